@@ -1,0 +1,13 @@
+/**
+ * Moist air, weather, sun and time.
+ *
+ * <p>Lives here: pure functions of state, one class per published formula set; the weather of a
+ * run; the calendar of a run.
+ *
+ * <p>May import: {@code java}, Commons Math and {@code errors}. Units: °C, Pa, kg water per kg dry
+ * air, J per kg dry air.
+ */
+@NullMarked
+package org.wardon.air;
+
+import org.jspecify.annotations.NullMarked;

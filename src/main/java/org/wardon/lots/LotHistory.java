@@ -1,0 +1,263 @@
+package org.wardon.lots;
+
+import java.util.Arrays;
+import java.util.Optional;
+import org.wardon.errors.Require;
+
+/**
+ * What a lot went through: samples at rising times, linear between them. Written by the heat model,
+ * by a reader of loggers and by a thought experiment alike; read by the keeping model, which knows
+ * nothing else.
+ */
+public final class LotHistory {
+    private final double[] timeS;
+    private final double[] meanC;
+    private final double[] surfaceC;
+    private final double[] coldestC;
+    private final double[] humidity;
+    private final double[] ethylenePpm;
+    private final boolean[] wet;
+    private final Optional<double[]> massKg;
+
+    private LotHistory(Builder b) {
+        int n = b.size;
+        timeS = Arrays.copyOf(b.timeS, n);
+        meanC = Arrays.copyOf(b.meanC, n);
+        surfaceC = Arrays.copyOf(b.surfaceC, n);
+        coldestC = Arrays.copyOf(b.coldestC, n);
+        humidity = Arrays.copyOf(b.humidity, n);
+        ethylenePpm = Arrays.copyOf(b.ethylenePpm, n);
+        wet = Arrays.copyOf(b.wet, n);
+        massKg = b.massKnown ? Optional.of(Arrays.copyOf(b.massKg, n)) : Optional.empty();
+    }
+
+    /**
+     * Returns the history of a lot held in one condition.
+     *
+     * @param temperatureC temperature of lot and air, °C
+     * @param humidityFraction humidity of the air at the fruit, 0 to 1
+     * @param ethylenePpm ethylene, µL/L
+     * @param durationS how long, s, above 0
+     * @return a history of two samples, without mass
+     */
+    public static LotHistory constant(
+            double temperatureC, double humidityFraction, double ethylenePpm, double durationS) {
+        Builder b = new Builder();
+        for (double t : new double[] {0, durationS}) {
+            b.add(
+                    t,
+                    temperatureC,
+                    temperatureC,
+                    temperatureC,
+                    humidityFraction,
+                    ethylenePpm,
+                    false);
+        }
+        return b.build();
+    }
+
+    /**
+     * Returns the number of samples.
+     *
+     * @return at least 2
+     */
+    public int size() {
+        return timeS.length;
+    }
+
+    /**
+     * Returns the time of a sample.
+     *
+     * @param i sample
+     * @return s since the start of the run, rising
+     */
+    public double timeS(int i) {
+        return timeS[i];
+    }
+
+    /**
+     * Returns the mass-average temperature.
+     *
+     * @param i sample
+     * @return °C
+     */
+    public double meanC(int i) {
+        return meanC[i];
+    }
+
+    /**
+     * Returns the temperature of the outermost shell.
+     *
+     * @param i sample
+     * @return °C
+     */
+    public double surfaceC(int i) {
+        return surfaceC[i];
+    }
+
+    /**
+     * Returns the temperature of the coldest shell.
+     *
+     * @param i sample
+     * @return °C
+     */
+    public double coldestC(int i) {
+        return coldestC[i];
+    }
+
+    /**
+     * Returns the relative humidity of the air at the fruit.
+     *
+     * @param i sample
+     * @return 0 to 1
+     */
+    public double humidityFraction(int i) {
+        return humidity[i];
+    }
+
+    /**
+     * Returns the ethylene in the air.
+     *
+     * @param i sample
+     * @return µL/L
+     */
+    public double ethylenePpm(int i) {
+        return ethylenePpm[i];
+    }
+
+    /**
+     * Returns whether free water lies on the produce.
+     *
+     * @param i sample
+     * @return true if wet
+     */
+    public boolean wet(int i) {
+        return wet[i];
+    }
+
+    /**
+     * Returns whether the mass was computed or weighed.
+     *
+     * @return true if {@link #massKg} may be called
+     */
+    public boolean knowsMass() {
+        return massKg.isPresent();
+    }
+
+    /**
+     * Returns the mass of the lot.
+     *
+     * @param i sample
+     * @return kg
+     * @throws java.util.NoSuchElementException where the mass is not known
+     */
+    public double massKg(int i) {
+        return massKg.orElseThrow()[i];
+    }
+
+    /**
+     * Returns a copy with other ethylene.
+     *
+     * @param ppm {@code [sample]}, µL/L
+     * @return the copy
+     */
+    public LotHistory withEthylene(double[] ppm) {
+        Require.that(ppm.length == size(), "one ethylene value a sample is needed");
+        Builder b = new Builder();
+        for (int i = 0; i < size(); i++) {
+            b.add(timeS[i], meanC[i], surfaceC[i], coldestC[i], humidity[i], ppm[i], wet[i]);
+            if (massKg.isPresent()) {
+                b.mass(massKg.get()[i]);
+            }
+        }
+        return b.build();
+    }
+
+    /** Collects samples in order of time. */
+    public static final class Builder {
+        private double[] timeS = new double[64];
+        private double[] meanC = new double[64];
+        private double[] surfaceC = new double[64];
+        private double[] coldestC = new double[64];
+        private double[] humidity = new double[64];
+        private double[] ethylenePpm = new double[64];
+        private double[] massKg = new double[64];
+        private boolean[] wet = new boolean[64];
+        private boolean massKnown;
+        private int size;
+
+        /** Starts empty. */
+        public Builder() {}
+
+        /**
+         * Adds a sample.
+         *
+         * @param atS s since the start of the run, above the last one
+         * @param mean mass-average temperature, °C
+         * @param surface outermost shell, °C
+         * @param coldest coldest shell, °C
+         * @param humidityFraction air at the fruit, 0 to 1
+         * @param ethylene µL/L
+         * @param isWet free water on the produce
+         * @return this
+         */
+        public Builder add(
+                double atS,
+                double mean,
+                double surface,
+                double coldest,
+                double humidityFraction,
+                double ethylene,
+                boolean isWet) {
+            Require.that(
+                    size == 0 || atS > timeS[size - 1],
+                    "history times must rise, found " + atS + " s");
+            if (size == timeS.length) {
+                grow();
+            }
+            timeS[size] = atS;
+            meanC[size] = mean;
+            surfaceC[size] = surface;
+            coldestC[size] = coldest;
+            humidity[size] = humidityFraction;
+            ethylenePpm[size] = ethylene;
+            wet[size] = isWet;
+            size++;
+            return this;
+        }
+
+        /**
+         * Gives the mass of the sample added last. Give it for all samples or for none.
+         *
+         * @param kg mass of the lot, kg
+         * @return this
+         */
+        public Builder mass(double kg) {
+            massKg[size - 1] = kg;
+            massKnown = true;
+            return this;
+        }
+
+        /**
+         * Returns the history.
+         *
+         * @return the history, of at least 2 samples
+         */
+        public LotHistory build() {
+            Require.that(size >= 2, "a history needs at least 2 samples, found " + size);
+            return new LotHistory(this);
+        }
+
+        private void grow() {
+            int n = 2 * size;
+            timeS = Arrays.copyOf(timeS, n);
+            meanC = Arrays.copyOf(meanC, n);
+            surfaceC = Arrays.copyOf(surfaceC, n);
+            coldestC = Arrays.copyOf(coldestC, n);
+            humidity = Arrays.copyOf(humidity, n);
+            ethylenePpm = Arrays.copyOf(ethylenePpm, n);
+            massKg = Arrays.copyOf(massKg, n);
+            wet = Arrays.copyOf(wet, n);
+        }
+    }
+}
