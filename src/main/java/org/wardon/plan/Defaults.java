@@ -1,0 +1,182 @@
+package org.wardon.plan;
+
+import org.wardon.enclosure.FaceName;
+
+/** Every value that stands in where a plan is silent, with what it rests on. */
+public final class Defaults {
+    /** Mark of a figure of the trade that nobody printed. */
+    public static final String COMMON_PRACTICE = "common practice, no source";
+
+    /** Mark of a figure that is ours. */
+    public static final String ASSUMPTION = "assumption";
+
+    /** Height above the sea. */
+    public static final Default ELEVATION_M = new Default(0, "m", ASSUMPTION);
+
+    /** Door openings. */
+    public static final Default OPENINGS_PER_DAY = new Default(20, "1/day", COMMON_PRACTICE);
+
+    /** How long the door stands open each time. */
+    public static final Default SECONDS_OPEN = new Default(60, "s", COMMON_PRACTICE);
+
+    /** First hour the door is used. */
+    public static final String DOOR_FROM = "07:00";
+
+    /** Last hour the door is used. */
+    public static final String DOOR_TO = "19:00";
+
+    /** A door with nothing before it. */
+    public static final String DOOR_PROTECTION = "open-unprotected";
+
+    /** Leakage of a chamber of sandwich panel or other insulated, closed build. */
+    public static final Default LEAKAGE_PANEL = new Default(2, "1/day", COMMON_PRACTICE);
+
+    /** Leakage of a chamber of masonry or earth. */
+    public static final Default LEAKAGE_MASONRY = new Default(10, "1/day", COMMON_PRACTICE);
+
+    /** Leakage of a chamber of straw, thatch, bamboo or other loose build. */
+    public static final Default LEAKAGE_LOOSE = new Default(30, "1/day", COMMON_PRACTICE);
+
+    /** Uplift of the heat flow through all faces. */
+    public static final Default THERMAL_BRIDGE_PCT = new Default(10, "%", COMMON_PRACTICE);
+
+    /** Conductivity of the foam core of a panel some years old. */
+    public static final Default AGED_PANEL_CONDUCTIVITY =
+            new Default(0.028, "W/(m K)", COMMON_PRACTICE);
+
+    /** Sunlight taken up by a face of which nothing is known. */
+    public static final Default SOLAR_ABSORPTANCE = new Default(0.6, "1", ASSUMPTION);
+
+    /** Produce a gross cubic metre. */
+    public static final Default STOWAGE_KG_M3 = new Default(150, "kg/m3", COMMON_PRACTICE);
+
+    /** Half width of the band of the thermostat. */
+    public static final Default BAND_K = new Default(1, "K", ASSUMPTION);
+
+    /** Humidity wished for. */
+    public static final Default HUMIDITY_PCT = new Default(90, "%", ASSUMPTION);
+
+    /** Air onto the coil at the rated point. */
+    public static final Default RATED_AIR_C = new Default(10, "°C", ASSUMPTION);
+
+    /** Air onto the condenser at the rated point. */
+    public static final Default RATED_OUTDOOR_C = new Default(35, "°C", ASSUMPTION);
+
+    /** Share of the Carnot efficiency a small unit reaches. */
+    public static final Default CARNOT_FRACTION = new Default(0.45, "1", "CARNOT-PAGE");
+
+    /** Condensing above the air onto an air-cooled condenser. */
+    public static final Default CONDENSING_APPROACH_K =
+            new Default(12, "K", "from memory of ASHRAE-R");
+
+    /** Air onto the coil above evaporating, for 80 to 85 % humidity. */
+    public static final Default EVAPORATING_TD_K = new Default(6, "K", "HOLDER");
+
+    /** Fan of the air cooler as a share of the rated capacity. */
+    public static final Default FAN_SHARE = new Default(0.04, "1", ASSUMPTION);
+
+    /** How far the air cools through the coil at the rated point. */
+    public static final Default AIR_DROP_K = new Default(5, "K", ASSUMPTION);
+
+    /** Shortest run of a compressor. */
+    public static final Default MIN_RUN_MINUTES = new Default(5, "min", COMMON_PRACTICE);
+
+    /** Shortest rest of a compressor. */
+    public static final Default MIN_REST_MINUTES = new Default(3, "min", COMMON_PRACTICE);
+
+    /** Air onto the condenser above outdoors, open yard. */
+    public static final Default CONDENSER_RISE_K = new Default(3, "K", COMMON_PRACTICE);
+
+    /** Lowest temperature the control of a cold-room unit can be set to. */
+    public static final Default LOWEST_C = new Default(-30, "°C", ASSUMPTION);
+
+    /** Days a lot is wanted in the chamber. */
+    public static final Default WANTED_DAYS = new Default(7, "day", ASSUMPTION);
+
+    /** From leaving the store to the buyer. */
+    public static final Default MARKET_DAYS = new Default(2, "day", COMMON_PRACTICE);
+
+    /** A lot without a price counts its kilograms. */
+    public static final Default PRICE_PER_KG = new Default(1, "1/kg", ASSUMPTION);
+
+    /** Energy without a price costs nothing. */
+    public static final Default ENERGY_PRICE_PER_KWH = new Default(0, "1/kWh", ASSUMPTION);
+
+    /** Ethylene of outdoor air. */
+    public static final Default OUTDOOR_ETHYLENE_PPM = new Default(0.01, "ppm", ASSUMPTION);
+
+    /** Ethylene in a market building. */
+    public static final Default MARKET_ETHYLENE_PPM = new Default(0.06, "ppm", ASSUMPTION);
+
+    /** The package of a lot whose package nobody gave: any package in a room with fans. */
+    public static final String PACKAGE = "room-cooling-any";
+
+    /** Number the draws start from. */
+    public static final long SEED = 1;
+
+    private static final double ZERO_C_IN_K = 273.15;
+    private static final double AIR_HEAT_J_M3K = 1.2 * 1006;
+
+    private Defaults() {}
+
+    /**
+     * Returns the compass direction a face looks to.
+     *
+     * @param face the face
+     * @return degrees from north by east; 0 for roof and floor
+     */
+    public static double azimuthDeg(FaceName face) {
+        return switch (face) {
+            case ROOF, FLOOR, NORTH -> 0;
+            case EAST -> 90;
+            case SOUTH -> 180;
+            case WEST -> 270;
+        };
+    }
+
+    /**
+     * Returns the electric power of a compressor at its rated point: capacity over a share of the
+     * Carnot coefficient of performance.
+     *
+     * <p>Source: {@code cooling-sources.csv}, rows cop_carnot_fraction, condensing_approach,
+     * evap_td_mid_rh.
+     *
+     * @param ratedCapacityW total heat taken at the rated point, W
+     * @param ratedAirC air onto the coil, °C
+     * @param ratedOutdoorC air onto the condenser, °C
+     * @return W, at most the capacity
+     */
+    public static double ratedPowerW(
+            double ratedCapacityW, double ratedAirC, double ratedOutdoorC) {
+        double evaporatingK = ratedAirC - EVAPORATING_TD_K.value() + ZERO_C_IN_K;
+        double condensingK = ratedOutdoorC + CONDENSING_APPROACH_K.value() + ZERO_C_IN_K;
+        double liftK = Math.max(condensingK - evaporatingK, 1);
+        double cop = CARNOT_FRACTION.value() * evaporatingK / liftK;
+        return ratedCapacityW / Math.max(cop, 1);
+    }
+
+    /**
+     * Returns the conductance of a coil that moves the rated capacity at the usual difference
+     * between air and evaporation.
+     *
+     * <p>Source: {@code cooling-sources.csv}, rows coil_capacity (from memory of ASHRAE
+     * Refrigeration) and evap_td_mid_rh.
+     *
+     * @param ratedCapacityW total heat taken at the rated point, W
+     * @return W/K
+     */
+    public static double coilUaWK(double ratedCapacityW) {
+        return ratedCapacityW / EVAPORATING_TD_K.value();
+    }
+
+    /**
+     * Returns the air through the coil that takes the rated capacity with a drop of 5 K
+     * (assumption).
+     *
+     * @param ratedCapacityW total heat taken at the rated point, W
+     * @return m3/s
+     */
+    public static double airFlowM3s(double ratedCapacityW) {
+        return ratedCapacityW / (AIR_HEAT_J_M3K * AIR_DROP_K.value());
+    }
+}

@@ -1,0 +1,116 @@
+package org.wardon.plan;
+
+import java.time.LocalDateTime;
+import java.util.HashSet;
+import java.util.List;
+import java.util.NoSuchElementException;
+import java.util.Set;
+import org.wardon.air.Site;
+import org.wardon.air.Timeline;
+import org.wardon.errors.Require;
+
+/**
+ * A store and what is to come into it.
+ *
+ * @param name a name for people
+ * @param site where it stands
+ * @param weatherSource weather of the run and where it comes from
+ * @param from local time the run starts
+ * @param days how long it runs, days
+ * @param chambers at least one, ids unique
+ * @param lots ids unique
+ * @param without what happens to the lots otherwise
+ * @param seed number the draws start from
+ * @param prices money
+ * @param ethylene ethylene of the air around
+ * @param assumed every value the plan left out, in the order of the plan
+ */
+public record StorePlan(
+        String name,
+        Site site,
+        WeatherSource weatherSource,
+        LocalDateTime from,
+        double days,
+        List<ChamberPlan> chambers,
+        List<LotPlan> lots,
+        WithoutChamber without,
+        long seed,
+        Prices prices,
+        EthyleneAround ethylene,
+        List<Assumed> assumed) {
+    /** Copies the lists and checks bounds and ids. */
+    public StorePlan {
+        chambers = List.copyOf(chambers);
+        lots = List.copyOf(lots);
+        assumed = List.copyOf(assumed);
+        Require.within("days", days, 0.1, 1_830, "day", "");
+        Require.that(!chambers.isEmpty(), "a plan needs at least one chamber");
+        Set<String> seen = new HashSet<>();
+        for (ChamberPlan chamber : chambers) {
+            Require.that(seen.add(chamber.id()), "chamber id '" + chamber.id() + "' stands twice");
+        }
+        Set<String> seenLots = new HashSet<>();
+        for (LotPlan lot : lots) {
+            Require.that(seenLots.add(lot.id()), "lot id '" + lot.id() + "' stands twice");
+            if (lot.chamber().isPresent()) {
+                Require.that(
+                        seen.contains(lot.chamber().get()),
+                        "lot '" + lot.id() + "' is in no chamber of the plan");
+            }
+        }
+    }
+
+    /**
+     * Returns a chamber.
+     *
+     * @param id its id
+     * @return the chamber
+     * @throws NoSuchElementException where the plan has none of that id
+     */
+    public ChamberPlan getChamber(String id) {
+        return chambers.stream()
+                .filter(chamber -> chamber.id().equals(id))
+                .findFirst()
+                .orElseThrow(() -> new NoSuchElementException("no chamber '" + id + "'"));
+    }
+
+    /**
+     * Returns the clock of the run.
+     *
+     * @return the clock, second 0 at {@code from}
+     */
+    public Timeline timeline() {
+        return new Timeline(from, site.zone());
+    }
+
+    /**
+     * Returns how long the run is.
+     *
+     * @return s
+     */
+    public double durationS() {
+        return days * Timeline.DAY_S;
+    }
+
+    /**
+     * Returns a copy with other lots, such as after placing.
+     *
+     * @param otherLots the lots
+     * @return the copy
+     */
+    public StorePlan withLots(List<LotPlan> otherLots) {
+        return new StorePlan(
+                name,
+                site,
+                weatherSource,
+                from,
+                days,
+                chambers,
+                otherLots,
+                without,
+                seed,
+                prices,
+                ethylene,
+                assumed);
+    }
+}
