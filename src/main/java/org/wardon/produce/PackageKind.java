@@ -9,7 +9,8 @@ import org.wardon.errors.Require;
  * @param id id of the table of packages, or {@code own} for a half-cooling time given in a plan
  * @param description what it is
  * @param halfCoolingHours time for the sensible heat to fall to half, h
- * @param vapourConductance mass loss in the package over mass loss bare, 1 = bare
+ * @param vapourConductance mass loss in the package over mass loss bare, 1 = bare; above 1 counts
+ *     as bare
  * @param tareKgPerKg empty package per kg of produce; absent where not known
  * @param broad whether the time is a broad one not measured on this package
  */

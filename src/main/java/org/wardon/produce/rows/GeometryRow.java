@@ -6,7 +6,7 @@ import java.util.OptionalDouble;
  * Shape and size of one item.
  *
  * @param shape {@code sphere}, {@code cylinder}, {@code slab} or {@code leaf}
- * @param characteristicMm radius, or half thickness of slab and leaf, mm
+ * @param characteristicMm radius, or half thickness of slab and leaf, mm; empty where not printed
  * @param lengthMm length, mm
  * @param unitMassKg mass of one item, kg
  * @param densityKgM3 density of the item, kg/m3
@@ -16,7 +16,7 @@ import java.util.OptionalDouble;
  */
 public record GeometryRow(
         String shape,
-        double characteristicMm,
+        OptionalDouble characteristicMm,
         OptionalDouble lengthMm,
         OptionalDouble unitMassKg,
         OptionalDouble densityKgM3,

@@ -6,7 +6,7 @@ import org.wardon.produce.Fact;
  * Heat of respiration at one temperature.
  *
  * @param temperatureC temperature of the produce, °C
- * @param state {@code green}, {@code ripe} or {@code not-stated}
+ * @param state {@code green}, {@code turning}, {@code ripe}, {@code uncured} or {@code not-stated}
  * @param wattsPerTonne rate, W per tonne
  * @param table the table it stands in: {@code heat} (printed as heat), {@code co2} or {@code
  *     co2-other} (printed as mg CO2/(kg h), turned with 10.7 J per mg)
