@@ -85,7 +85,7 @@ public record Composition(Map<Component, Double> fraction) {
     public double specificHeatJkgK(double temperatureC) {
         double sum = 0;
         for (Map.Entry<Component, Double> part : fraction.entrySet()) {
-            sum += part.getValue() * part.getKey().specificHeatJkgK(temperatureC);
+            sum += part.getValue() * ChoiOkos.specificHeatJkgK(part.getKey(), temperatureC);
         }
         return sum;
     }
@@ -99,7 +99,7 @@ public record Composition(Map<Component, Double> fraction) {
     public double densityKgM3(double temperatureC) {
         double volume = 0;
         for (Map.Entry<Component, Double> part : fraction.entrySet()) {
-            volume += part.getValue() / part.getKey().densityKgM3(temperatureC);
+            volume += part.getValue() / ChoiOkos.densityKgM3(part.getKey(), temperatureC);
         }
         return 1 / volume;
     }
@@ -118,8 +118,8 @@ public record Composition(Map<Component, Double> fraction) {
             sum +=
                     part.getValue()
                             * density
-                            / component.densityKgM3(temperatureC)
-                            * component.conductivityWmK(temperatureC);
+                            / ChoiOkos.densityKgM3(component, temperatureC)
+                            * ChoiOkos.conductivityWmK(component, temperatureC);
         }
         return sum;
     }
