@@ -1,0 +1,128 @@
+package org.wardon.files.forecast;
+
+import java.util.OptionalDouble;
+
+/**
+ * What a chamber will do.
+ *
+ * @param id its id
+ * @param holds whether it holds its setting
+ * @param airC its air, °C, hourly means
+ * @param humidityPct its relative humidity, percent
+ * @param hoursOutsideBand hours outside the band after pull-down, h
+ * @param hoursDisturbed hours within 12 h of a later arrival, h
+ * @param pullDownHours from the first arrival until the air has been inside for 3 h; absent where
+ *     never
+ * @param peakLoadW highest hourly load with the air held ideally, W
+ * @param removedPeakW highest hourly heat really removed, W
+ * @param intakeKgPerDay largest warm intake a day, kg; absent where the chamber can take none to
+ *     its setting or has no cooler
+ * @param respirationLoadW heat of respiration, W
+ * @param o2PctMin lowest oxygen, percent
+ * @param loadKWh heat into the chamber by term, kWh
+ * @param heatRemovedKWh heat taken by all coolers, kWh
+ * @param energyKWh electricity, kWh
+ * @param energyCost its cost, currency
+ * @param waterUsedKg water evaporated and bled off, kg
+ * @param co2PpmMax highest CO2, ppm
+ * @param ethylenePpmMax highest ethylene, ppm
+ * @param balanceErrorPct error of the balances, percent of the throughput
+ */
+public record ChamberForecast(
+        String id,
+        boolean holds,
+        AirC airC,
+        MeanMinMax humidityPct,
+        double hoursOutsideBand,
+        double hoursDisturbed,
+        OptionalDouble pullDownHours,
+        double peakLoadW,
+        double removedPeakW,
+        OptionalDouble intakeKgPerDay,
+        MeanMax respirationLoadW,
+        double o2PctMin,
+        LoadKWh loadKWh,
+        double heatRemovedKWh,
+        double energyKWh,
+        double energyCost,
+        double waterUsedKg,
+        double co2PpmMax,
+        double ethylenePpmMax,
+        double balanceErrorPct) {
+    /**
+     * The chamber's air.
+     *
+     * @param mean mean, °C
+     * @param min lowest hourly mean, °C
+     * @param max highest hourly mean, °C
+     * @param p95 19 of 20 hours are below, °C
+     */
+    public record AirC(double mean, double min, double max, double p95) {}
+
+    /**
+     * A load in two numbers.
+     *
+     * @param mean its mean, W
+     * @param max its highest hour, W
+     */
+    public record MeanMax(double mean, double max) {}
+
+    /**
+     * Heat into the chamber by term, kWh, positive inwards.
+     *
+     * @param walls through the faces
+     * @param door through the open door
+     * @param leakage with leaking air
+     * @param freshAir with fresh air
+     * @param fieldHeat given up by the lots
+     * @param respiration of the lots
+     * @param fans fans
+     * @param lights lights
+     * @param people people
+     * @param packages given up by packages and structure
+     * @param defrost defrost
+     * @param humidifier with the water of the humidifier
+     * @param heater heater
+     * @param pumps pumps
+     * @param air given up by the air
+     */
+    public record LoadKWh(
+            double walls,
+            double door,
+            double leakage,
+            double freshAir,
+            double fieldHeat,
+            double respiration,
+            double fans,
+            double lights,
+            double people,
+            double packages,
+            double defrost,
+            double humidifier,
+            double heater,
+            double pumps,
+            double air) {
+        /**
+         * Returns the sum of all terms.
+         *
+         * @return kWh
+         */
+        public double sum() {
+            return walls
+                    + door
+                    + leakage
+                    + freshAir
+                    + fieldHeat
+                    + respiration
+                    + fans
+                    + lights
+                    + people
+                    + packages
+                    + defrost
+                    + humidifier
+                    + heater
+                    + pumps
+                    + air;
+        }
+    }
+}

@@ -1,0 +1,110 @@
+package org.wardon.files.forecast;
+
+import java.io.IOException;
+import java.io.Writer;
+import java.nio.file.Path;
+import java.util.ArrayList;
+import java.util.List;
+import java.util.Map;
+import java.util.function.IntToDoubleFunction;
+import org.wardon.air.Timeline;
+import org.wardon.errors.Require;
+import org.wardon.files.AtomicFile;
+
+/**
+ * Writes hourly series as CSV with fixed columns: {@code chamber-ID.csv} and {@code lot-ID.csv}.
+ * Air and powers are means of the hour before, all else is at the hour. A value that is not a
+ * number is an empty cell.
+ */
+public final class SeriesWriter {
+    /** Columns of a chamber after {@code time}; {@code waterOutC} may follow. */
+    public static final List<String> CHAMBER =
+            List.of(
+                    "airC",
+                    "humidityPct",
+                    "outdoorC",
+                    "coolingW",
+                    "powerW",
+                    "co2Ppm",
+                    "ethylenePpm");
+
+    /** Columns of a lot after {@code time}. */
+    public static final List<String> LOT =
+            List.of("meanC", "surfaceC", "coreC", "respirationW", "massKg", "lifeUsedPct");
+
+    private static final String WATER_OUT = "waterOutC";
+
+    private final Path folder;
+    private final Timeline timeline;
+
+    /**
+     * Makes the folder where it does not exist.
+     *
+     * @param folder where the files go
+     * @param timeline clock of the run
+     * @throws org.wardon.files.CannotWrite where the folder cannot be made
+     */
+    public SeriesWriter(Path folder, Timeline timeline) {
+        this.folder = AtomicFile.folder(folder);
+        this.timeline = timeline;
+    }
+
+    /**
+     * Writes the series of a chamber.
+     *
+     * @param id its id
+     * @param timeS {@code [row]}, s since the start of the run
+     * @param columns the values by row, one for each name of {@link #CHAMBER}, and {@code
+     *     waterOutC} where a water film runs
+     */
+    public void chamber(String id, double[] timeS, Map<String, IntToDoubleFunction> columns) {
+        List<String> names = new ArrayList<>(CHAMBER);
+        if (columns.containsKey(WATER_OUT)) {
+            names.add(WATER_OUT);
+        }
+        write("chamber-" + id + ".csv", names, timeS, columns);
+    }
+
+    /**
+     * Writes the series of a lot.
+     *
+     * @param id its id
+     * @param timeS {@code [row]}, s since the start of the run
+     * @param columns the values by row, one for each name of {@link #LOT}
+     */
+    public void lot(String id, double[] timeS, Map<String, IntToDoubleFunction> columns) {
+        write("lot-" + id + ".csv", LOT, timeS, columns);
+    }
+
+    private void write(
+            String name,
+            List<String> names,
+            double[] timeS,
+            Map<String, IntToDoubleFunction> columns) {
+        Require.that(
+                columns.size() == names.size() && columns.keySet().containsAll(names),
+                name + " needs the columns " + names + ", found " + columns.keySet());
+        List<IntToDoubleFunction> values = names.stream().map(columns::get).toList();
+        AtomicFile.write(
+                folder.resolve(name),
+                out -> {
+                    out.write("time," + String.join(",", names) + "\n");
+                    for (int row = 0; row < timeS.length; row++) {
+                        line(out, timeS[row], row, values);
+                    }
+                });
+    }
+
+    private void line(Writer out, double atS, int row, List<IntToDoubleFunction> values)
+            throws IOException {
+        out.write(timeline.localAt(atS).toString());
+        for (IntToDoubleFunction value : values) {
+            out.write(',');
+            double v = value.applyAsDouble(row);
+            if (Double.isFinite(v)) {
+                out.write(AnswerWriter.rounded(v).toPlainString());
+            }
+        }
+        out.write('\n');
+    }
+}
