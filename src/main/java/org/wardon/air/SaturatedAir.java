@@ -79,7 +79,7 @@ public final class SaturatedAir {
      * @throws IllegalArgumentException outside that range
      */
     public static double slopePaPerK(double temperatureC) {
-        return pressurePa(temperatureC) * logSlope(temperatureC);
+        return pressurePa(temperatureC) * logSlopePerK(temperatureC);
     }
 
     /**
@@ -153,7 +153,14 @@ public final class SaturatedAir {
                         + 6.5459673 * Math.log(t)); // equation 6
     }
 
-    private static double logSlope(double temperatureC) {
+    /**
+     * Returns the slope of the logarithm of the saturation pressure: {@link #slopePaPerK} divided
+     * by {@link #pressurePa}, without an exponential.
+     *
+     * @param temperatureC temperature, °C, -60 to 60; not checked
+     * @return 1/K
+     */
+    public static double logSlopePerK(double temperatureC) {
         return temperatureC <= TRIPLE_POINT_C
                 ? iceLogSlope(temperatureC)
                 : waterLogSlope(temperatureC);

@@ -83,4 +83,9 @@ public record Compressor(
     public String kind() {
         return "compressor";
     }
+
+    @Override
+    public CompressorLaw law(double pressurePa) {
+        return new CompressorLaw(this, pressurePa);
+    }
 }

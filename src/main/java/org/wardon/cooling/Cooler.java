@@ -8,4 +8,13 @@ public sealed interface Cooler permits Compressor {
      * @return such as {@code compressor}
      */
     String kind();
+
+    /**
+     * Compiles the cooler for a site.
+     *
+     * @param pressurePa air pressure of the site, Pa
+     * @return what it does to the air
+     * @throws IllegalArgumentException where its parts cannot work together
+     */
+    CoolerLaw law(double pressurePa);
 }
