@@ -13,7 +13,8 @@ import org.wardon.air.SaturatedAir;
  * chapter on air-cooling coils (from memory). Frost: below -1 °C evaporating the conductance falls
  * to 0.8 of the dry one over 4 K, a mean over the time between two defrosts (assumption).
  *
- * <p>A scratch object: {@link #at} fills its fields, the law reads them. Not shared.
+ * <p>Its {@link State} is a scratch object: {@link State#at} fills its fields, the law reads them.
+ * Not shared.
  */
 final class Coil {
     /** Specific heat of ice, J/(kg K). Source: from memory of ASHRAE Fundamentals, chapter 1. */
