@@ -33,4 +33,24 @@ public record Lot(
     public Shells shells() {
         return Shells.of(item);
     }
+
+    /**
+     * Returns the lot breathing by another law, as once it ripens or before it is cured.
+     *
+     * @param law the law
+     * @return the lot
+     */
+    public Lot breathing(RespirationLaw law) {
+        return new Lot(id, massKg, item, packing, law, transpiration);
+    }
+
+    /**
+     * Returns the lot in another package or at another package time.
+     *
+     * @param other the packing
+     * @return the lot
+     */
+    public Lot packedIn(Packing other) {
+        return new Lot(id, massKg, item, other, respiration, transpiration);
+    }
 }

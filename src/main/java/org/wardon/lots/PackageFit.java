@@ -1,0 +1,138 @@
+package org.wardon.lots;
+
+import java.util.List;
+import java.util.function.DoubleUnaryOperator;
+import org.apache.commons.math3.analysis.solvers.BrentSolver;
+import org.wardon.produce.PackageKind;
+import org.wardon.produce.Reason;
+
+/**
+ * Finds the conductances of a package so that the items in it, cut into shells, take its published
+ * half-cooling time: sensible heat alone, no respiration, no evaporation, chamber air of one
+ * temperature.
+ *
+ * <p>The film in the package is that of slow air ({@link AirFilm}); the path from package air to
+ * chamber is fitted. Where even an open package is too slow with that film, the package is taken as
+ * open and the film fitted, as in forced air or a shower. Where the item alone is slower than the
+ * printed time, the item's time is kept and said.
+ */
+public final class PackageFit {
+    /** Relative conductance from which produce counts as bare: the package adds next to nothing. */
+    private static final double NEXT_TO_BARE = 0.995;
+
+    /** An open path: this many times the conductance of the item's own flesh by its radius ... */
+    private static final double OPEN_BIOT = 200;
+
+    /** ... but no more than this, W/(kg K); a lot would follow the chamber's air within seconds. */
+    private static final double OPEN_W_KG_K = 400;
+
+    private static final double LEAST_W_KG_K = 1e-5;
+
+    private PackageFit() {}
+
+    /**
+     * Returns the packing of an item.
+     *
+     * @param item the item
+     * @param inside what the package holds beside the items
+     * @param halfCoolingS half-cooling time of the mass average, s
+     * @return the packing; the reason {@code item-slower-than-package} where the time cannot be met
+     */
+    static WithReasons<Packing> of(Item item, PackageInside inside, double halfCoolingS) {
+        Shells shells = Shells.of(item);
+        double open = openWPerKgK(item);
+        double film = Math.min(open, item.areaM2PerKg() * AirFilm.heatWPerM2K(item));
+        double quickestS = halfS(item, shells, inside.packing(open, open));
+        if (quickestS >= halfCoolingS) {
+            Reason slow =
+                    Reason.about(
+                            "item-slower-than-package",
+                            inside.commodityId(),
+                            inside.sourceId(),
+                            Reason.Argument.of(quickestS / 3600, "h"),
+                            Reason.Argument.of(halfCoolingS / 3600, "h"));
+            return new WithReasons<>(inside.packing(open, open), List.of(slow), false);
+        }
+        boolean openSuffices = halfS(item, shells, inside.packing(film, open)) <= halfCoolingS;
+        DoubleUnaryOperator halfWith =
+                openSuffices
+                        ? g -> halfS(item, shells, inside.packing(film, g))
+                        : g -> halfS(item, shells, inside.packing(g, open));
+        double fitted = fit(halfWith, halfCoolingS, open);
+        Packing packing =
+                openSuffices ? inside.packing(film, fitted) : inside.packing(fitted, open);
+        return new WithReasons<>(packing, List.of(), false);
+    }
+
+    /**
+     * Returns the packing with another half-cooling time, all else the same.
+     *
+     * @param item the item
+     * @param packing its packing
+     * @param factor on the half-cooling time, above 0; a time quicker than the bare item's is not
+     *     reached
+     * @return the packing
+     */
+    public static Packing slowed(Item item, Packing packing, double factor) {
+        double halfS = halfCoolingS(item, packing) * factor;
+        return of(item, PackageInside.like(packing), halfS).value();
+    }
+
+    /**
+     * Returns the half-cooling time of the mass average in chamber air of one temperature, without
+     * respiration and evaporation.
+     *
+     * @param item the item
+     * @param packing its packing
+     * @return s
+     */
+    public static double halfCoolingS(Item item, Packing packing) {
+        return halfS(item, Shells.of(item), packing);
+    }
+
+    /**
+     * Returns the conductance for vapour of a package from the loss in it over the loss bare: bare
+     * and package in series let through that share.
+     *
+     * @param bareKgPerKgSPa tissue to air without package, kg/(kg s Pa)
+     * @param relative loss in the package over loss bare, above 0; from 0.995 on taken as 0.995
+     * @return package air to chamber, kg/(kg s Pa)
+     */
+    public static double vapourKgPerKgSPa(double bareKgPerKgSPa, double relative) {
+        double r = Math.min(NEXT_TO_BARE, relative);
+        return bareKgPerKgSPa * r / (1 - r);
+    }
+
+    /** Chooses what the commodity's package holds and how its time is drawn. */
+    static WithReasons<Packing> of(
+            Item item, PackageInside inside, PackageKind kind, double share) {
+        double hours = kind.halfCoolingHours().atLogShare(share);
+        Reason time =
+                Reason.about(
+                        kind.broad() ? "package-time-broad" : "package-time",
+                        kind.id(),
+                        kind.halfCoolingHours().sourceId(),
+                        Reason.Argument.of(hours, "h"));
+        return new WithReasons<>(inside, List.of(time), false).and(of(item, inside, 3600 * hours));
+    }
+
+    private static double openWPerKgK(Item item) {
+        double flesh = item.conductivityWmK() / item.radiusM() * item.areaM2PerKg();
+        return Math.min(OPEN_W_KG_K, OPEN_BIOT * flesh);
+    }
+
+    private static double halfS(Item item, Shells shells, Packing packing) {
+        return new PackageCooling(item, shells, packing).meanFallsToS(0.5);
+    }
+
+    private static double fit(DoubleUnaryOperator halfWith, double wantedS, double open) {
+        double logarithm =
+                new BrentSolver(1e-10, 1e-7)
+                        .solve(
+                                200,
+                                lnG -> Math.log(halfWith.applyAsDouble(Math.exp(lnG)) / wantedS),
+                                Math.log(LEAST_W_KG_K),
+                                Math.log(open));
+        return Math.exp(logarithm);
+    }
+}

@@ -1,0 +1,176 @@
+package org.wardon.lots;
+
+import java.util.ArrayList;
+import java.util.LinkedHashSet;
+import java.util.List;
+import java.util.Map;
+import java.util.NavigableMap;
+import java.util.Optional;
+import java.util.OptionalDouble;
+import java.util.Set;
+import java.util.TreeMap;
+import java.util.function.Predicate;
+import java.util.stream.Stream;
+import org.wardon.produce.Commodity;
+import org.wardon.produce.Fact;
+import org.wardon.produce.Reason;
+import org.wardon.produce.Ripeness;
+import org.wardon.produce.rows.RespirationPower;
+import org.wardon.produce.rows.RespirationRow;
+
+/**
+ * Chooses what a commodity breathes by.
+ *
+ * <p>Rule: the chosen table's rows of the state that is wanted, else those of no stated state, else
+ * the same in the other tables, else all rows of the chosen table together; the published power law
+ * only where there is no row; else the class. From turning on the ripe rows hold, unless rows of
+ * turning fruit are printed. Unknown ripeness takes all states, low to high.
+ */
+public final class Respirations {
+    /** Spread of the class curve, × or ÷ (assumption; see the test that measures it). */
+    static final double CLASS_SPREAD = 2;
+
+    private static final String NOT_STATED = "not-stated";
+    private static final String UNCURED = "uncured";
+
+    private Respirations() {}
+
+    /**
+     * Returns the curve of a commodity.
+     *
+     * @param commodity the commodity
+     * @param ripeness how far it has come
+     * @param classes class values, for a commodity nobody measured
+     * @param share share of the range, 0 low to 1 high
+     * @return the curve and what it rests on
+     */
+    public static WithReasons<RespirationCurve> of(
+            Commodity commodity, Ripeness ripeness, ClassValues classes, double share) {
+        return own(commodity, ripeness, share).orElseGet(() -> ofClass(commodity, classes, share));
+    }
+
+    /** The curve that rests on the commodity's own rows or power law. */
+    static Optional<WithReasons<RespirationCurve>> own(
+            Commodity commodity, Ripeness ripeness, double share) {
+        List<RespirationRow> usable =
+                usable(commodity).filter(row -> !row.state().equals(UNCURED)).toList();
+        List<RespirationRow> rows = chosen(usable, states(ripeness));
+        if (!rows.isEmpty()) {
+            return Optional.of(ofRows(commodity.id(), rows, share));
+        }
+        return commodity.breath().powers().stream()
+                .findFirst()
+                .map(law -> ofPower(commodity.id(), law, share));
+    }
+
+    /**
+     * Returns the curve of a root or bulb that has not been cured.
+     *
+     * @param commodity the commodity
+     * @param share share of the range, 0 low to 1 high
+     * @return the curve of its uncured rows and what it rests on; empty where none are printed
+     */
+    public static Optional<WithReasons<RespirationCurve>> uncured(
+            Commodity commodity, double share) {
+        List<RespirationRow> rows =
+                usable(commodity).filter(row -> row.state().equals(UNCURED)).toList();
+        return rows.isEmpty() ? Optional.empty() : Optional.of(ofRows(commodity.id(), rows, share));
+    }
+
+    private static Stream<RespirationRow> usable(Commodity commodity) {
+        return commodity.breath().respiration().stream()
+                .filter(row -> row.wattsPerTonne().lowest() > 0);
+    }
+
+    private static List<RespirationRow> chosen(
+            List<RespirationRow> rows, List<Predicate<RespirationRow>> states) {
+        Set<String> tables = new LinkedHashSet<>();
+        rows.forEach(row -> tables.add(key(row)));
+        for (Predicate<RespirationRow> state : states) {
+            for (String table : tables) {
+                List<RespirationRow> found =
+                        rows.stream().filter(row -> key(row).equals(table)).filter(state).toList();
+                if (!found.isEmpty()) {
+                    return found;
+                }
+            }
+        }
+        return rows;
+    }
+
+    private static List<Predicate<RespirationRow>> states(Ripeness ripeness) {
+        Predicate<RespirationRow> any = row -> true;
+        return switch (ripeness) {
+            case GREEN -> List.of(is("green"), is(NOT_STATED), any);
+            case TURNING -> List.of(is("turning"), is("ripe"), is(NOT_STATED), any);
+            case RIPE -> List.of(is("ripe"), is(NOT_STATED), any);
+            case UNKNOWN -> List.of(any);
+        };
+    }
+
+    private static Predicate<RespirationRow> is(String state) {
+        return row -> row.state().equals(state);
+    }
+
+    private static String key(RespirationRow row) {
+        return row.table() + " " + row.wattsPerTonne().sourceId();
+    }
+
+    private static WithReasons<RespirationCurve> ofRows(
+            String id, List<RespirationRow> rows, double share) {
+        NavigableMap<Double, Fact> rates = new TreeMap<>();
+        rows.forEach(
+                row -> rates.merge(row.temperatureC(), row.wattsPerTonne(), Respirations::both));
+        String source = rows.get(0).wattsPerTonne().sourceId();
+        List<Reason> reasons = new ArrayList<>();
+        reasons.add(
+                Reason.about(
+                        "respiration-table",
+                        id,
+                        source,
+                        Reason.Argument.of(rates.firstKey(), "C"),
+                        Reason.Argument.of(rates.lastKey(), "C")));
+        if (rates.firstKey() > 0 || rates.lastKey() < 20) {
+            reasons.add(Reason.about("respiration-extended", id, "USDA-AH66"));
+        }
+        return new WithReasons<>(RespirationCurve.through(rates, share), reasons, false);
+    }
+
+    private static Fact both(Fact one, Fact other) {
+        return new Fact(
+                OptionalDouble.of(Math.min(one.lowest(), other.lowest())),
+                OptionalDouble.of(Math.max(one.highest(), other.highest())),
+                one.unit(),
+                one.sourceId(),
+                one.evidence(),
+                one.own() || other.own());
+    }
+
+    private static WithReasons<RespirationCurve> ofPower(
+            String id, RespirationPower law, double share) {
+        NavigableMap<Double, Fact> rates = new TreeMap<>();
+        for (int c = 0; c <= 30; c++) {
+            double wattsPerTonne = 1000 * RespirationPowerLaw.wattsPerKg(law, c);
+            rates.put((double) c, Fact.of(wattsPerTonne, "W/t", law.sourceId(), law.evidence()));
+        }
+        return new WithReasons<>(
+                RespirationCurve.through(rates, share),
+                List.of(Reason.about("respiration-power", id, law.sourceId())),
+                false);
+    }
+
+    private static WithReasons<RespirationCurve> ofClass(
+            Commodity commodity, ClassValues classes, double share) {
+        Map<Double, Fact> rates = classes.of(commodity.plantPart()).respiration();
+        return new WithReasons<>(
+                RespirationCurve.through(rates, share),
+                List.of(
+                        Reason.about(
+                                "respiration-class",
+                                commodity.id(),
+                                ClassValues.SOURCE,
+                                Reason.Argument.text(commodity.plantPart()),
+                                Reason.Argument.of(CLASS_SPREAD, "1"))),
+                true);
+    }
+}
