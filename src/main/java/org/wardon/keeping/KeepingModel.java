@@ -1,0 +1,194 @@
+package org.wardon.keeping;
+
+import java.util.ArrayList;
+import java.util.List;
+import java.util.Optional;
+import org.wardon.keeping.chilling.Chilling;
+import org.wardon.keeping.dormancy.Dormancy;
+import org.wardon.keeping.ethylene.Response;
+import org.wardon.keeping.life.LifeCurve;
+import org.wardon.lots.LotHistory;
+import org.wardon.produce.Commodity;
+import org.wardon.produce.Ripeness;
+import org.wardon.produce.rows.CompositionRow;
+
+/**
+ * How one lot keeps: all mechanisms, ready to follow histories. Build it once a lot; following is
+ * cheap and changes nothing.
+ */
+public final class KeepingModel {
+    /** Freezing point where none is printed: the warm side of what is printed (assumption). */
+    private static final double USUAL_FREEZING_C = -0.5;
+
+    private final KeptLot lot;
+    private final LifeCurve curve;
+    private final Optional<Chilling> chilling;
+    private final Dormancy dormancy;
+    private final Response response;
+    private final LifeSpan span;
+    private final WaterLimit water;
+    private final double freezingC;
+
+    private KeepingModel(KeptLot lot) {
+        Commodity commodity = lot.commodity();
+        this.lot = lot;
+        span = new LifeSpan(commodity, lot.door());
+        Ripeness ripeness = span.ripeness();
+        chilling = Chilling.of(commodity, ripeness);
+        double floorC = chilling.map(c -> c.zone().topC()).orElse(Double.NEGATIVE_INFINITY);
+        curve = LifeCurve.of(commodity, floorC, lot.door().knownLife());
+        dormancy = Dormancy.of(commodity);
+        response = Response.of(commodity, lot.door().ripeness());
+        water = new WaterLimit(commodity, curve);
+        freezingC = freezing(commodity);
+    }
+
+    /**
+     * Returns the model of a lot.
+     *
+     * @param lot the lot
+     * @return its model
+     */
+    public static KeepingModel of(KeptLot lot) {
+        return new KeepingModel(lot);
+    }
+
+    private static double freezing(Commodity commodity) {
+        if (commodity.needs().highestFreezingC().isPresent()) {
+            return commodity.needs().highestFreezingC().get().highest();
+        }
+        return commodity.body().compositions().stream()
+                .map(CompositionRow::initialFreezingC)
+                .filter(java.util.OptionalDouble::isPresent)
+                .mapToDouble(java.util.OptionalDouble::getAsDouble)
+                .max()
+                .orElse(USUAL_FREEZING_C);
+    }
+
+    /**
+     * Follows a history; beyond its end each mechanism goes on at its mean rate of the last 24
+     * hours.
+     *
+     * @param history what the lot goes through from its arrival on
+     * @param draw the draw
+     * @return its fate
+     */
+    public Fate follow(LotHistory history, Draw draw) {
+        return follow(history, draw, Window.lastDay(history));
+    }
+
+    /**
+     * Follows a history; beyond its end each mechanism goes on at its mean rate of a window.
+     *
+     * @param history what the lot goes through from its arrival on
+     * @param draw the draw
+     * @param beyond the window, the last 24 hours without an outage say
+     * @return its fate
+     */
+    public Fate follow(LotHistory history, Draw draw, Window beyond) {
+        return new Following(this, history, draw, beyond).fate();
+    }
+
+    /**
+     * Follows a history in the plain run and all draws and puts them together.
+     *
+     * @param history what the lot goes through from its arrival on
+     * @param draws the draws
+     * @param fromS days left count from here, s
+     * @param leavesS end of stay and market leg, s, for the risk of chilling
+     * @return the outlook
+     */
+    public Outlook outlook(LotHistory history, List<Draw> draws, double fromS, double leavesS) {
+        List<Fate> fates = new ArrayList<>(draws.size());
+        for (Draw draw : draws) {
+            fates.add(follow(history, draw));
+        }
+        double endS = history.timeS(history.size() - 1);
+        return Outlook.of(
+                follow(history, Draw.MEDIAN), fates, fromS, endS, leavesS, basis(history));
+    }
+
+    /**
+     * Returns what an answer along a history rests on and why.
+     *
+     * @param history what the lot goes through
+     * @return basis with reasons
+     */
+    public Basis basis(LotHistory history) {
+        return new Grounds(this, history).basis();
+    }
+
+    /**
+     * Returns the temperature below which the commodity freezes.
+     *
+     * @return highest freezing point, °C
+     */
+    public double freezingC() {
+        return freezingC;
+    }
+
+    /**
+     * Returns the temperature from which on nothing is chilled, as printed for the lot's ripeness.
+     *
+     * @return °C, minus infinity where it does not chill
+     */
+    public double lowestSafeC() {
+        return chilling.map(c -> c.zone().topC()).orElse(Double.NEGATIVE_INFINITY);
+    }
+
+    /**
+     * Returns whether the lot is to stay dry.
+     *
+     * @return true for bulbs that root and mould in damp air
+     */
+    public boolean wantsDry() {
+        return dormancy.wantsDry();
+    }
+
+    /**
+     * Returns whether the lot still has to be cured, or may have to.
+     *
+     * @return true where a cure is printed and nobody said it was done
+     */
+    public boolean uncured() {
+        return dormancy.curable() && !lot.door().cured().orElse(false);
+    }
+
+    /**
+     * Returns the lot.
+     *
+     * @return the lot as given
+     */
+    public KeptLot lot() {
+        return lot;
+    }
+
+    /**
+     * Returns what ethylene does to the lot.
+     *
+     * @return its response
+     */
+    public Response response() {
+        return response;
+    }
+
+    LifeCurve curve() {
+        return curve;
+    }
+
+    Optional<Chilling> chilling() {
+        return chilling;
+    }
+
+    Dormancy dormancy() {
+        return dormancy;
+    }
+
+    LifeSpan span() {
+        return span;
+    }
+
+    WaterLimit water() {
+        return water;
+    }
+}

@@ -1,0 +1,22 @@
+package org.wardon.keeping;
+
+import java.util.Optional;
+import java.util.function.DoubleFunction;
+import org.wardon.lots.TranspirationLaw;
+import org.wardon.produce.Commodity;
+
+/**
+ * A lot whose keeping is judged.
+ *
+ * @param id id of the lot
+ * @param commodity what it is
+ * @param door what was known at arrival
+ * @param transpiration how it loses water in an open package, by the share of the published range
+ *     (0 tight, 1 open); used for the permissible loss and for histories that bring no mass; empty
+ *     to leave water loss out where the mass is not known
+ */
+public record KeptLot(
+        String id,
+        Commodity commodity,
+        LotAtDoor door,
+        Optional<DoubleFunction<TranspirationLaw>> transpiration) {}

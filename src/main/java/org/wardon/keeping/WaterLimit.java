@@ -1,0 +1,75 @@
+package org.wardon.keeping;
+
+import java.util.List;
+import java.util.Optional;
+import java.util.function.DoubleFunction;
+import org.wardon.air.SaturatedAir;
+import org.wardon.air.Timeline;
+import org.wardon.keeping.life.Ageing;
+import org.wardon.keeping.life.LifeCurve;
+import org.wardon.lots.TranspirationLaw;
+import org.wardon.produce.Commodity;
+import org.wardon.produce.Fact;
+import org.wardon.produce.rows.MoistureLimit;
+
+/**
+ * How much water a lot may lose.
+ *
+ * <p>The rule: the printed permissible loss, but never less than what the produce would lose in an
+ * open package over the published life in the handbook's own condition, for there it keeps. For a
+ * commodity with a limit of its own the shortest published life counts, for one that has only the
+ * general limit the life of the draw.
+ */
+final class WaterLimit {
+    /** General rule for produce: shrivel becomes obvious at 3 to 6 percent, id AH66-1986. */
+    private static final double GENERAL_FRACTION = 0.03;
+
+    private static final String GENERAL = "produce in general";
+    private static final double USUAL_HUMIDITY = 0.925;
+
+    private final double printedFraction;
+    private final boolean general;
+    private final String sourceId;
+    private final LifeCurve curve;
+    private final double handbookC;
+    private final double handbookHumidity;
+
+    WaterLimit(Commodity commodity, LifeCurve curve) {
+        List<MoistureLimit> limits = commodity.water().limits();
+        Optional<MoistureLimit> first = limits.stream().findFirst();
+        printedFraction =
+                first.map(row -> row.maxLossPct().lowest() / 100).orElse(GENERAL_FRACTION);
+        general = first.isEmpty() || first.get().symptom().contains(GENERAL);
+        sourceId = first.map(row -> row.maxLossPct().sourceId()).orElse("AH66-1986");
+        this.curve = curve;
+        handbookC = 0.5 * (curve.level().atLowC() + curve.level().atHighC());
+        handbookHumidity =
+                commodity
+                        .needs()
+                        .humidityPct()
+                        .map(Fact::middle)
+                        .map(pct -> pct / 100)
+                        .orElse(USUAL_HUMIDITY);
+    }
+
+    String sourceId() {
+        return sourceId;
+    }
+
+    /** Permissible loss of a draw, share of the mass. */
+    double fraction(Optional<DoubleFunction<TranspirationLaw>> laws, Ageing ageing, Draw draw) {
+        if (laws.isEmpty()) {
+            return printedFraction;
+        }
+        TranspirationLaw law = laws.get().apply(draw.transpiration());
+        double days = general ? ageing.lifeDays(handbookC) : curve.level().lowDays();
+        return Math.max(printedFraction, perDay(law, handbookC, handbookHumidity) * days);
+    }
+
+    /** Water lost from a kilogram, kg a day; not below 0. */
+    static double perDay(TranspirationLaw law, double skinC, double humidityFraction) {
+        double saturated = SaturatedAir.pressurePa(skinC);
+        double lost = law.waterKgPerKgS(saturated, humidityFraction * saturated);
+        return Math.max(0, lost) * Timeline.DAY_S;
+    }
+}

@@ -1,0 +1,124 @@
+package org.wardon.keeping.chilling;
+
+import java.util.ArrayList;
+import java.util.List;
+import java.util.Optional;
+import java.util.OptionalDouble;
+import org.wardon.produce.Commodity;
+import org.wardon.produce.Fact;
+import org.wardon.produce.Ripeness;
+import org.wardon.produce.rows.ChillingFloor;
+
+/**
+ * Which lowest safe temperature counts for a lot.
+ *
+ * <p>The rule: of the printed rows, those of the lot's ripeness, else those that state none; rows
+ * of single cultivars only where there are no others. Among them the highest printed figure counts,
+ * but not above the handbook's own storage temperature unless a row gives it as its lower bound.
+ * Unknown ripeness is judged as green. A commodity without a row whose handbook temperature is 7 °C
+ * or more is taken to chill below that temperature (assumption).
+ */
+final class Floors {
+    private static final double TROPICAL_FROM_C = 7;
+    private static final String BAND = "band";
+    private static final double BAND_WIDTH_K = 10;
+
+    private Floors() {}
+
+    /**
+     * Returns the zone in which a lot is injured.
+     *
+     * @param commodity the commodity
+     * @param ripeness how ripe the lot is
+     * @return the zone; empty where it does not chill
+     */
+    static Optional<Zone> of(Commodity commodity, Ripeness ripeness) {
+        List<ChillingFloor> rows = chosen(commodity, ripeness);
+        Optional<Fact> handbook = commodity.needs().temperatureC();
+        if (rows.isEmpty()) {
+            boolean rated = commodity.keeping().floors().stream().anyMatch(row -> !row.rated());
+            return handbook.filter(fact -> fact.lowest() >= TROPICAL_FROM_C && !rated)
+                    .map(
+                            fact ->
+                                    new Zone(
+                                            fact.lowest(),
+                                            OptionalDouble.empty(),
+                                            false,
+                                            true,
+                                            fact.sourceId()));
+        }
+        boolean band = rows.stream().anyMatch(row -> row.zone().equals(BAND));
+        return Optional.of(band ? band(rows) : floor(rows, handbook));
+    }
+
+    private static Zone band(List<ChillingFloor> rows) {
+        double top = rows.stream().mapToDouble(Floors::high).max().orElseThrow();
+        OptionalDouble printed =
+                rows.stream()
+                        .filter(row -> row.bandLowC().isPresent())
+                        .mapToDouble(row -> row.bandLowC().getAsDouble())
+                        .min();
+        double low = printed.orElse(top - BAND_WIDTH_K);
+        return new Zone(top, OptionalDouble.of(low), skin(rows), false, rows.get(0).sourceId());
+    }
+
+    private static Zone floor(List<ChillingFloor> rows, Optional<Fact> handbook) {
+        double highest = rows.stream().mapToDouble(Floors::high).max().orElseThrow();
+        double highestLow = rows.stream().mapToDouble(Floors::low).max().orElseThrow();
+        double kept = handbook.map(Fact::lowest).orElse(highest);
+        double floor = Math.max(highestLow, Math.min(highest, kept));
+        return new Zone(floor, OptionalDouble.empty(), skin(rows), false, sourceOf(rows, floor));
+    }
+
+    private static String sourceOf(List<ChillingFloor> rows, double floor) {
+        return rows.stream()
+                .filter(row -> low(row) <= floor && floor <= high(row))
+                .findFirst()
+                .orElse(rows.get(0))
+                .sourceId();
+    }
+
+    private static boolean skin(List<ChillingFloor> rows) {
+        String tissue =
+                rows.stream()
+                        .map(ChillingFloor::tissue)
+                        .filter(name -> !name.equals("not-stated"))
+                        .findFirst()
+                        .orElse("whole");
+        return tissue.equals("skin") || tissue.equals("leaf");
+    }
+
+    private static List<ChillingFloor> chosen(Commodity commodity, Ripeness ripeness) {
+        List<ChillingFloor> all = new ArrayList<>();
+        for (ChillingFloor row : commodity.keeping().floors()) {
+            if (row.rated() && row.lowestSafeC().isPresent() && !row.zone().isEmpty()) {
+                all.add(row);
+            }
+        }
+        List<ChillingFloor> fitting =
+                all.stream().filter(row -> row.ripeness().equals(word(ripeness))).toList();
+        List<ChillingFloor> silent =
+                all.stream().filter(row -> row.ripeness().equals("not-stated")).toList();
+        List<ChillingFloor> pool = !fitting.isEmpty() ? fitting : silent.isEmpty() ? all : silent;
+        List<ChillingFloor> general = pool.stream().filter(row -> row.variant().isEmpty()).toList();
+        return general.isEmpty() ? pool : general;
+    }
+
+    /**
+     * Returns how the tables call a ripeness for chilling.
+     *
+     * @param ripeness ripeness of the lot
+     * @return word of the tables
+     */
+    static String word(Ripeness ripeness) {
+        return ripeness == Ripeness.RIPE ? "ripe" : "mature-green";
+    }
+
+    private static double low(ChillingFloor row) {
+        return row.lowestSafeC().orElseThrow().lowest();
+    }
+
+    private static double high(ChillingFloor row) {
+        return row.lowestSafeC().orElseThrow().highest();
+    }
+}

@@ -1,0 +1,46 @@
+package org.wardon.keeping.chilling;
+
+import java.util.OptionalDouble;
+
+/**
+ * The temperatures that injure.
+ *
+ * @param topC injury below it, °C
+ * @param bandLowC lower end of a damaging band, below which it is milder again, °C; empty where
+ *     colder is always worse
+ * @param bySkin whether the temperature of the skin counts, else the mean
+ * @param assumed whether nobody printed it for the commodity
+ * @param sourceId source of the temperature
+ */
+public record Zone(
+        double topC, OptionalDouble bandLowC, boolean bySkin, boolean assumed, String sourceId) {
+    /**
+     * Share of the worst rate left at and below a band. From the rows of peach: 7 to 14 days at 5
+     * °C and 21 at 0 °C (chilling-exposure table, memory): about 0.4.
+     */
+    private static final double BELOW_BAND = 0.4;
+
+    /**
+     * Returns how strongly a temperature injures, in kelvin below the top.
+     *
+     * @param temperatureC temperature, °C
+     * @param shiftK how far the top lies lower than printed, K
+     * @return K, 0 at and above the top
+     */
+    double severityK(double temperatureC, double shiftK) {
+        double below = topC - shiftK - temperatureC;
+        if (below <= 0) {
+            return 0;
+        }
+        return bandLowC.isPresent() ? inBand(below, topC - bandLowC.getAsDouble()) : below;
+    }
+
+    private static double inBand(double below, double width) {
+        double worst = width / 2;
+        if (below <= worst) {
+            return below;
+        }
+        double past = Math.min(1, (below - worst) / worst);
+        return worst * (1 - past * (1 - BELOW_BAND));
+    }
+}

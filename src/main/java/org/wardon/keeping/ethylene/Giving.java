@@ -1,0 +1,112 @@
+package org.wardon.keeping.ethylene;
+
+import java.util.ArrayList;
+import java.util.Comparator;
+import java.util.List;
+import java.util.Map;
+import java.util.OptionalDouble;
+import org.wardon.keeping.Draw;
+import org.wardon.produce.Commodity;
+import org.wardon.produce.rows.EthyleneRate;
+
+/**
+ * Ethylene a commodity gives off. Between the temperatures of its rows the logarithm of the rate is
+ * straight; beyond them Q10 is 2 to 3 (assumption). Rows that print an upper limit only reach a
+ * decade down from it (assumption). Without rows the class at 20 °C counts.
+ *
+ * <p>Source of the classes: id kader-lists (very low under 0.1, low 0.1 to 1, moderate 1 to 10,
+ * high 10 to 100, very high over 100 µL/(kg h) at 20 °C).
+ */
+public final class Giving {
+    private static final double CLASS_AT_C = 20;
+    private static final double DECADE = 10;
+    private static final Map<String, double[]> CLASSES =
+            Map.of(
+                    "very-low", new double[] {0.01, 0.1},
+                    "low", new double[] {0.1, 1},
+                    "moderate", new double[] {1, 10},
+                    "high", new double[] {10, 100},
+                    "very-high", new double[] {100, 1000});
+
+    private final double[] atC;
+    private final double[] lnLow;
+    private final double[] lnHigh;
+    private final String sourceId;
+
+    private Giving(List<double[]> points, String sourceId) {
+        atC = points.stream().mapToDouble(point -> point[0]).toArray();
+        lnLow = points.stream().mapToDouble(point -> Math.log(point[1])).toArray();
+        lnHigh = points.stream().mapToDouble(point -> Math.log(point[2])).toArray();
+        this.sourceId = sourceId;
+    }
+
+    /**
+     * Returns what a commodity gives off.
+     *
+     * @param commodity the commodity
+     * @return its rates
+     */
+    public static Giving of(Commodity commodity) {
+        List<double[]> points = new ArrayList<>();
+        String source = "kader-lists";
+        for (EthyleneRate row : commodity.breath().ethylene()) {
+            OptionalDouble at = row.temperatureC();
+            if (at.isPresent()) {
+                points.add(point(at.getAsDouble(), row));
+                source = row.microlitrePerKgHour().sourceId();
+            }
+        }
+        if (points.isEmpty()) {
+            double[] bounds =
+                    CLASSES.getOrDefault(
+                            commodity.needs().ethyleneProduction(), new double[] {0.01, 1});
+            points.add(new double[] {CLASS_AT_C, bounds[0], bounds[1]});
+        }
+        points.sort(Comparator.comparingDouble(point -> point[0]));
+        return new Giving(points, source);
+    }
+
+    private static double[] point(double atC, EthyleneRate row) {
+        double high = row.microlitrePerKgHour().highest();
+        double low = row.microlitrePerKgHour().lowest();
+        boolean lowPrinted = row.microlitrePerKgHour().low().isPresent();
+        boolean highPrinted = row.microlitrePerKgHour().high().isPresent();
+        return new double[] {
+            atC, lowPrinted ? low : high / DECADE, highPrinted ? high : low * DECADE
+        };
+    }
+
+    /**
+     * Returns the source of the rates.
+     *
+     * @return id
+     */
+    public String sourceId() {
+        return sourceId;
+    }
+
+    /**
+     * Returns the rate of a draw.
+     *
+     * @param temperatureC temperature of the produce, °C
+     * @param stage 0 before ripening (lowest printed), 1 after (highest), between for produce that
+     *     does not ripen
+     * @param draw the draw, for the steepness beyond the printed temperatures
+     * @return µL/(kg h)
+     */
+    public double microlitrePerKgHour(double temperatureC, double stage, Draw draw) {
+        int last = atC.length - 1;
+        double inside = Math.min(Math.max(temperatureC, atC[0]), atC[last]);
+        int i = 0;
+        while (i < last - 1 && atC[i + 1] < inside) {
+            i++;
+        }
+        int next = Math.min(i + 1, last);
+        double width = atC[next] - atC[i];
+        double share = width == 0 ? 0 : (inside - atC[i]) / width;
+        double low = lnLow[i] + share * (lnLow[next] - lnLow[i]);
+        double high = lnHigh[i] + share * (lnHigh[next] - lnHigh[i]);
+        double steepness = Math.log(2 + draw.ethyleneGiven()) / DECADE;
+        return Math.exp(low + stage * (high - low) + steepness * (temperatureC - inside));
+    }
+}

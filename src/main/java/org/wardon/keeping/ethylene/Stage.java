@@ -1,0 +1,61 @@
+package org.wardon.keeping.ethylene;
+
+import java.util.Set;
+import org.wardon.produce.Commodity;
+import org.wardon.produce.Ripeness;
+
+/** How ripeness bears on what a fruit gives off and on what its published life means. */
+public final class Stage {
+    /** Rows of the tables that already speak of ripening or ripe fruit. */
+    private static final Set<String> RIPE_IDS =
+            Set.of("banana-ripe", "tomato-ripe", "tomato-pink", "cherry-tomato");
+
+    /** Rows of the tables that already speak of green fruit. */
+    private static final Set<String> GREEN_IDS =
+            Set.of("banana-green", "tomato-mature-green", "plantain");
+
+    private static final double HALF_WAY = 0.5;
+
+    private Stage() {}
+
+    /**
+     * Returns whether the commodity's own rows are those of ripe fruit.
+     *
+     * @param commodity the commodity
+     * @return true if its life is a ripe life
+     */
+    public static boolean soldRipe(Commodity commodity) {
+        return RIPE_IDS.contains(commodity.id());
+    }
+
+    /**
+     * Returns the ripeness to judge by.
+     *
+     * @param commodity the commodity
+     * @param told what was told
+     * @return green or ripe where the commodity itself says so, else what was told
+     */
+    public static Ripeness judged(Commodity commodity, Ripeness told) {
+        if (soldRipe(commodity)) {
+            return Ripeness.RIPE;
+        }
+        return told == Ripeness.UNKNOWN && GREEN_IDS.contains(commodity.id())
+                ? Ripeness.GREEN
+                : told;
+    }
+
+    /**
+     * Returns where between the lowest and the highest printed rate a lot gives off ethylene.
+     *
+     * @param commodity the commodity
+     * @param told what was told of its ripeness
+     * @return 0 for green fruit that ripens, 1 for ripening, ripe and unknown, half way for produce
+     *     that does not ripen
+     */
+    public static double giving(Commodity commodity, Ripeness told) {
+        if (!commodity.climacteric()) {
+            return HALF_WAY;
+        }
+        return judged(commodity, told) == Ripeness.GREEN ? 0 : 1;
+    }
+}

@@ -1,0 +1,21 @@
+package org.wardon.keeping.life;
+
+import org.wardon.keeping.RestsOn;
+
+/**
+ * The life a curve is anchored on.
+ *
+ * @param atLowC lower end of the condition's temperature, °C
+ * @param atHighC upper end of it, °C
+ * @param lowDays shortest life printed for that condition, days
+ * @param highDays longest, days
+ * @param restsOn what it rests on: handbook life or class
+ * @param sourceId its source
+ */
+public record LifeLevel(
+        double atLowC,
+        double atHighC,
+        double lowDays,
+        double highDays,
+        RestsOn restsOn,
+        String sourceId) {}
