@@ -51,8 +51,7 @@ public final class SunPosition {
         double utcHour =
                 (timeline.secondOfDay(seconds) - offset.getTotalSeconds()) / Timeline.HOUR_S;
         double correctionH =
-                site.longitudeDeg() / 15
-                        + equationOfTimeMin(timeline.dayOfYear(seconds)) / 60;
+                site.longitudeDeg() / 15 + equationOfTimeMin(timeline.dayOfYear(seconds)) / 60;
         double hour = (utcHour + correctionH) % 24;
         return hour < 0 ? hour + 24 : hour;
     }
@@ -99,8 +98,7 @@ public final class SunPosition {
         double omega = hourAngle(solarHour);
         // South and west parts of the sun's direction; safe overhead and at the poles.
         double south =
-                Math.cos(omega) * Math.cos(delta) * Math.sin(phi)
-                        - Math.sin(delta) * Math.cos(phi);
+                Math.cos(omega) * Math.cos(delta) * Math.sin(phi) - Math.sin(delta) * Math.cos(phi);
         double west = Math.cos(delta) * Math.sin(omega);
         return Math.toDegrees(Math.atan2(west, south));
     }

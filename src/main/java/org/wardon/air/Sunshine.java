@@ -5,8 +5,8 @@ package org.wardon.air;
  *
  * <p>Where the weather states global radiation it is split by {@link DiffuseShare}. Where it does
  * not, each day's clearness is estimated from its range of temperature ({@link
- * DailyRadiation#shareByRange}) and held through the day (assumption); {@link #estimated()} says so.
- * With the sun below 5 degrees all is taken as diffuse, since the split is worthless there.
+ * DailyRadiation#shareByRange}) and held through the day (assumption); {@link #estimated()} says
+ * so. With the sun below 5 degrees all is taken as diffuse, since the split is worthless there.
  */
 public final class Sunshine {
     /** Solar constant, W/m2. Source: Duffie and Beckman, chapter 1 (from memory). */
@@ -178,8 +178,7 @@ public final class Sunshine {
         double c = cosZenith[hour];
         double turn = Math.toRadians(azimuthDeg[hour] - (azimuthFromNorthDeg - 180));
         double sinZenith = Math.sqrt(Math.max(0, 1 - c * c));
-        double incidence =
-                Math.cos(tilt) * c + Math.sin(tilt) * sinZenith * Math.cos(turn);
+        double incidence = Math.cos(tilt) * c + Math.sin(tilt) * sinZenith * Math.cos(turn);
         return beamNormalWm2[hour] * Math.max(0, incidence)
                 + diffuseWm2[hour] * (1 + Math.cos(tilt)) / 2
                 + globalWm2(hour) * GROUND_ALBEDO * (1 - Math.cos(tilt)) / 2;

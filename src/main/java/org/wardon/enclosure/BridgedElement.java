@@ -29,7 +29,12 @@ public record BridgedElement(
             parts = List.copyOf(parts);
             double sum = parts.stream().mapToDouble(Part::share).sum();
             Require.within(
-                    "sum of the shares of a layer", sum, 1 - 1e-6, 1 + 1e-6, "", "Shares add to 1.");
+                    "sum of the shares of a layer",
+                    sum,
+                    1 - 1e-6,
+                    1 + 1e-6,
+                    "",
+                    "Shares add to 1.");
         }
 
         /**
@@ -114,8 +119,7 @@ public record BridgedElement(
                     longer.add(
                             new Path(
                                     path.share * part.share,
-                                    path.resistanceM2KW
-                                            + layer.thicknessM / part.conductivityWmK));
+                                    path.resistanceM2KW + layer.thicknessM / part.conductivityWmK));
                 }
             }
             paths = longer;

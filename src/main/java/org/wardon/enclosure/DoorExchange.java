@@ -51,10 +51,8 @@ public final class DoorExchange {
             double roomKgM3, double beyondKgM3, double widthM, double heightM) {
         boolean roomHeavier = roomKgM3 >= beyondKgM3;
         double ratio = roomHeavier ? beyondKgM3 / roomKgM3 : roomKgM3 / beyondKgM3;
-        double byRatio =
-                -rootSlope(1 - ratio) * shape(ratio) + root(1 - ratio) * shapeSlope(ratio);
-        double slope =
-                roomHeavier ? root(1 - ratio) * shape(ratio) - ratio * byRatio : byRatio;
+        double byRatio = -rootSlope(1 - ratio) * shape(ratio) + root(1 - ratio) * shapeSlope(ratio);
+        double slope = roomHeavier ? root(1 - ratio) * shape(ratio) - ratio * byRatio : byRatio;
         return opening(widthM, heightM) * slope;
     }
 

@@ -39,8 +39,7 @@ public record GasLevel(double sourcePpmH, double airChangesPerHour, double outdo
             double temperatureC,
             double pressurePa) {
         double molPerHour = massKg * respirationMgKgH * 1e-3 / CARBON_DIOXIDE_G_MOL;
-        double airMol =
-                pressurePa * freeVolumeM3 / (GAS_J_MOL_K * (temperatureC + 273.15));
+        double airMol = pressurePa * freeVolumeM3 / (GAS_J_MOL_K * (temperatureC + 273.15));
         return 1e6 * molPerHour / airMol;
     }
 
@@ -93,8 +92,7 @@ public record GasLevel(double sourcePpmH, double airChangesPerHour, double outdo
      * @param outdoorPpm level of the air coming in, ppm
      * @return free volumes an hour
      */
-    public static double airChangesToHold(
-            double sourcePpmH, double limitPpm, double outdoorPpm) {
+    public static double airChangesToHold(double sourcePpmH, double limitPpm, double outdoorPpm) {
         Require.that(limitPpm > outdoorPpm, "no air change holds a level below that outdoors");
         return sourcePpmH / (limitPpm - outdoorPpm);
     }

@@ -16,8 +16,7 @@ import org.wardon.errors.Require;
  * @param wallThicknessM thickness of the walls around it, m
  * @param soil what it lies on
  */
-public record GroundFloor(
-        double areaM2, double perimeterM, double wallThicknessM, Soil soil) {
+public record GroundFloor(double areaM2, double perimeterM, double wallThicknessM, Soil soil) {
     /** Depth of soil with capacity, m. */
     private static final double SOIL_DEPTH_M = 0.5;
 

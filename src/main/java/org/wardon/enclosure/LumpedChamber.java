@@ -52,8 +52,6 @@ public record LumpedChamber(
         if (left >= 1) {
             return left == 1 ? 0 : Double.POSITIVE_INFINITY;
         }
-        return left <= 0
-                ? Double.POSITIVE_INFINITY
-                : -Math.log(left) * capacityJK / conductanceWK;
+        return left <= 0 ? Double.POSITIVE_INFINITY : -Math.log(left) * capacityJK / conductanceWK;
     }
 }

@@ -26,8 +26,8 @@ public final class NaturalConvection {
             double diffusivityM2s,
             double expansionPerK) {
         /**
-         * Returns dry air. Source: Sutherland's law with the constants of White, Viscous Fluid
-         * Flow (from memory); specific heat 1006 J/(kg K).
+         * Returns dry air. Source: Sutherland's law with the constants of White, Viscous Fluid Flow
+         * (from memory); specific heat 1006 J/(kg K).
          *
          * @param temperatureC mean of surface and air, °C
          * @param pressurePa air pressure, Pa
@@ -60,8 +60,7 @@ public final class NaturalConvection {
      * @param gravityMs2 gravity, m/s2
      * @return dimensionless
      */
-    public static double rayleigh(
-            double differenceK, double lengthM, Gas gas, double gravityMs2) {
+    public static double rayleigh(double differenceK, double lengthM, Gas gas, double gravityMs2) {
         return gravityMs2
                 * gas.expansionPerK
                 * Math.abs(differenceK)
@@ -89,15 +88,13 @@ public final class NaturalConvection {
      * Returns the Nusselt number of a level plate the air leaves freely: a cold ceiling, a warm
      * floor.
      *
-     * @param rayleigh Rayleigh number with area over perimeter; below 1e4 the branch for 1e4 to
-     *     1e7 is carried on
+     * @param rayleigh Rayleigh number with area over perimeter; below 1e4 the branch for 1e4 to 1e7
+     *     is carried on
      * @return dimensionless
      */
     public static double stirringNusselt(double rayleigh) {
         Require.within("rayleigh", rayleigh, 0, 1e14, "", "");
-        return rayleigh < 1e7
-                ? 0.54 * Math.pow(rayleigh, 0.25)
-                : 0.15 * Math.cbrt(rayleigh);
+        return rayleigh < 1e7 ? 0.54 * Math.pow(rayleigh, 0.25) : 0.15 * Math.cbrt(rayleigh);
     }
 
     /**
@@ -127,11 +124,8 @@ public final class NaturalConvection {
         Gas gas = Gas.air(0.5 * (surfaceC + airC), pressurePa);
         boolean wall = face != FaceName.ROOF && face != FaceName.FLOOR;
         double length =
-                wall
-                        ? box.heightM()
-                        : box.areaM2(face) / (2 * (box.lengthM() + box.widthM()));
-        double ra =
-                rayleigh(surfaceC - airC, length, gas, DoorExchange.GRAVITY_MS2);
+                wall ? box.heightM() : box.areaM2(face) / (2 * (box.lengthM() + box.widthM()));
+        double ra = rayleigh(surfaceC - airC, length, gas, DoorExchange.GRAVITY_MS2);
         boolean stirring = surfaceC < airC == (face == FaceName.ROOF);
         double nusselt;
         if (wall) {

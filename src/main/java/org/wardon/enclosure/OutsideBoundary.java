@@ -130,8 +130,7 @@ public final class OutsideBoundary {
                         meanWallThicknessM(enclosure),
                         GroundFloor.Soil.SAND_OR_GRAVEL);
         List<Layer> soil =
-                floor.soilLayers(
-                        UValue.resistanceM2KW(face.layers()), Films.insideM2KW(flow));
+                floor.soilLayers(UValue.resistanceM2KW(face.layers()), Films.insideM2KW(flow));
         List<Reason> reasons =
                 around.deepGroundC().isPresent()
                         ? List.of()
@@ -143,8 +142,7 @@ public final class OutsideBoundary {
                                         Reason.Argument.of(deep, "C")));
         int n = around.hours() + 1;
         // The film is inside the slab's resistance already: a tight one stands here.
-        return new OutsideBoundary(
-                constant(n, deep), constant(n, TIGHT_WM2K), flow, soil, reasons);
+        return new OutsideBoundary(constant(n, deep), constant(n, TIGHT_WM2K), flow, soil, reasons);
     }
 
     private static final double TIGHT_WM2K = 1e4;

@@ -46,8 +46,7 @@ public record PeriodicTransmittance(
         // The heat flow inside follows the swing outside: its phase is counted from -2 pi to 0.
         double phase = lag > 0 ? lag - 2 * Math.PI : lag;
         double steady = UValue.wattsM2K(insideToOutside, insideFilmM2KW, outsideFilmM2KW);
-        double capacity =
-                periodS / (2 * Math.PI) * z.a.subtract(Complex.ONE).divide(z.b).abs();
+        double capacity = periodS / (2 * Math.PI) * z.a.subtract(Complex.ONE).divide(z.b).abs();
         return new PeriodicTransmittance(
                 periodS, y.abs(), y.abs() / steady, periodS * phase / (2 * Math.PI), capacity);
     }
@@ -67,8 +66,7 @@ public record PeriodicTransmittance(
             double x = layer.thicknessM() / depth;
             double shc = Math.sinh(x) * Math.cos(x);
             double chs = Math.cosh(x) * Math.sin(x);
-            Complex diagonal =
-                    new Complex(Math.cosh(x) * Math.cos(x), Math.sinh(x) * Math.sin(x));
+            Complex diagonal = new Complex(Math.cosh(x) * Math.cos(x), Math.sinh(x) * Math.sin(x));
             Complex up = new Complex(shc + chs, chs - shc).multiply(-depth / (2 * lambda));
             Complex down = new Complex(shc - chs, shc + chs).multiply(-lambda / depth);
             return new Matrix(diagonal, up, down, diagonal);

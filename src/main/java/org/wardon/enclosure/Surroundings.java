@@ -81,13 +81,7 @@ public record Surroundings(
      */
     public Surroundings withDeepGround(double yearlyMeanC) {
         return new Surroundings(
-                site,
-                weather,
-                sun,
-                hours,
-                insideMeanC,
-                OptionalDouble.of(yearlyMeanC),
-                neighbourC);
+                site, weather, sun, hours, insideMeanC, OptionalDouble.of(yearlyMeanC), neighbourC);
     }
 
     /**
