@@ -1,0 +1,357 @@
+package org.wardon.reference;
+
+import java.util.List;
+import java.util.Map;
+import java.util.Optional;
+import java.util.concurrent.ConcurrentHashMap;
+import java.util.function.Function;
+import java.util.stream.Collectors;
+import java.util.stream.Stream;
+import org.wardon.enclosure.Doorway;
+import org.wardon.enclosure.Material;
+import org.wardon.errors.BadInput;
+import org.wardon.produce.Commodity;
+import org.wardon.produce.MixingGroup;
+import org.wardon.produce.NamedFact;
+import org.wardon.produce.PackageClass;
+import org.wardon.produce.PackageKind;
+import org.wardon.produce.Source;
+import org.wardon.produce.rows.EthyleneStorageRow;
+
+/**
+ * The published tables, read from the database shipped with the program and never changed, with a
+ * keeper's own values laid over them. May be used by several threads.
+ */
+public final class ReferenceBook implements AutoCloseable {
+    private final ReferenceDatabase database;
+    private final Map<String, List<OwnValue>> own;
+    private final Names names;
+    private final PackageReader packages;
+    private final FactReader facts;
+    private final GroupReader groups;
+    private final Sources sources;
+    private final Map<String, Material> materials;
+    private final Map<String, Doorway> doorways;
+    private final Map<String, Commodity> read = new ConcurrentHashMap<>();
+
+    private ReferenceBook(ReferenceDatabase database, List<OwnValue> own) {
+        this.database = database;
+        this.own = own.stream().collect(Collectors.groupingBy(OwnValue::commodityId));
+        names = new Names(database);
+        packages = new PackageReader(database);
+        facts = new FactReader(database);
+        groups = new GroupReader(database);
+        sources = new Sources(database);
+        StoreReader store = new StoreReader(database);
+        materials = byId(store.materials(), Material::id);
+        doorways = byId(store.doorways(), Doorway::id);
+    }
+
+    private static <T> Map<String, T> byId(List<T> values, Function<T, String> id) {
+        return values.stream().collect(Collectors.toMap(id, Function.identity()));
+    }
+
+    /**
+     * Opens the book as published.
+     *
+     * @return the book; close it when done
+     */
+    public static ReferenceBook open() {
+        return new ReferenceBook(ReferenceDatabase.open(), List.of());
+    }
+
+    /**
+     * Opens the book with a keeper's own values laid over it.
+     *
+     * @param own the own values
+     * @return the book; close it when done
+     * @throws BadInput if the keeper's file cannot be read
+     */
+    public static ReferenceBook open(OwnValues own) {
+        return new ReferenceBook(ReferenceDatabase.open(), own.list());
+    }
+
+    /**
+     * Returns the ids of all commodities.
+     *
+     * @return in the order of the table
+     */
+    public List<String> list() {
+        return database.list(
+                "select commodity_id from commodities order by line",
+                row -> row.text("commodity_id"));
+    }
+
+    /**
+     * Returns a commodity by its id.
+     *
+     * @param id id of the tables
+     * @return the commodity, own values first
+     * @throws BadInput if there is no such id, with the nearest names
+     */
+    public Commodity get(String id) {
+        return byId(id).orElseThrow(() -> unknown(id));
+    }
+
+    /**
+     * Returns a commodity by whatever people call it.
+     *
+     * @param name an id, a common, local or botanical name; case and plural do not matter
+     * @return the commodity, own values first; empty if nothing is called so
+     */
+    public Optional<Commodity> find(String name) {
+        return names.find(name).flatMap(this::byId);
+    }
+
+    /**
+     * Returns a commodity by whatever people call it, or refuses the name.
+     *
+     * @param name an id or a name
+     * @return the commodity, own values first
+     * @throws BadInput if nothing is called so, with the nearest names
+     */
+    public Commodity named(String name) {
+        return find(name).orElseThrow(() -> unknown(name));
+    }
+
+    /**
+     * Returns the names nearest to a misspelt one.
+     *
+     * @param name the misspelt name
+     * @return up to three, nearest first; none if nothing comes near
+     */
+    public List<String> nearest(String name) {
+        return names.nearest(name);
+    }
+
+    private Optional<Commodity> byId(String id) {
+        Commodity known = read.get(id);
+        if (known != null) {
+            return Optional.of(known);
+        }
+        Optional<Commodity> found =
+                new CommodityReader(database)
+                        .read(id)
+                        .map(published -> OwnOverlay.over(published, ownOf(id)));
+        found.ifPresent(commodity -> read.put(id, commodity));
+        return found;
+    }
+
+    private List<OwnValue> ownOf(String id) {
+        return own.getOrDefault(id, List.of());
+    }
+
+    private BadInput unknown(String name) {
+        List<String> near = nearest(name);
+        String way = "'look' without a name lists all commodities";
+        return new BadInput(
+                name,
+                "",
+                "no commodity is called so",
+                near.isEmpty() ? way : "perhaps " + String.join(", ", near) + "? " + way);
+    }
+
+    /**
+     * Returns every fact of a commodity with its source, to be shown to a person.
+     *
+     * @param id id of the tables
+     * @return own values first, then all printed ones, those they override included
+     * @throws BadInput if there is no such id, with the nearest names
+     */
+    public List<NamedFact> facts(String id) {
+        Commodity commodity = get(id);
+        return Stream.concat(
+                        ownOf(commodity.id()).stream().map(OwnValue::named),
+                        facts.ofCommodity(commodity.id()).stream())
+                .toList();
+    }
+
+    /**
+     * Returns a source.
+     *
+     * @param id id beside a figure; also {@code own}, {@code common-practice} and {@code
+     *     assumption}
+     * @return the source
+     * @throws IllegalArgumentException if there is none
+     */
+    public Source source(String id) {
+        return sources.get(id);
+    }
+
+    /**
+     * Returns the sources of a row that names several.
+     *
+     * @param ids ids joined by semicolons
+     * @return the sources, in that order
+     * @throws IllegalArgumentException if one of them is not known
+     */
+    public List<Source> sources(String ids) {
+        return Stream.of(ids.split(";", -1)).map(this::source).toList();
+    }
+
+    /**
+     * Returns the building materials.
+     *
+     * @return by id
+     */
+    public Map<String, Material> materials() {
+        return Map.copyOf(materials);
+    }
+
+    /**
+     * Returns a building material.
+     *
+     * @param id id of the tables
+     * @return the material
+     * @throws BadInput if there is no such id
+     */
+    public Material material(String id) {
+        return known(materials, id, "material");
+    }
+
+    /**
+     * Returns what can protect a door.
+     *
+     * @return by id
+     */
+    public Map<String, Doorway> doorways() {
+        return Map.copyOf(doorways);
+    }
+
+    /**
+     * Returns the protection of a door.
+     *
+     * @param id id of the tables, such as {@code strip-curtain}
+     * @return the doorway
+     * @throws BadInput if there is no such id
+     */
+    public Doorway doorway(String id) {
+        return known(doorways, id, "door protection");
+    }
+
+    /**
+     * Returns the packages that can hold a lot.
+     *
+     * @return by id; a class of package is one too, with the broad time of room cooling
+     */
+    public Map<String, PackageKind> packageKinds() {
+        return Map.copyOf(packages.kinds());
+    }
+
+    /**
+     * Returns a package.
+     *
+     * @param id id of the tables
+     * @return the package
+     * @throws BadInput if there is no such id, or if print gives no half-cooling time for it
+     */
+    public PackageKind packageKind(String id) {
+        String described = packages.withoutTime().get(id);
+        if (described != null) {
+            throw new BadInput(
+                    id,
+                    "",
+                    "no half-cooling time is published for this package (" + described + ")",
+                    "a package with a time, such as room-cooling-any, or give the time");
+        }
+        return known(packages.kinds(), id, "package");
+    }
+
+    /**
+     * Returns packages that print describes without a half-cooling time; they cannot hold a lot.
+     *
+     * @return descriptions by id
+     */
+    public Map<String, String> packagesWithoutTime() {
+        return Map.copyOf(packages.withoutTime());
+    }
+
+    /**
+     * Returns the classes of package.
+     *
+     * @return by id
+     */
+    public Map<String, PackageClass> packageClasses() {
+        return Map.copyOf(packages.classes());
+    }
+
+    private static <T> T known(Map<String, T> values, String id, String what) {
+        T value = values.get(id);
+        if (value == null) {
+            throw new BadInput(
+                    id,
+                    "",
+                    "no " + what + " is called so",
+                    "one of " + values.keySet().stream().sorted().toList());
+        }
+        return value;
+    }
+
+    /**
+     * Returns the limits of gases, charges and wash water that keep people safe.
+     *
+     * @return all, by the names of the table
+     */
+    public List<NamedFact> safetyLimits() {
+        return facts.safetyLimits();
+    }
+
+    /**
+     * Returns the heat that people, lights and machines give.
+     *
+     * @return all, by the names of the table
+     */
+    public List<NamedFact> internalLoads() {
+        return facts.internalLoads();
+    }
+
+    /**
+     * Returns defaults of the trade without a published source.
+     *
+     * @return all, by the names of the table; to be shown as assumptions
+     */
+    public List<NamedFact> marketPractice() {
+        return facts.marketPractice();
+    }
+
+    /**
+     * Returns parameters of ways to cool.
+     *
+     * @return all, named {@code kind/parameter}; the formula stands in the note
+     */
+    public List<NamedFact> coolingSources() {
+        return facts.coolingSources();
+    }
+
+    /**
+     * Returns published groups of commodities that may share a room for a short time.
+     *
+     * @return all groups of all schemes
+     */
+    public List<MixingGroup> mixingGroups() {
+        return groups.mixingGroups();
+    }
+
+    /**
+     * Returns what ethylene did to stored produce, in the words of the sources.
+     *
+     * @return all rows
+     */
+    public List<EthyleneStorageRow> ethyleneStorage() {
+        return groups.ethyleneStorage();
+    }
+
+    /**
+     * Returns monthly means of the weather of places.
+     *
+     * @return all months of all places
+     */
+    public List<ClimateMonth> climate() {
+        return groups.climate();
+    }
+
+    @Override
+    public void close() {
+        database.close();
+    }
+}

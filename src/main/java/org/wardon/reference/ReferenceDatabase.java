@@ -1,0 +1,99 @@
+package org.wardon.reference;
+
+import java.io.IOException;
+import java.io.InputStream;
+import java.io.UncheckedIOException;
+import java.sql.Connection;
+import java.sql.DriverManager;
+import java.sql.PreparedStatement;
+import java.sql.ResultSet;
+import java.sql.ResultSetMetaData;
+import java.sql.SQLException;
+import java.sql.Statement;
+import java.util.ArrayList;
+import java.util.HashSet;
+import java.util.List;
+import java.util.Optional;
+import java.util.Set;
+import java.util.function.Function;
+import org.sqlite.SQLiteConnection;
+
+/**
+ * The shipped database, held in memory and refusing every change: SQLite cannot open a file inside
+ * a jar, and a copy on disk would have to be cleaned up.
+ */
+final class ReferenceDatabase implements AutoCloseable {
+    private static final String FILE = "reference.db";
+
+    private final Connection connection;
+
+    private ReferenceDatabase(Connection connection) {
+        this.connection = connection;
+    }
+
+    static ReferenceDatabase open() {
+        byte[] bytes = shipped();
+        try {
+            Connection connection = DriverManager.getConnection("jdbc:sqlite:");
+            connection.unwrap(SQLiteConnection.class).deserialize("main", bytes);
+            try (Statement statement = connection.createStatement()) {
+                statement.execute("pragma query_only = 1");
+            }
+            return new ReferenceDatabase(connection);
+        } catch (SQLException e) {
+            throw new IllegalStateException(FILE + " cannot be opened; build the program again", e);
+        }
+    }
+
+    private static byte[] shipped() {
+        try (InputStream in = ReferenceDatabase.class.getResourceAsStream(FILE)) {
+            if (in == null) {
+                throw new IllegalStateException(FILE + " is missing; build the program again");
+            }
+            return in.readAllBytes();
+        } catch (IOException e) {
+            throw new UncheckedIOException(FILE + " cannot be read", e);
+        }
+    }
+
+    /** Returns one value a row, in the order of the query. */
+    synchronized <T> List<T> list(String sql, Function<Row, T> reading, Object... arguments) {
+        try (PreparedStatement statement = connection.prepareStatement(sql)) {
+            for (int i = 0; i < arguments.length; i++) {
+                statement.setObject(i + 1, arguments[i]);
+            }
+            List<T> values = new ArrayList<>();
+            try (ResultSet results = statement.executeQuery()) {
+                Row row = new Row(results, columns(results.getMetaData()));
+                while (results.next()) {
+                    values.add(reading.apply(row));
+                }
+            }
+            return values;
+        } catch (SQLException e) {
+            throw new IllegalStateException(FILE + " does not answer: " + sql, e);
+        }
+    }
+
+    /** Returns the values of the rows that have one, in the order of the query. */
+    <T> List<T> present(String sql, Function<Row, Optional<T>> reading, Object... arguments) {
+        return list(sql, reading, arguments).stream().flatMap(Optional::stream).toList();
+    }
+
+    private static Set<String> columns(ResultSetMetaData answer) throws SQLException {
+        Set<String> columns = new HashSet<>();
+        for (int i = 1; i <= answer.getColumnCount(); i++) {
+            columns.add(answer.getColumnLabel(i));
+        }
+        return columns;
+    }
+
+    @Override
+    public synchronized void close() {
+        try {
+            connection.close();
+        } catch (SQLException e) {
+            throw new IllegalStateException(FILE + " cannot be closed", e);
+        }
+    }
+}
