@@ -1,10 +1,10 @@
 package org.wardon.lots;
 
 /**
- * The handbook's usual rise of respiration and decay with temperature.
+ * The handbook's usual rise of deterioration with temperature.
  *
- * <p>Source: USDA Agriculture Handbook 66: Q10 3.0 from 0 to 10 °C, 2.5 to 20 °C, 2.0 to 30 °C, 1.5
- * to 40 °C (upper values of its table).
+ * <p>Source: USDA Agriculture Handbook 66, table 20.3, Q10 assumed there: 3.0 from 0 to 10 °C, 2.5
+ * to 20 °C, 2.0 to 30 °C, 1.5 to 40.
  */
 public final class HandbookQ10 {
     private static final double[] Q10 = {3.0, 2.5, 2.0, 1.5};

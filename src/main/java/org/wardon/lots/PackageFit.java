@@ -21,10 +21,10 @@ public final class PackageFit {
     private static final double NEXT_TO_BARE = 0.995;
 
     /** An open path: this many times the conductance of the item's own flesh by its radius ... */
-    private static final double OPEN_BIOT = 200;
+    private static final double OPEN_BIOT = 2000;
 
     /** ... but no more than this, W/(kg K); a lot would follow the chamber's air within seconds. */
-    private static final double OPEN_W_KG_K = 400;
+    private static final double OPEN_W_KG_K = 1000;
 
     private static final double LEAST_W_KG_K = 1e-5;
 

@@ -131,7 +131,7 @@ public final class Respirations {
                         Reason.Argument.of(rates.firstKey(), "C"),
                         Reason.Argument.of(rates.lastKey(), "C")));
         if (rates.firstKey() > 0 || rates.lastKey() < 20) {
-            reasons.add(Reason.about("respiration-extended", id, "USDA-AH66"));
+            reasons.add(Reason.about("respiration-extended", id, "ah66-2002-tab"));
         }
         return new WithReasons<>(RespirationCurve.through(rates, share), reasons, false);
     }

@@ -10,10 +10,10 @@ import org.wardon.produce.rows.TranspirationRow;
 /**
  * Chooses what a commodity transpires by.
  *
- * <p>Rule: a printed coefficient is skin and test film together and stands alone; else the mean
- * skin coefficient in series with the film of air in the package; else the median of the plant
- * part. The range is the printed skin range over its mean; × or ÷ 1.5 where none is printed
- * (assumption), × or ÷ 3 for a class value (assumption).
+ * <p>Rule: a printed coefficient is skin and test film together, counted from saturation, and
+ * stands alone; else the mean skin coefficient in series with the film of air in the package; else
+ * the median of the plant part. The range is the printed skin range over its mean; × or ÷ 1.5 where
+ * none is printed (assumption), × or ÷ 3 for a class value (assumption).
  *
  * <p>Source: ASHRAE Handbook - Refrigeration 2006, chapter 9, 1/kt = 1/ks + 1/ka.
  */
@@ -22,6 +22,9 @@ public final class Transpirations {
     private static final double KG_PER_UG = 1e-9;
     private static final double UNPRINTED_SPREAD = 1.5;
     private static final double CLASS_SPREAD = 3;
+
+    /** A printed coefficient is defined on the saturation pressure at the produce's temperature. */
+    private static final double SATURATED = 1;
 
     /** Vapour pressure lowering where none is printed: the commonest in the table (assumption). */
     private static final double USUAL_LOWERING = 0.99;
@@ -76,7 +79,7 @@ public final class Transpirations {
         if (row.coefficient().isPresent()) {
             Fact whole = row.coefficient().get();
             return new WithReasons<>(
-                    new TranspirationLaw(whole.middle() * KG_PER_NG * factor, lowering, film),
+                    new TranspirationLaw(whole.middle() * KG_PER_NG * factor, SATURATED, film),
                     List.of(Reason.about("transpiration-coefficient", id, whole.sourceId())),
                     false);
         }
