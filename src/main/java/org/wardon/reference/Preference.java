@@ -40,9 +40,10 @@ final class Preference {
                     Evidence.PRACTICE,
                     Evidence.ASSUMPTION);
 
-    /** Rows of respiration: by table, then by temperature; a stable sort keeps states apart. */
+    /** Rows of respiration: a state together, then by table, then by temperature. */
     static final Comparator<RespirationRow> RESPIRATION =
-            Comparator.<RespirationRow, Integer>comparing(row -> HEAT_TABLES.indexOf(row.table()))
+            Comparator.comparing(RespirationRow::state)
+                    .thenComparing(row -> HEAT_TABLES.indexOf(row.table()))
                     .thenComparing(RespirationRow::temperatureC)
                     .thenComparing(row -> rank(row.wattsPerTonne()));
 
