@@ -78,6 +78,30 @@ public final class Weather {
     }
 
     /**
+     * Returns the vapour pressure. Weather states humidity over water, also in frost; what would
+     * stand above saturation over ice is taken as fallen out.
+     *
+     * @param hour hour since the start
+     * @return Pa
+     */
+    public double vapourPressurePa(int hour) {
+        double t = temperatureC(hour);
+        return Math.min(
+                humidityPct(hour) / 100 * SaturatedAir.overWaterPa(t), SaturatedAir.pressurePa(t));
+    }
+
+    /**
+     * Returns the humidity ratio.
+     *
+     * @param hour hour since the start
+     * @param pressurePa air pressure of the site, Pa
+     * @return kg/kg
+     */
+    public double humidityRatio(int hour, double pressurePa) {
+        return MoistAir.humidityRatio(vapourPressurePa(hour), pressurePa);
+    }
+
+    /**
      * Returns the global radiation on the level.
      *
      * @param hour hour since the start

@@ -156,6 +156,13 @@ public final class CompressorLaw implements CoolerLaw {
         out.drainByHumidity = out.vapourByHumidity * liquid - thaws * teByHumidity;
         out.drainEnthalpyJkg = Coil.condensateJkg(teC);
         out.electricW = share * speed * full / cop(teC, condensingC);
+        double electricByCoil = out.electricW * powerLogSlope(teC, condensingC);
+        out.electricByAirC = electricByCoil * teByAir;
+        out.electricByHumidity = electricByCoil * teByHumidity;
+        out.electricByRun = out.electricW / in.run;
+        if (unit.control() == Compressor.Control.MODULATING) {
+            out.electricByRun += electricByCoil * teBySpeed * speed / in.run;
+        }
         out.evaporatingC = teC;
         out.condensingC = condensingC;
         out.supplyC = in.airC - coil.effectiveness * (in.airC - teC);
@@ -202,6 +209,16 @@ public final class CompressorLaw implements CoolerLaw {
     private static double capacityLogSlope(double evaporatingC) {
         return CAPACITY_PER_TE_K
                 * Smooth.positiveSlope(NO_GAIN_ABOVE_C - evaporatingC, GAIN_ROUNDING_K);
+    }
+
+    /** Slope of the logarithm of power by evaporating temperature: capacity less efficiency. */
+    private static double powerLogSlope(double evaporatingC, double condensingC) {
+        double te = limited(evaporatingC);
+        double counts = Smooth.positiveSlope(NO_GAIN_ABOVE_C - evaporatingC, GAIN_ROUNDING_K);
+        return counts
+                * (CAPACITY_PER_TE_K
+                        - 1 / (condensingC - te)
+                        - 1 / (te + SaturatedAir.ZERO_C_IN_K));
     }
 
     private double cop(double evaporatingC, double condensingC) {

@@ -62,6 +62,15 @@ public final class CoolerEffect {
     /** Electric power of compressor or pump, without the fan, W. */
     public double electricW;
 
+    /** Electric power by air temperature, W/K. */
+    public double electricByAirC;
+
+    /** Electric power by humidity ratio, W per kg/kg. */
+    public double electricByHumidity;
+
+    /** Electric power by running share or speed, W. */
+    public double electricByRun;
+
     /** Power of the fan, all of which warms the chamber's air, W. */
     public double fanW;
 
@@ -134,7 +143,7 @@ public final class CoolerEffect {
         sensibleByRun = vapourByRun = 0;
         drainByAirC = drainByHumidity = 0;
         totalW = drainKgS = frostKgS = drainEnthalpyJkg = exchangeKgS = waterKgS = 0;
-        electricW = fanW = 0;
+        electricW = fanW = electricByAirC = electricByHumidity = electricByRun = 0;
         evaporatingC = condensingC = supplyC = Double.NaN;
         tripped = false;
         Arrays.fill(filmWm2K, 0);

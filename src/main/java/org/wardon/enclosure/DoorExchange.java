@@ -39,24 +39,6 @@ public final class DoorExchange {
     }
 
     /**
-     * Returns the slope of {@link #flowKgS} by the density of the chamber's air.
-     *
-     * @param roomKgM3 density of the chamber's air, kg/m3
-     * @param beyondKgM3 density of the air beyond, kg/m3
-     * @param widthM clear width, m
-     * @param heightM clear height, m
-     * @return m3/s
-     */
-    public static double flowByRoomDensity(
-            double roomKgM3, double beyondKgM3, double widthM, double heightM) {
-        boolean roomHeavier = roomKgM3 >= beyondKgM3;
-        double ratio = roomHeavier ? beyondKgM3 / roomKgM3 : roomKgM3 / beyondKgM3;
-        double byRatio = -rootSlope(1 - ratio) * shape(ratio) + root(1 - ratio) * shapeSlope(ratio);
-        double slope = roomHeavier ? root(1 - ratio) * shape(ratio) - ratio * byRatio : byRatio;
-        return opening(widthM, heightM) * slope;
-    }
-
-    /**
      * Returns what is left of the full flow in use.
      *
      * @param flowFactor share of the full flow reached, such as {@link #FLOW_FACTOR}
@@ -105,20 +87,8 @@ public final class DoorExchange {
         return x * x / Math.sqrt(q * Math.sqrt(q));
     }
 
-    private static double rootSlope(double x) {
-        double q = x * x + ROUNDING * ROUNDING;
-        return x * (2 - 1.5 * x * x / q) / Math.sqrt(q * Math.sqrt(q));
-    }
-
     private static double shape(double ratio) {
         double f = 2 / (1 + 1 / Math.cbrt(ratio));
         return f * Math.sqrt(f);
-    }
-
-    private static double shapeSlope(double ratio) {
-        double c = Math.cbrt(ratio);
-        double f = 2 / (1 + 1 / c);
-        double fSlope = 2 / ((1 + c) * (1 + c)) / (3 * c * c);
-        return 1.5 * Math.sqrt(f) * fSlope;
     }
 }

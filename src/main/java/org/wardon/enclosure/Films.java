@@ -47,4 +47,21 @@ public final class Films {
         Require.within("windMs", windMs, 0, 100, "m/s", "Give the wind speed, or none.");
         return 1 / (4 + 4 * windMs + OUTDOOR_RADIATION_WM2K);
     }
+
+    /**
+     * Returns the resistance of an inner surface by natural convection and radiation, where a plan
+     * asks for computed films instead of the fixed ones.
+     *
+     * @param face the face
+     * @param box inside measures
+     * @param surfaceC its mean surface, °C
+     * @param airC mean air of the chamber, °C
+     * @param pressurePa air pressure, Pa
+     * @return m2 K/W
+     */
+    public static double computedM2KW(
+            FaceName face, Box box, double surfaceC, double airC, double pressurePa) {
+        double convection = NaturalConvection.filmWm2K(face, box, surfaceC, airC, pressurePa);
+        return 1 / (convection + RadiantFilm.wattsM2K(0.5 * (surfaceC + airC)));
+    }
 }

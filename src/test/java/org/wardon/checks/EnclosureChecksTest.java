@@ -27,6 +27,8 @@ class EnclosureChecksTest {
                     "fao340_product", "org.wardon.advice.size.DesignLoad",
                     "fao340_first_six", "org.wardon.advice.size.DesignLoad");
 
+    private static final Map<String, ToDoubleFunction<CheckRow>> BUILT = built();
+
     private static Map<String, ToDoubleFunction<CheckRow>> built() {
         Map<String, ToDoubleFunction<CheckRow>> laws = new TreeMap<>();
         laws.putAll(MoistAirChecks.laws());
@@ -39,7 +41,7 @@ class EnclosureChecksTest {
 
     /** The law of a row: the longest beginning of its name that is listed. */
     private static List<String> lawsOf(String row) {
-        return built().keySet().stream()
+        return BUILT.keySet().stream()
                 .filter(row::startsWith)
                 .sorted((a, b) -> b.length() - a.length())
                 .toList();
@@ -47,7 +49,6 @@ class EnclosureChecksTest {
 
     @TestFactory
     Stream<DynamicTest> publishedValueIsMet() throws IOException {
-        Map<String, ToDoubleFunction<CheckRow>> laws = built();
         List<CheckRow> all = CheckRow.read(FILE);
         return all.stream()
                 .filter(row -> !lawsOf(row.name()).isEmpty())
@@ -55,7 +56,7 @@ class EnclosureChecksTest {
                         row ->
                                 DynamicTest.dynamicTest(
                                         row.title(),
-                                        () -> check(row, laws.get(lawsOf(row.name()).get(0)))));
+                                        () -> check(row, BUILT.get(lawsOf(row.name()).get(0)))));
     }
 
     private static void check(CheckRow row, ToDoubleFunction<CheckRow> law) {
@@ -82,7 +83,7 @@ class EnclosureChecksTest {
     void everyLawAndEveryListedRowIsInTheTable() throws IOException {
         List<String> names = CheckRow.read(FILE).stream().map(CheckRow::name).toList();
         assertTrue(names.containsAll(NOT_BUILT.keySet()));
-        for (String law : built().keySet()) {
+        for (String law : BUILT.keySet()) {
             assertTrue(
                     names.stream().anyMatch(name -> lawsOf(name).indexOf(law) == 0),
                     law + " meets no row");

@@ -208,6 +208,18 @@ class CompressorLawTest {
             check(law, in, setHumidity, w, 1e-6, e -> e.vapourKgS, at.vapourByHumidity, 0.3, what);
             check(law, in, setRun, run, 1e-4, e -> e.sensibleW, at.sensibleByRun, 3e3, what);
             check(law, in, setRun, run, 1e-4, e -> e.vapourKgS, at.vapourByRun, 1e-3, what);
+            check(law, in, setAir, t, 1e-3, e -> e.electricW, at.electricByAirC, 20, what);
+            check(
+                    law,
+                    in,
+                    setHumidity,
+                    w,
+                    1e-6,
+                    e -> e.electricW,
+                    at.electricByHumidity,
+                    1e4,
+                    what);
+            check(law, in, setRun, run, 1e-4, e -> e.electricW, at.electricByRun, 1e3, what);
             if (in.own.length > 0) {
                 double own = in.own[0];
                 DoubleConsumer setOwn = x -> in.own[0] = x;
