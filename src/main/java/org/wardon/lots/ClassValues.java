@@ -1,5 +1,6 @@
 package org.wardon.lots;
 
+import java.util.ArrayList;
 import java.util.Collection;
 import java.util.HashMap;
 import java.util.List;
@@ -7,33 +8,42 @@ import java.util.Map;
 import java.util.Optional;
 import java.util.TreeMap;
 import java.util.function.Function;
+import java.util.function.Predicate;
 import java.util.function.ToDoubleFunction;
 import java.util.stream.Collectors;
 import org.apache.commons.math3.stat.descriptive.rank.Median;
 import org.wardon.errors.Require;
+import org.wardon.lots.StandIn.Figure;
 import org.wardon.produce.Commodity;
 import org.wardon.produce.Evidence;
 import org.wardon.produce.Fact;
 import org.wardon.produce.Ripeness;
 
 /**
- * Medians over the plant parts, for figures nobody printed.
+ * Medians over kindred commodities, for figures nobody printed.
  *
- * <p>Each figure is the median over those commodities of the part that have it of their own. A part
- * without any takes the figure of a kindred part (herbs that of leafy vegetables), else the median
- * over all commodities. All of it is (assumption): that a crop is like others of its part.
+ * <p>Each figure is the median over those that have it of their own: first over commodities of the
+ * same plant part and scientific name, else over the plant part, else over a kindred part (leafy
+ * vegetables for herbs), else over all commodities. All of it is (assumption): that a crop is like
+ * its kin.
  */
 public final class ClassValues {
     /** Source named where a class value stands in. */
     static final String SOURCE = "assumption";
 
+    private static final String ALL = "all";
     private static final Map<String, String> KINDRED = Map.of("herb", "leafy");
     private static final double[] RESPIRATION_C = {0, 5, 10, 15, 20, 25, 30};
 
+    /** Commodities that share something, and its name. */
+    private record Group(String name, List<Commodity> members) {}
+
+    private final Map<String, StandIn> byId;
     private final Map<String, StandIn> byPart;
     private final StandIn all;
 
-    private ClassValues(Map<String, StandIn> byPart, StandIn all) {
+    private ClassValues(Map<String, StandIn> byId, Map<String, StandIn> byPart, StandIn all) {
+        this.byId = Map.copyOf(byId);
         this.byPart = Map.copyOf(byPart);
         this.all = all;
     }
@@ -47,31 +57,52 @@ public final class ClassValues {
      */
     public static ClassValues of(Collection<Commodity> commodities) {
         Require.that(!commodities.isEmpty(), "class values need at least one commodity");
-        Map<String, List<Commodity>> parts =
-                commodities.stream().collect(Collectors.groupingBy(Commodity::plantPart));
+        Group all = new Group(ALL, List.copyOf(commodities));
+        Map<String, StandIn> bySpecies = new HashMap<>();
         Map<String, StandIn> byPart = new HashMap<>();
-        for (String part : parts.keySet()) {
-            byPart.put(
-                    part, over(List.of(members(parts, part), kindred(parts, part), commodities)));
+        Map<String, StandIn> byId = new HashMap<>();
+        for (Commodity one : commodities) {
+            String part = one.plantPart();
+            List<Group> wider = List.of(part(all, part), part(all, kindred(part)), all);
+            byPart.computeIfAbsent(part, key -> over(wider));
+            String species = species(one);
+            Group kin = new Group(species, matching(all, c -> kin(one, c)));
+            List<Group> groups = new ArrayList<>(wider);
+            groups.add(0, kin);
+            byId.put(
+                    one.id(), bySpecies.computeIfAbsent(species + " " + part, key -> over(groups)));
         }
-        return new ClassValues(byPart, over(List.of(commodities)));
+        return new ClassValues(byId, byPart, over(List.of(all)));
     }
 
-    private static Collection<Commodity> members(Map<String, List<Commodity>> parts, String part) {
-        return parts.getOrDefault(part, List.of());
+    private static Group part(Group all, String part) {
+        return new Group(part, matching(all, c -> c.plantPart().equals(part)));
     }
 
-    private static Collection<Commodity> kindred(Map<String, List<Commodity>> parts, String part) {
-        return members(parts, KINDRED.getOrDefault(part, part));
+    private static String kindred(String part) {
+        return KINDRED.getOrDefault(part, part);
     }
 
-    /** The values of a plant part; those of all commodities where the part is unknown. */
-    StandIn of(String plantPart) {
-        return byPart.getOrDefault(plantPart, all);
+    /** The scientific name stands last. */
+    private static String species(Commodity commodity) {
+        return commodity.names().get(commodity.names().size() - 1);
+    }
+
+    private static boolean kin(Commodity one, Commodity other) {
+        return one.plantPart().equals(other.plantPart()) && species(one).equals(species(other));
+    }
+
+    private static List<Commodity> matching(Group group, Predicate<Commodity> like) {
+        return group.members().stream().filter(like).toList();
+    }
+
+    /** What stands in for a commodity. */
+    StandIn of(Commodity commodity) {
+        return byId.getOrDefault(commodity.id(), byPart.getOrDefault(commodity.plantPart(), all));
     }
 
     /** Takes each figure from the first group that has it. */
-    private static StandIn over(List<Collection<Commodity>> groups) {
+    private static StandIn over(List<Group> groups) {
         return new StandIn(
                 first(groups, ClassValues::medianHeat, "composition"),
                 first(groups, ClassValues::medianSize, "size"),
@@ -79,15 +110,15 @@ public final class ClassValues {
                 first(groups, ClassValues::medianTranspiration, "transpiration coefficient"));
     }
 
-    private static <T> T first(
-            List<Collection<Commodity>> groups,
-            Function<Collection<Commodity>, Optional<T>> figure,
-            String what) {
-        return groups.stream()
-                .map(figure)
-                .flatMap(Optional::stream)
-                .findFirst()
-                .orElseThrow(() -> new IllegalArgumentException("no commodity has a " + what));
+    private static <T> Figure<T> first(
+            List<Group> groups, Function<Collection<Commodity>, Optional<T>> figure, String what) {
+        for (Group group : groups) {
+            Optional<T> found = figure.apply(group.members());
+            if (found.isPresent()) {
+                return new Figure<>(found.get(), group.name());
+            }
+        }
+        throw new IllegalArgumentException("no commodity has a " + what);
     }
 
     private static Optional<ItemHeat> medianHeat(Collection<Commodity> group) {

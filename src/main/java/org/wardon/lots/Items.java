@@ -31,7 +31,7 @@ public final class Items {
      * @return the item and what it rests on
      */
     public static WithReasons<Item> of(Commodity commodity, ClassValues classes) {
-        StandIn standIn = classes.of(commodity.plantPart());
+        StandIn standIn = classes.of(commodity);
         WithReasons<ItemHeat> heat =
                 ownHeat(commodity)
                         .map(
@@ -99,8 +99,7 @@ public final class Items {
     private static Optional<WithReasons<ItemSize>> unprintedSize(
             Commodity commodity, ItemHeat heat) {
         Optional<GeometryRow> row = geometry(commodity);
-        boolean leaf =
-                row.map(g -> g.shape().equals("leaf")).orElse(commodity.plantPart().equals("herb"));
+        boolean leaf = row.map(g -> g.shape().equals("leaf")).orElseGet(() -> leafy(commodity));
         if (leaf) {
             ItemSize thin = new ItemSize(Shape.SLAB, LEAF_M);
             return Optional.of(found(thin, "item-leaf-thickness", commodity.id(), "assumption"));
@@ -116,6 +115,11 @@ public final class Items {
                                                         "item-size-from-mass",
                                                         commodity.id(),
                                                         sizeSource(commodity))));
+    }
+
+    /** Herbs and what is named for its leaf, where no row says more. */
+    private static boolean leafy(Commodity commodity) {
+        return commodity.plantPart().equals("herb") || commodity.id().endsWith("-leaf");
     }
 
     private static Optional<Double> unitMass(Commodity commodity) {
@@ -157,13 +161,14 @@ public final class Items {
         return new WithReasons<>(value, List.of(Reason.about(code, id, sourceId)), false);
     }
 
-    private static <T> WithReasons<T> ofClass(T value, String code, Commodity commodity) {
+    private static <T> WithReasons<T> ofClass(
+            StandIn.Figure<T> figure, String code, Commodity commodity) {
         Reason reason =
                 Reason.about(
                         code,
                         commodity.id(),
                         ClassValues.SOURCE,
-                        Reason.Argument.text(commodity.plantPart()));
-        return new WithReasons<>(value, List.of(reason), true);
+                        Reason.Argument.text(figure.group()));
+        return new WithReasons<>(figure.value(), List.of(reason), true);
     }
 }

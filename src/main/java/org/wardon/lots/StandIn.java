@@ -4,7 +4,7 @@ import java.util.Map;
 import org.wardon.produce.Fact;
 
 /**
- * What stands in for figures nobody printed, the median over a plant part.
+ * What stands in for figures nobody printed.
  *
  * @param heat specific heat, conductivity and density
  * @param size shape and size
@@ -12,12 +12,16 @@ import org.wardon.produce.Fact;
  * @param transpirationKgPerKgSPa tissue to package air, kg/(kg s Pa)
  */
 record StandIn(
-        ItemHeat heat,
-        ItemSize size,
-        Map<Double, Fact> respiration,
-        double transpirationKgPerKgSPa) {
-    /** Copies the map. */
-    StandIn {
-        respiration = Map.copyOf(respiration);
-    }
+        Figure<ItemHeat> heat,
+        Figure<ItemSize> size,
+        Figure<Map<Double, Fact>> respiration,
+        Figure<Double> transpirationKgPerKgSPa) {
+    /**
+     * A median and whose it is.
+     *
+     * @param value the median
+     * @param group scientific name, plant part, or {@code all}
+     * @param <T> what it is of
+     */
+    record Figure<T>(T value, String group) {}
 }

@@ -12,8 +12,9 @@ import org.wardon.produce.rows.TranspirationRow;
  *
  * <p>Rule: a printed coefficient is skin and test film together, counted from saturation, and
  * stands alone; else the mean skin coefficient in series with the film of air in the package; else
- * the median of the plant part. The range is the printed skin range over its mean; × or ÷ 1.5 where
- * none is printed (assumption), × or ÷ 3 for a class value (assumption).
+ * a printed loss for each mbar of vapour pressure deficit, also counted from saturation; else the
+ * class. The range is the printed skin range over its mean; × or ÷ 1.5 for a coefficient without
+ * one, × or ÷ 2 for a loss, × or ÷ 3 for a class value (assumption).
  *
  * <p>Source: ASHRAE Handbook - Refrigeration 2006, chapter 9, 1/kt = 1/ks + 1/ka.
  */
@@ -21,7 +22,11 @@ public final class Transpirations {
     private static final double KG_PER_NG = 1e-12;
     private static final double KG_PER_UG = 1e-9;
     private static final double UNPRINTED_SPREAD = 1.5;
+    private static final double LOSS_SPREAD = 2;
     private static final double CLASS_SPREAD = 3;
+
+    /** One percent a day for each mbar, kg/(kg s Pa). */
+    private static final double KG_PER_PCT_DAY_MBAR = 0.01 / 86_400 / 100;
 
     /** A printed coefficient is defined on the saturation pressure at the produce's temperature. */
     private static final double SATURATED = 1;
@@ -31,6 +36,10 @@ public final class Transpirations {
 
     /** Low and high over the middle. */
     private record Spread(double low, double high) {
+        static Spread both(double factor) {
+            return new Spread(1 / factor, factor);
+        }
+
         double at(double share) {
             return share < 0.5 ? Math.pow(low, 1 - 2 * share) : Math.pow(high, 2 * share - 1);
         }
@@ -49,32 +58,51 @@ public final class Transpirations {
      */
     public static WithReasons<TranspirationLaw> of(
             Commodity commodity, Item item, ClassValues classes, double share) {
-        Optional<TranspirationRow> row = row(commodity);
-        double film = item.areaM2PerKg() * AirFilm.vapourKgPerSM2Pa(item);
-        double lowering =
-                row.flatMap(r -> r.vapourPressureLowering().stream().boxed().findFirst())
-                        .orElse(USUAL_LOWERING);
-        if (row.isEmpty()) {
-            double middle = classes.of(commodity.plantPart()).transpirationKgPerKgSPa();
-            double factor = new Spread(1 / CLASS_SPREAD, CLASS_SPREAD).at(share);
-            return new WithReasons<>(
-                    new TranspirationLaw(middle * factor, lowering, film),
-                    List.of(
-                            Reason.about(
-                                    "transpiration-class",
-                                    commodity.id(),
-                                    ClassValues.SOURCE,
-                                    Reason.Argument.text(commodity.plantPart()),
-                                    Reason.Argument.of(CLASS_SPREAD, "1"))),
-                    true);
-        }
-        return printed(commodity.id(), row.get(), item, lowering, share);
+        return own(commodity, item, share)
+                .orElseGet(() -> ofClass(commodity, item, classes, share));
+    }
+
+    private static Optional<WithReasons<TranspirationLaw>> own(
+            Commodity commodity, Item item, double share) {
+        return row(commodity)
+                .map(row -> printed(commodity.id(), row, item, share))
+                .or(() -> loss(commodity).map(loss -> ofLoss(commodity.id(), loss, item, share)));
+    }
+
+    private static WithReasons<TranspirationLaw> ofClass(
+            Commodity commodity, Item item, ClassValues classes, double share) {
+        StandIn.Figure<Double> middle = classes.of(commodity).transpirationKgPerKgSPa();
+        Reason reason =
+                Reason.about(
+                        "transpiration-class",
+                        commodity.id(),
+                        ClassValues.SOURCE,
+                        Reason.Argument.text(middle.group()),
+                        Reason.Argument.of(CLASS_SPREAD, "1"));
+        double conductance = middle.value() * Spread.both(CLASS_SPREAD).at(share);
+        return new WithReasons<>(
+                new TranspirationLaw(conductance, USUAL_LOWERING, film(item)),
+                List.of(reason),
+                true);
+    }
+
+    private static WithReasons<TranspirationLaw> ofLoss(
+            String id, Fact loss, Item item, double share) {
+        double conductance = loss.middle() * KG_PER_PCT_DAY_MBAR;
+        return new WithReasons<>(
+                new TranspirationLaw(
+                        conductance * Spread.both(LOSS_SPREAD).at(share), SATURATED, film(item)),
+                List.of(Reason.about("transpiration-loss", id, loss.sourceId())),
+                false);
+    }
+
+    private static double film(Item item) {
+        return item.areaM2PerKg() * AirFilm.vapourKgPerSM2Pa(item);
     }
 
     private static WithReasons<TranspirationLaw> printed(
-            String id, TranspirationRow row, Item item, double lowering, double share) {
-        double area = item.areaM2PerKg();
-        double film = area * AirFilm.vapourKgPerSM2Pa(item);
+            String id, TranspirationRow row, Item item, double share) {
+        double film = film(item);
         double factor = spread(row).at(share);
         if (row.coefficient().isPresent()) {
             Fact whole = row.coefficient().get();
@@ -83,7 +111,8 @@ public final class Transpirations {
                     List.of(Reason.about("transpiration-coefficient", id, whole.sourceId())),
                     false);
         }
-        double skin = area * skinMean(row) * KG_PER_UG * factor;
+        double lowering = row.vapourPressureLowering().orElse(USUAL_LOWERING);
+        double skin = item.areaM2PerKg() * skinMean(row) * KG_PER_UG * factor;
         String source = row.skin().map(Fact::sourceId).orElse(ClassValues.SOURCE);
         return new WithReasons<>(
                 new TranspirationLaw(inSeries(skin, film), lowering, film),
@@ -104,16 +133,29 @@ public final class Transpirations {
 
     /** The conductance in the middle of a commodity's own range, empty where nobody measured. */
     static Optional<Double> ownMiddle(Commodity commodity) {
-        return row(commodity).flatMap(row -> ownMiddle(commodity, row));
+        Optional<Double> coefficient =
+                row(commodity)
+                        .flatMap(TranspirationRow::coefficient)
+                        .map(ng -> ng.middle() * KG_PER_NG);
+        return coefficient
+                .or(() -> ownSkin(commodity))
+                .or(() -> loss(commodity).map(loss -> loss.middle() * KG_PER_PCT_DAY_MBAR));
     }
 
-    private static Optional<Double> ownMiddle(Commodity commodity, TranspirationRow row) {
-        if (row.coefficient().isPresent()) {
-            return Optional.of(row.coefficient().get().middle() * KG_PER_NG);
-        }
-        return Items.printed(commodity)
-                .map(item -> printed(commodity.id(), row, item, USUAL_LOWERING, 0.5))
+    private static Optional<Double> ownSkin(Commodity commodity) {
+        return row(commodity)
+                .flatMap(
+                        row ->
+                                Items.printed(commodity)
+                                        .map(item -> printed(commodity.id(), row, item, 0.5)))
                 .map(law -> law.value().conductanceKgPerKgSPa());
+    }
+
+    private static Optional<Fact> loss(Commodity commodity) {
+        return commodity.water().losses().stream()
+                .flatMap(row -> row.loss().stream())
+                .filter(fact -> fact.unit().equals("pct_per_day_per_mbar"))
+                .findFirst();
     }
 
     private static Optional<TranspirationRow> row(Commodity commodity) {
@@ -132,7 +174,7 @@ public final class Transpirations {
 
     private static Spread spread(TranspirationRow row) {
         if (row.skin().isEmpty() || row.skin().get().lowest() >= row.skin().get().highest()) {
-            return new Spread(1 / UNPRINTED_SPREAD, UNPRINTED_SPREAD);
+            return Spread.both(UNPRINTED_SPREAD);
         }
         double mean = skinMean(row);
         Fact skin = row.skin().get();

@@ -28,7 +28,7 @@ import org.wardon.produce.rows.TranspirationRow;
  * the tables are read).
  *
  * @param id id of the tables
- * @param names common name first, then the scientific one and others
+ * @param names common name first, then what people call it, the scientific name last
  * @param plantPart {@code fruit}, {@code leafy}, {@code root} and the like
  * @param climacteric whether the fruit ripens by itself after harvest
  * @param needs the handbook's condition, life and classes

@@ -99,7 +99,7 @@ class RespirationCurveTest {
         assertTrue(found.ofClass());
         assertEquals("respiration-class", found.restsOn().get(0).code());
         assertEquals(apple.wattsPerKg(10), found.value().wattsPerKg(10), 1e-12);
-        assertEquals(2 * apple.wattsPerKg(10), found.value().fresh().wattsPerKg(10), 1e-12);
+        assertEquals(3 * apple.wattsPerKg(10), found.value().fresh().wattsPerKg(10), 1e-12);
     }
 
     @Source("10.7 J per mg of CO2, Becker, Misra and Fricke 1996; stoichiometry of glucose")
