@@ -1,5 +1,6 @@
 package org.wardon.plan;
 
+import java.util.List;
 import org.wardon.enclosure.FaceName;
 
 /** Every value that stands in where a plan is silent, with what it rests on. */
@@ -114,10 +115,32 @@ public final class Defaults {
     /** Number the draws start from. */
     public static final long SEED = 1;
 
+    private static final List<String> LOOSE = List.of("straw", "thatch", "bamboo");
+    private static final double INSULATES_BELOW_WMK = 0.06;
     private static final double ZERO_C_IN_K = 273.15;
     private static final double AIR_HEAT_J_M3K = 1.2 * 1006;
 
     private Defaults() {}
+
+    /**
+     * Returns whether a material makes a loose, leaky wall (assumption).
+     *
+     * @param materialId its id
+     * @return true for straw, thatch and bamboo
+     */
+    public static boolean looseBuild(String materialId) {
+        return LOOSE.stream().anyMatch(materialId::contains);
+    }
+
+    /**
+     * Returns whether a layer makes its wall an insulated, closed one (assumption).
+     *
+     * @param conductivityWmK its conductivity, W/(m K)
+     * @return true below 0.06
+     */
+    public static boolean insulates(double conductivityWmK) {
+        return conductivityWmK < INSULATES_BELOW_WMK;
+    }
 
     /**
      * Returns the compass direction a face looks to.

@@ -1,0 +1,144 @@
+package org.wardon.files;
+
+import java.time.LocalDate;
+import java.util.List;
+import java.util.Optional;
+import org.wardon.cooling.Cooler;
+import org.wardon.cooling.Setting;
+import org.wardon.enclosure.Box;
+import org.wardon.enclosure.Enclosure;
+import org.wardon.enclosure.Face;
+import org.wardon.enclosure.Gains;
+import org.wardon.files.json.Part;
+import org.wardon.plan.ChamberPlan;
+import org.wardon.plan.Corrections;
+import org.wardon.plan.Default;
+import org.wardon.plan.Defaults;
+import org.wardon.plan.OutagePlan;
+import org.wardon.plan.StartAir;
+
+/** Turns the chambers of a checked plan into records. */
+final class ChamberBinder {
+    private static final double MOST_KG = 1e7;
+
+    private final Inputs inputs;
+    private final FaceBinder faceBinder;
+    private final DoorBinder doorBinder;
+
+    ChamberBinder(Part buildUps, Lookups lookups, Inputs inputs) {
+        this.inputs = inputs;
+        this.faceBinder = new FaceBinder(buildUps, lookups, inputs);
+        this.doorBinder = new DoorBinder(lookups, inputs);
+    }
+
+    ChamberPlan bind(Part chamber) {
+        Box box =
+                new Box(
+                        inputs.number(chamber, "lengthM"),
+                        inputs.number(chamber, "widthM"),
+                        inputs.number(chamber, "heightM"));
+        Enclosure enclosure = enclosure(chamber, box);
+        CompressorBinder compressors = new CompressorBinder(inputs);
+        List<Cooler> coolers =
+                chamber.at("cooling").items().stream().<Cooler>map(compressors::bind).toList();
+        return new ChamberPlan(
+                inputs.text(chamber, "id"),
+                enclosure,
+                coolers,
+                setting(chamber.at("setting")),
+                capacityKg(chamber, box),
+                outages(chamber),
+                inputs.numberElse(chamber, "humidifierKgH", 0),
+                inputs.numberElse(chamber, "heaterW", 0),
+                starts(chamber.at("starts")),
+                corrections(chamber.at("corrections")));
+    }
+
+    private Enclosure enclosure(Part chamber, Box box) {
+        List<Face> faces = chamber.at("faces").items().stream().map(faceBinder::bind).toList();
+        Default leakage = leakage(faces);
+        return new Enclosure(
+                box,
+                faces,
+                inputs.number(chamber, "thermalBridgePct", Defaults.THERMAL_BRIDGE_PCT),
+                chamber.has("door")
+                        ? Optional.of(doorBinder.bind(chamber.at("door")))
+                        : Optional.empty(),
+                inputs.number(chamber, "leakageAirChangesPerDay", leakage),
+                inputs.numberElse(chamber, "freshAirM3PerHour", 0),
+                gains(chamber.at("gains")),
+                inputs.numberElse(chamber, "structureCapacityJK", 0),
+                chamber.at("films").text().equals(Optional.of("computed")));
+    }
+
+    private static Default leakage(List<Face> faces) {
+        boolean loose = false;
+        boolean insulated = false;
+        for (Face face : faces) {
+            if (!face.level()) {
+                loose |= face.layers().stream().anyMatch(l -> Defaults.looseBuild(l.material()));
+                insulated |=
+                        face.layers().stream()
+                                .anyMatch(l -> Defaults.insulates(l.conductivityWmK()));
+            }
+        }
+        if (loose) {
+            return Defaults.LEAKAGE_LOOSE;
+        }
+        return insulated ? Defaults.LEAKAGE_PANEL : Defaults.LEAKAGE_MASONRY;
+    }
+
+    private Gains gains(Part gains) {
+        double peopleHours = inputs.numberElse(gains, "peopleHoursPerDay", 0);
+        return new Gains(
+                inputs.numberElse(gains, "lightsW", 0),
+                inputs.numberElse(gains, "lightsHoursPerDay", Math.min(peopleHours, 24)),
+                peopleHours,
+                inputs.numberElse(gains, "fansW", 0));
+    }
+
+    private Setting setting(Part setting) {
+        return new Setting(
+                inputs.number(setting, "temperatureC"),
+                inputs.number(setting, "bandK", Defaults.BAND_K),
+                inputs.number(setting, "humidityPct", Defaults.HUMIDITY_PCT));
+    }
+
+    private double capacityKg(Part chamber, Box box) {
+        double usual = Defaults.STOWAGE_KG_M3.value() * box.volumeM3();
+        return inputs.number(
+                chamber,
+                "capacityKg",
+                Math.min(Math.max(usual, 1), MOST_KG),
+                "kg",
+                Defaults.STOWAGE_KG_M3.mark());
+    }
+
+    private List<OutagePlan> outages(Part chamber) {
+        return chamber.at("outages").items().stream()
+                .map(
+                        outage ->
+                                new OutagePlan(
+                                        inputs.time(outage, "from").orElseThrow(),
+                                        inputs.number(outage, "hours")))
+                .toList();
+    }
+
+    private Optional<StartAir> starts(Part starts) {
+        return starts.given()
+                ? Optional.of(
+                        new StartAir(
+                                inputs.number(starts, "temperatureC"),
+                                inputs.maybe(starts, "humidityPct")))
+                : Optional.empty();
+    }
+
+    private Corrections corrections(Part part) {
+        return new Corrections(
+                inputs.numberElse(part, "wallFactor", 1),
+                inputs.numberElse(part, "exchangeFactor", 1),
+                inputs.numberElse(part, "capacityFactor", 1),
+                inputs.numberElse(part, "thermostatOffsetK", 0),
+                part.at("since").text().map(LocalDate::parse));
+    }
+}

@@ -1,0 +1,237 @@
+package org.wardon.files;
+
+import java.time.LocalDateTime;
+import java.time.LocalTime;
+import java.util.ArrayList;
+import java.util.HashMap;
+import java.util.List;
+import java.util.Map;
+import java.util.Optional;
+import java.util.OptionalDouble;
+import java.util.Set;
+import java.util.stream.Collectors;
+import org.wardon.files.json.Faults;
+import org.wardon.files.json.Json;
+import org.wardon.files.json.Part;
+import org.wardon.plan.Defaults;
+
+/** What the schema cannot say of chambers: what names what, what comes before what. */
+final class ChamberRules {
+    private static final List<String> FACES =
+            List.of("roof", "floor", "north", "east", "south", "west");
+
+    private final Part plan;
+    private final Lookups lookups;
+    private final Faults faults;
+    private final IdRules ids;
+    private final Set<String> chamberIds;
+
+    ChamberRules(Part plan, Lookups lookups, Faults faults) {
+        this.plan = plan;
+        this.lookups = lookups;
+        this.faults = faults;
+        this.ids = new IdRules(faults);
+        this.chamberIds = chamberIds(plan);
+    }
+
+    static Set<String> chamberIds(Part plan) {
+        return plan.at("chambers").items().stream()
+                .flatMap(chamber -> chamber.at("id").text().stream())
+                .collect(Collectors.toSet());
+    }
+
+    void check() {
+        for (String name : plan.at("buildUps").names()) {
+            plan.at("buildUps").at(name).at("layers").items().forEach(this::layer);
+        }
+        List<Part> chambers = plan.at("chambers").items();
+        ids.unique(chambers, "chamber");
+        for (Part chamber : chambers) {
+            faces(chamber);
+            if (chamber.has("door")) {
+                door(chamber);
+            }
+            outages(chamber);
+        }
+    }
+
+    private void faces(Part chamber) {
+        Part faces = chamber.at("faces");
+        boolean misread = false;
+        Map<String, String> seen = new HashMap<>();
+        for (Part face : faces.items()) {
+            Part name = face.at("face");
+            misread |= name.text().isEmpty() || faults.at(name.path());
+            name.text().ifPresent(word -> once(word, face, seen));
+            ids.known(face.at("buildUp"), plan.at("buildUps").names(), "build-up of this plan");
+            face.at("layers").items().forEach(this::layer);
+            beyond(face.at("beyond"), chamber);
+            if (name.text().equals(Optional.of("floor"))) {
+                floor(face.at("beyond"));
+            }
+        }
+        List<String> missing = FACES.stream().filter(name -> !seen.containsKey(name)).toList();
+        if (!missing.isEmpty() && !misread && !faces.items().isEmpty()) {
+            faults.add(
+                    faces.path(),
+                    "lacks " + String.join(", ", missing),
+                    "accepted: all six of " + String.join(", ", FACES));
+        } else if (faces.given() && faces.items().isEmpty()) {
+            faults.add(
+                    faces.path(), "is empty", "accepted: all six of " + String.join(", ", FACES));
+        }
+    }
+
+    private void once(String word, Part face, Map<String, String> seen) {
+        String first = seen.putIfAbsent(word, face.path());
+        if (first != null) {
+            faults.add(
+                    face.at("face").path(),
+                    "is " + Json.quoted(word) + ", as " + first + " is too",
+                    "accepted: each face once");
+        }
+    }
+
+    private void floor(Part beyond) {
+        if (beyond.text().equals(Optional.of("outdoors"))) {
+            faults.add(
+                    beyond.path(),
+                    "is 'outdoors' under a floor",
+                    "accepted: ground, shade, {\"spaceC\": 22}, {\"spaceAboveOutdoorK\": 3} or"
+                            + " {\"chamber\": \"south\"}");
+        }
+    }
+
+    private void beyond(Part beyond, Part chamber) {
+        Part other = beyond.at("chamber");
+        if (other.text().isPresent() && other.text().equals(chamber.at("id").text())) {
+            faults.add(
+                    other.path(),
+                    "is " + Json.quoted(other.text().get()) + ", the chamber itself",
+                    "accepted: another chamber of the plan");
+        } else {
+            ids.known(other, chamberIds, "chamber of this plan");
+        }
+    }
+
+    private void layer(Part layer) {
+        Part material = layer.at("material");
+        ids.known(material, lookups.materials().keySet(), "material of the tables");
+        Material row = material.text().map(lookups.materials()::get).orElse(null);
+        if (row == null || faults.at(layer.path())) {
+            return;
+        }
+        List<String> unknown = new ArrayList<>();
+        boolean resistance = row.resistanceM2KW().isPresent();
+        lacks(layer, "conductivityWmK", row.conductivityWmK(), resistance, unknown);
+        lacks(layer, "densityKgM3", row.densityKgM3(), resistance, unknown);
+        lacks(layer, "specificHeatJkgK", row.specificHeatJkgK(), resistance, unknown);
+        if (!unknown.isEmpty()) {
+            faults.add(
+                    layer.path(),
+                    "the tables have no " + String.join(", ", unknown) + " of '" + row.id() + "'",
+                    "accepted: " + String.join(", ", unknown) + " given beside the material");
+        }
+    }
+
+    private static void lacks(
+            Part layer, String name, OptionalDouble value, boolean resistance, List<String> out) {
+        if (value.isEmpty() && !resistance && !layer.has(name)) {
+            out.add(name);
+        }
+    }
+
+    private void door(Part chamber) {
+        Part door = chamber.at("door");
+        beyond(door.at("beyond"), chamber);
+        ids.known(
+                door.at("protection"),
+                lookups.protections().keySet(),
+                "protection of a door with a figure in the tables");
+        if (door.at("beyond").text().equals(Optional.of("ground"))) {
+            faults.add(
+                    door.at("beyond").path(),
+                    "is 'ground' behind a door",
+                    "accepted: outdoors, shade, {\"spaceC\": 22}, {\"spaceAboveOutdoorK\": 3} or"
+                            + " {\"chamber\": \"south\"}");
+        }
+        hours(door);
+        fits(door.at("heightM"), chamber.at("heightM"), "higher");
+        Part longest =
+                chamber.at("lengthM").number().orElse(0) < chamber.at("widthM").number().orElse(0)
+                        ? chamber.at("widthM")
+                        : chamber.at("lengthM");
+        fits(door.at("widthM"), longest, "wider");
+    }
+
+    private void fits(Part of, Part within, String how) {
+        boolean known =
+                of.number().isPresent()
+                        && within.number().isPresent()
+                        && !faults.at(of.path())
+                        && !faults.at(within.path());
+        if (known && of.number().getAsDouble() > within.number().getAsDouble()) {
+            faults.add(
+                    of.path(),
+                    "is "
+                            + of.json().orElseThrow().shown()
+                            + " m, "
+                            + how
+                            + " than the chamber's "
+                            + within.json().orElseThrow().shown()
+                            + " m",
+                    "accepted: up to " + within.json().orElseThrow().shown() + " m");
+        }
+    }
+
+    private void hours(Part door) {
+        if (faults.at(door.at("from").path()) || faults.at(door.at("to").path())) {
+            return;
+        }
+        String from = door.at("from").text().orElse(Defaults.DOOR_FROM);
+        String to = door.at("to").text().orElse(Defaults.DOOR_TO);
+        if (!LocalTime.parse(from).isBefore(LocalTime.parse(to))) {
+            faults.add(
+                    door.at(door.has("to") ? "to" : "from").path(),
+                    "the door is used from " + from + " to " + to,
+                    "accepted: a later hour of the same day for to, 23:59 at most");
+        }
+    }
+
+    private void outages(Part chamber) {
+        Optional<LocalDateTime> from = Times.at(plan.at("from"));
+        Optional<LocalDateTime> end = Times.end(plan);
+        LocalDateTime last = LocalDateTime.MIN;
+        for (Part outage : chamber.at("outages").items()) {
+            Optional<LocalDateTime> at = Times.at(outage.at("from"));
+            OptionalDouble hours = outage.at("hours").number();
+            if (at.isEmpty() || hours.isEmpty() || faults.at(outage.path())) {
+                continue;
+            }
+            LocalDateTime to = Times.plusHours(at.get(), hours.getAsDouble());
+            if (at.get().isBefore(last)) {
+                faults.add(
+                        outage.at("from").path(),
+                        "is " + at.get() + ", before the outage above has ended at " + last,
+                        "accepted: outages in order, none overlapping");
+            }
+            if (end.isPresent() && !at.get().isBefore(end.get())) {
+                outside(outage, "is " + at.get() + ", after the plan has ended", from, end);
+            } else if (from.isPresent() && !to.isAfter(from.get())) {
+                outside(outage, "ends at " + to + ", before the plan begins", from, end);
+            }
+            last = to.isAfter(last) ? to : last;
+        }
+    }
+
+    private void outside(
+            Part outage, String what, Optional<LocalDateTime> from, Optional<LocalDateTime> end) {
+        faults.add(
+                outage.at("from").path(),
+                what,
+                "accepted: hours between "
+                        + from.map(LocalDateTime::toString).orElse("from")
+                        + " and "
+                        + end.map(LocalDateTime::toString).orElse("the end"));
+    }
+}

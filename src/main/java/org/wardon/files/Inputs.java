@@ -1,0 +1,81 @@
+package org.wardon.files;
+
+import java.time.LocalDateTime;
+import java.util.LinkedHashSet;
+import java.util.List;
+import java.util.Optional;
+import java.util.OptionalDouble;
+import java.util.Set;
+import org.wardon.files.json.Json;
+import org.wardon.files.json.Part;
+import org.wardon.plan.Assumed;
+import org.wardon.plan.Default;
+
+/** Takes values from a checked plan and notes each default it puts in. */
+final class Inputs {
+    private final Set<Assumed> assumed = new LinkedHashSet<>();
+
+    List<Assumed> assumed() {
+        return List.copyOf(assumed);
+    }
+
+    double number(Part owner, String name) {
+        return owner.at(name).number().orElseThrow();
+    }
+
+    OptionalDouble maybe(Part owner, String name) {
+        return owner.at(name).number();
+    }
+
+    /** Returns the number, or the default, which is then told. */
+    double number(Part owner, String name, Default otherwise) {
+        return number(owner, name, otherwise.value(), otherwise.unit(), otherwise.mark());
+    }
+
+    /** Returns the number, or one worked out, which is then told. */
+    double number(Part owner, String name, double otherwise, String unit, String mark) {
+        OptionalDouble given = owner.at(name).number();
+        if (given.isPresent()) {
+            return given.getAsDouble();
+        }
+        note(owner, name, plain(otherwise), unit, mark);
+        return otherwise;
+    }
+
+    /** Returns the number, or what its absence plainly means, which needs no telling. */
+    double numberElse(Part owner, String name, double otherwise) {
+        return owner.at(name).number().orElse(otherwise);
+    }
+
+    String text(Part owner, String name) {
+        return owner.at(name).text().orElseThrow();
+    }
+
+    /** Returns the text, or the default, which is then told. */
+    String text(Part owner, String name, String otherwise, String mark) {
+        Optional<String> given = owner.at(name).text();
+        if (given.isEmpty()) {
+            note(owner, name, otherwise, "", mark);
+        }
+        return given.orElse(otherwise);
+    }
+
+    boolean flag(Part owner, String name) {
+        return owner.at(name).flag().orElse(false);
+    }
+
+    Optional<LocalDateTime> time(Part owner, String name) {
+        return owner.at(name).text().map(LocalDateTime::parse);
+    }
+
+    void note(Part owner, String name, String value, String unit, String mark) {
+        assumed.add(new Assumed(Json.member(owner.path(), name), value, unit, mark));
+    }
+
+    static String plain(double value) {
+        double rounded = Math.rint(value * 1e4) / 1e4;
+        return rounded == Math.rint(rounded)
+                ? String.valueOf(Math.round(rounded))
+                : String.valueOf(rounded);
+    }
+}

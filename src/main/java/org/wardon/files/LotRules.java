@@ -1,0 +1,130 @@
+package org.wardon.files;
+
+import java.time.LocalDateTime;
+import java.util.List;
+import java.util.Optional;
+import java.util.Set;
+import org.wardon.files.json.Faults;
+import org.wardon.files.json.Part;
+import org.wardon.plan.Defaults;
+
+/** What the schema cannot say of lots: what names what, what comes before what. */
+final class LotRules {
+    private final Part plan;
+    private final Lookups lookups;
+    private final Faults faults;
+    private final IdRules ids;
+    private final Set<String> chamberIds;
+
+    LotRules(Part plan, Lookups lookups, Faults faults) {
+        this.plan = plan;
+        this.lookups = lookups;
+        this.faults = faults;
+        this.ids = new IdRules(faults);
+        this.chamberIds = ChamberRules.chamberIds(plan);
+    }
+
+    void check() {
+        List<Part> lots = plan.at("lots").items();
+        ids.unique(lots, "lot");
+        for (Part lot : lots) {
+            ids.known(lot.at("commodity"), lookups.commodities(), "commodity of the tables");
+            ids.known(
+                    lot.at("package"),
+                    lookups.packages(),
+                    "package with a half-cooling time in the tables");
+            ids.known(lot.at("chamber"), chamberIds, "chamber of this plan");
+            stay(lot);
+        }
+    }
+
+    private void stay(Part lot) {
+        Optional<LocalDateTime> from = Times.at(plan.at("from"));
+        Part arrivesAt = lot.at("arrives");
+        Optional<LocalDateTime> arrives = arrivesAt.given() ? Times.at(arrivesAt) : from;
+        if (arrives.isEmpty()) {
+            return;
+        }
+        harvested(lot, arrives.get());
+        Optional<LocalDateTime> end = Times.end(plan);
+        if (end.isPresent() && arrivesAt.given() && !arrives.get().isBefore(end.get())) {
+            faults.add(
+                    arrivesAt.path(),
+                    "is " + arrives.get() + ", when the plan has ended",
+                    "accepted: before " + end.get());
+        }
+        Optional<LocalDateTime> leaves = leaves(lot, arrives.get());
+        if (leaves.isPresent()) {
+            leaving(lot, arrives.get(), leaves.get(), from);
+        }
+        moves(lot, arrives.get(), leaves);
+    }
+
+    private void harvested(Part lot, LocalDateTime arrives) {
+        Part harvested = lot.at("harvested");
+        Optional<LocalDateTime> time = Times.at(harvested);
+        if (time.isPresent() && time.get().isAfter(arrives)) {
+            faults.add(
+                    harvested.path(),
+                    "is " + time.get() + ", after the lot arrives at " + arrives,
+                    "accepted: a time up to its arrival");
+        }
+    }
+
+    private Optional<LocalDateTime> leaves(Part lot, LocalDateTime arrives) {
+        if (lot.has("leaves")) {
+            return Times.at(lot.at("leaves"));
+        }
+        if (faults.at(lot.at("wantedDays").path())) {
+            return Optional.empty();
+        }
+        double days = lot.at("wantedDays").number().orElse(Defaults.WANTED_DAYS.value());
+        return Optional.of(Times.plusDays(arrives, days));
+    }
+
+    private void leaving(
+            Part lot, LocalDateTime arrives, LocalDateTime leaves, Optional<LocalDateTime> from) {
+        Part by = lot.at(lot.has("leaves") ? "leaves" : "wantedDays");
+        if (!leaves.isAfter(arrives)) {
+            faults.add(
+                    by.path(),
+                    "the lot leaves at " + leaves + " and arrives at " + arrives,
+                    "accepted: leaving after arriving");
+        } else if (from.isPresent() && !leaves.isAfter(from.get())) {
+            faults.add(
+                    by.path(),
+                    "the lot leaves at " + leaves + ", before the plan begins",
+                    "accepted: leaving after " + from.get());
+        }
+    }
+
+    private void moves(Part lot, LocalDateTime arrives, Optional<LocalDateTime> leaves) {
+        Part moves = lot.at("moves");
+        if (!moves.items().isEmpty() && !lot.has("chamber")) {
+            faults.add(
+                    moves.path(),
+                    "the lot moves but has no chamber to start from",
+                    "accepted: chamber given too");
+        }
+        LocalDateTime last = arrives;
+        for (Part move : moves.items()) {
+            ids.known(move.at("to"), chamberIds, "chamber of this plan");
+            Optional<LocalDateTime> at = Times.at(move.at("at"));
+            if (at.isEmpty()) {
+                continue;
+            }
+            if (!at.get().isAfter(last)) {
+                faults.add(
+                        move.at("at").path(),
+                        "is " + at.get() + ", not after " + last,
+                        "accepted: moves in order, after the lot arrives");
+            } else if (leaves.isPresent() && !at.get().isBefore(leaves.get())) {
+                faults.add(
+                        move.at("at").path(),
+                        "is " + at.get() + ", when the lot has left at " + leaves.get(),
+                        "accepted: moves before the lot leaves");
+            }
+            last = at.get();
+        }
+    }
+}

@@ -1,0 +1,76 @@
+package org.wardon.files;
+
+import java.time.LocalDateTime;
+import java.time.ZoneId;
+import java.util.List;
+import org.wardon.air.Site;
+import org.wardon.files.json.Part;
+import org.wardon.plan.ChamberPlan;
+import org.wardon.plan.Defaults;
+import org.wardon.plan.EthyleneAround;
+import org.wardon.plan.LotPlan;
+import org.wardon.plan.Prices;
+import org.wardon.plan.StorePlan;
+import org.wardon.plan.WeatherSource;
+import org.wardon.plan.WithoutChamber;
+
+/** Turns a checked plan into records. */
+final class PlanBinder {
+    private final Part plan;
+    private final Lookups lookups;
+    private final Inputs inputs = new Inputs();
+
+    PlanBinder(Part plan, Lookups lookups) {
+        this.plan = plan;
+        this.lookups = lookups;
+    }
+
+    StorePlan bind(WeatherSource weather, String fileName) {
+        LocalDateTime from = inputs.time(plan, "from").orElseThrow();
+        Site site = site();
+        ChamberBinder chamberBinder = new ChamberBinder(plan.at("buildUps"), lookups, inputs);
+        List<ChamberPlan> chambers =
+                plan.at("chambers").items().stream().map(chamberBinder::bind).toList();
+        LotBinder lotBinder = new LotBinder(from, inputs);
+        List<LotPlan> lots = plan.at("lots").items().stream().map(lotBinder::bind).toList();
+        Prices prices =
+                new Prices(
+                        plan.at("currency").text().orElse(""),
+                        inputs.number(plan, "energyPricePerKWh", Defaults.ENERGY_PRICE_PER_KWH));
+        EthyleneAround ethylene =
+                new EthyleneAround(
+                        inputs.number(plan, "outdoorEthylenePpm", Defaults.OUTDOOR_ETHYLENE_PPM),
+                        inputs.number(plan, "marketEthylenePpm", Defaults.MARKET_ETHYLENE_PPM));
+        return new StorePlan(
+                plan.at("name").text().orElse(fileName),
+                site,
+                weather,
+                from,
+                inputs.number(plan, "days"),
+                chambers,
+                lots,
+                without(),
+                (long) inputs.numberElse(plan, "seed", Defaults.SEED),
+                prices,
+                ethylene,
+                inputs.assumed());
+    }
+
+    private Site site() {
+        Part site = plan.at("site");
+        return new Site(
+                inputs.number(site, "latitudeDeg"),
+                inputs.number(site, "longitudeDeg"),
+                inputs.number(site, "elevationM", Defaults.ELEVATION_M),
+                ZoneId.of(inputs.text(site, "zone")));
+    }
+
+    private WithoutChamber without() {
+        Part without = plan.at("withoutChamber");
+        if (!without.has("temperatureC")) {
+            return new WithoutChamber.Shade();
+        }
+        return new WithoutChamber.Steady(
+                inputs.number(without, "temperatureC"), inputs.number(without, "humidityPct"));
+    }
+}

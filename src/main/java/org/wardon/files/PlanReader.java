@@ -1,0 +1,68 @@
+package org.wardon.files;
+
+import java.nio.file.Path;
+import java.util.Optional;
+import org.wardon.errors.BadInput;
+import org.wardon.files.json.Faults;
+import org.wardon.files.json.Json;
+import org.wardon.files.json.JsonText;
+import org.wardon.files.json.Part;
+import org.wardon.files.json.SchemaCheck;
+import org.wardon.plan.StorePlan;
+import org.wardon.plan.WeatherSource;
+
+/**
+ * Reads a store plan strictly. Every fault is told at once, each mistake once: what is no JSON,
+ * names and values the schema does not accept, ids that name nothing, times that cannot be, and the
+ * faults of the weather file.
+ */
+public final class PlanReader {
+    /** Largest plan read, MB. */
+    public static final int LARGEST_MB = 20;
+
+    private PlanReader() {}
+
+    /**
+     * Reads a plan and the weather it names.
+     *
+     * @param file the plan
+     * @param lookups the ids of the tables
+     * @return the plan, with every default put in and listed
+     * @throws BadInput with every fault
+     */
+    public static StorePlan read(Path file, Lookups lookups) {
+        String shown = file.toString();
+        Faults faults = new Faults(shown);
+        String text = TextFile.read(file, shown, LARGEST_MB);
+        Optional<Json> json = JsonText.read(text, faults);
+        if (json.isPresent()) {
+            new SchemaCheck(Schema.tree(), faults).check(json.get());
+        }
+        if (json.isEmpty() || !(json.get() instanceof Json.Obj)) {
+            faults.refuseIfAny();
+        }
+        Part plan = Part.root(json.orElseThrow());
+        Optional<WeatherSource> weather = PlanWeather.read(plan, file, faults);
+        new ChamberRules(plan, lookups, faults).check();
+        new LotRules(plan, lookups, faults).check();
+        faults.refuseIfAny();
+        return bound(plan, weather.orElseThrow(), lookups, file);
+    }
+
+    private static StorePlan bound(Part plan, WeatherSource weather, Lookups lookups, Path file) {
+        try {
+            return new PlanBinder(plan, lookups).bind(weather, nameOf(file));
+        } catch (IllegalArgumentException e) {
+            // The records hold the schema's bounds too; what slips past it still ends as a fault.
+            throw new BadInput(
+                    file.toString(),
+                    "$",
+                    String.valueOf(e.getMessage()),
+                    "accepted: see the schema");
+        }
+    }
+
+    private static String nameOf(Path file) {
+        return String.valueOf(file.getFileName()).replaceFirst("\\.[^.]*$", "");
+    }
+}

@@ -1,0 +1,77 @@
+package org.wardon.files;
+
+import de.siegmar.fastcsv.reader.CommentStrategy;
+import de.siegmar.fastcsv.reader.CsvReader;
+import de.siegmar.fastcsv.reader.NamedCsvRecord;
+import java.io.IOException;
+import java.io.UncheckedIOException;
+import java.nio.file.Path;
+import java.util.HashMap;
+import java.util.HashSet;
+import java.util.List;
+import java.util.Map;
+import java.util.OptionalDouble;
+import java.util.Set;
+
+/** The ids of the tables we carry, read straight from their CSV files. */
+public final class TableLookups {
+    private static final Path TABLES = Path.of("reference-tables");
+
+    private TableLookups() {}
+
+    public static Lookups read() {
+        Set<String> commodities = new HashSet<>();
+        rows("crops/commodities.csv").forEach(row -> commodities.add(row.getField("commodity_id")));
+        Set<String> packages = new HashSet<>();
+        for (NamedCsvRecord row : rows("stores/packages.csv")) {
+            if (number(row, "half_cooling_hours_low").isPresent()) {
+                packages.add(row.getField("package_id"));
+            }
+        }
+        Map<String, Material> materials = new HashMap<>();
+        for (NamedCsvRecord row : rows("stores/materials.csv")) {
+            materials.put(row.getField("material_id"), material(row));
+        }
+        Map<String, Double> protections = new HashMap<>();
+        for (NamedCsvRecord row : rows("stores/doorways.csv")) {
+            OptionalDouble low = number(row, "effectiveness_min");
+            OptionalDouble high = number(row, "effectiveness_max");
+            if (low.isPresent() && high.isPresent()) {
+                protections.put(
+                        row.getField("doorway_id"),
+                        number(row, "effectiveness_typical")
+                                .orElse((low.getAsDouble() + high.getAsDouble()) / 2));
+            }
+        }
+        return new Lookups(commodities, packages, materials, protections);
+    }
+
+    private static Material material(NamedCsvRecord row) {
+        return new Material(
+                row.getField("material_id"),
+                number(row, "conductivity_W_mK"),
+                number(row, "density_kg_m3"),
+                number(row, "specific_heat_J_kgK"),
+                number(row, "resistance_m2K_W"),
+                number(row, "solar_absorptance"),
+                row.getField("source_id"));
+    }
+
+    private static OptionalDouble number(NamedCsvRecord row, String column) {
+        String cell = row.getField(column);
+        return cell.isBlank()
+                ? OptionalDouble.empty()
+                : OptionalDouble.of(Double.parseDouble(cell));
+    }
+
+    private static List<NamedCsvRecord> rows(String name) {
+        try (CsvReader<NamedCsvRecord> reader =
+                CsvReader.builder()
+                        .commentStrategy(CommentStrategy.SKIP)
+                        .ofNamedCsvRecord(TABLES.resolve(name))) {
+            return reader.stream().toList();
+        } catch (IOException e) {
+            throw new UncheckedIOException(e);
+        }
+    }
+}
