@@ -25,26 +25,26 @@ import org.wardon.produce.rows.EthyleneStorageRow;
 public final class ReferenceBook implements AutoCloseable {
     private final ReferenceDatabase database;
     private final Map<String, List<OwnValue>> own;
-    private final Names names;
-    private final PackageReader packages;
     private final FactReader facts;
     private final GroupReader groups;
-    private final Sources sources;
-    private final Map<String, Material> materials;
-    private final Map<String, Doorway> doorways;
+    private final Once<Names> names;
+    private final Once<PackageReader> packages;
+    private final Once<Sources> sources;
+    private final Once<Map<String, Material>> materials;
+    private final Once<Map<String, Doorway>> doorways;
     private final Map<String, Commodity> read = new ConcurrentHashMap<>();
 
     private ReferenceBook(ReferenceDatabase database, List<OwnValue> own) {
         this.database = database;
         this.own = own.stream().collect(Collectors.groupingBy(OwnValue::commodityId));
-        names = new Names(database);
-        packages = new PackageReader(database);
         facts = new FactReader(database);
         groups = new GroupReader(database);
-        sources = new Sources(database);
+        names = new Once<>(() -> new Names(database));
+        packages = new Once<>(() -> new PackageReader(database));
+        sources = new Once<>(() -> new Sources(database));
         StoreReader store = new StoreReader(database);
-        materials = byId(store.materials(), Material::id);
-        doorways = byId(store.doorways(), Doorway::id);
+        materials = new Once<>(() -> byId(store.materials(), Material::id));
+        doorways = new Once<>(() -> byId(store.doorways(), Doorway::id));
     }
 
     private static <T> Map<String, T> byId(List<T> values, Function<T, String> id) {
@@ -100,7 +100,7 @@ public final class ReferenceBook implements AutoCloseable {
      * @return the commodity, own values first; empty if nothing is called so
      */
     public Optional<Commodity> find(String name) {
-        return names.find(name).flatMap(this::byId);
+        return names.get().find(name).flatMap(this::byId);
     }
 
     /**
@@ -121,7 +121,7 @@ public final class ReferenceBook implements AutoCloseable {
      * @return up to three, nearest first; none if nothing comes near
      */
     public List<String> nearest(String name) {
-        return names.nearest(name);
+        return names.get().nearest(name);
     }
 
     private Optional<Commodity> byId(String id) {
@@ -159,10 +159,11 @@ public final class ReferenceBook implements AutoCloseable {
      * @throws BadInput if there is no such id, with the nearest names
      */
     public List<NamedFact> facts(String id) {
-        Commodity commodity = get(id);
+        if (!list().contains(id)) {
+            throw unknown(id);
+        }
         return Stream.concat(
-                        ownOf(commodity.id()).stream().map(OwnValue::named),
-                        facts.ofCommodity(commodity.id()).stream())
+                        ownOf(id).stream().map(OwnValue::named), facts.ofCommodity(id).stream())
                 .toList();
     }
 
@@ -175,7 +176,7 @@ public final class ReferenceBook implements AutoCloseable {
      * @throws IllegalArgumentException if there is none
      */
     public Source source(String id) {
-        return sources.get(id);
+        return sources.get().get(id);
     }
 
     /**
@@ -195,7 +196,7 @@ public final class ReferenceBook implements AutoCloseable {
      * @return by id
      */
     public Map<String, Material> materials() {
-        return Map.copyOf(materials);
+        return Map.copyOf(materials.get());
     }
 
     /**
@@ -206,7 +207,7 @@ public final class ReferenceBook implements AutoCloseable {
      * @throws BadInput if there is no such id
      */
     public Material material(String id) {
-        return known(materials, id, "material");
+        return known(materials.get(), id, "material");
     }
 
     /**
@@ -215,7 +216,7 @@ public final class ReferenceBook implements AutoCloseable {
      * @return by id
      */
     public Map<String, Doorway> doorways() {
-        return Map.copyOf(doorways);
+        return Map.copyOf(doorways.get());
     }
 
     /**
@@ -226,7 +227,7 @@ public final class ReferenceBook implements AutoCloseable {
      * @throws BadInput if there is no such id
      */
     public Doorway doorway(String id) {
-        return known(doorways, id, "door protection");
+        return known(doorways.get(), id, "door protection");
     }
 
     /**
@@ -235,7 +236,7 @@ public final class ReferenceBook implements AutoCloseable {
      * @return by id; a class of package is one too, with the broad time of room cooling
      */
     public Map<String, PackageKind> packageKinds() {
-        return Map.copyOf(packages.kinds());
+        return Map.copyOf(packages.get().kinds());
     }
 
     /**
@@ -246,7 +247,7 @@ public final class ReferenceBook implements AutoCloseable {
      * @throws BadInput if there is no such id, or if print gives no half-cooling time for it
      */
     public PackageKind packageKind(String id) {
-        String described = packages.withoutTime().get(id);
+        String described = packages.get().withoutTime().get(id);
         if (described != null) {
             throw new BadInput(
                     id,
@@ -254,7 +255,7 @@ public final class ReferenceBook implements AutoCloseable {
                     "no half-cooling time is published for this package (" + described + ")",
                     "a package with a time, such as room-cooling-any, or give the time");
         }
-        return known(packages.kinds(), id, "package");
+        return known(packages.get().kinds(), id, "package");
     }
 
     /**
@@ -263,7 +264,7 @@ public final class ReferenceBook implements AutoCloseable {
      * @return descriptions by id
      */
     public Map<String, String> packagesWithoutTime() {
-        return Map.copyOf(packages.withoutTime());
+        return Map.copyOf(packages.get().withoutTime());
     }
 
     /**
@@ -272,7 +273,7 @@ public final class ReferenceBook implements AutoCloseable {
      * @return by id
      */
     public Map<String, PackageClass> packageClasses() {
-        return Map.copyOf(packages.classes());
+        return Map.copyOf(packages.get().classes());
     }
 
     private static <T> T known(Map<String, T> values, String id, String what) {

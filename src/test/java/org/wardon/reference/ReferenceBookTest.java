@@ -107,6 +107,20 @@ class ReferenceBookTest {
         assertEquals(mg * 2.9722, mandarin.wattsPerTonne().lowest(), mg * 0.0001);
     }
 
+    @Source("sprouting.csv, UCD-SWEETPOT: more rapid above 15 °C")
+    @Test
+    void namesOfFactsSayWhichEndIsPrintedAndNothingThatIsNot() {
+        List<NamedFact> facts = BOOK.facts("sweet-potato");
+        assertTrue(facts.stream().anyMatch(fact -> fact.name().equals("sprouting@from-15C")));
+        for (String id : BOOK.list()) {
+            for (NamedFact fact : BOOK.facts(id)) {
+                assertFalse(fact.note().contains("; 0 % humidity"), id + " " + fact);
+                assertFalse(fact.note().contains("; 0 days cooled"), id + " " + fact);
+                assertFalse(fact.note().endsWith("mean 0"), id + " " + fact);
+            }
+        }
+    }
+
     @Test
     void compositionWithFreezingPointIsChosen() {
         Commodity mango = BOOK.get("mango");

@@ -102,7 +102,7 @@ select commodity_id as commodity_id, 16 as ord, 'ethylene-sensitivity-class' as 
 union all
 select commodity_id as commodity_id, 20 as ord, 'chilling-floor' as name, lowest_safe_C as low, coalesce(lowest_safe_high_C, lowest_safe_C) as high,
        'C' as unit, case when lowest_safe_C is null then 'hardly sensitive' else '' end as text, source_id as source_id, evidence as evidence,
-       trim(coalesce(trim(coalesce('; ' || symptoms, '') || coalesce('; ' || nullif(ripeness, 'not-stated'), '') || coalesce('; ' || variant, '') || coalesce('; ' || case when zone = 'band' then 'top of a damaging band' || coalesce(' from ' || printf('%g', band_low_C) || ' C', '') end, ''), '; '), '') || '; ' || case when evidence_text <> evidence then evidence_text else '' end, '; ') as note,
+       trim(coalesce(trim(coalesce('; ' || symptoms, '') || coalesce('; ' || nullif(ripeness, 'not-stated'), '') || coalesce('; ' || variant, '') || coalesce('; ' || case when zone = 'band' then 'top of a damaging band' || case when band_low_C is null then '' else ' from ' || printf('%g', band_low_C) || ' C' end end, ''), '; '), '') || '; ' || case when evidence_text <> evidence then evidence_text else '' end, '; ') as note,
        'chilling' as table_name, line
   from chilling
 union all
@@ -132,19 +132,19 @@ select commodity_id as commodity_id, 32 as ord, 'fitted-activation-energy' as na
 union all
 select commodity_id as commodity_id, 33 as ord, 'activation-energy' as name, Ea_senescence_kJ_mol as low, Ea_senescence_kJ_mol as high,
        'kJ/mol' as unit, case when Ea_senescence_kJ_mol is null then coalesce(attribute, '') else '' end as text, source_id as source_id, evidence as evidence,
-       trim(coalesce(trim(coalesce('; ' || attribute, '') || coalesce('; ' || variant, '') || coalesce('; ' || 'order ' || printf('%g', "order"), '') || coalesce('; ' || 'k_ref ' || k_ref, '') || coalesce('; ' || note, ''), '; '), '') || '; ' || case when evidence_text <> evidence then evidence_text else '' end, '; ') as note,
+       trim(coalesce(trim(coalesce('; ' || attribute, '') || coalesce('; ' || variant, '') || coalesce('; ' || case when "order" is not null then 'order ' || printf('%g', "order") end, '') || coalesce('; ' || 'k_ref ' || k_ref, '') || coalesce('; ' || note, ''), '; '), '') || '; ' || case when evidence_text <> evidence then evidence_text else '' end, '; ') as note,
        'keeping-quality-model' as table_name, line
   from keeping_quality_model
 union all
 select commodity_id as commodity_id, 34 as ord, 'ambient-life' as name, ambient_life_low_d as low, ambient_life_high_d as high,
        'day' as unit, case when ambient_life_low_d is null and ambient_life_high_d is null then cooling else '' end as text, source_id as source_id, evidence as evidence,
-       trim(coalesce(trim(coalesce('; ' || ambient_temp_C, '') || coalesce('; ' || variant, '') || coalesce('; ' || 'then ' || cooling, '') || coalesce('; ' || printf('%g', cooled_life_d) || ' days cooled', '') || coalesce('; ' || note, ''), '; '), '') || '; ' || case when evidence_text <> evidence then evidence_text else '' end, '; ') as note,
+       trim(coalesce(trim(coalesce('; ' || ambient_temp_C, '') || coalesce('; ' || variant, '') || coalesce('; ' || 'then ' || cooling, '') || coalesce('; ' || case when cooled_life_d is not null then printf('%g', cooled_life_d) || ' days cooled' end, '') || coalesce('; ' || note, ''), '; '), '') || '; ' || case when evidence_text <> evidence then evidence_text else '' end, '; ') as note,
        'ambient-practice' as table_name, line
   from ambient_practice where ambient_life_high_d is not null or ambient_life_low_d is not null or cooled_life_d is not null or note is not null
 union all
-select commodity_id as commodity_id, 35 as ord, 'sprouting' || case when temp_low_C is null and temp_high_C is null then '' else '@' || coalesce(printf('%g', temp_low_C), '') || '-' || coalesce(printf('%g', temp_high_C), '') || 'C' end as name, days_low as low, days_high as high,
+select commodity_id as commodity_id, 35 as ord, 'sprouting' || case when temp_low_C is null and temp_high_C is null then '' when temp_low_C is null then printf('@to-%gC', temp_high_C) when temp_high_C is null then printf('@from-%gC', temp_low_C) when temp_low_C = temp_high_C then printf('@%gC', temp_low_C) else printf('@%g-%gC', temp_low_C, temp_high_C) end as name, days_low as low, days_high as high,
        'day' as unit, case when days_low is null and days_high is null then effect else '' end as text, source_id as source_id, evidence as evidence,
-       trim(coalesce(trim(coalesce('; ' || effect, '') || coalesce('; ' || printf('%g', rh_limit_pct) || ' % humidity', ''), '; '), '') || '; ' || case when evidence_text <> evidence then evidence_text else '' end, '; ') as note,
+       trim(coalesce(trim(coalesce('; ' || effect, '') || coalesce('; ' || case when rh_limit_pct is not null then printf('%g', rh_limit_pct) || ' % humidity' end, ''), '; '), '') || '; ' || case when evidence_text <> evidence then evidence_text else '' end, '; ') as note,
        'sprouting' as table_name, line
   from sprouting
 union all
@@ -172,13 +172,13 @@ select commodity_id as commodity_id, 40 as ord, printf('respiration-heat@%gC', t
        'respiration-heat' as table_name, line
   from respiration_heat
 union all
-select commodity_id as commodity_id, 41 as ord, printf('respiration-heat@%gC', temp_C) as name, mgCO2_kg_h_low * 10.7 / 3.6 as low, mgCO2_kg_h_high * 10.7 / 3.6 as high,
+select commodity_id as commodity_id, 41 as ord, printf('respiration-heat@%gC', temp_C) as name, round(mgCO2_kg_h_low * 10.7 / 3.6, 1) as low, round(mgCO2_kg_h_high * 10.7 / 3.6, 1) as high,
        'W/t' as unit, '' as text, source_id as source_id, evidence as evidence,
        trim(coalesce(printf('printed as %g to %g mg CO2/(kg h)', mgCO2_kg_h_low, mgCO2_kg_h_high), '') || '; ' || case when evidence_text <> evidence then evidence_text else '' end, '; ') as note,
        'respiration' as table_name, line
   from respiration
 union all
-select commodity_id as commodity_id, 42 as ord, printf('respiration-heat@%gC', temp_C) as name, mgCO2_kg_h_low * 10.7 / 3.6 as low, mgCO2_kg_h_high * 10.7 / 3.6 as high,
+select commodity_id as commodity_id, 42 as ord, printf('respiration-heat@%gC', temp_C) as name, round(mgCO2_kg_h_low * 10.7 / 3.6, 1) as low, round(mgCO2_kg_h_high * 10.7 / 3.6, 1) as high,
        'W/t' as unit, '' as text, source_id as source_id, evidence as evidence,
        trim(coalesce(printf('printed as %g to %g mg CO2/(kg h)', mgCO2_kg_h_low, mgCO2_kg_h_high), '') || '; ' || case when evidence_text <> evidence then evidence_text else '' end, '; ') as note,
        'respiration-alt' as table_name, line
@@ -246,7 +246,7 @@ select commodity_id as commodity_id, 62 as ord, 'vapour-pressure-lowering' as na
 union all
 select commodity_id as commodity_id, 63 as ord, 'water-loss' || case when temp_C is null then '' else '@' || temp_C || case when temp_C glob '*[0-9]' then 'C' else '' end end as name, weight_loss_pct_per_day as low, weight_loss_pct_per_day as high,
        case unit when 'pct_per_day' then 'pct/day' when 'pct_per_day_per_mbar' then 'pct/(day mbar)' else '' end as unit, case when weight_loss_pct_per_day is null then note else '' end as text, source_id as source_id, evidence as evidence,
-       trim(coalesce(trim(coalesce('; ' || variant, '') || coalesce('; ' || printf('%g', rh_pct) || ' % humidity', '') || coalesce('; ' || 'acceptable ' || max_acceptable_loss_pct || ' %', '') || coalesce('; ' || note, ''), '; '), '') || '; ' || case when evidence_text <> evidence then evidence_text else '' end, '; ') as note,
+       trim(coalesce(trim(coalesce('; ' || variant, '') || coalesce('; ' || case when rh_pct is not null then printf('%g', rh_pct) || ' % humidity' end, '') || coalesce('; ' || 'acceptable ' || max_acceptable_loss_pct || ' %', '') || coalesce('; ' || note, ''), '; '), '') || '; ' || case when evidence_text <> evidence then evidence_text else '' end, '; ') as note,
        'moisture-loss' as table_name, line
   from moisture_loss
 union all
