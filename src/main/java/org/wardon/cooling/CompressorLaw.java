@@ -11,8 +11,9 @@ import org.wardon.errors.Require;
  * <p>Capacity rises with the evaporating temperature by 3.5 % a kelvin (3 to 4.5 %), as an
  * exponential so that it never falls below 0, and no further above +10 °C; it falls with the
  * condensing temperature by 1.1 % a kelvin (0.8 to 1.5 %). Power is capacity over {@code eta x
- * Te/(Tc - Te)}, temperatures in kelvin. The rated capacity and power, taken on a dry coil, fix the
- * level of the capacity and {@code eta}.
+ * Te/(Tc - Te)}, temperatures in kelvin. The rated capacity and power fix the level of the capacity
+ * and {@code eta}; the rated air is taken at 85 % humidity (EN 328, from memory), from 20 °C at 47
+ * % (27 °C with a wet bulb of 19 °C, ISO 5151, from memory).
  *
  * <p>Source: capacity slopes from memory of ASHRAE Handbook - Refrigeration; fraction of Carnot as
  * in the table of cooling sources (cop_carnot_fraction); limit of +10 °C: common practice, no
@@ -30,6 +31,9 @@ public final class CompressorLaw implements CoolerLaw {
     private static final double CAPACITY_PER_TC_K = 0.011;
     private static final double NO_GAIN_ABOVE_C = 10;
     private static final double GAIN_ROUNDING_K = 1;
+    private static final double COMFORT_FROM_C = 20;
+    private static final double COLD_ROOM_HUMIDITY = 0.85;
+    private static final double COMFORT_HUMIDITY = 0.47;
     private static final double COIL_WATER_KG_PER_KW = 0.2;
 
     private final Compressor unit;
@@ -52,7 +56,7 @@ public final class CompressorLaw implements CoolerLaw {
         this.pressurePa = pressurePa;
         // The fan moves a volume; its mass is taken at the rated air (within 5 % in use).
         flowKgS = unit.airFlowM3s() / MoistAir.specificVolumeM3kg(unit.ratedAirC(), 0, pressurePa);
-        ratedEvaporatingC = dryCoilC();
+        ratedEvaporatingC = ratedCoilC();
         ratedCondensingC = Condensing.temperatureC(unit.ratedOutdoorC());
         double teK = limited(ratedEvaporatingC) + SaturatedAir.ZERO_C_IN_K;
         double lift = ratedCondensingC - limited(ratedEvaporatingC);
@@ -60,21 +64,34 @@ public final class CompressorLaw implements CoolerLaw {
         coilWaterKg = COIL_WATER_KG_PER_KW * unit.ratedCapacityW() / 1_000;
     }
 
-    private double dryCoilC() {
-        double capacityFlow = flowKgS * MoistAir.DRY_AIR_J_KG_K;
-        double coil = unit.ratedAirC() - 5;
-        for (int i = 0; i < 60; i++) {
-            double eps = 1 - Math.exp(-unit.coilUaWK() / capacityFlow * Coil.frostFactor(coil));
-            double next = unit.ratedAirC() - unit.ratedCapacityW() / (capacityFlow * eps);
-            coil = Math.max(next, -200);
-        }
-        return Require.within(
-                "rated evaporating temperature, from ratedCapacityW, coilUaWK and airFlowM3s,",
-                coil,
-                -50,
-                unit.ratedAirC(),
-                "°C",
+    /** The coil temperature at which the coil takes the rated capacity from the rated air. */
+    private double ratedCoilC() {
+        double w = MoistAir.humidityRatioAt(unit.ratedAirC(), ratedHumidity(), pressurePa);
+        Coil.State coil = new Coil.State();
+        double low = -50;
+        double high = unit.ratedAirC();
+        coil.at(unit.ratedAirC(), w, low, flowKgS, unit.coilUaWK(), pressurePa);
+        Require.within(
+                "ratedCapacityW",
+                unit.ratedCapacityW(),
+                0,
+                coil.totalW,
+                "W at -50 °C evaporating",
                 "The coil is too small for the rated capacity: check coilUaWK and airFlowM3s.");
+        while (high - low > 1e-11) {
+            double middle = 0.5 * (low + high);
+            coil.at(unit.ratedAirC(), w, middle, flowKgS, unit.coilUaWK(), pressurePa);
+            if (coil.totalW > unit.ratedCapacityW()) {
+                low = middle;
+            } else {
+                high = middle;
+            }
+        }
+        return 0.5 * (low + high);
+    }
+
+    private double ratedHumidity() {
+        return unit.ratedAirC() < COMFORT_FROM_C ? COLD_ROOM_HUMIDITY : COMFORT_HUMIDITY;
     }
 
     /**

@@ -1,0 +1,107 @@
+package org.wardon.cooling;
+
+import java.util.ArrayList;
+import java.util.List;
+import org.wardon.produce.Caution;
+import org.wardon.produce.Caution.Level;
+import org.wardon.produce.Reason;
+import org.wardon.produce.Reason.Argument;
+
+/**
+ * What a keeper must hear of a cooler before it runs: it will ice up, cannot follow, or is
+ * misstated.
+ */
+public final class CoolerCautions {
+    /** Air below this needs a defrost, °C. Common practice, no source. */
+    private static final double ICES_BELOW_C = 4;
+
+    /** Fraction of Carnot of real machines. Source: table of cooling sources, 0.35 to 0.65. */
+    private static final double LEAST_CARNOT = 0.35;
+
+    private static final double MOST_CARNOT = 0.65;
+
+    /**
+     * Rated coil colder than its air by more than this is too small for its unit, K (assumption).
+     */
+    private static final double WIDEST_DIFFERENCE_K = 15;
+
+    private CoolerCautions() {}
+
+    /**
+     * Returns the cautions of a cooler at its setting: {@code ices-up}, {@code control-too-warm},
+     * {@code rating-unlikely}, {@code coil-small}.
+     *
+     * @param cooler the cooler
+     * @param setting what the keeper dialled in
+     * @param chamberId the chamber, subject of the reasons
+     * @param pressurePa air pressure of the site, Pa
+     * @return the cautions, may be empty
+     */
+    public static List<Caution> of(
+            Cooler cooler, Setting setting, String chamberId, double pressurePa) {
+        List<Caution> cautions = new ArrayList<>();
+        if (cooler instanceof Compressor unit) {
+            follows(unit, setting, chamberId, cautions);
+            rating(unit, chamberId, pressurePa, cautions);
+        }
+        return cautions;
+    }
+
+    private static void follows(
+            Compressor unit, Setting setting, String chamberId, List<Caution> cautions) {
+        double kept = Thermostat.followedC(setting, unit.lowestC());
+        if (kept < ICES_BELOW_C && unit.defrost().isEmpty()) {
+            cautions.add(
+                    caution(
+                            Level.CAUTION,
+                            "ices-up",
+                            chamberId,
+                            "common-practice",
+                            Argument.of(kept, "C"),
+                            Argument.of(ICES_BELOW_C, "C")));
+        }
+        if (kept > setting.temperatureC()) {
+            cautions.add(
+                    caution(
+                            Level.CAUTION,
+                            "control-too-warm",
+                            chamberId,
+                            "common-practice",
+                            Argument.of(setting.temperatureC(), "C"),
+                            Argument.of(kept, "C")));
+        }
+    }
+
+    private static void rating(
+            Compressor unit, String chamberId, double pressurePa, List<Caution> cautions) {
+        CompressorLaw law = unit.law(pressurePa);
+        double carnot = law.carnotFraction();
+        if (carnot < LEAST_CARNOT || carnot > MOST_CARNOT) {
+            cautions.add(
+                    caution(
+                            Level.NOTE,
+                            "rating-unlikely",
+                            chamberId,
+                            "CARNOT-PAGE",
+                            Argument.of(carnot, "1"),
+                            Argument.of(LEAST_CARNOT, "1"),
+                            Argument.of(MOST_CARNOT, "1")));
+        }
+        double difference = unit.ratedAirC() - law.ratedEvaporatingC();
+        if (difference > WIDEST_DIFFERENCE_K) {
+            cautions.add(
+                    caution(
+                            Level.NOTE,
+                            "coil-small",
+                            chamberId,
+                            "assumption",
+                            Argument.of(difference, "K"),
+                            Argument.of(WIDEST_DIFFERENCE_K, "K")));
+        }
+    }
+
+    private static Caution caution(
+            Level level, String code, String chamberId, String source, Argument... arguments) {
+        return new Caution(level, Reason.about(code, chamberId, source, arguments));
+    }
+}
