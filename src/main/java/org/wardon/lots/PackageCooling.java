@@ -88,7 +88,7 @@ final class PackageCooling {
         for (double r : rate) {
             slowest = Math.min(slowest, r);
         }
-        return new BrentSolver(1e-10, 1e-9)
+        return new BrentSolver(1e-8, 1e-6)
                 .solve(200, timeS -> mean(timeS) - share, 0, LONGEST / slowest);
     }
 }

@@ -1,6 +1,7 @@
 package org.wardon.lots;
 
 import java.util.List;
+import java.util.function.DoubleFunction;
 import java.util.function.DoubleUnaryOperator;
 import org.apache.commons.math3.analysis.solvers.BrentSolver;
 import org.wardon.produce.PackageKind;
@@ -42,26 +43,28 @@ public final class PackageFit {
         Shells shells = Shells.of(item);
         double open = openWPerKgK(item);
         double film = Math.min(open, item.areaM2PerKg() * AirFilm.heatWPerM2K(item));
-        double quickestS = halfS(item, shells, inside.packing(open, open));
-        if (quickestS >= halfCoolingS) {
-            Reason slow =
-                    Reason.about(
-                            "item-slower-than-package",
-                            inside.commodityId(),
-                            inside.sourceId(),
-                            Reason.Argument.of(quickestS / 3600, "h"),
-                            Reason.Argument.of(halfCoolingS / 3600, "h"));
-            return new WithReasons<>(inside.packing(open, open), List.of(slow), false);
+        if (leftAfter(halfCoolingS, item, shells, inside.packing(open, open)) >= 0.5) {
+            return itemsOwnTime(item, inside, open, halfCoolingS);
         }
-        boolean openSuffices = halfS(item, shells, inside.packing(film, open)) <= halfCoolingS;
-        DoubleUnaryOperator halfWith =
-                openSuffices
-                        ? g -> halfS(item, shells, inside.packing(film, g))
-                        : g -> halfS(item, shells, inside.packing(g, open));
-        double fitted = fit(halfWith, halfCoolingS, open);
-        Packing packing =
-                openSuffices ? inside.packing(film, fitted) : inside.packing(fitted, open);
-        return new WithReasons<>(packing, List.of(), false);
+        boolean openSuffices =
+                leftAfter(halfCoolingS, item, shells, inside.packing(film, open)) <= 0.5;
+        DoubleFunction<Packing> packing =
+                openSuffices ? g -> inside.packing(film, g) : g -> inside.packing(g, open);
+        double fitted = fit(g -> leftAfter(halfCoolingS, item, shells, packing.apply(g)), open);
+        return new WithReasons<>(packing.apply(fitted), List.of(), false);
+    }
+
+    private static WithReasons<Packing> itemsOwnTime(
+            Item item, PackageInside inside, double open, double halfCoolingS) {
+        Packing packing = inside.packing(open, open);
+        Reason slow =
+                Reason.about(
+                        "item-slower-than-package",
+                        inside.commodityId(),
+                        inside.sourceId(),
+                        Reason.Argument.of(halfCoolingS(item, packing) / 3600, "h"),
+                        Reason.Argument.of(halfCoolingS / 3600, "h"));
+        return new WithReasons<>(packing, List.of(slow), false);
     }
 
     /**
@@ -87,7 +90,7 @@ public final class PackageFit {
      * @return s
      */
     public static double halfCoolingS(Item item, Packing packing) {
-        return halfS(item, Shells.of(item), packing);
+        return new PackageCooling(item, Shells.of(item), packing).meanFallsToS(0.5);
     }
 
     /**
@@ -121,16 +124,18 @@ public final class PackageFit {
         return Math.min(OPEN_W_KG_K, OPEN_BIOT * flesh);
     }
 
-    private static double halfS(Item item, Shells shells, Packing packing) {
-        return new PackageCooling(item, shells, packing).meanFallsToS(0.5);
+    /** Share of the starting difference left in the mean of the items. */
+    private static double leftAfter(double timeS, Item item, Shells shells, Packing packing) {
+        return new PackageCooling(item, shells, packing).mean(timeS);
     }
 
-    private static double fit(DoubleUnaryOperator halfWith, double wantedS, double open) {
+    /** The conductance at which half is left; the better it conducts, the less is left. */
+    private static double fit(DoubleUnaryOperator left, double open) {
         double logarithm =
-                new BrentSolver(1e-10, 1e-7)
+                new BrentSolver(1e-9, 1e-6)
                         .solve(
-                                200,
-                                lnG -> Math.log(halfWith.applyAsDouble(Math.exp(lnG)) / wantedS),
+                                100,
+                                lnG -> left.applyAsDouble(Math.exp(lnG)) - 0.5,
                                 Math.log(LEAST_W_KG_K),
                                 Math.log(open));
         return Math.exp(logarithm);
