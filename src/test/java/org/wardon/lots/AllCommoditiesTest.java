@@ -236,6 +236,26 @@ class AllCommoditiesTest {
         assertFalse(lot(byId("apple"), kinds.get("room-cooling-any"), 0.5).ofClass());
     }
 
+    @Test
+    void everySourceNamedIsInTheBookOrAnAssumption() {
+        try (ReferenceBook book = ReferenceBook.open()) {
+            for (PackageKind kind : kinds.values()) {
+                for (Commodity commodity : all.subList(0, 10)) {
+                    named(book, lot(commodity, kind, 0.5));
+                }
+            }
+            all.forEach(one -> named(book, lot(one, kinds.get("room-cooling-any"), 0.5)));
+        }
+    }
+
+    private static void named(ReferenceBook book, WithReasons<Lot> lot) {
+        for (Reason reason : lot.restsOn()) {
+            if (!reason.sourceId().equals(ClassValues.SOURCE)) {
+                assertEquals(reason.sourceId(), book.source(reason.sourceId()).id(), reason.code());
+            }
+        }
+    }
+
     private static Commodity byId(String id) {
         return all.stream().filter(one -> one.id().equals(id)).findFirst().orElseThrow();
     }
