@@ -33,12 +33,13 @@ public record Material(
      * Returns whether a layer can be made of it.
      *
      * @return true for a solid with conductivity, density and specific heat, and for a resistance
+     *     that is no surface film
      */
     public boolean isLayer() {
         boolean solid =
                 conductivityWmK.isPresent()
                         && densityKgM3.isPresent()
                         && specificHeatJkgK.isPresent();
-        return solid || resistanceM2KW.isPresent();
+        return solid || resistanceM2KW.isPresent() && !id.startsWith("film-");
     }
 }

@@ -9,7 +9,7 @@ import java.util.Optional;
 
 /** Finds a commodity by what people call it. */
 final class Names {
-    private static final int SUGGESTIONS = 3;
+    private static final int SUGGESTIONS = 4;
 
     private final Map<String, String> idOf = new LinkedHashMap<>();
 
@@ -53,27 +53,33 @@ final class Names {
         return singulars(plain).stream().filter(idOf::containsKey).findFirst().map(idOf::get);
     }
 
-    /** Returns the names nearest to a misspelt one, nearest first, one a commodity. */
+    /**
+     * Returns the ids whose names come nearest to a name that is misspelt or too short, nearest
+     * first; a whole word of a name, such as {@code pepper}, counts as one slip.
+     */
     List<String> nearest(String name) {
         String plain = plain(name);
         int reach = Math.max(2, plain.length() / 3);
-        Map<String, Integer> distance = new HashMap<>();
-        Map<String, String> word = new HashMap<>();
+        Map<String, Integer> slipsTo = new HashMap<>();
         idOf.forEach(
                 (known, id) -> {
-                    int slips = EditDistance.between(plain, known);
-                    if (slips <= reach && slips < distance.getOrDefault(id, Integer.MAX_VALUE)) {
-                        distance.put(id, slips);
-                        word.put(id, known.replace(' ', '-').equals(id) ? id : known);
+                    int slips = hasWord(known, plain) ? 1 : EditDistance.between(plain, known);
+                    if (slips <= reach) {
+                        slipsTo.merge(id, slips, Math::min);
                     }
                 });
-        return distance.entrySet().stream()
+        return slipsTo.entrySet().stream()
                 .sorted(
                         Map.Entry.<String, Integer>comparingByValue()
                                 .thenComparing(Map.Entry.comparingByKey()))
                 .limit(SUGGESTIONS)
-                .map(entry -> word.getOrDefault(entry.getKey(), entry.getKey()))
+                .map(Map.Entry::getKey)
                 .toList();
+    }
+
+    private static boolean hasWord(String known, String plain) {
+        return singulars(plain).stream()
+                .anyMatch(word -> (" " + known + " ").contains(" " + word + " "));
     }
 
     private static List<String> singulars(String plain) {

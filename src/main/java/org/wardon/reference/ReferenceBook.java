@@ -115,10 +115,10 @@ public final class ReferenceBook implements AutoCloseable {
     }
 
     /**
-     * Returns the names nearest to a misspelt one.
+     * Returns the commodities whose names come nearest to a misspelt one.
      *
-     * @param name the misspelt name
-     * @return up to three, nearest first; none if nothing comes near
+     * @param name the misspelt name, or a word of several names such as {@code pepper}
+     * @return up to four ids, nearest first; none if nothing comes near
      */
     public List<String> nearest(String name) {
         return names.get().nearest(name);

@@ -153,6 +153,15 @@ class OwnValuesTest {
     }
 
     @Test
+    void refusesAFolderThatIsAFile() throws IOException {
+        Path file = Files.writeString(folder.resolve("taken"), "x");
+        OwnValue value = OwnValue.of("mango", "storage-life", 9, 12, NOW);
+        BadInput refused = assertThrows(BadInput.class, () -> new OwnValues(file).set(value));
+        assertTrue(refused.getMessage().contains("cannot be created"), refused.getMessage());
+        assertEquals("x", Files.readString(file));
+    }
+
+    @Test
     void folderIsTheOneGivenThenTheVariableThenTheUsersData() {
         Path home = Path.of("/home/k");
         Map<String, String> set =

@@ -187,7 +187,13 @@ class ReferenceBookTest {
     void misspeltNamesLeadToTheNearest() {
         assertEquals("mango", BOOK.nearest("mangoo").get(0));
         assertEquals("papaya", BOOK.nearest("paypaya").get(0));
+        assertEquals("eggplant", BOOK.nearest("aubergin").get(0));
+        assertEquals(List.of("bell-pepper", "chili-pepper"), BOOK.nearest("peppers"));
         assertEquals(List.of(), BOOK.nearest("xylophonequartz"));
+        assertTrue(
+                assertThrows(BadInput.class, () -> BOOK.get("aubergine"))
+                        .getMessage()
+                        .contains("perhaps eggplant?"));
         BadInput refused = assertThrows(BadInput.class, () -> BOOK.get("brocoli"));
         assertEquals(
                 "brocoli: no commodity is called so; perhaps broccoli? 'look' without a name lists"
@@ -211,6 +217,7 @@ class ReferenceBookTest {
         assertTrue(panel.isLayer());
         assertTrue(BOOK.material("airgap-25-h").isLayer());
         assertFalse(BOOK.material("finish-whitewash").isLayer());
+        assertFalse(BOOK.material("film-in-h").isLayer());
     }
 
     @Source("USDA AH66: cooling time 20 to 100 h in room cooling, divided by 3")
