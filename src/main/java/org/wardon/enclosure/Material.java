@@ -40,6 +40,6 @@ public record Material(
                 conductivityWmK.isPresent()
                         && densityKgM3.isPresent()
                         && specificHeatJkgK.isPresent();
-        return solid || resistanceM2KW.isPresent() && !id.startsWith("film-");
+        return solid || (resistanceM2KW.isPresent() && !id.startsWith("film-"));
     }
 }
