@@ -1,0 +1,33 @@
+package org.wardon.heat;
+
+import java.util.OptionalDouble;
+import org.wardon.errors.Require;
+
+/**
+ * The air a run starts with. What is left open: a chamber with a compressor starts at its setting,
+ * all others at outdoors, which faces then follow at the steady profile between.
+ *
+ * @param temperatureC air, °C
+ * @param humidityPct its relative humidity, percent
+ */
+public record Start(OptionalDouble temperatureC, OptionalDouble humidityPct) {
+    /** Everything as usual. */
+    public static final Start USUAL = new Start(OptionalDouble.empty(), OptionalDouble.empty());
+
+    /** Checks the bounds. */
+    public Start {
+        temperatureC.ifPresent(t -> Require.within("starts.temperatureC", t, -30, 60, "°C", ""));
+        humidityPct.ifPresent(h -> Require.within("starts.humidityPct", h, 0, 100, "%", ""));
+    }
+
+    /**
+     * Returns a start in given air.
+     *
+     * @param temperatureC air, °C
+     * @param humidityPct relative humidity, percent
+     * @return the start
+     */
+    public static Start at(double temperatureC, double humidityPct) {
+        return new Start(OptionalDouble.of(temperatureC), OptionalDouble.of(humidityPct));
+    }
+}

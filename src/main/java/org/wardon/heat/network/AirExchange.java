@@ -1,0 +1,210 @@
+package org.wardon.heat.network;
+
+import org.wardon.air.MoistAir;
+import org.wardon.air.SaturatedAir;
+import org.wardon.enclosure.DoorExchange;
+import org.wardon.heat.solver.Tree;
+
+/**
+ * Air that comes and goes: leakage and fresh air as steady flows of outdoor air, and the door by
+ * the difference of densities. Equal masses of dry air pass each way.
+ */
+final class AirExchange implements Part {
+    /** Flows: enthalpy by leakage, W. */
+    static final int LEAK_HEAT = 0;
+
+    /** Vapour by leakage, kg/s. */
+    static final int LEAK_VAPOUR = 1;
+
+    /** Enthalpy by fresh air, W. */
+    static final int FRESH_HEAT = 2;
+
+    /** Vapour by fresh air, kg/s. */
+    static final int FRESH_VAPOUR = 3;
+
+    /** Enthalpy by the door, W. */
+    static final int DOOR_HEAT = 4;
+
+    /** Vapour by the door, kg/s. */
+    static final int DOOR_VAPOUR = 5;
+
+    /** Dry air exchanged in all, kg/s. */
+    static final int EXCHANGED = 6;
+
+    static final int FLOWS = 7;
+
+    private static final double VAPOUR_VOLUME = 1.607858;
+    private static final double SLOPE_OVER_S = 1;
+
+    private final int flowAt;
+    private final double pressurePa;
+    private final double leakKgS;
+    private final double freshKgS;
+    private final Doorway doorway;
+    private boolean open;
+    private double freeM3 = 1;
+
+    private double door;
+    private double doorByAirC;
+    private double doorByRatio;
+    private double toOutdoors;
+    private double toBeyondHeat;
+    private double toBeyondRatio;
+
+    /**
+     * The door as numbers.
+     *
+     * @param widthM clear width, m; 0 for no door
+     * @param heightM clear height, m
+     * @param share of the full flow in use
+     * @param averagedOpenS open time of one opening where openings are averaged, s; else 0
+     * @param openingsPerS openings a second while in use, where averaged
+     */
+    record Doorway(
+            double widthM,
+            double heightM,
+            double share,
+            double averagedOpenS,
+            double openingsPerS) {}
+
+    AirExchange(int flowAt, double pressurePa, double leakKgS, double freshKgS, Doorway doorway) {
+        this.flowAt = flowAt;
+        this.pressurePa = pressurePa;
+        this.leakKgS = leakKgS;
+        this.freshKgS = freshKgS;
+        this.doorway = doorway;
+    }
+
+    /** Opens or shuts the door; where averaged, starts or ends its hours of use. */
+    void open(boolean standsOpen) {
+        open = standsOpen;
+    }
+
+    /** Tells the free volume of the chamber, m3. */
+    void freeVolume(double m3) {
+        freeM3 = m3;
+    }
+
+    private double density(double airC, double ratio) {
+        return (1 + ratio)
+                * pressurePa
+                / (MoistAir.DRY_AIR_GAS_J_KG_K
+                        * (airC + SaturatedAir.ZERO_C_IN_K)
+                        * (1 + VAPOUR_VOLUME * ratio));
+    }
+
+    /** Dry air through the door, kg/s. */
+    private double doorKgS(double airC, double ratio, double beyondC, double beyondRatio) {
+        if (!open || doorway.widthM <= 0) {
+            return 0;
+        }
+        double inside = density(airC, ratio);
+        double full =
+                DoorExchange.flowKgS(
+                                inside,
+                                density(beyondC, beyondRatio),
+                                doorway.widthM,
+                                doorway.heightM)
+                        * doorway.share
+                        / (1 + ratio);
+        if (doorway.averagedOpenS <= 0) {
+            return full;
+        }
+        double dry = inside / (1 + ratio);
+        return dry
+                * DoorExchange.volumeAnOpeningM3(full / dry, doorway.averagedOpenS, freeM3)
+                * doorway.openingsPerS;
+    }
+
+    @Override
+    public void rates(AirState air, Outside outside, double[] y, double[] rates, double[] flows) {
+        Outside.Place out = outside.outdoors;
+        Outside.Place beyond = outside.beyondDoor;
+        double through = doorKgS(air.airC, air.ratio, beyond.airC, beyond.ratio);
+        double heat = out.enthalpy() - air.enthalpy;
+        double vapour = out.ratio - air.ratio;
+        double doorHeat = through * (beyond.enthalpy() - air.enthalpy);
+        double doorVapour = through * (beyond.ratio - air.ratio);
+        flows[flowAt + LEAK_HEAT] = leakKgS * heat;
+        flows[flowAt + LEAK_VAPOUR] = leakKgS * vapour;
+        flows[flowAt + FRESH_HEAT] = freshKgS * heat;
+        flows[flowAt + FRESH_VAPOUR] = freshKgS * vapour;
+        flows[flowAt + DOOR_HEAT] = doorHeat;
+        flows[flowAt + DOOR_VAPOUR] = doorVapour;
+        flows[flowAt + EXCHANGED] = leakKgS + freshKgS + through;
+        rates[AirState.ENTHALPY] += (leakKgS + freshKgS) * heat + doorHeat;
+        rates[AirState.HUMIDITY] += (leakKgS + freshKgS) * vapour + doorVapour;
+    }
+
+    @Override
+    public void linearise(AirState air, Outside outside, double airKg, double[] y, Tree tree) {
+        Outside.Place beyond = outside.beyondDoor;
+        door = doorKgS(air.airC, air.ratio, beyond.airC, beyond.ratio);
+        doorByAirC = 0;
+        doorByRatio = 0;
+        if (door > 0) {
+            double t = 1e-4;
+            double w = 1e-7;
+            doorByAirC =
+                    (doorKgS(air.airC + t, air.ratio, beyond.airC, beyond.ratio)
+                                    - doorKgS(air.airC - t, air.ratio, beyond.airC, beyond.ratio))
+                            / (2 * t);
+            doorByRatio =
+                    (doorKgS(air.airC, air.ratio + w, beyond.airC, beyond.ratio)
+                                    - doorKgS(air.airC, air.ratio - w, beyond.airC, beyond.ratio))
+                            / (2 * w);
+        }
+        toOutdoors = leakKgS + freshKgS;
+        toBeyondHeat = beyond.enthalpy() - air.enthalpy;
+        toBeyondRatio = beyond.ratio - air.ratio;
+        double byEnthalpy = doorByAirC * air.airByEnthalpy;
+        double byRatio = doorByAirC * air.airByRatio + doorByRatio;
+        tree.hubByHub[0] += (-toOutdoors - door + byEnthalpy * toBeyondHeat) / airKg;
+        tree.hubByHub[1] += byRatio * toBeyondHeat / airKg;
+        tree.hubByHub[2] += byEnthalpy * toBeyondRatio / airKg;
+        tree.hubByHub[3] += (-toOutdoors - door + byRatio * toBeyondRatio) / airKg;
+    }
+
+    @Override
+    public void timeSlope(
+            AirState air, Outside outside, double[] y, double[] rateSlope, double[] slope) {
+        Outside.Place out = outside.outdoors;
+        Outside.Place beyond = outside.beyondDoor;
+        double heat = out.enthalpySlope();
+        double doorSlope =
+                door > 0
+                        ? (doorKgS(
+                                                air.airC,
+                                                air.ratio,
+                                                beyond.airC + SLOPE_OVER_S * beyond.airSlope,
+                                                beyond.ratio + SLOPE_OVER_S * beyond.ratioSlope)
+                                        - door)
+                                / SLOPE_OVER_S
+                        : 0;
+        double doorHeat = door * beyond.enthalpySlope() + doorSlope * toBeyondHeat;
+        double doorVapour = door * beyond.ratioSlope + doorSlope * toBeyondRatio;
+        slope[flowAt + LEAK_HEAT] = leakKgS * heat;
+        slope[flowAt + LEAK_VAPOUR] = leakKgS * out.ratioSlope;
+        slope[flowAt + FRESH_HEAT] = freshKgS * heat;
+        slope[flowAt + FRESH_VAPOUR] = freshKgS * out.ratioSlope;
+        slope[flowAt + DOOR_HEAT] = doorHeat;
+        slope[flowAt + DOOR_VAPOUR] = doorVapour;
+        slope[flowAt + EXCHANGED] = doorSlope;
+        rateSlope[AirState.ENTHALPY] += toOutdoors * heat + doorHeat;
+        rateSlope[AirState.HUMIDITY] += toOutdoors * out.ratioSlope + doorVapour;
+    }
+
+    @Override
+    public void flowsAlong(AirState air, double[] v, double[] change) {
+        double heat = -v[AirState.ENTHALPY];
+        double vapour = -v[AirState.HUMIDITY];
+        double through = doorByAirC * air.airAlong(v) + doorByRatio * v[AirState.HUMIDITY];
+        change[flowAt + LEAK_HEAT] = leakKgS * heat;
+        change[flowAt + LEAK_VAPOUR] = leakKgS * vapour;
+        change[flowAt + FRESH_HEAT] = freshKgS * heat;
+        change[flowAt + FRESH_VAPOUR] = freshKgS * vapour;
+        change[flowAt + DOOR_HEAT] = door * heat + through * toBeyondHeat;
+        change[flowAt + DOOR_VAPOUR] = door * vapour + through * toBeyondRatio;
+        change[flowAt + EXCHANGED] = through;
+    }
+}

@@ -1,0 +1,461 @@
+package org.wardon.heat.network;
+
+import org.wardon.air.MoistAir;
+import org.wardon.air.SaturatedAir;
+import org.wardon.heat.laws.FreeWater;
+import org.wardon.heat.solver.Branch;
+import org.wardon.heat.solver.Tree;
+import org.wardon.lots.AirFilm;
+import org.wardon.lots.Lot;
+import org.wardon.lots.Packing;
+import org.wardon.lots.RespirationLaw;
+import org.wardon.lots.Shells;
+
+/**
+ * One lot: shells from the middle outwards, skin without mass, free water, package air with the
+ * tare. The block holds the outermost shell, the free water, and enthalpy and humidity ratio of the
+ * package air.
+ *
+ * <p>The skin's temperature solves {@code ks (Tn - Ts) + kf (Tp - Ts) = m (hv(Ts) - hl(Ts))}:
+ * evaporation draws its heat at the skin. Heat capacity, breathing mass and surface of a lot are
+ * those at arrival: a lot that lost 5 % of its water would differ by as much, less than any of them
+ * is known.
+ */
+final class LotBranch implements Part {
+    /** Flows of a lot: heat and enthalpy to the chamber's air, W. */
+    static final int TO_AIR = 0;
+
+    /** Vapour to the chamber's air, kg/s. */
+    static final int VAPOUR = 1;
+
+    /** Heat of respiration, W. */
+    static final int RESPIRATION = 2;
+
+    /** Vapour from skin and free water to the package air, kg/s. */
+    static final int EVAPORATED = 3;
+
+    /** Enthalpy that water had as a liquid, W. */
+    static final int LIQUID = 4;
+
+    static final int FLOWS = 5;
+
+    private static final double PACKAGE_AIR_C = 10;
+    private static final double L0 = MoistAir.EVAPORATION_J_KG;
+    private static final double VAPOUR_LESS_WATER =
+            MoistAir.VAPOUR_J_KG_K - MoistAir.WATER_J_KG_K;
+    private static final double WATER = MoistAir.WATER_J_KG_K;
+
+    final Branch branch;
+    private final int flowAt;
+    private final double pressurePa;
+    private final int shells;
+    private final double[] capacity;
+    private final double[] shellKg;
+    private final double[] between;
+    private final double skin;
+    private final double film;
+    private final double tissueKgSPa;
+    private final double lowering;
+    private final double filmKgSPa;
+    private final double fullKg;
+    private final double packageWK;
+    private final double packageKgSPa;
+    private final double packageKg;
+    private final double packageJkgK;
+    private final LocalCurve saturation;
+    private LocalCurve[] breath;
+    private final boolean plain;
+    private final double respirationFactor;
+    private boolean gives = true;
+
+    private double skinC;
+    private double evaporated;
+    private double evaporatedBySkin;
+    private double evaporatedByWater;
+    private double evaporatedByRatio;
+    private double filmWater;
+    private double filmWaterBySkin;
+    private double filmWaterByWater;
+    private double filmWaterByRatio;
+    private double packageC;
+    private double packagePa;
+
+    /** What the block's four unknowns do to skin, evaporation and the rest, at the last start. */
+    private final double[] skinBy = new double[4];
+
+    private final double[] evaporatedBy = new double[4];
+    private final double[] filmWaterBy = new double[4];
+    private final double[] liquidBy = new double[4];
+    private final double[] packageCBy = new double[4];
+    private final double[] toAirBy = new double[4];
+    private final double[] breathSlope;
+    private double jRatio;
+    private double jAirRatio;
+    private double toAirByAirRatio;
+
+    LotBranch(
+            Tree tree,
+            int flowAt,
+            Lot lot,
+            Packing packing,
+            double respirationFactor,
+            double transpirationFactor,
+            double pressurePa,
+            boolean plain) {
+        Shells cut = lot.shells();
+        double kg = lot.massKg();
+        this.shells = cut.count();
+        this.branch = tree.addBranch(shells - 1, 4);
+        this.flowAt = flowAt;
+        this.pressurePa = pressurePa;
+        this.plain = plain;
+        this.respirationFactor = respirationFactor;
+        capacity = new double[shells];
+        shellKg = new double[shells];
+        between = new double[shells - 1];
+        breathSlope = new double[shells];
+        for (int i = 0; i < shells; i++) {
+            shellKg[i] = kg * cut.massFraction(i);
+            capacity[i] = shellKg[i] * lot.item().specificHeatJkgK();
+            if (i < shells - 1) {
+                between[i] = kg * cut.conductanceWPerKgK(i);
+            }
+        }
+        skin = kg * cut.skinConductanceWPerKgK();
+        film = kg * packing.filmWPerKgK();
+        tissueKgSPa = kg * lot.transpiration().conductanceKgPerKgSPa() * transpirationFactor;
+        lowering = lot.transpiration().vapourPressureLowering();
+        filmKgSPa = kg * lot.transpiration().filmKgPerKgSPa();
+        fullKg = kg * lot.item().areaM2PerKg() * FreeWater.FULL_KG_M2;
+        packageWK = kg * packing.chamberWPerKgK();
+        packageKgSPa = kg * packing.vapourKgPerKgSPa();
+        packageKg =
+                kg
+                        * packing.airM3PerKg()
+                        / MoistAir.specificVolumeM3kg(PACKAGE_AIR_C, 0, pressurePa);
+        packageJkgK = MoistAir.DRY_AIR_J_KG_K + kg * packing.tareJPerKgK() / packageKg;
+        saturation = Saturation.curve(plain);
+        breath = new LocalCurve[shells];
+        breathe(lot.respiration());
+    }
+
+    /** Changes the law of respiration. */
+    void breathe(RespirationLaw law) {
+        for (int i = 0; i < shells; i++) {
+            breath[i] =
+                    new LocalCurve(
+                            t -> respirationFactor * law.wattsPerKg(t),
+                            t -> respirationFactor * law.slopeWattsPerKgK(t),
+                            plain);
+        }
+    }
+
+    /** Makes the lot a shadow, or a lot again. */
+    void give(boolean toTheAir) {
+        gives = toTheAir;
+    }
+
+    boolean gives() {
+        return gives;
+    }
+
+    /** Writes an even lot: pulp, package at the same temperature with the chamber's humidity. */
+    void arrive(double pulpC, double waterKg, double ratio, double[] y) {
+        for (int i = 0; i < shells; i++) {
+            y[branch.start + i] = pulpC;
+        }
+        int b = branch.blockAt(0);
+        double cap = MoistAir.saturatedHumidityRatio(pulpC, pressurePa);
+        double packageRatio = Math.min(ratio, cap);
+        y[b + 1] = waterKg;
+        y[b + 2] = packageJkgK * pulpC + packageRatio * MoistAir.vapourEnthalpyJkg(pulpC);
+        y[b + 3] = packageRatio;
+    }
+
+    int flow(int kind) {
+        return flowAt + kind;
+    }
+
+    double meanC(double[] y) {
+        double heat = 0;
+        double whole = 0;
+        for (int i = 0; i < shells; i++) {
+            heat += capacity[i] * y[branch.start + i];
+            whole += capacity[i];
+        }
+        return heat / whole;
+    }
+
+    double surfaceC(double[] y) {
+        return y[branch.start + shells - 1];
+    }
+
+    double coreC(double[] y) {
+        return y[branch.start];
+    }
+
+    double coldestC(double[] y) {
+        double least = y[branch.start];
+        for (int i = 1; i < shells; i++) {
+            least = Math.min(least, y[branch.start + i]);
+        }
+        return least;
+    }
+
+    double warmestC(double[] y) {
+        double most = y[branch.start];
+        for (int i = 1; i < shells; i++) {
+            most = Math.max(most, y[branch.start + i]);
+        }
+        return most;
+    }
+
+    double waterKg(double[] y) {
+        return y[branch.blockAt(1)];
+    }
+
+    double wetShare(double[] y) {
+        return FreeWater.wetShare(waterKg(y) / fullKg);
+    }
+
+    /** Relative humidity of package air at its own temperature, 0 to 1 and a little above. */
+    double humidityFraction(double[] y) {
+        int b = branch.blockAt(0);
+        packageAir(y[b + 2], y[b + 3]);
+        return packagePa / Saturation.pressurePa(packageC);
+    }
+
+    double heatJ(double[] y) {
+        double sum = 0;
+        for (int i = 0; i < shells; i++) {
+            sum += capacity[i] * y[branch.start + i];
+        }
+        return sum;
+    }
+
+    double packageHeatJ(double[] y) {
+        return packageKg * y[branch.blockAt(2)];
+    }
+
+    double packageWaterKg(double[] y) {
+        return packageKg * y[branch.blockAt(3)];
+    }
+
+    double respirationW(double[] y) {
+        double sum = 0;
+        for (int i = 0; i < shells; i++) {
+            sum += shellKg[i] * breath[i].value(y[branch.start + i]);
+        }
+        return sum;
+    }
+
+    private void packageAir(double enthalpy, double ratio) {
+        packageC = (enthalpy - ratio * L0) / (packageJkgK + MoistAir.VAPOUR_J_KG_K * ratio);
+        packagePa = pressurePa * ratio / (MoistAir.MOLAR_MASS_RATIO + ratio);
+    }
+
+    /** Newton on the heat of the skin; ends with evaporation at the skin found. */
+    private void solveSkin(double shellC, double waterKg) {
+        double wet = FreeWater.wetShare(waterKg / fullKg);
+        double t = (skin * shellC + film * packageC) / (skin + film);
+        for (int i = 0; i < 12; i++) {
+            evaporation(t, wet);
+            double latent = L0 + VAPOUR_LESS_WATER * t;
+            double miss = skin * (shellC - t) + film * (packageC - t) - evaporated * latent;
+            double fall =
+                    skin + film + evaporatedBySkin * latent + evaporated * VAPOUR_LESS_WATER;
+            double step = miss / fall;
+            t += step;
+            if (Math.abs(step) < 1e-9) {
+                break;
+            }
+        }
+        evaporation(t, wet);
+        skinC = t;
+    }
+
+    private void evaporation(double t, double wet) {
+        double psat = saturation.value(t);
+        double slope = saturation.slope(t);
+        double tissueDrop = lowering * psat - packagePa;
+        double filmDrop = psat - packagePa;
+        double width = FreeWater.ROUND_PA;
+        double tissue = tissueKgSPa * (1 - wet);
+        double up = FreeWater.positive(filmDrop, width);
+        double down = FreeWater.positive(-filmDrop, width);
+        double tissueSlope = tissue * FreeWater.positiveSlope(tissueDrop, width);
+        double filmSlope =
+                filmKgSPa
+                        * (wet * FreeWater.positiveSlope(filmDrop, width)
+                                + FreeWater.positiveSlope(-filmDrop, width));
+        filmWater = filmKgSPa * (wet * up - down);
+        evaporated = tissue * FreeWater.positive(tissueDrop, width) + filmWater;
+        evaporatedBySkin = (tissueSlope * lowering + filmSlope) * slope;
+        filmWaterBySkin = filmSlope * slope;
+        // By the package's vapour pressure; turned to humidity ratio where it is needed.
+        evaporatedByRatio = -tissueSlope - filmSlope;
+        filmWaterByRatio = -filmSlope;
+        evaporatedByWater = filmKgSPa * up - tissueKgSPa * FreeWater.positive(tissueDrop, width);
+        filmWaterByWater = filmKgSPa * up;
+    }
+
+    @Override
+    public void rates(
+            AirState air, Outside outside, double[] y, double[] rates, double[] flows) {
+        int start = branch.start;
+        int b = branch.blockAt(0);
+        double breathing = 0;
+        double flux = 0;
+        for (int i = 0; i < shells - 1; i++) {
+            double heat = shellKg[i] * breath[i].value(y[start + i]);
+            double next = between[i] * (y[start + i] - y[start + i + 1]);
+            rates[start + i] = (flux - next + heat) / capacity[i];
+            breathing += heat;
+            flux = next;
+        }
+        double heat = shellKg[shells - 1] * breath[shells - 1].value(y[b]);
+        breathing += heat;
+        packageAir(y[b + 2], y[b + 3]);
+        solveSkin(y[b], y[b + 1]);
+        double toSkin = skin * (y[b] - skinC);
+        double liquid = evaporated * WATER * skinC;
+        double out = packageKgSPa * (packagePa - air.vapourPa);
+        double toAir =
+                packageWK * (packageC - air.airC) + out * MoistAir.vapourEnthalpyJkg(packageC);
+        rates[b] = (flux - toSkin + heat) / capacity[shells - 1];
+        rates[b + 1] = -filmWater;
+        rates[b + 2] = (toSkin + liquid - toAir) / packageKg;
+        rates[b + 3] = (evaporated - out) / packageKg;
+        flows[flowAt + TO_AIR] = toAir;
+        flows[flowAt + VAPOUR] = out;
+        flows[flowAt + RESPIRATION] = breathing;
+        flows[flowAt + EVAPORATED] = evaporated;
+        flows[flowAt + LIQUID] = liquid;
+        if (gives) {
+            rates[AirState.ENTHALPY] += toAir;
+            rates[AirState.HUMIDITY] += out;
+        }
+    }
+
+    @Override
+    public void linearise(
+            AirState air, Outside outside, double airKg, double[] y, Tree tree) {
+        int start = branch.start;
+        int b = branch.blockAt(0);
+        for (int i = 0; i < shells; i++) {
+            breath[i].near(y[start + i]);
+            breathSlope[i] = shellKg[i] * breath[i].slope(y[start + i]);
+        }
+        saturation.near(skinC);
+        packageAir(y[b + 2], y[b + 3]);
+        solveSkin(y[b], y[b + 1]);
+        skinSlopes(y[b + 1], y[b + 3]);
+        for (int i = 0; i < shells - 1; i++) {
+            double left = i == 0 ? 0 : between[i - 1];
+            branch.before[i] = left / capacity[i];
+            branch.after[i] = between[i] / capacity[i];
+            branch.self[i] = (breathSlope[i] - left - between[i]) / capacity[i];
+        }
+        branch.blockByRun = between[shells - 2] / capacity[shells - 1];
+        writeBlock();
+        writeHub(air, airKg, tree);
+    }
+
+    private void skinSlopes(double waterKg, double ratio) {
+        double byPa = pressurePa * MoistAir.MOLAR_MASS_RATIO;
+        double sum = MoistAir.MOLAR_MASS_RATIO + ratio;
+        double paByRatio = byPa / (sum * sum);
+        double wetSlope = FreeWater.wetShareSlope(waterKg / fullKg) / fullKg;
+        evaporatedByRatio *= paByRatio;
+        filmWaterByRatio *= paByRatio;
+        evaporatedByWater *= wetSlope;
+        filmWaterByWater *= wetSlope;
+        double inverse = 1 / (packageJkgK + MoistAir.VAPOUR_J_KG_K * ratio);
+        packageCBy[2] = inverse;
+        packageCBy[3] = -MoistAir.vapourEnthalpyJkg(packageC) * inverse;
+        double latent = L0 + VAPOUR_LESS_WATER * skinC;
+        double fall =
+                skin + film + evaporatedBySkin * latent + evaporated * VAPOUR_LESS_WATER;
+        skinBy[0] = skin / fall;
+        skinBy[1] = -latent * evaporatedByWater / fall;
+        skinBy[2] = film * packageCBy[2] / fall;
+        skinBy[3] = (film * packageCBy[3] - latent * evaporatedByRatio) / fall;
+        for (int i = 0; i < 4; i++) {
+            double direct = i == 1 ? evaporatedByWater : i == 3 ? evaporatedByRatio : 0;
+            double directFilm = i == 1 ? filmWaterByWater : i == 3 ? filmWaterByRatio : 0;
+            evaporatedBy[i] = evaporatedBySkin * skinBy[i] + direct;
+            filmWaterBy[i] = filmWaterBySkin * skinBy[i] + directFilm;
+            liquidBy[i] = WATER * (evaporatedBy[i] * skinC + evaporated * skinBy[i]);
+        }
+        jRatio = packageKgSPa * paByRatio;
+    }
+
+    private void writeBlock() {
+        double shell = capacity[shells - 1];
+        double[] j = branch.inner;
+        for (int i = 0; i < 4; i++) {
+            double toSkinBy = skin * ((i == 0 ? 1 : 0) - skinBy[i]);
+            j[i] = -toSkinBy / shell;
+            j[4 + i] = -filmWaterBy[i];
+            j[8 + i] = (toSkinBy + liquidBy[i]) / packageKg;
+            j[12 + i] = evaporatedBy[i] / packageKg;
+        }
+        j[0] += (breathSlope[shells - 1] - between[shells - 2]) / shell;
+        j[15] -= jRatio / packageKg;
+    }
+
+    private void writeHub(AirState air, double airKg, Tree tree) {
+        double enthalpy = MoistAir.vapourEnthalpyJkg(packageC);
+        double out = packageKgSPa * (packagePa - air.vapourPa);
+        jAirRatio = -packageKgSPa * air.vapourByRatio;
+        double byPackageC = packageWK + out * MoistAir.VAPOUR_J_KG_K;
+        toAirBy[2] = byPackageC * packageCBy[2];
+        toAirBy[3] = byPackageC * packageCBy[3] + enthalpy * jRatio;
+        toAirByAirRatio = enthalpy * jAirRatio;
+        double toAirByRatio = -packageWK * air.airByRatio + toAirByAirRatio;
+        double toAirByEnthalpy = -packageWK * air.airByEnthalpy;
+        branch.inner[10] -= toAirBy[2] / packageKg;
+        branch.inner[11] -= toAirBy[3] / packageKg;
+        branch.byHub[4] = -toAirByEnthalpy / packageKg;
+        branch.byHub[5] = -toAirByRatio / packageKg;
+        branch.byHub[7] = -jAirRatio / packageKg;
+        double share = gives ? 1 / airKg : 0;
+        branch.onHub[2] = toAirBy[2] * share;
+        branch.onHub[3] = toAirBy[3] * share;
+        branch.onHub[7] = jRatio * share;
+        tree.hubByHub[0] += toAirByEnthalpy * share;
+        tree.hubByHub[1] += toAirByRatio * share;
+        tree.hubByHub[3] += jAirRatio * share;
+    }
+
+    @Override
+    public void timeSlope(
+            AirState air, Outside outside, double[] y, double[] rateSlope, double[] slope) {
+        // A lot feels time only through the chamber's air.
+    }
+
+    @Override
+    public void flowsAlong(AirState air, double[] v, double[] change) {
+        int b = branch.blockAt(0);
+        double breathing = 0;
+        for (int i = 0; i < shells; i++) {
+            breathing += breathSlope[i] * v[branch.start + i];
+        }
+        double evaporating = 0;
+        double liquid = 0;
+        for (int i = 0; i < 4; i++) {
+            evaporating += evaporatedBy[i] * v[b + i];
+            liquid += liquidBy[i] * v[b + i];
+        }
+        double ratio = v[AirState.HUMIDITY];
+        change[flowAt + RESPIRATION] = breathing;
+        change[flowAt + EVAPORATED] = evaporating;
+        change[flowAt + LIQUID] = liquid;
+        change[flowAt + VAPOUR] = jRatio * v[b + 3] + jAirRatio * ratio;
+        change[flowAt + TO_AIR] =
+                toAirBy[2] * v[b + 2]
+                        + toAirBy[3] * v[b + 3]
+                        - packageWK * air.airAlong(v)
+                        + toAirByAirRatio * ratio;
+    }
+}

@@ -1,0 +1,24 @@
+package org.wardon.heat.network;
+
+import org.wardon.heat.solver.Tree;
+
+/** Something that hangs on the chamber's air: writes its own rates and adds to those of the air. */
+interface Part {
+    /**
+     * Adds rates and writes flows. The hub's entries collect W and kg/s; the network divides them
+     * by the mass of the air.
+     */
+    void rates(AirState air, Outside outside, double[] y, double[] rates, double[] flows);
+
+    /** Writes J; what the part does to the air goes, divided by {@code airKg}, to the hub's rows. */
+    void linearise(AirState air, Outside outside, double airKg, double[] y, Tree tree);
+
+    /**
+     * Adds what the outside's change in time does, after {@link #linearise}; the hub's entries
+     * collect W/s and kg/s2.
+     */
+    void timeSlope(AirState air, Outside outside, double[] y, double[] rateSlope, double[] slope);
+
+    /** Writes the change of its flows along a direction, linearised at {@code air}. */
+    void flowsAlong(AirState air, double[] v, double[] change);
+}

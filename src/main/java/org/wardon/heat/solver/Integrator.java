@@ -1,0 +1,234 @@
+package org.wardon.heat.solver;
+
+import java.util.Arrays;
+
+/**
+ * Carries a state through time in steps as long as the error allows, and lands exactly on the times
+ * asked for and on the first crossing of a {@link Trigger}. Allocates nothing after construction.
+ */
+public final class Integrator {
+    private static final double SAFETY = 0.85;
+    private static final double SHORTEST = 0.15;
+    private static final double LONGEST = 6;
+    private static final int LANDINGS = 40;
+
+    private final Rosenbrock method;
+    private final double[] totals;
+    private final double shortestStep;
+    private double nextStep;
+    private double lastError = 1;
+    private final double[] edgeStep;
+    private int edge = 0;
+    private boolean fired;
+    private long steps;
+    private long rejected;
+
+    /**
+     * Makes room for a system.
+     *
+     * @param system what to integrate; its tree must be complete
+     * @param edges kinds of edges {@link #restart} will tell of, at least 1
+     * @param firstStep first step tried, above 0
+     * @param shortestStep a step the error control would make shorter than this stops the run
+     */
+    public Integrator(TreeSystem system, int edges, double firstStep, double shortestStep) {
+        this.method = new Rosenbrock(system);
+        this.totals = new double[system.flows()];
+        this.edgeStep = new double[edges];
+        Arrays.fill(edgeStep, firstStep);
+        this.nextStep = firstStep;
+        this.shortestStep = shortestStep;
+    }
+
+    /** Hears of each step taken. */
+    public interface StepListener {
+        /**
+         * Hears of a step.
+         *
+         * @param from start of the step
+         * @param to end of the step
+         * @param y state at its end
+         */
+        void stepped(double from, double to, double[] y);
+    }
+
+    /** A function of the state whose rise through zero ends an advance. */
+    public interface Trigger {
+        /**
+         * Returns the function.
+         *
+         * @param t time
+         * @param y state
+         * @return below 0 before the crossing
+         */
+        double value(double t, double[] y);
+
+        /**
+         * Returns how near above 0 is near enough.
+         *
+         * @return above 0
+         */
+        double tolerance();
+    }
+
+    /**
+     * Tells that the rates jump here, so that the step last used says little about the next; the
+     * step that went well behind the last edge of the same kind is tried.
+     *
+     * @param kind kind of edge, from 0
+     */
+    public void restart(int kind) {
+        nextStep = edgeStep[kind];
+        edge = kind;
+    }
+
+    /**
+     * Advances the state in place.
+     *
+     * @param t time of the state
+     * @param y state, changed in place
+     * @param until time to land on, after {@code t}
+     * @param trigger ends the advance early when it fires
+     * @param listener hears of each step
+     * @return the time reached: {@code until}, or that of the crossing
+     * @throws StepTooShort where no step long enough passes the error test
+     */
+    public double advance(
+            double t, double[] y, double until, Trigger trigger, StepListener listener) {
+        fired = false;
+        if (trigger.value(t, y) > 0) {
+            fired = true;
+            return t;
+        }
+        double now = t;
+        while (now < until && !fired) {
+            method.startFrom(now, y);
+            double left = until - now;
+            double h = acceptableStep(now, y, left);
+            fired = trigger.value(now + h, method.end) > 0;
+            double taken = fired ? land(now, y, h, trigger) : h;
+            double end = taken == left ? until : now + taken;
+            method.addFlows(taken, totals);
+            System.arraycopy(method.end, 0, y, 0, y.length);
+            steps++;
+            listener.stepped(now, end, y);
+            now = end;
+        }
+        return now;
+    }
+
+    private double acceptableStep(double now, double[] y, double left) {
+        double h = fit(nextStep, left);
+        boolean refused = false;
+        while (true) {
+            double error = method.tryStep(now, y, h);
+            if (error <= 1) {
+                chooseNext(h, error, refused);
+                return h;
+            }
+            rejected++;
+            refused = true;
+            double factor = error < 1e12 ? SAFETY / Math.cbrt(error) : SHORTEST;
+            h *= Math.max(SHORTEST, Math.min(factor, 0.8));
+            if (!(h > shortestStep)) {
+                throw new StepTooShort(now, h);
+            }
+        }
+    }
+
+    /** A step that lands on the end, or leaves room for a decent last one. */
+    private static double fit(double wanted, double left) {
+        if (wanted >= left) {
+            return left;
+        }
+        return wanted > 0.5 * left ? 0.5 * left : wanted;
+    }
+
+    /** Standard control; after a step that went worse than the one before, more carefully. */
+    private void chooseNext(double h, double error, boolean refused) {
+        double e = Math.max(error, 1e-6);
+        double factor = SAFETY / Math.cbrt(e);
+        if (edge < 0 && e > lastError) {
+            factor *= Math.pow(lastError / e, 0.2);
+        }
+        double proposed = h * Math.max(SHORTEST, Math.min(factor, refused ? 1 : LONGEST));
+        if (edge >= 0) {
+            edgeStep[edge] = proposed;
+            edge = -1;
+        }
+        // A step cut short to land on an event says nothing against the step wanted before.
+        nextStep = h < nextStep && !refused ? Math.max(proposed, nextStep) : proposed;
+        lastError = e;
+    }
+
+    /** Shortens the step until it ends just behind the crossing (Illinois rule of false position). */
+    private double land(double now, double[] y, double h, Trigger trigger) {
+        double wanted = 0.5 * trigger.tolerance();
+        double low = 0;
+        double lowMiss = trigger.value(now, y) - wanted;
+        double high = h;
+        double value = trigger.value(now + h, method.end);
+        double highMiss = value - wanted;
+        int side = 0;
+        for (int i = 0; i < LANDINGS; i++) {
+            boolean near = value > 0 && value <= trigger.tolerance();
+            if (near || high - low < shortestStep) {
+                break;
+            }
+            double guess = (low * highMiss - high * lowMiss) / (highMiss - lowMiss);
+            double margin = 0.01 * (high - low);
+            guess = Math.min(Math.max(guess, low + margin), high - margin);
+            method.tryStep(now, y, guess);
+            value = trigger.value(now + guess, method.end);
+            if (value > 0) {
+                high = guess;
+                highMiss = value - wanted;
+                lowMiss *= side > 0 ? 0.5 : 1;
+                side = 1;
+            } else {
+                low = guess;
+                lowMiss = value - wanted;
+                highMiss *= side < 0 ? 0.5 : 1;
+                side = -1;
+            }
+        }
+        method.tryStep(now, y, high);
+        return high;
+    }
+
+    /**
+     * Returns whether the trigger ended the last advance.
+     *
+     * @return true where it fired
+     */
+    public boolean fired() {
+        return fired;
+    }
+
+    /**
+     * Returns the integrals of the flows since the start.
+     *
+     * @return {@code [flow]}, live
+     */
+    public double[] totals() {
+        return totals;
+    }
+
+    /**
+     * Returns the number of steps taken.
+     *
+     * @return steps
+     */
+    public long steps() {
+        return steps;
+    }
+
+    /**
+     * Returns the number of steps tried and refused.
+     *
+     * @return steps
+     */
+    public long rejected() {
+        return rejected;
+    }
+}

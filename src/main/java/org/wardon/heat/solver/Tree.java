@@ -1,0 +1,127 @@
+package org.wardon.heat.solver;
+
+import java.util.ArrayList;
+import java.util.List;
+
+/**
+ * A Jacobian shaped like a tree: a hub of a few nodes and branches that hang on it. The state holds
+ * the hub first, then branch by branch. Solving costs as much as the tree has nodes; no matrix is
+ * formed.
+ *
+ * <p>Signs: with M = shift I - J, a branch's run is tridiagonal, so plain elimination towards the
+ * hub, a solve of the hub, and substitution back give the exact solution. No pivoting is done: the
+ * shift 1/(step γ) rules the diagonal of a step that passes its error test.
+ */
+public final class Tree {
+    private final int hub;
+    private final List<Branch> list = new ArrayList<>();
+    private Branch[] branches = new Branch[0];
+    private final double[] hubLu;
+    private int size;
+
+    /** J of the hub's rows by the hub, {@code [row * hub + column]}; written by the system. */
+    public final double[] hubByHub;
+
+    /**
+     * Starts a tree.
+     *
+     * @param hub nodes of the hub, at least 1
+     */
+    public Tree(int hub) {
+        this.hub = hub;
+        this.size = hub;
+        hubByHub = new double[hub * hub];
+        hubLu = new double[hub * hub];
+    }
+
+    /**
+     * Adds a branch behind the last one.
+     *
+     * @param run nodes of its run, 0 or more
+     * @param block nodes of its block, 1 or more
+     * @return the branch, whose J parts the system writes
+     */
+    public Branch addBranch(int run, int block) {
+        Branch branch = new Branch(size, run, block, hub);
+        size += branch.size();
+        list.add(branch);
+        branches = list.toArray(new Branch[0]);
+        return branch;
+    }
+
+    /**
+     * Returns the number of nodes.
+     *
+     * @return hub and branches
+     */
+    public int size() {
+        return size;
+    }
+
+    /**
+     * Returns the number of nodes of the hub.
+     *
+     * @return at least 1
+     */
+    public int hub() {
+        return hub;
+    }
+
+    Branch[] branches() {
+        return branches;
+    }
+
+    void factor(double shift) {
+        for (int i = 0; i < hub * hub; i++) {
+            hubLu[i] = -hubByHub[i];
+        }
+        for (int i = 0; i < hub; i++) {
+            hubLu[i * hub + i] += shift;
+        }
+        for (Branch branch : branches) {
+            if (branch.active()) {
+                branch.factor(shift, hubLu);
+            }
+        }
+        factorHub();
+    }
+
+    private void factorHub() {
+        for (int k = 0; k < hub; k++) {
+            double inverse = 1 / hubLu[k * hub + k];
+            hubLu[k * hub + k] = inverse;
+            for (int i = k + 1; i < hub; i++) {
+                double l = hubLu[i * hub + k] * inverse;
+                hubLu[i * hub + k] = l;
+                for (int j = k + 1; j < hub; j++) {
+                    hubLu[i * hub + j] -= l * hubLu[k * hub + j];
+                }
+            }
+        }
+    }
+
+    /** Solves (shift I - J) x = right-hand side, in place. */
+    void solve(double[] x) {
+        for (Branch branch : branches) {
+            if (branch.active()) {
+                branch.forward(x);
+            }
+        }
+        for (int i = 1; i < hub; i++) {
+            for (int k = 0; k < i; k++) {
+                x[i] -= hubLu[i * hub + k] * x[k];
+            }
+        }
+        for (int i = hub - 1; i >= 0; i--) {
+            for (int k = i + 1; k < hub; k++) {
+                x[i] -= hubLu[i * hub + k] * x[k];
+            }
+            x[i] *= hubLu[i * hub + i];
+        }
+        for (Branch branch : branches) {
+            if (branch.active()) {
+                branch.back(x);
+            }
+        }
+    }
+}
