@@ -53,8 +53,7 @@ public record ChamberRun(
      * @param humidifierKgH water a humidifier can add towards the wanted humidity, kg/h
      * @param neighbours air of the chambers next door, by id
      */
-    public record Extras(
-            double heaterW, double humidifierKgH, Map<String, AirSeries> neighbours) {
+    public record Extras(double heaterW, double humidifierKgH, Map<String, AirSeries> neighbours) {
         /** Nothing else. */
         public static final Extras NONE = new Extras(0, 0, Map.of());
 
@@ -120,7 +119,22 @@ public record ChamberRun(
      * @return the changed copy
      */
     public ChamberRun withWeather(Weather other) {
-        return new ChamberRun(chamberId, site, timeline, other, enclosure, coolers, setting, outages, stays, factors, start, durationS, doorMode, controlMode, extras);
+        return new ChamberRun(
+                chamberId,
+                site,
+                timeline,
+                other,
+                enclosure,
+                coolers,
+                setting,
+                outages,
+                stays,
+                factors,
+                start,
+                durationS,
+                doorMode,
+                controlMode,
+                extras);
     }
 
     /**
@@ -130,7 +144,22 @@ public record ChamberRun(
      * @return the changed copy
      */
     public ChamberRun withEnclosure(Enclosure other) {
-        return new ChamberRun(chamberId, site, timeline, weather, other, coolers, setting, outages, stays, factors, start, durationS, doorMode, controlMode, extras);
+        return new ChamberRun(
+                chamberId,
+                site,
+                timeline,
+                weather,
+                other,
+                coolers,
+                setting,
+                outages,
+                stays,
+                factors,
+                start,
+                durationS,
+                doorMode,
+                controlMode,
+                extras);
     }
 
     /**
@@ -140,7 +169,22 @@ public record ChamberRun(
      * @return the changed copy
      */
     public ChamberRun withCoolers(List<Cooler> other) {
-        return new ChamberRun(chamberId, site, timeline, weather, enclosure, other, setting, outages, stays, factors, start, durationS, doorMode, controlMode, extras);
+        return new ChamberRun(
+                chamberId,
+                site,
+                timeline,
+                weather,
+                enclosure,
+                other,
+                setting,
+                outages,
+                stays,
+                factors,
+                start,
+                durationS,
+                doorMode,
+                controlMode,
+                extras);
     }
 
     /**
@@ -150,7 +194,22 @@ public record ChamberRun(
      * @return the changed copy
      */
     public ChamberRun withSetting(Setting other) {
-        return new ChamberRun(chamberId, site, timeline, weather, enclosure, coolers, other, outages, stays, factors, start, durationS, doorMode, controlMode, extras);
+        return new ChamberRun(
+                chamberId,
+                site,
+                timeline,
+                weather,
+                enclosure,
+                coolers,
+                other,
+                outages,
+                stays,
+                factors,
+                start,
+                durationS,
+                doorMode,
+                controlMode,
+                extras);
     }
 
     /**
@@ -160,7 +219,22 @@ public record ChamberRun(
      * @return the changed copy
      */
     public ChamberRun withOutages(List<Outage> other) {
-        return new ChamberRun(chamberId, site, timeline, weather, enclosure, coolers, setting, other, stays, factors, start, durationS, doorMode, controlMode, extras);
+        return new ChamberRun(
+                chamberId,
+                site,
+                timeline,
+                weather,
+                enclosure,
+                coolers,
+                setting,
+                other,
+                stays,
+                factors,
+                start,
+                durationS,
+                doorMode,
+                controlMode,
+                extras);
     }
 
     /**
@@ -170,7 +244,22 @@ public record ChamberRun(
      * @return the changed copy
      */
     public ChamberRun withStays(List<Stay> other) {
-        return new ChamberRun(chamberId, site, timeline, weather, enclosure, coolers, setting, outages, other, factors, start, durationS, doorMode, controlMode, extras);
+        return new ChamberRun(
+                chamberId,
+                site,
+                timeline,
+                weather,
+                enclosure,
+                coolers,
+                setting,
+                outages,
+                other,
+                factors,
+                start,
+                durationS,
+                doorMode,
+                controlMode,
+                extras);
     }
 
     /**
@@ -180,7 +269,22 @@ public record ChamberRun(
      * @return the changed copy
      */
     public ChamberRun withFactors(Factors other) {
-        return new ChamberRun(chamberId, site, timeline, weather, enclosure, coolers, setting, outages, stays, other, start, durationS, doorMode, controlMode, extras);
+        return new ChamberRun(
+                chamberId,
+                site,
+                timeline,
+                weather,
+                enclosure,
+                coolers,
+                setting,
+                outages,
+                stays,
+                other,
+                start,
+                durationS,
+                doorMode,
+                controlMode,
+                extras);
     }
 
     /**
@@ -190,7 +294,22 @@ public record ChamberRun(
      * @return the changed copy
      */
     public ChamberRun withStart(Start other) {
-        return new ChamberRun(chamberId, site, timeline, weather, enclosure, coolers, setting, outages, stays, factors, other, durationS, doorMode, controlMode, extras);
+        return new ChamberRun(
+                chamberId,
+                site,
+                timeline,
+                weather,
+                enclosure,
+                coolers,
+                setting,
+                outages,
+                stays,
+                factors,
+                other,
+                durationS,
+                doorMode,
+                controlMode,
+                extras);
     }
 
     /**
@@ -200,7 +319,22 @@ public record ChamberRun(
      * @return the changed copy
      */
     public ChamberRun withDurationS(double other) {
-        return new ChamberRun(chamberId, site, timeline, weather, enclosure, coolers, setting, outages, stays, factors, start, other, doorMode, controlMode, extras);
+        return new ChamberRun(
+                chamberId,
+                site,
+                timeline,
+                weather,
+                enclosure,
+                coolers,
+                setting,
+                outages,
+                stays,
+                factors,
+                start,
+                other,
+                doorMode,
+                controlMode,
+                extras);
     }
 
     /**
@@ -210,7 +344,22 @@ public record ChamberRun(
      * @return the changed copy
      */
     public ChamberRun withDoorMode(DoorMode other) {
-        return new ChamberRun(chamberId, site, timeline, weather, enclosure, coolers, setting, outages, stays, factors, start, durationS, other, controlMode, extras);
+        return new ChamberRun(
+                chamberId,
+                site,
+                timeline,
+                weather,
+                enclosure,
+                coolers,
+                setting,
+                outages,
+                stays,
+                factors,
+                start,
+                durationS,
+                other,
+                controlMode,
+                extras);
     }
 
     /**
@@ -220,7 +369,9 @@ public record ChamberRun(
      * @return the changed copy
      */
     public ChamberRun withControlMode(ControlMode other) {
-        return new ChamberRun(chamberId, site, timeline, weather, enclosure, coolers, setting, outages, stays, factors, start, durationS, doorMode, other, extras);
+        return new ChamberRun(
+                chamberId, site, timeline, weather, enclosure, coolers, setting, outages, stays,
+                factors, start, durationS, doorMode, other, extras);
     }
 
     /**
@@ -230,6 +381,21 @@ public record ChamberRun(
      * @return the changed copy
      */
     public ChamberRun withExtras(Extras other) {
-        return new ChamberRun(chamberId, site, timeline, weather, enclosure, coolers, setting, outages, stays, factors, start, durationS, doorMode, controlMode, other);
+        return new ChamberRun(
+                chamberId,
+                site,
+                timeline,
+                weather,
+                enclosure,
+                coolers,
+                setting,
+                outages,
+                stays,
+                factors,
+                start,
+                durationS,
+                doorMode,
+                controlMode,
+                other);
     }
 }

@@ -12,7 +12,7 @@ import org.wardon.heat.solver.Tree;
  * One cooler on the chamber's air. The thermostat switches it, or it follows the air within the
  * band; its own states, such as water on its coil, are a branch.
  */
-final class CoolerPart implements Part {
+public final class CoolerPart implements Part {
     /** Flows: enthalpy taken from the air, W. */
     static final int REMOVED = 0;
 
@@ -37,6 +37,9 @@ final class CoolerPart implements Part {
     private static final double WARMEST_C = 55;
     private static final double WETTEST = 0.08;
     private static final double SHIFT_K = 0.01;
+
+    /** Error of an own state that counts as 1: water on a coil, kg. */
+    private static final double OWN_TOLERANCE = 0.005;
 
     private final CoolerLaw law;
     private final int flowAt;
@@ -65,8 +68,7 @@ final class CoolerPart implements Part {
     private final double[] removedByOwn;
 
     /** What a cooler follows. {@code fanAlwaysW} is the fan that runs through rest and defrost. */
-    record Following(
-            boolean modulating, double followedC, double bandK, double fanAlwaysW) {}
+    record Following(boolean modulating, double followedC, double bandK, double fanAlwaysW) {}
 
     CoolerPart(Tree tree, int flowAt, CoolerLaw law, Following following) {
         this.law = law;
@@ -84,54 +86,115 @@ final class CoolerPart implements Part {
         this.removedByOwn = new double[own];
     }
 
-    void power(boolean available) {
+    /**
+     * Tells whether there is power.
+     *
+     * @param available true where there is
+     */
+    public void power(boolean available) {
         powered = available;
     }
 
-    void switchOn(boolean running) {
+    /**
+     * Switches it by the thermostat.
+     *
+     * @param running true for on
+     */
+    public void switchOn(boolean running) {
         on = running;
     }
 
-    boolean on() {
+    /**
+     * Returns whether the thermostat has it on.
+     *
+     * @return true for on
+     */
+    public boolean on() {
         return on;
     }
 
-    boolean modulating() {
+    /**
+     * Returns whether it follows the air within the band.
+     *
+     * @return false where it is switched on and off
+     */
+    public boolean modulating() {
         return modulating;
     }
 
-    double followedC() {
+    /**
+     * Returns the air temperature it keeps.
+     *
+     * @return °C
+     */
+    public double followedC() {
         return followedC;
     }
 
-    double bandK() {
+    /**
+     * Returns the half width of its band.
+     *
+     * @return K
+     */
+    public double bandK() {
         return bandK;
     }
 
-    /** Starts or ends a defrost; the heater warms the chamber. */
-    void defrost(boolean running, double heaterW) {
+    /**
+     * Starts or ends a defrost; the heater warms the chamber.
+     *
+     * @param running true for the start
+     * @param heaterW heater, W
+     */
+    public void defrost(boolean running, double heaterW) {
         defrosting = running;
         defrostW = running ? heaterW : 0;
     }
 
-    boolean defrosting() {
+    /**
+     * Returns whether it is being defrosted.
+     *
+     * @return true while it is
+     */
+    public boolean defrosting() {
         return defrosting;
     }
 
-    boolean powered() {
+    /**
+     * Returns whether it has power.
+     *
+     * @return true where it has
+     */
+    public boolean powered() {
         return powered;
     }
 
-    /** What it did when it was last asked. */
-    CoolerEffect effect() {
+    /**
+     * Returns what it did when it was last asked.
+     *
+     * @return live
+     */
+    public CoolerEffect effect() {
         return effect;
+    }
+
+    void tolerances(double[] tolerances) {
+        for (int i = 0; i < own; i++) {
+            tolerances[branch[0].blockAt(i)] = OWN_TOLERANCE;
+        }
     }
 
     int flow(int kind) {
         return flowAt + kind;
     }
 
-    double waterKg(double[] y) {
+    /**
+     * Returns the water on its coil.
+     *
+     * @param y state
+     * @return kg
+     */
+    public double waterKg(double[] y) {
         double sum = 0;
         for (int i = 0; i < own; i++) {
             sum += y[branch[0].blockAt(i)];
@@ -150,8 +213,9 @@ final class CoolerPart implements Part {
     }
 
     private void ask(AirState air, Outside outside, double[] y) {
-        in.airC = Math.min(Math.max(air.airC, COLDEST_C), WARMEST_C);
-        in.humidityRatio = Math.min(Math.max(air.ratio, 0), WETTEST);
+        // A refused step may ask beyond what a coil knows; the parts around it then refuse it.
+        in.airC = air.airC > COLDEST_C ? Math.min(air.airC, WARMEST_C) : COLDEST_C;
+        in.humidityRatio = air.ratio > 0 ? Math.min(air.ratio, WETTEST) : 0;
         in.outdoorC = outside.outdoors.airC;
         in.outdoorHumidityRatio = outside.outdoors.ratio;
         in.run = run(air.airC);
@@ -171,8 +235,7 @@ final class CoolerPart implements Part {
     @Override
     public void rates(AirState air, Outside outside, double[] y, double[] rates, double[] flows) {
         ask(air, outside, y);
-        double removed =
-                effect.sensibleW + effect.vapourKgS * MoistAir.vapourEnthalpyJkg(air.airC);
+        double removed = effect.sensibleW + effect.vapourKgS * MoistAir.vapourEnthalpyJkg(air.airC);
         double heater = powered ? defrostW : 0;
         flows[flowAt + REMOVED] = removed;
         flows[flowAt + VAPOUR] = effect.vapourKgS;

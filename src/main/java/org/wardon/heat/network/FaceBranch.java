@@ -37,8 +37,7 @@ final class FaceBranch implements Part {
     static final int FLOWS = 7;
 
     private static final double EVAPORATION = MoistAir.EVAPORATION_J_KG;
-    private static final double VAPOUR_LESS_WATER =
-            MoistAir.VAPOUR_J_KG_K - MoistAir.WATER_J_KG_K;
+    private static final double VAPOUR_LESS_WATER = MoistAir.VAPOUR_J_KG_K - MoistAir.WATER_J_KG_K;
 
     private final Branch branch;
     private final int flowAt;
@@ -138,6 +137,13 @@ final class FaceBranch implements Part {
         return y[branch.blockAt(1)];
     }
 
+    void tolerances(double airK, double[] tolerances) {
+        for (int i = 0; i < grid.capacity.length; i++) {
+            tolerances[branch.start + i] = 2 * airK;
+        }
+        tolerances[branch.blockAt(1)] = 0.05 * areaM2 * FreeWater.FULL_KG_M2;
+    }
+
     int flow(int kind) {
         return flowAt + kind;
     }
@@ -185,8 +191,7 @@ final class FaceBranch implements Part {
     }
 
     @Override
-    public void rates(
-            AirState air, Outside outside, double[] y, double[] rates, double[] flows) {
+    public void rates(AirState air, Outside outside, double[] y, double[] rates, double[] flows) {
         int start = branch.start;
         double flux = outer * (beyondC - y[start]);
         flows[flowAt + FROM_BEYOND] = areaM2 * flux;
@@ -215,8 +220,7 @@ final class FaceBranch implements Part {
     }
 
     @Override
-    public void linearise(
-            AirState air, Outside outside, double airKg, double[] y, Tree tree) {
+    public void linearise(AirState air, Outside outside, double airKg, double[] y, Tree tree) {
         int surface = branch.blockAt(0);
         double surfaceC = y[surface];
         saturation.near(surfaceC);

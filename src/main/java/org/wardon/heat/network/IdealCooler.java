@@ -85,8 +85,7 @@ final class IdealCooler implements Part {
                 sensibleByAirC * FreeWater.positive(wetness, 1e-5) * perSensible
                         - vapourByRatio * saturatedSlope;
         double enthalpy = MoistAir.vapourEnthalpyJkg(air.airC);
-        removedByAirC =
-                sensibleByAirC + vapourByAirC * enthalpy + vapour * MoistAir.VAPOUR_J_KG_K;
+        removedByAirC = sensibleByAirC + vapourByAirC * enthalpy + vapour * MoistAir.VAPOUR_J_KG_K;
         removedByRatio = vapourByRatio * enthalpy;
         tree.hubByHub[0] -= removedByAirC * air.airByEnthalpy / airKg;
         tree.hubByHub[1] -= (removedByAirC * air.airByRatio + removedByRatio) / airKg;

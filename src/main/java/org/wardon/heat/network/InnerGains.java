@@ -162,8 +162,7 @@ final class InnerGains implements Part {
                 PeopleHeat.LATENT_SHARE * peopleByAirC / MoistAir.vapourEnthalpyJkg(BODY_C);
         double waterByAirC = breathByAirC + humidifierByAirC;
         tree.hubByHub[0] += heatByAirC * air.airByEnthalpy / airKg;
-        tree.hubByHub[1] +=
-                (heatByAirC * air.airByRatio + humidifierByRatio * waterHeat) / airKg;
+        tree.hubByHub[1] += (heatByAirC * air.airByRatio + humidifierByRatio * waterHeat) / airKg;
         tree.hubByHub[2] += waterByAirC * air.airByEnthalpy / airKg;
         tree.hubByHub[3] += (waterByAirC * air.airByRatio + humidifierByRatio) / airKg;
     }

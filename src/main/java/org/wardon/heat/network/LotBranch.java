@@ -1,11 +1,9 @@
 package org.wardon.heat.network;
 
 import org.wardon.air.MoistAir;
-import org.wardon.air.SaturatedAir;
 import org.wardon.heat.laws.FreeWater;
 import org.wardon.heat.solver.Branch;
 import org.wardon.heat.solver.Tree;
-import org.wardon.lots.AirFilm;
 import org.wardon.lots.Lot;
 import org.wardon.lots.Packing;
 import org.wardon.lots.RespirationLaw;
@@ -21,7 +19,7 @@ import org.wardon.lots.Shells;
  * those at arrival: a lot that lost 5 % of its water would differ by as much, less than any of them
  * is known.
  */
-final class LotBranch implements Part {
+public final class LotBranch implements Part {
     /** Flows of a lot: heat and enthalpy to the chamber's air, W. */
     static final int TO_AIR = 0;
 
@@ -41,11 +39,12 @@ final class LotBranch implements Part {
 
     private static final double PACKAGE_AIR_C = 10;
     private static final double L0 = MoistAir.EVAPORATION_J_KG;
-    private static final double VAPOUR_LESS_WATER =
-            MoistAir.VAPOUR_J_KG_K - MoistAir.WATER_J_KG_K;
+    private static final double VAPOUR_LESS_WATER = MoistAir.VAPOUR_J_KG_K - MoistAir.WATER_J_KG_K;
     private static final double WATER = MoistAir.WATER_J_KG_K;
 
+    /** Its place in the state. */
     final Branch branch;
+
     private final int flowAt;
     private final double pressurePa;
     private final int shells;
@@ -139,8 +138,12 @@ final class LotBranch implements Part {
         breathe(lot.respiration());
     }
 
-    /** Changes the law of respiration. */
-    void breathe(RespirationLaw law) {
+    /**
+     * Changes the law of respiration.
+     *
+     * @param law the law from now on
+     */
+    public void breathe(RespirationLaw law) {
         for (int i = 0; i < shells; i++) {
             breath[i] =
                     new LocalCurve(
@@ -150,17 +153,34 @@ final class LotBranch implements Part {
         }
     }
 
-    /** Makes the lot a shadow, or a lot again. */
-    void give(boolean toTheAir) {
+    /**
+     * Makes the lot a shadow, or a lot again.
+     *
+     * @param toTheAir false for a shadow
+     */
+    public void give(boolean toTheAir) {
         gives = toTheAir;
     }
 
-    boolean gives() {
+    /**
+     * Returns whether the lot gives to the air.
+     *
+     * @return false for a shadow
+     */
+    public boolean gives() {
         return gives;
     }
 
-    /** Writes an even lot: pulp, package at the same temperature with the chamber's humidity. */
-    void arrive(double pulpC, double waterKg, double ratio, double[] y) {
+    /**
+     * Writes an even lot: package at the temperature of the flesh with the chamber's humidity; from
+     * then on it takes part.
+     *
+     * @param pulpC flesh, °C
+     * @param waterKg free water, kg
+     * @param ratio humidity ratio of the chamber's air, kg/kg
+     * @param y state, changed in place
+     */
+    public void arrive(double pulpC, double waterKg, double ratio, double[] y) {
         for (int i = 0; i < shells; i++) {
             y[branch.start + i] = pulpC;
         }
@@ -170,13 +190,76 @@ final class LotBranch implements Part {
         y[b + 1] = waterKg;
         y[b + 2] = packageJkgK * pulpC + packageRatio * MoistAir.vapourEnthalpyJkg(pulpC);
         y[b + 3] = packageRatio;
+        branch.activate(true);
     }
 
-    int flow(int kind) {
-        return flowAt + kind;
+    void tolerances(double lotK, double airK, double[] tolerances) {
+        int b = branch.blockAt(0);
+        for (int i = 0; i < shells; i++) {
+            tolerances[branch.start + i] = lotK;
+        }
+        tolerances[b + 1] = 0.05 * fullKg;
+        tolerances[b + 2] = airK * packageJkgK;
+        tolerances[b + 3] = airK * 5e-4;
     }
 
-    double meanC(double[] y) {
+    /**
+     * Returns the heat of respiration.
+     *
+     * @param totals integrals of the flows
+     * @return J
+     */
+    public double respirationJ(double[] totals) {
+        return totals[flowAt + RESPIRATION];
+    }
+
+    /**
+     * Returns the vapour that left skin and free water.
+     *
+     * @param totals integrals of the flows
+     * @return kg
+     */
+    public double evaporatedKg(double[] totals) {
+        return totals[flowAt + EVAPORATED];
+    }
+
+    /**
+     * Returns the enthalpy that water had as a liquid.
+     *
+     * @param totals integrals of the flows
+     * @return J
+     */
+    public double liquidJ(double[] totals) {
+        return totals[flowAt + LIQUID];
+    }
+
+    /**
+     * Returns the vapour that reached the chamber's air.
+     *
+     * @param totals integrals of the flows
+     * @return kg
+     */
+    public double vapourKg(double[] totals) {
+        return totals[flowAt + VAPOUR];
+    }
+
+    /**
+     * Returns the enthalpy that reached the chamber's air.
+     *
+     * @param totals integrals of the flows
+     * @return J
+     */
+    public double toAirJ(double[] totals) {
+        return totals[flowAt + TO_AIR];
+    }
+
+    /**
+     * Returns the mass average.
+     *
+     * @param y state
+     * @return °C
+     */
+    public double meanC(double[] y) {
         double heat = 0;
         double whole = 0;
         for (int i = 0; i < shells; i++) {
@@ -186,15 +269,33 @@ final class LotBranch implements Part {
         return heat / whole;
     }
 
-    double surfaceC(double[] y) {
+    /**
+     * Returns the outermost shell.
+     *
+     * @param y state
+     * @return °C
+     */
+    public double surfaceC(double[] y) {
         return y[branch.start + shells - 1];
     }
 
-    double coreC(double[] y) {
+    /**
+     * Returns the innermost shell.
+     *
+     * @param y state
+     * @return °C
+     */
+    public double coreC(double[] y) {
         return y[branch.start];
     }
 
-    double coldestC(double[] y) {
+    /**
+     * Returns the coldest shell.
+     *
+     * @param y state
+     * @return °C
+     */
+    public double coldestC(double[] y) {
         double least = y[branch.start];
         for (int i = 1; i < shells; i++) {
             least = Math.min(least, y[branch.start + i]);
@@ -202,7 +303,13 @@ final class LotBranch implements Part {
         return least;
     }
 
-    double warmestC(double[] y) {
+    /**
+     * Returns the warmest shell.
+     *
+     * @param y state
+     * @return °C
+     */
+    public double warmestC(double[] y) {
         double most = y[branch.start];
         for (int i = 1; i < shells; i++) {
             most = Math.max(most, y[branch.start + i]);
@@ -210,22 +317,45 @@ final class LotBranch implements Part {
         return most;
     }
 
-    double waterKg(double[] y) {
+    /**
+     * Returns the free water on the lot.
+     *
+     * @param y state
+     * @return kg
+     */
+    public double waterKg(double[] y) {
         return y[branch.blockAt(1)];
     }
 
-    double wetShare(double[] y) {
+    /**
+     * Returns the share of the skin under free water.
+     *
+     * @param y state
+     * @return 0 to 1
+     */
+    public double wetShare(double[] y) {
         return FreeWater.wetShare(waterKg(y) / fullKg);
     }
 
-    /** Relative humidity of package air at its own temperature, 0 to 1 and a little above. */
-    double humidityFraction(double[] y) {
+    /**
+     * Returns the relative humidity of package air at its own temperature.
+     *
+     * @param y state
+     * @return 0 to 1 and a little above
+     */
+    public double humidityFraction(double[] y) {
         int b = branch.blockAt(0);
         packageAir(y[b + 2], y[b + 3]);
         return packagePa / Saturation.pressurePa(packageC);
     }
 
-    double heatJ(double[] y) {
+    /**
+     * Returns the heat in the shells.
+     *
+     * @param y state
+     * @return J from 0 °C
+     */
+    public double heatJ(double[] y) {
         double sum = 0;
         for (int i = 0; i < shells; i++) {
             sum += capacity[i] * y[branch.start + i];
@@ -233,15 +363,33 @@ final class LotBranch implements Part {
         return sum;
     }
 
-    double packageHeatJ(double[] y) {
+    /**
+     * Returns the enthalpy of package and package air.
+     *
+     * @param y state
+     * @return J
+     */
+    public double packageHeatJ(double[] y) {
         return packageKg * y[branch.blockAt(2)];
     }
 
-    double packageWaterKg(double[] y) {
+    /**
+     * Returns the vapour in the package air.
+     *
+     * @param y state
+     * @return kg
+     */
+    public double packageWaterKg(double[] y) {
         return packageKg * y[branch.blockAt(3)];
     }
 
-    double respirationW(double[] y) {
+    /**
+     * Returns the heat of respiration.
+     *
+     * @param y state
+     * @return W
+     */
+    public double respirationW(double[] y) {
         double sum = 0;
         for (int i = 0; i < shells; i++) {
             sum += shellKg[i] * breath[i].value(y[branch.start + i]);
@@ -262,8 +410,7 @@ final class LotBranch implements Part {
             evaporation(t, wet);
             double latent = L0 + VAPOUR_LESS_WATER * t;
             double miss = skin * (shellC - t) + film * (packageC - t) - evaporated * latent;
-            double fall =
-                    skin + film + evaporatedBySkin * latent + evaporated * VAPOUR_LESS_WATER;
+            double fall = skin + film + evaporatedBySkin * latent + evaporated * VAPOUR_LESS_WATER;
             double step = miss / fall;
             t += step;
             if (Math.abs(step) < 1e-9) {
@@ -300,8 +447,7 @@ final class LotBranch implements Part {
     }
 
     @Override
-    public void rates(
-            AirState air, Outside outside, double[] y, double[] rates, double[] flows) {
+    public void rates(AirState air, Outside outside, double[] y, double[] rates, double[] flows) {
         int start = branch.start;
         int b = branch.blockAt(0);
         double breathing = 0;
@@ -338,8 +484,7 @@ final class LotBranch implements Part {
     }
 
     @Override
-    public void linearise(
-            AirState air, Outside outside, double airKg, double[] y, Tree tree) {
+    public void linearise(AirState air, Outside outside, double airKg, double[] y, Tree tree) {
         int start = branch.start;
         int b = branch.blockAt(0);
         for (int i = 0; i < shells; i++) {
@@ -374,8 +519,7 @@ final class LotBranch implements Part {
         packageCBy[2] = inverse;
         packageCBy[3] = -MoistAir.vapourEnthalpyJkg(packageC) * inverse;
         double latent = L0 + VAPOUR_LESS_WATER * skinC;
-        double fall =
-                skin + film + evaporatedBySkin * latent + evaporated * VAPOUR_LESS_WATER;
+        double fall = skin + film + evaporatedBySkin * latent + evaporated * VAPOUR_LESS_WATER;
         skinBy[0] = skin / fall;
         skinBy[1] = -latent * evaporatedByWater / fall;
         skinBy[2] = film * packageCBy[2] / fall;

@@ -10,7 +10,9 @@ interface Part {
      */
     void rates(AirState air, Outside outside, double[] y, double[] rates, double[] flows);
 
-    /** Writes J; what the part does to the air goes, divided by {@code airKg}, to the hub's rows. */
+    /**
+     * Writes J; what the part does to the air goes, divided by {@code airKg}, to the hub's rows.
+     */
     void linearise(AirState air, Outside outside, double airKg, double[] y, Tree tree);
 
     /**

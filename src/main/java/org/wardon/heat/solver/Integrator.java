@@ -59,7 +59,8 @@ public final class Integrator {
          *
          * @param t time
          * @param y state
-         * @return below 0 before the crossing
+         * @return below 0 before the crossing; negative infinity while it is not armed, which must
+         *     change only where an advance ends
          */
         double value(double t, double[] y);
 
@@ -161,7 +162,9 @@ public final class Integrator {
         lastError = e;
     }
 
-    /** Shortens the step until it ends just behind the crossing (Illinois rule of false position). */
+    /**
+     * Shortens the step until it ends just behind the crossing (Illinois rule of false position).
+     */
     private double land(double now, double[] y, double h, Trigger trigger) {
         double wanted = 0.5 * trigger.tolerance();
         double low = 0;
@@ -170,6 +173,10 @@ public final class Integrator {
         double value = trigger.value(now + h, method.end);
         double highMiss = value - wanted;
         int side = 0;
+        if (Double.isInfinite(lowMiss)) {
+            // Not armed before the end of this step: it fires there.
+            return h;
+        }
         for (int i = 0; i < LANDINGS; i++) {
             boolean near = value > 0 && value <= trigger.tolerance();
             if (near || high - low < shortestStep) {

@@ -8,10 +8,10 @@ import java.util.Arrays;
  *
  * <p>Source: Sandu, Verwer, Blom, Spee, Carmichael and Potra 1997, Benchmarking stiff ODE solvers
  * for atmospheric chemistry problems II, Atmospheric Environment 31 (coefficients from memory of
- * it; {@code RosenbrockOrderTest} guards them). Written in the form without matrix products:
- * {@code (1/(h γ) I - J) u_i = f(t + α_i h, y + Σ a_ij u_j) + Σ c_ij/h u_j + h γ_i f_t}, with γ =
- * 1/2; a31 = 2, a41 = 2, a43 = 1, other a 0; c21 = 4, c31 = 1, c32 = -1, c41 = 1, c42 = -1, c43 =
- * -8/3; α = 0 0 1 1; γ_i = 1/2 3/2 0 0; new state y + 2 u_1 + u_3 + u_4; error u_4.
+ * it; {@code RosenbrockOrderTest} guards them). Written in the form without matrix products: {@code
+ * (1/(h γ) I - J) u_i = f(t + α_i h, y + Σ a_ij u_j) + Σ c_ij/h u_j + h γ_i f_t}, with γ = 1/2; a31
+ * = 2, a41 = 2, a43 = 1, other a 0; c21 = 4, c31 = 1, c32 = -1, c41 = 1, c42 = -1, c43 = -8/3; α =
+ * 0 0 1 1; γ_i = 1/2 3/2 0 0; new state y + 2 u_1 + u_3 + u_4; error u_4.
  *
  * <p>Flows g are integrated as if they were further unknowns, which needs no linear algebra: their
  * stages sum to {@code h (Σ b_i (g_i + h γ_i g_t) + g_y · Σ b_i u_i)} with b = 5/6, -1/6, -1/6, 1/2

@@ -1,6 +1,8 @@
 package org.wardon.heat.solver;
 
-/** The error control asks for a step shorter than makes sense: the rates are not smooth, or huge. */
+/**
+ * The error control asks for a step shorter than makes sense: the rates are not smooth, or huge.
+ */
 public final class StepTooShort extends RuntimeException {
     private static final long serialVersionUID = 1L;
 

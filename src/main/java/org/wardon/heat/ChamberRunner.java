@@ -1,0 +1,425 @@
+package org.wardon.heat;
+
+import java.util.ArrayList;
+import java.util.Comparator;
+import java.util.List;
+import java.util.Locale;
+import org.wardon.cooling.Compressor;
+import org.wardon.cooling.CoolerEffect;
+import org.wardon.errors.Progress;
+import org.wardon.errors.RunStopped;
+import org.wardon.heat.network.ChamberNetwork;
+import org.wardon.heat.network.LotBranch;
+import org.wardon.heat.network.Terms;
+import org.wardon.heat.solver.Integrator;
+import org.wardon.heat.solver.StepTooShort;
+import org.wardon.lots.BurntSugar;
+
+/** Takes one chamber through its run: edges, thermostats, hours, and the steps between them. */
+final class ChamberRunner implements Integrator.StepListener {
+    private static final double COLDEST_C = -60;
+    private static final double WARMEST_C = 90;
+    private static final double SHORTEST_STEP_S = 1e-5;
+    private static final double FIRST_STEP_S = 2;
+
+    /** Kinds of edges whose first steps are remembered apart. */
+    private static final int OPENED = 0;
+
+    private static final int SHUT = 1;
+    private static final int STARTED = 2;
+    private static final int RESTED = 3;
+    private static final int OTHER = 4;
+    private static final int EDGES = 5;
+
+    /** Packages take this much more room than the produce in them (assumption). */
+    private static final double PACKAGE_ROOM = 1.05;
+
+    private static final double LEAST_FREE_SHARE = 0.05;
+
+    private final ChamberRun run;
+    private final ChamberNetwork network;
+    private final Terms terms;
+    private final Integrator integrator;
+    private final double[] totals;
+    private final SwitchedCoolers thermostats;
+    private final EnergyBudget budget;
+    private final Carbon carbon;
+    private final HourRecorder hours;
+    private final LotRecorder[] lots;
+    private final List<Edge> edges;
+    private final double usedS;
+    private final Spans outages;
+    private final Spans tripped;
+    private final Spans wetFaces;
+    private final Spans icing;
+    private double[] y;
+    private int nextEdge;
+    private boolean powered = true;
+    private boolean awaitsFirstOpening;
+    private double co2AtFirstOpening;
+    private long openings;
+    private double lastExchanged;
+    private double lastRespiration;
+    private double mixedJ;
+    private double mixedKg;
+    private final double startLayersJ;
+    private final double startStructureJ;
+    private final double startAirJ;
+    private final double startAirKg;
+
+    ChamberRunner(ChamberRun run, ChamberNetwork network, double[] start, Accuracy accuracy) {
+        this.run = run;
+        this.network = network;
+        this.terms = network.terms();
+        this.y = start;
+        network.accuracy(accuracy.lotK(), accuracy.airK());
+        integrator = new Integrator(network, EDGES, FIRST_STEP_S, SHORTEST_STEP_S);
+        totals = integrator.totals();
+        thermostats = new SwitchedCoolers(run, network);
+        budget = new EnergyBudget(run, network);
+        double pressure = RunCompiler.pressurePa(run);
+        carbon = new Carbon(pressure);
+        int rows = RunCompiler.hours(run) + 2;
+        hours = new HourRecorder(network, pressure, rows);
+        lots = new LotRecorder[run.stays().size()];
+        for (int i = 0; i < lots.length; i++) {
+            lots[i] = new LotRecorder(run.stays().get(i), network.lot(i), rows + 1);
+        }
+        edges = Schedule.of(run);
+        usedS = Schedule.useS(run);
+        String id = run.chamberId();
+        outages = new Spans(CourseEvent.Kind.OUTAGE, id);
+        tripped = new Spans(CourseEvent.Kind.TRIPPED, id);
+        wetFaces = new Spans(CourseEvent.Kind.WET_FACES, id);
+        icing = new Spans(CourseEvent.Kind.ICES_UP, id);
+        startLayersJ = network.layersJ(y);
+        startStructureJ = network.structureJ(y);
+        startAirJ = network.airKg() * network.enthalpyJkg(y);
+        startAirKg = network.airKg() * network.ratio(y);
+    }
+
+    /** Runs to the end. */
+    Course run(Progress progress) {
+        double t = 0;
+        int hour = 0;
+        passEdges(t);
+        while (t < run.durationS()) {
+            double hourEnd = Math.min((hour + 1) * 3600.0, run.durationS());
+            double until = Math.min(hourEnd, Math.min(nextEdgeS(), thermostats.nextUnlock(t)));
+            until = Math.min(until, budget.nextCheck(t, totals));
+            t = advance(t, until);
+            passEdges(t);
+            budget.check(t, totals);
+            if (t >= hourEnd) {
+                hour++;
+                network.hour(hour);
+                endHour(t);
+                progress.at("heat", t / run.durationS());
+            }
+        }
+        return course();
+    }
+
+    private double nextEdgeS() {
+        return nextEdge < edges.size() ? edges.get(nextEdge).atS() : Double.POSITIVE_INFINITY;
+    }
+
+    private double advance(double from, double until) {
+        try {
+            double t = integrator.advance(from, y, until, thermostats, this);
+            if (integrator.fired()) {
+                integrator.restart(thermostats.fire(t, y) ? STARTED : RESTED);
+            }
+            return t;
+        } catch (StepTooShort stuck) {
+            throw new RunStopped(
+                    stuck.time(),
+                    run.chamberId(),
+                    String.format(
+                            Locale.ROOT,
+                            "the rates are not smooth, %s; air %.2f °C",
+                            stuck.getMessage(),
+                            network.airC(y)));
+        }
+    }
+
+    @Override
+    public void stepped(double from, double to, double[] state) {
+        double airC = network.airC(state);
+        if (!(airC > COLDEST_C && airC < WARMEST_C)) {
+            stop(to, "air temperature", airC);
+        }
+        hours.stepped(state);
+        for (int i = 0; i < lots.length; i++) {
+            lots[i].stepped(to, state, totals);
+        }
+        double exchanged = terms.exchanged(totals);
+        double respiration = respirationJ();
+        carbon.step(
+                to - from,
+                (respiration - lastRespiration) / BurntSugar.JOULE_PER_KG_CO2 / (to - from),
+                network.cubicMetres((exchanged - lastExchanged) / (to - from)),
+                airC,
+                network.freeM3());
+        lastExchanged = exchanged;
+        lastRespiration = respiration;
+        boolean tripping = false;
+        for (int i = 0; i < network.coolerCount(); i++) {
+            CoolerEffect effect = network.cooler(i).effect();
+            tripping |= effect.tripped && network.cooler(i).powered();
+        }
+        tripped.is(to, tripping);
+    }
+
+    /** Heat given off so far by lots while they were in the chamber. */
+    private double respirationJ() {
+        double sum = 0;
+        for (int i = 0; i < lots.length; i++) {
+            sum +=
+                    lots[i].present()
+                            ? network.lot(i).respirationJ(totals)
+                            : lots[i].totals().respirationJ();
+        }
+        return sum;
+    }
+
+    private void stop(double t, String what, double valueC) {
+        throw new RunStopped(
+                t,
+                run.chamberId(),
+                String.format(
+                        Locale.ROOT,
+                        "%s would be %.1f °C; the model holds between %.0f and %.0f °C",
+                        what,
+                        valueC,
+                        COLDEST_C,
+                        WARMEST_C));
+    }
+
+    private void endHour(double t) {
+        for (int i = 0; i < lots.length; i++) {
+            LotBranch lot = network.lot(i);
+            if (lots[i].present()) {
+                double warm = lot.warmestC(y);
+                if (!(warm > COLDEST_C && warm < WARMEST_C)) {
+                    stop(t, "lot " + run.stays().get(i).lot().id(), warm);
+                }
+            }
+            lots[i].row(t, y, totals);
+        }
+        hours.row(t, y, totals, respirationJ(), carbon.ppm());
+        wetFaces.is(t, network.faceWaterKg(y) > 0.1);
+        icing.is(t, icesUp());
+    }
+
+    /** Air below 4 °C on a running coil without defrost. Source: common practice, no source. */
+    private boolean icesUp() {
+        for (int i = 0; i < network.coolerCount(); i++) {
+            if (run.coolers().get(i) instanceof Compressor unit
+                    && unit.defrost().isEmpty()
+                    && network.airC(y) < 4
+                    && network.cooler(i).effect().evaporatingC < 0) {
+                return true;
+            }
+        }
+        return false;
+    }
+
+    private void passEdges(double t) {
+        while (nextEdge < edges.size() && edges.get(nextEdge).atS() <= t) {
+            pass(edges.get(nextEdge), t);
+            nextEdge++;
+        }
+    }
+
+    private void pass(Edge edge, double t) {
+        switch (edge.kind()) {
+            case MIDNIGHT -> {
+                awaitsFirstOpening = true;
+                budget.midnight(totals, powered);
+            }
+            case USE_STARTS -> use(true);
+            case USE_ENDS -> use(false);
+            case LIGHTS_ON, LIGHTS_OFF -> {
+                network.light(edge.kind() == Edge.Kind.LIGHTS_ON);
+                integrator.restart(OTHER);
+            }
+            case POWER_OFF -> power(t, false);
+            case POWER_ON -> power(t, true);
+            case DEFROST_STARTS, DEFROST_ENDS -> defrost(edge, t);
+            case DOOR_OPENS, DOOR_SHUTS -> door(edge);
+            case ARRIVES -> arrive(edge.index(), t);
+            case LEAVES -> leave(edge.index(), t);
+            case FRESH_ENDS ->
+                    network.lot(edge.index())
+                            .breathe(run.stays().get(edge.index()).lot().respiration());
+        }
+    }
+
+    private void use(boolean starts) {
+        double present = run.enclosure().gains().peopleHoursPerDay() * 3600 / usedS;
+        network.people(starts ? present : 0);
+        if (run.doorMode() == DoorMode.AVERAGED) {
+            network.door(starts);
+        }
+        integrator.restart(OTHER);
+    }
+
+    private void power(double t, boolean on) {
+        powered = on;
+        outages.is(t, !on);
+        for (int i = 0; i < thermostats.count(); i++) {
+            thermostats.rest(i, t);
+        }
+        network.power(on);
+        budget.apply();
+        integrator.restart(on ? STARTED : RESTED);
+    }
+
+    private void defrost(Edge edge, double t) {
+        boolean starts = edge.kind() == Edge.Kind.DEFROST_STARTS;
+        int i = edge.index();
+        if (run.coolers().get(i) instanceof Compressor unit && unit.defrost().isPresent()) {
+            if (starts) {
+                thermostats.rest(i, t);
+            }
+            network.cooler(i).defrost(starts && powered, unit.defrost().get().heaterW());
+            integrator.restart(OTHER);
+        }
+    }
+
+    private void door(Edge edge) {
+        boolean opens = edge.kind() == Edge.Kind.DOOR_OPENS;
+        network.door(opens);
+        if (opens && edge.atS() >= 0) {
+            openings++;
+            if (awaitsFirstOpening) {
+                co2AtFirstOpening = Math.max(co2AtFirstOpening, carbon.ppm());
+                awaitsFirstOpening = false;
+            }
+        }
+        integrator.restart(opens ? OPENED : SHUT);
+    }
+
+    private void arrive(int i, double t) {
+        Stay stay = run.stays().get(i);
+        LotBranch lot = network.lot(i);
+        boolean fresh = stay.freshUntilS() > t;
+        lot.breathe(fresh ? stay.lot().respiration().fresh() : stay.lot().respiration());
+        lot.arrive(stay.pulpC(), stay.surfaceWaterKg(), network.ratio(y), y);
+        lots[i].arrives(t, y, totals);
+        changeVolume();
+        integrator.restart(OTHER);
+    }
+
+    private void leave(int i, double t) {
+        lots[i].stepped(t, y, totals);
+        lots[i].row(t, y, totals);
+        lots[i].close(y, totals);
+        lastRespiration = respirationJ();
+        network.lot(i).give(false);
+        changeVolume();
+        integrator.restart(OTHER);
+    }
+
+    private void changeVolume() {
+        double gross = run.enclosure().box().volumeM3();
+        double free = gross;
+        for (int i = 0; i < lots.length; i++) {
+            if (lots[i].present()) {
+                var lot = run.stays().get(i).lot();
+                free -= PACKAGE_ROOM * lot.massKg() / lot.item().densityKgM3();
+            }
+        }
+        free = Math.max(free, LEAST_FREE_SHARE * gross);
+        carbon.mix(network.freeM3(), free);
+        double[] mixed = network.changeFreeVolume(free, y);
+        mixedJ += mixed[0];
+        mixedKg += mixed[1];
+    }
+
+    private Course course() {
+        double end = run.durationS();
+        List<CourseEvent> events = new ArrayList<>();
+        double packagesJ = startStructureJ - network.structureJ(y);
+        double packagesKg = 0;
+        double fieldHeat = 0;
+        double respiration = 0;
+        double evaporated = 0;
+        for (LotRecorder lot : lots) {
+            lot.close(y, totals);
+            packagesJ += lot.packageGaveJ();
+            packagesKg += lot.packageGaveKg();
+            fieldHeat += lot.totals().fieldHeatJ();
+            respiration += lot.totals().respirationJ();
+            evaporated += lot.totals().evaporatedKg();
+            events.addAll(lot.wetSpans(end));
+        }
+        for (Spans spans : List.of(outages, tripped, wetFaces, icing, budget.spans())) {
+            events.addAll(spans.until(end));
+        }
+        events.sort(Comparator.comparingDouble(CourseEvent::fromS));
+        HeatLedger heat =
+                new HeatLedger(
+                        terms.walls(totals),
+                        terms.door(totals) + mixedJ,
+                        terms.leakage(totals),
+                        terms.freshAir(totals),
+                        fieldHeat,
+                        respiration,
+                        terms.fans(totals),
+                        terms.lights(totals),
+                        terms.people(totals),
+                        packagesJ,
+                        terms.defrost(totals),
+                        terms.humidifier(totals),
+                        terms.heater(totals),
+                        0,
+                        startAirJ - network.airKg() * network.enthalpyJkg(y),
+                        terms.removed(totals),
+                        terms.electricity(totals));
+        return new Course(
+                run.chamberId(),
+                hours.hours(),
+                java.util.Arrays.stream(lots).map(LotRecorder::course).toList(),
+                events,
+                counts(),
+                heat,
+                water(evaporated, packagesKg, respiration),
+                layersError(),
+                network.reasons());
+    }
+
+    private Course.Counts counts() {
+        return new Course.Counts(
+                thermostats.switches(),
+                openings,
+                terms.ranS(totals),
+                carbon.highestPpm(),
+                co2AtFirstOpening,
+                integrator.steps(),
+                integrator.rejected());
+    }
+
+    private WaterLedger water(double evaporated, double packagesKg, double respirationJ) {
+        return new WaterLedger(
+                evaporated,
+                packagesKg,
+                terms.doorVapour(totals) + mixedKg,
+                terms.leakageVapour(totals),
+                terms.freshAirVapour(totals),
+                terms.peopleVapour(totals),
+                terms.humidifierWater(totals),
+                terms.wallVapour(totals),
+                -terms.removedVapour(totals),
+                startAirKg - network.airKg() * network.ratio(y),
+                respirationJ / BurntSugar.JOULE_PER_KG_CO2 * BurntSugar.WATER_KG_PER_KG_CO2,
+                terms.ranOff(totals));
+    }
+
+    private double layersError() {
+        double stored = network.layersJ(y) - startLayersJ;
+        double entered = Math.abs(terms.fromBeyond(totals)) + Math.abs(stored);
+        return entered > 0 ? Math.abs(terms.intoLayers(totals) - stored) / entered : 0;
+    }
+}

@@ -1,0 +1,82 @@
+package org.wardon.heat;
+
+import java.util.List;
+import org.wardon.produce.Reason;
+
+/**
+ * What a run returns.
+ *
+ * @param chamberId id of the chamber
+ * @param hours the chamber's series
+ * @param lots one a stay, in the order of the run
+ * @param events what went on for a while, by start
+ * @param counts what was counted
+ * @param heat heat by term
+ * @param water water by term
+ * @param layersErrorShare error of the heat balance of the faces' layers, share of what entered
+ *     them
+ * @param reasons what had to be estimated, with an empty subject
+ */
+public record Course(
+        String chamberId,
+        Hours hours,
+        List<LotCourse> lots,
+        List<CourseEvent> events,
+        Counts counts,
+        HeatLedger heat,
+        WaterLedger water,
+        double layersErrorShare,
+        List<Reason> reasons) {
+    /** Copies the lists. */
+    public Course {
+        lots = List.copyOf(lots);
+        events = List.copyOf(events);
+        reasons = List.copyOf(reasons);
+    }
+
+    /**
+     * What was counted in a run.
+     *
+     * @param thermostatSwitches times a thermostat switched on or off
+     * @param doorOpenings openings of the door
+     * @param coolerRanS time the first cooler ran, by its share, s
+     * @param co2HighestPpm highest carbon dioxide, ppm
+     * @param co2AtFirstOpeningPpm highest carbon dioxide met at the first opening of a day, ppm; 0
+     *     where the door never opens
+     * @param steps steps of the solver
+     * @param stepsRefused steps tried and refused
+     */
+    public record Counts(
+            long thermostatSwitches,
+            long doorOpenings,
+            double coolerRanS,
+            double co2HighestPpm,
+            double co2AtFirstOpeningPpm,
+            long steps,
+            long stepsRefused) {}
+
+    /**
+     * Returns the worst error of the balances of heat and water.
+     *
+     * @return percent
+     */
+    public double balanceErrorPct() {
+        double worst = Math.max(heat.errorShare(), water.errorShare());
+        return 100 * Math.max(worst, layersErrorShare);
+    }
+
+    /**
+     * Returns the lot of an id.
+     *
+     * @param id lot id
+     * @return its course
+     * @throws java.util.NoSuchElementException where there is none
+     */
+    public LotCourse lot(String id) {
+        return lots.stream()
+                .filter(lot -> lot.stay().lot().id().equals(id))
+                .findFirst()
+                .orElseThrow(
+                        () -> new java.util.NoSuchElementException("no lot " + id + " in the run"));
+    }
+}

@@ -1,0 +1,28 @@
+package org.wardon.heat;
+
+/**
+ * Something that changes at a time known beforehand.
+ *
+ * @param atS when, s since the start of the run
+ * @param kind what changes
+ * @param index which lot, outage or cooler; 0 where there is but one
+ */
+record Edge(double atS, Kind kind, int index) {
+    /** What changes. */
+    enum Kind {
+        MIDNIGHT,
+        USE_STARTS,
+        USE_ENDS,
+        LIGHTS_ON,
+        LIGHTS_OFF,
+        POWER_OFF,
+        POWER_ON,
+        DEFROST_STARTS,
+        DEFROST_ENDS,
+        DOOR_SHUTS,
+        LEAVES,
+        ARRIVES,
+        FRESH_ENDS,
+        DOOR_OPENS
+    }
+}

@@ -1,0 +1,88 @@
+package org.wardon.heat;
+
+import org.wardon.air.MoistAir;
+import org.wardon.heat.network.ChamberNetwork;
+import org.wardon.heat.network.Terms;
+
+/** Writes down the chamber's hours. */
+final class HourRecorder {
+    private final ChamberNetwork network;
+    private final Terms terms;
+    private final double pressurePa;
+    private final double[][] columns = new double[Hours.Column.values().length][];
+    private int size;
+    private double lastS;
+    private double lastAir;
+    private double lastRemoved;
+    private double lastElectricity;
+    private double lastExchanged;
+    private double lastRespiration;
+    private double lowest = Double.POSITIVE_INFINITY;
+    private double highest = Double.NEGATIVE_INFINITY;
+    private double supply = Double.NaN;
+
+    HourRecorder(ChamberNetwork network, double pressurePa, int mostRows) {
+        this.network = network;
+        this.terms = network.terms();
+        this.pressurePa = pressurePa;
+        for (int i = 0; i < columns.length; i++) {
+            columns[i] = new double[mostRows];
+        }
+    }
+
+    void stepped(double[] y) {
+        double airC = network.airC(y);
+        lowest = Math.min(lowest, airC);
+        highest = Math.max(highest, airC);
+        for (int i = 0; i < network.coolerCount(); i++) {
+            double leaves = network.cooler(i).effect().supplyC;
+            if (Double.isNaN(supply) || leaves < supply) {
+                supply = leaves;
+            }
+        }
+    }
+
+    private void set(Hours.Column column, double value) {
+        columns[column.ordinal()][size] = value;
+    }
+
+    /** Writes a row; {@code respirationJ} is what the lots present gave off since the start. */
+    void row(double t, double[] y, double[] totals, double respirationJ, double co2Ppm) {
+        double span = t - lastS;
+        double airC = network.airC(y);
+        set(Hours.Column.AT_S, t);
+        set(Hours.Column.AIR_C, (terms.airC(totals) - lastAir) / span);
+        set(Hours.Column.AIR_LOWEST_C, Math.min(lowest, airC));
+        set(Hours.Column.AIR_HIGHEST_C, Math.max(highest, airC));
+        set(Hours.Column.HUMIDITY, MoistAir.humidityFraction(airC, network.ratio(y), pressurePa));
+        set(Hours.Column.OUTDOOR_C, network.outdoorC());
+        set(Hours.Column.COOLING_W, (terms.removed(totals) - lastRemoved) / span);
+        set(Hours.Column.POWER_W, (terms.electricity(totals) - lastElectricity) / span);
+        set(Hours.Column.CO2_PPM, co2Ppm);
+        set(
+                Hours.Column.EXCHANGE_M3S,
+                network.cubicMetres((terms.exchanged(totals) - lastExchanged) / span));
+        set(Hours.Column.FREE_M3, network.freeM3());
+        set(Hours.Column.SUPPLY_C, supply);
+        set(Hours.Column.HUMIDITY_RATIO, network.ratio(y));
+        set(Hours.Column.RESPIRATION_W, (respirationJ - lastRespiration) / span);
+        size++;
+        startSpan(t, totals, respirationJ);
+    }
+
+    private void startSpan(double t, double[] totals, double respirationJ) {
+        lastS = t;
+        lastAir = terms.airC(totals);
+        lastRemoved = terms.removed(totals);
+        lastElectricity = terms.electricity(totals);
+        lastExchanged = terms.exchanged(totals);
+        lastRespiration = respirationJ;
+        lowest = Double.POSITIVE_INFINITY;
+        highest = Double.NEGATIVE_INFINITY;
+        supply = Double.NaN;
+    }
+
+    Hours hours() {
+        return new Hours(columns, size);
+    }
+}

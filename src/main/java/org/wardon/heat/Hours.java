@@ -1,0 +1,190 @@
+package org.wardon.heat;
+
+import java.util.Arrays;
+
+/**
+ * The chamber's series. Row i stands at {@link #atS}, an hour after the one before (the last may be
+ * shorter). Air, cooling, power, exchange and load are means of the span before; all else is at the
+ * instant.
+ */
+public final class Hours {
+    private final double[][] columns;
+
+    /** The columns, in order. */
+    enum Column {
+        AT_S,
+        AIR_C,
+        AIR_LOWEST_C,
+        AIR_HIGHEST_C,
+        HUMIDITY,
+        OUTDOOR_C,
+        COOLING_W,
+        POWER_W,
+        CO2_PPM,
+        EXCHANGE_M3S,
+        FREE_M3,
+        SUPPLY_C,
+        HUMIDITY_RATIO,
+        RESPIRATION_W
+    }
+
+    Hours(double[][] columns, int rows) {
+        this.columns = new double[columns.length][];
+        for (int i = 0; i < columns.length; i++) {
+            this.columns[i] = Arrays.copyOf(columns[i], rows);
+        }
+    }
+
+    private double get(Column column, int i) {
+        return columns[column.ordinal()][i];
+    }
+
+    /**
+     * Returns the number of rows.
+     *
+     * @return at least 1
+     */
+    public int size() {
+        return columns[0].length;
+    }
+
+    /**
+     * Returns the time of a row.
+     *
+     * @param i row
+     * @return s since the start of the run
+     */
+    public double atS(int i) {
+        return get(Column.AT_S, i);
+    }
+
+    /**
+     * Returns the mean air temperature of the span before.
+     *
+     * @param i row
+     * @return °C
+     */
+    public double airC(int i) {
+        return get(Column.AIR_C, i);
+    }
+
+    /**
+     * Returns the lowest air temperature of the span before.
+     *
+     * @param i row
+     * @return °C
+     */
+    public double airLowestC(int i) {
+        return get(Column.AIR_LOWEST_C, i);
+    }
+
+    /**
+     * Returns the highest air temperature of the span before.
+     *
+     * @param i row
+     * @return °C
+     */
+    public double airHighestC(int i) {
+        return get(Column.AIR_HIGHEST_C, i);
+    }
+
+    /**
+     * Returns the relative humidity at the instant.
+     *
+     * @param i row
+     * @return 0 to 1
+     */
+    public double humidityFraction(int i) {
+        return get(Column.HUMIDITY, i);
+    }
+
+    /**
+     * Returns the outdoor air at the instant.
+     *
+     * @param i row
+     * @return °C
+     */
+    public double outdoorC(int i) {
+        return get(Column.OUTDOOR_C, i);
+    }
+
+    /**
+     * Returns the mean heat taken by coolers in the span before.
+     *
+     * @param i row
+     * @return W
+     */
+    public double coolingW(int i) {
+        return get(Column.COOLING_W, i);
+    }
+
+    /**
+     * Returns the mean electric power of the span before.
+     *
+     * @param i row
+     * @return W
+     */
+    public double powerW(int i) {
+        return get(Column.POWER_W, i);
+    }
+
+    /**
+     * Returns carbon dioxide at the instant.
+     *
+     * @param i row
+     * @return ppm by volume
+     */
+    public double co2Ppm(int i) {
+        return get(Column.CO2_PPM, i);
+    }
+
+    /**
+     * Returns the mean exchange of air in the span before: leakage, fresh air, door.
+     *
+     * @param i row
+     * @return m3 of chamber air/s
+     */
+    public double exchangeM3s(int i) {
+        return get(Column.EXCHANGE_M3S, i);
+    }
+
+    /**
+     * Returns the free volume at the instant: chamber less lots.
+     *
+     * @param i row
+     * @return m3
+     */
+    public double freeM3(int i) {
+        return get(Column.FREE_M3, i);
+    }
+
+    /**
+     * Returns the coldest air that left a cooler in the span before.
+     *
+     * @param i row
+     * @return °C; NaN where none ran
+     */
+    public double supplyC(int i) {
+        return get(Column.SUPPLY_C, i);
+    }
+
+    /**
+     * Returns the humidity ratio at the instant.
+     *
+     * @param i row
+     * @return kg/kg
+     */
+    public double humidityRatio(int i) {
+        return get(Column.HUMIDITY_RATIO, i);
+    }
+
+    /**
+     * Returns the mean heat of respiration of the lots present in the span before.
+     *
+     * @param i row
+     * @return W
+     */
+    public double respirationW(int i) {
+        return get(Column.RESPIRATION_W, i);
+    }
+}

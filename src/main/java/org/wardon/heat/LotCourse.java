@@ -1,0 +1,133 @@
+package org.wardon.heat;
+
+import java.util.Arrays;
+import org.wardon.lots.LotHistory;
+
+/** What a lot went through in a run, its time as a shadow included. */
+public final class LotCourse {
+    private final Stay stay;
+    private final LotHistory history;
+    private final double[][] rows;
+    private final LotTotals totals;
+
+    /** Columns of the hourly series. */
+    enum Column {
+        AT_S,
+        MEAN_C,
+        SURFACE_C,
+        CORE_C,
+        RESPIRATION_W,
+        MASS_KG
+    }
+
+    LotCourse(Stay stay, LotHistory history, double[][] rows, int size, LotTotals totals) {
+        this.stay = stay;
+        this.history = history;
+        this.totals = totals;
+        this.rows = new double[rows.length][];
+        for (int i = 0; i < rows.length; i++) {
+            this.rows[i] = Arrays.copyOf(rows[i], size);
+        }
+    }
+
+    /**
+     * Returns the stay.
+     *
+     * @return lot, arrival, leaving
+     */
+    public Stay stay() {
+        return stay;
+    }
+
+    /**
+     * Returns what keeping reads.
+     *
+     * @return samples from arrival (or the start of the run) to the end of the run, hourly and
+     *     closer after arrival
+     */
+    public LotHistory history() {
+        return history;
+    }
+
+    /**
+     * Returns what added up while it was in the chamber.
+     *
+     * @return heat, water, mass
+     */
+    public LotTotals totals() {
+        return totals;
+    }
+
+    /**
+     * Returns the number of rows of the hourly series.
+     *
+     * @return 0 where the lot arrives after the run
+     */
+    public int size() {
+        return rows[0].length;
+    }
+
+    private double get(Column column, int i) {
+        return rows[column.ordinal()][i];
+    }
+
+    /**
+     * Returns the time of a row.
+     *
+     * @param i row
+     * @return s since the start of the run
+     */
+    public double atS(int i) {
+        return get(Column.AT_S, i);
+    }
+
+    /**
+     * Returns the mass average at the instant.
+     *
+     * @param i row
+     * @return °C
+     */
+    public double meanC(int i) {
+        return get(Column.MEAN_C, i);
+    }
+
+    /**
+     * Returns the outermost shell at the instant.
+     *
+     * @param i row
+     * @return °C
+     */
+    public double surfaceC(int i) {
+        return get(Column.SURFACE_C, i);
+    }
+
+    /**
+     * Returns the innermost shell at the instant.
+     *
+     * @param i row
+     * @return °C
+     */
+    public double coreC(int i) {
+        return get(Column.CORE_C, i);
+    }
+
+    /**
+     * Returns the heat of respiration at the instant.
+     *
+     * @param i row
+     * @return W
+     */
+    public double respirationW(int i) {
+        return get(Column.RESPIRATION_W, i);
+    }
+
+    /**
+     * Returns the mass at the instant.
+     *
+     * @param i row
+     * @return kg
+     */
+    public double massKg(int i) {
+        return get(Column.MASS_KG, i);
+    }
+}

@@ -1,0 +1,163 @@
+package org.wardon.heat;
+
+import java.util.ArrayList;
+import java.util.List;
+import org.wardon.heat.network.LotBranch;
+import org.wardon.lots.BurntSugar;
+import org.wardon.lots.LotHistory;
+
+/** Writes down what one lot goes through. */
+final class LotRecorder {
+    /** For so long after arrival samples stand closer. */
+    private static final double CLOSER_FOR_S = 24 * 3600.0;
+
+    private static final double CLOSER_S = 300;
+
+    /** Wet from this share of the skin on; below it dew is not noticed (assumption). */
+    private static final double WET_SHARE = 0.02;
+
+    private final Stay stay;
+    private final LotBranch lot;
+    private final LotHistory.Builder history = new LotHistory.Builder();
+    private final double[][] rows = new double[LotCourse.Column.values().length][];
+    private int size;
+    private double lastSampleS = Double.NEGATIVE_INFINITY;
+    private double arrivedS = Double.POSITIVE_INFINITY;
+    private double startHeatJ;
+    private double startPackageJ;
+    private double startPackageKg;
+    private double startWaterKg;
+    private boolean closed;
+    private double packageGaveJ;
+    private double packageGaveKg;
+    private double wetFromS = Double.NaN;
+    private final List<CourseEvent> wetSpans = new ArrayList<>();
+    private final LotTotals nothing;
+    private LotTotals totals;
+
+    LotRecorder(Stay stay, LotBranch lot, int mostRows) {
+        this.stay = stay;
+        this.lot = lot;
+        this.nothing = new LotTotals(0, 0, 0, 0, stay.lot().massKg());
+        this.totals = nothing;
+        for (int i = 0; i < rows.length; i++) {
+            rows[i] = new double[mostRows];
+        }
+    }
+
+    boolean present() {
+        return arrivedS < Double.POSITIVE_INFINITY && !closed;
+    }
+
+    void arrives(double t, double[] y, double[] integrals) {
+        arrivedS = t;
+        startHeatJ = lot.heatJ(y);
+        startPackageJ = lot.packageHeatJ(y);
+        startPackageKg = lot.packageWaterKg(y);
+        startWaterKg = lot.waterKg(y);
+        row(t, y, integrals);
+    }
+
+    /** Closes the account: the lot leaves, or the run ends. */
+    void close(double[] y, double[] integrals) {
+        if (!present()) {
+            return;
+        }
+        closed = true;
+        packageGaveJ = startPackageJ - lot.packageHeatJ(y);
+        packageGaveKg = startPackageKg - lot.packageWaterKg(y);
+        double fieldHeat = startHeatJ - lot.heatJ(y) + lot.liquidJ(integrals);
+        totals =
+                new LotTotals(
+                        lot.respirationJ(integrals),
+                        fieldHeat,
+                        lot.evaporatedKg(integrals),
+                        stay.lot().massKg() - massKg(y, integrals),
+                        stay.lot().massKg());
+    }
+
+    /** Tissue and sugar left, free water apart. */
+    private double massKg(double[] y, double[] integrals) {
+        double co2 = lot.respirationJ(integrals) / BurntSugar.JOULE_PER_KG_CO2;
+        double burnt = co2 * (BurntSugar.GLUCOSE_KG_PER_KG_CO2 - BurntSugar.WATER_KG_PER_KG_CO2);
+        double water = lot.evaporatedKg(integrals) + lot.waterKg(y) - startWaterKg;
+        return stay.lot().massKg() - burnt - water;
+    }
+
+    void stepped(double t, double[] y, double[] integrals) {
+        if (arrivedS == Double.POSITIVE_INFINITY) {
+            return;
+        }
+        boolean wet = lot.wetShare(y) > WET_SHARE;
+        if (wet && Double.isNaN(wetFromS)) {
+            wetFromS = t;
+        } else if (!wet && !Double.isNaN(wetFromS)) {
+            endWetSpan(t);
+        }
+        if (t - arrivedS < CLOSER_FOR_S && t - lastSampleS >= CLOSER_S) {
+            sample(t, y, integrals);
+        }
+    }
+
+    private void endWetSpan(double t) {
+        String id = stay.lot().id();
+        wetSpans.add(new CourseEvent(CourseEvent.Kind.WET_LOT, id, wetFromS, t));
+        wetFromS = Double.NaN;
+    }
+
+    /** Writes an hourly row, and a sample where none stands there yet. */
+    void row(double t, double[] y, double[] integrals) {
+        if (arrivedS == Double.POSITIVE_INFINITY) {
+            return;
+        }
+        if (size == 0 || t > rows[0][size - 1]) {
+            rows[LotCourse.Column.AT_S.ordinal()][size] = t;
+            rows[LotCourse.Column.MEAN_C.ordinal()][size] = lot.meanC(y);
+            rows[LotCourse.Column.SURFACE_C.ordinal()][size] = lot.surfaceC(y);
+            rows[LotCourse.Column.CORE_C.ordinal()][size] = lot.coreC(y);
+            rows[LotCourse.Column.RESPIRATION_W.ordinal()][size] = lot.respirationW(y);
+            rows[LotCourse.Column.MASS_KG.ordinal()][size] = massKg(y, integrals);
+            size++;
+        }
+        if (t > lastSampleS) {
+            sample(t, y, integrals);
+        }
+    }
+
+    private void sample(double t, double[] y, double[] integrals) {
+        history.add(
+                        t,
+                        lot.meanC(y),
+                        lot.surfaceC(y),
+                        lot.coldestC(y),
+                        Math.min(lot.humidityFraction(y), 1),
+                        0,
+                        lot.wetShare(y) > WET_SHARE)
+                .mass(massKg(y, integrals));
+        lastSampleS = t;
+    }
+
+    double packageGaveJ() {
+        return packageGaveJ;
+    }
+
+    double packageGaveKg() {
+        return packageGaveKg;
+    }
+
+    LotTotals totals() {
+        return totals;
+    }
+
+    /** Ends open spans and returns them all. */
+    List<CourseEvent> wetSpans(double endS) {
+        if (!Double.isNaN(wetFromS)) {
+            endWetSpan(endS);
+        }
+        return wetSpans;
+    }
+
+    LotCourse course() {
+        return new LotCourse(stay, history.build(), rows, size, totals);
+    }
+}

@@ -1,0 +1,146 @@
+package org.wardon.heat;
+
+import java.util.HashMap;
+import java.util.Map;
+import java.util.OptionalDouble;
+import org.wardon.air.MoistAir;
+import org.wardon.air.StandardAtmosphere;
+import org.wardon.air.Sunshine;
+import org.wardon.enclosure.Surroundings;
+import org.wardon.errors.Require;
+import org.wardon.heat.network.ChamberNetwork;
+import org.wardon.heat.network.NetworkInputs;
+import org.wardon.heat.network.Tuning;
+
+/** Turns a run into the network of its chamber. */
+final class RunCompiler {
+    private RunCompiler() {}
+
+    static double pressurePa(ChamberRun run) {
+        return StandardAtmosphere.pressurePa(run.site().elevationM());
+    }
+
+    static int hours(ChamberRun run) {
+        return (int) Math.ceil(run.durationS() / 3600 - 1e-9);
+    }
+
+    static boolean passive(ChamberRun run) {
+        return run.coolers().isEmpty() && run.controlMode() != ControlMode.IDEAL;
+    }
+
+    static ChamberNetwork network(ChamberRun run, boolean plain) {
+        checkControl(run);
+        double pressure = pressurePa(run);
+        Factors f = run.factors();
+        return new ChamberNetwork(
+                new NetworkInputs(
+                        run.enclosure(),
+                        surroundings(run),
+                        neighbourRatios(run, pressure),
+                        pressure,
+                        run.coolers(),
+                        control(run.controlMode()),
+                        run.setting(),
+                        run.stays().stream().map(Stay::lot).toList(),
+                        new Tuning(
+                                f.wall(),
+                                f.exchange(),
+                                f.capacity(),
+                                f.respiration(),
+                                f.transpiration(),
+                                f.packageTime(),
+                                f.thermostatOffsetK()),
+                        run.doorMode() == DoorMode.AVERAGED,
+                        run.extras().heaterW(),
+                        run.extras().humidifierKgH() / 3600,
+                        plain));
+    }
+
+    private static void checkControl(ChamberRun run) {
+        Require.that(
+                run.doorMode() == DoorMode.PULSES || run.controlMode() != ControlMode.AS_BUILT,
+                "an averaged door needs modulating or ideal control, found AS_BUILT");
+        for (Stay stay : run.stays()) {
+            Require.that(
+                    stay.arrivesS() < run.durationS(),
+                    "lot "
+                            + stay.lot().id()
+                            + " arrives at "
+                            + stay.arrivesS()
+                            + " s, after the run of "
+                            + run.durationS()
+                            + " s");
+        }
+    }
+
+    private static NetworkInputs.Control control(ControlMode mode) {
+        return switch (mode) {
+            case AS_BUILT -> NetworkInputs.Control.AS_BUILT;
+            case MODULATING -> NetworkInputs.Control.MODULATING;
+            case IDEAL -> NetworkInputs.Control.IDEAL;
+        };
+    }
+
+    private static Surroundings surroundings(ChamberRun run) {
+        int hours = hours(run) + 1;
+        Map<String, Surroundings.HourlyAir> neighbours = new HashMap<>();
+        run.extras()
+                .neighbours()
+                .forEach((id, air) -> neighbours.put(id, h -> air.temperatureC(h * 3600.0)));
+        double mean = 0;
+        for (int h = 0; h <= hours; h++) {
+            mean += run.weather().temperatureC(h) / (hours + 1);
+        }
+        return new Surroundings(
+                run.site(),
+                run.weather(),
+                Sunshine.of(run.site(), run.timeline(), run.weather(), hours),
+                hours,
+                passive(run) ? mean : run.setting().temperatureC(),
+                OptionalDouble.empty(),
+                neighbours);
+    }
+
+    private static Map<String, double[]> neighbourRatios(ChamberRun run, double pressurePa) {
+        Map<String, double[]> ratios = new HashMap<>();
+        int hours = hours(run) + 2;
+        run.extras()
+                .neighbours()
+                .forEach(
+                        (id, air) -> {
+                            double[] ratio = new double[hours];
+                            for (int h = 0; h < hours; h++) {
+                                double t = h * 3600.0;
+                                ratio[h] =
+                                        MoistAir.humidityRatioAt(
+                                                air.temperatureC(t),
+                                                air.humidityFraction(t),
+                                                pressurePa);
+                            }
+                            ratios.put(id, ratio);
+                        });
+        return ratios;
+    }
+
+    /** Temperature the run starts with, °C. */
+    static double startC(ChamberRun run) {
+        double usual = passive(run) ? run.weather().temperatureC(0) : run.setting().temperatureC();
+        return run.start().temperatureC().orElse(usual);
+    }
+
+    /** Humidity ratio the run starts with, kg/kg. */
+    static double startRatio(ChamberRun run, ChamberNetwork network) {
+        double pressure = pressurePa(run);
+        double airC = startC(run);
+        OptionalDouble given = run.start().humidityPct();
+        if (given.isPresent()) {
+            return MoistAir.humidityRatioAt(airC, given.getAsDouble() / 100, pressure);
+        }
+        double wanted =
+                passive(run)
+                        ? network.outdoorRatio(0)
+                        : MoistAir.humidityRatioAt(
+                                airC, run.setting().humidityPct() / 100, pressure);
+        return Math.min(wanted, MoistAir.saturatedHumidityRatio(airC, pressure));
+    }
+}

@@ -1,0 +1,131 @@
+package org.wardon.heat;
+
+import java.time.LocalTime;
+import java.util.ArrayList;
+import java.util.Comparator;
+import java.util.List;
+import org.wardon.air.Timeline;
+import org.wardon.cooling.Compressor;
+import org.wardon.cooling.Compressor.Defrost;
+import org.wardon.cooling.Outage;
+import org.wardon.enclosure.Door;
+import org.wardon.enclosure.Gains;
+
+/** All edges of a run in order of time, from the midnight before its start. */
+final class Schedule {
+    /** Hours of use of a chamber without a door (assumption). */
+    private static final LocalTime USE_FROM = LocalTime.of(7, 0);
+
+    private static final LocalTime USE_TO = LocalTime.of(19, 0);
+
+    private final ChamberRun run;
+    private final List<Edge> edges = new ArrayList<>();
+
+    private Schedule(ChamberRun run) {
+        this.run = run;
+    }
+
+    static List<Edge> of(ChamberRun run) {
+        Schedule schedule = new Schedule(run);
+        double midnight = -run.timeline().secondOfDay(0);
+        for (int day = 0; midnight < run.durationS(); day++, midnight += Timeline.DAY_S) {
+            schedule.day(day, midnight);
+        }
+        schedule.outages();
+        schedule.stays();
+        schedule.defrosts();
+        schedule.edges.removeIf(edge -> edge.atS() >= run.durationS());
+        schedule.edges.sort(Comparator.comparingDouble(Edge::atS).thenComparing(Edge::kind));
+        return List.copyOf(schedule.edges);
+    }
+
+    private void add(double atS, Edge.Kind kind, int index) {
+        edges.add(new Edge(atS, kind, index));
+    }
+
+    private void day(int day, double midnight) {
+        add(midnight, Edge.Kind.MIDNIGHT, 0);
+        double from = midnight + useFrom().toSecondOfDay();
+        double to = midnight + useTo().toSecondOfDay();
+        add(from, Edge.Kind.USE_STARTS, 0);
+        add(to, Edge.Kind.USE_ENDS, 0);
+        Gains gains = run.enclosure().gains();
+        double lit = gains.lightsHoursPerDay() * Timeline.HOUR_S;
+        if (gains.lightsW() > 0 && lit > 0) {
+            // Longer than the hours of use, they burn on as long before as after.
+            double first = lit > to - from ? 0.5 * (from + to - lit) : from;
+            add(first, Edge.Kind.LIGHTS_ON, 0);
+            add(first + lit, Edge.Kind.LIGHTS_OFF, 0);
+        }
+        if (run.enclosure().door().isPresent() && run.doorMode() == DoorMode.PULSES) {
+            openings(run.enclosure().door().get(), day, from, to);
+        }
+    }
+
+    LocalTime useFrom() {
+        return run.enclosure().door().map(Door::from).orElse(USE_FROM);
+    }
+
+    LocalTime useTo() {
+        return run.enclosure().door().map(Door::to).orElse(USE_TO);
+    }
+
+    /** Hours of use a day, s. */
+    static double useS(ChamberRun run) {
+        Schedule schedule = new Schedule(run);
+        return schedule.useTo().toSecondOfDay() - schedule.useFrom().toSecondOfDay();
+    }
+
+    /** Openings spread evenly; a fraction of one adds up over the days. */
+    private void openings(Door door, int day, double from, double to) {
+        double perDay = door.openingsPerDay();
+        int count = (int) (Math.floor(perDay * (day + 1) + 1e-9) - Math.floor(perDay * day + 1e-9));
+        if (count == 0 || door.secondsOpen() <= 0) {
+            return;
+        }
+        double spacing = (to - from) / count;
+        double open = Math.min(door.secondsOpen(), spacing);
+        for (int i = 0; i < count; i++) {
+            double start = from + i * spacing + 0.5 * (spacing - open);
+            add(start, Edge.Kind.DOOR_OPENS, 0);
+            add(start + open, Edge.Kind.DOOR_SHUTS, 0);
+        }
+    }
+
+    private void outages() {
+        for (int i = 0; i < run.outages().size(); i++) {
+            Outage outage = run.outages().get(i);
+            add(outage.startS(), Edge.Kind.POWER_OFF, i);
+            add(outage.endS(), Edge.Kind.POWER_ON, i);
+        }
+    }
+
+    private void stays() {
+        for (int i = 0; i < run.stays().size(); i++) {
+            Stay stay = run.stays().get(i);
+            add(Math.max(stay.arrivesS(), 0), Edge.Kind.ARRIVES, i);
+            if (stay.freshUntilS() > Math.max(stay.arrivesS(), 0)) {
+                add(stay.freshUntilS(), Edge.Kind.FRESH_ENDS, i);
+            }
+            if (Double.isFinite(stay.leavesS())) {
+                add(stay.leavesS(), Edge.Kind.LEAVES, i);
+            }
+        }
+    }
+
+    private void defrosts() {
+        for (int i = 0; i < run.coolers().size(); i++) {
+            if (run.controlMode() == ControlMode.IDEAL
+                    || !(run.coolers().get(i) instanceof Compressor unit)
+                    || unit.defrost().isEmpty()) {
+                continue;
+            }
+            Defrost defrost = unit.defrost().get();
+            double every = defrost.everyHours() * Timeline.HOUR_S;
+            for (double t = every; t < run.durationS(); t += every) {
+                add(t, Edge.Kind.DEFROST_STARTS, i);
+                add(t + defrost.minutes() * 60, Edge.Kind.DEFROST_ENDS, i);
+            }
+        }
+    }
+}

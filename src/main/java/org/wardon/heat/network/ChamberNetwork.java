@@ -1,0 +1,664 @@
+package org.wardon.heat.network;
+
+import java.util.ArrayList;
+import java.util.Arrays;
+import java.util.List;
+import java.util.Optional;
+import org.wardon.air.MoistAir;
+import org.wardon.air.SaturatedAir;
+import org.wardon.cooling.Compressor;
+import org.wardon.cooling.Cooler;
+import org.wardon.cooling.Thermostat;
+import org.wardon.enclosure.Beyond;
+import org.wardon.enclosure.Door;
+import org.wardon.enclosure.DoorExchange;
+import org.wardon.enclosure.Enclosure;
+import org.wardon.enclosure.Face;
+import org.wardon.enclosure.Layer;
+import org.wardon.enclosure.Leakage;
+import org.wardon.enclosure.OutsideBoundary;
+import org.wardon.enclosure.Surroundings;
+import org.wardon.heat.solver.Tree;
+import org.wardon.heat.solver.TreeSystem;
+import org.wardon.lots.Lot;
+import org.wardon.lots.PackageFit;
+import org.wardon.lots.Packing;
+import org.wardon.produce.Reason;
+
+/**
+ * A chamber compiled into parts around its air. The state holds the air's enthalpy and humidity
+ * ratio first, then faces, structure, coolers and lots.
+ */
+public final class ChamberNetwork implements TreeSystem {
+    private static final double COOLER_STAGE_BANDS = 1;
+    private static final double IDEAL_FOLLOWS_IN_S = 0.3;
+
+    /** Coil of the ideal cooler below the air, K (common practice for rooms of produce). */
+    public static final double IDEAL_COIL_BELOW_K = 6;
+
+    private final NetworkInputs inputs;
+    private final Tree tree = new Tree(2);
+    private final AirState air;
+    private final AirState startAir;
+    private final Outside outside = new Outside();
+    private final HourlyAir outdoors;
+    private final HourlyAir beyondDoor;
+    private final List<OutsideBoundary> boundaries = new ArrayList<>();
+    private final FaceBranch[] faces;
+    private final Optional<StructurePart> structure;
+    private final CoolerPart[] coolers;
+    private final Optional<IdealCooler> ideal;
+    private final int idealFlowAt;
+    private final AirExchange exchange;
+    private final int exchangeFlowAt;
+    private final InnerGains gains;
+    private final int gainsFlowAt;
+    private final LotBranch[] lots;
+    private final Part[] always;
+    private final double[] tolerances;
+    private int flows;
+    private double airKg;
+    private double freeM3;
+    private int hour;
+
+    /**
+     * Compiles a chamber.
+     *
+     * @param inputs what it is made of
+     */
+    public ChamberNetwork(NetworkInputs inputs) {
+        this.inputs = inputs;
+        air = new AirState(inputs.pressurePa());
+        startAir = new AirState(inputs.pressurePa());
+        outdoors = outdoorAir();
+        beyondDoor = airBeyondDoor();
+        faces = faces();
+        double structureJK = inputs.enclosure().structureCapacityJK();
+        structure =
+                structureJK > 0
+                        ? Optional.of(
+                                new StructurePart(tree, take(StructurePart.FLOWS), structureJK))
+                        : Optional.empty();
+        boolean unlimited = inputs.control() == NetworkInputs.Control.IDEAL;
+        coolers = unlimited ? new CoolerPart[0] : coolers();
+        idealFlowAt = flows;
+        ideal = unlimited ? Optional.of(idealCooler()) : Optional.empty();
+        exchangeFlowAt = take(AirExchange.FLOWS);
+        exchange = exchange();
+        gainsFlowAt = take(InnerGains.FLOWS);
+        gains =
+                new InnerGains(
+                        gainsFlowAt,
+                        inputs.setting(),
+                        inputs.tuning().thermostatOffsetK(),
+                        inputs.enclosure().gains().fansW(),
+                        inputs.enclosure().gains().lightsW(),
+                        inputs.heaterW(),
+                        inputs.humidifierKgS());
+        lots = new LotBranch[inputs.lots().size()];
+        for (int i = 0; i < lots.length; i++) {
+            lots[i] = lot(inputs.lots().get(i));
+        }
+        always = alwaysThere();
+        tolerances = new double[tree.size()];
+        freeVolume(inputs.enclosure().box().volumeM3());
+        hour(0);
+    }
+
+    private int take(int count) {
+        int at = flows;
+        flows += count;
+        return at;
+    }
+
+    private Part[] alwaysThere() {
+        List<Part> parts = new ArrayList<>(List.of(faces));
+        structure.ifPresent(parts::add);
+        parts.addAll(List.of(coolers));
+        ideal.ifPresent(parts::add);
+        parts.add(exchange);
+        parts.add(gains);
+        return parts.toArray(new Part[0]);
+    }
+
+    private HourlyAir outdoorAir() {
+        Surroundings around = inputs.around();
+        int n = around.hours() + 1;
+        double[] airC = new double[n];
+        double[] ratio = new double[n];
+        for (int h = 0; h < n; h++) {
+            airC[h] = around.weather().temperatureC(h);
+            // Stations state humidity over water at all temperatures.
+            double pa = around.weather().humidityPct(h) / 100 * SaturatedAir.overWaterPa(airC[h]);
+            ratio[h] = MoistAir.humidityRatio(pa, inputs.pressurePa());
+        }
+        return new HourlyAir(airC, ratio);
+    }
+
+    private HourlyAir airBeyondDoor() {
+        Optional<Door> door = inputs.enclosure().door();
+        if (door.isEmpty()) {
+            return outdoors;
+        }
+        Beyond beyond = door.get().beyond();
+        int n = inputs.around().hours() + 1;
+        double[] airC = new double[n];
+        double[] ratio = new double[n];
+        for (int h = 0; h < n; h++) {
+            airC[h] = OutsideBoundary.airBeyondC(beyond, inputs.around(), h);
+            double most = MoistAir.saturatedHumidityRatio(airC[h], inputs.pressurePa());
+            double there =
+                    beyond instanceof Beyond.Neighbour next
+                            ? inputs.neighbourRatio().getOrDefault(next.chamberId(), NONE)[h]
+                            : outdoors.ratio(h);
+            ratio[h] = Math.min(there, most);
+        }
+        return new HourlyAir(airC, ratio);
+    }
+
+    private static final double[] NONE = {};
+
+    private FaceBranch[] faces() {
+        Enclosure enclosure = inputs.enclosure();
+        List<FaceBranch> list = new ArrayList<>();
+        for (Face face : enclosure.faces()) {
+            OutsideBoundary boundary = OutsideBoundary.of(enclosure, face, inputs.around());
+            boundaries.add(boundary);
+            List<Layer> layers = new ArrayList<>(boundary.addedLayers());
+            layers.addAll(face.layers());
+            double inside = FaceFilms.insideM2KW(enclosure, face, boundary, inputs);
+            double wall = inputs.tuning().wall();
+            FaceGrid grid = new FaceGrid(layers, inside, wall);
+            double area = enclosure.box().areaM2(face.name());
+            double steady = grid.steady(boundary.filmWm2K(0) * wall);
+            double bridge = enclosure.thermalBridgePct() / 100 * area * steady;
+            list.add(
+                    new FaceBranch(
+                            tree,
+                            take(FaceBranch.FLOWS),
+                            area,
+                            grid,
+                            bridge,
+                            FaceFilms.convectiveWm2K(boundary.direction()),
+                            wall,
+                            inputs.plain()));
+        }
+        return list.toArray(new FaceBranch[0]);
+    }
+
+    private CoolerPart[] coolers() {
+        List<CoolerPart> list = new ArrayList<>();
+        int stage = 0;
+        for (Cooler cooler : inputs.coolers()) {
+            if (!(cooler instanceof Compressor unit)) {
+                throw new IllegalArgumentException(
+                        "cooler " + cooler.kind() + " is not built into the heat model");
+            }
+            Compressor asked = UnitTuning.of(unit, inputs);
+            double followed =
+                    Thermostat.followedC(inputs.setting(), unit.lowestC())
+                            - inputs.tuning().thermostatOffsetK()
+                            + stage * COOLER_STAGE_BANDS * inputs.setting().bandK();
+            CoolerPart.Following following =
+                    new CoolerPart.Following(
+                            asked.control() == Compressor.Control.MODULATING,
+                            followed,
+                            inputs.setting().bandK(),
+                            unit.fanAlways() ? unit.fanW() : 0);
+            list.add(
+                    new CoolerPart(
+                            tree,
+                            take(CoolerPart.FLOWS),
+                            asked.law(inputs.pressurePa()),
+                            following));
+            stage++;
+        }
+        return list.toArray(new CoolerPart[0]);
+    }
+
+    private IdealCooler idealCooler() {
+        double wattsPerK =
+                dryAirKg(inputs.enclosure().box().volumeM3())
+                        * MoistAir.DRY_AIR_J_KG_K
+                        / IDEAL_FOLLOWS_IN_S;
+        return new IdealCooler(
+                take(IdealCooler.FLOWS),
+                inputs.setting().temperatureC() - inputs.tuning().thermostatOffsetK(),
+                IDEAL_COIL_BELOW_K,
+                wattsPerK,
+                inputs.plain());
+    }
+
+    private AirExchange exchange() {
+        Enclosure enclosure = inputs.enclosure();
+        double factor = inputs.tuning().exchange();
+        double perM3 = dryAirKg(1);
+        double volume = enclosure.box().volumeM3();
+        double leak = Leakage.leakM3s(enclosure.leakageAirChangesPerDay(), volume) * factor;
+        double fresh = enclosure.freshAirM3PerHour() / 3600 * factor;
+        return new AirExchange(
+                exchangeFlowAt, inputs.pressurePa(), leak * perM3, fresh * perM3, doorway(factor));
+    }
+
+    private AirExchange.Doorway doorway(double factor) {
+        Optional<Door> door = inputs.enclosure().door();
+        if (door.isEmpty()) {
+            return new AirExchange.Doorway(0, 0, 0, 0, 0);
+        }
+        Door d = door.get();
+        double usedS = d.to().toSecondOfDay() - d.from().toSecondOfDay();
+        double open = Math.min(d.secondsOpen(), usedS / Math.max(d.openingsPerDay(), 1));
+        boolean averaged = inputs.averagedDoor() && open > 0;
+        return new AirExchange.Doorway(
+                d.widthM(),
+                d.heightM(),
+                factor * DoorExchange.share(DoorExchange.FLOW_FACTOR, d.effectiveness()),
+                averaged ? open : 0,
+                d.openingsPerDay() / usedS);
+    }
+
+    private LotBranch lot(Lot lot) {
+        double slower = inputs.tuning().packageTime();
+        Packing packing =
+                Math.abs(slower - 1) < 1e-12
+                        ? lot.packing()
+                        : PackageFit.slowed(lot.item(), lot.packing(), slower);
+        return new LotBranch(
+                tree,
+                take(LotBranch.FLOWS),
+                lot,
+                packing,
+                inputs.tuning().respiration(),
+                inputs.tuning().transpiration(),
+                inputs.pressurePa(),
+                inputs.plain());
+    }
+
+    /** Dry air in a volume at the setting, kg; a constant for flows counted in chamber air. */
+    private double dryAirKg(double volumeM3) {
+        return volumeM3
+                / MoistAir.specificVolumeM3kg(
+                        inputs.around().insideMeanC(), 0, inputs.pressurePa());
+    }
+
+    /**
+     * Sets the free volume of the chamber.
+     *
+     * @param m3 volume without lots and packages, m3, above 0
+     */
+    public void freeVolume(double m3) {
+        freeM3 = m3;
+        airKg = dryAirKg(m3);
+        exchange.freeVolume(m3);
+    }
+
+    /**
+     * Returns the free volume.
+     *
+     * @return m3
+     */
+    public double freeM3() {
+        return freeM3;
+    }
+
+    /**
+     * Returns the dry air in the chamber.
+     *
+     * @return kg
+     */
+    public double airKg() {
+        return airKg;
+    }
+
+    /**
+     * Turns a flow of dry air into one of chamber air.
+     *
+     * @param kgS kg/s
+     * @return m3/s
+     */
+    public double cubicMetres(double kgS) {
+        return kgS / dryAirKg(1);
+    }
+
+    /**
+     * Enters an hour of the weather.
+     *
+     * @param h hour of the run, 0 to the last but one
+     */
+    public void hour(int h) {
+        hour = Math.min(h, inputs.around().hours() - 1);
+        for (int i = 0; i < faces.length; i++) {
+            OutsideBoundary b = boundaries.get(i);
+            faces[i].farFilm(0.5 * (b.filmWm2K(hour) + b.filmWm2K(hour + 1)));
+        }
+    }
+
+    private void at(double t) {
+        double into = t - hour * 3600.0;
+        outdoors.at(hour, into, outside.outdoors);
+        beyondDoor.at(hour, into, outside.beyondDoor);
+        double x = into / 3600;
+        for (int i = 0; i < faces.length; i++) {
+            OutsideBoundary b = boundaries.get(i);
+            double slope = b.temperatureC(hour + 1) - b.temperatureC(hour);
+            faces[i].beyond(b.temperatureC(hour) + x * slope, slope / 3600);
+        }
+    }
+
+    /**
+     * Writes the start: air as given, faces at the steady profile, lots not there yet.
+     *
+     * @param airC air, °C
+     * @param ratio humidity ratio, kg/kg
+     * @return the state
+     */
+    public double[] start(double airC, double ratio) {
+        double[] y = new double[tree.size()];
+        y[AirState.ENTHALPY] = MoistAir.enthalpyJkg(airC, ratio);
+        y[AirState.HUMIDITY] = ratio;
+        at(0);
+        for (FaceBranch face : faces) {
+            face.steadyProfile(airC, y);
+        }
+        structure.ifPresent(s -> s.start(airC, y));
+        for (LotBranch lot : lots) {
+            lot.branch.activate(false);
+        }
+        return y;
+    }
+
+    /**
+     * Returns the sums of the flows by term.
+     *
+     * @return the terms
+     */
+    public Terms terms() {
+        int idealAt = ideal.isPresent() ? idealFlowAt : -1;
+        return new Terms(faces, coolers, idealAt, exchangeFlowAt, gainsFlowAt);
+    }
+
+    /**
+     * Returns a lot.
+     *
+     * @param i number of the lot in the inputs
+     * @return its branch
+     */
+    public LotBranch lot(int i) {
+        return lots[i];
+    }
+
+    /**
+     * Returns how many coolers there are.
+     *
+     * @return 0 for a passive chamber and an ideal cooler
+     */
+    public int coolerCount() {
+        return coolers.length;
+    }
+
+    /**
+     * Returns a cooler.
+     *
+     * @param i number of the cooler in the inputs
+     * @return the part
+     */
+    public CoolerPart cooler(int i) {
+        return coolers[i];
+    }
+
+    /**
+     * Returns the air temperature of a state.
+     *
+     * @param y state
+     * @return °C
+     */
+    public double airC(double[] y) {
+        return MoistAir.temperatureC(y[AirState.ENTHALPY], y[AirState.HUMIDITY]);
+    }
+
+    /**
+     * Returns the humidity ratio of a state.
+     *
+     * @param y state
+     * @return kg/kg
+     */
+    public double ratio(double[] y) {
+        return y[AirState.HUMIDITY];
+    }
+
+    /**
+     * Returns the enthalpy of the air of a state.
+     *
+     * @param y state
+     * @return J per kg dry air
+     */
+    public double enthalpyJkg(double[] y) {
+        return y[AirState.ENTHALPY];
+    }
+
+    /**
+     * Mixes outdoor air into the chamber where lots left, or pushes air out where they came in.
+     *
+     * @param m3 free volume from now on, m3
+     * @param y state, changed in place
+     * @return enthalpy and vapour that came in, J and kg, below 0 where air was pushed out
+     */
+    public double[] changeFreeVolume(double m3, double[] y) {
+        double before = airKg;
+        double heatBefore = before * y[AirState.ENTHALPY];
+        double waterBefore = before * y[AirState.HUMIDITY];
+        freeVolume(m3);
+        if (airKg > before) {
+            double in = airKg - before;
+            double heat = heatBefore + in * outside.outdoors.enthalpy();
+            double water = waterBefore + in * outside.outdoors.ratio;
+            y[AirState.ENTHALPY] = heat / airKg;
+            y[AirState.HUMIDITY] = water / airKg;
+        }
+        return new double[] {
+            airKg * y[AirState.ENTHALPY] - heatBefore, airKg * y[AirState.HUMIDITY] - waterBefore
+        };
+    }
+
+    /**
+     * Returns the heat stored in the layers of all faces.
+     *
+     * @param y state
+     * @return J from 0 °C
+     */
+    public double layersJ(double[] y) {
+        double sum = 0;
+        for (FaceBranch face : faces) {
+            sum += face.heatJ(y);
+        }
+        return sum;
+    }
+
+    /**
+     * Returns the water on all faces.
+     *
+     * @param y state
+     * @return kg
+     */
+    public double faceWaterKg(double[] y) {
+        double sum = 0;
+        for (FaceBranch face : faces) {
+            sum += face.waterKg(y);
+        }
+        return sum;
+    }
+
+    /**
+     * Returns the inner surface of a face.
+     *
+     * @param i number of the face in the enclosure
+     * @param y state
+     * @return °C
+     */
+    public double surfaceC(int i, double[] y) {
+        return faces[i].surfaceC(y);
+    }
+
+    /**
+     * Returns the heat stored in racks and structure.
+     *
+     * @param y state
+     * @return J from 0 °C
+     */
+    public double structureJ(double[] y) {
+        return structure.map(s -> s.heatJ(y)).orElse(0.0);
+    }
+
+    /**
+     * Returns the outdoor air at the time last asked for.
+     *
+     * @return °C
+     */
+    public double outdoorC() {
+        return outside.outdoors.airC;
+    }
+
+    /**
+     * Returns the outdoor air of an hour.
+     *
+     * @param h hour of the run
+     * @return humidity ratio, kg/kg
+     */
+    public double outdoorRatio(int h) {
+        return outdoors.ratio(h);
+    }
+
+    /**
+     * Returns the reasons of the far sides: sun or ground that had to be estimated.
+     *
+     * @return reasons with an empty subject
+     */
+    public List<Reason> reasons() {
+        return boundaries.stream().flatMap(b -> b.reasons().stream()).distinct().toList();
+    }
+
+    /**
+     * Opens or shuts the door; where averaged, starts or ends its hours of use.
+     *
+     * @param open true to open
+     */
+    public void door(boolean open) {
+        exchange.open(open);
+    }
+
+    /**
+     * Turns all electricity on or off.
+     *
+     * @param on true for on
+     */
+    public void power(boolean on) {
+        gains.power(on);
+        for (CoolerPart cooler : coolers) {
+            cooler.power(on);
+        }
+    }
+
+    /**
+     * Turns the lights on or off.
+     *
+     * @param on true for on
+     */
+    public void light(boolean on) {
+        gains.light(on);
+    }
+
+    /**
+     * Tells how many people are at work.
+     *
+     * @param present persons, may be a mean
+     */
+    public void people(double present) {
+        gains.people(present);
+    }
+
+    /**
+     * Sets what error counts as 1.
+     *
+     * @param lotK lots, K
+     * @param airK air, K
+     */
+    public void accuracy(double lotK, double airK) {
+        Arrays.fill(tolerances, lotK);
+        tolerances[AirState.ENTHALPY] = airK * MoistAir.DRY_AIR_J_KG_K;
+        tolerances[AirState.HUMIDITY] = airK * 5e-4;
+        for (FaceBranch face : faces) {
+            face.tolerances(airK, tolerances);
+        }
+        for (LotBranch lot : lots) {
+            lot.tolerances(lotK, airK, tolerances);
+        }
+        for (CoolerPart cooler : coolers) {
+            cooler.tolerances(tolerances);
+        }
+    }
+
+    @Override
+    public Tree tree() {
+        return tree;
+    }
+
+    @Override
+    public int flows() {
+        return flows;
+    }
+
+    @Override
+    public double[] tolerances() {
+        return tolerances;
+    }
+
+    @Override
+    public void rates(double t, double[] y, double[] rates, double[] flow) {
+        at(t);
+        air.set(y);
+        rates[AirState.ENTHALPY] = 0;
+        rates[AirState.HUMIDITY] = 0;
+        for (Part part : always) {
+            part.rates(air, outside, y, rates, flow);
+        }
+        for (LotBranch lot : lots) {
+            if (lot.branch.active()) {
+                lot.rates(air, outside, y, rates, flow);
+            }
+        }
+        rates[AirState.ENTHALPY] /= airKg;
+        rates[AirState.HUMIDITY] /= airKg;
+    }
+
+    @Override
+    public void linearise(double t, double[] y, double[] rateSlope, double[] flowSlope) {
+        at(t);
+        startAir.set(y);
+        Arrays.fill(tree.hubByHub, 0);
+        Arrays.fill(rateSlope, 0);
+        Arrays.fill(flowSlope, 0);
+        for (Part part : always) {
+            part.linearise(startAir, outside, airKg, y, tree);
+            part.timeSlope(startAir, outside, y, rateSlope, flowSlope);
+        }
+        for (LotBranch lot : lots) {
+            if (lot.branch.active()) {
+                lot.linearise(startAir, outside, airKg, y, tree);
+            }
+        }
+        rateSlope[AirState.ENTHALPY] /= airKg;
+        rateSlope[AirState.HUMIDITY] /= airKg;
+    }
+
+    @Override
+    public void flowsAlong(double[] direction, double[] change) {
+        for (Part part : always) {
+            part.flowsAlong(startAir, direction, change);
+        }
+        for (LotBranch lot : lots) {
+            if (lot.branch.active()) {
+                lot.flowsAlong(startAir, direction, change);
+            }
+        }
+    }
+}
