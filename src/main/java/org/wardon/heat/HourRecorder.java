@@ -1,5 +1,8 @@
 package org.wardon.heat;
 
+import java.util.EnumMap;
+import java.util.Map;
+import java.util.Objects;
 import org.wardon.air.MoistAir;
 import org.wardon.heat.network.ChamberNetwork;
 import org.wardon.heat.network.Terms;
@@ -9,7 +12,7 @@ final class HourRecorder {
     private final ChamberNetwork network;
     private final Terms terms;
     private final double pressurePa;
-    private final double[][] columns = new double[Hours.Column.values().length][];
+    private final Map<Hours.Column, double[]> columns = new EnumMap<>(Hours.Column.class);
     private int size;
     private double lastS;
     private double lastAir;
@@ -25,8 +28,8 @@ final class HourRecorder {
         this.network = network;
         this.terms = network.terms();
         this.pressurePa = pressurePa;
-        for (int i = 0; i < columns.length; i++) {
-            columns[i] = new double[mostRows];
+        for (Hours.Column column : Hours.Column.values()) {
+            columns.put(column, new double[mostRows]);
         }
     }
 
@@ -43,7 +46,7 @@ final class HourRecorder {
     }
 
     private void set(Hours.Column column, double value) {
-        columns[column.ordinal()][size] = value;
+        Objects.requireNonNull(columns.get(column))[size] = value;
     }
 
     /** Writes a row; {@code respirationJ} is what the lots present gave off since the start. */

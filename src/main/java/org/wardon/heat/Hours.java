@@ -1,6 +1,9 @@
 package org.wardon.heat;
 
 import java.util.Arrays;
+import java.util.EnumMap;
+import java.util.Map;
+import java.util.Objects;
 
 /**
  * The chamber's series. Row i stands at {@link #atS}, an hour after the one before (the last may be
@@ -8,7 +11,8 @@ import java.util.Arrays;
  * instant.
  */
 public final class Hours {
-    private final double[][] columns;
+    private final Map<Column, double[]> columns = new EnumMap<>(Column.class);
+    private final int rows;
 
     /** The columns, in order. */
     enum Column {
@@ -28,15 +32,13 @@ public final class Hours {
         RESPIRATION_W
     }
 
-    Hours(double[][] columns, int rows) {
-        this.columns = new double[columns.length][];
-        for (int i = 0; i < columns.length; i++) {
-            this.columns[i] = Arrays.copyOf(columns[i], rows);
-        }
+    Hours(Map<Column, double[]> columns, int rows) {
+        this.rows = rows;
+        columns.forEach((column, values) -> this.columns.put(column, Arrays.copyOf(values, rows)));
     }
 
     private double get(Column column, int i) {
-        return columns[column.ordinal()][i];
+        return Objects.requireNonNull(columns.get(column))[i];
     }
 
     /**
@@ -45,7 +47,7 @@ public final class Hours {
      * @return at least 1
      */
     public int size() {
-        return columns[0].length;
+        return rows;
     }
 
     /**

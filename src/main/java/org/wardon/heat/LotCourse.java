@@ -1,13 +1,17 @@
 package org.wardon.heat;
 
 import java.util.Arrays;
+import java.util.EnumMap;
+import java.util.Map;
+import java.util.Objects;
 import org.wardon.lots.LotHistory;
 
 /** What a lot went through in a run, its time as a shadow included. */
 public final class LotCourse {
     private final Stay stay;
     private final LotHistory history;
-    private final double[][] rows;
+    private final Map<Column, double[]> rows = new EnumMap<>(Column.class);
+    private final int size;
     private final LotTotals totals;
 
     /** Columns of the hourly series. */
@@ -20,14 +24,13 @@ public final class LotCourse {
         MASS_KG
     }
 
-    LotCourse(Stay stay, LotHistory history, double[][] rows, int size, LotTotals totals) {
+    LotCourse(
+            Stay stay, LotHistory history, Map<Column, double[]> rows, int size, LotTotals totals) {
         this.stay = stay;
         this.history = history;
         this.totals = totals;
-        this.rows = new double[rows.length][];
-        for (int i = 0; i < rows.length; i++) {
-            this.rows[i] = Arrays.copyOf(rows[i], size);
-        }
+        this.size = size;
+        rows.forEach((column, values) -> this.rows.put(column, Arrays.copyOf(values, size)));
     }
 
     /**
@@ -64,11 +67,11 @@ public final class LotCourse {
      * @return 0 where the lot arrives after the run
      */
     public int size() {
-        return rows[0].length;
+        return size;
     }
 
     private double get(Column column, int i) {
-        return rows[column.ordinal()][i];
+        return Objects.requireNonNull(rows.get(column))[i];
     }
 
     /**

@@ -1,7 +1,10 @@
 package org.wardon.heat;
 
 import java.util.ArrayList;
+import java.util.EnumMap;
 import java.util.List;
+import java.util.Map;
+import java.util.Objects;
 import org.wardon.heat.network.LotBranch;
 import org.wardon.lots.BurntSugar;
 import org.wardon.lots.LotHistory;
@@ -19,7 +22,8 @@ final class LotRecorder {
     private final Stay stay;
     private final LotBranch lot;
     private final LotHistory.Builder history = new LotHistory.Builder();
-    private final double[][] rows = new double[LotCourse.Column.values().length][];
+    private final Map<LotCourse.Column, double[]> rows = new EnumMap<>(LotCourse.Column.class);
+    private double lastRowS = Double.NEGATIVE_INFINITY;
     private int size;
     private double lastSampleS = Double.NEGATIVE_INFINITY;
     private double arrivedS = Double.POSITIVE_INFINITY;
@@ -40,8 +44,8 @@ final class LotRecorder {
         this.lot = lot;
         this.nothing = new LotTotals(0, 0, 0, 0, stay.lot().massKg());
         this.totals = nothing;
-        for (int i = 0; i < rows.length; i++) {
-            rows[i] = new double[mostRows];
+        for (LotCourse.Column column : LotCourse.Column.values()) {
+            rows.put(column, new double[mostRows]);
         }
     }
 
@@ -110,18 +114,23 @@ final class LotRecorder {
         if (arrivedS == Double.POSITIVE_INFINITY) {
             return;
         }
-        if (size == 0 || t > rows[0][size - 1]) {
-            rows[LotCourse.Column.AT_S.ordinal()][size] = t;
-            rows[LotCourse.Column.MEAN_C.ordinal()][size] = lot.meanC(y);
-            rows[LotCourse.Column.SURFACE_C.ordinal()][size] = lot.surfaceC(y);
-            rows[LotCourse.Column.CORE_C.ordinal()][size] = lot.coreC(y);
-            rows[LotCourse.Column.RESPIRATION_W.ordinal()][size] = lot.respirationW(y);
-            rows[LotCourse.Column.MASS_KG.ordinal()][size] = massKg(y, integrals);
+        if (t > lastRowS) {
+            set(LotCourse.Column.AT_S, t);
+            set(LotCourse.Column.MEAN_C, lot.meanC(y));
+            set(LotCourse.Column.SURFACE_C, lot.surfaceC(y));
+            set(LotCourse.Column.CORE_C, lot.coreC(y));
+            set(LotCourse.Column.RESPIRATION_W, lot.respirationW(y));
+            set(LotCourse.Column.MASS_KG, massKg(y, integrals));
+            lastRowS = t;
             size++;
         }
         if (t > lastSampleS) {
             sample(t, y, integrals);
         }
+    }
+
+    private void set(LotCourse.Column column, double value) {
+        Objects.requireNonNull(rows.get(column))[size] = value;
     }
 
     private void sample(double t, double[] y, double[] integrals) {
