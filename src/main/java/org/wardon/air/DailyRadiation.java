@@ -9,6 +9,9 @@ package org.wardon.air;
 public final class DailyRadiation {
     private static final double SOLAR_CONSTANT_MJ_M2_MIN = 0.0820;
 
+    /** Coefficient for the interior of a land mass, 1/K^0.5; 0.19 at coasts. */
+    private static final double INTERIOR = 0.16;
+
     private DailyRadiation() {}
 
     /**
@@ -76,9 +79,6 @@ public final class DailyRadiation {
     public static double shareByRange(double rangeK, double elevationM) {
         return Math.min(INTERIOR * Math.sqrt(rangeK), clearSkyShare(elevationM));
     }
-
-    /** Coefficient for the interior of a land mass, 1/K^0.5; 0.19 at coasts. */
-    private static final double INTERIOR = 0.16;
 
     private static double declinationRad(int dayOfYear) {
         return 0.409 * Math.sin(2 * Math.PI * dayOfYear / 365 - 1.39);

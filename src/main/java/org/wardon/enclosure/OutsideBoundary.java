@@ -3,6 +3,7 @@ package org.wardon.enclosure;
 import java.util.ArrayList;
 import java.util.Arrays;
 import java.util.List;
+import java.util.Objects;
 import org.wardon.air.SolAir;
 import org.wardon.errors.Require;
 import org.wardon.produce.Reason;
@@ -12,6 +13,9 @@ import org.wardon.produce.Reason;
  * heat model sees no sun, wind or soil, only this.
  */
 public final class OutsideBoundary {
+    /** Conductance in place of a film where the resistance stands elsewhere already, W/(m2 K). */
+    private static final double TIGHT_WM2K = 1e4;
+
     private final double[] temperatureC;
     private final double[] filmWm2K;
     private final HeatFlow direction;
@@ -84,7 +88,7 @@ public final class OutsideBoundary {
                             + neighbour.chamberId()
                             + " is not given; known are "
                             + around.neighbourC().keySet());
-            return java.util.Objects.requireNonNull(air).temperatureC(hour);
+            return Objects.requireNonNull(air).temperatureC(hour);
         }
         return outdoorC;
     }
@@ -144,8 +148,6 @@ public final class OutsideBoundary {
         // The film is inside the slab's resistance already: a tight one stands here.
         return new OutsideBoundary(constant(n, deep), constant(n, TIGHT_WM2K), flow, soil, reasons);
     }
-
-    private static final double TIGHT_WM2K = 1e4;
 
     private static double meanWallThicknessM(Enclosure enclosure) {
         double sum = 0;

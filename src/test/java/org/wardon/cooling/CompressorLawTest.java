@@ -5,12 +5,17 @@ import static org.junit.jupiter.api.Assertions.assertFalse;
 import static org.junit.jupiter.api.Assertions.assertThrows;
 import static org.junit.jupiter.api.Assertions.assertTrue;
 
+import de.siegmar.fastcsv.reader.CsvReader;
+import de.siegmar.fastcsv.reader.NamedCsvRecord;
+import java.io.IOException;
+import java.nio.file.Path;
 import java.util.Optional;
 import java.util.OptionalDouble;
 import java.util.SplittableRandom;
 import java.util.function.DoubleConsumer;
 import java.util.function.ToDoubleFunction;
 import org.junit.jupiter.api.Test;
+import org.wardon.Source;
 import org.wardon.air.MoistAir;
 import org.wardon.cooling.Compressor.Control;
 
@@ -102,6 +107,61 @@ class CompressorLawTest {
         assertTrue(hot.evaporatingC > 11);
         assertEquals(hot.totalW, hotter.totalW, 1e-6);
         assertEquals(3_500 * Math.exp(0.035 * (10 - law.ratedEvaporatingC())), hotter.totalW, 0.01);
+    }
+
+    /** The three figures of a row: least, most, typical. */
+    private static double[] printed(String parameter) throws IOException {
+        try (CsvReader<NamedCsvRecord> csv =
+                CsvReader.builder()
+                        .ofNamedCsvRecord(Path.of("reference-tables/stores/cooling-sources.csv"))) {
+            for (NamedCsvRecord r : csv) {
+                if (r.getField("parameter").equals(parameter)) {
+                    return new double[] {
+                        Double.parseDouble(r.getField("min")),
+                        Double.parseDouble(r.getField("max")),
+                        Double.parseDouble(r.getField("typical"))
+                    };
+                }
+            }
+        }
+        throw new AssertionError(parameter);
+    }
+
+    @Source("ASHRAE Handbook - Refrigeration, from memory: table of cooling sources, capacity_te")
+    @Test
+    void capacityRisesWithTheEvaporatingTemperatureAsPrinted() throws IOException {
+        CompressorLaw law = unit(Control.ON_OFF, false).law(P);
+        CoolerEffect cold = effect(law, inputs(law, 2, 0.85, 32));
+        CoolerEffect warm = effect(law, inputs(law, 8, 0.85, 32));
+        double perK = Math.log(warm.totalW / cold.totalW) / (warm.evaporatingC - cold.evaporatingC);
+        double[] row = printed("capacity_te");
+        assertEquals(row[2], perK, 1e-6);
+        assertTrue(row[0] <= perK && perK <= row[1]);
+    }
+
+    @Source("ASHRAE Handbook - Refrigeration, from memory: capacity_tc and condensing_approach")
+    @Test
+    void capacityFallsWithTheCondensingTemperatureAsPrinted() throws IOException {
+        CompressorLaw law = unit(Control.ON_OFF, false).law(P);
+        // Above +10 °C evaporating only the condensing side tells.
+        CoolerEffect rated = effect(law, inputs(law, 35, 0.5, 32));
+        CoolerEffect hot = effect(law, inputs(law, 35, 0.5, 42));
+        double perK = (1 - hot.totalW / rated.totalW) / 10;
+        assertEquals(printed("capacity_tc")[2], perK, 1e-6);
+        assertEquals(35 + printed("condensing_approach")[2], rated.condensingC, 1e-9);
+    }
+
+    @Test
+    void frostTakesAFifthOfTheConductance() {
+        CompressorLaw law = unit(Control.ON_OFF, false).law(P);
+        CoolerInputs in = inputs(law, -10, 0.85, 32);
+        CoolerEffect out = effect(law, in);
+        assertTrue(out.evaporatingC < -5);
+        double met = (in.airC - out.supplyC) / (in.airC - out.evaporatingC);
+        double flow = 0.6 / MoistAir.specificVolumeM3kg(10, 0, P);
+        assertEquals(1 - Math.exp(-0.8 * 600 / (flow * 1_006)), met, 1e-9);
+        assertEquals(0, out.drainKgS, 1e-15);
+        assertTrue(out.frostKgS > 0);
     }
 
     @Test
