@@ -14,14 +14,16 @@ import java.util.stream.Collectors;
  * @param atC the temperature it holds at, °C, for facts that need one
  */
 record OwnName(Kind kind, OptionalDouble atC) {
+    private static final double COLDEST_C = -2;
+    private static final double HOTTEST_C = 40;
     private static final Pattern AT = Pattern.compile("([a-z-]+)@(-?[0-9]{1,2}(?:\\.[0-9]+)?)C");
 
     /** The facts, with their unit and the figures accepted (our bounds). */
     enum Kind {
         STORAGE_TEMPERATURE("storage-temperature", "C", -30, 30, false),
         STORAGE_HUMIDITY("storage-humidity", "pct", 1, 100, false),
-        STORAGE_LIFE("storage-life", "day", 0.1, 1000, false),
-        LIFE("life", "day", 0.1, 1000, true),
+        STORAGE_LIFE("storage-life", "day", 0.1, 730, false),
+        LIFE("life", "day", 0.1, 730, true),
         FREEZING_POINT("highest-freezing-point", "C", -30, 0, false),
         CHILLING_FLOOR("chilling-floor", "C", -5, 25, false),
         PERMISSIBLE_LOSS("permissible-loss", "pct", 0.1, 60, false),
@@ -70,11 +72,21 @@ record OwnName(Kind kind, OptionalDouble atC) {
         return Arrays.stream(Kind.values())
                 .filter(kind -> kind.word.equals(word) && kind.needsTemperature == hasTemperature)
                 .findFirst()
+                .filter(kind -> !hasTemperature || inReach(atC.orElseThrow()))
                 .map(kind -> new OwnName(kind, atC));
+    }
+
+    private static boolean inReach(double atC) {
+        return atC >= COLDEST_C && atC <= HOTTEST_C;
     }
 
     /** Returns the names that can be set, for a message. */
     static String accepted() {
-        return Arrays.stream(Kind.values()).map(Kind::form).collect(Collectors.joining(", "));
+        return Arrays.stream(Kind.values()).map(Kind::form).collect(Collectors.joining(", "))
+                + "; the temperature from "
+                + COLDEST_C
+                + " to "
+                + HOTTEST_C
+                + " C";
     }
 }

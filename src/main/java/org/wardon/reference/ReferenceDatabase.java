@@ -11,8 +11,10 @@ import java.sql.ResultSetMetaData;
 import java.sql.SQLException;
 import java.sql.Statement;
 import java.util.ArrayList;
+import java.util.HashMap;
 import java.util.HashSet;
 import java.util.List;
+import java.util.Map;
 import java.util.Optional;
 import java.util.Set;
 import java.util.function.Function;
@@ -26,6 +28,7 @@ final class ReferenceDatabase implements AutoCloseable {
     private static final String FILE = "reference.db";
 
     private final Connection connection;
+    private final Map<String, PreparedStatement> idle = new HashMap<>();
 
     private ReferenceDatabase(Connection connection) {
         this.connection = connection;
@@ -56,23 +59,38 @@ final class ReferenceDatabase implements AutoCloseable {
         }
     }
 
-    /** Returns one value a row, in the order of the query. */
+    /** Returns one value a row, in the order of the query; a reading may ask further queries. */
     synchronized <T> List<T> list(String sql, Function<Row, T> reading, Object... arguments) {
-        try (PreparedStatement statement = connection.prepareStatement(sql)) {
-            for (int i = 0; i < arguments.length; i++) {
-                statement.setObject(i + 1, arguments[i]);
+        try {
+            PreparedStatement statement = idle.remove(sql);
+            if (statement == null) {
+                statement = connection.prepareStatement(sql);
             }
-            List<T> values = new ArrayList<>();
-            try (ResultSet results = statement.executeQuery()) {
-                Row row = new Row(results, columns(results.getMetaData()));
-                while (results.next()) {
-                    values.add(reading.apply(row));
-                }
+            List<T> values = ask(statement, reading, arguments);
+            PreparedStatement twin = idle.put(sql, statement);
+            if (twin != null) {
+                twin.close();
             }
             return values;
         } catch (SQLException e) {
             throw new IllegalStateException(FILE + " does not answer: " + sql, e);
         }
+    }
+
+    private static <T> List<T> ask(
+            PreparedStatement statement, Function<Row, T> reading, Object... arguments)
+            throws SQLException {
+        for (int i = 0; i < arguments.length; i++) {
+            statement.setObject(i + 1, arguments[i]);
+        }
+        List<T> values = new ArrayList<>();
+        try (ResultSet results = statement.executeQuery()) {
+            Row row = new Row(results, columns(results.getMetaData()));
+            while (results.next()) {
+                values.add(reading.apply(row));
+            }
+        }
+        return values;
     }
 
     /** Returns the values of the rows that have one, in the order of the query. */

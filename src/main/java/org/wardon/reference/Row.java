@@ -27,7 +27,7 @@ final class Row {
 
     Row(ResultSet results, Set<String> columns) {
         this.results = results;
-        this.columns = Set.copyOf(columns);
+        this.columns = columns;
     }
 
     /** Returns the text; an empty cell is an empty text. */

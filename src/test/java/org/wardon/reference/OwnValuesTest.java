@@ -2,6 +2,7 @@ package org.wardon.reference;
 
 import static org.junit.jupiter.api.Assertions.assertEquals;
 import static org.junit.jupiter.api.Assertions.assertFalse;
+import static org.junit.jupiter.api.Assertions.assertNotEquals;
 import static org.junit.jupiter.api.Assertions.assertThrows;
 import static org.junit.jupiter.api.Assertions.assertTrue;
 
@@ -19,14 +20,29 @@ import java.util.stream.Stream;
 import org.junit.jupiter.api.Test;
 import org.junit.jupiter.api.io.TempDir;
 import org.wardon.errors.BadInput;
+import org.wardon.keeping.RestsOn;
+import org.wardon.keeping.chilling.Chilling;
+import org.wardon.keeping.life.LifeCurve;
+import org.wardon.lots.ClassValues;
+import org.wardon.lots.Respirations;
 import org.wardon.produce.Commodity;
 import org.wardon.produce.NamedFact;
+import org.wardon.produce.Ripeness;
 
 /** A keeper's own values lie over print and are shown as own. */
 class OwnValuesTest {
     private static final String NOW = "2026-03-02T09:00:00Z";
 
+    /** Has a figure for everything the class values ask for. */
+    private static final Commodity APPLE = apple();
+
     @TempDir Path folder;
+
+    private static Commodity apple() {
+        try (ReferenceBook book = ReferenceBook.open()) {
+            return book.get("apple");
+        }
+    }
 
     @Test
     void ownValuesComeFirstAndPrintStaysVisible() {
@@ -64,6 +80,40 @@ class OwnValuesTest {
                             .orElseThrow();
             assertEquals(13, printed.low().orElseThrow());
         }
+    }
+
+    @Test
+    void theModelReckonsWithOwnValues() {
+        OwnValues own = new OwnValues(folder);
+        own.set(OwnValue.of("mango", "chilling-floor", 8, 8, NOW));
+        own.set(OwnValue.of("mango", "life@10C", 9, 9, NOW));
+        own.set(OwnValue.of("mango", "respiration-heat@13C", 50, 50, NOW));
+        own.set(OwnValue.of("mango", "permissible-loss", 6, 6, NOW));
+        try (ReferenceBook book = ReferenceBook.open(own);
+                ReferenceBook print = ReferenceBook.open()) {
+            Commodity mango = book.get("mango");
+            Commodity printed = print.get("mango");
+            assertEquals(8, floor(mango));
+            assertEquals(10, floor(printed), 3);
+            assertNotEquals(8, floor(printed));
+            assertEquals(RestsOn.KNOWN_LIFE, life(mango).restsOn());
+            assertNotEquals(RestsOn.KNOWN_LIFE, life(printed).restsOn());
+            assertEquals(0.050, wattsPerKg(mango), 1e-9);
+            assertTrue(wattsPerKg(printed) > 0.080);
+        }
+    }
+
+    private static double floor(Commodity commodity) {
+        return Chilling.of(commodity, Ripeness.GREEN).orElseThrow().zone().topC();
+    }
+
+    private static LifeCurve life(Commodity commodity) {
+        return LifeCurve.of(commodity, 0, Optional.empty());
+    }
+
+    private static double wattsPerKg(Commodity commodity) {
+        ClassValues classes = ClassValues.of(List.of(commodity, APPLE));
+        return Respirations.of(commodity, Ripeness.UNKNOWN, classes, 0.5).value().wattsPerKg(13);
     }
 
     @Test
@@ -119,7 +169,8 @@ class OwnValuesTest {
         assertEquals(
                 "mango colour: no fact of this name can be set; one of storage-temperature,"
                         + " storage-humidity, storage-life, life@10C, highest-freezing-point,"
-                        + " chilling-floor, permissible-loss, respiration-heat@10C",
+                        + " chilling-floor, permissible-loss, respiration-heat@10C; the"
+                        + " temperature from -2.0 to 40.0 C",
                 name.getMessage());
         BadInput range =
                 assertThrows(

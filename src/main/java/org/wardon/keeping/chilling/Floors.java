@@ -12,11 +12,12 @@ import org.wardon.produce.rows.ChillingFloor;
 /**
  * Which lowest safe temperature counts for a lot.
  *
- * <p>The rule: of the printed rows, those of the lot's ripeness, else those that state none; rows
- * of single cultivars only where there are no others. Among them the highest printed figure counts,
- * but not above the handbook's own storage temperature unless a row gives it as its lower bound.
- * Unknown ripeness is judged as green. A commodity without a row whose handbook temperature is 7 °C
- * or more is taken to chill below that temperature (assumption).
+ * <p>The rule: the keeper's own floor, where there is one; else of the printed rows, those of the
+ * lot's ripeness, else those that state none; rows of single cultivars only where there are no
+ * others. Among them the highest printed figure counts, but not above the handbook's own storage
+ * temperature unless a row gives it as its lower bound. Unknown ripeness is judged as green. A
+ * commodity without a row whose handbook temperature is 7 °C or more is taken to chill below that
+ * temperature (assumption).
  */
 final class Floors {
     private static final double TROPICAL_FROM_C = 7;
@@ -94,6 +95,11 @@ final class Floors {
             if (row.rated() && row.lowestSafeC().isPresent() && !row.zone().isEmpty()) {
                 all.add(row);
             }
+        }
+        List<ChillingFloor> own =
+                all.stream().filter(row -> row.lowestSafeC().orElseThrow().own()).toList();
+        if (!own.isEmpty()) {
+            return own;
         }
         List<ChillingFloor> fitting =
                 all.stream().filter(row -> row.ripeness().equals(word(ripeness))).toList();

@@ -44,7 +44,8 @@ public final class LifeCurve {
      * @param commodity the commodity
      * @param chillingFloorC lives below it are left to chilling, °C; minus infinity where it does
      *     not chill
-     * @param known the keeper's own figure, which sets the level
+     * @param known the keeper's own figure, which sets the level; where there is none, an own life
+     *     at a temperature among the commodity's facts does
      * @return the curve
      */
     public static LifeCurve of(
@@ -53,7 +54,17 @@ public final class LifeCurve {
                 ClassLife.of(commodity),
                 OwnSlope.of(commodity, chillingFloorC),
                 Rest.exponent(commodity),
-                known);
+                known.or(() -> own(commodity)));
+    }
+
+    private static Optional<KnownLife> own(Commodity commodity) {
+        return commodity.keeping().lives().stream()
+                .filter(row -> row.lifeDays().own() && row.temperatureC().isPresent())
+                .findFirst()
+                .map(
+                        row ->
+                                new KnownLife(
+                                        row.lifeDays().middle(), row.temperatureC().getAsDouble()));
     }
 
     /**
