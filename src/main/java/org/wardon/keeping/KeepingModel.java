@@ -86,7 +86,17 @@ public final class KeepingModel {
      * @return its fate
      */
     public Fate follow(LotHistory history, Draw draw, Window beyond) {
-        return new Following(this, history, draw, beyond).fate();
+        return new Following(paces(draw), history, beyond).fate();
+    }
+
+    /**
+     * Returns the pace of each mechanism in a draw.
+     *
+     * @param draw the draw
+     * @return paces, for constant conditions
+     */
+    public Paces paces(Draw draw) {
+        return new Paces(this, draw);
     }
 
     /**
@@ -134,6 +144,24 @@ public final class KeepingModel {
      */
     public double lowestSafeC() {
         return chilling.map(c -> c.zone().topC()).orElse(Double.NEGATIVE_INFINITY);
+    }
+
+    /**
+     * Returns the warm end of the temperature the handbook advises.
+     *
+     * @return °C; that of kin or plant part where none is printed
+     */
+    public double handbookC() {
+        return water.handbookC();
+    }
+
+    /**
+     * Returns the middle of the humidity the handbook advises.
+     *
+     * @return 0 to 1
+     */
+    public double handbookHumidityFraction() {
+        return water.handbookHumidity();
     }
 
     /**

@@ -16,9 +16,10 @@ import org.wardon.produce.rows.MoistureLimit;
  * How much water a lot may lose.
  *
  * <p>The rule: the printed permissible loss, but never less than what the produce would lose in an
- * open package over the published life in the handbook's own condition, for there it keeps. For a
- * commodity with a limit of its own the shortest published life counts, for one that has only the
- * general limit the life of the draw.
+ * open package over the published life in the handbook's own condition (at the warm end of its
+ * temperature, in the middle of its humidity), for there it keeps. For a commodity with a limit of
+ * its own the shortest published life counts, for one that has only the general limit the life of
+ * the draw.
  */
 final class WaterLimit {
     /** General rule for produce: shrivel becomes obvious at 3 to 6 percent, id AH66-1986. */
@@ -42,7 +43,7 @@ final class WaterLimit {
         general = first.isEmpty() || first.get().symptom().contains(GENERAL);
         sourceId = first.map(row -> row.maxLossPct().sourceId()).orElse("AH66-1986");
         this.curve = curve;
-        handbookC = 0.5 * (curve.level().atLowC() + curve.level().atHighC());
+        handbookC = curve.level().atHighC();
         handbookHumidity =
                 commodity
                         .needs()
@@ -54,6 +55,16 @@ final class WaterLimit {
 
     String sourceId() {
         return sourceId;
+    }
+
+    /** Warm end of the handbook's temperature, °C. */
+    double handbookC() {
+        return handbookC;
+    }
+
+    /** Middle of the handbook's humidity, 0 to 1. */
+    double handbookHumidity() {
+        return handbookHumidity;
     }
 
     /** Permissible loss of a draw, share of the mass. */

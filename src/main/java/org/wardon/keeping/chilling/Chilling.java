@@ -3,8 +3,8 @@ package org.wardon.keeping.chilling;
 import java.util.Optional;
 import org.apache.commons.math3.distribution.NormalDistribution;
 import org.wardon.keeping.Draw;
+import org.wardon.keeping.life.LifeLevel;
 import org.wardon.produce.Commodity;
-import org.wardon.produce.Fact;
 import org.wardon.produce.Ripeness;
 
 /**
@@ -20,21 +20,12 @@ public final class Chilling {
 
     private final Zone zone;
     private final DoseFit fit;
-    private final double handbookLowC;
-    private final double handbookHighC;
-    private final double publishedDays;
+    private final LifeLevel handbook;
 
-    private Chilling(
-            Zone zone,
-            DoseFit fit,
-            double handbookLowC,
-            double handbookHighC,
-            double publishedDays) {
+    private Chilling(Zone zone, DoseFit fit, LifeLevel handbook) {
         this.zone = zone;
         this.fit = fit;
-        this.handbookLowC = handbookLowC;
-        this.handbookHighC = handbookHighC;
-        this.publishedDays = publishedDays;
+        this.handbook = handbook;
     }
 
     /**
@@ -49,18 +40,13 @@ public final class Chilling {
     }
 
     private static Chilling of(Commodity commodity, Ripeness ripeness, Zone zone) {
-        Optional<Fact> handbook = commodity.needs().temperatureC();
-        double low = handbook.map(Fact::lowest).orElse(zone.topC());
-        double high = handbook.map(Fact::highest).orElse(zone.topC());
-        double days =
-                handbook.isPresent()
-                        ? commodity.needs().lifeDays().map(Fact::lowest).orElse(0.0)
-                        : 0;
+        LifeLevel handbook = LifeLevel.of(commodity);
         DoseFit first = DoseFit.of(commodity, ripeness, zone, 0);
-        Chilling printed = new Chilling(zone, first, low, high, days);
-        double shift = zone.bandLowC().isPresent() ? 0 : printed.shiftK(Math.exp(first.lnMedian()));
+        Chilling printed = new Chilling(zone, first, handbook);
+        double shift =
+                zone.bandLowC().isPresent() ? 0 : printed.shiftK(Math.exp(first.lnMedian()), 0.5);
         DoseFit fit = shift > 0 ? DoseFit.of(commodity, ripeness, zone, shift) : first;
-        return new Chilling(zone, fit, low, high, days);
+        return new Chilling(zone, fit, handbook);
     }
 
     /**
@@ -103,22 +89,24 @@ public final class Chilling {
                                 + fit.deviation()
                                         * NORMAL.inverseCumulativeProbability(draw.chilling()));
         if (zone.bandLowC().isEmpty()) {
-            return new Injury(zone, shiftK(dose), dose);
+            return new Injury(zone, shiftK(dose, draw.chilling()), dose);
         }
-        return new Injury(zone, 0, Math.max(dose, publishedDays * worstInHandbookK()));
+        return new Injury(zone, 0, Math.max(dose, days(draw.chilling()) * worstInHandbookK()));
     }
 
     /** How far the floor moves down so that the handbook's coldest keeps the published life. */
-    private double shiftK(double doseKd) {
-        if (publishedDays <= 0) {
-            return 0;
-        }
-        return Math.max(0, zone.topC() - handbookLowC - doseKd / publishedDays);
+    private double shiftK(double doseKd, double quantile) {
+        return Math.max(0, zone.topC() - handbook.atLowC() - doseKd / days(quantile));
+    }
+
+    /** A tender lot must keep the shortest published life there, a hardy one the longest. */
+    private double days(double quantile) {
+        return handbook.lowDays() * Math.pow(handbook.highDays() / handbook.lowDays(), quantile);
     }
 
     private double worstInHandbookK() {
-        double worst = zone.severityK(handbookHighC, 0);
-        for (double t = handbookLowC; t < handbookHighC; t += STEP_K) {
+        double worst = zone.severityK(handbook.atHighC(), 0);
+        for (double t = handbook.atLowC(); t < handbook.atHighC(); t += STEP_K) {
             worst = Math.max(worst, zone.severityK(t, 0));
         }
         return worst;

@@ -4,8 +4,8 @@ import java.util.ArrayList;
 import java.util.List;
 import java.util.Optional;
 import java.util.OptionalDouble;
+import org.wardon.keeping.life.LifeLevel;
 import org.wardon.produce.Commodity;
-import org.wardon.produce.Fact;
 import org.wardon.produce.Ripeness;
 import org.wardon.produce.rows.ChillingFloor;
 
@@ -35,21 +35,22 @@ final class Floors {
      */
     static Optional<Zone> of(Commodity commodity, Ripeness ripeness) {
         List<ChillingFloor> rows = chosen(commodity, ripeness);
-        Optional<Fact> handbook = commodity.needs().temperatureC();
+        LifeLevel handbook = LifeLevel.of(commodity);
         if (rows.isEmpty()) {
             boolean rated = commodity.keeping().floors().stream().anyMatch(row -> !row.rated());
-            return handbook.filter(fact -> fact.lowest() >= TROPICAL_FROM_C && !rated)
-                    .map(
-                            fact ->
-                                    new Zone(
-                                            fact.lowest(),
-                                            OptionalDouble.empty(),
-                                            false,
-                                            true,
-                                            fact.sourceId()));
+            boolean tropical = handbook.atLowC() >= TROPICAL_FROM_C && !rated;
+            return tropical
+                    ? Optional.of(
+                            new Zone(
+                                    handbook.atLowC(),
+                                    OptionalDouble.empty(),
+                                    false,
+                                    true,
+                                    handbook.sourceId()))
+                    : Optional.empty();
         }
         boolean band = rows.stream().anyMatch(row -> row.zone().equals(BAND));
-        return Optional.of(band ? band(rows) : floor(rows, handbook));
+        return Optional.of(band ? band(rows) : floor(rows, handbook.atLowC()));
     }
 
     private static Zone band(List<ChillingFloor> rows) {
@@ -63,11 +64,10 @@ final class Floors {
         return new Zone(top, OptionalDouble.of(low), skin(rows), false, rows.get(0).sourceId());
     }
 
-    private static Zone floor(List<ChillingFloor> rows, Optional<Fact> handbook) {
+    private static Zone floor(List<ChillingFloor> rows, double keptAtC) {
         double highest = rows.stream().mapToDouble(Floors::high).max().orElseThrow();
         double highestLow = rows.stream().mapToDouble(Floors::low).max().orElseThrow();
-        double kept = handbook.map(Fact::lowest).orElse(highest);
-        double floor = Math.max(highestLow, Math.min(highest, kept));
+        double floor = Math.max(highestLow, Math.min(highest, keptAtC));
         return new Zone(floor, OptionalDouble.empty(), skin(rows), false, sourceOf(rows, floor));
     }
 

@@ -12,7 +12,8 @@ import org.wardon.produce.rows.EthyleneRate;
 /**
  * Ethylene a commodity gives off. Between the temperatures of its rows the logarithm of the rate is
  * straight; beyond them Q10 is 2 to 3 (assumption). Rows that print an upper limit only reach a
- * decade down from it (assumption). Without rows the class at 20 °C counts.
+ * decade down from it (assumption); a lower limit alone is taken as it stands. Without rows the
+ * class at 20 °C counts.
  *
  * <p>Source of the classes: id kader-lists (very low under 0.1, low 0.1 to 1, moderate 1 to 10,
  * high 10 to 100, very high over 100 µL/(kg h) at 20 °C).
@@ -70,10 +71,7 @@ public final class Giving {
         double high = row.microlitrePerKgHour().highest();
         double low = row.microlitrePerKgHour().lowest();
         boolean lowPrinted = row.microlitrePerKgHour().low().isPresent();
-        boolean highPrinted = row.microlitrePerKgHour().high().isPresent();
-        return new double[] {
-            atC, lowPrinted ? low : high / DECADE, highPrinted ? high : low * DECADE
-        };
+        return new double[] {atC, lowPrinted ? low : high / DECADE, high};
     }
 
     /**

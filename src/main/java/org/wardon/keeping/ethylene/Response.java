@@ -38,19 +38,22 @@ public final class Response {
     private final OptionalDouble triggerPpm;
     private final Giving giving;
     private final double handbookC;
-    private final double stage;
+    private final Commodity commodity;
+    private final Ripeness ripeness;
 
     private Response(
             boolean sensitive,
             OptionalDouble triggerPpm,
             Giving giving,
             double handbookC,
-            double stage) {
+            Commodity commodity,
+            Ripeness ripeness) {
         this.sensitive = sensitive;
         this.triggerPpm = triggerPpm;
         this.giving = giving;
         this.handbookC = handbookC;
-        this.stage = stage;
+        this.commodity = commodity;
+        this.ripeness = ripeness;
     }
 
     /**
@@ -74,7 +77,8 @@ public final class Response {
                 trigger,
                 Giving.of(commodity),
                 commodity.needs().temperatureC().map(fact -> fact.middle()).orElse(10.0),
-                Stage.giving(commodity, ripeness));
+                commodity,
+                ripeness);
     }
 
     /**
@@ -84,6 +88,15 @@ public final class Response {
      */
     public boolean sensitive() {
         return sensitive;
+    }
+
+    /**
+     * Returns what the commodity gives off itself.
+     *
+     * @return its rates
+     */
+    public Giving giving() {
+        return giving;
     }
 
     /**
@@ -110,6 +123,7 @@ public final class Response {
     }
 
     private double ownKindPpm(Draw draw) {
+        double stage = Stage.giving(commodity, ripeness, draw);
         double rate = giving.microlitrePerKgHour(handbookC, stage, draw);
         return steadyPpm(USUAL_KG_M3 * rate, USUAL_AIR_CHANGES);
     }

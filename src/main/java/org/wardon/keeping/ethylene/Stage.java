@@ -1,6 +1,7 @@
 package org.wardon.keeping.ethylene;
 
 import java.util.Set;
+import org.wardon.keeping.Draw;
 import org.wardon.produce.Commodity;
 import org.wardon.produce.Ripeness;
 
@@ -13,8 +14,6 @@ public final class Stage {
     /** Rows of the tables that already speak of green fruit. */
     private static final Set<String> GREEN_IDS =
             Set.of("banana-green", "tomato-mature-green", "plantain");
-
-    private static final double HALF_WAY = 0.5;
 
     private Stage() {}
 
@@ -49,12 +48,13 @@ public final class Stage {
      *
      * @param commodity the commodity
      * @param told what was told of its ripeness
-     * @return 0 for green fruit that ripens, 1 for ripening, ripe and unknown, half way for produce
-     *     that does not ripen
+     * @param draw the draw
+     * @return 0 for green fruit that ripens, 1 for ripening, ripe and unknown; for produce that
+     *     does not ripen as the draw has it
      */
-    public static double giving(Commodity commodity, Ripeness told) {
+    public static double giving(Commodity commodity, Ripeness told, Draw draw) {
         if (!commodity.climacteric()) {
-            return HALF_WAY;
+            return draw.ethyleneGiven();
         }
         return judged(commodity, told) == Ripeness.GREEN ? 0 : 1;
     }

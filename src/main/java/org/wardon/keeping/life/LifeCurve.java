@@ -22,8 +22,12 @@ public final class LifeCurve {
     /** How well a keeper's own figure is known (assumption). */
     private static final double OF_OWN_FIGURE = 1.25;
 
+    /** Least share of a printed range that is left to lots once temperature has its part (ours). */
+    private static final double LEAST_WIDTH = 0.5;
+
     private static final double LEAST_KJ_MOL = 15;
-    private static final double ENOUGH_WEIGHT = 0.5;
+    private static final double ENOUGH_WEIGHT = 0.4;
+    private static final int ENOUGH_TEMPERATURES = 3;
     private static final NormalDistribution NORMAL = new NormalDistribution(null, 0, 1);
 
     private final LifeLevel level;
@@ -51,7 +55,7 @@ public final class LifeCurve {
     public static LifeCurve of(
             Commodity commodity, double chillingFloorC, Optional<KnownLife> known) {
         return new LifeCurve(
-                ClassLife.of(commodity),
+                LifeLevel.of(commodity),
                 OwnSlope.of(commodity, chillingFloorC),
                 Rest.exponent(commodity),
                 known.or(() -> own(commodity)));
@@ -97,7 +101,7 @@ public final class LifeCurve {
         if (level.restsOn() == RestsOn.CLASS) {
             return RestsOn.CLASS;
         }
-        if (slope.ownWeight() >= ENOUGH_WEIGHT) {
+        if (slope.ownWeight() >= ENOUGH_WEIGHT && slope.temperatures() >= ENOUGH_TEMPERATURES) {
             return RestsOn.OWN_CURVE;
         }
         return slope.ownWeight() > 0 ? RestsOn.POOLED_SLOPE : RestsOn.HANDBOOK_LIFE;
@@ -154,11 +158,10 @@ public final class LifeCurve {
         }
         double low = Math.log(level.lowDays());
         double high = Math.log(level.highDays());
-        double width = Math.log(BETWEEN_SOURCES);
         if (high - low < 1e-9) {
-            return low + (2 * q - 1) * width;
+            return low + (2 * q - 1) * Math.log(BETWEEN_SOURCES);
         }
         double fall = free.lnRate(level.atHighC()) - free.lnRate(level.atLowC());
-        return low + q * Math.max(high - low - fall, Math.min(high - low, width));
+        return low + q * Math.max(high - low - fall, LEAST_WIDTH * (high - low));
     }
 }

@@ -1,6 +1,7 @@
 package org.wardon.keeping.life;
 
 import org.wardon.keeping.RestsOn;
+import org.wardon.produce.Commodity;
 
 /**
  * The life a curve is anchored on.
@@ -18,4 +19,14 @@ public record LifeLevel(
         double lowDays,
         double highDays,
         RestsOn restsOn,
-        String sourceId) {}
+        String sourceId) {
+    /**
+     * Returns the life to anchor on.
+     *
+     * @param commodity the commodity
+     * @return the handbook's own life in its own condition, else that of kin or plant part
+     */
+    public static LifeLevel of(Commodity commodity) {
+        return ClassLife.of(commodity);
+    }
+}

@@ -1,0 +1,13 @@
+package org.wardon.keeping;
+
+import org.wardon.lots.LotHistory;
+
+/**
+ * A lot in a chamber as it gives off and feels ethylene.
+ *
+ * @param lot the lot
+ * @param history what it goes through from its arrival on
+ * @param massKg its mass, kg
+ * @param leavesS from here on it gives nothing, s; it goes on feeling the air
+ */
+public record Giver(KeptLot lot, LotHistory history, double massKg, double leavesS) {}

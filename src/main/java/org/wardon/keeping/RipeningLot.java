@@ -1,0 +1,93 @@
+package org.wardon.keeping;
+
+import java.util.OptionalDouble;
+import org.wardon.air.Timeline;
+import org.wardon.keeping.ethylene.Giving;
+import org.wardon.keeping.ethylene.Stage;
+import org.wardon.keeping.ethylene.Trigger;
+import org.wardon.lots.LotHistory;
+import org.wardon.produce.Ripeness;
+
+/** One lot stepped through a chamber's ethylene: gives off, feels, begins to ripen. */
+final class RipeningLot {
+    /** Ageing does not ask for humidity. */
+    private static final double ANY_HUMIDITY = 0.9;
+
+    private final Giver giver;
+    private final Draw draw;
+    private final KeepingModel model;
+    private final Giving giving;
+    private final Wear green;
+    private final Trigger trigger;
+    private double greenUsed;
+    private double ripensS = Double.POSITIVE_INFINITY;
+    private int cursor;
+
+    RipeningLot(Giver giver, Draw draw) {
+        this.giver = giver;
+        this.draw = draw;
+        model = KeepingModel.of(giver.lot());
+        giving = model.response().giving();
+        OptionalDouble level = model.response().triggerPpm(draw);
+        trigger = new Trigger(level.orElse(Double.POSITIVE_INFINITY), model.lowestSafeC());
+        Paces paces = model.paces(draw);
+        green = paces.aged(paces.greenShare(), true);
+        greenUsed = giver.lot().door().usedFraction().orElse(paces.beforeArrival(green));
+    }
+
+    private boolean here(double atS) {
+        return atS >= giver.history().timeS(0);
+    }
+
+    /** Ethylene given off, µL/h. */
+    double microlitrePerHour(double atS) {
+        if (!here(atS) || atS >= giver.leavesS()) {
+            return 0;
+        }
+        return giver.massKg() * giving.microlitrePerKgHour(meanC(atS), stage(atS), draw);
+    }
+
+    private double stage(double atS) {
+        return atS >= ripensS
+                ? Stage.giving(giver.lot().commodity(), Ripeness.RIPE, draw)
+                : Stage.giving(giver.lot().commodity(), giver.lot().door().ripeness(), draw);
+    }
+
+    /** Feels the air of a step. */
+    void feel(double fromS, double toS, double ppm) {
+        if (!model.span().twoClocks() || !here(fromS) || fromS >= ripensS) {
+            return;
+        }
+        double middleC = meanC(0.5 * (fromS + toS));
+        double days = (toS - fromS) / Timeline.DAY_S;
+        greenUsed += days * green.perDay(middleC, middleC, ANY_HUMIDITY, ppm);
+        trigger.feel(toS, meanC(toS), ppm);
+        if (greenUsed >= 1 || trigger.startsS() <= toS) {
+            ripensS = toS;
+        }
+    }
+
+    /** When it began to ripen, s; infinite where it did not. */
+    double ripensS() {
+        return ripensS;
+    }
+
+    private double meanC(double atS) {
+        LotHistory h = giver.history();
+        int last = h.size() - 1;
+        if (atS >= h.timeS(last)) {
+            return h.meanC(last);
+        }
+        if (atS <= h.timeS(0)) {
+            return h.meanC(0);
+        }
+        while (cursor > 0 && h.timeS(cursor) > atS) {
+            cursor--;
+        }
+        while (h.timeS(cursor + 1) < atS) {
+            cursor++;
+        }
+        double share = (atS - h.timeS(cursor)) / (h.timeS(cursor + 1) - h.timeS(cursor));
+        return h.meanC(cursor) + share * (h.meanC(cursor + 1) - h.meanC(cursor));
+    }
+}

@@ -1,0 +1,72 @@
+package org.wardon.sharing;
+
+import java.util.ArrayList;
+import java.util.List;
+import org.wardon.errors.Require;
+import org.wardon.keeping.Draw;
+import org.wardon.produce.Reason;
+import org.wardon.produce.Reason.Argument;
+
+/** Who may share a chamber with whom, before there is a chamber. */
+public final class Sharing {
+    private Sharing() {}
+
+    /**
+     * Judges a group of lots.
+     *
+     * @param wishes the lots and their days, at least one, ids all different
+     * @param draws the draws, 32 are usual
+     * @return verdict, workable settings and every pair
+     */
+    public static SharingAnswer of(List<Wish> wishes, List<Draw> draws) {
+        List<Workable> lots = new ArrayList<>();
+        for (Wish wish : wishes) {
+            lots.add(Workable.of(wish, draws));
+        }
+        return among(lots);
+    }
+
+    /**
+     * Judges a group whose workable settings are known.
+     *
+     * @param lots the lots with their workable settings, at least one
+     * @return verdict, workable settings and every pair
+     */
+    public static SharingAnswer among(List<Workable> lots) {
+        Require.that(!lots.isEmpty(), "sharing is judged of at least one lot");
+        Common common = Common.of(lots);
+        Verdict verdict = common.verdict();
+        List<PairVerdict> pairs = new ArrayList<>();
+        for (int i = 0; i < lots.size(); i++) {
+            for (int j = i + 1; j < lots.size(); j++) {
+                PairVerdict pair = new Pairing(lots.get(i), lots.get(j)).verdict();
+                pairs.add(pair);
+                verdict = verdict.worse(pair.verdict());
+            }
+        }
+        return new SharingAnswer(
+                verdict, common.temperatureC(), common.humidityPct(), pairs, reasons(lots));
+    }
+
+    private static List<Reason> reasons(List<Workable> lots) {
+        List<Reason> reasons = new ArrayList<>();
+        for (Workable lot : lots) {
+            if (lot.fallsShortAnyway()) {
+                reasons.add(
+                        Reason.about(
+                                "keeps-less-than-wanted",
+                                lot.wish().lot().id(),
+                                "assumption",
+                                Argument.of(lot.wish().wholeDays(), "day")));
+            }
+            if (lot.model().uncured()) {
+                reasons.add(
+                        Reason.about(
+                                "cure-first",
+                                lot.wish().lot().id(),
+                                lot.wish().lot().commodity().keeping().curing().get(0).sourceId()));
+            }
+        }
+        return reasons;
+    }
+}

@@ -1,0 +1,231 @@
+package org.wardon.sharing;
+
+import java.util.ArrayList;
+import java.util.Arrays;
+import java.util.List;
+import org.wardon.keeping.Draw;
+import org.wardon.keeping.Fate;
+import org.wardon.keeping.KeepingModel;
+import org.wardon.keeping.Mechanism;
+import org.wardon.keeping.Paces;
+
+/**
+ * The workable settings of one lot: how good each temperature and humidity is for its wanted days
+ * and market leg, by the keeping model, ethylene left aside.
+ */
+public final class Workable {
+    private static final double MARKET_HUMIDITY = 0.75;
+
+    private final Wish wish;
+    private final KeepingModel model;
+    private final List<Draw> draws;
+
+    /** {@code [temperature][humidity]}, days. */
+    private final double[][] tenth = new double[Settings.TEMPERATURES][Settings.HUMIDITIES];
+
+    private final double[][] median = new double[Settings.TEMPERATURES][Settings.HUMIDITIES];
+
+    /** {@code [temperature]}, share of draws injured by the end of the market leg. */
+    private final double[] chilled = new double[Settings.TEMPERATURES];
+
+    /** {@code [temperature][humidity]}. */
+    private final Verdict[][] verdicts = new Verdict[Settings.TEMPERATURES][Settings.HUMIDITIES];
+
+    private Workable(Wish wish, List<Draw> draws) {
+        this.wish = wish;
+        this.draws = draws;
+        model = KeepingModel.of(wish.lot());
+        fill();
+        judge();
+    }
+
+    /**
+     * Works out the settings of a lot.
+     *
+     * @param wish the lot and its days
+     * @param draws the draws, 32 are usual
+     * @return its workable settings
+     */
+    public static Workable of(Wish wish, List<Draw> draws) {
+        return new Workable(wish, List.copyOf(draws));
+    }
+
+    private void fill() {
+        List<Paces> paces = new ArrayList<>();
+        for (Draw draw : draws) {
+            paces.add(model.paces(draw));
+        }
+        double[] days = new double[draws.size()];
+        for (int t = 0; t < Settings.TEMPERATURES; t++) {
+            double temperatureC = Settings.temperatureC(t);
+            int injured = 0;
+            double[] byTemperature = new double[draws.size()];
+            for (int d = 0; d < days.length; d++) {
+                byTemperature[d] = days(paces.get(d), temperatureC, 1, false);
+                injured +=
+                        daysBy(paces.get(d), Mechanism.CHILLING, temperatureC, 1) < wish.wholeDays()
+                                ? 1
+                                : 0;
+            }
+            chilled[t] = (double) injured / days.length;
+            for (int h = 0; h < Settings.HUMIDITIES; h++) {
+                double humidity = Settings.humidityPct(h) / 100;
+                for (int d = 0; d < days.length; d++) {
+                    days[d] =
+                            Math.min(
+                                    byTemperature[d],
+                                    days(paces.get(d), temperatureC, humidity, true));
+                }
+                place(t, h, days);
+            }
+        }
+    }
+
+    private void place(int t, int h, double[] days) {
+        double[] sorted = days.clone();
+        Arrays.sort(sorted);
+        tenth[t][h] = at(sorted, Limits.GOOD_SHARE);
+        median[t][h] = at(sorted, Limits.TOLERABLE_SHARE);
+    }
+
+    private void judge() {
+        for (int t = 0; t < Settings.TEMPERATURES; t++) {
+            for (int h = 0; h < Settings.HUMIDITIES; h++) {
+                verdicts[t][h] = judged(t, h);
+            }
+        }
+    }
+
+    private Verdict judged(int t, int h) {
+        if (!safe(t)) {
+            return Verdict.NO;
+        }
+        if (tenth[t][h] >= wish.wholeDays() && chilled[t] < Limits.GOOD_CHILLING) {
+            return Verdict.GOOD;
+        }
+        boolean nearly = handbookMedian() >= Limits.LEAST_OF_WANTED * wish.wholeDays();
+        return nearly && bearable(t, h) ? Verdict.TOLERABLE : Verdict.NO;
+    }
+
+    /** Whether the lot keeps its days, or most of what it has in the handbook's own condition. */
+    boolean bearable(int t, int h) {
+        return safe(t) && median[t][h] >= Limits.neededDays(handbookMedian(), wish.wholeDays());
+    }
+
+    /** Clear of freezing and hardly chilled; the handbook's condition is never refused for cold. */
+    private boolean safe(int t) {
+        double allowed = Math.max(Limits.TOLERABLE_CHILLING, chilled[handbookTemperature()] + 1e-9);
+        return clearOfFreezing(t) && chilled[t] < allowed;
+    }
+
+    private double handbookMedian() {
+        int h = Settings.nearestHumidity(100 * model.handbookHumidityFraction());
+        return median[handbookTemperature()][h];
+    }
+
+    private int handbookTemperature() {
+        return Settings.nearestTemperature(model.handbookC());
+    }
+
+    private static double at(double[] sorted, double share) {
+        double place = share * (sorted.length - 1);
+        int below = (int) place;
+        int above = Math.min(below + 1, sorted.length - 1);
+        return sorted[below] + (place - below) * (sorted[above] - sorted[below]);
+    }
+
+    /** Days by the mechanisms that ask for humidity, or by those that do not. */
+    private double days(Paces pace, double temperatureC, double humidity, boolean ofHumidity) {
+        double least = Fate.MOST_DAYS;
+        for (Mechanism mechanism : pace.mechanisms()) {
+            boolean asks = mechanism == Mechanism.WATER_LOSS || mechanism == Mechanism.DECAY;
+            if (asks == ofHumidity) {
+                least = Math.min(least, daysBy(pace, mechanism, temperatureC, humidity));
+            }
+        }
+        return least;
+    }
+
+    /** Days in the chamber so that the market leg still fits, and the market leg. */
+    private double daysBy(Paces pace, Mechanism mechanism, double temperatureC, double humidity) {
+        if (!pace.mechanisms().contains(mechanism)) {
+            return Fate.MOST_DAYS;
+        }
+        double perDay = pace.perDay(mechanism, temperatureC, humidity, 0);
+        double left = 1 - pace.start(mechanism);
+        double market = 0;
+        if (wish.marketC().isPresent()) {
+            market = wish.marketDays();
+            double marketC = wish.marketC().getAsDouble();
+            left -= market * pace.perDay(mechanism, marketC, MARKET_HUMIDITY, 0);
+        }
+        if (left <= 0) {
+            return 0;
+        }
+        return perDay > 0 ? Math.min(Fate.MOST_DAYS, left / perDay + market) : Fate.MOST_DAYS;
+    }
+
+    private boolean clearOfFreezing(int t) {
+        return Settings.temperatureC(t) >= model.freezingC() + Limits.FREEZING_MARGIN_K;
+    }
+
+    /**
+     * Returns the verdict on a setting.
+     *
+     * @param temperatureC temperature, °C; the nearest of the grid counts
+     * @param humidityPct humidity at the produce, percent; the nearest of the grid counts
+     * @return how good it is for this lot alone
+     */
+    public Verdict at(double temperatureC, double humidityPct) {
+        return at(Settings.nearestTemperature(temperatureC), Settings.nearestHumidity(humidityPct));
+    }
+
+    Verdict at(int t, int h) {
+        return verdicts[t][h];
+    }
+
+    /**
+     * Returns whether the lot falls short of its days even in the handbook's own condition, so that
+     * its company is not to blame.
+     *
+     * @return true if its median life there is shorter than stay and market leg
+     */
+    public boolean fallsShortAnyway() {
+        return handbookMedian() < wish.wholeDays();
+    }
+
+    /**
+     * Returns the days the lot lasts in a setting.
+     *
+     * @param temperatureC temperature, °C
+     * @param humidityPct humidity at the produce, percent
+     * @return tenth percentile, days
+     */
+    public double tenthDays(double temperatureC, double humidityPct) {
+        return tenth[Settings.nearestTemperature(temperatureC)][
+                Settings.nearestHumidity(humidityPct)];
+    }
+
+    /**
+     * Returns the share of draws chilled by the end of the market leg.
+     *
+     * @param temperatureC temperature, °C
+     * @return 0 to 1
+     */
+    public double chilledShare(double temperatureC) {
+        return chilled[Settings.nearestTemperature(temperatureC)];
+    }
+
+    /**
+     * Returns the lot and its days.
+     *
+     * @return the wish
+     */
+    public Wish wish() {
+        return wish;
+    }
+
+    KeepingModel model() {
+        return model;
+    }
+}

@@ -1,0 +1,130 @@
+package org.wardon.sharing;
+
+import static org.junit.jupiter.api.Assertions.assertEquals;
+import static org.junit.jupiter.api.Assertions.assertFalse;
+import static org.junit.jupiter.api.Assertions.assertTrue;
+
+import java.util.List;
+import java.util.OptionalDouble;
+import java.util.stream.Stream;
+import org.junit.jupiter.api.Test;
+import org.wardon.keeping.Crops;
+import org.wardon.keeping.Draw;
+import org.wardon.keeping.Draws;
+import org.wardon.keeping.Fate;
+import org.wardon.keeping.KeepingModel;
+import org.wardon.lots.LotHistory;
+import org.wardon.produce.Reason;
+
+class SharingTest {
+    private static final List<Draw> DRAWS = Draws.seeded(1, 32);
+    private static final double DAY_S = 86_400;
+
+    private static SharingAnswer share(double days, String... ids) {
+        return Sharing.of(
+                Stream.of(ids).map(id -> Wish.of(Crops.lot(Crops.get(id)), days)).toList(), DRAWS);
+    }
+
+    private static Reason reason(PairVerdict pair, String code) {
+        return pair.reasons().stream()
+                .filter(r -> r.code().equals(code))
+                .findFirst()
+                .orElseThrow(() -> new AssertionError(code + " not in " + pair));
+    }
+
+    @Test
+    void bananaAndLettuceArePulledApartByTemperature() {
+        SharingAnswer answer = share(14, "banana-green", "lettuce-crisphead");
+        assertEquals(Verdict.NO, answer.verdict());
+        assertTrue(answer.workableC().isEmpty());
+        Reason gap = reason(answer.pairs().get(0), "temperature-gap");
+        assertEquals(List.of("lettuce-crisphead", "banana-green"), gap.subjects());
+        assertTrue(gap.arguments().get(0).value() > 8, gap.toString());
+        assertFalse(gap.sourceId().isBlank());
+    }
+
+    @Test
+    void broccoliAndCauliflowerShareNearFreezingAndDamp() {
+        SharingAnswer answer = share(7, "broccoli", "cauliflower");
+        assertEquals(Verdict.GOOD, answer.verdict());
+        SettingRange range = answer.workableC().orElseThrow();
+        assertTrue(range.low() <= 0.5 && range.high() < 5, range.toString());
+        assertTrue(answer.workableHumidityPct().orElseThrow().high() == 100);
+    }
+
+    @Test
+    void applesShortenTheLifeOfBroccoli() {
+        PairVerdict pair = share(14, "apple", "broccoli").pairs().get(0);
+        assertEquals(Verdict.NO, pair.verdict());
+        assertEquals(List.of("broccoli", "apple"), reason(pair, "ethylene-shortens").subjects());
+    }
+
+    @Test
+    void ripeJackfruitStartsGreenBananasRipening() {
+        PairVerdict pair = share(7, "banana-green", "jackfruit").pairs().get(0);
+        assertEquals(Verdict.NO, pair.verdict());
+        reason(pair, "ethylene-starts-ripening");
+    }
+
+    @Test
+    void smellIsBorneForTwoDaysAndNoLonger() {
+        PairVerdict brief = share(2, "leek", "grape").pairs().get(0);
+        PairVerdict week = share(7, "leek", "grape").pairs().get(0);
+        assertEquals(Verdict.TOLERABLE, brief.verdict(), brief.toString());
+        assertEquals(Verdict.NO, week.verdict(), week.toString());
+        reason(week, "odour");
+    }
+
+    @Test
+    void onionsAndLettuceSplitOverHumidity() {
+        PairVerdict pair = share(30, "onion-dry", "celery").pairs().get(0);
+        assertEquals(Verdict.NO, pair.verdict());
+        reason(pair, "humidity-split");
+    }
+
+    @Test
+    void everyPairIsListedAndEveryReasonHasASource() {
+        SharingAnswer answer = share(7, "mango", "okra", "onion-dry", "celery", "apple");
+        assertEquals(10, answer.pairs().size());
+        for (PairVerdict pair : answer.pairs()) {
+            assertTrue(
+                    pair.verdict() == Verdict.GOOD || !pair.reasons().isEmpty(), pair.toString());
+        }
+    }
+
+    @Test
+    void warmMarketNarrowsTheSettings() {
+        Wish cool = Wish.of(Crops.lot(Crops.get("broccoli")), 5);
+        Wish warm = new Wish(cool.lot(), 5, 2, OptionalDouble.of(28));
+        Workable ofCool = Workable.of(cool, DRAWS);
+        Workable ofWarm = Workable.of(warm, DRAWS);
+        assertTrue(ofWarm.tenthDays(2, 97.5) < ofCool.tenthDays(2, 97.5));
+    }
+
+    private static Together together(String id, double atC, double humidity, double ppm) {
+        KeepingModel model = Crops.model(id);
+        LotHistory history = LotHistory.constant(atC, humidity, ppm, 7 * DAY_S);
+        List<Fate> fates = DRAWS.stream().map(draw -> model.follow(history, draw)).toList();
+        return new Together(Wish.of(model.lot(), 7), model, fates, 500, 0, 7 * DAY_S, atC, ppm);
+    }
+
+    @Test
+    void chamberIsJudgedByTheAirItReallyHas() {
+        ChamberVerdict cold =
+                ChamberSharing.of(
+                        List.of(
+                                together("banana-green", 5, 0.9, 0.01),
+                                together("lettuce-crisphead", 5, 0.99, 0.01)));
+        assertEquals(Verdict.NO, cold.verdict());
+        assertTrue(
+                cold.reasons().stream()
+                        .anyMatch(
+                                r ->
+                                        r.code().equals("chilling-risk")
+                                                && r.subjects().contains("banana-green")));
+        ChamberVerdict apart = ChamberSharing.of(List.of(together("broccoli", 0, 0.98, 0.01)));
+        assertEquals(Verdict.GOOD, apart.verdict(), apart.toString());
+        ChamberVerdict foul = ChamberSharing.of(List.of(together("broccoli", 0, 0.98, 5)));
+        assertEquals(Verdict.NO, foul.verdict());
+    }
+}
