@@ -1,7 +1,11 @@
 package org.wardon.heat;
 
+import org.wardon.air.Site;
+import org.wardon.air.StandardAtmosphere;
 import org.wardon.errors.Progress;
+import org.wardon.errors.Require;
 import org.wardon.heat.network.ChamberNetwork;
+import org.wardon.heat.network.LotInGivenAir;
 
 /** The heat and moisture model: runs a chamber, or a lot in given air. */
 public final class HeatModel {
@@ -25,5 +29,30 @@ public final class HeatModel {
         double[] start =
                 network.start(RunCompiler.startC(run), RunCompiler.startRatio(run, network));
         return new ChamberRunner(run, network, start, accuracy).run(progress);
+    }
+
+    /**
+     * Runs one lot in air that is given: without the chamber, along a logger, or before it arrived.
+     * The lot breathes, sweats and cools by the same code as in a chamber; it does not act on the
+     * air.
+     *
+     * @param stay the lot, its arrival and the temperature of its flesh then; its leaving is not
+     *     heard
+     * @param air the air around its package
+     * @param site where, for the air pressure
+     * @param factors on respiration, transpiration and package; the rest is not heard
+     * @param durationS end, s since the start of the run, after arrival
+     * @return what it went through, from arrival to the end
+     * @throws org.wardon.errors.RunStopped where a state cannot be
+     */
+    public static LotCourse runInGivenAir(
+            Stay stay, AirSeries air, Site site, Factors factors, double durationS) {
+        Require.that(
+                durationS > Math.max(stay.arrivesS(), 0),
+                "the run ends at " + durationS + " s, the lot arrives at " + stay.arrivesS());
+        double pressurePa = StandardAtmosphere.pressurePa(site.elevationM());
+        LotInGivenAir network =
+                new LotInGivenAir(stay.lot(), RunCompiler.tuning(factors), pressurePa);
+        return new GivenAirRunner(stay, air, pressurePa, durationS, network).run();
     }
 }

@@ -31,7 +31,6 @@ final class RunCompiler {
     static ChamberNetwork network(ChamberRun run, boolean plain) {
         checkControl(run);
         double pressure = pressurePa(run);
-        Factors f = run.factors();
         return new ChamberNetwork(
                 new NetworkInputs(
                         run.enclosure(),
@@ -42,18 +41,22 @@ final class RunCompiler {
                         control(run.controlMode()),
                         run.setting(),
                         run.stays().stream().map(Stay::lot).toList(),
-                        new Tuning(
-                                f.wall(),
-                                f.exchange(),
-                                f.capacity(),
-                                f.respiration(),
-                                f.transpiration(),
-                                f.packageTime(),
-                                f.thermostatOffsetK()),
+                        tuning(run.factors()),
                         run.doorMode() == DoorMode.AVERAGED,
                         run.extras().heaterW(),
                         run.extras().humidifierKgH() / 3600,
                         plain));
+    }
+
+    static Tuning tuning(Factors f) {
+        return new Tuning(
+                f.wall(),
+                f.exchange(),
+                f.capacity(),
+                f.respiration(),
+                f.transpiration(),
+                f.packageTime(),
+                f.thermostatOffsetK());
     }
 
     private static void checkControl(ChamberRun run) {

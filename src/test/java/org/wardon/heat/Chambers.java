@@ -93,6 +93,10 @@ public final class Chambers {
     }
 
     static Compressor unit(Compressor.Control control) {
+        return unit(control, 3);
+    }
+
+    static Compressor unit(Compressor.Control control, double minMinutes) {
         return new Compressor(
                 12_000,
                 4_800,
@@ -103,8 +107,8 @@ public final class Chambers {
                 2_000,
                 2.0,
                 control,
-                3,
-                3,
+                minMinutes,
+                minMinutes,
                 3,
                 -5,
                 Optional.empty(),

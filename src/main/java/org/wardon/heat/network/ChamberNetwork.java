@@ -21,8 +21,6 @@ import org.wardon.enclosure.Surroundings;
 import org.wardon.heat.solver.Tree;
 import org.wardon.heat.solver.TreeSystem;
 import org.wardon.lots.Lot;
-import org.wardon.lots.PackageFit;
-import org.wardon.lots.Packing;
 import org.wardon.produce.Reason;
 
 /**
@@ -258,16 +256,11 @@ public final class ChamberNetwork implements TreeSystem {
     }
 
     private LotBranch lot(Lot lot) {
-        double slower = inputs.tuning().packageTime();
-        Packing packing =
-                Math.abs(slower - 1) < 1e-12
-                        ? lot.packing()
-                        : PackageFit.slowed(lot.item(), lot.packing(), slower);
         return new LotBranch(
                 tree,
                 take(LotBranch.FLOWS),
                 lot,
-                packing,
+                LotInGivenAir.packing(lot, inputs.tuning().packageTime()),
                 inputs.tuning().respiration(),
                 inputs.tuning().transpiration(),
                 inputs.pressurePa(),

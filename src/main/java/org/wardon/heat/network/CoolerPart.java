@@ -63,6 +63,7 @@ public final class CoolerPart implements Part {
     private double vapourByRatio;
     private double fanByAirC;
     private double electricByAirC;
+    private double electricByRatio;
     private double runByAirC;
     private final double[] vapourByOwn;
     private final double[] removedByOwn;
@@ -267,7 +268,8 @@ public final class CoolerPart implements Part {
                         + effect.vapourKgS * MoistAir.VAPOUR_J_KG_K;
         removedByRatio = effect.sensibleByHumidity + vapourByRatio * enthalpy;
         fanByAirC = in.run > 0 ? runByAirC * (effect.fanW - fanAlwaysW) / in.run : 0;
-        electricByAirC = in.run > 0 ? runByAirC * effect.electricW / in.run : 0;
+        electricByAirC = effect.electricByAirC + runByAirC * effect.electricByRun;
+        electricByRatio = effect.electricByHumidity;
         double heatByAirC = fanByAirC - removedByAirC;
         tree.hubByHub[0] += heatByAirC * air.airByEnthalpy / airKg;
         tree.hubByHub[1] += (heatByAirC * air.airByRatio - removedByRatio) / airKg;
@@ -329,7 +331,7 @@ public final class CoolerPart implements Part {
         }
         change[flowAt + REMOVED] = removed;
         change[flowAt + VAPOUR] = vapour;
-        change[flowAt + ELECTRIC] = electricByAirC * airC;
+        change[flowAt + ELECTRIC] = electricByAirC * airC + electricByRatio * ratio;
         change[flowAt + FAN] = fanByAirC * airC;
         change[flowAt + RUN] = runByAirC * airC;
     }

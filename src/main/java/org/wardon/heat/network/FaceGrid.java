@@ -10,13 +10,14 @@ import org.wardon.enclosure.Layer;
  * resistance (it would ask for steps of milliseconds and carry a hundred-thousandth of the
  * resistance); a still-air layer is a resistance without capacity.
  *
- * <p>Cells are at most 0.35 of the depth a daily wave reaches, {@code sqrt(a day/pi)}, which keeps
- * the periodic transmittance of a day within 1 % of the exact one.
+ * <p>Cells are so thin against the depth a daily wave reaches, {@code sqrt(a day/pi)}, that the
+ * periodic transmittance of a day stays within 1 % of the exact one: its error grows as the face's
+ * thickness in depths times the square of a cell's (measured: 7 % of that product).
  */
 final class FaceGrid {
     private static final double DAY_S = 86_400;
-    private static final double CELL_OF_DEPTH = 0.35;
-    private static final int MOST_CELLS = 40;
+    private static final double THICKEST_CELL = 0.35;
+    private static final double PRODUCT = 0.11;
 
     /** A layer of less than this is a thin sheet, m2 K/W. */
     private static final double SHEET_M2K_W = 0.002;
@@ -41,8 +42,13 @@ final class FaceGrid {
 
     /** Cuts layers, from outside to inside; the inner film is a resistance, m2 K/W. */
     FaceGrid(List<Layer> layers, double innerM2KW, double wallFactor) {
+        double depths = 0;
         for (Layer layer : layers) {
-            add(layer, wallFactor);
+            depths += conducts(layer) ? depths(layer) : 0;
+        }
+        double cell = Math.min(THICKEST_CELL, Math.sqrt(PRODUCT / Math.max(depths, 1e-3)));
+        for (Layer layer : layers) {
+            add(layer, wallFactor, cell);
         }
         if (nodes.isEmpty()) {
             addNode(BARE_JM2K);
@@ -60,14 +66,14 @@ final class FaceGrid {
         }
     }
 
-    private void add(Layer layer, double wallFactor) {
+    private void add(Layer layer, double wallFactor, double cell) {
         double resistance = layer.resistanceM2KW() / wallFactor;
         if (layer.capacityJm2K() <= 0) {
             pendingM2KW += resistance;
-        } else if (layer.resistanceM2KW() < SHEET_M2K_W) {
+        } else if (!conducts(layer)) {
             massHere(layer.capacityJm2K());
         } else {
-            int cells = cells(layer);
+            int cells = (int) Math.ceil(depths(layer) / cell - 1e-9);
             double half = 0.5 * layer.capacityJm2K() / cells;
             for (int i = 0; i < cells; i++) {
                 massHere(half);
@@ -77,12 +83,15 @@ final class FaceGrid {
         }
     }
 
-    private static int cells(Layer layer) {
+    private static boolean conducts(Layer layer) {
+        return layer.capacityJm2K() > 0 && layer.resistanceM2KW() >= SHEET_M2K_W;
+    }
+
+    /** Thickness over the depth a daily wave reaches. */
+    private static double depths(Layer layer) {
         double diffusivity =
                 layer.conductivityWmK() / (layer.densityKgM3() * layer.specificHeatJkgK());
-        double depth = Math.sqrt(diffusivity * DAY_S / Math.PI);
-        int cells = (int) Math.ceil(layer.thicknessM() / (CELL_OF_DEPTH * depth));
-        return Math.min(Math.max(cells, 1), MOST_CELLS);
+        return layer.thicknessM() / Math.sqrt(diffusivity * DAY_S / Math.PI);
     }
 
     private void massHere(double jm2k) {
