@@ -77,6 +77,9 @@ public record Compressor(
         Require.within("minRestMinutes", minRestMinutes, 0, 120, "min", "");
         Require.within("condenserRiseK", condenserRiseK, 0, 30, "K", "");
         Require.within("lowestC", lowestC, -40, 30, "°C", "");
+        if (dailyEnergyKWh.isPresent()) {
+            Require.within("dailyEnergyKWh", dailyEnergyKWh.getAsDouble(), 0, 100_000, "kWh", "");
+        }
     }
 
     @Override

@@ -8,8 +8,6 @@ import java.util.List;
 import java.util.Map;
 import java.util.Optional;
 import java.util.OptionalDouble;
-import java.util.Set;
-import java.util.stream.Collectors;
 import org.wardon.files.json.Faults;
 import org.wardon.files.json.Json;
 import org.wardon.files.json.Part;
@@ -24,20 +22,12 @@ final class ChamberRules {
     private final Lookups lookups;
     private final Faults faults;
     private final IdRules ids;
-    private final Set<String> chamberIds;
 
     ChamberRules(Part plan, Lookups lookups, Faults faults) {
         this.plan = plan;
         this.lookups = lookups;
         this.faults = faults;
         this.ids = new IdRules(faults);
-        this.chamberIds = chamberIds(plan);
-    }
-
-    static Set<String> chamberIds(Part plan) {
-        return plan.at("chambers").items().stream()
-                .flatMap(chamber -> chamber.at("id").text().stream())
-                .collect(Collectors.toSet());
     }
 
     void check() {
@@ -61,8 +51,8 @@ final class ChamberRules {
         Map<String, String> seen = new HashMap<>();
         for (Part face : faces.items()) {
             Part name = face.at("face");
-            misread |= name.text().isEmpty() || faults.at(name.path());
             name.text().ifPresent(word -> once(word, face, seen));
+            misread |= name.text().isEmpty() || faults.at(name.path());
             ids.known(face.at("buildUp"), plan.at("buildUps").names(), "build-up of this plan");
             face.at("layers").items().forEach(this::layer);
             beyond(face.at("beyond"), chamber);
@@ -84,7 +74,7 @@ final class ChamberRules {
 
     private void once(String word, Part face, Map<String, String> seen) {
         String first = seen.putIfAbsent(word, face.path());
-        if (first != null) {
+        if (first != null && !faults.at(face.at("face").path())) {
             faults.add(
                     face.at("face").path(),
                     "is " + Json.quoted(word) + ", as " + first + " is too",
@@ -104,13 +94,16 @@ final class ChamberRules {
 
     private void beyond(Part beyond, Part chamber) {
         Part other = beyond.at("chamber");
+        if (faults.at(beyond.path())) {
+            return;
+        }
         if (other.text().isPresent() && other.text().equals(chamber.at("id").text())) {
             faults.add(
                     other.path(),
                     "is " + Json.quoted(other.text().get()) + ", the chamber itself",
                     "accepted: another chamber of the plan");
         } else {
-            ids.known(other, chamberIds, "chamber of this plan");
+            ids.chamber(other, plan);
         }
     }
 
@@ -209,16 +202,19 @@ final class ChamberRules {
                 continue;
             }
             LocalDateTime to = Times.plusHours(at.get(), hours.getAsDouble());
+            if (end.isPresent() && !at.get().isBefore(end.get())) {
+                outside(outage, "is " + at.get() + ", after the plan has ended", from, end);
+                continue;
+            }
+            if (from.isPresent() && !to.isAfter(from.get())) {
+                outside(outage, "ends at " + to + ", before the plan begins", from, end);
+                continue;
+            }
             if (at.get().isBefore(last)) {
                 faults.add(
                         outage.at("from").path(),
                         "is " + at.get() + ", before the outage above has ended at " + last,
                         "accepted: outages in order, none overlapping");
-            }
-            if (end.isPresent() && !at.get().isBefore(end.get())) {
-                outside(outage, "is " + at.get() + ", after the plan has ended", from, end);
-            } else if (from.isPresent() && !to.isAfter(from.get())) {
-                outside(outage, "ends at " + to + ", before the plan begins", from, end);
             }
             last = to.isAfter(last) ? to : last;
         }

@@ -36,6 +36,15 @@ final class IdRules {
         }
     }
 
+    /** A text must be the id of a chamber; not asked where the chambers' own ids are in doubt. */
+    void chamber(Part part, Part plan) {
+        List<Part> chambers = plan.at("chambers").items();
+        List<String> known = chambers.stream().flatMap(c -> c.at("id").text().stream()).toList();
+        if (!known.isEmpty() && known.size() == chambers.size()) {
+            known(part, known, "chamber of this plan");
+        }
+    }
+
     /** A text must be one of the known ids. */
     void known(Part part, Collection<String> ids, String what) {
         if (part.text().isPresent()

@@ -21,6 +21,8 @@ import org.wardon.produce.Ripeness;
 /** Turns the lots of a checked plan into records. */
 final class LotBinder {
     private static final double DAY_S = 86_400;
+    private static final double FEWEST_DAYS = 0.01;
+    private static final double MOST_DAYS = 730;
 
     private final LocalDateTime from;
     private final Inputs inputs;
@@ -62,7 +64,8 @@ final class LotBinder {
     private double wantedDays(Part lot, LocalDateTime arrives) {
         Optional<LocalDateTime> leaves = inputs.time(lot, "leaves");
         if (leaves.isPresent() && !lot.has("wantedDays")) {
-            return arrives.until(leaves.get(), ChronoUnit.SECONDS) / DAY_S;
+            double days = arrives.until(leaves.get(), ChronoUnit.SECONDS) / DAY_S;
+            return Math.min(Math.max(days, FEWEST_DAYS), MOST_DAYS);
         }
         return inputs.number(lot, "wantedDays", Defaults.WANTED_DAYS);
     }

@@ -3,7 +3,6 @@ package org.wardon.files;
 import java.time.LocalDateTime;
 import java.util.List;
 import java.util.Optional;
-import java.util.Set;
 import org.wardon.files.json.Faults;
 import org.wardon.files.json.Part;
 import org.wardon.plan.Defaults;
@@ -14,14 +13,12 @@ final class LotRules {
     private final Lookups lookups;
     private final Faults faults;
     private final IdRules ids;
-    private final Set<String> chamberIds;
 
     LotRules(Part plan, Lookups lookups, Faults faults) {
         this.plan = plan;
         this.lookups = lookups;
         this.faults = faults;
         this.ids = new IdRules(faults);
-        this.chamberIds = ChamberRules.chamberIds(plan);
     }
 
     void check() {
@@ -33,7 +30,7 @@ final class LotRules {
                     lot.at("package"),
                     lookups.packages(),
                     "package with a half-cooling time in the tables");
-            ids.known(lot.at("chamber"), chamberIds, "chamber of this plan");
+            ids.chamber(lot.at("chamber"), plan);
             stay(lot);
         }
     }
@@ -108,7 +105,7 @@ final class LotRules {
         }
         LocalDateTime last = arrives;
         for (Part move : moves.items()) {
-            ids.known(move.at("to"), chamberIds, "chamber of this plan");
+            ids.chamber(move.at("to"), plan);
             Optional<LocalDateTime> at = Times.at(move.at("at"));
             if (at.isEmpty()) {
                 continue;

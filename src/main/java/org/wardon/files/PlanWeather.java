@@ -77,6 +77,10 @@ final class PlanWeather {
                 faults.add(path, "the file " + Json.quoted(name) + " does not exist", INSIDE);
                 return Optional.empty();
             }
+            if (Files.isDirectory(file)) {
+                faults.add(path, "is " + Json.quoted(name) + ", a folder", INSIDE);
+                return Optional.empty();
+            }
             // A link may lead out of the folder though its name does not.
             if (!file.toRealPath().startsWith(folder.toAbsolutePath().toRealPath())) {
                 faults.add(

@@ -45,7 +45,7 @@ public record LotPlan(
         moves = List.copyOf(moves);
         Require.within("massKg of " + id, massKg, 0.1, 500_000, "kg", "Give net kilograms.");
         Require.within("temperatureC of " + id, temperatureC, -5, 55, "°C", "Measure the pulp.");
-        Require.within("wantedDays of " + id, wantedDays, 0, 730, "day", "");
+        Require.within("wantedDays of " + id, wantedDays, 0.01, 730, "day", "");
         Require.that(
                 leaves.isAfter(arrives),
                 "lot " + id + " leaves at " + leaves + ", not after it arrives at " + arrives);

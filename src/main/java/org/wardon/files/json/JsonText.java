@@ -5,6 +5,7 @@ import java.util.LinkedHashMap;
 import java.util.List;
 import java.util.Map;
 import java.util.Optional;
+import org.jspecify.annotations.Nullable;
 import tools.jackson.core.JacksonException;
 import tools.jackson.core.JsonParser;
 import tools.jackson.core.JsonToken;
@@ -118,9 +119,11 @@ public final class JsonText {
                 : Trouble.at(text, (int) Math.max(e.getLocation().getCharOffset(), 0));
     }
 
-    private void notJson(TokenStreamLocation where, Trouble trouble) {
+    private void notJson(@Nullable TokenStreamLocation where, Trouble trouble) {
         faults.add(
-                "line " + where.getLineNr() + ", column " + where.getColumnNr(),
+                where == null
+                        ? "$"
+                        : "line " + where.getLineNr() + ", column " + where.getColumnNr(),
                 trouble.what(),
                 trouble.accepted());
     }

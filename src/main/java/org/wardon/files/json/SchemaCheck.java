@@ -66,7 +66,8 @@ public final class SchemaCheck {
     }
 
     private void wrong(String path, Json json, Rule rule) {
-        faults.add(path, "is " + json.shown(), SchemaWords.accepted(rule));
+        String what = json instanceof Json.Text ? "the text " : "";
+        faults.add(path, "is " + what + json.shown(), SchemaWords.accepted(rule));
     }
 
     private void constant(Json json, Rule rule, String path) {
@@ -190,8 +191,9 @@ public final class SchemaCheck {
         faults.add(
                 where,
                 "is not a name known here",
-                near.map(other -> "did you mean '" + other + "'?")
-                        .orElse("accepted: " + String.join(", ", rule.propertyNames())));
+                near.map(other -> "did you mean '" + other + "'? ").orElse("")
+                        + "accepted: "
+                        + String.join(", ", rule.propertyNames()));
     }
 
     private void missing(Json.Obj object, Rule rule, String path, List<String> meant) {
@@ -217,10 +219,12 @@ public final class SchemaCheck {
                                         object.members().keySet().containsAll(group)
                                                 || group.stream().anyMatch(meant::contains));
         if (!groups.isEmpty() && !satisfied) {
-            String wanted =
-                    String.join(
-                            ", or ", groups.stream().map(g -> String.join(" with ", g)).toList());
-            faults.add(path, "says too little", "accepted: " + wanted);
+            faults.add(
+                    path,
+                    "has neither "
+                            + String.join(
+                                    " nor ", groups.stream().map(SchemaWords::allOf).toList()),
+                    "accepted: one of these");
         }
     }
 

@@ -19,6 +19,10 @@ final class SchemaWords {
         return words.size() == 1 ? words.get(0) : "one of " + String.join(", ", words);
     }
 
+    static String allOf(List<String> names) {
+        return names.size() == 1 ? names.get(0) : "all of " + String.join(", ", names);
+    }
+
     private static String composed(Rule rule) {
         if (rule.has("const")) {
             return rule.constant();

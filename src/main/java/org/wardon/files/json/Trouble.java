@@ -36,6 +36,9 @@ record Trouble(String what, String accepted) {
                     new Trouble(
                             "a comma is missing before this", "accepted: a comma between values");
             case '}', ']' -> closing(here, before);
+            case ',' ->
+                    new Trouble(
+                            "a comma with nothing before it", "accepted: a value between commas");
             default -> other(text, offset, word);
         };
     }

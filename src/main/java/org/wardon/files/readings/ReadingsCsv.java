@@ -145,7 +145,7 @@ final class ReadingsCsv {
         if (record.getFieldCount() != header.size()) {
             faults.add(
                     "line " + line,
-                    "has " + record.getFieldCount() + " cells, the first line has " + header.size(),
+                    "cells: " + record.getFieldCount() + ", in the first line: " + header.size(),
                     "accepted: a cell a column, commas between, a point as decimal mark");
             return;
         }
@@ -205,7 +205,8 @@ final class ReadingsCsv {
             faults.add(
                     where,
                     "is " + Json.quoted(cell),
-                    column.accepted() + "; an empty cell where nothing was read");
+                    column.accepted()
+                            + " with a point as decimal mark; an empty cell for no reading");
             return Double.NaN;
         }
         double value = Double.parseDouble(cell);
