@@ -43,7 +43,7 @@ public record StorePlan(
         chambers = List.copyOf(chambers);
         lots = List.copyOf(lots);
         assumed = List.copyOf(assumed);
-        Require.within("seed", seed, 0, 9_007_199_254_740_991.0, "", "");
+        Require.within("seed", (double) seed, 0, 9_007_199_254_740_991.0, "", "");
         Require.within("days", days, 0.1, 1_830, "day", "");
         Require.that(!chambers.isEmpty(), "a plan needs at least one chamber");
         Set<String> seen = new HashSet<>();
