@@ -19,6 +19,7 @@ final class Gaps {
     private final long fromS;
     private final long toS;
     private final LimitedFaults faults;
+    private final long medianS;
     private final long usualS;
     private final List<FilledGap> filled = new ArrayList<>();
 
@@ -27,15 +28,16 @@ final class Gaps {
         this.fromS = fromS;
         this.toS = toS;
         this.faults = faults;
-        this.usualS = Math.min(readings.usualStepS(), HOUR_S);
+        this.medianS = readings.usualStepS();
+        this.usualS = Math.min(medianS, HOUR_S);
     }
 
     /** Returns the gaps that may be filled, in order of column and time. */
     List<FilledGap> find(List<String> columns) {
-        if (readings.usualStepS() > LONGEST_S) {
+        if (medianS > LONGEST_S) {
             faults.add(
                     "column time",
-                    "the readings are usually " + hours(readings.usualStepS()) + " apart",
+                    "the readings are usually " + hours(medianS) + " apart",
                     "accepted: readings at most 3 h apart");
             return filled;
         }
@@ -107,7 +109,7 @@ final class Gaps {
         for (int i = 1; i < at.size(); i++) {
             long a = at.get(i - 1);
             long b = at.get(i);
-            boolean missing = 2 * (b - a) > 3 * readings.usualStepS() && b - a > HOUR_S;
+            boolean missing = 2 * (b - a) > 3 * medianS && b - a > HOUR_S;
             // Where whole lines are missing the columns have nothing to add.
             boolean own = !emptyCells || line.get(i) - line.get(i - 1) > 1;
             if (missing && own && b > fromS && a < toS) {
