@@ -2,7 +2,11 @@ package org.wardon.keeping;
 
 import java.util.Optional;
 import java.util.function.DoubleFunction;
+import org.wardon.lots.ClassValues;
+import org.wardon.lots.Item;
+import org.wardon.lots.Items;
 import org.wardon.lots.TranspirationLaw;
+import org.wardon.lots.Transpirations;
 import org.wardon.produce.Commodity;
 
 /**
@@ -19,4 +23,21 @@ public record KeptLot(
         String id,
         Commodity commodity,
         LotAtDoor door,
-        Optional<DoubleFunction<TranspirationLaw>> transpiration) {}
+        Optional<DoubleFunction<TranspirationLaw>> transpiration) {
+    /**
+     * Returns a lot in an open package, losing water as is printed for its commodity.
+     *
+     * @param id id of the lot
+     * @param commodity what it is
+     * @param door what was known at arrival
+     * @param classes class values for what is not printed
+     * @return the lot
+     */
+    public static KeptLot inOpenPackage(
+            String id, Commodity commodity, LotAtDoor door, ClassValues classes) {
+        Item item = Items.of(commodity, classes).value();
+        DoubleFunction<TranspirationLaw> law =
+                share -> Transpirations.of(commodity, item, classes, share).value();
+        return new KeptLot(id, commodity, door, Optional.of(law));
+    }
+}

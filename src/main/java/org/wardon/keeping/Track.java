@@ -14,10 +14,17 @@ final class Track {
     private final double[] used;
     private final double beyondPerDay;
 
-    private Track(double[] timeS, double[] used, double beyondPerDay) {
+    /** From here on {@link #lift} counts as used besides; s. */
+    private final double jumpS;
+
+    private final double lift;
+
+    private Track(double[] timeS, double[] used, double beyondPerDay, double jumpS, double lift) {
         this.timeS = timeS;
         this.used = used;
         this.beyondPerDay = beyondPerDay;
+        this.jumpS = jumpS;
+        this.lift = lift;
     }
 
     /** Integrates a rate by Simpson's rule in panels of at most a kelvin. */
@@ -35,12 +42,13 @@ final class Track {
             used[i] = used[i - 1] + days * meanRate(history, wear, i, before, after);
             before = after;
         }
-        return new Track(timeS, used, slope(timeS, used, window));
+        return new Track(timeS, used, slope(timeS, used, window), Double.POSITIVE_INFINITY, 0);
     }
 
     /** Takes shares that were worked out elsewhere. */
     static Track given(double[] timeS, double[] used, Window window) {
-        return new Track(timeS, used, Math.max(0, slope(timeS, used, window)));
+        return new Track(
+                timeS, used, Math.max(0, slope(timeS, used, window)), Double.POSITIVE_INFINITY, 0);
     }
 
     private static double meanRate(
@@ -100,30 +108,31 @@ final class Track {
 
     /** Returns the track with at least a share used from a time on; the rates stay. */
     Track jumpedTo(double share, double atS) {
-        double[] jumped = used.clone();
-        double there = at(timeS, used, atS);
-        double lift = Math.max(0, share - there);
-        for (int i = 0; i < jumped.length; i++) {
-            if (timeS[i] >= atS) {
-                jumped[i] += lift;
-            }
-        }
-        return new Track(timeS, jumped, beyondPerDay);
+        double missing = Math.max(0, share - at(timeS, used, atS));
+        return new Track(timeS, used, beyondPerDay, atS, missing);
     }
 
     /** Share used at a time, s; goes on beyond the end. */
     double usedAt(double atS) {
         double end = timeS[timeS.length - 1];
         double beyond = Math.max(0, atS - end) / Timeline.DAY_S * beyondPerDay;
-        return at(timeS, used, atS) + beyond;
+        return at(timeS, used, atS) + beyond + (atS >= jumpS ? lift : 0);
     }
 
     double used(int sample) {
-        return used[sample];
+        return used[sample] + (timeS[sample] >= jumpS ? lift : 0);
     }
 
     /** Time at which a share is reached, s; infinite where it never is. */
     double reachesS(double share) {
+        double unlifted = reachesWithoutJumpS(share);
+        if (unlifted <= jumpS) {
+            return unlifted;
+        }
+        return Math.max(jumpS, reachesWithoutJumpS(share - lift));
+    }
+
+    private double reachesWithoutJumpS(double share) {
         if (used[0] >= share) {
             return timeS[0];
         }

@@ -5,12 +5,7 @@ import java.util.LinkedHashMap;
 import java.util.List;
 import java.util.Map;
 import java.util.Optional;
-import java.util.function.DoubleFunction;
 import org.wardon.lots.ClassValues;
-import org.wardon.lots.Item;
-import org.wardon.lots.Items;
-import org.wardon.lots.TranspirationLaw;
-import org.wardon.lots.Transpirations;
 import org.wardon.produce.Commodity;
 import org.wardon.produce.MixingGroup;
 import org.wardon.reference.ReferenceBook;
@@ -55,10 +50,7 @@ public final class Crops {
     }
 
     public static KeptLot lot(Commodity commodity, LotAtDoor door) {
-        Item item = Items.of(commodity, CLASSES).value();
-        DoubleFunction<TranspirationLaw> law =
-                share -> Transpirations.of(commodity, item, CLASSES, share).value();
-        return new KeptLot(commodity.id(), commodity, door, Optional.of(law));
+        return KeptLot.inOpenPackage(commodity.id(), commodity, door, CLASSES);
     }
 
     public static KeepingModel model(String id) {

@@ -1,10 +1,10 @@
 package org.wardon.keeping.ethylene;
 
 import java.util.ArrayList;
-import java.util.Comparator;
 import java.util.List;
 import java.util.Map;
 import java.util.OptionalDouble;
+import java.util.Set;
 import org.wardon.keeping.Draw;
 import org.wardon.produce.Commodity;
 import org.wardon.produce.rows.EthyleneRate;
@@ -29,42 +29,47 @@ public final class Giving {
                     "high", new double[] {10, 100},
                     "very-high", new double[] {100, 1000});
 
-    private final double[] atC;
-    private final double[] lnLow;
-    private final double[] lnHigh;
+    private static final Set<String> RIPENING = Set.of("ripe", "turning");
+
+    private final RateCurve before;
+    private final RateCurve after;
     private final String sourceId;
 
-    private Giving(List<double[]> points, String sourceId) {
-        atC = points.stream().mapToDouble(point -> point[0]).toArray();
-        lnLow = points.stream().mapToDouble(point -> Math.log(point[1])).toArray();
-        lnHigh = points.stream().mapToDouble(point -> Math.log(point[2])).toArray();
+    private Giving(RateCurve before, RateCurve after, String sourceId) {
+        this.before = before;
+        this.after = after;
         this.sourceId = sourceId;
     }
 
     /**
-     * Returns what a commodity gives off.
+     * Returns what a commodity gives off. Rows of ripe or turning fruit hold once it ripens, all
+     * others before; where one kind is missing the other holds throughout.
      *
      * @param commodity the commodity
      * @return its rates
      */
     public static Giving of(Commodity commodity) {
-        List<double[]> points = new ArrayList<>();
+        List<double[]> early = new ArrayList<>();
+        List<double[]> late = new ArrayList<>();
         String source = "kader-lists";
         for (EthyleneRate row : commodity.breath().ethylene()) {
             OptionalDouble at = row.temperatureC();
             if (at.isPresent()) {
-                points.add(point(at.getAsDouble(), row));
+                (RIPENING.contains(row.ripeness()) ? late : early)
+                        .add(point(at.getAsDouble(), row));
                 source = row.microlitrePerKgHour().sourceId();
             }
         }
-        if (points.isEmpty()) {
+        if (early.isEmpty() && late.isEmpty()) {
             double[] bounds =
                     CLASSES.getOrDefault(
                             commodity.needs().ethyleneProduction(), new double[] {0.01, 1});
-            points.add(new double[] {CLASS_AT_C, bounds[0], bounds[1]});
+            early.add(new double[] {CLASS_AT_C, bounds[0], bounds[1]});
         }
-        points.sort(Comparator.comparingDouble(point -> point[0]));
-        return new Giving(points, source);
+        return new Giving(
+                new RateCurve(early.isEmpty() ? late : early),
+                new RateCurve(late.isEmpty() ? early : late),
+                source);
     }
 
     private static double[] point(double atC, EthyleneRate row) {
@@ -93,18 +98,9 @@ public final class Giving {
      * @return µL/(kg h)
      */
     public double microlitrePerKgHour(double temperatureC, double stage, Draw draw) {
-        int last = atC.length - 1;
-        double inside = Math.min(Math.max(temperatureC, atC[0]), atC[last]);
-        int i = 0;
-        while (i < last - 1 && atC[i + 1] < inside) {
-            i++;
-        }
-        int next = Math.min(i + 1, last);
-        double width = atC[next] - atC[i];
-        double share = width == 0 ? 0 : (inside - atC[i]) / width;
-        double low = lnLow[i] + share * (lnLow[next] - lnLow[i]);
-        double high = lnHigh[i] + share * (lnHigh[next] - lnHigh[i]);
         double steepness = Math.log(2 + draw.ethyleneGiven()) / DECADE;
-        return Math.exp(low + stage * (high - low) + steepness * (temperatureC - inside));
+        double low = before.lnLow(temperatureC, steepness);
+        double high = after.lnHigh(temperatureC, steepness);
+        return Math.exp(low + stage * (high - low));
     }
 }
