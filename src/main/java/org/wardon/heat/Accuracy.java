@@ -10,7 +10,7 @@ import org.wardon.errors.Require;
  */
 record Accuracy(double lotK, double airK) {
     /** Lots within 0.02 K and air within 0.06 K of a tight run over a month (measured). */
-    static final Accuracy USUAL = new Accuracy(2e-3, 1e-2);
+    static final Accuracy USUAL = new Accuracy(5e-3, 5e-2);
 
     Accuracy {
         Require.within("lotK", lotK, 1e-9, 1, "K", "");

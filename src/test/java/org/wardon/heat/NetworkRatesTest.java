@@ -10,9 +10,9 @@ import org.wardon.air.MoistAir;
 import org.wardon.air.SaturatedAir;
 import org.wardon.cooling.Compressor;
 import org.wardon.cooling.Compressor.Control;
-import org.wardon.cooling.CompressorLaw;
 import org.wardon.cooling.CoolerEffect;
 import org.wardon.cooling.CoolerInputs;
+import org.wardon.cooling.CompressorLaw;
 import org.wardon.cooling.Thermostat;
 import org.wardon.enclosure.DoorExchange;
 import org.wardon.enclosure.PeopleHeat;
@@ -79,9 +79,7 @@ class NetworkRatesTest {
         }
     }
 
-    /**
-     * What 30 K or 1000 Pa across the skin would do to a node: its rate is a difference of such.
-     */
+    /** What 30 K or 1000 Pa across the skin would do to a node: its rate is a difference of such. */
     private double gross(Lot lot, int node) {
         Shells cut = lot.shells();
         int n = cut.count();
@@ -129,7 +127,7 @@ class NetworkRatesTest {
                                                 - t,
                                 -40,
                                 59);
-        double psat = SaturatedAir.pressurePa(skin);
+        double psat = SaturatedAir.overWaterPa(skin);
         double fromFilm = SkinWater.fromFilmKgPerKgS(lot.transpiration(), psat, packagePa, wet);
         double gone =
                 kg
@@ -165,7 +163,7 @@ class NetworkRatesTest {
     }
 
     private static double latentW(Lot lot, double skinC, double packagePa, double wet) {
-        double psat = SaturatedAir.pressurePa(skinC);
+        double psat = SaturatedAir.overWaterPa(skinC);
         double gone =
                 SkinWater.fromFilmKgPerKgS(lot.transpiration(), psat, packagePa, wet)
                         + SkinWater.fromTissueKgPerKgS(lot.transpiration(), psat, packagePa, wet);
@@ -243,7 +241,8 @@ class NetworkRatesTest {
             double expected = 0;
             int at = 2;
             for (int i = 0; i < 6; i++) {
-                double area = run.enclosure().box().areaM2(run.enclosure().faces().get(i).name());
+                double area =
+                        run.enclosure().box().areaM2(run.enclosure().faces().get(i).name());
                 double surface = network.surfaceC(i, y);
                 while (y[at] != surface) {
                     at++;

@@ -38,9 +38,20 @@ public final class LotBranch implements Part {
     static final int FLOWS = 5;
 
     private static final double PACKAGE_AIR_C = 10;
+
+    /** Respiration is followed by a cubic this far to either side, K. */
+    private static final double BREATH_REACH_K = 0.6;
+
     private static final double L0 = MoistAir.EVAPORATION_J_KG;
     private static final double VAPOUR_LESS_WATER = MoistAir.VAPOUR_J_KG_K - MoistAir.WATER_J_KG_K;
     private static final double WATER = MoistAir.WATER_J_KG_K;
+
+    /** The skin found last is a good start when it lies this near, K. */
+    private static final double NEAR_K = 5;
+
+    /** Newton ends with a step shorter than this, K. */
+    private static final double LAST_STEP_K = 1e-7;
+
 
     /** Its place in the state. */
     final Branch branch;
@@ -133,7 +144,7 @@ public final class LotBranch implements Part {
                         * packing.airM3PerKg()
                         / MoistAir.specificVolumeM3kg(PACKAGE_AIR_C, 0, pressurePa);
         packageJkgK = MoistAir.DRY_AIR_J_KG_K + kg * packing.tareJPerKgK() / packageKg;
-        saturation = Saturation.curve(plain);
+        saturation = Saturation.overWater(plain);
         breath = new LocalCurve[shells];
         breathe(lot.respiration());
     }
@@ -149,6 +160,7 @@ public final class LotBranch implements Part {
                     new LocalCurve(
                             t -> respirationFactor * law.wattsPerKg(t),
                             t -> respirationFactor * law.slopeWattsPerKgK(t),
+                            BREATH_REACH_K,
                             plain);
         }
     }
@@ -405,7 +417,8 @@ public final class LotBranch implements Part {
     /** Newton on the heat of the skin; ends with evaporation at the skin found. */
     private void solveSkin(double shellC, double waterKg) {
         double wet = FreeWater.wetShare(waterKg / fullKg);
-        double t = (skin * shellC + film * packageC) / (skin + film);
+        double dry = (skin * shellC + film * packageC) / (skin + film);
+        double t = Math.abs(skinC - dry) < NEAR_K ? skinC : dry;
         for (int i = 0; i < 12; i++) {
             evaporation(t, wet);
             double latent = L0 + VAPOUR_LESS_WATER * t;
@@ -413,11 +426,13 @@ public final class LotBranch implements Part {
             double fall = skin + film + evaporatedBySkin * latent + evaporated * VAPOUR_LESS_WATER;
             double step = miss / fall;
             t += step;
-            if (Math.abs(step) < 1e-9) {
+            if (Math.abs(step) < LAST_STEP_K) {
+                // What is left is of the square of this step: the slope carries it.
+                evaporated += evaporatedBySkin * step;
+                filmWater += filmWaterBySkin * step;
                 break;
             }
         }
-        evaporation(t, wet);
         skinC = t;
     }
 

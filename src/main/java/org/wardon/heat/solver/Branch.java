@@ -43,7 +43,10 @@ public final class Branch {
     private final int hub;
     private final double[] inversePivot;
     private final double[] ratio;
+    private final double[] afterShare;
     private final double[] lu;
+    private final double[] inverse;
+    private final double[] work;
     private final double[] hubShare;
     private double blockRatio;
     private boolean active = true;
@@ -61,7 +64,10 @@ public final class Branch {
         onHub = new double[hub * block];
         inversePivot = new double[run];
         ratio = new double[run];
+        afterShare = new double[run];
         lu = new double[block * block];
+        inverse = new double[block * block];
+        work = new double[block];
         hubShare = new double[block * hub];
     }
 
@@ -117,12 +123,15 @@ public final class Branch {
             blockRatio = -blockByRun * inversePivot[run - 1];
             lu[0] += blockRatio * after[run - 1];
         }
-        factorBlock();
-        for (int i = 0; i < block * hub; i++) {
-            hubShare[i] = -byHub[i];
-        }
-        for (int c = 0; c < hub; c++) {
-            solveBlock(hubShare, c, hub);
+        invertBlock();
+        for (int i = 0; i < block; i++) {
+            for (int c = 0; c < hub; c++) {
+                double sum = 0;
+                for (int k = 0; k < block; k++) {
+                    sum -= inverse[i * block + k] * byHub[k * hub + c];
+                }
+                hubShare[i * hub + c] = sum;
+            }
         }
         for (int r = 0; r < hub; r++) {
             for (int c = 0; c < hub; c++) {
@@ -140,41 +149,64 @@ public final class Branch {
         for (int i = 0; i < run; i++) {
             double r = i == 0 ? 0 : -before[i] * inversePivot[i - 1];
             pivot = shift - self[i] + (i == 0 ? 0 : r * after[i - 1]);
+            double inverse = 1 / pivot;
             ratio[i] = r;
-            inversePivot[i] = 1 / pivot;
+            inversePivot[i] = inverse;
+            afterShare[i] = after[i] * inverse;
         }
     }
 
-    private void factorBlock() {
+    /** Gauss-Jordan without pivoting; a block of a few nodes is solved fastest by its inverse. */
+    private void invertBlock() {
+        Arrays.fill(inverse, 0);
+        for (int i = 0; i < block; i++) {
+            inverse[i * block + i] = 1;
+        }
         for (int k = 0; k < block; k++) {
-            double inverse = 1 / lu[k * block + k];
-            lu[k * block + k] = inverse;
-            for (int i = k + 1; i < block; i++) {
-                double l = lu[i * block + k] * inverse;
-                lu[i * block + k] = l;
-                for (int j = k + 1; j < block; j++) {
-                    lu[i * block + j] -= l * lu[k * block + j];
+            double scale = 1 / lu[k * block + k];
+            for (int j = 0; j < block; j++) {
+                lu[k * block + j] *= scale;
+                inverse[k * block + j] *= scale;
+            }
+            for (int i = 0; i < block; i++) {
+                double factor = lu[i * block + k];
+                if (i != k && factor != 0) {
+                    for (int j = 0; j < block; j++) {
+                        lu[i * block + j] -= factor * lu[k * block + j];
+                        inverse[i * block + j] -= factor * inverse[k * block + j];
+                    }
                 }
             }
         }
     }
 
-    /** Solves with the block's factors in place on entries {@code offset + i * stride}. */
-    private void solveBlock(double[] x, int offset, int stride) {
-        for (int i = 1; i < block; i++) {
-            double sum = x[offset + i * stride];
-            for (int k = 0; k < i; k++) {
-                sum -= lu[i * block + k] * x[offset + k * stride];
-            }
-            x[offset + i * stride] = sum;
+    /** Multiplies the block's entries by its inverse, in place. */
+    private void solveBlock(double[] x, int at) {
+        if (block == 4) {
+            solveFour(x, at);
+            return;
         }
-        for (int i = block - 1; i >= 0; i--) {
-            double sum = x[offset + i * stride];
-            for (int k = i + 1; k < block; k++) {
-                sum -= lu[i * block + k] * x[offset + k * stride];
+        for (int i = 0; i < block; i++) {
+            double sum = 0;
+            for (int k = 0; k < block; k++) {
+                sum += inverse[i * block + k] * x[at + k];
             }
-            x[offset + i * stride] = sum * lu[i * block + i];
+            work[i] = sum;
         }
+        System.arraycopy(work, 0, x, at, block);
+    }
+
+    /** A block of four, written out: such make up most of a tree. */
+    private void solveFour(double[] x, int at) {
+        double[] m = inverse;
+        double a = x[at];
+        double b = x[at + 1];
+        double c = x[at + 2];
+        double d = x[at + 3];
+        x[at] = m[0] * a + m[1] * b + m[2] * c + m[3] * d;
+        x[at + 1] = m[4] * a + m[5] * b + m[6] * c + m[7] * d;
+        x[at + 2] = m[8] * a + m[9] * b + m[10] * c + m[11] * d;
+        x[at + 3] = m[12] * a + m[13] * b + m[14] * c + m[15] * d;
     }
 
     /** Eliminates the branch from the right-hand side into the hub's entries, in place. */
@@ -186,7 +218,7 @@ public final class Branch {
         if (run > 0) {
             x[b] -= blockRatio * x[b - 1];
         }
-        solveBlock(x, b, 1);
+        solveBlock(x, b);
         for (int r = 0; r < hub; r++) {
             double sum = 0;
             for (int k = 0; k < block; k++) {
@@ -207,7 +239,7 @@ public final class Branch {
             x[b + i] -= sum;
         }
         for (int i = run - 1; i >= 0; i--) {
-            x[start + i] = (x[start + i] + after[i] * x[start + i + 1]) * inversePivot[i];
+            x[start + i] = x[start + i] * inversePivot[i] + afterShare[i] * x[start + i + 1];
         }
     }
 }
