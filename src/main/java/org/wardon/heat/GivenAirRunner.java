@@ -93,7 +93,9 @@ final class GivenAirRunner implements Integrator.StepListener, Integrator.Trigge
             return integrator.advance(t, y, until, this, this);
         } catch (StepTooShort stuck) {
             throw new RunStopped(
-                    stuck.time(), stay.lot().id(), "the rates are not smooth: " + stuck.getMessage());
+                    stuck.time(),
+                    stay.lot().id(),
+                    "the rates are not smooth: " + stuck.getMessage());
         }
     }
 

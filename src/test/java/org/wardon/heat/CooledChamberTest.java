@@ -52,7 +52,8 @@ class CooledChamberTest {
                 Chambers.full(Control.ON_OFF, 3, 4)
                         .withOutages(List.of(new Outage(3 * 86_400, 3 * 86_400 + 6 * 3600)));
         Course course = run(run);
-        assertTrue(course.hours().airC(72 + 5) > course.hours().airC(71) + 1,
+        assertTrue(
+                course.hours().airC(72 + 5) > course.hours().airC(71) + 1,
                 course.hours().airC(71) + " to " + course.hours().airC(77));
         assertEquals(0, course.hours().coolingW(72 + 3), 1e-9);
         assertEquals(0, course.hours().powerW(72 + 3), 1e-9);
@@ -88,9 +89,7 @@ class CooledChamberTest {
         ChamberRun pulses = Chambers.full(Control.MODULATING, 4, 6);
         Course each = run(pulses);
         Course averaged =
-                run(
-                        pulses.withDoorMode(DoorMode.AVERAGED)
-                                .withControlMode(ControlMode.MODULATING));
+                run(pulses.withDoorMode(DoorMode.AVERAGED).withControlMode(ControlMode.MODULATING));
         assertEquals(120, each.counts().doorOpenings());
         assertEquals(each.heat().door(), averaged.heat().door(), 0.12 * each.heat().door());
         for (int i = 0; i < 4; i++) {
@@ -105,8 +104,7 @@ class CooledChamberTest {
     void carbonDioxideSettlesWhereSourceAndLeakageBalance() {
         Course course =
                 run(
-                        Chambers.passive(
-                                        Chambers.panelRoom(0), Weather.steady(20, 60), 10)
+                        Chambers.passive(Chambers.panelRoom(0), Weather.steady(20, 60), 10)
                                 .withStays(Chambers.load(1, 200, 20)));
         int end = course.hours().size() - 1;
         double kgS = course.hours().respirationW(end) / 10.7e6;
@@ -129,8 +127,7 @@ class CooledChamberTest {
                         Chambers.breath(50, 0),
                         lot.transpiration());
         ChamberRun run =
-                Chambers.passive(
-                                Chambers.shut(List.of(Chambers.FOAM)), Weather.steady(25, 60), 3)
+                Chambers.passive(Chambers.shut(List.of(Chambers.FOAM)), Weather.steady(25, 60), 3)
                         .withStays(List.of(new Stay(fire, 0, Double.POSITIVE_INFINITY, 25)));
         RunStopped stopped = assertThrows(RunStopped.class, () -> run(run));
         assertEquals("north", stopped.chamber());
@@ -141,8 +138,7 @@ class CooledChamberTest {
     void stepsAllocateNothing() {
         ChamberRun run = Chambers.full(Control.MODULATING, 12, 1);
         ChamberNetwork network = RunCompiler.network(run, false);
-        double[] y =
-                network.start(RunCompiler.startC(run), RunCompiler.startRatio(run, network));
+        double[] y = network.start(RunCompiler.startC(run), RunCompiler.startRatio(run, network));
         for (int i = 0; i < 12; i++) {
             network.lot(i).arrive(22, 0, network.ratio(y), y);
         }

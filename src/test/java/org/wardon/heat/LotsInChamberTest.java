@@ -69,8 +69,7 @@ class LotsInChamberTest {
 
     @Test
     void waterLostByLotsIsGainedByAirCoilFacesAndLeakage() {
-        Course course =
-                HeatModel.run(Chambers.full(Control.ON_OFF, 4, 2), Progress.SILENT);
+        Course course = HeatModel.run(Chambers.full(Control.ON_OFF, 4, 2), Progress.SILENT);
         WaterLedger water = course.water();
         assertTrue(water.lots() > 1, "lots lost " + water.lots() + " kg");
         assertTrue(-water.coolers() > water.lots(), "the coil took " + -water.coolers());
@@ -113,8 +112,7 @@ class LotsInChamberTest {
     void noHeatComesFromNothing() {
         Stay stay = new Stay(silent(Shape.SPHERE, 0.03, 6), 0, FOREVER, 28);
         ChamberRun run =
-                Chambers.passive(
-                                Chambers.shut(List.of(Chambers.FOAM)), Weather.steady(20, 50), 4)
+                Chambers.passive(Chambers.shut(List.of(Chambers.FOAM)), Weather.steady(20, 50), 4)
                         .withStart(Start.at(10, 60))
                         .withStays(List.of(stay));
         Course course = HeatModel.run(run, Progress.SILENT);
@@ -158,7 +156,8 @@ class LotsInChamberTest {
         for (int i = before; i < cold.size(); i++) {
             warmest = Math.max(warmest, cold.meanC(i));
         }
-        assertTrue(warmest > cold.meanC(before) + 0.05, "rose by " + (warmest - cold.meanC(before)));
+        assertTrue(
+                warmest > cold.meanC(before) + 0.05, "rose by " + (warmest - cold.meanC(before)));
         assertEquals(2.4 * 86_400, course.lots().get(1).history().timeS(0), 1e-6);
         assertTrue(course.balanceErrorPct() < 1e-6, course.balanceErrorPct() + " %");
     }

@@ -10,9 +10,9 @@ import org.wardon.air.MoistAir;
 import org.wardon.air.SaturatedAir;
 import org.wardon.cooling.Compressor;
 import org.wardon.cooling.Compressor.Control;
+import org.wardon.cooling.CompressorLaw;
 import org.wardon.cooling.CoolerEffect;
 import org.wardon.cooling.CoolerInputs;
-import org.wardon.cooling.CompressorLaw;
 import org.wardon.cooling.Thermostat;
 import org.wardon.enclosure.DoorExchange;
 import org.wardon.enclosure.PeopleHeat;
@@ -79,7 +79,9 @@ class NetworkRatesTest {
         }
     }
 
-    /** What 30 K or 1000 Pa across the skin would do to a node: its rate is a difference of such. */
+    /**
+     * What 30 K or 1000 Pa across the skin would do to a node: its rate is a difference of such.
+     */
     private double gross(Lot lot, int node) {
         Shells cut = lot.shells();
         int n = cut.count();
@@ -241,8 +243,7 @@ class NetworkRatesTest {
             double expected = 0;
             int at = 2;
             for (int i = 0; i < 6; i++) {
-                double area =
-                        run.enclosure().box().areaM2(run.enclosure().faces().get(i).name());
+                double area = run.enclosure().box().areaM2(run.enclosure().faces().get(i).name());
                 double surface = network.surfaceC(i, y);
                 while (y[at] != surface) {
                     at++;
@@ -363,7 +364,7 @@ class NetworkRatesTest {
             double[] near = new double[size];
             quick.rates(1800, y, near, flows);
             for (int i = 0; i < size; i++) {
-                assertEquals(exact[i], near[i], 1e-5 * (Math.abs(exact[i]) + 1e-6), "node " + i);
+                assertEquals(exact[i], near[i], 1e-5 * Math.abs(exact[i]) + 1e-9, "node " + i);
             }
         }
     }

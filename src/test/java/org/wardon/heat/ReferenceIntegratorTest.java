@@ -27,8 +27,7 @@ class ReferenceIntegratorTest {
     @BeforeAll
     static void integrateReference() {
         ChamberNetwork network = RunCompiler.network(RUN, true);
-        double[] y =
-                network.start(RunCompiler.startC(RUN), RunCompiler.startRatio(RUN, network));
+        double[] y = network.start(RunCompiler.startC(RUN), RunCompiler.startRatio(RUN, network));
         List<Edge> edges = Schedule.of(RUN);
         double t = 0;
         int next = 0;
@@ -68,12 +67,10 @@ class ReferenceIntegratorTest {
             case USE_ENDS -> network.people(0);
             case ARRIVES -> {
                 network.lot(edge.index())
-                        .arrive(
-                                RUN.stays().get(edge.index()).pulpC(), 0, network.ratio(y), y);
+                        .arrive(RUN.stays().get(edge.index()).pulpC(), 0, network.ratio(y), y);
                 double free = network.freeM3();
                 var lot = RUN.stays().get(edge.index()).lot();
-                network.changeFreeVolume(
-                        free - 1.05 * lot.massKg() / lot.item().densityKgM3(), y);
+                network.changeFreeVolume(free - 1.05 * lot.massKg() / lot.item().densityKgM3(), y);
             }
             default -> {}
         }
@@ -124,9 +121,7 @@ class ReferenceIntegratorTest {
     private static double worstAirK(Course course) {
         double worst = 0;
         for (int hour = 0; hour < AIR_MEAN.size(); hour++) {
-            worst =
-                    Math.max(
-                            worst, Math.abs(course.hours().airC(hour) - AIR_MEAN.get(hour)));
+            worst = Math.max(worst, Math.abs(course.hours().airC(hour) - AIR_MEAN.get(hour)));
         }
         return worst;
     }
@@ -149,8 +144,7 @@ class ReferenceIntegratorTest {
     void errorFallsWithTheTolerance() {
         double last = Double.POSITIVE_INFINITY;
         for (double airK : new double[] {0.1, 0.01, 0.001}) {
-            Course course =
-                    HeatModel.run(RUN, Progress.SILENT, new Accuracy(airK / 5, airK), true);
+            Course course = HeatModel.run(RUN, Progress.SILENT, new Accuracy(airK / 5, airK), true);
             double worst = worstLotK(course) + worstAirK(course);
             assertTrue(worst < last / 2, "at " + airK + ": " + worst + " after " + last);
             last = worst;

@@ -24,8 +24,7 @@ final class LocalCurve {
     private double c3;
 
     /** Makes a curve trusted as far as its reach, K; {@code plain} always asks the law itself. */
-    LocalCurve(
-            DoubleUnaryOperator law, DoubleUnaryOperator slope, double reachK, boolean plain) {
+    LocalCurve(DoubleUnaryOperator law, DoubleUnaryOperator slope, double reachK, boolean plain) {
         this.reachK = reachK;
         this.law = law;
         this.slope = slope;

@@ -52,7 +52,6 @@ public final class LotBranch implements Part {
     /** Newton ends with a step shorter than this, K. */
     private static final double LAST_STEP_K = 1e-7;
 
-
     /** Its place in the state. */
     final Branch branch;
 

@@ -82,16 +82,10 @@ public final class LotInGivenAir implements TreeSystem {
      * @param seconds length of the stretch, s, above 0
      */
     public void air(
-            double[] y,
-            double airC,
-            double ratio,
-            double thenC,
-            double thenRatio,
-            double seconds) {
+            double[] y, double airC, double ratio, double thenC, double thenRatio, double seconds) {
         y[AirState.ENTHALPY] = MoistAir.enthalpyJkg(airC, ratio);
         y[AirState.HUMIDITY] = ratio;
-        enthalpySlope =
-                (MoistAir.enthalpyJkg(thenC, thenRatio) - y[AirState.ENTHALPY]) / seconds;
+        enthalpySlope = (MoistAir.enthalpyJkg(thenC, thenRatio) - y[AirState.ENTHALPY]) / seconds;
         ratioSlope = (thenRatio - ratio) / seconds;
     }
 

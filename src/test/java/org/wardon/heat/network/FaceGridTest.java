@@ -52,8 +52,7 @@ class FaceGridTest {
         PeriodicTransmittance exact =
                 PeriodicTransmittance.of(insideToOutside, INSIDE, OUTSIDE, DAY_S);
         Complex found = waveThrough(new FaceGrid(outsideToInside, INSIDE, 1));
-        assertEquals(
-                exact.transmittanceWm2K(), found.abs(), 0.01 * exact.transmittanceWm2K());
+        assertEquals(exact.transmittanceWm2K(), found.abs(), 0.01 * exact.transmittanceWm2K());
     }
 
     @Test
