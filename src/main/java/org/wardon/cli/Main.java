@@ -1,15 +1,104 @@
 package org.wardon.cli;
 
-/** Starts the program. */
-public final class Main {
-    private Main() {}
+import java.io.PrintStream;
+import org.wardon.errors.BadInput;
+import org.wardon.errors.Fault;
+import org.wardon.errors.RunStopped;
+import org.wardon.files.CannotWrite;
+import picocli.CommandLine;
+import picocli.CommandLine.Command;
+import picocli.CommandLine.Model.CommandSpec;
+import picocli.CommandLine.ParameterException;
+import picocli.CommandLine.Spec;
+
+/** The program: reads the words typed and hands them to a verb. */
+@Command(
+        name = "wardon",
+        mixinStandardHelpOptions = true,
+        versionProvider = Version.class,
+        subcommands = {
+            Advise.class,
+            Keep.class,
+            Share.class,
+            Look.class,
+            SchemaVerb.class,
+            Demo.class
+        },
+        synopsisSubcommandLabel = "VERB",
+        description = {
+            "Advice for people who keep other people's harvest cool: which crops may share a"
+                    + " chamber, what to set, whether it holds, how many days each lot has left and"
+                    + " why."
+        },
+        footer = {
+            "",
+            "Exit status: 0 done; 2 input that cannot be used, nothing written; 3 a run met a state"
+                    + " that cannot be; 4 a result could not be written.",
+            "Wardon advises; local codes and licensed practice decide."
+        })
+public final class Main implements Runnable {
+    @Spec private CommandSpec spec = CommandSpec.create();
+
+    /** Made by the command line. */
+    public Main() {}
+
+    /**
+     * Runs one command and ends the process with its exit status.
+     *
+     * @param args the words typed
+     */
+    public static void main(String[] args) {
+        System.exit(run(args));
+    }
 
     /**
      * Runs one command.
      *
      * @param args the words typed
+     * @return exit status, see {@code --help}
      */
-    public static void main(String[] args) {
-        System.out.println("wardon");
+    static int run(String... args) {
+        Terminal terminal = Terminal.ofProcess();
+        CommandLine line = new CommandLine(new Main());
+        line.setCaseInsensitiveEnumValuesAllowed(true);
+        line.setParameterExceptionHandler((fault, words) -> misused(fault, terminal.err()));
+        line.setExecutionExceptionHandler((fault, command, parsed) -> failed(fault, terminal));
+        return line.execute(args);
+    }
+
+    @Override
+    public void run() {
+        throw new ParameterException(
+                spec.commandLine(), "no verb is given; 'wardon --help' lists them");
+    }
+
+    private static int misused(ParameterException fault, PrintStream err) {
+        String verb = fault.getCommandLine().getCommandSpec().qualifiedName();
+        err.println("wardon: " + fault.getMessage() + "; see '" + verb + " --help'");
+        return Exit.BAD_INPUT;
+    }
+
+    private static int failed(Exception fault, Terminal terminal) {
+        if (fault instanceof BadInput bad) {
+            for (Fault one : bad.faults()) {
+                terminal.err().println("wardon: " + one.sentence());
+            }
+            return Exit.BAD_INPUT;
+        }
+        if (fault instanceof RunStopped stopped) {
+            terminal.err()
+                    .println(
+                            "wardon: the run stopped at a state that cannot be: "
+                                    + stopped.getMessage()
+                                    + "; check the plan's figures for this chamber");
+            return Exit.RUN_STOPPED;
+        }
+        if (fault instanceof CannotWrite unwritten) {
+            terminal.err().println("wardon: " + unwritten.fault().sentence());
+            return Exit.CANNOT_WRITE;
+        }
+        terminal.err().println("wardon: a fault of the program itself, please report it:");
+        fault.printStackTrace(terminal.err());
+        return Exit.INTERNAL;
     }
 }

@@ -128,7 +128,7 @@ final class Grounds {
                             && highest >= effect.thresholdPpm().get().lowest();
             if (above) {
                 say(
-                        "ethylene-disorder",
+                        "ethylene-harms",
                         effect.sourceId(),
                         Argument.of(effect.thresholdPpm().get().lowest(), "ppm"),
                         Argument.of(highest, "ppm"),

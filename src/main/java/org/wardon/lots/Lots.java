@@ -41,7 +41,12 @@ public final class Lots {
         WithReasons<Packing> packing =
                 PackageFit.of(
                         item.value(),
-                        PackageInside.of(commodity, item.value(), kind, bare),
+                        PackageInside.of(
+                                commodity,
+                                item.value(),
+                                kind,
+                                new PackageInside.Vapour(
+                                        bare, water.value().conductanceKgPerKgSPa())),
                         kind,
                         shares.packageTime());
         Lot lot = new Lot(id, massKg, item.value(), packing.value(), breath.value(), water.value());

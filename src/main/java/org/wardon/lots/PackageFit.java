@@ -12,10 +12,11 @@ import org.wardon.produce.Reason;
  * half-cooling time: sensible heat alone, no respiration, no evaporation, chamber air of one
  * temperature.
  *
- * <p>The film in the package is that of slow air ({@link AirFilm}); the path from package air to
- * chamber is fitted. Where even an open package is too slow with that film, the package is taken as
- * open and the film fitted, as in forced air or a shower. Where the item alone is slower than the
- * printed time, the item's time is kept and said.
+ * <p>The film in the package is that of slow air ({@link AirFilm}), or wider where the produce
+ * loses water through more surface than its simple body has, as leaves do; the path from package
+ * air to chamber is fitted. Where even an open package is too slow with that film, the package is
+ * taken as open and the film fitted, as in forced air or a shower. Where the item alone is slower
+ * than the printed time, the item's time is kept and said.
  */
 public final class PackageFit {
     /** Relative conductance from which produce counts as bare: the package adds next to nothing. */
@@ -42,7 +43,8 @@ public final class PackageFit {
     static WithReasons<Packing> of(Item item, PackageInside inside, double halfCoolingS) {
         Shells shells = Shells.of(item);
         double open = openWPerKgK(item);
-        double film = Math.min(open, item.areaM2PerKg() * AirFilm.heatWPerM2K(item));
+        double outside = item.areaM2PerKg() * AirFilm.heatWPerM2K(item);
+        double film = Math.min(open, Math.max(outside, inside.leastFilmWPerKgK()));
         if (leftAfter(halfCoolingS, item, shells, inside.packing(open, open)) >= 0.5) {
             return itemsOwnTime(item, inside, open, halfCoolingS);
         }

@@ -13,14 +13,26 @@ import org.wardon.produce.rows.GeometryRow;
  * @param sourceId source of the package's time
  * @param airM3PerKg air among the items, m3/kg
  * @param tareJPerKgK heat capacity of the empty package, J/(K kg of lot)
- * @param vapourKgPerKgSPa package air to chamber, kg/(kg s Pa)
+ * @param vapourKgPerKgSPa package air to chamber, at most, kg/(kg s Pa)
+ * @param leastFilmWPerKgK film of the items, at least, W/(kg K)
  */
 record PackageInside(
         String commodityId,
         String sourceId,
         double airM3PerKg,
         double tareJPerKgK,
-        double vapourKgPerKgSPa) {
+        double vapourKgPerKgSPa,
+        double leastFilmWPerKgK) {
+    /**
+     * Vapour that moving air can carry for the heat it carries, kg/(s Pa) for W/K: 0.622/(cp p) at
+     * sea level. What lets vapour pass by air lets heat pass with it, so no path for vapour is
+     * wider than this; without the bound a lot could fall below the wet bulb of the air around it.
+     *
+     * <p>Source: Lewis relation for air and water with the number taken as 1, ASHRAE Handbook -
+     * Fundamentals, 2017, chapter 6 (from memory of it).
+     */
+    static final double VAPOUR_PER_HEAT = 0.622 / (1006.0 * 101_325.0);
+
     /** Air among items over the whole where no bulk density is printed (assumption). */
     private static final double USUAL_VOIDS = 0.42;
 
@@ -30,14 +42,24 @@ record PackageInside(
     /** Specific heat of board, wood and plastic, J/(kg K) (assumption). */
     private static final double TARE_J_KG_K = 1700;
 
-    static PackageInside of(Commodity commodity, Item item, PackageKind kind, double bareVapour) {
+    /**
+     * Conductance for vapour from tissue to air without a package.
+     *
+     * @param usualKgPerKgSPa middle of its range, by which the package is measured
+     * @param drawnKgPerKgSPa as drawn; the film must carry the heat that goes with it
+     */
+    record Vapour(double usualKgPerKgSPa, double drawnKgPerKgSPa) {}
+
+    static PackageInside of(Commodity commodity, Item item, PackageKind kind, Vapour vapour) {
         double tare = kind.tareKgPerKg().map(Fact::middle).orElse(USUAL_TARE);
         return new PackageInside(
                 commodity.id(),
                 kind.halfCoolingHours().sourceId(),
                 airM3PerKg(commodity, item),
                 TARE_J_KG_K * tare,
-                PackageFit.vapourKgPerKgSPa(bareVapour, kind.vapourConductance().atLogShare(0.5)));
+                PackageFit.vapourKgPerKgSPa(
+                        vapour.usualKgPerKgSPa(), kind.vapourConductance().atLogShare(0.5)),
+                vapour.drawnKgPerKgSPa() / VAPOUR_PER_HEAT);
     }
 
     /** The same beside other conductances. */
@@ -47,11 +69,13 @@ record PackageInside(
                 ClassValues.SOURCE,
                 packing.airM3PerKg(),
                 packing.tareJPerKgK(),
-                packing.vapourKgPerKgSPa());
+                packing.vapourKgPerKgSPa(),
+                0);
     }
 
     Packing packing(double filmWPerKgK, double chamberWPerKgK) {
-        return new Packing(filmWPerKgK, chamberWPerKgK, airM3PerKg, tareJPerKgK, vapourKgPerKgSPa);
+        double vapour = Math.min(vapourKgPerKgSPa, VAPOUR_PER_HEAT * chamberWPerKgK);
+        return new Packing(filmWPerKgK, chamberWPerKgK, airM3PerKg, tareJPerKgK, vapour);
     }
 
     private static double airM3PerKg(Commodity commodity, Item item) {

@@ -65,7 +65,7 @@ public final class ChamberSharing {
         verdict = verdict.worse(nearly && enough ? Verdict.TOLERABLE : Verdict.NO);
         reasons.add(
                 Reason.about(
-                        handbook < wanted ? "keeps-less-than-wanted" : "short-of-wanted",
+                        handbook < wanted ? "keeps-less-here" : "falls-short-here",
                         lot.id(),
                         handbookSource(lot),
                         Argument.of(spread.p10(), "day"),

@@ -18,7 +18,7 @@ import org.wardon.Source;
 /** A fitted package takes its published time, checked by a general integrator. */
 class PackageFitTest {
     private static final PackageInside CARTON =
-            new PackageInside("pear", "USDA-AH66", 0.0007, 100, 1e-10);
+            new PackageInside("pear", "USDA-AH66", 0.0007, 100, 1e-10, 0);
 
     /** Three percent is promised; shells without film miss by up to 1.5 %. */
     private static final double PROMISED = 0.03;

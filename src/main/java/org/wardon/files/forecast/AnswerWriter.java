@@ -62,6 +62,16 @@ public final class AnswerWriter {
     }
 
     /**
+     * Returns a number as text, as it stands in answers.
+     *
+     * @param value a finite number
+     * @return plain digits
+     */
+    public static String text(double value) {
+        return rounded(value).toPlainString();
+    }
+
+    /**
      * Returns a number as it is written.
      *
      * @param value a finite number

@@ -1,0 +1,137 @@
+package org.wardon.advice.company;
+
+import java.util.ArrayList;
+import java.util.List;
+import java.util.Map;
+import java.util.Optional;
+import java.util.function.DoubleFunction;
+import org.wardon.advice.wording.Words;
+import org.wardon.errors.BadInput;
+import org.wardon.errors.Fault;
+import org.wardon.files.forecast.Because;
+import org.wardon.files.forecast.Bounds;
+import org.wardon.files.forecast.ShareAnswer;
+import org.wardon.keeping.Draw;
+import org.wardon.keeping.Draws;
+import org.wardon.keeping.KeptLot;
+import org.wardon.keeping.LotAtDoor;
+import org.wardon.lots.ClassValues;
+import org.wardon.lots.Item;
+import org.wardon.lots.Items;
+import org.wardon.lots.TranspirationLaw;
+import org.wardon.lots.Transpirations;
+import org.wardon.produce.Commodity;
+import org.wardon.produce.Reason;
+import org.wardon.reference.ReferenceBook;
+import org.wardon.sharing.PairVerdict;
+import org.wardon.sharing.SettingRange;
+import org.wardon.sharing.Sharing;
+import org.wardon.sharing.SharingAnswer;
+import org.wardon.sharing.Wish;
+
+/** Answers who may share a chamber. */
+public final class SharingAdvice {
+    /** Days wanted unless others are asked for. */
+    public static final double USUAL_DAYS = 7;
+
+    private static final int DRAWS = 32;
+    private static final long SEED = 1;
+
+    private final ReferenceBook book;
+    private final Words words;
+    private final ClassValues classes;
+    private final List<Draw> draws = Draws.seeded(SEED, DRAWS);
+
+    /**
+     * Prepares for questions.
+     *
+     * @param book the reference book
+     * @param words words for the reasons
+     */
+    public SharingAdvice(ReferenceBook book, Words words) {
+        this.book = book;
+        this.words = words;
+        this.classes = ClassValues.of(book.list().stream().map(book::get).toList());
+    }
+
+    /**
+     * Answers a question.
+     *
+     * @param days days wanted of each crop, by id or any common name, in the order asked
+     * @return the verdict
+     * @throws BadInput with every fault: an unknown name, a crop named twice, days out of range
+     */
+    public ShareReport ask(Map<String, Double> days) {
+        List<Fault> faults = new ArrayList<>();
+        List<Wish> wishes = new ArrayList<>();
+        List<String> seen = new ArrayList<>();
+        days.forEach((name, wanted) -> wish(name, wanted, seen, faults).ifPresent(wishes::add));
+        if (!faults.isEmpty()) {
+            throw new BadInput(faults);
+        }
+        SharingAnswer found = Sharing.of(wishes, draws);
+        return new ShareReport(answer(found), found.reasons());
+    }
+
+    private Optional<Wish> wish(String name, double wanted, List<String> seen, List<Fault> faults) {
+        Optional<Commodity> commodity = Optional.empty();
+        try {
+            commodity = Optional.of(book.named(name));
+        } catch (BadInput unknown) {
+            faults.addAll(unknown.faults());
+        }
+        if (!(wanted >= 0.1 && wanted <= 730)) {
+            faults.add(
+                    new Fault(
+                            name,
+                            "",
+                            wanted + " days are out of range",
+                            "accepted: 0.1 to 730 days"));
+            return Optional.empty();
+        }
+        if (commodity.isPresent() && seen.contains(commodity.get().id())) {
+            faults.add(
+                    new Fault(
+                            name,
+                            "",
+                            commodity.get().id() + " is named twice",
+                            "name each crop once"));
+            return Optional.empty();
+        }
+        commodity.ifPresent(one -> seen.add(one.id()));
+        return commodity.map(one -> Wish.of(kept(one), wanted));
+    }
+
+    private KeptLot kept(Commodity commodity) {
+        Item item = Items.of(commodity, classes).value();
+        DoubleFunction<TranspirationLaw> laws =
+                share -> Transpirations.of(commodity, item, classes, share).value();
+        return new KeptLot(commodity.id(), commodity, LotAtDoor.SOUND, Optional.of(laws));
+    }
+
+    private ShareAnswer answer(SharingAnswer found) {
+        return new ShareAnswer(
+                found.verdict().word(),
+                found.workableC().map(SharingAdvice::bounds),
+                found.workableHumidityPct().map(SharingAdvice::bounds),
+                found.pairs().stream().map(this::pair).toList(),
+                Optional.empty());
+    }
+
+    private static Bounds bounds(SettingRange range) {
+        return new Bounds(range.low(), range.high());
+    }
+
+    private ShareAnswer.Pair pair(PairVerdict pair) {
+        return new ShareAnswer.Pair(
+                pair.a(),
+                pair.b(),
+                pair.verdict().word(),
+                pair.reasons().stream().map(this::because).toList());
+    }
+
+    private Because because(Reason reason) {
+        return new Because(
+                reason.code(), reason.subjects(), words.sentence(reason), reason.sourceId());
+    }
+}

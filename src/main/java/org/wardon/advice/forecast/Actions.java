@@ -1,0 +1,203 @@
+package org.wardon.advice.forecast;
+
+import java.util.ArrayList;
+import java.util.Comparator;
+import java.util.List;
+import java.util.Map;
+import java.util.Optional;
+import java.util.OptionalDouble;
+import org.wardon.advice.wording.Words;
+import org.wardon.air.Timeline;
+import org.wardon.enclosure.Door;
+import org.wardon.files.forecast.ChamberForecast;
+import org.wardon.files.forecast.Forecast.Action;
+import org.wardon.keeping.Fate;
+import org.wardon.keeping.Outlook;
+import org.wardon.keeping.Spread;
+import org.wardon.plan.ChamberPlan;
+import org.wardon.produce.Reason;
+import org.wardon.produce.Reason.Argument;
+
+/** What to do first: what saves people, then what saves most. */
+final class Actions {
+    /** Moves that gain less than this share of a lot's price are not worth a person's time. */
+    private static final double WORTH_MOVING = 0.02;
+
+    /** A door counts as left open from here on, s an opening (assumption). */
+    private static final double LEFT_OPEN_S = 120;
+
+    /** Share of the heat that makes the door worth naming (assumption). */
+    private static final double DOOR_SHARE = 0.15;
+
+    private static final double AIR_OUT_PPM = 14_000;
+    private static final String OWN_RULE = "assumption";
+
+    private final StoreOutcome outcome;
+    private final Map<String, ChamberForecast> chambers;
+    private final Words words;
+    private final List<Candidate> found = new ArrayList<>();
+
+    private record Candidate(
+            int rank, Reason reason, OptionalDouble gainDays, OptionalDouble gainValue) {}
+
+    Actions(StoreOutcome outcome, Map<String, ChamberForecast> chambers, Words words) {
+        this.outcome = outcome;
+        this.chambers = Map.copyOf(chambers);
+        this.words = words;
+    }
+
+    List<Action> all() {
+        outcome.model().plan().chambers().forEach(this::airOut);
+        outcome.model().sheets().forEach(this::lot);
+        outcome.model().plan().chambers().forEach(this::chamber);
+        found.sort(
+                Comparator.comparingInt(Candidate::rank)
+                        .thenComparing(c -> -c.gainValue().orElse(0))
+                        .thenComparing(c -> -c.gainDays().orElse(0)));
+        List<Action> actions = new ArrayList<>();
+        for (Candidate candidate : found) {
+            actions.add(
+                    new Action(
+                            actions.size() + 1,
+                            words.sentence(candidate.reason()),
+                            candidate.reason().subjects().get(0),
+                            candidate.gainDays(),
+                            candidate.gainValue()));
+        }
+        return actions;
+    }
+
+    private void say(int rank, Reason reason) {
+        found.add(new Candidate(rank, reason, OptionalDouble.empty(), OptionalDouble.empty()));
+    }
+
+    private void airOut(ChamberPlan chamber) {
+        if (ById.get(chambers, chamber.id()).co2PpmMax() >= AIR_OUT_PPM) {
+            say(0, Reason.about("do-air-out", chamber.id(), OWN_RULE));
+        }
+    }
+
+    private void lot(LotSheet sheet) {
+        if (!outcome.has(sheet.id())) {
+            return;
+        }
+        LotFates fates = outcome.fates(sheet.id());
+        if (sheet.model().uncured()) {
+            String source = sheet.commodity().keeping().curing().get(0).sourceId();
+            say(1, Reason.about("do-cure-first", sheet.id(), source));
+        }
+        move(sheet, fates);
+        sell(sheet, fates);
+    }
+
+    private void move(LotSheet sheet, LotFates fates) {
+        String here = sheet.plan().chamber().orElse("");
+        double best = 0;
+        Optional<Candidate> move = Optional.empty();
+        double price = sheet.plan().market().pricePerKg() * sheet.plan().massKg();
+        double soundHere = fates.shareSoundWhenSold(sheet.soldS());
+        for (ChamberPlan other : outcome.model().plan().chambers()) {
+            if (other.id().equals(here)) {
+                continue;
+            }
+            OtherChambers.There there =
+                    new OtherChambers(outcome.model())
+                            .of(
+                                    sheet,
+                                    outcome.course(other.id()),
+                                    outcome.ethylene(other.id()),
+                                    outcome.durationS());
+            double gain = there.shareSound() - soundHere;
+            if (gain > best + WORTH_MOVING) {
+                best = gain;
+                move =
+                        Optional.of(
+                                new Candidate(
+                                        2,
+                                        new Reason(
+                                                "do-move",
+                                                List.of(sheet.id(), other.id(), here),
+                                                List.of(
+                                                        Argument.of(
+                                                                100 * there.shareSound(), "pct"),
+                                                        Argument.of(100 * soundHere, "pct")),
+                                                OWN_RULE),
+                                        OptionalDouble.of(
+                                                days(there.sold(), sheet)
+                                                        - days(fates.sold(), sheet)),
+                                        price > 0
+                                                ? OptionalDouble.of(
+                                                        there.value(sheet) - valueHere(sheet))
+                                                : OptionalDouble.empty()));
+            }
+        }
+        move.ifPresent(found::add);
+    }
+
+    private double valueHere(LotSheet sheet) {
+        ChamberPlan chamber =
+                outcome.model().plan().getChamber(sheet.plan().chamber().orElseThrow());
+        return new LotFigures(sheet, chamber, outcome).valueKept();
+    }
+
+    private static double days(List<Fate> fates, LotSheet sheet) {
+        double from = sheet.clock().hereFromS();
+        return Spread.of(fates.stream().mapToDouble(fate -> fate.daysLeft(from)).toArray()).p50();
+    }
+
+    private void sell(LotSheet sheet, LotFates fates) {
+        double leaveBy =
+                Outlook.leaveByS(fates.staying(), sheet.clock().arrivesS(), sheet.marketDays());
+        if (leaveBy >= sheet.clock().leavesS()) {
+            return;
+        }
+        double earlier = (sheet.clock().leavesS() - leaveBy) / Timeline.DAY_S;
+        boolean now = leaveBy <= sheet.clock().hereFromS() + 0.5 * Timeline.DAY_S;
+        say(
+                now ? 3 : 4,
+                Reason.about(
+                        now ? "do-sell-now" : "do-sell-earlier",
+                        sheet.id(),
+                        OWN_RULE,
+                        Argument.of(earlier, "day"),
+                        Argument.text(
+                                outcome.model()
+                                        .plan()
+                                        .timeline()
+                                        .localAt(leaveBy)
+                                        .toLocalDate()
+                                        .toString())));
+    }
+
+    private void chamber(ChamberPlan chamber) {
+        ChamberForecast figures = ById.get(chambers, chamber.id());
+        double load = figures.heatRemovedKWh();
+        double share = load > 0 ? figures.loadKWh().door() / load : 0;
+        Door door = chamber.enclosure().door().orElse(null);
+        if (door != null && door.secondsOpen() >= LEFT_OPEN_S && share >= DOOR_SHARE) {
+            say(
+                    5,
+                    Reason.about(
+                            "do-shut-door",
+                            chamber.id(),
+                            OWN_RULE,
+                            Argument.of(100 * share, "pct"),
+                            Argument.of(door.secondsOpen() / 60, "1")));
+        }
+        if (!chamber.coolers().isEmpty() && figures.peakLoadW() > 1.05 * figures.removedPeakW()) {
+            Argument peak = Argument.of(figures.peakLoadW(), "W");
+            Argument removed = Argument.of(figures.removedPeakW(), "W");
+            say(
+                    6,
+                    figures.intakeKgPerDay().isPresent()
+                            ? Reason.about(
+                                    "do-spread-intake",
+                                    chamber.id(),
+                                    OWN_RULE,
+                                    peak,
+                                    removed,
+                                    Argument.of(figures.intakeKgPerDay().getAsDouble(), "kg"))
+                            : Reason.about("do-precool", chamber.id(), OWN_RULE, peak, removed));
+        }
+    }
+}

@@ -1,0 +1,213 @@
+package org.wardon.advice.forecast;
+
+import java.util.ArrayList;
+import java.util.HashSet;
+import java.util.List;
+import java.util.Set;
+import org.wardon.air.StandardAtmosphere;
+import org.wardon.air.Timeline;
+import org.wardon.cooling.Cooler;
+import org.wardon.cooling.CoolerCautions;
+import org.wardon.heat.Course;
+import org.wardon.heat.CourseEvent;
+import org.wardon.plan.Assumed;
+import org.wardon.plan.ChamberPlan;
+import org.wardon.plan.FilledGap;
+import org.wardon.plan.StorePlan;
+import org.wardon.plan.WeatherSource;
+import org.wardon.produce.Caution;
+import org.wardon.produce.Caution.Level;
+import org.wardon.produce.Reason;
+import org.wardon.produce.Reason.Argument;
+
+/** What a person must hear of beside the figures: first what can hurt people, then produce. */
+final class Cautions {
+    /** Eight-hour limit of carbon dioxide, ppm; source: safety limits, id OSHA-1910. */
+    private static final double CO2_CAUTION_PPM = 5_000;
+
+    /** Own rule between the published limits, ppm (assumption). */
+    private static final double CO2_DANGER_PPM = 14_000;
+
+    /** Fifteen-minute limit, ppm; source: safety limits, id ACGIH. */
+    private static final double CO2_EVACUATE_PPM = 30_000;
+
+    private static final String OWN_RULE = "assumption";
+    private static final String PRACTICE = "common-practice";
+
+    private final StoreOutcome outcome;
+    private final List<Caution> cautions = new ArrayList<>();
+    private final Set<Reason> told = new HashSet<>();
+
+    Cautions(StoreOutcome outcome) {
+        this.outcome = outcome;
+    }
+
+    List<Caution> all() {
+        StorePlan plan = outcome.model().plan();
+        for (ChamberPlan chamber : plan.chambers()) {
+            gases(chamber);
+        }
+        add(Level.NOTE, Reason.about("never-alone", "store", "OSHA-1910"));
+        if (plan.chambers().stream().anyMatch(c -> !c.coolers().isEmpty())) {
+            add(Level.NOTE, Reason.about("licensed-work", "store", "ASHRAE-34"));
+        }
+        for (ChamberPlan chamber : plan.chambers()) {
+            chamber(chamber);
+        }
+        outcome.model().sheets().forEach(this::lot);
+        weather(plan);
+        defaults(plan);
+        add(Level.NOTE, Reason.about("keeping-not-safety", "store", PRACTICE));
+        return List.copyOf(cautions);
+    }
+
+    private void add(Level level, Reason reason) {
+        if (told.add(reason)) {
+            cautions.add(new Caution(level, reason));
+        }
+    }
+
+    private void gases(ChamberPlan chamber) {
+        Course course = outcome.horizonCourse(chamber.id());
+        double ppm = course.counts().co2HighestPpm();
+        Argument highest = Argument.of(ppm, "ppm");
+        Argument opening = Argument.of(course.counts().co2AtFirstOpeningPpm(), "ppm");
+        if (ppm >= CO2_EVACUATE_PPM) {
+            add(
+                    Level.DANGER,
+                    Reason.about("co2-evacuate", chamber.id(), "ACGIH", highest, opening));
+            add(Level.CAUTION, Reason.about("co2-outside-model", chamber.id(), OWN_RULE, highest));
+        } else if (ppm >= CO2_DANGER_PPM) {
+            add(Level.DANGER, Reason.about("co2-danger", chamber.id(), OWN_RULE, highest, opening));
+        } else if (ppm >= CO2_CAUTION_PPM) {
+            add(
+                    Level.CAUTION,
+                    Reason.about("co2-caution", chamber.id(), "OSHA-1910", highest, opening));
+        }
+    }
+
+    private void chamber(ChamberPlan chamber) {
+        Course course = outcome.horizonCourse(chamber.id());
+        for (CourseEvent.Kind kind : CourseEvent.Kind.values()) {
+            double hours =
+                    course.events().stream()
+                                    .filter(event -> event.kind() == kind)
+                                    .mapToDouble(event -> event.untilS() - event.fromS())
+                                    .sum()
+                            / Timeline.HOUR_S;
+            if (hours > 0) {
+                event(chamber, kind, hours, course);
+            }
+        }
+        double pressurePa =
+                StandardAtmosphere.pressurePa(outcome.model().plan().site().elevationM());
+        for (Cooler cooler : chamber.coolers()) {
+            CoolerCautions.of(cooler, chamber.setting(), chamber.id(), pressurePa)
+                    .forEach(caution -> add(caution.level(), caution.reason()));
+        }
+        for (Reason reason : course.reasons()) {
+            add(
+                    Level.NOTE,
+                    new Reason(
+                            reason.code(),
+                            List.of(chamber.id()),
+                            reason.arguments(),
+                            reason.sourceId()));
+        }
+    }
+
+    private void event(ChamberPlan chamber, CourseEvent.Kind kind, double hours, Course course) {
+        Argument told = Argument.of(hours, "h");
+        switch (kind) {
+            case WET_LOT -> wetLots(chamber, course);
+            case WET_FACES ->
+                    add(Level.NOTE, Reason.about("wet-faces", chamber.id(), PRACTICE, told));
+            case TRIPPED -> add(Level.CAUTION, Reason.about("trips", chamber.id(), PRACTICE, told));
+            case ICES_UP ->
+                    add(Level.CAUTION, Reason.about("coil-iced", chamber.id(), PRACTICE, told));
+            case ENERGY_USED_UP ->
+                    add(Level.CAUTION, Reason.about("energy-used-up", chamber.id(), "own", told));
+            case OUTAGE -> add(Level.NOTE, Reason.about("outage", chamber.id(), "own", told));
+        }
+    }
+
+    private void wetLots(ChamberPlan chamber, Course course) {
+        for (LotSheet sheet : outcome.model().sheetsIn(chamber.id())) {
+            double hours =
+                    course.events().stream()
+                                    .filter(e -> e.kind() == CourseEvent.Kind.WET_LOT)
+                                    .filter(e -> e.subject().equals(sheet.id()))
+                                    .mapToDouble(e -> e.untilS() - e.fromS())
+                                    .sum()
+                            / Timeline.HOUR_S;
+            if (hours >= 1) {
+                add(
+                        Level.NOTE,
+                        Reason.about("sweats", sheet.id(), PRACTICE, Argument.of(hours, "h")));
+            }
+        }
+    }
+
+    private void lot(LotSheet sheet) {
+        if (outcome.has(sheet.id())) {
+            for (Reason reason : outcome.fates(sheet.id()).basis().reasons()) {
+                add(level(reason.code()), reason);
+            }
+        }
+        for (Reason reason : sheet.restsOn()) {
+            if (reason.code().endsWith("-class") || reason.code().endsWith("-broad")) {
+                add(
+                        Level.NOTE,
+                        new Reason(
+                                reason.code(),
+                                List.of(sheet.id()),
+                                reason.arguments(),
+                                reason.sourceId()));
+            }
+        }
+    }
+
+    private static Level level(String code) {
+        return switch (code) {
+            case "freezes", "heat-killed" -> Level.DANGER;
+            case "cure-first", "too-damp", "wet-long", "cold-sweetening", "ethylene-harms" ->
+                    Level.CAUTION;
+            default -> Level.NOTE;
+        };
+    }
+
+    private void weather(StorePlan plan) {
+        if (plan.weatherSource() instanceof WeatherSource.Csv csv) {
+            for (FilledGap gap : csv.filled()) {
+                add(
+                        Level.NOTE,
+                        Reason.about(
+                                "weather-gap-filled",
+                                csv.file(),
+                                "own",
+                                Argument.text(gap.column()),
+                                Argument.text(gap.from().toString()),
+                                Argument.text(gap.to().toString())));
+            }
+        }
+    }
+
+    private void defaults(StorePlan plan) {
+        for (Assumed assumed : plan.assumed()) {
+            add(
+                    Level.NOTE,
+                    Reason.about(
+                            "default-taken",
+                            assumed.path(),
+                            sourceOf(assumed.mark()),
+                            Argument.text((assumed.value() + " " + assumed.unit()).strip()),
+                            Argument.text(assumed.mark())));
+        }
+    }
+
+    private static String sourceOf(String mark) {
+        return mark.startsWith("common practice")
+                ? PRACTICE
+                : mark.startsWith("assumption") ? OWN_RULE : mark;
+    }
+}

@@ -1,0 +1,115 @@
+package org.wardon.advice.forecast;
+
+import java.util.Arrays;
+import java.util.OptionalDouble;
+import java.util.function.IntToDoubleFunction;
+import java.util.stream.IntStream;
+import org.wardon.files.forecast.ChamberForecast;
+import org.wardon.files.forecast.ChamberForecast.AirC;
+import org.wardon.files.forecast.ChamberForecast.LoadKWh;
+import org.wardon.files.forecast.ChamberForecast.MeanMax;
+import org.wardon.files.forecast.MeanMinMax;
+import org.wardon.heat.Course;
+import org.wardon.heat.HeatLedger;
+import org.wardon.heat.Hours;
+import org.wardon.plan.ChamberPlan;
+
+/** Figures of one chamber over the horizon. */
+final class ChamberFigures {
+    private static final double J_PER_KWH = 3.6e6;
+    private static final double AIR_O2_PCT = 20.9;
+
+    private final ChamberPlan chamber;
+    private final StoreOutcome outcome;
+    private final Course course;
+    private final Course horizon;
+
+    ChamberFigures(ChamberPlan chamber, StoreOutcome outcome) {
+        this.chamber = chamber;
+        this.outcome = outcome;
+        this.course = outcome.course(chamber.id());
+        this.horizon = outcome.horizonCourse(chamber.id());
+    }
+
+    ChamberForecast forecast(Holding holding, Course ideal, OptionalDouble intake) {
+        Hours hours = horizon.hours();
+        double energyKWh = horizon.heat().electricity() / J_PER_KWH;
+        double co2 = horizon.counts().co2HighestPpm();
+        return new ChamberForecast(
+                chamber.id(),
+                holding.holds(),
+                air(hours),
+                meanMinMax(hours, i -> 100 * hours.humidityFraction(i)),
+                holding.hoursOutside(),
+                holding.hoursDisturbed(),
+                holding.pullDownHours(),
+                max(ideal.hours(), ideal.hours()::coolingW),
+                max(hours, hours::coolingW),
+                intake,
+                new MeanMax(mean(hours, hours::respirationW), max(hours, hours::respirationW)),
+                AIR_O2_PCT - co2 / 1e4,
+                load(horizon.heat()),
+                horizon.heat().removed() / J_PER_KWH,
+                energyKWh,
+                energyKWh * outcome.model().plan().prices().energyPerKWh(),
+                0,
+                co2,
+                ethylenePpm(),
+                Math.max(horizon.balanceErrorPct(), course.balanceErrorPct()));
+    }
+
+    private double ethylenePpm() {
+        var level = outcome.ethylene(chamber.id());
+        Hours hours = horizon.hours();
+        return max(hours, i -> level.ppmAt(hours.atS(i)));
+    }
+
+    private static LoadKWh load(HeatLedger heat) {
+        return new LoadKWh(
+                heat.walls() / J_PER_KWH,
+                heat.door() / J_PER_KWH,
+                heat.leakage() / J_PER_KWH,
+                heat.freshAir() / J_PER_KWH,
+                heat.fieldHeat() / J_PER_KWH,
+                heat.respiration() / J_PER_KWH,
+                heat.fans() / J_PER_KWH,
+                heat.lights() / J_PER_KWH,
+                heat.people() / J_PER_KWH,
+                heat.packages() / J_PER_KWH,
+                heat.defrost() / J_PER_KWH,
+                heat.humidifier() / J_PER_KWH,
+                heat.heater() / J_PER_KWH,
+                heat.pumps() / J_PER_KWH,
+                heat.air() / J_PER_KWH);
+    }
+
+    private static AirC air(Hours hours) {
+        double[] sorted =
+                IntStream.range(0, hours.size()).mapToDouble(hours::airC).sorted().toArray();
+        double place = 0.95 * (sorted.length - 1);
+        int below = (int) place;
+        int above = Math.min(below + 1, sorted.length - 1);
+        double p95 = sorted[below] + (place - below) * (sorted[above] - sorted[below]);
+        return new AirC(
+                Arrays.stream(sorted).average().orElseThrow(),
+                min(hours, hours::airLowestC),
+                max(hours, hours::airHighestC),
+                p95);
+    }
+
+    private static MeanMinMax meanMinMax(Hours hours, IntToDoubleFunction value) {
+        return new MeanMinMax(mean(hours, value), min(hours, value), max(hours, value));
+    }
+
+    private static double mean(Hours hours, IntToDoubleFunction value) {
+        return IntStream.range(0, hours.size()).mapToDouble(value).average().orElseThrow();
+    }
+
+    private static double min(Hours hours, IntToDoubleFunction value) {
+        return IntStream.range(0, hours.size()).mapToDouble(value).min().orElseThrow();
+    }
+
+    private static double max(Hours hours, IntToDoubleFunction value) {
+        return IntStream.range(0, hours.size()).mapToDouble(value).max().orElseThrow();
+    }
+}

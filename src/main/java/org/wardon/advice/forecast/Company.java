@@ -1,0 +1,108 @@
+package org.wardon.advice.forecast;
+
+import java.util.ArrayList;
+import java.util.List;
+import java.util.OptionalDouble;
+import org.wardon.advice.wording.Words;
+import org.wardon.air.Timeline;
+import org.wardon.files.forecast.Because;
+import org.wardon.files.forecast.Forecast;
+import org.wardon.keeping.ChamberEthylene;
+import org.wardon.keeping.Draws;
+import org.wardon.lots.LotHistory;
+import org.wardon.plan.ChamberPlan;
+import org.wardon.produce.Reason;
+import org.wardon.sharing.ChamberSharing;
+import org.wardon.sharing.ChamberVerdict;
+import org.wardon.sharing.PairVerdict;
+import org.wardon.sharing.Sharing;
+import org.wardon.sharing.Together;
+import org.wardon.sharing.Verdict;
+import org.wardon.sharing.Wish;
+
+/**
+ * Who stands with whom in the chambers of a plan, and whether they may: the verdict by what the
+ * chamber's own air does to them, and of the pairs that no setting suits the reason why.
+ */
+final class Company {
+    private final StoreOutcome outcome;
+    private final Words words;
+
+    Company(StoreOutcome outcome, Words words) {
+        this.outcome = outcome;
+        this.words = words;
+    }
+
+    List<Forecast.Sharing> verdicts() {
+        List<Forecast.Sharing> verdicts = new ArrayList<>();
+        for (ChamberPlan chamber : outcome.model().plan().chambers()) {
+            List<LotSheet> lots =
+                    outcome.model().sheetsIn(chamber.id()).stream()
+                            .filter(sheet -> outcome.has(sheet.id()))
+                            .toList();
+            if (!lots.isEmpty()) {
+                verdicts.add(verdict(chamber, lots));
+            }
+        }
+        return verdicts;
+    }
+
+    private Forecast.Sharing verdict(ChamberPlan chamber, List<LotSheet> lots) {
+        ChamberEthylene level = outcome.ethylene(chamber.id());
+        ChamberVerdict found =
+                ChamberSharing.of(lots.stream().map(sheet -> together(sheet, level)).toList());
+        List<Because> reasons = new ArrayList<>();
+        apart(lots).forEach(reason -> reasons.add(because(reason)));
+        found.reasons().forEach(reason -> reasons.add(because(reason)));
+        return new Forecast.Sharing(chamber.id(), found.verdict().word(), reasons);
+    }
+
+    /** Why pairs that no setting suits do not go together. */
+    private List<Reason> apart(List<LotSheet> lots) {
+        List<Reason> reasons = new ArrayList<>();
+        List<Wish> wishes = lots.stream().map(Company::wish).toList();
+        var draws = Draws.seeded(outcome.model().plan().seed(), StoreRun.DRAWS);
+        for (PairVerdict pair : Sharing.of(wishes, draws).pairs()) {
+            if (pair.verdict() == Verdict.NO) {
+                pair.reasons().stream().limit(1).forEach(reasons::add);
+            }
+        }
+        return reasons;
+    }
+
+    private Together together(LotSheet sheet, ChamberEthylene level) {
+        LotHistory history = outcome.history(sheet.id());
+        double untilS = Math.min(sheet.clock().leavesS(), outcome.horizonS());
+        double sumC = 0;
+        double sumPpm = 0;
+        int n = 0;
+        for (int i = 0; i < history.size() && (n == 0 || history.timeS(i) <= untilS); i++) {
+            sumC += history.meanC(i);
+            sumPpm += level.ppmAt(history.timeS(i));
+            n++;
+        }
+        return new Together(
+                wish(sheet),
+                sheet.model(),
+                outcome.fates(sheet.id()).sold(),
+                sheet.plan().massKg(),
+                sheet.clock().hereFromS(),
+                sheet.clock().leavesS(),
+                sumC / n,
+                sumPpm / n);
+    }
+
+    private static Wish wish(LotSheet sheet) {
+        double days = (sheet.clock().leavesS() - sheet.clock().hereFromS()) / Timeline.DAY_S;
+        return new Wish(
+                sheet.kept(),
+                Math.min(730, Math.max(0.1, days)),
+                sheet.marketDays(),
+                OptionalDouble.empty());
+    }
+
+    private Because because(Reason reason) {
+        return new Because(
+                reason.code(), reason.subjects(), words.sentence(reason), reason.sourceId());
+    }
+}

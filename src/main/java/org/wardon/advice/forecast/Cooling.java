@@ -1,0 +1,75 @@
+package org.wardon.advice.forecast;
+
+import java.util.OptionalDouble;
+import org.wardon.air.Timeline;
+import org.wardon.heat.Course;
+import org.wardon.heat.Hours;
+import org.wardon.lots.LotHistory;
+import org.wardon.plan.ChamberPlan;
+
+/**
+ * How a lot cools in its chamber.
+ *
+ * <p>The cooling fraction is (mean - mark) / (mean at arrival - mark). The mark is the setting; in
+ * a chamber that cannot reach it, the chamber's own mean air of the last 24 hours.
+ *
+ * @param startC mean temperature at the start, °C
+ * @param markC temperature it is to come to, °C
+ * @param halfHours hours to half cooling; empty where it does not apply or is not reached
+ * @param sevenEighthsHours hours to seven-eighths cooling; empty likewise
+ */
+record Cooling(
+        double startC, double markC, OptionalDouble halfHours, OptionalDouble sevenEighthsHours) {
+    /** Below this difference cooling times say nothing, K. */
+    private static final double LEAST_K = 2;
+
+    static Cooling of(LotSheet sheet, LotHistory history, ChamberPlan chamber, Course course) {
+        double start = history.meanC(0);
+        double mark = markC(chamber, course);
+        if (start - mark < LEAST_K) {
+            return new Cooling(start, mark, OptionalDouble.empty(), OptionalDouble.empty());
+        }
+        return new Cooling(
+                start,
+                mark,
+                hoursTo(history, mark + (start - mark) / 2),
+                hoursTo(history, mark + (start - mark) / 8));
+    }
+
+    /** Whether the lot had anything to cool. */
+    boolean wasWarm() {
+        return startC - markC >= LEAST_K;
+    }
+
+    private static double markC(ChamberPlan chamber, Course course) {
+        double setting = chamber.setting().temperatureC();
+        double own = lastDayC(course.hours());
+        boolean reaches =
+                !chamber.coolers().isEmpty() && own <= setting + chamber.setting().bandK() + 0.5;
+        return reaches ? setting : own;
+    }
+
+    private static double lastDayC(Hours hours) {
+        double end = hours.atS(hours.size() - 1);
+        double sum = 0;
+        int n = 0;
+        for (int i = hours.size() - 1; i >= 0 && hours.atS(i) > end - Timeline.DAY_S; i--) {
+            sum += hours.airC(i);
+            n++;
+        }
+        return sum / n;
+    }
+
+    private static OptionalDouble hoursTo(LotHistory history, double targetC) {
+        for (int i = 1; i < history.size(); i++) {
+            if (history.meanC(i) <= targetC) {
+                double fall = history.meanC(i - 1) - history.meanC(i);
+                double share = fall > 0 ? (history.meanC(i - 1) - targetC) / fall : 1;
+                double at =
+                        history.timeS(i - 1) + share * (history.timeS(i) - history.timeS(i - 1));
+                return OptionalDouble.of((at - history.timeS(0)) / Timeline.HOUR_S);
+            }
+        }
+        return OptionalDouble.empty();
+    }
+}

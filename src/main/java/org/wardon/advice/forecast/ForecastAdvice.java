@@ -1,0 +1,117 @@
+package org.wardon.advice.forecast;
+
+import java.util.ArrayList;
+import java.util.Comparator;
+import java.util.LinkedHashMap;
+import java.util.List;
+import java.util.Locale;
+import java.util.Map;
+import java.util.stream.Stream;
+import org.wardon.advice.wording.Words;
+import org.wardon.air.Weather;
+import org.wardon.errors.Progress;
+import org.wardon.files.forecast.ChamberForecast;
+import org.wardon.files.forecast.Forecast;
+import org.wardon.files.forecast.LotForecast;
+import org.wardon.heat.Course;
+import org.wardon.plan.ChamberPlan;
+import org.wardon.plan.StorePlan;
+import org.wardon.produce.Caution;
+import org.wardon.produce.Reason;
+import org.wardon.reference.ReferenceBook;
+
+/** Answers the main question: what to do with this load in this store in this weather. */
+public final class ForecastAdvice {
+    private final ReferenceBook book;
+    private final Words words;
+
+    /**
+     * Prepares for questions.
+     *
+     * @param book the reference book
+     * @param words words for the texts of the forecast
+     */
+    public ForecastAdvice(ReferenceBook book, Words words) {
+        this.book = book;
+        this.words = words;
+    }
+
+    /**
+     * Advises on a plan.
+     *
+     * @param asked the plan
+     * @param progress hears how far the work has come
+     * @return the advice
+     * @throws org.wardon.errors.RunStopped where a chamber meets a state that cannot be
+     */
+    public StoreAdvice advise(StorePlan asked, Progress progress) {
+        Weather weather =
+                PlanWeather.prolonged(
+                        asked.weatherSource().weather(),
+                        asked.durationS(),
+                        StoreRun.MOST_BEYOND_DAYS);
+        StoreModel open = model(asked, weather);
+        SimplePlacing.Placed placed = new SimplePlacing(open).place();
+        StoreModel model = placed.told().isEmpty() ? open : model(placed.plan(), weather);
+        StoreOutcome outcome = new StoreRun(model).run(progress);
+        return together(outcome, placed.told());
+    }
+
+    private StoreModel model(StorePlan plan, Weather weather) {
+        return new StoreModel(plan, weather, new LotSheets(plan, weather, book).all());
+    }
+
+    private StoreAdvice together(StoreOutcome outcome, List<Caution> placed) {
+        Map<String, ChamberForecast> chambers = new LinkedHashMap<>();
+        Map<String, List<Reason>> whyNot = new LinkedHashMap<>();
+        for (ChamberPlan chamber : outcome.model().plan().chambers()) {
+            Holding holding = Holding.of(chamber, outcome);
+            Course ideal =
+                    outcome.model().ideal(chamber, outcome.horizonS(), outcome.horizonCourses());
+            ChamberFigures figures = new ChamberFigures(chamber, outcome);
+            chambers.put(
+                    chamber.id(),
+                    figures.forecast(holding, ideal, new Intake(outcome, chamber).kgPerDay()));
+            whyNot.put(chamber.id(), holding.reasons());
+        }
+        List<LotForecast> lots = lots(outcome);
+        double kept = lots.stream().mapToDouble(LotForecast::valueKept).sum();
+        double energy = chambers.values().stream().mapToDouble(ChamberForecast::energyCost).sum();
+        Forecast forecast =
+                new Forecast(
+                        Forecast.VERSION,
+                        List.copyOf(chambers.values()),
+                        new Forecast.Value(kept, energy, kept - energy),
+                        lots,
+                        new Company(outcome, words).verdicts(),
+                        warnings(outcome, placed),
+                        new Actions(outcome, chambers, words).all());
+        return new StoreAdvice(outcome, forecast, whyNot);
+    }
+
+    private static List<LotForecast> lots(StoreOutcome outcome) {
+        List<LotForecast> lots = new ArrayList<>();
+        for (LotSheet sheet : outcome.model().sheets()) {
+            if (outcome.has(sheet.id())) {
+                ChamberPlan chamber =
+                        outcome.model().plan().getChamber(sheet.plan().chamber().orElseThrow());
+                lots.add(new LotFigures(sheet, chamber, outcome).forecast());
+            }
+        }
+        return lots;
+    }
+
+    private List<Forecast.Warning> warnings(StoreOutcome outcome, List<Caution> placed) {
+        return Stream.concat(placed.stream(), new Cautions(outcome).all().stream())
+                .sorted(Comparator.comparing(Caution::level).reversed())
+                .map(
+                        caution ->
+                                new Forecast.Warning(
+                                        caution.reason().code(),
+                                        caution.level().name().toLowerCase(Locale.ROOT),
+                                        String.join(",", caution.reason().subjects()),
+                                        words.sentence(caution.reason()),
+                                        caution.reason().sourceId()))
+                .toList();
+    }
+}

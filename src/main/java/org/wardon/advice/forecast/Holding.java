@@ -1,0 +1,294 @@
+package org.wardon.advice.forecast;
+
+import java.util.ArrayList;
+import java.util.List;
+import java.util.OptionalDouble;
+import java.util.function.DoublePredicate;
+import org.wardon.air.Timeline;
+import org.wardon.cooling.Outage;
+import org.wardon.heat.Course;
+import org.wardon.heat.Hours;
+import org.wardon.lots.LotHistory;
+import org.wardon.plan.ChamberPlan;
+import org.wardon.produce.Reason;
+import org.wardon.produce.Reason.Argument;
+
+/**
+ * Whether a chamber holds its setting. Thresholds are our own rules and are told with the verdict:
+ * after pull-down the hourly mean stays inside setting ± (band + 0.5 K) in 95 of 100 hours outside
+ * outages and disturbed hours (without a thermostat: at or below setting + band); every lot reaches
+ * seven-eighths cooling within max(24 h, 4.5 half-cooling times of its package); no lot already
+ * cold rises more than 2 K through an arrival; no lot leaves its safe range.
+ *
+ * @param holds the verdict
+ * @param hoursOutside hours outside the band after pull-down, outages and disturbed hours left out
+ * @param hoursDisturbed hours after later arrivals
+ * @param pullDownHours hours from the first arrival until the air has been inside for three hours
+ * @param reasons why not; empty where it holds
+ */
+record Holding(
+        boolean holds,
+        double hoursOutside,
+        double hoursDisturbed,
+        OptionalDouble pullDownHours,
+        List<Reason> reasons) {
+    static final double AIR_ALLOWANCE_K = 0.5;
+    static final double SHARE_INSIDE = 0.95;
+    static final double DISTURBED_HOURS = 12;
+    static final double PULLED_DOWN_HOURS = 3;
+    static final double SEVEN_EIGHTHS_LEAST_H = 24;
+    static final double SEVEN_EIGHTHS_PER_HALF = 4.5;
+    static final double RISE_MOST_K = 2;
+    static final double RISK_MOST = 0.10;
+    static final double FREEZING_MARGIN_K = 0.5;
+    static final double SETTLE_HOURS = 6;
+
+    private static final String RULE = "assumption";
+
+    Holding {
+        reasons = List.copyOf(reasons);
+    }
+
+    /** Judges one chamber of an outcome. */
+    static Holding of(ChamberPlan chamber, StoreOutcome outcome) {
+        return new Judge(chamber, outcome).holding();
+    }
+
+    private static final class Judge {
+        private final ChamberPlan chamber;
+        private final StoreOutcome outcome;
+        private final Course course;
+        private final Hours hours;
+        private final List<LotSheet> lots;
+        private final List<Reason> reasons = new ArrayList<>();
+
+        Judge(ChamberPlan chamber, StoreOutcome outcome) {
+            this.chamber = chamber;
+            this.outcome = outcome;
+            course = outcome.course(chamber.id());
+            hours = course.hours();
+            lots =
+                    outcome.model().sheetsIn(chamber.id()).stream()
+                            .filter(sheet -> outcome.has(sheet.id()))
+                            .toList();
+        }
+
+        Holding holding() {
+            double firstS = lots.stream().mapToDouble(s -> s.clock().hereFromS()).min().orElse(0);
+            OptionalDouble pulledDownS = pulledDownS(firstS);
+            double outside = 0;
+            double disturbed = 0;
+            double counted = 0;
+            for (int i = 0; i < hours.size() && hours.atS(i) <= outcome.horizonS(); i++) {
+                double at = hours.atS(i);
+                double span = i == 0 ? at : at - hours.atS(i - 1);
+                if (pulledDownS.isEmpty() || at <= pulledDownS.getAsDouble() || inOutage(at)) {
+                    continue;
+                }
+                if (disturbed(at, firstS)) {
+                    disturbed += span / Timeline.HOUR_S;
+                } else {
+                    counted += span / Timeline.HOUR_S;
+                    outside += inside(hours.airC(i)) ? 0 : span / Timeline.HOUR_S;
+                }
+            }
+            judgeAir(pulledDownS, outside, counted);
+            lots.forEach(this::judgeLot);
+            OptionalDouble pull =
+                    pulledDownS.isPresent()
+                            ? OptionalDouble.of(
+                                    (pulledDownS.getAsDouble() - firstS) / Timeline.HOUR_S)
+                            : OptionalDouble.empty();
+            return new Holding(reasons.isEmpty(), outside, disturbed, pull, reasons);
+        }
+
+        private boolean inside(double airC) {
+            double set = chamber.setting().temperatureC();
+            double band = chamber.setting().bandK();
+            return chamber.coolers().isEmpty()
+                    ? airC <= set + band
+                    : Math.abs(airC - set) <= band + AIR_ALLOWANCE_K;
+        }
+
+        /** When the air has been inside for three hours running: the start of those hours. */
+        private OptionalDouble pulledDownS(double firstS) {
+            double since = Double.NaN;
+            for (int i = 0; i < hours.size() && hours.atS(i) <= outcome.horizonS(); i++) {
+                if (hours.atS(i) <= firstS || !inside(hours.airC(i))) {
+                    since = Double.NaN;
+                    continue;
+                }
+                double start = Math.max(firstS, i == 0 ? 0 : hours.atS(i - 1));
+                since = Double.isNaN(since) ? start : since;
+                if (hours.atS(i) - since >= PULLED_DOWN_HOURS * Timeline.HOUR_S - 1) {
+                    return OptionalDouble.of(since);
+                }
+            }
+            return OptionalDouble.empty();
+        }
+
+        private boolean inOutage(double atS) {
+            for (Outage outage : outcome.model().outages(chamber)) {
+                if (atS > outage.startS() && atS - Timeline.HOUR_S < outage.endS()) {
+                    return true;
+                }
+            }
+            return false;
+        }
+
+        private boolean disturbed(double atS, double firstS) {
+            return lots.stream()
+                    .mapToDouble(sheet -> sheet.clock().arrivesS())
+                    .anyMatch(
+                            arrives ->
+                                    arrives > firstS
+                                            && atS > arrives
+                                            && atS <= arrives + DISTURBED_HOURS * Timeline.HOUR_S);
+        }
+
+        private void judgeAir(OptionalDouble pulledDownS, double outside, double counted) {
+            double set = chamber.setting().temperatureC();
+            if (pulledDownS.isEmpty()) {
+                say("never-pulled-down", Argument.of(set, "C"), Argument.of(meanAirC(), "C"));
+            } else if (counted > 0 && outside > (1 - SHARE_INSIDE) * counted) {
+                say(
+                        "air-outside-band",
+                        Argument.of(outside, "h"),
+                        Argument.of(counted, "h"),
+                        Argument.of(set, "C"));
+            }
+        }
+
+        private double meanAirC() {
+            double sum = 0;
+            for (int i = 0; i < hours.size(); i++) {
+                sum += hours.airC(i);
+            }
+            return sum / hours.size();
+        }
+
+        private void judgeLot(LotSheet sheet) {
+            LotHistory history = outcome.history(sheet.id());
+            Cooling cooling = Cooling.of(sheet, history, chamber, course);
+            judgeCooling(sheet, history, cooling);
+            judgeRise(sheet, history, cooling);
+            judgeSafety(sheet, history, cooling);
+        }
+
+        private void judgeCooling(LotSheet sheet, LotHistory history, Cooling cooling) {
+            double allowed =
+                    Math.max(
+                            SEVEN_EIGHTHS_LEAST_H,
+                            SEVEN_EIGHTHS_PER_HALF * sheet.kind().halfCoolingHours().middle());
+            double here = Math.min(sheet.clock().leavesS(), outcome.durationS()) - history.timeS(0);
+            if (!cooling.wasWarm() || here < allowed * Timeline.HOUR_S) {
+                return;
+            }
+            OptionalDouble took = cooling.sevenEighthsHours();
+            if (took.isEmpty() || took.getAsDouble() > allowed) {
+                sayOf(
+                        "cools-too-slowly",
+                        sheet,
+                        Argument.of(took.orElse(here / Timeline.HOUR_S), "h"),
+                        Argument.of(allowed, "h"));
+            }
+        }
+
+        /** Rise of a cold lot over the twelve hours after another lot came in. */
+        private void judgeRise(LotSheet sheet, LotHistory history, Cooling cooling) {
+            for (LotSheet other : lots) {
+                double arrives = other.clock().arrivesS();
+                double coldAt =
+                        history.timeS(0) + cooling.sevenEighthsHours().orElse(0) * Timeline.HOUR_S;
+                if (other.id().equals(sheet.id())
+                        || arrives <= coldAt
+                        || arrives >= sheet.clock().leavesS()
+                        || (cooling.wasWarm() && cooling.sevenEighthsHours().isEmpty())) {
+                    continue;
+                }
+                double until =
+                        Math.min(
+                                sheet.clock().leavesS(),
+                                arrives + DISTURBED_HOURS * Timeline.HOUR_S);
+                double rise =
+                        extreme(history, arrives, until, true)
+                                - extreme(
+                                        history,
+                                        arrives - Timeline.HOUR_S,
+                                        arrives + Timeline.HOUR_S,
+                                        false);
+                if (rise > RISE_MOST_K) {
+                    sayOf(
+                            "warmed-by-arrival",
+                            sheet,
+                            Argument.of(rise, "K"),
+                            Argument.text(other.id()));
+                }
+            }
+        }
+
+        private static double extreme(
+                LotHistory history, double fromS, double toS, boolean highest) {
+            double found = Double.NaN;
+            for (int i = 0; i < history.size(); i++) {
+                if (history.timeS(i) >= fromS && history.timeS(i) <= toS) {
+                    double t = history.meanC(i);
+                    found =
+                            Double.isNaN(found)
+                                    ? t
+                                    : highest ? Math.max(found, t) : Math.min(found, t);
+                }
+            }
+            return found;
+        }
+
+        private void judgeSafety(LotSheet sheet, LotHistory history, Cooling cooling) {
+            double freezing = sheet.model().freezingC() + FREEZING_MARGIN_K;
+            if (anyWithin(sheet, history, 0, c -> c < freezing, false)) {
+                sayOf("near-freezing", sheet, Argument.of(sheet.model().freezingC(), "C"));
+            }
+            double risk = LotRisk.chilling(outcome.fates(sheet.id()), sheet.soldS());
+            if (risk >= RISK_MOST) {
+                sayOf("chilling-in-stay", sheet, Argument.of(100 * risk, "pct"));
+            }
+            double most =
+                    chamber.setting().temperatureC() + chamber.setting().bandK() + RISE_MOST_K;
+            double settledS =
+                    history.timeS(0)
+                            + (cooling.sevenEighthsHours().orElse(0) + SETTLE_HOURS)
+                                    * Timeline.HOUR_S;
+            boolean cooled = !cooling.wasWarm() || cooling.sevenEighthsHours().isPresent();
+            if (cooled && anyWithin(sheet, history, settledS, c -> c > most, true)) {
+                sayOf("lot-too-warm", sheet, Argument.of(most, "C"));
+            }
+        }
+
+        private boolean anyWithin(
+                LotSheet sheet,
+                LotHistory history,
+                double fromS,
+                DoublePredicate wrong,
+                boolean mean) {
+            for (int i = 0; i < history.size(); i++) {
+                double at = history.timeS(i);
+                boolean here =
+                        at >= fromS && at <= Math.min(sheet.clock().leavesS(), outcome.horizonS());
+                if (here
+                        && !inOutage(at)
+                        && wrong.test(mean ? history.meanC(i) : history.coldestC(i))) {
+                    return true;
+                }
+            }
+            return false;
+        }
+
+        private void say(String code, Argument... arguments) {
+            reasons.add(Reason.about(code, chamber.id(), RULE, arguments));
+        }
+
+        private void sayOf(String code, LotSheet sheet, Argument... arguments) {
+            reasons.add(
+                    new Reason(code, List.of(sheet.id(), chamber.id()), List.of(arguments), RULE));
+        }
+    }
+}

@@ -1,0 +1,59 @@
+package org.wardon.advice.forecast;
+
+import java.nio.file.Path;
+import java.util.List;
+import java.util.Map;
+import org.wardon.files.forecast.Forecast;
+import org.wardon.plan.StorePlan;
+import org.wardon.produce.Reason;
+
+/** The advice on a store plan: the forecast, why chambers hold or do not, the series. */
+public final class StoreAdvice {
+    private final StoreOutcome outcome;
+    private final Forecast forecast;
+    private final Map<String, List<Reason>> whyNotHeld;
+
+    StoreAdvice(StoreOutcome outcome, Forecast forecast, Map<String, List<Reason>> whyNotHeld) {
+        this.outcome = outcome;
+        this.forecast = forecast;
+        this.whyNotHeld = Map.copyOf(whyNotHeld);
+    }
+
+    /**
+     * Returns the plan as it was run, every lot placed.
+     *
+     * @return the plan
+     */
+    public StorePlan plan() {
+        return outcome.model().plan();
+    }
+
+    /**
+     * Returns the forecast.
+     *
+     * @return in its fixed names
+     */
+    public Forecast forecast() {
+        return forecast;
+    }
+
+    /**
+     * Returns why a chamber does not hold.
+     *
+     * @param chamberId its id
+     * @return reasons, empty where it holds
+     */
+    public List<Reason> whyNotHeld(String chamberId) {
+        return whyNotHeld.getOrDefault(chamberId, List.of());
+    }
+
+    /**
+     * Writes the hourly series of chambers and lots.
+     *
+     * @param folder where to; it is made
+     * @throws org.wardon.files.CannotWrite where a file cannot be written
+     */
+    public void writeSeries(Path folder) {
+        new StoreSeries(outcome).write(folder);
+    }
+}

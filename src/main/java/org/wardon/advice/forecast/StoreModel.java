@@ -1,0 +1,276 @@
+package org.wardon.advice.forecast;
+
+import java.util.HashMap;
+import java.util.LinkedHashMap;
+import java.util.List;
+import java.util.Map;
+import java.util.Optional;
+import java.util.OptionalDouble;
+import org.wardon.air.Timeline;
+import org.wardon.air.Weather;
+import org.wardon.cooling.Outage;
+import org.wardon.enclosure.Beyond;
+import org.wardon.enclosure.Enclosure;
+import org.wardon.errors.Progress;
+import org.wardon.heat.AirSeries;
+import org.wardon.heat.ChamberRun;
+import org.wardon.heat.ControlMode;
+import org.wardon.heat.Course;
+import org.wardon.heat.DoorMode;
+import org.wardon.heat.Factors;
+import org.wardon.heat.HeatModel;
+import org.wardon.heat.LotCourse;
+import org.wardon.heat.Start;
+import org.wardon.heat.Stay;
+import org.wardon.keeping.Draw;
+import org.wardon.plan.ChamberPlan;
+import org.wardon.plan.Corrections;
+import org.wardon.plan.StorePlan;
+import org.wardon.plan.WithoutChamber;
+
+/**
+ * A store plan ready for the heat model: each chamber as a run, the lots of a draw in it, the air
+ * of neighbours handed on until it agrees.
+ */
+final class StoreModel {
+    /** Neighbours have agreed when no hour differs by more, K. */
+    private static final double AGREED_K = 0.1;
+
+    private static final int MOST_PASSES = 6;
+
+    private final StorePlan plan;
+    private final Weather weather;
+    private final List<LotSheet> sheets;
+    private final Timeline timeline;
+
+    StoreModel(StorePlan plan, Weather weather, List<LotSheet> sheets) {
+        this.plan = plan;
+        this.weather = weather;
+        this.sheets = List.copyOf(sheets);
+        this.timeline = plan.timeline();
+    }
+
+    StorePlan plan() {
+        return plan;
+    }
+
+    Weather weather() {
+        return weather;
+    }
+
+    List<LotSheet> sheets() {
+        return sheets;
+    }
+
+    List<LotSheet> sheetsIn(String chamberId) {
+        return sheets.stream()
+                .filter(sheet -> sheet.plan().chamber().equals(Optional.of(chamberId)))
+                .toList();
+    }
+
+    /**
+     * Runs all chambers in full. The air of neighbours is handed on until it agrees in runs with
+     * averaged doors, which have no cycles of their own to disagree about.
+     */
+    Map<String, Course> plain(double durationS, Progress progress) {
+        Map<String, AirSeries> air = startAir();
+        boolean coupled = plan.chambers().stream().anyMatch(StoreModel::hasNeighbour);
+        for (int pass = 0; coupled && pass < MOST_PASSES; pass++) {
+            Map<String, AirSeries> next =
+                    airOf(
+                            pass(
+                                    Draw.MEDIAN,
+                                    durationS,
+                                    air,
+                                    DoorMode.AVERAGED,
+                                    ControlMode.MODULATING));
+            boolean agreed = apartK(air, next, durationS) < AGREED_K;
+            air = next;
+            if (agreed) {
+                break;
+            }
+        }
+        progress.at("forecast", 0.5);
+        Map<String, Course> courses =
+                pass(Draw.MEDIAN, durationS, air, DoorMode.PULSES, ControlMode.AS_BUILT);
+        progress.at("forecast", 1);
+        return courses;
+    }
+
+    /**
+     * Runs all chambers in one draw with averaged doors, in the neighbours' air of the plain run.
+     */
+    Map<String, Course> drawn(Draw draw, double durationS, Map<String, Course> plain) {
+        return pass(draw, durationS, airOf(plain), DoorMode.AVERAGED, ControlMode.MODULATING);
+    }
+
+    /** Runs all chambers with averaged doors, each neighbour taken to stand at its setting. */
+    Map<String, Course> sketch(double durationS) {
+        return pass(Draw.MEDIAN, durationS, startAir(), DoorMode.AVERAGED, ControlMode.MODULATING);
+    }
+
+    /** Runs one chamber with the air held ideally at its setting: what it takes is the load. */
+    Course ideal(ChamberPlan chamber, double durationS, Map<String, Course> plain) {
+        ChamberRun run =
+                run(chamber, Draw.MEDIAN, durationS, airOf(plain))
+                        .withDoorMode(DoorMode.AVERAGED)
+                        .withControlMode(ControlMode.IDEAL);
+        return HeatModel.run(run, Progress.SILENT);
+    }
+
+    /** The plain run of one chamber, to be varied. */
+    ChamberRun asPlanned(ChamberPlan chamber, double durationS, Map<String, Course> plain) {
+        return run(chamber, Draw.MEDIAN, durationS, airOf(plain));
+    }
+
+    /** Runs all lots that are in the run without a chamber in one draw, by id. */
+    Map<String, LotCourse> without(Draw draw, double durationS) {
+        AirSeries air = withoutAir();
+        Map<String, LotCourse> courses = new HashMap<>();
+        for (LotSheet sheet : sheets) {
+            if (sheet.clock().arrivesS() < durationS) {
+                courses.put(sheet.id(), inAir(sheet.stay(draw), air, durationS));
+            }
+        }
+        return courses;
+    }
+
+    /** Runs one lot in the air of a chamber that is there already. */
+    LotCourse inAirOf(LotSheet sheet, Course chamber, double durationS) {
+        return inAir(sheet.stay(Draw.MEDIAN), series(chamber), durationS);
+    }
+
+    private LotCourse inAir(Stay stay, AirSeries air, double durationS) {
+        return HeatModel.runInGivenAir(stay, air, plan.site(), Factors.PLAIN, durationS);
+    }
+
+    /** The air a lot would stand in without a chamber. */
+    AirSeries withoutAir() {
+        return plan.without() instanceof WithoutChamber.Steady steady
+                ? AirSeries.steady(steady.temperatureC(), steady.humidityPct() / 100)
+                : AirSeries.outdoors(weather);
+    }
+
+    private Map<String, Course> pass(
+            Draw draw,
+            double durationS,
+            Map<String, AirSeries> air,
+            DoorMode door,
+            ControlMode control) {
+        Map<String, Course> courses = new LinkedHashMap<>();
+        for (ChamberPlan chamber : plan.chambers()) {
+            ChamberRun run =
+                    run(chamber, draw, durationS, air).withDoorMode(door).withControlMode(control);
+            courses.put(chamber.id(), HeatModel.run(run, Progress.SILENT));
+        }
+        return courses;
+    }
+
+    private ChamberRun run(
+            ChamberPlan chamber, Draw draw, double durationS, Map<String, AirSeries> air) {
+        List<Stay> stays =
+                sheetsIn(chamber.id()).stream()
+                        .filter(sheet -> sheet.clock().arrivesS() < durationS)
+                        .filter(sheet -> sheet.clock().leavesS() > 0)
+                        .map(sheet -> sheet.stay(draw))
+                        .toList();
+        return ChamberRun.of(
+                        chamber.id(),
+                        plan.site(),
+                        timeline,
+                        weather,
+                        chamber.enclosure(),
+                        chamber.setting(),
+                        durationS)
+                .withCoolers(chamber.coolers())
+                .withOutages(outages(chamber))
+                .withStays(stays)
+                .withFactors(factors(chamber.corrections()))
+                .withStart(start(chamber))
+                .withExtras(new ChamberRun.Extras(chamber.heaterW(), chamber.humidifierKgH(), air));
+    }
+
+    List<Outage> outages(ChamberPlan chamber) {
+        return chamber.outages().stream()
+                .map(
+                        outage ->
+                                new Outage(
+                                        timeline.secondsAt(outage.from()),
+                                        timeline.secondsAt(outage.to())))
+                .toList();
+    }
+
+    private static Factors factors(Corrections c) {
+        return new Factors(
+                c.wallFactor(),
+                c.exchangeFactor(),
+                c.capacityFactor(),
+                1,
+                1,
+                1,
+                c.thermostatOffsetK());
+    }
+
+    private static Start start(ChamberPlan chamber) {
+        return chamber.starts()
+                .map(air -> new Start(OptionalDouble.of(air.temperatureC()), air.humidityPct()))
+                .orElse(Start.USUAL);
+    }
+
+    private static boolean hasNeighbour(ChamberPlan chamber) {
+        Enclosure built = chamber.enclosure();
+        return built.faces().stream().anyMatch(face -> face.beyond() instanceof Beyond.Neighbour)
+                || built.door()
+                        .map(door -> door.beyond() instanceof Beyond.Neighbour)
+                        .orElse(false);
+    }
+
+    /** Before the first pass every chamber is taken to stand at its setting. */
+    private Map<String, AirSeries> startAir() {
+        Map<String, AirSeries> air = new HashMap<>();
+        for (ChamberPlan chamber : plan.chambers()) {
+            air.put(
+                    chamber.id(),
+                    chamber.coolers().isEmpty()
+                            ? AirSeries.outdoors(weather)
+                            : AirSeries.steady(
+                                    chamber.setting().temperatureC(),
+                                    chamber.setting().humidityPct() / 100));
+        }
+        return air;
+    }
+
+    private static Map<String, AirSeries> airOf(Map<String, Course> courses) {
+        Map<String, AirSeries> air = new HashMap<>();
+        courses.forEach((id, course) -> air.put(id, series(course)));
+        return air;
+    }
+
+    private static AirSeries series(Course course) {
+        int n = course.hours().size();
+        double[] time = new double[n];
+        double[] temperature = new double[n];
+        double[] humidity = new double[n];
+        for (int i = 0; i < n; i++) {
+            time[i] = course.hours().atS(i);
+            temperature[i] = course.hours().airC(i);
+            humidity[i] = Math.min(1, course.hours().humidityFraction(i));
+        }
+        return new AirSeries(time, temperature, humidity);
+    }
+
+    private static double apartK(
+            Map<String, AirSeries> before, Map<String, AirSeries> after, double durationS) {
+        double most = 0;
+        for (Map.Entry<String, AirSeries> entry : after.entrySet()) {
+            AirSeries old = before.get(entry.getKey());
+            for (double t = 0; old != null && t <= durationS; t += Timeline.HOUR_S) {
+                most =
+                        Math.max(
+                                most,
+                                Math.abs(old.temperatureC(t) - entry.getValue().temperatureC(t)));
+            }
+        }
+        return most;
+    }
+}

@@ -1,0 +1,61 @@
+package org.wardon.advice.forecast;
+
+import java.util.Map;
+import org.wardon.heat.Course;
+import org.wardon.keeping.ChamberEthylene;
+import org.wardon.lots.LotHistory;
+
+/**
+ * All that was computed of a store.
+ *
+ * @param model the store as it was run
+ * @param horizonS end of the plan, s
+ * @param durationS end of the run, s; beyond the horizon where lots had not settled
+ * @param horizonCourses chambers in full to the end of the horizon, by id; for totals
+ * @param courses chambers in full to the end of the run, by id
+ * @param ethylene ethylene of the chambers in the plain run
+ * @param histories lots in the plain run, by id, with their ethylene
+ * @param fates fates of the lots, by id
+ */
+record StoreOutcome(
+        StoreModel model,
+        double horizonS,
+        double durationS,
+        Map<String, Course> horizonCourses,
+        Map<String, Course> courses,
+        Map<String, ChamberEthylene> ethylene,
+        Map<String, LotHistory> histories,
+        Map<String, LotFates> fates) {
+    StoreOutcome {
+        horizonCourses = Map.copyOf(horizonCourses);
+        courses = Map.copyOf(courses);
+        ethylene = Map.copyOf(ethylene);
+        histories = Map.copyOf(histories);
+        fates = Map.copyOf(fates);
+    }
+
+    /** Whether a lot is in the run. */
+    boolean has(String lotId) {
+        return fates.containsKey(lotId);
+    }
+
+    Course horizonCourse(String chamberId) {
+        return ById.get(horizonCourses, chamberId);
+    }
+
+    Course course(String chamberId) {
+        return ById.get(courses, chamberId);
+    }
+
+    ChamberEthylene ethylene(String chamberId) {
+        return ById.get(ethylene, chamberId);
+    }
+
+    LotHistory history(String lotId) {
+        return ById.get(histories, lotId);
+    }
+
+    LotFates fates(String lotId) {
+        return ById.get(fates, lotId);
+    }
+}

@@ -1,0 +1,64 @@
+package org.wardon.advice.forecast;
+
+import java.nio.file.Path;
+import java.util.LinkedHashMap;
+import java.util.Map;
+import java.util.function.IntToDoubleFunction;
+import java.util.stream.IntStream;
+import org.wardon.files.forecast.SeriesWriter;
+import org.wardon.heat.Course;
+import org.wardon.heat.Hours;
+import org.wardon.heat.LotCourse;
+import org.wardon.keeping.ChamberEthylene;
+import org.wardon.keeping.Fate;
+
+/** Hourly series of a store's horizon, written as CSV. */
+final class StoreSeries {
+    private final StoreOutcome outcome;
+
+    StoreSeries(StoreOutcome outcome) {
+        this.outcome = outcome;
+    }
+
+    void write(Path folder) {
+        SeriesWriter writer = new SeriesWriter(folder, outcome.model().plan().timeline());
+        outcome.horizonCourses().forEach((id, course) -> chamber(writer, id, course));
+        outcome.horizonCourses()
+                .values()
+                .forEach(course -> course.lots().forEach(lot -> lot(writer, lot)));
+    }
+
+    private void chamber(SeriesWriter writer, String id, Course course) {
+        Hours hours = course.hours();
+        ChamberEthylene level = outcome.ethylene(id);
+        Map<String, IntToDoubleFunction> columns = new LinkedHashMap<>();
+        columns.put("airC", hours::airC);
+        columns.put("humidityPct", i -> 100 * hours.humidityFraction(i));
+        columns.put("outdoorC", hours::outdoorC);
+        columns.put("coolingW", hours::coolingW);
+        columns.put("powerW", hours::powerW);
+        columns.put("co2Ppm", hours::co2Ppm);
+        columns.put("ethylenePpm", i -> level.ppmAt(hours.atS(i)));
+        writer.chamber(id, times(hours.size(), hours::atS), columns);
+    }
+
+    private void lot(SeriesWriter writer, LotCourse lot) {
+        String id = lot.stay().lot().id();
+        if (!outcome.has(id)) {
+            return;
+        }
+        Fate plain = outcome.fates(id).plain();
+        Map<String, IntToDoubleFunction> columns = new LinkedHashMap<>();
+        columns.put("meanC", lot::meanC);
+        columns.put("surfaceC", lot::surfaceC);
+        columns.put("coreC", lot::coreC);
+        columns.put("respirationW", lot::respirationW);
+        columns.put("massKg", lot::massKg);
+        columns.put("lifeUsedPct", i -> 100 * plain.usedAt(lot.atS(i)));
+        writer.lot(id, times(lot.size(), lot::atS), columns);
+    }
+
+    private static double[] times(int n, IntToDoubleFunction atS) {
+        return IntStream.range(0, n).mapToDouble(atS).toArray();
+    }
+}

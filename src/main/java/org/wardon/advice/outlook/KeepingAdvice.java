@@ -1,0 +1,225 @@
+package org.wardon.advice.outlook;
+
+import java.util.ArrayList;
+import java.util.Comparator;
+import java.util.List;
+import java.util.Locale;
+import java.util.Map;
+import java.util.Optional;
+import java.util.function.DoubleFunction;
+import java.util.regex.Matcher;
+import java.util.regex.Pattern;
+import org.wardon.errors.BadInput;
+import org.wardon.errors.Fault;
+import org.wardon.files.forecast.ChillingRisk;
+import org.wardon.files.forecast.KeepAnswer;
+import org.wardon.files.forecast.Quantiles;
+import org.wardon.files.readings.HistoryCsv;
+import org.wardon.files.readings.LoggedHistory;
+import org.wardon.keeping.Draw;
+import org.wardon.keeping.Draws;
+import org.wardon.keeping.HistoryLegs;
+import org.wardon.keeping.KeepingModel;
+import org.wardon.keeping.KeptLot;
+import org.wardon.keeping.KnownLife;
+import org.wardon.keeping.LotAtDoor;
+import org.wardon.keeping.Outlook;
+import org.wardon.keeping.Spread;
+import org.wardon.lots.ClassValues;
+import org.wardon.lots.Item;
+import org.wardon.lots.Items;
+import org.wardon.lots.LotHistory;
+import org.wardon.lots.TranspirationLaw;
+import org.wardon.lots.Transpirations;
+import org.wardon.produce.Commodity;
+import org.wardon.reference.ReferenceBook;
+
+/** Answers how long a lot keeps. */
+public final class KeepingAdvice {
+    /** Draws that make a range. */
+    public static final int DRAWS = 128;
+
+    /** Seed of the draws: a question without a plan always gets the same. */
+    private static final long SEED = 1;
+
+    /** Ethylene of air without a source nearby, µL/L (assumption). */
+    private static final double CLEAN_PPM = 0.01;
+
+    /** Humidity at the produce where neither print nor person gives one (assumption). */
+    private static final double USUAL_HUMIDITY = 0.9;
+
+    /** Days a history is carried on where it goes on at another temperature. */
+    private static final double CARRIED_DAYS = 2;
+
+    private static final double DAY_S = 86_400;
+    private static final Pattern DAYS_AT_C =
+            Pattern.compile("(\\d+(?:\\.\\d+)?)@(-?\\d+(?:\\.\\d+)?)");
+
+    private final ReferenceBook book;
+    private final ClassValues classes;
+
+    /**
+     * Prepares for questions.
+     *
+     * @param book the reference book
+     */
+    public KeepingAdvice(ReferenceBook book) {
+        this.book = book;
+        this.classes = ClassValues.of(book.list().stream().map(book::get).toList());
+    }
+
+    /**
+     * Answers a question.
+     *
+     * @param request the question
+     * @return days left from now on (a history's end, or the start of one condition), life used and
+     *     risk of chilling at the end of the days or of the history
+     * @throws BadInput with every fault of the question
+     */
+    public KeepReport ask(KeepRequest request) {
+        check(request);
+        Commodity commodity = book.named(request.commodity());
+        LotHistory told = history(request, commodity);
+        double endS = told.timeS(told.size() - 1);
+        LotHistory followed = carriedOn(request.condition(), told, endS);
+        double fromS = request.condition() instanceof KeepRequest.Steady ? 0 : endS;
+        KeepingModel model = KeepingModel.of(kept(commodity, door(request)));
+        Outlook outlook = model.outlook(followed, Draws.seeded(SEED, DRAWS), fromS, endS);
+        double usedPct = 100 * model.follow(followed, Draw.MEDIAN).usedAt(endS);
+        return new KeepReport(
+                commodity,
+                answer(commodity, outlook, usedPct),
+                outlook.restsOn().word(),
+                outlook.reasons());
+    }
+
+    private static void check(KeepRequest request) {
+        List<Fault> faults = new ArrayList<>();
+        if (request.condition() instanceof KeepRequest.Steady steady) {
+            within(faults, "--at", steady.atC(), -5, 50, "°C");
+            within(faults, "--days", steady.days(), 0.05, 730, "days");
+        } else if (request.condition() instanceof KeepRequest.Logged logged) {
+            logged.thenC().ifPresent(c -> within(faults, "--then", c, -5, 50, "°C"));
+        }
+        request.humidityPct().ifPresent(pct -> within(faults, "--humidity", pct, 0, 100, "%"));
+        request.usedPct().ifPresent(pct -> within(faults, "--used", pct, 0, 100, "%"));
+        request.knownLife().ifPresent(text -> checkLife(faults, text));
+        if (!faults.isEmpty()) {
+            throw new BadInput(faults);
+        }
+    }
+
+    private static void checkLife(List<Fault> faults, String text) {
+        Matcher match = DAYS_AT_C.matcher(text);
+        if (!match.matches()) {
+            faults.add(
+                    new Fault(
+                            "--known-life",
+                            "",
+                            "'" + text + "' is not DAYS@C",
+                            "accepted: days, @ and °C, such as 9@10"));
+            return;
+        }
+        within(faults, "--known-life days", Double.parseDouble(match.group(1)), 0.1, 730, "days");
+        within(faults, "--known-life °C", Double.parseDouble(match.group(2)), -5, 45, "°C");
+    }
+
+    private static void within(
+            List<Fault> faults, String option, double value, double low, double high, String unit) {
+        if (!(value >= low && value <= high)) {
+            faults.add(
+                    new Fault(
+                            option,
+                            "",
+                            value + " is out of range",
+                            String.format(Locale.ROOT, "accepted: %s to %s %s", low, high, unit)));
+        }
+    }
+
+    private LotHistory history(KeepRequest request, Commodity commodity) {
+        double humidity =
+                request.humidityPct().isPresent()
+                        ? request.humidityPct().getAsDouble() / 100
+                        : handbookHumidity(commodity);
+        if (request.condition() instanceof KeepRequest.Steady steady) {
+            return LotHistory.constant(steady.atC(), humidity, CLEAN_PPM, steady.days() * DAY_S);
+        }
+        KeepRequest.Logged logged = (KeepRequest.Logged) request.condition();
+        LoggedHistory read =
+                HistoryCsv.read(logged.csv(), logged.csv().toString(), humidity, CLEAN_PPM);
+        return read.history();
+    }
+
+    private static double handbookHumidity(Commodity commodity) {
+        return commodity
+                .needs()
+                .humidityPct()
+                .map(fact -> fact.middle() / 100)
+                .orElse(USUAL_HUMIDITY);
+    }
+
+    private static LotHistory carriedOn(
+            KeepRequest.Condition condition, LotHistory told, double endS) {
+        if (condition instanceof KeepRequest.Logged logged && logged.thenC().isPresent()) {
+            int last = told.size() - 1;
+            return HistoryLegs.then(
+                    told,
+                    endS,
+                    logged.thenC().getAsDouble(),
+                    told.humidityFraction(last),
+                    told.ethylenePpm(last),
+                    CARRIED_DAYS);
+        }
+        return told;
+    }
+
+    private static LotAtDoor door(KeepRequest request) {
+        LotAtDoor door = LotAtDoor.SOUND.withRipeness(request.ripeness());
+        if (request.usedPct().isPresent()) {
+            door = door.withUsed(request.usedPct().getAsDouble() / 100);
+        }
+        if (request.cured().isPresent()) {
+            door = door.withCured(request.cured().get());
+        }
+        if (request.knownLife().isPresent()) {
+            Matcher match = DAYS_AT_C.matcher(request.knownLife().get());
+            if (match.matches()) {
+                door =
+                        door.withKnownLife(
+                                new KnownLife(
+                                        Double.parseDouble(match.group(1)),
+                                        Double.parseDouble(match.group(2))));
+            }
+        }
+        return door;
+    }
+
+    private KeptLot kept(Commodity commodity, LotAtDoor door) {
+        Item item = Items.of(commodity, classes).value();
+        DoubleFunction<TranspirationLaw> laws =
+                share -> Transpirations.of(commodity, item, classes, share).value();
+        return new KeptLot(commodity.id(), commodity, door, Optional.of(laws));
+    }
+
+    private static KeepAnswer answer(Commodity commodity, Outlook outlook, double usedPct) {
+        List<KeepAnswer.Mechanism> mechanisms =
+                outlook.mechanisms().entrySet().stream()
+                        .sorted(Comparator.comparing(Map.Entry::getKey))
+                        .map(
+                                e ->
+                                        new KeepAnswer.Mechanism(
+                                                e.getKey().word(), quantiles(e.getValue())))
+                        .toList();
+        return new KeepAnswer(
+                commodity.id(),
+                quantiles(outlook.daysLeft()),
+                usedPct,
+                outlook.limitedBy().word(),
+                new ChillingRisk(outlook.chilling().probability(), outlook.chilling().safeDays()),
+                mechanisms);
+    }
+
+    private static Quantiles quantiles(Spread spread) {
+        return new Quantiles(spread.p10(), spread.p50(), spread.p90());
+    }
+}

@@ -1,0 +1,278 @@
+package org.wardon.cli;
+
+import java.util.Comparator;
+import java.util.List;
+import java.util.Locale;
+import java.util.stream.Collectors;
+import org.wardon.advice.forecast.StoreAdvice;
+import org.wardon.advice.wording.Units;
+import org.wardon.advice.wording.Words;
+import org.wardon.files.forecast.ChamberForecast;
+import org.wardon.files.forecast.Forecast;
+import org.wardon.files.forecast.LotForecast;
+import org.wardon.files.forecast.Quantiles;
+import org.wardon.plan.ChamberPlan;
+import org.wardon.plan.LotPlan;
+import org.wardon.plan.StorePlan;
+
+/** The advice on a store plan for a person. */
+final class AdvicePage {
+    private final StoreAdvice advice;
+    private final StorePlan plan;
+    private final Forecast forecast;
+    private final Words words;
+    private final Units units;
+    private final Terminal terminal;
+    private final boolean notes;
+    private final StringBuilder page = new StringBuilder();
+
+    AdvicePage(StoreAdvice advice, Words words, Terminal terminal, boolean notes) {
+        this.advice = advice;
+        this.plan = advice.plan();
+        this.forecast = advice.forecast();
+        this.words = words;
+        this.units = words.units();
+        this.terminal = terminal;
+        this.notes = notes;
+    }
+
+    String text() {
+        head(
+                String.format(
+                        Locale.ROOT,
+                        "%s: %s days from %s",
+                        plan.name(),
+                        units.figure(plan.days(), "1"),
+                        plan.from()));
+        warnings("danger", "Danger");
+        actions();
+        forecast.chambers().forEach(this::chamber);
+        lots();
+        warnings("caution", "Cautions");
+        warnings("note", "Good to know");
+        value();
+        return page.toString();
+    }
+
+    private void head(String text) {
+        page.append(terminal.bold(text)).append("\n\n");
+    }
+
+    private void actions() {
+        if (forecast.actions().isEmpty()) {
+            return;
+        }
+        head("What to do first");
+        for (Forecast.Action action : forecast.actions()) {
+            String gain =
+                    action.gainValue().isPresent()
+                            ? "  (gains " + money(action.gainValue().getAsDouble()) + ")"
+                            : "";
+            page.append("  ")
+                    .append(action.order())
+                    .append(". ")
+                    .append(action.text())
+                    .append(gain)
+                    .append('\n');
+        }
+        page.append('\n');
+    }
+
+    private String money(double value) {
+        return String.format(Locale.ROOT, "%,.0f %s", value, plan.prices().currency())
+                .replace(',', ' ')
+                .strip();
+    }
+
+    private void chamber(ChamberForecast chamber) {
+        ChamberPlan built = plan.getChamber(chamber.id());
+        head("Chamber " + chamber.id() + ": " + sentence(chamber, built));
+        line(
+                "air",
+                units.temperature(chamber.airC().mean())
+                        + " on average, "
+                        + units.temperature(chamber.airC().min())
+                        + " to "
+                        + units.temperature(chamber.airC().max())
+                        + "; humidity "
+                        + units.figure(chamber.humidityPct().mean(), "pct"));
+        chamber.pullDownHours().ifPresent(hours -> line("pull-down", units.figure(hours, "h")));
+        line(
+                "heat",
+                "load peaks at "
+                        + units.figure(chamber.peakLoadW(), "W")
+                        + "; "
+                        + kwh(chamber.heatRemovedKWh())
+                        + " removed with "
+                        + kwh(chamber.energyKWh())
+                        + " of power; most from "
+                        + largest(chamber.loadKWh()));
+        chamber.intakeKgPerDay()
+                .ifPresent(
+                        kg ->
+                                line(
+                                        "intake",
+                                        "at most " + units.mass(kg) + " of warm produce a day"));
+        line(
+                "gases",
+                "carbon dioxide up to "
+                        + units.figure(chamber.co2PpmMax(), "ppm")
+                        + ", ethylene up to "
+                        + units.figure(chamber.ethylenePpmMax(), "ppm"));
+        company(chamber.id());
+        page.append('\n');
+    }
+
+    private String sentence(ChamberForecast chamber, ChamberPlan built) {
+        String set = units.temperature(built.setting().temperatureC());
+        if (chamber.holds()) {
+            return "holds " + set + ".";
+        }
+        String why =
+                advice.whyNotHeld(chamber.id()).stream()
+                        .map(words::sentence)
+                        .collect(Collectors.joining("; "));
+        return "does not hold " + set + ": " + why + ".";
+    }
+
+    private void line(String name, String text) {
+        page.append(String.format(Locale.ROOT, "  %-10s %s%n", name, text));
+    }
+
+    private static String kwh(double kWh) {
+        return String.format(Locale.ROOT, "%.0f kWh", kWh);
+    }
+
+    private static String largest(ChamberForecast.LoadKWh load) {
+        record Term(String name, double kWh) {}
+        return List.of(
+                        new Term("the faces", load.walls()),
+                        new Term("the door", load.door()),
+                        new Term("leakage", load.leakage() + load.freshAir()),
+                        new Term("field heat", load.fieldHeat()),
+                        new Term("respiration", load.respiration()),
+                        new Term("fans", load.fans()),
+                        new Term("lights and people", load.lights() + load.people()))
+                .stream()
+                .sorted(Comparator.comparingDouble(Term::kWh).reversed())
+                .limit(3)
+                .map(term -> term.name() + " (" + kwh(term.kWh()) + ")")
+                .collect(Collectors.joining(", "));
+    }
+
+    private void company(String chamberId) {
+        for (Forecast.Sharing sharing : forecast.sharing()) {
+            if (sharing.chamber().equals(chamberId)) {
+                line("company", words.text("verdict." + sharing.verdict()));
+                sharing.reasons()
+                        .forEach(
+                                reason ->
+                                        line(
+                                                "",
+                                                "- "
+                                                        + reason.text()
+                                                        + "  ["
+                                                        + reason.source()
+                                                        + "]"));
+            }
+        }
+    }
+
+    private void lots() {
+        head("Lots, first to leave first");
+        page.append(
+                String.format(
+                        "  %-8s %-20s %-8s %-11s %-34s %-26s %s%n",
+                        "lot",
+                        "crop",
+                        "chamber",
+                        "leave by",
+                        "days left",
+                        "limited by",
+                        "days gained"));
+        forecast.lots().stream()
+                .sorted(Comparator.comparing(LotForecast::leaveBy))
+                .forEach(this::lot);
+        page.append('\n');
+    }
+
+    private void lot(LotForecast lot) {
+        LotPlan planned =
+                plan.lots().stream()
+                        .filter(one -> one.id().equals(lot.id()))
+                        .findFirst()
+                        .orElseThrow();
+        page.append(
+                String.format(
+                        "  %-8s %-20s %-8s %-11s %-34s %-26s %s%n",
+                        lot.id(),
+                        planned.commodity(),
+                        lot.chamber().orElse("-"),
+                        lot.leaveBy().toLocalDate(),
+                        words.range(lot.daysLeft()),
+                        words.text("limit." + lot.limitedBy()),
+                        gained(lot.daysGained())));
+    }
+
+    private String gained(Quantiles days) {
+        String verb = days.p50() < 0 ? "loses " : "";
+        double size = Math.abs(days.p50());
+        return verb + units.figure(size, "day");
+    }
+
+    private void warnings(String level, String title) {
+        List<Forecast.Warning> told =
+                forecast.warnings().stream()
+                        .filter(warning -> warning.level().equals(level))
+                        .filter(warning -> notes || !isDetail(warning))
+                        .toList();
+        if (told.isEmpty()) {
+            return;
+        }
+        head(title);
+        for (Forecast.Warning warning : told) {
+            page.append("  - ")
+                    .append(warning.text())
+                    .append("  [")
+                    .append(warning.source())
+                    .append("]\n");
+        }
+        long hidden =
+                forecast.warnings().stream()
+                                .filter(warning -> warning.level().equals(level))
+                                .count()
+                        - told.size();
+        if (hidden > 0) {
+            page.append("  - ")
+                    .append(hidden)
+                    .append(" more notes on what the figures rest on: --notes\n");
+        }
+        page.append('\n');
+    }
+
+    /** What a figure rests on is for those who ask. */
+    private static boolean isDetail(Forecast.Warning warning) {
+        String code = warning.code();
+        return code.equals("default-taken")
+                || code.startsWith("life-")
+                || code.startsWith("chilling-floor")
+                || code.startsWith("chilling-band")
+                || code.startsWith("chilling-dose")
+                || code.equals("sprouting-range")
+                || code.endsWith("-class")
+                || code.endsWith("-broad");
+    }
+
+    private void value() {
+        Forecast.Value value = forecast.value();
+        head(
+                "Worth "
+                        + money(value.kept())
+                        + " when sold, power "
+                        + money(value.energyCost())
+                        + ", net "
+                        + money(value.net())
+                        + ".");
+        page.append("Wardon advises; local codes and licensed practice decide.\n");
+    }
+}

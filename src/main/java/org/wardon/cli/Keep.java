@@ -1,0 +1,149 @@
+package org.wardon.cli;
+
+import java.io.PrintStream;
+import java.nio.file.Path;
+import java.util.Optional;
+import java.util.OptionalDouble;
+import java.util.concurrent.Callable;
+import org.jspecify.annotations.Nullable;
+import org.wardon.advice.outlook.KeepReport;
+import org.wardon.advice.outlook.KeepRequest;
+import org.wardon.advice.outlook.KeepingAdvice;
+import org.wardon.errors.BadInput;
+import org.wardon.files.forecast.AnswerWriter;
+import org.wardon.produce.Ripeness;
+import org.wardon.reference.ReferenceBook;
+import picocli.CommandLine.ArgGroup;
+import picocli.CommandLine.Command;
+import picocli.CommandLine.Mixin;
+import picocli.CommandLine.Option;
+import picocli.CommandLine.Parameters;
+
+/** Says how long a lot keeps. */
+@Command(
+        name = "keep",
+        mixinStandardHelpOptions = true,
+        description = {
+            "Says how many days one lot keeps, in one condition or along a logged history, what"
+                    + " ends it and why."
+        })
+final class Keep implements Callable<Integer> {
+    @Mixin private Shared shared = new Shared();
+
+    @Parameters(paramLabel = "COMMODITY", description = "Its id or any common name.")
+    private String name = "";
+
+    @ArgGroup(multiplicity = "1")
+    private Where where = new Where();
+
+    /** One condition, or a history. */
+    static final class Where {
+        @Option(
+                names = "--at",
+                paramLabel = "C",
+                required = true,
+                description = "Temperature of the lot, °C.")
+        private double atC;
+
+        @Option(
+                names = "--history",
+                paramLabel = "CSV",
+                required = true,
+                description = {
+                    "Logged history: time,temperatureC[,humidityPct] or time,temperatureF."
+                })
+        private @Nullable Path history;
+    }
+
+    @Option(
+            names = "--humidity",
+            paramLabel = "PCT",
+            description = "Humidity at the produce, percent (default: the handbook's).")
+    private @Nullable Double humidityPct;
+
+    @Option(
+            names = "--days",
+            paramLabel = "N",
+            description = "With --at: days after which life used and chilling are told (7).")
+    private @Nullable Double days;
+
+    @Option(
+            names = "--then",
+            paramLabel = "C",
+            description = "With --history: temperature it goes on at, °C.")
+    private @Nullable Double thenC;
+
+    @Option(
+            names = "--used",
+            paramLabel = "PCT",
+            description = "Share of its life used before, percent.")
+    private @Nullable Double usedPct;
+
+    @Option(
+            names = "--known-life",
+            paramLabel = "DAYS@C",
+            description = "In my store it keeps so many days at so many °C, such as 9@10.")
+    private @Nullable String knownLife;
+
+    @Option(
+            names = "--ripeness",
+            paramLabel = "STATE",
+            description = "green, turning or ripe (default: unknown).")
+    private Ripeness ripeness = Ripeness.UNKNOWN;
+
+    @Option(
+            names = "--cured",
+            paramLabel = "yes|no",
+            description = "Whether bulbs or roots were cured (default: unknown).")
+    private @Nullable YesNo cured;
+
+    @Option(names = "--json", description = "Answer in JSON.")
+    private boolean json;
+
+    @Override
+    public Integer call() {
+        PrintStream out = Terminal.ofProcess().out();
+        try (ReferenceBook book = shared.book()) {
+            KeepReport report = new KeepingAdvice(book).ask(request());
+            out.print(
+                    json
+                            ? AnswerWriter.json(report.answer())
+                            : new KeepPage(shared.words()).of(report));
+        }
+        return Exit.OK;
+    }
+
+    private KeepRequest request() {
+        KeepRequest.Condition condition;
+        if (where.history == null) {
+            refuse("--then", thenC);
+            double told = days == null ? KeepRequest.Steady.USUAL_DAYS : days;
+            condition = new KeepRequest.Steady(where.atC, told);
+        } else {
+            refuse("--days", days);
+            condition = new KeepRequest.Logged(where.history, number(thenC));
+        }
+        return new KeepRequest(
+                name,
+                condition,
+                number(humidityPct),
+                number(usedPct),
+                Optional.ofNullable(knownLife),
+                ripeness,
+                Optional.ofNullable(cured).map(answer -> answer == YesNo.YES));
+    }
+
+    private static void refuse(String option, @Nullable Double value) {
+        if (value != null) {
+            throw new BadInput(
+                    option,
+                    "",
+                    "it does not go with the other options given",
+                    "accepted: --days with --at, --then with --history");
+        }
+    }
+
+    private static OptionalDouble number(@Nullable Double value) {
+        return value == null ? OptionalDouble.empty() : OptionalDouble.of(value);
+    }
+}
