@@ -11,7 +11,6 @@ import org.wardon.files.forecast.ChamberForecast;
 import org.wardon.files.forecast.Forecast;
 import org.wardon.files.forecast.LotForecast;
 import org.wardon.files.forecast.Quantiles;
-import org.wardon.plan.ChamberPlan;
 import org.wardon.plan.LotPlan;
 import org.wardon.plan.StorePlan;
 
@@ -85,8 +84,7 @@ final class AdvicePage {
     }
 
     private void chamber(ChamberForecast chamber) {
-        ChamberPlan built = plan.getChamber(chamber.id());
-        head("Chamber " + chamber.id() + ": " + sentence(chamber, built));
+        head("Chamber " + chamber.id() + ": " + sentence(chamber));
         line(
                 "air",
                 units.temperature(chamber.airC().mean())
@@ -123,8 +121,8 @@ final class AdvicePage {
         page.append('\n');
     }
 
-    private String sentence(ChamberForecast chamber, ChamberPlan built) {
-        String set = units.temperature(built.setting().temperatureC());
+    private String sentence(ChamberForecast chamber) {
+        String set = units.temperature(advice.settingC(chamber.id()));
         if (chamber.holds()) {
             return "holds " + set + ".";
         }

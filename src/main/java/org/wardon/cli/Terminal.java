@@ -4,6 +4,7 @@ import java.io.PrintStream;
 import java.nio.charset.StandardCharsets;
 import java.util.Locale;
 import org.wardon.errors.Progress;
+import picocli.CommandLine.Help;
 
 /** Where answers and messages go: colour only on a terminal, progress only on long work. */
 final class Terminal {
@@ -21,11 +22,10 @@ final class Terminal {
 
     /** Returns the terminal of this process, speaking UTF-8. */
     static Terminal ofProcess() {
-        boolean terminal = System.console() != null && System.getenv("NO_COLOR") == null;
         return new Terminal(
                 new PrintStream(System.out, true, StandardCharsets.UTF_8),
                 new PrintStream(System.err, true, StandardCharsets.UTF_8),
-                terminal);
+                Help.Ansi.AUTO.enabled());
     }
 
     PrintStream out() {

@@ -48,6 +48,16 @@ public final class StoreAdvice {
     }
 
     /**
+     * Returns the temperature a chamber is set to.
+     *
+     * @param chamberId its id
+     * @return °C
+     */
+    public double settingC(String chamberId) {
+        return plan().getChamber(chamberId).setting().temperatureC();
+    }
+
+    /**
      * Writes the hourly series of chambers and lots.
      *
      * @param folder where to; it is made

@@ -133,11 +133,12 @@ class AnswerWriterTest {
                                                                 OptionalDouble.of(13),
                                                                 OptionalDouble.empty(),
                                                                 "°C",
+                                                                "",
                                                                 "cantwell-2001",
                                                                 "seen",
                                                                 false)))));
         assertNames("commodity names facts", look);
-        assertNames("name low high unit source evidence own", look.get("facts").get(0));
+        assertNames("name low high unit text source evidence own", look.get("facts").get(0));
         JsonNode place =
                 JsonMapper.shared()
                         .readTree(
