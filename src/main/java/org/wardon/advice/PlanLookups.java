@@ -4,7 +4,6 @@ import java.util.HashMap;
 import java.util.Map;
 import java.util.Set;
 import org.wardon.files.Lookups;
-import org.wardon.files.Material;
 import org.wardon.reference.ReferenceBook;
 
 /** What a store plan may name, from the reference book. */
@@ -18,20 +17,6 @@ public final class PlanLookups {
      * @return ids of commodities, packages, materials and door protections
      */
     public static Lookups of(ReferenceBook book) {
-        Map<String, Material> materials = new HashMap<>();
-        book.materials()
-                .forEach(
-                        (id, m) ->
-                                materials.put(
-                                        id,
-                                        new Material(
-                                                id,
-                                                m.conductivityWmK(),
-                                                m.densityKgM3(),
-                                                m.specificHeatJkgK(),
-                                                m.resistanceM2KW(),
-                                                m.solarAbsorptance(),
-                                                m.sourceId())));
         Map<String, Double> protections = new HashMap<>();
         book.doorways()
                 .forEach(
@@ -39,6 +24,9 @@ public final class PlanLookups {
                                 doorway.usual()
                                         .ifPresent(fact -> protections.put(id, fact.middle())));
         return new Lookups(
-                Set.copyOf(book.list()), book.packageKinds().keySet(), materials, protections);
+                Set.copyOf(book.list()),
+                book.packageKinds().keySet(),
+                book.materials(),
+                protections);
     }
 }

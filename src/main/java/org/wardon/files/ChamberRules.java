@@ -8,6 +8,7 @@ import java.util.List;
 import java.util.Map;
 import java.util.Optional;
 import java.util.OptionalDouble;
+import org.wardon.enclosure.Material;
 import org.wardon.files.json.Faults;
 import org.wardon.files.json.Json;
 import org.wardon.files.json.Part;

@@ -6,6 +6,7 @@ import org.wardon.enclosure.Beyond;
 import org.wardon.enclosure.Face;
 import org.wardon.enclosure.FaceName;
 import org.wardon.enclosure.Layer;
+import org.wardon.enclosure.Material;
 import org.wardon.files.json.Part;
 import org.wardon.plan.Default;
 import org.wardon.plan.Defaults;

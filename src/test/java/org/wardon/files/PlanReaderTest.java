@@ -137,7 +137,7 @@ class PlanReaderTest {
         assertEquals(0.5, north.solarAbsorptance());
         assertEquals(
                 List.of(
-                        new Layer("steel", 0.0005, 50, 7800, 450),
+                        new Layer("steel-sheet", 0.0005, 50, 7800, 450),
                         new Layer("pur-panel", 0.08, 0.027, 40, 1400)),
                 north.layers());
     }

@@ -12,6 +12,8 @@ import java.util.List;
 import java.util.Map;
 import java.util.OptionalDouble;
 import java.util.Set;
+import org.wardon.enclosure.Material;
+import org.wardon.produce.Evidence;
 
 /** The ids of the tables we carry, read straight from their CSV files. */
 public final class TableLookups {
@@ -49,12 +51,15 @@ public final class TableLookups {
     private static Material material(NamedCsvRecord row) {
         return new Material(
                 row.getField("material_id"),
+                row.getField("name"),
                 number(row, "conductivity_W_mK"),
                 number(row, "density_kg_m3"),
                 number(row, "specific_heat_J_kgK"),
-                number(row, "resistance_m2K_W"),
                 number(row, "solar_absorptance"),
-                row.getField("source_id"));
+                number(row, "resistance_m2K_W"),
+                row.getField("source_id"),
+                Evidence.MIXED, // several words stand in the column; the reader asks none of them
+                row.getField("note"));
     }
 
     private static OptionalDouble number(NamedCsvRecord row, String column) {
