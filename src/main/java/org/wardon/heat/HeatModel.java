@@ -26,8 +26,7 @@ public final class HeatModel {
 
     static Course run(ChamberRun run, Progress progress, Accuracy accuracy, boolean plain) {
         ChamberNetwork network = RunCompiler.network(run, plain);
-        double[] start =
-                network.start(RunCompiler.startC(run), RunCompiler.startRatio(run, network));
+        double[] start = WarmUp.start(run, network, accuracy, plain);
         return new ChamberRunner(run, network, start, accuracy).run(progress);
     }
 

@@ -4,8 +4,9 @@ import java.util.OptionalDouble;
 import org.wardon.errors.Require;
 
 /**
- * The air a run starts with. What is left open: a chamber with a compressor starts at its setting,
- * all others at outdoors, which faces then follow at the steady profile between.
+ * The air a run starts with. What is left open: a chamber with a compressor starts at its setting
+ * with faces at the steady profile, all others as the first day, come five times before, leaves
+ * them.
  *
  * @param temperatureC air, °C
  * @param humidityPct its relative humidity, percent

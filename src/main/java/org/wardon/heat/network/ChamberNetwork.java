@@ -347,8 +347,7 @@ public final class ChamberNetwork implements TreeSystem {
      */
     public double[] start(double airC, double ratio) {
         double[] y = new double[tree.size()];
-        y[AirState.ENTHALPY] = MoistAir.enthalpyJkg(airC, ratio);
-        y[AirState.HUMIDITY] = ratio;
+        setAir(airC, ratio, y);
         at(0);
         for (FaceBranch face : faces) {
             face.steadyProfile(airC, y);
@@ -427,6 +426,18 @@ public final class ChamberNetwork implements TreeSystem {
      */
     public double enthalpyJkg(double[] y) {
         return y[AirState.ENTHALPY];
+    }
+
+    /**
+     * Sets the air of a state.
+     *
+     * @param airC temperature, °C
+     * @param ratio humidity ratio, kg/kg
+     * @param y state, changed in place
+     */
+    public void setAir(double airC, double ratio, double[] y) {
+        y[AirState.ENTHALPY] = MoistAir.enthalpyJkg(airC, ratio);
+        y[AirState.HUMIDITY] = ratio;
     }
 
     /**

@@ -1,0 +1,80 @@
+package org.wardon.heat;
+
+import java.util.List;
+import org.wardon.air.MoistAir;
+import org.wardon.air.Timeline;
+import org.wardon.air.Weather;
+import org.wardon.errors.Progress;
+import org.wardon.heat.network.ChamberNetwork;
+
+/**
+ * The state a run starts with. A chamber held at its setting starts with faces at the steady
+ * profile; one that follows the weather, without lots, after its first day came five times.
+ */
+final class WarmUp {
+    private static final int DAYS = 5;
+    private static final int DAY_H = 24;
+
+    private WarmUp() {}
+
+    static double[] start(
+            ChamberRun run, ChamberNetwork network, Accuracy accuracy, boolean plain) {
+        double[] y =
+                network.start(RunCompiler.startC(run), RunCompiler.startRatio(run, network));
+        if (!RunCompiler.passive(run) || run.start().temperatureC().isPresent()) {
+            return y;
+        }
+        ChamberRun before = firstDayRepeated(run);
+        ChamberNetwork empty = RunCompiler.network(before, plain);
+        double[] warm =
+                empty.start(RunCompiler.startC(before), RunCompiler.startRatio(before, empty));
+        ChamberRunner runner = new ChamberRunner(before, empty, warm, accuracy);
+        runner.run(Progress.SILENT);
+        // Lots come last in the state: what stands before them is the same in both networks.
+        System.arraycopy(warm, 0, y, 0, warm.length);
+        run.start()
+                .humidityPct()
+                .ifPresent(
+                        pct -> {
+                            double airC = network.airC(y);
+                            network.setAir(
+                                    airC,
+                                    MoistAir.humidityRatioAt(
+                                            airC, pct / 100, RunCompiler.pressurePa(run)),
+                                    y);
+                        });
+        return y;
+    }
+
+    private static ChamberRun firstDayRepeated(ChamberRun run) {
+        int hours = DAYS * DAY_H + 3;
+        double[] temperature = new double[hours];
+        double[] humidity = new double[hours];
+        double[] sun = new double[hours];
+        double[] wind = new double[hours];
+        Weather weather = run.weather();
+        for (int h = 0; h < hours; h++) {
+            int hour = h % DAY_H;
+            temperature[h] = weather.temperatureC(hour);
+            humidity[h] = weather.humidityPct(hour);
+            sun[h] = weather.globalWm2(hour);
+            wind[h] = weather.windMs(hour);
+        }
+        return new ChamberRun(
+                run.chamberId(),
+                run.site(),
+                new Timeline(run.timeline().from().minusDays(DAYS), run.site().zone()),
+                new Weather(temperature, humidity, sun, wind),
+                run.enclosure(),
+                List.of(),
+                run.setting(),
+                List.of(),
+                List.of(),
+                run.factors(),
+                run.start(),
+                DAYS * Timeline.DAY_S,
+                run.doorMode(),
+                run.controlMode(),
+                run.extras());
+    }
+}
