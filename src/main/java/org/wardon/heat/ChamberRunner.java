@@ -80,7 +80,7 @@ final class ChamberRunner implements Integrator.StepListener {
         double pressure = RunCompiler.pressurePa(run);
         carbon = new Carbon(pressure);
         int rows = RunCompiler.hours(run) + 2;
-        hours = new HourRecorder(network, pressure, rows);
+        hours = new HourRecorder(network, rows);
         lots = new LotRecorder[run.stays().size()];
         for (int i = 0; i < lots.length; i++) {
             lots[i] = new LotRecorder(run.stays().get(i), network.lot(i), rows + 1);
@@ -137,8 +137,8 @@ final class ChamberRunner implements Integrator.StepListener {
                     run.chamberId(),
                     String.format(
                             Locale.ROOT,
-                            "the rates are not smooth, %s; air %.2f °C",
-                            stuck.getMessage(),
+                            "%s: no step is short enough; air %.2f °C",
+                            network.partAt(stuck.node()),
                             network.airC(y)));
         }
     }
@@ -152,6 +152,10 @@ final class ChamberRunner implements Integrator.StepListener {
         hours.stepped(state);
         for (int i = 0; i < lots.length; i++) {
             lots[i].stepped(to, state, totals);
+            double warm = network.lot(i).warmestC(state);
+            if (!(warm > COLDEST_C && warm < WARMEST_C)) {
+                stop(to, "lot " + run.stays().get(i).lot().id(), warm);
+            }
         }
         double exchanged = terms.exchanged(totals);
         double respiration = respirationJ();
@@ -198,13 +202,6 @@ final class ChamberRunner implements Integrator.StepListener {
 
     private void endHour(double t) {
         for (int i = 0; i < lots.length; i++) {
-            LotBranch lot = network.lot(i);
-            if (lots[i].present()) {
-                double warm = lot.warmestC(y);
-                if (!(warm > COLDEST_C && warm < WARMEST_C)) {
-                    stop(t, "lot " + run.stays().get(i).lot().id(), warm);
-                }
-            }
             lots[i].row(t, y, totals);
         }
         hours.row(t, y, totals, respirationJ(), carbon.ppm());

@@ -92,10 +92,7 @@ final class GivenAirRunner implements Integrator.StepListener, Integrator.Trigge
         try {
             return integrator.advance(t, y, until, this, this);
         } catch (StepTooShort stuck) {
-            throw new RunStopped(
-                    stuck.time(),
-                    stay.lot().id(),
-                    "the rates are not smooth: " + stuck.getMessage());
+            throw new RunStopped(stuck.time(), stay.lot().id(), "the lot: no step is short enough");
         }
     }
 

@@ -3,7 +3,6 @@ package org.wardon.heat;
 import java.util.EnumMap;
 import java.util.Map;
 import java.util.Objects;
-import org.wardon.air.MoistAir;
 import org.wardon.heat.network.ChamberNetwork;
 import org.wardon.heat.network.Terms;
 
@@ -11,7 +10,6 @@ import org.wardon.heat.network.Terms;
 final class HourRecorder {
     private final ChamberNetwork network;
     private final Terms terms;
-    private final double pressurePa;
     private final Map<Hours.Column, double[]> columns = new EnumMap<>(Hours.Column.class);
     private int size;
     private double lastS;
@@ -24,10 +22,9 @@ final class HourRecorder {
     private double highest = Double.NEGATIVE_INFINITY;
     private double supply = Double.NaN;
 
-    HourRecorder(ChamberNetwork network, double pressurePa, int mostRows) {
+    HourRecorder(ChamberNetwork network, int mostRows) {
         this.network = network;
         this.terms = network.terms();
-        this.pressurePa = pressurePa;
         for (Hours.Column column : Hours.Column.values()) {
             columns.put(column, new double[mostRows]);
         }
@@ -57,7 +54,7 @@ final class HourRecorder {
         set(Hours.Column.AIR_C, (terms.airC(totals) - lastAir) / span);
         set(Hours.Column.AIR_LOWEST_C, Math.min(lowest, airC));
         set(Hours.Column.AIR_HIGHEST_C, Math.max(highest, airC));
-        set(Hours.Column.HUMIDITY, MoistAir.humidityFraction(airC, network.ratio(y), pressurePa));
+        set(Hours.Column.HUMIDITY, network.humidityFraction(y));
         set(Hours.Column.OUTDOOR_C, network.outdoorC());
         set(Hours.Column.COOLING_W, (terms.removed(totals) - lastRemoved) / span);
         set(Hours.Column.POWER_W, (terms.electricity(totals) - lastElectricity) / span);

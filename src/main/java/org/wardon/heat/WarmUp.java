@@ -19,8 +19,7 @@ final class WarmUp {
 
     static double[] start(
             ChamberRun run, ChamberNetwork network, Accuracy accuracy, boolean plain) {
-        double[] y =
-                network.start(RunCompiler.startC(run), RunCompiler.startRatio(run, network));
+        double[] y = network.start(RunCompiler.startC(run), RunCompiler.startRatio(run, network));
         if (!RunCompiler.passive(run) || run.start().temperatureC().isPresent()) {
             return y;
         }

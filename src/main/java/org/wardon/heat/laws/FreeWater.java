@@ -14,8 +14,11 @@ public final class FreeWater {
     /** What a face cannot hold runs off over this time, s (assumption). */
     public static final double RUNS_OFF_S = 900;
 
-    /** Differences of vapour pressure are rounded within this of 0, Pa. */
-    public static final double ROUND_PA = 1;
+    /**
+     * Differences of vapour pressure are rounded within this of 0, Pa: 0.06 K of dew point at 10
+     * °C.
+     */
+    public static final double ROUND_PA = 5;
 
     private FreeWater() {}
 

@@ -419,6 +419,17 @@ public final class ChamberNetwork implements TreeSystem {
     }
 
     /**
+     * Returns the relative humidity of the air of a state.
+     *
+     * @param y state
+     * @return 0 to 1, a little above where supersaturated
+     */
+    public double humidityFraction(double[] y) {
+        double pa = MoistAir.vapourPressurePa(y[AirState.HUMIDITY], inputs.pressurePa());
+        return pa / Saturation.pressurePa(airC(y));
+    }
+
+    /**
      * Returns the enthalpy of the air of a state.
      *
      * @param y state
@@ -599,6 +610,29 @@ public final class ChamberNetwork implements TreeSystem {
         for (CoolerPart cooler : coolers) {
             cooler.tolerances(tolerances);
         }
+    }
+
+    /**
+     * Returns what a node of the state belongs to.
+     *
+     * @param node index into the state
+     * @return such as {@code air} or {@code lot M1}
+     */
+    public String partAt(int node) {
+        if (node < 2) {
+            return node == AirState.ENTHALPY ? "air" : "humidity of the air";
+        }
+        for (int i = lots.length - 1; i >= 0; i--) {
+            if (node >= lots[i].branch.start) {
+                return "lot " + inputs.lots().get(i).id();
+            }
+        }
+        for (int i = faces.length - 1; i >= 0; i--) {
+            if (node >= faces[i].firstNode() && node <= faces[i].lastNode()) {
+                return "face " + inputs.enclosure().faces().get(i).name();
+            }
+        }
+        return "cooler or structure";
     }
 
     @Override

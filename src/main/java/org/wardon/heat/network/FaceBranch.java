@@ -129,6 +129,14 @@ final class FaceBranch implements Part {
         return areaM2 * sum;
     }
 
+    int firstNode() {
+        return branch.start;
+    }
+
+    int lastNode() {
+        return branch.blockAt(1);
+    }
+
     double surfaceC(double[] y) {
         return y[branch.blockAt(0)];
     }

@@ -132,7 +132,7 @@ public final class Integrator {
             double factor = error < 1e12 ? SAFETY / Math.cbrt(error) : SHORTEST;
             h *= Math.max(SHORTEST, Math.min(factor, 0.8));
             if (!(h > shortestStep)) {
-                throw new StepTooShort(now, h);
+                throw new StepTooShort(now, h, method.worstNode);
             }
         }
     }

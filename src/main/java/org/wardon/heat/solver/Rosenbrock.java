@@ -42,6 +42,9 @@ final class Rosenbrock {
     private final double[] flow4;
     private final double[] flowAlong;
 
+    /** Where the error of the step tried last was largest: a hub node, or a branch's first. */
+    int worstNode;
+
     /** The state at the end of the step tried last. */
     final double[] end;
 
@@ -108,16 +111,24 @@ final class Rosenbrock {
         double[] tolerance = system.tolerances();
         double worst = 0;
         for (int i = 0; i < tree.hub(); i++) {
-            worst = Math.max(worst, Math.abs(u4[i] / tolerance[i]));
+            double e = Math.abs(u4[i] / tolerance[i]);
+            if (!(e <= worst)) {
+                worst = e;
+                worstNode = i;
+            }
         }
         for (Branch branch : tree.branches()) {
             if (branch.active()) {
                 double sum = 0;
                 for (int i = branch.start; i < branch.start + branch.size(); i++) {
-                    double e = u4[i] / tolerance[i];
-                    sum += e * e;
+                    double share = u4[i] / tolerance[i];
+                    sum += share * share;
                 }
-                worst = Math.max(worst, Math.sqrt(sum / branch.size()));
+                double e = Math.sqrt(sum / branch.size());
+                if (!(e <= worst)) {
+                    worst = e;
+                    worstNode = branch.start;
+                }
             }
         }
         return worst;
