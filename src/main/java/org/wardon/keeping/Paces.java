@@ -44,7 +44,10 @@ public final class Paces {
         put(
                 Mechanism.FREEZING,
                 (mean, skin, humid, ppm) -> mean < model.freezingC() ? AT_ONCE_PER_DAY : 0);
-        model.lot().transpiration().ifPresent(range -> lose(range.apply(draw.transpiration())));
+        double packed = model.lot().packageKgPerKgSPa();
+        model.lot()
+                .transpiration()
+                .ifPresent(range -> lose(range.apply(draw.transpiration()).behind(packed)));
         rest();
     }
 

@@ -26,13 +26,13 @@ final class RipeningLot {
     RipeningLot(Giver giver, Draw draw) {
         this.giver = giver;
         this.draw = draw;
-        model = KeepingModel.of(giver.lot());
+        model = giver.model();
         giving = model.response().giving();
         OptionalDouble level = model.response().triggerPpm(draw);
         trigger = new Trigger(level.orElse(Double.POSITIVE_INFINITY), model.lowestSafeC());
         Paces paces = model.paces(draw);
         green = paces.aged(paces.greenShare(), true);
-        greenUsed = giver.lot().door().usedFraction().orElse(paces.beforeArrival(green));
+        greenUsed = model.lot().door().usedFraction().orElse(paces.beforeArrival(green));
     }
 
     private boolean here(double atS) {
@@ -49,8 +49,8 @@ final class RipeningLot {
 
     private double stage(double atS) {
         return atS >= ripensS
-                ? Stage.giving(giver.lot().commodity(), Ripeness.RIPE, draw)
-                : Stage.giving(giver.lot().commodity(), giver.lot().door().ripeness(), draw);
+                ? Stage.giving(model.lot().commodity(), Ripeness.RIPE, draw)
+                : Stage.giving(model.lot().commodity(), model.lot().door().ripeness(), draw);
     }
 
     /** Feels the air of a step. */

@@ -53,4 +53,20 @@ public record TranspirationLaw(
         return new TranspirationLaw(
                 conductanceKgPerKgSPa * factor, vapourPressureLowering, filmKgPerKgSPa);
     }
+
+    /**
+     * Returns the law of produce behind a package: both conductances in series.
+     *
+     * @param packageKgPerKgSPa package air to the air outside, kg/(kg s Pa); infinite for none
+     * @return the law
+     */
+    public TranspirationLaw behind(double packageKgPerKgSPa) {
+        if (Double.isInfinite(packageKgPerKgSPa)) {
+            return this;
+        }
+        return new TranspirationLaw(
+                Transpirations.inSeries(conductanceKgPerKgSPa, packageKgPerKgSPa),
+                vapourPressureLowering,
+                Transpirations.inSeries(filmKgPerKgSPa, packageKgPerKgSPa));
+    }
 }

@@ -31,10 +31,10 @@ public final class Workable {
     /** {@code [temperature][humidity]}. */
     private final Verdict[][] verdicts = new Verdict[Settings.TEMPERATURES][Settings.HUMIDITIES];
 
-    private Workable(Wish wish, List<Draw> draws) {
+    private Workable(Wish wish, KeepingModel model, List<Draw> draws) {
         this.wish = wish;
         this.draws = draws;
-        model = KeepingModel.of(wish.lot());
+        this.model = model;
         fill();
         judge();
     }
@@ -47,7 +47,19 @@ public final class Workable {
      * @return its workable settings
      */
     public static Workable of(Wish wish, List<Draw> draws) {
-        return new Workable(wish, List.copyOf(draws));
+        return of(wish, KeepingModel.of(wish.lot()), draws);
+    }
+
+    /**
+     * Works out the settings of a lot whose model is there already.
+     *
+     * @param wish the lot and its days
+     * @param model the lot's model
+     * @param draws the draws, 32 are usual
+     * @return its workable settings
+     */
+    public static Workable of(Wish wish, KeepingModel model, List<Draw> draws) {
+        return new Workable(wish, model, List.copyOf(draws));
     }
 
     private void fill() {

@@ -170,7 +170,7 @@ class LotFatesTest {
         ChamberEthylene run =
                 ChamberEthylene.of(
                         new ChamberAir(hours, exchange, free),
-                        List.of(new Giver(apples, cold, 3_000, 20 * DAY_S)),
+                        List.of(new Giver(KeepingModel.of(apples), cold, 3_000, 20 * DAY_S)),
                         ChamberEthylene.OUTDOOR_PPM,
                         Draw.MEDIAN);
         double rate =
@@ -195,7 +195,7 @@ class LotFatesTest {
         ChamberEthylene run =
                 ChamberEthylene.of(
                         new ChamberAir(hours, exchange, free),
-                        List.of(new Giver(bananas, warm, 3_000, 30 * DAY_S)),
+                        List.of(new Giver(KeepingModel.of(bananas), warm, 3_000, 30 * DAY_S)),
                         ChamberEthylene.OUTDOOR_PPM,
                         Draw.MEDIAN);
         double ripens = run.ripensS(0);

@@ -4,7 +4,6 @@ import java.util.ArrayList;
 import java.util.List;
 import java.util.Map;
 import java.util.Optional;
-import java.util.function.DoubleFunction;
 import org.wardon.advice.wording.Words;
 import org.wardon.errors.BadInput;
 import org.wardon.errors.Fault;
@@ -16,10 +15,6 @@ import org.wardon.keeping.Draws;
 import org.wardon.keeping.KeptLot;
 import org.wardon.keeping.LotAtDoor;
 import org.wardon.lots.ClassValues;
-import org.wardon.lots.Item;
-import org.wardon.lots.Items;
-import org.wardon.lots.TranspirationLaw;
-import org.wardon.lots.Transpirations;
 import org.wardon.produce.Commodity;
 import org.wardon.produce.Reason;
 import org.wardon.reference.ReferenceBook;
@@ -99,14 +94,11 @@ public final class SharingAdvice {
             return Optional.empty();
         }
         commodity.ifPresent(one -> seen.add(one.id()));
-        return commodity.map(one -> Wish.of(kept(one), wanted));
-    }
-
-    private KeptLot kept(Commodity commodity) {
-        Item item = Items.of(commodity, classes).value();
-        DoubleFunction<TranspirationLaw> laws =
-                share -> Transpirations.of(commodity, item, classes, share).value();
-        return new KeptLot(commodity.id(), commodity, LotAtDoor.SOUND, Optional.of(laws));
+        return commodity.map(
+                one ->
+                        Wish.of(
+                                KeptLot.inOpenPackage(one.id(), one, LotAtDoor.SOUND, classes),
+                                wanted));
     }
 
     private ShareAnswer answer(SharingAnswer found) {

@@ -97,7 +97,7 @@ final class Actions {
         double price = sheet.plan().market().pricePerKg() * sheet.plan().massKg();
         double soundHere = fates.shareSoundWhenSold(sheet.soldS());
         for (ChamberPlan other : outcome.model().plan().chambers()) {
-            if (other.id().equals(here)) {
+            if (other.id().equals(here) || harms(sheet, other)) {
                 continue;
             }
             OtherChambers.There there =
@@ -132,6 +132,13 @@ final class Actions {
             }
         }
         move.ifPresent(found::add);
+    }
+
+    /** A chamber colder than the lot bears, or a cold one for a lot that is not cured. */
+    private boolean harms(LotSheet sheet, ChamberPlan other) {
+        double meanC = ById.get(chambers, other.id()).airC().mean();
+        boolean uncuredIntoCold = sheet.model().uncured() && !other.coolers().isEmpty();
+        return meanC < sheet.model().lowestSafeC() - other.setting().bandK() || uncuredIntoCold;
     }
 
     private double valueHere(LotSheet sheet) {

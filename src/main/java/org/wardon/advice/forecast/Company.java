@@ -8,6 +8,7 @@ import org.wardon.air.Timeline;
 import org.wardon.files.forecast.Because;
 import org.wardon.files.forecast.Forecast;
 import org.wardon.keeping.ChamberEthylene;
+import org.wardon.keeping.Draw;
 import org.wardon.keeping.Draws;
 import org.wardon.lots.LotHistory;
 import org.wardon.plan.ChamberPlan;
@@ -19,6 +20,7 @@ import org.wardon.sharing.Sharing;
 import org.wardon.sharing.Together;
 import org.wardon.sharing.Verdict;
 import org.wardon.sharing.Wish;
+import org.wardon.sharing.Workable;
 
 /**
  * Who stands with whom in the chambers of a plan, and whether they may: the verdict by what the
@@ -60,9 +62,12 @@ final class Company {
     /** Why pairs that no setting suits do not go together. */
     private List<Reason> apart(List<LotSheet> lots) {
         List<Reason> reasons = new ArrayList<>();
-        List<Wish> wishes = lots.stream().map(Company::wish).toList();
-        var draws = Draws.seeded(outcome.model().plan().seed(), StoreRun.DRAWS);
-        for (PairVerdict pair : Sharing.of(wishes, draws).pairs()) {
+        List<Draw> draws = Draws.seeded(outcome.model().plan().seed(), StoreRun.DRAWS);
+        List<Workable> workable =
+                lots.parallelStream()
+                        .map(sheet -> Workable.of(wish(sheet), sheet.model(), draws))
+                        .toList();
+        for (PairVerdict pair : Sharing.among(workable).pairs()) {
             if (pair.verdict() == Verdict.NO) {
                 pair.reasons().stream().limit(1).forEach(reasons::add);
             }

@@ -188,7 +188,7 @@ final class Fates {
         for (LotSheet sheet : present(chamberId, course)) {
             givers.add(
                     new Giver(
-                            sheet.kept(),
+                            sheet.model(),
                             course.lot(sheet.id()).history(),
                             sheet.plan().massKg(),
                             sheet.clock().leavesS()));

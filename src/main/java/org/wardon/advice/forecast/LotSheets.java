@@ -15,10 +15,9 @@ import org.wardon.keeping.KnownLife;
 import org.wardon.keeping.LotAtDoor;
 import org.wardon.keeping.Purpose;
 import org.wardon.lots.ClassValues;
-import org.wardon.lots.Item;
-import org.wardon.lots.Items;
+import org.wardon.lots.Lots;
+import org.wardon.lots.Shares;
 import org.wardon.lots.StackCooling;
-import org.wardon.lots.Transpirations;
 import org.wardon.plan.AtDoor;
 import org.wardon.plan.LotPlan;
 import org.wardon.plan.PackagePlan;
@@ -58,16 +57,20 @@ final class LotSheets {
 
     private LotSheet sheet(LotPlan lot) {
         Commodity commodity = book.get(lot.commodity());
-        Item item = Items.of(commodity, classes).value();
+        double vapour =
+                Lots.of(
+                                lot.id(),
+                                commodity,
+                                lot.massKg(),
+                                kind(lot.packed()),
+                                lot.atDoor().ripeness(),
+                                classes,
+                                Shares.MIDDLE)
+                        .value()
+                        .packing()
+                        .vapourKgPerKgSPa();
         KeptLot kept =
-                new KeptLot(
-                        lot.id(),
-                        commodity,
-                        door(lot),
-                        Optional.of(
-                                share ->
-                                        Transpirations.of(commodity, item, classes, share)
-                                                .value()));
+                KeptLot.inOpenPackage(lot.id(), commodity, door(lot), classes).packedIn(vapour);
         return new LotSheet(
                 lot, commodity, kind(lot.packed()), classes, clock(lot), KeepingModel.of(kept));
     }

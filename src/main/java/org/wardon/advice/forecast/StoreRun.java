@@ -29,7 +29,6 @@ final class StoreRun {
     static final int MOST_BEYOND_DAYS = 10;
 
     private static final double SETTLED_K_A_DAY = 0.3;
-    private static final int BEYOND_STEP_DAYS = 2;
 
     private final StoreModel model;
     private final Fates fates;
@@ -42,15 +41,10 @@ final class StoreRun {
     }
 
     StoreOutcome run(Progress progress) {
-        double durationS = horizonS;
-        Map<String, Course> horizon = model.plain(durationS, progress);
-        Map<String, Course> courses = horizon;
-        int beyond = BEYOND_STEP_DAYS;
-        while (beyond <= MOST_BEYOND_DAYS && !settled(courses, durationS)) {
-            durationS = horizonS + beyond * Timeline.DAY_S;
-            courses = model.plain(durationS, progress);
-            beyond += BEYOND_STEP_DAYS;
-        }
+        Map<String, Course> horizon = model.plain(horizonS, progress);
+        double durationS = settledS(horizon);
+        Map<String, Course> courses =
+                durationS > horizonS ? model.plain(durationS, progress) : horizon;
         Map<String, ChamberEthylene> ethylene = fates.ethylene(courses, Draw.MEDIAN);
         Map<String, LotHistory> histories = fates.histories(courses, ethylene);
         Map<String, LotCourse> without = model.without(Draw.MEDIAN, durationS);
@@ -113,6 +107,20 @@ final class StoreRun {
                             sheet.model().basis(history)));
         }
         return all;
+    }
+
+    /** When every lot's daily mean has come to rest, s: the horizon, or found by a sketch. */
+    private double settledS(Map<String, Course> horizon) {
+        if (settled(horizon, horizonS)) {
+            return horizonS;
+        }
+        double lastS = horizonS + MOST_BEYOND_DAYS * Timeline.DAY_S;
+        Map<String, Course> sketch = model.sketch(lastS);
+        double atS = horizonS + Timeline.DAY_S;
+        while (atS < lastS && !settled(sketch, atS)) {
+            atS += Timeline.DAY_S;
+        }
+        return atS;
     }
 
     /** Whether every lot's daily mean has come to rest a day after the last outage. */

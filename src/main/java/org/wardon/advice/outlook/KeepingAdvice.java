@@ -5,8 +5,6 @@ import java.util.Comparator;
 import java.util.List;
 import java.util.Locale;
 import java.util.Map;
-import java.util.Optional;
-import java.util.function.DoubleFunction;
 import java.util.regex.Matcher;
 import java.util.regex.Pattern;
 import org.wardon.errors.BadInput;
@@ -26,11 +24,7 @@ import org.wardon.keeping.LotAtDoor;
 import org.wardon.keeping.Outlook;
 import org.wardon.keeping.Spread;
 import org.wardon.lots.ClassValues;
-import org.wardon.lots.Item;
-import org.wardon.lots.Items;
 import org.wardon.lots.LotHistory;
-import org.wardon.lots.TranspirationLaw;
-import org.wardon.lots.Transpirations;
 import org.wardon.produce.Commodity;
 import org.wardon.reference.ReferenceBook;
 
@@ -83,7 +77,9 @@ public final class KeepingAdvice {
         double endS = told.timeS(told.size() - 1);
         LotHistory followed = carriedOn(request.condition(), told, endS);
         double fromS = request.condition() instanceof KeepRequest.Steady ? 0 : endS;
-        KeepingModel model = KeepingModel.of(kept(commodity, door(request)));
+        KeepingModel model =
+                KeepingModel.of(
+                        KeptLot.inOpenPackage(commodity.id(), commodity, door(request), classes));
         Outlook outlook = model.outlook(followed, Draws.seeded(SEED, DRAWS), fromS, endS);
         double usedPct = 100 * model.follow(followed, Draw.MEDIAN).usedAt(endS);
         return new KeepReport(
@@ -192,13 +188,6 @@ public final class KeepingAdvice {
             }
         }
         return door;
-    }
-
-    private KeptLot kept(Commodity commodity, LotAtDoor door) {
-        Item item = Items.of(commodity, classes).value();
-        DoubleFunction<TranspirationLaw> laws =
-                share -> Transpirations.of(commodity, item, classes, share).value();
-        return new KeptLot(commodity.id(), commodity, door, Optional.of(laws));
     }
 
     private static KeepAnswer answer(Commodity commodity, Outlook outlook, double usedPct) {
