@@ -43,7 +43,8 @@ public final class Giving {
 
     /**
      * Returns what a commodity gives off. Rows of ripe or turning fruit hold once it ripens, all
-     * others before; where one kind is missing the other holds throughout.
+     * others before; where one kind is missing the other holds throughout. A row that prints only
+     * "more than" speaks of ripening fruit: before that the class low is taken (assumption).
      *
      * @param commodity the commodity
      * @return its rates
@@ -55,21 +56,30 @@ public final class Giving {
         for (EthyleneRate row : commodity.breath().ethylene()) {
             OptionalDouble at = row.temperatureC();
             if (at.isPresent()) {
-                (RIPENING.contains(row.ripeness()) ? late : early)
-                        .add(point(at.getAsDouble(), row));
+                boolean ripening = RIPENING.contains(row.ripeness()) || moreThan(row);
+                (ripening ? late : early).add(point(at.getAsDouble(), row));
                 source = row.microlitrePerKgHour().sourceId();
             }
         }
+        if (early.isEmpty() && commodity.breath().ethylene().stream().anyMatch(Giving::moreThan)) {
+            early.add(classPoint("low"));
+        }
         if (early.isEmpty() && late.isEmpty()) {
-            double[] bounds =
-                    CLASSES.getOrDefault(
-                            commodity.needs().ethyleneProduction(), new double[] {0.01, 1});
-            early.add(new double[] {CLASS_AT_C, bounds[0], bounds[1]});
+            early.add(classPoint(commodity.needs().ethyleneProduction()));
         }
         return new Giving(
                 new RateCurve(early.isEmpty() ? late : early),
                 new RateCurve(late.isEmpty() ? early : late),
                 source);
+    }
+
+    private static boolean moreThan(EthyleneRate row) {
+        return row.microlitrePerKgHour().high().isEmpty();
+    }
+
+    private static double[] classPoint(String name) {
+        double[] bounds = CLASSES.getOrDefault(name, new double[] {0.01, 1});
+        return new double[] {CLASS_AT_C, bounds[0], bounds[1]};
     }
 
     private static double[] point(double atC, EthyleneRate row) {
