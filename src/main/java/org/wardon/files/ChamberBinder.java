@@ -8,6 +8,7 @@ import org.wardon.cooling.Setting;
 import org.wardon.enclosure.Box;
 import org.wardon.enclosure.Enclosure;
 import org.wardon.enclosure.Face;
+import org.wardon.enclosure.FaceName;
 import org.wardon.enclosure.Gains;
 import org.wardon.files.json.Part;
 import org.wardon.plan.ChamberPlan;
@@ -67,8 +68,13 @@ final class ChamberBinder {
                 inputs.number(chamber, "leakageAirChangesPerDay", leakage),
                 inputs.numberElse(chamber, "freshAirM3PerHour", 0),
                 gains(chamber.at("gains")),
-                inputs.numberElse(chamber, "structureCapacityJK", 0),
+                inputs.number(chamber, "structureCapacityJK", structure(box)),
                 chamber.at("films").text().equals(Optional.of("computed")));
+    }
+
+    private static Default structure(Box box) {
+        Default share = Defaults.STRUCTURE_J_M2K;
+        return new Default(share.value() * box.areaM2(FaceName.FLOOR), "J/K", share.mark());
     }
 
     private static Default leakage(List<Face> faces) {

@@ -38,6 +38,12 @@ public final class Defaults {
     /** Leakage of a chamber of straw, thatch, bamboo or other loose build. */
     public static final Default LEAKAGE_LOOSE = new Default(30, "1/day", COMMON_PRACTICE);
 
+    /**
+     * Heat capacity of racks, pallets and coil a square metre of floor: 15 kg of steel and 5 kg of
+     * wood.
+     */
+    public static final Default STRUCTURE_J_M2K = new Default(15_000, "J/(m2 K)", ASSUMPTION);
+
     /** Uplift of the heat flow through all faces. */
     public static final Default THERMAL_BRIDGE_PCT = new Default(10, "%", COMMON_PRACTICE);
 

@@ -187,6 +187,7 @@ class PlanReaderTest {
                         "$.chambers[0].thermalBridgePct 10 % (common practice, no source)",
                         "$.chambers[0].leakageAirChangesPerDay 2 1/day (common practice, no"
                                 + " source)",
+                        "$.chambers[0].structureCapacityJK 180000 J/K (assumption)",
                         "$.chambers[0].setting.bandK 1 K (assumption)",
                         "$.chambers[0].setting.humidityPct 90 % (assumption)",
                         "$.chambers[0].capacityKg 4500 kg (common practice, no source)",
