@@ -8,11 +8,7 @@ public enum ControlMode {
     MODULATING,
     /**
      * Instead of the coolers, an unlimited one that never lets the air above the setting: what it
-     * takes is the load. Its coil stands {@value #IDEAL_COIL_BELOW_K} K below the air (common
-     * practice for rooms of produce).
+     * takes is the load. Its coil stands 6 K below the air (common practice for rooms of produce).
      */
-    IDEAL;
-
-    /** Coil of the ideal cooler below the air, K. */
-    public static final double IDEAL_COIL_BELOW_K = 6;
+    IDEAL
 }

@@ -5,19 +5,12 @@ import java.util.Arrays;
 import java.util.List;
 import java.util.Optional;
 import org.wardon.air.MoistAir;
-import org.wardon.air.SaturatedAir;
 import org.wardon.cooling.Compressor;
 import org.wardon.cooling.Cooler;
-import org.wardon.cooling.Thermostat;
-import org.wardon.enclosure.Beyond;
-import org.wardon.enclosure.Door;
-import org.wardon.enclosure.DoorExchange;
 import org.wardon.enclosure.Enclosure;
 import org.wardon.enclosure.Face;
-import org.wardon.enclosure.Layer;
 import org.wardon.enclosure.Leakage;
 import org.wardon.enclosure.OutsideBoundary;
-import org.wardon.enclosure.Surroundings;
 import org.wardon.heat.solver.Tree;
 import org.wardon.heat.solver.TreeSystem;
 import org.wardon.lots.Lot;
@@ -28,12 +21,6 @@ import org.wardon.produce.Reason;
  * ratio first, then faces, structure, coolers and lots.
  */
 public final class ChamberNetwork implements TreeSystem {
-    private static final double COOLER_STAGE_BANDS = 1;
-    private static final double IDEAL_FOLLOWS_IN_S = 0.3;
-
-    /** Coil of the ideal cooler below the air, K (common practice for rooms of produce). */
-    public static final double IDEAL_COIL_BELOW_K = 6;
-
     private final NetworkInputs inputs;
     private final Tree tree = new Tree(2);
     private final AirState air;
@@ -68,8 +55,8 @@ public final class ChamberNetwork implements TreeSystem {
         this.inputs = inputs;
         air = new AirState(inputs.pressurePa());
         startAir = new AirState(inputs.pressurePa());
-        outdoors = outdoorAir();
-        beyondDoor = airBeyondDoor();
+        outdoors = AirAround.outdoors(inputs);
+        beyondDoor = AirAround.beyondDoor(inputs, outdoors);
         faces = faces();
         double structureJK = inputs.enclosure().structureCapacityJK();
         structure =
@@ -80,7 +67,14 @@ public final class ChamberNetwork implements TreeSystem {
         boolean unlimited = inputs.control() == NetworkInputs.Control.IDEAL;
         coolers = unlimited ? new CoolerPart[0] : coolers();
         idealFlowAt = flows;
-        ideal = unlimited ? Optional.of(idealCooler()) : Optional.empty();
+        ideal =
+                unlimited
+                        ? Optional.of(
+                                IdealCooler.of(
+                                        take(IdealCooler.FLOWS),
+                                        inputs,
+                                        dryAirKg(inputs.enclosure().box().volumeM3())))
+                        : Optional.empty();
         exchangeFlowAt = take(AirExchange.FLOWS);
         exchange = exchange();
         gainsFlowAt = take(InnerGains.FLOWS);
@@ -119,67 +113,13 @@ public final class ChamberNetwork implements TreeSystem {
         return parts.toArray(new Part[0]);
     }
 
-    private HourlyAir outdoorAir() {
-        Surroundings around = inputs.around();
-        int n = around.hours() + 1;
-        double[] airC = new double[n];
-        double[] ratio = new double[n];
-        for (int h = 0; h < n; h++) {
-            airC[h] = around.weather().temperatureC(h);
-            // Stations state humidity over water at all temperatures.
-            double pa = around.weather().humidityPct(h) / 100 * SaturatedAir.overWaterPa(airC[h]);
-            ratio[h] = MoistAir.humidityRatio(pa, inputs.pressurePa());
-        }
-        return new HourlyAir(airC, ratio);
-    }
-
-    private HourlyAir airBeyondDoor() {
-        Optional<Door> door = inputs.enclosure().door();
-        if (door.isEmpty()) {
-            return outdoors;
-        }
-        Beyond beyond = door.get().beyond();
-        int n = inputs.around().hours() + 1;
-        double[] airC = new double[n];
-        double[] ratio = new double[n];
-        for (int h = 0; h < n; h++) {
-            airC[h] = OutsideBoundary.airBeyondC(beyond, inputs.around(), h);
-            double most = MoistAir.saturatedHumidityRatio(airC[h], inputs.pressurePa());
-            double there =
-                    beyond instanceof Beyond.Neighbour next
-                            ? inputs.neighbourRatio().getOrDefault(next.chamberId(), NONE)[h]
-                            : outdoors.ratio(h);
-            ratio[h] = Math.min(there, most);
-        }
-        return new HourlyAir(airC, ratio);
-    }
-
-    private static final double[] NONE = {};
-
     private FaceBranch[] faces() {
         Enclosure enclosure = inputs.enclosure();
         List<FaceBranch> list = new ArrayList<>();
         for (Face face : enclosure.faces()) {
             OutsideBoundary boundary = OutsideBoundary.of(enclosure, face, inputs.around());
             boundaries.add(boundary);
-            List<Layer> layers = new ArrayList<>(boundary.addedLayers());
-            layers.addAll(face.layers());
-            double inside = FaceFilms.insideM2KW(enclosure, face, boundary, inputs);
-            double wall = inputs.tuning().wall();
-            FaceGrid grid = new FaceGrid(layers, inside, wall);
-            double area = enclosure.box().areaM2(face.name());
-            double steady = grid.steady(boundary.filmWm2K(0) * wall);
-            double bridge = enclosure.thermalBridgePct() / 100 * area * steady;
-            list.add(
-                    new FaceBranch(
-                            tree,
-                            take(FaceBranch.FLOWS),
-                            area,
-                            grid,
-                            bridge,
-                            FaceFilms.convectiveWm2K(boundary.direction()),
-                            wall,
-                            inputs.plain()));
+            list.add(FaceBranch.of(tree, take(FaceBranch.FLOWS), face, boundary, inputs));
         }
         return list.toArray(new FaceBranch[0]);
     }
@@ -193,38 +133,15 @@ public final class ChamberNetwork implements TreeSystem {
                         "cooler " + cooler.kind() + " is not built into the heat model");
             }
             Compressor asked = UnitTuning.of(unit, inputs);
-            double followed =
-                    Thermostat.followedC(inputs.setting(), unit.lowestC())
-                            - inputs.tuning().thermostatOffsetK()
-                            + stage * COOLER_STAGE_BANDS * inputs.setting().bandK();
-            CoolerPart.Following following =
-                    new CoolerPart.Following(
-                            asked.control() == Compressor.Control.MODULATING,
-                            followed,
-                            inputs.setting().bandK(),
-                            unit.fanAlways() ? unit.fanW() : 0);
             list.add(
                     new CoolerPart(
                             tree,
                             take(CoolerPart.FLOWS),
                             asked.law(inputs.pressurePa()),
-                            following));
+                            UnitTuning.following(unit, asked, stage, inputs)));
             stage++;
         }
         return list.toArray(new CoolerPart[0]);
-    }
-
-    private IdealCooler idealCooler() {
-        double wattsPerK =
-                dryAirKg(inputs.enclosure().box().volumeM3())
-                        * MoistAir.DRY_AIR_J_KG_K
-                        / IDEAL_FOLLOWS_IN_S;
-        return new IdealCooler(
-                take(IdealCooler.FLOWS),
-                inputs.setting().temperatureC() - inputs.tuning().thermostatOffsetK(),
-                IDEAL_COIL_BELOW_K,
-                wattsPerK,
-                inputs.plain());
     }
 
     private AirExchange exchange() {
@@ -235,24 +152,11 @@ public final class ChamberNetwork implements TreeSystem {
         double leak = Leakage.leakM3s(enclosure.leakageAirChangesPerDay(), volume) * factor;
         double fresh = enclosure.freshAirM3PerHour() / 3600 * factor;
         return new AirExchange(
-                exchangeFlowAt, inputs.pressurePa(), leak * perM3, fresh * perM3, doorway(factor));
-    }
-
-    private AirExchange.Doorway doorway(double factor) {
-        Optional<Door> door = inputs.enclosure().door();
-        if (door.isEmpty()) {
-            return new AirExchange.Doorway(0, 0, 0, 0, 0);
-        }
-        Door d = door.get();
-        double usedS = d.to().toSecondOfDay() - d.from().toSecondOfDay();
-        double open = Math.min(d.secondsOpen(), usedS / Math.max(d.openingsPerDay(), 1));
-        boolean averaged = inputs.averagedDoor() && open > 0;
-        return new AirExchange.Doorway(
-                d.widthM(),
-                d.heightM(),
-                factor * DoorExchange.share(DoorExchange.FLOW_FACTOR, d.effectiveness()),
-                averaged ? open : 0,
-                d.openingsPerDay() / usedS);
+                exchangeFlowAt,
+                inputs.pressurePa(),
+                leak * perM3,
+                fresh * perM3,
+                AirAround.doorway(inputs, factor));
     }
 
     private LotBranch lot(Lot lot) {

@@ -1,6 +1,12 @@
 package org.wardon.heat.network;
 
+import java.util.ArrayList;
+import java.util.List;
 import org.wardon.air.MoistAir;
+import org.wardon.enclosure.Enclosure;
+import org.wardon.enclosure.Face;
+import org.wardon.enclosure.Layer;
+import org.wardon.enclosure.OutsideBoundary;
 import org.wardon.heat.laws.FaceWater;
 import org.wardon.heat.laws.FreeWater;
 import org.wardon.heat.solver.Branch;
@@ -61,7 +67,7 @@ final class FaceBranch implements Part {
     private double runOff;
     private double runOffByWater;
 
-    FaceBranch(
+    private FaceBranch(
             Tree tree,
             int flowAt,
             double areaM2,
@@ -79,6 +85,28 @@ final class FaceBranch implements Part {
         this.wallFactor = wallFactor;
         this.saturation = Saturation.curve(plain);
         farFilm(25);
+    }
+
+    /** Compiles a face of a chamber. */
+    static FaceBranch of(
+            Tree tree, int flowAt, Face face, OutsideBoundary boundary, NetworkInputs inputs) {
+        Enclosure enclosure = inputs.enclosure();
+        List<Layer> layers = new ArrayList<>(boundary.addedLayers());
+        layers.addAll(face.layers());
+        double wall = inputs.tuning().wall();
+        double inside = FaceFilms.insideM2KW(enclosure, face, boundary, inputs);
+        FaceGrid grid = new FaceGrid(layers, inside, wall);
+        double area = enclosure.box().areaM2(face.name());
+        double steady = grid.steady(boundary.filmWm2K(0) * wall);
+        return new FaceBranch(
+                tree,
+                flowAt,
+                area,
+                grid,
+                enclosure.thermalBridgePct() / 100 * area * steady,
+                FaceFilms.convectiveWm2K(boundary.direction()),
+                wall,
+                inputs.plain());
     }
 
     private void conductionJ() {

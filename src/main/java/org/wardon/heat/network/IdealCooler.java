@@ -20,6 +20,12 @@ final class IdealCooler implements Part {
 
     private static final double ROUND_K = 0.02;
 
+    /** The air follows the ideal cooler in this time, s: the shorter, the nearer the setting. */
+    private static final double FOLLOWS_IN_S = 0.3;
+
+    /** Coil below the air, K (common practice for rooms of produce). */
+    private static final double COIL_BELOW_K = 6;
+
     private final int flowAt;
     private final double keptC;
     private final double coilBelowK;
@@ -41,6 +47,15 @@ final class IdealCooler implements Part {
         this.coilBelowK = coilBelowK;
         this.wattsPerK = wattsPerK;
         this.saturation = Saturation.curve(plain);
+    }
+
+    static IdealCooler of(int flowAt, NetworkInputs inputs, double airKg) {
+        return new IdealCooler(
+                flowAt,
+                inputs.setting().temperatureC() - inputs.tuning().thermostatOffsetK(),
+                COIL_BELOW_K,
+                airKg * MoistAir.DRY_AIR_J_KG_K / FOLLOWS_IN_S,
+                inputs.plain());
     }
 
     private double wetness(AirState air) {

@@ -63,29 +63,18 @@ public final class LotBranch implements Part {
     private final double[] between;
     private final double skin;
     private final double film;
-    private final double tissueKgSPa;
-    private final double lowering;
-    private final double filmKgSPa;
     private final double fullKg;
     private final double packageWK;
     private final double packageKgSPa;
     private final double packageKg;
     private final double packageJkgK;
-    private final LocalCurve saturation;
+    private final SkinEvaporation dew;
     private LocalCurve[] breath;
     private final boolean plain;
     private final double respirationFactor;
     private boolean gives = true;
 
     private double skinC;
-    private double evaporated;
-    private double evaporatedBySkin;
-    private double evaporatedByWater;
-    private double evaporatedByRatio;
-    private double filmWater;
-    private double filmWaterBySkin;
-    private double filmWaterByWater;
-    private double filmWaterByRatio;
     private double packageC;
     private double packagePa;
 
@@ -132,9 +121,6 @@ public final class LotBranch implements Part {
         }
         skin = kg * cut.skinConductanceWPerKgK();
         film = kg * packing.filmWPerKgK();
-        tissueKgSPa = kg * lot.transpiration().conductanceKgPerKgSPa() * transpirationFactor;
-        lowering = lot.transpiration().vapourPressureLowering();
-        filmKgSPa = kg * lot.transpiration().filmKgPerKgSPa();
         fullKg = kg * lot.item().areaM2PerKg() * FreeWater.FULL_KG_M2;
         packageWK = kg * packing.chamberWPerKgK();
         packageKgSPa = kg * packing.vapourKgPerKgSPa();
@@ -143,7 +129,7 @@ public final class LotBranch implements Part {
                         * packing.airM3PerKg()
                         / MoistAir.specificVolumeM3kg(PACKAGE_AIR_C, 0, pressurePa);
         packageJkgK = MoistAir.DRY_AIR_J_KG_K + kg * packing.tareJPerKgK() / packageKg;
-        saturation = Saturation.overWater(plain);
+        dew = new SkinEvaporation(lot, transpirationFactor, plain);
         breath = new LocalCurve[shells];
         breathe(lot.respiration());
     }
@@ -419,45 +405,24 @@ public final class LotBranch implements Part {
         double dry = (skin * shellC + film * packageC) / (skin + film);
         double t = Math.abs(skinC - dry) < NEAR_K ? skinC : dry;
         for (int i = 0; i < 12; i++) {
-            evaporation(t, wet);
+            dew.at(t, wet, packagePa);
             double latent = L0 + VAPOUR_LESS_WATER * t;
-            double miss = skin * (shellC - t) + film * (packageC - t) - evaporated * latent;
-            double fall = skin + film + evaporatedBySkin * latent + evaporated * VAPOUR_LESS_WATER;
+            double miss = skin * (shellC - t) + film * (packageC - t) - dew.evaporated * latent;
+            double fall =
+                    skin
+                            + film
+                            + dew.evaporatedBySkin * latent
+                            + dew.evaporated * VAPOUR_LESS_WATER;
             double step = miss / fall;
             t += step;
             if (Math.abs(step) < LAST_STEP_K) {
                 // What is left is of the square of this step: the slope carries it.
-                evaporated += evaporatedBySkin * step;
-                filmWater += filmWaterBySkin * step;
+                dew.evaporated += dew.evaporatedBySkin * step;
+                dew.filmWater += dew.filmWaterBySkin * step;
                 break;
             }
         }
         skinC = t;
-    }
-
-    private void evaporation(double t, double wet) {
-        double psat = saturation.value(t);
-        double slope = saturation.slope(t);
-        double tissueDrop = lowering * psat - packagePa;
-        double filmDrop = psat - packagePa;
-        double width = FreeWater.ROUND_PA;
-        double tissue = tissueKgSPa * (1 - wet);
-        double up = FreeWater.positive(filmDrop, width);
-        double down = FreeWater.positive(-filmDrop, width);
-        double tissueSlope = tissue * FreeWater.positiveSlope(tissueDrop, width);
-        double filmSlope =
-                filmKgSPa
-                        * (wet * FreeWater.positiveSlope(filmDrop, width)
-                                + FreeWater.positiveSlope(-filmDrop, width));
-        filmWater = filmKgSPa * (wet * up - down);
-        evaporated = tissue * FreeWater.positive(tissueDrop, width) + filmWater;
-        evaporatedBySkin = (tissueSlope * lowering + filmSlope) * slope;
-        filmWaterBySkin = filmSlope * slope;
-        // By the package's vapour pressure; turned to humidity ratio where it is needed.
-        evaporatedByRatio = -tissueSlope - filmSlope;
-        filmWaterByRatio = -filmSlope;
-        evaporatedByWater = filmKgSPa * up - tissueKgSPa * FreeWater.positive(tissueDrop, width);
-        filmWaterByWater = filmKgSPa * up;
     }
 
     @Override
@@ -478,18 +443,18 @@ public final class LotBranch implements Part {
         packageAir(y[b + 2], y[b + 3]);
         solveSkin(y[b], y[b + 1]);
         double toSkin = skin * (y[b] - skinC);
-        double liquid = evaporated * WATER * skinC;
+        double liquid = dew.evaporated * WATER * skinC;
         double out = packageKgSPa * (packagePa - air.vapourPa);
         double toAir =
                 packageWK * (packageC - air.airC) + out * MoistAir.vapourEnthalpyJkg(packageC);
         rates[b] = (flux - toSkin + heat) / capacity[shells - 1];
-        rates[b + 1] = -filmWater;
+        rates[b + 1] = -dew.filmWater;
         rates[b + 2] = (toSkin + liquid - toAir) / packageKg;
-        rates[b + 3] = (evaporated - out) / packageKg;
+        rates[b + 3] = (dew.evaporated - out) / packageKg;
         flows[flowAt + TO_AIR] = toAir;
         flows[flowAt + VAPOUR] = out;
         flows[flowAt + RESPIRATION] = breathing;
-        flows[flowAt + EVAPORATED] = evaporated;
+        flows[flowAt + EVAPORATED] = dew.evaporated;
         flows[flowAt + LIQUID] = liquid;
         if (gives) {
             rates[AirState.ENTHALPY] += toAir;
@@ -505,7 +470,7 @@ public final class LotBranch implements Part {
             breath[i].near(y[start + i]);
             breathSlope[i] = shellKg[i] * breath[i].slope(y[start + i]);
         }
-        saturation.near(skinC);
+        dew.near(skinC);
         packageAir(y[b + 2], y[b + 3]);
         solveSkin(y[b], y[b + 1]);
         skinSlopes(y[b + 1], y[b + 3]);
@@ -525,25 +490,26 @@ public final class LotBranch implements Part {
         double sum = MoistAir.MOLAR_MASS_RATIO + ratio;
         double paByRatio = byPa / (sum * sum);
         double wetSlope = FreeWater.wetShareSlope(waterKg / fullKg) / fullKg;
-        evaporatedByRatio *= paByRatio;
-        filmWaterByRatio *= paByRatio;
-        evaporatedByWater *= wetSlope;
-        filmWaterByWater *= wetSlope;
+        dew.evaporatedByRatio *= paByRatio;
+        dew.filmWaterByRatio *= paByRatio;
+        dew.evaporatedByWater *= wetSlope;
+        dew.filmWaterByWater *= wetSlope;
         double inverse = 1 / (packageJkgK + MoistAir.VAPOUR_J_KG_K * ratio);
         packageCBy[2] = inverse;
         packageCBy[3] = -MoistAir.vapourEnthalpyJkg(packageC) * inverse;
         double latent = L0 + VAPOUR_LESS_WATER * skinC;
-        double fall = skin + film + evaporatedBySkin * latent + evaporated * VAPOUR_LESS_WATER;
+        double fall =
+                skin + film + dew.evaporatedBySkin * latent + dew.evaporated * VAPOUR_LESS_WATER;
         skinBy[0] = skin / fall;
-        skinBy[1] = -latent * evaporatedByWater / fall;
+        skinBy[1] = -latent * dew.evaporatedByWater / fall;
         skinBy[2] = film * packageCBy[2] / fall;
-        skinBy[3] = (film * packageCBy[3] - latent * evaporatedByRatio) / fall;
+        skinBy[3] = (film * packageCBy[3] - latent * dew.evaporatedByRatio) / fall;
         for (int i = 0; i < 4; i++) {
-            double direct = i == 1 ? evaporatedByWater : i == 3 ? evaporatedByRatio : 0;
-            double directFilm = i == 1 ? filmWaterByWater : i == 3 ? filmWaterByRatio : 0;
-            evaporatedBy[i] = evaporatedBySkin * skinBy[i] + direct;
-            filmWaterBy[i] = filmWaterBySkin * skinBy[i] + directFilm;
-            liquidBy[i] = WATER * (evaporatedBy[i] * skinC + evaporated * skinBy[i]);
+            double direct = i == 1 ? dew.evaporatedByWater : i == 3 ? dew.evaporatedByRatio : 0;
+            double directFilm = i == 1 ? dew.filmWaterByWater : i == 3 ? dew.filmWaterByRatio : 0;
+            evaporatedBy[i] = dew.evaporatedBySkin * skinBy[i] + direct;
+            filmWaterBy[i] = dew.filmWaterBySkin * skinBy[i] + directFilm;
+            liquidBy[i] = WATER * (evaporatedBy[i] * skinC + dew.evaporated * skinBy[i]);
         }
         jRatio = packageKgSPa * paByRatio;
     }

@@ -1,6 +1,7 @@
 package org.wardon.heat.network;
 
 import org.wardon.cooling.Compressor;
+import org.wardon.cooling.Thermostat;
 
 /** A unit as a run asks for it: of another size by the capacity factor, or modulating. */
 final class UnitTuning {
@@ -26,5 +27,20 @@ final class UnitTuning {
                 unit.lowestC(),
                 unit.defrost(),
                 unit.dailyEnergyKWh());
+    }
+
+    /** What it follows: each further cooler comes in a band later than the one before. */
+    static CoolerPart.Following following(
+            Compressor unit, Compressor asked, int stage, NetworkInputs inputs) {
+        double bandK = inputs.setting().bandK();
+        double followed =
+                Thermostat.followedC(inputs.setting(), unit.lowestC())
+                        - inputs.tuning().thermostatOffsetK()
+                        + stage * bandK;
+        return new CoolerPart.Following(
+                asked.control() == Compressor.Control.MODULATING,
+                followed,
+                bandK,
+                unit.fanAlways() ? unit.fanW() : 0);
     }
 }

@@ -1,0 +1,72 @@
+package org.wardon.heat.network;
+
+import java.util.Optional;
+import org.wardon.air.MoistAir;
+import org.wardon.air.SaturatedAir;
+import org.wardon.enclosure.Beyond;
+import org.wardon.enclosure.Door;
+import org.wardon.enclosure.DoorExchange;
+import org.wardon.enclosure.OutsideBoundary;
+import org.wardon.enclosure.Surroundings;
+
+/** The air outdoors and beyond the door hour by hour, and the doorway to it. */
+final class AirAround {
+    private static final double[] NONE = {};
+
+    private AirAround() {}
+
+    /** Outdoor air. */
+    static HourlyAir outdoors(NetworkInputs inputs) {
+        Surroundings around = inputs.around();
+        int n = around.hours() + 1;
+        double[] airC = new double[n];
+        double[] ratio = new double[n];
+        for (int h = 0; h < n; h++) {
+            airC[h] = around.weather().temperatureC(h);
+            // Stations state humidity over water at all temperatures.
+            double pa = around.weather().humidityPct(h) / 100 * SaturatedAir.overWaterPa(airC[h]);
+            ratio[h] = MoistAir.humidityRatio(pa, inputs.pressurePa());
+        }
+        return new HourlyAir(airC, ratio);
+    }
+
+    /** Air beyond the door, never above saturation; outdoor air where there is no door. */
+    static HourlyAir beyondDoor(NetworkInputs inputs, HourlyAir outdoors) {
+        Optional<Door> door = inputs.enclosure().door();
+        if (door.isEmpty()) {
+            return outdoors;
+        }
+        Beyond beyond = door.get().beyond();
+        int n = inputs.around().hours() + 1;
+        double[] airC = new double[n];
+        double[] ratio = new double[n];
+        for (int h = 0; h < n; h++) {
+            airC[h] = OutsideBoundary.airBeyondC(beyond, inputs.around(), h);
+            double most = MoistAir.saturatedHumidityRatio(airC[h], inputs.pressurePa());
+            double there =
+                    beyond instanceof Beyond.Neighbour next
+                            ? inputs.neighbourRatio().getOrDefault(next.chamberId(), NONE)[h]
+                            : outdoors.ratio(h);
+            ratio[h] = Math.min(there, most);
+        }
+        return new HourlyAir(airC, ratio);
+    }
+
+    /** The doorway as numbers, its share of the full flow scaled by a factor. */
+    static AirExchange.Doorway doorway(NetworkInputs inputs, double factor) {
+        Optional<Door> door = inputs.enclosure().door();
+        if (door.isEmpty()) {
+            return new AirExchange.Doorway(0, 0, 0, 0, 0);
+        }
+        Door d = door.get();
+        double usedS = d.to().toSecondOfDay() - d.from().toSecondOfDay();
+        double open = Math.min(d.secondsOpen(), usedS / Math.max(d.openingsPerDay(), 1));
+        boolean averaged = inputs.averagedDoor() && open > 0;
+        return new AirExchange.Doorway(
+                d.widthM(),
+                d.heightM(),
+                factor * DoorExchange.share(DoorExchange.FLOW_FACTOR, d.effectiveness()),
+                averaged ? open : 0,
+                d.openingsPerDay() / usedS);
+    }
+}
