@@ -1,19 +1,17 @@
 package org.wardon.lots;
 
-import java.util.ArrayList;
 import java.util.Collection;
-import java.util.HashMap;
 import java.util.List;
 import java.util.Map;
 import java.util.Optional;
 import java.util.TreeMap;
+import java.util.concurrent.ConcurrentHashMap;
 import java.util.function.Function;
 import java.util.function.Predicate;
 import java.util.function.ToDoubleFunction;
 import java.util.stream.Collectors;
 import org.apache.commons.math3.stat.descriptive.rank.Median;
 import org.wardon.errors.Require;
-import org.wardon.lots.StandIn.Figure;
 import org.wardon.produce.Commodity;
 import org.wardon.produce.Evidence;
 import org.wardon.produce.Fact;
@@ -38,49 +36,72 @@ public final class ClassValues {
     /** Commodities that share something, and its name. */
     private record Group(String name, List<Commodity> members) {}
 
-    private final Map<String, StandIn> byId;
-    private final Map<String, StandIn> byPart;
-    private final StandIn all;
+    /**
+     * A median and whose it is.
+     *
+     * @param value the median
+     * @param group scientific name, plant part, or {@code all}
+     * @param <T> what it is of
+     */
+    record Figure<T>(T value, String group) {}
 
-    private ClassValues(Map<String, StandIn> byId, Map<String, StandIn> byPart, StandIn all) {
-        this.byId = Map.copyOf(byId);
-        this.byPart = Map.copyOf(byPart);
+    private final Group all;
+
+    // Figures already asked for, by species and plant part; most lots ask for one or two.
+    private final Map<String, Figure<ItemHeat>> heats = new ConcurrentHashMap<>();
+    private final Map<String, Figure<ItemSize>> sizes = new ConcurrentHashMap<>();
+    private final Map<String, Figure<Map<Double, Fact>>> respirations = new ConcurrentHashMap<>();
+    private final Map<String, Figure<Double>> transpirations = new ConcurrentHashMap<>();
+
+    private ClassValues(Group all) {
         this.all = all;
     }
 
     /**
-     * Returns the medians over commodities.
+     * Returns the medians over commodities. Each is worked out when it is first asked for; one that
+     * no commodity can give is refused then.
      *
-     * @param commodities all commodities of the tables; at least one of them with a composition, a
-     *     size, a respiration rate and a transpiration coefficient
+     * @param commodities all commodities of the tables
      * @return the class values
      */
     public static ClassValues of(Collection<Commodity> commodities) {
         Require.that(!commodities.isEmpty(), "class values need at least one commodity");
-        Group all = new Group(ALL, List.copyOf(commodities));
-        Map<String, StandIn> bySpecies = new HashMap<>();
-        Map<String, StandIn> byPart = new HashMap<>();
-        Map<String, StandIn> byId = new HashMap<>();
-        for (Commodity one : commodities) {
-            String part = one.plantPart();
-            List<Group> wider = List.of(part(all, part), part(all, kindred(part)), all);
-            byPart.computeIfAbsent(part, key -> over(wider));
-            String species = species(one);
-            Group kin = new Group(species, matching(all, c -> kin(one, c)));
-            List<Group> groups = new ArrayList<>(wider);
-            groups.add(0, kin);
-            byId.put(
-                    one.id(), bySpecies.computeIfAbsent(species + " " + part, key -> over(groups)));
-        }
-        return new ClassValues(byId, byPart, over(List.of(all)));
+        return new ClassValues(new Group(ALL, List.copyOf(commodities)));
     }
 
-    private static Group part(Group all, String part) {
-        return new Group(part, matching(all, c -> c.plantPart().equals(part)));
+    /** Specific heat, conductivity and density. */
+    Figure<ItemHeat> heat(Commodity commodity) {
+        return heats.computeIfAbsent(
+                kind(commodity), kind -> first(commodity, ClassValues::medianHeat, "composition"));
     }
 
-    private static String kindred(String part) {
-        return KINDRED.getOrDefault(part, part);
+    /** Shape and size. */
+    Figure<ItemSize> size(Commodity commodity) {
+        return sizes.computeIfAbsent(
+                kind(commodity), kind -> first(commodity, ClassValues::medianSize, "size"));
+    }
+
+    /** Rates by temperature in °C, W/t, median × or ÷ the class spread. */
+    Figure<Map<Double, Fact>> respiration(Commodity commodity) {
+        return respirations.computeIfAbsent(
+                kind(commodity),
+                kind -> first(commodity, ClassValues::medianRespiration, "respiration rate"));
+    }
+
+    /** Tissue to package air, kg/(kg s Pa). */
+    Figure<Double> transpirationKgPerKgSPa(Commodity commodity) {
+        return transpirations.computeIfAbsent(
+                kind(commodity),
+                kind ->
+                        first(
+                                commodity,
+                                ClassValues::medianTranspiration,
+                                "transpiration coefficient"));
+    }
+
+    /** Commodities of one kind have the same kin, and so the same class values. */
+    private static String kind(Commodity commodity) {
+        return commodity.plantPart() + " " + species(commodity);
     }
 
     /** The scientific name stands last. */
@@ -88,37 +109,35 @@ public final class ClassValues {
         return commodity.names().get(commodity.names().size() - 1);
     }
 
-    private static boolean kin(Commodity one, Commodity other) {
-        return one.plantPart().equals(other.plantPart()) && species(one).equals(species(other));
-    }
-
-    private static List<Commodity> matching(Group group, Predicate<Commodity> like) {
-        return group.members().stream().filter(like).toList();
-    }
-
-    /** What stands in for a commodity. */
-    StandIn of(Commodity commodity) {
-        return byId.getOrDefault(commodity.id(), byPart.getOrDefault(commodity.plantPart(), all));
-    }
-
-    /** Takes each figure from the first group that has it. */
-    private static StandIn over(List<Group> groups) {
-        return new StandIn(
-                first(groups, ClassValues::medianHeat, "composition"),
-                first(groups, ClassValues::medianSize, "size"),
-                first(groups, ClassValues::medianRespiration, "respiration rate"),
-                first(groups, ClassValues::medianTranspiration, "transpiration coefficient"));
-    }
-
-    private static <T> Figure<T> first(
-            List<Group> groups, Function<Collection<Commodity>, Optional<T>> figure, String what) {
-        for (Group group : groups) {
+    /** Takes the figure from the first group that has it. */
+    private <T> Figure<T> first(
+            Commodity commodity, Function<Collection<Commodity>, Optional<T>> figure, String what) {
+        for (Group group : groups(commodity)) {
             Optional<T> found = figure.apply(group.members());
             if (found.isPresent()) {
                 return new Figure<>(found.get(), group.name());
             }
         }
-        throw new IllegalArgumentException("no commodity has a " + what);
+        throw new IllegalArgumentException(
+                "no commodity of " + all.members().size() + " has a " + what);
+    }
+
+    private List<Group> groups(Commodity commodity) {
+        String part = commodity.plantPart();
+        String kind = kind(commodity);
+        return List.of(
+                group(species(commodity), other -> kind(other).equals(kind)),
+                part(part),
+                part(KINDRED.getOrDefault(part, part)),
+                all);
+    }
+
+    private Group part(String part) {
+        return group(part, commodity -> commodity.plantPart().equals(part));
+    }
+
+    private Group group(String name, Predicate<Commodity> like) {
+        return new Group(name, all.members().stream().filter(like).toList());
     }
 
     private static Optional<ItemHeat> medianHeat(Collection<Commodity> group) {

@@ -1,5 +1,6 @@
 package org.wardon.lots;
 
+import java.util.Collections;
 import java.util.EnumMap;
 import java.util.Map;
 import org.wardon.errors.Require;
@@ -24,7 +25,10 @@ public record Composition(Map<Component, Double> fraction) {
 
     /** Copies the map and refuses fractions that do not make up the whole. */
     public Composition {
-        fraction = Map.copyOf(fraction);
+        // In one order always: sums of the parts must be the same to the last digit in every run.
+        Map<Component, Double> ordered = new EnumMap<>(Component.class);
+        ordered.putAll(fraction);
+        fraction = Collections.unmodifiableMap(ordered);
         double sum = fraction.values().stream().mapToDouble(Double::doubleValue).sum();
         Require.within("sum of fractions", sum, 0.999999, 1.000001, "1", "Scale them to 1.");
     }

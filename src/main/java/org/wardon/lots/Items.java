@@ -31,7 +31,6 @@ public final class Items {
      * @return the item and what it rests on
      */
     public static WithReasons<Item> of(Commodity commodity, ClassValues classes) {
-        StandIn standIn = classes.of(commodity);
         WithReasons<ItemHeat> heat =
                 ownHeat(commodity)
                         .map(
@@ -42,12 +41,21 @@ public final class Items {
                                                 commodity.id(),
                                                 heatSource(commodity)))
                         .orElseGet(
-                                () -> ofClass(standIn.heat(), "item-composition-class", commodity));
+                                () ->
+                                        ofClass(
+                                                classes.heat(commodity),
+                                                "item-composition-class",
+                                                commodity));
         WithReasons<ItemSize> size =
                 printedSize(commodity)
                         .map(own -> found(own, "item-size", commodity.id(), sizeSource(commodity)))
                         .or(() -> unprintedSize(commodity, heat.value()))
-                        .orElseGet(() -> ofClass(standIn.size(), "item-size-class", commodity));
+                        .orElseGet(
+                                () ->
+                                        ofClass(
+                                                classes.size(commodity),
+                                                "item-size-class",
+                                                commodity));
         return heat.and(size)
                 .and(
                         new WithReasons<>(
@@ -162,7 +170,7 @@ public final class Items {
     }
 
     private static <T> WithReasons<T> ofClass(
-            StandIn.Figure<T> figure, String code, Commodity commodity) {
+            ClassValues.Figure<T> figure, String code, Commodity commodity) {
         Reason reason =
                 Reason.about(
                         code,

@@ -165,7 +165,7 @@ public final class Respirations {
 
     private static WithReasons<RespirationCurve> ofClass(
             Commodity commodity, ClassValues classes, double share) {
-        StandIn.Figure<Map<Double, Fact>> rates = classes.of(commodity).respiration();
+        ClassValues.Figure<Map<Double, Fact>> rates = classes.respiration(commodity);
         return new WithReasons<>(
                 RespirationCurve.through(rates.value(), share),
                 List.of(

@@ -71,7 +71,7 @@ public final class Transpirations {
 
     private static WithReasons<TranspirationLaw> ofClass(
             Commodity commodity, Item item, ClassValues classes, double share) {
-        StandIn.Figure<Double> middle = classes.of(commodity).transpirationKgPerKgSPa();
+        ClassValues.Figure<Double> middle = classes.transpirationKgPerKgSPa(commodity);
         Reason reason =
                 Reason.about(
                         "transpiration-class",

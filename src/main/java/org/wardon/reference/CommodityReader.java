@@ -2,59 +2,66 @@ package org.wardon.reference;
 
 import java.util.ArrayList;
 import java.util.List;
-import java.util.Optional;
 import org.wardon.produce.Commodity;
 
-/** Reads a commodity with every row that print has of it, the chosen row of each kind first. */
+/** Reads commodities with every row that print has of them, the chosen row of each kind first. */
 final class CommodityReader {
-    private final ReferenceDatabase database;
+    private final Selection selection;
+    private final NeedsOfView needs;
+    private final Grouped<String> aliases;
+    private final BodyRows body;
+    private final BreathRows breath;
+    private final WaterRows water;
+    private final KeepingRows keeping;
+    private final CompanyRows company;
 
-    CommodityReader(ReferenceDatabase database) {
-        this.database = database;
+    private CommodityReader(Selection selection) {
+        this.selection = selection;
+        needs = new NeedsOfView(selection);
+        aliases = selection.rows(Query.table("aliases"), row -> row.text("alias"));
+        body = new BodyRows(selection);
+        breath = new BreathRows(selection);
+        water = new WaterRows(selection);
+        keeping = new KeepingRows(selection);
+        company = new CompanyRows(selection);
     }
 
-    /** Returns the commodity; empty if the table has no such id. */
-    Optional<Commodity> read(String id) {
-        return database
-                .list(
-                        "select * from commodities where commodity_id = ?",
-                        row -> commodity(id, row),
-                        id)
-                .stream()
-                .findFirst();
+    /** Returns the commodities selected, in the order of their table; none for an unknown id. */
+    static List<Commodity> read(Selection selection) {
+        return new CommodityReader(selection).commodities();
     }
 
-    private Commodity commodity(String id, Row row) {
-        NeedsOfView view = NeedsOfView.of(database, id);
+    private List<Commodity> commodities() {
+        return selection.list(Query.table("commodities"), this::commodity);
+    }
+
+    private Commodity commodity(Row row) {
+        String id = row.text("commodity_id");
         return new Commodity(
                 id,
                 names(id, row),
                 row.text("plant_part"),
                 row.text("climacteric").equals("yes"),
-                needs(row, view),
-                new BodyRows(database, id).body(),
-                new BreathRows(database, id).breath(view.heat()),
-                new WaterRows(database, id).water(),
-                new KeepingRows(database, id).keeping(),
-                new CompanyRows(database, id).company());
+                needs(id, row),
+                body.of(id),
+                breath.of(id, needs.heat(id)),
+                water.of(id),
+                keeping.of(id),
+                company.of(id));
     }
 
     private List<String> names(String id, Row row) {
         List<String> names = new ArrayList<>();
         names.add(row.text("common_name"));
-        names.addAll(
-                database.list(
-                        "select alias from aliases where commodity_id = ? order by line",
-                        alias -> alias.text("alias"),
-                        id));
+        names.addAll(aliases.of(id));
         names.addAll(List.of(row.text("scientific_name").split("; ", -1)));
         return names;
     }
 
-    private static Commodity.Needs needs(Row row, NeedsOfView view) {
+    private Commodity.Needs needs(String id, Row row) {
         return new Commodity.Needs(
-                view.temperatureC(),
-                view.humidityPct(),
+                needs.temperatureC(id),
+                needs.humidityPct(id),
                 row.fact("life_low_days", "life_high_days", "day"),
                 row.fact("highest_freezing_C", "C"),
                 row.text("ethylene_production_class"),

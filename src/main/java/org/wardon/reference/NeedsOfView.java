@@ -8,65 +8,74 @@ import org.wardon.produce.Evidence;
 import org.wardon.produce.Fact;
 import org.wardon.produce.rows.RespirationRow;
 
-/**
- * What the view {@code commodity_needs} says of one commodity.
- *
- * @param temperatureC storage temperature, °C
- * @param humidityPct storage humidity, percent
- * @param heat heat of respiration of all tables, the commodity's own state first
- */
-record NeedsOfView(
-        Optional<Fact> temperatureC, Optional<Fact> humidityPct, List<RespirationRow> heat) {
-    NeedsOfView {
-        heat = List.copyOf(heat);
+/** What the view {@code commodity_needs} says: temperature, humidity and heat of respiration. */
+final class NeedsOfView {
+    /** The view repeats a commodity's needs with every rate. */
+    private static final Query NEEDS =
+            new Query(
+                    "*",
+                    "(select distinct commodity_id, temperature_low_C, temperature_high_C,"
+                            + " humidity_low_pct, humidity_high_pct, needs_source_id,"
+                            + " needs_evidence from commodity_needs)",
+                    "commodity_id",
+                    "commodity_id");
+
+    /** Storage temperature, °C, and humidity, percent. */
+    private record Needs(Optional<Fact> temperatureC, Optional<Fact> humidityPct) {}
+
+    private final Grouped<Needs> needs;
+    private final Grouped<RespirationRow> heat;
+    private final Grouped<RespirationRow> laterHeat;
+
+    NeedsOfView(Selection selection) {
+        needs = selection.rows(NEEDS, NeedsOfView::needs);
+        heat = selection.present(heat(0), NeedsOfView::heat);
+        laterHeat = selection.present(heat(1), NeedsOfView::heat);
     }
 
-    /** One row of the view. */
-    private record ViewRow(
-            Optional<Fact> temperatureC,
-            Optional<Fact> humidityPct,
-            Optional<RespirationRow> heat,
-            boolean later) {}
-
-    static NeedsOfView of(ReferenceDatabase database, String id) {
-        List<ViewRow> rows =
-                database.list(
-                        "select * from commodity_needs where commodity_id = ?"
-                                + " order by later, state, heat_line",
-                        NeedsOfView::viewRow,
-                        id);
-        return new NeedsOfView(
-                rows.get(0).temperatureC(),
-                rows.get(0).humidityPct(),
-                Stream.concat(heat(rows, false), heat(rows, true)).toList());
+    private static Query heat(int later) {
+        return new Query(
+                "heat_at_C, heat_low_W_per_tonne, heat_high_W_per_tonne, state, heat_table,"
+                        + " heat_source_id, heat_evidence",
+                "(select * from commodity_needs where heat_at_C is not null and later = "
+                        + later
+                        + ")",
+                "commodity_id",
+                "state, heat_line");
     }
 
-    private static Stream<RespirationRow> heat(List<ViewRow> rows, boolean later) {
-        return rows.stream()
-                .filter(row -> row.later() == later)
-                .flatMap(row -> row.heat().stream())
-                .sorted(Preference.RESPIRATION);
+    /** Returns the storage temperature, °C. */
+    Optional<Fact> temperatureC(String id) {
+        return needs.of(id).get(0).temperatureC();
     }
 
-    private static ViewRow viewRow(Row row) {
-        return new ViewRow(
+    /** Returns the storage humidity, percent. */
+    Optional<Fact> humidityPct(String id) {
+        return needs.of(id).get(0).humidityPct();
+    }
+
+    /** Returns the heat of respiration of all tables, the commodity's own state first. */
+    List<RespirationRow> heat(String id) {
+        return Stream.concat(sorted(heat.of(id)), sorted(laterHeat.of(id))).toList();
+    }
+
+    private static Stream<RespirationRow> sorted(List<RespirationRow> rows) {
+        return rows.stream().sorted(Preference.RESPIRATION);
+    }
+
+    private static Needs needs(Row row) {
+        return new Needs(
                 needs(row, "temperature_low_C", "temperature_high_C", "C"),
-                needs(row, "humidity_low_pct", "humidity_high_pct", "pct"),
-                heat(row),
-                row.value("later") > 0);
+                needs(row, "humidity_low_pct", "humidity_high_pct", "pct"));
     }
 
     private static Optional<RespirationRow> heat(Row row) {
-        if (row.number("heat_at_C").isEmpty()) {
-            return Optional.empty();
-        }
-        Evidence evidence = row.evidence("heat_evidence");
         return fact(
                         row.number("heat_low_W_per_tonne"),
                         row.number("heat_high_W_per_tonne"),
                         "W/t",
                         row.text("heat_source_id"),
-                        evidence)
+                        row.evidence("heat_evidence"))
                 .map(
                         watts ->
                                 new RespirationRow(

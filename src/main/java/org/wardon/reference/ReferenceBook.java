@@ -32,6 +32,7 @@ public final class ReferenceBook implements AutoCloseable {
     private final Once<Sources> sources;
     private final Once<Map<String, Material>> materials;
     private final Once<Map<String, Doorway>> doorways;
+    private final Once<List<Commodity>> all;
     private final Map<String, Commodity> read = new ConcurrentHashMap<>();
 
     private ReferenceBook(ReferenceDatabase database, List<OwnValue> own) {
@@ -45,6 +46,7 @@ public final class ReferenceBook implements AutoCloseable {
         StoreReader store = new StoreReader(database);
         materials = new Once<>(() -> byId(store.materials(), Material::id));
         doorways = new Once<>(() -> byId(store.doorways(), Doorway::id));
+        all = new Once<>(() -> read(Selection.all(database)));
     }
 
     private static <T> Map<String, T> byId(List<T> values, Function<T, String> id) {
@@ -80,6 +82,16 @@ public final class ReferenceBook implements AutoCloseable {
         return database.list(
                 "select commodity_id from commodities order by line",
                 row -> row.text("commodity_id"));
+    }
+
+    /**
+     * Returns all commodities. Each table is read once, so this is far quicker than asking for one
+     * after the other.
+     *
+     * @return in the order of the table, own values first
+     */
+    public List<Commodity> all() {
+        return all.get();
     }
 
     /**
@@ -129,12 +141,16 @@ public final class ReferenceBook implements AutoCloseable {
         if (known != null) {
             return Optional.of(known);
         }
-        Optional<Commodity> found =
-                new CommodityReader(database)
-                        .read(id)
-                        .map(published -> OwnOverlay.over(published, ownOf(id)));
-        found.ifPresent(commodity -> read.put(id, commodity));
-        return found;
+        return read(Selection.one(database, id)).stream().findFirst();
+    }
+
+    private List<Commodity> read(Selection selection) {
+        return CommodityReader.read(selection).stream().map(this::kept).toList();
+    }
+
+    /** One record a commodity, however it was asked for. */
+    private Commodity kept(Commodity published) {
+        return read.computeIfAbsent(published.id(), id -> OwnOverlay.over(published, ownOf(id)));
     }
 
     private List<OwnValue> ownOf(String id) {

@@ -4,7 +4,6 @@ import java.io.IOException;
 import java.io.InputStream;
 import java.io.UncheckedIOException;
 import java.sql.Connection;
-import java.sql.DriverManager;
 import java.sql.PreparedStatement;
 import java.sql.ResultSet;
 import java.sql.ResultSetMetaData;
@@ -15,9 +14,9 @@ import java.util.HashMap;
 import java.util.HashSet;
 import java.util.List;
 import java.util.Map;
-import java.util.Optional;
 import java.util.Set;
 import java.util.function.Function;
+import org.sqlite.SQLiteConfig;
 import org.sqlite.SQLiteConnection;
 
 /**
@@ -37,7 +36,7 @@ final class ReferenceDatabase implements AutoCloseable {
     static ReferenceDatabase open() {
         byte[] bytes = shipped();
         try {
-            Connection connection = DriverManager.getConnection("jdbc:sqlite:");
+            Connection connection = Sqlite.connect(new SQLiteConfig(), "jdbc:sqlite:");
             connection.unwrap(SQLiteConnection.class).deserialize("main", bytes);
             try (Statement statement = connection.createStatement()) {
                 statement.execute("pragma query_only = 1");
@@ -59,7 +58,7 @@ final class ReferenceDatabase implements AutoCloseable {
         }
     }
 
-    /** Returns one value a row, in the order of the query; a reading may ask further queries. */
+    /** Returns one value a row, in the order of the query. */
     synchronized <T> List<T> list(String sql, Function<Row, T> reading, Object... arguments) {
         try {
             PreparedStatement statement = idle.remove(sql);
@@ -91,11 +90,6 @@ final class ReferenceDatabase implements AutoCloseable {
             }
         }
         return values;
-    }
-
-    /** Returns the values of the rows that have one, in the order of the query. */
-    <T> List<T> present(String sql, Function<Row, Optional<T>> reading, Object... arguments) {
-        return list(sql, reading, arguments).stream().flatMap(Optional::stream).toList();
     }
 
     private static Set<String> columns(ResultSetMetaData answer) throws SQLException {

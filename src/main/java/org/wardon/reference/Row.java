@@ -3,11 +3,14 @@ package org.wardon.reference;
 import java.sql.ResultSet;
 import java.sql.SQLException;
 import java.util.Arrays;
+import java.util.Map;
 import java.util.Optional;
 import java.util.OptionalDouble;
 import java.util.Set;
+import java.util.function.Function;
 import java.util.regex.Matcher;
 import java.util.regex.Pattern;
+import java.util.stream.Collectors;
 import org.wardon.produce.Evidence;
 import org.wardon.produce.Fact;
 
@@ -19,6 +22,9 @@ final class Row {
     /** What stands for a source where a row is an assumption. */
     static final String ASSUMPTION = "assumption";
 
+    private static final Map<String, Evidence> EVIDENCE =
+            Arrays.stream(Evidence.values())
+                    .collect(Collectors.toMap(Evidence::word, Function.identity()));
     private static final Pattern RANGE = Pattern.compile("([0-9.]+)-([0-9.]+)");
     private static final Pattern NUMBER = Pattern.compile("-?[0-9]+(\\.[0-9]+)?");
 
@@ -61,10 +67,11 @@ final class Row {
 
     Evidence evidence(String column) {
         String word = text(column);
-        return Arrays.stream(Evidence.values())
-                .filter(evidence -> evidence.word().equals(word))
-                .findFirst()
-                .orElseThrow(() -> new IllegalStateException("no evidence called '" + word + "'"));
+        Evidence evidence = EVIDENCE.get(word);
+        if (evidence == null) {
+            throw new IllegalStateException("no evidence called '" + word + "'");
+        }
+        return evidence;
     }
 
     /**

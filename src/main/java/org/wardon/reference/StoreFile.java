@@ -61,7 +61,7 @@ final class StoreFile {
     }
 
     private <T> T with(SQLiteConfig config, Work<T> work) {
-        try (Connection connection = config.createConnection("jdbc:sqlite:" + file)) {
+        try (Connection connection = Sqlite.connect(config, "jdbc:sqlite:" + file)) {
             int version = version(connection);
             if (version > VERSION) {
                 throw new BadInput(

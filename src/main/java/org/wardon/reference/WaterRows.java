@@ -1,7 +1,8 @@
 package org.wardon.reference;
 
-import java.util.ArrayList;
 import java.util.List;
+import java.util.Optional;
+import java.util.stream.Stream;
 import org.wardon.produce.Commodity;
 import org.wardon.produce.rows.MoistureLimit;
 import org.wardon.produce.rows.MoistureLossRow;
@@ -10,61 +11,52 @@ import org.wardon.produce.rows.TranspirationRow;
 /** Transpiration, permissible loss and printed losses of a commodity. */
 final class WaterRows {
     private static final String ANY = "any";
+    private static final Query LIMITS = Query.table("moisture_loss_limits");
 
-    private final ReferenceDatabase database;
-    private final String id;
+    private final Grouped<TranspirationRow> transpiration;
+    private final Grouped<MoistureLimit> limits;
+    private final List<MoistureLimit> generalLimits;
+    private final Grouped<MoistureLossRow> losses;
 
-    WaterRows(ReferenceDatabase database, String id) {
-        this.database = database;
-        this.id = id;
+    WaterRows(Selection selection) {
+        transpiration = selection.rows(Query.table("transpiration"), WaterRows::transpiration);
+        limits = selection.present(LIMITS, WaterRows::limit);
+        generalLimits = selection.general(ANY, LIMITS, WaterRows::limit).of(ANY);
+        losses = selection.rows(Query.table("moisture_loss"), WaterRows::loss);
     }
 
-    Commodity.Water water() {
-        List<MoistureLimit> limits = new ArrayList<>(limits(id));
-        limits.addAll(limits(ANY));
-        return new Commodity.Water(transpiration(), limits, losses());
+    Commodity.Water of(String id) {
+        return new Commodity.Water(
+                transpiration.of(id),
+                Stream.concat(sorted(limits.of(id)), sorted(generalLimits)).toList(),
+                losses.of(id));
     }
 
-    private List<TranspirationRow> transpiration() {
-        return database.list(
-                "select * from transpiration where commodity_id = ? order by line",
-                row ->
-                        new TranspirationRow(
-                                row.fact("k_ng_kg_s_Pa", "ng/(kg s Pa)"),
-                                row.fact(
-                                        "skin_ks_low_ug_s_m2_Pa",
-                                        "skin_ks_high_ug_s_m2_Pa",
-                                        "ug/(s m2 Pa)"),
-                                row.number("skin_ks_mean_ug_s_m2_Pa"),
-                                row.number("vapour_pressure_lowering_effect")),
-                id);
+    private static Stream<MoistureLimit> sorted(List<MoistureLimit> limits) {
+        return limits.stream().sorted(Preference.LOSS);
     }
 
-    private List<MoistureLimit> limits(String commodity) {
-        return database
-                .present(
-                        "select * from moisture_loss_limits where commodity_id = ? order by line",
-                        row ->
-                                row.fact("max_permissible_loss_pct", "pct")
-                                        .map(loss -> new MoistureLimit(loss, row.text("symptom"))),
-                        commodity)
-                .stream()
-                .sorted(Preference.LOSS)
-                .toList();
+    private static TranspirationRow transpiration(Row row) {
+        return new TranspirationRow(
+                row.fact("k_ng_kg_s_Pa", "ng/(kg s Pa)"),
+                row.fact("skin_ks_low_ug_s_m2_Pa", "skin_ks_high_ug_s_m2_Pa", "ug/(s m2 Pa)"),
+                row.number("skin_ks_mean_ug_s_m2_Pa"),
+                row.number("vapour_pressure_lowering_effect"));
     }
 
-    private List<MoistureLossRow> losses() {
-        return database.list(
-                "select * from moisture_loss where commodity_id = ? order by line",
-                row ->
-                        new MoistureLossRow(
-                                row.text("variant"),
-                                row.figure("temp_C"),
-                                row.number("rh_pct"),
-                                row.fact("weight_loss_pct_per_day", row.text("unit")),
-                                row.printed("max_acceptable_loss_pct", "pct"),
-                                note(row)),
-                id);
+    private static Optional<MoistureLimit> limit(Row row) {
+        return row.fact("max_permissible_loss_pct", "pct")
+                .map(loss -> new MoistureLimit(loss, row.text("symptom")));
+    }
+
+    private static MoistureLossRow loss(Row row) {
+        return new MoistureLossRow(
+                row.text("variant"),
+                row.figure("temp_C"),
+                row.number("rh_pct"),
+                row.fact("weight_loss_pct_per_day", row.text("unit")),
+                row.printed("max_acceptable_loss_pct", "pct"),
+                note(row));
     }
 
     private static String note(Row row) {

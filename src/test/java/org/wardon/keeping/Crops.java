@@ -18,8 +18,8 @@ public final class Crops {
 
     static {
         try (ReferenceBook book = ReferenceBook.open()) {
-            for (String id : book.list()) {
-                ALL.put(id, book.get(id));
+            for (Commodity one : book.all()) {
+                ALL.put(one.id(), one);
             }
             GROUPS = List.copyOf(book.mixingGroups());
         }

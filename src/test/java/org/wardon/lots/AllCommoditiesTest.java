@@ -34,7 +34,7 @@ class AllCommoditiesTest {
     @BeforeAll
     static void openTheBook() {
         try (ReferenceBook book = ReferenceBook.open()) {
-            all = book.list().stream().map(book::get).toList();
+            all = book.all();
             kinds = Map.copyOf(book.packageKinds());
         }
         classes = ClassValues.of(all);

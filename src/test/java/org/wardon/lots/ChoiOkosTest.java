@@ -81,4 +81,10 @@ class ChoiOkosTest {
         assertTrue(made.conductivityWmK(10, 840) < made.conductivityWmK(10));
         assertEquals(made.conductivityWmK(10), made.conductivityWmK(10, 1300), 0);
     }
+
+    @Test
+    void partsAreSummedInOneOrder() {
+        Composition any = Composition.ofParts(85, 1, 0.3, 12, 1.2, 0.5);
+        assertEquals(List.of(Component.values()), List.copyOf(any.fraction().keySet()));
+    }
 }

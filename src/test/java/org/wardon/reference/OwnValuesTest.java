@@ -93,6 +93,8 @@ class OwnValuesTest {
                 ReferenceBook print = ReferenceBook.open()) {
             Commodity mango = book.get("mango");
             Commodity printed = print.get("mango");
+            assertTrue(book.all().contains(mango));
+            assertFalse(book.all().contains(printed));
             assertEquals(8, floor(mango));
             assertEquals(10, floor(printed), 3);
             assertNotEquals(8, floor(printed));

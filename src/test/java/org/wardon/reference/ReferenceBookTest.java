@@ -2,6 +2,7 @@ package org.wardon.reference;
 
 import static org.junit.jupiter.api.Assertions.assertEquals;
 import static org.junit.jupiter.api.Assertions.assertFalse;
+import static org.junit.jupiter.api.Assertions.assertSame;
 import static org.junit.jupiter.api.Assertions.assertThrows;
 import static org.junit.jupiter.api.Assertions.assertTrue;
 
@@ -60,6 +61,18 @@ class ReferenceBookTest {
         assertEquals(low, fact.lowest());
         assertEquals(high, fact.highest());
         assertFalse(fact.own());
+    }
+
+    @Test
+    void allAtOnceIsTheSameAsOneByOne() {
+        try (ReferenceBook allAtOnce = ReferenceBook.open()) {
+            List<Commodity> all = allAtOnce.all();
+            assertEquals(BOOK.list(), all.stream().map(Commodity::id).toList());
+            for (Commodity commodity : all) {
+                assertEquals(BOOK.get(commodity.id()), commodity);
+                assertSame(commodity, allAtOnce.get(commodity.id()));
+            }
+        }
     }
 
     @Test

@@ -46,7 +46,7 @@ public final class SharingAdvice {
     public SharingAdvice(ReferenceBook book, Words words) {
         this.book = book;
         this.words = words;
-        this.classes = ClassValues.of(book.list().stream().map(book::get).toList());
+        this.classes = ClassValues.of(book.all());
     }
 
     /**

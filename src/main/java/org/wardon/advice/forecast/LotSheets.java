@@ -43,7 +43,7 @@ final class LotSheets {
         this.plan = plan;
         this.weather = weather;
         this.book = book;
-        this.classes = ClassValues.of(book.list().stream().map(book::get).toList());
+        this.classes = ClassValues.of(book.all());
         this.timeline = plan.timeline();
     }
 

@@ -59,7 +59,7 @@ public final class KeepingAdvice {
      */
     public KeepingAdvice(ReferenceBook book) {
         this.book = book;
-        this.classes = ClassValues.of(book.list().stream().map(book::get).toList());
+        this.classes = ClassValues.of(book.all());
     }
 
     /**
