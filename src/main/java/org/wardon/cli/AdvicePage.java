@@ -85,6 +85,7 @@ final class AdvicePage {
 
     private void chamber(ChamberForecast chamber) {
         head("Chamber " + chamber.id() + ": " + sentence(chamber));
+        besides(chamber);
         line(
                 "air",
                 units.temperature(chamber.airC().mean())
@@ -126,11 +127,15 @@ final class AdvicePage {
         if (chamber.holds()) {
             return "holds " + set + ".";
         }
-        String why =
-                advice.whyNotHeld(chamber.id()).stream()
-                        .map(words::sentence)
-                        .collect(Collectors.joining("; "));
-        return "does not hold " + set + ": " + why + ".";
+        String first = words.sentence(advice.whyNotHeld(chamber.id()).get(0));
+        return "does not hold " + set + ": " + first + ".";
+    }
+
+    /** What else speaks against a chamber, beside its headline. */
+    private void besides(ChamberForecast chamber) {
+        advice.whyNotHeld(chamber.id()).stream()
+                .skip(1)
+                .forEach(reason -> line("", "- " + words.sentence(reason)));
     }
 
     private void line(String name, String text) {

@@ -5,6 +5,7 @@ import java.util.List;
 import org.wardon.air.Timeline;
 import org.wardon.keeping.chilling.Chilling;
 import org.wardon.keeping.dormancy.Dormancy;
+import org.wardon.keeping.ethylene.Response;
 import org.wardon.lots.LotHistory;
 import org.wardon.produce.Commodity;
 import org.wardon.produce.Reason;
@@ -124,8 +125,7 @@ final class Grounds {
         Commodity commodity = model.lot().commodity();
         for (EthyleneEffect effect : commodity.company().ethyleneEffects()) {
             boolean above =
-                    effect.thresholdPpm().isPresent()
-                            && highest >= effect.thresholdPpm().get().lowest();
+                    Response.isDisorder(effect) && highest >= effect.thresholdPpm().get().lowest();
             if (above) {
                 say(
                         "ethylene-harms",

@@ -19,9 +19,6 @@ import org.wardon.produce.rows.OdourPair;
 final class Conflicts {
     private static final String ANY = "any";
 
-    /** Levels at and below it tell of life shortened by degrees, not of a disorder, µL/L. */
-    private static final double DISORDERS_ABOVE_PPM = 0.1;
-
     private final List<Reason> reasons = new ArrayList<>();
     private Verdict verdict = Verdict.GOOD;
 
@@ -93,9 +90,7 @@ final class Conflicts {
     private void disorders(Wish taker, String giverId, double ppm) {
         for (EthyleneEffect effect : taker.lot().commodity().company().ethyleneEffects()) {
             double threshold = effect.thresholdPpm().map(fact -> fact.lowest()).orElse(Double.NaN);
-            boolean disorder =
-                    threshold > DISORDERS_ABOVE_PPM && !effect.effect().contains("starts ripening");
-            if (disorder && ppm >= threshold) {
+            if (Response.isDisorder(effect) && ppm >= threshold) {
                 say(
                         Verdict.TOLERABLE,
                         reason(

@@ -3,6 +3,7 @@ package org.wardon.advice.forecast;
 import java.util.ArrayList;
 import java.util.List;
 import java.util.OptionalDouble;
+import java.util.Set;
 import org.wardon.advice.wording.Words;
 import org.wardon.air.Timeline;
 import org.wardon.files.forecast.Because;
@@ -18,7 +19,6 @@ import org.wardon.sharing.ChamberVerdict;
 import org.wardon.sharing.PairVerdict;
 import org.wardon.sharing.Sharing;
 import org.wardon.sharing.Together;
-import org.wardon.sharing.Verdict;
 import org.wardon.sharing.Wish;
 import org.wardon.sharing.Workable;
 
@@ -27,6 +27,10 @@ import org.wardon.sharing.Workable;
  * chamber's own air does to them, and of the pairs that no setting suits the reason why.
  */
 final class Company {
+    /** What two lots want of the setting; what they do to each other the chamber's air tells. */
+    private static final Set<String> OF_SETTINGS =
+            Set.of("temperature-gap", "humidity-split", "no-common-setting");
+
     private final StoreOutcome outcome;
     private final Words words;
 
@@ -68,9 +72,9 @@ final class Company {
                         .map(sheet -> Workable.of(wish(sheet), sheet.model(), draws))
                         .toList();
         for (PairVerdict pair : Sharing.among(workable).pairs()) {
-            if (pair.verdict() == Verdict.NO) {
-                pair.reasons().stream().limit(1).forEach(reasons::add);
-            }
+            pair.reasons().stream()
+                    .filter(reason -> OF_SETTINGS.contains(reason.code()))
+                    .forEach(reasons::add);
         }
         return reasons;
     }
@@ -80,12 +84,14 @@ final class Company {
         double untilS = Math.min(sheet.clock().leavesS(), outcome.horizonS());
         double sumC = 0;
         double sumPpm = 0;
-        int n = 0;
-        for (int i = 0; i < history.size() && (n == 0 || history.timeS(i) <= untilS); i++) {
-            sumC += history.meanC(i);
-            sumPpm += level.ppmAt(history.timeS(i));
-            n++;
+        double span = 0;
+        for (int i = 1; i < history.size() && history.timeS(i) <= untilS + 1; i++) {
+            double step = history.timeS(i) - history.timeS(i - 1);
+            sumC += step * 0.5 * (history.meanC(i) + history.meanC(i - 1));
+            sumPpm += step * level.ppmAt(history.timeS(i));
+            span += step;
         }
+        boolean there = span > 0;
         return new Together(
                 wish(sheet),
                 sheet.model(),
@@ -93,8 +99,8 @@ final class Company {
                 sheet.plan().massKg(),
                 sheet.clock().hereFromS(),
                 sheet.clock().leavesS(),
-                sumC / n,
-                sumPpm / n);
+                there ? sumC / span : history.meanC(0),
+                there ? sumPpm / span : level.ppmAt(history.timeS(0)));
     }
 
     private static Wish wish(LotSheet sheet) {

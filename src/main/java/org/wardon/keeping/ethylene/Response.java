@@ -26,6 +26,9 @@ public final class Response {
     /** Produce a gross cubic metre, kg (common practice). */
     public static final double USUAL_KG_M3 = 150;
 
+    /** Levels at and below it tell of life shortened by degrees, not of a disorder, µL/L. */
+    private static final double DISORDERS_ABOVE_PPM = 0.1;
+
     private static final double PER_DECADE = 0.46;
     private static final double BASE_PPM = 0.1;
     private static final double LEAST = 0.05;
@@ -40,6 +43,19 @@ public final class Response {
     private final double handbookC;
     private final Commodity commodity;
     private final Ripeness ripeness;
+
+    /**
+     * Returns whether a row tells of a disorder, rather than of life shortened or ripening started,
+     * which are reckoned with elsewhere.
+     *
+     * @param effect the row
+     * @return true for a disorder from a printed level on
+     */
+    public static boolean isDisorder(EthyleneEffect effect) {
+        return effect.thresholdPpm().isPresent()
+                && effect.thresholdPpm().get().lowest() > DISORDERS_ABOVE_PPM
+                && !effect.effect().contains("starts ripening");
+    }
 
     private Response(
             boolean sensitive,
