@@ -4,6 +4,7 @@ import java.nio.file.Path;
 import org.jspecify.annotations.Nullable;
 import org.wardon.advice.forecast.ForecastAdvice;
 import org.wardon.advice.forecast.StoreAdvice;
+import org.wardon.files.AtomicFile;
 import org.wardon.files.forecast.AnswerWriter;
 import org.wardon.plan.StorePlan;
 import org.wardon.reference.ReferenceBook;
@@ -28,12 +29,19 @@ final class AdviceOutput {
 
     void advise(StorePlan plan, ReferenceBook book, Shared shared) {
         Terminal terminal = Terminal.ofProcess();
+        boolean toStdout = json != null && json.toString().equals("-");
+        if (json != null && !toStdout) {
+            AtomicFile.tryOut(json);
+        }
+        if (series != null) {
+            AtomicFile.folder(series);
+        }
         StoreAdvice advice =
                 new ForecastAdvice(book, shared.words()).advise(plan, terminal.progress());
         if (series != null) {
             advice.writeSeries(series);
         }
-        if (json != null && json.toString().equals("-")) {
+        if (toStdout) {
             terminal.out().print(AnswerWriter.json(advice.forecast()));
             return;
         }

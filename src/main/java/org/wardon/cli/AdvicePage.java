@@ -13,6 +13,7 @@ import org.wardon.files.forecast.LotForecast;
 import org.wardon.files.forecast.Quantiles;
 import org.wardon.plan.LotPlan;
 import org.wardon.plan.StorePlan;
+import org.wardon.produce.Reason;
 
 /** The advice on a store plan for a person. */
 final class AdvicePage {
@@ -37,12 +38,11 @@ final class AdvicePage {
 
     String text() {
         head(
-                String.format(
-                        Locale.ROOT,
-                        "%s: %s days from %s",
-                        plan.name(),
-                        units.figure(plan.days(), "1"),
-                        plan.from()));
+                plan.name()
+                        + ": "
+                        + units.figure(plan.days(), "day")
+                        + " from "
+                        + plan.from().toString().replace('T', ' '));
         warnings("danger", "Danger");
         actions();
         forecast.chambers().forEach(this::chamber);
@@ -54,7 +54,7 @@ final class AdvicePage {
     }
 
     private void head(String text) {
-        page.append(terminal.bold(text)).append("\n\n");
+        page.append(terminal.bold(Paragraph.hanging("", text))).append('\n');
     }
 
     private void actions() {
@@ -65,14 +65,10 @@ final class AdvicePage {
         for (Forecast.Action action : forecast.actions()) {
             String gain =
                     action.gainValue().isPresent()
-                            ? "  (gains " + money(action.gainValue().getAsDouble()) + ")"
+                            ? " (gains " + money(action.gainValue().getAsDouble()) + ")"
                             : "";
-            page.append("  ")
-                    .append(action.order())
-                    .append(". ")
-                    .append(action.text())
-                    .append(gain)
-                    .append('\n');
+            String lead = String.format(Locale.ROOT, "  %2d. ", action.order());
+            page.append(Paragraph.hanging(lead, action.text() + gain));
         }
         page.append('\n');
     }
@@ -95,7 +91,7 @@ final class AdvicePage {
                         + units.temperature(chamber.airC().max())
                         + "; humidity "
                         + units.figure(chamber.humidityPct().mean(), "pct"));
-        chamber.pullDownHours().ifPresent(hours -> line("pull-down", units.figure(hours, "h")));
+        line("pull-down", pullDown(chamber));
         line(
                 "heat",
                 "load peaks at "
@@ -133,13 +129,25 @@ final class AdvicePage {
 
     /** What else speaks against a chamber, beside its headline. */
     private void besides(ChamberForecast chamber) {
-        advice.whyNotHeld(chamber.id()).stream()
-                .skip(1)
-                .forEach(reason -> line("", "- " + words.sentence(reason)));
+        List<Reason> others = advice.whyNotHeld(chamber.id()).stream().skip(1).toList();
+        for (Reason reason : others) {
+            page.append(Paragraph.hanging("  - ", words.sentence(reason) + "."));
+        }
+        if (!others.isEmpty()) {
+            page.append('\n');
+        }
+    }
+
+    private String pullDown(ChamberForecast chamber) {
+        if (chamber.pullDownHours().isEmpty()) {
+            return "never comes to its setting for three hours running";
+        }
+        double hours = chamber.pullDownHours().getAsDouble();
+        return hours == 0 ? "none, it was at its setting" : units.figure(hours, "h");
     }
 
     private void line(String name, String text) {
-        page.append(String.format(Locale.ROOT, "  %-10s %s%n", name, text));
+        page.append(Paragraph.hanging(String.format(Locale.ROOT, "  %-10s ", name), text));
     }
 
     private static String kwh(double kWh) {
@@ -170,57 +178,42 @@ final class AdvicePage {
                 sharing.reasons()
                         .forEach(
                                 reason ->
-                                        line(
-                                                "",
-                                                "- "
-                                                        + reason.text()
-                                                        + "  ["
-                                                        + reason.source()
-                                                        + "]"));
+                                        page.append(
+                                                Paragraph.entry(
+                                                        "    ", reason.text(), reason.source())));
             }
         }
     }
 
     private void lots() {
         head("Lots, first to leave first");
-        page.append(
-                String.format(
-                        "  %-8s %-20s %-8s %-11s %-34s %-26s %s%n",
-                        "lot",
-                        "crop",
-                        "chamber",
-                        "leave by",
-                        "days left",
-                        "limited by",
-                        "days gained"));
+        Table table =
+                new Table("lot", "crop", "chamber", "leave by", "days left", "ended by", "gained");
         forecast.lots().stream()
                 .sorted(Comparator.comparing(LotForecast::leaveBy))
-                .forEach(this::lot);
-        page.append('\n');
+                .forEach(lot -> lot(table, lot));
+        page.append(table.text()).append('\n');
     }
 
-    private void lot(LotForecast lot) {
+    private void lot(Table table, LotForecast lot) {
         LotPlan planned =
                 plan.lots().stream()
                         .filter(one -> one.id().equals(lot.id()))
                         .findFirst()
                         .orElseThrow();
-        page.append(
-                String.format(
-                        "  %-8s %-20s %-8s %-11s %-34s %-26s %s%n",
-                        lot.id(),
-                        planned.commodity(),
-                        lot.chamber().orElse("-"),
-                        lot.leaveBy().toLocalDate(),
-                        words.range(lot.daysLeft()),
-                        words.text("limit." + lot.limitedBy()),
-                        gained(lot.daysGained())));
+        table.row(
+                lot.id(),
+                planned.commodity(),
+                lot.chamber().orElse("-"),
+                lot.leaveBy().toLocalDate().toString(),
+                words.span(lot.daysLeft()),
+                words.text("mechanism." + lot.limitedBy()),
+                gained(lot.daysGained()));
     }
 
     private String gained(Quantiles days) {
-        String verb = days.p50() < 0 ? "loses " : "";
-        double size = Math.abs(days.p50());
-        return verb + units.figure(size, "day");
+        String size = units.figure(Math.abs(days.p50()), "day");
+        return days.p50() < 0 ? "loses " + size : size;
     }
 
     private void warnings(String level, String title) {
@@ -234,11 +227,7 @@ final class AdvicePage {
         }
         head(title);
         for (Forecast.Warning warning : told) {
-            page.append("  - ")
-                    .append(warning.text())
-                    .append("  [")
-                    .append(warning.source())
-                    .append("]\n");
+            page.append(Paragraph.entry("  ", warning.text(), warning.source()));
         }
         long hidden =
                 forecast.warnings().stream()
@@ -246,9 +235,11 @@ final class AdvicePage {
                                 .count()
                         - told.size();
         if (hidden > 0) {
+            String notes = hidden == 1 ? " more note" : " more notes";
             page.append("  - ")
                     .append(hidden)
-                    .append(" more notes on what the figures rest on: --notes\n");
+                    .append(notes)
+                    .append(" on what the figures rest on: --notes\n");
         }
         page.append('\n');
     }
@@ -269,9 +260,9 @@ final class AdvicePage {
     private void value() {
         Forecast.Value value = forecast.value();
         head(
-                "Worth "
+                "Sold produce is worth "
                         + money(value.kept())
-                        + " when sold, power "
+                        + ", power costs "
                         + money(value.energyCost())
                         + ", net "
                         + money(value.net())

@@ -1,14 +1,18 @@
 package org.wardon.cli;
 
 import java.io.IOException;
-import java.io.InputStream;
-import java.io.UncheckedIOException;
+import java.io.InputStreamReader;
+import java.io.Reader;
+import java.nio.charset.StandardCharsets;
 import java.nio.file.Files;
+import java.nio.file.LinkOption;
 import java.nio.file.Path;
 import java.util.List;
 import java.util.Objects;
 import java.util.concurrent.Callable;
 import org.jspecify.annotations.Nullable;
+import org.wardon.errors.BadInput;
+import org.wardon.files.AtomicFile;
 import org.wardon.files.PlanReader;
 import org.wardon.reference.ReferenceBook;
 import picocli.CommandLine.Command;
@@ -38,10 +42,9 @@ final class Demo implements Callable<Integer> {
     private @Nullable Path copyTo;
 
     @Override
-    public Integer call() throws IOException {
-        Path folder = copyTo == null ? Files.createTempDirectory("wardon-demo") : copyTo;
+    public Integer call() {
+        Path folder = copyTo == null ? temporaryFolder() : newOrEmpty(copyTo);
         try (ReferenceBook book = shared.book()) {
-            Files.createDirectories(folder);
             for (String file : FILES) {
                 copy(file, folder.resolve(file));
             }
@@ -49,26 +52,51 @@ final class Demo implements Callable<Integer> {
                     PlanReader.read(folder.resolve(PLAN), shared.lookups(book)), book, shared);
         } finally {
             if (copyTo == null) {
-                remove(folder);
+                FILES.forEach(file -> folder.resolve(file).toFile().delete());
+                folder.toFile().delete();
             }
         }
         return Exit.OK;
     }
 
-    private static void copy(String file, Path to) {
-        try (InputStream in =
-                Objects.requireNonNull(
-                        Demo.class.getResourceAsStream("/org/wardon/demo/" + file), file)) {
-            Files.copy(in, to);
+    private static Path temporaryFolder() {
+        try {
+            return Files.createTempDirectory("wardon-demo");
         } catch (IOException e) {
-            throw new UncheckedIOException("the demo cannot be copied to " + to, e);
+            throw new BadInput(
+                    "demo",
+                    "",
+                    "no temporary folder can be made: " + e.getMessage(),
+                    "name a folder with --copy-to");
         }
     }
 
-    private static void remove(Path folder) throws IOException {
+    private static Path newOrEmpty(Path folder) {
         for (String file : FILES) {
-            Files.deleteIfExists(folder.resolve(file));
+            if (Files.exists(folder.resolve(file), LinkOption.NOFOLLOW_LINKS)) {
+                throw new BadInput(
+                        folder.toString(),
+                        "",
+                        "a file '" + file + "' is there already",
+                        "give a new or empty folder");
+            }
         }
-        Files.deleteIfExists(folder);
+        return AtomicFile.folder(folder);
+    }
+
+    private static void copy(String file, Path to) {
+        AtomicFile.write(
+                to,
+                out -> {
+                    try (Reader text =
+                            new InputStreamReader(
+                                    Objects.requireNonNull(
+                                            Demo.class.getResourceAsStream(
+                                                    "/org/wardon/demo/" + file),
+                                            file),
+                                    StandardCharsets.UTF_8)) {
+                        text.transferTo(out);
+                    }
+                });
     }
 }

@@ -9,6 +9,7 @@ import org.jspecify.annotations.Nullable;
 import org.wardon.advice.outlook.KeepReport;
 import org.wardon.advice.outlook.KeepRequest;
 import org.wardon.advice.outlook.KeepingAdvice;
+import org.wardon.advice.wording.Words;
 import org.wardon.errors.BadInput;
 import org.wardon.files.forecast.AnswerWriter;
 import org.wardon.produce.Ripeness;
@@ -104,13 +105,21 @@ final class Keep implements Callable<Integer> {
     public Integer call() {
         PrintStream out = Terminal.ofProcess().out();
         try (ReferenceBook book = shared.book()) {
-            KeepReport report = new KeepingAdvice(book).ask(request());
+            Words words = shared.words();
+            KeepRequest request = request();
+            KeepReport report = new KeepingAdvice(book).ask(request);
             out.print(
                     json
                             ? AnswerWriter.json(report.answer())
-                            : new KeepPage(shared.words()).of(report));
+                            : new KeepPage(words).of(report, until(request, words)));
         }
         return Exit.OK;
+    }
+
+    private static String until(KeepRequest request, Words words) {
+        return request.condition() instanceof KeepRequest.Steady steady
+                ? "after " + words.units().figure(steady.days(), "day")
+                : "at the end of the history";
     }
 
     private KeepRequest request() {

@@ -3,7 +3,6 @@ package org.wardon.cli;
 import org.wardon.advice.outlook.KeepReport;
 import org.wardon.advice.wording.Words;
 import org.wardon.files.forecast.KeepAnswer;
-import org.wardon.files.forecast.Quantiles;
 import org.wardon.produce.Reason;
 
 /** The answer of {@code keep} for a person. */
@@ -14,41 +13,68 @@ final class KeepPage {
         this.words = words;
     }
 
-    String of(KeepReport report) {
+    /**
+     * Returns the page.
+     *
+     * @param report the answer
+     * @param until when life used and chilling are told, such as "after 7 days"
+     */
+    String of(KeepReport report, String until) {
         KeepAnswer answer = report.answer();
         StringBuilder page = new StringBuilder();
-        page.append(report.commodity().names().get(0))
-                .append(": ")
-                .append(words.range(answer.daysLeft()))
-                .append(", ")
-                .append(words.text("limit." + answer.limitedBy()))
-                .append(".\n");
-        page.append("Life used: ")
-                .append(words.units().figure(answer.lifeUsedPct(), "pct"))
-                .append(". The figure rests on ")
-                .append(words.text("rests-on." + report.restsOn()))
-                .append(".\n");
+        page.append(
+                Paragraph.hanging(
+                        "",
+                        report.commodity().names().get(0)
+                                + ": keeps "
+                                + words.range(answer.daysLeft())
+                                + ", "
+                                + words.text("limit." + answer.limitedBy())
+                                + "."));
+        page.append(
+                Paragraph.hanging(
+                        "",
+                        "Life used "
+                                + until
+                                + ": "
+                                + words.units().figure(answer.lifeUsedPct(), "pct")
+                                + ". The figure rests on "
+                                + words.text("rests-on." + report.restsOn())
+                                + "."));
         if (answer.chillingRisk().probability() > 0) {
-            page.append("Risk of visible chilling injury: ")
-                    .append(words.units().figure(100 * answer.chillingRisk().probability(), "pct"))
-                    .append(".\n");
-        }
-        page.append('\n');
-        for (KeepAnswer.Mechanism mechanism : answer.mechanisms()) {
-            Quantiles days = mechanism.daysLeft();
             page.append(
-                    String.format(
-                            "  %-12s %s%n",
-                            words.text("mechanism." + mechanism.name()), words.range(days)));
+                    Paragraph.hanging(
+                            "",
+                            "Risk of visible chilling injury "
+                                    + until
+                                    + ": "
+                                    + words.units()
+                                            .figure(
+                                                    100 * answer.chillingRisk().probability(),
+                                                    "pct")
+                                    + safe(answer)
+                                    + "."));
         }
         page.append('\n');
+        Table table = new Table("if this alone acted", "days left");
+        for (KeepAnswer.Mechanism mechanism : answer.mechanisms()) {
+            table.row(
+                    words.text("mechanism." + mechanism.name()), words.span(mechanism.daysLeft()));
+        }
+        page.append(table.text()).append('\n');
         for (Reason reason : report.reasons()) {
-            page.append("  - ")
-                    .append(words.sentence(reason))
-                    .append("  [")
-                    .append(reason.sourceId())
-                    .append("]\n");
+            if (!reason.code().equals("life-rests-on")) {
+                page.append(Paragraph.entry("  ", words.sentence(reason), reason.sourceId()));
+            }
         }
         return page.toString();
+    }
+
+    private String safe(KeepAnswer answer) {
+        return answer.chillingRisk().safeDays().isPresent()
+                ? "; safe for "
+                        + words.units()
+                                .figure(answer.chillingRisk().safeDays().getAsDouble(), "day")
+                : "";
     }
 }

@@ -1,15 +1,12 @@
 package org.wardon.cli;
 
 import java.io.PrintStream;
-import java.util.LinkedHashSet;
 import java.util.List;
-import java.util.Locale;
-import java.util.OptionalDouble;
-import java.util.Set;
 import java.util.concurrent.Callable;
 import org.jspecify.annotations.Nullable;
 import org.wardon.files.forecast.AnswerWriter;
 import org.wardon.files.forecast.LookAnswer;
+import org.wardon.files.forecast.LookList;
 import org.wardon.produce.Commodity;
 import org.wardon.produce.NamedFact;
 import org.wardon.reference.ReferenceBook;
@@ -42,77 +39,28 @@ final class Look implements Callable<Integer> {
     public Integer call() {
         PrintStream out = Terminal.ofProcess().out();
         try (ReferenceBook book = shared.book()) {
-            if (name == null) {
-                book.list()
-                        .forEach(id -> out.printf("%-22s %s%n", id, book.get(id).names().get(0)));
-            } else {
-                show(book, book.named(name), out);
-            }
+            out.print(name == null ? list(book) : of(book, book.named(name)));
         }
         return Exit.OK;
     }
 
-    private void show(ReferenceBook book, Commodity commodity, PrintStream out) {
-        List<NamedFact> facts = book.facts(commodity.id());
+    private String list(ReferenceBook book) {
+        List<LookList.Entry> entries =
+                book.list().stream()
+                        .map(id -> new LookList.Entry(id, book.get(id).names()))
+                        .toList();
         if (json) {
-            out.print(AnswerWriter.json(LookAnswer.of(commodity, facts)));
-            return;
+            return AnswerWriter.json(new LookList(entries));
         }
-        out.println(String.join(", ", commodity.names()) + "  [" + commodity.id() + "]");
-        out.println();
-        Set<String> sources = new LinkedHashSet<>();
-        for (NamedFact fact : facts) {
-            out.println(line(fact));
-            sources.addAll(List.of(fact.sourceId().split(";", -1)));
-        }
-        out.println();
-        out.println("Sources");
-        for (String id : sources) {
-            out.println("  " + id + ": " + book.source(id).citation());
-        }
+        Table table = new Table("id", "name");
+        entries.forEach(entry -> table.row(entry.commodity(), entry.names().get(0)));
+        return table.text();
     }
 
-    private static String line(NamedFact fact) {
-        String range = range(fact.low(), fact.high());
-        String value = range.isEmpty() ? fact.text() : range + " " + sign(fact.unit());
-        String note = fact.note().isBlank() ? "" : "  (" + fact.note() + ")";
-        return String.format(
-                Locale.ROOT,
-                "  %-34s %-22s %s, %s%s%s",
-                fact.name(),
-                value.strip(),
-                fact.sourceId(),
-                fact.evidence().word(),
-                fact.own() ? " [own]" : "",
-                note);
-    }
-
-    /** The unit as a person writes it. */
-    private static String sign(String unit) {
-        return switch (unit) {
-            case "C" -> "°C";
-            case "pct" -> "%";
-            case "1" -> "";
-            default -> unit;
-        };
-    }
-
-    private static String range(OptionalDouble low, OptionalDouble high) {
-        if (low.isEmpty() && high.isEmpty()) {
-            return "";
-        }
-        if (low.isEmpty()) {
-            return "up to " + plain(high.getAsDouble());
-        }
-        if (high.isEmpty()) {
-            return "from " + plain(low.getAsDouble());
-        }
-        double a = low.getAsDouble();
-        double b = high.getAsDouble();
-        return a == b ? plain(a) : plain(a) + " to " + plain(b);
-    }
-
-    private static String plain(double value) {
-        return AnswerWriter.text(value);
+    private String of(ReferenceBook book, Commodity commodity) {
+        List<NamedFact> facts = book.facts(commodity.id());
+        return json
+                ? AnswerWriter.json(LookAnswer.of(commodity, facts))
+                : new LookPage(book, shared.words().units().fahrenheit()).of(commodity, facts);
     }
 }

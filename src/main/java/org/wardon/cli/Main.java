@@ -1,5 +1,7 @@
 package org.wardon.cli;
 
+import static java.util.stream.Collectors.joining;
+
 import java.io.PrintStream;
 import org.wardon.errors.BadInput;
 import org.wardon.errors.Fault;
@@ -10,6 +12,7 @@ import picocli.CommandLine.Command;
 import picocli.CommandLine.Model.CommandSpec;
 import picocli.CommandLine.ParameterException;
 import picocli.CommandLine.Spec;
+import picocli.CommandLine.UnmatchedArgumentException;
 
 /** The program: reads the words typed and hands them to a verb. */
 @Command(
@@ -74,8 +77,17 @@ public final class Main implements Runnable {
 
     private static int misused(ParameterException fault, PrintStream err) {
         String verb = fault.getCommandLine().getCommandSpec().qualifiedName();
-        err.println("wardon: " + fault.getMessage() + "; see '" + verb + " --help'");
+        String message = String.valueOf(fault.getMessage()).lines().collect(joining(" "));
+        err.println("wardon: " + message + perhaps(fault) + "; see '" + verb + " --help'");
         return Exit.BAD_INPUT;
+    }
+
+    private static String perhaps(ParameterException fault) {
+        if (fault instanceof UnmatchedArgumentException unmatched
+                && !unmatched.getSuggestions().isEmpty()) {
+            return "; perhaps " + String.join(", ", unmatched.getSuggestions());
+        }
+        return "";
     }
 
     private static int failed(Exception fault, Terminal terminal) {

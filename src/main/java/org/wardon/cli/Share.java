@@ -11,7 +11,6 @@ import org.wardon.advice.company.SharingAdvice;
 import org.wardon.advice.wording.Words;
 import org.wardon.errors.BadInput;
 import org.wardon.files.forecast.AnswerWriter;
-import org.wardon.files.forecast.ShareAnswer;
 import org.wardon.reference.ReferenceBook;
 import picocli.CommandLine.Command;
 import picocli.CommandLine.Mixin;
@@ -50,11 +49,7 @@ final class Share implements Callable<Integer> {
         Words words = shared.words();
         try (ReferenceBook book = shared.book()) {
             ShareReport report = new SharingAdvice(book, words).ask(wanted());
-            if (json) {
-                out.print(AnswerWriter.json(report.answer()));
-            } else {
-                print(out, words, report);
-            }
+            out.print(json ? AnswerWriter.json(report.answer()) : new SharePage(words).of(report));
         }
         return Exit.OK;
     }
@@ -78,42 +73,6 @@ final class Share implements Callable<Integer> {
             return Double.parseDouble(text);
         } catch (NumberFormatException e) {
             throw new BadInput(crop, "", "'" + text + "' is no number of days", "such as mango=10");
-        }
-    }
-
-    private static void print(PrintStream out, Words words, ShareReport report) {
-        ShareAnswer answer = report.answer();
-        out.println(words.text("verdict." + answer.verdict()) + ".");
-        answer.workableC()
-                .ifPresent(
-                        range ->
-                                out.println(
-                                        "Set "
-                                                + words.units().temperature(range.low())
-                                                + " to "
-                                                + words.units().temperature(range.high())
-                                                + answer.workableHumidityPct()
-                                                        .map(
-                                                                pct ->
-                                                                        " at "
-                                                                                + Math.round(
-                                                                                        pct.low())
-                                                                                + " to "
-                                                                                + Math.round(
-                                                                                        pct.high())
-                                                                                + " % humidity")
-                                                        .orElse("")
-                                                + "."));
-        report.notes().forEach(note -> out.println("  - " + words.sentence(note)));
-        for (ShareAnswer.Pair pair : answer.pairs()) {
-            out.println();
-            out.println(
-                    pair.a()
-                            + " with "
-                            + pair.b()
-                            + ": "
-                            + words.text("verdict." + pair.verdict()));
-            pair.reasons().forEach(r -> out.println("  - " + r.text() + "  [" + r.source() + "]"));
         }
     }
 }

@@ -50,15 +50,36 @@ public final class AtomicFile {
     public static void write(Path file, Body body) {
         try {
             if (Files.isDirectory(file)) {
-                throw new CannotWrite(
-                        new Fault(file.toString(), "", "it is a folder", "give the name of a file"),
-                        new FileAlreadyExistsException(file.toString()));
+                throw isFolder(file);
             }
             if (Files.exists(file) && !Files.isRegularFile(file)) {
                 straight(file, body);
             } else {
                 aside(Files.exists(file) ? file.toRealPath() : file.toAbsolutePath(), body);
             }
+        } catch (IOException | ReadOnlyFileSystemException e) {
+            throw cannotWrite(file, e);
+        }
+    }
+
+    /**
+     * Tries whether a file can be written, before work that would be lost; leaves nothing behind.
+     *
+     * @param file its final name
+     * @throws CannotWrite where it could not be written
+     */
+    public static void tryOut(Path file) {
+        if (Files.exists(file) && !Files.isDirectory(file) && !Files.isRegularFile(file)) {
+            return;
+        }
+        try {
+            if (Files.isDirectory(file)) {
+                throw isFolder(file);
+            }
+            Path real = Files.exists(file) ? file.toRealPath() : file.toAbsolutePath();
+            Path aside = aside(real);
+            Files.createFile(aside);
+            Files.delete(aside);
         } catch (IOException | ReadOnlyFileSystemException e) {
             throw cannotWrite(file, e);
         }
@@ -86,7 +107,7 @@ public final class AtomicFile {
     }
 
     private static void aside(Path file, Body body) throws IOException {
-        Path aside = file.resolveSibling(".wardon-" + UUID.randomUUID() + ".part");
+        Path aside = aside(file);
         // A stopped program takes its neighbour with it; a killed one leaves it under this name.
         aside.toFile().deleteOnExit();
         try {
@@ -108,6 +129,16 @@ public final class AtomicFile {
         } finally {
             Files.deleteIfExists(aside);
         }
+    }
+
+    private static Path aside(Path file) {
+        return file.resolveSibling(".wardon-" + UUID.randomUUID() + ".part");
+    }
+
+    private static CannotWrite isFolder(Path file) {
+        return new CannotWrite(
+                new Fault(file.toString(), "", "it is a folder", "give the name of a file"),
+                new FileAlreadyExistsException(file.toString()));
     }
 
     private static void move(Path aside, Path file) throws IOException {

@@ -125,7 +125,7 @@ final class Grounds {
         Commodity commodity = model.lot().commodity();
         for (EthyleneEffect effect : commodity.company().ethyleneEffects()) {
             boolean above =
-                    Response.isDisorder(effect) && highest >= effect.thresholdPpm().get().lowest();
+                    Response.isDisorder(effect) && highest > effect.thresholdPpm().get().lowest();
             if (above) {
                 say(
                         "ethylene-harms",

@@ -59,17 +59,25 @@ public record Units(boolean fahrenheit, boolean pounds) {
             case "K" -> difference(value);
             case "kg" -> mass(value);
             case "day" -> days(value);
-            case "h" -> format(Math.abs(value) < 10 ? "%.1f h" : "%.0f h", value);
-            case "pct" -> format(Math.abs(value) < 10 ? "%.1f %%" : "%.0f %%", value);
+            case "h" -> brief(value) + " h";
+            case "pct" -> brief(value) + " %";
             case "W" -> value >= 1000 ? format("%.1f kW", value / 1000) : format("%.0f W", value);
             case "ppm" -> format(value < 10 ? "%.2f ppm" : "%,.0f ppm", value);
-            default -> format(value == Math.rint(value) ? "%.0f" : "%.1f", value);
+            case "1" -> format(value == Math.rint(value) ? "%.0f" : "%.2f", value);
+            default -> throw new IllegalArgumentException("no words for the unit '" + unit + "'");
         };
     }
 
+    /** Returns a number with one decimal below 10 where it has one, none from there on. */
+    static String brief(double value) {
+        String text = format(Math.abs(value) < 9.95 ? "%.1f" : "%.0f", value);
+        String whole = text.endsWith(".0") ? text.substring(0, text.length() - 2) : text;
+        return "-0".equals(whole) ? "0" : whole;
+    }
+
     private static String days(double days) {
-        String text = format(Math.abs(days) < 10 ? "%.1f" : "%.0f", days);
-        return text + ("1.0".equals(text) ? " day" : " days");
+        String text = brief(days);
+        return text + ("1".equals(text) ? " day" : " days");
     }
 
     private static String format(String pattern, double value) {

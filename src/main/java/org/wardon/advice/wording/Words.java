@@ -7,21 +7,25 @@ import java.io.Reader;
 import java.io.UncheckedIOException;
 import java.nio.charset.StandardCharsets;
 import java.util.List;
-import java.util.Locale;
 import java.util.Objects;
 import java.util.Properties;
 import java.util.Set;
 import java.util.TreeSet;
+import java.util.regex.Matcher;
+import java.util.regex.Pattern;
 import org.wardon.files.forecast.Quantiles;
 import org.wardon.produce.Reason;
 
 /**
- * Turns codes into sentences. A sentence names subjects as {@code {s0}}, {@code {s1}} or {@code
- * {s*}} for all, and arguments as {@code {0}}, {@code {1}}.
+ * Turns codes into sentences. A sentence names subjects as {@code {s0}}, {@code {s1}}, arguments as
+ * {@code {0}}, {@code {1}}, and an argument that is itself a code of a family as {@code
+ * {family.0}}, whose words stand under {@code family.CODE}.
  */
 public final class Words {
     /** Days left are not told beyond this. */
     private static final int MOST_DAYS = 730;
+
+    private static final Pattern FAMILY = Pattern.compile("\\{([a-z-]+)\\.(\\d+)}");
 
     private final Properties bundle;
     private final Units units;
@@ -77,8 +81,7 @@ public final class Words {
      * @throws IllegalArgumentException when no sentence stands for the code
      */
     public String sentence(Reason reason) {
-        String text = text(reason.code());
-        text = text.replace("{s*}", String.join(", ", reason.subjects()));
+        String text = families(text(reason.code()), reason.arguments());
         text = fill(text, "s", reason.subjects());
         List<String> figures =
                 reason.arguments().stream()
@@ -114,24 +117,39 @@ public final class Words {
      * @return such as "5 to 12 days (likely 8)"; "more than" where a figure stands at its cap
      */
     public String range(Quantiles days) {
-        if (days.p10() >= MOST_DAYS) {
-            return "more than " + MOST_DAYS + " days";
-        }
-        String high = days.p90() >= MOST_DAYS ? "more than " + MOST_DAYS : number(days.p90());
-        String low = number(days.p10());
-        if (low.equals(high)) {
-            return low + ("1".equals(low) ? " day" : " days");
-        }
-        String middle = days.p50() >= MOST_DAYS ? "more than " + MOST_DAYS : number(days.p50());
-        return low + " to " + high + " days (likely " + middle + ")";
+        String low = capped(days.p10());
+        String high = capped(days.p90());
+        return low.equals(high)
+                ? low + ("1".equals(low) ? " day" : " days")
+                : low + " to " + high + " days (likely " + capped(days.p50()) + ")";
     }
 
-    private static String number(double days) {
-        if (Math.abs(days) < 9.95) {
-            String text = String.format(Locale.ROOT, "%.1f", days);
-            return text.endsWith(".0") ? text.substring(0, text.length() - 2) : text;
-        }
-        return String.format(Locale.ROOT, "%.0f", days);
+    /**
+     * Returns days left in few words, for a table whose head names the unit.
+     *
+     * @param days p10, p50 and p90, days
+     * @return such as "5 to 12 (likely 8)"
+     */
+    public String span(Quantiles days) {
+        String low = capped(days.p10());
+        String high = capped(days.p90());
+        return low.equals(high)
+                ? low
+                : low + " to " + high + " (likely " + capped(days.p50()) + ")";
+    }
+
+    private static String capped(double days) {
+        return days >= MOST_DAYS ? "more than " + MOST_DAYS : Units.brief(days);
+    }
+
+    private String families(String text, List<Reason.Argument> arguments) {
+        return FAMILY.matcher(text)
+                .replaceAll(
+                        match -> {
+                            int argument = Integer.parseInt(match.group(2));
+                            String code = arguments.get(argument).text();
+                            return Matcher.quoteReplacement(text(match.group(1) + "." + code));
+                        });
     }
 
     private static String fill(String text, String prefix, List<String> values) {
