@@ -1,12 +1,12 @@
 package org.wardon.lots;
 
 import java.util.ArrayList;
+import java.util.DoubleSummaryStatistics;
 import java.util.LinkedHashSet;
 import java.util.List;
 import java.util.Map;
 import java.util.NavigableMap;
 import java.util.Optional;
-import java.util.OptionalDouble;
 import java.util.Set;
 import java.util.TreeMap;
 import java.util.function.Predicate;
@@ -24,7 +24,8 @@ import org.wardon.produce.rows.RespirationRow;
  * <p>Rule: the chosen table's rows of the state that is wanted, else those of no stated state, else
  * the same in the other tables, else all rows of the chosen table together; the published power law
  * only where there is no row; else the class. From turning on the ripe rows hold, unless rows of
- * turning fruit are printed. Unknown ripeness takes all states, low to high.
+ * turning fruit are printed. Unknown ripeness takes all states, low to high. Temperatures the
+ * chosen table lacks are filled from other sources that agree with it, see {@link RespirationGaps}.
  */
 public final class Respirations {
     /**
@@ -60,7 +61,8 @@ public final class Respirations {
                 usable(commodity).filter(row -> !row.state().equals(UNCURED)).toList();
         List<RespirationRow> rows = chosen(usable, states(ripeness));
         if (!rows.isEmpty()) {
-            return Optional.of(ofRows(commodity.id(), rows, share));
+            RespirationGaps gaps = RespirationGaps.filled(rows, usable);
+            return Optional.of(ofRows(commodity.id(), rows, gaps, share));
         }
         return commodity.breath().powers().stream()
                 .findFirst()
@@ -78,7 +80,9 @@ public final class Respirations {
             Commodity commodity, double share) {
         List<RespirationRow> rows =
                 usable(commodity).filter(row -> row.state().equals(UNCURED)).toList();
-        return rows.isEmpty() ? Optional.empty() : Optional.of(ofRows(commodity.id(), rows, share));
+        return rows.isEmpty()
+                ? Optional.empty()
+                : Optional.of(ofRows(commodity.id(), rows, RespirationGaps.leftOpen(rows), share));
     }
 
     private static Stream<RespirationRow> usable(Commodity commodity) {
@@ -89,11 +93,14 @@ public final class Respirations {
     private static List<RespirationRow> chosen(
             List<RespirationRow> rows, List<Predicate<RespirationRow>> states) {
         Set<String> tables = new LinkedHashSet<>();
-        rows.forEach(row -> tables.add(key(row)));
+        rows.forEach(row -> tables.add(RespirationGaps.tableOf(row)));
         for (Predicate<RespirationRow> state : states) {
             for (String table : tables) {
                 List<RespirationRow> found =
-                        rows.stream().filter(row -> key(row).equals(table)).filter(state).toList();
+                        rows.stream()
+                                .filter(row -> RespirationGaps.tableOf(row).equals(table))
+                                .filter(state)
+                                .toList();
                 if (!found.isEmpty()) {
                     return found;
                 }
@@ -116,38 +123,36 @@ public final class Respirations {
         return row -> row.state().equals(state);
     }
 
-    private static String key(RespirationRow row) {
-        return row.table() + " " + row.wattsPerTonne().sourceId();
-    }
-
     private static WithReasons<RespirationCurve> ofRows(
-            String id, List<RespirationRow> rows, double share) {
-        NavigableMap<Double, Fact> rates = new TreeMap<>();
-        rows.forEach(
-                row -> rates.merge(row.temperatureC(), row.wattsPerTonne(), Respirations::both));
-        String source = rows.get(0).wattsPerTonne().sourceId();
+            String id, List<RespirationRow> chosen, RespirationGaps gaps, double share) {
         List<Reason> reasons = new ArrayList<>();
-        reasons.add(
-                Reason.about(
-                        "respiration-table",
-                        id,
-                        source,
-                        Reason.Argument.of(rates.firstKey(), "C"),
-                        Reason.Argument.of(rates.lastKey(), "C")));
-        if (rates.firstKey() > 0 || rates.lastKey() < 20) {
+        reasons.add(table(id, chosen));
+        if (!gaps.filling().isEmpty()) {
+            reasons.add(
+                    Reason.about(
+                            "respiration-filled",
+                            id,
+                            gaps.filling().firstEntry().getValue().sourceId(),
+                            Reason.Argument.of(gaps.filling().firstKey(), "C"),
+                            Reason.Argument.of(gaps.filling().lastKey(), "C")));
+        }
+        gaps.refused()
+                .forEach(source -> reasons.add(Reason.about("respiration-differs", id, source)));
+        if (gaps.rates().firstKey() > 0 || gaps.rates().lastKey() < 20) {
             reasons.add(Reason.about("respiration-extended", id, "ah66-2002-tab"));
         }
-        return new WithReasons<>(RespirationCurve.through(rates, share), reasons, false);
+        return new WithReasons<>(RespirationCurve.through(gaps.rates(), share), reasons, false);
     }
 
-    private static Fact both(Fact one, Fact other) {
-        return new Fact(
-                OptionalDouble.of(Math.min(one.lowest(), other.lowest())),
-                OptionalDouble.of(Math.max(one.highest(), other.highest())),
-                one.unit(),
-                one.sourceId(),
-                one.evidence(),
-                one.own() || other.own());
+    private static Reason table(String id, List<RespirationRow> chosen) {
+        DoubleSummaryStatistics printed =
+                chosen.stream().mapToDouble(RespirationRow::temperatureC).summaryStatistics();
+        return Reason.about(
+                "respiration-table",
+                id,
+                chosen.get(0).wattsPerTonne().sourceId(),
+                Reason.Argument.of(printed.getMin(), "C"),
+                Reason.Argument.of(printed.getMax(), "C"));
     }
 
     private static WithReasons<RespirationCurve> ofPower(
