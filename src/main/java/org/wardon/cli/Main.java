@@ -3,6 +3,7 @@ package org.wardon.cli;
 import static java.util.stream.Collectors.joining;
 
 import java.io.PrintStream;
+import java.util.List;
 import org.wardon.errors.BadInput;
 import org.wardon.errors.Fault;
 import org.wardon.errors.RunStopped;
@@ -71,23 +72,33 @@ public final class Main implements Runnable {
 
     @Override
     public void run() {
-        throw new ParameterException(
-                spec.commandLine(), "no verb is given; 'wardon --help' lists them");
+        throw new ParameterException(spec.commandLine(), "no verb is given");
     }
 
     private static int misused(ParameterException fault, PrintStream err) {
         String verb = fault.getCommandLine().getCommandSpec().qualifiedName();
-        String message = String.valueOf(fault.getMessage()).lines().collect(joining(" "));
-        err.println("wardon: " + message + perhaps(fault) + "; see '" + verb + " --help'");
+        err.println("wardon: " + message(fault) + "; see '" + verb + " --help'");
         return Exit.BAD_INPUT;
     }
 
-    private static String perhaps(ParameterException fault) {
-        if (fault instanceof UnmatchedArgumentException unmatched
-                && !unmatched.getSuggestions().isEmpty()) {
-            return "; perhaps " + String.join(", ", unmatched.getSuggestions());
+    private static String message(ParameterException fault) {
+        boolean noSuchVerb =
+                fault.getCommandLine().getParent() == null
+                        && fault instanceof UnmatchedArgumentException unmatched
+                        && !unmatched.isUnknownOption();
+        if (noSuchVerb) {
+            UnmatchedArgumentException unmatched = (UnmatchedArgumentException) fault;
+            List<String> near = unmatched.getSuggestions();
+            return "no verb is called '"
+                    + unmatched.getUnmatched().get(0)
+                    + "'"
+                    + (near.isEmpty() ? "" : "; perhaps " + String.join(", ", near));
         }
-        return "";
+        return String.valueOf(fault.getMessage())
+                .lines()
+                .collect(joining(" "))
+                .replaceFirst("^Error: ", "")
+                .replace("is not a double", "is not a number");
     }
 
     private static int failed(Exception fault, Terminal terminal) {

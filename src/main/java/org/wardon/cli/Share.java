@@ -72,7 +72,8 @@ final class Share implements Callable<Integer> {
         try {
             return Double.parseDouble(text);
         } catch (NumberFormatException e) {
-            throw new BadInput(crop, "", "'" + text + "' is no number of days", "such as mango=10");
+            throw new BadInput(
+                    crop, "", "'" + text + "' is no number of days", "accepted: such as mango=10");
         }
     }
 }

@@ -88,6 +88,17 @@ final class Cautions {
 
     private void chamber(ChamberPlan chamber) {
         Course course = outcome.horizonCourse(chamber.id());
+        double most = OtherChambers.mostKg(outcome.model().sheetsIn(chamber.id()));
+        if (most > chamber.capacityKg()) {
+            add(
+                    Level.CAUTION,
+                    Reason.about(
+                            "over-capacity",
+                            chamber.id(),
+                            "own",
+                            Argument.of(most, "kg"),
+                            Argument.of(chamber.capacityKg(), "kg")));
+        }
         for (CourseEvent.Kind kind : CourseEvent.Kind.values()) {
             double hours =
                     course.events().stream()
