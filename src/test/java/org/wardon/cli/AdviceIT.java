@@ -37,15 +37,16 @@ class AdviceIT {
     /** The error a forecast may report, percent; the terms must close as well. */
     private static final double BALANCE_PCT = 0.1;
 
-    @TempDir static Path folder;
-
-    private final Path series = folder.resolve("series");
+    private Path folder = Path.of("");
+    private Path series = Path.of("");
     private Ran advised = new Ran(-1, "", "");
     private JsonNode forecast = JsonMapper.shared().nullNode();
     private JsonNode plan = JsonMapper.shared().nullNode();
 
     @BeforeAll
-    void advise() throws IOException {
+    void advise(@TempDir Path temporary) throws IOException {
+        folder = temporary;
+        series = folder.resolve("series");
         Path out = folder.resolve("out.json");
         advised =
                 WardonJar.run(

@@ -117,7 +117,7 @@ public final class KeepingAdvice {
             return;
         }
         within(faults, "--known-life days", Double.parseDouble(match.group(1)), 0.1, 730, "days");
-        within(faults, "--known-life °C", Double.parseDouble(match.group(2)), -5, 45, "°C");
+        within(faults, "--known-life °C", Double.parseDouble(match.group(2)), -2, 40, "°C");
     }
 
     private static void within(
