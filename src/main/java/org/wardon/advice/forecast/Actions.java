@@ -106,7 +106,7 @@ final class Actions {
                                     sheet,
                                     outcome.course(other.id()),
                                     outcome.ethylene(other.id()),
-                                    outcome.durationS());
+                                    outcome.horizonS());
             double gain = there.shareSound() - soundHere;
             if (gain > best + WORTH_MOVING) {
                 best = gain;

@@ -68,7 +68,7 @@ final class Cautions {
     }
 
     private void gases(ChamberPlan chamber) {
-        Course course = outcome.horizonCourse(chamber.id());
+        Course course = outcome.course(chamber.id());
         double ppm = course.counts().co2HighestPpm();
         Argument highest = Argument.of(ppm, "ppm");
         Argument opening = Argument.of(course.counts().co2AtFirstOpeningPpm(), "ppm");
@@ -87,7 +87,7 @@ final class Cautions {
     }
 
     private void chamber(ChamberPlan chamber) {
-        Course course = outcome.horizonCourse(chamber.id());
+        Course course = outcome.course(chamber.id());
         double most = OtherChambers.mostKg(outcome.model().sheetsIn(chamber.id()));
         if (most > chamber.capacityKg()) {
             add(

@@ -14,7 +14,7 @@ import org.wardon.heat.HeatLedger;
 import org.wardon.heat.Hours;
 import org.wardon.plan.ChamberPlan;
 
-/** Figures of one chamber over the horizon. */
+/** Figures of one chamber over the course. */
 final class ChamberFigures {
     private static final double J_PER_KWH = 3.6e6;
     private static final double AIR_O2_PCT = 20.9;
@@ -22,19 +22,17 @@ final class ChamberFigures {
     private final ChamberPlan chamber;
     private final StoreOutcome outcome;
     private final Course course;
-    private final Course horizon;
 
     ChamberFigures(ChamberPlan chamber, StoreOutcome outcome) {
         this.chamber = chamber;
         this.outcome = outcome;
         this.course = outcome.course(chamber.id());
-        this.horizon = outcome.horizonCourse(chamber.id());
     }
 
     ChamberForecast forecast(Holding holding, Course ideal, OptionalDouble intake) {
-        Hours hours = horizon.hours();
-        double energyKWh = horizon.heat().electricity() / J_PER_KWH;
-        double co2 = horizon.counts().co2HighestPpm();
+        Hours hours = course.hours();
+        double energyKWh = course.heat().electricity() / J_PER_KWH;
+        double co2 = course.counts().co2HighestPpm();
         return new ChamberForecast(
                 chamber.id(),
                 holding.holds(),
@@ -48,19 +46,19 @@ final class ChamberFigures {
                 intake,
                 new MeanMax(mean(hours, hours::respirationW), max(hours, hours::respirationW)),
                 AIR_O2_PCT - co2 / 1e4,
-                load(horizon.heat()),
-                horizon.heat().removed() / J_PER_KWH,
+                load(course.heat()),
+                course.heat().removed() / J_PER_KWH,
                 energyKWh,
                 energyKWh * outcome.model().plan().prices().energyPerKWh(),
                 0,
                 co2,
                 ethylenePpm(),
-                Math.max(horizon.balanceErrorPct(), course.balanceErrorPct()));
+                course.balanceErrorPct());
     }
 
     private double ethylenePpm() {
         var level = outcome.ethylene(chamber.id());
-        Hours hours = horizon.hours();
+        Hours hours = course.hours();
         return max(hours, i -> level.ppmAt(hours.atS(i)));
     }
 

@@ -30,10 +30,12 @@ final class Fates {
 
     private final StoreModel model;
     private final EthyleneAround around;
+    private final Map<String, MarketAir> markets = new HashMap<>();
 
     Fates(StoreModel model) {
         this.model = model;
         this.around = model.plan().ethylene();
+        model.sheets().forEach(sheet -> markets.put(sheet.id(), market(sheet)));
     }
 
     /**
@@ -122,7 +124,7 @@ final class Fates {
 
     /** History of a lot up to its leaving, carried on through the market leg. */
     LotHistory withMarket(LotSheet sheet, LotHistory history) {
-        MarketAir market = market(sheet);
+        MarketAir market = ById.get(markets, sheet.id());
         return HistoryLegs.then(
                 history,
                 sheet.clock().leavesS(),
@@ -141,7 +143,7 @@ final class Fates {
     record MarketAir(double temperatureC, double humidityFraction) {}
 
     /** Air of a lot's market leg: as given, else the mean of the air without a chamber. */
-    MarketAir market(LotSheet sheet) {
+    private MarketAir market(LotSheet sheet) {
         AirSeries outside = model.withoutAir();
         double from = sheet.clock().leavesS();
         double hours = Math.max(1, Math.ceil(sheet.marketDays() * 24));

@@ -66,8 +66,7 @@ public final class ForecastAdvice {
         Map<String, List<Reason>> whyNot = new LinkedHashMap<>();
         for (ChamberPlan chamber : outcome.model().plan().chambers()) {
             Holding holding = Holding.of(chamber, outcome);
-            Course ideal =
-                    outcome.model().ideal(chamber, outcome.horizonS(), outcome.horizonCourses());
+            Course ideal = outcome.model().ideal(chamber, outcome.horizonS(), outcome.courses());
             ChamberFigures figures = new ChamberFigures(chamber, outcome);
             chambers.put(
                     chamber.id(),

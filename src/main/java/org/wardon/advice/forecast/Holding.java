@@ -180,7 +180,7 @@ record Holding(
                     Math.max(
                             SEVEN_EIGHTHS_LEAST_H,
                             SEVEN_EIGHTHS_PER_HALF * sheet.kind().halfCoolingHours().middle());
-            double here = Math.min(sheet.clock().leavesS(), outcome.durationS()) - history.timeS(0);
+            double here = Math.min(sheet.clock().leavesS(), outcome.horizonS()) - history.timeS(0);
             if (!cooling.wasWarm() || here < allowed * Timeline.HOUR_S) {
                 return;
             }

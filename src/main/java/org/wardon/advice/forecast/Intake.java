@@ -125,8 +125,7 @@ final class Intake {
     }
 
     private ChamberRun run(double startS, double durationS, List<Stay> stays) {
-        ChamberRun plan =
-                outcome.model().asPlanned(chamber, outcome.durationS(), outcome.courses());
+        ChamberRun plan = outcome.model().asPlanned(chamber, outcome.horizonS(), outcome.courses());
         return plan.withWeather(from(outcome.model().weather(), startS, durationS))
                 .withOutages(List.of())
                 .withStays(stays)

@@ -30,7 +30,7 @@ final class LotFigures {
         this.outcome = outcome;
         fates = outcome.fates(sheet.id());
         history = outcome.history(sheet.id());
-        inHorizon = outcome.horizonCourse(chamber.id()).lot(sheet.id());
+        inHorizon = outcome.course(chamber.id()).lot(sheet.id());
     }
 
     LotForecast forecast() {

@@ -42,12 +42,17 @@ final class StoreModel {
     private final Weather weather;
     private final List<LotSheet> sheets;
     private final Timeline timeline;
+    private final AirSeries withoutAir;
 
     StoreModel(StorePlan plan, Weather weather, List<LotSheet> sheets) {
         this.plan = plan;
         this.weather = weather;
         this.sheets = List.copyOf(sheets);
         this.timeline = plan.timeline();
+        this.withoutAir =
+                plan.without() instanceof WithoutChamber.Steady steady
+                        ? AirSeries.steady(steady.temperatureC(), steady.humidityPct() / 100)
+                        : AirSeries.outdoors(weather);
     }
 
     StorePlan plan() {
@@ -125,11 +130,10 @@ final class StoreModel {
 
     /** Runs all lots that are in the run without a chamber in one draw, by id. */
     Map<String, LotCourse> without(Draw draw, double durationS) {
-        AirSeries air = withoutAir();
         Map<String, LotCourse> courses = new HashMap<>();
         for (LotSheet sheet : sheets) {
             if (sheet.clock().arrivesS() < durationS) {
-                courses.put(sheet.id(), inAir(sheet.stay(draw), air, durationS));
+                courses.put(sheet.id(), inAir(sheet.stay(draw), withoutAir, durationS));
             }
         }
         return courses;
@@ -146,9 +150,7 @@ final class StoreModel {
 
     /** The air a lot would stand in without a chamber. */
     AirSeries withoutAir() {
-        return plan.without() instanceof WithoutChamber.Steady steady
-                ? AirSeries.steady(steady.temperatureC(), steady.humidityPct() / 100)
-                : AirSeries.outdoors(weather);
+        return withoutAir;
     }
 
     private Map<String, Course> pass(
@@ -157,12 +159,14 @@ final class StoreModel {
             Map<String, AirSeries> air,
             DoorMode door,
             ControlMode control) {
+        List<Course> ran =
+                plan.chambers().parallelStream()
+                        .map(chamber -> run(chamber, draw, durationS, air))
+                        .map(run -> run.withDoorMode(door).withControlMode(control))
+                        .map(run -> HeatModel.run(run, Progress.SILENT))
+                        .toList();
         Map<String, Course> courses = new LinkedHashMap<>();
-        for (ChamberPlan chamber : plan.chambers()) {
-            ChamberRun run =
-                    run(chamber, draw, durationS, air).withDoorMode(door).withControlMode(control);
-            courses.put(chamber.id(), HeatModel.run(run, Progress.SILENT));
-        }
+        ran.forEach(course -> courses.put(course.chamberId(), course));
         return courses;
     }
 

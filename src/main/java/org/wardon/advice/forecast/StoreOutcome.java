@@ -10,9 +10,7 @@ import org.wardon.lots.LotHistory;
  *
  * @param model the store as it was run
  * @param horizonS end of the plan, s
- * @param durationS end of the run, s; beyond the horizon where lots had not settled
- * @param horizonCourses chambers in full to the end of the horizon, by id; for totals
- * @param courses chambers in full to the end of the run, by id
+ * @param courses chambers in full to the end of the horizon, by id
  * @param ethylene ethylene of the chambers in the plain run
  * @param histories lots in the plain run, by id, with their ethylene
  * @param fates fates of the lots, by id
@@ -20,14 +18,11 @@ import org.wardon.lots.LotHistory;
 record StoreOutcome(
         StoreModel model,
         double horizonS,
-        double durationS,
-        Map<String, Course> horizonCourses,
         Map<String, Course> courses,
         Map<String, ChamberEthylene> ethylene,
         Map<String, LotHistory> histories,
         Map<String, LotFates> fates) {
     StoreOutcome {
-        horizonCourses = Map.copyOf(horizonCourses);
         courses = Map.copyOf(courses);
         ethylene = Map.copyOf(ethylene);
         histories = Map.copyOf(histories);
@@ -37,10 +32,6 @@ record StoreOutcome(
     /** Whether a lot is in the run. */
     boolean has(String lotId) {
         return fates.containsKey(lotId);
-    }
-
-    Course horizonCourse(String chamberId) {
-        return ById.get(horizonCourses, chamberId);
     }
 
     Course course(String chamberId) {

@@ -18,8 +18,9 @@ import org.wardon.lots.LotHistory;
 import org.wardon.plan.ChamberPlan;
 
 /**
- * Runs a store once in full and once a draw, and follows its lots. Past the horizon the run goes on
- * until the lots have settled, ten days at most.
+ * Runs a store once in full and once a draw, and follows its lots. The draws, from which days left
+ * are told, go on past the horizon until the lots have settled, ten days at most; the full run,
+ * from which everything else is told, ends with the horizon.
  */
 final class StoreRun {
     /** Draws of a forecast. */
@@ -41,24 +42,15 @@ final class StoreRun {
     }
 
     StoreOutcome run(Progress progress) {
-        Map<String, Course> horizon = model.plain(horizonS, progress);
-        double durationS = settledS(horizon);
-        Map<String, Course> courses =
-                durationS > horizonS ? model.plain(durationS, progress) : horizon;
+        Map<String, Course> courses = model.plain(horizonS, progress);
+        double durationS = settledS(courses);
         Map<String, ChamberEthylene> ethylene = fates.ethylene(courses, Draw.MEDIAN);
         Map<String, LotHistory> histories = fates.histories(courses, ethylene);
-        Map<String, LotCourse> without = model.without(Draw.MEDIAN, durationS);
+        Map<String, LotCourse> without = model.without(Draw.MEDIAN, horizonS);
         Map<String, Fates.Three> plain = fates.follow(histories, without, Draw.MEDIAN);
         List<Map<String, Fates.Three>> drawn = draws(courses, durationS, progress);
         return new StoreOutcome(
-                model,
-                horizonS,
-                durationS,
-                horizon,
-                courses,
-                ethylene,
-                histories,
-                together(plain, drawn, histories));
+                model, horizonS, courses, ethylene, histories, together(plain, drawn, histories));
     }
 
     private List<Map<String, Fates.Three>> draws(

@@ -22,8 +22,8 @@ final class StoreSeries {
 
     void write(Path folder) {
         SeriesWriter writer = new SeriesWriter(folder, outcome.model().plan().timeline());
-        outcome.horizonCourses().forEach((id, course) -> chamber(writer, id, course));
-        outcome.horizonCourses()
+        outcome.courses().forEach((id, course) -> chamber(writer, id, course));
+        outcome.courses()
                 .values()
                 .forEach(course -> course.lots().forEach(lot -> lot(writer, lot)));
     }
