@@ -38,6 +38,8 @@ public final class ChamberNetwork implements TreeSystem {
     private final int exchangeFlowAt;
     private final InnerGains gains;
     private final int gainsFlowAt;
+    private final MistPart mist;
+    private final int mistFlowAt;
     private final LotBranch[] lots;
     private final Part[] always;
     private final double[] tolerances;
@@ -87,6 +89,8 @@ public final class ChamberNetwork implements TreeSystem {
                         inputs.enclosure().gains().lightsW(),
                         inputs.heaterW(),
                         inputs.humidifierKgS());
+        mistFlowAt = take(MistPart.FLOWS);
+        mist = new MistPart(mistFlowAt, dryAirKg(inputs.enclosure().box().volumeM3()));
         lots = new LotBranch[inputs.lots().size()];
         for (int i = 0; i < lots.length; i++) {
             lots[i] = lot(inputs.lots().get(i));
@@ -110,6 +114,7 @@ public final class ChamberNetwork implements TreeSystem {
         ideal.ifPresent(parts::add);
         parts.add(exchange);
         parts.add(gains);
+        parts.add(mist);
         return parts.toArray(new Part[0]);
     }
 
@@ -270,7 +275,7 @@ public final class ChamberNetwork implements TreeSystem {
      */
     public Terms terms() {
         int idealAt = ideal.isPresent() ? idealFlowAt : -1;
-        return new Terms(faces, coolers, idealAt, exchangeFlowAt, gainsFlowAt);
+        return new Terms(faces, coolers, idealAt, exchangeFlowAt, gainsFlowAt, mistFlowAt);
     }
 
     /**

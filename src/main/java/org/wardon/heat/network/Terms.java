@@ -9,13 +9,21 @@ public final class Terms {
     private final int idealAt;
     private final int exchangeAt;
     private final int gainsAt;
+    private final int mistAt;
 
-    Terms(FaceBranch[] faces, CoolerPart[] coolers, int idealAt, int exchangeAt, int gainsAt) {
+    Terms(
+            FaceBranch[] faces,
+            CoolerPart[] coolers,
+            int idealAt,
+            int exchangeAt,
+            int gainsAt,
+            int mistAt) {
         this.faces = faces;
         this.coolers = coolers;
         this.idealAt = idealAt;
         this.exchangeAt = exchangeAt;
         this.gainsAt = gainsAt;
+        this.mistAt = mistAt;
     }
 
     private double faces(double[] totals, int kind) {
@@ -35,33 +43,35 @@ public final class Terms {
     }
 
     /**
-     * Enthalpy from faces to the air.
+     * Enthalpy from faces to the air, less that of mist.
      *
      * @param totals integrals of the flows
      * @return J
      */
     public double walls(double[] totals) {
-        return faces(totals, FaceBranch.HEAT) + faces(totals, FaceBranch.VAPOUR_ENTHALPY);
+        return faces(totals, FaceBranch.HEAT)
+                + faces(totals, FaceBranch.VAPOUR_ENTHALPY)
+                - totals[mistAt + MistPart.ENTHALPY];
     }
 
     /**
-     * Vapour from faces to the air; below 0 where it condensed.
+     * Vapour from faces to the air, less mist; below 0 where it condensed.
      *
      * @param totals integrals of the flows
      * @return kg
      */
     public double wallVapour(double[] totals) {
-        return faces(totals, FaceBranch.VAPOUR);
+        return faces(totals, FaceBranch.VAPOUR) - totals[mistAt + MistPart.WATER];
     }
 
     /**
-     * Water that ran off the faces.
+     * Water that ran off the faces or fell out as mist.
      *
      * @param totals integrals of the flows
      * @return kg
      */
     public double ranOff(double[] totals) {
-        return faces(totals, FaceBranch.RUNS_OFF);
+        return faces(totals, FaceBranch.RUNS_OFF) + totals[mistAt + MistPart.WATER];
     }
 
     /**

@@ -1,0 +1,95 @@
+package org.wardon.heat.network;
+
+import org.wardon.air.MoistAir;
+import org.wardon.heat.laws.FreeWater;
+import org.wardon.heat.solver.Tree;
+
+/**
+ * Mist: what the air holds beyond saturation falls out as water, which runs off with that of the
+ * faces. Its latent heat stays in the air.
+ *
+ * <p>Source: air holds no more vapour than saturation (ASHRAE Handbook - Fundamentals, chapter 1,
+ * saturated moist air; from memory of it). How fast the excess falls out is an assumption: within a
+ * minute.
+ */
+final class MistPart implements Part {
+    /** Flows: water out of the air, kg/s. */
+    static final int WATER = 0;
+
+    /** Its enthalpy, W. */
+    static final int ENTHALPY = 1;
+
+    static final int FLOWS = 2;
+
+    /** Time in which the excess falls out, s (assumption). */
+    private static final double FALLS_IN_S = 60;
+
+    /** The excess is rounded within this of saturation, kg/kg: about 0.2 % humidity at 5 °C. */
+    private static final double ROUND_KG_KG = 1e-5;
+
+    private final int flowAt;
+    private final double perS;
+    private double byAirC;
+    private double byRatio;
+    private double heatByAirC;
+    private double heatByRatio;
+
+    /**
+     * @param flowAt place of its flows
+     * @param airKg dry air of the chamber, kg
+     */
+    MistPart(int flowAt, double airKg) {
+        this.flowAt = flowAt;
+        this.perS = airKg / FALLS_IN_S;
+    }
+
+    private static double excess(AirState air) {
+        double psat = Saturation.pressurePa(air.airC);
+        return air.ratio - MoistAir.MOLAR_MASS_RATIO * psat / (air.pressurePa - psat);
+    }
+
+    @Override
+    public void rates(AirState air, Outside outside, double[] y, double[] rates, double[] flows) {
+        double water = perS * FreeWater.positive(excess(air), ROUND_KG_KG);
+        double heat = water * MoistAir.WATER_J_KG_K * air.airC;
+        rates[AirState.ENTHALPY] -= heat;
+        rates[AirState.HUMIDITY] -= water;
+        flows[flowAt + WATER] = water;
+        flows[flowAt + ENTHALPY] = heat;
+    }
+
+    @Override
+    public void linearise(AirState air, Outside outside, double airKg, double[] y, Tree tree) {
+        double psat = Saturation.pressurePa(air.airC);
+        double dry = air.pressurePa - psat;
+        double satByAirC =
+                MoistAir.MOLAR_MASS_RATIO
+                        * air.pressurePa
+                        * Saturation.slopePaPerK(air.airC)
+                        / (dry * dry);
+        double over = excess(air);
+        byRatio = perS * FreeWater.positiveSlope(over, ROUND_KG_KG);
+        byAirC = -byRatio * satByAirC;
+        double water = perS * FreeWater.positive(over, ROUND_KG_KG);
+        heatByRatio = byRatio * MoistAir.WATER_J_KG_K * air.airC;
+        heatByAirC = MoistAir.WATER_J_KG_K * (water + byAirC * air.airC);
+        tree.hubByHub[0] -= heatByAirC * air.airByEnthalpy / airKg;
+        tree.hubByHub[1] -= (heatByAirC * air.airByRatio + heatByRatio) / airKg;
+        tree.hubByHub[2] -= byAirC * air.airByEnthalpy / airKg;
+        tree.hubByHub[3] -= (byAirC * air.airByRatio + byRatio) / airKg;
+    }
+
+    @Override
+    public void timeSlope(
+            AirState air, Outside outside, double[] y, double[] rateSlope, double[] slope) {
+        // Mist feels time only through the chamber's air.
+    }
+
+    @Override
+    public void flowsAlong(AirState air, double[] v, double[] change) {
+        double airC = air.airAlong(v);
+        double ratio = v[AirState.HUMIDITY];
+        change[flowAt + WATER] = byAirC * airC + byRatio * ratio;
+        change[flowAt + ENTHALPY] = heatByAirC * airC + heatByRatio * ratio;
+    }
+}
