@@ -407,11 +407,11 @@ final class ChamberRunner implements Integrator.StepListener {
                 terms.freshAirVapour(totals),
                 terms.peopleVapour(totals),
                 terms.humidifierWater(totals),
-                terms.wallVapour(totals),
+                terms.wallVapour(totals) - terms.mist(totals),
                 -terms.removedVapour(totals),
                 startAirKg - network.airKg() * network.ratio(y),
                 respirationJ / BurntSugar.JOULE_PER_KG_CO2 * BurntSugar.WATER_KG_PER_KG_CO2,
-                terms.ranOff(totals));
+                terms.ranOff(totals) + terms.mist(totals));
     }
 
     private double layersError() {

@@ -14,7 +14,7 @@ package org.wardon.heat;
  * @param coolers brought by coolers; below 0 where they dried the air
  * @param air what the chamber's air gave up
  * @param formed water formed by respiration, which stays in the tissue; no part of the sum
- * @param ranOff water that ran off the faces; no part of the sum
+ * @param ranOff water that ran off the faces or fell out as mist; no part of the sum
  */
 public record WaterLedger(
         double lots,

@@ -1,6 +1,7 @@
 package org.wardon.heat;
 
 import static org.junit.jupiter.api.Assertions.assertEquals;
+import static org.junit.jupiter.api.Assertions.assertTrue;
 
 import java.util.List;
 import java.util.SplittableRandom;
@@ -18,6 +19,7 @@ import org.wardon.enclosure.DoorExchange;
 import org.wardon.enclosure.PeopleHeat;
 import org.wardon.heat.laws.FaceWater;
 import org.wardon.heat.laws.FreeWater;
+import org.wardon.heat.laws.Mist;
 import org.wardon.heat.laws.SkinWater;
 import org.wardon.heat.network.ChamberNetwork;
 import org.wardon.heat.solver.DenseJacobian;
@@ -213,8 +215,9 @@ class NetworkRatesTest {
             }
             heat += network.terms().walls(flows);
             heat += 50_000.0 / 1_200 * (network.structureJ(y) / 50_000 - airC);
-            water += network.terms().wallVapour(flows);
             double kg = 90 * perM3;
+            water += network.terms().wallVapour(flows);
+            water -= Mist.waterKgS(kg, airC, ratio, pressurePa);
             assertEquals(heat / kg, f[0], 1e-9 * (1 + Math.abs(f[0])), "enthalpy, state " + k);
             assertEquals(water / kg, f[1], 1e-11 * (1e-3 + Math.abs(f[1])), "water, state " + k);
         }
@@ -231,6 +234,25 @@ class NetworkRatesTest {
         in.run = Thermostat.modulatedShare(airC, 4, 1);
         law.effect(in, out);
         return out;
+    }
+
+    @Test
+    void mistFallsOutOfOversaturatedAirOnly() {
+        double[] flows = new double[network.flows()];
+        int misty = 0;
+        double airKg =
+                run.enclosure().box().volumeM3()
+                        / MoistAir.specificVolumeM3kg(run.setting().temperatureC(), 0, pressurePa);
+        for (int k = 0; k < 200; k++) {
+            double[] y = randomState();
+            rates(1800, y, flows);
+            double law = Mist.waterKgS(1, network.airC(y), network.ratio(y), pressurePa);
+            double found = network.terms().mist(flows);
+            misty += law > 0 ? 1 : 0;
+            assertEquals(law > 0, found > 0, "state " + k);
+            assertEquals(law * airKg, found, 1e-9 * law * airKg, "state " + k);
+        }
+        assertTrue(misty > 5 && misty < 195, "states with mist: " + misty);
     }
 
     @Test

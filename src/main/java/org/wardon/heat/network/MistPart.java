@@ -2,16 +2,10 @@ package org.wardon.heat.network;
 
 import org.wardon.air.MoistAir;
 import org.wardon.heat.laws.FreeWater;
+import org.wardon.heat.laws.Mist;
 import org.wardon.heat.solver.Tree;
 
-/**
- * Mist: what the air holds beyond saturation falls out as water, which runs off with that of the
- * faces. Its latent heat stays in the air.
- *
- * <p>Source: air holds no more vapour than saturation (ASHRAE Handbook - Fundamentals, chapter 1,
- * saturated moist air; from memory of it). How fast the excess falls out is an assumption: within a
- * minute.
- */
+/** Mist, by {@link Mist}; its water runs off with that of the faces. */
 final class MistPart implements Part {
     /** Flows: water out of the air, kg/s. */
     static final int WATER = 0;
@@ -20,12 +14,6 @@ final class MistPart implements Part {
     static final int ENTHALPY = 1;
 
     static final int FLOWS = 2;
-
-    /** Time in which the excess falls out, s (assumption). */
-    private static final double FALLS_IN_S = 60;
-
-    /** The excess is rounded within this of saturation, kg/kg: about 0.2 % humidity at 5 °C. */
-    private static final double ROUND_KG_KG = 1e-5;
 
     private final int flowAt;
     private final double perS;
@@ -40,7 +28,7 @@ final class MistPart implements Part {
      */
     MistPart(int flowAt, double airKg) {
         this.flowAt = flowAt;
-        this.perS = airKg / FALLS_IN_S;
+        this.perS = airKg / Mist.FALLS_IN_S;
     }
 
     private static double excess(AirState air) {
@@ -50,7 +38,7 @@ final class MistPart implements Part {
 
     @Override
     public void rates(AirState air, Outside outside, double[] y, double[] rates, double[] flows) {
-        double water = perS * FreeWater.positive(excess(air), ROUND_KG_KG);
+        double water = perS * FreeWater.positive(excess(air), Mist.ROUND_KG_KG);
         double heat = water * MoistAir.WATER_J_KG_K * air.airC;
         rates[AirState.ENTHALPY] -= heat;
         rates[AirState.HUMIDITY] -= water;
@@ -68,9 +56,9 @@ final class MistPart implements Part {
                         * Saturation.slopePaPerK(air.airC)
                         / (dry * dry);
         double over = excess(air);
-        byRatio = perS * FreeWater.positiveSlope(over, ROUND_KG_KG);
+        byRatio = perS * FreeWater.positiveSlope(over, Mist.ROUND_KG_KG);
         byAirC = -byRatio * satByAirC;
-        double water = perS * FreeWater.positive(over, ROUND_KG_KG);
+        double water = perS * FreeWater.positive(over, Mist.ROUND_KG_KG);
         heatByRatio = byRatio * MoistAir.WATER_J_KG_K * air.airC;
         heatByAirC = MoistAir.WATER_J_KG_K * (water + byAirC * air.airC);
         tree.hubByHub[0] -= heatByAirC * air.airByEnthalpy / airKg;

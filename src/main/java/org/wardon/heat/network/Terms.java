@@ -55,23 +55,33 @@ public final class Terms {
     }
 
     /**
-     * Vapour from faces to the air, less mist; below 0 where it condensed.
+     * Vapour from faces to the air; below 0 where it condensed.
      *
      * @param totals integrals of the flows
      * @return kg
      */
     public double wallVapour(double[] totals) {
-        return faces(totals, FaceBranch.VAPOUR) - totals[mistAt + MistPart.WATER];
+        return faces(totals, FaceBranch.VAPOUR);
     }
 
     /**
-     * Water that ran off the faces or fell out as mist.
+     * Water that fell out of the air as mist.
+     *
+     * @param totals integrals of the flows
+     * @return kg
+     */
+    public double mist(double[] totals) {
+        return totals[mistAt + MistPart.WATER];
+    }
+
+    /**
+     * Water that ran off the faces.
      *
      * @param totals integrals of the flows
      * @return kg
      */
     public double ranOff(double[] totals) {
-        return faces(totals, FaceBranch.RUNS_OFF) + totals[mistAt + MistPart.WATER];
+        return faces(totals, FaceBranch.RUNS_OFF);
     }
 
     /**
