@@ -28,16 +28,18 @@ final class KeepPage {
                         report.commodity().names().get(0)
                                 + ": keeps "
                                 + words.range(answer.daysLeft())
-                                + ", "
-                                + words.text("limit." + answer.limitedBy())
-                                + "."));
+                                + (Words.isCapped(answer.daysLeft().p10())
+                                        ? "."
+                                        : ", " + words.text("limit." + answer.limitedBy()) + ".")));
         page.append(
                 Paragraph.hanging(
                         "",
                         "Life used "
                                 + until
                                 + ": "
-                                + words.units().figure(answer.lifeUsedPct(), "pct")
+                                + (answer.lifeUsedPct() >= 100
+                                        ? "all of it"
+                                        : words.units().figure(answer.lifeUsedPct(), "pct"))
                                 + ". The figure rests on "
                                 + words.text("rests-on." + report.restsOn())
                                 + "."));

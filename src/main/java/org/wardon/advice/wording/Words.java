@@ -138,8 +138,18 @@ public final class Words {
                 : low + " to " + high + " (likely " + capped(days.p50()) + ")";
     }
 
+    /**
+     * Returns whether a number of days stands at its cap and is told as "more than".
+     *
+     * @param days days left
+     * @return true at the cap
+     */
+    public static boolean isCapped(double days) {
+        return days >= MOST_DAYS;
+    }
+
     private static String capped(double days) {
-        return days >= MOST_DAYS ? "more than " + MOST_DAYS : Units.brief(days);
+        return isCapped(days) ? "more than " + MOST_DAYS : Units.brief(days);
     }
 
     private String families(String text, List<Reason.Argument> arguments) {
