@@ -46,9 +46,7 @@ final class Look implements Callable<Integer> {
 
     private String list(ReferenceBook book) {
         List<LookList.Entry> entries =
-                book.list().stream()
-                        .map(id -> new LookList.Entry(id, book.get(id).names()))
-                        .toList();
+                book.all().stream().map(one -> new LookList.Entry(one.id(), one.names())).toList();
         if (json) {
             return AnswerWriter.json(new LookList(entries));
         }

@@ -7,7 +7,7 @@ import java.util.OptionalDouble;
 import java.util.Set;
 import java.util.regex.Matcher;
 import java.util.regex.Pattern;
-import org.wardon.files.forecast.AnswerWriter;
+import org.wardon.files.forecast.WrittenNumber;
 import org.wardon.produce.Commodity;
 import org.wardon.produce.NamedFact;
 import org.wardon.reference.ReferenceBook;
@@ -119,13 +119,13 @@ final class LookPage {
     }
 
     private String figure(double value, String unit) {
-        return "C".equals(unit) ? temperature(value) : AnswerWriter.text(value);
+        return "C".equals(unit) ? temperature(value) : WrittenNumber.text(value);
     }
 
     /** A printed temperature; in °F to a tenth, finer than any source reads. */
     private String temperature(double temperatureC) {
         return fahrenheit
-                ? AnswerWriter.text(Math.rint(10 * (1.8 * temperatureC + 32)) / 10)
-                : AnswerWriter.text(temperatureC);
+                ? WrittenNumber.text(Math.rint(10 * (1.8 * temperatureC + 32)) / 10)
+                : WrittenNumber.text(temperatureC);
     }
 }

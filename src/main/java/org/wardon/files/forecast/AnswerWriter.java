@@ -1,13 +1,9 @@
 package org.wardon.files.forecast;
 
-import java.math.BigDecimal;
-import java.math.MathContext;
-import java.math.RoundingMode;
 import java.nio.file.Path;
 import java.time.LocalDateTime;
 import java.time.temporal.ChronoUnit;
 import java.util.OptionalDouble;
-import org.wardon.errors.Require;
 import org.wardon.files.AtomicFile;
 import tools.jackson.core.JsonGenerator;
 import tools.jackson.databind.MapperFeature;
@@ -22,8 +18,6 @@ import tools.jackson.databind.ser.std.StdSerializer;
  * large ones with two decimals, {@code null} where there is no answer.
  */
 public final class AnswerWriter {
-    private static final MathContext SIX_DIGITS = new MathContext(6, RoundingMode.HALF_EVEN);
-    private static final double SIX_DIGITS_KEEP_CENTS_BELOW = 10_000;
     private static final JsonMapper MAPPER =
             JsonMapper.builder()
                     .disable(MapperFeature.SORT_PROPERTIES_ALPHABETICALLY)
@@ -61,38 +55,6 @@ public final class AnswerWriter {
         AtomicFile.write(file, out -> out.write(text));
     }
 
-    /**
-     * Returns a number as text, as it stands in answers.
-     *
-     * @param value a finite number
-     * @return plain digits
-     */
-    public static String text(double value) {
-        return rounded(value).toPlainString();
-    }
-
-    /**
-     * Returns a number as it is written.
-     *
-     * @param value a finite number
-     * @return six significant digits, or two decimals from 10 000 on
-     * @throws IllegalArgumentException if it is not finite
-     */
-    static BigDecimal rounded(double value) {
-        Require.that(
-                Double.isFinite(value), "a number of an answer must be finite, found " + value);
-        BigDecimal exact = BigDecimal.valueOf(value);
-        BigDecimal rounded =
-                Math.abs(value) < SIX_DIGITS_KEEP_CENTS_BELOW
-                        ? exact.round(SIX_DIGITS)
-                        : exact.setScale(2, RoundingMode.HALF_EVEN);
-        if (rounded.signum() == 0) {
-            return BigDecimal.ZERO;
-        }
-        BigDecimal bare = rounded.stripTrailingZeros();
-        return bare.scale() < 0 ? bare.setScale(0) : bare;
-    }
-
     private static final class Numbers extends StdSerializer<Double> {
         Numbers(Class<Double> type) {
             super(type);
@@ -100,7 +62,7 @@ public final class AnswerWriter {
 
         @Override
         public void serialize(Double value, JsonGenerator out, SerializationContext context) {
-            out.writeNumber(rounded(value).toPlainString());
+            out.writeNumber(WrittenNumber.text(value));
         }
     }
 
@@ -113,7 +75,7 @@ public final class AnswerWriter {
         public void serialize(
                 OptionalDouble value, JsonGenerator out, SerializationContext context) {
             if (value.isPresent()) {
-                out.writeNumber(rounded(value.getAsDouble()).toPlainString());
+                out.writeNumber(WrittenNumber.text(value.getAsDouble()));
             } else {
                 out.writeNull();
             }

@@ -102,7 +102,7 @@ public final class SeriesWriter {
             out.write(',');
             double v = value.applyAsDouble(row);
             if (Double.isFinite(v)) {
-                out.write(AnswerWriter.rounded(v).toPlainString());
+                out.write(WrittenNumber.text(v));
             }
         }
         out.write('\n');

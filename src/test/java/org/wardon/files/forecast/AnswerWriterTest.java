@@ -32,7 +32,7 @@ class AnswerWriterTest {
         "120000, 120000"
     })
     void numbersAreRoundedOnce(double value, String written) {
-        assertEquals(written, AnswerWriter.rounded(value).toPlainString());
+        assertEquals(written, WrittenNumber.text(value));
     }
 
     @Test
