@@ -20,14 +20,6 @@ import picocli.CommandLine.UnmatchedArgumentException;
         name = "wardon",
         mixinStandardHelpOptions = true,
         versionProvider = Version.class,
-        subcommands = {
-            Advise.class,
-            Keep.class,
-            Share.class,
-            Look.class,
-            SchemaVerb.class,
-            Demo.class
-        },
         synopsisSubcommandLabel = "VERB",
         description = {
             "Advice for people who keep other people's harvest cool: which crops may share a"
@@ -41,6 +33,15 @@ import picocli.CommandLine.UnmatchedArgumentException;
             "Wardon advises; local codes and licensed practice decide."
         })
 public final class Main implements Runnable {
+    private static final List<Class<?>> VERBS =
+            List.of(
+                    Advise.class,
+                    Keep.class,
+                    Share.class,
+                    Look.class,
+                    SchemaVerb.class,
+                    Demo.class);
+
     @Spec private CommandSpec spec = CommandSpec.create();
 
     /** Made by the command line. */
@@ -64,10 +65,24 @@ public final class Main implements Runnable {
     static int run(String... args) {
         Terminal terminal = Terminal.ofProcess();
         CommandLine line = new CommandLine(new Main());
+        verbsFor(args).forEach(verb -> line.addSubcommand(verb));
         line.setCaseInsensitiveEnumValuesAllowed(true);
         line.setParameterExceptionHandler((fault, words) -> misused(fault, terminal.err()));
         line.setExecutionExceptionHandler((fault, command, parsed) -> failed(fault, terminal));
         return line.execute(args);
+    }
+
+    /** The verb asked for alone, as reading all of them takes longer than many answers. */
+    private static List<Class<?>> verbsFor(String... args) {
+        List<Class<?>> asked =
+                VERBS.stream()
+                        .filter(verb -> args.length > 0 && name(verb).equals(args[0]))
+                        .toList();
+        return asked.isEmpty() ? VERBS : asked;
+    }
+
+    private static String name(Class<?> verb) {
+        return verb.getAnnotation(Command.class).name();
     }
 
     @Override
