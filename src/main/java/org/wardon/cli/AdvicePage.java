@@ -1,8 +1,10 @@
 package org.wardon.cli;
 
 import java.util.Comparator;
+import java.util.LinkedHashMap;
 import java.util.List;
 import java.util.Locale;
+import java.util.Map;
 import java.util.stream.Collectors;
 import org.wardon.advice.forecast.StoreAdvice;
 import org.wardon.advice.wording.Units;
@@ -226,8 +228,15 @@ final class AdvicePage {
             return;
         }
         head(title);
-        for (Forecast.Warning warning : told) {
-            page.append(Paragraph.entry("  ", warning.text(), warning.source()));
+        Map<String, List<Forecast.Warning>> alike =
+                told.stream()
+                        .collect(
+                                Collectors.groupingBy(
+                                        Forecast.Warning::code,
+                                        LinkedHashMap::new,
+                                        Collectors.toList()));
+        for (List<Forecast.Warning> group : alike.values()) {
+            group.forEach(one -> page.append(Paragraph.entry("  ", one.text(), one.source())));
         }
         long hidden =
                 forecast.warnings().stream()

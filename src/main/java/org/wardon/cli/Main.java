@@ -69,7 +69,15 @@ public final class Main implements Runnable {
         line.setCaseInsensitiveEnumValuesAllowed(true);
         line.setParameterExceptionHandler((fault, words) -> misused(fault, terminal.err()));
         line.setExecutionExceptionHandler((fault, command, parsed) -> failed(fault, terminal));
-        return line.execute(args);
+        int status = line.execute(args);
+        if (status == Exit.OK && System.out.checkError()) {
+            terminal.err()
+                    .println(
+                            "wardon: standard output: not all of the answer could be written;"
+                                    + " free some space, or let the reader read to the end");
+            return Exit.CANNOT_WRITE;
+        }
+        return status;
     }
 
     /** The verb asked for alone, as reading all of them takes longer than many answers. */

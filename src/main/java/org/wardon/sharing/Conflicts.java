@@ -60,7 +60,7 @@ final class Conflicts {
                                 giverId,
                                 Response.SOURCE_ID,
                                 Argument.of(ppm, "ppm"),
-                                Argument.of(100 * cost, "pct")));
+                                Argument.of(100 * Math.min(1, cost), "pct")));
             }
         }
         disorders(taker, giverId, ppm);

@@ -9,6 +9,8 @@ import java.nio.file.Files;
 import java.nio.file.Path;
 import java.util.stream.Stream;
 import org.junit.jupiter.api.Test;
+import org.junit.jupiter.api.condition.EnabledOnOs;
+import org.junit.jupiter.api.condition.OS;
 import org.junit.jupiter.api.io.TempDir;
 import org.junit.jupiter.params.ParameterizedTest;
 import org.junit.jupiter.params.provider.ValueSource;
@@ -115,6 +117,20 @@ class RefusalsIT {
         if (Files.isDirectory(readOnly.getParent())) {
             WardonJar.run("advise", MINIMAL, "--json", readOnly.toString()).refused(4);
         }
+    }
+
+    @Test
+    @EnabledOnOs(OS.LINUX)
+    void aFullDiskIsSaid() throws IOException, InterruptedException {
+        Path full = Path.of("/dev/full");
+        assertEquals(
+                "wardon: /dev/full: cannot be written: the disk is full; free some space and run"
+                        + " again; nothing was left under that name\n",
+                WardonJar.run("advise", MINIMAL, "--json", full.toString()).refused(4).err());
+        Path err = folder.resolve("err");
+        Process toFull = WardonJar.start(full, err, "look");
+        assertEquals(4, toFull.waitFor(), Files.readString(err));
+        assertTrue(Files.readString(err).startsWith("wardon: standard output: "));
     }
 
     /**

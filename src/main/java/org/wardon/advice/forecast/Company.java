@@ -46,7 +46,7 @@ final class Company {
                     outcome.model().sheetsIn(chamber.id()).stream()
                             .filter(sheet -> outcome.has(sheet.id()))
                             .toList();
-            if (!lots.isEmpty()) {
+            if (lots.size() > 1) {
                 verdicts.add(verdict(chamber, lots));
             }
         }
