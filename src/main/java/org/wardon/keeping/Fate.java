@@ -42,6 +42,24 @@ public final class Fate {
     }
 
     /**
+     * Returns the fate without its course: it starts and ends as this one does, by each mechanism
+     * and clock, and takes next to no memory. What was used between is lost.
+     *
+     * @return the copy
+     */
+    public Fate brief() {
+        Map<Mechanism, Track> ends = new EnumMap<>(Mechanism.class);
+        tracks.forEach((mechanism, track) -> ends.put(mechanism, track.brief()));
+        return new Fate(
+                drawNumber,
+                startS,
+                ends,
+                ageing,
+                green.map(Track::brief),
+                edible.map(Track::brief));
+    }
+
+    /**
      * Returns the number of the draw.
      *
      * @return 0 for the plain run

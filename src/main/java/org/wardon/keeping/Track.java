@@ -148,4 +148,18 @@ final class Track {
         }
         return timeS[last] + (share - used[last]) / beyondPerDay * Timeline.DAY_S;
     }
+
+    /** A track of at most two samples that starts and reaches the whole at the same times. */
+    Track brief() {
+        double end = reachesS(1);
+        double first = timeS[0];
+        if (end <= first) {
+            return new Track(new double[] {first}, new double[] {1}, 0, end, 0);
+        }
+        int last = timeS.length - 1;
+        boolean never = Double.isInfinite(end);
+        double[] times = {first, never ? timeS[last] : end};
+        double[] shares = {used(0), never ? used(last) : 1};
+        return new Track(times, shares, 0, Double.POSITIVE_INFINITY, 0);
+    }
 }

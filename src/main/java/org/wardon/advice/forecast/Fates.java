@@ -11,7 +11,6 @@ import org.wardon.cooling.Outage;
 import org.wardon.heat.AirSeries;
 import org.wardon.heat.Course;
 import org.wardon.heat.Hours;
-import org.wardon.heat.LotCourse;
 import org.wardon.keeping.ChamberEthylene;
 import org.wardon.keeping.Draw;
 import org.wardon.keeping.Fate;
@@ -45,7 +44,12 @@ final class Fates {
      * @param sold leaving as planned, market leg included
      * @param without without a chamber
      */
-    record Three(Fate staying, Fate sold, Fate without) {}
+    record Three(Fate staying, Fate sold, Fate without) {
+        /** The same ends without the courses to them, for draws of which many are kept. */
+        Three brief() {
+            return new Three(staying.brief(), sold.brief(), without.brief());
+        }
+    }
 
     /** Ethylene of each chamber in a draw, and with it the completed histories of its lots. */
     Map<String, ChamberEthylene> ethylene(Map<String, Course> courses, Draw draw) {
@@ -87,17 +91,26 @@ final class Fates {
     }
 
     /** Follows every lot that has a history. */
-    Map<String, Three> follow(
-            Map<String, LotHistory> histories, Map<String, LotCourse> without, Draw draw) {
+    Map<String, Three> follow(Map<String, LotHistory> histories, Draw draw, double durationS) {
         Map<String, Three> fates = new HashMap<>();
         for (LotSheet sheet : model.sheets()) {
             LotHistory history = histories.get(sheet.id());
             if (history != null) {
-                LotHistory alone = clean(ById.get(without, sheet.id()).history());
+                LotHistory alone = clean(model.without(sheet, draw, durationS).history());
                 fates.put(sheet.id(), three(sheet, history, alone, draw));
             }
         }
         return fates;
+    }
+
+    /** Follows every lot and keeps the ends only, each before the next is begun. */
+    Map<String, Three> ends(Map<String, LotHistory> histories, Draw draw, double durationS) {
+        Map<String, Three> ends = new HashMap<>();
+        histories.forEach(
+                (id, history) ->
+                        follow(Map.of(id, history), draw, durationS)
+                                .forEach((lot, three) -> ends.put(lot, three.brief())));
+        return ends;
     }
 
     private Three three(LotSheet sheet, LotHistory history, LotHistory outside, Draw draw) {

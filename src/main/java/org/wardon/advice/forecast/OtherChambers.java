@@ -53,7 +53,7 @@ final class OtherChambers {
         double ppm = meanPpm(level, history);
         List<Fate> sold = new ArrayList<>();
         for (Draw draw : draws) {
-            sold.add(fates.inOtherAir(sheet, history, ppm, draw));
+            sold.add(fates.inOtherAir(sheet, history, ppm, draw).brief());
         }
         return new There(Outlook.shareSound(sold, sheet.soldS()), massShare(sheet, history), sold);
     }

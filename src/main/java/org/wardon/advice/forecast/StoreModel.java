@@ -128,15 +128,9 @@ final class StoreModel {
         return run(chamber, Draw.MEDIAN, durationS, airOf(plain));
     }
 
-    /** Runs all lots that are in the run without a chamber in one draw, by id. */
-    Map<String, LotCourse> without(Draw draw, double durationS) {
-        Map<String, LotCourse> courses = new HashMap<>();
-        for (LotSheet sheet : sheets) {
-            if (sheet.clock().arrivesS() < durationS) {
-                courses.put(sheet.id(), inAir(sheet.stay(draw), withoutAir, durationS));
-            }
-        }
-        return courses;
+    /** Runs one lot without a chamber in one draw. */
+    LotCourse without(LotSheet sheet, Draw draw, double durationS) {
+        return inAir(sheet.stay(draw), withoutAir, durationS);
     }
 
     /** Runs one lot in the air of a chamber that is there already. */

@@ -9,7 +9,6 @@ import org.wardon.air.Timeline;
 import org.wardon.cooling.Outage;
 import org.wardon.errors.Progress;
 import org.wardon.heat.Course;
-import org.wardon.heat.LotCourse;
 import org.wardon.keeping.ChamberEthylene;
 import org.wardon.keeping.Draw;
 import org.wardon.keeping.Draws;
@@ -46,8 +45,7 @@ final class StoreRun {
         double durationS = settledS(courses);
         Map<String, ChamberEthylene> ethylene = fates.ethylene(courses, Draw.MEDIAN);
         Map<String, LotHistory> histories = fates.histories(courses, ethylene);
-        Map<String, LotCourse> without = model.without(Draw.MEDIAN, horizonS);
-        Map<String, Fates.Three> plain = fates.follow(histories, without, Draw.MEDIAN);
+        Map<String, Fates.Three> plain = fates.follow(histories, Draw.MEDIAN, horizonS);
         List<Map<String, Fates.Three>> drawn = draws(courses, durationS, progress);
         return new StoreOutcome(
                 model, horizonS, courses, ethylene, histories, together(plain, drawn, histories));
@@ -62,9 +60,8 @@ final class StoreRun {
                             Map<String, Course> courses = model.drawn(draw, durationS, plain);
                             Map<String, LotHistory> histories =
                                     fates.histories(courses, fates.ethylene(courses, draw));
-                            Map<String, LotCourse> without = model.without(draw, durationS);
                             progress.at("draws", done.incrementAndGet() / (double) DRAWS);
-                            return fates.follow(histories, without, draw);
+                            return fates.ends(histories, draw, durationS);
                         })
                 .toList();
     }
