@@ -157,6 +157,7 @@ final class StoreModel {
                 plan.chambers().parallelStream()
                         .map(chamber -> run(chamber, draw, durationS, air))
                         .map(run -> run.withDoorMode(door).withControlMode(control))
+                        .map(run -> door == DoorMode.AVERAGED ? Averaged.of(run) : run)
                         .map(run -> HeatModel.run(run, Progress.SILENT))
                         .toList();
         Map<String, Course> courses = new LinkedHashMap<>();
