@@ -22,14 +22,13 @@ final class ChamberRunner implements Integrator.StepListener {
     private static final double SHORTEST_STEP_S = 1e-5;
     private static final double FIRST_STEP_S = 2;
 
-    /** Kinds of edges whose first steps are remembered apart. */
-    private static final int OPENED = 0;
+    /** Kinds of edges whose first steps are remembered apart: the schedule's, and two more. */
+    private static final List<Edge.Kind> SCHEDULED = List.of(Edge.Kind.values());
 
-    private static final int SHUT = 1;
-    private static final int STARTED = 2;
-    private static final int RESTED = 3;
-    private static final int OTHER = 4;
-    private static final int EDGES = 5;
+    private static final int STARTED = SCHEDULED.size();
+
+    private static final int RESTED = STARTED + 1;
+    private static final int EDGES = STARTED + 2;
 
     /** Packages take this much more room than the produce in them (assumption). */
     private static final double PACKAGE_ROOM = 1.05;
@@ -235,31 +234,35 @@ final class ChamberRunner implements Integrator.StepListener {
                 awaitsFirstOpening = true;
                 budget.midnight(totals, powered);
             }
-            case USE_STARTS -> use(true);
-            case USE_ENDS -> use(false);
+            case USE_STARTS, USE_ENDS -> use(edge);
             case LIGHTS_ON, LIGHTS_OFF -> {
                 network.light(edge.kind() == Edge.Kind.LIGHTS_ON);
-                integrator.restart(OTHER);
+                restart(edge);
             }
             case POWER_OFF -> power(t, false);
             case POWER_ON -> power(t, true);
             case DEFROST_STARTS, DEFROST_ENDS -> defrost(edge, t);
             case DOOR_OPENS, DOOR_SHUTS -> door(edge);
-            case ARRIVES -> arrive(edge.index(), t);
-            case LEAVES -> leave(edge.index(), t);
+            case ARRIVES -> arrive(edge, t);
+            case LEAVES -> leave(edge, t);
             case FRESH_ENDS ->
                     network.lot(edge.index())
                             .breathe(run.stays().get(edge.index()).lot().respiration());
         }
     }
 
-    private void use(boolean starts) {
+    private void restart(Edge edge) {
+        integrator.restart(SCHEDULED.indexOf(edge.kind()));
+    }
+
+    private void use(Edge edge) {
+        boolean starts = edge.kind() == Edge.Kind.USE_STARTS;
         double present = run.enclosure().gains().peopleHoursPerDay() * 3600 / usedS;
         network.people(starts ? present : 0);
         if (run.doorMode() == DoorMode.AVERAGED) {
             network.door(starts);
         }
-        integrator.restart(OTHER);
+        restart(edge);
     }
 
     private void power(double t, boolean on) {
@@ -281,7 +284,7 @@ final class ChamberRunner implements Integrator.StepListener {
                 thermostats.rest(i, t);
             }
             network.cooler(i).defrost(starts && powered, unit.defrost().get().heaterW());
-            integrator.restart(OTHER);
+            restart(edge);
         }
     }
 
@@ -295,10 +298,11 @@ final class ChamberRunner implements Integrator.StepListener {
                 awaitsFirstOpening = false;
             }
         }
-        integrator.restart(opens ? OPENED : SHUT);
+        restart(edge);
     }
 
-    private void arrive(int i, double t) {
+    private void arrive(Edge edge, double t) {
+        int i = edge.index();
         Stay stay = run.stays().get(i);
         LotBranch lot = network.lot(i);
         boolean fresh = stay.freshUntilS() > t;
@@ -306,17 +310,18 @@ final class ChamberRunner implements Integrator.StepListener {
         lot.arrive(stay.pulpC(), stay.surfaceWaterKg(), network.ratio(y), y);
         lots[i].arrives(t, y, totals);
         changeVolume();
-        integrator.restart(OTHER);
+        restart(edge);
     }
 
-    private void leave(int i, double t) {
+    private void leave(Edge edge, double t) {
+        int i = edge.index();
         lots[i].stepped(t, y, totals);
         lots[i].row(t, y, totals);
         lots[i].close(y, totals);
         lastRespiration = respirationJ();
         network.lot(i).give(false);
         changeVolume();
-        integrator.restart(OTHER);
+        restart(edge);
     }
 
     private void changeVolume() {

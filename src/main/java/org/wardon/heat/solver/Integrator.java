@@ -10,6 +10,10 @@ public final class Integrator {
     private static final double SAFETY = 0.85;
     private static final double SHORTEST = 0.15;
     private static final double LONGEST = 6;
+
+    /** Rather than two halves, a step this much longer than wanted: its error is still below 1. */
+    private static final double REACHES = 1.15;
+
     private static final int LANDINGS = 40;
 
     private final Rosenbrock method;
@@ -139,7 +143,7 @@ public final class Integrator {
 
     /** A step that lands on the end, or leaves room for a decent last one. */
     private static double fit(double wanted, double left) {
-        if (wanted >= left) {
+        if (REACHES * wanted >= left) {
             return left;
         }
         return wanted > 0.5 * left ? 0.5 * left : wanted;
