@@ -21,13 +21,18 @@ import org.wardon.produce.Reason.Argument;
 /** What to do first: what saves people, then what saves most. */
 final class Actions {
     /** Moves that gain less than this share of a lot's price are not worth a person's time. */
-    private static final double WORTH_MOVING = 0.02;
+    private static final double WORTH_MOVING = 0.05;
 
     /** A door counts as left open from here on, s an opening (assumption). */
     private static final double LEFT_OPEN_S = 120;
 
     /** Share of the heat that makes the door worth naming (assumption). */
     private static final double DOOR_SHARE = 0.15;
+
+    /**
+     * Bulbs root and mould above 75 to 80 % humidity (sprouting table, ids USDA-GARDEN and kin).
+     */
+    private static final double DRY_CROPS_BELOW_PCT = 80;
 
     private static final double AIR_OUT_PPM = 14_000;
     private static final String OWN_RULE = "assumption";
@@ -134,11 +139,18 @@ final class Actions {
         move.ifPresent(found::add);
     }
 
-    /** A chamber colder than the lot bears, or a cold one for a lot that is not cured. */
+    /**
+     * A chamber that would harm the lot in a way its price does not show: colder than it bears,
+     * cold for one that is not cured, damp for one that is to stay dry.
+     */
     private boolean harms(LotSheet sheet, ChamberPlan other) {
-        double meanC = ById.get(chambers, other.id()).airC().mean();
+        ChamberForecast there = ById.get(chambers, other.id());
+        boolean tooCold =
+                there.airC().mean() < sheet.model().lowestSafeC() - other.setting().bandK();
         boolean uncuredIntoCold = sheet.model().uncured() && !other.coolers().isEmpty();
-        return meanC < sheet.model().lowestSafeC() - other.setting().bandK() || uncuredIntoCold;
+        boolean tooDamp =
+                sheet.model().wantsDry() && there.humidityPct().mean() > DRY_CROPS_BELOW_PCT;
+        return tooCold || uncuredIntoCold || tooDamp;
     }
 
     private double valueHere(LotSheet sheet) {
