@@ -19,6 +19,9 @@ import org.wardon.produce.Reason;
 
 /** The advice on a store plan for a person. */
 final class AdvicePage {
+    /** Heat below this is not worth a word, kWh. */
+    private static final double LEAST_TOLD_KWH = 0.5;
+
     private final StoreAdvice advice;
     private final StorePlan plan;
     private final Forecast forecast;
@@ -169,6 +172,7 @@ final class AdvicePage {
                 .stream()
                 .sorted(Comparator.comparingDouble(Term::kWh).reversed())
                 .limit(3)
+                .filter(term -> term.kWh() >= LEAST_TOLD_KWH)
                 .map(term -> term.name() + " (" + kwh(term.kWh()) + ")")
                 .collect(Collectors.joining(", "));
     }
@@ -188,6 +192,9 @@ final class AdvicePage {
     }
 
     private void lots() {
+        if (forecast.lots().isEmpty()) {
+            return;
+        }
         head("Lots, first to leave first");
         Table table =
                 new Table("lot", "crop", "chamber", "leave by", "days left", "ended by", "gained");

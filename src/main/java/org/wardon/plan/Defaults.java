@@ -86,7 +86,7 @@ public final class Defaults {
     public static final Default AIR_DROP_K = new Default(5, "K", ASSUMPTION);
 
     /** Shortest run of a compressor. */
-    public static final Default MIN_RUN_MINUTES = new Default(5, "min", COMMON_PRACTICE);
+    public static final Default MIN_RUN_MINUTES = new Default(2, "min", COMMON_PRACTICE);
 
     /** Shortest rest of a compressor. */
     public static final Default MIN_REST_MINUTES = new Default(3, "min", COMMON_PRACTICE);
