@@ -37,7 +37,7 @@ final class ChamberFigures {
                 chamber.id(),
                 holding.holds(),
                 air(hours),
-                meanMinMax(hours, i -> 100 * hours.humidityFraction(i)),
+                meanMinMax(hours, i -> StoreSeries.humidityPct(hours, i)),
                 holding.hoursOutside(),
                 holding.hoursDisturbed(),
                 holding.pullDownHours(),

@@ -28,12 +28,17 @@ final class StoreSeries {
                 .forEach(course -> course.lots().forEach(lot -> lot(writer, lot)));
     }
 
+    /** Relative humidity as told: air with mist in it is saturated. */
+    static double humidityPct(Hours hours, int row) {
+        return Math.min(100, 100 * hours.humidityFraction(row));
+    }
+
     private void chamber(SeriesWriter writer, String id, Course course) {
         Hours hours = course.hours();
         ChamberEthylene level = outcome.ethylene(id);
         Map<String, IntToDoubleFunction> columns = new LinkedHashMap<>();
         columns.put("airC", hours::airC);
-        columns.put("humidityPct", i -> 100 * hours.humidityFraction(i));
+        columns.put("humidityPct", i -> humidityPct(hours, i));
         columns.put("outdoorC", hours::outdoorC);
         columns.put("coolingW", hours::coolingW);
         columns.put("powerW", hours::powerW);
