@@ -26,6 +26,10 @@ final class WaterLimit {
     private static final double GENERAL_FRACTION = 0.03;
 
     private static final String GENERAL = "produce in general";
+
+    /** Top of the formulas of moist air; a skin above it is long dead, °C. */
+    private static final double HOTTEST_C = 60;
+
     private static final double USUAL_HUMIDITY = 0.925;
 
     private final double printedFraction;
@@ -79,7 +83,7 @@ final class WaterLimit {
 
     /** Water lost from a kilogram, kg a day; not below 0. */
     static double perDay(TranspirationLaw law, double skinC, double humidityFraction) {
-        double saturated = SaturatedAir.pressurePa(skinC);
+        double saturated = SaturatedAir.pressurePa(Math.min(HOTTEST_C, skinC));
         double lost = law.waterKgPerKgS(saturated, humidityFraction * saturated);
         return Math.max(0, lost) * Timeline.DAY_S;
     }

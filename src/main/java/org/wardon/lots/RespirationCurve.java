@@ -12,13 +12,23 @@ import org.wardon.produce.Fact;
  * <p>Outside the printed temperatures, down to 0 and up to 30 °C, the curve goes on with the
  * handbook's class Q10 ({@link HandbookQ10}) rather than with the last printed slope: single
  * figures beside ranges give slopes up to Q10 11. From 30 (or the highest printed temperature, if
- * above) to 38 °C the Q10 is 1.5; below and above the curve is flat.
+ * above) to 38 °C the Q10 is 1.5; below and above the curve is flat, until from 44 °C on the tissue
+ * dies of heat and its breathing ceases. What microbes then do to a heap is not reckoned with.
  */
 public final class RespirationCurve implements RespirationLaw {
     private static final double COLDEST_C = 0;
     private static final double WARM_C = 30;
     private static final double FLAT_FROM_C = 38;
     private static final double Q10_ABOVE_WARM = 1.5;
+
+    /** Tissue is killed by heat above 42 °C; its breathing ceases over these °C (assumption). */
+    private static final double DYING_FROM_C = 44;
+
+    private static final double DEAD_C = 50;
+
+    /** What is left of the rate in dead tissue, in the logarithm: a thousandth (assumption). */
+    private static final double LN_DEAD = -7;
+
     private static final double[] HANDBOOK_KNOTS_C = {0, 10, 20, 30};
 
     private final double[] knotC;
@@ -83,6 +93,9 @@ public final class RespirationCurve implements RespirationLaw {
             double rise = Math.log(Q10_ABOVE_WARM) * (FLAT_FROM_C - warm) / 10;
             knots.put(FLAT_FROM_C, stepped(knots, warm, rise));
         }
+        double flat = knots.lastKey();
+        knots.put(DYING_FROM_C, stepped(knots, flat, 0));
+        knots.put(DEAD_C, stepped(knots, flat, LN_DEAD));
     }
 
     private static double handbookStep(double fromC, double toC) {

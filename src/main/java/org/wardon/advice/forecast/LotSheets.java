@@ -33,6 +33,11 @@ final class LotSheets {
     /** Class of package whose vapour path a package of the keeper's own is taken to have. */
     private static final String OWN_LIKE = "room-cooling-any";
 
+    /** Nobody leaves a harvest out in harder frost or heat than this, °C (assumption). */
+    private static final double COLDEST_HELD_C = -1;
+
+    private static final double WARMEST_HELD_C = 50;
+
     private final StorePlan plan;
     private final Weather weather;
     private final ReferenceBook book;
@@ -124,7 +129,8 @@ final class LotSheets {
     private Age age(LotPlan lot) {
         AtDoor at = lot.atDoor();
         Mean shade = outdoorsBefore(lot.arrives(), at.harvested());
-        double held = at.heldC().orElse(shade.temperatureC());
+        double shadeC = Math.min(WARMEST_HELD_C, Math.max(COLDEST_HELD_C, shade.temperatureC()));
+        double held = at.heldC().orElse(shadeC);
         return at.harvested()
                 .map(
                         time ->
