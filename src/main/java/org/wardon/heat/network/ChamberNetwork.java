@@ -30,6 +30,8 @@ public final class ChamberNetwork implements TreeSystem {
     private final HourlyAir beyondDoor;
     private final List<OutsideBoundary> boundaries = new ArrayList<>();
     private final FaceBranch[] faces;
+    private final double[] hourStartC;
+    private final double[] hourChangeK;
     private final Optional<StructurePart> structure;
     private final CoolerPart[] coolers;
     private final Optional<IdealCooler> ideal;
@@ -47,6 +49,7 @@ public final class ChamberNetwork implements TreeSystem {
     private double airKg;
     private double freeM3;
     private int hour;
+    private double at = Double.NaN;
 
     /**
      * Compiles a chamber.
@@ -60,6 +63,8 @@ public final class ChamberNetwork implements TreeSystem {
         outdoors = AirAround.outdoors(inputs);
         beyondDoor = AirAround.beyondDoor(inputs, outdoors);
         faces = faces();
+        hourStartC = new double[faces.length];
+        hourChangeK = new double[faces.length];
         double structureJK = inputs.enclosure().structureCapacityJK();
         structure =
                 structureJK > 0
@@ -90,7 +95,10 @@ public final class ChamberNetwork implements TreeSystem {
                         inputs.heaterW(),
                         inputs.humidifierKgS());
         mistFlowAt = take(MistPart.FLOWS);
-        mist = new MistPart(mistFlowAt, dryAirKg(inputs.enclosure().box().volumeM3()));
+        mist = new MistPart(
+                        mistFlowAt,
+                        dryAirKg(inputs.enclosure().box().volumeM3()),
+                        inputs.plain());
         lots = new LotBranch[inputs.lots().size()];
         for (int i = 0; i < lots.length; i++) {
             lots[i] = lot(inputs.lots().get(i));
@@ -229,21 +237,26 @@ public final class ChamberNetwork implements TreeSystem {
      */
     public void hour(int h) {
         hour = Math.min(h, inputs.around().hours() - 1);
+        at = Double.NaN;
         for (int i = 0; i < faces.length; i++) {
             OutsideBoundary b = boundaries.get(i);
             faces[i].farFilm(0.5 * (b.filmWm2K(hour) + b.filmWm2K(hour + 1)));
+            hourStartC[i] = b.temperatureC(hour);
+            hourChangeK[i] = b.temperatureC(hour + 1) - hourStartC[i];
         }
     }
 
     private void at(double t) {
+        if (t == at) {
+            return;
+        }
+        at = t;
         double into = t - hour * 3600.0;
         outdoors.at(hour, into, outside.outdoors);
         beyondDoor.at(hour, into, outside.beyondDoor);
         double x = into / 3600;
         for (int i = 0; i < faces.length; i++) {
-            OutsideBoundary b = boundaries.get(i);
-            double slope = b.temperatureC(hour + 1) - b.temperatureC(hour);
-            faces[i].beyond(b.temperatureC(hour) + x * slope, slope / 3600);
+            faces[i].beyond(hourStartC[i] + x * hourChangeK[i], hourChangeK[i] / 3600);
         }
     }
 

@@ -81,6 +81,7 @@ public final class CoolerPart implements Part {
         this.fanAlwaysW = following.fanAlwaysW;
         this.branch = own > 0 ? new Branch[] {tree.addBranch(0, own)} : new Branch[0];
         this.in = new CoolerInputs(own);
+        in.airC = Double.NaN; // unlike anything it will be asked first
         this.effect = new CoolerEffect(own);
         this.shifted = new CoolerEffect(own);
         this.vapourByOwn = new double[own];
@@ -215,15 +216,30 @@ public final class CoolerPart implements Part {
 
     private void ask(AirState air, Outside outside, double[] y) {
         // A refused step may ask beyond what a coil knows; the parts around it then refuse it.
-        in.airC = air.airC > COLDEST_C ? Math.min(air.airC, WARMEST_C) : COLDEST_C;
-        in.humidityRatio = air.ratio > 0 ? Math.min(air.ratio, WETTEST) : 0;
-        in.outdoorC = outside.outdoors.airC;
-        in.outdoorHumidityRatio = outside.outdoors.ratio;
-        in.run = run(air.airC);
+        double airC = air.airC > COLDEST_C ? Math.min(air.airC, WARMEST_C) : COLDEST_C;
+        double ratio = air.ratio > 0 ? Math.min(air.ratio, WETTEST) : 0;
+        double outdoorC = outside.outdoors.airC;
+        double outdoorRatio = outside.outdoors.ratio;
+        double run = run(air.airC);
+        boolean asBefore =
+                airC == in.airC
+                        && ratio == in.humidityRatio
+                        && outdoorC == in.outdoorC
+                        && outdoorRatio == in.outdoorHumidityRatio
+                        && run == in.run;
+        in.airC = airC;
+        in.humidityRatio = ratio;
+        in.outdoorC = outdoorC;
+        in.outdoorHumidityRatio = outdoorRatio;
+        in.run = run;
         for (int i = 0; i < own; i++) {
-            in.own[i] = y[branch[0].blockAt(i)];
+            double state = y[branch[0].blockAt(i)];
+            asBefore &= state == in.own[i];
+            in.own[i] = state;
         }
-        law.effect(in, effect);
+        if (!asBefore) {
+            law.effect(in, effect);
+        }
     }
 
     private double fanW() {

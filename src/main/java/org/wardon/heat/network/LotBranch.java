@@ -50,7 +50,7 @@ public final class LotBranch implements Part {
     private static final double NEAR_K = 5;
 
     /** Newton ends with a step shorter than this, K. */
-    private static final double LAST_STEP_K = 1e-7;
+    private static final double LAST_STEP_K = 1e-5;
 
     /** Its place in the state. */
     final Branch branch;
@@ -59,6 +59,8 @@ public final class LotBranch implements Part {
     private final double pressurePa;
     private final int shells;
     private final double[] capacity;
+    private final double[] perCapacity;
+    private final double[] leaves;
     private final double[] shellKg;
     private final double[] between;
     private final double skin;
@@ -67,6 +69,7 @@ public final class LotBranch implements Part {
     private final double packageWK;
     private final double packageKgSPa;
     private final double packageKg;
+    private final double perPackageKg;
     private final double packageJkgK;
     private final SkinEvaporation dew;
     private LocalCurve[] breath;
@@ -109,16 +112,20 @@ public final class LotBranch implements Part {
         this.plain = plain;
         this.respirationFactor = respirationFactor;
         capacity = new double[shells];
+        perCapacity = new double[shells];
+        leaves = new double[shells - 1];
         shellKg = new double[shells];
         between = new double[shells - 1];
         breathSlope = new double[shells];
         for (int i = 0; i < shells; i++) {
             shellKg[i] = kg * cut.massFraction(i);
             capacity[i] = shellKg[i] * lot.item().specificHeatJkgK();
+            perCapacity[i] = 1 / capacity[i];
             if (i < shells - 1) {
                 between[i] = kg * cut.conductanceWPerKgK(i);
             }
         }
+        conductionJ();
         skin = kg * cut.skinConductanceWPerKgK();
         film = kg * packing.filmWPerKgK();
         fullKg = kg * lot.item().areaM2PerKg() * FreeWater.FULL_KG_M2;
@@ -128,6 +135,7 @@ public final class LotBranch implements Part {
                 kg
                         * packing.airM3PerKg()
                         / MoistAir.specificVolumeM3kg(PACKAGE_AIR_C, 0, pressurePa);
+        perPackageKg = 1 / packageKg;
         packageJkgK = MoistAir.DRY_AIR_J_KG_K + kg * packing.tareJPerKgK() / packageKg;
         dew = new SkinEvaporation(lot, transpirationFactor, plain);
         breath = new LocalCurve[shells];
@@ -394,6 +402,16 @@ public final class LotBranch implements Part {
         return sum;
     }
 
+    private void conductionJ() {
+        for (int i = 0; i < shells - 1; i++) {
+            double left = i == 0 ? 0 : between[i - 1];
+            branch.before[i] = left * perCapacity[i];
+            branch.after[i] = between[i] * perCapacity[i];
+            leaves[i] = (left + between[i]) * perCapacity[i];
+        }
+        branch.blockByRun = between[shells - 2] * perCapacity[shells - 1];
+    }
+
     private void packageAir(double enthalpy, double ratio) {
         packageC = (enthalpy - ratio * L0) / (packageJkgK + MoistAir.VAPOUR_J_KG_K * ratio);
         packagePa = pressurePa * ratio / (MoistAir.MOLAR_MASS_RATIO + ratio);
@@ -434,7 +452,7 @@ public final class LotBranch implements Part {
         for (int i = 0; i < shells - 1; i++) {
             double heat = shellKg[i] * breath[i].value(y[start + i]);
             double next = between[i] * (y[start + i] - y[start + i + 1]);
-            rates[start + i] = (flux - next + heat) / capacity[i];
+            rates[start + i] = (flux - next + heat) * perCapacity[i];
             breathing += heat;
             flux = next;
         }
@@ -447,10 +465,10 @@ public final class LotBranch implements Part {
         double out = packageKgSPa * (packagePa - air.vapourPa);
         double toAir =
                 packageWK * (packageC - air.airC) + out * MoistAir.vapourEnthalpyJkg(packageC);
-        rates[b] = (flux - toSkin + heat) / capacity[shells - 1];
+        rates[b] = (flux - toSkin + heat) * perCapacity[shells - 1];
         rates[b + 1] = -dew.filmWater;
-        rates[b + 2] = (toSkin + liquid - toAir) / packageKg;
-        rates[b + 3] = (dew.evaporated - out) / packageKg;
+        rates[b + 2] = (toSkin + liquid - toAir) * perPackageKg;
+        rates[b + 3] = (dew.evaporated - out) * perPackageKg;
         flows[flowAt + TO_AIR] = toAir;
         flows[flowAt + VAPOUR] = out;
         flows[flowAt + RESPIRATION] = breathing;
@@ -469,18 +487,14 @@ public final class LotBranch implements Part {
         for (int i = 0; i < shells; i++) {
             breath[i].near(y[start + i]);
             breathSlope[i] = shellKg[i] * breath[i].slope(y[start + i]);
+            if (i < shells - 1) {
+                branch.self[i] = breathSlope[i] * perCapacity[i] - leaves[i];
+            }
         }
         dew.near(skinC);
         packageAir(y[b + 2], y[b + 3]);
         solveSkin(y[b], y[b + 1]);
         skinSlopes(y[b + 1], y[b + 3]);
-        for (int i = 0; i < shells - 1; i++) {
-            double left = i == 0 ? 0 : between[i - 1];
-            branch.before[i] = left / capacity[i];
-            branch.after[i] = between[i] / capacity[i];
-            branch.self[i] = (breathSlope[i] - left - between[i]) / capacity[i];
-        }
-        branch.blockByRun = between[shells - 2] / capacity[shells - 1];
         writeBlock();
         writeHub(air, airKg, tree);
     }
@@ -515,17 +529,17 @@ public final class LotBranch implements Part {
     }
 
     private void writeBlock() {
-        double shell = capacity[shells - 1];
+        double perShell = perCapacity[shells - 1];
         double[] j = branch.inner;
         for (int i = 0; i < 4; i++) {
             double toSkinBy = skin * ((i == 0 ? 1 : 0) - skinBy[i]);
-            j[i] = -toSkinBy / shell;
+            j[i] = -toSkinBy * perShell;
             j[4 + i] = -filmWaterBy[i];
-            j[8 + i] = (toSkinBy + liquidBy[i]) / packageKg;
-            j[12 + i] = evaporatedBy[i] / packageKg;
+            j[8 + i] = (toSkinBy + liquidBy[i]) * perPackageKg;
+            j[12 + i] = evaporatedBy[i] * perPackageKg;
         }
-        j[0] += (breathSlope[shells - 1] - between[shells - 2]) / shell;
-        j[15] -= jRatio / packageKg;
+        j[0] += (breathSlope[shells - 1] - between[shells - 2]) * perShell;
+        j[15] -= jRatio * perPackageKg;
     }
 
     private void writeHub(AirState air, double airKg, Tree tree) {
@@ -538,11 +552,11 @@ public final class LotBranch implements Part {
         toAirByAirRatio = enthalpy * jAirRatio;
         double toAirByRatio = -packageWK * air.airByRatio + toAirByAirRatio;
         double toAirByEnthalpy = -packageWK * air.airByEnthalpy;
-        branch.inner[10] -= toAirBy[2] / packageKg;
-        branch.inner[11] -= toAirBy[3] / packageKg;
-        branch.byHub[4] = -toAirByEnthalpy / packageKg;
-        branch.byHub[5] = -toAirByRatio / packageKg;
-        branch.byHub[7] = -jAirRatio / packageKg;
+        branch.inner[10] -= toAirBy[2] * perPackageKg;
+        branch.inner[11] -= toAirBy[3] * perPackageKg;
+        branch.byHub[4] = -toAirByEnthalpy * perPackageKg;
+        branch.byHub[5] = -toAirByRatio * perPackageKg;
+        branch.byHub[7] = -jAirRatio * perPackageKg;
         double share = gives ? 1 / airKg : 0;
         branch.onHub[2] = toAirBy[2] * share;
         branch.onHub[3] = toAirBy[3] * share;

@@ -17,6 +17,7 @@ final class MistPart implements Part {
 
     private final int flowAt;
     private final double perS;
+    private final LocalCurve saturation;
     private double byAirC;
     private double byRatio;
     private double heatByAirC;
@@ -25,14 +26,16 @@ final class MistPart implements Part {
     /**
      * @param flowAt place of its flows
      * @param airKg dry air of the chamber, kg
+     * @param plain true to ask the law of saturation itself each time
      */
-    MistPart(int flowAt, double airKg) {
+    MistPart(int flowAt, double airKg, boolean plain) {
         this.flowAt = flowAt;
         this.perS = airKg / Mist.FALLS_IN_S;
+        this.saturation = Saturation.curve(plain);
     }
 
-    private static double excess(AirState air) {
-        double psat = Saturation.pressurePa(air.airC);
+    private double excess(AirState air) {
+        double psat = saturation.value(air.airC);
         return air.ratio - MoistAir.MOLAR_MASS_RATIO * psat / (air.pressurePa - psat);
     }
 
@@ -48,12 +51,13 @@ final class MistPart implements Part {
 
     @Override
     public void linearise(AirState air, Outside outside, double airKg, double[] y, Tree tree) {
-        double psat = Saturation.pressurePa(air.airC);
+        saturation.near(air.airC);
+        double psat = saturation.value(air.airC);
         double dry = air.pressurePa - psat;
         double satByAirC =
                 MoistAir.MOLAR_MASS_RATIO
                         * air.pressurePa
-                        * Saturation.slopePaPerK(air.airC)
+                        * saturation.slope(air.airC)
                         / (dry * dry);
         double over = excess(air);
         byRatio = perS * FreeWater.positiveSlope(over, Mist.ROUND_KG_KG);

@@ -44,7 +44,6 @@ public final class Branch {
     private final double[] inversePivot;
     private final double[] ratio;
     private final double[] afterShare;
-    private final double[] lu;
     private final double[] inverse;
     private final double[] work;
     private final double[] hubShare;
@@ -65,7 +64,6 @@ public final class Branch {
         inversePivot = new double[run];
         ratio = new double[run];
         afterShare = new double[run];
-        lu = new double[block * block];
         inverse = new double[block * block];
         work = new double[block];
         hubShare = new double[block * hub];
@@ -114,16 +112,24 @@ public final class Branch {
     void factor(double shift, double[] hubMatrix) {
         factorRun(shift);
         for (int i = 0; i < block * block; i++) {
-            lu[i] = -inner[i];
+            inverse[i] = -inner[i];
         }
         for (int i = 0; i < block; i++) {
-            lu[i * block + i] += shift;
+            inverse[i * block + i] += shift;
         }
         if (run > 0) {
             blockRatio = -blockByRun * inversePivot[run - 1];
-            lu[0] += blockRatio * after[run - 1];
+            inverse[0] += blockRatio * after[run - 1];
         }
         invertBlock();
+        if (hub == 2) {
+            shareOfTwo(hubMatrix);
+        } else {
+            shareOfHub(hubMatrix);
+        }
+    }
+
+    private void shareOfHub(double[] hubMatrix) {
         for (int i = 0; i < block; i++) {
             for (int c = 0; c < hub; c++) {
                 double sum = 0;
@@ -144,46 +150,97 @@ public final class Branch {
         }
     }
 
+    /** The same for a hub of two, written out: it is the usual one. */
+    private void shareOfTwo(double[] hubMatrix) {
+        double first = 0;
+        double firstBySecond = 0;
+        double secondByFirst = 0;
+        double second = 0;
+        for (int i = 0; i < block; i++) {
+            double left = 0;
+            double right = 0;
+            for (int k = 0; k < block; k++) {
+                double part = inverse[i * block + k];
+                left -= part * byHub[2 * k];
+                right -= part * byHub[2 * k + 1];
+            }
+            hubShare[2 * i] = left;
+            hubShare[2 * i + 1] = right;
+            first += onHub[i] * left;
+            firstBySecond += onHub[i] * right;
+            secondByFirst += onHub[block + i] * left;
+            second += onHub[block + i] * right;
+        }
+        hubMatrix[0] += first;
+        hubMatrix[1] += firstBySecond;
+        hubMatrix[2] += secondByFirst;
+        hubMatrix[3] += second;
+    }
+
     private void factorRun(double shift) {
-        double pivot = 0;
+        double last = 0;
+        double lastAfter = 0;
         for (int i = 0; i < run; i++) {
-            double r = i == 0 ? 0 : -before[i] * inversePivot[i - 1];
-            pivot = shift - self[i] + (i == 0 ? 0 : r * after[i - 1]);
-            double inverse = 1 / pivot;
+            double r = -before[i] * last;
+            double pivot = shift - self[i] + r * lastAfter;
+            last = 1 / pivot;
+            lastAfter = after[i];
             ratio[i] = r;
-            inversePivot[i] = inverse;
-            afterShare[i] = after[i] * inverse;
+            inversePivot[i] = last;
+            afterShare[i] = lastAfter * last;
         }
     }
 
-    /** Gauss-Jordan without pivoting; a block of a few nodes is solved fastest by its inverse. */
+    /**
+     * Gauss-Jordan in place without pivoting; a block of a few nodes is solved fastest by its
+     * inverse.
+     */
     private void invertBlock() {
-        Arrays.fill(inverse, 0);
-        for (int i = 0; i < block; i++) {
-            inverse[i * block + i] = 1;
+        if (block == 2) {
+            invertTwo();
+            return;
         }
+        double[] m = inverse;
         for (int k = 0; k < block; k++) {
-            double scale = 1 / lu[k * block + k];
+            int row = k * block;
+            double scale = 1 / m[row + k];
+            m[row + k] = 1;
             for (int j = 0; j < block; j++) {
-                lu[k * block + j] *= scale;
-                inverse[k * block + j] *= scale;
+                m[row + j] *= scale;
             }
             for (int i = 0; i < block; i++) {
-                double factor = lu[i * block + k];
-                if (i != k && factor != 0) {
+                if (i != k) {
+                    double factor = m[i * block + k];
+                    m[i * block + k] = 0;
                     for (int j = 0; j < block; j++) {
-                        lu[i * block + j] -= factor * lu[k * block + j];
-                        inverse[i * block + j] -= factor * inverse[k * block + j];
+                        m[i * block + j] -= factor * m[row + j];
                     }
                 }
             }
         }
     }
 
+    private void invertTwo() {
+        double[] m = inverse;
+        double a = m[0];
+        double scale = 1 / (a * m[3] - m[1] * m[2]);
+        m[0] = m[3] * scale;
+        m[1] *= -scale;
+        m[2] *= -scale;
+        m[3] = a * scale;
+    }
+
     /** Multiplies the block's entries by its inverse, in place. */
     private void solveBlock(double[] x, int at) {
         if (block == 4) {
             solveFour(x, at);
+            return;
+        }
+        if (block == 2) {
+            double a = x[at];
+            double b = x[at + 1];
+            x[at] = inverse[0] * a + inverse[1] * b;
+            x[at + 1] = inverse[2] * a + inverse[3] * b;
             return;
         }
         for (int i = 0; i < block; i++) {
@@ -211,14 +268,28 @@ public final class Branch {
 
     /** Eliminates the branch from the right-hand side into the hub's entries, in place. */
     void forward(double[] x) {
-        for (int i = 1; i < run; i++) {
-            x[start + i] -= ratio[i] * x[start + i - 1];
-        }
         int b = start + run;
         if (run > 0) {
-            x[b] -= blockRatio * x[b - 1];
+            double last = x[start];
+            for (int i = 1; i < run; i++) {
+                last = x[start + i] - ratio[i] * last;
+                x[start + i] = last;
+            }
+            x[b] -= blockRatio * last;
         }
         solveBlock(x, b);
+        if (hub == 2) {
+            double first = 0;
+            double second = 0;
+            for (int k = 0; k < block; k++) {
+                double part = x[b + k];
+                first += onHub[k] * part;
+                second += onHub[block + k] * part;
+            }
+            x[0] += first;
+            x[1] += second;
+            return;
+        }
         for (int r = 0; r < hub; r++) {
             double sum = 0;
             for (int k = 0; k < block; k++) {
@@ -231,15 +302,25 @@ public final class Branch {
     /** Puts the hub's solution back into the branch, in place. */
     void back(double[] x) {
         int b = start + run;
-        for (int i = 0; i < block; i++) {
-            double sum = 0;
-            for (int c = 0; c < hub; c++) {
-                sum += hubShare[i * hub + c] * x[c];
+        if (hub == 2) {
+            double first = x[0];
+            double second = x[1];
+            for (int i = 0; i < block; i++) {
+                x[b + i] -= hubShare[2 * i] * first + hubShare[2 * i + 1] * second;
             }
-            x[b + i] -= sum;
+        } else {
+            for (int i = 0; i < block; i++) {
+                double sum = 0;
+                for (int c = 0; c < hub; c++) {
+                    sum += hubShare[i * hub + c] * x[c];
+                }
+                x[b + i] -= sum;
+            }
         }
+        double next = x[b];
         for (int i = run - 1; i >= 0; i--) {
-            x[start + i] = x[start + i] * inversePivot[i] + afterShare[i] * x[start + i + 1];
+            next = x[start + i] * inversePivot[i] + afterShare[i] * next;
+            x[start + i] = next;
         }
     }
 }

@@ -77,19 +77,20 @@ final class Rosenbrock {
 
     /** Tries a step of length h from the state last started from; returns its error, 1 allowed. */
     double tryStep(double t, double[] y, double h) {
-        tree.factor(1 / (h * GAMMA));
+        double inverse = 1 / h;
+        tree.factor(inverse / GAMMA);
         for (int i = 0; i < n; i++) {
             u1[i] = f0[i] + 0.5 * h * ft[i];
         }
         tree.solve(u1);
         for (int i = 0; i < n; i++) {
-            u2[i] = f0[i] + 4 / h * u1[i] + 1.5 * h * ft[i];
+            u2[i] = f0[i] + 4 * inverse * u1[i] + 1.5 * h * ft[i];
             stage[i] = y[i] + 2 * u1[i];
         }
         tree.solve(u2);
         system.rates(t + h, stage, u3, flow3);
         for (int i = 0; i < n; i++) {
-            u3[i] += (u1[i] - u2[i]) / h;
+            u3[i] += (u1[i] - u2[i]) * inverse;
         }
         tree.solve(u3);
         for (int i = 0; i < n; i++) {
@@ -97,7 +98,7 @@ final class Rosenbrock {
         }
         system.rates(t + h, stage, u4, flow4);
         for (int i = 0; i < n; i++) {
-            u4[i] += (u1[i] - u2[i] - 8.0 / 3 * u3[i]) / h;
+            u4[i] += (u1[i] - u2[i] - 8.0 / 3 * u3[i]) * inverse;
         }
         tree.solve(u4);
         for (int i = 0; i < n; i++) {
