@@ -95,10 +95,9 @@ public final class ChamberNetwork implements TreeSystem {
                         inputs.heaterW(),
                         inputs.humidifierKgS());
         mistFlowAt = take(MistPart.FLOWS);
-        mist = new MistPart(
-                        mistFlowAt,
-                        dryAirKg(inputs.enclosure().box().volumeM3()),
-                        inputs.plain());
+        mist =
+                new MistPart(
+                        mistFlowAt, dryAirKg(inputs.enclosure().box().volumeM3()), inputs.plain());
         lots = new LotBranch[inputs.lots().size()];
         for (int i = 0; i < lots.length; i++) {
             lots[i] = lot(inputs.lots().get(i));

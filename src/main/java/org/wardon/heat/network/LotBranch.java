@@ -50,7 +50,7 @@ public final class LotBranch implements Part {
     private static final double NEAR_K = 5;
 
     /** Newton ends with a step shorter than this, K. */
-    private static final double LAST_STEP_K = 1e-5;
+    private static final double LAST_STEP_K = 1e-7;
 
     /** Its place in the state. */
     final Branch branch;

@@ -174,6 +174,7 @@ public final class Integrator {
         double low = 0;
         double lowMiss = trigger.value(now, y) - wanted;
         double high = h;
+        double tried = h;
         double value = trigger.value(now + h, method.end);
         double highMiss = value - wanted;
         int side = 0;
@@ -190,6 +191,7 @@ public final class Integrator {
             double margin = 0.01 * (high - low);
             guess = Math.min(Math.max(guess, low + margin), high - margin);
             method.tryStep(now, y, guess);
+            tried = guess;
             value = trigger.value(now + guess, method.end);
             if (value > 0) {
                 high = guess;
@@ -203,7 +205,9 @@ public final class Integrator {
                 side = -1;
             }
         }
-        method.tryStep(now, y, high);
+        if (tried != high) {
+            method.tryStep(now, y, high);
+        }
         return high;
     }
 
