@@ -4,6 +4,7 @@ import java.io.PrintStream;
 import java.util.List;
 import java.util.concurrent.Callable;
 import org.jspecify.annotations.Nullable;
+import org.wardon.errors.BadInput;
 import org.wardon.files.forecast.AnswerWriter;
 import org.wardon.files.forecast.LookAnswer;
 import org.wardon.files.forecast.LookList;
@@ -32,16 +33,34 @@ final class Look implements Callable<Integer> {
             description = "Its id or any common name, such as mango or lady's finger.")
     private @Nullable String name;
 
+    @Mixin private OwnWords own = new OwnWords();
+
     @Option(names = "--json", description = "Answer in JSON.")
     private boolean json;
 
     @Override
     public Integer call() {
         PrintStream out = Terminal.ofProcess().out();
+        if (own.asked()) {
+            change();
+        }
         try (ReferenceBook book = shared.book()) {
             out.print(name == null ? list(book) : of(book, book.named(name)));
         }
         return Exit.OK;
+    }
+
+    private void change() {
+        if (name == null) {
+            throw new BadInput(
+                    "look",
+                    "",
+                    "an own value needs its commodity",
+                    "accepted: look COMMODITY --own ...");
+        }
+        try (ReferenceBook book = shared.book()) {
+            own.change(shared.ownValues(), book.named(name).id());
+        }
     }
 
     private String list(ReferenceBook book) {

@@ -56,10 +56,7 @@ final class LookPage {
                         + ": "
                         + value(fact)
                         + " ["
-                        + fact.sourceId()
-                        + ", "
-                        + fact.evidence().word()
-                        + (fact.own() ? ", own" : "")
+                        + (fact.own() ? "own" : fact.sourceId() + ", " + fact.evidence().word())
                         + "]";
         String note = KIND.matcher(fact.note()).replaceFirst("");
         return Paragraph.hanging("  ", told)

@@ -31,13 +31,17 @@ final class Shared {
 
     /** Opens the book with the keeper's own values. */
     ReferenceBook book() {
-        Path folder =
+        return ReferenceBook.open(ownValues());
+    }
+
+    /** The keeper's own values. */
+    OwnValues ownValues() {
+        return new OwnValues(
                 StoreFolder.of(
                         Optional.ofNullable(home),
                         System.getenv(),
                         System.getProperty("os.name", ""),
-                        Path.of(System.getProperty("user.home", ".")));
-        return ReferenceBook.open(new OwnValues(folder));
+                        Path.of(System.getProperty("user.home", "."))));
     }
 
     /** What a plan may name. */

@@ -48,6 +48,41 @@ class AnswersIT {
     }
 
     @Test
+    void ownValuesWinAreShownAsOwnAndCanBeForgotten() {
+        String home = folder.resolve("home").toString();
+        JsonNode set =
+                WardonJar.run(
+                                "look",
+                                "mango",
+                                "--home",
+                                home,
+                                "--own",
+                                "storage-temperature=11..12",
+                                "--json")
+                        .json();
+        JsonNode first = set.get("facts").get(0);
+        assertEquals("storage-temperature", first.get("name").asString());
+        assertTrue(first.get("own").asBoolean(), first.toString());
+        assertEquals(12, first.get("high").asDouble());
+        assertTrue(
+                WardonJar.run("look", "mango", "--home", home).good().out().contains("13 °C"),
+                "print stays visible");
+        JsonNode forgotten =
+                WardonJar.run(
+                                "look",
+                                "mango",
+                                "--home",
+                                home,
+                                "--forget",
+                                "storage-temperature",
+                                "--json")
+                        .json();
+        for (JsonNode fact : forgotten.get("facts")) {
+            assertFalse(fact.get("own").asBoolean(), fact.toString());
+        }
+    }
+
+    @Test
     void keepTellsDaysInTheFixedNames() {
         JsonNode kept = WardonJar.run("keep", "mango", "--at", "13", "--json").json();
         JsonNames.check(
