@@ -403,11 +403,7 @@ public final class ChamberNetwork implements TreeSystem {
      * @return J from 0 °C
      */
     public double layersJ(double[] y) {
-        double sum = 0;
-        for (FaceBranch face : faces) {
-            sum += face.heatJ(y);
-        }
-        return sum;
+        return Arrays.stream(faces).mapToDouble(face -> face.heatJ(y)).sum();
     }
 
     /**
@@ -417,11 +413,7 @@ public final class ChamberNetwork implements TreeSystem {
      * @return kg
      */
     public double faceWaterKg(double[] y) {
-        double sum = 0;
-        for (FaceBranch face : faces) {
-            sum += face.waterKg(y);
-        }
-        return sum;
+        return Arrays.stream(faces).mapToDouble(face -> face.waterKg(y)).sum();
     }
 
     /**
@@ -522,15 +514,9 @@ public final class ChamberNetwork implements TreeSystem {
         Arrays.fill(tolerances, lotK);
         tolerances[AirState.ENTHALPY] = airK * MoistAir.DRY_AIR_J_KG_K;
         tolerances[AirState.HUMIDITY] = airK * 5e-4;
-        for (FaceBranch face : faces) {
-            face.tolerances(airK, tolerances);
-        }
-        for (LotBranch lot : lots) {
-            lot.tolerances(lotK, airK, tolerances);
-        }
-        for (CoolerPart cooler : coolers) {
-            cooler.tolerances(tolerances);
-        }
+        List.of(faces).forEach(face -> face.tolerances(airK, tolerances));
+        List.of(lots).forEach(lot -> lot.tolerances(lotK, airK, tolerances));
+        List.of(coolers).forEach(cooler -> cooler.tolerances(tolerances));
     }
 
     /**
@@ -540,20 +526,7 @@ public final class ChamberNetwork implements TreeSystem {
      * @return such as {@code air} or {@code lot M1}
      */
     public String partAt(int node) {
-        if (node < 2) {
-            return node == AirState.ENTHALPY ? "air" : "humidity of the air";
-        }
-        for (int i = lots.length - 1; i >= 0; i--) {
-            if (node >= lots[i].branch.start) {
-                return "lot " + inputs.lots().get(i).id();
-            }
-        }
-        for (int i = faces.length - 1; i >= 0; i--) {
-            if (node >= faces[i].firstNode() && node <= faces[i].lastNode()) {
-                return "face " + inputs.enclosure().faces().get(i).name();
-            }
-        }
-        return "cooler or structure";
+        return new PartNames(inputs, faces, lots).at(node);
     }
 
     @Override
