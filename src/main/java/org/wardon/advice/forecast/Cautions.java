@@ -10,6 +10,10 @@ import org.wardon.cooling.Cooler;
 import org.wardon.cooling.CoolerCautions;
 import org.wardon.heat.Course;
 import org.wardon.heat.CourseEvent;
+import org.wardon.keeping.Draw;
+import org.wardon.lots.Lot;
+import org.wardon.lots.PackageFit;
+import org.wardon.lots.StackCooling;
 import org.wardon.plan.Assumed;
 import org.wardon.plan.ChamberPlan;
 import org.wardon.plan.FilledGap;
@@ -165,6 +169,7 @@ final class Cautions {
                 add(level(reason.code()), reason);
             }
         }
+        selfHeating(sheet);
         for (Reason reason : sheet.restsOn()) {
             if (reason.code().endsWith("-class") || reason.code().endsWith("-broad")) {
                 add(
@@ -175,6 +180,26 @@ final class Cautions {
                                 reason.arguments(),
                                 reason.sourceId()));
             }
+        }
+    }
+
+    /**
+     * How far a lot at rest stands above its air by its own breathing, at the chamber's setting.
+     */
+    private void selfHeating(LotSheet sheet) {
+        String chamberId = sheet.plan().chamber().orElseThrow();
+        double settingC = outcome.model().plan().getChamber(chamberId).setting().temperatureC();
+        Lot lot = sheet.stay(Draw.MEDIAN).lot();
+        double excessK =
+                StackCooling.selfHeatingK(
+                        lot.respiration().wattsPerKg(settingC),
+                        PackageFit.halfCoolingS(lot.item(), lot.packing()),
+                        lot.item().specificHeatJkgK());
+        Argument told = Argument.of(excessK, "K");
+        if (excessK > StackCooling.RUNAWAY_K) {
+            add(Level.DANGER, Reason.about("stack-runs-away", sheet.id(), OWN_RULE, told));
+        } else if (excessK > StackCooling.CAUTION_K) {
+            add(Level.CAUTION, Reason.about("stack-heats-itself", sheet.id(), OWN_RULE, told));
         }
     }
 
