@@ -34,7 +34,6 @@ final class Actions {
      */
     private static final double DRY_CROPS_BELOW_PCT = 80;
 
-    private static final double AIR_OUT_PPM = 14_000;
     private static final String OWN_RULE = "assumption";
 
     private final StoreOutcome outcome;
@@ -77,7 +76,7 @@ final class Actions {
     }
 
     private void airOut(ChamberPlan chamber) {
-        if (ById.get(chambers, chamber.id()).co2PpmMax() >= AIR_OUT_PPM) {
+        if (ById.get(chambers, chamber.id()).co2PpmMax() >= Cautions.CO2_DANGER_PPM) {
             say(0, Reason.about("do-air-out", chamber.id(), OWN_RULE));
         }
     }

@@ -30,7 +30,7 @@ final class Cautions {
     private static final double CO2_CAUTION_PPM = 5_000;
 
     /** Own rule between the published limits, ppm (assumption). */
-    private static final double CO2_DANGER_PPM = 14_000;
+    static final double CO2_DANGER_PPM = 14_000;
 
     /** Fifteen-minute limit, ppm; source: safety limits, id ACGIH. */
     private static final double CO2_EVACUATE_PPM = 30_000;

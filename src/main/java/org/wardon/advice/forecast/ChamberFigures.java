@@ -16,7 +16,7 @@ import org.wardon.plan.ChamberPlan;
 
 /** Figures of one chamber over the course. */
 final class ChamberFigures {
-    private static final double J_PER_KWH = 3.6e6;
+    static final double J_PER_KWH = 3.6e6;
     private static final double AIR_O2_PCT = 20.9;
 
     private final ChamberPlan chamber;

@@ -15,8 +15,6 @@ import org.wardon.plan.ChamberPlan;
 
 /** Figures of one lot over the horizon. */
 final class LotFigures {
-    private static final double J_PER_KWH = 3.6e6;
-
     private final LotSheet sheet;
     private final ChamberPlan chamber;
     private final StoreOutcome outcome;
@@ -46,7 +44,7 @@ final class LotFigures {
                 cooling.halfHours(),
                 cooling.sevenEighthsHours(),
                 temperature(),
-                inHorizon.totals().respirationJ() / J_PER_KWH,
+                inHorizon.totals().respirationJ() / ChamberFigures.J_PER_KWH,
                 inHorizon.totals().weightLossPct(),
                 outlook.lifeUsedPct(),
                 outlook.restsOn().word(),

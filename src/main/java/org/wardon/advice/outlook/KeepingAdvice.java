@@ -7,6 +7,7 @@ import java.util.Locale;
 import java.util.Map;
 import java.util.regex.Matcher;
 import java.util.regex.Pattern;
+import org.wardon.air.Timeline;
 import org.wardon.errors.BadInput;
 import org.wardon.errors.Fault;
 import org.wardon.files.forecast.ChillingRisk;
@@ -14,6 +15,7 @@ import org.wardon.files.forecast.KeepAnswer;
 import org.wardon.files.forecast.Quantiles;
 import org.wardon.files.readings.HistoryCsv;
 import org.wardon.files.readings.LoggedHistory;
+import org.wardon.keeping.ChamberEthylene;
 import org.wardon.keeping.Draw;
 import org.wardon.keeping.Draws;
 import org.wardon.keeping.HistoryLegs;
@@ -36,16 +38,12 @@ public final class KeepingAdvice {
     /** Seed of the draws: a question without a plan always gets the same. */
     private static final long SEED = 1;
 
-    /** Ethylene of air without a source nearby, µL/L (assumption). */
-    private static final double CLEAN_PPM = 0.01;
-
     /** Humidity at the produce where neither print nor person gives one (assumption). */
     private static final double USUAL_HUMIDITY = 0.9;
 
     /** Days a history is carried on where it goes on at another temperature. */
     private static final double CARRIED_DAYS = 2;
 
-    private static final double DAY_S = 86_400;
     private static final Pattern DAYS_AT_C =
             Pattern.compile("(\\d+(?:\\.\\d+)?)@(-?\\d+(?:\\.\\d+)?)");
 
@@ -138,11 +136,19 @@ public final class KeepingAdvice {
                         ? request.humidityPct().getAsDouble() / 100
                         : handbookHumidity(commodity);
         if (request.condition() instanceof KeepRequest.Steady steady) {
-            return LotHistory.constant(steady.atC(), humidity, CLEAN_PPM, steady.days() * DAY_S);
+            return LotHistory.constant(
+                    steady.atC(),
+                    humidity,
+                    ChamberEthylene.OUTDOOR_PPM,
+                    steady.days() * Timeline.DAY_S);
         }
         KeepRequest.Logged logged = (KeepRequest.Logged) request.condition();
         LoggedHistory read =
-                HistoryCsv.read(logged.csv(), logged.csv().toString(), humidity, CLEAN_PPM);
+                HistoryCsv.read(
+                        logged.csv(),
+                        logged.csv().toString(),
+                        humidity,
+                        ChamberEthylene.OUTDOOR_PPM);
         return read.history();
     }
 
