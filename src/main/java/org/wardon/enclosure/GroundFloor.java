@@ -53,6 +53,29 @@ public record GroundFloor(double areaM2, double perimeterM, double wallThickness
     }
 
     /**
+     * Returns the floor of a chamber that stands alone on sand or gravel (the soil taken where none
+     * is known).
+     *
+     * @param enclosure the chamber
+     * @return its floor, exposed all around
+     */
+    public static GroundFloor under(Enclosure enclosure) {
+        Box box = enclosure.box();
+        double thick =
+                enclosure.faces().stream()
+                        .filter(face -> !face.level())
+                        .mapToDouble(
+                                face -> face.layers().stream().mapToDouble(Layer::thicknessM).sum())
+                        .average()
+                        .orElse(0);
+        return new GroundFloor(
+                box.areaM2(FaceName.FLOOR),
+                2 * (box.lengthM() + box.widthM()),
+                thick,
+                Soil.SAND_OR_GRAVEL);
+    }
+
+    /**
      * Returns the characteristic dimension: area over half the perimeter.
      *
      * @return m

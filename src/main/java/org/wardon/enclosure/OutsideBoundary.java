@@ -124,17 +124,11 @@ public final class OutsideBoundary {
 
     /** The ISO 13370 slab; a wall against soil is taken as part of it (assumption). */
     private static OutsideBoundary ground(Enclosure enclosure, Face face, Surroundings around) {
-        Box box = enclosure.box();
         double deep = around.deepGroundC().orElseGet(around::meanOutdoorC);
         HeatFlow flow = HeatFlow.through(face.name(), deep, around.insideMeanC());
-        GroundFloor floor =
-                new GroundFloor(
-                        box.areaM2(FaceName.FLOOR),
-                        2 * (box.lengthM() + box.widthM()),
-                        meanWallThicknessM(enclosure),
-                        GroundFloor.Soil.SAND_OR_GRAVEL);
         List<Layer> soil =
-                floor.soilLayers(UValue.resistanceM2KW(face.layers()), Films.insideM2KW(flow));
+                GroundFloor.under(enclosure)
+                        .soilLayers(UValue.resistanceM2KW(face.layers()), Films.insideM2KW(flow));
         List<Reason> reasons =
                 around.deepGroundC().isPresent()
                         ? List.of()
@@ -147,18 +141,6 @@ public final class OutsideBoundary {
         int n = around.hours() + 1;
         // The film is inside the slab's resistance already: a tight one stands here.
         return new OutsideBoundary(constant(n, deep), constant(n, TIGHT_WM2K), flow, soil, reasons);
-    }
-
-    private static double meanWallThicknessM(Enclosure enclosure) {
-        double sum = 0;
-        int walls = 0;
-        for (Face face : enclosure.faces()) {
-            if (!face.level()) {
-                sum += face.layers().stream().mapToDouble(Layer::thicknessM).sum();
-                walls++;
-            }
-        }
-        return sum / walls;
     }
 
     private static double[] constant(int n, double value) {

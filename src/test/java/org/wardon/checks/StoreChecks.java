@@ -1,8 +1,12 @@
 package org.wardon.checks;
 
+import static org.junit.jupiter.api.Assertions.assertEquals;
+
 import java.util.Map;
 import java.util.TreeMap;
 import java.util.function.ToDoubleFunction;
+import org.wardon.advice.size.DesignLoad;
+import org.wardon.advice.size.LoadTerms;
 import org.wardon.air.MoistAir;
 import org.wardon.cooling.CarnotShare;
 import org.wardon.cooling.Ice;
@@ -56,6 +60,16 @@ final class StoreChecks {
                         (enthalpyOut(r) - enthalpyRoom(r))
                                 / MoistAir.specificVolumeM3kg(
                                         r.d("T_room_C"), humidity(r, "T_room_C", "RH_room"), P));
+        laws.put(
+                "fao340_product",
+                r ->
+                        LoadTerms.product(
+                                        "fish",
+                                        r.d("kg_per_day"),
+                                        r.d("kg_per_day") * r.d("kcal_per_kg") * KILOCALORIE_J,
+                                        24)
+                                .meanW());
+        laws.put("fao340_first_six", r -> firstSix(r).meanW());
         laws.put("person_", r -> PeopleHeat.watts(r.d("T_C")));
         laws.put("carnot_", r -> CarnotShare.cop(r.d("Te_C"), r.d("Tc_C"), 1));
         laws.put("cop_", r -> CarnotShare.cop(r.d("Te_C"), r.d("Tc_C"), r.d("eta2")));
@@ -94,6 +108,20 @@ final class StoreChecks {
     }
 
     private static final double P = 101_325;
+
+    /**
+     * The printed figures behind the six items, worked out as terms; the sum of the row is that of
+     * the kilocalories printed for each.
+     */
+    private static DesignLoad firstSix(CheckRow r) {
+        DesignLoad load = FishStore.firstSix();
+        for (int i = 0; i < load.terms().size(); i++) {
+            double printedW =
+                    r.inputs().get("items_kcal_h").get(i).asDouble() * KILOCALORIE_J / 3_600;
+            assertEquals(printedW, load.terms().get(i).meanW(), 0.002 * printedW, "item " + i);
+        }
+        return load;
+    }
 
     private static double pressure(CheckRow r) {
         return r.has("elevation_m") ? MoistAirChecks.pressure(r) : P;
