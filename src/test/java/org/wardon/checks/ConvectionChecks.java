@@ -3,7 +3,7 @@ package org.wardon.checks;
 import java.util.Map;
 import java.util.TreeMap;
 import java.util.function.ToDoubleFunction;
-import org.wardon.cooling.FallingFilm;
+import org.wardon.cooling.water.FallingFilm;
 import org.wardon.enclosure.NaturalConvection;
 import org.wardon.enclosure.NaturalConvection.Gas;
 import org.wardon.enclosure.UValue;

@@ -1,5 +1,6 @@
-package org.wardon.cooling;
+package org.wardon.cooling.water;
 
+import org.wardon.air.MoistAir;
 import org.wardon.errors.Require;
 
 /**
@@ -15,6 +16,9 @@ import org.wardon.errors.Require;
  */
 public record FallingFilm(double densityKgM3, double viscosityPas, double conductivityWmK) {
     private static final double GRAVITY_MS2 = 9.81;
+    private static final double UPRIGHT_DEG = 90;
+    private static final double WAVES_FROM = 30;
+    private static final double TURBULENT_FROM = 1_700;
 
     /** Checks the bounds. */
     public FallingFilm {
@@ -85,11 +89,89 @@ public record FallingFilm(double densityKgM3, double viscosityPas, double conduc
      * @return W/(m2 K)
      */
     public double wavyWm2K(double flowKgMs) {
-        double nu = viscosityPas / densityKgM3;
-        return 0.822
-                * Math.pow(reynolds(flowKgMs), -0.22)
+        return 0.822 * Math.pow(reynolds(flowKgMs), -0.22) * conductivityWmK / viscousLengthM();
+    }
+
+    /**
+     * Returns the film coefficient between a wall and the water of a wavy film that is warmed or
+     * cooled, Nu = 0.0323 Re^0.2 Pr^0.344.
+     *
+     * <p>Source: {@code cooling-sources.csv}, row wavy_heating, WILKE1962 (from memory).
+     *
+     * @param flowKgMs flow a metre of width, kg/(m s)
+     * @return W/(m2 K)
+     */
+    public double wavyHeatingWm2K(double flowKgMs) {
+        return 0.0323
+                * Math.pow(reynolds(flowKgMs), 0.2)
+                * Math.pow(prandtl(), 0.344)
                 * conductivityWmK
-                / Math.cbrt(nu * nu / GRAVITY_MS2);
+                / viscousLengthM();
+    }
+
+    /**
+     * Returns the film coefficient of a turbulent film, Nu = 0.0038 Re^0.4 Pr^0.65.
+     *
+     * <p>Source: {@code cooling-sources.csv}, row turbulent_evap, CHUN1971 (from memory).
+     *
+     * @param flowKgMs flow a metre of width, kg/(m s)
+     * @return W/(m2 K)
+     */
+    public double turbulentWm2K(double flowKgMs) {
+        return 0.0038
+                * Math.pow(reynolds(flowKgMs), 0.4)
+                * Math.pow(prandtl(), 0.65)
+                * conductivityWmK
+                / viscousLengthM();
+    }
+
+    /**
+     * Returns the film coefficient between an upright wall and the water: the highest of the
+     * smooth, wavy and turbulent laws. Each is a lower bound outside its own regime and the three
+     * cross near the borders, so the highest is continuous in the flow.
+     *
+     * @param flowKgMs flow a metre of width, kg/(m s), above 0
+     * @return W/(m2 K)
+     */
+    public double wallWm2K(double flowKgMs) {
+        double smooth = smoothWm2K(flowKgMs, UPRIGHT_DEG);
+        return Math.max(smooth, Math.max(wavyHeatingWm2K(flowKgMs), turbulentWm2K(flowKgMs)));
+    }
+
+    /** How a film runs. */
+    public enum Regime {
+        /** Smooth. */
+        LAMINAR,
+        /** With waves. */
+        WAVY,
+        /** Turbulent. */
+        TURBULENT
+    }
+
+    /**
+     * Returns how the film runs.
+     *
+     * <p>Source: {@code cooling-sources.csv}, row film_reynolds, BSL (from memory): laminar below
+     * about 30, turbulent above about 1600 to 1800.
+     *
+     * @param flowKgMs flow a metre of width, kg/(m s)
+     * @return its regime
+     */
+    public Regime regime(double flowKgMs) {
+        double re = reynolds(flowKgMs);
+        if (re < WAVES_FROM) {
+            return Regime.LAMINAR;
+        }
+        return re < TURBULENT_FROM ? Regime.WAVY : Regime.TURBULENT;
+    }
+
+    private double prandtl() {
+        return MoistAir.WATER_J_KG_K * viscosityPas / conductivityWmK;
+    }
+
+    private double viscousLengthM() {
+        double nu = viscosityPas / densityKgM3;
+        return Math.cbrt(nu * nu / GRAVITY_MS2);
     }
 
     private double drive(double slopeDeg) {
