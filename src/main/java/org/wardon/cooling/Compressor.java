@@ -40,29 +40,10 @@ public record Compressor(
         Optional<Defrost> defrost,
         OptionalDouble dailyEnergyKWh)
         implements Cooler {
-    /** How capacity follows the thermostat. */
-    public enum Control {
-        /** On above setting + band, off below setting - band. */
-        ON_OFF,
-        /** Capacity follows the air temperature within the band. */
-        MODULATING
-    }
+    private static final double SECONDS = 60;
 
-    /**
-     * A timed defrost.
-     *
-     * @param everyHours time between starts, h
-     * @param minutes how long, min
-     * @param heaterW heat given to the coil, W; 0 for defrost by air
-     */
-    public record Defrost(double everyHours, double minutes, double heaterW) {
-        /** Checks the bounds. */
-        public Defrost {
-            Require.within("defrost.everyHours", everyHours, 1, 168, "h", "");
-            Require.within("defrost.minutes", minutes, 1, 120, "min", "");
-            Require.within("defrost.heaterW", heaterW, 0, 100_000, "W", "");
-        }
-    }
+    /** Power over the rated one with the warmest air (assumption). */
+    private static final double WARM_START = 1.5;
 
     /** Checks the bounds. */
     public Compressor {
@@ -90,5 +71,91 @@ public record Compressor(
     @Override
     public CompressorLaw law(double pressurePa) {
         return new CompressorLaw(this, pressurePa);
+    }
+
+    @Override
+    public Optional<Following> following() {
+        return Optional.of(
+                new Following(
+                        control,
+                        lowestC,
+                        SECONDS * minRunMinutes,
+                        SECONDS * minRestMinutes,
+                        fanAlways ? fanW : 0));
+    }
+
+    /** Capacity, coil and air flow together: the same unit, larger; power stays. */
+    @Override
+    public Compressor sized(double factor) {
+        return copy(factor, control);
+    }
+
+    @Override
+    public Compressor modulating() {
+        return copy(1, Control.MODULATING);
+    }
+
+    private Compressor copy(double factor, Control other) {
+        return new Compressor(
+                ratedCapacityW * factor,
+                ratedPowerW,
+                ratedAirC,
+                ratedOutdoorC,
+                fanW,
+                fanAlways,
+                coilUaWK * factor,
+                airFlowM3s * factor,
+                other,
+                minRunMinutes,
+                minRestMinutes,
+                condenserRiseK,
+                lowestC,
+                defrost,
+                dailyEnergyKWh);
+    }
+
+    /** Its capacity and power less the share of time it rests; coil and fan stay. */
+    @Override
+    public Compressor withDefrostSpread() {
+        double share = defrost.map(Defrost::share).orElse(0.0);
+        return defrost.isEmpty()
+                ? this
+                : new Compressor(
+                        ratedCapacityW * (1 - share),
+                        ratedPowerW * (1 - share),
+                        ratedAirC,
+                        ratedOutdoorC,
+                        fanW,
+                        fanAlways,
+                        coilUaWK,
+                        airFlowM3s,
+                        control,
+                        minRunMinutes,
+                        minRestMinutes,
+                        condenserRiseK,
+                        lowestC,
+                        Optional.empty(),
+                        dailyEnergyKWh);
+    }
+
+    @Override
+    public boolean startsAtSetting() {
+        return true;
+    }
+
+    @Override
+    public boolean holdsBand() {
+        return true;
+    }
+
+    /** A warm start draws more than the rated point. */
+    @Override
+    public double mostElectricW() {
+        return WARM_START * ratedPowerW + fanW;
+    }
+
+    @Override
+    public <R> R match(Kinds<R> kinds) {
+        return kinds.compressor(this);
     }
 }

@@ -124,8 +124,10 @@ public final class CompressorLaw implements CoolerLaw {
         double condensingC = Condensing.temperatureC(in.outdoorC + unit.condenserRiseK());
         double permitted = Condensing.permitted(condensingC);
         out.tripped = permitted < 1;
-        double share = unit.control() == Compressor.Control.MODULATING ? 1 : in.run;
-        double speed = unit.control() == Compressor.Control.MODULATING ? in.run : 1;
+        double share = unit.control() == Control.MODULATING ? 1 : in.run;
+        double speed = unit.control() == Control.MODULATING ? in.run : 1;
+        out.ran = in.run;
+        out.ranByRun = 1;
         out.fanW = unit.fanAlways() ? unit.fanW() : unit.fanW() * in.run;
         if (in.run > 0 && permitted > 0) {
             running(in, out, guessC, condensingC, speed * permitted, share);
@@ -156,7 +158,7 @@ public final class CompressorLaw implements CoolerLaw {
                 share * (coil.sensibleByHumidity + coil.sensibleByCoil * teByHumidity);
         out.vapourByAirC = share * coil.vapourByCoil * teByAir;
         out.vapourByHumidity = share * (coil.vapourByHumidity + coil.vapourByCoil * teByHumidity);
-        if (unit.control() == Compressor.Control.MODULATING) {
+        if (unit.control() == Control.MODULATING) {
             double speedByRun = speed / in.run;
             out.sensibleByRun = coil.sensibleByCoil * teBySpeed * speedByRun;
             out.vapourByRun = coil.vapourByCoil * teBySpeed * speedByRun;
@@ -171,13 +173,17 @@ public final class CompressorLaw implements CoolerLaw {
         double thaws = out.vapourKgS * Coil.frozenShareSlope(teC);
         out.drainByAirC = out.vapourByAirC * liquid - thaws * teByAir;
         out.drainByHumidity = out.vapourByHumidity * liquid - thaws * teByHumidity;
+        out.drainByRun = out.vapourByRun * liquid;
+        if (unit.control() == Control.MODULATING) {
+            out.drainByRun -= thaws * teBySpeed * speed / in.run;
+        }
         out.drainEnthalpyJkg = Coil.condensateJkg(teC);
         out.electricW = share * speed * full / cop(teC, condensingC);
         double electricByCoil = out.electricW * powerLogSlope(teC, condensingC);
         out.electricByAirC = electricByCoil * teByAir;
         out.electricByHumidity = electricByCoil * teByHumidity;
         out.electricByRun = out.electricW / in.run;
-        if (unit.control() == Compressor.Control.MODULATING) {
+        if (unit.control() == Control.MODULATING) {
             out.electricByRun += electricByCoil * teBySpeed * speed / in.run;
         }
         out.evaporatingC = teC;
@@ -265,6 +271,7 @@ public final class CompressorLaw implements CoolerLaw {
         out.ownRate[0] = kept - back;
         out.ownRateByAirC[0] = out.drainByAirC * (1 - wetness) - byAir;
         out.ownRateByHumidity[0] = out.drainByHumidity * (1 - wetness) - byHumidity;
+        out.ownRateByRun[0] = out.drainByRun * (1 - wetness) + wetness * lifts * permitted;
         out.ownRateByOwn[0] = -(out.drainKgS + (1 - running) * lifts) / coilWaterKg;
         out.vapourByOwn[0] = -(1 - running) * lifts / coilWaterKg;
         out.sensibleByOwn[0] = -out.vapourByOwn[0] * latent;

@@ -1,6 +1,17 @@
 package org.wardon.cooling;
 
-/** A way of taking heat out of a chamber: one record a kind. */
+import java.util.Optional;
+import java.util.OptionalDouble;
+
+/**
+ * A way of taking heat out of a chamber: one record a kind. What the model must know of a kind
+ * stands here, so that no other room asks which kind it has; where each kind has its own answer
+ * there is {@link #match}.
+ *
+ * <p>A new kind is a record in {@code permits} with its {@link CoolerLaw}, a method of {@link
+ * Kinds}, a binder and a schema entry. A kind that acts on faces states film and fluid of its faces
+ * in {@link CoolerEffect}, for the faces to take; what it does to the air goes as for all others.
+ */
 public sealed interface Cooler permits Compressor {
     /**
      * Returns the kind as a plan names it.
@@ -17,4 +28,107 @@ public sealed interface Cooler permits Compressor {
      * @throws IllegalArgumentException where its parts cannot work together
      */
     CoolerLaw law(double pressurePa);
+
+    /**
+     * Returns how it follows the thermostat.
+     *
+     * @return empty for one that always acts
+     */
+    Optional<Following> following();
+
+    /**
+     * Returns the same cooler with another capacity.
+     *
+     * @param factor on what it can take, 1 for none
+     * @return the changed copy
+     */
+    Cooler sized(double factor);
+
+    /**
+     * Returns the same cooler with its thermostat following the air within the band.
+     *
+     * @return the changed copy; itself where it has no thermostat
+     */
+    Cooler modulating();
+
+    /**
+     * Returns whether a chamber with it starts at its setting, as one that has been cold before.
+     *
+     * @return false where the chamber starts at outdoors
+     */
+    boolean startsAtSetting();
+
+    /**
+     * Returns whether it is judged by keeping the band from both sides.
+     *
+     * @return false where the weather decides, and only too warm counts
+     */
+    boolean holdsBand();
+
+    /**
+     * Returns the most electricity it can draw, fan included.
+     *
+     * @return W
+     */
+    double mostElectricW();
+
+    /**
+     * Returns whether it stands still without electricity.
+     *
+     * @return true for most
+     */
+    default boolean needsPower() {
+        return true;
+    }
+
+    /**
+     * Returns its timed defrost.
+     *
+     * @return empty where there is none
+     */
+    default Optional<Defrost> defrost() {
+        return Optional.empty();
+    }
+
+    /**
+     * Returns the same cooler with its defrosts spread evenly over the time.
+     *
+     * @return the changed copy, without {@link #defrost}; itself where it has none
+     */
+    default Cooler withDefrostSpread() {
+        return this;
+    }
+
+    /**
+     * Returns the energy a day its supply can give.
+     *
+     * @return kWh; empty where there is no limit
+     */
+    default OptionalDouble dailyEnergyKWh() {
+        return OptionalDouble.empty();
+    }
+
+    /**
+     * Gives the answer of its kind; the compiler asks for every kind.
+     *
+     * @param kinds an answer a kind
+     * @param <R> what is answered
+     * @return the answer
+     */
+    <R> R match(Kinds<R> kinds);
+
+    /**
+     * One answer a kind.
+     *
+     * @param <R> what is answered
+     */
+    interface Kinds<R> {
+        /**
+         * Answers for a compressor.
+         *
+         * @param unit the unit
+         * @return the answer
+         */
+        R compressor(Compressor unit);
+    }
 }

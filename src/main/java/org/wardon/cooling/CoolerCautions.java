@@ -39,12 +39,16 @@ public final class CoolerCautions {
      */
     public static List<Caution> of(
             Cooler cooler, Setting setting, String chamberId, double pressurePa) {
-        List<Caution> cautions = new ArrayList<>();
-        if (cooler instanceof Compressor unit) {
-            follows(unit, setting, chamberId, cautions);
-            rating(unit, chamberId, pressurePa, cautions);
-        }
-        return cautions;
+        return cooler.match(
+                new Cooler.Kinds<>() {
+                    @Override
+                    public List<Caution> compressor(Compressor unit) {
+                        List<Caution> cautions = new ArrayList<>();
+                        follows(unit, setting, chamberId, cautions);
+                        rating(unit, chamberId, pressurePa, cautions);
+                        return cautions;
+                    }
+                });
     }
 
     private static void follows(

@@ -53,6 +53,18 @@ public final class CoolerEffect {
     /** Enthalpy of what drains or freezes, J/kg from liquid water of 0 °C. */
     public double drainEnthalpyJkg;
 
+    /**
+     * Share of the time it really runs, or speed: the thermostat's share less what its own
+     * conditions forbid. Fan, exchange and water go with it.
+     */
+    public double ran;
+
+    /** That share by air temperature, the thermostat's held, 1/K. */
+    public double ranByAirC;
+
+    /** That share by the thermostat's. */
+    public double ranByRun;
+
     /** Outdoor air driven through the chamber, kg dry air/s. */
     public double exchangeKgS;
 
@@ -101,6 +113,9 @@ public final class CoolerEffect {
     /** {@code [own state]}, its rate by humidity ratio, unit/s per kg/kg. */
     public final double[] ownRateByHumidity;
 
+    /** {@code [own state]}, its rate by running share or speed, unit/s. */
+    public final double[] ownRateByRun;
+
     /** {@code [own state]}, its rate by itself, 1/s. */
     public final double[] ownRateByOwn;
 
@@ -109,6 +124,9 @@ public final class CoolerEffect {
 
     /** {@code [own state]}, vapour by the state, kg/s per unit. */
     public final double[] vapourByOwn;
+
+    /** {@code [own state]}, electric power by the state, W per unit. */
+    public final double[] electricByOwn;
 
     /** Seconds until the cooler itself changes its course; infinite where it does not. */
     public double nextEventS = Double.POSITIVE_INFINITY;
@@ -122,6 +140,9 @@ public final class CoolerEffect {
     /** Scratch: what drains by humidity ratio, kg/s per kg/kg. */
     double drainByHumidity;
 
+    /** Scratch: what drains by running share or speed, kg/s. */
+    double drainByRun;
+
     /**
      * Makes room for the answers of one cooler.
      *
@@ -131,9 +152,11 @@ public final class CoolerEffect {
         ownRate = new double[ownStates];
         ownRateByAirC = new double[ownStates];
         ownRateByHumidity = new double[ownStates];
+        ownRateByRun = new double[ownStates];
         ownRateByOwn = new double[ownStates];
         sensibleByOwn = new double[ownStates];
         vapourByOwn = new double[ownStates];
+        electricByOwn = new double[ownStates];
     }
 
     /** Sets everything to a resting cooler; the last evaporating temperature goes too. */
@@ -141,7 +164,8 @@ public final class CoolerEffect {
         sensibleW = vapourKgS = 0;
         sensibleByAirC = sensibleByHumidity = vapourByAirC = vapourByHumidity = 0;
         sensibleByRun = vapourByRun = 0;
-        drainByAirC = drainByHumidity = 0;
+        ran = ranByAirC = ranByRun = 0;
+        drainByAirC = drainByHumidity = drainByRun = 0;
         totalW = drainKgS = frostKgS = drainEnthalpyJkg = exchangeKgS = waterKgS = 0;
         electricW = fanW = electricByAirC = electricByHumidity = electricByRun = 0;
         evaporatingC = condensingC = supplyC = Double.NaN;
@@ -151,9 +175,11 @@ public final class CoolerEffect {
         Arrays.fill(ownRate, 0);
         Arrays.fill(ownRateByAirC, 0);
         Arrays.fill(ownRateByHumidity, 0);
+        Arrays.fill(ownRateByRun, 0);
         Arrays.fill(ownRateByOwn, 0);
         Arrays.fill(sensibleByOwn, 0);
         Arrays.fill(vapourByOwn, 0);
+        Arrays.fill(electricByOwn, 0);
         nextEventS = Double.POSITIVE_INFINITY;
     }
 }

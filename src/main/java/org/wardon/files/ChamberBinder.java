@@ -39,9 +39,9 @@ final class ChamberBinder {
                         inputs.number(chamber, "widthM"),
                         inputs.number(chamber, "heightM"));
         Enclosure enclosure = enclosure(chamber, box);
-        CompressorBinder compressors = new CompressorBinder(inputs);
+        CoolerBinder coolerBinder = new CoolerBinder(inputs);
         List<Cooler> coolers =
-                chamber.at("cooling").items().stream().<Cooler>map(compressors::bind).toList();
+                chamber.at("cooling").items().stream().map(coolerBinder::bind).toList();
         return new ChamberPlan(
                 inputs.text(chamber, "id"),
                 enclosure,

@@ -2,6 +2,7 @@ package org.wardon.files;
 
 import java.util.Optional;
 import org.wardon.cooling.Compressor;
+import org.wardon.cooling.Defrost;
 import org.wardon.files.json.Part;
 import org.wardon.plan.Defaults;
 
@@ -42,9 +43,7 @@ final class CompressorBinder {
                         Defaults.airFlowM3s(capacityW),
                         "m3/s",
                         Defaults.AIR_DROP_K.mark()),
-                part.at("control").text().equals(Optional.of("modulating"))
-                        ? Compressor.Control.MODULATING
-                        : Compressor.Control.ON_OFF,
+                inputs.control(part),
                 inputs.number(part, "minRunMinutes", Defaults.MIN_RUN_MINUTES),
                 inputs.number(part, "minRestMinutes", Defaults.MIN_REST_MINUTES),
                 inputs.number(part, "condenserRiseK", Defaults.CONDENSER_RISE_K),
@@ -53,10 +52,10 @@ final class CompressorBinder {
                 inputs.maybe(part, "dailyEnergyKWh"));
     }
 
-    private Optional<Compressor.Defrost> defrost(Part defrost) {
+    private Optional<Defrost> defrost(Part defrost) {
         return defrost.given()
                 ? Optional.of(
-                        new Compressor.Defrost(
+                        new Defrost(
                                 inputs.number(defrost, "everyHours"),
                                 inputs.number(defrost, "minutes"),
                                 inputs.numberElse(defrost, "heaterW", 0)))

@@ -6,6 +6,7 @@ import java.util.List;
 import java.util.Optional;
 import java.util.OptionalDouble;
 import java.util.Set;
+import org.wardon.cooling.Control;
 import org.wardon.files.json.Json;
 import org.wardon.files.json.Part;
 import org.wardon.plan.Assumed;
@@ -62,6 +63,13 @@ final class Inputs {
 
     boolean flag(Part owner, String name) {
         return owner.at(name).flag().orElse(false);
+    }
+
+    /** Returns how a cooler follows its thermostat: on and off, unless modulating is asked for. */
+    Control control(Part cooler) {
+        return cooler.at("control").text().equals(Optional.of("modulating"))
+                ? Control.MODULATING
+                : Control.ON_OFF;
     }
 
     Optional<LocalDateTime> time(Part owner, String name) {

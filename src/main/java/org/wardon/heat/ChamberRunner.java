@@ -4,11 +4,12 @@ import java.util.ArrayList;
 import java.util.Comparator;
 import java.util.List;
 import java.util.Locale;
-import org.wardon.cooling.Compressor;
 import org.wardon.cooling.CoolerEffect;
+import org.wardon.cooling.Defrost;
 import org.wardon.errors.Progress;
 import org.wardon.errors.RunStopped;
 import org.wardon.heat.network.ChamberNetwork;
+import org.wardon.heat.network.CoolerPart;
 import org.wardon.heat.network.LotBranch;
 import org.wardon.heat.network.Terms;
 import org.wardon.heat.solver.Integrator;
@@ -74,7 +75,7 @@ final class ChamberRunner implements Integrator.StepListener {
         network.accuracy(accuracy.lotK(), accuracy.airK());
         integrator = new Integrator(network, EDGES, FIRST_STEP_S, SHORTEST_STEP_S);
         totals = integrator.totals();
-        thermostats = new SwitchedCoolers(run, network);
+        thermostats = new SwitchedCoolers(network);
         budget = new EnergyBudget(run, network);
         double pressure = RunCompiler.pressurePa(run);
         carbon = new Carbon(pressure);
@@ -211,10 +212,10 @@ final class ChamberRunner implements Integrator.StepListener {
     /** Air below 4 °C on a running coil without defrost. Source: common practice, no source. */
     private boolean icesUp() {
         for (int i = 0; i < network.coolerCount(); i++) {
-            if (run.coolers().get(i) instanceof Compressor unit
-                    && unit.defrost().isEmpty()
+            CoolerPart cooler = network.cooler(i);
+            if (cooler.unit().defrost().isEmpty()
                     && network.airC(y) < 4
-                    && network.cooler(i).effect().evaporatingC < 0) {
+                    && cooler.effect().evaporatingC < 0) {
                 return true;
             }
         }
@@ -269,7 +270,9 @@ final class ChamberRunner implements Integrator.StepListener {
         powered = on;
         outages.is(t, !on);
         for (int i = 0; i < thermostats.count(); i++) {
-            thermostats.rest(i, t);
+            if (network.cooler(i).unit().needsPower()) {
+                thermostats.rest(i, t);
+            }
         }
         network.power(on);
         budget.apply();
@@ -279,13 +282,12 @@ final class ChamberRunner implements Integrator.StepListener {
     private void defrost(Edge edge, double t) {
         boolean starts = edge.kind() == Edge.Kind.DEFROST_STARTS;
         int i = edge.index();
-        if (run.coolers().get(i) instanceof Compressor unit && unit.defrost().isPresent()) {
-            if (starts) {
-                thermostats.rest(i, t);
-            }
-            network.cooler(i).defrost(starts && powered, unit.defrost().get().heaterW());
-            restart(edge);
+        Defrost defrost = network.cooler(i).unit().defrost().orElseThrow();
+        if (starts) {
+            thermostats.rest(i, t);
         }
+        network.cooler(i).defrost(starts && powered, defrost.heaterW());
+        restart(edge);
     }
 
     private void door(Edge edge) {
@@ -386,17 +388,32 @@ final class ChamberRunner implements Integrator.StepListener {
                 java.util.Arrays.stream(lots).map(LotRecorder::course).toList(),
                 events,
                 counts(),
+                coolers(),
                 heat,
                 water(evaporated, packagesKg, respiration),
                 layersError(),
                 network.reasons());
     }
 
+    private List<CoolerTotals> coolers() {
+        List<CoolerTotals> all = new ArrayList<>();
+        for (int i = 0; i < network.coolerCount(); i++) {
+            Terms.OfCooler did = terms.cooler(i, totals);
+            all.add(
+                    new CoolerTotals(
+                            network.cooler(i).unit().kind(),
+                            did.ranS(),
+                            did.removedJ(),
+                            did.electricityJ(),
+                            did.waterKg()));
+        }
+        return all;
+    }
+
     private Course.Counts counts() {
         return new Course.Counts(
                 thermostats.switches(),
                 openings,
-                terms.ranS(totals),
                 carbon.highestPpm(),
                 co2AtFirstOpening,
                 integrator.steps(),

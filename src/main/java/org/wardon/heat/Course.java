@@ -11,6 +11,7 @@ import org.wardon.produce.Reason;
  * @param lots one a stay, in the order of the run
  * @param events what went on for a while, by start
  * @param counts what was counted
+ * @param coolers what each cooler did, in their order; none with an ideal one
  * @param heat heat by term
  * @param water water by term
  * @param layersErrorShare error of the heat balance of the faces' layers, share of what entered
@@ -23,6 +24,7 @@ public record Course(
         List<LotCourse> lots,
         List<CourseEvent> events,
         Counts counts,
+        List<CoolerTotals> coolers,
         HeatLedger heat,
         WaterLedger water,
         double layersErrorShare,
@@ -31,6 +33,7 @@ public record Course(
     public Course {
         lots = List.copyOf(lots);
         events = List.copyOf(events);
+        coolers = List.copyOf(coolers);
         reasons = List.copyOf(reasons);
     }
 
@@ -39,7 +42,6 @@ public record Course(
      *
      * @param thermostatSwitches times a thermostat switched on or off
      * @param doorOpenings openings of the door
-     * @param coolerRanS time the first cooler ran, by its share, s
      * @param co2HighestPpm highest carbon dioxide, ppm
      * @param co2AtFirstOpeningPpm highest carbon dioxide met at the first opening of a day, ppm; 0
      *     where the door never opens
@@ -49,11 +51,19 @@ public record Course(
     public record Counts(
             long thermostatSwitches,
             long doorOpenings,
-            double coolerRanS,
             double co2HighestPpm,
             double co2AtFirstOpeningPpm,
             long steps,
             long stepsRefused) {}
+
+    /**
+     * Returns the water all coolers used up.
+     *
+     * @return kg
+     */
+    public double waterUsedKg() {
+        return coolers.stream().mapToDouble(CoolerTotals::waterKg).sum();
+    }
 
     /**
      * Returns the worst error of the balances of heat and water.

@@ -1,13 +1,15 @@
 package org.wardon.heat;
 
-import java.util.OptionalDouble;
-import org.wardon.cooling.Compressor;
+import java.util.ArrayList;
+import java.util.List;
 import org.wardon.heat.network.ChamberNetwork;
+import org.wardon.heat.network.CoolerPart;
 import org.wardon.heat.network.Terms;
 
 /**
- * A supply that can give only so much energy a day, such as solar: when it is used up coolers and
- * fans stand still until midnight.
+ * A supply that can give only so much energy a day, such as solar: when it is used up the coolers
+ * on it and their fans stand still until midnight. Coolers that name a daily energy share one
+ * supply; others are not on it.
  */
 final class EnergyBudget {
     private static final double SOONEST_S = 30;
@@ -15,6 +17,7 @@ final class EnergyBudget {
 
     private final ChamberNetwork network;
     private final Terms terms;
+    private final List<Integer> onIt = new ArrayList<>();
     private final double dayJ;
     private final double mostW;
     private final Spans spans;
@@ -27,21 +30,28 @@ final class EnergyBudget {
         this.spans = new Spans(CourseEvent.Kind.ENERGY_USED_UP, run.chamberId());
         double kWh = 0;
         double watts = 0;
-        boolean limited = network.coolerCount() > 0;
         for (int i = 0; i < network.coolerCount(); i++) {
-            if (run.coolers().get(i) instanceof Compressor unit) {
-                OptionalDouble day = unit.dailyEnergyKWh();
-                limited &= day.isPresent();
-                kWh += day.orElse(0);
-                watts += 1.5 * unit.ratedPowerW() + unit.fanW();
+            CoolerPart cooler = network.cooler(i);
+            if (cooler.unit().dailyEnergyKWh().isPresent()) {
+                onIt.add(i);
+                kWh += cooler.unit().dailyEnergyKWh().getAsDouble();
+                watts += cooler.unit().mostElectricW();
             }
         }
-        dayJ = limited ? kWh * JOULE_PER_KWH : Double.POSITIVE_INFINITY;
+        dayJ = onIt.isEmpty() ? Double.POSITIVE_INFINITY : kWh * JOULE_PER_KWH;
         mostW = watts;
     }
 
+    private double drawnJ(double[] totals) {
+        double sum = 0;
+        for (int i : onIt) {
+            sum += terms.electricity(i, totals);
+        }
+        return sum;
+    }
+
     private double leftJ(double[] totals) {
-        return dayJ - (terms.electricity(totals) - atMidnightJ);
+        return dayJ - (drawnJ(totals) - atMidnightJ);
     }
 
     /** The earliest time at which the energy can be used up, s. */
@@ -61,11 +71,9 @@ final class EnergyBudget {
     }
 
     void midnight(double[] totals, boolean powered) {
-        atMidnightJ = terms.electricity(totals);
+        atMidnightJ = drawnJ(totals);
         if (usedUp && powered) {
-            for (int i = 0; i < network.coolerCount(); i++) {
-                network.cooler(i).power(true);
-            }
+            onIt.forEach(i -> network.cooler(i).power(true));
         }
         usedUp = false;
     }
@@ -73,7 +81,7 @@ final class EnergyBudget {
     /** Takes the power from the coolers where it is used up. */
     void apply() {
         if (usedUp) {
-            for (int i = 0; i < network.coolerCount(); i++) {
+            for (int i : onIt) {
                 network.cooler(i).switchOn(false);
                 network.cooler(i).power(false);
             }

@@ -6,6 +6,7 @@ import java.util.OptionalDouble;
 import org.wardon.air.MoistAir;
 import org.wardon.air.StandardAtmosphere;
 import org.wardon.air.Sunshine;
+import org.wardon.cooling.Cooler;
 import org.wardon.enclosure.Surroundings;
 import org.wardon.errors.Require;
 import org.wardon.heat.network.ChamberNetwork;
@@ -24,8 +25,23 @@ final class RunCompiler {
         return (int) Math.ceil(run.durationS() / 3600 - 1e-9);
     }
 
-    static boolean passive(ChamberRun run) {
-        return run.coolers().isEmpty() && run.controlMode() != ControlMode.IDEAL;
+    /** Whether it starts as the weather leaves it, not at its setting. */
+    static boolean startsOutdoors(ChamberRun run) {
+        return run.coolers().stream().noneMatch(Cooler::startsAtSetting)
+                && run.controlMode() != ControlMode.IDEAL;
+    }
+
+    /**
+     * What the inside stands at in the mean, for the direction of films and the mass of air, °C:
+     * the setting, or outdoors where that is what it follows. Coolers that work with outdoor air
+     * bring the chamber below outdoors at most down to the setting.
+     */
+    private static double insideMeanC(ChamberRun run, double outdoorMeanC) {
+        double setC = run.setting().temperatureC();
+        if (!startsOutdoors(run)) {
+            return setC;
+        }
+        return run.coolers().isEmpty() ? outdoorMeanC : Math.min(setC, outdoorMeanC);
     }
 
     static ChamberNetwork network(ChamberRun run, boolean plain) {
@@ -99,7 +115,7 @@ final class RunCompiler {
                 run.weather(),
                 Sunshine.of(run.site(), run.timeline(), run.weather(), hours),
                 hours,
-                passive(run) ? mean : run.setting().temperatureC(),
+                insideMeanC(run, mean),
                 OptionalDouble.empty(),
                 neighbours);
     }
@@ -127,7 +143,8 @@ final class RunCompiler {
 
     /** Temperature the run starts with, °C. */
     static double startC(ChamberRun run) {
-        double usual = passive(run) ? run.weather().temperatureC(0) : run.setting().temperatureC();
+        double usual =
+                startsOutdoors(run) ? run.weather().temperatureC(0) : run.setting().temperatureC();
         return run.start().temperatureC().orElse(usual);
     }
 
@@ -140,7 +157,7 @@ final class RunCompiler {
             return MoistAir.humidityRatioAt(airC, given.getAsDouble() / 100, pressure);
         }
         double wanted =
-                passive(run)
+                startsOutdoors(run)
                         ? network.outdoorRatio(0)
                         : MoistAir.humidityRatioAt(
                                 airC, run.setting().humidityPct() / 100, pressure);

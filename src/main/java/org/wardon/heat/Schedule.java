@@ -4,9 +4,9 @@ import java.time.LocalTime;
 import java.util.ArrayList;
 import java.util.Comparator;
 import java.util.List;
+import java.util.Optional;
 import org.wardon.air.Timeline;
-import org.wardon.cooling.Compressor;
-import org.wardon.cooling.Compressor.Defrost;
+import org.wardon.cooling.Defrost;
 import org.wardon.cooling.Outage;
 import org.wardon.enclosure.Door;
 import org.wardon.enclosure.Gains;
@@ -115,12 +115,11 @@ final class Schedule {
 
     private void defrosts() {
         for (int i = 0; i < run.coolers().size(); i++) {
-            if (run.controlMode() == ControlMode.IDEAL
-                    || !(run.coolers().get(i) instanceof Compressor unit)
-                    || unit.defrost().isEmpty()) {
+            Optional<Defrost> timed = run.coolers().get(i).defrost();
+            if (run.controlMode() == ControlMode.IDEAL || timed.isEmpty()) {
                 continue;
             }
-            Defrost defrost = unit.defrost().get();
+            Defrost defrost = timed.get();
             double every = defrost.everyHours() * Timeline.HOUR_S;
             for (double t = every; t < run.durationS(); t += every) {
                 add(t, Edge.Kind.DEFROST_STARTS, i);

@@ -4,9 +4,9 @@ import java.util.OptionalDouble;
 import org.wardon.errors.Require;
 
 /**
- * The air a run starts with. What is left open: a chamber with a compressor starts at its setting
- * with faces at the steady profile, all others as the first day, come five times before, leaves
- * them.
+ * The air a run starts with. What is left open: a chamber whose coolers keep it cold starts at its
+ * setting with faces at the steady profile, all others as the first day, come five times before,
+ * leaves them.
  *
  * @param temperatureC air, °C
  * @param humidityPct its relative humidity, percent

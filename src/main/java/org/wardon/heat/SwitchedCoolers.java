@@ -1,15 +1,16 @@
 package org.wardon.heat;
 
 import java.util.Arrays;
-import org.wardon.cooling.Compressor;
+import java.util.Optional;
+import org.wardon.cooling.Following;
 import org.wardon.heat.network.ChamberNetwork;
 import org.wardon.heat.network.CoolerPart;
 import org.wardon.heat.solver.Integrator;
 
 /**
- * The thermostats of coolers that run on and off: on above setting + band, off below setting -
- * band, each run and rest at least as long as the unit asks. The crossing is found by the
- * integrator, which ends a step there.
+ * The thermostats of coolers that run on and off: on above setting + band where the cooler's own
+ * conditions hold, off below setting - band or where they do not; each run and rest at least as
+ * long as the unit asks. The crossing is found by the integrator, which ends a step there.
  */
 final class SwitchedCoolers implements Integrator.Trigger {
     /** A switching may come this much late, K; thermostats are no better. */
@@ -21,7 +22,7 @@ final class SwitchedCoolers implements Integrator.Trigger {
     private final double[] minRestS;
     private long switches;
 
-    SwitchedCoolers(ChamberRun run, ChamberNetwork network) {
+    SwitchedCoolers(ChamberNetwork network) {
         this.network = network;
         int n = network.coolerCount();
         lockedUntil = new double[n];
@@ -29,10 +30,9 @@ final class SwitchedCoolers implements Integrator.Trigger {
         minRestS = new double[n];
         Arrays.fill(lockedUntil, Double.NEGATIVE_INFINITY);
         for (int i = 0; i < n; i++) {
-            if (run.coolers().get(i) instanceof Compressor unit) {
-                minRunS[i] = 60 * unit.minRunMinutes();
-                minRestS[i] = 60 * unit.minRestMinutes();
-            }
+            Optional<Following> following = network.cooler(i).unit().following();
+            minRunS[i] = following.map(Following::minRunS).orElse(0.0);
+            minRestS[i] = following.map(Following::minRestS).orElse(0.0);
         }
     }
 
@@ -41,22 +41,25 @@ final class SwitchedCoolers implements Integrator.Trigger {
         double most = Double.NEGATIVE_INFINITY;
         double airC = network.airC(y);
         for (int i = 0; i < lockedUntil.length; i++) {
-            most = Math.max(most, miss(i, t, airC));
+            most = Math.max(most, miss(i, t, y, airC));
         }
         return most;
     }
 
     /** How far the air is beyond the point of switching, K; below 0 before it. */
-    private double miss(int i, double t, double airC) {
+    private double miss(int i, double t, double[] y, double airC) {
         CoolerPart cooler = network.cooler(i);
-        if (cooler.modulating()
+        if (!cooler.switched()
                 || !cooler.powered()
                 || cooler.defrosting()
                 || t < lockedUntil[i] - 1e-6) {
             return Double.NEGATIVE_INFINITY;
         }
         double above = airC - cooler.followedC();
-        return cooler.on() ? -cooler.bandK() - above : above - cooler.bandK();
+        double inside = network.inside(i, t, y);
+        return cooler.on()
+                ? Math.max(-cooler.bandK() - above, -inside)
+                : Math.min(above - cooler.bandK(), inside);
     }
 
     @Override
@@ -69,7 +72,7 @@ final class SwitchedCoolers implements Integrator.Trigger {
         boolean started = false;
         double airC = network.airC(y);
         for (int i = 0; i < lockedUntil.length; i++) {
-            if (miss(i, t, airC) > 0) {
+            if (miss(i, t, y, airC) > 0) {
                 boolean on = !network.cooler(i).on();
                 turn(i, t, on);
                 started |= on;
@@ -84,7 +87,7 @@ final class SwitchedCoolers implements Integrator.Trigger {
         switches++;
     }
 
-    /** Lets all that run come to rest: the power went, or a defrost starts. */
+    /** Lets one that runs come to rest: the power went or came, or a defrost starts. */
     void rest(int i, double t) {
         if (network.cooler(i).on()) {
             turn(i, t, false);

@@ -9,7 +9,8 @@ import org.wardon.heat.network.ChamberNetwork;
 
 /**
  * The state a run starts with. A chamber held at its setting starts with faces at the steady
- * profile; one that follows the weather, without lots, after its first day came five times.
+ * profile; one that follows the weather, without lots and with its coolers at rest, after its first
+ * day came five times.
  */
 final class WarmUp {
     private static final int DAYS = 5;
@@ -20,7 +21,7 @@ final class WarmUp {
     static double[] start(
             ChamberRun run, ChamberNetwork network, Accuracy accuracy, boolean plain) {
         double[] y = network.start(RunCompiler.startC(run), RunCompiler.startRatio(run, network));
-        if (!RunCompiler.passive(run) || run.start().temperatureC().isPresent()) {
+        if (!RunCompiler.startsOutdoors(run) || run.start().temperatureC().isPresent()) {
             return y;
         }
         ChamberRun before = firstDayRepeated(run);
@@ -29,7 +30,8 @@ final class WarmUp {
                 empty.start(RunCompiler.startC(before), RunCompiler.startRatio(before, empty));
         ChamberRunner runner = new ChamberRunner(before, empty, warm, accuracy);
         runner.run(Progress.SILENT);
-        // Lots come last in the state: what stands before them is the same in both networks.
+        // Faces and structure come first in the state, coolers and lots after them; before the run
+        // neither was there.
         System.arraycopy(warm, 0, y, 0, warm.length);
         run.start()
                 .humidityPct()

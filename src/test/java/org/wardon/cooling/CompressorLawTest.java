@@ -17,7 +17,6 @@ import java.util.function.ToDoubleFunction;
 import org.junit.jupiter.api.Test;
 import org.wardon.Source;
 import org.wardon.air.MoistAir;
-import org.wardon.cooling.Compressor.Control;
 
 /** A compressor in balance with its coil. */
 class CompressorLawTest {

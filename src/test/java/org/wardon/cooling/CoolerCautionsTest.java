@@ -6,8 +6,6 @@ import java.util.List;
 import java.util.Optional;
 import java.util.OptionalDouble;
 import org.junit.jupiter.api.Test;
-import org.wardon.cooling.Compressor.Control;
-import org.wardon.cooling.Compressor.Defrost;
 
 /** What a keeper hears of a cooler. */
 class CoolerCautionsTest {

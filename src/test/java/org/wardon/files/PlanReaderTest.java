@@ -13,6 +13,8 @@ import java.util.Optional;
 import java.util.OptionalDouble;
 import org.junit.jupiter.api.Test;
 import org.wardon.cooling.Compressor;
+import org.wardon.cooling.Control;
+import org.wardon.cooling.Defrost;
 import org.wardon.cooling.Setting;
 import org.wardon.enclosure.Beyond;
 import org.wardon.enclosure.Door;
@@ -93,12 +95,12 @@ class PlanReaderTest {
                                 true,
                                 600,
                                 0.6,
-                                Compressor.Control.MODULATING,
+                                Control.MODULATING,
                                 4,
                                 3,
                                 3,
                                 2,
-                                Optional.of(new Compressor.Defrost(8, 20, 800)),
+                                Optional.of(new Defrost(8, 20, 800)),
                                 OptionalDouble.of(30))),
                 north.coolers());
     }

@@ -12,6 +12,7 @@ import org.wardon.air.Site;
 import org.wardon.air.Timeline;
 import org.wardon.air.Weather;
 import org.wardon.cooling.Compressor;
+import org.wardon.cooling.Control;
 import org.wardon.cooling.Setting;
 import org.wardon.enclosure.Beyond;
 import org.wardon.enclosure.Box;
@@ -92,11 +93,11 @@ public final class Chambers {
                 false);
     }
 
-    static Compressor unit(Compressor.Control control) {
+    static Compressor unit(Control control) {
         return unit(control, 3);
     }
 
-    static Compressor unit(Compressor.Control control, double minMinutes) {
+    static Compressor unit(Control control, double minMinutes) {
         return new Compressor(
                 12_000,
                 4_800,
@@ -175,7 +176,7 @@ public final class Chambers {
     }
 
     /** Twelve lots in a panel room with door, sun, people and a compressor. */
-    static ChamberRun full(Compressor.Control control, int lots, double days) {
+    static ChamberRun full(Control control, int lots, double days) {
         int hours = (int) (days * 24) + 3;
         return passive(panelRoom(20), weather(hours), days)
                 .withSetting(new Setting(4, 1, 90))

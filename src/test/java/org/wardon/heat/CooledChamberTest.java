@@ -9,7 +9,7 @@ import java.lang.management.ManagementFactory;
 import java.util.List;
 import org.junit.jupiter.api.Test;
 import org.wardon.air.Weather;
-import org.wardon.cooling.Compressor.Control;
+import org.wardon.cooling.Control;
 import org.wardon.cooling.Outage;
 import org.wardon.errors.Progress;
 import org.wardon.errors.RunStopped;
@@ -144,7 +144,7 @@ class CooledChamberTest {
         }
         network.accuracy(1e-6, 1e-5);
         Integrator integrator = new Integrator(network, 1, 1, 1e-6);
-        SwitchedCoolers thermostats = new SwitchedCoolers(run, network);
+        SwitchedCoolers thermostats = new SwitchedCoolers(network);
         Integrator.StepListener deaf = (from, to, state) -> {};
         double t = integrator.advance(0, y, 600, thermostats, deaf);
         ThreadMXBean threads = (ThreadMXBean) ManagementFactory.getThreadMXBean();

@@ -11,7 +11,7 @@ import org.openjdk.jmh.annotations.Param;
 import org.openjdk.jmh.annotations.Scope;
 import org.openjdk.jmh.annotations.State;
 import org.openjdk.jmh.annotations.Warmup;
-import org.wardon.cooling.Compressor.Control;
+import org.wardon.cooling.Control;
 import org.wardon.errors.Progress;
 
 /** Time of whole runs; for a person to run, not a check. */

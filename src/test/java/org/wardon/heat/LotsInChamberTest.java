@@ -10,7 +10,7 @@ import org.junit.jupiter.api.Test;
 import org.junit.jupiter.params.ParameterizedTest;
 import org.junit.jupiter.params.provider.CsvSource;
 import org.wardon.air.Weather;
-import org.wardon.cooling.Compressor.Control;
+import org.wardon.cooling.Control;
 import org.wardon.errors.Progress;
 import org.wardon.lots.Item;
 import org.wardon.lots.Lot;

@@ -9,7 +9,7 @@ import org.apache.commons.math3.ode.FirstOrderDifferentialEquations;
 import org.apache.commons.math3.ode.nonstiff.DormandPrince853Integrator;
 import org.junit.jupiter.api.BeforeAll;
 import org.junit.jupiter.api.Test;
-import org.wardon.cooling.Compressor.Control;
+import org.wardon.cooling.Control;
 import org.wardon.errors.Progress;
 import org.wardon.heat.network.ChamberNetwork;
 

@@ -1,10 +1,5 @@
 package org.wardon.advice.forecast;
 
-import java.util.ArrayList;
-import java.util.List;
-import java.util.Optional;
-import org.wardon.cooling.Compressor;
-import org.wardon.cooling.Compressor.Defrost;
 import org.wardon.cooling.Cooler;
 import org.wardon.enclosure.Enclosure;
 import org.wardon.enclosure.Gains;
@@ -16,45 +11,17 @@ import org.wardon.heat.ChamberRun;
  * sketches.
  */
 final class Averaged {
-    private static final double MINUTES = 60;
-
     private Averaged() {}
 
     static ChamberRun of(ChamberRun run) {
-        double heatersW = 0;
-        List<Cooler> coolers = new ArrayList<>();
-        for (Cooler cooler : run.coolers()) {
-            if (cooler instanceof Compressor unit && unit.defrost().isPresent()) {
-                Defrost defrost = unit.defrost().get();
-                double share = defrost.minutes() / (MINUTES * defrost.everyHours());
-                heatersW += share * defrost.heaterW();
-                coolers.add(resting(unit, share));
-            } else {
-                coolers.add(cooler);
-            }
-        }
-        return heatersW > 0
-                ? run.withCoolers(coolers).withEnclosure(warmed(run.enclosure(), heatersW))
-                : run.withCoolers(coolers);
-    }
-
-    private static Compressor resting(Compressor unit, double share) {
-        return new Compressor(
-                unit.ratedCapacityW() * (1 - share),
-                unit.ratedPowerW() * (1 - share),
-                unit.ratedAirC(),
-                unit.ratedOutdoorC(),
-                unit.fanW(),
-                unit.fanAlways(),
-                unit.coilUaWK(),
-                unit.airFlowM3s(),
-                unit.control(),
-                unit.minRunMinutes(),
-                unit.minRestMinutes(),
-                unit.condenserRiseK(),
-                unit.lowestC(),
-                Optional.empty(),
-                unit.dailyEnergyKWh());
+        double heatersW =
+                run.coolers().stream()
+                        .flatMap(cooler -> cooler.defrost().stream())
+                        .mapToDouble(defrost -> defrost.share() * defrost.heaterW())
+                        .sum();
+        ChamberRun even =
+                run.withCoolers(run.coolers().stream().map(Cooler::withDefrostSpread).toList());
+        return heatersW > 0 ? even.withEnclosure(warmed(run.enclosure(), heatersW)) : even;
     }
 
     private static Enclosure warmed(Enclosure built, double heatersW) {

@@ -50,7 +50,7 @@ final class ChamberFigures {
                 course.heat().removed() / J_PER_KWH,
                 energyKWh,
                 energyKWh * outcome.model().plan().prices().energyPerKWh(),
-                0,
+                course.waterUsedKg(),
                 co2,
                 ethylenePpm(),
                 course.balanceErrorPct());

@@ -5,6 +5,7 @@ import java.util.List;
 import java.util.OptionalDouble;
 import java.util.function.DoublePredicate;
 import org.wardon.air.Timeline;
+import org.wardon.cooling.Cooler;
 import org.wardon.cooling.Outage;
 import org.wardon.heat.Course;
 import org.wardon.heat.Hours;
@@ -16,9 +17,10 @@ import org.wardon.produce.Reason.Argument;
 /**
  * Whether a chamber holds its setting. Thresholds are our own rules and are told with the verdict:
  * after pull-down the hourly mean stays inside setting ± (band + 0.5 K) in 95 of 100 hours outside
- * outages and disturbed hours (without a thermostat: at or below setting + band); every lot reaches
- * seven-eighths cooling within max(24 h, 4.5 half-cooling times of its package); no lot already
- * cold rises more than 2 K through an arrival; no lot leaves its safe range.
+ * outages and disturbed hours (where the weather decides, as without coolers, with pads, wet walls
+ * and night air: at or below setting + band); every lot reaches seven-eighths cooling within max(24
+ * h, 4.5 half-cooling times of its package); no lot already cold rises more than 2 K through an
+ * arrival; no lot leaves its safe range.
  *
  * @param holds the verdict
  * @param hoursOutside hours outside the band after pull-down, outages and disturbed hours left out
@@ -105,9 +107,9 @@ record Holding(
         private boolean inside(double airC) {
             double set = chamber.setting().temperatureC();
             double band = chamber.setting().bandK();
-            return chamber.coolers().isEmpty()
-                    ? airC <= set + band
-                    : Math.abs(airC - set) <= band + AIR_ALLOWANCE_K;
+            return chamber.coolers().stream().anyMatch(Cooler::holdsBand)
+                    ? Math.abs(airC - set) <= band + AIR_ALLOWANCE_K
+                    : airC <= set + band;
         }
 
         /** When the air has been inside for three hours running: the start of those hours. */

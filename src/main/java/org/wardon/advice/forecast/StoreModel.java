@@ -8,6 +8,7 @@ import java.util.Optional;
 import java.util.OptionalDouble;
 import org.wardon.air.Timeline;
 import org.wardon.air.Weather;
+import org.wardon.cooling.Cooler;
 import org.wardon.cooling.Outage;
 import org.wardon.enclosure.Beyond;
 import org.wardon.enclosure.Enclosure;
@@ -224,17 +225,17 @@ final class StoreModel {
                         .orElse(false);
     }
 
-    /** Before the first pass every chamber is taken to stand at its setting. */
+    /** Before the first pass a chamber is taken to stand at its setting, or at outdoors. */
     private Map<String, AirSeries> startAir() {
         Map<String, AirSeries> air = new HashMap<>();
         for (ChamberPlan chamber : plan.chambers()) {
             air.put(
                     chamber.id(),
-                    chamber.coolers().isEmpty()
-                            ? AirSeries.outdoors(weather)
-                            : AirSeries.steady(
+                    chamber.coolers().stream().anyMatch(Cooler::startsAtSetting)
+                            ? AirSeries.steady(
                                     chamber.setting().temperatureC(),
-                                    chamber.setting().humidityPct() / 100));
+                                    chamber.setting().humidityPct() / 100)
+                            : AirSeries.outdoors(weather));
         }
         return air;
     }

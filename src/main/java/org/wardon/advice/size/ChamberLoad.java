@@ -8,6 +8,7 @@ import org.wardon.advice.size.DesignLoad.Term;
 import org.wardon.air.MoistAir;
 import org.wardon.cooling.Compressor;
 import org.wardon.cooling.Cooler;
+import org.wardon.cooling.Defrost;
 import org.wardon.enclosure.Beyond;
 import org.wardon.enclosure.Box;
 import org.wardon.enclosure.Enclosure;
@@ -244,6 +245,6 @@ public final class ChamberLoad {
     }
 
     private static double defrostW(Compressor unit) {
-        return unit.defrost().map(Compressor.Defrost::heaterW).orElse(0.0);
+        return unit.defrost().map(Defrost::heaterW).orElse(0.0);
     }
 }

@@ -3,11 +3,13 @@ package org.wardon.heat.network;
 import org.wardon.air.MoistAir;
 import org.wardon.air.SaturatedAir;
 import org.wardon.enclosure.DoorExchange;
+import org.wardon.heat.laws.FreeWater;
 import org.wardon.heat.solver.Tree;
 
 /**
  * Air that comes and goes: leakage and fresh air as steady flows of outdoor air, and the door by
- * the difference of densities. Equal masses of dry air pass each way.
+ * the difference of densities. Equal masses of dry air pass each way. Air that coolers blow in
+ * keeps that much leakage out, down to none. Coolers must have been asked before.
  */
 final class AirExchange implements Part {
     /** Flows: enthalpy by leakage, W. */
@@ -36,18 +38,26 @@ final class AirExchange implements Part {
     private static final double VAPOUR_VOLUME = 1.607858;
     private static final double SLOPE_OVER_S = 1;
 
+    /** The last of the leakage fades out over this share of it, to either side. */
+    private static final double FADES_OVER = 0.05;
+
     private final int flowAt;
     private final double pressurePa;
     private final double leakKgS;
     private final double freshKgS;
     private final Doorway doorway;
+    private final CoolerPart[] coolers;
     private boolean open;
     private double freeM3 = 1;
 
     private double door;
     private double doorByAirC;
     private double doorByRatio;
+    private double leak;
+    private double leakByAirC;
     private double toOutdoors;
+    private double toOutdoorsHeat;
+    private double toOutdoorsRatio;
     private double toBeyondHeat;
     private double toBeyondRatio;
 
@@ -67,12 +77,37 @@ final class AirExchange implements Part {
             double averagedOpenS,
             double openingsPerS) {}
 
-    AirExchange(int flowAt, double pressurePa, double leakKgS, double freshKgS, Doorway doorway) {
+    /** Steady flows of outdoor air with the door shut and no fan blowing in, kg/s. */
+    record Steady(double leakKgS, double freshKgS) {}
+
+    AirExchange(
+            int flowAt, double pressurePa, Steady steady, Doorway doorway, CoolerPart[] coolers) {
         this.flowAt = flowAt;
         this.pressurePa = pressurePa;
-        this.leakKgS = leakKgS;
-        this.freshKgS = freshKgS;
+        this.leakKgS = steady.leakKgS;
+        this.freshKgS = steady.freshKgS;
         this.doorway = doorway;
+        this.coolers = coolers.clone();
+    }
+
+    private double drivenKgS() {
+        double sum = 0;
+        for (CoolerPart cooler : coolers) {
+            sum += cooler.drivenKgS();
+        }
+        return sum;
+    }
+
+    /** Leakage left beside what coolers blow in, kg/s. */
+    private double leakKgS() {
+        return leakKgS > 0 ? FreeWater.positive(leakKgS - drivenKgS(), FADES_OVER * leakKgS) : 0;
+    }
+
+    /** Slope of the leakage left by what coolers blow in. */
+    private double leakSlope() {
+        return leakKgS > 0
+                ? -FreeWater.positiveSlope(leakKgS - drivenKgS(), FADES_OVER * leakKgS)
+                : 0;
     }
 
     /** Opens or shuts the door; where averaged, starts or ends its hours of use. */
@@ -125,15 +160,16 @@ final class AirExchange implements Part {
         double vapour = out.ratio - air.ratio;
         double doorHeat = through * (beyond.enthalpy() - air.enthalpy);
         double doorVapour = through * (beyond.ratio - air.ratio);
-        flows[flowAt + LEAK_HEAT] = leakKgS * heat;
-        flows[flowAt + LEAK_VAPOUR] = leakKgS * vapour;
+        double leaks = leakKgS();
+        flows[flowAt + LEAK_HEAT] = leaks * heat;
+        flows[flowAt + LEAK_VAPOUR] = leaks * vapour;
         flows[flowAt + FRESH_HEAT] = freshKgS * heat;
         flows[flowAt + FRESH_VAPOUR] = freshKgS * vapour;
         flows[flowAt + DOOR_HEAT] = doorHeat;
         flows[flowAt + DOOR_VAPOUR] = doorVapour;
-        flows[flowAt + EXCHANGED] = leakKgS + freshKgS + through;
-        rates[AirState.ENTHALPY] += (leakKgS + freshKgS) * heat + doorHeat;
-        rates[AirState.HUMIDITY] += (leakKgS + freshKgS) * vapour + doorVapour;
+        flows[flowAt + EXCHANGED] = leaks + freshKgS + through;
+        rates[AirState.ENTHALPY] += (leaks + freshKgS) * heat + doorHeat;
+        rates[AirState.HUMIDITY] += (leaks + freshKgS) * vapour + doorVapour;
     }
 
     @Override
@@ -154,7 +190,14 @@ final class AirExchange implements Part {
                                     - doorKgS(air.airC, air.ratio - w, beyond.airC, beyond.ratio))
                             / (2 * w);
         }
-        toOutdoors = leakKgS + freshKgS;
+        leak = leakKgS();
+        leakByAirC = 0;
+        for (CoolerPart cooler : coolers) {
+            leakByAirC += leakSlope() * cooler.drivenByAirC();
+        }
+        toOutdoors = leak + freshKgS;
+        toOutdoorsHeat = outside.outdoors.enthalpy() - air.enthalpy;
+        toOutdoorsRatio = outside.outdoors.ratio - air.ratio;
         toBeyondHeat = beyond.enthalpy() - air.enthalpy;
         toBeyondRatio = beyond.ratio - air.ratio;
         double byEnthalpy = doorByAirC * air.airByEnthalpy;
@@ -163,6 +206,12 @@ final class AirExchange implements Part {
         tree.hubByHub[1] += byRatio * toBeyondHeat / airKg;
         tree.hubByHub[2] += byEnthalpy * toBeyondRatio / airKg;
         tree.hubByHub[3] += (-toOutdoors - door + byRatio * toBeyondRatio) / airKg;
+        double leakByEnthalpy = leakByAirC * air.airByEnthalpy / airKg;
+        double leakByRatio = leakByAirC * air.airByRatio / airKg;
+        tree.hubByHub[0] += leakByEnthalpy * toOutdoorsHeat;
+        tree.hubByHub[1] += leakByRatio * toOutdoorsHeat;
+        tree.hubByHub[2] += leakByEnthalpy * toOutdoorsRatio;
+        tree.hubByHub[3] += leakByRatio * toOutdoorsRatio;
     }
 
     @Override
@@ -183,28 +232,35 @@ final class AirExchange implements Part {
                         : 0;
         double doorHeat = door * beyond.enthalpySlope() + doorSlope * toBeyondHeat;
         double doorVapour = door * beyond.ratioSlope + doorSlope * toBeyondRatio;
-        slope[flowAt + LEAK_HEAT] = leakKgS * heat;
-        slope[flowAt + LEAK_VAPOUR] = leakKgS * out.ratioSlope;
+        double leaks = 0;
+        for (CoolerPart cooler : coolers) {
+            leaks += leakSlope() * slope[cooler.flow(CoolerPart.EXCHANGED)];
+        }
+        slope[flowAt + LEAK_HEAT] = leak * heat + leaks * toOutdoorsHeat;
+        slope[flowAt + LEAK_VAPOUR] = leak * out.ratioSlope + leaks * toOutdoorsRatio;
         slope[flowAt + FRESH_HEAT] = freshKgS * heat;
         slope[flowAt + FRESH_VAPOUR] = freshKgS * out.ratioSlope;
         slope[flowAt + DOOR_HEAT] = doorHeat;
         slope[flowAt + DOOR_VAPOUR] = doorVapour;
-        slope[flowAt + EXCHANGED] = doorSlope;
-        rateSlope[AirState.ENTHALPY] += toOutdoors * heat + doorHeat;
-        rateSlope[AirState.HUMIDITY] += toOutdoors * out.ratioSlope + doorVapour;
+        slope[flowAt + EXCHANGED] = leaks + doorSlope;
+        rateSlope[AirState.ENTHALPY] += toOutdoors * heat + leaks * toOutdoorsHeat + doorHeat;
+        rateSlope[AirState.HUMIDITY] +=
+                toOutdoors * out.ratioSlope + leaks * toOutdoorsRatio + doorVapour;
     }
 
     @Override
     public void flowsAlong(AirState air, double[] v, double[] change) {
         double heat = -v[AirState.ENTHALPY];
         double vapour = -v[AirState.HUMIDITY];
-        double through = doorByAirC * air.airAlong(v) + doorByRatio * v[AirState.HUMIDITY];
-        change[flowAt + LEAK_HEAT] = leakKgS * heat;
-        change[flowAt + LEAK_VAPOUR] = leakKgS * vapour;
+        double airC = air.airAlong(v);
+        double through = doorByAirC * airC + doorByRatio * v[AirState.HUMIDITY];
+        double leaks = leakByAirC * airC;
+        change[flowAt + LEAK_HEAT] = leak * heat + leaks * toOutdoorsHeat;
+        change[flowAt + LEAK_VAPOUR] = leak * vapour + leaks * toOutdoorsRatio;
         change[flowAt + FRESH_HEAT] = freshKgS * heat;
         change[flowAt + FRESH_VAPOUR] = freshKgS * vapour;
         change[flowAt + DOOR_HEAT] = door * heat + through * toBeyondHeat;
         change[flowAt + DOOR_VAPOUR] = door * vapour + through * toBeyondRatio;
-        change[flowAt + EXCHANGED] = through;
+        change[flowAt + EXCHANGED] = leaks + through;
     }
 }

@@ -5,8 +5,6 @@ import java.util.Arrays;
 import java.util.List;
 import java.util.Optional;
 import org.wardon.air.MoistAir;
-import org.wardon.cooling.Compressor;
-import org.wardon.cooling.Cooler;
 import org.wardon.enclosure.Enclosure;
 import org.wardon.enclosure.Face;
 import org.wardon.enclosure.Leakage;
@@ -72,7 +70,7 @@ public final class ChamberNetwork implements TreeSystem {
                                 new StructurePart(tree, take(StructurePart.FLOWS), structureJK))
                         : Optional.empty();
         boolean unlimited = inputs.control() == NetworkInputs.Control.IDEAL;
-        coolers = unlimited ? new CoolerPart[0] : coolers();
+        coolers = unlimited ? new CoolerPart[0] : CoolerParts.of(tree, this::take, inputs);
         idealFlowAt = flows;
         ideal =
                 unlimited
@@ -136,26 +134,6 @@ public final class ChamberNetwork implements TreeSystem {
         return list.toArray(new FaceBranch[0]);
     }
 
-    private CoolerPart[] coolers() {
-        List<CoolerPart> list = new ArrayList<>();
-        int stage = 0;
-        for (Cooler cooler : inputs.coolers()) {
-            if (!(cooler instanceof Compressor unit)) {
-                throw new IllegalArgumentException(
-                        "cooler " + cooler.kind() + " is not built into the heat model");
-            }
-            Compressor asked = UnitTuning.of(unit, inputs);
-            list.add(
-                    new CoolerPart(
-                            tree,
-                            take(CoolerPart.FLOWS),
-                            asked.law(inputs.pressurePa()),
-                            UnitTuning.following(unit, asked, stage, inputs)));
-            stage++;
-        }
-        return list.toArray(new CoolerPart[0]);
-    }
-
     private AirExchange exchange() {
         Enclosure enclosure = inputs.enclosure();
         double factor = inputs.tuning().exchange();
@@ -166,9 +144,9 @@ public final class ChamberNetwork implements TreeSystem {
         return new AirExchange(
                 exchangeFlowAt,
                 inputs.pressurePa(),
-                leak * perM3,
-                fresh * perM3,
-                AirAround.doorway(inputs, factor));
+                new AirExchange.Steady(leak * perM3, fresh * perM3),
+                AirAround.doorway(inputs, factor),
+                coolers);
     }
 
     private LotBranch lot(Lot lot) {
@@ -274,6 +252,7 @@ public final class ChamberNetwork implements TreeSystem {
             face.steadyProfile(airC, y);
         }
         structure.ifPresent(s -> s.start(airC, y));
+        List.of(coolers).forEach(cooler -> cooler.start(y));
         for (LotBranch lot : lots) {
             lot.branch.activate(false);
         }
@@ -317,6 +296,19 @@ public final class ChamberNetwork implements TreeSystem {
      */
     public CoolerPart cooler(int i) {
         return coolers[i];
+    }
+
+    /**
+     * Returns how far a cooler is inside its own conditions for running, thermostat apart.
+     *
+     * @param i number of the cooler in the inputs
+     * @param t time, s
+     * @param y state
+     * @return K or percent of humidity, below 0 outside; infinite where it has no conditions
+     */
+    public double inside(int i, double t, double[] y) {
+        at(t);
+        return coolers[i].inside(airC(y), ratio(y), outside);
     }
 
     /**

@@ -1,9 +1,11 @@
 package org.wardon.heat.network;
 
 import org.wardon.air.MoistAir;
+import org.wardon.cooling.Cooler;
 import org.wardon.cooling.CoolerEffect;
 import org.wardon.cooling.CoolerInputs;
 import org.wardon.cooling.CoolerLaw;
+import org.wardon.cooling.Following;
 import org.wardon.cooling.Thermostat;
 import org.wardon.heat.solver.Branch;
 import org.wardon.heat.solver.Tree;
@@ -28,25 +30,29 @@ public final class CoolerPart implements Part {
     /** Heater of a defrost, W. */
     static final int DEFROST = 4;
 
-    /** Running share. */
+    /** Share of the time it really runs. */
     static final int RUN = 5;
 
-    static final int FLOWS = 6;
+    /** Outdoor air driven through the chamber, kg dry air/s. */
+    static final int EXCHANGED = 6;
+
+    /** Water used up, kg/s. */
+    static final int WATER = 7;
+
+    static final int FLOWS = 8;
 
     private static final double COLDEST_C = -45;
     private static final double WARMEST_C = 55;
     private static final double WETTEST = 0.08;
-    private static final double SHIFT_K = 0.01;
+    private static final double SHIFT_S = 10;
 
-    /** Error of an own state that counts as 1: water on a coil, kg. */
-    private static final double OWN_TOLERANCE = 0.005;
-
+    private final Cooler unit;
     private final CoolerLaw law;
     private final int flowAt;
     private final int own;
+    private final boolean follows;
     private final boolean modulating;
-    private final double followedC;
-    private final double bandK;
+    private final Band band;
     private final double fanAlwaysW;
     private final Branch[] branch;
     private final CoolerInputs in;
@@ -57,35 +63,48 @@ public final class CoolerPart implements Part {
     private double defrostW;
     private boolean defrosting;
 
-    private double removedByAirC;
-    private double removedByRatio;
-    private double vapourByAirC;
-    private double vapourByRatio;
-    private double fanByAirC;
-    private double electricByAirC;
-    private double electricByRatio;
     private double runByAirC;
-    private final double[] vapourByOwn;
-    private final double[] removedByOwn;
 
-    /** What a cooler follows. {@code fanAlwaysW} is the fan that runs through rest and defrost. */
-    record Following(boolean modulating, double followedC, double bandK, double fanAlwaysW) {}
+    /** Slopes of the flows at the start of a step: by air, by humidity ratio, by own states. */
+    private final double[] byAirC = new double[FLOWS];
 
-    CoolerPart(Tree tree, int flowAt, CoolerLaw law, Following following) {
+    private final double[] byRatio = new double[FLOWS];
+    private final double[] byOwn;
+
+    /** The air it keeps: a temperature, and half a band to either side. */
+    record Band(double followedC, double bandK) {}
+
+    CoolerPart(Tree tree, int flowAt, Cooler unit, CoolerLaw law, Band band) {
+        this.unit = unit;
         this.law = law;
         this.flowAt = flowAt;
         this.own = law.ownStates();
-        this.modulating = following.modulating;
-        this.followedC = following.followedC;
-        this.bandK = following.bandK;
-        this.fanAlwaysW = following.fanAlwaysW;
+        this.follows = unit.following().isPresent();
+        this.modulating = unit.following().map(Following::modulating).orElse(false);
+        this.fanAlwaysW = unit.following().map(Following::fanAlwaysW).orElse(0.0);
+        this.band = band;
         this.branch = own > 0 ? new Branch[] {tree.addBranch(0, own)} : new Branch[0];
         this.in = new CoolerInputs(own);
         in.airC = Double.NaN; // unlike anything it will be asked first
         this.effect = new CoolerEffect(own);
         this.shifted = new CoolerEffect(own);
-        this.vapourByOwn = new double[own];
-        this.removedByOwn = new double[own];
+        this.byOwn = new double[FLOWS * own];
+    }
+
+    /** Writes its own states as they are at the start of a run. */
+    void start(double[] y) {
+        for (int i = 0; i < own; i++) {
+            y[branch[0].blockAt(i)] = law.ownAtStart(i);
+        }
+    }
+
+    /**
+     * Returns the cooler it was built from, as the run asked for it.
+     *
+     * @return the record
+     */
+    public Cooler unit() {
+        return unit;
     }
 
     /**
@@ -94,7 +113,7 @@ public final class CoolerPart implements Part {
      * @param available true where there is
      */
     public void power(boolean available) {
-        powered = available;
+        powered = available || !unit.needsPower();
     }
 
     /**
@@ -116,12 +135,12 @@ public final class CoolerPart implements Part {
     }
 
     /**
-     * Returns whether it follows the air within the band.
+     * Returns whether a thermostat switches it on and off.
      *
-     * @return false where it is switched on and off
+     * @return false where it follows the air within the band, or always acts
      */
-    public boolean modulating() {
-        return modulating;
+    public boolean switched() {
+        return follows && !modulating;
     }
 
     /**
@@ -130,7 +149,7 @@ public final class CoolerPart implements Part {
      * @return °C
      */
     public double followedC() {
-        return followedC;
+        return band.followedC;
     }
 
     /**
@@ -139,7 +158,7 @@ public final class CoolerPart implements Part {
      * @return K
      */
     public double bandK() {
-        return bandK;
+        return band.bandK;
     }
 
     /**
@@ -163,7 +182,7 @@ public final class CoolerPart implements Part {
     }
 
     /**
-     * Returns whether it has power.
+     * Returns whether it has the power it needs.
      *
      * @return true where it has
      */
@@ -182,7 +201,7 @@ public final class CoolerPart implements Part {
 
     void tolerances(double[] tolerances) {
         for (int i = 0; i < own; i++) {
-            tolerances[branch[0].blockAt(i)] = OWN_TOLERANCE;
+            tolerances[branch[0].blockAt(i)] = law.ownTolerance(i);
         }
     }
 
@@ -190,18 +209,25 @@ public final class CoolerPart implements Part {
         return flowAt + kind;
     }
 
+    /** Outdoor air it drove in when it was last asked, kg dry air/s. */
+    double drivenKgS() {
+        return effect.exchangeKgS;
+    }
+
+    /** The same by air temperature, where the network was linearised last, kg/(s K). */
+    double drivenByAirC() {
+        return byAirC[EXCHANGED];
+    }
+
     /**
-     * Returns the water on its coil.
+     * Returns an own state, such as the water on its coil.
      *
-     * @param y state
-     * @return kg
+     * @param i number of the state
+     * @param y state of the network
+     * @return in its unit
      */
-    public double waterKg(double[] y) {
-        double sum = 0;
-        for (int i = 0; i < own; i++) {
-            sum += y[branch[0].blockAt(i)];
-        }
-        return sum;
+    public double own(int i, double[] y) {
+        return y[branch[0].blockAt(i)];
     }
 
     private double run(double airC) {
@@ -209,18 +235,15 @@ public final class CoolerPart implements Part {
             return 0;
         }
         if (modulating) {
-            return Thermostat.modulatedShare(airC, followedC, bandK);
+            return Thermostat.modulatedShare(airC, band.followedC, band.bandK);
         }
-        return on ? 1 : 0;
+        return on || !follows ? 1 : 0;
     }
 
-    private void ask(AirState air, Outside outside, double[] y) {
-        // A refused step may ask beyond what a coil knows; the parts around it then refuse it.
-        double airC = air.airC > COLDEST_C ? Math.min(air.airC, WARMEST_C) : COLDEST_C;
-        double ratio = air.ratio > 0 ? Math.min(air.ratio, WETTEST) : 0;
+    /** Tells the scratch what it meets; returns whether it has met just that before. */
+    private boolean meets(double airC, double ratio, Outside outside, double run) {
         double outdoorC = outside.outdoors.airC;
         double outdoorRatio = outside.outdoors.ratio;
-        double run = run(air.airC);
         boolean asBefore =
                 airC == in.airC
                         && ratio == in.humidityRatio
@@ -232,6 +255,14 @@ public final class CoolerPart implements Part {
         in.outdoorC = outdoorC;
         in.outdoorHumidityRatio = outdoorRatio;
         in.run = run;
+        return asBefore;
+    }
+
+    private void ask(AirState air, Outside outside, double[] y) {
+        // A refused step may ask beyond what a coil knows; the parts around it then refuse it.
+        double airC = air.airC > COLDEST_C ? Math.min(air.airC, WARMEST_C) : COLDEST_C;
+        double ratio = air.ratio > 0 ? Math.min(air.ratio, WETTEST) : 0;
+        boolean asBefore = meets(airC, ratio, outside, run(air.airC));
         for (int i = 0; i < own; i++) {
             double state = y[branch[0].blockAt(i)];
             asBefore &= state == in.own[i];
@@ -240,6 +271,17 @@ public final class CoolerPart implements Part {
         if (!asBefore) {
             law.effect(in, effect);
         }
+    }
+
+    /** How far it is inside its own conditions, K or percent; infinite where it has none. */
+    double inside(double airC, double ratio, Outside outside) {
+        if (!law.conditional()) {
+            return Double.POSITIVE_INFINITY;
+        }
+        meets(airC, ratio, outside, on ? 1 : 0);
+        double inside = law.inside(in, on, shifted);
+        in.airC = Double.NaN; // what it did last answers to other air
+        return inside;
     }
 
     private double fanW() {
@@ -259,7 +301,9 @@ public final class CoolerPart implements Part {
         flows[flowAt + ELECTRIC] = effect.electricW;
         flows[flowAt + FAN] = fanW();
         flows[flowAt + DEFROST] = heater;
-        flows[flowAt + RUN] = in.run;
+        flows[flowAt + RUN] = effect.ran;
+        flows[flowAt + EXCHANGED] = effect.exchangeKgS;
+        flows[flowAt + WATER] = effect.waterKgS;
         rates[AirState.ENTHALPY] += fanW() + heater - removed;
         rates[AirState.HUMIDITY] -= effect.vapourKgS;
         for (int i = 0; i < own; i++) {
@@ -270,67 +314,87 @@ public final class CoolerPart implements Part {
     @Override
     public void linearise(AirState air, Outside outside, double airKg, double[] y, Tree tree) {
         ask(air, outside, y);
-        runByAirC =
-                modulating && powered && !defrosting
-                        ? Thermostat.modulatedSlopePerK(air.airC, followedC, bandK)
-                        : 0;
-        double enthalpy = MoistAir.vapourEnthalpyJkg(air.airC);
-        vapourByAirC = effect.vapourByAirC + runByAirC * effect.vapourByRun;
-        vapourByRatio = effect.vapourByHumidity;
-        removedByAirC =
-                effect.sensibleByAirC
-                        + runByAirC * effect.sensibleByRun
-                        + vapourByAirC * enthalpy
-                        + effect.vapourKgS * MoistAir.VAPOUR_J_KG_K;
-        removedByRatio = effect.sensibleByHumidity + vapourByRatio * enthalpy;
-        fanByAirC = in.run > 0 ? runByAirC * (effect.fanW - fanAlwaysW) / in.run : 0;
-        electricByAirC = effect.electricByAirC + runByAirC * effect.electricByRun;
-        electricByRatio = effect.electricByHumidity;
-        double heatByAirC = fanByAirC - removedByAirC;
+        slopes(air.airC);
+        double heatByAirC = byAirC[FAN] - byAirC[REMOVED];
         tree.hubByHub[0] += heatByAirC * air.airByEnthalpy / airKg;
-        tree.hubByHub[1] += (heatByAirC * air.airByRatio - removedByRatio) / airKg;
-        tree.hubByHub[2] -= vapourByAirC * air.airByEnthalpy / airKg;
-        tree.hubByHub[3] -= (vapourByAirC * air.airByRatio + vapourByRatio) / airKg;
-        ownJ(air, airKg, enthalpy);
+        tree.hubByHub[1] += (heatByAirC * air.airByRatio - byRatio[REMOVED]) / airKg;
+        tree.hubByHub[2] -= byAirC[VAPOUR] * air.airByEnthalpy / airKg;
+        tree.hubByHub[3] -= (byAirC[VAPOUR] * air.airByRatio + byRatio[VAPOUR]) / airKg;
+        ownJ(air, airKg);
     }
 
-    private void ownJ(AirState air, double airKg, double enthalpy) {
+    private void slopes(double airC) {
+        runByAirC =
+                modulating && powered && !defrosting
+                        ? Thermostat.modulatedSlopePerK(airC, band.followedC, band.bandK)
+                        : 0;
+        double enthalpy = MoistAir.vapourEnthalpyJkg(airC);
+        byAirC[VAPOUR] = effect.vapourByAirC + runByAirC * effect.vapourByRun;
+        byRatio[VAPOUR] = effect.vapourByHumidity;
+        byAirC[REMOVED] =
+                effect.sensibleByAirC
+                        + runByAirC * effect.sensibleByRun
+                        + byAirC[VAPOUR] * enthalpy
+                        + effect.vapourKgS * MoistAir.VAPOUR_J_KG_K;
+        byRatio[REMOVED] = effect.sensibleByHumidity + byRatio[VAPOUR] * enthalpy;
+        byAirC[ELECTRIC] = effect.electricByAirC + runByAirC * effect.electricByRun;
+        byRatio[ELECTRIC] = effect.electricByHumidity;
+        double ranByAirC = effect.ranByAirC + runByAirC * effect.ranByRun;
+        double perRan = effect.ran > 0 ? ranByAirC / effect.ran : 0;
+        byAirC[RUN] = ranByAirC;
+        byAirC[FAN] = perRan * (effect.fanW - fanAlwaysW);
+        byAirC[EXCHANGED] = perRan * effect.exchangeKgS;
+        byAirC[WATER] = perRan * effect.waterKgS;
+        for (int i = 0; i < own; i++) {
+            byOwn[VAPOUR * own + i] = effect.vapourByOwn[i];
+            byOwn[REMOVED * own + i] = effect.sensibleByOwn[i] + effect.vapourByOwn[i] * enthalpy;
+            byOwn[ELECTRIC * own + i] = effect.electricByOwn[i];
+        }
+    }
+
+    private void ownJ(AirState air, double airKg) {
         for (int i = 0; i < own; i++) {
             Branch b = branch[0];
             b.inner[i * own + i] = effect.ownRateByOwn[i];
-            b.byHub[i * 2] = effect.ownRateByAirC[i] * air.airByEnthalpy;
-            b.byHub[i * 2 + 1] =
-                    effect.ownRateByAirC[i] * air.airByRatio + effect.ownRateByHumidity[i];
-            vapourByOwn[i] = effect.vapourByOwn[i];
-            removedByOwn[i] = effect.sensibleByOwn[i] + vapourByOwn[i] * enthalpy;
-            b.onHub[i] = -removedByOwn[i] / airKg;
-            b.onHub[own + i] = -vapourByOwn[i] / airKg;
+            double byAir = effect.ownRateByAirC[i] + runByAirC * effect.ownRateByRun[i];
+            b.byHub[i * 2] = byAir * air.airByEnthalpy;
+            b.byHub[i * 2 + 1] = byAir * air.airByRatio + effect.ownRateByHumidity[i];
+            b.onHub[i] = -byOwn[REMOVED * own + i] / airKg;
+            b.onHub[own + i] = -byOwn[VAPOUR * own + i] / airKg;
         }
     }
 
     @Override
     public void timeSlope(
             AirState air, Outside outside, double[] y, double[] rateSlope, double[] slope) {
-        if (in.run <= 0) {
+        if (in.run <= 0 && own == 0) {
             return;
         }
+        Outside.Place out = outside.outdoors;
         double outdoorC = in.outdoorC;
-        in.outdoorC = outdoorC + SHIFT_K;
+        double outdoorRatio = in.outdoorHumidityRatio;
+        in.outdoorC = outdoorC + SHIFT_S * out.airSlope;
+        in.outdoorHumidityRatio = outdoorRatio + SHIFT_S * out.ratioSlope;
         shifted.evaporatingC = effect.evaporatingC;
         law.effect(in, shifted);
         in.outdoorC = outdoorC;
-        double a = outside.outdoors.airSlope / SHIFT_K;
-        double vapour = a * (shifted.vapourKgS - effect.vapourKgS);
+        in.outdoorHumidityRatio = outdoorRatio;
+        double vapour = (shifted.vapourKgS - effect.vapourKgS) / SHIFT_S;
         double removed =
-                a * (shifted.sensibleW - effect.sensibleW)
+                (shifted.sensibleW - effect.sensibleW) / SHIFT_S
                         + vapour * MoistAir.vapourEnthalpyJkg(air.airC);
+        double fan = powered && !defrosting ? (shifted.fanW - effect.fanW) / SHIFT_S : 0;
         slope[flowAt + REMOVED] = removed;
         slope[flowAt + VAPOUR] = vapour;
-        slope[flowAt + ELECTRIC] = a * (shifted.electricW - effect.electricW);
-        rateSlope[AirState.ENTHALPY] -= removed;
+        slope[flowAt + ELECTRIC] = (shifted.electricW - effect.electricW) / SHIFT_S;
+        slope[flowAt + FAN] = fan;
+        slope[flowAt + RUN] = (shifted.ran - effect.ran) / SHIFT_S;
+        slope[flowAt + EXCHANGED] = (shifted.exchangeKgS - effect.exchangeKgS) / SHIFT_S;
+        slope[flowAt + WATER] = (shifted.waterKgS - effect.waterKgS) / SHIFT_S;
+        rateSlope[AirState.ENTHALPY] += fan - removed;
         rateSlope[AirState.HUMIDITY] -= vapour;
         for (int i = 0; i < own; i++) {
-            rateSlope[branch[0].blockAt(i)] += a * (shifted.ownRate[i] - effect.ownRate[i]);
+            rateSlope[branch[0].blockAt(i)] += (shifted.ownRate[i] - effect.ownRate[i]) / SHIFT_S;
         }
     }
 
@@ -338,17 +402,12 @@ public final class CoolerPart implements Part {
     public void flowsAlong(AirState air, double[] v, double[] change) {
         double airC = air.airAlong(v);
         double ratio = v[AirState.HUMIDITY];
-        double vapour = vapourByAirC * airC + vapourByRatio * ratio;
-        double removed = removedByAirC * airC + removedByRatio * ratio;
-        for (int i = 0; i < own; i++) {
-            double water = v[branch[0].blockAt(i)];
-            vapour += vapourByOwn[i] * water;
-            removed += removedByOwn[i] * water;
+        for (int kind = 0; kind < FLOWS; kind++) {
+            double sum = byAirC[kind] * airC + byRatio[kind] * ratio;
+            for (int i = 0; i < own; i++) {
+                sum += byOwn[kind * own + i] * v[branch[0].blockAt(i)];
+            }
+            change[flowAt + kind] = sum;
         }
-        change[flowAt + REMOVED] = removed;
-        change[flowAt + VAPOUR] = vapour;
-        change[flowAt + ELECTRIC] = electricByAirC * airC + electricByRatio * ratio;
-        change[flowAt + FAN] = fanByAirC * airC;
-        change[flowAt + RUN] = runByAirC * airC;
     }
 }

@@ -167,13 +167,13 @@ public final class Terms {
     }
 
     /**
-     * Dry air exchanged by leakage, fresh air and door.
+     * Dry air exchanged by leakage, fresh air, door and coolers that blow outdoor air in.
      *
      * @param totals integrals of the flows
      * @return kg
      */
     public double exchanged(double[] totals) {
-        return totals[exchangeAt + AirExchange.EXCHANGED];
+        return totals[exchangeAt + AirExchange.EXCHANGED] + coolers(totals, CoolerPart.EXCHANGED);
     }
 
     /**
@@ -303,12 +303,55 @@ public final class Terms {
     }
 
     /**
-     * Time the first cooler ran, weighted by its share.
+     * Water used up by coolers.
      *
      * @param totals integrals of the flows
-     * @return s; 0 without a cooler
+     * @return kg
      */
-    public double ranS(double[] totals) {
-        return coolers.length == 0 ? 0 : totals[coolers[0].flow(CoolerPart.RUN)];
+    public double waterUsed(double[] totals) {
+        return coolers(totals, CoolerPart.WATER);
     }
+
+    /**
+     * What one cooler did.
+     *
+     * @param i number of the cooler
+     * @param totals integrals of the flows
+     * @return the sums
+     */
+    public OfCooler cooler(int i, double[] totals) {
+        CoolerPart cooler = coolers[i];
+        return new OfCooler(
+                totals[cooler.flow(CoolerPart.RUN)],
+                totals[cooler.flow(CoolerPart.REMOVED)],
+                electricity(cooler, totals),
+                totals[cooler.flow(CoolerPart.WATER)]);
+    }
+
+    /**
+     * Electricity of one cooler, its fan and its defrost.
+     *
+     * @param i number of the cooler
+     * @param totals integrals of the flows
+     * @return J
+     */
+    public double electricity(int i, double[] totals) {
+        return electricity(coolers[i], totals);
+    }
+
+    private static double electricity(CoolerPart cooler, double[] totals) {
+        return totals[cooler.flow(CoolerPart.ELECTRIC)]
+                + totals[cooler.flow(CoolerPart.FAN)]
+                + totals[cooler.flow(CoolerPart.DEFROST)];
+    }
+
+    /**
+     * Sums of one cooler.
+     *
+     * @param ranS time it ran, weighted by its share, s
+     * @param removedJ enthalpy taken from the air, J
+     * @param electricityJ electricity, fan and defrost included, J
+     * @param waterKg water used up, kg
+     */
+    public record OfCooler(double ranS, double removedJ, double electricityJ, double waterKg) {}
 }

@@ -15,6 +15,7 @@ import java.util.regex.Matcher;
 import java.util.regex.Pattern;
 import org.junit.jupiter.api.Test;
 import org.wardon.cooling.Compressor;
+import org.wardon.cooling.Control;
 import org.wardon.cooling.CoolerCautions;
 import org.wardon.cooling.Setting;
 import org.wardon.files.forecast.Quantiles;
@@ -143,7 +144,7 @@ class WordsTest {
                         false,
                         150,
                         0.6,
-                        Compressor.Control.ON_OFF,
+                        Control.ON_OFF,
                         5,
                         5,
                         3,

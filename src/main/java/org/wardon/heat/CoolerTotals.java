@@ -1,0 +1,13 @@
+package org.wardon.heat;
+
+/**
+ * What one cooler did in a run.
+ *
+ * @param kind kind, as a plan names it
+ * @param ranS time it ran, weighted by its share, s
+ * @param removedJ enthalpy taken from the air, J
+ * @param electricityJ electricity, fan and defrost included, J
+ * @param waterKg water used up, kg
+ */
+public record CoolerTotals(
+        String kind, double ranS, double removedJ, double electricityJ, double waterKg) {}
