@@ -4,6 +4,8 @@ import java.util.ArrayList;
 import java.util.Comparator;
 import java.util.List;
 import java.util.Locale;
+import java.util.Objects;
+import org.jspecify.annotations.Nullable;
 import org.wardon.cooling.CoolerEffect;
 import org.wardon.cooling.Defrost;
 import org.wardon.errors.Progress;
@@ -53,6 +55,9 @@ final class ChamberRunner implements Integrator.StepListener {
     private final Spans wetFaces;
     private final Spans icing;
     private double[] y;
+    private double now;
+    private int hour;
+    private final @Nullable LotState[] carried;
     private int nextEdge;
     private boolean powered = true;
     private boolean awaitsFirstOpening;
@@ -82,8 +87,10 @@ final class ChamberRunner implements Integrator.StepListener {
         int rows = RunCompiler.hours(run) + 2;
         hours = new HourRecorder(network, rows);
         lots = new LotRecorder[run.stays().size()];
+        carried = new LotState[lots.length];
         for (int i = 0; i < lots.length; i++) {
             lots[i] = new LotRecorder(run.stays().get(i), network.lot(i), rows + 1);
+            carried[i] = run.stays().get(i).passage().as().orElse(null);
         }
         edges = Schedule.of(run);
         usedS = Schedule.useS(run);
@@ -98,26 +105,62 @@ final class ChamberRunner implements Integrator.StepListener {
         startAirKg = network.airKg() * network.ratio(y);
     }
 
+    /** Compiles a run; it stands at its start. */
+    static ChamberRunner of(ChamberRun run, Accuracy accuracy, boolean plain) {
+        ChamberNetwork network = RunCompiler.network(run, plain);
+        double[] start = WarmUp.start(run, network, accuracy, plain);
+        return new ChamberRunner(run, network, start, accuracy);
+    }
+
     /** Runs to the end. */
     Course run(Progress progress) {
-        double t = 0;
-        int hour = 0;
-        passEdges(t);
-        while (t < run.durationS()) {
-            double hourEnd = Math.min((hour + 1) * 3600.0, run.durationS());
-            double until = Math.min(hourEnd, Math.min(nextEdgeS(), thermostats.nextUnlock(t)));
-            until = Math.min(until, budget.nextCheck(t, totals));
-            t = advance(t, until);
-            passEdges(t);
-            budget.check(t, totals);
-            if (t >= hourEnd) {
-                hour++;
-                network.hour(hour);
-                endHour(t);
-                progress.at("heat", t / run.durationS());
+        goTo(run.durationS(), progress);
+        return finish();
+    }
+
+    /** Goes on to a time of the run and stands there before anything that changes at it. */
+    void goTo(double stopS, Progress progress) {
+        while (now < stopS) {
+            settle();
+            double until = Math.min(stopS, Math.min(hourEndS(), nextEdgeS()));
+            until = Math.min(until, thermostats.nextUnlock(now));
+            until = Math.min(until, budget.nextCheck(now, totals));
+            now = advance(now, until);
+            if (now >= hourEndS()) {
+                progress.at("heat", now / run.durationS());
             }
         }
+    }
+
+    /** Lets pass what changes at the time it stands at, and ends the hour where it is over. */
+    private void settle() {
+        passEdges(now);
+        budget.check(now, totals);
+        if (now >= hourEndS()) {
+            hour++;
+            network.hour(hour);
+            endHour(now);
+        }
+    }
+
+    private double hourEndS() {
+        return Math.min((hour + 1) * 3600.0, run.durationS());
+    }
+
+    /** Closes the books at the end of the run, to which it must have gone. */
+    Course finish() {
+        settle();
         return course();
+    }
+
+    /** How a lot is now, to be carried to another chamber. */
+    LotState carryOut(int lot) {
+        return lots[lot].state(y, totals);
+    }
+
+    /** Tells how a lot will be when it is carried in. */
+    void carryIn(int lot, LotState state) {
+        carried[lot] = state;
     }
 
     private double nextEdgeS() {
@@ -309,8 +352,14 @@ final class ChamberRunner implements Integrator.StepListener {
         LotBranch lot = network.lot(i);
         boolean fresh = stay.freshUntilS() > t;
         lot.breathe(fresh ? stay.lot().respiration().fresh() : stay.lot().respiration());
-        lot.arrive(stay.pulpC(), stay.surfaceWaterKg(), network.ratio(y), y);
-        lots[i].arrives(t, y, totals);
+        if (stay.passage().from().isPresent()) {
+            LotState state = Objects.requireNonNull(carried[i], "it runs with where it came from");
+            state.into(lot, y);
+            lots[i].carriedIn(t, y, totals, state.massKg());
+        } else {
+            lot.arrive(stay.pulpC(), stay.surfaceWaterKg(), network.ratio(y), y);
+            lots[i].arrives(t, y, totals);
+        }
         changeVolume();
         restart(edge);
     }
@@ -320,6 +369,9 @@ final class ChamberRunner implements Integrator.StepListener {
         lots[i].stepped(t, y, totals);
         lots[i].row(t, y, totals);
         lots[i].close(y, totals);
+        if (run.stays().get(i).carriedOn()) {
+            lots[i].carriedOff(t, y, totals);
+        }
         lastRespiration = respirationJ();
         network.lot(i).give(false);
         changeVolume();

@@ -1,10 +1,10 @@
 package org.wardon.heat;
 
+import java.util.List;
 import org.wardon.air.Site;
 import org.wardon.air.StandardAtmosphere;
 import org.wardon.errors.Progress;
 import org.wardon.errors.Require;
-import org.wardon.heat.network.ChamberNetwork;
 import org.wardon.heat.network.LotInGivenAir;
 
 /** The heat and moisture model: runs a chamber, or a lot in given air. */
@@ -25,9 +25,19 @@ public final class HeatModel {
     }
 
     static Course run(ChamberRun run, Progress progress, Accuracy accuracy, boolean plain) {
-        ChamberNetwork network = RunCompiler.network(run, plain);
-        double[] start = WarmUp.start(run, network, accuracy, plain);
-        return new ChamberRunner(run, network, start, accuracy).run(progress);
+        return ChamberRunner.of(run, accuracy, plain).run(progress);
+    }
+
+    /**
+     * Runs the chambers of a store, which may carry lots to each other.
+     *
+     * @param runs the chambers, of one span and one site; a lot that is carried on stands in both
+     * @return what happened, in the order of the runs
+     * @throws org.wardon.errors.RunStopped where a state cannot be
+     * @throws IllegalArgumentException where a lot is carried to where no such lot comes in
+     */
+    public static List<Course> runTogether(List<ChamberRun> runs) {
+        return TogetherRun.of(runs, Accuracy.USUAL);
     }
 
     /**

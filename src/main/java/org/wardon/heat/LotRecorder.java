@@ -5,6 +5,7 @@ import java.util.EnumMap;
 import java.util.List;
 import java.util.Map;
 import java.util.Objects;
+import java.util.Optional;
 import org.wardon.heat.network.LotBranch;
 import org.wardon.lots.BurntSugar;
 import org.wardon.lots.LotHistory;
@@ -31,7 +32,9 @@ final class LotRecorder {
     private double startPackageJ;
     private double startPackageKg;
     private double startWaterKg;
+    private double startMassKg;
     private boolean closed;
+    private Optional<LotState> carriedOut = Optional.empty();
     private double packageGaveJ;
     private double packageGaveKg;
     private double wetFromS = Double.NaN;
@@ -42,7 +45,8 @@ final class LotRecorder {
     LotRecorder(Stay stay, LotBranch lot, int mostRows) {
         this.stay = stay;
         this.lot = lot;
-        this.nothing = new LotTotals(0, 0, 0, 0, stay.lot().massKg());
+        this.startMassKg = stay.lot().massKg();
+        this.nothing = new LotTotals(0, 0, 0, 0, startMassKg);
         this.totals = nothing;
         for (LotCourse.Column column : LotCourse.Column.values()) {
             rows.put(column, new double[mostRows]);
@@ -62,6 +66,25 @@ final class LotRecorder {
         row(t, y, integrals);
     }
 
+    /** A lot carried in from another chamber, with what it weighs now. */
+    void carriedIn(double t, double[] y, double[] integrals, double massKg) {
+        startMassKg = massKg;
+        arrives(t, y, integrals);
+    }
+
+    /** How the lot is now, to be carried on. */
+    LotState state(double[] y, double[] integrals) {
+        return new LotState(lot, y, massKg(y, integrals));
+    }
+
+    /** The lot is gone to another chamber, where it is written down from now on. */
+    void carriedOff(double t, double[] y, double[] integrals) {
+        carriedOut = Optional.of(state(y, integrals));
+        if (!Double.isNaN(wetFromS)) {
+            endWetSpan(t);
+        }
+    }
+
     /** Closes the account: the lot leaves, or the run ends. */
     void close(double[] y, double[] integrals) {
         if (!present()) {
@@ -76,8 +99,8 @@ final class LotRecorder {
                         lot.respirationJ(integrals),
                         fieldHeat,
                         lot.evaporatedKg(integrals),
-                        stay.lot().massKg() - massKg(y, integrals),
-                        stay.lot().massKg());
+                        startMassKg - massKg(y, integrals),
+                        startMassKg);
     }
 
     /** Tissue and sugar left, free water apart. */
@@ -85,11 +108,11 @@ final class LotRecorder {
         double co2 = lot.respirationJ(integrals) / BurntSugar.JOULE_PER_KG_CO2;
         double burnt = co2 * (BurntSugar.GLUCOSE_KG_PER_KG_CO2 - BurntSugar.WATER_KG_PER_KG_CO2);
         double water = lot.evaporatedKg(integrals) + lot.waterKg(y) - startWaterKg;
-        return stay.lot().massKg() - burnt - water;
+        return startMassKg - burnt - water;
     }
 
     void stepped(double t, double[] y, double[] integrals) {
-        if (arrivedS == Double.POSITIVE_INFINITY) {
+        if (arrivedS == Double.POSITIVE_INFINITY || carriedOut.isPresent()) {
             return;
         }
         boolean wet = lot.wetShare(y) > WET_SHARE;
@@ -111,7 +134,7 @@ final class LotRecorder {
 
     /** Writes an hourly row, and a sample where none stands there yet. */
     void row(double t, double[] y, double[] integrals) {
-        if (arrivedS == Double.POSITIVE_INFINITY) {
+        if (arrivedS == Double.POSITIVE_INFINITY || carriedOut.isPresent()) {
             return;
         }
         if (t > lastRowS) {
@@ -167,6 +190,6 @@ final class LotRecorder {
     }
 
     LotCourse course() {
-        return new LotCourse(stay, history.build(), rows, size, totals);
+        return new LotCourse(stay, history.build(), rows, size, totals, carriedOut);
     }
 }

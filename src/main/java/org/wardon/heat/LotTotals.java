@@ -15,6 +15,16 @@ public record LotTotals(
         double evaporatedKg,
         double massLostKg,
         double massAtArrivalKg) {
+    /** What added up in this place and then in another. */
+    LotTotals and(LotTotals next) {
+        return new LotTotals(
+                respirationJ + next.respirationJ,
+                fieldHeatJ + next.fieldHeatJ,
+                evaporatedKg + next.evaporatedKg,
+                massLostKg + next.massLostKg,
+                massAtArrivalKg);
+    }
+
     /**
      * Returns the loss of weight.
      *

@@ -173,6 +173,37 @@ public final class LotHistory {
         return b.build();
     }
 
+    /**
+     * Returns this history carried on by another.
+     *
+     * @param next what comes after; of it the samples behind the end of this one are taken
+     * @return the joined history
+     */
+    public LotHistory then(LotHistory next) {
+        Builder b = new Builder();
+        copy(this, Double.NEGATIVE_INFINITY, b);
+        copy(next, timeS[size() - 1], b);
+        return b.build();
+    }
+
+    private static void copy(LotHistory h, double afterS, Builder b) {
+        for (int i = 0; i < h.size(); i++) {
+            if (h.timeS[i] > afterS) {
+                b.add(
+                        h.timeS[i],
+                        h.meanC[i],
+                        h.surfaceC[i],
+                        h.coldestC[i],
+                        h.humidity[i],
+                        h.ethylenePpm[i],
+                        h.wet[i]);
+                if (h.massKg.isPresent()) {
+                    b.mass(h.massKg.get()[i]);
+                }
+            }
+        }
+    }
+
     /** Collects samples in order of time. */
     public static final class Builder {
         private double[] timeS = new double[64];

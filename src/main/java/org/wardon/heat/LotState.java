@@ -1,0 +1,31 @@
+package org.wardon.heat;
+
+import org.wardon.heat.network.LotBranch;
+import org.wardon.heat.network.LotNodes;
+
+/**
+ * A lot at the moment it is carried from one chamber to another: each shell's temperature, the free
+ * water on it, what its package holds, its mass. The air in the package goes along with it.
+ */
+public final class LotState {
+    private final double[] nodes;
+    private final double massKg;
+
+    LotState(LotBranch lot, double[] y, double massKg) {
+        this.nodes = LotNodes.of(lot, y);
+        this.massKg = massKg;
+    }
+
+    /**
+     * Returns the mass.
+     *
+     * @return tissue and sugar left, free water apart, kg
+     */
+    public double massKg() {
+        return massKg;
+    }
+
+    void into(LotBranch lot, double[] y) {
+        LotNodes.put(nodes, lot, y);
+    }
+}
