@@ -70,6 +70,45 @@ public record BridgedElement(
     }
 
     /**
+     * Returns the element of layers, as aged and damp as they are, between two films.
+     *
+     * @param layers from one side to the other
+     * @param insideFilmM2KW resistance of the inner surface, m2 K/W
+     * @param outsideFilmM2KW resistance of the outer surface, m2 K/W
+     * @return the element
+     */
+    public static BridgedElement of(
+            List<Layer> layers, double insideFilmM2KW, double outsideFilmM2KW) {
+        return new BridgedElement(
+                layers.stream().map(BridgedElement::parts).toList(),
+                insideFilmM2KW,
+                outsideFilmM2KW);
+    }
+
+    private static BridgedLayer parts(Layer layer) {
+        double conductivity = layer.asBuilt().conductivityWmK();
+        if (layer.inPlace().bridge().isEmpty()) {
+            return BridgedLayer.even(layer.thicknessM(), conductivity);
+        }
+        Layer.Bridge bridge = layer.inPlace().bridge().get();
+        double share = bridge.areaPct() / 100;
+        return new BridgedLayer(
+                layer.thicknessM(),
+                List.of(
+                        new Part(share, bridge.conductivityWmK()),
+                        new Part(1 - share, conductivity)));
+    }
+
+    /**
+     * Returns the mean of both limits.
+     *
+     * @return resistance from air to air, m2 K/W
+     */
+    public double combinedM2KW() {
+        return 0.5 * (upperM2KW() + lowerM2KW());
+    }
+
+    /**
      * Returns the upper limit of the resistance.
      *
      * @return m2 K/W
@@ -105,7 +144,7 @@ public record BridgedElement(
      * @return W/(m2 K)
      */
     public double wattsM2K() {
-        return UValue.ofResistance(0.5 * (upperM2KW() + lowerM2KW()));
+        return UValue.ofResistance(combinedM2KW());
     }
 
     private record Path(double share, double resistanceM2KW) {}

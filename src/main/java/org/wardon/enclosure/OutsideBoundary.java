@@ -128,7 +128,7 @@ public final class OutsideBoundary {
         HeatFlow flow = HeatFlow.through(face.name(), deep, around.insideMeanC());
         List<Layer> soil =
                 GroundFloor.under(enclosure)
-                        .soilLayers(UValue.resistanceM2KW(face.layers()), Films.insideM2KW(flow));
+                        .soilLayers(UValue.resistanceM2KW(face.asBuilt()), Films.insideM2KW(flow));
         List<Reason> reasons =
                 around.deepGroundC().isPresent()
                         ? List.of()

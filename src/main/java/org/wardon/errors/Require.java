@@ -24,16 +24,20 @@ public final class Require {
             throw new IllegalArgumentException(
                     String.format(
                             Locale.ROOT,
-                            "%s is %s %s; accepted is %s to %s %s. %s",
+                            "%s is %s%s; accepted is %s to %s%s.%s",
                             name,
                             value,
-                            unit,
+                            after(unit),
                             low,
                             high,
-                            unit,
-                            remedy));
+                            after(unit),
+                            after(remedy)));
         }
         return value;
+    }
+
+    private static String after(String text) {
+        return text.isBlank() ? "" : " " + text;
     }
 
     /**

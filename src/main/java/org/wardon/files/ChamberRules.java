@@ -8,6 +8,7 @@ import java.util.List;
 import java.util.Map;
 import java.util.Optional;
 import java.util.OptionalDouble;
+import org.wardon.enclosure.Face;
 import org.wardon.enclosure.Material;
 import org.wardon.files.json.Faults;
 import org.wardon.files.json.Json;
@@ -34,6 +35,7 @@ final class ChamberRules {
     void check() {
         for (String name : plan.at("buildUps").names()) {
             plan.at("buildUps").at(name).at("layers").items().forEach(this::layer);
+            bridges(plan.at("buildUps").at(name).at("layers"));
         }
         List<Part> chambers = plan.at("chambers").items();
         ids.unique(chambers, "chamber");
@@ -56,6 +58,7 @@ final class ChamberRules {
             misread |= name.text().isEmpty() || faults.at(name.path());
             ids.known(face.at("buildUp"), plan.at("buildUps").names(), "build-up of this plan");
             face.at("layers").items().forEach(this::layer);
+            bridges(face.at("layers"));
             beyond(face.at("beyond"), chamber);
             if (name.text().equals(Optional.of("floor"))) {
                 floor(face.at("beyond"));
@@ -112,6 +115,9 @@ final class ChamberRules {
         Part material = layer.at("material");
         ids.known(material, lookups.materials().keySet(), "material of the tables");
         Material row = material.text().map(lookups.materials()::get).orElse(null);
+        if (row != null || material.text().isEmpty()) {
+            moisture(layer.at("moisturePct"), Optional.ofNullable(row));
+        }
         if (row == null || faults.at(layer.path())) {
             return;
         }
@@ -125,6 +131,31 @@ final class ChamberRules {
                     layer.path(),
                     "the tables have no " + String.join(", ", unknown) + " of '" + row.id() + "'",
                     "accepted: " + String.join(", ", unknown) + " given beside the material");
+        }
+    }
+
+    private void moisture(Part moisture, Optional<Material> row) {
+        boolean known = row.isPresent() && row.get().moisture().coefficient().isPresent();
+        if (moisture.number().isEmpty() || faults.at(moisture.path()) || known) {
+            return;
+        }
+        String found =
+                row.map(m -> "the tables have no moisture coefficient of '" + m.id() + "'")
+                        .orElse("a layer without material has no moisture coefficient");
+        faults.add(
+                moisture.path(),
+                found,
+                "accepted: agedFactor in its place, how many times more heat it lets through");
+    }
+
+    /** The combined method sums every way through the face: each bridged layer doubles them. */
+    private void bridges(Part layers) {
+        long bridged = layers.items().stream().filter(layer -> layer.has("bridge")).count();
+        if (bridged > Face.MOST_BRIDGED) {
+            faults.add(
+                    layers.path(),
+                    "has " + bridged + " layers with a bridge",
+                    "accepted: at most " + Face.MOST_BRIDGED + " of them");
         }
     }
 

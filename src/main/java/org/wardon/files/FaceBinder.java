@@ -93,7 +93,8 @@ final class FaceBinder {
                     thicknessM,
                     inputs.number(layer, "conductivityWmK"),
                     inputs.number(layer, "densityKgM3"),
-                    inputs.number(layer, "specificHeatJkgK"));
+                    inputs.number(layer, "specificHeatJkgK"),
+                    inPlace(layer, Material.Moisture.UNKNOWN));
         }
         Material row = Optional.ofNullable(lookups.materials().get(id.get())).orElseThrow();
         return new Layer(
@@ -101,7 +102,25 @@ final class FaceBinder {
                 thicknessM,
                 conductivity(layer, row, thicknessM),
                 inputs.numberElse(layer, "densityKgM3", row.densityKgM3().orElse(0)),
-                inputs.numberElse(layer, "specificHeatJkgK", row.specificHeatJkgK().orElse(0)));
+                inputs.numberElse(layer, "specificHeatJkgK", row.specificHeatJkgK().orElse(0)),
+                inPlace(layer, row.moisture()));
+    }
+
+    private Layer.InPlace inPlace(Part layer, Material.Moisture printed) {
+        OptionalDouble vapour = layer.at("vapourResistanceFactor").number();
+        Part bridge = layer.at("bridge");
+        return new Layer.InPlace(
+                inputs.numberElse(layer, "agedFactor", 1),
+                new Layer.Damp(
+                        inputs.numberElse(layer, "moisturePct", 0),
+                        printed.coefficient().orElse(0)),
+                bridge.given()
+                        ? Optional.of(
+                                new Layer.Bridge(
+                                        inputs.number(bridge, "conductivityWmK"),
+                                        inputs.number(bridge, "areaPct")))
+                        : Optional.empty(),
+                vapour.isPresent() ? vapour : printed.vapourResistanceFactor());
     }
 
     private double conductivity(Part layer, Material row, double thicknessM) {

@@ -14,7 +14,8 @@ final class StoreReader {
 
     List<Material> materials() {
         return database.list(
-                "select * from materials order by line",
+                "select m.*, w.vapour_resistance_factor, w.moisture_coefficient from materials m"
+                        + " left join material_moisture w using (material_id) order by m.line",
                 row ->
                         new Material(
                                 row.text("material_id"),
@@ -24,6 +25,9 @@ final class StoreReader {
                                 row.number("specific_heat_J_kgK"),
                                 row.number("solar_absorptance"),
                                 row.number("resistance_m2K_W"),
+                                new Material.Moisture(
+                                        row.number("vapour_resistance_factor"),
+                                        row.number("moisture_coefficient")),
                                 row.text("source_id"),
                                 row.evidence(),
                                 row.text("note")));

@@ -19,6 +19,7 @@ import org.wardon.cooling.Setting;
 import org.wardon.enclosure.Beyond;
 import org.wardon.enclosure.Door;
 import org.wardon.enclosure.Face;
+import org.wardon.enclosure.FaceName;
 import org.wardon.enclosure.Gains;
 import org.wardon.enclosure.Layer;
 import org.wardon.plan.Assumed;
@@ -105,6 +106,33 @@ class PlanReaderTest {
                 north.coolers());
     }
 
+    private static Layer.InPlace asPrinted(double moistureCoefficient, double vapourResistance) {
+        return new Layer.InPlace(
+                1,
+                new Layer.Damp(0, moistureCoefficient),
+                Optional.empty(),
+                OptionalDouble.of(vapourResistance));
+    }
+
+    @Test
+    void whatBecameOfALayer() {
+        Layer foam =
+                EXAMPLE.getChamber("north").enclosure().faces().stream()
+                        .filter(face -> face.name() == FaceName.FLOOR)
+                        .findFirst()
+                        .orElseThrow()
+                        .layers()
+                        .get(0);
+        assertEquals(
+                new Layer.InPlace(
+                        1.2,
+                        new Layer.Damp(2, 2.5),
+                        Optional.of(new Layer.Bridge(0.13, 8)),
+                        OptionalDouble.of(120)),
+                foam.inPlace());
+        assertEquals(1.2 * Math.exp(2.5 * 0.02), foam.inPlace().worseFactor(), 1e-12);
+    }
+
     @Test
     void valuesOfAnEnclosure() {
         var enclosure = EXAMPLE.getChamber("north").enclosure();
@@ -139,8 +167,8 @@ class PlanReaderTest {
         assertEquals(0.5, north.solarAbsorptance());
         assertEquals(
                 List.of(
-                        new Layer("steel-sheet", 0.0005, 50, 7800, 450),
-                        new Layer("pur-panel", 0.08, 0.027, 40, 1400)),
+                        new Layer("steel-sheet", 0.0005, 50, 7800, 450, asPrinted(0, 1e6)),
+                        new Layer("pur-panel", 0.08, 0.027, 40, 1400, asPrinted(6, 60))),
                 north.layers());
     }
 

@@ -30,9 +30,12 @@ public final class TableLookups {
                 packages.add(row.getField("package_id"));
             }
         }
+        Map<String, NamedCsvRecord> moisture = new HashMap<>();
+        rows("stores/material-moisture.csv")
+                .forEach(row -> moisture.put(row.getField("material_id"), row));
         Map<String, Material> materials = new HashMap<>();
         for (NamedCsvRecord row : rows("stores/materials.csv")) {
-            materials.put(row.getField("material_id"), material(row));
+            materials.put(row.getField("material_id"), material(row, moisture));
         }
         Map<String, Double> protections = new HashMap<>();
         for (NamedCsvRecord row : rows("stores/doorways.csv")) {
@@ -48,7 +51,8 @@ public final class TableLookups {
         return new Lookups(commodities, packages, materials, protections);
     }
 
-    private static Material material(NamedCsvRecord row) {
+    private static Material material(NamedCsvRecord row, Map<String, NamedCsvRecord> moisture) {
+        NamedCsvRecord wet = moisture.get(row.getField("material_id"));
         return new Material(
                 row.getField("material_id"),
                 row.getField("name"),
@@ -57,6 +61,11 @@ public final class TableLookups {
                 number(row, "specific_heat_J_kgK"),
                 number(row, "solar_absorptance"),
                 number(row, "resistance_m2K_W"),
+                wet == null
+                        ? Material.Moisture.UNKNOWN
+                        : new Material.Moisture(
+                                number(wet, "vapour_resistance_factor"),
+                                number(wet, "moisture_coefficient")),
                 row.getField("source_id"),
                 Evidence.MIXED, // several words stand in the column; the reader asks none of them
                 row.getField("note"));

@@ -117,7 +117,7 @@ public final class ChamberLoad {
         double beyondC = beyondC(face.beyond(), day);
         HeatFlow flow = HeatFlow.through(face.name(), beyondC, roomC);
         double inside = Films.insideM2KW(flow);
-        double layers = UValue.resistanceM2KW(face.layers());
+        double layers = UValue.resistanceM2KW(face.asBuilt());
         boolean outdoors = face.beyond() instanceof Beyond.Outdoors;
         boolean open = outdoors || face.beyond() instanceof Beyond.Shade;
         double wattsM2K =

@@ -92,10 +92,10 @@ final class FaceBranch implements Part {
             Tree tree, int flowAt, Face face, OutsideBoundary boundary, NetworkInputs inputs) {
         Enclosure enclosure = inputs.enclosure();
         List<Layer> layers = new ArrayList<>(boundary.addedLayers());
-        layers.addAll(face.layers());
+        layers.addAll(face.asBuilt());
         double wall = inputs.tuning().wall();
-        double inside = FaceFilms.insideM2KW(enclosure, face, boundary, inputs);
-        FaceGrid grid = new FaceGrid(layers, inside, wall);
+        FaceFilms.Film inside = FaceFilms.inside(enclosure, face, boundary, inputs);
+        FaceGrid grid = new FaceGrid(layers, inside.resistanceM2KW(), wall);
         double area = enclosure.box().areaM2(face.name());
         double steady = grid.steady(boundary.filmWm2K(0) * wall);
         return new FaceBranch(
@@ -104,7 +104,7 @@ final class FaceBranch implements Part {
                 area,
                 grid,
                 enclosure.thermalBridgePct() / 100 * area * steady,
-                FaceFilms.convectiveWm2K(boundary.direction()),
+                inside.convectiveWm2K(),
                 wall,
                 inputs.plain());
     }

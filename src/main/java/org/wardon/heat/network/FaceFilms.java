@@ -20,12 +20,20 @@ final class FaceFilms {
 
     private FaceFilms() {}
 
-    /** Resistance of the inside film, m2 K/W. */
-    static double insideM2KW(
+    /**
+     * A film.
+     *
+     * @param resistanceM2KW convection and radiation together, m2 K/W
+     * @param convectiveWm2K convection alone, which carries vapour too, W/(m2 K)
+     */
+    record Film(double resistanceM2KW, double convectiveWm2K) {}
+
+    /** The film inside a face. */
+    static Film inside(
             Enclosure enclosure, Face face, OutsideBoundary boundary, NetworkInputs inputs) {
         double standard = Films.insideM2KW(boundary.direction());
         if (!enclosure.computedFilms()) {
-            return standard;
+            return new Film(standard, convectiveWm2K(boundary.direction()));
         }
         double insideC = inputs.around().insideMeanC();
         double beyondC =
@@ -34,24 +42,25 @@ final class FaceFilms {
                         .average()
                         .orElseThrow();
         double layers =
-                UValue.resistanceM2KW(face.layers())
+                UValue.resistanceM2KW(face.asBuilt())
                         + boundary.addedLayers().stream().mapToDouble(l -> l.resistanceM2KW()).sum()
                         + 1 / boundary.filmWm2K(0);
         double film = standard;
+        double convective = 0;
         for (int i = 0; i < ROUNDS; i++) {
             double drop = (beyondC - insideC) * film / (film + layers);
             double least = Math.copySign(LEAST_DIFFERENCE_K, drop);
             double surfaceC = insideC + (Math.abs(drop) < LEAST_DIFFERENCE_K ? least : drop);
-            double convective =
+            convective =
                     NaturalConvection.filmWm2K(
                             face.name(), enclosure.box(), surfaceC, insideC, inputs.pressurePa());
             film = 1 / (convective + RadiantFilm.wattsM2K(0.5 * (surfaceC + insideC)));
         }
-        return film;
+        return new Film(film, convective);
     }
 
     /**
-     * Convective part of the inside film, W/(m2 K).
+     * Convective part of the inside film of the standard, W/(m2 K).
      *
      * <p>Source: ISO 6946:2017, annex C: 5.0 up, 2.5 level, 0.7 down (from memory).
      */
