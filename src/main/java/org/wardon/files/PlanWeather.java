@@ -14,7 +14,10 @@ import org.wardon.files.json.Part;
 import org.wardon.files.readings.WeatherCsv;
 import org.wardon.plan.WeatherSource;
 
-/** Finds the weather of a plan: steady, or a file in the plan's folder and never outside it. */
+/**
+ * Finds the weather of a plan: steady, made from normals, or a file in the plan's folder and never
+ * outside it.
+ */
 final class PlanWeather {
     private static final String INSIDE = "accepted: a file in the plan's folder or below it";
 
@@ -32,6 +35,9 @@ final class PlanWeather {
                     new WeatherSource.Steady(
                             steady.at("temperatureC").number().orElseThrow(),
                             steady.at("humidityPct").number().orElseThrow()));
+        }
+        if (weather.has("normals")) {
+            return NormalsReader.read(plan, faults).map(source -> source);
         }
         Part csv = weather.at("csv");
         return csv.text().flatMap(name -> csv(plan, csv.path(), name, planFile, faults));

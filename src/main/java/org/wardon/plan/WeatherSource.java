@@ -2,6 +2,7 @@ package org.wardon.plan;
 
 import java.util.List;
 import org.wardon.air.Weather;
+import org.wardon.air.normals.MonthlyNormals;
 import org.wardon.errors.Require;
 
 /** Where the weather of a plan comes from. */
@@ -45,4 +46,12 @@ public sealed interface WeatherSource {
             filled = List.copyOf(filled);
         }
     }
+
+    /**
+     * Weather made from monthly normals.
+     *
+     * @param normals the normals
+     * @param weather hourly values made from them, from {@code from} to the end of the plan
+     */
+    record Normals(MonthlyNormals normals, Weather weather) implements WeatherSource {}
 }

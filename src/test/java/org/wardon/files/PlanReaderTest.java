@@ -12,6 +12,8 @@ import java.util.List;
 import java.util.Optional;
 import java.util.OptionalDouble;
 import org.junit.jupiter.api.Test;
+import org.wardon.air.Weather;
+import org.wardon.air.normals.NormalsWeather;
 import org.wardon.cooling.Compressor;
 import org.wardon.cooling.Control;
 import org.wardon.cooling.Defrost;
@@ -67,6 +69,20 @@ class PlanReaderTest {
         assertEquals(241, weather.weather().hours());
         assertEquals(List.of(), weather.filled());
         assertEquals(24.0, weather.weather().temperatureC(0));
+    }
+
+    @Test
+    void valuesOfNormals() {
+        StorePlan plan = PlanReader.read(PLANS.resolve("normals/plan.json"), TableLookups.read());
+        WeatherSource.Normals made =
+                assertInstanceOf(WeatherSource.Normals.class, plan.weatherSource());
+        assertEquals(26.5, made.normals().dailyMaxC().get(1));
+        assertEquals(18.1, made.normals().dailyMinC().get(11));
+        assertEquals(64, made.normals().humidityPct().get(10));
+        assertEquals(6.58, made.normals().globalKWhM2Day().orElseThrow().get(0));
+        Weather again = NormalsWeather.of(made.normals(), plan.site(), plan.timeline(), 4, 6 * 24);
+        assertEquals(6 * 24 + 1, made.weather().hours());
+        assertEquals(again.temperatureC(77), made.weather().temperatureC(77));
     }
 
     @Test

@@ -14,13 +14,16 @@ import java.io.IOException;
 import java.nio.file.Files;
 import java.nio.file.Path;
 import java.util.ArrayList;
+import java.util.Collections;
 import java.util.List;
 import java.util.Map;
 import java.util.Optional;
+import java.util.function.Function;
 import java.util.stream.Stream;
 import org.junit.jupiter.api.DynamicTest;
 import org.junit.jupiter.api.Test;
 import org.junit.jupiter.api.TestFactory;
+import org.wardon.air.normals.MonthlyNormals;
 import org.wardon.errors.Fault;
 import org.wardon.files.json.Faults;
 import org.wardon.files.json.Json;
@@ -129,6 +132,34 @@ class SchemaTest {
         holdBounds(
                 steady, steady.get("weather"), SCHEMA.at("/$defs/weather"), "$.weather", checked);
         assertTrue(checked.size() > 90, "bounds checked: " + checked);
+    }
+
+    @Test
+    void normalsHaveTheSameBounds() {
+        List<Double> low = Collections.nCopies(12, -55.0);
+        List<Double> high = Collections.nCopies(12, 50.0);
+        List<Double> humid = Collections.nCopies(12, 70.0);
+        holdNormal("dailyMaxC", l -> new MonthlyNormals(l, low, humid, Optional.empty()));
+        holdNormal("dailyMinC", l -> new MonthlyNormals(high, l, humid, Optional.empty()));
+        holdNormal("humidityPct", l -> new MonthlyNormals(high, low, l, Optional.empty()));
+        holdNormal("globalKWhM2Day", l -> new MonthlyNormals(high, low, humid, Optional.of(l)));
+    }
+
+    private static void holdNormal(String name, Function<List<Double>, MonthlyNormals> make) {
+        JsonNode rule = SCHEMA.at("/$defs/weather/properties/normals/properties/" + name);
+        double low = rule.at("/items/minimum").asDouble();
+        double high = rule.at("/items/maximum").asDouble();
+        for (double inside : new double[] {low, high}) {
+            assertDoesNotThrow(() -> make.apply(Collections.nCopies(12, inside)), name);
+        }
+        for (double outside : new double[] {low - 1e-3, high + 1e-3}) {
+            assertThrows(
+                    IllegalArgumentException.class,
+                    () -> make.apply(Collections.nCopies(12, outside)),
+                    name + " of " + outside);
+        }
+        assertEquals(MonthlyNormals.MONTHS, rule.get("minItems").asInt());
+        assertEquals(MonthlyNormals.MONTHS, rule.get("maxItems").asInt());
     }
 
     private static void holdBounds(

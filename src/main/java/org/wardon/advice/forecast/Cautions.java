@@ -213,6 +213,13 @@ final class Cautions {
     }
 
     private void weather(StorePlan plan) {
+        if (plan.weatherSource() instanceof WeatherSource.Normals made) {
+            Argument seed = Argument.text(String.valueOf(plan.seed()));
+            add(Level.NOTE, Reason.about("weather-from-normals", "weather", OWN_RULE, seed));
+            if (made.normals().globalKWhM2Day().isEmpty()) {
+                add(Level.NOTE, Reason.about("sun-from-normals", "weather", "FAO56"));
+            }
+        }
         if (plan.weatherSource() instanceof WeatherSource.Csv csv) {
             for (FilledGap gap : csv.filled()) {
                 add(

@@ -6,6 +6,7 @@ import static org.junit.jupiter.api.Assertions.assertTrue;
 import java.io.IOException;
 import java.nio.file.Files;
 import java.nio.file.Path;
+import java.util.Collections;
 import java.util.List;
 import java.util.Locale;
 import java.util.SplittableRandom;
@@ -92,16 +93,34 @@ class RandomPlansTest {
                     """
                     {"storePlan": 1, "name": "random",
                      "site": {"latitudeDeg": %.1f, "longitudeDeg": 10, "elevationM": %d, "zone": "UTC"},
-                     "weather": {"steady": {"temperatureC": %.1f, "humidityPct": %.0f}},
+                     "weather": %s,
                      "from": "2026-06-01T00:00", "days": 5,
                      "chambers": [%s], "lots": [%s]}
                     """,
                     random.nextDouble(-40, 50),
                     pick(0, 1800),
-                    random.nextDouble(-8, 36),
-                    random.nextDouble(15, 98),
+                    weather(),
                     chamber(),
                     lots);
+        }
+
+        private String weather() {
+            double middleC = random.nextDouble(-8, 36);
+            double pct = random.nextDouble(15, 98);
+            if (random.nextInt(3) > 0) {
+                return String.format(
+                        Locale.ROOT,
+                        "{\"steady\": {\"temperatureC\": %.1f, \"humidityPct\": %.0f}}",
+                        middleC,
+                        pct);
+            }
+            double rangeK = random.nextDouble(0, 14);
+            return String.format(
+                    Locale.ROOT,
+                    "{\"normals\": {\"dailyMaxC\": %s, \"dailyMinC\": %s, \"humidityPct\": %s}}",
+                    Collections.nCopies(12, middleC + rangeK / 2),
+                    Collections.nCopies(12, middleC - rangeK / 2),
+                    Collections.nCopies(12, pct));
         }
 
         private int pick(int... among) {
