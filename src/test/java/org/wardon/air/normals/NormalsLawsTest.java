@@ -165,7 +165,7 @@ class NormalsLawsTest {
                 "dailyMaxC of month 1 is 20.0, below its dailyMinC of 30.0",
                 refusal(() -> new MonthlyNormals(cool, warm, humid, Optional.empty())));
         assertEquals(
-                "weather.normals.humidityPct[0] is 0.0 %; accepted is 1.0 to 100.0 %. ",
+                "weather.normals.humidityPct[0] is 0.0 %; accepted is 1.0 to 100.0 %.",
                 refusal(
                         () ->
                                 new MonthlyNormals(
