@@ -3,6 +3,7 @@ package org.wardon.heat;
 import java.util.List;
 import org.wardon.air.Site;
 import org.wardon.air.StandardAtmosphere;
+import org.wardon.enclosure.Surroundings;
 import org.wardon.errors.Progress;
 import org.wardon.errors.Require;
 import org.wardon.heat.network.LotInGivenAir;
@@ -22,6 +23,16 @@ public final class HeatModel {
      */
     public static Course run(ChamberRun run, Progress progress) {
         return run(run, progress, Accuracy.USUAL, false);
+    }
+
+    /**
+     * Returns what surrounds the chamber of a run, as the model feels it.
+     *
+     * @param run the run
+     * @return its weather, sun and neighbours
+     */
+    public static Surroundings around(ChamberRun run) {
+        return RunCompiler.surroundings(run);
     }
 
     static Course run(ChamberRun run, Progress progress, Accuracy accuracy, boolean plain) {

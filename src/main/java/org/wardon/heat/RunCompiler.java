@@ -100,7 +100,7 @@ final class RunCompiler {
         };
     }
 
-    private static Surroundings surroundings(ChamberRun run) {
+    static Surroundings surroundings(ChamberRun run) {
         int hours = hours(run) + 1;
         Map<String, Surroundings.HourlyAir> neighbours = new HashMap<>();
         run.extras()

@@ -120,6 +120,7 @@ final class Cautions {
             CoolerCautions.of(cooler, chamber.setting(), chamber.id(), pressurePa)
                     .forEach(caution -> add(caution.level(), caution.reason()));
         }
+        FaceMoisture.of(chamber, outcome).forEach(c -> add(c.level(), c.reason()));
         for (Reason reason : course.reasons()) {
             add(
                     Level.NOTE,

@@ -12,6 +12,7 @@ public record Units(boolean fahrenheit, boolean pounds) {
     /** Celsius and kilograms. */
     public static final Units METRIC = new Units(false, false);
 
+    private static final double G_M2_PER_OZ_FT2 = 305.15;
     private static final double KG_PER_LB = 0.45359237;
 
     /**
@@ -58,6 +59,10 @@ public record Units(boolean fahrenheit, boolean pounds) {
             case "C" -> temperature(value);
             case "K" -> difference(value);
             case "kg" -> mass(value);
+            case "g/m2" ->
+                    pounds
+                            ? format("%.2f oz/ft2", value / G_M2_PER_OZ_FT2)
+                            : format("%.0f g/m2", value);
             case "day" -> days(value);
             case "h" -> brief(value) + " h";
             case "pct" -> brief(value) + " %";

@@ -48,7 +48,8 @@ class WordsTest {
     private static final Words WORDS = Words.english(Units.METRIC);
     private static final Words AMERICAN = Words.english(new Units(true, true));
     private static final Pattern GAP = Pattern.compile("\\{(s?)(\\d+)}|\\{[a-z-]+\\.(\\d+)}");
-    private static final Set<String> FAMILIES = Set.of("limit", "mechanism", "rests-on", "verdict");
+    private static final Set<String> FAMILIES =
+            Set.of("limit", "mechanism", "rests-on", "side", "verdict");
     private static final double DAY_S = 86_400;
 
     /** Hyphenated words in quotes beside codes and sources. */
