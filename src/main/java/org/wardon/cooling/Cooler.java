@@ -9,10 +9,10 @@ import java.util.OptionalDouble;
  * there is {@link #match}.
  *
  * <p>A new kind is a record in {@code permits} with its {@link CoolerLaw}, a method of {@link
- * Kinds}, a binder and a schema entry. A kind that acts on faces states film and fluid of its faces
- * in {@link CoolerEffect}, for the faces to take; what it does to the air goes as for all others.
+ * Kinds}, a binder and a schema entry. A kind that acts on faces is a {@link FaceCooler} and does
+ * nothing to the air but through them.
  */
-public sealed interface Cooler permits Compressor {
+public sealed interface Cooler permits Compressor, FaceCooler {
     /**
      * Returns the kind as a plan names it.
      *
@@ -130,5 +130,21 @@ public sealed interface Cooler permits Compressor {
          * @return the answer
          */
         R compressor(Compressor unit);
+
+        /**
+         * Answers for walls kept wet outside.
+         *
+         * @param wall the walls
+         * @return the answer
+         */
+        R wettedWall(WettedWall wall);
+
+        /**
+         * Answers for water over the inner side of faces.
+         *
+         * @param film the water
+         * @return the answer
+         */
+        R waterFilm(WaterFilm film);
     }
 }

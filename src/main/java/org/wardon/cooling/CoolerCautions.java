@@ -48,6 +48,16 @@ public final class CoolerCautions {
                         rating(unit, chamberId, pressurePa, cautions);
                         return cautions;
                     }
+
+                    @Override
+                    public List<Caution> wettedWall(WettedWall wall) {
+                        return List.of();
+                    }
+
+                    @Override
+                    public List<Caution> waterFilm(WaterFilm film) {
+                        return List.of();
+                    }
                 });
     }
 

@@ -4,6 +4,7 @@ import java.util.EnumSet;
 import java.util.List;
 import java.util.Optional;
 import java.util.Set;
+import java.util.function.Function;
 import org.wardon.enclosure.FaceName;
 import org.wardon.errors.Require;
 
@@ -30,7 +31,7 @@ public record WaterFilm(
         boolean open,
         double gapMm,
         Control control)
-        implements Cooler {
+        implements FaceCooler {
     private static final int DAY_H = 24;
     private static final double NO_LIMIT_C = -40;
 
@@ -68,8 +69,7 @@ public record WaterFilm(
          */
         public double electricPerW(double waterC, double outdoorC) {
             double evaporatingC = waterC - evaporatingBelowK;
-            double condensingC =
-                    Math.max(outdoorC + condensingAboveK, evaporatingC + LEAST_LIFT_K);
+            double condensingC = Math.max(outdoorC + condensingAboveK, evaporatingC + LEAST_LIFT_K);
             return 1 / CarnotShare.cop(evaporatingC, condensingC, carnotFraction);
         }
     }
@@ -79,8 +79,7 @@ public record WaterFilm(
         Require.that(!wets.isEmpty(), "wets is empty; name at least one face");
         wets = Set.copyOf(EnumSet.copyOf(wets));
         boolean level = wets.contains(FaceName.ROOF) || wets.contains(FaceName.FLOOR);
-        Require.that(
-                !(open && level), "wets is " + wets + "; an open film runs down walls only");
+        Require.that(!(open && level), "wets is " + wets + "; an open film runs down walls only");
         Require.within("flowKgS", flowKgS, 0, 100, "kg/s", "");
         inletC = List.copyOf(inletC);
         Require.that(
@@ -119,8 +118,8 @@ public record WaterFilm(
     }
 
     @Override
-    public Set<FaceName> faces() {
-        return flowKgS > 0 ? wets : Set.of();
+    public <R> R onFaces(Function<WettedWall, R> outside, Function<WaterFilm, R> inside) {
+        return inside.apply(this);
     }
 
     @Override

@@ -5,6 +5,7 @@ import java.util.EnumSet;
 import java.util.List;
 import java.util.Optional;
 import java.util.Set;
+import java.util.function.Function;
 import org.wardon.enclosure.FaceName;
 import org.wardon.errors.Require;
 
@@ -31,7 +32,7 @@ public record WettedWall(
         double waterKgPerDay,
         double innerDampFraction,
         List<LocalTime> pouredAt)
-        implements Cooler {
+        implements FaceCooler {
     /** Checks the bounds. */
     public WettedWall {
         Require.that(!wets.isEmpty(), "wets is empty; name at least one wall");
@@ -61,8 +62,8 @@ public record WettedWall(
     }
 
     @Override
-    public Set<FaceName> faces() {
-        return wets;
+    public <R> R onFaces(Function<WettedWall, R> outside, Function<WaterFilm, R> inside) {
+        return outside.apply(this);
     }
 
     @Override

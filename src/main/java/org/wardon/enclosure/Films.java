@@ -15,8 +15,8 @@ public final class Films {
     private static final double LEVEL_M2KW = 0.13;
     private static final double DOWN_M2KW = 0.17;
 
-    /** Radiation of a surface near 20 °C, W/(m2 K). */
-    private static final double OUTDOOR_RADIATION_WM2K = 5.5;
+    /** Radiant part of an outdoor film, of a surface near 20 °C, W/(m2 K). */
+    public static final double OUTDOOR_RADIATION_WM2K = 5.5;
 
     private Films() {}
 

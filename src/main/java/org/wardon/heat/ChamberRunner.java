@@ -78,6 +78,7 @@ final class ChamberRunner implements Integrator.StepListener {
         this.terms = network.terms();
         this.y = start;
         network.accuracy(accuracy.lotK(), accuracy.airK());
+        network.settle(y);
         integrator = new Integrator(network, EDGES, FIRST_STEP_S, SHORTEST_STEP_S);
         totals = integrator.totals();
         thermostats = new SwitchedCoolers(network);
@@ -139,6 +140,7 @@ final class ChamberRunner implements Integrator.StepListener {
         if (now >= hourEndS()) {
             hour++;
             network.hour(hour);
+            network.settle(y);
             endHour(now);
         }
     }
@@ -430,7 +432,7 @@ final class ChamberRunner implements Integrator.StepListener {
                         terms.defrost(totals),
                         terms.humidifier(totals),
                         terms.heater(totals),
-                        0,
+                        terms.pumps(totals),
                         startAirJ - network.airKg() * network.enthalpyJkg(y),
                         terms.removed(totals),
                         terms.electricity(totals));

@@ -61,7 +61,8 @@ final class RunCompiler {
                         run.doorMode() == DoorMode.AVERAGED,
                         run.extras().heaterW(),
                         run.extras().humidifierKgH() / 3600,
-                        plain));
+                        plain,
+                        run.timeline().secondOfDay(0) / 3600));
     }
 
     static Tuning tuning(Factors f) {

@@ -6,9 +6,7 @@ import java.util.List;
 import java.util.Optional;
 import org.wardon.air.MoistAir;
 import org.wardon.enclosure.Enclosure;
-import org.wardon.enclosure.Face;
 import org.wardon.enclosure.Leakage;
-import org.wardon.enclosure.OutsideBoundary;
 import org.wardon.heat.solver.Tree;
 import org.wardon.heat.solver.TreeSystem;
 import org.wardon.lots.Lot;
@@ -26,10 +24,8 @@ public final class ChamberNetwork implements TreeSystem {
     private final Outside outside = new Outside();
     private final HourlyAir outdoors;
     private final HourlyAir beyondDoor;
-    private final List<OutsideBoundary> boundaries = new ArrayList<>();
-    private final FaceBranch[] faces;
-    private final double[] hourStartC;
-    private final double[] hourChangeK;
+    private final Faces faces;
+    private final WettedWalls wettedWalls;
     private final Optional<StructurePart> structure;
     private final CoolerPart[] coolers;
     private final Optional<IdealCooler> ideal;
@@ -60,9 +56,8 @@ public final class ChamberNetwork implements TreeSystem {
         startAir = new AirState(inputs.pressurePa());
         outdoors = AirAround.outdoors(inputs);
         beyondDoor = AirAround.beyondDoor(inputs, outdoors);
-        faces = faces();
-        hourStartC = new double[faces.length];
-        hourChangeK = new double[faces.length];
+        faces = new Faces(tree, this::take, inputs);
+        wettedWalls = new WettedWalls(faces.wetted());
         double structureJK = inputs.enclosure().structureCapacityJK();
         structure =
                 structureJK > 0
@@ -71,6 +66,7 @@ public final class ChamberNetwork implements TreeSystem {
                         : Optional.empty();
         boolean unlimited = inputs.control() == NetworkInputs.Control.IDEAL;
         coolers = unlimited ? new CoolerPart[0] : CoolerParts.of(tree, this::take, inputs);
+        faces.drivenBy(coolers);
         idealFlowAt = flows;
         ideal =
                 unlimited
@@ -113,7 +109,7 @@ public final class ChamberNetwork implements TreeSystem {
     }
 
     private Part[] alwaysThere() {
-        List<Part> parts = new ArrayList<>(List.of(faces));
+        List<Part> parts = new ArrayList<>(List.of(faces.parts()));
         structure.ifPresent(parts::add);
         parts.addAll(List.of(coolers));
         ideal.ifPresent(parts::add);
@@ -121,17 +117,6 @@ public final class ChamberNetwork implements TreeSystem {
         parts.add(gains);
         parts.add(mist);
         return parts.toArray(new Part[0]);
-    }
-
-    private FaceBranch[] faces() {
-        Enclosure enclosure = inputs.enclosure();
-        List<FaceBranch> list = new ArrayList<>();
-        for (Face face : enclosure.faces()) {
-            OutsideBoundary boundary = OutsideBoundary.of(enclosure, face, inputs.around());
-            boundaries.add(boundary);
-            list.add(FaceBranch.of(tree, take(FaceBranch.FLOWS), face, boundary, inputs));
-        }
-        return list.toArray(new FaceBranch[0]);
     }
 
     private AirExchange exchange() {
@@ -215,12 +200,7 @@ public final class ChamberNetwork implements TreeSystem {
     public void hour(int h) {
         hour = Math.min(h, inputs.around().hours() - 1);
         at = Double.NaN;
-        for (int i = 0; i < faces.length; i++) {
-            OutsideBoundary b = boundaries.get(i);
-            faces[i].farFilm(0.5 * (b.filmWm2K(hour) + b.filmWm2K(hour + 1)));
-            hourStartC[i] = b.temperatureC(hour);
-            hourChangeK[i] = b.temperatureC(hour + 1) - hourStartC[i];
-        }
+        faces.hour(hour);
     }
 
     private void at(double t) {
@@ -231,10 +211,17 @@ public final class ChamberNetwork implements TreeSystem {
         double into = t - hour * 3600.0;
         outdoors.at(hour, into, outside.outdoors);
         beyondDoor.at(hour, into, outside.beyondDoor);
-        double x = into / 3600;
-        for (int i = 0; i < faces.length; i++) {
-            faces[i].beyond(hourStartC[i] + x * hourChangeK[i], hourChangeK[i] / 3600);
-        }
+        faces.at(into / 3600);
+    }
+
+    /**
+     * Lets the water on faces follow the state: at the start of a run and with each hour.
+     *
+     * @param y state
+     */
+    public void settle(double[] y) {
+        startAir.set(y);
+        faces.settle(startAir, y);
     }
 
     /**
@@ -248,14 +235,13 @@ public final class ChamberNetwork implements TreeSystem {
         double[] y = new double[tree.size()];
         setAir(airC, ratio, y);
         at(0);
-        for (FaceBranch face : faces) {
-            face.steadyProfile(airC, y);
-        }
+        faces.steadyProfile(airC, y);
         structure.ifPresent(s -> s.start(airC, y));
         List.of(coolers).forEach(cooler -> cooler.start(y));
         for (LotBranch lot : lots) {
             lot.branch.activate(false);
         }
+        settle(y);
         return y;
     }
 
@@ -266,7 +252,7 @@ public final class ChamberNetwork implements TreeSystem {
      */
     public Terms terms() {
         int idealAt = ideal.isPresent() ? idealFlowAt : -1;
-        return new Terms(faces, coolers, idealAt, exchangeFlowAt, gainsFlowAt, mistFlowAt);
+        return new Terms(faces.parts(), coolers, idealAt, exchangeFlowAt, gainsFlowAt, mistFlowAt);
     }
 
     /**
@@ -395,7 +381,7 @@ public final class ChamberNetwork implements TreeSystem {
      * @return J from 0 °C
      */
     public double layersJ(double[] y) {
-        return Arrays.stream(faces).mapToDouble(face -> face.heatJ(y)).sum();
+        return faces.layersJ(y);
     }
 
     /**
@@ -405,7 +391,7 @@ public final class ChamberNetwork implements TreeSystem {
      * @return kg
      */
     public double faceWaterKg(double[] y) {
-        return Arrays.stream(faces).mapToDouble(face -> face.waterKg(y)).sum();
+        return faces.waterKg(y);
     }
 
     /**
@@ -416,7 +402,7 @@ public final class ChamberNetwork implements TreeSystem {
      * @return °C
      */
     public double surfaceC(int i, double[] y) {
-        return faces[i].surfaceC(y);
+        return faces.parts()[i].surfaceC(y);
     }
 
     /**
@@ -454,7 +440,7 @@ public final class ChamberNetwork implements TreeSystem {
      * @return reasons with an empty subject
      */
     public List<Reason> reasons() {
-        return boundaries.stream().flatMap(b -> b.reasons().stream()).distinct().toList();
+        return faces.reasons();
     }
 
     /**
@@ -476,6 +462,15 @@ public final class ChamberNetwork implements TreeSystem {
         for (CoolerPart cooler : coolers) {
             cooler.power(on);
         }
+    }
+
+    /**
+     * Returns the walls kept wet outside.
+     *
+     * @return live, may be none
+     */
+    public WettedWalls wettedWalls() {
+        return wettedWalls;
     }
 
     /**
@@ -506,7 +501,7 @@ public final class ChamberNetwork implements TreeSystem {
         Arrays.fill(tolerances, lotK);
         tolerances[AirState.ENTHALPY] = airK * MoistAir.DRY_AIR_J_KG_K;
         tolerances[AirState.HUMIDITY] = airK * 5e-4;
-        List.of(faces).forEach(face -> face.tolerances(airK, tolerances));
+        faces.tolerances(airK, tolerances);
         List.of(lots).forEach(lot -> lot.tolerances(lotK, airK, tolerances));
         List.of(coolers).forEach(cooler -> cooler.tolerances(tolerances));
     }
@@ -518,7 +513,7 @@ public final class ChamberNetwork implements TreeSystem {
      * @return such as {@code air} or {@code lot M1}
      */
     public String partAt(int node) {
-        return new PartNames(inputs, faces, lots).at(node);
+        return new PartNames(inputs, faces.parts(), lots).at(node);
     }
 
     @Override

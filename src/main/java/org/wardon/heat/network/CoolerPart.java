@@ -14,7 +14,7 @@ import org.wardon.heat.solver.Tree;
  * One cooler on the chamber's air. The thermostat switches it, or it follows the air within the
  * band; its own states, such as water on its coil, are a branch.
  */
-public final class CoolerPart implements Part {
+public final class CoolerPart implements Part, FilmedFace.Control {
     /** Flows: enthalpy taken from the air, W. */
     static final int REMOVED = 0;
 
@@ -230,7 +230,8 @@ public final class CoolerPart implements Part {
         return y[branch[0].blockAt(i)];
     }
 
-    private double run(double airC) {
+    @Override
+    public double share(double airC) {
         if (!powered || defrosting) {
             return 0;
         }
@@ -238,6 +239,13 @@ public final class CoolerPart implements Part {
             return Thermostat.modulatedShare(airC, band.followedC, band.bandK);
         }
         return on || !follows ? 1 : 0;
+    }
+
+    @Override
+    public double shareByAirC(double airC) {
+        return modulating && powered && !defrosting
+                ? Thermostat.modulatedSlopePerK(airC, band.followedC, band.bandK)
+                : 0;
     }
 
     /** Tells the scratch what it meets; returns whether it has met just that before. */
@@ -262,7 +270,7 @@ public final class CoolerPart implements Part {
         // A refused step may ask beyond what a coil knows; the parts around it then refuse it.
         double airC = air.airC > COLDEST_C ? Math.min(air.airC, WARMEST_C) : COLDEST_C;
         double ratio = air.ratio > 0 ? Math.min(air.ratio, WETTEST) : 0;
-        boolean asBefore = meets(airC, ratio, outside, run(air.airC));
+        boolean asBefore = meets(airC, ratio, outside, share(air.airC));
         for (int i = 0; i < own; i++) {
             double state = y[branch[0].blockAt(i)];
             asBefore &= state == in.own[i];
@@ -324,10 +332,7 @@ public final class CoolerPart implements Part {
     }
 
     private void slopes(double airC) {
-        runByAirC =
-                modulating && powered && !defrosting
-                        ? Thermostat.modulatedSlopePerK(airC, band.followedC, band.bandK)
-                        : 0;
+        runByAirC = shareByAirC(airC);
         double enthalpy = MoistAir.vapourEnthalpyJkg(airC);
         byAirC[VAPOUR] = effect.vapourByAirC + runByAirC * effect.vapourByRun;
         byRatio[VAPOUR] = effect.vapourByHumidity;

@@ -40,7 +40,8 @@ final class CoolerParts {
         return parts.toArray(new CoolerPart[0]);
     }
 
-    private static Cooler asked(Cooler built, NetworkInputs inputs) {
+    /** A cooler as the run asks for it. */
+    static Cooler asked(Cooler built, NetworkInputs inputs) {
         Cooler sized = built.sized(inputs.tuning().capacity());
         return inputs.control() == NetworkInputs.Control.MODULATING ? sized.modulating() : sized;
     }

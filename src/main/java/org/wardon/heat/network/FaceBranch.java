@@ -18,30 +18,7 @@ import org.wardon.heat.solver.Tree;
  * inner surface and the water on it. The thermal bridge is a conductance without mass beside the
  * layers.
  */
-final class FaceBranch implements Part {
-    /** Flows of a face: heat to the air, W (film and bridge). */
-    static final int HEAT = 0;
-
-    /** Vapour to the air, kg/s. */
-    static final int VAPOUR = 1;
-
-    /** Enthalpy of that vapour, W. */
-    static final int VAPOUR_ENTHALPY = 2;
-
-    /** Heat from the far side into the layers, W. */
-    static final int FROM_BEYOND = 3;
-
-    /** Heat of evaporation drawn from the surface, W. */
-    static final int LATENT = 4;
-
-    /** Water running off, kg/s. */
-    static final int RUNS_OFF = 5;
-
-    /** Heat through the thermal bridge, part of HEAT, W. */
-    static final int BRIDGE = 6;
-
-    static final int FLOWS = 7;
-
+final class FaceBranch implements FacePart {
     private static final double EVAPORATION = MoistAir.EVAPORATION_J_KG;
     private static final double VAPOUR_LESS_WATER = MoistAir.VAPOUR_J_KG_K - MoistAir.WATER_J_KG_K;
 
@@ -122,21 +99,21 @@ final class FaceBranch implements Part {
         }
     }
 
-    /** Sets the far film, W/(m2 K); it may change from hour to hour. */
-    void farFilm(double wattsM2K) {
+    @Override
+    public void farFilm(double wattsM2K) {
         farFilm = wattsM2K * wallFactor;
         outer = 1 / (1 / farFilm + grid.outerM2KW);
         conductionJ();
     }
 
-    /** Sets what lies beyond: sol-air or other temperature, °C, and its change, K/s. */
-    void beyond(double temperatureC, double slopeKs) {
+    @Override
+    public void beyond(double temperatureC, double slopeKs) {
         beyondC = temperatureC;
         beyondSlope = slopeKs;
     }
 
-    /** Writes the steady profile between the far side and air, and a dry surface. */
-    void steadyProfile(double airC, double[] y) {
+    @Override
+    public void steadyProfile(double airC, double[] y) {
         double flux = grid.steady(farFilm) * (beyondC - airC);
         double t = beyondC - flux / outer;
         for (int i = 0; i < grid.capacity.length; i++) {
@@ -148,8 +125,8 @@ final class FaceBranch implements Part {
         y[branch.blockAt(1)] = 0;
     }
 
-    /** Heat in the layers above 0 °C, J. */
-    double heatJ(double[] y) {
+    @Override
+    public double heatJ(double[] y) {
         double sum = 0;
         for (int i = 0; i < grid.capacity.length; i++) {
             sum += grid.capacity[i] * y[branch.start + i];
@@ -157,30 +134,36 @@ final class FaceBranch implements Part {
         return areaM2 * sum;
     }
 
-    int firstNode() {
+    @Override
+    public int firstNode() {
         return branch.start;
     }
 
-    int lastNode() {
+    @Override
+    public int lastNode() {
         return branch.blockAt(1);
     }
 
-    double surfaceC(double[] y) {
+    @Override
+    public double surfaceC(double[] y) {
         return y[branch.blockAt(0)];
     }
 
-    double waterKg(double[] y) {
+    @Override
+    public double waterKg(double[] y) {
         return y[branch.blockAt(1)];
     }
 
-    void tolerances(double airK, double[] tolerances) {
+    @Override
+    public void tolerances(double airK, double[] tolerances) {
         for (int i = 0; i < grid.capacity.length; i++) {
             tolerances[branch.start + i] = 2 * airK;
         }
         tolerances[branch.blockAt(1)] = 0.05 * areaM2 * FreeWater.FULL_KG_M2;
     }
 
-    int flow(int kind) {
+    @Override
+    public int flow(int kind) {
         return flowAt + kind;
     }
 

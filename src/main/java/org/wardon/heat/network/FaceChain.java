@@ -11,6 +11,7 @@ import org.wardon.heat.solver.Branch;
 abstract class FaceChain implements FacePart {
     final Branch branch;
     final int flowAt;
+    private final int cooler;
     final double areaM2;
     final FaceGrid grid;
     final double bridgeWK;
@@ -33,6 +34,7 @@ abstract class FaceChain implements FacePart {
      * What every such face has.
      *
      * @param flowAt place of its flows
+     * @param cooler number of the cooler that acts on it
      * @param areaM2 inside area, m2
      * @param grid its layers cut into nodes
      * @param bridgeWK thermal bridge, W/K
@@ -42,6 +44,7 @@ abstract class FaceChain implements FacePart {
      */
     record Build(
             int flowAt,
+            int cooler,
             double areaM2,
             FaceGrid grid,
             double bridgeWK,
@@ -52,6 +55,7 @@ abstract class FaceChain implements FacePart {
     FaceChain(Branch branch, Build build, int nodesBefore) {
         this.branch = branch;
         this.flowAt = build.flowAt;
+        this.cooler = build.cooler;
         this.areaM2 = build.areaM2;
         this.grid = build.grid;
         this.bridgeWK = build.bridgeWK;
@@ -156,6 +160,11 @@ abstract class FaceChain implements FacePart {
     @Override
     public double waterKg(double[] y) {
         return y[waterAt()];
+    }
+
+    @Override
+    public int cooler() {
+        return cooler;
     }
 
     @Override

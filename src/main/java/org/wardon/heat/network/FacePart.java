@@ -1,7 +1,5 @@
 package org.wardon.heat.network;
 
-import org.wardon.heat.solver.Tree;
-
 /**
  * One face of a chamber as the network sees it. Its first {@link #COMMON} flows are those of every
  * face; one that is kept wet outside or under water inside has more behind them.
@@ -56,6 +54,11 @@ interface FacePart extends Part {
 
     /** Place of a flow. */
     int flow(int kind);
+
+    /** Number of the cooler that acts on it; -1 for none. */
+    default int cooler() {
+        return -1;
+    }
 
     /** Heat a cooler took from the face and from the air before it, J. */
     default double takenJ(double[] totals) {

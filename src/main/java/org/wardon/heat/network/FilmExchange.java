@@ -52,20 +52,25 @@ final class FilmExchange {
     private double fluxSlope;
     private double saturated;
 
-    /** {@code limitW} is what the chiller can take; infinite for water that runs away. */
-    FilmExchange(double limitW, double pressurePa, boolean plain) {
+    /**
+     * Starts with conductances that stand until the first hour.
+     *
+     * @param limitW what the chiller can take, W; infinite for water that runs away
+     * @param sheet the water
+     */
+    FilmExchange(double limitW, WaterSheet sheet, double pressurePa, boolean plain) {
         this.limitW = limitW;
+        this.sheet = sheet;
         this.pressurePa = pressurePa;
         this.saturation = Saturation.curve(plain);
-        this.meanC = 10;
+        this.meanC = Double.NaN; // not met yet
     }
 
     /** Sets what holds for an hour. */
     void set(WaterSheet now, double entersC) {
         sheet = now;
         inletC = entersC;
-        perFlux =
-                now.meanShare() * now.areaM2() / (now.flowKgS() * MoistAir.WATER_J_KG_K);
+        perFlux = now.meanShare() * now.areaM2() / (now.flowKgS() * MoistAir.WATER_J_KG_K);
     }
 
     WaterSheet sheet() {
@@ -79,8 +84,7 @@ final class FilmExchange {
 
     /** Water leaving, °C. */
     double outletC() {
-        return meanC
-                + (1 - sheet.meanShare()) * takenW / (sheet.flowKgS() * MoistAir.WATER_J_KG_K);
+        return meanC + (1 - sheet.meanShare()) * takenW / (sheet.flowKgS() * MoistAir.WATER_J_KG_K);
     }
 
     /** Heat to the water a square metre and its slope by the water's temperature. */
@@ -165,8 +169,7 @@ final class FilmExchange {
         double area = sheet.areaM2();
         fromWallW = area * sides.wallWm2K() * (wallC - meanC);
         fromBeforeW = area * sides.beforeWm2K() * (beforeC - meanC);
-        vapourKgS =
-                sides.vapourKgM2S() > 0 ? area * sides.vapourKgM2S() * (saturated - ratio) : 0;
+        vapourKgS = sides.vapourKgM2S() > 0 ? area * sides.vapourKgM2S() * (saturated - ratio) : 0;
     }
 
     /** The same with all derivatives, by implicit differentiation. */
@@ -189,8 +192,7 @@ final class FilmExchange {
             takenBy[by] = area * share * fluxFree;
             meanBy[by] = (share * fluxFree - fluxBy(by, latent)) / fluxSlope;
             fromWallBy[by] = area * sides.wallWm2K() * ((by == BY_WALL ? 1 : 0) - meanBy[by]);
-            fromBeforeBy[by] =
-                    area * sides.beforeWm2K() * ((by == BY_BEFORE ? 1 : 0) - meanBy[by]);
+            fromBeforeBy[by] = area * sides.beforeWm2K() * ((by == BY_BEFORE ? 1 : 0) - meanBy[by]);
             vapourBy[by] = rise * meanBy[by] - (by == BY_RATIO ? area * g : 0);
         }
     }

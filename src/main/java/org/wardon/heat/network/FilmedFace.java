@@ -100,7 +100,13 @@ abstract class FilmedFace extends FaceChain {
     FilmedFace(Branch branch, Build build, Water water, double pressurePa, int ownKinds) {
         super(branch, build, 0);
         this.water = water;
-        this.film = new FilmExchange(water.limitW, pressurePa, build.plain());
+        WaterSheet.Sides none = new WaterSheet.Sides(1, 1, 0, 1);
+        this.film =
+                new FilmExchange(
+                        water.limitW,
+                        new WaterSheet(areaM2, water.flowKgS, none),
+                        pressurePa,
+                        build.plain());
         this.kinds = FLOWS + ownKinds;
         atRest = new double[kinds];
         running = new double[kinds];

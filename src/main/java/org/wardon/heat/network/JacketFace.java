@@ -26,12 +26,7 @@ final class JacketFace extends FilmedFace {
     private double standingWK;
 
     JacketFace(Tree tree, Build build, Water water, JacketGap gap, double pressurePa) {
-        super(
-                tree.addBranch(build.grid().capacity.length - 1, 3),
-                build,
-                water,
-                pressurePa,
-                1);
+        super(tree.addBranch(build.grid().capacity.length - 1, 3), build, water, pressurePa, 1);
         this.gap = gap;
         surface = new SurfaceWater(areaM2, build.convectiveWm2K(), build.plain());
         sheetJK = areaM2 * (SHEET_JM2K + gap.gapM() * WATER_J_M3K);

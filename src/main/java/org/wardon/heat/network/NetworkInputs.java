@@ -24,6 +24,7 @@ import org.wardon.lots.Lot;
  * @param heaterW heater, W
  * @param humidifierKgS humidifier, kg/s
  * @param plain whether laws are asked directly instead of through local cubics
+ * @param startsAtHour hour of the day at second 0, 0 to 24
  */
 public record NetworkInputs(
         Enclosure enclosure,
@@ -38,7 +39,8 @@ public record NetworkInputs(
         boolean averagedDoor,
         double heaterW,
         double humidifierKgS,
-        boolean plain) {
+        boolean plain,
+        double startsAtHour) {
     /** How coolers follow the thermostat. */
     public enum Control {
         /** As built. */

@@ -31,12 +31,7 @@ final class OpenFilmFace extends FilmedFace {
     private final SurfaceWater surface;
 
     OpenFilmFace(Tree tree, Build build, Water water, double pressurePa) {
-        super(
-                tree.addBranch(build.grid().capacity.length - 1, 2),
-                build,
-                water,
-                pressurePa,
-                1);
+        super(tree.addBranch(build.grid().capacity.length - 1, 2), build, water, pressurePa, 1);
         surface = new SurfaceWater(areaM2, build.convectiveWm2K(), build.plain());
         farFilm(25);
     }
@@ -55,7 +50,8 @@ final class OpenFilmFace extends FilmedFace {
     @Override
     void settle(AirState air, double[] y) {
         double airC = Math.min(Math.max(air.airC, COLDEST_C), WARMEST_C);
-        double filmC = Math.min(Math.max(film.sheet() == null ? inletC : film.meanC, COLDEST_C), WARMEST_C);
+        double met = Double.isFinite(film.meanC) ? film.meanC : inletC;
+        double filmC = Math.min(Math.max(met, COLDEST_C), WARMEST_C);
         double convective =
                 FilmAir.convectiveWm2K(water.wayM(), filmC, airC, air.ratio, air.pressurePa);
         double before = convective + RadiantFilm.wattsM2K(0.5 * (filmC + airC));
@@ -87,8 +83,7 @@ final class OpenFilmFace extends FilmedFace {
     }
 
     private void fill(double waterKg) {
-        running[WATER_RATE] =
-                (areaM2 * FreeWater.FACE_HOLDS_KG_M2 - waterKg) / FILLS_IN_S;
+        running[WATER_RATE] = (areaM2 * FreeWater.FACE_HOLDS_KG_M2 - waterKg) / FILLS_IN_S;
     }
 
     @Override
@@ -192,8 +187,7 @@ final class OpenFilmFace extends FilmedFace {
         by[partial][LATENT] +=
                 share * (vapour * film.latent + film.vapourKgS * LATENT_SLOPE * mean);
         double round = areaM2 * ROUND_KG_M2S;
-        by[partial][RUNS_OFF] -=
-                share * vapour * FreeWater.positiveSlope(-film.vapourKgS, round);
+        by[partial][RUNS_OFF] -= share * vapour * FreeWater.positiveSlope(-film.vapourKgS, round);
         by[partial][USED] += share * vapour * FreeWater.positiveSlope(film.vapourKgS, round);
         waterSlopes(partial, input);
     }

@@ -3,10 +3,10 @@ package org.wardon.heat.network;
 /** Names what a node of a chamber's state belongs to, for messages. */
 final class PartNames {
     private final NetworkInputs inputs;
-    private final FaceBranch[] faces;
+    private final FacePart[] faces;
     private final LotBranch[] lots;
 
-    PartNames(NetworkInputs inputs, FaceBranch[] faces, LotBranch[] lots) {
+    PartNames(NetworkInputs inputs, FacePart[] faces, LotBranch[] lots) {
         this.inputs = inputs;
         this.faces = faces;
         this.lots = lots;

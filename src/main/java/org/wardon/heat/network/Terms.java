@@ -1,10 +1,14 @@
 package org.wardon.heat.network;
 
+import org.wardon.cooling.FaceCooler;
+
 /**
  * Sums over the parts of a network of the integrals its solver carried: J and kg since the start.
  */
 public final class Terms {
-    private final FaceBranch[] faces;
+    private static final int ALL = -1;
+
+    private final FacePart[] faces;
     private final CoolerPart[] coolers;
     private final int idealAt;
     private final int exchangeAt;
@@ -12,7 +16,7 @@ public final class Terms {
     private final int mistAt;
 
     Terms(
-            FaceBranch[] faces,
+            FacePart[] faces,
             CoolerPart[] coolers,
             int idealAt,
             int exchangeAt,
@@ -28,7 +32,7 @@ public final class Terms {
 
     private double faces(double[] totals, int kind) {
         double sum = 0;
-        for (FaceBranch face : faces) {
+        for (FacePart face : faces) {
             sum += totals[face.flow(kind)];
         }
         return sum;
@@ -42,15 +46,42 @@ public final class Terms {
         return sum;
     }
 
+    /** Heat that coolers took from faces and the air before them; of all, or of one cooler. */
+    private double taken(double[] totals, int cooler) {
+        double sum = 0;
+        for (FacePart face : faces) {
+            sum += cooler < 0 || face.cooler() == cooler ? face.takenJ(totals) : 0;
+        }
+        return sum;
+    }
+
+    private double faceWater(double[] totals, int cooler) {
+        double sum = 0;
+        for (FacePart face : faces) {
+            sum += cooler < 0 || face.cooler() == cooler ? face.waterUsedKg(totals) : 0;
+        }
+        return sum;
+    }
+
+    private double chillers(double[] totals, int cooler) {
+        double sum = 0;
+        for (FacePart face : faces) {
+            sum += cooler < 0 || face.cooler() == cooler ? face.electricityJ(totals) : 0;
+        }
+        return sum;
+    }
+
     /**
-     * Enthalpy from faces to the air, less that of mist.
+     * Enthalpy from faces to the air, less that of mist, and what coolers took of their heat before
+     * it came to the air: by evaporation outside, by water inside.
      *
      * @param totals integrals of the flows
      * @return J
      */
     public double walls(double[] totals) {
-        return faces(totals, FaceBranch.HEAT)
-                + faces(totals, FaceBranch.VAPOUR_ENTHALPY)
+        return faces(totals, FacePart.HEAT)
+                + taken(totals, ALL)
+                + faces(totals, FacePart.VAPOUR_ENTHALPY)
                 - totals[mistAt + MistPart.ENTHALPY];
     }
 
@@ -61,7 +92,7 @@ public final class Terms {
      * @return kg
      */
     public double wallVapour(double[] totals) {
-        return faces(totals, FaceBranch.VAPOUR);
+        return faces(totals, FacePart.VAPOUR);
     }
 
     /**
@@ -81,7 +112,7 @@ public final class Terms {
      * @return kg
      */
     public double ranOff(double[] totals) {
-        return faces(totals, FaceBranch.RUNS_OFF);
+        return faces(totals, FacePart.RUNS_OFF);
     }
 
     /**
@@ -91,9 +122,10 @@ public final class Terms {
      * @return J
      */
     public double intoLayers(double[] totals) {
-        return faces(totals, FaceBranch.FROM_BEYOND)
-                - (faces(totals, FaceBranch.HEAT) - faces(totals, FaceBranch.BRIDGE))
-                - faces(totals, FaceBranch.LATENT);
+        return faces(totals, FacePart.FROM_BEYOND)
+                - (faces(totals, FacePart.HEAT) - faces(totals, FacePart.BRIDGE))
+                - faces(totals, FacePart.LATENT)
+                - taken(totals, ALL);
     }
 
     /**
@@ -103,7 +135,7 @@ public final class Terms {
      * @return J
      */
     public double fromBeyond(double[] totals) {
-        return faces(totals, FaceBranch.FROM_BEYOND);
+        return faces(totals, FacePart.FROM_BEYOND);
     }
 
     /**
@@ -257,6 +289,24 @@ public final class Terms {
     }
 
     /**
+     * Heat of pumps, which the water they drive carries away.
+     *
+     * @param totals integrals of the flows
+     * @return J
+     */
+    public double pumps(double[] totals) {
+        double sum = 0;
+        for (CoolerPart cooler : coolers) {
+            sum += pump(cooler, totals);
+        }
+        return sum;
+    }
+
+    private static double pump(CoolerPart cooler, double[] totals) {
+        return cooler.unit() instanceof FaceCooler ? totals[cooler.flow(CoolerPart.ELECTRIC)] : 0;
+    }
+
+    /**
      * Heat of defrosting.
      *
      * @param totals integrals of the flows
@@ -267,13 +317,15 @@ public final class Terms {
     }
 
     /**
-     * Enthalpy taken from the air by coolers.
+     * Enthalpy taken by coolers: from the air, by water and evaporation from faces, heat of pumps.
      *
      * @param totals integrals of the flows
      * @return J
      */
     public double removed(double[] totals) {
         return coolers(totals, CoolerPart.REMOVED)
+                + taken(totals, ALL)
+                + pumps(totals)
                 + (idealAt >= 0 ? totals[idealAt + IdealCooler.REMOVED] : 0);
     }
 
@@ -289,13 +341,14 @@ public final class Terms {
     }
 
     /**
-     * Electricity of compressors, fans, lights, heater and defrost.
+     * Electricity of compressors, pumps, chillers, fans, lights, heater and defrost.
      *
      * @param totals integrals of the flows
      * @return J
      */
     public double electricity(double[] totals) {
         return coolers(totals, CoolerPart.ELECTRIC)
+                + chillers(totals, ALL)
                 + fans(totals)
                 + lights(totals)
                 + heater(totals)
@@ -309,7 +362,7 @@ public final class Terms {
      * @return kg
      */
     public double waterUsed(double[] totals) {
-        return coolers(totals, CoolerPart.WATER);
+        return coolers(totals, CoolerPart.WATER) + faceWater(totals, ALL);
     }
 
     /**
@@ -323,24 +376,22 @@ public final class Terms {
         CoolerPart cooler = coolers[i];
         return new OfCooler(
                 totals[cooler.flow(CoolerPart.RUN)],
-                totals[cooler.flow(CoolerPart.REMOVED)],
-                electricity(cooler, totals),
-                totals[cooler.flow(CoolerPart.WATER)]);
+                totals[cooler.flow(CoolerPart.REMOVED)] + taken(totals, i) + pump(cooler, totals),
+                electricity(i, totals),
+                totals[cooler.flow(CoolerPart.WATER)] + faceWater(totals, i));
     }
 
     /**
-     * Electricity of one cooler, its fan and its defrost.
+     * Electricity of one cooler, its pump and chiller, its fan and its defrost.
      *
      * @param i number of the cooler
      * @param totals integrals of the flows
      * @return J
      */
     public double electricity(int i, double[] totals) {
-        return electricity(coolers[i], totals);
-    }
-
-    private static double electricity(CoolerPart cooler, double[] totals) {
-        return totals[cooler.flow(CoolerPart.ELECTRIC)]
+        CoolerPart cooler = coolers[i];
+        return chillers(totals, i)
+                + totals[cooler.flow(CoolerPart.ELECTRIC)]
                 + totals[cooler.flow(CoolerPart.FAN)]
                 + totals[cooler.flow(CoolerPart.DEFROST)];
     }
@@ -349,7 +400,7 @@ public final class Terms {
      * Sums of one cooler.
      *
      * @param ranS time it ran, weighted by its share, s
-     * @param removedJ enthalpy taken from the air, J
+     * @param removedJ enthalpy taken, J
      * @param electricityJ electricity, fan and defrost included, J
      * @param waterKg water used up, kg
      */

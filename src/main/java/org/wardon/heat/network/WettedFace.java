@@ -86,6 +86,10 @@ final class WettedFace extends FaceChain {
         tolerances[drawnInsideAt()] = tolerances[branch.start];
     }
 
+    double holdsKg() {
+        return sand.holdsKg;
+    }
+
     /** Water in the sand, kg. */
     double sandKg(double[] y) {
         return y[branch.start] + y[drawnInsideAt()];

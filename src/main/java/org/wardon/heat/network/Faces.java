@@ -1,0 +1,120 @@
+package org.wardon.heat.network;
+
+import java.util.ArrayList;
+import java.util.Arrays;
+import java.util.List;
+import java.util.function.IntUnaryOperator;
+import org.wardon.cooling.WaterFilm;
+import org.wardon.enclosure.Enclosure;
+import org.wardon.enclosure.Face;
+import org.wardon.enclosure.OutsideBoundary;
+import org.wardon.heat.solver.Tree;
+import org.wardon.produce.Reason;
+
+/** The faces of a chamber with what lies beyond them, hour by hour. */
+final class Faces {
+    private final NetworkInputs inputs;
+    private final List<OutsideBoundary> boundaries = new ArrayList<>();
+    private final FacePart[] parts;
+    private final double[] hourStartC;
+    private final double[] hourChangeK;
+    private final List<FilmedFace> filmed = new ArrayList<>();
+    private final List<WettedFace> wetted = new ArrayList<>();
+
+    Faces(Tree tree, IntUnaryOperator take, NetworkInputs inputs) {
+        this.inputs = inputs;
+        Enclosure enclosure = inputs.enclosure();
+        FaceParts kinds = new FaceParts(tree, take, inputs);
+        List<FacePart> list = new ArrayList<>();
+        for (Face face : enclosure.faces()) {
+            OutsideBoundary boundary = OutsideBoundary.of(enclosure, face, inputs.around());
+            boundaries.add(boundary);
+            list.add(kinds.of(face, boundary));
+        }
+        parts = list.toArray(new FacePart[0]);
+        for (FacePart part : parts) {
+            if (part instanceof FilmedFace under) {
+                filmed.add(under);
+            } else if (part instanceof WettedFace wet) {
+                wetted.add(wet);
+            }
+        }
+        hourStartC = new double[parts.length];
+        hourChangeK = new double[parts.length];
+    }
+
+    FacePart[] parts() {
+        return parts;
+    }
+
+    List<WettedFace> wetted() {
+        return wetted;
+    }
+
+    List<FilmedFace> filmed() {
+        return filmed;
+    }
+
+    /** Lets the water of each face run as its cooler does. */
+    void drivenBy(CoolerPart[] coolers) {
+        filmed.forEach(face -> face.drivenBy(coolers[face.cooler()]));
+    }
+
+    /** Enters an hour of the weather and of the water. */
+    void hour(int hour) {
+        for (int i = 0; i < parts.length; i++) {
+            OutsideBoundary b = boundaries.get(i);
+            parts[i].farFilm(0.5 * (b.filmWm2K(hour) + b.filmWm2K(hour + 1)));
+            hourStartC[i] = b.temperatureC(hour);
+            hourChangeK[i] = b.temperatureC(hour + 1) - hourStartC[i];
+        }
+        for (FilmedFace face : filmed) {
+            WaterFilm water = (WaterFilm) inputs.coolers().get(face.cooler());
+            int ofDay = (int) Math.floor(inputs.startsAtHour() + hour) % 24;
+            double inletC = water.inletC(ofDay);
+            double outdoorC =
+                    0.5
+                            * (inputs.around().weather().temperatureC(hour)
+                                    + inputs.around().weather().temperatureC(hour + 1));
+            face.hour(
+                    inletC, water.chiller().map(c -> c.electricPerW(inletC, outdoorC)).orElse(0.0));
+        }
+    }
+
+    /** Sets what lies beyond at a share of the hour. */
+    void at(double share) {
+        for (int i = 0; i < parts.length; i++) {
+            parts[i].beyond(hourStartC[i] + share * hourChangeK[i], hourChangeK[i] / 3600);
+        }
+    }
+
+    /** Lets the films of water follow the state, and the sand of wetted walls. */
+    void settle(AirState air, double[] y) {
+        filmed.forEach(face -> face.settle(air, y));
+        wetted.forEach(face -> face.follow(y));
+    }
+
+    void steadyProfile(double airC, double[] y) {
+        for (FacePart part : parts) {
+            part.steadyProfile(airC, y);
+        }
+    }
+
+    double layersJ(double[] y) {
+        return Arrays.stream(parts).mapToDouble(face -> face.heatJ(y)).sum();
+    }
+
+    double waterKg(double[] y) {
+        return Arrays.stream(parts).mapToDouble(face -> face.waterKg(y)).sum();
+    }
+
+    void tolerances(double airK, double[] tolerances) {
+        for (FacePart part : parts) {
+            part.tolerances(airK, tolerances);
+        }
+    }
+
+    List<Reason> reasons() {
+        return boundaries.stream().flatMap(b -> b.reasons().stream()).distinct().toList();
+    }
+}
