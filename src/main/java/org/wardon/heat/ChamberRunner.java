@@ -44,6 +44,8 @@ final class ChamberRunner implements Integrator.StepListener {
     private final Integrator integrator;
     private final double[] totals;
     private final SwitchedCoolers thermostats;
+    private final Watering watering;
+    private final Integrator.Trigger triggers;
     private final EnergyBudget budget;
     private final Carbon carbon;
     private final HourRecorder hours;
@@ -82,6 +84,8 @@ final class ChamberRunner implements Integrator.StepListener {
         integrator = new Integrator(network, EDGES, FIRST_STEP_S, SHORTEST_STEP_S);
         totals = integrator.totals();
         thermostats = new SwitchedCoolers(network);
+        watering = new Watering(run, network, y);
+        triggers = new FirstOf(thermostats, watering);
         budget = new EnergyBudget(run, network);
         double pressure = RunCompiler.pressurePa(run);
         carbon = new Carbon(pressure);
@@ -171,8 +175,9 @@ final class ChamberRunner implements Integrator.StepListener {
 
     private double advance(double from, double until) {
         try {
-            double t = integrator.advance(from, y, until, thermostats, this);
+            double t = integrator.advance(from, y, until, triggers, this);
             if (integrator.fired()) {
+                watering.fire(t, y);
                 integrator.restart(thermostats.fire(t, y) ? STARTED : RESTED);
             }
             return t;
@@ -288,6 +293,10 @@ final class ChamberRunner implements Integrator.StepListener {
             case POWER_OFF -> power(t, false);
             case POWER_ON -> power(t, true);
             case DEFROST_STARTS, DEFROST_ENDS -> defrost(edge, t);
+            case WALL_POURED -> {
+                watering.pour(edge.index(), t, y);
+                restart(edge);
+            }
             case DOOR_OPENS, DOOR_SHUTS -> door(edge);
             case ARRIVES -> arrive(edge, t);
             case LEAVES -> leave(edge, t);
@@ -413,7 +422,8 @@ final class ChamberRunner implements Integrator.StepListener {
             evaporated += lot.totals().evaporatedKg();
             events.addAll(lot.wetSpans(end));
         }
-        for (Spans spans : List.of(outages, tripped, wetFaces, icing, budget.spans())) {
+        for (Spans spans :
+                List.of(outages, tripped, wetFaces, icing, watering.spans(), budget.spans())) {
             events.addAll(spans.until(end));
         }
         events.sort(Comparator.comparingDouble(CourseEvent::fromS));
@@ -445,6 +455,7 @@ final class ChamberRunner implements Integrator.StepListener {
                 coolers(),
                 heat,
                 water(evaporated, packagesKg, respiration),
+                watering.ledger(y, totals),
                 layersError(),
                 network.reasons());
     }

@@ -14,6 +14,7 @@ import org.wardon.produce.Reason;
  * @param coolers what each cooler did, in their order; none with an ideal one
  * @param heat heat by term
  * @param water water by term
+ * @param sand water of wetted walls
  * @param layersErrorShare error of the heat balance of the faces' layers, share of what entered
  *     them
  * @param reasons what had to be estimated, with an empty subject
@@ -27,6 +28,7 @@ public record Course(
         List<CoolerTotals> coolers,
         HeatLedger heat,
         WaterLedger water,
+        SandLedger sand,
         double layersErrorShare,
         List<Reason> reasons) {
     /** Copies the lists. */
@@ -66,13 +68,13 @@ public record Course(
     }
 
     /**
-     * Returns the worst error of the balances of heat and water.
+     * Returns the worst error of the balances of heat, of water, and of the water of wetted walls.
      *
      * @return percent
      */
     public double balanceErrorPct() {
         double worst = Math.max(heat.errorShare(), water.errorShare());
-        return 100 * Math.max(worst, layersErrorShare);
+        return 100 * Math.max(Math.max(worst, sand.errorShare()), layersErrorShare);
     }
 
     /**

@@ -21,6 +21,8 @@ public record CourseEvent(Kind kind, String subject, double fromS, double untilS
         TRIPPED,
         /** Frost gathered on a coil without defrost. */
         ICES_UP,
+        /** A wetted wall stood dry. */
+        DRY_WALL,
         /** The daily energy was used up. */
         ENERGY_USED_UP
     }

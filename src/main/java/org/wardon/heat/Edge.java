@@ -19,6 +19,7 @@ record Edge(double atS, Kind kind, int index) {
         POWER_ON,
         DEFROST_STARTS,
         DEFROST_ENDS,
+        WALL_POURED,
         DOOR_SHUTS,
         LEAVES,
         ARRIVES,

@@ -3,11 +3,15 @@ package org.wardon.heat;
 import java.util.EnumMap;
 import java.util.Map;
 import java.util.Objects;
+import org.wardon.air.MoistAir;
 import org.wardon.heat.network.ChamberNetwork;
 import org.wardon.heat.network.Terms;
 
 /** Writes down the chamber's hours. */
 final class HourRecorder {
+    /** Less water than this in a span has no temperature of its own, kg. */
+    private static final double LEAST_WATER_KG = 1e-6;
+
     private final ChamberNetwork network;
     private final Terms terms;
     private final Map<Hours.Column, double[]> columns = new EnumMap<>(Hours.Column.class);
@@ -18,6 +22,8 @@ final class HourRecorder {
     private double lastElectricity;
     private double lastExchanged;
     private double lastRespiration;
+    private double lastWaterKg;
+    private double lastOutletJ;
     private double lowest = Double.POSITIVE_INFINITY;
     private double highest = Double.NEGATIVE_INFINITY;
     private double supply = Double.NaN;
@@ -66,8 +72,15 @@ final class HourRecorder {
         set(Hours.Column.SUPPLY_C, supply);
         set(Hours.Column.HUMIDITY_RATIO, network.ratio(y));
         set(Hours.Column.RESPIRATION_W, (respirationJ - lastRespiration) / span);
+        set(Hours.Column.WATER_OUT_C, waterOutC(totals));
         size++;
         startSpan(t, totals, respirationJ);
+    }
+
+    private double waterOutC(double[] totals) {
+        double kg = terms.facesWaterKg(totals) - lastWaterKg;
+        double joule = terms.facesOutletJ(totals) - lastOutletJ;
+        return kg > LEAST_WATER_KG ? joule / (kg * MoistAir.WATER_J_KG_K) : Double.NaN;
     }
 
     private void startSpan(double t, double[] totals, double respirationJ) {
@@ -77,6 +90,8 @@ final class HourRecorder {
         lastElectricity = terms.electricity(totals);
         lastExchanged = terms.exchanged(totals);
         lastRespiration = respirationJ;
+        lastWaterKg = terms.facesWaterKg(totals);
+        lastOutletJ = terms.facesOutletJ(totals);
         lowest = Double.POSITIVE_INFINITY;
         highest = Double.NEGATIVE_INFINITY;
         supply = Double.NaN;

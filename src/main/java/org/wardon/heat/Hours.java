@@ -29,7 +29,8 @@ public final class Hours {
         FREE_M3,
         SUPPLY_C,
         HUMIDITY_RATIO,
-        RESPIRATION_W
+        RESPIRATION_W,
+        WATER_OUT_C
     }
 
     Hours(Map<Column, double[]> columns, int rows) {
@@ -188,5 +189,15 @@ public final class Hours {
      */
     public double respirationW(int i) {
         return get(Column.RESPIRATION_W, i);
+    }
+
+    /**
+     * Returns the mean temperature of the water that left the faces in the span before.
+     *
+     * @param i row
+     * @return °C; NaN where no water ran
+     */
+    public double waterOutC(int i) {
+        return get(Column.WATER_OUT_C, i);
     }
 }

@@ -8,6 +8,7 @@ import java.util.Optional;
 import org.wardon.air.Timeline;
 import org.wardon.cooling.Defrost;
 import org.wardon.cooling.Outage;
+import org.wardon.cooling.WettedWall;
 import org.wardon.enclosure.Door;
 import org.wardon.enclosure.Gains;
 
@@ -30,6 +31,7 @@ final class Schedule {
         double midnight = -run.timeline().secondOfDay(0);
         for (int day = 0; midnight < run.durationS(); day++, midnight += Timeline.DAY_S) {
             schedule.day(day, midnight);
+            schedule.pourings(midnight);
         }
         schedule.outages();
         schedule.stays();
@@ -89,6 +91,21 @@ final class Schedule {
             double start = from + i * spacing + 0.5 * (spacing - open);
             add(start, Edge.Kind.DOOR_OPENS, 0);
             add(start + open, Edge.Kind.DOOR_SHUTS, 0);
+        }
+    }
+
+    /** Water poured before the run begins is in the sand already. */
+    private void pourings(double midnight) {
+        for (int i = 0; i < run.coolers().size(); i++) {
+            if (run.controlMode() != ControlMode.IDEAL
+                    && run.coolers().get(i) instanceof WettedWall wall) {
+                for (LocalTime hour : wall.pouredAt()) {
+                    double at = midnight + hour.toSecondOfDay();
+                    if (at >= 0) {
+                        add(at, Edge.Kind.WALL_POURED, i);
+                    }
+                }
+            }
         }
     }
 

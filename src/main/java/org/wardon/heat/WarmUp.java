@@ -4,13 +4,14 @@ import java.util.List;
 import org.wardon.air.MoistAir;
 import org.wardon.air.Timeline;
 import org.wardon.air.Weather;
+import org.wardon.cooling.FaceCooler;
 import org.wardon.errors.Progress;
 import org.wardon.heat.network.ChamberNetwork;
 
 /**
  * The state a run starts with. A chamber held at its setting starts with faces at the steady
- * profile; one that follows the weather, without lots and with its coolers at rest, after its first
- * day came five times.
+ * profile; one that follows the weather, without lots and with its coolers at rest but for walls
+ * kept wet, after its first day came five times.
  */
 final class WarmUp {
     private static final int DAYS = 5;
@@ -31,7 +32,7 @@ final class WarmUp {
         ChamberRunner runner = new ChamberRunner(before, empty, warm, accuracy);
         runner.run(Progress.SILENT);
         // Faces and structure come first in the state, coolers and lots after them; before the run
-        // neither was there.
+        // only coolers that are part of a face were there.
         System.arraycopy(warm, 0, y, 0, warm.length);
         run.start()
                 .humidityPct()
@@ -67,7 +68,8 @@ final class WarmUp {
                 new Timeline(run.timeline().from().minusDays(DAYS), run.site().zone()),
                 new Weather(temperature, humidity, sun, wind),
                 run.enclosure(),
-                List.of(),
+                // Wetted walls are wet before the run too: they are what the weather makes of them.
+                run.coolers().stream().filter(FaceCooler.class::isInstance).toList(),
                 run.setting(),
                 List.of(),
                 List.of(),

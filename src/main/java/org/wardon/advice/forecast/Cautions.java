@@ -141,6 +141,8 @@ final class Cautions {
             case TRIPPED -> add(Level.CAUTION, Reason.about("trips", chamber.id(), PRACTICE, told));
             case ICES_UP ->
                     add(Level.CAUTION, Reason.about("coil-iced", chamber.id(), PRACTICE, told));
+            case DRY_WALL ->
+                    add(Level.CAUTION, Reason.about("dry-wall", chamber.id(), "own", told));
             case ENERGY_USED_UP ->
                     add(Level.CAUTION, Reason.about("energy-used-up", chamber.id(), "own", told));
             case OUTAGE -> add(Level.NOTE, Reason.about("outage", chamber.id(), "own", told));

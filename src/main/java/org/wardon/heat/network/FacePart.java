@@ -74,4 +74,14 @@ interface FacePart extends Part {
     default double electricityJ(double[] totals) {
         return 0;
     }
+
+    /** Water that ran over it, kg. */
+    default double passedKg(double[] totals) {
+        return 0;
+    }
+
+    /** Heat of that water leaving, above 0 °C, J. */
+    default double outletJ(double[] totals) {
+        return 0;
+    }
 }

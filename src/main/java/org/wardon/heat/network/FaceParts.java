@@ -115,11 +115,11 @@ final class FaceParts {
         Enclosure enclosure = inputs.enclosure();
         List<Layer> layers = new ArrayList<>(outside);
         layers.addAll(boundary.addedLayers());
-        layers.addAll(face.layers());
+        layers.addAll(face.asBuilt());
         layers.addAll(inside);
         double wall = inputs.tuning().wall();
-        FaceGrid grid =
-                new FaceGrid(layers, FaceFilms.insideM2KW(enclosure, face, boundary, inputs), wall);
+        FaceFilms.Film film = FaceFilms.inside(enclosure, face, boundary, inputs);
+        FaceGrid grid = new FaceGrid(layers, film.resistanceM2KW(), wall);
         double area = enclosure.box().areaM2(face.name());
         double steady = grid.steady(boundary.filmWm2K(0) * wall);
         return new FaceChain.Build(
@@ -128,7 +128,7 @@ final class FaceParts {
                 area,
                 grid,
                 enclosure.thermalBridgePct() / 100 * area * steady,
-                FaceFilms.convectiveWm2K(boundary.direction()),
+                film.convectiveWm2K(),
                 wall,
                 inputs.plain());
     }

@@ -213,13 +213,13 @@ abstract class FilmedFace extends FaceChain {
         change[flowAt + FROM_BEYOND] = -areaM2 * outer * v[outermost];
     }
 
-    /** Water that ran over the face so far, kg. */
-    double passedKg(double[] totals) {
+    @Override
+    public double passedKg(double[] totals) {
         return totals[flowAt + WATER];
     }
 
-    /** Heat of it leaving so far, above 0 °C, J. */
-    double outletJ(double[] totals) {
+    @Override
+    public double outletJ(double[] totals) {
         return totals[flowAt + OUTLET];
     }
 

@@ -366,6 +366,34 @@ public final class Terms {
     }
 
     /**
+     * Water that ran over faces.
+     *
+     * @param totals integrals of the flows
+     * @return kg
+     */
+    public double facesWaterKg(double[] totals) {
+        double sum = 0;
+        for (FacePart face : faces) {
+            sum += face.passedKg(totals);
+        }
+        return sum;
+    }
+
+    /**
+     * Heat of that water leaving, above 0 °C.
+     *
+     * @param totals integrals of the flows
+     * @return J
+     */
+    public double facesOutletJ(double[] totals) {
+        double sum = 0;
+        for (FacePart face : faces) {
+            sum += face.outletJ(totals);
+        }
+        return sum;
+    }
+
+    /**
      * What one cooler did.
      *
      * @param i number of the cooler

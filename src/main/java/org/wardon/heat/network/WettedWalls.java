@@ -77,4 +77,14 @@ public final class WettedWalls {
     public double sandKg(double[] y) {
         return faces.stream().mapToDouble(face -> face.sandKg(y)).sum();
     }
+
+    /**
+     * Returns the water that evaporated outside and from the damp share inside.
+     *
+     * @param totals integrals of the flows
+     * @return kg
+     */
+    public double evaporatedKg(double[] totals) {
+        return faces.stream().mapToDouble(face -> face.waterUsedKg(totals)).sum();
+    }
 }
