@@ -29,6 +29,9 @@ public record WaterLedger(
         double air,
         double formed,
         double ranOff) {
+    /** Below this what passed is rounding, kg. */
+    private static final double LEAST_KG = 1e-6;
+
     /**
      * Returns the sum of all terms, which must be nothing.
      *
@@ -50,7 +53,7 @@ public record WaterLedger(
     /**
      * Returns the error of the balance.
      *
-     * @return share of the throughput; 0 where nothing passed
+     * @return share of the throughput; 0 where less than a milligram passed
      */
     public double errorShare() {
         double all = 0;
@@ -60,6 +63,6 @@ public record WaterLedger(
                 }) {
             all += Math.abs(term);
         }
-        return all > 0 ? Math.abs(sum()) / (0.5 * all) : 0;
+        return all > LEAST_KG ? Math.abs(sum()) / (0.5 * all) : 0;
     }
 }

@@ -22,7 +22,7 @@ import org.wardon.heat.solver.Tree;
 
 /** Makes each face plain, wetted outside or under water inside, as the coolers of the run ask. */
 final class FaceParts {
-    /** A skin so thin that it is mass on the surface: the wet surface is a node of its own. */
+    /** Mass for a wet surface whose layer has none: the surface must be a node of its own. */
     private static final Layer SKIN = new Layer("water", 0.0005, 0.6, 1_000, 4_186);
 
     private final Tree tree;
@@ -68,8 +68,7 @@ final class FaceParts {
                 !(face.beyond() instanceof Beyond.Ground)
                         && !(face.beyond() instanceof Beyond.Neighbour),
                 "face " + face.name() + " cannot dry to " + face.beyond());
-        FaceChain.Build build =
-                build(WettedFace.FLOWS, index, face, boundary, List.of(SKIN), List.of());
+        FaceChain.Build build = build(WettedFace.FLOWS, index, face, boundary, true);
         double area = build.areaM2() / area(wall.wets());
         double radiant =
                 face.beyond() instanceof Beyond.Outdoors || face.beyond() instanceof Beyond.Shade
@@ -84,8 +83,7 @@ final class FaceParts {
     }
 
     private FilmedFace filmed(WaterFilm film, int index, Face face, OutsideBoundary boundary) {
-        FaceChain.Build build =
-                build(FilmedFace.FLOWS, index, face, boundary, List.of(), List.of(SKIN));
+        FaceChain.Build build = build(FilmedFace.FLOWS, index, face, boundary, false);
         double share = across(face.name()) / film.wets().stream().mapToDouble(this::across).sum();
         double pumpW = film.pumpW() * share;
         double limitW =
@@ -106,17 +104,14 @@ final class FaceParts {
     }
 
     private FaceChain.Build build(
-            int flows,
-            int cooler,
-            Face face,
-            OutsideBoundary boundary,
-            List<Layer> outside,
-            List<Layer> inside) {
+            int flows, int cooler, Face face, OutsideBoundary boundary, boolean wetOutside) {
         Enclosure enclosure = inputs.enclosure();
-        List<Layer> layers = new ArrayList<>(outside);
-        layers.addAll(boundary.addedLayers());
+        List<Layer> layers = new ArrayList<>(boundary.addedLayers());
         layers.addAll(face.asBuilt());
-        layers.addAll(inside);
+        int wet = wetOutside ? 0 : layers.size() - 1;
+        if (layers.get(wet).capacityJm2K() <= 0) {
+            layers.add(wetOutside ? 0 : layers.size(), SKIN);
+        }
         double wall = inputs.tuning().wall();
         FaceFilms.Film film = FaceFilms.inside(enclosure, face, boundary, inputs);
         FaceGrid grid = new FaceGrid(layers, film.resistanceM2KW(), wall);
