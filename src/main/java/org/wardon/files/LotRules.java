@@ -4,6 +4,7 @@ import java.time.LocalDateTime;
 import java.util.List;
 import java.util.Optional;
 import org.wardon.files.json.Faults;
+import org.wardon.files.json.Json;
 import org.wardon.files.json.Part;
 import org.wardon.plan.Defaults;
 
@@ -103,25 +104,58 @@ final class LotRules {
                     "the lot moves but has no chamber to start from",
                     "accepted: chamber given too");
         }
-        LocalDateTime last = arrives;
+        Optional<LocalDateTime> end = Times.end(plan);
+        Optional<String> here = lot.at("chamber").text();
+        Optional<LocalDateTime> before = Optional.empty();
         for (Part move : moves.items()) {
-            ids.chamber(move.at("to"), plan);
+            Part to = move.at("to");
+            ids.chamber(to, plan);
+            if (here.isPresent() && to.text().equals(here)) {
+                faults.add(
+                        to.path(),
+                        "is " + Json.quoted(here.get()) + ", where the lot stands already",
+                        "accepted: another chamber, or leave this move out");
+            }
+            here = to.text();
             Optional<LocalDateTime> at = Times.at(move.at("at"));
-            if (at.isEmpty()) {
-                continue;
+            if (at.isPresent()) {
+                moved(move.at("at"), at.get(), arrives, before);
+                movedIn(move.at("at"), at.get(), leaves, end);
+                before = at;
             }
-            if (!at.get().isAfter(last)) {
-                faults.add(
-                        move.at("at").path(),
-                        "is " + at.get() + ", not after " + last,
-                        "accepted: moves in order, after the lot arrives");
-            } else if (leaves.isPresent() && !at.get().isBefore(leaves.get())) {
-                faults.add(
-                        move.at("at").path(),
-                        "is " + at.get() + ", when the lot has left at " + leaves.get(),
-                        "accepted: moves before the lot leaves");
-            }
-            last = at.get();
+        }
+    }
+
+    private void moved(
+            Part part, LocalDateTime at, LocalDateTime arrives, Optional<LocalDateTime> before) {
+        if (at.isBefore(arrives)) {
+            faults.add(
+                    part.path(),
+                    "is " + at + ", before the lot arrives at " + arrives,
+                    "accepted: from its arrival on");
+        } else if (before.isPresent() && !at.isAfter(before.get())) {
+            faults.add(
+                    part.path(),
+                    "is " + at + ", not after the move before it at " + before.get(),
+                    "accepted: moves in order of time");
+        }
+    }
+
+    private void movedIn(
+            Part part,
+            LocalDateTime at,
+            Optional<LocalDateTime> leaves,
+            Optional<LocalDateTime> end) {
+        if (leaves.isPresent() && !at.isBefore(leaves.get())) {
+            faults.add(
+                    part.path(),
+                    "is " + at + ", when the lot has left at " + leaves.get(),
+                    "accepted: moves before the lot leaves");
+        } else if (end.isPresent() && !at.isBefore(end.get())) {
+            faults.add(
+                    part.path(),
+                    "is " + at + ", when the plan has ended",
+                    "accepted: before " + end.get());
         }
     }
 }

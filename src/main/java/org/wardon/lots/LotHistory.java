@@ -181,14 +181,27 @@ public final class LotHistory {
      */
     public LotHistory then(LotHistory next) {
         Builder b = new Builder();
-        copy(this, Double.NEGATIVE_INFINITY, b);
-        copy(next, timeS[size() - 1], b);
+        copy(this, Double.NEGATIVE_INFINITY, Double.POSITIVE_INFINITY, b);
+        copy(next, timeS[size() - 1], Double.POSITIVE_INFINITY, b);
         return b.build();
     }
 
-    private static void copy(LotHistory h, double afterS, Builder b) {
+    /**
+     * Returns the part of this history within a span.
+     *
+     * @param fromS first time, s
+     * @param untilS last time, s; at least two samples must stand between
+     * @return the part
+     */
+    public LotHistory within(double fromS, double untilS) {
+        Builder b = new Builder();
+        copy(this, Math.nextDown(fromS), untilS, b);
+        return b.build();
+    }
+
+    private static void copy(LotHistory h, double afterS, double untilS, Builder b) {
         for (int i = 0; i < h.size(); i++) {
-            if (h.timeS[i] > afterS) {
+            if (h.timeS[i] > afterS && h.timeS[i] <= untilS) {
                 b.add(
                         h.timeS[i],
                         h.meanC[i],

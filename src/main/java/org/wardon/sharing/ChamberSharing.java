@@ -40,18 +40,24 @@ public final class ChamberSharing {
     }
 
     private static double marketEndS(Together lot) {
-        return lot.leavesS() + lot.wish().marketDays() * Timeline.DAY_S;
+        return lot.span().goesS() + lot.wish().marketDays() * Timeline.DAY_S;
     }
 
+    /** Told where the lot ends: what it lasts is made in all places together. */
     private void lasts(Together lot) {
+        if (!lot.span().last()) {
+            return;
+        }
         double sound = Outlook.shareSound(lot.fates(), marketEndS(lot));
         if (sound >= 1 - Limits.GOOD_SHARE) {
             return;
         }
         double[] days =
-                lot.fates().stream().mapToDouble(fate -> fate.daysLeft(lot.arrivesS())).toArray();
+                lot.fates().stream()
+                        .mapToDouble(fate -> fate.daysLeft(lot.span().storedS()))
+                        .toArray();
         Spread spread = Spread.of(days);
-        double wanted = (marketEndS(lot) - lot.arrivesS()) / Timeline.DAY_S;
+        double wanted = (marketEndS(lot) - lot.span().storedS()) / Timeline.DAY_S;
         double handbook =
                 lot.wish()
                         .lot()
@@ -79,7 +85,8 @@ public final class ChamberSharing {
             injured += fate.endS(Mechanism.CHILLING) <= marketEndS(lot) ? 1 : 0;
         }
         double share = injured / lot.fates().size();
-        if (share < Limits.GOOD_CHILLING) {
+        boolean coldHere = lot.span().last() || lot.meanC() < lot.model().lowestSafeC();
+        if (share < Limits.GOOD_CHILLING || !coldHere) {
             return;
         }
         verdict = verdict.worse(share < Limits.TOLERABLE_CHILLING ? Verdict.TOLERABLE : Verdict.NO);

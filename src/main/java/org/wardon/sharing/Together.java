@@ -11,8 +11,7 @@ import org.wardon.keeping.KeepingModel;
  * @param model how it keeps
  * @param fates its fates in the draws, with the chamber's air, humidity and ethylene
  * @param massKg its mass, kg
- * @param arrivesS when it arrives, s
- * @param leavesS when it leaves, s
+ * @param span when it is there, and when in the store
  * @param meanC its mean temperature while there, °C
  * @param ethylenePpm mean ethylene while it is there, µL/L
  */
@@ -21,10 +20,29 @@ public record Together(
         KeepingModel model,
         List<Fate> fates,
         double massKg,
-        double arrivesS,
-        double leavesS,
+        Span span,
         double meanC,
         double ethylenePpm) {
+    /**
+     * When a lot is in a chamber, and when in the store, of which it may leave another chamber.
+     *
+     * @param arrivesS when it comes into the chamber, s
+     * @param leavesS when it leaves the chamber, s
+     * @param storedS when it comes into the store, s
+     * @param goesS when it leaves the store, s
+     */
+    public record Span(double arrivesS, double leavesS, double storedS, double goesS) {
+        /** A lot that is nowhere else in the store. */
+        public static Span only(double arrivesS, double leavesS) {
+            return new Span(arrivesS, leavesS, arrivesS, leavesS);
+        }
+
+        /** Whether the lot leaves the store from here. */
+        boolean last() {
+            return leavesS == goesS;
+        }
+    }
+
     /** Copies the list. */
     public Together {
         fates = List.copyOf(fates);
@@ -32,8 +50,8 @@ public record Together(
 
     /** Days both are there, 0 where their stays do not meet. */
     double daysWith(Together other) {
-        double from = Math.max(arrivesS, other.arrivesS);
-        double to = Math.min(leavesS, other.leavesS);
+        double from = Math.max(span.arrivesS(), other.span.arrivesS());
+        double to = Math.min(span.leavesS(), other.span.leavesS());
         return Math.max(0, to - from) / org.wardon.air.Timeline.DAY_S;
     }
 

@@ -4,6 +4,7 @@ import static org.junit.jupiter.api.Assertions.assertEquals;
 import static org.junit.jupiter.api.Assertions.assertTrue;
 
 import java.util.List;
+import java.util.Map;
 import org.junit.jupiter.api.Test;
 import org.wardon.Source;
 import org.wardon.keeping.ethylene.ChamberAir;
@@ -167,17 +168,69 @@ class LotFatesTest {
         }
         KeptLot apples = Crops.lot(Crops.get("apple"));
         LotHistory cold = held(0, 0.92, 0, 10);
-        ChamberEthylene run =
-                ChamberEthylene.of(
-                        new ChamberAir(hours, exchange, free),
-                        List.of(new Giver(KeepingModel.of(apples), cold, 3_000, 20 * DAY_S)),
+        StoreEthylene run =
+                StoreEthylene.of(
+                        Map.of("north", new ChamberAir(hours, exchange, free)),
+                        List.of(inNorth(apples, cold, 20 * DAY_S)),
                         ChamberEthylene.OUTDOOR_PPM,
                         Draw.MEDIAN);
         double rate =
                 Crops.model("apple").response().giving().microlitrePerKgHour(0, 1, Draw.MEDIAN);
         double rest = Response.steadyPpm(150 * rate, 6) + ChamberEthylene.OUTDOOR_PPM;
-        assertEquals(rest, run.ppmAt(10 * DAY_S), 1e-3 * rest);
-        assertEquals(rest, run.histories().get(0).ethylenePpm(1), 1e-3 * rest);
+        assertEquals(rest, run.chamber("north").ppmAt(10 * DAY_S), 1e-3 * rest);
+        LotHistory felt = run.histories().values().iterator().next();
+        assertEquals(rest, felt.ethylenePpm(1), 1e-3 * rest);
+    }
+
+    private static Giver inNorth(KeptLot lot, LotHistory history, double leavesS) {
+        List<Giver.Place> here = List.of(new Giver.Place(0, "north"));
+        return new Giver(KeepingModel.of(lot), history, 3_000, leavesS, here);
+    }
+
+    @Test
+    void aLotThatIsMovedTakesItsEthyleneAndItsRipeningAlong() {
+        double[] hours = new double[481];
+        double[] exchange = new double[481];
+        double[] free = new double[481];
+        for (int i = 0; i < hours.length; i++) {
+            hours[i] = 3_600.0 * i;
+            exchange[i] = 20.0 * 6 / DAY_S;
+            free[i] = 15;
+        }
+        ChamberAir air = new ChamberAir(hours, exchange, free);
+        KeptLot bananas = Crops.lot(Crops.get("banana-green"));
+        LotHistory warm = held(20, 0.9, 0, 20);
+        StoreEthylene stays =
+                StoreEthylene.of(
+                        Map.of("north", air),
+                        List.of(inNorth(bananas, warm, 30 * DAY_S)),
+                        0.01,
+                        Draw.MEDIAN);
+        double ripens = stays.ripensS(bananas.id());
+        double moves = ripens + 2 * DAY_S;
+        StoreEthylene goes =
+                StoreEthylene.of(
+                        Map.of("north", air, "south", air),
+                        List.of(
+                                new Giver(
+                                        KeepingModel.of(bananas),
+                                        warm,
+                                        3_000,
+                                        30 * DAY_S,
+                                        List.of(
+                                                new Giver.Place(0, "north"),
+                                                new Giver.Place(moves, "south")))),
+                        0.01,
+                        Draw.MEDIAN);
+        assertEquals(ripens, goes.ripensS(bananas.id()), 0, "it began in the first chamber");
+        double before = stays.chamber("north").ppmAt(moves - 3_600);
+        assertEquals(before, goes.chamber("north").ppmAt(moves - 3_600), 1e-12);
+        double after = moves + 2 * DAY_S;
+        assertEquals(0.01, goes.chamber("north").ppmAt(after), 0.01, "nothing gives there");
+        assertTrue(goes.chamber("south").ppmAt(after) > 0.9 * before, "it gives on as ripe");
+        LotHistory felt = goes.histories().get(bananas.id());
+        assertEquals(
+                goes.chamber("south").ppmAt(20 * DAY_S), felt.ethylenePpm(felt.size() - 1), 1e-12);
     }
 
     @Test
@@ -192,14 +245,15 @@ class LotFatesTest {
         }
         KeptLot bananas = Crops.lot(Crops.get("banana-green"));
         LotHistory warm = held(20, 0.9, 0, 20);
-        ChamberEthylene run =
-                ChamberEthylene.of(
-                        new ChamberAir(hours, exchange, free),
-                        List.of(new Giver(KeepingModel.of(bananas), warm, 3_000, 30 * DAY_S)),
+        StoreEthylene run =
+                StoreEthylene.of(
+                        Map.of("north", new ChamberAir(hours, exchange, free)),
+                        List.of(inNorth(bananas, warm, 30 * DAY_S)),
                         ChamberEthylene.OUTDOOR_PPM,
                         Draw.MEDIAN);
-        double ripens = run.ripensS(0);
+        double ripens = run.ripensS(bananas.id());
         assertTrue(ripens > DAY_S && ripens < 15 * DAY_S, "ripens at " + ripens / DAY_S + " d");
-        assertTrue(run.ppmAt(20 * DAY_S) > 2 * run.ppmAt(ripens - 7_200));
+        ChamberEthylene level = run.chamber("north");
+        assertTrue(level.ppmAt(20 * DAY_S) > 2 * level.ppmAt(ripens - 7_200));
     }
 }

@@ -105,7 +105,8 @@ class SharingTest {
         KeepingModel model = Crops.model(id);
         LotHistory history = LotHistory.constant(atC, humidity, ppm, 7 * DAY_S);
         List<Fate> fates = DRAWS.stream().map(draw -> model.follow(history, draw)).toList();
-        return new Together(Wish.of(model.lot(), 7), model, fates, 500, 0, 7 * DAY_S, atC, ppm);
+        Together.Span span = Together.Span.only(0, 7 * DAY_S);
+        return new Together(Wish.of(model.lot(), 7), model, fates, 500, span, atC, ppm);
     }
 
     @Test

@@ -95,7 +95,10 @@ final class Actions {
     }
 
     private void move(LotSheet sheet, LotFates fates) {
-        String here = sheet.plan().chamber().orElse("");
+        if (sheet.visits().size() > 1) {
+            return; // The keeper moves it already.
+        }
+        String here = sheet.endsIn();
         double best = 0;
         Optional<Candidate> move = Optional.empty();
         double price = sheet.plan().market().pricePerKg() * sheet.plan().massKg();
@@ -153,8 +156,7 @@ final class Actions {
     }
 
     private double valueHere(LotSheet sheet) {
-        ChamberPlan chamber =
-                outcome.model().plan().getChamber(sheet.plan().chamber().orElseThrow());
+        ChamberPlan chamber = outcome.model().plan().getChamber(sheet.endsIn());
         return new LotFigures(sheet, chamber, outcome).valueKept();
     }
 

@@ -57,7 +57,9 @@ final class Cautions {
         }
         for (ChamberPlan chamber : plan.chambers()) {
             chamber(chamber);
+            new Deliveries(outcome, chamber).all().forEach(c -> add(c.level(), c.reason()));
         }
+        new Carried(outcome).all().forEach(c -> add(c.level(), c.reason()));
         outcome.model().sheets().forEach(this::lot);
         weather(plan);
         defaults(plan);
@@ -92,7 +94,7 @@ final class Cautions {
 
     private void chamber(ChamberPlan chamber) {
         Course course = outcome.course(chamber.id());
-        double most = OtherChambers.mostKg(outcome.model().sheetsIn(chamber.id()));
+        double most = OtherChambers.mostKg(outcome.model().visitsIn(chamber.id()));
         if (most > chamber.capacityKg()) {
             add(
                     Level.CAUTION,
@@ -187,11 +189,16 @@ final class Cautions {
     }
 
     /**
-     * How far a lot at rest stands above its air by its own breathing, at the chamber's setting.
+     * How far a lot at rest stands above its air by its own breathing, at the setting of the
+     * warmest chamber it stands in.
      */
     private void selfHeating(LotSheet sheet) {
-        String chamberId = sheet.plan().chamber().orElseThrow();
-        double settingC = outcome.model().plan().getChamber(chamberId).setting().temperatureC();
+        double settingC =
+                sheet.visits().stream()
+                        .map(visit -> outcome.model().plan().getChamber(visit.chamber()))
+                        .mapToDouble(chamber -> chamber.setting().temperatureC())
+                        .max()
+                        .orElseThrow();
         Lot lot = sheet.stay(Draw.MEDIAN).lot();
         double excessK =
                 StackCooling.selfHeatingK(

@@ -42,46 +42,67 @@ final class Company {
     List<Forecast.Sharing> verdicts() {
         List<Forecast.Sharing> verdicts = new ArrayList<>();
         for (ChamberPlan chamber : outcome.model().plan().chambers()) {
-            List<LotSheet> lots =
-                    outcome.model().sheetsIn(chamber.id()).stream()
-                            .filter(sheet -> outcome.has(sheet.id()))
+            List<Visit> visits =
+                    outcome.model().visitsIn(chamber.id()).stream()
+                            .filter(visit -> outcome.has(visit.id()))
+                            .filter(visit -> visit.arrivesS() < outcome.horizonS())
                             .toList();
-            if (lots.size() > 1) {
-                verdicts.add(verdict(chamber, lots));
+            if (visits.stream().map(Visit::id).distinct().count() > 1) {
+                verdicts.add(verdict(chamber, visits));
             }
         }
         return verdicts;
     }
 
-    private Forecast.Sharing verdict(ChamberPlan chamber, List<LotSheet> lots) {
+    private Forecast.Sharing verdict(ChamberPlan chamber, List<Visit> visits) {
         ChamberEthylene level = outcome.ethylene(chamber.id());
         ChamberVerdict found =
-                ChamberSharing.of(lots.stream().map(sheet -> together(sheet, level)).toList());
+                ChamberSharing.of(visits.stream().map(visit -> together(visit, level)).toList());
         List<Because> reasons = new ArrayList<>();
-        apart(lots).forEach(reason -> reasons.add(because(reason)));
+        apart(visits).forEach(reason -> reasons.add(because(reason)));
         found.reasons().forEach(reason -> reasons.add(because(reason)));
         return new Forecast.Sharing(chamber.id(), found.verdict().word(), reasons);
     }
 
-    /** Why pairs that no setting suits do not go together. */
-    private List<Reason> apart(List<LotSheet> lots) {
+    /** Why pairs that no setting suits do not go together; those that meet, where lots move. */
+    private List<Reason> apart(List<Visit> visits) {
         List<Reason> reasons = new ArrayList<>();
         List<Draw> draws = Draws.seeded(outcome.model().plan().seed(), StoreRun.DRAWS);
         List<Workable> workable =
-                lots.parallelStream()
-                        .map(sheet -> Workable.of(wish(sheet), sheet.model(), draws))
+                visits.parallelStream()
+                        .map(visit -> Workable.of(wish(visit), visit.sheet().model(), draws))
                         .toList();
         for (PairVerdict pair : Sharing.among(workable).pairs()) {
-            pair.reasons().stream()
-                    .filter(reason -> OF_SETTINGS.contains(reason.code()))
-                    .forEach(reasons::add);
+            if (meet(pair, visits)) {
+                pair.reasons().stream()
+                        .filter(reason -> OF_SETTINGS.contains(reason.code()))
+                        .filter(reason -> !reasons.contains(reason))
+                        .forEach(reasons::add);
+            }
         }
         return reasons;
     }
 
-    private Together together(LotSheet sheet, ChamberEthylene level) {
-        LotHistory history = outcome.history(sheet.id());
-        double untilS = Math.min(sheet.clock().leavesS(), outcome.horizonS());
+    /** Lots that never stand here at one time because one of them is moved need not agree. */
+    private static boolean meet(PairVerdict pair, List<Visit> visits) {
+        for (Visit a : visits) {
+            for (Visit b : visits) {
+                boolean pairOfThese =
+                        a.id().equals(pair.a()) && b.id().equals(pair.b()) && !a.equals(b);
+                boolean settled = a.only() && b.only();
+                boolean overlap = a.hereFromS() < b.leavesS() && b.hereFromS() < a.leavesS();
+                if (pairOfThese && (settled || overlap)) {
+                    return true;
+                }
+            }
+        }
+        return false;
+    }
+
+    private Together together(Visit visit, ChamberEthylene level) {
+        LotSheet sheet = visit.sheet();
+        LotHistory history = visit.within(outcome.history(visit.id()));
+        double untilS = Math.min(visit.leavesS(), outcome.horizonS());
         double sumC = 0;
         double sumPpm = 0;
         double span = 0;
@@ -93,22 +114,25 @@ final class Company {
         }
         boolean there = span > 0;
         return new Together(
-                wish(sheet),
+                wish(visit),
                 sheet.model(),
                 outcome.fates(sheet.id()).sold(),
                 sheet.plan().massKg(),
-                sheet.clock().hereFromS(),
-                sheet.clock().leavesS(),
+                new Together.Span(
+                        visit.hereFromS(),
+                        visit.leavesS(),
+                        sheet.clock().hereFromS(),
+                        sheet.clock().leavesS()),
                 there ? sumC / span : history.meanC(0),
                 there ? sumPpm / span : level.ppmAt(history.timeS(0)));
     }
 
-    private static Wish wish(LotSheet sheet) {
-        double days = (sheet.clock().leavesS() - sheet.clock().hereFromS()) / Timeline.DAY_S;
+    private static Wish wish(Visit visit) {
+        double days = (visit.leavesS() - visit.hereFromS()) / Timeline.DAY_S;
         return new Wish(
-                sheet.kept(),
+                visit.sheet().kept(),
                 Math.min(730, Math.max(0.1, days)),
-                sheet.marketDays(),
+                visit.sheet().marketDays(),
                 OptionalDouble.empty());
     }
 

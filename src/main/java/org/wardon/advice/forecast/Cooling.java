@@ -8,7 +8,7 @@ import org.wardon.lots.LotHistory;
 import org.wardon.plan.ChamberPlan;
 
 /**
- * How a lot cools in its chamber.
+ * How a lot cools in its chamber, or on its way through several to the one it ends in.
  *
  * <p>The cooling fraction is (mean - mark) / (mean at arrival - mark). The mark is the setting; in
  * a chamber that cannot reach it, the chamber's own mean air of the last 24 hours.
@@ -23,7 +23,7 @@ record Cooling(
     /** Below this difference cooling times say nothing, K. */
     private static final double LEAST_K = 2;
 
-    static Cooling of(LotSheet sheet, LotHistory history, ChamberPlan chamber, Course course) {
+    static Cooling of(LotHistory history, ChamberPlan chamber, Course course) {
         double start = history.meanC(0);
         double mark = markC(chamber, course);
         if (start - mark < LEAST_K) {

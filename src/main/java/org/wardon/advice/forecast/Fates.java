@@ -5,22 +5,21 @@ import java.util.Arrays;
 import java.util.HashMap;
 import java.util.List;
 import java.util.Map;
-import java.util.Optional;
 import org.wardon.air.Timeline;
 import org.wardon.cooling.Outage;
 import org.wardon.heat.AirSeries;
 import org.wardon.heat.Course;
 import org.wardon.heat.Hours;
-import org.wardon.keeping.ChamberEthylene;
+import org.wardon.heat.LotCourse;
 import org.wardon.keeping.Draw;
 import org.wardon.keeping.Fate;
 import org.wardon.keeping.Giver;
 import org.wardon.keeping.HistoryLegs;
+import org.wardon.keeping.StoreEthylene;
 import org.wardon.keeping.Window;
 import org.wardon.keeping.ethylene.ChamberAir;
 import org.wardon.lots.LotHistory;
 import org.wardon.plan.EthyleneAround;
-import org.wardon.plan.StorePlan;
 
 /** Follows the lots of a store through one draw: staying, sold, and without a chamber. */
 final class Fates {
@@ -51,43 +50,11 @@ final class Fates {
         }
     }
 
-    /** Ethylene of each chamber in a draw, and with it the completed histories of its lots. */
-    Map<String, ChamberEthylene> ethylene(Map<String, Course> courses, Draw draw) {
-        Map<String, ChamberEthylene> levels = new HashMap<>();
-        courses.forEach(
-                (id, course) ->
-                        levels.put(
-                                id,
-                                ChamberEthylene.of(
-                                        air(course.hours()),
-                                        givers(id, course),
-                                        around.outdoorPpm(),
-                                        draw)));
-        return levels;
-    }
-
-    /** Lots of a chamber that are in the run, in the order of the run. */
-    List<LotSheet> present(String chamberId, Course course) {
-        return model.sheetsIn(chamberId).stream()
-                .filter(
-                        sheet ->
-                                course.lots().stream()
-                                        .anyMatch(lot -> lot.stay().lot().id().equals(sheet.id())))
-                .toList();
-    }
-
-    /** Histories of all lots by id, with their ethylene. */
-    Map<String, LotHistory> histories(
-            Map<String, Course> courses, Map<String, ChamberEthylene> levels) {
-        Map<String, LotHistory> histories = new HashMap<>();
-        courses.forEach(
-                (id, course) -> {
-                    List<LotSheet> lots = present(id, course);
-                    for (int i = 0; i < lots.size(); i++) {
-                        histories.put(lots.get(i).id(), ById.get(levels, id).histories().get(i));
-                    }
-                });
-        return histories;
+    /** Ethylene of all chambers in a draw, and with it the completed histories of the lots. */
+    StoreEthylene ethylene(Map<String, Course> courses, Draw draw) {
+        Map<String, ChamberAir> air = new HashMap<>();
+        courses.forEach((id, course) -> air.put(id, air(course.hours())));
+        return StoreEthylene.of(air, givers(courses), around.outdoorPpm(), draw);
     }
 
     /** Follows every lot that has a history. */
@@ -176,19 +143,23 @@ final class Fates {
         return history.withEthylene(ppm);
     }
 
-    /** The last 24 hours of a history without an outage, or its last 24 hours. */
+    /** The last 24 hours of a history without an outage where it ends, or its last 24 hours. */
     private Window beyond(LotSheet sheet, LotHistory history) {
-        Window last = Window.lastDay(history);
-        StorePlan plan = model.plan();
-        Optional<String> chamber = sheet.plan().chamber();
-        List<Outage> outages =
-                chamber.isEmpty() ? List.of() : model.outages(plan.getChamber(chamber.get()));
+        Window whole = Window.lastDay(history);
+        List<Visit> visits = sheet.visits();
+        if (visits.isEmpty()) {
+            return whole;
+        }
+        Visit end = visits.get(visits.size() - 1);
+        double hereS = Math.max(history.timeS(0), end.hereFromS());
+        Window last = new Window(fromS(whole.fromS(), hereS, whole.toS()), whole.toS());
+        List<Outage> outages = model.outages(model.plan().getChamber(end.chamber()));
         Window window = last;
         for (int i = outages.size() - 1; i >= 0; i--) {
             Outage outage = outages.get(i);
             if (outage.startS() < window.toS() && outage.endS() > window.fromS()) {
                 double to = outage.startS();
-                double from = Math.max(history.timeS(0), to - Timeline.DAY_S);
+                double from = Math.max(hereS, to - Timeline.DAY_S);
                 if (to - from < Timeline.HOUR_S) {
                     return last;
                 }
@@ -198,15 +169,27 @@ final class Fates {
         return window;
     }
 
-    private List<Giver> givers(String chamberId, Course course) {
+    /** Where a window starts that is to lie in the last place, but is an hour long at least. */
+    private static double fromS(double fromS, double hereS, double toS) {
+        return Math.max(fromS, Math.min(hereS, toS - Timeline.HOUR_S));
+    }
+
+    private List<Giver> givers(Map<String, Course> courses) {
+        Map<String, LotCourse> lots = Legs.joined(courses.values());
         List<Giver> givers = new ArrayList<>();
-        for (LotSheet sheet : present(chamberId, course)) {
-            givers.add(
-                    new Giver(
-                            sheet.model(),
-                            course.lot(sheet.id()).history(),
-                            sheet.plan().massKg(),
-                            sheet.clock().leavesS()));
+        for (LotSheet sheet : model.sheets()) {
+            LotCourse lot = lots.get(sheet.id());
+            if (lot != null) {
+                givers.add(
+                        new Giver(
+                                sheet.model(),
+                                lot.history(),
+                                sheet.plan().massKg(),
+                                sheet.clock().leavesS(),
+                                sheet.visits().stream()
+                                        .map(v -> new Giver.Place(v.arrivesS(), v.chamber()))
+                                        .toList()));
+            }
         }
         return givers;
     }

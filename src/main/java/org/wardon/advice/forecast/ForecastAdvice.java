@@ -9,8 +9,6 @@ import java.util.Map;
 import java.util.stream.Stream;
 import org.wardon.advice.wording.Words;
 import org.wardon.air.Weather;
-import org.wardon.errors.BadInput;
-import org.wardon.errors.Fault;
 import org.wardon.errors.Progress;
 import org.wardon.files.forecast.ChamberForecast;
 import org.wardon.files.forecast.Forecast;
@@ -44,11 +42,9 @@ public final class ForecastAdvice {
      * @param asked the plan
      * @param progress hears how far the work has come
      * @return the advice
-     * @throws BadInput where the plan asks for what is not built: a lot moved between chambers
      * @throws org.wardon.errors.RunStopped where a chamber meets a state that cannot be
      */
     public StoreAdvice advise(StorePlan asked, Progress progress) {
-        refuseMoves(asked);
         Weather weather =
                 PlanWeather.prolonged(
                         asked.weatherSource().weather(),
@@ -59,23 +55,6 @@ public final class ForecastAdvice {
         StoreModel model = placed.told().isEmpty() ? open : model(placed.plan(), weather);
         StoreOutcome outcome = new StoreRun(model).run(progress);
         return together(outcome, placed.told());
-    }
-
-    private static void refuseMoves(StorePlan plan) {
-        List<Fault> faults = new ArrayList<>();
-        for (int i = 0; i < plan.lots().size(); i++) {
-            if (!plan.lots().get(i).moves().isEmpty()) {
-                faults.add(
-                        new Fault(
-                                plan.name(),
-                                "$.lots[" + i + "].moves",
-                                "a lot moved between chambers is not built into the forecast yet",
-                                "leave moves out; a lot that moves may be told as two lots"));
-            }
-        }
-        if (!faults.isEmpty()) {
-            throw new BadInput(faults);
-        }
     }
 
     private StoreModel model(StorePlan plan, Weather weather) {
@@ -113,8 +92,7 @@ public final class ForecastAdvice {
         List<LotForecast> lots = new ArrayList<>();
         for (LotSheet sheet : outcome.model().sheets()) {
             if (outcome.has(sheet.id())) {
-                ChamberPlan chamber =
-                        outcome.model().plan().getChamber(sheet.plan().chamber().orElseThrow());
+                ChamberPlan chamber = outcome.model().plan().getChamber(sheet.endsIn());
                 lots.add(new LotFigures(sheet, chamber, outcome).forecast());
             }
         }

@@ -61,7 +61,7 @@ record Holding(
         private final StoreOutcome outcome;
         private final Course course;
         private final Hours hours;
-        private final List<LotSheet> lots;
+        private final List<Visit> lots;
         private final List<Reason> reasons = new ArrayList<>();
 
         Judge(ChamberPlan chamber, StoreOutcome outcome) {
@@ -70,13 +70,14 @@ record Holding(
             course = outcome.course(chamber.id());
             hours = course.hours();
             lots =
-                    outcome.model().sheetsIn(chamber.id()).stream()
-                            .filter(sheet -> outcome.has(sheet.id()))
+                    outcome.model().visitsIn(chamber.id()).stream()
+                            .filter(visit -> outcome.has(visit.id()))
+                            .filter(visit -> visit.arrivesS() < outcome.horizonS())
                             .toList();
         }
 
         Holding holding() {
-            double firstS = lots.stream().mapToDouble(s -> s.clock().hereFromS()).min().orElse(0);
+            double firstS = lots.stream().mapToDouble(Visit::hereFromS).min().orElse(0);
             OptionalDouble pulledDownS = pulledDownS(firstS);
             double outside = 0;
             double disturbed = 0;
@@ -96,6 +97,7 @@ record Holding(
             }
             judgeAir(pulledDownS, outside, counted);
             lots.forEach(this::judgeLot);
+            judgeRises();
             OptionalDouble pull =
                     pulledDownS.isPresent()
                             ? OptionalDouble.of(
@@ -140,7 +142,7 @@ record Holding(
 
         private boolean disturbed(double atS, double firstS) {
             return lots.stream()
-                    .mapToDouble(sheet -> sheet.clock().arrivesS())
+                    .mapToDouble(Visit::arrivesS)
                     .anyMatch(
                             arrives ->
                                     arrives > firstS
@@ -169,20 +171,20 @@ record Holding(
             return sum / hours.size();
         }
 
-        private void judgeLot(LotSheet sheet) {
-            LotHistory history = outcome.history(sheet.id());
-            Cooling cooling = Cooling.of(sheet, history, chamber, course);
-            judgeCooling(sheet, history, cooling);
-            judgeRise(sheet, history, cooling);
-            judgeSafety(sheet, history, cooling);
+        private void judgeLot(Visit visit) {
+            LotHistory history = visit.within(outcome.history(visit.id()));
+            Cooling cooling = Cooling.of(history, chamber, course);
+            judgeCooling(visit, history, cooling);
+            judgeSafety(visit, history, cooling);
         }
 
-        private void judgeCooling(LotSheet sheet, LotHistory history, Cooling cooling) {
+        private void judgeCooling(Visit visit, LotHistory history, Cooling cooling) {
+            LotSheet sheet = visit.sheet();
             double allowed =
                     Math.max(
                             SEVEN_EIGHTHS_LEAST_H,
                             SEVEN_EIGHTHS_PER_HALF * sheet.kind().halfCoolingHours().middle());
-            double here = Math.min(sheet.clock().leavesS(), outcome.horizonS()) - history.timeS(0);
+            double here = Math.min(visit.leavesS(), outcome.horizonS()) - history.timeS(0);
             if (!cooling.wasWarm() || here < allowed * Timeline.HOUR_S) {
                 return;
             }
@@ -196,61 +198,27 @@ record Holding(
             }
         }
 
-        /** Rise of a cold lot over the twelve hours after another lot came in. */
-        private void judgeRise(LotSheet sheet, LotHistory history, Cooling cooling) {
-            for (LotSheet other : lots) {
-                double arrives = other.clock().arrivesS();
-                double coldAt =
-                        history.timeS(0) + cooling.sevenEighthsHours().orElse(0) * Timeline.HOUR_S;
-                if (other.id().equals(sheet.id())
-                        || arrives <= coldAt
-                        || arrives >= sheet.clock().leavesS()
-                        || (cooling.wasWarm() && cooling.sevenEighthsHours().isEmpty())) {
-                    continue;
-                }
-                double until =
-                        Math.min(
-                                sheet.clock().leavesS(),
-                                arrives + DISTURBED_HOURS * Timeline.HOUR_S);
-                double rise =
-                        extreme(history, arrives, until, true)
-                                - extreme(
-                                        history,
-                                        arrives - Timeline.HOUR_S,
-                                        arrives + Timeline.HOUR_S,
-                                        false);
-                if (rise > RISE_MOST_K) {
+        /** Rises of cold lots over the twelve hours after others came in. */
+        private void judgeRises() {
+            for (Deliveries.Rise rise : new Deliveries(outcome, chamber).rises()) {
+                if (rise.riseK() > RISE_MOST_K) {
                     sayOf(
                             "warmed-by-arrival",
-                            sheet,
-                            Argument.of(rise, "K"),
-                            Argument.text(other.id()));
+                            rise.cold().sheet(),
+                            Argument.of(rise.riseK(), "K"),
+                            Argument.text(String.join(", ", rise.comes())));
                 }
             }
         }
 
-        private static double extreme(
-                LotHistory history, double fromS, double toS, boolean highest) {
-            double found = Double.NaN;
-            for (int i = 0; i < history.size(); i++) {
-                if (history.timeS(i) >= fromS && history.timeS(i) <= toS) {
-                    double t = history.meanC(i);
-                    found =
-                            Double.isNaN(found)
-                                    ? t
-                                    : highest ? Math.max(found, t) : Math.min(found, t);
-                }
-            }
-            return found;
-        }
-
-        private void judgeSafety(LotSheet sheet, LotHistory history, Cooling cooling) {
+        private void judgeSafety(Visit visit, LotHistory history, Cooling cooling) {
+            LotSheet sheet = visit.sheet();
             double freezing = sheet.model().freezingC() + FREEZING_MARGIN_K;
-            if (anyWithin(sheet, history, 0, c -> c < freezing, false)) {
+            if (anyWithin(visit, history, 0, c -> c < freezing, false)) {
                 sayOf("near-freezing", sheet, Argument.of(sheet.model().freezingC(), "C"));
             }
             double risk = LotRisk.chilling(outcome.fates(sheet.id()), sheet.soldS());
-            if (risk >= RISK_MOST) {
+            if (risk >= RISK_MOST && (visit.only() || chills(visit, history))) {
                 sayOf("chilling-in-stay", sheet, Argument.of(100 * risk, "pct"));
             }
             double most =
@@ -260,21 +228,26 @@ record Holding(
                             + (cooling.sevenEighthsHours().orElse(0) + SETTLE_HOURS)
                                     * Timeline.HOUR_S;
             boolean cooled = !cooling.wasWarm() || cooling.sevenEighthsHours().isPresent();
-            if (cooled && anyWithin(sheet, history, settledS, c -> c > most, true)) {
+            if (cooled && anyWithin(visit, history, settledS, c -> c > most, true)) {
                 sayOf("lot-too-warm", sheet, Argument.of(most, "C"));
             }
         }
 
+        /** Whether a lot that is moved is in its harmful cold here. */
+        private boolean chills(Visit visit, LotHistory history) {
+            double lowestC = visit.sheet().model().lowestSafeC();
+            return anyWithin(visit, history, 0, c -> c < lowestC, false);
+        }
+
         private boolean anyWithin(
-                LotSheet sheet,
+                Visit visit,
                 LotHistory history,
                 double fromS,
                 DoublePredicate wrong,
                 boolean mean) {
             for (int i = 0; i < history.size(); i++) {
                 double at = history.timeS(i);
-                boolean here =
-                        at >= fromS && at <= Math.min(sheet.clock().leavesS(), outcome.horizonS());
+                boolean here = at >= fromS && at <= Math.min(visit.leavesS(), outcome.horizonS());
                 if (here
                         && !inOutage(at)
                         && wrong.test(mean ? history.meanC(i) : history.coldestC(i))) {

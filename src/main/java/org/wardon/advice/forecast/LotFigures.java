@@ -28,13 +28,13 @@ final class LotFigures {
         this.outcome = outcome;
         fates = outcome.fates(sheet.id());
         history = outcome.history(sheet.id());
-        inHorizon = outcome.course(chamber.id()).lot(sheet.id());
+        inHorizon = outcome.lot(sheet.id());
     }
 
     LotForecast forecast() {
         double fromS = sheet.clock().hereFromS();
         Outlook outlook = outlook();
-        Cooling cooling = Cooling.of(sheet, history, chamber, outcome.course(chamber.id()));
+        Cooling cooling = Cooling.of(history, chamber, outcome.course(chamber.id()));
         double leaveBy =
                 Outlook.leaveByS(fates.staying(), sheet.clock().arrivesS(), sheet.marketDays());
         return new LotForecast(

@@ -1,6 +1,8 @@
 package org.wardon.advice.forecast;
 
+import java.util.ArrayList;
 import java.util.List;
+import java.util.Optional;
 import org.wardon.air.Timeline;
 import org.wardon.heat.Stay;
 import org.wardon.keeping.Draw;
@@ -41,8 +43,16 @@ record LotSheet(
      * @param arrivesS arrival, s since the start of the run, may be below 0
      * @param leavesS leaving, s
      * @param freshUntilS until then it breathes as freshly harvested, s
+     * @param moves to other chambers, in order of time
      */
-    record Clock(double arrivesS, double leavesS, double freshUntilS) {
+    record Clock(double arrivesS, double leavesS, double freshUntilS, List<Moved> moves) {
+        Clock {
+            moves = List.copyOf(moves);
+        }
+
+        /** The lot is carried to a chamber at a time of the run, s. */
+        record Moved(double atS, String to) {}
+
         /** Start of what the run knows of the lot, s. */
         double hereFromS() {
             return Math.max(0, arrivesS);
@@ -68,6 +78,36 @@ record LotSheet(
 
     double soldS() {
         return clock.soldS(marketDays());
+    }
+
+    /**
+     * Where it stands in the run, in order of time; empty where it is to be placed. A chamber it
+     * left before the run began, or at the moment it came, it never stood in.
+     */
+    List<Visit> visits() {
+        if (plan.chamber().isEmpty()) {
+            return List.of();
+        }
+        List<Visit> visits = new ArrayList<>();
+        String here = plan.chamber().get();
+        double since = clock.arrivesS();
+        Optional<String> from = Optional.empty();
+        for (Clock.Moved move : clock.moves()) {
+            if (move.atS() > Math.max(since, 0)) {
+                visits.add(new Visit(this, here, since, move.atS(), from, Optional.of(move.to())));
+                from = Optional.of(here);
+                since = move.atS();
+            }
+            here = move.to();
+        }
+        visits.add(new Visit(this, here, since, clock.leavesS(), from, Optional.empty()));
+        return visits;
+    }
+
+    /** The chamber it ends in. */
+    String endsIn() {
+        List<Visit> visits = visits();
+        return visits.get(visits.size() - 1).chamber();
     }
 
     /** The body of the lot in one draw, as the heat model takes it. */

@@ -88,7 +88,14 @@ final class LotSheets {
                         .harvested()
                         .map(time -> timeline.secondsAt(time) + Timeline.DAY_S)
                         .orElse(Double.NEGATIVE_INFINITY);
-        return new LotSheet.Clock(arrives, leaves, fresh);
+        List<LotSheet.Clock.Moved> moves =
+                lot.moves().stream()
+                        .map(
+                                move ->
+                                        new LotSheet.Clock.Moved(
+                                                timeline.secondsAt(move.at()), move.to()))
+                        .toList();
+        return new LotSheet.Clock(arrives, leaves, fresh, moves);
     }
 
     private PackageKind kind(PackagePlan packed) {

@@ -76,16 +76,15 @@ final class OtherChambers {
         return mass / history.massKg(0);
     }
 
-    /** Largest mass that stands in a chamber at one time, kg, a lot more or less included. */
-    static double mostKg(List<LotSheet> lots) {
+    /** Largest mass that stands in a chamber at one time, kg. */
+    static double mostKg(List<Visit> visits) {
         double most = 0;
-        for (LotSheet at : lots) {
+        for (Visit at : visits) {
             double here = 0;
-            for (LotSheet other : lots) {
+            for (Visit other : visits) {
                 boolean overlaps =
-                        other.clock().hereFromS() <= at.clock().hereFromS()
-                                && other.clock().leavesS() > at.clock().hereFromS();
-                here += overlaps ? other.plan().massKg() : 0;
+                        other.hereFromS() <= at.hereFromS() && other.leavesS() > at.hereFromS();
+                here += overlaps ? other.sheet().plan().massKg() : 0;
             }
             most = Math.max(most, here);
         }

@@ -5,8 +5,8 @@ import java.util.LinkedHashMap;
 import java.util.List;
 import java.util.Map;
 import org.wardon.heat.Course;
-import org.wardon.keeping.ChamberEthylene;
 import org.wardon.keeping.Draw;
+import org.wardon.keeping.StoreEthylene;
 import org.wardon.plan.ChamberPlan;
 import org.wardon.plan.LotPlan;
 import org.wardon.plan.StorePlan;
@@ -45,7 +45,7 @@ final class SimplePlacing {
         }
         double durationS = plan.durationS();
         Map<String, Course> courses = model.sketch(durationS);
-        Map<String, ChamberEthylene> levels = new Fates(model).ethylene(courses, Draw.MEDIAN);
+        StoreEthylene levels = new Fates(model).ethylene(courses, Draw.MEDIAN);
         List<LotSheet> open =
                 model.sheets().stream()
                         .filter(sheet -> sheet.plan().chamber().isEmpty())
@@ -64,7 +64,7 @@ final class SimplePlacing {
                                 .of(
                                         sheet,
                                         ById.get(courses, chamber.id()),
-                                        ById.get(levels, chamber.id()),
+                                        levels.chamber(chamber.id()),
                                         durationS);
                 there.put(chamber.id(), at);
                 if (hasRoom(chamber, sheet, chosen)) {
@@ -98,13 +98,13 @@ final class SimplePlacing {
     }
 
     private boolean hasRoom(ChamberPlan chamber, LotSheet sheet, Map<String, String> chosen) {
-        List<LotSheet> there = new ArrayList<>(model.sheetsIn(chamber.id()));
+        List<Visit> there = new ArrayList<>(model.visitsIn(chamber.id()));
         for (LotSheet other : model.sheets()) {
             if (chamber.id().equals(chosen.get(other.id()))) {
-                there.add(other);
+                there.add(Visit.whole(other, chamber.id()));
             }
         }
-        there.add(sheet);
+        there.add(Visit.whole(sheet, chamber.id()));
         return OtherChambers.mostKg(there) <= chamber.capacityKg();
     }
 }

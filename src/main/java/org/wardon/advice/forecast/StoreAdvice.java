@@ -19,6 +19,10 @@ public final class StoreAdvice {
         this.whyNotHeld = Map.copyOf(whyNotHeld);
     }
 
+    StoreOutcome outcome() {
+        return outcome;
+    }
+
     /**
      * Returns the plan as it was run, every lot placed.
      *

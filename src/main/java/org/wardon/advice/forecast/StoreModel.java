@@ -4,7 +4,6 @@ import java.util.HashMap;
 import java.util.LinkedHashMap;
 import java.util.List;
 import java.util.Map;
-import java.util.Optional;
 import java.util.OptionalDouble;
 import org.wardon.air.Timeline;
 import org.wardon.air.Weather;
@@ -68,9 +67,16 @@ final class StoreModel {
         return sheets;
     }
 
+    /** Lots that stand in a chamber at some time. */
     List<LotSheet> sheetsIn(String chamberId) {
+        return visitsIn(chamberId).stream().map(Visit::sheet).distinct().toList();
+    }
+
+    /** Visits of lots to a chamber. */
+    List<Visit> visitsIn(String chamberId) {
         return sheets.stream()
-                .filter(sheet -> sheet.plan().chamber().equals(Optional.of(chamberId)))
+                .flatMap(sheet -> sheet.visits().stream())
+                .filter(visit -> visit.chamber().equals(chamberId))
                 .toList();
     }
 
@@ -118,7 +124,7 @@ final class StoreModel {
     /** Runs one chamber with the air held ideally at its setting: what it takes is the load. */
     Course ideal(ChamberPlan chamber, double durationS, Map<String, Course> plain) {
         ChamberRun run =
-                run(chamber, Draw.MEDIAN, durationS, airOf(plain))
+                asPlanned(chamber, durationS, plain)
                         .withDoorMode(DoorMode.AVERAGED)
                         .withControlMode(ControlMode.IDEAL);
         return HeatModel.run(run, Progress.SILENT);
@@ -126,7 +132,22 @@ final class StoreModel {
 
     /** The plain run of one chamber, to be varied. */
     ChamberRun asPlanned(ChamberPlan chamber, double durationS, Map<String, Course> plain) {
-        return run(chamber, Draw.MEDIAN, durationS, airOf(plain));
+        ChamberRun run = run(chamber, Draw.MEDIAN, durationS, airOf(plain));
+        return run.withStays(run.stays().stream().map(stay -> known(stay, plain)).toList());
+    }
+
+    /** A lot that is carried in comes as it left the other chamber in the plain run. */
+    private static Stay known(Stay stay, Map<String, Course> plain) {
+        if (stay.passage().from().isEmpty()) {
+            return stay;
+        }
+        return ById.get(plain, stay.passage().from().get()).lots().stream()
+                .filter(lot -> lot.stay().lot().id().equals(stay.lot().id()))
+                .filter(lot -> lot.stay().leavesS() == stay.arrivesS())
+                .findFirst()
+                .flatMap(LotCourse::carriedOut)
+                .map(stay::carriedInAs)
+                .orElseThrow();
     }
 
     /** Runs one lot without a chamber in one draw. */
@@ -154,13 +175,13 @@ final class StoreModel {
             Map<String, AirSeries> air,
             DoorMode door,
             ControlMode control) {
-        List<Course> ran =
-                plan.chambers().parallelStream()
+        List<ChamberRun> runs =
+                plan.chambers().stream()
                         .map(chamber -> run(chamber, draw, durationS, air))
                         .map(run -> run.withDoorMode(door).withControlMode(control))
                         .map(run -> door == DoorMode.AVERAGED ? Averaged.of(run) : run)
-                        .map(run -> HeatModel.run(run, Progress.SILENT))
                         .toList();
+        List<Course> ran = HeatModel.runTogether(runs);
         Map<String, Course> courses = new LinkedHashMap<>();
         ran.forEach(course -> courses.put(course.chamberId(), course));
         return courses;
@@ -169,10 +190,10 @@ final class StoreModel {
     private ChamberRun run(
             ChamberPlan chamber, Draw draw, double durationS, Map<String, AirSeries> air) {
         List<Stay> stays =
-                sheetsIn(chamber.id()).stream()
-                        .filter(sheet -> sheet.clock().arrivesS() < durationS)
-                        .filter(sheet -> sheet.clock().leavesS() > 0)
-                        .map(sheet -> sheet.stay(draw))
+                visitsIn(chamber.id()).stream()
+                        .filter(visit -> visit.arrivesS() < durationS)
+                        .filter(visit -> visit.leavesS() > 0)
+                        .map(visit -> visit.stay(draw))
                         .toList();
         return ChamberRun.of(
                         chamber.id(),

@@ -2,6 +2,7 @@ package org.wardon.advice.forecast;
 
 import java.util.Map;
 import org.wardon.heat.Course;
+import org.wardon.heat.LotCourse;
 import org.wardon.keeping.ChamberEthylene;
 import org.wardon.lots.LotHistory;
 
@@ -36,6 +37,11 @@ record StoreOutcome(
 
     Course course(String chamberId) {
         return ById.get(courses, chamberId);
+    }
+
+    /** A lot over all chambers it stood in. */
+    LotCourse lot(String lotId) {
+        return ById.get(Legs.joined(courses.values()), lotId);
     }
 
     ChamberEthylene ethylene(String chamberId) {

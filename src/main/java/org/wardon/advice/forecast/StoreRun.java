@@ -9,10 +9,10 @@ import org.wardon.air.Timeline;
 import org.wardon.cooling.Outage;
 import org.wardon.errors.Progress;
 import org.wardon.heat.Course;
-import org.wardon.keeping.ChamberEthylene;
 import org.wardon.keeping.Draw;
 import org.wardon.keeping.Draws;
 import org.wardon.keeping.Fate;
+import org.wardon.keeping.StoreEthylene;
 import org.wardon.lots.LotHistory;
 import org.wardon.plan.ChamberPlan;
 
@@ -43,12 +43,17 @@ final class StoreRun {
     StoreOutcome run(Progress progress) {
         Map<String, Course> courses = model.plain(horizonS, progress);
         double durationS = settledS(courses);
-        Map<String, ChamberEthylene> ethylene = fates.ethylene(courses, Draw.MEDIAN);
-        Map<String, LotHistory> histories = fates.histories(courses, ethylene);
+        StoreEthylene ethylene = fates.ethylene(courses, Draw.MEDIAN);
+        Map<String, LotHistory> histories = ethylene.histories();
         Map<String, Fates.Three> plain = fates.follow(histories, Draw.MEDIAN, horizonS);
         List<Map<String, Fates.Three>> drawn = draws(courses, durationS, progress);
         return new StoreOutcome(
-                model, horizonS, courses, ethylene, histories, together(plain, drawn, histories));
+                model,
+                horizonS,
+                courses,
+                ethylene.chambers(),
+                histories,
+                together(plain, drawn, histories));
     }
 
     private List<Map<String, Fates.Three>> draws(
@@ -59,7 +64,7 @@ final class StoreRun {
                         draw -> {
                             Map<String, Course> courses = model.drawn(draw, durationS, plain);
                             Map<String, LotHistory> histories =
-                                    fates.histories(courses, fates.ethylene(courses, draw));
+                                    fates.ethylene(courses, draw).histories();
                             progress.at("draws", done.incrementAndGet() / (double) DRAWS);
                             return fates.ends(histories, draw, durationS);
                         })
@@ -123,7 +128,7 @@ final class StoreRun {
         }
         return courses.values().stream()
                 .flatMap(course -> course.lots().stream())
-                .filter(lot -> lot.stay().arrivesS() < durationS)
+                .filter(lot -> lot.stay().arrivesS() < durationS && lot.carriedOut().isEmpty())
                 .allMatch(lot -> settled(lot.history(), durationS));
     }
 

@@ -23,9 +23,7 @@ final class StoreSeries {
     void write(Path folder) {
         SeriesWriter writer = new SeriesWriter(folder, outcome.model().plan().timeline());
         outcome.courses().forEach((id, course) -> chamber(writer, id, course));
-        outcome.courses()
-                .values()
-                .forEach(course -> course.lots().forEach(lot -> lot(writer, lot)));
+        Legs.joined(outcome.courses().values()).values().forEach(lot -> lot(writer, lot));
     }
 
     /** Relative humidity as told: air with mist in it is saturated. */
