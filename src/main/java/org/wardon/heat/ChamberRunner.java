@@ -8,6 +8,7 @@ import java.util.Objects;
 import org.jspecify.annotations.Nullable;
 import org.wardon.cooling.CoolerEffect;
 import org.wardon.cooling.Defrost;
+import org.wardon.enclosure.PeopleHeat;
 import org.wardon.errors.Progress;
 import org.wardon.errors.RunStopped;
 import org.wardon.heat.network.ChamberNetwork;
@@ -62,11 +63,12 @@ final class ChamberRunner implements Integrator.StepListener {
     private final @Nullable LotState[] carried;
     private int nextEdge;
     private boolean powered = true;
-    private boolean awaitsFirstOpening;
+    private boolean awaitsFirstOpening = true;
     private double co2AtFirstOpening;
     private long openings;
     private double lastExchanged;
     private double lastRespiration;
+    private double lastPeople;
     private double mixedJ;
     private double mixedKg;
     private final double startLayersJ;
@@ -209,14 +211,18 @@ final class ChamberRunner implements Integrator.StepListener {
         }
         double exchanged = terms.exchanged(totals);
         double respiration = respirationJ();
+        double people = terms.people(totals);
         carbon.step(
                 to - from,
-                (respiration - lastRespiration) / BurntSugar.JOULE_PER_KG_CO2 / (to - from),
+                ((respiration - lastRespiration) / BurntSugar.JOULE_PER_KG_CO2
+                                + (people - lastPeople) * PeopleHeat.CO2_KG_PER_J)
+                        / (to - from),
                 network.cubicMetres((exchanged - lastExchanged) / (to - from)),
                 airC,
                 network.freeM3());
         lastExchanged = exchanged;
         lastRespiration = respiration;
+        lastPeople = people;
         boolean tripping = false;
         for (int i = 0; i < network.coolerCount(); i++) {
             CoolerEffect effect = network.cooler(i).effect();

@@ -1,5 +1,6 @@
 package org.wardon.lots;
 
+import java.util.OptionalDouble;
 import org.wardon.errors.Require;
 
 /**
@@ -21,8 +22,18 @@ public record StackCooling(
     /** Self-heating above which a caution is due, K (assumption). */
     public static final double CAUTION_K = 3;
 
-    /** Self-heating above which a stack of Q10 2.5 runs away, K: 10/ln 2.5. */
+    /**
+     * Most self-heating a stack of Q10 2.5 can stand at, K: 10/ln 2.5. Where heat of breathing
+     * grows as exp(T ln Q10/10) and loss with the excess alone, both meet only up to there (N. N.
+     * Semenov's condition of self-ignition, from memory); at the air's own temperature the
+     * breathing may then be worth no more than a third of it, 10/(e ln Q10).
+     */
     public static final double RUNAWAY_K = 11;
+
+    /** Where no rest is found up to here above the air, there is none, K. */
+    private static final double SEARCHED_K = 60;
+
+    private static final double SEARCH_STEP_K = 0.05;
 
     private static final double LN2 = 0.693;
 
@@ -55,9 +66,38 @@ public record StackCooling(
     }
 
     /**
-     * Returns how far produce at rest stays above its air.
+     * Returns how far produce stands above its air once it has come to rest, breathing at its own
+     * temperature, not at the air's.
      *
-     * @param respirationWPerKg heat of respiration, W/kg
+     * @param law its breathing
+     * @param airC the air around it, °C
+     * @param halfCoolingS half-cooling time, s
+     * @param specificHeatJkgK specific heat of the produce, J/(kg K)
+     * @return mean excess, K; empty where it never rests: it runs away
+     */
+    public static OptionalDouble restsAtK(
+            RespirationLaw law, double airC, double halfCoolingS, double specificHeatJkgK) {
+        double lower = 0;
+        for (double above = SEARCH_STEP_K; above <= SEARCHED_K; above += SEARCH_STEP_K) {
+            double gives =
+                    selfHeatingK(law.wattsPerKg(airC + above), halfCoolingS, specificHeatJkgK);
+            if (gives <= above) {
+                // Straight between the last two: breathing bends little over a twentieth of a
+                // kelvin.
+                double over =
+                        selfHeatingK(law.wattsPerKg(airC + lower), halfCoolingS, specificHeatJkgK)
+                                - lower;
+                return OptionalDouble.of(lower + SEARCH_STEP_K * over / (over + above - gives));
+            }
+            lower = above;
+        }
+        return OptionalDouble.empty();
+    }
+
+    /**
+     * Returns how far produce at rest stays above its air for a given heat of breathing.
+     *
+     * @param respirationWPerKg heat of respiration at the produce's own temperature, W/kg
      * @param halfCoolingS half-cooling time, s
      * @param specificHeatJkgK specific heat of the produce, J/(kg K)
      * @return mean excess, K

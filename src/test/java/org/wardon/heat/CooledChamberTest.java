@@ -101,20 +101,6 @@ class CooledChamberTest {
     }
 
     @Test
-    void carbonDioxideSettlesWhereSourceAndLeakageBalance() {
-        Course course =
-                run(
-                        Chambers.passive(Chambers.panelRoom(0), Weather.steady(20, 60), 10)
-                                .withStays(Chambers.load(1, 200, 20)));
-        int end = course.hours().size() - 1;
-        double kgS = course.hours().respirationW(end) / 10.7e6;
-        double exchange = course.hours().exchangeM3s(end);
-        double m3PerKg = 188.92 * (course.hours().airC(end) + 273.15) / 101_085;
-        double settles = 420 + 1e6 * kgS * m3PerKg / exchange;
-        assertEquals(settles, course.hours().co2Ppm(end), 0.01 * settles);
-    }
-
-    @Test
     void anImpossibleStateStopsTheRunWithTimeAndChamber() {
         // A tonne that sets free fifty watts a kilogram in a small shut box of foam.
         var lot = Chambers.lot("hot", 1_000, 0.03, 4);

@@ -76,7 +76,7 @@ final class Actions {
     }
 
     private void airOut(ChamberPlan chamber) {
-        if (ById.get(chambers, chamber.id()).co2PpmMax() >= Cautions.CO2_DANGER_PPM) {
+        if (ById.get(chambers, chamber.id()).co2PpmMax() >= GasCautions.DANGER_PPM) {
             say(0, Reason.about("do-air-out", chamber.id(), OWN_RULE));
         }
     }

@@ -10,10 +10,6 @@ import org.wardon.cooling.Cooler;
 import org.wardon.cooling.CoolerCautions;
 import org.wardon.heat.Course;
 import org.wardon.heat.CourseEvent;
-import org.wardon.keeping.Draw;
-import org.wardon.lots.Lot;
-import org.wardon.lots.PackageFit;
-import org.wardon.lots.StackCooling;
 import org.wardon.plan.Assumed;
 import org.wardon.plan.ChamberPlan;
 import org.wardon.plan.FilledGap;
@@ -26,15 +22,6 @@ import org.wardon.produce.Reason.Argument;
 
 /** What a person must hear of beside the figures: first what can hurt people, then produce. */
 final class Cautions {
-    /** Eight-hour limit of carbon dioxide, ppm; source: safety limits, id OSHA-1910. */
-    private static final double CO2_CAUTION_PPM = 5_000;
-
-    /** Own rule between the published limits, ppm (assumption). */
-    static final double CO2_DANGER_PPM = 14_000;
-
-    /** Fifteen-minute limit, ppm; source: safety limits, id ACGIH. */
-    private static final double CO2_EVACUATE_PPM = 30_000;
-
     private static final String OWN_RULE = "assumption";
     private static final String PRACTICE = "common-practice";
 
@@ -49,7 +36,8 @@ final class Cautions {
     List<Caution> all() {
         StorePlan plan = outcome.model().plan();
         for (ChamberPlan chamber : plan.chambers()) {
-            gases(chamber);
+            GasCautions.ofPeople(chamber.id(), outcome.course(chamber.id()))
+                    .forEach(c -> add(c.level(), c.reason()));
         }
         add(Level.NOTE, Reason.about("never-alone", "store", "OSHA-1910"));
         if (plan.chambers().stream().anyMatch(c -> !c.coolers().isEmpty())) {
@@ -70,25 +58,6 @@ final class Cautions {
     private void add(Level level, Reason reason) {
         if (told.add(reason)) {
             cautions.add(new Caution(level, reason));
-        }
-    }
-
-    private void gases(ChamberPlan chamber) {
-        Course course = outcome.course(chamber.id());
-        double ppm = course.counts().co2HighestPpm();
-        Argument highest = Argument.of(ppm, "ppm");
-        Argument opening = Argument.of(course.counts().co2AtFirstOpeningPpm(), "ppm");
-        if (ppm >= CO2_EVACUATE_PPM) {
-            add(
-                    Level.DANGER,
-                    Reason.about("co2-evacuate", chamber.id(), "ACGIH", highest, opening));
-            add(Level.CAUTION, Reason.about("co2-outside-model", chamber.id(), OWN_RULE, highest));
-        } else if (ppm >= CO2_DANGER_PPM) {
-            add(Level.DANGER, Reason.about("co2-danger", chamber.id(), OWN_RULE, highest, opening));
-        } else if (ppm >= CO2_CAUTION_PPM) {
-            add(
-                    Level.CAUTION,
-                    Reason.about("co2-caution", chamber.id(), "OSHA-1910", highest, opening));
         }
     }
 
@@ -174,7 +143,8 @@ final class Cautions {
                 add(level(reason.code()), reason);
             }
         }
-        selfHeating(sheet);
+        GasCautions.ofLot(sheet, outcome).forEach(c -> add(c.level(), c.reason()));
+        SelfHeating.of(sheet, outcome).ifPresent(c -> add(c.level(), c.reason()));
         for (Reason reason : sheet.restsOn()) {
             if (reason.code().endsWith("-class") || reason.code().endsWith("-broad")) {
                 add(
@@ -185,31 +155,6 @@ final class Cautions {
                                 reason.arguments(),
                                 reason.sourceId()));
             }
-        }
-    }
-
-    /**
-     * How far a lot at rest stands above its air by its own breathing, at the setting of the
-     * warmest chamber it stands in.
-     */
-    private void selfHeating(LotSheet sheet) {
-        double settingC =
-                sheet.visits().stream()
-                        .map(visit -> outcome.model().plan().getChamber(visit.chamber()))
-                        .mapToDouble(chamber -> chamber.setting().temperatureC())
-                        .max()
-                        .orElseThrow();
-        Lot lot = sheet.stay(Draw.MEDIAN).lot();
-        double excessK =
-                StackCooling.selfHeatingK(
-                        lot.respiration().wattsPerKg(settingC),
-                        PackageFit.halfCoolingS(lot.item(), lot.packing()),
-                        lot.item().specificHeatJkgK());
-        Argument told = Argument.of(excessK, "K");
-        if (excessK > StackCooling.RUNAWAY_K) {
-            add(Level.DANGER, Reason.about("stack-runs-away", sheet.id(), OWN_RULE, told));
-        } else if (excessK > StackCooling.CAUTION_K) {
-            add(Level.CAUTION, Reason.about("stack-heats-itself", sheet.id(), OWN_RULE, told));
         }
     }
 
