@@ -107,6 +107,7 @@ final class AdvicePage {
                         + kwh(chamber.energyKWh())
                         + " of power; most from "
                         + largest(chamber.loadKWh()));
+        coolers(chamber);
         chamber.intakeKgPerDay()
                 .ifPresent(
                         kg ->
@@ -121,6 +122,22 @@ final class AdvicePage {
                         + units.figure(chamber.ethylenePpmMax(), "ppm"));
         company(chamber.id());
         page.append('\n');
+    }
+
+    /** How long each cooler ran, where there is more to tell than of one compressor. */
+    private void coolers(ChamberForecast chamber) {
+        List<ChamberForecast.OfCooler> all = chamber.coolers();
+        if (all.size() > 1 || all.stream().anyMatch(c -> !c.kind().equals("compressor"))) {
+            String each =
+                    all.stream()
+                            .map(c -> c.kind() + " " + units.figure(c.runningHours(), "h"))
+                            .collect(Collectors.joining(", "));
+            String water =
+                    chamber.waterUsedKg() > 0
+                            ? "; " + units.mass(chamber.waterUsedKg()) + " of water used"
+                            : "";
+            line("ran", each + water);
+        }
     }
 
     private String sentence(ChamberForecast chamber) {

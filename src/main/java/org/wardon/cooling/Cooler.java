@@ -12,7 +12,7 @@ import java.util.OptionalDouble;
  * Kinds}, a binder and a schema entry. A kind that acts on faces is a {@link FaceCooler} and does
  * nothing to the air but through them.
  */
-public sealed interface Cooler permits Compressor, FaceCooler {
+public sealed interface Cooler permits Compressor, EvaporativePad, NightAir, FaceCooler {
     /**
      * Returns the kind as a plan names it.
      *
@@ -146,5 +146,21 @@ public sealed interface Cooler permits Compressor, FaceCooler {
          * @return the answer
          */
         R waterFilm(WaterFilm film);
+
+        /**
+         * Answers for a pad.
+         *
+         * @param pad the pad
+         * @return the answer
+         */
+        R evaporativePad(EvaporativePad pad);
+
+        /**
+         * Answers for night air.
+         *
+         * @param fan the fan
+         * @return the answer
+         */
+        R nightAir(NightAir fan);
     }
 }

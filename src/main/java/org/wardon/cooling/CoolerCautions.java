@@ -29,7 +29,8 @@ public final class CoolerCautions {
 
     /**
      * Returns the cautions of a cooler at its setting: {@code ices-up}, {@code control-too-warm},
-     * {@code rating-unlikely}, {@code coil-small}.
+     * {@code rating-unlikely}, {@code coil-small} of a compressor, {@code pad-water} of a pad,
+     * {@code night-air-rain} of night air.
      *
      * @param cooler the cooler
      * @param setting what the keeper dialled in
@@ -57,6 +58,22 @@ public final class CoolerCautions {
                     @Override
                     public List<Caution> waterFilm(WaterFilm film) {
                         return List.of();
+                    }
+
+                    @Override
+                    public List<Caution> evaporativePad(EvaporativePad pad) {
+                        return List.of(
+                                caution(Level.CAUTION, "pad-water", chamberId, "common-practice"));
+                    }
+
+                    @Override
+                    public List<Caution> nightAir(NightAir fan) {
+                        return List.of(
+                                caution(
+                                        Level.NOTE,
+                                        "night-air-rain",
+                                        chamberId,
+                                        "common-practice"));
                     }
                 });
     }

@@ -131,6 +131,9 @@ public final class CoolerEffect {
     /** Seconds until the cooler itself changes its course; infinite where it does not. */
     public double nextEventS = Double.POSITIVE_INFINITY;
 
+    /** Scratch: outdoor air on its way in; kept while the outdoor air stays. */
+    final Supply supply = new Supply();
+
     /** Scratch of the coil's iteration. */
     final Coil.State coil = new Coil.State();
 

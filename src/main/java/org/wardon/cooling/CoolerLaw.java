@@ -1,7 +1,7 @@
 package org.wardon.cooling;
 
 /** A cooler compiled for the air pressure of its site: pure, without state, safe to share. */
-public sealed interface CoolerLaw permits CompressorLaw, FaceLaw {
+public sealed interface CoolerLaw permits CompressorLaw, EvaporativePadLaw, NightAirLaw, FaceLaw {
     /**
      * Returns how many own states the cooler has, such as water on its coil.
      *

@@ -39,15 +39,17 @@ final class ChamberBinder {
                         inputs.number(chamber, "widthM"),
                         inputs.number(chamber, "heightM"));
         Enclosure enclosure = enclosure(chamber, box);
-        CoolerBinder coolerBinder = new CoolerBinder(inputs);
+        Setting setting = setting(chamber.at("setting"));
+        double capacityKg = capacityKg(chamber, box);
+        CoolerBinder coolerBinder = new CoolerBinder(inputs, capacityKg);
         List<Cooler> coolers =
                 chamber.at("cooling").items().stream().map(coolerBinder::bind).toList();
         return new ChamberPlan(
                 inputs.text(chamber, "id"),
                 enclosure,
                 coolers,
-                setting(chamber.at("setting")),
-                capacityKg(chamber, box),
+                setting,
+                capacityKg,
                 outages(chamber),
                 inputs.numberElse(chamber, "humidifierKgH", 0),
                 inputs.numberElse(chamber, "heaterW", 0),

@@ -45,6 +45,27 @@ final class ChamberRules {
                 door(chamber);
             }
             outages(chamber);
+            chamber.at("cooling").items().forEach(this::humidityBounds);
+        }
+    }
+
+    private void humidityBounds(Part cooler) {
+        Part low = cooler.at("lowestHumidityPct");
+        Part high = cooler.at("highestHumidityPct");
+        boolean known =
+                low.number().isPresent()
+                        && high.number().isPresent()
+                        && !faults.at(low.path())
+                        && !faults.at(high.path());
+        if (known && low.number().getAsDouble() >= high.number().getAsDouble()) {
+            faults.add(
+                    low.path(),
+                    "is "
+                            + low.json().orElseThrow().shown()
+                            + " %, not below highestHumidityPct "
+                            + high.json().orElseThrow().shown()
+                            + " %",
+                    "accepted: less than highestHumidityPct");
         }
     }
 

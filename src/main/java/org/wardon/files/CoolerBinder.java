@@ -6,15 +6,20 @@ import org.wardon.files.json.Part;
 /** Turns a cooler of a checked plan into the record of its kind. */
 final class CoolerBinder {
     private final Inputs inputs;
+    private final FanBinder fans;
 
-    CoolerBinder(Inputs inputs) {
+    /** {@code capacityKg} is what the chamber takes, kg. */
+    CoolerBinder(Inputs inputs, double capacityKg) {
         this.inputs = inputs;
+        this.fans = new FanBinder(inputs, capacityKg);
     }
 
     Cooler bind(Part part) {
         String kind = inputs.text(part, "kind");
         return switch (kind) {
             case "compressor" -> new CompressorBinder(inputs).bind(part);
+            case "evaporative-pad" -> fans.pad(part);
+            case "night-air" -> fans.nightAir(part);
             default ->
                     throw new IllegalArgumentException(
                             part.path() + ": the schema let the kind '" + kind + "' pass");

@@ -24,6 +24,9 @@ final class HourRecorder {
     private double lastRespiration;
     private double lastWaterKg;
     private double lastOutletJ;
+    private double lastUsedKg;
+    private final double[][] ran;
+    private final double[] lastRan;
     private double lowest = Double.POSITIVE_INFINITY;
     private double highest = Double.NEGATIVE_INFINITY;
     private double supply = Double.NaN;
@@ -34,6 +37,8 @@ final class HourRecorder {
         for (Hours.Column column : Hours.Column.values()) {
             columns.put(column, new double[mostRows]);
         }
+        ran = new double[network.coolerCount()][mostRows];
+        lastRan = new double[network.coolerCount()];
     }
 
     void stepped(double[] y) {
@@ -73,6 +78,12 @@ final class HourRecorder {
         set(Hours.Column.HUMIDITY_RATIO, network.ratio(y));
         set(Hours.Column.RESPIRATION_W, (respirationJ - lastRespiration) / span);
         set(Hours.Column.WATER_OUT_C, waterOutC(totals));
+        set(Hours.Column.WATER_USED_KG, terms.waterUsed(totals) - lastUsedKg);
+        for (int k = 0; k < ran.length; k++) {
+            double ranS = terms.ranS(k, totals);
+            ran[k][size] = (ranS - lastRan[k]) / span;
+            lastRan[k] = ranS;
+        }
         size++;
         startSpan(t, totals, respirationJ);
     }
@@ -92,12 +103,13 @@ final class HourRecorder {
         lastRespiration = respirationJ;
         lastWaterKg = terms.facesWaterKg(totals);
         lastOutletJ = terms.facesOutletJ(totals);
+        lastUsedKg = terms.waterUsed(totals);
         lowest = Double.POSITIVE_INFINITY;
         highest = Double.NEGATIVE_INFINITY;
         supply = Double.NaN;
     }
 
     Hours hours() {
-        return new Hours(columns, size);
+        return new Hours(columns, ran, size);
     }
 }

@@ -7,11 +7,12 @@ import java.util.Objects;
 
 /**
  * The chamber's series. Row i stands at {@link #atS}, an hour after the one before (the last may be
- * shorter). Air, cooling, power, exchange and load are means of the span before; all else is at the
- * instant.
+ * shorter). Air, cooling, power, exchange, load, running and water used are those of the span
+ * before; all else is at the instant.
  */
 public final class Hours {
     private final Map<Column, double[]> columns = new EnumMap<>(Column.class);
+    private final double[][] ran;
     private final int rows;
 
     /** The columns, in order. */
@@ -30,11 +31,16 @@ public final class Hours {
         SUPPLY_C,
         HUMIDITY_RATIO,
         RESPIRATION_W,
-        WATER_OUT_C
+        WATER_OUT_C,
+        WATER_USED_KG
     }
 
-    Hours(Map<Column, double[]> columns, int rows) {
+    Hours(Map<Column, double[]> columns, double[][] ran, int rows) {
         this.rows = rows;
+        this.ran = new double[ran.length][];
+        for (int k = 0; k < ran.length; k++) {
+            this.ran[k] = Arrays.copyOf(ran[k], rows);
+        }
         columns.forEach((column, values) -> this.columns.put(column, Arrays.copyOf(values, rows)));
     }
 
@@ -142,7 +148,7 @@ public final class Hours {
     }
 
     /**
-     * Returns the mean exchange of air in the span before: leakage, fresh air, door.
+     * Returns the mean exchange of air in the span before: leakage, fresh air, door, fans.
      *
      * @param i row
      * @return m3 of chamber air/s
@@ -199,5 +205,26 @@ public final class Hours {
      */
     public double waterOutC(int i) {
         return get(Column.WATER_OUT_C, i);
+    }
+
+    /**
+     * Returns the water coolers used up in the span before.
+     *
+     * @param i row
+     * @return kg
+     */
+    public double waterUsedKg(int i) {
+        return get(Column.WATER_USED_KG, i);
+    }
+
+    /**
+     * Returns the share of the span before that a cooler ran.
+     *
+     * @param cooler number of the cooler in the run
+     * @param i row
+     * @return 0 to 1
+     */
+    public double ran(int cooler, int i) {
+        return ran[cooler][i];
     }
 }

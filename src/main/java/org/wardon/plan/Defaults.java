@@ -97,6 +97,34 @@ public final class Defaults {
     /** Lowest temperature the control of a cold-room unit can be set to. */
     public static final Default LOWEST_C = new Default(-30, "°C", ASSUMPTION);
 
+    /**
+     * Saturation effectiveness of a pad.
+     *
+     * <p>Source: {@code cooling-sources.csv}, row saturation_effectiveness, 0.7 to 0.95.
+     */
+    public static final Default PAD_EFFECTIVENESS = new Default(0.8, "1", "WANG-CRC");
+
+    /**
+     * Outdoor air blown in for a tonne the chamber takes.
+     *
+     * <p>Source: {@code cooling-sources.csv}, row air_circulation_potato: air asked for a tonne
+     * while loading and cooling down.
+     */
+    public static final Default AIR_M3_H_T = new Default(85, "m3/(h t)", "NHB2010");
+
+    /** Power of a fan for each m3/s it blows in: 50 Pa with a fifth of the power in the air. */
+    public static final Default FAN_W_PER_M3S = new Default(250, "W per m3/s", ASSUMPTION);
+
+    /**
+     * How much colder outdoor air must be than the chamber for a fan to run.
+     *
+     * <p>Source: {@code cooling-sources.csv}, row rule of night_ventilation, 1 to 3 K.
+     */
+    public static final Default DIFFERENCE_K = new Default(2, "K", "from memory of ASHRAE-F");
+
+    /** Coldest outdoor air let in. */
+    public static final Default LOWEST_INTAKE_C = new Default(0, "°C", ASSUMPTION);
+
     /** Days a lot is wanted in the chamber. */
     public static final Default WANTED_DAYS = new Default(7, "day", ASSUMPTION);
 
@@ -124,6 +152,7 @@ public final class Defaults {
     private static final List<String> LOOSE = List.of("straw", "thatch", "bamboo");
     private static final double INSULATES_BELOW_WMK = 0.06;
     private static final double ZERO_C_IN_K = 273.15;
+    private static final double LEAST_INTAKE_M3S = 0.001;
     private static final double AIR_HEAT_J_M3K = 1.2 * 1006;
 
     private Defaults() {}
@@ -196,6 +225,16 @@ public final class Defaults {
      */
     public static double coilUaWK(double ratedCapacityW) {
         return ratedCapacityW / EVAPORATING_TD_K.value();
+    }
+
+    /**
+     * Returns the outdoor air blown into a chamber by what it takes.
+     *
+     * @param capacityKg most produce it takes, kg
+     * @return m3/s
+     */
+    public static double intakeM3s(double capacityKg) {
+        return Math.max(AIR_M3_H_T.value() * capacityKg / 1_000 / 3_600, LEAST_INTAKE_M3S);
     }
 
     /**

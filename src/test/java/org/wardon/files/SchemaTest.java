@@ -128,6 +128,13 @@ class SchemaTest {
         ((ObjectNode) plan.at("/lots/0")).remove("moves");
         List<String> checked = new ArrayList<>();
         holdBounds(plan, plan, SCHEMA, "$", checked);
+        ObjectNode coolers = read("coolers");
+        holdBounds(
+                coolers,
+                coolers.at("/chambers/0/cooling"),
+                SCHEMA.at("/$defs/chamber/properties/cooling"),
+                "$.chambers[0].cooling",
+                checked);
         ObjectNode steady = read("minimal");
         holdBounds(
                 steady, steady.get("weather"), SCHEMA.at("/$defs/weather"), "$.weather", checked);
@@ -223,10 +230,10 @@ class SchemaTest {
         ObjectNode plan = read("minimal");
         ObjectNode chamber = (ObjectNode) plan.at("/chambers/0");
         chamber.putObject("door").put("widthM", 0.9).put("heightM", 2);
-        chamber.putArray("cooling")
-                .addObject()
-                .put("kind", "compressor")
-                .put("ratedCapacityW", 3500);
+        ArrayNode cooling = chamber.putArray("cooling");
+        cooling.addObject().put("kind", "compressor").put("ratedCapacityW", 3500);
+        cooling.addObject().put("kind", "evaporative-pad");
+        cooling.addObject().put("kind", "night-air");
         Part part =
                 Part.root(JsonText.read(plan.toString(), new Faults("plan.json")).orElseThrow());
         List<Assumed> told =

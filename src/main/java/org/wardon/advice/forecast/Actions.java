@@ -8,6 +8,7 @@ import java.util.Optional;
 import java.util.OptionalDouble;
 import org.wardon.advice.wording.Words;
 import org.wardon.air.Timeline;
+import org.wardon.cooling.Cooler;
 import org.wardon.enclosure.Door;
 import org.wardon.files.forecast.ChamberForecast;
 import org.wardon.files.forecast.Forecast.Action;
@@ -204,7 +205,10 @@ final class Actions {
                             Argument.of(100 * share, "pct"),
                             Argument.of(door.secondsOpen() / 60, "1")));
         }
-        if (!chamber.coolers().isEmpty() && figures.peakLoadW() > 1.05 * figures.removedPeakW()) {
+        if (weatherDecides(chamber)) {
+            addCold(chamber, figures);
+        } else if (!chamber.coolers().isEmpty()
+                && figures.peakLoadW() > 1.05 * figures.removedPeakW()) {
             Argument peak = Argument.of(figures.peakLoadW(), "W");
             Argument removed = Argument.of(figures.removedPeakW(), "W");
             say(
@@ -218,6 +222,26 @@ final class Actions {
                                     removed,
                                     Argument.of(figures.intakeKgPerDay().getAsDouble(), "kg"))
                             : Reason.about("do-precool", chamber.id(), OWN_RULE, peak, removed));
+        }
+    }
+
+    private static boolean weatherDecides(ChamberPlan chamber) {
+        return !chamber.coolers().isEmpty()
+                && chamber.coolers().stream().noneMatch(Cooler::holdsBand);
+    }
+
+    /** Where the weather cannot give the setting, spreading the intake does not help. */
+    private void addCold(ChamberPlan chamber, ChamberForecast figures) {
+        double setC = chamber.setting().temperatureC();
+        if (figures.airC().mean() > setC + chamber.setting().bandK()) {
+            say(
+                    6,
+                    Reason.about(
+                            "do-add-cold",
+                            chamber.id(),
+                            OWN_RULE,
+                            Argument.of(figures.airC().mean(), "C"),
+                            Argument.of(setC, "C")));
         }
     }
 }

@@ -92,6 +92,7 @@ final class Cautions {
                     .forEach(caution -> add(caution.level(), caution.reason()));
         }
         FaceMoisture.of(chamber, outcome).forEach(c -> add(c.level(), c.reason()));
+        OutdoorAirCautions.of(outcome, chamber).forEach(c -> add(c.level(), c.reason()));
         for (Reason reason : course.reasons()) {
             add(
                     Level.NOTE,

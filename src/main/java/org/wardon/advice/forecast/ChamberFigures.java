@@ -4,11 +4,14 @@ import java.util.Arrays;
 import java.util.OptionalDouble;
 import java.util.function.IntToDoubleFunction;
 import java.util.stream.IntStream;
+import org.wardon.air.Timeline;
 import org.wardon.files.forecast.ChamberForecast;
 import org.wardon.files.forecast.ChamberForecast.AirC;
 import org.wardon.files.forecast.ChamberForecast.LoadKWh;
 import org.wardon.files.forecast.ChamberForecast.MeanMax;
+import org.wardon.files.forecast.ChamberForecast.OfCooler;
 import org.wardon.files.forecast.MeanMinMax;
+import org.wardon.heat.CoolerTotals;
 import org.wardon.heat.Course;
 import org.wardon.heat.HeatLedger;
 import org.wardon.heat.Hours;
@@ -53,7 +56,17 @@ final class ChamberFigures {
                 course.waterUsedKg(),
                 co2,
                 ethylenePpm(),
-                course.balanceErrorPct());
+                course.balanceErrorPct(),
+                course.coolers().stream().map(ChamberFigures::cooler).toList());
+    }
+
+    private static OfCooler cooler(CoolerTotals did) {
+        return new OfCooler(
+                did.kind(),
+                did.ranS() / Timeline.HOUR_S,
+                did.removedJ() / J_PER_KWH,
+                did.electricityJ() / J_PER_KWH,
+                did.waterKg());
     }
 
     private double ethylenePpm() {

@@ -42,7 +42,25 @@ final class StoreSeries {
         columns.put("powerW", hours::powerW);
         columns.put("co2Ppm", hours::co2Ppm);
         columns.put("ethylenePpm", i -> level.ppmAt(hours.atS(i)));
+        ofCoolers(course, columns);
         writer.chamber(id, times(hours.size(), hours::atS), columns);
+    }
+
+    /** Where there is more than compressors: water used, and how much each cooler ran. */
+    private static void ofCoolers(Course course, Map<String, IntToDoubleFunction> columns) {
+        Hours hours = course.hours();
+        if (course.coolers().stream().allMatch(cooler -> cooler.kind().equals("compressor"))) {
+            return;
+        }
+        if (course.waterUsedKg() > 0) {
+            columns.put("waterUsedKg", hours::waterUsedKg);
+        }
+        for (int k = 0; k < course.coolers().size(); k++) {
+            int cooler = k;
+            columns.put(
+                    SeriesWriter.running(k),
+                    i -> 100 * Math.min(Math.max(hours.ran(cooler, i), 0), 1));
+        }
     }
 
     private void lot(SeriesWriter writer, LotCourse lot) {

@@ -1,5 +1,6 @@
 package org.wardon.files.forecast;
 
+import java.util.List;
 import java.util.OptionalDouble;
 
 /**
@@ -27,6 +28,7 @@ import java.util.OptionalDouble;
  * @param co2PpmMax highest CO2, ppm
  * @param ethylenePpmMax highest ethylene, ppm
  * @param balanceErrorPct error of the balances, percent of the throughput
+ * @param coolers what each cooler did, in the order of the plan
  */
 public record ChamberForecast(
         String id,
@@ -48,7 +50,29 @@ public record ChamberForecast(
         double waterUsedKg,
         double co2PpmMax,
         double ethylenePpmMax,
-        double balanceErrorPct) {
+        double balanceErrorPct,
+        List<OfCooler> coolers) {
+    /** Copies the list. */
+    public ChamberForecast {
+        coolers = List.copyOf(coolers);
+    }
+
+    /**
+     * What one cooler did.
+     *
+     * @param kind its kind
+     * @param runningHours time it ran, weighted by its share, h
+     * @param heatRemovedKWh heat taken, kWh
+     * @param energyKWh electricity, kWh
+     * @param waterUsedKg water evaporated and bled off, kg
+     */
+    public record OfCooler(
+            String kind,
+            double runningHours,
+            double heatRemovedKWh,
+            double energyKWh,
+            double waterUsedKg) {}
+
     /**
      * The chamber's air.
      *

@@ -17,7 +17,7 @@ import org.wardon.files.AtomicFile;
  * number is an empty cell.
  */
 public final class SeriesWriter {
-    /** Columns of a chamber after {@code time}; {@code waterOutC} may follow. */
+    /** Columns of a chamber after {@code time}; {@link #OPTIONAL} may follow. */
     public static final List<String> CHAMBER =
             List.of(
                     "airC",
@@ -32,7 +32,12 @@ public final class SeriesWriter {
     public static final List<String> LOT =
             List.of("meanC", "surfaceC", "coreC", "respirationW", "massKg", "lifeUsedPct");
 
-    private static final String WATER_OUT = "waterOutC";
+    /**
+     * Columns of a chamber whose coolers have them: water leaving a film, water used in the hour
+     * before. After them may come the share of the hour before that each cooler ran, {@link
+     * #running}.
+     */
+    public static final List<String> OPTIONAL = List.of("waterOutC", "waterUsedKg");
 
     private final Path folder;
     private final Timeline timeline;
@@ -54,15 +59,26 @@ public final class SeriesWriter {
      *
      * @param id its id
      * @param timeS {@code [row]}, s since the start of the run
-     * @param columns the values by row, one for each name of {@link #CHAMBER}, and {@code
-     *     waterOutC} where a water film runs
+     * @param columns the values by row, one for each name of {@link #CHAMBER}, and those of {@link
+     *     #OPTIONAL} and {@link #running} that it has
      */
     public void chamber(String id, double[] timeS, Map<String, IntToDoubleFunction> columns) {
         List<String> names = new ArrayList<>(CHAMBER);
-        if (columns.containsKey(WATER_OUT)) {
-            names.add(WATER_OUT);
+        OPTIONAL.stream().filter(columns::containsKey).forEach(names::add);
+        for (int i = 0; columns.containsKey(running(i)); i++) {
+            names.add(running(i));
         }
         write("chamber-" + id + ".csv", names, timeS, columns);
+    }
+
+    /**
+     * Returns the name of the column that says how much a cooler ran.
+     *
+     * @param cooler its number in the plan, from 0
+     * @return such as {@code running1Pct} for the first
+     */
+    public static String running(int cooler) {
+        return "running" + (cooler + 1) + "Pct";
     }
 
     /**

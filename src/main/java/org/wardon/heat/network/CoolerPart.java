@@ -44,7 +44,11 @@ public final class CoolerPart implements Part, FilmedFace.Control {
     private static final double COLDEST_C = -45;
     private static final double WARMEST_C = 55;
     private static final double WETTEST = 0.08;
+
+    /** Time over which the slope by the weather is taken, s; conditions change over less. */
     private static final double SHIFT_S = 10;
+
+    private static final double SHIFT_OF_CONDITIONS_S = 0.25;
 
     private final Cooler unit;
     private final CoolerLaw law;
@@ -57,7 +61,8 @@ public final class CoolerPart implements Part, FilmedFace.Control {
     private final Branch[] branch;
     private final CoolerInputs in;
     private final CoolerEffect effect;
-    private final CoolerEffect shifted;
+    private final CoolerEffect after;
+    private final CoolerEffect before;
     private boolean powered = true;
     private boolean on;
     private double defrostW;
@@ -87,7 +92,8 @@ public final class CoolerPart implements Part, FilmedFace.Control {
         this.in = new CoolerInputs(own);
         in.airC = Double.NaN; // unlike anything it will be asked first
         this.effect = new CoolerEffect(own);
-        this.shifted = new CoolerEffect(own);
+        this.after = new CoolerEffect(own);
+        this.before = new CoolerEffect(own);
         this.byOwn = new double[FLOWS * own];
     }
 
@@ -287,7 +293,7 @@ public final class CoolerPart implements Part, FilmedFace.Control {
             return Double.POSITIVE_INFINITY;
         }
         meets(airC, ratio, outside, on ? 1 : 0);
-        double inside = law.inside(in, on, shifted);
+        double inside = law.inside(in, on, after);
         in.airC = Double.NaN; // what it did last answers to other air
         return inside;
     }
@@ -375,32 +381,44 @@ public final class CoolerPart implements Part, FilmedFace.Control {
         if (in.run <= 0 && own == 0) {
             return;
         }
-        Outside.Place out = outside.outdoors;
-        double outdoorC = in.outdoorC;
-        double outdoorRatio = in.outdoorHumidityRatio;
-        in.outdoorC = outdoorC + SHIFT_S * out.airSlope;
-        in.outdoorHumidityRatio = outdoorRatio + SHIFT_S * out.ratioSlope;
-        shifted.evaporatingC = effect.evaporatingC;
-        law.effect(in, shifted);
-        in.outdoorC = outdoorC;
-        in.outdoorHumidityRatio = outdoorRatio;
-        double vapour = (shifted.vapourKgS - effect.vapourKgS) / SHIFT_S;
+        CoolerEffect behind = effect;
+        double span = SHIFT_S;
+        if (law.conditional()) {
+            // Shares of own conditions bend: their slope is taken from both sides, over less.
+            span = 2 * SHIFT_OF_CONDITIONS_S;
+            behind = before;
+            shift(outside.outdoors, -SHIFT_OF_CONDITIONS_S, before);
+        }
+        shift(outside.outdoors, law.conditional() ? SHIFT_OF_CONDITIONS_S : SHIFT_S, after);
+        double vapour = (after.vapourKgS - behind.vapourKgS) / span;
         double removed =
-                (shifted.sensibleW - effect.sensibleW) / SHIFT_S
+                (after.sensibleW - behind.sensibleW) / span
                         + vapour * MoistAir.vapourEnthalpyJkg(air.airC);
-        double fan = powered && !defrosting ? (shifted.fanW - effect.fanW) / SHIFT_S : 0;
+        double fan = powered && !defrosting ? (after.fanW - behind.fanW) / span : 0;
         slope[flowAt + REMOVED] = removed;
         slope[flowAt + VAPOUR] = vapour;
-        slope[flowAt + ELECTRIC] = (shifted.electricW - effect.electricW) / SHIFT_S;
+        slope[flowAt + ELECTRIC] = (after.electricW - behind.electricW) / span;
         slope[flowAt + FAN] = fan;
-        slope[flowAt + RUN] = (shifted.ran - effect.ran) / SHIFT_S;
-        slope[flowAt + EXCHANGED] = (shifted.exchangeKgS - effect.exchangeKgS) / SHIFT_S;
-        slope[flowAt + WATER] = (shifted.waterKgS - effect.waterKgS) / SHIFT_S;
+        slope[flowAt + RUN] = (after.ran - behind.ran) / span;
+        slope[flowAt + EXCHANGED] = (after.exchangeKgS - behind.exchangeKgS) / span;
+        slope[flowAt + WATER] = (after.waterKgS - behind.waterKgS) / span;
         rateSlope[AirState.ENTHALPY] += fan - removed;
         rateSlope[AirState.HUMIDITY] -= vapour;
         for (int i = 0; i < own; i++) {
-            rateSlope[branch[0].blockAt(i)] += (shifted.ownRate[i] - effect.ownRate[i]) / SHIFT_S;
+            rateSlope[branch[0].blockAt(i)] += (after.ownRate[i] - behind.ownRate[i]) / span;
         }
+    }
+
+    /** Asks what it would do in the outdoor air of a little later, or before. */
+    private void shift(Outside.Place out, double seconds, CoolerEffect then) {
+        double outdoorC = in.outdoorC;
+        double outdoorRatio = in.outdoorHumidityRatio;
+        in.outdoorC = outdoorC + seconds * out.airSlope;
+        in.outdoorHumidityRatio = outdoorRatio + seconds * out.ratioSlope;
+        then.evaporatingC = effect.evaporatingC;
+        law.effect(in, then);
+        in.outdoorC = outdoorC;
+        in.outdoorHumidityRatio = outdoorRatio;
     }
 
     @Override

@@ -403,10 +403,21 @@ public final class Terms {
     public OfCooler cooler(int i, double[] totals) {
         CoolerPart cooler = coolers[i];
         return new OfCooler(
-                totals[cooler.flow(CoolerPart.RUN)],
+                ranS(i, totals),
                 totals[cooler.flow(CoolerPart.REMOVED)] + taken(totals, i) + pump(cooler, totals),
                 electricity(i, totals),
                 totals[cooler.flow(CoolerPart.WATER)] + faceWater(totals, i));
+    }
+
+    /**
+     * Time one cooler ran, weighted by its share.
+     *
+     * @param i number of the cooler
+     * @param totals integrals of the flows
+     * @return s
+     */
+    public double ranS(int i, double[] totals) {
+        return totals[coolers[i].flow(CoolerPart.RUN)];
     }
 
     /**

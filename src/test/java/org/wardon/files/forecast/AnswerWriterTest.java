@@ -50,8 +50,11 @@ class AnswerWriterTest {
                 "id holds airC humidityPct hoursOutsideBand hoursDisturbed pullDownHours peakLoadW"
                         + " removedPeakW intakeKgPerDay respirationLoadW o2PctMin loadKWh"
                         + " heatRemovedKWh energyKWh energyCost waterUsedKg co2PpmMax"
-                        + " ethylenePpmMax balanceErrorPct",
+                        + " ethylenePpmMax balanceErrorPct coolers",
                 chamber);
+        assertNames(
+                "kind runningHours heatRemovedKWh energyKWh waterUsedKg",
+                chamber.get("coolers").get(0));
         assertNames("mean min max p95", chamber.get("airC"));
         assertNames("mean min max", chamber.get("humidityPct"));
         assertNames("mean max", chamber.get("respirationLoadW"));
@@ -175,7 +178,8 @@ class AnswerWriterTest {
                         0,
                         4000,
                         0.4,
-                        0.00012);
+                        0.00012,
+                        List.of(new ChamberForecast.OfCooler("night-air", 80, 120, 50, 0)));
         LotForecast lot =
                 new LotForecast(
                         "M1",

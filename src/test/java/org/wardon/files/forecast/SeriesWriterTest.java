@@ -40,16 +40,20 @@ class SeriesWriterTest {
     }
 
     @Test
-    void aChamberHasItsColumnsAndWaterWhereAFilmRuns() throws IOException {
+    void aChamberHasItsColumnsAndThoseOfItsCoolers() throws IOException {
         writer().chamber("north", TIMES, columns(SeriesWriter.CHAMBER));
         Map<String, IntToDoubleFunction> film = columns(SeriesWriter.CHAMBER);
         film.put("waterOutC", row -> 4);
+        film.put(SeriesWriter.running(1), row -> 40);
+        film.put(SeriesWriter.running(0), row -> 100);
+        film.put("waterUsedKg", row -> 3);
         writer().chamber("south", TIMES, film);
         assertEquals(
                 "time,airC,humidityPct,outdoorC,coolingW,powerW,co2Ppm,ethylenePpm",
                 Files.readAllLines(folder.resolve("a/b/chamber-north.csv")).get(0));
         assertEquals(
-                "time,airC,humidityPct,outdoorC,coolingW,powerW,co2Ppm,ethylenePpm,waterOutC",
+                "time,airC,humidityPct,outdoorC,coolingW,powerW,co2Ppm,ethylenePpm,waterOutC,"
+                        + "waterUsedKg,running1Pct,running2Pct",
                 Files.readAllLines(folder.resolve("a/b/chamber-south.csv")).get(0));
     }
 

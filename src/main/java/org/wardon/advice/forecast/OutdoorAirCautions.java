@@ -1,0 +1,143 @@
+package org.wardon.advice.forecast;
+
+import java.util.ArrayList;
+import java.util.List;
+import org.wardon.air.MoistAir;
+import org.wardon.air.SaturatedAir;
+import org.wardon.air.StandardAtmosphere;
+import org.wardon.air.Weather;
+import org.wardon.cooling.Compressor;
+import org.wardon.cooling.Cooler;
+import org.wardon.cooling.EvaporativePad;
+import org.wardon.cooling.NightAir;
+import org.wardon.cooling.PadOutlet;
+import org.wardon.cooling.WaterFilm;
+import org.wardon.cooling.WettedWall;
+import org.wardon.heat.Hours;
+import org.wardon.plan.ChamberPlan;
+import org.wardon.produce.Caution;
+import org.wardon.produce.Caution.Level;
+import org.wardon.produce.Reason;
+import org.wardon.produce.Reason.Argument;
+
+/**
+ * What this weather lets coolers that work with outdoor air do: {@code pad-gives-little}, {@code
+ * night-air-rests}, {@code night-air-dry}.
+ */
+final class OutdoorAirCautions implements Cooler.Kinds<List<Caution>> {
+    /**
+     * What a well-kept pad takes off the incoming air, K; source: table of cooling sources,
+     * air_cooling, 5.6 to 11.1 K.
+     */
+    private static final double WELL_KEPT_K = 5.6;
+
+    /** A fan that runs less than this share of the time hardly does (assumption). */
+    private static final double RESTS_BELOW = 0.02;
+
+    /** Air this much drier than wished for is told, percent (assumption). */
+    private static final double DRY_BY_PCT = 20;
+
+    private static final String OWN_RULE = "assumption";
+
+    private final ChamberPlan chamber;
+    private final int place;
+    private final Hours hours;
+    private final Weather weather;
+    private final double pressurePa;
+
+    private OutdoorAirCautions(StoreOutcome outcome, ChamberPlan chamber, int place) {
+        this.chamber = chamber;
+        this.place = place;
+        this.hours = outcome.course(chamber.id()).hours();
+        this.weather = outcome.model().weather();
+        this.pressurePa = StandardAtmosphere.pressurePa(outcome.model().plan().site().elevationM());
+    }
+
+    static List<Caution> of(StoreOutcome outcome, ChamberPlan chamber) {
+        List<Caution> all = new ArrayList<>();
+        for (int i = 0; i < chamber.coolers().size(); i++) {
+            Cooler cooler = chamber.coolers().get(i);
+            all.addAll(cooler.match(new OutdoorAirCautions(outcome, chamber, i)));
+        }
+        return all;
+    }
+
+    @Override
+    public List<Caution> compressor(Compressor unit) {
+        return List.of();
+    }
+
+    @Override
+    public List<Caution> wettedWall(WettedWall wall) {
+        return List.of();
+    }
+
+    @Override
+    public List<Caution> waterFilm(WaterFilm film) {
+        return List.of();
+    }
+
+    @Override
+    public List<Caution> evaporativePad(EvaporativePad pad) {
+        double sum = 0;
+        for (int h = 0; h < hours.size(); h++) {
+            double airC = weather.temperatureC(h);
+            double most = MoistAir.saturatedHumidityRatio(airC, pressurePa);
+            double ratio = Math.min(MoistAir.humidityRatio(vapourPa(h), pressurePa), most);
+            sum += airC - PadOutlet.of(airC, ratio, pad.effectiveness(), pressurePa).temperatureC();
+        }
+        double meanK = sum / hours.size();
+        return meanK >= WELL_KEPT_K
+                ? List.of()
+                : List.of(
+                        caution(
+                                Reason.about(
+                                        "pad-gives-little",
+                                        chamber.id(),
+                                        "OSU-AEX127",
+                                        Argument.of(meanK, "K"),
+                                        Argument.of(WELL_KEPT_K, "K"))));
+    }
+
+    @Override
+    public List<Caution> nightAir(NightAir fan) {
+        double ran = 0;
+        double humidity = 0;
+        for (int i = 0; i < hours.size(); i++) {
+            double share = hours.ran(place, i);
+            double inside = SaturatedAir.pressurePa(hours.airC(i));
+            ran += share;
+            humidity += share * 100 * Math.min(vapourPa(i) / inside, 1);
+        }
+        if (ran < RESTS_BELOW * hours.size()) {
+            return List.of(
+                    caution(
+                            Reason.about(
+                                    "night-air-rests",
+                                    chamber.id(),
+                                    OWN_RULE,
+                                    Argument.of(ran, "h"),
+                                    Argument.of(hours.size(), "h"))));
+        }
+        double wishedPct = chamber.setting().humidityPct();
+        return humidity / ran >= wishedPct - DRY_BY_PCT
+                ? List.of()
+                : List.of(
+                        caution(
+                                Reason.about(
+                                        "night-air-dry",
+                                        chamber.id(),
+                                        OWN_RULE,
+                                        Argument.of(humidity / ran, "pct"),
+                                        Argument.of(wishedPct, "pct"))));
+    }
+
+    /** Stations state humidity over water at all temperatures. */
+    private double vapourPa(int h) {
+        return weather.humidityPct(h) / 100 * SaturatedAir.overWaterPa(weather.temperatureC(h));
+    }
+
+    private static Caution caution(Reason reason) {
+        return new Caution(Level.CAUTION, reason);
+    }
+}

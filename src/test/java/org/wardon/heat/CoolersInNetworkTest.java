@@ -1,0 +1,202 @@
+package org.wardon.heat;
+
+import static org.junit.jupiter.api.Assertions.assertEquals;
+import static org.junit.jupiter.api.Assertions.assertTrue;
+
+import java.util.List;
+import java.util.SplittableRandom;
+import org.junit.jupiter.api.Test;
+import org.wardon.air.MoistAir;
+import org.wardon.air.Weather;
+import org.wardon.cooling.Compressor;
+import org.wardon.cooling.Control;
+import org.wardon.cooling.Cooler;
+import org.wardon.cooling.CoolerEffect;
+import org.wardon.cooling.EvaporativePad;
+import org.wardon.cooling.NightAir;
+import org.wardon.cooling.Setting;
+import org.wardon.enclosure.Enclosure;
+import org.wardon.heat.network.ChamberNetwork;
+import org.wardon.heat.solver.DenseJacobian;
+
+/**
+ * A chamber with coolers of every kind that acts on its air: what the network states of them equals
+ * differences, at states where thermostats and own conditions are partly fulfilled.
+ */
+class CoolersInNetworkTest {
+    private static final double T = 1_800;
+
+    /** The coil's balance ends within 1e-11 x (1 + T) K, times some 5 kW/K, over 2 s. */
+    private static final double NOISE_W_S = 1e-6;
+
+    private final SplittableRandom random = new SplittableRandom(5);
+    private final ChamberRun run = run();
+    private final ChamberNetwork network = RunCompiler.network(run, true);
+    private final int size = network.tree().size();
+
+    private static List<Cooler> coolers() {
+        Compressor plain = Chambers.unit(Control.MODULATING);
+        Compressor airy =
+                new Compressor(
+                        plain.ratedCapacityW(),
+                        plain.ratedPowerW(),
+                        plain.ratedAirC(),
+                        plain.ratedOutdoorC(),
+                        plain.fanW(),
+                        true,
+                        plain.coilUaWK(),
+                        plain.airFlowM3s(),
+                        plain.control(),
+                        plain.minRunMinutes(),
+                        plain.minRestMinutes(),
+                        plain.condenserRiseK(),
+                        plain.lowestC(),
+                        plain.defrost(),
+                        plain.dailyEnergyKWh());
+        return List.of(
+                new EvaporativePad(0.15, 0.1, 80, 20, Control.MODULATING),
+                new NightAir(0.15, 90, 2, 3, 30, 80, Control.MODULATING),
+                airy,
+                new EvaporativePad(0.8, 0.05, 30, 0, Control.MODULATING));
+    }
+
+    private static ChamberRun run() {
+        Weather weather =
+                new Weather(
+                        new double[] {19, 17.5, 17, 17},
+                        new double[] {45, 50, 50, 50},
+                        new double[4],
+                        new double[4]);
+        Enclosure leaky =
+                new Enclosure(
+                        Chambers.panelRoom(20).box(),
+                        Chambers.panelRoom(20).faces(),
+                        10,
+                        Chambers.panelRoom(20).door(),
+                        150,
+                        20,
+                        Chambers.panelRoom(20).gains(),
+                        50_000,
+                        false);
+        return Chambers.passive(leaky, weather, 1 / 12.0)
+                .withSetting(new Setting(20, 1.5, 80))
+                .withControlMode(ControlMode.MODULATING)
+                .withCoolers(coolers());
+    }
+
+    private double[] randomState() {
+        double airC = random.nextDouble(16.5, 27);
+        double pressure = RunCompiler.pressurePa(run);
+        double ratio =
+                random.nextDouble(0.3, 0.98) * MoistAir.saturatedHumidityRatio(airC, pressure);
+        double[] y = network.start(airC, ratio);
+        for (int i = 2; i < size; i++) {
+            y[i] = y[i] == 0 ? random.nextDouble(0.3, 1.5) : y[i] * random.nextDouble(0.97, 1.03);
+        }
+        return y;
+    }
+
+    private double[] rates(double t, double[] y, double[] flows) {
+        double[] f = new double[size];
+        network.rates(t, y, f, flows);
+        return f;
+    }
+
+    @Test
+    void jacobianEqualsDifferences() {
+        double[] none = new double[network.flows()];
+        double[] slope = new double[size];
+        double[] flowSlope = new double[network.flows()];
+        int[] partly = new int[network.coolerCount()];
+        for (int k = 0; k < 150; k++) {
+            double[] y = randomState();
+            network.linearise(T, y, slope, flowSlope);
+            for (int i = 0; i < partly.length; i++) {
+                CoolerEffect effect = network.cooler(i).effect();
+                partly[i] += effect.ran > 0.01 && effect.ran < 0.99 ? 1 : 0;
+            }
+            double[][] j = DenseJacobian.of(network.tree());
+            for (int c = 0; c < size; c++) {
+                double step = 1e-6 * Math.max(Math.abs(y[c]), 1e-2);
+                double[] up = y.clone();
+                double[] down = y.clone();
+                up[c] += step;
+                down[c] -= step;
+                double[] fUp = rates(T, up, none);
+                double[] fDown = rates(T, down, none);
+                for (int r = 0; r < size; r++) {
+                    double difference = (fUp[r] - fDown[r]) / (2 * step);
+                    double scale = Math.abs(j[r][r]) + Math.abs(j[r][c]);
+                    assertEquals(
+                            difference,
+                            j[r][c],
+                            2e-4 * scale + 1e-9 * Math.abs(fUp[r]) / step,
+                            "state " + k + " row " + r + " column " + c);
+                }
+            }
+        }
+        for (int i = 0; i < partly.length; i++) {
+            assertTrue(partly[i] > 5, "cooler " + i + " partly ran in " + partly[i] + " states");
+        }
+    }
+
+    @Test
+    void slopesInTimeEqualDifferences() {
+        double[] slope = new double[size];
+        double[] flowSlope = new double[network.flows()];
+        double[] flowsUp = new double[network.flows()];
+        double[] flowsDown = new double[network.flows()];
+        for (int k = 0; k < 100; k++) {
+            double[] y = randomState();
+            network.linearise(T, y, slope, flowSlope);
+            double[] up = rates(T + 1, y, flowsUp);
+            double[] down = rates(T - 1, y, flowsDown);
+            for (int i = 0; i < flowSlope.length; i++) {
+                double difference = (flowsUp[i] - flowsDown[i]) / 2;
+                assertEquals(
+                        difference,
+                        flowSlope[i],
+                        2e-3 * Math.abs(difference) + NOISE_W_S,
+                        "state " + k + " flow " + i);
+            }
+            for (int i = 0; i < size; i++) {
+                double difference = (up[i] - down[i]) / 2;
+                assertEquals(
+                        difference,
+                        slope[i],
+                        2e-3 * Math.abs(difference) + NOISE_W_S / 100,
+                        "node " + i);
+            }
+        }
+    }
+
+    @Test
+    void flowsAlongADirectionEqualDifferences() {
+        double[] slope = new double[size];
+        double[] flowSlope = new double[network.flows()];
+        double[] up = new double[network.flows()];
+        double[] down = new double[network.flows()];
+        double[] along = new double[network.flows()];
+        for (int k = 0; k < 150; k++) {
+            double[] y = randomState();
+            network.linearise(T, y, slope, flowSlope);
+            double[] v = new double[size];
+            double[] plus = y.clone();
+            double[] minus = y.clone();
+            for (int i = 0; i < size; i++) {
+                v[i] = 1e-5 * Math.abs(y[i]) * random.nextDouble(-1, 1);
+                plus[i] += v[i];
+                minus[i] -= v[i];
+            }
+            network.flowsAlong(v, along);
+            rates(T, plus, up);
+            rates(T, minus, down);
+            for (int i = 0; i < along.length; i++) {
+                double difference = 0.5 * (up[i] - down[i]);
+                double scale = Math.abs(difference) + 1e-6 * Math.abs(up[i]);
+                assertEquals(
+                        difference, along[i], 1e-3 * scale + 1e-12, "state " + k + " flow " + i);
+            }
+        }
+    }
+}
