@@ -22,7 +22,9 @@ public final class AirSeries {
                 n > 0 && temperatureC.length == n && humidityFraction.length == n,
                 "an air series needs three arrays of equal length of at least 1, found " + n);
         for (int i = 1; i < n; i++) {
-            Require.that(timeS[i] > timeS[i - 1], "times must rise, found " + timeS[i] + " s");
+            if (!(timeS[i] > timeS[i - 1])) {
+                throw new IllegalArgumentException("times must rise, found " + timeS[i] + " s");
+            }
         }
         this.timeS = timeS.clone();
         this.temperatureC = temperatureC.clone();

@@ -1,5 +1,6 @@
 package org.wardon.keeping;
 
+import java.util.Arrays;
 import org.wardon.air.Timeline;
 import org.wardon.lots.LotHistory;
 
@@ -99,10 +100,8 @@ final class Track {
         if (atS >= timeS[last]) {
             return used[last];
         }
-        int i = 0;
-        while (timeS[i + 1] < atS) {
-            i++;
-        }
+        int found = Arrays.binarySearch(timeS, atS);
+        int i = found >= 0 ? found : -found - 2;
         return between(used[i], used[i + 1], (atS - timeS[i]) / (timeS[i + 1] - timeS[i]));
     }
 

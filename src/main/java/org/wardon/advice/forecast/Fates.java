@@ -5,6 +5,7 @@ import java.util.Arrays;
 import java.util.HashMap;
 import java.util.List;
 import java.util.Map;
+import java.util.function.ToDoubleFunction;
 import org.wardon.air.Timeline;
 import org.wardon.cooling.Outage;
 import org.wardon.heat.AirSeries;
@@ -58,12 +59,16 @@ final class Fates {
     }
 
     /** Follows every lot that has a history. */
-    Map<String, Three> follow(Map<String, LotHistory> histories, Draw draw, double durationS) {
+    Map<String, Three> follow(
+            Map<String, LotHistory> histories, Draw draw, ToDoubleFunction<String> withoutS) {
         Map<String, Three> fates = new HashMap<>();
         for (LotSheet sheet : model.sheets()) {
             LotHistory history = histories.get(sheet.id());
             if (history != null) {
-                LotHistory alone = clean(model.without(sheet, draw, durationS).history());
+                LotHistory alone =
+                        clean(
+                                model.without(sheet, draw, withoutS.applyAsDouble(sheet.id()))
+                                        .history());
                 fates.put(sheet.id(), three(sheet, history, alone, draw));
             }
         }
@@ -71,11 +76,12 @@ final class Fates {
     }
 
     /** Follows every lot and keeps the ends only, each before the next is begun. */
-    Map<String, Three> ends(Map<String, LotHistory> histories, Draw draw, double durationS) {
+    Map<String, Three> ends(
+            Map<String, LotHistory> histories, Draw draw, ToDoubleFunction<String> withoutS) {
         Map<String, Three> ends = new HashMap<>();
         histories.forEach(
                 (id, history) ->
-                        follow(Map.of(id, history), draw, durationS)
+                        follow(Map.of(id, history), draw, withoutS)
                                 .forEach((lot, three) -> ends.put(lot, three.brief())));
         return ends;
     }

@@ -52,7 +52,7 @@ public final class ForecastAdvice {
                         StoreRun.MOST_BEYOND_DAYS);
         StoreModel open = model(asked, weather);
         SimplePlacing.Placed placed = new SimplePlacing(open).place();
-        StoreModel model = placed.told().isEmpty() ? open : model(placed.plan(), weather);
+        StoreModel model = placed.told().isEmpty() ? open : open.placed(placed.plan());
         StoreOutcome outcome = new StoreRun(model).run(progress);
         return together(outcome, placed.told());
     }

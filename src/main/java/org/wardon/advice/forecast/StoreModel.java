@@ -5,6 +5,7 @@ import java.util.LinkedHashMap;
 import java.util.List;
 import java.util.Map;
 import java.util.OptionalDouble;
+import java.util.function.ToDoubleFunction;
 import org.wardon.air.Timeline;
 import org.wardon.air.Weather;
 import org.wardon.cooling.Cooler;
@@ -25,6 +26,7 @@ import org.wardon.heat.Stay;
 import org.wardon.keeping.Draw;
 import org.wardon.plan.ChamberPlan;
 import org.wardon.plan.Corrections;
+import org.wardon.plan.LotPlan;
 import org.wardon.plan.StorePlan;
 import org.wardon.plan.WithoutChamber;
 
@@ -53,6 +55,16 @@ final class StoreModel {
                 plan.without() instanceof WithoutChamber.Steady steady
                         ? AirSeries.steady(steady.temperatureC(), steady.humidityPct() / 100)
                         : AirSeries.outdoors(weather);
+    }
+
+    /** The same store with its lots in the chambers of another plan. */
+    StoreModel placed(StorePlan otherwise) {
+        Map<String, LotPlan> lots = new HashMap<>();
+        otherwise.lots().forEach(lot -> lots.put(lot.id(), lot));
+        return new StoreModel(
+                otherwise,
+                weather,
+                sheets.stream().map(sheet -> sheet.planned(ById.get(lots, sheet.id()))).toList());
     }
 
     StorePlan plan() {
@@ -92,7 +104,7 @@ final class StoreModel {
                     airOf(
                             pass(
                                     Draw.MEDIAN,
-                                    durationS,
+                                    id -> durationS,
                                     air,
                                     DoorMode.AVERAGED,
                                     ControlMode.MODULATING));
@@ -104,21 +116,36 @@ final class StoreModel {
         }
         progress.at("forecast", 0.5);
         Map<String, Course> courses =
-                pass(Draw.MEDIAN, durationS, air, DoorMode.PULSES, ControlMode.AS_BUILT);
+                pass(Draw.MEDIAN, id -> durationS, air, DoorMode.PULSES, ControlMode.AS_BUILT);
         progress.at("forecast", 1);
         return courses;
     }
 
     /**
-     * Runs all chambers in one draw with averaged doors, in the neighbours' air of the plain run.
+     * Runs all chambers in one draw with averaged doors, each to its own end in seconds, in the
+     * neighbours' air of the plain run.
      */
-    Map<String, Course> drawn(Draw draw, double durationS, Map<String, Course> plain) {
-        return pass(draw, durationS, airOf(plain), DoorMode.AVERAGED, ControlMode.MODULATING);
+    Map<String, Course> drawn(Draw draw, ToDoubleFunction<String> endS, Map<String, Course> plain) {
+        return pass(draw, endS, airOf(plain), DoorMode.AVERAGED, ControlMode.MODULATING);
     }
 
     /** Runs all chambers with averaged doors, each neighbour taken to stand at its setting. */
     Map<String, Course> sketch(double durationS) {
-        return pass(Draw.MEDIAN, durationS, startAir(), DoorMode.AVERAGED, ControlMode.MODULATING);
+        return pass(
+                Draw.MEDIAN,
+                id -> durationS,
+                startAir(),
+                DoorMode.AVERAGED,
+                ControlMode.MODULATING);
+    }
+
+    /** Runs one chamber with averaged doors, in the neighbours' air of the plain run. */
+    Course sketch(ChamberPlan chamber, double durationS, Map<String, Course> plain) {
+        ChamberRun run =
+                asPlanned(chamber, durationS, plain)
+                        .withDoorMode(DoorMode.AVERAGED)
+                        .withControlMode(ControlMode.MODULATING);
+        return HeatModel.run(Averaged.of(run), Progress.SILENT);
     }
 
     /** Runs one chamber with the air held ideally at its setting: what it takes is the load. */
@@ -171,13 +198,13 @@ final class StoreModel {
 
     private Map<String, Course> pass(
             Draw draw,
-            double durationS,
+            ToDoubleFunction<String> endS,
             Map<String, AirSeries> air,
             DoorMode door,
             ControlMode control) {
         List<ChamberRun> runs =
                 plan.chambers().stream()
-                        .map(chamber -> run(chamber, draw, durationS, air))
+                        .map(chamber -> run(chamber, draw, endS.applyAsDouble(chamber.id()), air))
                         .map(run -> run.withDoorMode(door).withControlMode(control))
                         .map(run -> door == DoorMode.AVERAGED ? Averaged.of(run) : run)
                         .toList();
