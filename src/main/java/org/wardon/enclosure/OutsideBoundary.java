@@ -163,6 +163,15 @@ public final class OutsideBoundary {
     }
 
     /**
+     * Returns the temperatures of all hours.
+     *
+     * @return {@code [hour]}, °C
+     */
+    public double[] temperaturesC() {
+        return temperatureC.clone();
+    }
+
+    /**
      * Returns the temperature beyond the film: sol-air, air of the space, or deep ground.
      *
      * @param hour hour of the run, 0 to {@link #hours}

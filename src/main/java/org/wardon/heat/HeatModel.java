@@ -22,7 +22,11 @@ public final class HeatModel {
      * @throws IllegalArgumentException where a part is not built or parts do not fit together
      */
     public static Course run(ChamberRun run, Progress progress) {
-        return run(run, progress, Accuracy.USUAL, false);
+        return run(
+                run,
+                progress,
+                run.doorMode() == DoorMode.SKETCHED ? Accuracy.SKETCHED : Accuracy.USUAL,
+                false);
     }
 
     /**

@@ -92,20 +92,23 @@ final class Fates {
         return new Three(staying, sold(sheet, history, staying, draw), alone);
     }
 
-    /** The fate of a lot in another air than that of its chamber. */
-    Fate inOtherAir(LotSheet sheet, LotHistory history, double ppm, Draw draw) {
+    /** History of a lot in another air than that of its chamber, market leg included. */
+    LotHistory inOtherAir(LotSheet sheet, LotHistory history, double ppm) {
         double[] felt = new double[history.size()];
         Arrays.fill(felt, ppm);
         LotHistory there = history.withEthylene(felt);
-        return sold(sheet, there, sheet.model().follow(there, draw), draw);
+        return isSold(sheet, there) ? withMarket(sheet, there) : there;
+    }
+
+    private static boolean isSold(LotSheet sheet, LotHistory history) {
+        return sheet.marketDays() >= SHORTEST_LEG_DAYS
+                && sheet.clock().leavesS() > history.timeS(0);
     }
 
     private Fate sold(LotSheet sheet, LotHistory history, Fate staying, Draw draw) {
-        double leavesS = sheet.clock().leavesS();
-        if (sheet.marketDays() < SHORTEST_LEG_DAYS || leavesS <= history.timeS(0)) {
-            return staying;
-        }
-        return sheet.model().follow(withMarket(sheet, history), draw);
+        return isSold(sheet, history)
+                ? sheet.model().follow(withMarket(sheet, history), draw)
+                : staying;
     }
 
     /** History of a lot up to its leaving, carried on through the market leg. */

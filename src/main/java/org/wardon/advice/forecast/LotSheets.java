@@ -1,7 +1,6 @@
 package org.wardon.advice.forecast;
 
 import java.time.LocalDateTime;
-import java.util.ArrayList;
 import java.util.List;
 import java.util.Optional;
 import java.util.OptionalDouble;
@@ -53,11 +52,7 @@ final class LotSheets {
     }
 
     List<LotSheet> all() {
-        List<LotSheet> sheets = new ArrayList<>();
-        for (LotPlan lot : plan.lots()) {
-            sheets.add(sheet(lot));
-        }
-        return List.copyOf(sheets);
+        return plan.lots().parallelStream().map(this::sheet).toList();
     }
 
     private LotSheet sheet(LotPlan lot) {

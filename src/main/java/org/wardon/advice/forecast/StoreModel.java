@@ -45,16 +45,20 @@ final class StoreModel {
     private final List<LotSheet> sheets;
     private final Timeline timeline;
     private final AirSeries withoutAir;
+    private final AirSeries sketchedAir;
 
     StoreModel(StorePlan plan, Weather weather, List<LotSheet> sheets) {
         this.plan = plan;
         this.weather = weather;
         this.sheets = List.copyOf(sheets);
         this.timeline = plan.timeline();
-        this.withoutAir =
-                plan.without() instanceof WithoutChamber.Steady steady
-                        ? AirSeries.steady(steady.temperatureC(), steady.humidityPct() / 100)
-                        : AirSeries.outdoors(weather);
+        if (plan.without() instanceof WithoutChamber.Steady steady) {
+            withoutAir = AirSeries.steady(steady.temperatureC(), steady.humidityPct() / 100);
+            sketchedAir = withoutAir;
+        } else {
+            withoutAir = AirSeries.outdoors(weather);
+            sketchedAir = withoutAir.sketched();
+        }
     }
 
     /** The same store with its lots in the chambers of another plan. */
@@ -126,7 +130,7 @@ final class StoreModel {
      * neighbours' air of the plain run.
      */
     Map<String, Course> drawn(Draw draw, ToDoubleFunction<String> endS, Map<String, Course> plain) {
-        return pass(draw, endS, airOf(plain), DoorMode.AVERAGED, ControlMode.MODULATING);
+        return pass(draw, endS, airOf(plain), DoorMode.SKETCHED, ControlMode.MODULATING);
     }
 
     /** Runs all chambers with averaged doors, each neighbour taken to stand at its setting. */
@@ -143,7 +147,7 @@ final class StoreModel {
     Course sketch(ChamberPlan chamber, double durationS, Map<String, Course> plain) {
         ChamberRun run =
                 asPlanned(chamber, durationS, plain)
-                        .withDoorMode(DoorMode.AVERAGED)
+                        .withDoorMode(DoorMode.SKETCHED)
                         .withControlMode(ControlMode.MODULATING);
         return HeatModel.run(Averaged.of(run), Progress.SILENT);
     }
@@ -179,12 +183,12 @@ final class StoreModel {
 
     /** Runs one lot without a chamber in one draw. */
     LotCourse without(LotSheet sheet, Draw draw, double durationS) {
-        return inAir(sheet.stay(draw), withoutAir, durationS);
+        return inAir(sheet.stay(draw), sketchedAir, durationS);
     }
 
     /** Runs one lot in the air of a chamber that is there already. */
     LotCourse inAirOf(LotSheet sheet, Course chamber, double durationS) {
-        return inAir(sheet.stay(Draw.MEDIAN), series(chamber), durationS);
+        return inAir(sheet.stay(Draw.MEDIAN), series(chamber).sketched(), durationS);
     }
 
     private LotCourse inAir(Stay stay, AirSeries air, double durationS) {
@@ -206,7 +210,7 @@ final class StoreModel {
                 plan.chambers().stream()
                         .map(chamber -> run(chamber, draw, endS.applyAsDouble(chamber.id()), air))
                         .map(run -> run.withDoorMode(door).withControlMode(control))
-                        .map(run -> door == DoorMode.AVERAGED ? Averaged.of(run) : run)
+                        .map(run -> door == DoorMode.PULSES ? run : Averaged.of(run))
                         .toList();
         List<Course> ran = HeatModel.runTogether(runs);
         Map<String, Course> courses = new LinkedHashMap<>();
