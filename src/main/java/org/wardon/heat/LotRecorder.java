@@ -16,7 +16,9 @@ final class LotRecorder {
     private static final double CLOSER_FOR_S = 24 * 3600.0;
 
     private static final double CLOSER_S = 300;
-    private static final int CLOSER_SAMPLES = (int) (CLOSER_FOR_S / CLOSER_S);
+
+    /** Room for samples closer than rows; more are taken too. */
+    private static final int CLOSER_SAMPLES = 80;
 
     /** Wet from this share of the skin on; below it dew is not noticed (assumption). */
     private static final double WET_SHARE = 0.02;

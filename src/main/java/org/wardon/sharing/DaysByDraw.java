@@ -1,7 +1,6 @@
 package org.wardon.sharing;
 
-import java.util.ArrayList;
-import java.util.List;
+import java.util.function.Predicate;
 import org.wardon.keeping.Draw;
 import org.wardon.keeping.Fate;
 import org.wardon.keeping.KeepingModel;
@@ -17,9 +16,9 @@ final class DaysByDraw {
 
     private final Paces paces;
     private final double marketDays;
-    private final List<Left> dry = new ArrayList<>();
-    private final List<Left> ofHumidity = new ArrayList<>();
-    private final List<Left> chilling = new ArrayList<>();
+    private final Left[] dry;
+    private final Left[] ofHumidity;
+    private final Left[] chilling;
 
     /** What a mechanism leaves for the chamber, share of its limit. */
     private record Left(Mechanism mechanism, double share) {}
@@ -27,14 +26,20 @@ final class DaysByDraw {
     DaysByDraw(KeepingModel model, Wish wish, Draw draw) {
         paces = model.paces(draw);
         marketDays = wish.marketC().isPresent() ? wish.marketDays() : 0;
-        for (Mechanism mechanism : paces.mechanisms()) {
-            Left left = new Left(mechanism, left(mechanism, wish));
-            boolean asks = mechanism == Mechanism.WATER_LOSS || mechanism == Mechanism.DECAY;
-            (asks ? ofHumidity : dry).add(left);
-            if (mechanism == Mechanism.CHILLING) {
-                chilling.add(left);
-            }
-        }
+        dry = left(wish, m -> !asksForHumidity(m));
+        ofHumidity = left(wish, DaysByDraw::asksForHumidity);
+        chilling = left(wish, m -> m == Mechanism.CHILLING);
+    }
+
+    private static boolean asksForHumidity(Mechanism mechanism) {
+        return mechanism == Mechanism.WATER_LOSS || mechanism == Mechanism.DECAY;
+    }
+
+    private Left[] left(Wish wish, Predicate<Mechanism> which) {
+        return paces.mechanisms().stream()
+                .filter(which)
+                .map(mechanism -> new Left(mechanism, left(mechanism, wish)))
+                .toArray(Left[]::new);
     }
 
     private double left(Mechanism mechanism, Wish wish) {
@@ -63,7 +68,7 @@ final class DaysByDraw {
     }
 
     /** Days in the chamber so that the market leg still fits, and the market leg. */
-    private double least(List<Left> among, double temperatureC, double humidityFraction) {
+    private double least(Left[] among, double temperatureC, double humidityFraction) {
         double least = Fate.MOST_DAYS;
         for (Left left : among) {
             if (left.share <= 0) {

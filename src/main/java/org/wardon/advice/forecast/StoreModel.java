@@ -4,7 +4,9 @@ import java.util.HashMap;
 import java.util.LinkedHashMap;
 import java.util.List;
 import java.util.Map;
+import java.util.Optional;
 import java.util.OptionalDouble;
+import java.util.concurrent.ConcurrentHashMap;
 import java.util.function.ToDoubleFunction;
 import org.wardon.air.Timeline;
 import org.wardon.air.Weather;
@@ -46,6 +48,7 @@ final class StoreModel {
     private final Timeline timeline;
     private final AirSeries withoutAir;
     private final AirSeries sketchedAir;
+    private final Map<String, Start> warmed = new ConcurrentHashMap<>();
 
     StoreModel(StorePlan plan, Weather weather, List<LotSheet> sheets) {
         this.plan = plan;
@@ -211,11 +214,17 @@ final class StoreModel {
                         .map(chamber -> run(chamber, draw, endS.applyAsDouble(chamber.id()), air))
                         .map(run -> run.withDoorMode(door).withControlMode(control))
                         .map(run -> door == DoorMode.PULSES ? run : Averaged.of(run))
+                        .map(run -> door == DoorMode.SKETCHED ? run.withStart(warmed(run)) : run)
                         .toList();
         List<Course> ran = HeatModel.runTogether(runs);
         Map<String, Course> courses = new LinkedHashMap<>();
         ran.forEach(course -> courses.put(course.chamberId(), course));
         return courses;
+    }
+
+    /** All draws of a chamber start alike. */
+    private Start warmed(ChamberRun run) {
+        return warmed.computeIfAbsent(run.chamberId(), id -> HeatModel.warmed(run));
     }
 
     private ChamberRun run(
@@ -265,7 +274,12 @@ final class StoreModel {
 
     private static Start start(ChamberPlan chamber) {
         return chamber.starts()
-                .map(air -> new Start(OptionalDouble.of(air.temperatureC()), air.humidityPct()))
+                .map(
+                        air ->
+                                new Start(
+                                        OptionalDouble.of(air.temperatureC()),
+                                        air.humidityPct(),
+                                        Optional.empty()))
                 .orElse(Start.USUAL);
     }
 
