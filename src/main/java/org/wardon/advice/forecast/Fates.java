@@ -20,6 +20,7 @@ import org.wardon.keeping.StoreEthylene;
 import org.wardon.keeping.Window;
 import org.wardon.keeping.ethylene.ChamberAir;
 import org.wardon.lots.LotHistory;
+import org.wardon.plan.ChamberPlan;
 import org.wardon.plan.EthyleneAround;
 
 /** Follows the lots of a store through one draw: staying, sold, and without a chamber. */
@@ -53,8 +54,17 @@ final class Fates {
 
     /** Ethylene of all chambers in a draw, and with it the completed histories of the lots. */
     StoreEthylene ethylene(Map<String, Course> courses, Draw draw) {
+        return ethylene(courses, draw, true);
+    }
+
+    /** Ethylene of all chambers in the middle draw as if no scrubber ran. */
+    StoreEthylene unscrubbed(Map<String, Course> courses) {
+        return ethylene(courses, Draw.MEDIAN, false);
+    }
+
+    private StoreEthylene ethylene(Map<String, Course> courses, Draw draw, boolean scrubbed) {
         Map<String, ChamberAir> air = new HashMap<>();
-        courses.forEach((id, course) -> air.put(id, air(course.hours())));
+        courses.forEach((id, course) -> air.put(id, air(id, course.hours(), scrubbed)));
         return StoreEthylene.of(air, givers(courses), around.outdoorPpm(), draw);
     }
 
@@ -204,7 +214,7 @@ final class Fates {
     }
 
     /** Exchange of a run as keeping reads it: each value holds from its time on. */
-    private static ChamberAir air(Hours hours) {
+    private ChamberAir air(String chamberId, Hours hours, boolean scrubbed) {
         int lead = hours.atS(0) > 0 ? 1 : 0;
         int n = hours.size() + lead;
         double[] time = new double[n];
@@ -216,6 +226,27 @@ final class Fates {
             free[i] = hours.freeM3(Math.max(0, row));
             exchange[i] = hours.exchangeM3s(Math.min(row + 1, hours.size() - 1));
         }
-        return new ChamberAir(time, exchange, free);
+        return scrubbed
+                ? new ChamberAir(time, exchange, free, cleaned(chamberId, time))
+                : new ChamberAir(time, exchange, free);
+    }
+
+    /** Air a scrubber cleans from each time to the next, less what falls into outages, m3/s. */
+    private double[] cleaned(String chamberId, double[] timeS) {
+        double[] cleaned = new double[timeS.length];
+        ChamberPlan chamber = model.plan().getChamber(chamberId);
+        if (chamber.ethyleneScrub().isPresent()) {
+            List<Outage> outages = model.outages(chamber);
+            double most = chamber.ethyleneScrub().get().cleanedM3s();
+            for (int i = 0; i + 1 < timeS.length; i++) {
+                double out = 0;
+                for (Outage outage : outages) {
+                    double from = Math.max(timeS[i], outage.startS());
+                    out += Math.max(0, Math.min(timeS[i + 1], outage.endS()) - from);
+                }
+                cleaned[i] = most * (1 - out / (timeS[i + 1] - timeS[i]));
+            }
+        }
+        return cleaned;
     }
 }
