@@ -6,6 +6,8 @@ import java.util.HashMap;
 import java.util.List;
 import java.util.Map;
 import java.util.Optional;
+import java.util.Set;
+import java.util.TreeSet;
 import org.wardon.errors.Require;
 import org.wardon.keeping.ethylene.ChamberAir;
 import org.wardon.lots.LotHistory;
@@ -27,6 +29,7 @@ public final class StoreEthylene {
      * Steps the chambers through a run.
      *
      * @param air exchange and free volume of each chamber over the run, by id; at the same times
+     *     for chambers that a lot moves between
      * @param lots the lots, present from the start of their history until they leave
      * @param outdoorPpm ethylene of the air that comes in, µL/L
      * @param draw the draw
@@ -34,17 +37,44 @@ public final class StoreEthylene {
      */
     public static StoreEthylene of(
             Map<String, ChamberAir> air, List<Giver> lots, double outdoorPpm, Draw draw) {
-        Steps steps = new Steps(air, lots, outdoorPpm, draw);
         StoreEthylene store = new StoreEthylene();
-        for (int c = 0; c < steps.ids.size(); c++) {
-            store.chambers.put(steps.ids.get(c), new ChamberEthylene(steps.timeS, steps.ppm[c]));
+        Set<String> linked = new TreeSet<>();
+        for (Giver giver : lots) {
+            if (giver.places().size() > 1) {
+                giver.places().forEach(place -> linked.add(place.chamber()));
+            }
         }
-        for (int i = 0; i < lots.size(); i++) {
-            String id = lots.get(i).model().lot().id();
-            store.histories.put(id, store.felt(lots.get(i)));
-            store.ripensS.put(id, steps.stepped.get(i).ripensS());
+        if (!linked.isEmpty()) {
+            store.step(linked, air, lots, outdoorPpm, draw);
+        }
+        for (String id : air.keySet()) {
+            if (!linked.contains(id)) {
+                store.step(Set.of(id), air, lots, outdoorPpm, draw);
+            }
         }
         return store;
+    }
+
+    /** Steps chambers that lots move between, or one by itself. */
+    private void step(
+            Set<String> ids,
+            Map<String, ChamberAir> air,
+            List<Giver> lots,
+            double outdoorPpm,
+            Draw draw) {
+        Map<String, ChamberAir> among = new HashMap<>(air);
+        among.keySet().retainAll(ids);
+        List<Giver> here =
+                lots.stream().filter(lot -> ids.contains(lot.places().get(0).chamber())).toList();
+        Steps steps = new Steps(among, here, outdoorPpm, draw);
+        for (int c = 0; c < steps.ids.size(); c++) {
+            chambers.put(steps.ids.get(c), new ChamberEthylene(steps.timeS, steps.ppm[c]));
+        }
+        for (int i = 0; i < here.size(); i++) {
+            String id = here.get(i).model().lot().id();
+            histories.put(id, felt(here.get(i)));
+            ripensS.put(id, steps.stepped.get(i).ripensS());
+        }
     }
 
     private LotHistory felt(Giver giver) {
