@@ -52,12 +52,12 @@ public final class CoolerCautions {
 
                     @Override
                     public List<Caution> wettedWall(WettedWall wall) {
-                        return List.of();
+                        return WaterCautions.of(wall, chamberId);
                     }
 
                     @Override
                     public List<Caution> waterFilm(WaterFilm film) {
-                        return List.of();
+                        return WaterCautions.of(film, setting, chamberId, pressurePa);
                     }
 
                     @Override

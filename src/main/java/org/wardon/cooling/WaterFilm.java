@@ -112,6 +112,15 @@ public record WaterFilm(
         return inletC.stream().mapToDouble(c -> c).min().orElseThrow();
     }
 
+    /**
+     * Returns the warmest water at the inlet.
+     *
+     * @return °C
+     */
+    public double warmestC() {
+        return inletC.stream().mapToDouble(c -> c).max().orElseThrow();
+    }
+
     @Override
     public String kind() {
         return "water-film";

@@ -46,6 +46,7 @@ final class ChamberRules {
             }
             outages(chamber);
             chamber.at("cooling").items().forEach(this::humidityBounds);
+            new WaterRules(faults).check(chamber);
         }
     }
 

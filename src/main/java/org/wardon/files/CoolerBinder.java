@@ -20,6 +20,8 @@ final class CoolerBinder {
             case "compressor" -> new CompressorBinder(inputs).bind(part);
             case "evaporative-pad" -> fans.pad(part);
             case "night-air" -> fans.nightAir(part);
+            case "wetted-wall" -> new WaterBinder(inputs).wettedWall(part);
+            case "water-film" -> new WaterBinder(inputs).waterFilm(part);
             default ->
                     throw new IllegalArgumentException(
                             part.path() + ": the schema let the kind '" + kind + "' pass");

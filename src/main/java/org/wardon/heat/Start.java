@@ -1,6 +1,5 @@
 package org.wardon.heat;
 
-import java.util.Optional;
 import java.util.OptionalDouble;
 import org.wardon.errors.Require;
 
@@ -11,13 +10,10 @@ import org.wardon.errors.Require;
  *
  * @param temperatureC air, °C
  * @param humidityPct its relative humidity, percent
- * @param warmed what the first day leaves, where it was worked out before
  */
-public record Start(
-        OptionalDouble temperatureC, OptionalDouble humidityPct, Optional<Warmed> warmed) {
+public record Start(OptionalDouble temperatureC, OptionalDouble humidityPct) {
     /** Everything as usual. */
-    public static final Start USUAL =
-            new Start(OptionalDouble.empty(), OptionalDouble.empty(), Optional.empty());
+    public static final Start USUAL = new Start(OptionalDouble.empty(), OptionalDouble.empty());
 
     /** Checks the bounds. */
     public Start {
@@ -33,7 +29,6 @@ public record Start(
      * @return the start
      */
     public static Start at(double temperatureC, double humidityPct) {
-        return new Start(
-                OptionalDouble.of(temperatureC), OptionalDouble.of(humidityPct), Optional.empty());
+        return new Start(OptionalDouble.of(temperatureC), OptionalDouble.of(humidityPct));
     }
 }

@@ -125,6 +125,21 @@ public final class Defaults {
     /** Coldest outdoor air let in. */
     public static final Default LOWEST_INTAKE_C = new Default(0, "°C", ASSUMPTION);
 
+    /** Share of the inner side of a wetted wall that is damp. */
+    public static final Default INNER_DAMP_FRACTION = new Default(0.5, "1", ASSUMPTION);
+
+    /** Hours at which the water of a wetted wall is poured, in equal parts. */
+    public static final List<String> POURED_AT = List.of("07:00", "17:00");
+
+    /** What those hours rest on: {@code cooling-sources.csv}, row watering, 1 to 3 times a day. */
+    public static final String POURED_AT_MARK = "ECC-ENERGYPEDIA; assumption for the hours";
+
+    /** Power of a pump for each kilogram a second: 8 m of head at an efficiency of 0.3. */
+    public static final Default PUMP_W_PER_KG_S = new Default(260, "W s/kg", ASSUMPTION);
+
+    /** Thickness of the water in a jacket. */
+    public static final Default JACKET_GAP_MM = new Default(10, "mm", ASSUMPTION);
+
     /** Days a lot is wanted in the chamber. */
     public static final Default WANTED_DAYS = new Default(7, "day", ASSUMPTION);
 
@@ -142,9 +157,6 @@ public final class Defaults {
 
     /** Ethylene in a market building. */
     public static final Default MARKET_ETHYLENE_PPM = new Default(0.06, "ppm", ASSUMPTION);
-
-    /** Share of the ethylene a scrubber takes at a pass. */
-    public static final Default SCRUB_EFFICIENCY_PCT = new Default(80, "%", ASSUMPTION);
 
     /** The package of a lot whose package nobody gave: any package in a room with fans. */
     public static final String PACKAGE = "room-cooling-any";

@@ -11,8 +11,10 @@ import java.sql.SQLException;
 import java.sql.Statement;
 import java.util.ArrayList;
 import java.util.HashMap;
+import java.util.HashSet;
 import java.util.List;
 import java.util.Map;
+import java.util.Set;
 import java.util.function.Function;
 import org.sqlite.SQLiteConfig;
 import org.sqlite.SQLiteConnection;
@@ -90,10 +92,10 @@ final class ReferenceDatabase implements AutoCloseable {
         return values;
     }
 
-    private static Map<String, Integer> columns(ResultSetMetaData answer) throws SQLException {
-        Map<String, Integer> columns = new HashMap<>();
+    private static Set<String> columns(ResultSetMetaData answer) throws SQLException {
+        Set<String> columns = new HashSet<>();
         for (int i = 1; i <= answer.getColumnCount(); i++) {
-            columns.put(answer.getColumnLabel(i), i);
+            columns.add(answer.getColumnLabel(i));
         }
         return columns;
     }

@@ -135,6 +135,15 @@ class SchemaTest {
                 SCHEMA.at("/$defs/chamber/properties/cooling"),
                 "$.chambers[0].cooling",
                 checked);
+        ObjectNode water = read("water");
+        for (int i = 0; i < 2; i++) {
+            holdBounds(
+                    water,
+                    water.at("/chambers/" + i + "/cooling"),
+                    SCHEMA.at("/$defs/chamber/properties/cooling"),
+                    "$.chambers[" + i + "].cooling",
+                    checked);
+        }
         ObjectNode steady = read("minimal");
         holdBounds(
                 steady, steady.get("weather"), SCHEMA.at("/$defs/weather"), "$.weather", checked);
@@ -180,7 +189,7 @@ class SchemaTest {
                                 : rule.path("additionalProperties");
                 JsonNode child = value.get(name);
                 if (child.isNumber() && !name.equals("storePlan")) {
-                    JsonNode bounds = resolved(next);
+                    JsonNode bounds = chosen(resolved(next), child);
                     hold(plan, (ObjectNode) value, name, bounds, path + "." + name);
                     checked.add(path + "." + name);
                 } else {
@@ -234,6 +243,14 @@ class SchemaTest {
         cooling.addObject().put("kind", "compressor").put("ratedCapacityW", 3500);
         cooling.addObject().put("kind", "evaporative-pad");
         cooling.addObject().put("kind", "night-air");
+        cooling.addObject()
+                .put("kind", "wetted-wall")
+                .put("waterKgPerDay", 40)
+                .putArray("wets")
+                .add("north");
+        ObjectNode jacket = cooling.addObject();
+        jacket.put("kind", "water-film").put("flowKgS", 0.3).put("inletC", 6).put("open", false);
+        jacket.put("chillerCapacityW", 2_000).putArray("wets").add("south");
         Part part =
                 Part.root(JsonText.read(plan.toString(), new Faults("plan.json")).orElseThrow());
         List<Assumed> told =
@@ -298,13 +315,21 @@ class SchemaTest {
         return whole;
     }
 
+    private static boolean fits(String type, JsonNode value) {
+        return switch (type) {
+            case "object" -> value.isObject();
+            case "array" -> value.isArray();
+            default -> !value.isContainer();
+        };
+    }
+
     private static JsonNode chosen(JsonNode rule, JsonNode value) {
         for (JsonNode option : rule.path("oneOf")) {
             JsonNode other = resolved(option);
             JsonNode kind = other.path("properties").path("kind").path("const");
             boolean fits =
                     kind.isMissingNode()
-                            ? other.path("type").asString().equals("object") == value.isObject()
+                            ? fits(other.path("type").asString(), value)
                             : kind.equals(value.path("kind"));
             if (fits) {
                 return other;

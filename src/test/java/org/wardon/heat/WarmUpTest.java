@@ -53,8 +53,7 @@ class WarmUpTest {
                         .withStart(
                                 new Start(
                                         java.util.OptionalDouble.empty(),
-                                        java.util.OptionalDouble.of(30),
-                                        java.util.Optional.empty()));
+                                        java.util.OptionalDouble.of(30)));
         Course course = HeatModel.run(run, Progress.SILENT);
         assertEquals(0.30, course.hours().humidityFraction(0), 0.03);
     }

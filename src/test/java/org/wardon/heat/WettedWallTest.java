@@ -84,6 +84,8 @@ class WettedWallTest {
             boolean poured = Math.abs(hour - 7) < 1e-6 || Math.abs(hour - 17) < 1e-6;
             assertTrue(poured || spell.untilS() == 4 * 86_400, spell.toString());
         }
+        double dryS = dry.stream().mapToDouble(e -> e.untilS() - e.fromS()).sum();
+        assertEquals(4 * 86_400 - dryS, course.coolers().get(0).ranS(), 0.02 * dryS);
         // The sand gives all but what clings to it.
         assertEquals(80, course.waterUsedKg(), 1, "of 80 kg poured");
         Course more = HeatModel.run(WaterChambers.ofBrick(60, summer(4), 4), Progress.SILENT);

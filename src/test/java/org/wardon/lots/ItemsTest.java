@@ -93,8 +93,7 @@ class ItemsTest {
                         Optional.empty(),
                         true);
         WithReasons<Lot> found =
-                LotRange.of("A1", Crops.apple(), 500, carton, Ripeness.UNKNOWN, CLASSES)
-                        .at(Shares.MIDDLE);
+                Lots.of("A1", Crops.apple(), 500, carton, Ripeness.UNKNOWN, CLASSES, Shares.MIDDLE);
         Lot lot = found.value();
         assertEquals(
                 List.of(

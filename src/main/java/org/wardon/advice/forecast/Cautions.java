@@ -1,5 +1,6 @@
 package org.wardon.advice.forecast;
 
+import java.time.temporal.ChronoUnit;
 import java.util.ArrayList;
 import java.util.HashSet;
 import java.util.List;
@@ -48,7 +49,6 @@ final class Cautions {
             new Deliveries(outcome, chamber).all().forEach(c -> add(c.level(), c.reason()));
         }
         new Carried(outcome).all().forEach(c -> add(c.level(), c.reason()));
-        GasCautions.ofScrubbers(outcome).forEach(c -> add(c.level(), c.reason()));
         outcome.model().sheets().forEach(this::lot);
         weather(plan);
         defaults(plan);
@@ -114,12 +114,31 @@ final class Cautions {
             case TRIPPED -> add(Level.CAUTION, Reason.about("trips", chamber.id(), PRACTICE, told));
             case ICES_UP ->
                     add(Level.CAUTION, Reason.about("coil-iced", chamber.id(), PRACTICE, told));
-            case DRY_WALL ->
-                    add(Level.CAUTION, Reason.about("dry-wall", chamber.id(), "own", told));
+            case DRY_WALL -> dryWall(chamber, told, course);
             case ENERGY_USED_UP ->
                     add(Level.CAUTION, Reason.about("energy-used-up", chamber.id(), "own", told));
             case OUTAGE -> add(Level.NOTE, Reason.about("outage", chamber.id(), "own", told));
         }
+    }
+
+    private void dryWall(ChamberPlan chamber, Argument told, Course course) {
+        double firstS =
+                course.events().stream()
+                        .filter(event -> event.kind() == CourseEvent.Kind.DRY_WALL)
+                        .mapToDouble(CourseEvent::fromS)
+                        .min()
+                        .orElse(0);
+        String first =
+                outcome.model()
+                        .plan()
+                        .timeline()
+                        .localAt(firstS)
+                        .truncatedTo(ChronoUnit.MINUTES)
+                        .toString()
+                        .replace('T', ' ');
+        add(
+                Level.CAUTION,
+                Reason.about("dry-wall", chamber.id(), "own", told, Argument.text(first)));
     }
 
     private void wetLots(ChamberPlan chamber, Course course) {

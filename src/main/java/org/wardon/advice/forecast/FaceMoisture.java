@@ -13,6 +13,7 @@ import org.wardon.air.MoistAir;
 import org.wardon.air.SaturatedAir;
 import org.wardon.air.StandardAtmosphere;
 import org.wardon.air.Timeline;
+import org.wardon.cooling.WettedWall;
 import org.wardon.enclosure.Beyond;
 import org.wardon.enclosure.Face;
 import org.wardon.enclosure.Films;
@@ -33,7 +34,8 @@ import org.wardon.produce.Reason.Argument;
 
 /**
  * Whether water gathers inside the faces of a chamber, by the mean of each month of the run. Faces
- * on the ground are not judged: how damp their soil is nobody told.
+ * on the ground are not judged: how damp their soil is nobody told. Nor are walls kept wet on
+ * purpose.
  */
 final class FaceMoisture {
     private static final int MONTH_H = 30 * 24;
@@ -70,7 +72,7 @@ final class FaceMoisture {
         Map<Place, Found> wet = new LinkedHashMap<>();
         Set<String> unknown = new TreeSet<>();
         for (Face face : chamber.enclosure().faces()) {
-            if (!(face.beyond() instanceof Beyond.Ground)) {
+            if (!(face.beyond() instanceof Beyond.Ground) && !keptWet(face)) {
                 judge(face, OutsideBoundary.of(chamber.enclosure(), face, around), wet, unknown);
             }
         }
@@ -82,6 +84,15 @@ final class FaceMoisture {
             cautions.add(new Caution(Level.NOTE, open));
         }
         return cautions;
+    }
+
+    /** A wetted wall has water inside on purpose. */
+    private boolean keptWet(Face face) {
+        return chamber.coolers().stream()
+                .anyMatch(
+                        cooler ->
+                                cooler instanceof WettedWall wall
+                                        && wall.wets().contains(face.name()));
     }
 
     private void judge(

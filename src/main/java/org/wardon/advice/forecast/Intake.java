@@ -130,7 +130,7 @@ final class Intake {
                 .withOutages(List.of())
                 .withStays(stays)
                 .withDurationS(durationS)
-                .withDoorMode(DoorMode.SKETCHED)
+                .withDoorMode(DoorMode.AVERAGED)
                 .withControlMode(ControlMode.MODULATING);
     }
 

@@ -1,6 +1,7 @@
 package org.wardon.advice.forecast;
 
 import java.time.LocalDateTime;
+import java.util.ArrayList;
 import java.util.List;
 import java.util.Optional;
 import java.util.OptionalDouble;
@@ -14,7 +15,7 @@ import org.wardon.keeping.KnownLife;
 import org.wardon.keeping.LotAtDoor;
 import org.wardon.keeping.Purpose;
 import org.wardon.lots.ClassValues;
-import org.wardon.lots.LotRange;
+import org.wardon.lots.Lots;
 import org.wardon.lots.Shares;
 import org.wardon.lots.StackCooling;
 import org.wardon.plan.AtDoor;
@@ -52,21 +53,31 @@ final class LotSheets {
     }
 
     List<LotSheet> all() {
-        return plan.lots().parallelStream().map(this::sheet).toList();
+        List<LotSheet> sheets = new ArrayList<>();
+        for (LotPlan lot : plan.lots()) {
+            sheets.add(sheet(lot));
+        }
+        return List.copyOf(sheets);
     }
 
     private LotSheet sheet(LotPlan lot) {
         Commodity commodity = book.get(lot.commodity());
-        PackageKind kind = kind(lot.packed());
-        LotRange range =
-                LotRange.of(
-                        lot.id(), commodity, lot.massKg(), kind, lot.atDoor().ripeness(), classes);
-        double vapour = range.at(Shares.MIDDLE).value().packing().vapourKgPerKgSPa();
+        double vapour =
+                Lots.of(
+                                lot.id(),
+                                commodity,
+                                lot.massKg(),
+                                kind(lot.packed()),
+                                lot.atDoor().ripeness(),
+                                classes,
+                                Shares.MIDDLE)
+                        .value()
+                        .packing()
+                        .vapourKgPerKgSPa();
         KeptLot kept =
                 KeptLot.inOpenPackage(lot.id(), commodity, door(lot), classes).packedIn(vapour);
-        KeepingModel model = KeepingModel.of(kept);
-        LotRange breathing = model.uncured() ? range.uncured() : range;
-        return new LotSheet(lot, commodity, kind, breathing, clock(lot), model);
+        return new LotSheet(
+                lot, commodity, kind(lot.packed()), classes, clock(lot), KeepingModel.of(kept));
     }
 
     private LotSheet.Clock clock(LotPlan lot) {

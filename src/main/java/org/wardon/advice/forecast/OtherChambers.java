@@ -1,5 +1,6 @@
 package org.wardon.advice.forecast;
 
+import java.util.ArrayList;
 import java.util.List;
 import java.util.Map;
 import org.wardon.heat.Course;
@@ -50,11 +51,10 @@ final class OtherChambers {
     There of(LotSheet sheet, Course chamber, ChamberEthylene level, double durationS) {
         LotHistory history = model.inAirOf(sheet, chamber, durationS).history();
         double ppm = meanPpm(level, history);
-        LotHistory there = fates.inOtherAir(sheet, history, ppm);
-        List<Fate> sold =
-                draws.parallelStream()
-                        .map(draw -> sheet.model().follow(there, draw).brief())
-                        .toList();
+        List<Fate> sold = new ArrayList<>();
+        for (Draw draw : draws) {
+            sold.add(fates.inOtherAir(sheet, history, ppm, draw).brief());
+        }
         return new There(Outlook.shareSound(sold, sheet.soldS()), massShare(sheet, history), sold);
     }
 

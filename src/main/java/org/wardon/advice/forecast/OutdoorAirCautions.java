@@ -22,7 +22,7 @@ import org.wardon.produce.Reason.Argument;
 
 /**
  * What this weather lets coolers that work with outdoor air do: {@code pad-gives-little}, {@code
- * night-air-rests}, {@code night-air-dry}.
+ * night-air-rests}, {@code night-air-dry}, {@code wet-wall-gives-little}.
  */
 final class OutdoorAirCautions implements Cooler.Kinds<List<Caution>> {
     /**
@@ -36,6 +36,14 @@ final class OutdoorAirCautions implements Cooler.Kinds<List<Caution>> {
 
     /** Air this much drier than wished for is told, percent (assumption). */
     private static final double DRY_BY_PCT = 20;
+
+    /**
+     * Walls kept wet are for outdoor air below this humidity, percent; source: table of cooling
+     * sources, suitability_rh. Taken at the hottest hour of the day (assumption).
+     */
+    private static final double WALLS_BELOW_PCT = 40;
+
+    private static final int DAY_H = 24;
 
     private static final String OWN_RULE = "assumption";
 
@@ -69,7 +77,35 @@ final class OutdoorAirCautions implements Cooler.Kinds<List<Caution>> {
 
     @Override
     public List<Caution> wettedWall(WettedWall wall) {
-        return List.of();
+        double humidity = 0;
+        double gain = 0;
+        int days = 0;
+        for (int from = 0; from + DAY_H <= hours.size(); from += DAY_H) {
+            humidity += weather.humidityPct(hottest(from));
+            days++;
+        }
+        for (int h = 0; h < hours.size(); h++) {
+            gain += weather.temperatureC(h + 1) - hours.airC(h);
+        }
+        return days == 0 || humidity / days < WALLS_BELOW_PCT
+                ? List.of()
+                : List.of(
+                        caution(
+                                Reason.about(
+                                        "wet-wall-gives-little",
+                                        chamber.id(),
+                                        "ECC-ENERGYPEDIA",
+                                        Argument.of(humidity / days, "pct"),
+                                        Argument.of(WALLS_BELOW_PCT, "pct"),
+                                        Argument.of(gain / hours.size(), "K"))));
+    }
+
+    private int hottest(int from) {
+        int hour = from;
+        for (int h = from; h < from + DAY_H; h++) {
+            hour = weather.temperatureC(h) > weather.temperatureC(hour) ? h : hour;
+        }
+        return hour;
     }
 
     @Override

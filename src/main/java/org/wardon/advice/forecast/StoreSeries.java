@@ -46,11 +46,14 @@ final class StoreSeries {
         writer.chamber(id, times(hours.size(), hours::atS), columns);
     }
 
-    /** Where there is more than compressors: water used, and how much each cooler ran. */
+    /** Where there is more than compressors: water, and how much each cooler ran. */
     private static void ofCoolers(Course course, Map<String, IntToDoubleFunction> columns) {
         Hours hours = course.hours();
         if (course.coolers().stream().allMatch(cooler -> cooler.kind().equals("compressor"))) {
             return;
+        }
+        if (IntStream.range(0, hours.size()).anyMatch(i -> Double.isFinite(hours.waterOutC(i)))) {
+            columns.put("waterOutC", hours::waterOutC);
         }
         if (course.waterUsedKg() > 0) {
             columns.put("waterUsedKg", hours::waterUsedKg);

@@ -21,7 +21,8 @@ import java.util.OptionalDouble;
  * @param respirationLoadW heat of respiration, W
  * @param o2PctMin lowest oxygen, percent
  * @param loadKWh heat into the chamber by term, kWh
- * @param heatRemovedKWh heat taken by all coolers, kWh
+ * @param heatRemovedKWh heat taken by all coolers, kWh; by walls kept wet the heat of what
+ *     evaporated outside, which stands in {@code loadKWh.walls} too
  * @param energyKWh electricity, kWh
  * @param energyCost its cost, currency
  * @param waterUsedKg water evaporated and bled off, kg

@@ -76,7 +76,7 @@ public final class SchemaCheck {
         boolean same =
                 numbers
                         ? ((Json.Num) json).value() == ((Json.Num) wanted).value()
-                        : json.shown().equals(wanted.shown());
+                        : json.equals(wanted);
         if (!same) {
             wrong(path, json, rule);
         }

@@ -193,7 +193,7 @@ public final class ChamberNetwork implements TreeSystem {
     }
 
     /**
-     * Enters an hour of the weather, and the stretch that starts with it.
+     * Enters an hour of the weather.
      *
      * @param h hour of the run, 0 to the last but one
      */

@@ -41,6 +41,12 @@ final class OpenFilmFace extends FilmedFace {
         return innermost + 1;
     }
 
+    /** Its water is meant to be there: none that lies about. */
+    @Override
+    public double waterKg(double[] y) {
+        return 0;
+    }
+
     @Override
     public void steadyProfile(double airC, double[] y) {
         super.steadyProfile(airC, y);

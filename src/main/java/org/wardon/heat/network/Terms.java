@@ -410,14 +410,23 @@ public final class Terms {
     }
 
     /**
-     * Time one cooler ran, weighted by its share.
+     * Time one cooler ran, weighted by its share; for wetted walls the time they were wet, in the
+     * mean of them.
      *
      * @param i number of the cooler
      * @param totals integrals of the flows
      * @return s
      */
     public double ranS(int i, double[] totals) {
-        return totals[coolers[i].flow(CoolerPart.RUN)];
+        double wetS = 0;
+        int walls = 0;
+        for (FacePart face : faces) {
+            if (face instanceof WettedFace wall && wall.cooler() == i) {
+                wetS += wall.wetS(totals);
+                walls++;
+            }
+        }
+        return walls > 0 ? wetS / walls : totals[coolers[i].flow(CoolerPart.RUN)];
     }
 
     /**

@@ -18,7 +18,9 @@ final class WettedFace extends FaceChain {
     private static final int OUTSIDE_KG = COMMON + 1;
     private static final int DAMP_KG = COMMON + 2;
 
-    static final int FLOWS = COMMON + 3;
+    private static final int WET = COMMON + 3;
+
+    static final int FLOWS = COMMON + 4;
 
     /** Less than this share of what the sand holds clings to it (assumption). */
     static final double CLINGS = 0.02;
@@ -195,6 +197,7 @@ final class WettedFace extends FaceChain {
         flows[flowAt + LATENT_OUTSIDE] = latentOut;
         flows[flowAt + OUTSIDE_KG] = outVapour;
         flows[flowAt + DAMP_KG] = inside.fromDamp;
+        flows[flowAt + WET] = wet ? 1 : 0;
     }
 
     @Override
@@ -268,6 +271,7 @@ final class WettedFace extends FaceChain {
         change[flowAt + RUNS_OFF] = inside.runOffByWater * v[waterAt()];
         change[flowAt + LATENT_OUTSIDE] = outLatentBySurface * v[outermost];
         change[flowAt + OUTSIDE_KG] = outBySurface * v[outermost];
+        change[flowAt + WET] = 0;
         change[flowAt + DAMP_KG] = inside.dampBySurface * surface + inside.dampByRatio * ratio;
     }
 
@@ -279,5 +283,10 @@ final class WettedFace extends FaceChain {
     @Override
     public double waterUsedKg(double[] totals) {
         return totals[flowAt + OUTSIDE_KG] + totals[flowAt + DAMP_KG];
+    }
+
+    /** Time it was wet, s. */
+    double wetS(double[] totals) {
+        return totals[flowAt + WET];
     }
 }
