@@ -68,7 +68,7 @@ public final class DoorExchange {
      * <p>Source: ASHRAE Handbook - Refrigeration, doorway open-time factor (from memory).
      *
      * @param passages passages in the period
-     * @param secondsAPassage open and close time of a passage, s
+     * @param secondsAPassage open and close time of a berth, s
      * @param minutesOpen minutes it simply stands open in the period
      * @param periodH length of the period, h
      * @return fraction

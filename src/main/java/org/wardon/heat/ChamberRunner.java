@@ -97,7 +97,10 @@ final class ChamberRunner implements Integrator.StepListener {
         carried = new LotState[lots.length];
         for (int i = 0; i < lots.length; i++) {
             lots[i] = new LotRecorder(run.stays().get(i), network.lot(i), rows + 1);
-            carried[i] = run.stays().get(i).passage().as().orElse(null);
+            carried[i] = run.stays().get(i).berth().as().orElse(null);
+            if (run.stays().get(i).berth().inBlast()) {
+                network.inBlast(i);
+            }
         }
         edges = Schedule.of(run);
         usedS = Schedule.useS(run);
@@ -201,7 +204,7 @@ final class ChamberRunner implements Integrator.StepListener {
         if (!(airC > COLDEST_C && airC < WARMEST_C)) {
             stop(to, "air temperature", airC);
         }
-        hours.stepped(state);
+        hours.stepped(from, to, state);
         for (int i = 0; i < lots.length; i++) {
             lots[i].stepped(to, state, totals);
             double warm = network.lot(i).warmestC(state);
@@ -369,7 +372,7 @@ final class ChamberRunner implements Integrator.StepListener {
         LotBranch lot = network.lot(i);
         boolean fresh = stay.freshUntilS() > t;
         lot.breathe(fresh ? stay.lot().respiration().fresh() : stay.lot().respiration());
-        if (stay.passage().from().isPresent()) {
+        if (stay.berth().from().isPresent()) {
             LotState state = Objects.requireNonNull(carried[i], "it runs with where it came from");
             state.into(lot, y);
             lots[i].carriedIn(t, y, totals, state.massKg());

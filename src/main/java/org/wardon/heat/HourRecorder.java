@@ -30,6 +30,8 @@ final class HourRecorder {
     private double lowest = Double.POSITIVE_INFINITY;
     private double highest = Double.NEGATIVE_INFINITY;
     private double supply = Double.NaN;
+    private double blownS;
+    private double chilledKS;
 
     HourRecorder(ChamberNetwork network, int mostRows) {
         this.network = network;
@@ -41,16 +43,22 @@ final class HourRecorder {
         lastRan = new double[network.coolerCount()];
     }
 
-    void stepped(double[] y) {
+    void stepped(double from, double to, double[] y) {
         double airC = network.airC(y);
         lowest = Math.min(lowest, airC);
         highest = Math.max(highest, airC);
+        double blows = 0;
+        double chillK = 0;
         for (int i = 0; i < network.coolerCount(); i++) {
             double leaves = network.cooler(i).effect().supplyC;
             if (Double.isNaN(supply) || leaves < supply) {
                 supply = leaves;
             }
+            blows = Math.max(blows, network.cooler(i).blows());
+            chillK = Math.max(chillK, network.cooler(i).chillK(airC));
         }
+        blownS += blows * (to - from);
+        chilledKS += chillK * (to - from);
     }
 
     private void set(Hours.Column column, double value) {
@@ -75,6 +83,8 @@ final class HourRecorder {
                 network.cubicMetres((terms.exchanged(totals) - lastExchanged) / span));
         set(Hours.Column.FREE_M3, network.freeM3());
         set(Hours.Column.SUPPLY_C, supply);
+        set(Hours.Column.BLOWS, blownS / span);
+        set(Hours.Column.CHILL_K, chilledKS / span);
         set(Hours.Column.HUMIDITY_RATIO, network.ratio(y));
         set(Hours.Column.RESPIRATION_W, (respirationJ - lastRespiration) / span);
         set(Hours.Column.WATER_OUT_C, waterOutC(totals));
@@ -107,6 +117,8 @@ final class HourRecorder {
         lowest = Double.POSITIVE_INFINITY;
         highest = Double.NEGATIVE_INFINITY;
         supply = Double.NaN;
+        blownS = 0;
+        chilledKS = 0;
     }
 
     Hours hours() {

@@ -29,6 +29,8 @@ public final class Hours {
         EXCHANGE_M3S,
         FREE_M3,
         SUPPLY_C,
+        BLOWS,
+        CHILL_K,
         HUMIDITY_RATIO,
         RESPIRATION_W,
         WATER_OUT_C,
@@ -175,6 +177,27 @@ public final class Hours {
      */
     public double supplyC(int i) {
         return get(Column.SUPPLY_C, i);
+    }
+
+    /**
+     * Returns the share of the span before in which air left a cooler.
+     *
+     * @param i row
+     * @return 0 to 1
+     */
+    public double blows(int i) {
+        return get(Column.BLOWS, i);
+    }
+
+    /**
+     * Returns how much colder than the room the air was that left a cooler, as a mean over the span
+     * before, rests included.
+     *
+     * @param i row
+     * @return K, 0 or more
+     */
+    public double chillK(int i) {
+        return get(Column.CHILL_K, i);
     }
 
     /**

@@ -15,7 +15,7 @@ import org.wardon.lots.Lot;
  * @param freshUntilS until then it breathes at the high end of its range, s since the start of the
  *     run; negative infinity for never
  * @param surfaceWaterKg free water on it at arrival, kg
- * @param passage from and to which chamber of the store it is carried
+ * @param berth where it stands, from and to which chamber of the store it is carried
  */
 public record Stay(
         Lot lot,
@@ -24,7 +24,7 @@ public record Stay(
         double pulpC,
         double freshUntilS,
         double surfaceWaterKg,
-        Passage passage) {
+        Berth berth) {
     /** Checks the bounds. */
     public Stay {
         Require.that(
@@ -58,7 +58,7 @@ public record Stay(
             double pulpC,
             double freshUntilS,
             double surfaceWaterKg) {
-        this(lot, arrivesS, leavesS, pulpC, freshUntilS, surfaceWaterKg, Passage.DOOR);
+        this(lot, arrivesS, leavesS, pulpC, freshUntilS, surfaceWaterKg, Berth.DOOR);
     }
 
     /**
@@ -80,12 +80,12 @@ public record Stay(
      * @return the changed copy
      */
     public Stay carriedInAs(LotState state) {
-        Passage known = new Passage(passage.from(), passage.to(), Optional.of(state));
+        Berth known = new Berth(berth.from(), berth.to(), Optional.of(state), berth.inBlast());
         return new Stay(lot, arrivesS, leavesS, pulpC, freshUntilS, surfaceWaterKg, known);
     }
 
     /** Whether it is carried on to another chamber when it leaves. */
     boolean carriedOn() {
-        return passage.to().isPresent();
+        return berth.to().isPresent();
     }
 }

@@ -50,7 +50,7 @@ final class TogetherRun {
 
     private HandOver handOver(ChamberRun run, int lot, Accuracy accuracy) {
         Stay stay = run.stays().get(lot);
-        String to = stay.passage().to().orElseThrow();
+        String to = stay.berth().to().orElseThrow();
         ChamberRun other =
                 runs.stream()
                         .filter(one -> one.chamberId().equals(to))
@@ -59,7 +59,7 @@ final class TogetherRun {
         for (int i = 0; i < other.stays().size(); i++) {
             Stay there = other.stays().get(i);
             if (there.lot().id().equals(stay.lot().id())
-                    && there.passage().from().filter(run.chamberId()::equals).isPresent()
+                    && there.berth().from().filter(run.chamberId()::equals).isPresent()
                     && Math.abs(there.arrivesS() - stay.leavesS()) < SAME_S) {
                 return new HandOver(runner(run, accuracy), lot, runner(other, accuracy), i);
             }

@@ -40,7 +40,7 @@ class MovesTest {
                 pulpC,
                 Double.NEGATIVE_INFINITY,
                 0,
-                Passage.between(Optional.empty(), Optional.of(to)));
+                Berth.between(Optional.empty(), Optional.of(to)));
     }
 
     private static Stay coming(Lot lot, double atS, String from) {
@@ -51,7 +51,7 @@ class MovesTest {
                 20,
                 Double.NEGATIVE_INFINITY,
                 0,
-                Passage.between(Optional.of(from), Optional.empty()));
+                Berth.between(Optional.of(from), Optional.empty()));
     }
 
     private static Lot lot(String id) {

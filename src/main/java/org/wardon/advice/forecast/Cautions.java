@@ -47,6 +47,7 @@ final class Cautions {
         for (ChamberPlan chamber : plan.chambers()) {
             chamber(chamber);
             new Deliveries(outcome, chamber).all().forEach(c -> add(c.level(), c.reason()));
+            new ColdBlast(outcome, chamber).all().forEach(c -> add(c.level(), c.reason()));
         }
         new Carried(outcome).all().forEach(c -> add(c.level(), c.reason()));
         outcome.model().sheets().forEach(this::lot);

@@ -23,6 +23,7 @@ import org.wardon.heat.LotCourse;
 import org.wardon.heat.Start;
 import org.wardon.heat.Stay;
 import org.wardon.keeping.Draw;
+import org.wardon.lots.LotHistory;
 import org.wardon.plan.ChamberPlan;
 import org.wardon.plan.Corrections;
 import org.wardon.plan.StorePlan;
@@ -138,10 +139,10 @@ final class StoreModel {
 
     /** A lot that is carried in comes as it left the other chamber in the plain run. */
     private static Stay known(Stay stay, Map<String, Course> plain) {
-        if (stay.passage().from().isEmpty()) {
+        if (stay.berth().from().isEmpty()) {
             return stay;
         }
-        return ById.get(plain, stay.passage().from().get()).lots().stream()
+        return ById.get(plain, stay.berth().from().get()).lots().stream()
                 .filter(lot -> lot.stay().lot().id().equals(stay.lot().id()))
                 .filter(lot -> lot.stay().leavesS() == stay.arrivesS())
                 .findFirst()
@@ -158,6 +159,17 @@ final class StoreModel {
     /** Runs one lot in the air of a chamber that is there already. */
     LotCourse inAirOf(LotSheet sheet, Course chamber, double durationS) {
         return inAir(sheet.stay(Draw.MEDIAN), series(chamber), durationS);
+    }
+
+    /** Runs one visit in the blast of the cooler, from a temperature of the flesh on. */
+    LotHistory inBlast(Visit visit, double startC, AirSeries blast, double durationS) {
+        Stay stay =
+                new Stay(
+                        visit.stay(Draw.MEDIAN).lot(),
+                        visit.hereFromS(),
+                        Double.POSITIVE_INFINITY,
+                        startC);
+        return inAir(stay, blast, durationS).history();
     }
 
     private LotCourse inAir(Stay stay, AirSeries air, double durationS) {

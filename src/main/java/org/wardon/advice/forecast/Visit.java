@@ -1,10 +1,11 @@
 package org.wardon.advice.forecast;
 
 import java.util.Optional;
-import org.wardon.heat.Passage;
+import org.wardon.heat.Berth;
 import org.wardon.heat.Stay;
 import org.wardon.keeping.Draw;
 import org.wardon.lots.LotHistory;
+import org.wardon.plan.Place;
 
 /**
  * One lot in one chamber for a time. A lot that is never moved has one visit, from arrival to
@@ -57,6 +58,7 @@ record Visit(
     /** The visit as the heat model takes it. */
     Stay stay(Draw draw) {
         Stay whole = sheet.stay(draw);
+        Berth berth = Berth.between(from, to);
         return new Stay(
                 whole.lot(),
                 arrivesS,
@@ -64,7 +66,12 @@ record Visit(
                 whole.pulpC(),
                 whole.freshUntilS(),
                 from.isEmpty() ? whole.surfaceWaterKg() : 0,
-                Passage.between(from, to));
+                nearCooler() ? berth.nearCooler() : berth);
+    }
+
+    /** Whether it stands in the blast of the cooler, here as anywhere. */
+    boolean nearCooler() {
+        return sheet.plan().place() == Place.NEAR_COOLER;
     }
 
     /** What the lot goes through here, of all it goes through. */

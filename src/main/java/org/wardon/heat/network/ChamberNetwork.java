@@ -37,6 +37,7 @@ public final class ChamberNetwork implements TreeSystem {
     private final MistPart mist;
     private final int mistFlowAt;
     private final LotBranch[] lots;
+    private final Blast blast;
     private final Part[] always;
     private final double[] tolerances;
     private int flows;
@@ -96,6 +97,7 @@ public final class ChamberNetwork implements TreeSystem {
         for (int i = 0; i < lots.length; i++) {
             lots[i] = lot(inputs.lots().get(i));
         }
+        blast = new Blast(coolers, lots.length, inputs.pressurePa());
         always = alwaysThere();
         tolerances = new double[tree.size()];
         freeVolume(inputs.enclosure().box().volumeM3());
@@ -263,6 +265,15 @@ public final class ChamberNetwork implements TreeSystem {
      */
     public LotBranch lot(int i) {
         return lots[i];
+    }
+
+    /**
+     * Stands a lot near the cooler.
+     *
+     * @param i number of the lot in the inputs
+     */
+    public void inBlast(int i) {
+        blast.put(i);
     }
 
     /**
@@ -540,9 +551,10 @@ public final class ChamberNetwork implements TreeSystem {
         for (Part part : always) {
             part.rates(air, outside, y, rates, flow);
         }
-        for (LotBranch lot : lots) {
-            if (lot.branch.active()) {
-                lot.rates(air, outside, y, rates, flow);
+        blast.follow(air);
+        for (int i = 0; i < lots.length; i++) {
+            if (lots[i].branch.active()) {
+                lots[i].rates(blast.around(i, air), outside, y, rates, flow);
             }
         }
         rates[AirState.ENTHALPY] /= airKg;
@@ -560,9 +572,10 @@ public final class ChamberNetwork implements TreeSystem {
             part.linearise(startAir, outside, airKg, y, tree);
             part.timeSlope(startAir, outside, y, rateSlope, flowSlope);
         }
-        for (LotBranch lot : lots) {
-            if (lot.branch.active()) {
-                lot.linearise(startAir, outside, airKg, y, tree);
+        blast.follow(startAir);
+        for (int i = 0; i < lots.length; i++) {
+            if (lots[i].branch.active()) {
+                lots[i].linearise(blast.around(i, startAir), outside, airKg, y, tree);
             }
         }
         rateSlope[AirState.ENTHALPY] /= airKg;

@@ -1,6 +1,8 @@
 package org.wardon.heat.network;
 
 import org.wardon.air.MoistAir;
+import org.wardon.cooling.Compressor;
+import org.wardon.cooling.Control;
 import org.wardon.cooling.Cooler;
 import org.wardon.cooling.CoolerEffect;
 import org.wardon.cooling.CoolerInputs;
@@ -203,6 +205,31 @@ public final class CoolerPart implements Part, FilmedFace.Control {
      */
     public CoolerEffect effect() {
         return effect;
+    }
+
+    /**
+     * Returns the share of the time air leaves it; a compressor that changes its speed blows while
+     * it runs at all.
+     *
+     * @return 0 to 1
+     */
+    public double blows() {
+        if (Double.isNaN(effect.supplyC) || effect.ran <= 0) {
+            return 0;
+        }
+        boolean bySpeed = unit instanceof Compressor asked && asked.control() == Control.MODULATING;
+        return bySpeed ? 1 : Math.min(1, effect.ran);
+    }
+
+    /**
+     * Returns how much colder than the room the air is that leaves it, by the share of the time.
+     *
+     * @param airC the room's air, °C
+     * @return K; 0 while it rests
+     */
+    public double chillK(double airC) {
+        double blows = blows();
+        return blows > 0 ? blows * (airC - effect.supplyC) : 0;
     }
 
     void tolerances(double[] tolerances) {

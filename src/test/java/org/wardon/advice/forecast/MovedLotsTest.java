@@ -11,11 +11,6 @@ import org.junit.jupiter.api.AfterAll;
 import org.junit.jupiter.api.BeforeAll;
 import org.junit.jupiter.api.Test;
 import org.junit.jupiter.api.io.TempDir;
-import org.wardon.advice.PlanLookups;
-import org.wardon.advice.wording.Units;
-import org.wardon.advice.wording.Words;
-import org.wardon.errors.Progress;
-import org.wardon.files.PlanReader;
 import org.wardon.files.forecast.ChamberForecast;
 import org.wardon.files.forecast.Forecast;
 import org.wardon.files.forecast.LotForecast;
@@ -37,49 +32,6 @@ class MovedLotsTest {
         book.close();
     }
 
-    /** A panel room; two of one setting are alike to the last screw. */
-    private static String chamber(String id, double settingC) {
-        String faces =
-                List.of("roof", "floor", "north", "east", "south", "west").stream()
-                        .map(
-                                face ->
-                                        "{\"face\": \"%s\", \"beyond\": \"shade\", \"layers\": [{\"conductivityWmK\": 0.028, \"densityKgM3\": 40, \"specificHeatJkgK\": 1400, \"thicknessMm\": 80}]}"
-                                                .formatted(face))
-                        .collect(java.util.stream.Collectors.joining(","));
-        return """
-               {"id": "%s", "lengthM": 4, "widthM": 3, "heightM": 2.5, "faces": [%s],
-                "leakageAirChangesPerDay": 2, "freshAirM3PerHour": 10,
-                "cooling": [{"kind": "compressor", "ratedCapacityW": 3500, "ratedPowerW": 1400, "ratedAirC": 5,
-                 "ratedOutdoorC": 35, "fanW": 150, "coilUaWK": 600, "airFlowM3s": 0.6, "control": "modulating"}],
-                "setting": {"temperatureC": %s, "humidityPct": 90}, "capacityKg": 3000}
-               """
-                .formatted(id, faces, settingC);
-    }
-
-    private static String lot(String id, String crop, String arrives, double atC, String rest) {
-        return """
-               {"id": "%s", "commodity": "%s", "massKg": 300, "package": "room-cooling-any",
-                "arrives": "%s", "temperatureC": %s, "harvested": "2026-03-01T18:00", "wantedDays": 6,
-                "pricePerKg": 2, %s}
-               """
-                .formatted(id, crop, arrives, atC, rest);
-    }
-
-    private StoreAdvice advise(List<String> chambers, List<String> lots) throws IOException {
-        String plan =
-                """
-                {"storePlan": 1, "name": "moves (invented)",
-                 "site": {"latitudeDeg": 12, "longitudeDeg": -61, "elevationM": 10, "zone": "America/Grenada"},
-                 "weather": {"steady": {"temperatureC": 28, "humidityPct": 75}},
-                 "from": "2026-03-02T00:00", "days": 6, "energyPricePerKWh": 0.3,
-                 "chambers": [%s], "lots": [%s]}
-                """
-                        .formatted(String.join(",", chambers), String.join(",", lots));
-        Path file = Files.writeString(folder.resolve("plan.json"), plan);
-        return new ForecastAdvice(book, Words.english(Units.METRIC))
-                .advise(PlanReader.read(file, PlanLookups.of(book)), Progress.SILENT);
-    }
-
     private static LotForecast only(StoreAdvice advice) {
         assertEquals(1, advice.forecast().lots().size());
         return advice.forecast().lots().get(0);
@@ -98,27 +50,57 @@ class MovedLotsTest {
 
     @Test
     void aMoveAtTheHourOfArrivalIsStartingThere() throws IOException {
-        List<String> two = List.of(chamber("north", 2), chamber("south", 13));
+        List<String> two =
+                List.of(SmallStores.chamber("north", 2), SmallStores.chamber("south", 13));
         LotForecast started =
-                only(advise(two, List.of(lot("M", "mango", NOON, 29, "\"chamber\": \"south\""))));
+                only(
+                        SmallStores.advise(
+                                folder,
+                                book,
+                                two,
+                                List.of(
+                                        SmallStores.lot(
+                                                "M",
+                                                "mango",
+                                                NOON,
+                                                29,
+                                                "\"chamber\": \"south\""))));
         LotForecast moved =
-                only(advise(two, List.of(lot("M", "mango", NOON, 29, moves(NOON, "south")))));
+                only(
+                        SmallStores.advise(
+                                folder,
+                                book,
+                                two,
+                                List.of(
+                                        SmallStores.lot(
+                                                "M", "mango", NOON, 29, moves(NOON, "south")))));
         assertEquals(started, moved);
     }
 
     @Test
     void aMoveToAnIdenticalChamberChangesNothing() throws IOException {
-        List<String> two = List.of(chamber("north", 2), chamber("south", 2));
+        List<String> two =
+                List.of(SmallStores.chamber("north", 2), SmallStores.chamber("south", 2));
         LotForecast stays =
                 only(
-                        advise(
+                        SmallStores.advise(
+                                folder,
+                                book,
                                 two,
-                                List.of(lot("B", "broccoli", NOON, 20, "\"chamber\": \"north\""))));
+                                List.of(
+                                        SmallStores.lot(
+                                                "B",
+                                                "broccoli",
+                                                NOON,
+                                                20,
+                                                "\"chamber\": \"north\""))));
         StoreAdvice advice =
-                advise(
+                SmallStores.advise(
+                        folder,
+                        book,
                         two,
                         List.of(
-                                lot(
+                                SmallStores.lot(
                                         "B",
                                         "broccoli",
                                         NOON,
@@ -154,11 +136,18 @@ class MovedLotsTest {
     @Test
     void lotsThatChangePlacesAreToldInWordsAndHaveOneSeries() throws IOException {
         StoreAdvice advice =
-                advise(
-                        List.of(chamber("north", 2), chamber("south", 13)),
+                SmallStores.advise(
+                        folder,
+                        book,
+                        List.of(SmallStores.chamber("north", 2), SmallStores.chamber("south", 13)),
                         List.of(
-                                lot("B", "broccoli", NOON, 20, moves("2026-03-04T09:30", "south")),
-                                lot("M", "mango", NOON, 29, moves(NOON, "south"))
+                                SmallStores.lot(
+                                        "B",
+                                        "broccoli",
+                                        NOON,
+                                        20,
+                                        moves("2026-03-04T09:30", "south")),
+                                SmallStores.lot("M", "mango", NOON, 29, moves(NOON, "south"))
                                         .replace(
                                                 "]",
                                                 ", {\"at\": \"2026-03-04T09:30\","
@@ -216,10 +205,17 @@ class MovedLotsTest {
     void aWarmDeliveryOnAColdLoadIsToldInKelvinAndHours() throws IOException {
         List<String> lots =
                 List.of(
-                        lot("B", "broccoli", "2026-03-02T00:00", 2, "\"chamber\": \"north\""),
-                        lot("C", "carrot-topped", "2026-03-04T10:00", 28, "\"chamber\": \"north\"")
+                        SmallStores.lot(
+                                "B", "broccoli", "2026-03-02T00:00", 2, "\"chamber\": \"north\""),
+                        SmallStores.lot(
+                                        "C",
+                                        "carrot-topped",
+                                        "2026-03-04T10:00",
+                                        28,
+                                        "\"chamber\": \"north\"")
                                 .replace("\"massKg\": 300", "\"massKg\": 2500"));
-        StoreAdvice advice = advise(List.of(chamber("north", 2)), lots);
+        StoreAdvice advice =
+                SmallStores.advise(folder, book, List.of(SmallStores.chamber("north", 2)), lots);
         List<Forecast.Warning> told =
                 advice.forecast().warnings().stream()
                         .filter(w -> w.code().startsWith("warms-and"))
