@@ -12,7 +12,7 @@ import java.util.OptionalDouble;
  * Kinds}, a binder and a schema entry. A kind that acts on faces is a {@link FaceCooler} and does
  * nothing to the air but through them.
  */
-public sealed interface Cooler permits Compressor, EvaporativePad, NightAir, FaceCooler {
+public sealed interface Cooler permits Compressor, EvaporativePad, NightAir, IceBank, FaceCooler {
     /**
      * Returns the kind as a plan names it.
      *
@@ -100,6 +100,24 @@ public sealed interface Cooler permits Compressor, EvaporativePad, NightAir, Fac
     }
 
     /**
+     * Returns the ice it works with, which is its first own state.
+     *
+     * @return empty where it works without
+     */
+    default Optional<IceBank> ice() {
+        return Optional.empty();
+    }
+
+    /**
+     * Returns the machine that makes its ice again.
+     *
+     * @return empty where there is none
+     */
+    default Optional<Recharge> recharge() {
+        return Optional.empty();
+    }
+
+    /**
      * Returns the energy a day its supply can give.
      *
      * @return kWh; empty where there is no limit
@@ -162,5 +180,13 @@ public sealed interface Cooler permits Compressor, EvaporativePad, NightAir, Fac
          * @return the answer
          */
         R nightAir(NightAir fan);
+
+        /**
+         * Answers for a bank of ice.
+         *
+         * @param bank the bank
+         * @return the answer
+         */
+        R iceBank(IceBank bank);
     }
 }

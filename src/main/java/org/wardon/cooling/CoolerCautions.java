@@ -25,12 +25,15 @@ public final class CoolerCautions {
      */
     private static final double WIDEST_DIFFERENCE_K = 15;
 
+    /** Air nearer to the melting point than this takes hardly anything from it, K (assumption). */
+    private static final double LEAST_ABOVE_ICE_K = 2;
+
     private CoolerCautions() {}
 
     /**
      * Returns the cautions of a cooler at its setting: {@code ices-up}, {@code control-too-warm},
      * {@code rating-unlikely}, {@code coil-small} of a compressor, {@code pad-water} of a pad,
-     * {@code night-air-rain} of night air.
+     * {@code night-air-rain} of night air, {@code ice-handling} and {@code ice-too-warm} of ice.
      *
      * @param cooler the cooler
      * @param setting what the keeper dialled in
@@ -75,7 +78,29 @@ public final class CoolerCautions {
                                         chamberId,
                                         "common-practice"));
                     }
+
+                    @Override
+                    public List<Caution> iceBank(IceBank bank) {
+                        return ice(bank, setting, chamberId);
+                    }
                 });
+    }
+
+    private static List<Caution> ice(IceBank bank, Setting setting, String chamberId) {
+        List<Caution> cautions = new ArrayList<>();
+        cautions.add(caution(Level.CAUTION, "ice-handling", chamberId, "common-practice"));
+        double warmerK = setting.temperatureC() - bank.material().meltC();
+        if (warmerK < LEAST_ABOVE_ICE_K) {
+            cautions.add(
+                    caution(
+                            Level.CAUTION,
+                            "ice-too-warm",
+                            chamberId,
+                            "assumption",
+                            Argument.of(bank.material().meltC(), "C"),
+                            Argument.of(setting.temperatureC(), "C")));
+        }
+        return cautions;
     }
 
     private static void follows(

@@ -86,6 +86,21 @@ public final class CoolerEffect {
     /** Power of the fan, all of which warms the chamber's air, W. */
     public double fanW;
 
+    /** Heat that melts the cooler's own ice, W. */
+    public double meltsW;
+
+    /** That heat by air temperature, W/K. */
+    public double meltsByAirC;
+
+    /** That heat by humidity ratio, W per kg/kg. */
+    public double meltsByHumidity;
+
+    /** That heat by running share, W. */
+    public double meltsByRun;
+
+    /** Heat its machine takes out of its ice, W. */
+    public double refreezesW;
+
     /** Evaporating temperature, °C; NaN where the cooler has none or rests. */
     public double evaporatingC = Double.NaN;
 
@@ -128,6 +143,12 @@ public final class CoolerEffect {
     /** {@code [own state]}, electric power by the state, W per unit. */
     public final double[] electricByOwn;
 
+    /** {@code [own state]}, heat that melts ice by the state, W per unit. */
+    public final double[] meltsByOwn;
+
+    /** {@code [own state]}, heat taken out of the ice by the state, W per unit. */
+    public final double[] refreezesByOwn;
+
     /** Seconds until the cooler itself changes its course; infinite where it does not. */
     public double nextEventS = Double.POSITIVE_INFINITY;
 
@@ -160,6 +181,8 @@ public final class CoolerEffect {
         sensibleByOwn = new double[ownStates];
         vapourByOwn = new double[ownStates];
         electricByOwn = new double[ownStates];
+        meltsByOwn = new double[ownStates];
+        refreezesByOwn = new double[ownStates];
     }
 
     /** Sets everything to a resting cooler; the last evaporating temperature goes too. */
@@ -168,6 +191,7 @@ public final class CoolerEffect {
         sensibleByAirC = sensibleByHumidity = vapourByAirC = vapourByHumidity = 0;
         sensibleByRun = vapourByRun = 0;
         ran = ranByAirC = ranByRun = 0;
+        meltsW = meltsByAirC = meltsByHumidity = meltsByRun = refreezesW = 0;
         drainByAirC = drainByHumidity = drainByRun = 0;
         totalW = drainKgS = frostKgS = drainEnthalpyJkg = exchangeKgS = waterKgS = 0;
         electricW = fanW = electricByAirC = electricByHumidity = electricByRun = 0;
@@ -183,6 +207,8 @@ public final class CoolerEffect {
         Arrays.fill(sensibleByOwn, 0);
         Arrays.fill(vapourByOwn, 0);
         Arrays.fill(electricByOwn, 0);
+        Arrays.fill(meltsByOwn, 0);
+        Arrays.fill(refreezesByOwn, 0);
         nextEventS = Double.POSITIVE_INFINITY;
     }
 }

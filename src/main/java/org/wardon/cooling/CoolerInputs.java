@@ -28,6 +28,9 @@ public final class CoolerInputs {
     /** Share of the time it runs, or speed, 0 to 1; 1 for a cooler that is on. */
     public double run = 1;
 
+    /** Whether it is the hour of its machine that makes ice, and there is power. */
+    public boolean recharging;
+
     /**
      * Makes room for what one cooler meets.
      *

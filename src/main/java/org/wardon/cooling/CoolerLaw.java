@@ -1,7 +1,8 @@
 package org.wardon.cooling;
 
 /** A cooler compiled for the air pressure of its site: pure, without state, safe to share. */
-public sealed interface CoolerLaw permits CompressorLaw, EvaporativePadLaw, NightAirLaw, FaceLaw {
+public sealed interface CoolerLaw
+        permits CompressorLaw, EvaporativePadLaw, NightAirLaw, IceBankLaw, FaceLaw {
     /**
      * Returns how many own states the cooler has, such as water on its coil.
      *

@@ -33,6 +33,13 @@ public record NightAir(
         Require.within("lowestC", lowestC, -30, 30, "°C", "");
         Require.within("lowestHumidityPct", lowestHumidityPct, 0, 100, "%", "");
         Require.within("highestHumidityPct", highestHumidityPct, 0, 100, "%", "");
+        Require.that(
+                lowestHumidityPct <= highestHumidityPct,
+                "lowestHumidityPct is "
+                        + lowestHumidityPct
+                        + " %, above highestHumidityPct "
+                        + highestHumidityPct
+                        + " %; accepted: up to that");
     }
 
     @Override

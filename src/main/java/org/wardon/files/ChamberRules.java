@@ -45,28 +45,45 @@ final class ChamberRules {
                 door(chamber);
             }
             outages(chamber);
-            chamber.at("cooling").items().forEach(this::humidityBounds);
+            chamber.at("cooling").items().forEach(this::cooler);
             new WaterRules(faults).check(chamber);
         }
     }
 
-    private void humidityBounds(Part cooler) {
-        Part low = cooler.at("lowestHumidityPct");
-        Part high = cooler.at("highestHumidityPct");
+    private void cooler(Part cooler) {
+        notAbove(cooler, "lowestHumidityPct", "highestHumidityPct", "%");
+        notAbove(cooler, "startIceKg", "iceKg", "kg");
+        for (String name : List.of("rechargePowerW", "rechargeFrom", "rechargeTo")) {
+            if (cooler.has(name) && !cooler.has("rechargeW")) {
+                faults.add(
+                        cooler.at(name).path(),
+                        "is given without rechargeW",
+                        "accepted: together with rechargeW, or not at all");
+            }
+        }
+    }
+
+    private void notAbove(Part cooler, String lowName, String highName, String unit) {
+        Part low = cooler.at(lowName);
+        Part high = cooler.at(highName);
         boolean known =
                 low.number().isPresent()
                         && high.number().isPresent()
                         && !faults.at(low.path())
                         && !faults.at(high.path());
-        if (known && low.number().getAsDouble() >= high.number().getAsDouble()) {
+        if (known && low.number().getAsDouble() > high.number().getAsDouble()) {
+            String most = high.json().orElseThrow().shown() + " " + unit;
             faults.add(
                     low.path(),
                     "is "
                             + low.json().orElseThrow().shown()
-                            + " %, not below highestHumidityPct "
-                            + high.json().orElseThrow().shown()
-                            + " %",
-                    "accepted: less than highestHumidityPct");
+                            + " "
+                            + unit
+                            + ", above "
+                            + highName
+                            + " "
+                            + most,
+                    "accepted: up to " + most);
         }
     }
 

@@ -10,7 +10,7 @@ import org.wardon.plan.Defaults;
 final class CompressorBinder {
     private static final String COIL_MARK =
             Defaults.EVAPORATING_TD_K.mark() + "; from memory of ASHRAE-R";
-    private static final String POWER_MARK =
+    static final String POWER_MARK =
             Defaults.CARNOT_FRACTION.mark()
                     + "; "
                     + Defaults.EVAPORATING_TD_K.mark()

@@ -22,6 +22,7 @@ final class CoolerBinder {
             case "night-air" -> fans.nightAir(part);
             case "wetted-wall" -> new WaterBinder(inputs).wettedWall(part);
             case "water-film" -> new WaterBinder(inputs).waterFilm(part);
+            case "ice-bank" -> new IceBankBinder(inputs).bind(part);
             default ->
                     throw new IllegalArgumentException(
                             part.path() + ": the schema let the kind '" + kind + "' pass");

@@ -47,6 +47,7 @@ final class ChamberRunner implements Integrator.StepListener {
     private final SwitchedCoolers thermostats;
     private final Watering watering;
     private final Integrator.Trigger triggers;
+    private final IceBanks ice;
     private final EnergyBudget budget;
     private final Carbon carbon;
     private final HourRecorder hours;
@@ -88,6 +89,7 @@ final class ChamberRunner implements Integrator.StepListener {
         thermostats = new SwitchedCoolers(network);
         watering = new Watering(run, network, y);
         triggers = new FirstOf(thermostats, watering);
+        ice = new IceBanks(run, network, y);
         budget = new EnergyBudget(run, network);
         double pressure = RunCompiler.pressurePa(run);
         carbon = new Carbon(pressure);
@@ -232,6 +234,7 @@ final class ChamberRunner implements Integrator.StepListener {
             tripping |= effect.tripped && network.cooler(i).powered();
         }
         tripped.is(to, tripping);
+        ice.stepped(to, state);
     }
 
     /** Heat given off so far by lots while they were in the chamber. */
@@ -263,6 +266,7 @@ final class ChamberRunner implements Integrator.StepListener {
         for (int i = 0; i < lots.length; i++) {
             lots[i].row(t, y, totals);
         }
+        hours.ice(ice.leftKg(y));
         hours.row(t, y, totals, respirationJ(), carbon.ppm());
         wetFaces.is(t, network.faceWaterKg(y) > 0.1);
         icing.is(t, icesUp());
@@ -304,6 +308,11 @@ final class ChamberRunner implements Integrator.StepListener {
             case DEFROST_STARTS, DEFROST_ENDS -> defrost(edge, t);
             case WALL_POURED -> {
                 watering.pour(edge.index(), t, y);
+                restart(edge);
+            }
+            case RECHARGE_STARTS, RECHARGE_ENDS -> {
+                boolean starts = edge.kind() == Edge.Kind.RECHARGE_STARTS;
+                network.cooler(edge.index()).recharge(starts);
                 restart(edge);
             }
             case DOOR_OPENS, DOOR_SHUTS -> door(edge);
@@ -432,7 +441,14 @@ final class ChamberRunner implements Integrator.StepListener {
             events.addAll(lot.wetSpans(end));
         }
         for (Spans spans :
-                List.of(outages, tripped, wetFaces, icing, watering.spans(), budget.spans())) {
+                List.of(
+                        outages,
+                        tripped,
+                        wetFaces,
+                        icing,
+                        watering.spans(),
+                        budget.spans(),
+                        ice.spans())) {
             events.addAll(spans.until(end));
         }
         events.sort(Comparator.comparingDouble(CourseEvent::fromS));
@@ -479,7 +495,8 @@ final class ChamberRunner implements Integrator.StepListener {
                             did.ranS(),
                             did.removedJ(),
                             did.electricityJ(),
-                            did.waterKg()));
+                            did.waterKg(),
+                            ice.ledger(i, y, terms, totals)));
         }
         return all;
     }

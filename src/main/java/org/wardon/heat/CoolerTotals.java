@@ -1,5 +1,7 @@
 package org.wardon.heat;
 
+import java.util.Optional;
+
 /**
  * What one cooler did in a run.
  *
@@ -8,6 +10,12 @@ package org.wardon.heat;
  * @param removedJ enthalpy taken from the air, J
  * @param electricityJ electricity, fan and defrost included, J
  * @param waterKg water used up, kg
+ * @param ice its ice, where it works with ice
  */
 public record CoolerTotals(
-        String kind, double ranS, double removedJ, double electricityJ, double waterKg) {}
+        String kind,
+        double ranS,
+        double removedJ,
+        double electricityJ,
+        double waterKg,
+        Optional<IceLedger> ice) {}

@@ -68,13 +68,18 @@ public record Course(
     }
 
     /**
-     * Returns the worst error of the balances of heat, of water, and of the water of wetted walls.
+     * Returns the worst error of the balances of heat, of water, of the water of wetted walls and
+     * of ice.
      *
      * @return percent
      */
     public double balanceErrorPct() {
         double worst = Math.max(heat.errorShare(), water.errorShare());
-        return 100 * Math.max(Math.max(worst, sand.errorShare()), layersErrorShare);
+        worst = Math.max(Math.max(worst, sand.errorShare()), layersErrorShare);
+        for (CoolerTotals cooler : coolers) {
+            worst = Math.max(worst, cooler.ice().map(IceLedger::errorShare).orElse(0.0));
+        }
+        return 100 * worst;
     }
 
     /**

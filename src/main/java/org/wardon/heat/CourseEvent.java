@@ -23,6 +23,8 @@ public record CourseEvent(Kind kind, String subject, double fromS, double untilS
         ICES_UP,
         /** A wetted wall stood dry. */
         DRY_WALL,
+        /** No ice was left in a chamber with banks of ice. */
+        ICE_GONE,
         /** The daily energy was used up. */
         ENERGY_USED_UP
     }

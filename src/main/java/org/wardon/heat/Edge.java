@@ -20,6 +20,8 @@ record Edge(double atS, Kind kind, int index) {
         DEFROST_STARTS,
         DEFROST_ENDS,
         WALL_POURED,
+        RECHARGE_ENDS,
+        RECHARGE_STARTS,
         DOOR_SHUTS,
         LEAVES,
         ARRIVES,

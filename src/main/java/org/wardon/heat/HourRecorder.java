@@ -65,6 +65,11 @@ final class HourRecorder {
         Objects.requireNonNull(columns.get(column))[size] = value;
     }
 
+    /** Tells the ice there is for the next row, kg. */
+    void ice(double leftKg) {
+        set(Hours.Column.ICE_KG, leftKg);
+    }
+
     /** Writes a row; {@code respirationJ} is what the lots present gave off since the start. */
     void row(double t, double[] y, double[] totals, double respirationJ, double co2Ppm) {
         double span = t - lastS;

@@ -34,7 +34,8 @@ public final class Hours {
         HUMIDITY_RATIO,
         RESPIRATION_W,
         WATER_OUT_C,
-        WATER_USED_KG
+        WATER_USED_KG,
+        ICE_KG
     }
 
     Hours(Map<Column, double[]> columns, double[][] ran, int rows) {
@@ -249,5 +250,15 @@ public final class Hours {
      */
     public double ran(int cooler, int i) {
         return ran[cooler][i];
+    }
+
+    /**
+     * Returns the ice in the chamber at the instant.
+     *
+     * @param i row
+     * @return kg; NaN where there is no bank of ice
+     */
+    public double iceKg(int i) {
+        return get(Column.ICE_KG, i);
     }
 }

@@ -8,6 +8,7 @@ import java.util.Optional;
 import org.wardon.air.Timeline;
 import org.wardon.cooling.Defrost;
 import org.wardon.cooling.Outage;
+import org.wardon.cooling.Recharge;
 import org.wardon.cooling.WettedWall;
 import org.wardon.enclosure.Door;
 import org.wardon.enclosure.Gains;
@@ -32,6 +33,7 @@ final class Schedule {
         for (int day = 0; midnight < run.durationS(); day++, midnight += Timeline.DAY_S) {
             schedule.day(day, midnight);
             schedule.pourings(midnight);
+            schedule.recharges(day, midnight);
         }
         schedule.outages();
         schedule.stays();
@@ -106,6 +108,23 @@ final class Schedule {
                     }
                 }
             }
+        }
+    }
+
+    /** Hours of machines that make ice; at the start of the run it may be their hour already. */
+    private void recharges(int day, double midnight) {
+        for (int i = 0; i < run.coolers().size(); i++) {
+            Optional<Recharge> machine = run.coolers().get(i).recharge();
+            if (run.controlMode() == ControlMode.IDEAL || machine.isEmpty()) {
+                continue;
+            }
+            double from = machine.get().from().toSecondOfDay();
+            double to = machine.get().to().toSecondOfDay();
+            if (day == 0 && to <= from) {
+                add(midnight + from - Timeline.DAY_S, Edge.Kind.RECHARGE_STARTS, i);
+            }
+            add(midnight + from, Edge.Kind.RECHARGE_STARTS, i);
+            add(midnight + to, Edge.Kind.RECHARGE_ENDS, i);
         }
     }
 

@@ -140,6 +140,23 @@ public final class Defaults {
     /** Thickness of the water in a jacket. */
     public static final Default JACKET_GAP_MM = new Default(10, "mm", ASSUMPTION);
 
+    /**
+     * Melting point of ice.
+     *
+     * <p>Source: {@code cooling-sources.csv}, row latent_heat_ice.
+     */
+    public static final Default MELT_C = new Default(0, "°C", "ICE-NOTE");
+
+    /** Heat of melting of ice: ASHRAE Handbook - Fundamentals, chapter 1, table 3. */
+    public static final Default LATENT_KJ_KG =
+            new Default(333.5, "kJ/kg", "from memory of ASHRAE-F");
+
+    /** Hour from which ice is made again. */
+    public static final String RECHARGE_FROM = "22:00";
+
+    /** Hour until which ice is made again. */
+    public static final String RECHARGE_TO = "06:00";
+
     /** Days a lot is wanted in the chamber. */
     public static final Default WANTED_DAYS = new Default(7, "day", ASSUMPTION);
 
@@ -240,6 +257,18 @@ public final class Defaults {
      */
     public static double coilUaWK(double ratedCapacityW) {
         return ratedCapacityW / EVAPORATING_TD_K.value();
+    }
+
+    /**
+     * Returns the electric power of a machine that makes ice, at 35 °C outdoors: by the same share
+     * of Carnot as a compressor, evaporating as far below the melting point as a coil below air.
+     *
+     * @param coldW heat it takes out of the ice, W
+     * @param meltC melting point, °C
+     * @return W
+     */
+    public static double rechargePowerW(double coldW, double meltC) {
+        return ratedPowerW(coldW, meltC, RATED_OUTDOOR_C.value());
     }
 
     /**

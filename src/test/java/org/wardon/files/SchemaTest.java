@@ -251,6 +251,11 @@ class SchemaTest {
         ObjectNode jacket = cooling.addObject();
         jacket.put("kind", "water-film").put("flowKgS", 0.3).put("inletC", 6).put("open", false);
         jacket.put("chillerCapacityW", 2_000).putArray("wets").add("south");
+        cooling.addObject()
+                .put("kind", "ice-bank")
+                .put("iceKg", 400)
+                .put("uaWK", 80)
+                .put("rechargeW", 1_500);
         Part part =
                 Part.root(JsonText.read(plan.toString(), new Faults("plan.json")).orElseThrow());
         List<Assumed> told =

@@ -12,6 +12,9 @@ import org.wardon.cooling.Cooler;
 import org.wardon.enclosure.Door;
 import org.wardon.files.forecast.ChamberForecast;
 import org.wardon.files.forecast.Forecast.Action;
+import org.wardon.heat.Course;
+import org.wardon.heat.CourseEvent;
+import org.wardon.heat.IceLedger;
 import org.wardon.keeping.Fate;
 import org.wardon.keeping.Outlook;
 import org.wardon.keeping.Spread;
@@ -205,6 +208,7 @@ final class Actions {
                             Argument.of(100 * share, "pct"),
                             Argument.of(door.secondsOpen() / 60, "1")));
         }
+        addIce(chamber);
         if (weatherDecides(chamber)) {
             addCold(chamber, figures);
         } else if (!chamber.coolers().isEmpty()
@@ -223,6 +227,27 @@ final class Actions {
                                     Argument.of(figures.intakeKgPerDay().getAsDouble(), "kg"))
                             : Reason.about("do-precool", chamber.id(), OWN_RULE, peak, removed));
         }
+    }
+
+    /** Ice that ran out: at the pace the first of it went, for the hours that were without. */
+    private void addIce(ChamberPlan chamber) {
+        Course course = outcome.course(chamber.id());
+        List<CourseEvent> gone =
+                course.events().stream()
+                        .filter(event -> event.kind() == CourseEvent.Kind.ICE_GONE)
+                        .toList();
+        double startKg =
+                course.coolers().stream()
+                        .flatMap(cooler -> cooler.ice().stream())
+                        .mapToDouble(IceLedger::startKg)
+                        .sum();
+        if (gone.isEmpty() || gone.get(0).fromS() < Timeline.HOUR_S) {
+            return;
+        }
+        double goneS = gone.stream().mapToDouble(event -> event.untilS() - event.fromS()).sum();
+        double days = course.hours().atS(course.hours().size() - 1) / Timeline.DAY_S;
+        double kgADay = startKg / gone.get(0).fromS() * goneS / days;
+        say(6, Reason.about("do-add-ice", chamber.id(), OWN_RULE, Argument.of(kgADay, "kg")));
     }
 
     private static boolean weatherDecides(ChamberPlan chamber) {

@@ -94,7 +94,7 @@ final class Cautions {
                     .forEach(caution -> add(caution.level(), caution.reason()));
         }
         FaceMoisture.of(chamber, outcome).forEach(c -> add(c.level(), c.reason()));
-        OutdoorAirCautions.of(outcome, chamber).forEach(c -> add(c.level(), c.reason()));
+        CoolersAtWork.of(outcome, chamber).forEach(c -> add(c.level(), c.reason()));
         for (Reason reason : course.reasons()) {
             add(
                     Level.NOTE,
@@ -118,6 +118,9 @@ final class Cautions {
             case DRY_WALL -> dryWall(chamber, told, course);
             case ENERGY_USED_UP ->
                     add(Level.CAUTION, Reason.about("energy-used-up", chamber.id(), "own", told));
+            case ICE_GONE -> {
+                // Told with the hour among what coolers do.
+            }
             case OUTAGE -> add(Level.NOTE, Reason.about("outage", chamber.id(), "own", told));
         }
     }

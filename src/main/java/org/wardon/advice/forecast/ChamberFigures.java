@@ -66,7 +66,14 @@ final class ChamberFigures {
                 did.ranS() / Timeline.HOUR_S,
                 did.removedJ() / J_PER_KWH,
                 did.electricityJ() / J_PER_KWH,
-                did.waterKg());
+                did.waterKg(),
+                did.ice()
+                        .map(
+                                ice ->
+                                        new ChamberForecast.Ice(
+                                                ice.meltedKg(),
+                                                ice.refrozenKg(),
+                                                Math.max(ice.endKg(), 0))));
     }
 
     private double ethylenePpm() {

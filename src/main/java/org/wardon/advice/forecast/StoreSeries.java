@@ -58,6 +58,9 @@ final class StoreSeries {
         if (course.waterUsedKg() > 0) {
             columns.put("waterUsedKg", hours::waterUsedKg);
         }
+        if (course.coolers().stream().anyMatch(cooler -> cooler.ice().isPresent())) {
+            columns.put("iceKg", hours::iceKg);
+        }
         for (int k = 0; k < course.coolers().size(); k++) {
             int cooler = k;
             columns.put(

@@ -1,6 +1,7 @@
 package org.wardon.files.forecast;
 
 import java.util.List;
+import java.util.Optional;
 import java.util.OptionalDouble;
 
 /**
@@ -66,13 +67,24 @@ public record ChamberForecast(
      * @param heatRemovedKWh heat taken, kWh
      * @param energyKWh electricity, kWh
      * @param waterUsedKg water evaporated and bled off, kg
+     * @param ice its ice; absent where it works without
      */
     public record OfCooler(
             String kind,
             double runningHours,
             double heatRemovedKWh,
             double energyKWh,
-            double waterUsedKg) {}
+            double waterUsedKg,
+            Optional<Ice> ice) {}
+
+    /**
+     * What became of the ice of a bank.
+     *
+     * @param meltedKg ice that melted, kg
+     * @param refrozenKg ice that was made, kg
+     * @param leftKg ice at the end, kg
+     */
+    public record Ice(double meltedKg, double refrozenKg, double leftKg) {}
 
     /**
      * The chamber's air.

@@ -34,10 +34,10 @@ public final class SeriesWriter {
 
     /**
      * Columns of a chamber whose coolers have them: water leaving a film, water used in the hour
-     * before. After them may come the share of the hour before that each cooler ran, {@link
-     * #running}.
+     * before, ice left. After them may come the share of the hour before that each cooler ran,
+     * {@link #running}.
      */
-    public static final List<String> OPTIONAL = List.of("waterOutC", "waterUsedKg");
+    public static final List<String> OPTIONAL = List.of("waterOutC", "waterUsedKg", "iceKg");
 
     private final Path folder;
     private final Timeline timeline;

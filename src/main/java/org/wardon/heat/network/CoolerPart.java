@@ -41,7 +41,13 @@ public final class CoolerPart implements Part, FilmedFace.Control {
     /** Water used up, kg/s. */
     static final int WATER = 7;
 
-    static final int FLOWS = 8;
+    /** Heat that melts its ice, W. */
+    static final int MELTS = 8;
+
+    /** Heat its machine takes out of its ice, W. */
+    static final int REFREEZES = 9;
+
+    static final int FLOWS = 10;
 
     private static final double COLDEST_C = -45;
     private static final double WARMEST_C = 55;
@@ -66,6 +72,8 @@ public final class CoolerPart implements Part, FilmedFace.Control {
     private final CoolerEffect after;
     private final CoolerEffect before;
     private boolean powered = true;
+    private boolean mains = true;
+    private boolean rechargeHours;
     private boolean on;
     private double defrostW;
     private boolean defrosting;
@@ -121,7 +129,20 @@ public final class CoolerPart implements Part, FilmedFace.Control {
      * @param available true where there is
      */
     public void power(boolean available) {
+        mains = available;
         powered = available || !unit.needsPower();
+        recharge(rechargeHours);
+    }
+
+    /**
+     * Tells whether it is the hour of its machine that makes ice; it needs power too.
+     *
+     * @param hours true within the hours
+     */
+    public void recharge(boolean hours) {
+        rechargeHours = hours;
+        in.recharging = hours && mains;
+        in.airC = Double.NaN; // what it did last was another thing
     }
 
     /**
@@ -345,6 +366,8 @@ public final class CoolerPart implements Part, FilmedFace.Control {
         flows[flowAt + RUN] = effect.ran;
         flows[flowAt + EXCHANGED] = effect.exchangeKgS;
         flows[flowAt + WATER] = effect.waterKgS;
+        flows[flowAt + MELTS] = effect.meltsW;
+        flows[flowAt + REFREEZES] = effect.refreezesW;
         rates[AirState.ENTHALPY] += fanW() + heater - removed;
         rates[AirState.HUMIDITY] -= effect.vapourKgS;
         for (int i = 0; i < own; i++) {
@@ -383,7 +406,11 @@ public final class CoolerPart implements Part, FilmedFace.Control {
         byAirC[FAN] = perRan * (effect.fanW - fanAlwaysW);
         byAirC[EXCHANGED] = perRan * effect.exchangeKgS;
         byAirC[WATER] = perRan * effect.waterKgS;
+        byAirC[MELTS] = effect.meltsByAirC + runByAirC * effect.meltsByRun;
+        byRatio[MELTS] = effect.meltsByHumidity;
         for (int i = 0; i < own; i++) {
+            byOwn[MELTS * own + i] = effect.meltsByOwn[i];
+            byOwn[REFREEZES * own + i] = effect.refreezesByOwn[i];
             byOwn[VAPOUR * own + i] = effect.vapourByOwn[i];
             byOwn[REMOVED * own + i] = effect.sensibleByOwn[i] + effect.vapourByOwn[i] * enthalpy;
             byOwn[ELECTRIC * own + i] = effect.electricByOwn[i];
@@ -429,6 +456,8 @@ public final class CoolerPart implements Part, FilmedFace.Control {
         slope[flowAt + RUN] = (after.ran - behind.ran) / span;
         slope[flowAt + EXCHANGED] = (after.exchangeKgS - behind.exchangeKgS) / span;
         slope[flowAt + WATER] = (after.waterKgS - behind.waterKgS) / span;
+        slope[flowAt + MELTS] = (after.meltsW - behind.meltsW) / span;
+        slope[flowAt + REFREEZES] = (after.refreezesW - behind.refreezesW) / span;
         rateSlope[AirState.ENTHALPY] += fan - removed;
         rateSlope[AirState.HUMIDITY] -= vapour;
         for (int i = 0; i < own; i++) {

@@ -430,6 +430,28 @@ public final class Terms {
     }
 
     /**
+     * Heat that melted the ice of one cooler.
+     *
+     * @param i number of the cooler
+     * @param totals integrals of the flows
+     * @return J
+     */
+    public double melted(int i, double[] totals) {
+        return totals[coolers[i].flow(CoolerPart.MELTS)];
+    }
+
+    /**
+     * Heat a machine took out of the ice of one cooler.
+     *
+     * @param i number of the cooler
+     * @param totals integrals of the flows
+     * @return J
+     */
+    public double refrozen(int i, double[] totals) {
+        return totals[coolers[i].flow(CoolerPart.REFREEZES)];
+    }
+
+    /**
      * Electricity of one cooler, its pump and chiller, its fan and its defrost.
      *
      * @param i number of the cooler

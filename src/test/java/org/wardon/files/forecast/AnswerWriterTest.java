@@ -53,8 +53,9 @@ class AnswerWriterTest {
                         + " ethylenePpmMax balanceErrorPct coolers",
                 chamber);
         assertNames(
-                "kind runningHours heatRemovedKWh energyKWh waterUsedKg",
+                "kind runningHours heatRemovedKWh energyKWh waterUsedKg ice",
                 chamber.get("coolers").get(0));
+        assertNames("meltedKg refrozenKg leftKg", chamber.get("coolers").get(0).get("ice"));
         assertNames("mean min max p95", chamber.get("airC"));
         assertNames("mean min max", chamber.get("humidityPct"));
         assertNames("mean max", chamber.get("respirationLoadW"));
@@ -179,7 +180,14 @@ class AnswerWriterTest {
                         4000,
                         0.4,
                         0.00012,
-                        List.of(new ChamberForecast.OfCooler("night-air", 80, 120, 50, 0)));
+                        List.of(
+                                new ChamberForecast.OfCooler(
+                                        "ice-bank",
+                                        80,
+                                        120,
+                                        50,
+                                        0,
+                                        Optional.of(new ChamberForecast.Ice(900, 800, 100)))));
         LotForecast lot =
                 new LotForecast(
                         "M1",

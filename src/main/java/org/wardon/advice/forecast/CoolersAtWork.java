@@ -1,18 +1,24 @@
 package org.wardon.advice.forecast;
 
+import java.time.LocalDateTime;
+import java.time.temporal.ChronoUnit;
 import java.util.ArrayList;
 import java.util.List;
 import org.wardon.air.MoistAir;
 import org.wardon.air.SaturatedAir;
 import org.wardon.air.StandardAtmosphere;
+import org.wardon.air.Timeline;
 import org.wardon.air.Weather;
 import org.wardon.cooling.Compressor;
 import org.wardon.cooling.Cooler;
 import org.wardon.cooling.EvaporativePad;
+import org.wardon.cooling.IceBank;
 import org.wardon.cooling.NightAir;
 import org.wardon.cooling.PadOutlet;
 import org.wardon.cooling.WaterFilm;
 import org.wardon.cooling.WettedWall;
+import org.wardon.heat.Course;
+import org.wardon.heat.CourseEvent;
 import org.wardon.heat.Hours;
 import org.wardon.plan.ChamberPlan;
 import org.wardon.produce.Caution;
@@ -21,10 +27,10 @@ import org.wardon.produce.Reason;
 import org.wardon.produce.Reason.Argument;
 
 /**
- * What this weather lets coolers that work with outdoor air do: {@code pad-gives-little}, {@code
- * night-air-rests}, {@code night-air-dry}, {@code wet-wall-gives-little}.
+ * What this weather and this load make of coolers: {@code pad-gives-little}, {@code
+ * night-air-rests}, {@code night-air-dry}, {@code wet-wall-gives-little}, {@code ice-gone}.
  */
-final class OutdoorAirCautions implements Cooler.Kinds<List<Caution>> {
+final class CoolersAtWork implements Cooler.Kinds<List<Caution>> {
     /**
      * What a well-kept pad takes off the incoming air, K; source: table of cooling sources,
      * air_cooling, 5.6 to 11.1 K.
@@ -49,14 +55,18 @@ final class OutdoorAirCautions implements Cooler.Kinds<List<Caution>> {
 
     private final ChamberPlan chamber;
     private final int place;
+    private final Course course;
+    private final Timeline timeline;
     private final Hours hours;
     private final Weather weather;
     private final double pressurePa;
 
-    private OutdoorAirCautions(StoreOutcome outcome, ChamberPlan chamber, int place) {
+    private CoolersAtWork(StoreOutcome outcome, ChamberPlan chamber, int place) {
         this.chamber = chamber;
         this.place = place;
-        this.hours = outcome.course(chamber.id()).hours();
+        this.course = outcome.course(chamber.id());
+        this.timeline = outcome.model().plan().timeline();
+        this.hours = course.hours();
         this.weather = outcome.model().weather();
         this.pressurePa = StandardAtmosphere.pressurePa(outcome.model().plan().site().elevationM());
     }
@@ -65,7 +75,7 @@ final class OutdoorAirCautions implements Cooler.Kinds<List<Caution>> {
         List<Caution> all = new ArrayList<>();
         for (int i = 0; i < chamber.coolers().size(); i++) {
             Cooler cooler = chamber.coolers().get(i);
-            all.addAll(cooler.match(new OutdoorAirCautions(outcome, chamber, i)));
+            all.addAll(cooler.match(new CoolersAtWork(outcome, chamber, i)));
         }
         return all;
     }
@@ -166,6 +176,28 @@ final class OutdoorAirCautions implements Cooler.Kinds<List<Caution>> {
                                         OWN_RULE,
                                         Argument.of(humidity / ran, "pct"),
                                         Argument.of(wishedPct, "pct"))));
+    }
+
+    @Override
+    public List<Caution> iceBank(IceBank bank) {
+        List<CourseEvent> gone =
+                course.events().stream()
+                        .filter(event -> event.kind() == CourseEvent.Kind.ICE_GONE)
+                        .toList();
+        if (gone.isEmpty()) {
+            return List.of();
+        }
+        double goneS = gone.stream().mapToDouble(event -> event.untilS() - event.fromS()).sum();
+        double days = hours.atS(hours.size() - 1) / Timeline.DAY_S;
+        LocalDateTime first = timeline.localAt(gone.get(0).fromS()).truncatedTo(ChronoUnit.MINUTES);
+        return List.of(
+                caution(
+                        Reason.about(
+                                "ice-gone",
+                                chamber.id(),
+                                OWN_RULE,
+                                Argument.text(first.toString().replace('T', ' ')),
+                                Argument.of(goneS / Timeline.HOUR_S / days, "h"))));
     }
 
     /** Stations state humidity over water at all temperatures. */
