@@ -70,12 +70,7 @@ final class ChamberRunner implements Integrator.StepListener {
     private double lastExchanged;
     private double lastRespiration;
     private double lastPeople;
-    private double mixedJ;
-    private double mixedKg;
-    private final double startLayersJ;
-    private final double startStructureJ;
-    private final double startAirJ;
-    private final double startAirKg;
+    private final Books books;
 
     ChamberRunner(ChamberRun run, ChamberNetwork network, double[] start, Accuracy accuracy) {
         this.run = run;
@@ -111,10 +106,7 @@ final class ChamberRunner implements Integrator.StepListener {
         tripped = new Spans(CourseEvent.Kind.TRIPPED, id);
         wetFaces = new Spans(CourseEvent.Kind.WET_FACES, id);
         icing = new Spans(CourseEvent.Kind.ICES_UP, id);
-        startLayersJ = network.layersJ(y);
-        startStructureJ = network.structureJ(y);
-        startAirJ = network.airKg() * network.enthalpyJkg(y);
-        startAirKg = network.airKg() * network.ratio(y);
+        books = new Books(network, y, totals, lots);
     }
 
     /** Compiles a run; it stands at its start. */
@@ -164,6 +156,16 @@ final class ChamberRunner implements Integrator.StepListener {
     Course finish() {
         settle();
         return course();
+    }
+
+    /** Goes on to a time, and from there to another, and tells what came in between. */
+    HourAccount account(double fromS, double untilS) {
+        goTo(fromS, Progress.SILENT);
+        settle();
+        Accountant accountant = new Accountant(run, network, totals, lots, books);
+        accountant.open(now, y);
+        goTo(untilS, Progress.SILENT);
+        return accountant.close(now, y);
     }
 
     /** How a lot is now, to be carried to another chamber. */
@@ -418,26 +420,14 @@ final class ChamberRunner implements Integrator.StepListener {
         }
         free = Math.max(free, LEAST_FREE_SHARE * gross);
         carbon.mix(network.freeM3(), free);
-        double[] mixed = network.changeFreeVolume(free, y);
-        mixedJ += mixed[0];
-        mixedKg += mixed[1];
+        books.mixed(network.changeFreeVolume(free, y));
     }
 
     private Course course() {
         double end = run.durationS();
         List<CourseEvent> events = new ArrayList<>();
-        double packagesJ = startStructureJ - network.structureJ(y);
-        double packagesKg = 0;
-        double fieldHeat = 0;
-        double respiration = 0;
-        double evaporated = 0;
         for (LotRecorder lot : lots) {
             lot.close(y, totals);
-            packagesJ += lot.packageGaveJ();
-            packagesKg += lot.packageGaveKg();
-            fieldHeat += lot.totals().fieldHeatJ();
-            respiration += lot.totals().respirationJ();
-            evaporated += lot.totals().evaporatedKg();
             events.addAll(lot.wetSpans(end));
         }
         for (Spans spans :
@@ -452,25 +442,6 @@ final class ChamberRunner implements Integrator.StepListener {
             events.addAll(spans.until(end));
         }
         events.sort(Comparator.comparingDouble(CourseEvent::fromS));
-        HeatLedger heat =
-                new HeatLedger(
-                        terms.walls(totals),
-                        terms.door(totals) + mixedJ,
-                        terms.leakage(totals),
-                        terms.freshAir(totals),
-                        fieldHeat,
-                        respiration,
-                        terms.fans(totals),
-                        terms.lights(totals),
-                        terms.people(totals),
-                        packagesJ,
-                        terms.defrost(totals),
-                        terms.humidifier(totals),
-                        terms.heater(totals),
-                        terms.pumps(totals),
-                        startAirJ - network.airKg() * network.enthalpyJkg(y),
-                        terms.removed(totals),
-                        terms.electricity(totals));
         return new Course(
                 run.chamberId(),
                 hours.hours(),
@@ -478,10 +449,10 @@ final class ChamberRunner implements Integrator.StepListener {
                 events,
                 counts(),
                 coolers(),
-                heat,
-                water(evaporated, packagesKg, respiration),
+                books.heat(y),
+                books.water(y),
                 watering.ledger(y, totals),
-                layersError(),
+                books.layersError(y),
                 network.reasons());
     }
 
@@ -509,27 +480,5 @@ final class ChamberRunner implements Integrator.StepListener {
                 co2AtFirstOpening,
                 integrator.steps(),
                 integrator.rejected());
-    }
-
-    private WaterLedger water(double evaporated, double packagesKg, double respirationJ) {
-        return new WaterLedger(
-                evaporated,
-                packagesKg,
-                terms.doorVapour(totals) + mixedKg,
-                terms.leakageVapour(totals),
-                terms.freshAirVapour(totals),
-                terms.peopleVapour(totals),
-                terms.humidifierWater(totals),
-                terms.wallVapour(totals) - terms.mist(totals),
-                -terms.removedVapour(totals),
-                startAirKg - network.airKg() * network.ratio(y),
-                respirationJ / BurntSugar.JOULE_PER_KG_CO2 * BurntSugar.WATER_KG_PER_KG_CO2,
-                terms.ranOff(totals) + terms.mist(totals));
-    }
-
-    private double layersError() {
-        double stored = network.layersJ(y) - startLayersJ;
-        double entered = Math.abs(terms.fromBeyond(totals)) + Math.abs(stored);
-        return entered > 0 ? Math.abs(terms.intoLayers(totals) - stored) / entered : 0;
     }
 }

@@ -41,6 +41,31 @@ public record HeatLedger(
         double air,
         double removed,
         double electricity) {
+    static final HeatLedger NOTHING =
+            new HeatLedger(0, 0, 0, 0, 0, 0, 0, 0, 0, 0, 0, 0, 0, 0, 0, 0, 0);
+
+    /** What came in between. */
+    HeatLedger since(HeatLedger before) {
+        return new HeatLedger(
+                walls - before.walls,
+                door - before.door,
+                leakage - before.leakage,
+                freshAir - before.freshAir,
+                fieldHeat - before.fieldHeat,
+                respiration - before.respiration,
+                fans - before.fans,
+                lights - before.lights,
+                people - before.people,
+                packages - before.packages,
+                defrost - before.defrost,
+                humidifier - before.humidifier,
+                heater - before.heater,
+                pumps - before.pumps,
+                air - before.air,
+                removed - before.removed,
+                electricity - before.electricity);
+    }
+
     /**
      * Returns the sum of all terms, which the coolers must have removed.
      *

@@ -52,6 +52,22 @@ public final class HeatModel {
     }
 
     /**
+     * Runs a chamber to a time and accounts for the span before it.
+     *
+     * @param run what to run; a lot carried in must be known
+     * @param fromS start of the span, s since the start of the run
+     * @param untilS its end, s, after its start, within the run
+     * @return what moved heat and water in the span, and faces and lots at its end
+     * @throws org.wardon.errors.RunStopped where a state cannot be
+     */
+    public static HourAccount account(ChamberRun run, double fromS, double untilS) {
+        Require.that(
+                fromS >= 0 && untilS > fromS && untilS <= run.durationS(),
+                "a span of the run, not " + fromS + " to " + untilS + " s");
+        return ChamberRunner.of(run, Accuracy.USUAL, false).account(fromS, untilS);
+    }
+
+    /**
      * Runs one lot in air that is given: without the chamber, along a logger, or before it arrived.
      * The lot breathes, sweats and cools by the same code as in a chamber; it does not act on the
      * air.

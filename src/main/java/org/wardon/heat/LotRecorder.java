@@ -35,8 +35,7 @@ final class LotRecorder {
     private double startMassKg;
     private boolean closed;
     private Optional<LotState> carriedOut = Optional.empty();
-    private double packageGaveJ;
-    private double packageGaveKg;
+    private LotAmounts amounts = LotAmounts.NOTHING;
     private double wetFromS = Double.NaN;
     private final List<CourseEvent> wetSpans = new ArrayList<>();
     private final LotTotals nothing;
@@ -90,21 +89,34 @@ final class LotRecorder {
         if (!present()) {
             return;
         }
+        amounts = amounts(y, integrals);
         closed = true;
-        packageGaveJ = startPackageJ - lot.packageHeatJ(y);
-        packageGaveKg = startPackageKg - lot.packageWaterKg(y);
-        double fieldHeat = startHeatJ - lot.heatJ(y) + lot.liquidJ(integrals);
         totals =
                 new LotTotals(
-                        lot.respirationJ(integrals),
-                        fieldHeat,
-                        lot.evaporatedKg(integrals),
+                        amounts.respirationJ(),
+                        amounts.fleshJ() + amounts.liquidJ(),
+                        amounts.evaporatedKg(),
                         startMassKg - massKg(y, integrals),
                         startMassKg);
     }
 
+    /** What it gave so far; as it was when the account was closed. */
+    LotAmounts amounts(double[] y, double[] integrals) {
+        return present()
+                ? new LotAmounts(
+                        lot.respirationJ(integrals),
+                        startHeatJ - lot.heatJ(y),
+                        lot.liquidJ(integrals),
+                        startPackageJ - lot.packageHeatJ(y),
+                        startPackageKg - lot.packageWaterKg(y),
+                        lot.evaporatedKg(integrals),
+                        lot.toAirJ(integrals),
+                        lot.vapourKg(integrals))
+                : amounts;
+    }
+
     /** Tissue and sugar left, free water apart. */
-    private double massKg(double[] y, double[] integrals) {
+    double massKg(double[] y, double[] integrals) {
         double co2 = lot.respirationJ(integrals) / BurntSugar.JOULE_PER_KG_CO2;
         double burnt = co2 * (BurntSugar.GLUCOSE_KG_PER_KG_CO2 - BurntSugar.WATER_KG_PER_KG_CO2);
         double water = lot.evaporatedKg(integrals) + lot.waterKg(y) - startWaterKg;
@@ -167,14 +179,6 @@ final class LotRecorder {
                         lot.wetShare(y) > WET_SHARE)
                 .mass(massKg(y, integrals));
         lastSampleS = t;
-    }
-
-    double packageGaveJ() {
-        return packageGaveJ;
-    }
-
-    double packageGaveKg() {
-        return packageGaveKg;
     }
 
     LotTotals totals() {

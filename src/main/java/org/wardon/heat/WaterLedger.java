@@ -32,6 +32,25 @@ public record WaterLedger(
     /** Below this what passed is rounding, kg. */
     private static final double LEAST_KG = 1e-6;
 
+    static final WaterLedger NOTHING = new WaterLedger(0, 0, 0, 0, 0, 0, 0, 0, 0, 0, 0, 0);
+
+    /** What came in between. */
+    WaterLedger since(WaterLedger before) {
+        return new WaterLedger(
+                lots - before.lots,
+                packages - before.packages,
+                door - before.door,
+                leakage - before.leakage,
+                freshAir - before.freshAir,
+                people - before.people,
+                humidifier - before.humidifier,
+                faces - before.faces,
+                coolers - before.coolers,
+                air - before.air,
+                formed - before.formed,
+                ranOff - before.ranOff);
+    }
+
     /**
      * Returns the sum of all terms, which must be nothing.
      *

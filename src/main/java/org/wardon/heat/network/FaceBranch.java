@@ -135,6 +135,31 @@ final class FaceBranch implements FacePart {
     }
 
     @Override
+    public FaceGrid grid() {
+        return grid;
+    }
+
+    @Override
+    public int outermost() {
+        return branch.start;
+    }
+
+    @Override
+    public double beyondC() {
+        return beyondC;
+    }
+
+    @Override
+    public double farFilmWm2K() {
+        return farFilm;
+    }
+
+    @Override
+    public double areaM2() {
+        return areaM2;
+    }
+
+    @Override
     public int firstNode() {
         return branch.start;
     }

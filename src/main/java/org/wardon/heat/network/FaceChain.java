@@ -132,6 +132,31 @@ abstract class FaceChain implements FacePart {
     }
 
     @Override
+    public FaceGrid grid() {
+        return grid;
+    }
+
+    @Override
+    public int outermost() {
+        return outermost;
+    }
+
+    @Override
+    public double beyondC() {
+        return beyondC;
+    }
+
+    @Override
+    public double farFilmWm2K() {
+        return farFilm;
+    }
+
+    @Override
+    public double areaM2() {
+        return areaM2;
+    }
+
+    @Override
     public int firstNode() {
         return branch.start;
     }

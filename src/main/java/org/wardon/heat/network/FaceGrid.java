@@ -46,7 +46,18 @@ final class FaceGrid {
     /** Conductance from the last node to the air, film included, W/(m2 K). */
     final double inner;
 
+    /** Depth of each node from the outer side of the layers, m. */
+    final double[] depthM;
+
+    /** Name of the layer each node lies in, or on the outer side of. */
+    final List<String> layers;
+
+    /** Thickness of all layers, m. */
+    final double thicknessM;
+
     private final List<double[]> nodes = new ArrayList<>();
+    private final List<String> names = new ArrayList<>();
+    private double doneM;
     private final double wholeM2KW;
     private double pendingM2KW;
 
@@ -62,8 +73,11 @@ final class FaceGrid {
             add(layer, wallFactor, cell);
         }
         if (nodes.isEmpty()) {
-            addNode(BARE_JM2K);
+            addNode(BARE_JM2K, doneM, layers.isEmpty() ? "" : layers.get(0).material());
         }
+        thicknessM = doneM;
+        depthM = nodes.stream().mapToDouble(node -> node[2]).toArray();
+        this.layers = List.copyOf(names);
         inner = 1 / (pendingM2KW + innerM2KW / wallFactor);
         int n = nodes.size();
         capacity = new double[n];
@@ -82,17 +96,19 @@ final class FaceGrid {
         if (layer.capacityJm2K() <= 0) {
             pendingM2KW += resistance;
         } else if (!conducts(layer)) {
-            massHere(layer.capacityJm2K());
+            massHere(layer.capacityJm2K(), layer.material());
         } else {
             int least = resistance > THIN_SHARE * wholeM2KW ? 2 : 1;
             int cells = Math.max(least, (int) Math.ceil(depths(layer) / cell - 1e-9));
             double[] share = shares(cells);
-            massHere(share[0] * layer.capacityJm2K());
+            massHere(share[0] * layer.capacityJm2K(), layer.material());
             for (int i = 1; i <= cells; i++) {
                 pendingM2KW = resistance / cells;
-                addNode(share[i] * layer.capacityJm2K());
+                double depth = doneM + i * layer.thicknessM() / cells;
+                addNode(share[i] * layer.capacityJm2K(), depth, layer.material());
             }
         }
+        doneM += layer.thicknessM();
     }
 
     /**
@@ -126,16 +142,17 @@ final class FaceGrid {
         return layer.thicknessM() / Math.sqrt(diffusivity * DAY_S / Math.PI);
     }
 
-    private void massHere(double jm2k) {
+    private void massHere(double jm2k, String layer) {
         if (nodes.isEmpty() || pendingM2KW > 0) {
-            addNode(jm2k);
+            addNode(jm2k, doneM, layer);
         } else {
             nodes.get(nodes.size() - 1)[0] += jm2k;
         }
     }
 
-    private void addNode(double jm2k) {
-        nodes.add(new double[] {jm2k, pendingM2KW});
+    private void addNode(double jm2k, double depth, String layer) {
+        nodes.add(new double[] {jm2k, pendingM2KW, depth});
+        names.add(layer);
         pendingM2KW = 0;
     }
 

@@ -41,6 +41,20 @@ interface FacePart extends Part {
     /** Heat in the layers above 0 °C, J. */
     double heatJ(double[] y);
 
+    /** Its layers cut into nodes. */
+    FaceGrid grid();
+
+    /** Place of the outermost node of its layers in the state. */
+    int outermost();
+
+    /** What lies beyond now: sol-air or other temperature, °C. */
+    double beyondC();
+
+    /** Far film now, W/(m2 K). */
+    double farFilmWm2K();
+
+    double areaM2();
+
     int firstNode();
 
     int lastNode();

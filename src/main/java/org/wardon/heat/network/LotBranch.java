@@ -77,8 +77,8 @@ public final class LotBranch implements Part {
     private final double respirationFactor;
     private boolean gives = true;
 
-    private double skinC;
-    private double packageC;
+    double skinC;
+    double packageC;
     private double packagePa;
 
     /** What the block's four unknowns do to skin, evaporation and the rest, at the last start. */

@@ -38,6 +38,18 @@ public final class Terms {
         return sum;
     }
 
+    /**
+     * Reads one face.
+     *
+     * @param i number of the face in the enclosure
+     * @param y state, in which the rates were asked for last
+     * @param totals integrals of the flows
+     * @return its temperatures and what went through it
+     */
+    public FaceReading face(int i, double[] y, double[] totals) {
+        return FaceReading.of(faces[i], y, totals);
+    }
+
     private double coolers(double[] totals, int kind) {
         double sum = 0;
         for (CoolerPart cooler : coolers) {
