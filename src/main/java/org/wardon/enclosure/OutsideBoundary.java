@@ -3,9 +3,7 @@ package org.wardon.enclosure;
 import java.util.ArrayList;
 import java.util.Arrays;
 import java.util.List;
-import java.util.Objects;
 import org.wardon.air.SolAir;
-import org.wardon.errors.Require;
 import org.wardon.produce.Reason;
 
 /**
@@ -82,13 +80,14 @@ public final class OutsideBoundary {
         }
         if (beyond instanceof Beyond.Neighbour neighbour) {
             Surroundings.HourlyAir air = around.neighbourC().get(neighbour.chamberId());
-            Require.that(
-                    air != null,
-                    "the air of chamber "
-                            + neighbour.chamberId()
-                            + " is not given; known are "
-                            + around.neighbourC().keySet());
-            return Objects.requireNonNull(air).temperatureC(hour);
+            if (air == null) {
+                throw new IllegalArgumentException(
+                        "the air of chamber "
+                                + neighbour.chamberId()
+                                + " is not given; known are "
+                                + around.neighbourC().keySet());
+            }
+            return air.temperatureC(hour);
         }
         return outdoorC;
     }
@@ -160,6 +159,15 @@ public final class OutsideBoundary {
      */
     public int hours() {
         return temperatureC.length - 1;
+    }
+
+    /**
+     * Returns the temperatures of all hours.
+     *
+     * @return {@code [hour]}, °C
+     */
+    public double[] temperaturesC() {
+        return temperatureC.clone();
     }
 
     /**

@@ -15,6 +15,7 @@ import org.wardon.plan.ChamberPlan;
 import org.wardon.plan.Corrections;
 import org.wardon.plan.Default;
 import org.wardon.plan.Defaults;
+import org.wardon.plan.EthyleneScrub;
 import org.wardon.plan.OutagePlan;
 import org.wardon.plan.StartAir;
 
@@ -53,6 +54,7 @@ final class ChamberBinder {
                 outages(chamber),
                 inputs.numberElse(chamber, "humidifierKgH", 0),
                 inputs.numberElse(chamber, "heaterW", 0),
+                scrub(chamber.at("ethyleneScrub")),
                 starts(chamber.at("starts")),
                 corrections(chamber.at("corrections")));
     }
@@ -130,6 +132,16 @@ final class ChamberBinder {
                                         inputs.time(outage, "from").orElseThrow(),
                                         inputs.number(outage, "hours")))
                 .toList();
+    }
+
+    private Optional<EthyleneScrub> scrub(Part scrub) {
+        return scrub.given()
+                ? Optional.of(
+                        new EthyleneScrub(
+                                inputs.number(scrub, "airM3PerHour"),
+                                inputs.number(
+                                        scrub, "efficiencyPct", Defaults.SCRUB_EFFICIENCY_PCT)))
+                : Optional.empty();
     }
 
     private Optional<StartAir> starts(Part starts) {

@@ -1,11 +1,11 @@
 package org.wardon.files;
 
 import java.time.LocalDateTime;
-import java.util.LinkedHashSet;
+import java.util.LinkedHashMap;
 import java.util.List;
+import java.util.Map;
 import java.util.Optional;
 import java.util.OptionalDouble;
-import java.util.Set;
 import org.wardon.cooling.Control;
 import org.wardon.files.json.Json;
 import org.wardon.files.json.Part;
@@ -14,10 +14,10 @@ import org.wardon.plan.Default;
 
 /** Takes values from a checked plan and notes each default it puts in. */
 final class Inputs {
-    private final Set<Assumed> assumed = new LinkedHashSet<>();
+    private final Map<String, Assumed> assumed = new LinkedHashMap<>();
 
     List<Assumed> assumed() {
-        return List.copyOf(assumed);
+        return List.copyOf(assumed.values());
     }
 
     double number(Part owner, String name) {
@@ -77,7 +77,8 @@ final class Inputs {
     }
 
     void note(Part owner, String name, String value, String unit, String mark) {
-        assumed.add(new Assumed(Json.member(owner.path(), name), value, unit, mark));
+        String path = Json.member(owner.path(), name);
+        assumed.putIfAbsent(path, new Assumed(path, value, unit, mark));
     }
 
     static String plain(double value) {

@@ -1,5 +1,7 @@
 package org.wardon.heat;
 
+import java.util.stream.IntStream;
+import org.wardon.air.Coarse;
 import org.wardon.air.Weather;
 import org.wardon.errors.Require;
 
@@ -8,6 +10,7 @@ public final class AirSeries {
     private final double[] timeS;
     private final double[] temperatureC;
     private final double[] humidityFraction;
+    private final int rowHours;
 
     /**
      * Holds a series; the arrays are copied.
@@ -17,16 +20,24 @@ public final class AirSeries {
      * @param humidityFraction {@code [sample]}, relative humidity, 0 to 1
      */
     public AirSeries(double[] timeS, double[] temperatureC, double[] humidityFraction) {
+        this(timeS, temperatureC, humidityFraction, 1);
+    }
+
+    private AirSeries(
+            double[] timeS, double[] temperatureC, double[] humidityFraction, int rowHours) {
         int n = timeS.length;
         Require.that(
                 n > 0 && temperatureC.length == n && humidityFraction.length == n,
                 "an air series needs three arrays of equal length of at least 1, found " + n);
         for (int i = 1; i < n; i++) {
-            Require.that(timeS[i] > timeS[i - 1], "times must rise, found " + timeS[i] + " s");
+            if (!(timeS[i] > timeS[i - 1])) {
+                throw new IllegalArgumentException("times must rise, found " + timeS[i] + " s");
+            }
         }
         this.timeS = timeS.clone();
         this.temperatureC = temperatureC.clone();
         this.humidityFraction = humidityFraction.clone();
+        this.rowHours = rowHours;
     }
 
     /**
@@ -58,6 +69,30 @@ public final class AirSeries {
             humidity[h] = weather.humidityPct(h) / 100;
         }
         return new AirSeries(time, temperature, humidity);
+    }
+
+    /**
+     * Returns an hourly series for sampling: straight between means of three hours, with rows as
+     * far apart for the lot that stands in it. A series of one sample stays as it is.
+     *
+     * @return about every third sample, and the last
+     */
+    public AirSeries sketched() {
+        int rows = DoorMode.SKETCHED.rowHours();
+        double[] meanC = Coarse.means(temperatureC, rows);
+        double[] mean = Coarse.means(humidityFraction, rows);
+        int[] kept =
+                IntStream.range(0, size()).filter(i -> i % rows == 0 || i == size() - 1).toArray();
+        return new AirSeries(
+                IntStream.of(kept).mapToDouble(i -> timeS[i]).toArray(),
+                IntStream.of(kept).mapToDouble(i -> meanC[i]).toArray(),
+                IntStream.of(kept).mapToDouble(i -> mean[i]).toArray(),
+                size() > 1 ? rows : 1);
+    }
+
+    /** Hours from row to row of a lot that stands in it. */
+    int rowHours() {
+        return rowHours;
     }
 
     /**

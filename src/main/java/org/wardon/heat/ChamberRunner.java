@@ -141,7 +141,7 @@ final class ChamberRunner implements Integrator.StepListener {
         passEdges(now);
         budget.check(now, totals);
         if (now >= hourEndS()) {
-            hour++;
+            hour += run.doorMode().rowHours();
             network.hour(hour);
             network.settle(y);
             endHour(now);
@@ -149,7 +149,7 @@ final class ChamberRunner implements Integrator.StepListener {
     }
 
     private double hourEndS() {
-        return Math.min((hour + 1) * 3600.0, run.durationS());
+        return Math.min((hour + run.doorMode().rowHours()) * 3600.0, run.durationS());
     }
 
     /** Closes the books at the end of the run, to which it must have gone. */
@@ -334,7 +334,7 @@ final class ChamberRunner implements Integrator.StepListener {
         boolean starts = edge.kind() == Edge.Kind.USE_STARTS;
         double present = run.enclosure().gains().peopleHoursPerDay() * 3600 / usedS;
         network.people(starts ? present : 0);
-        if (run.doorMode() == DoorMode.AVERAGED) {
+        if (run.doorMode() != DoorMode.PULSES) {
             network.door(starts);
         }
         restart(edge);

@@ -20,6 +20,7 @@ final class GivenAirRunner implements Integrator.StepListener, Integrator.Trigge
     private final LotInGivenAir network;
     private final Integrator integrator;
     private final LotRecorder recorder;
+    private final double rowS;
 
     GivenAirRunner(
             Stay stay, AirSeries air, double pressurePa, double endS, LotInGivenAir network) {
@@ -28,7 +29,9 @@ final class GivenAirRunner implements Integrator.StepListener, Integrator.Trigge
         this.pressurePa = pressurePa;
         this.endS = endS;
         this.network = network;
-        network.accuracy(Accuracy.USUAL.lotK(), Accuracy.USUAL.airK());
+        Accuracy accuracy = air.rowHours() > 1 ? Accuracy.SKETCHED : Accuracy.USUAL;
+        network.accuracy(accuracy.lotK(), accuracy.airK());
+        rowS = 3600.0 * air.rowHours();
         integrator = new Integrator(network, 1, FIRST_STEP_S, SHORTEST_STEP_S);
         int rows = (int) Math.ceil((endS - startS()) / 3600) + 3;
         recorder = new LotRecorder(stay, network.lot(), rows);
@@ -47,7 +50,7 @@ final class GivenAirRunner implements Integrator.StepListener, Integrator.Trigge
         network.lot().arrive(stay.pulpC(), stay.surfaceWaterKg(), ratio(t), y);
         recorder.arrives(t, y, integrator.totals());
         int sample = 0;
-        double nextRow = 3600 * (Math.floor(t / 3600 + 1e-9) + 1);
+        double nextRow = rowS * (Math.floor(t / rowS + 1e-9) + 1);
         while (t < endS - LEAST_STRETCH_S) {
             while (sample < air.size() && air.timeS(sample) <= t + LEAST_STRETCH_S) {
                 sample++;
@@ -71,7 +74,7 @@ final class GivenAirRunner implements Integrator.StepListener, Integrator.Trigge
             }
             if (t >= nextRow || t >= endS - LEAST_STRETCH_S) {
                 recorder.row(t, y, integrator.totals());
-                nextRow += 3600;
+                nextRow += rowS;
             }
         }
         recorder.close(y, integrator.totals());

@@ -1,6 +1,7 @@
 package org.wardon.heat;
 
 import java.util.List;
+import java.util.Optional;
 import org.wardon.air.Site;
 import org.wardon.air.StandardAtmosphere;
 import org.wardon.enclosure.Surroundings;
@@ -22,7 +23,26 @@ public final class HeatModel {
      * @throws IllegalArgumentException where a part is not built or parts do not fit together
      */
     public static Course run(ChamberRun run, Progress progress) {
-        return run(run, progress, Accuracy.USUAL, false);
+        return run(run, progress, accuracy(run), false);
+    }
+
+    /**
+     * Warms a chamber that follows the weather, for many runs with other lots.
+     *
+     * @param run one of those runs
+     * @return its start with the faces warmed, or its own start where none is needed
+     */
+    public static Start warmed(ChamberRun run) {
+        if (!WarmUp.wanted(run)) {
+            return run.start();
+        }
+        Warmed warmed = WarmUp.warmed(run, accuracy(run), false);
+        return new Start(
+                run.start().temperatureC(), run.start().humidityPct(), Optional.of(warmed));
+    }
+
+    private static Accuracy accuracy(ChamberRun run) {
+        return run.doorMode() == DoorMode.SKETCHED ? Accuracy.SKETCHED : Accuracy.USUAL;
     }
 
     /**
@@ -48,7 +68,7 @@ public final class HeatModel {
      * @throws IllegalArgumentException where a lot is carried to where no such lot comes in
      */
     public static List<Course> runTogether(List<ChamberRun> runs) {
-        return TogetherRun.of(runs, Accuracy.USUAL);
+        return TogetherRun.of(runs, runs.isEmpty() ? Accuracy.USUAL : accuracy(runs.get(0)));
     }
 
     /**

@@ -17,12 +17,15 @@ final class LotRecorder {
 
     private static final double CLOSER_S = 300;
 
+    /** Room for samples closer than rows; more are taken too. */
+    private static final int CLOSER_SAMPLES = 80;
+
     /** Wet from this share of the skin on; below it dew is not noticed (assumption). */
     private static final double WET_SHARE = 0.02;
 
     private final Stay stay;
     private final LotBranch lot;
-    private final LotHistory.Builder history = new LotHistory.Builder();
+    private final LotHistory.Builder history;
     private final Map<LotCourse.Column, double[]> rows = new EnumMap<>(LotCourse.Column.class);
     private double lastRowS = Double.NEGATIVE_INFINITY;
     private int size;
@@ -47,6 +50,7 @@ final class LotRecorder {
         this.startMassKg = stay.lot().massKg();
         this.nothing = new LotTotals(0, 0, 0, 0, startMassKg);
         this.totals = nothing;
+        this.history = new LotHistory.Builder(mostRows + CLOSER_SAMPLES);
         for (LotCourse.Column column : LotCourse.Column.values()) {
             rows.put(column, new double[mostRows]);
         }

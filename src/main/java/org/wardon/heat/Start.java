@@ -1,5 +1,6 @@
 package org.wardon.heat;
 
+import java.util.Optional;
 import java.util.OptionalDouble;
 import org.wardon.errors.Require;
 
@@ -10,10 +11,13 @@ import org.wardon.errors.Require;
  *
  * @param temperatureC air, °C
  * @param humidityPct its relative humidity, percent
+ * @param warmed what the first day leaves, where it was worked out before
  */
-public record Start(OptionalDouble temperatureC, OptionalDouble humidityPct) {
+public record Start(
+        OptionalDouble temperatureC, OptionalDouble humidityPct, Optional<Warmed> warmed) {
     /** Everything as usual. */
-    public static final Start USUAL = new Start(OptionalDouble.empty(), OptionalDouble.empty());
+    public static final Start USUAL =
+            new Start(OptionalDouble.empty(), OptionalDouble.empty(), Optional.empty());
 
     /** Checks the bounds. */
     public Start {
@@ -29,6 +33,7 @@ public record Start(OptionalDouble temperatureC, OptionalDouble humidityPct) {
      * @return the start
      */
     public static Start at(double temperatureC, double humidityPct) {
-        return new Start(OptionalDouble.of(temperatureC), OptionalDouble.of(humidityPct));
+        return new Start(
+                OptionalDouble.of(temperatureC), OptionalDouble.of(humidityPct), Optional.empty());
     }
 }

@@ -22,18 +22,10 @@ final class WarmUp {
     static double[] start(
             ChamberRun run, ChamberNetwork network, Accuracy accuracy, boolean plain) {
         double[] y = network.start(RunCompiler.startC(run), RunCompiler.startRatio(run, network));
-        if (!RunCompiler.startsOutdoors(run) || run.start().temperatureC().isPresent()) {
+        if (!wanted(run)) {
             return y;
         }
-        ChamberRun before = firstDayRepeated(run);
-        ChamberNetwork empty = RunCompiler.network(before, plain);
-        double[] warm =
-                empty.start(RunCompiler.startC(before), RunCompiler.startRatio(before, empty));
-        ChamberRunner runner = new ChamberRunner(before, empty, warm, accuracy);
-        runner.run(Progress.SILENT);
-        // Faces and structure come first in the state, coolers and lots after them; before the run
-        // only coolers that are part of a face were there.
-        System.arraycopy(warm, 0, y, 0, warm.length);
+        run.start().warmed().orElseGet(() -> warmed(run, accuracy, plain)).into(y);
         run.start()
                 .humidityPct()
                 .ifPresent(
@@ -46,6 +38,19 @@ final class WarmUp {
                                     y);
                         });
         return y;
+    }
+
+    static Warmed warmed(ChamberRun run, Accuracy accuracy, boolean plain) {
+        ChamberRun before = firstDayRepeated(run);
+        ChamberNetwork empty = RunCompiler.network(before, plain);
+        double[] warm =
+                empty.start(RunCompiler.startC(before), RunCompiler.startRatio(before, empty));
+        new ChamberRunner(before, empty, warm, accuracy).run(Progress.SILENT);
+        return new Warmed(warm);
+    }
+
+    static boolean wanted(ChamberRun run) {
+        return RunCompiler.startsOutdoors(run) && run.start().temperatureC().isEmpty();
     }
 
     private static ChamberRun firstDayRepeated(ChamberRun run) {

@@ -34,7 +34,7 @@ public final class HistoryLegs {
             double days) {
         Require.that(untilS > history.timeS(0), "a history is cut after its start, not " + untilS);
         Require.that(days * Timeline.DAY_S > CHANGE_S, "a further leg lasts over an hour");
-        LotHistory.Builder joined = new LotHistory.Builder();
+        LotHistory.Builder joined = new LotHistory.Builder(history.size() + 3);
         copyUntil(history, untilS, joined);
         for (double t : new double[] {untilS + CHANGE_S, untilS + days * Timeline.DAY_S}) {
             joined.add(

@@ -1,5 +1,6 @@
 package org.wardon.keeping;
 
+import java.util.Arrays;
 import org.wardon.air.Timeline;
 import org.wardon.lots.LotHistory;
 
@@ -9,6 +10,9 @@ import org.wardon.lots.LotHistory;
  */
 final class Track {
     private static final double PANEL_K = 1;
+
+    /** Over so small a change a rate runs straight: of Q10 5 to 1 in 7000. */
+    private static final double STRAIGHT_K = 0.25;
 
     private final double[] timeS;
     private final double[] used;
@@ -55,7 +59,11 @@ final class Track {
             LotHistory history, Wear wear, int i, double before, double after) {
         double meanK = Math.abs(history.meanC(i) - history.meanC(i - 1));
         double skinK = Math.abs(history.surfaceC(i) - history.surfaceC(i - 1));
-        int panels = (int) Math.max(1, Math.ceil(Math.max(meanK, skinK) / PANEL_K));
+        double mostK = Math.max(meanK, skinK);
+        if (mostK < STRAIGHT_K) {
+            return 0.5 * (before + after);
+        }
+        int panels = (int) Math.ceil(mostK / PANEL_K);
         double sum = 0;
         double left = before;
         for (int p = 1; p <= panels; p++) {
@@ -99,10 +107,8 @@ final class Track {
         if (atS >= timeS[last]) {
             return used[last];
         }
-        int i = 0;
-        while (timeS[i + 1] < atS) {
-            i++;
-        }
+        int found = Arrays.binarySearch(timeS, atS);
+        int i = found >= 0 ? found : -found - 2;
         return between(used[i], used[i + 1], (atS - timeS[i]) / (timeS[i + 1] - timeS[i]));
     }
 

@@ -31,6 +31,18 @@ public final class LotHistory {
         massKg = b.massKnown ? Optional.of(Arrays.copyOf(b.massKg, n)) : Optional.empty();
     }
 
+    /** The same samples with other ethylene; what never changes is shared, not copied. */
+    private LotHistory(LotHistory same, double[] ppm) {
+        timeS = same.timeS;
+        meanC = same.meanC;
+        surfaceC = same.surfaceC;
+        coldestC = same.coldestC;
+        humidity = same.humidity;
+        ethylenePpm = ppm;
+        wet = same.wet;
+        massKg = same.massKg;
+    }
+
     /**
      * Returns the history of a lot held in one condition.
      *
@@ -163,14 +175,7 @@ public final class LotHistory {
      */
     public LotHistory withEthylene(double[] ppm) {
         Require.that(ppm.length == size(), "one ethylene value a sample is needed");
-        Builder b = new Builder();
-        for (int i = 0; i < size(); i++) {
-            b.add(timeS[i], meanC[i], surfaceC[i], coldestC[i], humidity[i], ppm[i], wet[i]);
-            if (massKg.isPresent()) {
-                b.mass(massKg.get()[i]);
-            }
-        }
-        return b.build();
+        return new LotHistory(this, ppm.clone());
     }
 
     /**
@@ -219,19 +224,37 @@ public final class LotHistory {
 
     /** Collects samples in order of time. */
     public static final class Builder {
-        private double[] timeS = new double[64];
-        private double[] meanC = new double[64];
-        private double[] surfaceC = new double[64];
-        private double[] coldestC = new double[64];
-        private double[] humidity = new double[64];
-        private double[] ethylenePpm = new double[64];
-        private double[] massKg = new double[64];
-        private boolean[] wet = new boolean[64];
+        private double[] timeS;
+        private double[] meanC;
+        private double[] surfaceC;
+        private double[] coldestC;
+        private double[] humidity;
+        private double[] ethylenePpm;
+        private double[] massKg;
+        private boolean[] wet;
         private boolean massKnown;
         private int size;
 
         /** Starts empty. */
-        public Builder() {}
+        public Builder() {
+            this(64);
+        }
+
+        /**
+         * Starts empty with room.
+         *
+         * @param samples samples expected, at least 1; more are taken too
+         */
+        public Builder(int samples) {
+            timeS = new double[samples];
+            meanC = new double[samples];
+            surfaceC = new double[samples];
+            coldestC = new double[samples];
+            humidity = new double[samples];
+            ethylenePpm = new double[samples];
+            massKg = new double[samples];
+            wet = new boolean[samples];
+        }
 
         /**
          * Adds a sample.
@@ -253,9 +276,9 @@ public final class LotHistory {
                 double humidityFraction,
                 double ethylene,
                 boolean isWet) {
-            Require.that(
-                    size == 0 || atS > timeS[size - 1],
-                    "history times must rise, found " + atS + " s");
+            if (size > 0 && !(atS > timeS[size - 1])) {
+                throw new IllegalArgumentException("history times must rise, found " + atS + " s");
+            }
             if (size == timeS.length) {
                 grow();
             }

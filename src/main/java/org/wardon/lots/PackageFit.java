@@ -30,6 +30,12 @@ public final class PackageFit {
 
     private static final double LEAST_W_KG_K = 1e-5;
 
+    private static final int SECANTS = 20;
+    private static final double EXACT = 1e-8;
+
+    /** As much left as a share can be told from all of it. */
+    private static final double ALL_LEFT = 1 - 1e-12;
+
     private PackageFit() {}
 
     /**
@@ -52,7 +58,11 @@ public final class PackageFit {
                 leftAfter(halfCoolingS, item, shells, inside.packing(film, open)) <= 0.5;
         DoubleFunction<Packing> packing =
                 openSuffices ? g -> inside.packing(film, g) : g -> inside.packing(g, open);
-        double fitted = fit(g -> leftAfter(halfCoolingS, item, shells, packing.apply(g)), open);
+        double fitted =
+                fit(
+                        g -> leftAfter(halfCoolingS, item, shells, packing.apply(g)),
+                        open,
+                        item.specificHeatJkgK() / halfCoolingS);
         return new WithReasons<>(packing.apply(fitted), List.of(), false);
     }
 
@@ -131,8 +141,39 @@ public final class PackageFit {
         return new PackageCooling(item, shells, packing).mean(timeS);
     }
 
-    /** The conductance at which half is left; the better it conducts, the less is left. */
-    private static double fit(DoubleUnaryOperator left, double open) {
+    /**
+     * The conductance at which half is left; the better it conducts, the less is left. In a body of
+     * one temperature the time is straight in the resistance, so that a secant in those two is
+     * nearly there at its first step.
+     */
+    private static double fit(DoubleUnaryOperator left, double open, double slopeGuess) {
+        double resistance = 1 / open;
+        double miss = miss(left, resistance);
+        double next = within(resistance - miss / slopeGuess, open);
+        for (int i = 0; i < SECANTS; i++) {
+            double nextMiss = miss(left, next);
+            double slope = (nextMiss - miss) / (next - resistance);
+            resistance = next;
+            miss = nextMiss;
+            next = within(resistance - miss / slope, open);
+            if (Math.abs(next - resistance) <= EXACT * resistance) {
+                return 1 / next;
+            }
+        }
+        return searched(left, open);
+    }
+
+    private static double within(double resistance, double open) {
+        return Math.min(1 / LEAST_W_KG_K, Math.max(1 / open, resistance));
+    }
+
+    /** Time constant over time, less what it is where half is left; rises with the resistance. */
+    private static double miss(DoubleUnaryOperator left, double resistance) {
+        double share = Math.min(left.applyAsDouble(1 / resistance), ALL_LEFT);
+        return -1 / Math.log(share) - 1 / Math.log(2);
+    }
+
+    private static double searched(DoubleUnaryOperator left, double open) {
         double logarithm =
                 new BrentSolver(1e-9, 1e-6)
                         .solve(

@@ -18,6 +18,7 @@ import org.wardon.errors.Require;
  * @param outages hours without power, in order, none overlapping
  * @param humidifierKgH most water a humidifier adds, kg/h; 0 for none
  * @param heaterW a heater against cold nights, W; 0 for none
+ * @param ethyleneScrub a scrubber of ethylene, where there is one
  * @param starts the air it starts with, where the plan says
  * @param corrections what a fit found
  */
@@ -30,6 +31,7 @@ public record ChamberPlan(
         List<OutagePlan> outages,
         double humidifierKgH,
         double heaterW,
+        Optional<EthyleneScrub> ethyleneScrub,
         Optional<StartAir> starts,
         Corrections corrections) {
     /** Copies the lists and checks the bounds. */

@@ -175,6 +175,9 @@ public final class Defaults {
     /** Ethylene in a market building. */
     public static final Default MARKET_ETHYLENE_PPM = new Default(0.06, "ppm", ASSUMPTION);
 
+    /** Share of the ethylene a scrubber takes at a pass. */
+    public static final Default SCRUB_EFFICIENCY_PCT = new Default(80, "%", ASSUMPTION);
+
     /** The package of a lot whose package nobody gave: any package in a room with fans. */
     public static final String PACKAGE = "room-cooling-any";
 

@@ -11,10 +11,8 @@ import java.sql.SQLException;
 import java.sql.Statement;
 import java.util.ArrayList;
 import java.util.HashMap;
-import java.util.HashSet;
 import java.util.List;
 import java.util.Map;
-import java.util.Set;
 import java.util.function.Function;
 import org.sqlite.SQLiteConfig;
 import org.sqlite.SQLiteConnection;
@@ -92,10 +90,10 @@ final class ReferenceDatabase implements AutoCloseable {
         return values;
     }
 
-    private static Set<String> columns(ResultSetMetaData answer) throws SQLException {
-        Set<String> columns = new HashSet<>();
+    private static Map<String, Integer> columns(ResultSetMetaData answer) throws SQLException {
+        Map<String, Integer> columns = new HashMap<>();
         for (int i = 1; i <= answer.getColumnCount(); i++) {
-            columns.add(answer.getColumnLabel(i));
+            columns.put(answer.getColumnLabel(i), i);
         }
         return columns;
     }

@@ -6,7 +6,6 @@ import java.util.Arrays;
 import java.util.Map;
 import java.util.Optional;
 import java.util.OptionalDouble;
-import java.util.Set;
 import java.util.function.Function;
 import java.util.regex.Matcher;
 import java.util.regex.Pattern;
@@ -29,17 +28,26 @@ final class Row {
     private static final Pattern NUMBER = Pattern.compile("-?[0-9]+(\\.[0-9]+)?");
 
     private final ResultSet results;
-    private final Set<String> columns;
+    private final Map<String, Integer> columns;
 
-    Row(ResultSet results, Set<String> columns) {
+    Row(ResultSet results, Map<String, Integer> columns) {
         this.results = results;
         this.columns = columns;
+    }
+
+    /** Where a column stands; the driver's own search by name costs more than the cell. */
+    private int place(String column) {
+        Integer place = columns.get(column);
+        if (place == null) {
+            throw new IllegalStateException("no column " + column + " in " + columns.keySet());
+        }
+        return place;
     }
 
     /** Returns the text; an empty cell is an empty text. */
     String text(String column) {
         try {
-            String text = results.getString(column);
+            String text = results.getString(place(column));
             return text == null ? "" : text;
         } catch (SQLException e) {
             throw new IllegalStateException("no text in column " + column, e);
@@ -48,7 +56,7 @@ final class Row {
 
     OptionalDouble number(String column) {
         try {
-            double value = results.getDouble(column);
+            double value = results.getDouble(place(column));
             return results.wasNull() ? OptionalDouble.empty() : OptionalDouble.of(value);
         } catch (SQLException e) {
             throw new IllegalStateException("no number in column " + column, e);
@@ -78,7 +86,7 @@ final class Row {
      * Returns the source; a row without one rests on the practice of the trade or an assumption.
      */
     String source() {
-        if (columns.contains("source_id") && !text("source_id").isEmpty()) {
+        if (columns.containsKey("source_id") && !text("source_id").isEmpty()) {
             return text("source_id");
         }
         return evidence() == Evidence.PRACTICE ? PRACTICE : ASSUMPTION;

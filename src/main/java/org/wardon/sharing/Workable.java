@@ -1,21 +1,15 @@
 package org.wardon.sharing;
 
-import java.util.ArrayList;
 import java.util.Arrays;
 import java.util.List;
 import org.wardon.keeping.Draw;
-import org.wardon.keeping.Fate;
 import org.wardon.keeping.KeepingModel;
-import org.wardon.keeping.Mechanism;
-import org.wardon.keeping.Paces;
 
 /**
  * The workable settings of one lot: how good each temperature and humidity is for its wanted days
  * and market leg, by the keeping model, ethylene left aside.
  */
 public final class Workable {
-    private static final double MARKET_HUMIDITY = 0.75;
-
     private final Wish wish;
     private final KeepingModel model;
     private final List<Draw> draws;
@@ -63,30 +57,25 @@ public final class Workable {
     }
 
     private void fill() {
-        List<Paces> paces = new ArrayList<>();
-        for (Draw draw : draws) {
-            paces.add(model.paces(draw));
-        }
+        List<DaysByDraw> drawn = draws.stream().map(d -> new DaysByDraw(model, wish, d)).toList();
         double[] days = new double[draws.size()];
+        double[] anyHumidity = new double[draws.size()];
         for (int t = 0; t < Settings.TEMPERATURES; t++) {
             double temperatureC = Settings.temperatureC(t);
             int injured = 0;
-            double[] byTemperature = new double[draws.size()];
             for (int d = 0; d < days.length; d++) {
-                byTemperature[d] = days(paces.get(d), temperatureC, 1, false);
-                injured +=
-                        daysBy(paces.get(d), Mechanism.CHILLING, temperatureC, 1) < wish.wholeDays()
-                                ? 1
-                                : 0;
+                anyHumidity[d] = drawn.get(d).atAnyHumidity(temperatureC);
+                injured += drawn.get(d).chilledAfter(temperatureC) < wish.wholeDays() ? 1 : 0;
             }
             chilled[t] = (double) injured / days.length;
             for (int h = 0; h < Settings.HUMIDITIES; h++) {
                 double humidity = Settings.humidityPct(h) / 100;
                 for (int d = 0; d < days.length; d++) {
+                    double least = anyHumidity[d];
                     days[d] =
-                            Math.min(
-                                    byTemperature[d],
-                                    days(paces.get(d), temperatureC, humidity, true));
+                            least > 0
+                                    ? Math.min(least, drawn.get(d).at(temperatureC, humidity))
+                                    : 0;
                 }
                 place(t, h, days);
             }
@@ -144,37 +133,6 @@ public final class Workable {
         int below = (int) place;
         int above = Math.min(below + 1, sorted.length - 1);
         return sorted[below] + (place - below) * (sorted[above] - sorted[below]);
-    }
-
-    /** Days by the mechanisms that ask for humidity, or by those that do not. */
-    private double days(Paces pace, double temperatureC, double humidity, boolean ofHumidity) {
-        double least = Fate.MOST_DAYS;
-        for (Mechanism mechanism : pace.mechanisms()) {
-            boolean asks = mechanism == Mechanism.WATER_LOSS || mechanism == Mechanism.DECAY;
-            if (asks == ofHumidity) {
-                least = Math.min(least, daysBy(pace, mechanism, temperatureC, humidity));
-            }
-        }
-        return least;
-    }
-
-    /** Days in the chamber so that the market leg still fits, and the market leg. */
-    private double daysBy(Paces pace, Mechanism mechanism, double temperatureC, double humidity) {
-        if (!pace.mechanisms().contains(mechanism)) {
-            return Fate.MOST_DAYS;
-        }
-        double perDay = pace.perDay(mechanism, temperatureC, humidity, 0);
-        double left = 1 - pace.start(mechanism);
-        double market = 0;
-        if (wish.marketC().isPresent()) {
-            market = wish.marketDays();
-            double marketC = wish.marketC().getAsDouble();
-            left -= market * pace.perDay(mechanism, marketC, MARKET_HUMIDITY, 0);
-        }
-        if (left <= 0) {
-            return 0;
-        }
-        return perDay > 0 ? Math.min(Fate.MOST_DAYS, left / perDay + market) : Fate.MOST_DAYS;
     }
 
     private boolean clearOfFreezing(int t) {

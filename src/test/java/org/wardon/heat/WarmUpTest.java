@@ -53,7 +53,8 @@ class WarmUpTest {
                         .withStart(
                                 new Start(
                                         java.util.OptionalDouble.empty(),
-                                        java.util.OptionalDouble.of(30)));
+                                        java.util.OptionalDouble.of(30),
+                                        java.util.Optional.empty()));
         Course course = HeatModel.run(run, Progress.SILENT);
         assertEquals(0.30, course.hours().humidityFraction(0), 0.03);
     }

@@ -45,7 +45,7 @@ class AllCommoditiesTest {
 
     private static WithReasons<Lot> lot(Commodity commodity, PackageKind kind, double share) {
         Shares shares = new Shares(share, share, share);
-        return Lots.of("L1", commodity, 1000, kind, Ripeness.UNKNOWN, classes, shares);
+        return LotRange.of("L1", commodity, 1000, kind, Ripeness.UNKNOWN, classes).at(shares);
     }
 
     @ParameterizedTest(name = "share {0} of every range")

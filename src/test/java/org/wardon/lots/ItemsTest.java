@@ -93,7 +93,8 @@ class ItemsTest {
                         Optional.empty(),
                         true);
         WithReasons<Lot> found =
-                Lots.of("A1", Crops.apple(), 500, carton, Ripeness.UNKNOWN, CLASSES, Shares.MIDDLE);
+                LotRange.of("A1", Crops.apple(), 500, carton, Ripeness.UNKNOWN, CLASSES)
+                        .at(Shares.MIDDLE);
         Lot lot = found.value();
         assertEquals(
                 List.of(

@@ -107,6 +107,9 @@ final class Actions {
         Optional<Candidate> move = Optional.empty();
         double price = sheet.plan().market().pricePerKg() * sheet.plan().massKg();
         double soundHere = fates.shareSoundWhenSold(sheet.soldS());
+        if (soundHere + WORTH_MOVING >= 1) {
+            return;
+        }
         for (ChamberPlan other : outcome.model().plan().chambers()) {
             if (other.id().equals(here) || harms(sheet, other)) {
                 continue;

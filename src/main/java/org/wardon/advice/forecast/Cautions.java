@@ -50,6 +50,7 @@ final class Cautions {
             new ColdBlast(outcome, chamber).all().forEach(c -> add(c.level(), c.reason()));
         }
         new Carried(outcome).all().forEach(c -> add(c.level(), c.reason()));
+        GasCautions.ofScrubbers(outcome).forEach(c -> add(c.level(), c.reason()));
         outcome.model().sheets().forEach(this::lot);
         weather(plan);
         defaults(plan);

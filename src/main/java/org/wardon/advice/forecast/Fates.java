@@ -5,6 +5,7 @@ import java.util.Arrays;
 import java.util.HashMap;
 import java.util.List;
 import java.util.Map;
+import java.util.function.ToDoubleFunction;
 import org.wardon.air.Timeline;
 import org.wardon.cooling.Outage;
 import org.wardon.heat.AirSeries;
@@ -19,6 +20,7 @@ import org.wardon.keeping.StoreEthylene;
 import org.wardon.keeping.Window;
 import org.wardon.keeping.ethylene.ChamberAir;
 import org.wardon.lots.LotHistory;
+import org.wardon.plan.ChamberPlan;
 import org.wardon.plan.EthyleneAround;
 
 /** Follows the lots of a store through one draw: staying, sold, and without a chamber. */
@@ -52,18 +54,31 @@ final class Fates {
 
     /** Ethylene of all chambers in a draw, and with it the completed histories of the lots. */
     StoreEthylene ethylene(Map<String, Course> courses, Draw draw) {
+        return ethylene(courses, draw, true);
+    }
+
+    /** Ethylene of all chambers in the middle draw as if no scrubber ran. */
+    StoreEthylene unscrubbed(Map<String, Course> courses) {
+        return ethylene(courses, Draw.MEDIAN, false);
+    }
+
+    private StoreEthylene ethylene(Map<String, Course> courses, Draw draw, boolean scrubbed) {
         Map<String, ChamberAir> air = new HashMap<>();
-        courses.forEach((id, course) -> air.put(id, air(course.hours())));
+        courses.forEach((id, course) -> air.put(id, air(id, course.hours(), scrubbed)));
         return StoreEthylene.of(air, givers(courses), around.outdoorPpm(), draw);
     }
 
     /** Follows every lot that has a history. */
-    Map<String, Three> follow(Map<String, LotHistory> histories, Draw draw, double durationS) {
+    Map<String, Three> follow(
+            Map<String, LotHistory> histories, Draw draw, ToDoubleFunction<String> withoutS) {
         Map<String, Three> fates = new HashMap<>();
         for (LotSheet sheet : model.sheets()) {
             LotHistory history = histories.get(sheet.id());
             if (history != null) {
-                LotHistory alone = clean(model.without(sheet, draw, durationS).history());
+                LotHistory alone =
+                        clean(
+                                model.without(sheet, draw, withoutS.applyAsDouble(sheet.id()))
+                                        .history());
                 fates.put(sheet.id(), three(sheet, history, alone, draw));
             }
         }
@@ -71,11 +86,12 @@ final class Fates {
     }
 
     /** Follows every lot and keeps the ends only, each before the next is begun. */
-    Map<String, Three> ends(Map<String, LotHistory> histories, Draw draw, double durationS) {
+    Map<String, Three> ends(
+            Map<String, LotHistory> histories, Draw draw, ToDoubleFunction<String> withoutS) {
         Map<String, Three> ends = new HashMap<>();
         histories.forEach(
                 (id, history) ->
-                        follow(Map.of(id, history), draw, durationS)
+                        follow(Map.of(id, history), draw, withoutS)
                                 .forEach((lot, three) -> ends.put(lot, three.brief())));
         return ends;
     }
@@ -86,20 +102,23 @@ final class Fates {
         return new Three(staying, sold(sheet, history, staying, draw), alone);
     }
 
-    /** The fate of a lot in another air than that of its chamber. */
-    Fate inOtherAir(LotSheet sheet, LotHistory history, double ppm, Draw draw) {
+    /** History of a lot in another air than that of its chamber, market leg included. */
+    LotHistory inOtherAir(LotSheet sheet, LotHistory history, double ppm) {
         double[] felt = new double[history.size()];
         Arrays.fill(felt, ppm);
         LotHistory there = history.withEthylene(felt);
-        return sold(sheet, there, sheet.model().follow(there, draw), draw);
+        return isSold(sheet, there) ? withMarket(sheet, there) : there;
+    }
+
+    private static boolean isSold(LotSheet sheet, LotHistory history) {
+        return sheet.marketDays() >= SHORTEST_LEG_DAYS
+                && sheet.clock().leavesS() > history.timeS(0);
     }
 
     private Fate sold(LotSheet sheet, LotHistory history, Fate staying, Draw draw) {
-        double leavesS = sheet.clock().leavesS();
-        if (sheet.marketDays() < SHORTEST_LEG_DAYS || leavesS <= history.timeS(0)) {
-            return staying;
-        }
-        return sheet.model().follow(withMarket(sheet, history), draw);
+        return isSold(sheet, history)
+                ? sheet.model().follow(withMarket(sheet, history), draw)
+                : staying;
     }
 
     /** History of a lot up to its leaving, carried on through the market leg. */
@@ -195,7 +214,7 @@ final class Fates {
     }
 
     /** Exchange of a run as keeping reads it: each value holds from its time on. */
-    private static ChamberAir air(Hours hours) {
+    private ChamberAir air(String chamberId, Hours hours, boolean scrubbed) {
         int lead = hours.atS(0) > 0 ? 1 : 0;
         int n = hours.size() + lead;
         double[] time = new double[n];
@@ -207,6 +226,27 @@ final class Fates {
             free[i] = hours.freeM3(Math.max(0, row));
             exchange[i] = hours.exchangeM3s(Math.min(row + 1, hours.size() - 1));
         }
-        return new ChamberAir(time, exchange, free);
+        return scrubbed
+                ? new ChamberAir(time, exchange, free, cleaned(chamberId, time))
+                : new ChamberAir(time, exchange, free);
+    }
+
+    /** Air a scrubber cleans from each time to the next, less what falls into outages, m3/s. */
+    private double[] cleaned(String chamberId, double[] timeS) {
+        double[] cleaned = new double[timeS.length];
+        ChamberPlan chamber = model.plan().getChamber(chamberId);
+        if (chamber.ethyleneScrub().isPresent()) {
+            List<Outage> outages = model.outages(chamber);
+            double most = chamber.ethyleneScrub().get().cleanedM3s();
+            for (int i = 0; i + 1 < timeS.length; i++) {
+                double out = 0;
+                for (Outage outage : outages) {
+                    double from = Math.max(timeS[i], outage.startS());
+                    out += Math.max(0, Math.min(timeS[i + 1], outage.endS()) - from);
+                }
+                cleaned[i] = most * (1 - out / (timeS[i + 1] - timeS[i]));
+            }
+        }
+        return cleaned;
     }
 }

@@ -6,6 +6,7 @@ import java.util.LinkedHashMap;
 import java.util.List;
 import java.util.Locale;
 import java.util.Map;
+import java.util.OptionalDouble;
 import java.util.stream.Stream;
 import org.wardon.advice.wording.Words;
 import org.wardon.air.Weather;
@@ -52,7 +53,7 @@ public final class ForecastAdvice {
                         StoreRun.MOST_BEYOND_DAYS);
         StoreModel open = model(asked, weather);
         SimplePlacing.Placed placed = new SimplePlacing(open).place();
-        StoreModel model = placed.told().isEmpty() ? open : model(placed.plan(), weather);
+        StoreModel model = placed.told().isEmpty() ? open : open.placed(placed.plan());
         StoreOutcome outcome = new StoreRun(model).run(progress);
         return together(outcome, placed.told());
     }
@@ -62,16 +63,15 @@ public final class ForecastAdvice {
     }
 
     private StoreAdvice together(StoreOutcome outcome, List<Caution> placed) {
+        List<Judged> judged =
+                outcome.model().plan().chambers().parallelStream()
+                        .map(chamber -> judged(chamber, outcome))
+                        .toList();
         Map<String, ChamberForecast> chambers = new LinkedHashMap<>();
         Map<String, List<Reason>> whyNot = new LinkedHashMap<>();
-        for (ChamberPlan chamber : outcome.model().plan().chambers()) {
-            Holding holding = Holding.of(chamber, outcome);
-            Course ideal = outcome.model().ideal(chamber, outcome.horizonS(), outcome.courses());
-            ChamberFigures figures = new ChamberFigures(chamber, outcome);
-            chambers.put(
-                    chamber.id(),
-                    figures.forecast(holding, ideal, new Intake(outcome, chamber).kgPerDay()));
-            whyNot.put(chamber.id(), holding.reasons());
+        for (Judged chamber : judged) {
+            chambers.put(chamber.forecast.id(), chamber.forecast);
+            whyNot.put(chamber.forecast.id(), chamber.whyNot);
         }
         List<LotForecast> lots = lots(outcome);
         double kept = lots.stream().mapToDouble(LotForecast::valueKept).sum();
@@ -86,6 +86,18 @@ public final class ForecastAdvice {
                         warnings(outcome, placed),
                         new Actions(outcome, chambers, words).all());
         return new StoreAdvice(outcome, forecast, whyNot);
+    }
+
+    /** A chamber's figures, and why it does not hold where it does not. */
+    private record Judged(ChamberForecast forecast, List<Reason> whyNot) {}
+
+    private static Judged judged(ChamberPlan chamber, StoreOutcome outcome) {
+        Holding holding = Holding.of(chamber, outcome);
+        Course ideal = outcome.model().ideal(chamber, outcome.horizonS(), outcome.courses());
+        OptionalDouble intake = new Intake(outcome, chamber).kgPerDay();
+        return new Judged(
+                new ChamberFigures(chamber, outcome).forecast(holding, ideal, intake),
+                holding.reasons());
     }
 
     private static List<LotForecast> lots(StoreOutcome outcome) {

@@ -8,6 +8,8 @@ import java.util.function.Function;
 import org.wardon.air.Timeline;
 import org.wardon.heat.Course;
 import org.wardon.heat.Hours;
+import org.wardon.keeping.StoreEthylene;
+import org.wardon.plan.ChamberPlan;
 import org.wardon.produce.Caution;
 import org.wardon.produce.Caution.Level;
 import org.wardon.produce.Fact;
@@ -88,6 +90,33 @@ final class GasCautions {
                                     "OSHA-1910",
                                     highest,
                                     opening)));
+        }
+        return told;
+    }
+
+    /** What the scrubbers of a store do. */
+    static List<Caution> ofScrubbers(StoreOutcome outcome) {
+        List<ChamberPlan> scrubbed =
+                outcome.model().plan().chambers().stream()
+                        .filter(chamber -> chamber.ethyleneScrub().isPresent())
+                        .toList();
+        if (scrubbed.isEmpty()) {
+            return List.of();
+        }
+        StoreEthylene open = new Fates(outcome.model()).unscrubbed(outcome.courses());
+        List<Caution> told = new ArrayList<>();
+        for (ChamberPlan chamber : scrubbed) {
+            double cleaned = chamber.ethyleneScrub().orElseThrow().cleanedM3s() * 3_600;
+            told.add(
+                    new Caution(
+                            Level.NOTE,
+                            Reason.about(
+                                    "scrubs-ethylene",
+                                    chamber.id(),
+                                    "own",
+                                    Argument.of(cleaned, "m3/h"),
+                                    Argument.of(outcome.ethylene(chamber.id()).highestPpm(), "ppm"),
+                                    Argument.of(open.chamber(chamber.id()).highestPpm(), "ppm"))));
         }
         return told;
     }

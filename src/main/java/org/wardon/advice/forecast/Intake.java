@@ -130,7 +130,7 @@ final class Intake {
                 .withOutages(List.of())
                 .withStays(stays)
                 .withDurationS(durationS)
-                .withDoorMode(DoorMode.AVERAGED)
+                .withDoorMode(DoorMode.SKETCHED)
                 .withControlMode(ControlMode.MODULATING);
     }
 

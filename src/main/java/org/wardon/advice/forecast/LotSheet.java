@@ -8,13 +8,9 @@ import org.wardon.heat.Stay;
 import org.wardon.keeping.Draw;
 import org.wardon.keeping.KeepingModel;
 import org.wardon.keeping.KeptLot;
-import org.wardon.lots.ClassValues;
 import org.wardon.lots.Lot;
-import org.wardon.lots.Lots;
-import org.wardon.lots.RespirationLaw;
-import org.wardon.lots.Respirations;
+import org.wardon.lots.LotRange;
 import org.wardon.lots.Shares;
-import org.wardon.lots.WithReasons;
 import org.wardon.plan.LotPlan;
 import org.wardon.produce.Commodity;
 import org.wardon.produce.PackageKind;
@@ -26,7 +22,7 @@ import org.wardon.produce.Reason;
  * @param plan the lot as planned
  * @param commodity what it is
  * @param kind its package
- * @param classes class values for what nobody printed
+ * @param range its body in the ranges of what is printed
  * @param clock arrival and leaving in seconds of the run
  * @param model how it keeps
  */
@@ -34,7 +30,7 @@ record LotSheet(
         LotPlan plan,
         Commodity commodity,
         PackageKind kind,
-        ClassValues classes,
+        LotRange range,
         Clock clock,
         KeepingModel model) {
     /**
@@ -124,25 +120,16 @@ record LotSheet(
 
     /** What the body of the lot rests on. */
     List<Reason> restsOn() {
-        return built(Shares.MIDDLE).restsOn();
+        return range.at(Shares.MIDDLE).restsOn();
     }
 
     private Lot body(Draw draw) {
         Shares shares = new Shares(draw.respiration(), draw.transpiration(), draw.packaging());
-        Lot lot = built(shares).value();
-        return model.uncured()
-                ? Respirations.uncured(commodity, draw.respiration())
-                        .map(raw -> breathing(lot, raw.value()))
-                        .orElse(lot)
-                : lot;
+        return range.at(shares).value();
     }
 
-    private WithReasons<Lot> built(Shares shares) {
-        return Lots.of(
-                id(), commodity, plan.massKg(), kind, plan.atDoor().ripeness(), classes, shares);
-    }
-
-    private static Lot breathing(Lot lot, RespirationLaw law) {
-        return new Lot(lot.id(), lot.massKg(), lot.item(), lot.packing(), law, lot.transpiration());
+    /** The same lot planned otherwise: in another chamber, say. */
+    LotSheet planned(LotPlan otherwise) {
+        return new LotSheet(otherwise, commodity, kind, range, clock, model);
     }
 }

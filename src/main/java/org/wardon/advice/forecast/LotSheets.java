@@ -1,7 +1,6 @@
 package org.wardon.advice.forecast;
 
 import java.time.LocalDateTime;
-import java.util.ArrayList;
 import java.util.List;
 import java.util.Optional;
 import java.util.OptionalDouble;
@@ -15,7 +14,7 @@ import org.wardon.keeping.KnownLife;
 import org.wardon.keeping.LotAtDoor;
 import org.wardon.keeping.Purpose;
 import org.wardon.lots.ClassValues;
-import org.wardon.lots.Lots;
+import org.wardon.lots.LotRange;
 import org.wardon.lots.Shares;
 import org.wardon.lots.StackCooling;
 import org.wardon.plan.AtDoor;
@@ -53,31 +52,21 @@ final class LotSheets {
     }
 
     List<LotSheet> all() {
-        List<LotSheet> sheets = new ArrayList<>();
-        for (LotPlan lot : plan.lots()) {
-            sheets.add(sheet(lot));
-        }
-        return List.copyOf(sheets);
+        return plan.lots().parallelStream().map(this::sheet).toList();
     }
 
     private LotSheet sheet(LotPlan lot) {
         Commodity commodity = book.get(lot.commodity());
-        double vapour =
-                Lots.of(
-                                lot.id(),
-                                commodity,
-                                lot.massKg(),
-                                kind(lot.packed()),
-                                lot.atDoor().ripeness(),
-                                classes,
-                                Shares.MIDDLE)
-                        .value()
-                        .packing()
-                        .vapourKgPerKgSPa();
+        PackageKind kind = kind(lot.packed());
+        LotRange range =
+                LotRange.of(
+                        lot.id(), commodity, lot.massKg(), kind, lot.atDoor().ripeness(), classes);
+        double vapour = range.at(Shares.MIDDLE).value().packing().vapourKgPerKgSPa();
         KeptLot kept =
                 KeptLot.inOpenPackage(lot.id(), commodity, door(lot), classes).packedIn(vapour);
-        return new LotSheet(
-                lot, commodity, kind(lot.packed()), classes, clock(lot), KeepingModel.of(kept));
+        KeepingModel model = KeepingModel.of(kept);
+        LotRange breathing = model.uncured() ? range.uncured() : range;
+        return new LotSheet(lot, commodity, kind, breathing, clock(lot), model);
     }
 
     private LotSheet.Clock clock(LotPlan lot) {

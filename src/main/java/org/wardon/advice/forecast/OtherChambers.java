@@ -1,6 +1,5 @@
 package org.wardon.advice.forecast;
 
-import java.util.ArrayList;
 import java.util.List;
 import java.util.Map;
 import org.wardon.heat.Course;
@@ -51,10 +50,11 @@ final class OtherChambers {
     There of(LotSheet sheet, Course chamber, ChamberEthylene level, double durationS) {
         LotHistory history = model.inAirOf(sheet, chamber, durationS).history();
         double ppm = meanPpm(level, history);
-        List<Fate> sold = new ArrayList<>();
-        for (Draw draw : draws) {
-            sold.add(fates.inOtherAir(sheet, history, ppm, draw).brief());
-        }
+        LotHistory there = fates.inOtherAir(sheet, history, ppm);
+        List<Fate> sold =
+                draws.parallelStream()
+                        .map(draw -> sheet.model().follow(there, draw).brief())
+                        .toList();
         return new There(Outlook.shareSound(sold, sheet.soldS()), massShare(sheet, history), sold);
     }
 

@@ -4,7 +4,10 @@ import java.util.HashMap;
 import java.util.LinkedHashMap;
 import java.util.List;
 import java.util.Map;
+import java.util.Optional;
 import java.util.OptionalDouble;
+import java.util.concurrent.ConcurrentHashMap;
+import java.util.function.ToDoubleFunction;
 import org.wardon.air.Timeline;
 import org.wardon.air.Weather;
 import org.wardon.cooling.Cooler;
@@ -26,6 +29,7 @@ import org.wardon.keeping.Draw;
 import org.wardon.lots.LotHistory;
 import org.wardon.plan.ChamberPlan;
 import org.wardon.plan.Corrections;
+import org.wardon.plan.LotPlan;
 import org.wardon.plan.StorePlan;
 import org.wardon.plan.WithoutChamber;
 
@@ -44,16 +48,31 @@ final class StoreModel {
     private final List<LotSheet> sheets;
     private final Timeline timeline;
     private final AirSeries withoutAir;
+    private final AirSeries sketchedAir;
+    private final Map<String, Start> warmed = new ConcurrentHashMap<>();
 
     StoreModel(StorePlan plan, Weather weather, List<LotSheet> sheets) {
         this.plan = plan;
         this.weather = weather;
         this.sheets = List.copyOf(sheets);
         this.timeline = plan.timeline();
-        this.withoutAir =
-                plan.without() instanceof WithoutChamber.Steady steady
-                        ? AirSeries.steady(steady.temperatureC(), steady.humidityPct() / 100)
-                        : AirSeries.outdoors(weather);
+        if (plan.without() instanceof WithoutChamber.Steady steady) {
+            withoutAir = AirSeries.steady(steady.temperatureC(), steady.humidityPct() / 100);
+            sketchedAir = withoutAir;
+        } else {
+            withoutAir = AirSeries.outdoors(weather);
+            sketchedAir = withoutAir.sketched();
+        }
+    }
+
+    /** The same store with its lots in the chambers of another plan. */
+    StoreModel placed(StorePlan otherwise) {
+        Map<String, LotPlan> lots = new HashMap<>();
+        otherwise.lots().forEach(lot -> lots.put(lot.id(), lot));
+        return new StoreModel(
+                otherwise,
+                weather,
+                sheets.stream().map(sheet -> sheet.planned(ById.get(lots, sheet.id()))).toList());
     }
 
     StorePlan plan() {
@@ -93,7 +112,7 @@ final class StoreModel {
                     airOf(
                             pass(
                                     Draw.MEDIAN,
-                                    durationS,
+                                    id -> durationS,
                                     air,
                                     DoorMode.AVERAGED,
                                     ControlMode.MODULATING));
@@ -105,21 +124,36 @@ final class StoreModel {
         }
         progress.at("forecast", 0.5);
         Map<String, Course> courses =
-                pass(Draw.MEDIAN, durationS, air, DoorMode.PULSES, ControlMode.AS_BUILT);
+                pass(Draw.MEDIAN, id -> durationS, air, DoorMode.PULSES, ControlMode.AS_BUILT);
         progress.at("forecast", 1);
         return courses;
     }
 
     /**
-     * Runs all chambers in one draw with averaged doors, in the neighbours' air of the plain run.
+     * Runs all chambers in one draw with averaged doors, each to its own end in seconds, in the
+     * neighbours' air of the plain run.
      */
-    Map<String, Course> drawn(Draw draw, double durationS, Map<String, Course> plain) {
-        return pass(draw, durationS, airOf(plain), DoorMode.AVERAGED, ControlMode.MODULATING);
+    Map<String, Course> drawn(Draw draw, ToDoubleFunction<String> endS, Map<String, Course> plain) {
+        return pass(draw, endS, airOf(plain), DoorMode.SKETCHED, ControlMode.MODULATING);
     }
 
     /** Runs all chambers with averaged doors, each neighbour taken to stand at its setting. */
     Map<String, Course> sketch(double durationS) {
-        return pass(Draw.MEDIAN, durationS, startAir(), DoorMode.AVERAGED, ControlMode.MODULATING);
+        return pass(
+                Draw.MEDIAN,
+                id -> durationS,
+                startAir(),
+                DoorMode.AVERAGED,
+                ControlMode.MODULATING);
+    }
+
+    /** Runs one chamber with averaged doors, in the neighbours' air of the plain run. */
+    Course sketch(ChamberPlan chamber, double durationS, Map<String, Course> plain) {
+        ChamberRun run =
+                asPlanned(chamber, durationS, plain)
+                        .withDoorMode(DoorMode.SKETCHED)
+                        .withControlMode(ControlMode.MODULATING);
+        return HeatModel.run(Averaged.of(run), Progress.SILENT);
     }
 
     /** Runs one chamber with the air held ideally at its setting: what it takes is the load. */
@@ -153,12 +187,12 @@ final class StoreModel {
 
     /** Runs one lot without a chamber in one draw. */
     LotCourse without(LotSheet sheet, Draw draw, double durationS) {
-        return inAir(sheet.stay(draw), withoutAir, durationS);
+        return inAir(sheet.stay(draw), sketchedAir, durationS);
     }
 
     /** Runs one lot in the air of a chamber that is there already. */
     LotCourse inAirOf(LotSheet sheet, Course chamber, double durationS) {
-        return inAir(sheet.stay(Draw.MEDIAN), series(chamber), durationS);
+        return inAir(sheet.stay(Draw.MEDIAN), series(chamber).sketched(), durationS);
     }
 
     /** Runs one visit in the blast of the cooler, from a temperature of the flesh on. */
@@ -183,20 +217,26 @@ final class StoreModel {
 
     private Map<String, Course> pass(
             Draw draw,
-            double durationS,
+            ToDoubleFunction<String> endS,
             Map<String, AirSeries> air,
             DoorMode door,
             ControlMode control) {
         List<ChamberRun> runs =
                 plan.chambers().stream()
-                        .map(chamber -> run(chamber, draw, durationS, air))
+                        .map(chamber -> run(chamber, draw, endS.applyAsDouble(chamber.id()), air))
                         .map(run -> run.withDoorMode(door).withControlMode(control))
-                        .map(run -> door == DoorMode.AVERAGED ? Averaged.of(run) : run)
+                        .map(run -> door == DoorMode.PULSES ? run : Averaged.of(run))
+                        .map(run -> door == DoorMode.SKETCHED ? run.withStart(warmed(run)) : run)
                         .toList();
         List<Course> ran = HeatModel.runTogether(runs);
         Map<String, Course> courses = new LinkedHashMap<>();
         ran.forEach(course -> courses.put(course.chamberId(), course));
         return courses;
+    }
+
+    /** All draws of a chamber start alike. */
+    private Start warmed(ChamberRun run) {
+        return warmed.computeIfAbsent(run.chamberId(), id -> HeatModel.warmed(run));
     }
 
     private ChamberRun run(
@@ -246,7 +286,12 @@ final class StoreModel {
 
     private static Start start(ChamberPlan chamber) {
         return chamber.starts()
-                .map(air -> new Start(OptionalDouble.of(air.temperatureC()), air.humidityPct()))
+                .map(
+                        air ->
+                                new Start(
+                                        OptionalDouble.of(air.temperatureC()),
+                                        air.humidityPct(),
+                                        Optional.empty()))
                 .orElse(Start.USUAL);
     }
 

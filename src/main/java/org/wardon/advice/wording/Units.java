@@ -13,6 +13,7 @@ public record Units(boolean fahrenheit, boolean pounds) {
     public static final Units METRIC = new Units(false, false);
 
     private static final double G_M2_PER_OZ_FT2 = 305.15;
+    private static final double M3_H_PER_FT3_MIN = 1.699;
     private static final double KG_PER_LB = 0.45359237;
 
     /**
@@ -63,6 +64,10 @@ public record Units(boolean fahrenheit, boolean pounds) {
                     pounds
                             ? format("%.2f oz/ft2", value / G_M2_PER_OZ_FT2)
                             : format("%.0f g/m2", value);
+            case "m3/h" ->
+                    pounds
+                            ? format("%,.0f ft3/min", value / M3_H_PER_FT3_MIN)
+                            : format("%,.0f m3/h", value);
             case "day" -> days(value);
             case "h" -> brief(value) + " h";
             case "pct" -> brief(value) + " %";

@@ -4,7 +4,6 @@ import java.util.Collections;
 import java.util.LinkedHashMap;
 import java.util.List;
 import java.util.Map;
-import java.util.regex.Pattern;
 
 /** A JSON value. Numbers keep their text, objects the order of their names. */
 public sealed interface Json {
@@ -68,9 +67,6 @@ public sealed interface Json {
     /** Longest text shown in a message. */
     int SHOWN = 60;
 
-    /** A name that needs no quotes in a path. */
-    Pattern PLAIN_NAME = Pattern.compile("[A-Za-z_][A-Za-z0-9_-]*");
-
     /**
      * Returns the value as a message shows it.
      *
@@ -114,9 +110,20 @@ public sealed interface Json {
      * @return such as {@code $.site.zone}
      */
     static String member(String path, String name) {
-        return PLAIN_NAME.matcher(name).matches()
-                ? path + "." + name
-                : path + "[" + quoted(name) + "]";
+        return plain(name) ? path + "." + name : path + "[" + quoted(name) + "]";
+    }
+
+    /** A letter or low line, then letters, digits, low lines and hyphens; asked for every name. */
+    private static boolean plain(String name) {
+        for (int i = 0; i < name.length(); i++) {
+            char c = name.charAt(i);
+            boolean letter = c == '_' || (c >= 'a' && c <= 'z') || (c >= 'A' && c <= 'Z');
+            boolean later = c == '-' || (c >= '0' && c <= '9');
+            if (!letter && (i == 0 || !later)) {
+                return false;
+            }
+        }
+        return !name.isEmpty();
     }
 
     private static String cut(String text) {

@@ -27,7 +27,7 @@ final class AirAround {
             double pa = around.weather().humidityPct(h) / 100 * SaturatedAir.overWaterPa(airC[h]);
             ratio[h] = MoistAir.humidityRatio(pa, inputs.pressurePa());
         }
-        return new HourlyAir(airC, ratio);
+        return new HourlyAir(airC, ratio, inputs.rowHours());
     }
 
     /** Air beyond the door, never above saturation; outdoor air where there is no door. */
@@ -49,7 +49,7 @@ final class AirAround {
                             : outdoors.ratio(h);
             ratio[h] = Math.min(there, most);
         }
-        return new HourlyAir(airC, ratio);
+        return new HourlyAir(airC, ratio, inputs.rowHours());
     }
 
     /** The doorway as numbers, its share of the full flow scaled by a factor. */

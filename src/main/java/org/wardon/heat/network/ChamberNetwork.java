@@ -195,7 +195,7 @@ public final class ChamberNetwork implements TreeSystem {
     }
 
     /**
-     * Enters an hour of the weather.
+     * Enters an hour of the weather, and the stretch that starts with it.
      *
      * @param h hour of the run, 0 to the last but one
      */

@@ -1,9 +1,9 @@
 package org.wardon.heat.network;
 
 import java.util.ArrayList;
-import java.util.Arrays;
 import java.util.List;
 import java.util.function.IntUnaryOperator;
+import org.wardon.air.Coarse;
 import org.wardon.cooling.WaterFilm;
 import org.wardon.enclosure.Enclosure;
 import org.wardon.enclosure.Face;
@@ -16,6 +16,7 @@ final class Faces {
     private final NetworkInputs inputs;
     private final List<OutsideBoundary> boundaries = new ArrayList<>();
     private final FacePart[] parts;
+    private final double[][] beyondC;
     private final double[] hourStartC;
     private final double[] hourChangeK;
     private final List<FilmedFace> filmed = new ArrayList<>();
@@ -39,6 +40,10 @@ final class Faces {
                 wetted.add(wet);
             }
         }
+        beyondC = new double[parts.length][];
+        for (int i = 0; i < parts.length; i++) {
+            beyondC[i] = Coarse.means(boundaries.get(i).temperaturesC(), inputs.rowHours());
+        }
         hourStartC = new double[parts.length];
         hourChangeK = new double[parts.length];
     }
@@ -60,13 +65,14 @@ final class Faces {
         filmed.forEach(face -> face.drivenBy(coolers[face.cooler()]));
     }
 
-    /** Enters an hour of the weather and of the water. */
+    /** Enters an hour of the weather and of the water, and the stretch that starts with it. */
     void hour(int hour) {
+        int until = Math.min(hour + inputs.rowHours(), inputs.around().hours());
         for (int i = 0; i < parts.length; i++) {
             OutsideBoundary b = boundaries.get(i);
-            parts[i].farFilm(0.5 * (b.filmWm2K(hour) + b.filmWm2K(hour + 1)));
-            hourStartC[i] = b.temperatureC(hour);
-            hourChangeK[i] = b.temperatureC(hour + 1) - hourStartC[i];
+            parts[i].farFilm(0.5 * (b.filmWm2K(hour) + b.filmWm2K(until)));
+            hourStartC[i] = beyondC[i][hour];
+            hourChangeK[i] = beyondC[i][hour + 1] - hourStartC[i];
         }
         for (FilmedFace face : filmed) {
             WaterFilm water = (WaterFilm) inputs.coolers().get(face.cooler());
@@ -101,11 +107,19 @@ final class Faces {
     }
 
     double layersJ(double[] y) {
-        return Arrays.stream(parts).mapToDouble(face -> face.heatJ(y)).sum();
+        double sum = 0;
+        for (FacePart part : parts) {
+            sum += part.heatJ(y);
+        }
+        return sum;
     }
 
     double waterKg(double[] y) {
-        return Arrays.stream(parts).mapToDouble(face -> face.waterKg(y)).sum();
+        double sum = 0;
+        for (FacePart part : parts) {
+            sum += part.waterKg(y);
+        }
+        return sum;
     }
 
     void tolerances(double airK, double[] tolerances) {

@@ -21,6 +21,7 @@ import org.wardon.lots.Lot;
  * @param lots all lots that will ever be in it
  * @param tuning factors
  * @param averagedDoor whether openings are averaged over the hours of use
+ * @param rowHours hours from row to row; the outdoors run straight between means of as many
  * @param heaterW heater, W
  * @param humidifierKgS humidifier, kg/s
  * @param plain whether laws are asked directly instead of through local cubics
@@ -37,6 +38,7 @@ public record NetworkInputs(
         List<Lot> lots,
         Tuning tuning,
         boolean averagedDoor,
+        int rowHours,
         double heaterW,
         double humidifierKgS,
         boolean plain,

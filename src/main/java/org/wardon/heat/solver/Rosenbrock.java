@@ -18,6 +18,7 @@ import java.util.Arrays;
  * and g_1 = g_2.
  */
 final class Rosenbrock {
+    private static final int STAGES = 4;
     private static final double GAMMA = 0.5;
     private static final double B1 = 5.0 / 6;
     private static final double B2 = -1.0 / 6;
@@ -34,6 +35,7 @@ final class Rosenbrock {
     private final double[] u2;
     private final double[] u3;
     private final double[] u4;
+    private final double[][] stages;
     private final double[] stage;
     private final double[] along;
     private final double[] flow0;
@@ -59,6 +61,7 @@ final class Rosenbrock {
         u2 = new double[n];
         u3 = new double[n];
         u4 = new double[n];
+        stages = new double[][] {u1, u2, u3, u4};
         stage = new double[n];
         along = new double[n];
         end = new double[n];
@@ -75,36 +78,61 @@ final class Rosenbrock {
         system.rates(t, y, f0, flow0);
     }
 
-    /** Tries a step of length h from the state last started from; returns its error, 1 allowed. */
+    /**
+     * Tries a step of length h from the state last started from; returns its error, 1 allowed. The
+     * stages share one place that solves: a short run ends before the compiler has got through four
+     * copies of the tree.
+     */
     double tryStep(double t, double[] y, double h) {
-        double inverse = 1 / h;
-        tree.factor(inverse / GAMMA);
-        for (int i = 0; i < n; i++) {
-            u1[i] = f0[i] + 0.5 * h * ft[i];
+        tree.factor(1 / (h * GAMMA));
+        for (int s = 0; s < STAGES; s++) {
+            if (s < 2) {
+                fromStart(s, h);
+            } else {
+                fromEnd(s, t + h, y, h);
+            }
+            tree.solve(stages[s]);
         }
-        tree.solve(u1);
-        for (int i = 0; i < n; i++) {
-            u2[i] = f0[i] + 4 * inverse * u1[i] + 1.5 * h * ft[i];
-            stage[i] = y[i] + 2 * u1[i];
-        }
-        tree.solve(u2);
-        system.rates(t + h, stage, u3, flow3);
-        for (int i = 0; i < n; i++) {
-            u3[i] += (u1[i] - u2[i]) * inverse;
-        }
-        tree.solve(u3);
-        for (int i = 0; i < n; i++) {
-            stage[i] += u3[i];
-        }
-        system.rates(t + h, stage, u4, flow4);
-        for (int i = 0; i < n; i++) {
-            u4[i] += (u1[i] - u2[i] - 8.0 / 3 * u3[i]) * inverse;
-        }
-        tree.solve(u4);
         for (int i = 0; i < n; i++) {
             end[i] = stage[i] + u4[i];
         }
         return error();
+    }
+
+    /** Right-hand sides of the first two stages, which see the rates at the start. */
+    private void fromStart(int s, double h) {
+        if (s == 0) {
+            double slope = 0.5 * h;
+            for (int i = 0; i < n; i++) {
+                u1[i] = f0[i] + slope * ft[i];
+            }
+        } else {
+            double slope = 1.5 * h;
+            double four = 4 / h;
+            for (int i = 0; i < n; i++) {
+                u2[i] = f0[i] + four * u1[i] + slope * ft[i];
+            }
+        }
+    }
+
+    /** Right-hand sides of the last two, which see the rates at the end. */
+    private void fromEnd(int s, double until, double[] y, double h) {
+        double[] u = stages[s];
+        boolean third = s == 2;
+        for (int i = 0; i < n; i++) {
+            stage[i] = third ? y[i] + 2 * u1[i] : stage[i] + u3[i];
+        }
+        system.rates(until, stage, u, third ? flow3 : flow4);
+        double inverse = 1 / h;
+        for (int i = 0; i < n; i++) {
+            u[i] += (u1[i] - u2[i]) * inverse;
+        }
+        if (!third) {
+            double more = -8.0 / 3 * inverse;
+            for (int i = 0; i < n; i++) {
+                u[i] += more * u3[i];
+            }
+        }
     }
 
     /** Each node of the hub counts for itself, each branch by its root mean square. */

@@ -19,7 +19,7 @@ import org.wardon.advice.wording.Words;
 import org.wardon.files.PlanReader;
 import org.wardon.lots.ClassValues;
 import org.wardon.lots.Lot;
-import org.wardon.lots.Lots;
+import org.wardon.lots.LotRange;
 import org.wardon.lots.Shares;
 import org.wardon.plan.ChamberPlan;
 import org.wardon.produce.Ripeness;
@@ -47,14 +47,14 @@ class ChamberLoadTest {
     }
 
     private static Lot mango() {
-        return Lots.of(
+        return LotRange.of(
                         "M1",
                         book.get("mango"),
                         800,
                         book.packageKind("room-cooling-any"),
                         Ripeness.GREEN,
-                        ClassValues.of(book.all()),
-                        Shares.MIDDLE)
+                        ClassValues.of(book.all()))
+                .at(Shares.MIDDLE)
                 .value();
     }
 

@@ -28,7 +28,7 @@ import org.wardon.keeping.Mechanism;
 import org.wardon.keeping.RestsOn;
 import org.wardon.lots.ClassValues;
 import org.wardon.lots.LotHistory;
-import org.wardon.lots.Lots;
+import org.wardon.lots.LotRange;
 import org.wardon.lots.Shares;
 import org.wardon.produce.Commodity;
 import org.wardon.produce.PackageKind;
@@ -109,7 +109,8 @@ class WordsTest {
             for (PackageKind kind : kinds) {
                 for (Ripeness ripeness : Ripeness.values()) {
                     spoken(
-                            Lots.of("A1", commodity, 500, kind, ripeness, classes, Shares.MIDDLE)
+                            LotRange.of("A1", commodity, 500, kind, ripeness, classes)
+                                    .at(Shares.MIDDLE)
                                     .restsOn());
                 }
             }
