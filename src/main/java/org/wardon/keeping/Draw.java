@@ -1,7 +1,5 @@
 package org.wardon.keeping;
 
-import org.wardon.errors.Require;
-
 /**
  * One numbered choice among all published ranges at once: for each, how far along it lies. The same
  * numbered draw stands behind every answer, with and without the chamber, so that differences are
@@ -62,9 +60,14 @@ public record Draw(
             curing
         };
         for (double quantile : all) {
-            Require.that(
-                    quantile > 0 && quantile < 1,
-                    "a quantile of draw " + number + " is " + quantile + "; accepted is 0 to 1");
+            if (!(quantile > 0 && quantile < 1)) {
+                throw new IllegalArgumentException(
+                        "a quantile of draw "
+                                + number
+                                + " is "
+                                + quantile
+                                + "; accepted is 0 to 1");
+            }
         }
     }
 

@@ -51,20 +51,27 @@ public final class PackageFit {
         double open = openWPerKgK(item);
         double outside = item.areaM2PerKg() * AirFilm.heatWPerM2K(item);
         double film = Math.min(open, Math.max(outside, inside.leastFilmWPerKgK()));
-        if (leftAfter(halfCoolingS, item, shells, inside.packing(open, open)) >= 0.5) {
-            return itemsOwnTime(item, inside, open, halfCoolingS);
+        double left = leftAfter(halfCoolingS, item, shells, inside.packing(film, open));
+        DoubleFunction<Packing> packing = g -> inside.packing(film, g);
+        if (left > 0.5) {
+            // Too slow with that film; an item too slow with any keeps its own time.
+            left = leftAfter(halfCoolingS, item, shells, inside.packing(open, open));
+            if (left >= 0.5) {
+                return itemsOwnTime(item, inside, open, halfCoolingS);
+            }
+            packing = g -> inside.packing(g, open);
         }
-        boolean openSuffices =
-                leftAfter(halfCoolingS, item, shells, inside.packing(film, open)) <= 0.5;
-        DoubleFunction<Packing> packing =
-                openSuffices ? g -> inside.packing(film, g) : g -> inside.packing(g, open);
+        DoubleFunction<Packing> chosen = packing;
         double fitted =
                 fit(
-                        g -> leftAfter(halfCoolingS, item, shells, packing.apply(g)),
-                        open,
+                        g -> leftAfter(halfCoolingS, item, shells, chosen.apply(g)),
+                        new Open(open, left),
                         item.specificHeatJkgK() / halfCoolingS);
-        return new WithReasons<>(packing.apply(fitted), List.of(), false);
+        return new WithReasons<>(chosen.apply(fitted), List.of(), false);
     }
+
+    /** The widest conductance and the share left with it. */
+    private record Open(double conductance, double left) {}
 
     private static WithReasons<Packing> itemsOwnTime(
             Item item, PackageInside inside, double open, double halfCoolingS) {
@@ -146,12 +153,13 @@ public final class PackageFit {
      * one temperature the time is straight in the resistance, so that a secant in those two is
      * nearly there at its first step.
      */
-    private static double fit(DoubleUnaryOperator left, double open, double slopeGuess) {
+    private static double fit(DoubleUnaryOperator left, Open widest, double slopeGuess) {
+        double open = widest.conductance;
         double resistance = 1 / open;
-        double miss = miss(left, resistance);
+        double miss = miss(widest.left);
         double next = within(resistance - miss / slopeGuess, open);
         for (int i = 0; i < SECANTS; i++) {
-            double nextMiss = miss(left, next);
+            double nextMiss = miss(left.applyAsDouble(1 / next));
             double slope = (nextMiss - miss) / (next - resistance);
             resistance = next;
             miss = nextMiss;
@@ -167,10 +175,9 @@ public final class PackageFit {
         return Math.min(1 / LEAST_W_KG_K, Math.max(1 / open, resistance));
     }
 
-    /** Time constant over time, less what it is where half is left; rises with the resistance. */
-    private static double miss(DoubleUnaryOperator left, double resistance) {
-        double share = Math.min(left.applyAsDouble(1 / resistance), ALL_LEFT);
-        return -1 / Math.log(share) - 1 / Math.log(2);
+    /** Time constant over time, less what it is where half is left. */
+    private static double miss(double left) {
+        return -1 / Math.log(Math.min(left, ALL_LEFT)) - 1 / Math.log(2);
     }
 
     private static double searched(DoubleUnaryOperator left, double open) {

@@ -68,16 +68,26 @@ public final class Workable {
                 injured += drawn.get(d).chilledAfter(temperatureC) < wish.wholeDays() ? 1 : 0;
             }
             chilled[t] = (double) injured / days.length;
+            place(t, 0, anyHumidity);
+            double untouchedTenth = tenth[t][0];
+            double untouchedMedian = median[t][0];
             for (int h = 0; h < Settings.HUMIDITIES; h++) {
                 double humidity = Settings.humidityPct(h) / 100;
+                boolean touched = false;
                 for (int d = 0; d < days.length; d++) {
                     double least = anyHumidity[d];
                     days[d] =
                             least > 0
                                     ? Math.min(least, drawn.get(d).at(temperatureC, humidity))
                                     : 0;
+                    touched |= days[d] < least;
                 }
-                place(t, h, days);
+                if (touched) {
+                    place(t, h, days);
+                } else {
+                    tenth[t][h] = untouchedTenth;
+                    median[t][h] = untouchedMedian;
+                }
             }
         }
     }

@@ -8,9 +8,6 @@ import org.wardon.heat.Stay;
 import org.wardon.keeping.Draw;
 import org.wardon.keeping.KeepingModel;
 import org.wardon.keeping.KeptLot;
-import org.wardon.lots.Lot;
-import org.wardon.lots.LotRange;
-import org.wardon.lots.Shares;
 import org.wardon.plan.LotPlan;
 import org.wardon.produce.Commodity;
 import org.wardon.produce.PackageKind;
@@ -22,7 +19,7 @@ import org.wardon.produce.Reason;
  * @param plan the lot as planned
  * @param commodity what it is
  * @param kind its package
- * @param range its body in the ranges of what is printed
+ * @param bodies its body in each draw
  * @param clock arrival and leaving in seconds of the run
  * @param model how it keeps
  */
@@ -30,7 +27,7 @@ record LotSheet(
         LotPlan plan,
         Commodity commodity,
         PackageKind kind,
-        LotRange range,
+        Bodies bodies,
         Clock clock,
         KeepingModel model) {
     /**
@@ -110,7 +107,7 @@ record LotSheet(
     Stay stay(Draw draw) {
         double water = plan.atDoor().surfaceWaterPct() / 100 * plan.massKg();
         return new Stay(
-                body(draw),
+                bodies.in(draw),
                 clock.arrivesS(),
                 clock.leavesS(),
                 plan.temperatureC(),
@@ -120,16 +117,11 @@ record LotSheet(
 
     /** What the body of the lot rests on. */
     List<Reason> restsOn() {
-        return range.at(Shares.MIDDLE).restsOn();
-    }
-
-    private Lot body(Draw draw) {
-        Shares shares = new Shares(draw.respiration(), draw.transpiration(), draw.packaging());
-        return range.at(shares).value();
+        return bodies.restsOn();
     }
 
     /** The same lot planned otherwise: in another chamber, say. */
     LotSheet planned(LotPlan otherwise) {
-        return new LotSheet(otherwise, commodity, kind, range, clock, model);
+        return new LotSheet(otherwise, commodity, kind, bodies, clock, model);
     }
 }

@@ -66,7 +66,7 @@ final class LotSheets {
                 KeptLot.inOpenPackage(lot.id(), commodity, door(lot), classes).packedIn(vapour);
         KeepingModel model = KeepingModel.of(kept);
         LotRange breathing = model.uncured() ? range.uncured() : range;
-        return new LotSheet(lot, commodity, kind, breathing, clock(lot), model);
+        return new LotSheet(lot, commodity, kind, new Bodies(breathing), clock(lot), model);
     }
 
     private LotSheet.Clock clock(LotPlan lot) {

@@ -26,6 +26,7 @@ final class ReadingsCsv {
     private static final String TIME = "time";
     private static final Pattern LOCAL =
             Pattern.compile("[0-9]{4}-[0-9]{2}-[0-9]{2}T[0-9]{2}:[0-9]{2}(:[0-9]{2}(\\.[0-9]+)?)?");
+    private static final String MINUTE_SHAPE = "0000-00-00T00:00";
     private static final Pattern NUMBER =
             Pattern.compile("[-+]?([0-9]+\\.?[0-9]*|\\.[0-9]+)([eE][-+]?[0-9]{1,3})?");
 
@@ -182,7 +183,7 @@ final class ReadingsCsv {
 
     private Optional<LocalDateTime> local(String cell, long line) {
         String trouble = "";
-        if (LOCAL.matcher(cell).matches()) {
+        if (toTheMinute(cell) || LOCAL.matcher(cell).matches()) {
             try {
                 return Optional.of(LocalDateTime.parse(cell));
             } catch (DateTimeException e) {
@@ -196,14 +197,49 @@ final class ReadingsCsv {
         return Optional.empty();
     }
 
+    private static String where(long line, Column column) {
+        return "line " + line + ", column " + column.name();
+    }
+
+    /** The usual shape of a number, told without the cost of the pattern: digits and one point. */
+    private static boolean decimal(String cell) {
+        int points = 0;
+        for (int i = 0; i < cell.length(); i++) {
+            char c = cell.charAt(i);
+            points += c == '.' ? 1 : 0;
+            if (!digit(c) && (c != '.' || i == 0 || points > 1)) {
+                return false;
+            }
+        }
+        return !cell.isEmpty();
+    }
+
+    /** The usual shape of a time, likewise. */
+    private static boolean toTheMinute(String cell) {
+        if (cell.length() != MINUTE_SHAPE.length()) {
+            return false;
+        }
+        for (int i = 0; i < cell.length(); i++) {
+            char shape = MINUTE_SHAPE.charAt(i);
+            char c = cell.charAt(i);
+            if (shape == '0' ? !digit(c) : c != shape) {
+                return false;
+            }
+        }
+        return true;
+    }
+
+    private static boolean digit(char c) {
+        return c >= '0' && c <= '9';
+    }
+
     private double number(String cell, Column column, long line) {
         if (cell.isEmpty()) {
             return Double.NaN;
         }
-        String where = "line " + line + ", column " + column.name();
-        if (!NUMBER.matcher(cell).matches()) {
+        if (!decimal(cell) && !NUMBER.matcher(cell).matches()) {
             faults.add(
-                    where,
+                    where(line, column),
                     "is " + Json.quoted(cell),
                     column.accepted()
                             + " with a point as decimal mark; an empty cell for no reading");
@@ -211,7 +247,7 @@ final class ReadingsCsv {
         }
         double value = Double.parseDouble(cell);
         if (value < column.low() || value > column.high()) {
-            faults.add(where, "is " + cell + " " + column.unit(), column.accepted());
+            faults.add(where(line, column), "is " + cell + " " + column.unit(), column.accepted());
         }
         return value;
     }

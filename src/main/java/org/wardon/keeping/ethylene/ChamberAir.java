@@ -44,7 +44,9 @@ public final class ChamberAir {
                         && cleanedM3s.length == n,
                 "chamber air needs arrays of equal length of at least 2, found " + n);
         for (int i = 0; i < n; i++) {
-            Require.that(i == 0 || timeS[i] > timeS[i - 1], "times must rise, found " + timeS[i]);
+            if (i > 0 && !(timeS[i] > timeS[i - 1])) {
+                throw new IllegalArgumentException("times must rise, found " + timeS[i]);
+            }
             Require.within("exchangeM3s", exchangeM3s[i], 0, 1e4, "m3/s", "");
             Require.within("freeVolumeM3", freeVolumeM3[i], 1e-3, 1e7, "m3", "Less lots.");
             Require.within("cleanedM3s", cleanedM3s[i], 0, 1e4, "m3/s", "");

@@ -1,0 +1,37 @@
+package org.wardon.advice.forecast;
+
+import java.util.List;
+import java.util.Map;
+import java.util.concurrent.ConcurrentHashMap;
+import org.wardon.keeping.Draw;
+import org.wardon.lots.Lot;
+import org.wardon.lots.LotRange;
+import org.wardon.lots.Shares;
+import org.wardon.produce.Reason;
+
+/** The body of a lot in each draw, fitted once: it stands in chambers and without one alike. */
+final class Bodies {
+    private final LotRange range;
+    private final Map<Integer, Lot> byDraw = new ConcurrentHashMap<>();
+
+    Bodies(LotRange range) {
+        this.range = range;
+    }
+
+    Lot in(Draw draw) {
+        return byDraw.computeIfAbsent(
+                draw.number(),
+                number ->
+                        range.at(
+                                        new Shares(
+                                                draw.respiration(),
+                                                draw.transpiration(),
+                                                draw.packaging()))
+                                .value());
+    }
+
+    /** What the body rests on. */
+    List<Reason> restsOn() {
+        return range.at(Shares.MIDDLE).restsOn();
+    }
+}
