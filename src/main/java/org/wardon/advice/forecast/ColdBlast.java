@@ -6,9 +6,7 @@ import java.util.List;
 import java.util.Optional;
 import org.wardon.heat.AirSeries;
 import org.wardon.heat.Hours;
-import org.wardon.keeping.Draw;
 import org.wardon.keeping.Draws;
-import org.wardon.keeping.Fate;
 import org.wardon.keeping.Mechanism;
 import org.wardon.lots.LotHistory;
 import org.wardon.plan.ChamberPlan;
@@ -124,7 +122,7 @@ final class ColdBlast {
                             Argument.of(coldestC, "C"),
                             Argument.of(freezingC, "C")));
         }
-        if (visit.only() && Double.isFinite(visit.sheet().model().lowestSafeC())) {
+        if (visit.only() && coldestC < visit.sheet().model().lowestSafeC()) {
             chilling(visit, here, blast, told);
         }
     }
@@ -146,11 +144,12 @@ final class ColdBlast {
     /** Share of the draws in which the lot, kept along a history, shows chilling when sold. */
     private double risk(Visit visit, LotHistory history) {
         LotSheet sheet = visit.sheet();
-        int injured = 0;
-        for (Draw draw : Draws.seeded(outcome.model().plan().seed(), StoreRun.DRAWS)) {
-            Fate fate = fates.inOtherAir(sheet, history, 0, draw);
-            injured += fate.endS(Mechanism.CHILLING) <= sheet.soldS() ? 1 : 0;
-        }
+        LotHistory sold = fates.inOtherAir(sheet, history, 0);
+        long injured =
+                Draws.seeded(outcome.model().plan().seed(), StoreRun.DRAWS).parallelStream()
+                        .map(draw -> sheet.model().follow(sold, draw))
+                        .filter(fate -> fate.endS(Mechanism.CHILLING) <= sheet.soldS())
+                        .count();
         return injured / (double) StoreRun.DRAWS;
     }
 

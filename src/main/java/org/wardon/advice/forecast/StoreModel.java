@@ -143,7 +143,7 @@ final class StoreModel {
                 Draw.MEDIAN,
                 id -> durationS,
                 startAir(),
-                DoorMode.AVERAGED,
+                DoorMode.SKETCHED,
                 ControlMode.MODULATING);
     }
 
