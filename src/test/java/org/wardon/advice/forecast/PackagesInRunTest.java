@@ -15,7 +15,7 @@ import org.wardon.heat.HeatModel;
 import org.wardon.heat.Stay;
 import org.wardon.lots.ClassValues;
 import org.wardon.lots.Lot;
-import org.wardon.lots.Lots;
+import org.wardon.lots.LotRange;
 import org.wardon.lots.Shares;
 import org.wardon.produce.Commodity;
 import org.wardon.produce.PackageKind;
@@ -44,14 +44,14 @@ class PackagesInRunTest {
     private static double lostKg(String packageId) {
         Commodity apple = book.get("apple");
         Lot lot =
-                Lots.of(
+                LotRange.of(
                                 "A",
                                 apple,
                                 300,
                                 book.packageKind(packageId),
                                 org.wardon.produce.Ripeness.UNKNOWN,
-                                ClassValues.of(book.all()),
-                                Shares.MIDDLE)
+                                ClassValues.of(book.all()))
+                        .at(Shares.MIDDLE)
                         .value();
         return HeatModel.runInGivenAir(
                         new Stay(lot, 0, 30 * DAY_S, 2),
