@@ -2,6 +2,8 @@ package org.wardon.advice.forecast;
 
 import java.util.ArrayList;
 import java.util.List;
+import java.util.Set;
+import java.util.stream.Collectors;
 import org.wardon.air.MoistAir;
 import org.wardon.air.StandardAtmosphere;
 import org.wardon.air.Timeline;
@@ -17,6 +19,7 @@ import org.wardon.produce.Reason.Argument;
 /** Tells of the lots that are carried from one chamber to another, and where they sweat by it. */
 final class Carried {
     private static final String PRACTICE = "common-practice";
+    private static final String SWEATS = "sweats-when-moved";
 
     private final StoreOutcome outcome;
 
@@ -34,6 +37,16 @@ final class Carried {
             }
         }
         return told;
+    }
+
+    /** Chambers a lot is told to sweat in because it was carried there. */
+    static Set<String> sweatsIn(String lotId, List<Caution> carried) {
+        return carried.stream()
+                .map(Caution::reason)
+                .filter(reason -> reason.code().equals(SWEATS))
+                .filter(reason -> reason.subjects().get(0).equals(lotId))
+                .map(reason -> reason.subjects().get(2))
+                .collect(Collectors.toSet());
     }
 
     private void tell(Visit visit, String from, List<Caution> told) {
@@ -61,7 +74,7 @@ final class Carried {
                     new Caution(
                             Level.CAUTION,
                             new Reason(
-                                    "sweats-when-moved",
+                                    SWEATS,
                                     subjects,
                                     List.of(
                                             Argument.of(history.surfaceC(sample), "C"),

@@ -49,9 +49,15 @@ final class Cautions {
             new Deliveries(outcome, chamber).all().forEach(c -> add(c.level(), c.reason()));
             new ColdBlast(outcome, chamber).all().forEach(c -> add(c.level(), c.reason()));
         }
-        new Carried(outcome).all().forEach(c -> add(c.level(), c.reason()));
+        List<Caution> carried = new Carried(outcome).all();
+        carried.forEach(c -> add(c.level(), c.reason()));
         GasCautions.ofScrubbers(outcome).forEach(c -> add(c.level(), c.reason()));
-        outcome.model().sheets().forEach(this::lot);
+        for (LotSheet sheet : outcome.model().sheets()) {
+            lot(sheet);
+            new Sweating(sheet, outcome)
+                    .all(Carried.sweatsIn(sheet.id(), carried))
+                    .forEach(c -> add(c.level(), c.reason()));
+        }
         weather(plan);
         defaults(plan);
         add(Level.NOTE, Reason.about("keeping-not-safety", "store", PRACTICE));
@@ -110,7 +116,9 @@ final class Cautions {
     private void event(ChamberPlan chamber, CourseEvent.Kind kind, double hours, Course course) {
         Argument told = Argument.of(hours, "h");
         switch (kind) {
-            case WET_LOT -> wetLots(chamber, course);
+            case WET_LOT -> {
+                // Told lot by lot.
+            }
             case WET_FACES ->
                     add(Level.NOTE, Reason.about("wet-faces", chamber.id(), PRACTICE, told));
             case TRIPPED -> add(Level.CAUTION, Reason.about("trips", chamber.id(), PRACTICE, told));
@@ -146,27 +154,13 @@ final class Cautions {
                 Reason.about("dry-wall", chamber.id(), "own", told, Argument.text(first)));
     }
 
-    private void wetLots(ChamberPlan chamber, Course course) {
-        for (LotSheet sheet : outcome.model().sheetsIn(chamber.id())) {
-            double hours =
-                    course.events().stream()
-                                    .filter(e -> e.kind() == CourseEvent.Kind.WET_LOT)
-                                    .filter(e -> e.subject().equals(sheet.id()))
-                                    .mapToDouble(e -> e.untilS() - e.fromS())
-                                    .sum()
-                            / Timeline.HOUR_S;
-            if (hours >= 1) {
-                add(
-                        Level.NOTE,
-                        Reason.about("sweats", sheet.id(), PRACTICE, Argument.of(hours, "h")));
-            }
-        }
-    }
-
     private void lot(LotSheet sheet) {
         if (outcome.has(sheet.id())) {
             for (Reason reason : outcome.fates(sheet.id()).basis().reasons()) {
-                add(level(reason.code()), reason);
+                // Sweat is told by where and when; only water it came with is told by its length.
+                if (!reason.code().equals("wet-long") || Sweating.cameWet(sheet)) {
+                    add(level(reason.code()), reason);
+                }
             }
         }
         GasCautions.ofLot(sheet, outcome).forEach(c -> add(c.level(), c.reason()));
