@@ -97,7 +97,8 @@ final class Carried {
                         .filter(event -> event.subject().equals(visit.id()))
                         .filter(event -> event.fromS() >= visit.arrivesS())
                         .filter(event -> event.fromS() < visit.leavesS())
-                        .mapToDouble(event -> event.untilS() - event.fromS())
+                        .mapToDouble(
+                                event -> Math.min(event.untilS(), visit.leavesS()) - event.fromS())
                         .sum()
                 / Timeline.HOUR_S;
     }

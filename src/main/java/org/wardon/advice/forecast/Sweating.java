@@ -104,8 +104,13 @@ final class Sweating {
                 .filter(event -> event.subject().equals(sheet.id()))
                 .filter(event -> event.fromS() >= from - 1 && event.fromS() < visit.leavesS())
                 .filter(event -> !cameWet(sheet) || event.fromS() > from + Timeline.HOUR_S)
-                .map(event -> new Span(visit.chamber(), event.fromS(), event.untilS()))
+                .map(event -> new Span(visit.chamber(), event.fromS(), until(event, visit)))
                 .toList();
+    }
+
+    /** A lot that left goes on as a shadow, whose water is nobody's. */
+    private static double until(CourseEvent event, Visit visit) {
+        return Math.min(event.untilS(), visit.leavesS());
     }
 
     private Optional<Caution> onLeaving() {

@@ -105,8 +105,18 @@ class SweatingTest {
         assertEquals(1, sweats.size() + longer.size(), forecast.warnings().toString());
         assertEquals(List.of(), SmallPlan.told(forecast, "wet-long"));
         String told = sweats.isEmpty() ? longer.get(0) : sweats.get(0);
-        assertTrue(told.startsWith("C1: sweats in north, "), told);
+        assertTrue(told.startsWith("C1: sweats in north, wet for "), told);
         assertTrue(told.contains(" from 2026-03-02 06:"), told);
+    }
+
+    @Test
+    void whatALotThatLeftWouldGoThroughIsNotCounted() throws IOException {
+        Forecast forecast =
+                with(
+                        "\"setting\": {\"temperatureC\": 20}",
+                        carrots("C1", 2, ", \"leaves\": \"2026-03-02T10:00\""));
+        String told = SmallPlan.told(forecast, "sweats").get(0);
+        assertTrue(figure(told, "wet for ([0-9.]+) h in all") <= 10, told);
     }
 
     @Test
