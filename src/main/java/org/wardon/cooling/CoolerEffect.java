@@ -1,7 +1,6 @@
 package org.wardon.cooling;
 
 import java.util.Arrays;
-import org.wardon.enclosure.FaceName;
 
 /**
  * What a cooler does to its chamber at one instant. Mutable with open fields on purpose: the solver
@@ -113,12 +112,6 @@ public final class CoolerEffect {
     /** Whether the high-pressure switch holds the compressor back. */
     public boolean tripped;
 
-    /** {@code [face ordinal]}, film the cooler lays on the inner side, W/(m2 K); 0 for none. */
-    public final double[] filmWm2K = new double[FaceName.values().length];
-
-    /** {@code [face ordinal]}, temperature of that film, °C. */
-    public final double[] fluidC = new double[FaceName.values().length];
-
     /** {@code [own state]}, rate of each, its unit a second. */
     public final double[] ownRate;
 
@@ -197,8 +190,6 @@ public final class CoolerEffect {
         electricW = fanW = electricByAirC = electricByHumidity = electricByRun = 0;
         evaporatingC = condensingC = supplyC = Double.NaN;
         tripped = false;
-        Arrays.fill(filmWm2K, 0);
-        Arrays.fill(fluidC, 0);
         Arrays.fill(ownRate, 0);
         Arrays.fill(ownRateByAirC, 0);
         Arrays.fill(ownRateByHumidity, 0);

@@ -1,7 +1,5 @@
 package org.wardon.cooling;
 
-import org.wardon.enclosure.FaceName;
-
 /**
  * What a cooler meets at one instant. Mutable with open fields for the same reason as {@link
  * CoolerEffect}: it is refilled at each stage of each step.
@@ -18,9 +16,6 @@ public final class CoolerInputs {
 
     /** Humidity ratio of outdoor air, kg/kg. */
     public double outdoorHumidityRatio;
-
-    /** {@code [face ordinal]}, inner surface of each face, °C. */
-    public final double[] faceC = new double[FaceName.values().length];
 
     /** {@code [own state]}, the cooler's own states. */
     public final double[] own;
