@@ -74,17 +74,26 @@ final class Faces {
             hourStartC[i] = beyondC[i][hour];
             hourChangeK[i] = beyondC[i][hour + 1] - hourStartC[i];
         }
+        double outdoorC =
+                0.5
+                        * (inputs.around().weather().temperatureC(hour)
+                                + inputs.around().weather().temperatureC(until));
         for (FilmedFace face : filmed) {
             WaterFilm water = (WaterFilm) inputs.coolers().get(face.cooler());
-            int ofDay = (int) Math.floor(inputs.startsAtHour() + hour) % 24;
-            double inletC = water.inletC(ofDay);
-            double outdoorC =
-                    0.5
-                            * (inputs.around().weather().temperatureC(hour)
-                                    + inputs.around().weather().temperatureC(hour + 1));
+            double inletC = inletC(water, hour, until);
             face.hour(
                     inletC, water.chiller().map(c -> c.electricPerW(inletC, outdoorC)).orElse(0.0));
         }
+    }
+
+    /** Water at the inlet in the mean of a stretch of hours, °C. */
+    private double inletC(WaterFilm water, int from, int until) {
+        int hours = Math.max(until - from, 1);
+        double sum = 0;
+        for (int h = from; h < from + hours; h++) {
+            sum += water.inletC((int) Math.floor(inputs.startsAtHour() + h) % 24);
+        }
+        return sum / hours;
     }
 
     /** Sets what lies beyond at a share of the hour. */
