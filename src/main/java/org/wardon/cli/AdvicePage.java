@@ -108,6 +108,7 @@ final class AdvicePage {
                         + " of power; most from "
                         + largest(chamber.loadKWh()));
         coolers(chamber);
+        chamber.solar().ifPresent(this::solar);
         chamber.intakeKgPerDay()
                 .ifPresent(
                         kg ->
@@ -143,7 +144,7 @@ final class AdvicePage {
     private String sentence(ChamberForecast chamber) {
         String set = units.temperature(advice.settingC(chamber.id()));
         if (chamber.holds()) {
-            return "holds " + set + ".";
+            return "holds " + set + chamber.solar().map(this::though).orElse("") + ".";
         }
         String first = words.sentence(advice.whyNotHeld(chamber.id()).get(0));
         return "does not hold " + set + ": " + first + ".";
@@ -170,6 +171,35 @@ final class AdvicePage {
 
     private void line(String name, String text) {
         page.append(Paragraph.hanging(String.format(Locale.ROOT, "  %-10s ", name), text));
+    }
+
+    /** A chamber may hold though its battery runs out in the night. */
+    private String though(ChamberForecast.Solar solar) {
+        return solar.firstWithout()
+                .map(
+                        at ->
+                                ", though the battery runs out (first on "
+                                        + at.toString().replace("T", " at ")
+                                        + ", "
+                                        + units.figure(solar.hoursWithout(), "h")
+                                        + " without power in all)")
+                .orElse("");
+    }
+
+    private void solar(ChamberForecast.Solar solar) {
+        String night =
+                solar.hoursWithout() > 0
+                        ? "battery empty for " + units.figure(solar.hoursWithout(), "h")
+                        : "battery down to " + units.figure(solar.batteryLowPct(), "pct");
+        line(
+                "sun",
+                kwh(solar.panelKWh())
+                        + " from the panels, "
+                        + kwh(solar.usedKWh())
+                        + " used, "
+                        + kwh(solar.spilledKWh())
+                        + " to spare; "
+                        + night);
     }
 
     private static String kwh(double kWh) {

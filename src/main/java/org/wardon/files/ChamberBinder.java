@@ -16,7 +16,6 @@ import org.wardon.plan.Corrections;
 import org.wardon.plan.Default;
 import org.wardon.plan.Defaults;
 import org.wardon.plan.EthyleneScrub;
-import org.wardon.plan.OutagePlan;
 import org.wardon.plan.StartAir;
 
 /** Turns the chambers of a checked plan into records. */
@@ -26,9 +25,11 @@ final class ChamberBinder {
     private final Inputs inputs;
     private final FaceBinder faceBinder;
     private final DoorBinder doorBinder;
+    private final PowerBinder powerBinder;
 
-    ChamberBinder(Part buildUps, Lookups lookups, Inputs inputs) {
+    ChamberBinder(Part buildUps, Lookups lookups, Inputs inputs, PowerBinder powerBinder) {
         this.inputs = inputs;
+        this.powerBinder = powerBinder;
         this.faceBinder = new FaceBinder(buildUps, lookups, inputs);
         this.doorBinder = new DoorBinder(lookups, inputs);
     }
@@ -51,7 +52,8 @@ final class ChamberBinder {
                 coolers,
                 setting,
                 capacityKg,
-                outages(chamber),
+                powerBinder.single(chamber),
+                powerBinder.power(chamber),
                 inputs.numberElse(chamber, "humidifierKgH", 0),
                 inputs.numberElse(chamber, "heaterW", 0),
                 scrub(chamber.at("ethyleneScrub")),
@@ -122,16 +124,6 @@ final class ChamberBinder {
                 Math.min(Math.max(usual, 1), MOST_KG),
                 "kg",
                 Defaults.STOWAGE_KG_M3.mark());
-    }
-
-    private List<OutagePlan> outages(Part chamber) {
-        return chamber.at("outages").items().stream()
-                .map(
-                        outage ->
-                                new OutagePlan(
-                                        inputs.time(outage, "from").orElseThrow(),
-                                        inputs.number(outage, "hours")))
-                .toList();
     }
 
     private Optional<EthyleneScrub> scrub(Part scrub) {

@@ -1,6 +1,5 @@
 package org.wardon.files;
 
-import java.time.LocalDateTime;
 import java.time.LocalTime;
 import java.util.ArrayList;
 import java.util.HashMap;
@@ -24,12 +23,14 @@ final class ChamberRules {
     private final Lookups lookups;
     private final Faults faults;
     private final IdRules ids;
+    private final PowerRules power;
 
     ChamberRules(Part plan, Lookups lookups, Faults faults) {
         this.plan = plan;
         this.lookups = lookups;
         this.faults = faults;
         this.ids = new IdRules(faults);
+        this.power = new PowerRules(plan, faults);
     }
 
     void check() {
@@ -44,7 +45,7 @@ final class ChamberRules {
             if (chamber.has("door")) {
                 door(chamber);
             }
-            outages(chamber);
+            power.check(chamber);
             chamber.at("cooling").items().forEach(this::cooler);
             new WaterRules(faults).check(chamber);
         }
@@ -260,45 +261,5 @@ final class ChamberRules {
                     "the door is used from " + from + " to " + to,
                     "accepted: a later hour of the same day for to, 23:59 at most");
         }
-    }
-
-    private void outages(Part chamber) {
-        Optional<LocalDateTime> from = Times.at(plan.at("from"));
-        Optional<LocalDateTime> end = Times.end(plan);
-        LocalDateTime last = LocalDateTime.MIN;
-        for (Part outage : chamber.at("outages").items()) {
-            Optional<LocalDateTime> at = Times.at(outage.at("from"));
-            OptionalDouble hours = outage.at("hours").number();
-            if (at.isEmpty() || hours.isEmpty() || faults.at(outage.path())) {
-                continue;
-            }
-            LocalDateTime to = Times.plusHours(at.get(), hours.getAsDouble());
-            if (end.isPresent() && !at.get().isBefore(end.get())) {
-                outside(outage, "is " + at.get() + ", after the plan has ended", from, end);
-                continue;
-            }
-            if (from.isPresent() && !to.isAfter(from.get())) {
-                outside(outage, "ends at " + to + ", before the plan begins", from, end);
-                continue;
-            }
-            if (at.get().isBefore(last)) {
-                faults.add(
-                        outage.at("from").path(),
-                        "is " + at.get() + ", before the outage above has ended at " + last,
-                        "accepted: outages in order, none overlapping");
-            }
-            last = to.isAfter(last) ? to : last;
-        }
-    }
-
-    private void outside(
-            Part outage, String what, Optional<LocalDateTime> from, Optional<LocalDateTime> end) {
-        faults.add(
-                outage.at("from").path(),
-                what,
-                "accepted: hours between "
-                        + from.map(LocalDateTime::toString).orElse("from")
-                        + " and "
-                        + end.map(LocalDateTime::toString).orElse("the end"));
     }
 }

@@ -28,7 +28,12 @@ final class PlanBinder {
     StorePlan bind(WeatherSource weather, String fileName) {
         LocalDateTime from = inputs.time(plan, "from").orElseThrow();
         Site site = site();
-        ChamberBinder chamberBinder = new ChamberBinder(plan.at("buildUps"), lookups, inputs);
+        ChamberBinder chamberBinder =
+                new ChamberBinder(
+                        plan.at("buildUps"),
+                        lookups,
+                        inputs,
+                        new PowerBinder(site.latitudeDeg(), inputs));
         List<ChamberPlan> chambers =
                 plan.at("chambers").items().stream().map(chamberBinder::bind).toList();
         LotBinder lotBinder = new LotBinder(from, inputs);

@@ -2,12 +2,14 @@ package org.wardon.heat;
 
 import java.util.List;
 import java.util.Map;
+import java.util.Optional;
 import org.wardon.air.Site;
 import org.wardon.air.Timeline;
 import org.wardon.air.Weather;
 import org.wardon.cooling.Cooler;
 import org.wardon.cooling.Outage;
 import org.wardon.cooling.Setting;
+import org.wardon.cooling.solar.SolarSupply;
 import org.wardon.enclosure.Enclosure;
 import org.wardon.errors.Require;
 
@@ -52,8 +54,13 @@ public record ChamberRun(
      * @param heaterW heater that keeps a chamber from falling below its setting - band, W
      * @param humidifierKgH water a humidifier can add towards the wanted humidity, kg/h
      * @param neighbours air of the chambers next door, by id
+     * @param solar panels and battery its electricity comes from; absent where a grid feeds it
      */
-    public record Extras(double heaterW, double humidifierKgH, Map<String, AirSeries> neighbours) {
+    public record Extras(
+            double heaterW,
+            double humidifierKgH,
+            Map<String, AirSeries> neighbours,
+            Optional<SolarSupply> solar) {
         /** Nothing else. */
         public static final Extras NONE = new Extras(0, 0, Map.of());
 
@@ -62,6 +69,26 @@ public record ChamberRun(
             neighbours = Map.copyOf(neighbours);
             Require.within("heaterW", heaterW, 0, 1e6, "W", "");
             Require.within("humidifierKgH", humidifierKgH, 0, 1e4, "kg/h", "");
+        }
+
+        /**
+         * A chamber on the grid.
+         *
+         * @param heaterW heater, W
+         * @param humidifierKgH humidifier, kg/h
+         * @param neighbours air of the chambers next door, by id
+         */
+        public Extras(double heaterW, double humidifierKgH, Map<String, AirSeries> neighbours) {
+            this(heaterW, humidifierKgH, neighbours, Optional.empty());
+        }
+
+        /**
+         * Returns the same, fed by a grid.
+         *
+         * @return the changed copy
+         */
+        Extras onGrid() {
+            return new Extras(heaterW, humidifierKgH, neighbours, Optional.empty());
         }
     }
 

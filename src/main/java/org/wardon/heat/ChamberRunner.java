@@ -5,6 +5,7 @@ import java.util.Comparator;
 import java.util.List;
 import java.util.Locale;
 import java.util.Objects;
+import java.util.Optional;
 import org.jspecify.annotations.Nullable;
 import org.wardon.cooling.CoolerEffect;
 import org.wardon.cooling.Defrost;
@@ -49,6 +50,7 @@ final class ChamberRunner implements Integrator.StepListener {
     private final Integrator.Trigger triggers;
     private final IceBanks ice;
     private final EnergyBudget budget;
+    private final Optional<SolarRun> solar;
     private final Carbon carbon;
     private final HourRecorder hours;
     private final LotRecorder[] lots;
@@ -83,9 +85,15 @@ final class ChamberRunner implements Integrator.StepListener {
         totals = integrator.totals();
         thermostats = new SwitchedCoolers(network);
         watering = new Watering(run, network, y);
-        triggers = new FirstOf(thermostats, watering);
         ice = new IceBanks(run, network, y);
         budget = new EnergyBudget(run, network);
+        solar =
+                run.extras()
+                        .solar()
+                        .filter(supply -> run.controlMode() != ControlMode.IDEAL)
+                        .map(supply -> new SolarRun(supply, run, network, integrator));
+        Integrator.Trigger dryOrWarm = new FirstOf(thermostats, watering);
+        triggers = solar.isPresent() ? new FirstOf(dryOrWarm, solar.get()) : dryOrWarm;
         double pressure = RunCompiler.pressurePa(run);
         carbon = new Carbon(pressure);
         int rows = RunCompiler.hours(run) + 2;
@@ -107,6 +115,7 @@ final class ChamberRunner implements Integrator.StepListener {
         wetFaces = new Spans(CourseEvent.Kind.WET_FACES, id);
         icing = new Spans(CourseEvent.Kind.ICES_UP, id);
         books = new Books(network, y, totals, lots);
+        solar.ifPresent(any -> feed(0));
     }
 
     /** Compiles a run; it stands at its start. */
@@ -129,6 +138,7 @@ final class ChamberRunner implements Integrator.StepListener {
             double until = Math.min(stopS, Math.min(hourEndS(), nextEdgeS()));
             until = Math.min(until, thermostats.nextUnlock(now));
             until = Math.min(until, budget.nextCheck(now, totals));
+            until = Math.min(until, nextRestartS());
             now = advance(now, until);
             if (now >= hourEndS()) {
                 progress.at("heat", now / run.durationS());
@@ -136,10 +146,17 @@ final class ChamberRunner implements Integrator.StepListener {
         }
     }
 
+    private double nextRestartS() {
+        return solar.map(supply -> supply.nextRestart(now)).orElse(Double.POSITIVE_INFINITY);
+    }
+
     /** Lets pass what changes at the time it stands at, and ends the hour where it is over. */
     private void settle() {
         passEdges(now);
         budget.check(now, totals);
+        if (solar.isPresent() && solar.get().turns(now)) {
+            feed(now);
+        }
         if (now >= hourEndS()) {
             hour += run.doorMode().rowHours();
             network.hour(hour);
@@ -209,6 +226,7 @@ final class ChamberRunner implements Integrator.StepListener {
             stop(to, "air temperature", airC);
         }
         hours.stepped(from, to, state);
+        solar.ifPresent(supply -> supply.stepped(to, totals));
         for (int i = 0; i < lots.length; i++) {
             lots[i].stepped(to, state, totals);
             double warm = network.lot(i).warmestC(state);
@@ -270,6 +288,7 @@ final class ChamberRunner implements Integrator.StepListener {
         }
         hours.ice(ice.leftKg(y));
         hours.row(t, y, totals, respirationJ(), carbon.ppm());
+        solar.ifPresent(supply -> hours.supply(supply.panelJ(), supply.share()));
         wetFaces.is(t, network.faceWaterKg(y) > 0.1);
         icing.is(t, icesUp());
     }
@@ -298,7 +317,7 @@ final class ChamberRunner implements Integrator.StepListener {
         switch (edge.kind()) {
             case MIDNIGHT -> {
                 awaitsFirstOpening = true;
-                budget.midnight(totals, powered);
+                budget.midnight(totals, fed());
             }
             case USE_STARTS, USE_ENDS -> use(edge);
             case LIGHTS_ON, LIGHTS_OFF -> {
@@ -343,12 +362,24 @@ final class ChamberRunner implements Integrator.StepListener {
     private void power(double t, boolean on) {
         powered = on;
         outages.is(t, !on);
+        feed(t);
+    }
+
+    /** Whether electricity reaches the chamber: no outage, and a battery that is not empty. */
+    private boolean fed() {
+        return powered && solar.map(SolarRun::on).orElse(true);
+    }
+
+    /** Gives or takes the electricity of all consumers; what ran comes to rest first. */
+    private void feed(double t) {
+        boolean on = fed();
         for (int i = 0; i < thermostats.count(); i++) {
             if (network.cooler(i).unit().needsPower()) {
                 thermostats.rest(i, t);
             }
         }
         network.power(on);
+        solar.ifPresent(supply -> supply.leaveOut());
         budget.apply();
         integrator.restart(on ? STARTED : RESTED);
     }
@@ -360,7 +391,7 @@ final class ChamberRunner implements Integrator.StepListener {
         if (starts) {
             thermostats.rest(i, t);
         }
-        network.cooler(i).defrost(starts && powered, defrost.heaterW());
+        network.cooler(i).defrost(starts && fed(), defrost.heaterW());
         restart(edge);
     }
 
@@ -441,6 +472,7 @@ final class ChamberRunner implements Integrator.StepListener {
                         ice.spans())) {
             events.addAll(spans.until(end));
         }
+        solar.ifPresent(supply -> events.addAll(supply.spans(end)));
         events.sort(Comparator.comparingDouble(CourseEvent::fromS));
         return new Course(
                 run.chamberId(),
@@ -453,6 +485,7 @@ final class ChamberRunner implements Integrator.StepListener {
                 books.water(y),
                 watering.ledger(y, totals),
                 books.layersError(y),
+                solar.map(SolarRun::ledger),
                 network.reasons());
     }
 

@@ -1,6 +1,7 @@
 package org.wardon.heat;
 
 import java.util.List;
+import java.util.Optional;
 import org.wardon.produce.Reason;
 
 /**
@@ -17,6 +18,7 @@ import org.wardon.produce.Reason;
  * @param sand water of wetted walls
  * @param layersErrorShare error of the heat balance of the faces' layers, share of what entered
  *     them
+ * @param solar what panels and battery did, where they feed the chamber
  * @param reasons what had to be estimated, with an empty subject
  */
 public record Course(
@@ -30,6 +32,7 @@ public record Course(
         WaterLedger water,
         SandLedger sand,
         double layersErrorShare,
+        Optional<SolarLedger> solar,
         List<Reason> reasons) {
     /** Copies the lists. */
     public Course {
@@ -69,7 +72,7 @@ public record Course(
 
     /**
      * Returns the worst error of the balances of heat, of water, of the water of wetted walls and
-     * of ice.
+     * of ice and of solar energy.
      *
      * @return percent
      */
@@ -79,6 +82,7 @@ public record Course(
         for (CoolerTotals cooler : coolers) {
             worst = Math.max(worst, cooler.ice().map(IceLedger::errorShare).orElse(0.0));
         }
+        worst = Math.max(worst, solar.map(SolarLedger::errorShare).orElse(0.0));
         return 100 * worst;
     }
 

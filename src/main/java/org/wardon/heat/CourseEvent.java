@@ -26,6 +26,8 @@ public record CourseEvent(Kind kind, String subject, double fromS, double untilS
         /** No ice was left in a chamber with banks of ice. */
         ICE_GONE,
         /** The daily energy was used up. */
-        ENERGY_USED_UP
+        ENERGY_USED_UP,
+        /** The battery of a solar supply was empty, and nothing fed the chamber. */
+        BATTERY_EMPTY
     }
 }

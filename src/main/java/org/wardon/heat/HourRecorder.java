@@ -27,6 +27,7 @@ final class HourRecorder {
     private double lastUsedKg;
     private final double[][] ran;
     private final double[] lastRan;
+    private double lastPanel;
     private double lowest = Double.POSITIVE_INFINITY;
     private double highest = Double.NEGATIVE_INFINITY;
     private double supply = Double.NaN;
@@ -62,7 +63,7 @@ final class HourRecorder {
     }
 
     private void set(Hours.Column column, double value) {
-        Objects.requireNonNull(columns.get(column))[size] = value;
+        column(column)[size] = value;
     }
 
     /** Tells the ice there is for the next row, kg. */
@@ -107,6 +108,20 @@ final class HourRecorder {
         double kg = terms.facesWaterKg(totals) - lastWaterKg;
         double joule = terms.facesOutletJ(totals) - lastOutletJ;
         return kg > LEAST_WATER_KG ? joule / (kg * MoistAir.WATER_J_KG_K) : Double.NaN;
+    }
+
+    /** Adds panels and battery to the row written last. */
+    void supply(double panelJ, double share) {
+        int row = size - 1;
+        double[] atS = column(Hours.Column.AT_S);
+        double span = row == 0 ? atS[0] : atS[row] - atS[row - 1];
+        column(Hours.Column.PANEL_W)[row] = (panelJ - lastPanel) / span;
+        column(Hours.Column.BATTERY)[row] = share;
+        lastPanel = panelJ;
+    }
+
+    private double[] column(Hours.Column column) {
+        return Objects.requireNonNull(columns.get(column));
     }
 
     private void startSpan(double t, double[] totals, double respirationJ) {

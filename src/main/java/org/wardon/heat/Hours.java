@@ -35,7 +35,9 @@ public final class Hours {
         RESPIRATION_W,
         WATER_OUT_C,
         WATER_USED_KG,
-        ICE_KG
+        ICE_KG,
+        PANEL_W,
+        BATTERY
     }
 
     Hours(Map<Column, double[]> columns, double[][] ran, int rows) {
@@ -260,5 +262,25 @@ public final class Hours {
      */
     public double iceKg(int i) {
         return get(Column.ICE_KG, i);
+    }
+
+    /**
+     * Returns what solar panels could give, mean of the span before.
+     *
+     * @param i row
+     * @return W; 0 without a solar supply
+     */
+    public double panelW(int i) {
+        return get(Column.PANEL_W, i);
+    }
+
+    /**
+     * Returns the charge of the battery at the instant.
+     *
+     * @param i row
+     * @return 0 to 1; 0 without a solar supply
+     */
+    public double batteryShare(int i) {
+        return get(Column.BATTERY, i);
     }
 }

@@ -83,6 +83,6 @@ final class WarmUp {
                 DAYS * Timeline.DAY_S,
                 run.doorMode(),
                 run.controlMode(),
-                run.extras());
+                run.extras().onGrid());
     }
 }

@@ -15,7 +15,8 @@ import org.wardon.errors.Require;
  * @param coolers in the order they act; none for a passive chamber
  * @param setting what the keeper dials in
  * @param capacityKg most produce it takes, kg
- * @param outages hours without power, in order, none overlapping
+ * @param outages single spans without power, in order, none overlapping
+ * @param power hours without power every day, and what feeds it
  * @param humidifierKgH most water a humidifier adds, kg/h; 0 for none
  * @param heaterW a heater against cold nights, W; 0 for none
  * @param ethyleneScrub a scrubber of ethylene, where there is one
@@ -29,6 +30,7 @@ public record ChamberPlan(
         Setting setting,
         double capacityKg,
         List<OutagePlan> outages,
+        PowerPlan power,
         double humidifierKgH,
         double heaterW,
         Optional<EthyleneScrub> ethyleneScrub,

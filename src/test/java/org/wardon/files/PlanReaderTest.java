@@ -18,6 +18,7 @@ import org.wardon.cooling.Compressor;
 import org.wardon.cooling.Control;
 import org.wardon.cooling.Defrost;
 import org.wardon.cooling.Setting;
+import org.wardon.cooling.solar.SolarSupply;
 import org.wardon.enclosure.Beyond;
 import org.wardon.enclosure.Door;
 import org.wardon.enclosure.Face;
@@ -29,6 +30,7 @@ import org.wardon.plan.AtDoor;
 import org.wardon.plan.ChamberPlan;
 import org.wardon.plan.Chilled;
 import org.wardon.plan.Corrections;
+import org.wardon.plan.DailyOutage;
 import org.wardon.plan.EthyleneAround;
 import org.wardon.plan.KnownLife;
 import org.wardon.plan.LotPlan;
@@ -37,6 +39,7 @@ import org.wardon.plan.Move;
 import org.wardon.plan.OutagePlan;
 import org.wardon.plan.PackagePlan;
 import org.wardon.plan.Place;
+import org.wardon.plan.PowerPlan;
 import org.wardon.plan.Prices;
 import org.wardon.plan.Purpose;
 import org.wardon.plan.StartAir;
@@ -97,6 +100,28 @@ class PlanReaderTest {
                         new OutagePlan(LocalDateTime.parse("2026-03-03T18:00"), 6),
                         new OutagePlan(LocalDateTime.parse("2026-03-05T18:00"), 2.5)),
                 north.outages());
+        assertEquals(
+                new PowerPlan(
+                        List.of(
+                                new DailyOutage(
+                                        LocalTime.of(22, 30),
+                                        LocalTime.of(5, 0),
+                                        Optional.of(LocalDate.parse("2026-03-04")),
+                                        Optional.of(LocalDate.parse("2026-03-09")))),
+                        Optional.empty()),
+                north.power());
+        assertEquals(
+                new PowerPlan(
+                        List.of(),
+                        Optional.of(
+                                new SolarSupply(
+                                        800,
+                                        15,
+                                        180,
+                                        0.75,
+                                        new SolarSupply.Cells(4, 0.85, 60, 25),
+                                        OptionalDouble.of(1500)))),
+                EXAMPLE.getChamber("south").power());
         assertEquals(Optional.of(new StartAir(25, OptionalDouble.of(80))), north.starts());
         assertEquals(
                 new Corrections(1.1, 0.9, 0.95, 0.4, Optional.of(LocalDate.parse("2026-02-01"))),
@@ -147,6 +172,62 @@ class PlanReaderTest {
                         OptionalDouble.of(120)),
                 foam.inPlace());
         assertEquals(1.2 * Math.exp(2.5 * 0.02), foam.inPlace().worseFactor(), 1e-12);
+    }
+
+    @Test
+    void aSolarSupplyLeftOpenLooksToTheEquatorAndTellsItsDefaults() {
+        StorePlan plan = PlanReader.read(PLANS.resolve("solar/plan.json"), TableLookups.read());
+        assertEquals(
+                Optional.of(
+                        new SolarSupply(
+                                2500,
+                                34,
+                                0,
+                                0.8,
+                                new SolarSupply.Cells(2, 0.9, 50, 20),
+                                OptionalDouble.empty())),
+                plan.getChamber("north").power().solar());
+        List<String> told =
+                plan.assumed().stream()
+                        .map(PlanReaderTest::line)
+                        .filter(line -> line.contains(".supply."))
+                        .map(line -> line.replace("$.chambers[0].supply.solar.", ""))
+                        .toList();
+        assertEquals(
+                List.of(
+                        "tiltDeg 34 ° (common practice, no source)",
+                        "azimuthDeg 0 ° (common practice, no source)",
+                        "performanceRatio 0.8 1 (common practice, no source)",
+                        "batteryEfficiency 0.9 1 (common practice, no source)",
+                        "startChargePct 50 % (assumption)",
+                        "restartChargePct 20 % (assumption)"),
+                told);
+    }
+
+    @Test
+    void dailyOutagesBecomeSpansOverMidnight() {
+        DailyOutage nights =
+                new DailyOutage(
+                        LocalTime.of(18, 0),
+                        LocalTime.of(6, 0),
+                        Optional.empty(),
+                        Optional.empty());
+        LocalDateTime start = LocalDateTime.parse("2026-03-02T00:00");
+        assertEquals(
+                List.of(
+                        new OutagePlan(LocalDateTime.parse("2026-03-01T18:00"), 12),
+                        new OutagePlan(LocalDateTime.parse("2026-03-02T18:00"), 12),
+                        new OutagePlan(LocalDateTime.parse("2026-03-03T18:00"), 12)),
+                nights.within(start, start.plusDays(2)));
+        DailyOutage once =
+                new DailyOutage(
+                        LocalTime.of(9, 0),
+                        LocalTime.of(11, 15),
+                        Optional.of(LocalDate.parse("2026-03-03")),
+                        Optional.of(LocalDate.parse("2026-03-03")));
+        assertEquals(
+                List.of(new OutagePlan(LocalDateTime.parse("2026-03-03T09:00"), 2.25)),
+                once.within(start, start.plusDays(9)));
     }
 
     @Test

@@ -98,6 +98,14 @@ public final class Chambers {
     }
 
     static Compressor unit(Control control, double minMinutes) {
+        return unit(control, minMinutes, OptionalDouble.empty());
+    }
+
+    static Compressor limited(Control control, double dailyKWh) {
+        return unit(control, 3, OptionalDouble.of(dailyKWh));
+    }
+
+    private static Compressor unit(Control control, double minMinutes, OptionalDouble dailyKWh) {
         return new Compressor(
                 12_000,
                 4_800,
@@ -113,7 +121,7 @@ public final class Chambers {
                 3,
                 -5,
                 Optional.empty(),
-                OptionalDouble.empty());
+                dailyKWh);
     }
 
     static Weather weather(int hours) {

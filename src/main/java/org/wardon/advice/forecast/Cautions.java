@@ -9,6 +9,8 @@ import org.wardon.air.StandardAtmosphere;
 import org.wardon.air.Timeline;
 import org.wardon.cooling.Cooler;
 import org.wardon.cooling.CoolerCautions;
+import org.wardon.cooling.solar.Inverter;
+import org.wardon.cooling.solar.SolarSupply;
 import org.wardon.heat.Course;
 import org.wardon.heat.CourseEvent;
 import org.wardon.plan.Assumed;
@@ -102,6 +104,7 @@ final class Cautions {
         }
         FaceMoisture.of(chamber, outcome).forEach(c -> add(c.level(), c.reason()));
         CoolersAtWork.of(outcome, chamber).forEach(c -> add(c.level(), c.reason()));
+        chamber.power().solar().ifPresent(supply -> solar(chamber, supply));
         for (Reason reason : course.reasons()) {
             add(
                     Level.NOTE,
@@ -110,6 +113,31 @@ final class Cautions {
                             List.of(chamber.id()),
                             reason.arguments(),
                             reason.sourceId()));
+        }
+    }
+
+    private void solar(ChamberPlan chamber, SolarSupply supply) {
+        add(Level.CAUTION, Reason.about("solar-hazards", chamber.id(), PRACTICE));
+        List<Boolean> carried =
+                Inverter.carries(
+                        supply.inverterW(),
+                        Inverter.othersW(
+                                chamber.enclosure().gains(),
+                                chamber.heaterW(),
+                                chamber.humidifierKgH()),
+                        chamber.coolers());
+        for (int i = 0; i < carried.size(); i++) {
+            if (!carried.get(i)) {
+                add(
+                        Level.CAUTION,
+                        Reason.about(
+                                "inverter-small",
+                                chamber.id(),
+                                OWN_RULE,
+                                Argument.of(i + 1, "1"),
+                                Argument.of(chamber.coolers().get(i).mostElectricW(), "W"),
+                                Argument.of(supply.inverterW().orElseThrow(), "W")));
+            }
         }
     }
 
@@ -130,6 +158,16 @@ final class Cautions {
             case ICE_GONE -> {
                 // Told with the hour among what coolers do.
             }
+            case BATTERY_EMPTY ->
+                    add(
+                            Level.CAUTION,
+                            Reason.about(
+                                    "battery-empty",
+                                    chamber.id(),
+                                    "own",
+                                    told,
+                                    BatteryNights.at(
+                                            BatteryNights.first(course).orElseThrow(), outcome)));
             case OUTAGE -> add(Level.NOTE, Reason.about("outage", chamber.id(), "own", told));
         }
     }

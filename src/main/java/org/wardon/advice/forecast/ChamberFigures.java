@@ -10,11 +10,13 @@ import org.wardon.files.forecast.ChamberForecast.AirC;
 import org.wardon.files.forecast.ChamberForecast.LoadKWh;
 import org.wardon.files.forecast.ChamberForecast.MeanMax;
 import org.wardon.files.forecast.ChamberForecast.OfCooler;
+import org.wardon.files.forecast.ChamberForecast.Solar;
 import org.wardon.files.forecast.MeanMinMax;
 import org.wardon.heat.CoolerTotals;
 import org.wardon.heat.Course;
 import org.wardon.heat.HeatLedger;
 import org.wardon.heat.Hours;
+import org.wardon.heat.SolarLedger;
 import org.wardon.plan.ChamberPlan;
 
 /** Figures of one chamber over the course. */
@@ -52,12 +54,15 @@ final class ChamberFigures {
                 load(course.heat()),
                 course.heat().removed() / J_PER_KWH,
                 energyKWh,
-                energyKWh * outcome.model().plan().prices().energyPerKWh(),
+                chamber.power().solar().isPresent()
+                        ? 0
+                        : energyKWh * outcome.model().plan().prices().energyPerKWh(),
                 course.waterUsedKg(),
                 co2,
                 ethylenePpm(),
                 course.balanceErrorPct(),
-                course.coolers().stream().map(ChamberFigures::cooler).toList());
+                course.coolers().stream().map(ChamberFigures::cooler).toList(),
+                course.solar().map(this::solar));
     }
 
     private static OfCooler cooler(CoolerTotals did) {
@@ -80,6 +85,19 @@ final class ChamberFigures {
         var level = outcome.ethylene(chamber.id());
         Hours hours = course.hours();
         return max(hours, i -> level.ppmAt(hours.atS(i)));
+    }
+
+    private Solar solar(SolarLedger did) {
+        return new Solar(
+                did.panelJ() / J_PER_KWH,
+                did.usedJ() / J_PER_KWH,
+                did.spilledJ() / J_PER_KWH,
+                did.lostJ() / J_PER_KWH,
+                did.startJ() / J_PER_KWH,
+                did.endJ() / J_PER_KWH,
+                100 * did.lowestShare(),
+                did.withoutS() / Timeline.HOUR_S,
+                BatteryNights.first(course).map(event -> BatteryNights.time(event, outcome)));
     }
 
     private static LoadKWh load(HeatLedger heat) {

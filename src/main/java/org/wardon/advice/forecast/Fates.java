@@ -162,7 +162,9 @@ final class Fates {
         return history.withEthylene(ppm);
     }
 
-    /** The last 24 hours of a history without an outage where it ends, or its last 24 hours. */
+    /**
+     * The last 24 hours of a history without a single outage where it ends, or its last 24 hours.
+     */
     private Window beyond(LotSheet sheet, LotHistory history) {
         Window whole = Window.lastDay(history);
         List<Visit> visits = sheet.visits();
@@ -172,7 +174,7 @@ final class Fates {
         Visit end = visits.get(visits.size() - 1);
         double hereS = Math.max(history.timeS(0), end.hereFromS());
         Window last = new Window(fromS(whole.fromS(), hereS, whole.toS()), whole.toS());
-        List<Outage> outages = model.outages(model.plan().getChamber(end.chamber()));
+        List<Outage> outages = model.singleOutages(model.plan().getChamber(end.chamber()));
         Window window = last;
         for (int i = outages.size() - 1; i >= 0; i--) {
             Outage outage = outages.get(i);

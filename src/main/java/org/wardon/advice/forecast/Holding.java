@@ -2,12 +2,15 @@ package org.wardon.advice.forecast;
 
 import java.util.ArrayList;
 import java.util.List;
+import java.util.Optional;
 import java.util.OptionalDouble;
+import java.util.Set;
 import java.util.function.DoublePredicate;
 import org.wardon.air.Timeline;
 import org.wardon.cooling.Cooler;
 import org.wardon.cooling.Outage;
 import org.wardon.heat.Course;
+import org.wardon.heat.CourseEvent;
 import org.wardon.heat.Hours;
 import org.wardon.lots.LotHistory;
 import org.wardon.plan.ChamberPlan;
@@ -46,6 +49,9 @@ record Holding(
     static final double SETTLE_HOURS = 6;
 
     private static final String RULE = "assumption";
+
+    /** Reasons that no lack of power brings. */
+    private static final Set<String> TOO_COLD = Set.of("near-freezing", "chilling-in-stay");
 
     Holding {
         reasons = List.copyOf(reasons);
@@ -98,6 +104,7 @@ record Holding(
             judgeAir(pulledDownS, outside, counted);
             lots.forEach(this::judgeLot);
             judgeRises();
+            judgeSupply();
             OptionalDouble pull =
                     pulledDownS.isPresent()
                             ? OptionalDouble.of(
@@ -160,6 +167,22 @@ record Holding(
                         Argument.of(outside, "h"),
                         Argument.of(counted, "h"),
                         Argument.of(set, "C"));
+            }
+        }
+
+        /** Where something is too warm and the battery ran out, that is the first thing to say. */
+        private void judgeSupply() {
+            Optional<CourseEvent> first = BatteryNights.first(course);
+            boolean warm = reasons.stream().anyMatch(r -> !TOO_COLD.contains(r.code()));
+            if (warm && first.isPresent()) {
+                reasons.add(
+                        0,
+                        Reason.about(
+                                "battery-runs-out",
+                                chamber.id(),
+                                RULE,
+                                Argument.of(BatteryNights.hours(course), "h"),
+                                BatteryNights.at(first.get(), outcome)));
             }
         }
 

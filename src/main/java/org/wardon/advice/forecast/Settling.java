@@ -31,7 +31,7 @@ final class Settling {
         double lastS = horizonS + StoreRun.MOST_BEYOND_DAYS * Timeline.DAY_S;
         for (ChamberPlan chamber : model.plan().chambers()) {
             Course course = ById.get(plain, chamber.id());
-            List<Outage> outages = model.outages(chamber);
+            List<Outage> outages = model.singleOutages(chamber);
             double atS = horizonS;
             if (!settled(course.lots(), outages, atS)) {
                 Course sketch = model.sketch(chamber, lastS, plain);

@@ -1,5 +1,7 @@
 package org.wardon.advice.forecast;
 
+import java.time.LocalDateTime;
+import java.util.ArrayList;
 import java.util.HashMap;
 import java.util.LinkedHashMap;
 import java.util.List;
@@ -29,7 +31,9 @@ import org.wardon.keeping.Draw;
 import org.wardon.lots.LotHistory;
 import org.wardon.plan.ChamberPlan;
 import org.wardon.plan.Corrections;
+import org.wardon.plan.DailyOutage;
 import org.wardon.plan.LotPlan;
+import org.wardon.plan.OutagePlan;
 import org.wardon.plan.StorePlan;
 import org.wardon.plan.WithoutChamber;
 
@@ -260,17 +264,31 @@ final class StoreModel {
                 .withStays(stays)
                 .withFactors(factors(chamber.corrections()))
                 .withStart(start(chamber))
-                .withExtras(new ChamberRun.Extras(chamber.heaterW(), chamber.humidifierKgH(), air));
+                .withExtras(
+                        new ChamberRun.Extras(
+                                chamber.heaterW(),
+                                chamber.humidifierKgH(),
+                                air,
+                                chamber.power().solar()));
     }
 
+    /** All spans without power of a chamber, to the end of the longest run, none overlapping. */
     List<Outage> outages(ChamberPlan chamber) {
-        return chamber.outages().stream()
-                .map(
-                        outage ->
-                                new Outage(
-                                        timeline.secondsAt(outage.from()),
-                                        timeline.secondsAt(outage.to())))
-                .toList();
+        LocalDateTime end = timeline.localAt(plan.durationS()).plusDays(StoreRun.MOST_BEYOND_DAYS);
+        List<Outage> all = new ArrayList<>(singleOutages(chamber));
+        for (DailyOutage daily : chamber.power().daily()) {
+            daily.within(plan.from(), end).forEach(outage -> all.add(span(outage)));
+        }
+        return Outage.joined(all);
+    }
+
+    /** Spans without power that do not come back every day, in order. */
+    List<Outage> singleOutages(ChamberPlan chamber) {
+        return chamber.outages().stream().map(this::span).toList();
+    }
+
+    private Outage span(OutagePlan outage) {
+        return new Outage(timeline.secondsAt(outage.from()), timeline.secondsAt(outage.to()));
     }
 
     private static Factors factors(Corrections c) {

@@ -43,6 +43,10 @@ final class StoreSeries {
         columns.put("co2Ppm", hours::co2Ppm);
         columns.put("ethylenePpm", i -> level.ppmAt(hours.atS(i)));
         ofCoolers(course, columns);
+        if (course.solar().isPresent()) {
+            columns.put("panelW", hours::panelW);
+            columns.put("batteryPct", i -> 100 * hours.batteryShare(i));
+        }
         writer.chamber(id, times(hours.size(), hours::atS), columns);
     }
 

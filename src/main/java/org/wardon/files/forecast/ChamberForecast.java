@@ -1,5 +1,6 @@
 package org.wardon.files.forecast;
 
+import java.time.LocalDateTime;
 import java.util.List;
 import java.util.Optional;
 import java.util.OptionalDouble;
@@ -25,12 +26,13 @@ import java.util.OptionalDouble;
  * @param heatRemovedKWh heat taken by all coolers, kWh; by walls kept wet the heat of what
  *     evaporated outside, which stands in {@code loadKWh.walls} too
  * @param energyKWh electricity, kWh
- * @param energyCost its cost, currency
+ * @param energyCost its cost, currency; 0 from a solar supply
  * @param waterUsedKg water evaporated and bled off, kg
  * @param co2PpmMax highest CO2, ppm
  * @param ethylenePpmMax highest ethylene, ppm
  * @param balanceErrorPct error of the balances, percent of the throughput
  * @param coolers what each cooler did, in the order of the plan
+ * @param solar panels and battery; absent where a grid feeds the chamber
  */
 public record ChamberForecast(
         String id,
@@ -53,7 +55,8 @@ public record ChamberForecast(
         double co2PpmMax,
         double ethylenePpmMax,
         double balanceErrorPct,
-        List<OfCooler> coolers) {
+        List<OfCooler> coolers,
+        Optional<Solar> solar) {
     /** Copies the list. */
     public ChamberForecast {
         coolers = List.copyOf(coolers);
@@ -85,6 +88,30 @@ public record ChamberForecast(
      * @param leftKg ice at the end, kg
      */
     public record Ice(double meltedKg, double refrozenKg, double leftKg) {}
+
+    /**
+     * Panels and battery; panel and start are used, lost, spilled or left at the end.
+     *
+     * @param panelKWh what the panels could give, kWh
+     * @param usedKWh what the chamber drew, kWh
+     * @param spilledKWh what found the battery full, kWh
+     * @param lossesKWh what the battery lost, kWh
+     * @param startKWh charge at the start, kWh
+     * @param endKWh charge at the end, kWh
+     * @param batteryLowPct lowest charge, percent
+     * @param hoursWithout hours without power because the battery was empty, h
+     * @param firstWithout local time at which it first ran out; absent where it never did
+     */
+    public record Solar(
+            double panelKWh,
+            double usedKWh,
+            double spilledKWh,
+            double lossesKWh,
+            double startKWh,
+            double endKWh,
+            double batteryLowPct,
+            double hoursWithout,
+            Optional<LocalDateTime> firstWithout) {}
 
     /**
      * The chamber's air.

@@ -33,11 +33,12 @@ public final class SeriesWriter {
             List.of("meanC", "surfaceC", "coreC", "respirationW", "massKg", "lifeUsedPct");
 
     /**
-     * Columns of a chamber whose coolers have them: water leaving a film, water used in the hour
-     * before, ice left. After them may come the share of the hour before that each cooler ran,
-     * {@link #running}.
+     * Columns of a chamber that has them: water leaving a film, water used in the hour before, ice
+     * left, power of panels, charge of a battery. After them may come the share of the hour before
+     * that each cooler ran, {@link #running}.
      */
-    public static final List<String> OPTIONAL = List.of("waterOutC", "waterUsedKg", "iceKg");
+    public static final List<String> OPTIONAL =
+            List.of("waterOutC", "waterUsedKg", "iceKg", "panelW", "batteryPct");
 
     private final Path folder;
     private final Timeline timeline;

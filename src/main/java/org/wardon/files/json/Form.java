@@ -45,6 +45,7 @@ final class Form {
         return switch (form) {
             case "zone" -> "no time zone known here";
             case "localTime" -> "no time of day";
+            case "localDate" -> "no day of the calendar";
             default -> "no day and time of the calendar";
         };
     }

@@ -3,6 +3,7 @@ package org.wardon.heat.network;
 import org.wardon.air.MoistAir;
 import org.wardon.cooling.Setting;
 import org.wardon.cooling.Thermostat;
+import org.wardon.cooling.solar.Inverter;
 import org.wardon.enclosure.PeopleHeat;
 import org.wardon.heat.laws.FreeWater;
 import org.wardon.heat.solver.Tree;
@@ -44,6 +45,12 @@ final class InnerGains implements Part {
 
     /** Water of the humidifier, °C (assumption). */
     private static final double WATER_C = 20;
+
+    /** Electricity a humidifier turns water to mist with, J/kg. */
+    static final double HUMIDIFIER_J_KG = 3_600 * Inverter.HUMIDIFIER_WH_KG;
+
+    /** What a kilogram of that water brings, J. */
+    private static final double WATER_HEAT_J_KG = MoistAir.WATER_J_KG_K * WATER_C + HUMIDIFIER_J_KG;
 
     /** The humidifier gives all it can this far below the wanted humidity (assumption). */
     private static final double HUMIDITY_BAND = 0.04;
@@ -119,7 +126,7 @@ final class InnerGains implements Part {
         double breath = PeopleHeat.LATENT_SHARE * body / MoistAir.vapourEnthalpyJkg(BODY_C);
         double heater = powered && heaterW > 0 ? heaterW * heaterShare(air.airC) : 0;
         double mist = humidifier(air);
-        double mistHeat = mist * MoistAir.WATER_J_KG_K * WATER_C;
+        double mistHeat = mist * WATER_HEAT_J_KG;
         flows[flowAt + FANS] = fans;
         flows[flowAt + LIGHTS] = lights;
         flows[flowAt + PEOPLE] = body;
@@ -156,7 +163,7 @@ final class InnerGains implements Part {
             humidifierByAirC =
                     -byHumidity * air.vapourPa / (psat * psat) * Saturation.slopePaPerK(air.airC);
         }
-        double waterHeat = MoistAir.WATER_J_KG_K * WATER_C;
+        double waterHeat = WATER_HEAT_J_KG;
         double heatByAirC = peopleByAirC + heaterByAirC + humidifierByAirC * waterHeat;
         double breathByAirC =
                 PeopleHeat.LATENT_SHARE * peopleByAirC / MoistAir.vapourEnthalpyJkg(BODY_C);
@@ -182,7 +189,7 @@ final class InnerGains implements Part {
                 PeopleHeat.LATENT_SHARE * peopleByAirC * airC / MoistAir.vapourEnthalpyJkg(BODY_C);
         change[flowAt + HEATER] = heaterByAirC * airC;
         change[flowAt + HUMIDIFIER] = mist;
-        change[flowAt + HUMIDIFIER_HEAT] = mist * MoistAir.WATER_J_KG_K * WATER_C;
+        change[flowAt + HUMIDIFIER_HEAT] = mist * WATER_HEAT_J_KG;
         change[flowAt + AIR_C] = airC;
     }
 }

@@ -353,7 +353,7 @@ public final class Terms {
     }
 
     /**
-     * Electricity of compressors, pumps, chillers, fans, lights, heater and defrost.
+     * Electricity of compressors, pumps, chillers, fans, lights, heater, humidifier and defrost.
      *
      * @param totals integrals of the flows
      * @return J
@@ -364,6 +364,7 @@ public final class Terms {
                 + fans(totals)
                 + lights(totals)
                 + heater(totals)
+                + InnerGains.HUMIDIFIER_J_KG * humidifierWater(totals)
                 + defrost(totals);
     }
 

@@ -230,6 +230,18 @@ public final class Integrator {
     }
 
     /**
+     * Tells the integrals of the flows as the step tried last would leave them; for a trigger that
+     * hangs on them.
+     *
+     * @param h length of that step
+     * @param into {@code [flow]}, filled
+     */
+    public void tried(double h, double[] into) {
+        System.arraycopy(totals, 0, into, 0, totals.length);
+        method.addFlows(h, into);
+    }
+
+    /**
      * Returns the number of steps taken.
      *
      * @return steps

@@ -50,12 +50,16 @@ class AnswerWriterTest {
                 "id holds airC humidityPct hoursOutsideBand hoursDisturbed pullDownHours peakLoadW"
                         + " removedPeakW intakeKgPerDay respirationLoadW o2PctMin loadKWh"
                         + " heatRemovedKWh energyKWh energyCost waterUsedKg co2PpmMax"
-                        + " ethylenePpmMax balanceErrorPct coolers",
+                        + " ethylenePpmMax balanceErrorPct coolers solar",
                 chamber);
         assertNames(
                 "kind runningHours heatRemovedKWh energyKWh waterUsedKg ice",
                 chamber.get("coolers").get(0));
         assertNames("meltedKg refrozenKg leftKg", chamber.get("coolers").get(0).get("ice"));
+        assertNames(
+                "panelKWh usedKWh spilledKWh lossesKWh startKWh endKWh batteryLowPct hoursWithout"
+                        + " firstWithout",
+                chamber.get("solar"));
         assertNames("mean min max p95", chamber.get("airC"));
         assertNames("mean min max", chamber.get("humidityPct"));
         assertNames("mean max", chamber.get("respirationLoadW"));
@@ -187,7 +191,10 @@ class AnswerWriterTest {
                                         120,
                                         50,
                                         0,
-                                        Optional.of(new ChamberForecast.Ice(900, 800, 100)))));
+                                        Optional.of(new ChamberForecast.Ice(900, 800, 100)))),
+                        Optional.of(
+                                new ChamberForecast.Solar(
+                                        60, 50, 6, 3, 5, 6, 12.5, 0, Optional.empty())));
         LotForecast lot =
                 new LotForecast(
                         "M1",
