@@ -9,6 +9,7 @@ import org.wardon.errors.Require;
  * @param name which face
  * @param beyond what lies behind it
  * @param azimuthDeg compass direction it looks to, degrees from north by east; not used level
+ * @param tiltDeg 0 level and looking up, 90 upright; a floor looks down and hears of none
  * @param solarAbsorptance share of sunlight taken up outside, 0 to 1
  * @param layers from outside to inside, at least one
  */
@@ -16,8 +17,12 @@ public record Face(
         FaceName name,
         Beyond beyond,
         double azimuthDeg,
+        double tiltDeg,
         double solarAbsorptance,
         List<Layer> layers) {
+    /** Steepest roof, degrees. */
+    public static final double STEEPEST_ROOF_DEG = 75;
+
     /** Most layers of a face that may have bridges. */
     public static final int MOST_BRIDGED = 8;
 
@@ -32,6 +37,31 @@ public record Face(
                 "face " + name + " has " + bridged + " bridged layers; at most " + MOST_BRIDGED);
         Require.within("solarAbsorptance of " + name, solarAbsorptance, 0, 1, "", "");
         Require.within("azimuthDeg of " + name, azimuthDeg, -360, 360, "°", "");
+        double steepest = name == FaceName.ROOF ? STEEPEST_ROOF_DEG : uprightDeg(name);
+        double flattest = name == FaceName.ROOF ? 0 : uprightDeg(name);
+        Require.within("tiltDeg of " + name, tiltDeg, flattest, steepest, "°", "");
+    }
+
+    /**
+     * A face as it usually stands: a level roof or floor, an upright wall.
+     *
+     * @param name which face
+     * @param beyond what lies behind it
+     * @param azimuthDeg compass direction it looks to, degrees from north by east
+     * @param solarAbsorptance share of sunlight taken up outside, 0 to 1
+     * @param layers from outside to inside
+     */
+    public Face(
+            FaceName name,
+            Beyond beyond,
+            double azimuthDeg,
+            double solarAbsorptance,
+            List<Layer> layers) {
+        this(name, beyond, azimuthDeg, uprightDeg(name), solarAbsorptance, layers);
+    }
+
+    private static double uprightDeg(FaceName name) {
+        return name == FaceName.ROOF || name == FaceName.FLOOR ? 0 : 90;
     }
 
     /**

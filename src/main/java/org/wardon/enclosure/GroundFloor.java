@@ -2,6 +2,8 @@ package org.wardon.enclosure;
 
 import java.util.ArrayList;
 import java.util.List;
+import org.wardon.air.Timeline;
+import org.wardon.air.YearWave;
 import org.wardon.errors.Require;
 
 /**
@@ -17,6 +19,12 @@ import org.wardon.errors.Require;
  * @param soil what it lies on
  */
 public record GroundFloor(double areaM2, double perimeterM, double wallThicknessM, Soil soil) {
+    /**
+     * How much later than outdoors the yearly wave comes through the ground, days: one month.
+     * Source: ISO 13370:2017, periodic heat flow of a slab on ground, from memory.
+     */
+    public static final double LATE_DAYS = 30.4;
+
     /** Depth of soil with capacity, m. */
     private static final double SOIL_DEPTH_M = 0.5;
 
@@ -110,6 +118,28 @@ public record GroundFloor(double areaM2, double perimeterM, double wallThickness
         return dt < b
                 ? 2 * lambda / (Math.PI * b + dt) * Math.log(Math.PI * b / dt + 1)
                 : lambda / (0.457 * b + dt);
+    }
+
+    /**
+     * Returns how much of the yearly swing outdoors acts below the floor: the periodic coefficient
+     * of the standard over its steady one. Never above 1: the standard's strip along the edge would
+     * say so for a very small floor (departure).
+     *
+     * <p>Source: ISO 13370:2017, annex on periodic heat flow, slab on ground without edge
+     * insulation: {@code 0.37 P lambda ln(delta/dt + 1)} with the depth delta the yearly wave
+     * reaches (from memory; 3.2 m in sand or gravel, 2.2 m in clay).
+     *
+     * @param floorM2KW resistance of the floor's layers, m2 K/W
+     * @param insideFilmM2KW resistance of the inner surface, m2 K/W
+     * @return 0 to 1
+     */
+    public double swingShare(double floorM2KW, double insideFilmM2KW) {
+        double diffusivity = soil.conductivityWmK / (soil.densityKgM3 * soil.specificHeatJkgK);
+        double reachM =
+                GroundTemperature.dampingDepthM(diffusivity, YearWave.YEAR_DAYS * Timeline.DAY_S);
+        double dt = equivalentM(floorM2KW, insideFilmM2KW);
+        double periodicWK = 0.37 * perimeterM * soil.conductivityWmK * Math.log(reachM / dt + 1);
+        return Math.min(1, periodicWK / (areaM2 * wattsM2K(floorM2KW, insideFilmM2KW)));
     }
 
     /**

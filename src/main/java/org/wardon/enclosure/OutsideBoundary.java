@@ -3,7 +3,10 @@ package org.wardon.enclosure;
 import java.util.ArrayList;
 import java.util.Arrays;
 import java.util.List;
+import java.util.Optional;
 import org.wardon.air.SolAir;
+import org.wardon.air.Timeline;
+import org.wardon.air.YearWave;
 import org.wardon.produce.Reason;
 
 /**
@@ -97,14 +100,15 @@ public final class OutsideBoundary {
         double[] temperature = new double[n];
         double[] film = new double[n];
         boolean roof = face.name() == FaceName.ROOF;
+        double openSky = SolAir.SKY_LOSS_K * Math.cos(Math.toRadians(face.tiltDeg()));
         for (int h = 0; h < n; h++) {
             film[h] = 1 / Films.outsideM2KW(around.weather().windMs(h));
             // No sun reaches the underside of a floor on posts.
             double sun =
                     face.name() == FaceName.FLOOR
                             ? 0
-                            : around.sun().onFaceWm2(h, roof ? 0 : 90, face.azimuthDeg());
-            double sky = roof ? SolAir.SKY_LOSS_K * around.sun().skyClearness(h) : 0;
+                            : around.sun().onFaceWm2(h, face.tiltDeg(), face.azimuthDeg());
+            double sky = roof ? openSky * around.sun().skyClearness(h) : 0;
             temperature[h] =
                     SolAir.temperatureC(
                             around.weather().temperatureC(h),
@@ -121,15 +125,30 @@ public final class OutsideBoundary {
         return new OutsideBoundary(temperature, film, flow, List.of(), reasons);
     }
 
-    /** The ISO 13370 slab; a wall against soil is taken as part of it (assumption). */
+    /**
+     * The ISO 13370 slab over ground that follows the year; a wall against soil is taken as part of
+     * it (assumption).
+     */
     private static OutsideBoundary ground(Enclosure enclosure, Face face, Surroundings around) {
-        double deep = around.deepGroundC().orElseGet(around::meanOutdoorC);
+        Optional<YearWave> year = around.year();
+        double deep = year.map(YearWave::meanC).orElseGet(around::meanOutdoorC);
         HeatFlow flow = HeatFlow.through(face.name(), deep, around.insideMeanC());
-        List<Layer> soil =
-                GroundFloor.under(enclosure)
-                        .soilLayers(UValue.resistanceM2KW(face.asBuilt()), Films.insideM2KW(flow));
+        GroundFloor floor = GroundFloor.under(enclosure);
+        double layers = UValue.resistanceM2KW(face.asBuilt());
+        double film = Films.insideM2KW(flow);
+        double[] temperature = constant(around.hours() + 1, deep);
+        if (year.isPresent()) {
+            double share = floor.swingShare(layers, film);
+            for (int h = 0; h < temperature.length; h++) {
+                double t = h * Timeline.HOUR_S;
+                double day =
+                        around.timeline().dayOfYear(t)
+                                + around.timeline().secondOfDay(t) / Timeline.DAY_S;
+                temperature[h] = year.get().temperatureC(day, share, GroundFloor.LATE_DAYS);
+            }
+        }
         List<Reason> reasons =
-                around.deepGroundC().isPresent()
+                year.isPresent()
                         ? List.of()
                         : List.of(
                                 Reason.about(
@@ -137,9 +156,13 @@ public final class OutsideBoundary {
                                         "",
                                         "assumption",
                                         Reason.Argument.of(deep, "C")));
-        int n = around.hours() + 1;
         // The film is inside the slab's resistance already: a tight one stands here.
-        return new OutsideBoundary(constant(n, deep), constant(n, TIGHT_WM2K), flow, soil, reasons);
+        return new OutsideBoundary(
+                temperature,
+                constant(temperature.length, TIGHT_WM2K),
+                flow,
+                floor.soilLayers(layers, film),
+                reasons);
     }
 
     private static double[] constant(int n, double value) {

@@ -1,32 +1,33 @@
 package org.wardon.enclosure;
 
 import java.util.Map;
-import java.util.OptionalDouble;
+import java.util.Optional;
 import org.wardon.air.Site;
 import org.wardon.air.Sunshine;
 import org.wardon.air.Timeline;
 import org.wardon.air.Weather;
+import org.wardon.air.YearWave;
 import org.wardon.errors.Require;
 
 /**
  * What surrounds a chamber during a run. Its sun is worked out once for all faces.
  *
- * @param site where the store stands
+ * @param site where the store stands, with the course of its year where known
+ * @param timeline the run's calendar
  * @param weather outdoor weather
  * @param sun its sun, for hour 0 to {@code hours}
  * @param hours length of the run, h
  * @param insideMeanC temperature the chamber is expected to keep, °C; tells heat flowing up from
  *     down
- * @param deepGroundC yearly mean outdoors, °C; where empty the mean of the run's weather is taken
  * @param neighbourC hourly air of other chambers by id, °C, as far as they are known
  */
 public record Surroundings(
         Site site,
+        Timeline timeline,
         Weather weather,
         Sunshine sun,
         int hours,
         double insideMeanC,
-        OptionalDouble deepGroundC,
         Map<String, HourlyAir> neighbourC) {
     /** Air of a neighbour, hour by hour. */
     @FunctionalInterface
@@ -59,8 +60,7 @@ public record Surroundings(
     public static Surroundings of(
             Site site, Timeline timeline, Weather weather, int hours, double insideMeanC) {
         Sunshine sun = Sunshine.of(site, timeline, weather, hours);
-        return new Surroundings(
-                site, weather, sun, hours, insideMeanC, OptionalDouble.empty(), Map.of());
+        return new Surroundings(site, timeline, weather, sun, hours, insideMeanC, Map.of());
     }
 
     /**
@@ -70,18 +70,17 @@ public record Surroundings(
      * @return the copy
      */
     public Surroundings withNeighbours(Map<String, HourlyAir> neighbours) {
-        return new Surroundings(site, weather, sun, hours, insideMeanC, deepGroundC, neighbours);
+        return new Surroundings(site, timeline, weather, sun, hours, insideMeanC, neighbours);
     }
 
     /**
-     * Returns a copy with a known ground.
+     * Returns the course of the year that the ground follows: what the site tells, else that of a
+     * run of a year.
      *
-     * @param yearlyMeanC yearly mean outdoors, °C
-     * @return the copy
+     * @return empty where nobody knows; the ground is then taken at the mean of the run's weather
      */
-    public Surroundings withDeepGround(double yearlyMeanC) {
-        return new Surroundings(
-                site, weather, sun, hours, insideMeanC, OptionalDouble.of(yearlyMeanC), neighbourC);
+    public Optional<YearWave> year() {
+        return site.year().or(() -> YearWave.of(weather, timeline));
     }
 
     /**

@@ -99,6 +99,7 @@ final class ChamberRules {
             ids.known(face.at("buildUp"), plan.at("buildUps").names(), "build-up of this plan");
             face.at("layers").items().forEach(this::layer);
             bridges(face.at("layers"));
+            tilt(face);
             beyond(face.at("beyond"), chamber);
             if (name.text().equals(Optional.of("floor"))) {
                 floor(face.at("beyond"));
@@ -123,6 +124,25 @@ final class ChamberRules {
                     face.at("face").path(),
                     "is " + Json.quoted(word) + ", as " + first + " is too",
                     "accepted: each face once");
+        }
+    }
+
+    private void tilt(Part face) {
+        Part tilt = face.at("tiltDeg");
+        if (tilt.number().isEmpty() || faults.at(tilt.path())) {
+            return;
+        }
+        Optional<String> name = face.at("face").text();
+        if (!name.equals(Optional.of("roof"))) {
+            faults.add(
+                    tilt.path(),
+                    "stands on " + name.map(Json::quoted).orElse("no face"),
+                    "accepted: on the roof only");
+        } else if (tilt.number().getAsDouble() > 0 && !face.has("azimuthDeg")) {
+            faults.add(
+                    tilt.path(),
+                    "slopes without a direction",
+                    "accepted: azimuthDeg given beside it");
         }
     }
 

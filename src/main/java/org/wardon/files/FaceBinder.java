@@ -37,6 +37,7 @@ final class FaceBinder {
                 name,
                 beyond,
                 inputs.numberElse(face, "azimuthDeg", Defaults.azimuthDeg(name)),
+                inputs.numberElse(face, "tiltDeg", Defaults.tiltDeg(name)),
                 absorptance(face, buildUp, layers, beyond),
                 layers.items().stream().map(this::layer).toList());
     }

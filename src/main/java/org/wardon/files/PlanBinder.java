@@ -4,6 +4,7 @@ import java.time.LocalDateTime;
 import java.time.ZoneId;
 import java.util.List;
 import org.wardon.air.Site;
+import org.wardon.air.YearWave;
 import org.wardon.files.json.Part;
 import org.wardon.plan.ChamberPlan;
 import org.wardon.plan.Defaults;
@@ -27,7 +28,7 @@ final class PlanBinder {
 
     StorePlan bind(WeatherSource weather, String fileName) {
         LocalDateTime from = inputs.time(plan, "from").orElseThrow();
-        Site site = site();
+        Site site = site(weather);
         ChamberBinder chamberBinder =
                 new ChamberBinder(
                         plan.at("buildUps"),
@@ -61,13 +62,26 @@ final class PlanBinder {
                 inputs.assumed());
     }
 
-    private Site site() {
-        Part site = plan.at("site");
-        return new Site(
-                inputs.number(site, "latitudeDeg"),
-                inputs.number(site, "longitudeDeg"),
-                inputs.number(site, "elevationM", Defaults.ELEVATION_M),
-                ZoneId.of(inputs.text(site, "zone")));
+    private Site site(WeatherSource weather) {
+        Part part = plan.at("site");
+        Site site =
+                new Site(
+                        inputs.number(part, "latitudeDeg"),
+                        inputs.number(part, "longitudeDeg"),
+                        inputs.number(part, "elevationM", Defaults.ELEVATION_M),
+                        ZoneId.of(inputs.text(part, "zone")));
+        Part year = part.at("year");
+        if (year.given()) {
+            double usual = YearWave.usualWarmestDay(site.latitudeDeg());
+            return site.withYear(
+                    new YearWave(
+                            inputs.number(year, "meanC"),
+                            inputs.number(year, "swingK"),
+                            inputs.number(year, "warmestDay", usual, "", Defaults.ASSUMPTION)));
+        }
+        return weather instanceof WeatherSource.Normals made
+                ? site.withYear(made.normals().year())
+                : site;
     }
 
     private WithoutChamber without() {

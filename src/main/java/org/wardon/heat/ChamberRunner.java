@@ -138,7 +138,7 @@ final class ChamberRunner implements Integrator.StepListener {
             double until = Math.min(stopS, Math.min(hourEndS(), nextEdgeS()));
             until = Math.min(until, thermostats.nextUnlock(now));
             until = Math.min(until, budget.nextCheck(now, totals));
-            until = Math.min(until, nextRestartS());
+            until = Math.min(until, nextSunS());
             now = advance(now, until);
             if (now >= hourEndS()) {
                 progress.at("heat", now / run.durationS());
@@ -146,8 +146,8 @@ final class ChamberRunner implements Integrator.StepListener {
         }
     }
 
-    private double nextRestartS() {
-        return solar.map(supply -> supply.nextRestart(now)).orElse(Double.POSITIVE_INFINITY);
+    private double nextSunS() {
+        return solar.map(supply -> supply.nextLanding(now)).orElse(Double.POSITIVE_INFINITY);
     }
 
     /** Lets pass what changes at the time it stands at, and ends the hour where it is over. */

@@ -114,11 +114,11 @@ final class RunCompiler {
         }
         return new Surroundings(
                 run.site(),
+                run.timeline(),
                 run.weather(),
                 Sunshine.of(run.site(), run.timeline(), run.weather(), hours),
                 hours,
                 insideMeanC(run, mean),
-                OptionalDouble.empty(),
                 neighbours);
     }
 

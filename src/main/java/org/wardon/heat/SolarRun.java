@@ -113,16 +113,20 @@ final class SolarRun implements Integrator.Trigger {
         return on != before;
     }
 
-    /** When it will be charged enough to go on, s, as far as this hour tells; else infinite. */
-    double nextRestart(double t) {
+    /**
+     * The time a step must land on, s: the end of the hour, up to which the panels run straight, or
+     * before it when the battery is charged enough to go on.
+     */
+    double nextLanding(double t) {
+        double left = HOUR_S * (Math.floor(t / HOUR_S + 1e-9) + 1) - t;
         if (on) {
-            return Double.POSITIVE_INFINITY;
+            return t + left;
         }
-        double left = HOUR_S * (Math.floor(t / HOUR_S) + 1) - t;
         double now = panelW(t);
         double slope = (panelW(t + left) - now) / left;
         // Not shorter than the clock can tell, or the run would stand still.
-        return t + Math.max(1e-3, battery.secondsTo(restartShare(), now, slope, left));
+        double seconds = battery.secondsTo(restartShare(), now, slope, left);
+        return t + Math.min(left, Math.max(1e-3, seconds));
     }
 
     private double restartShare() {

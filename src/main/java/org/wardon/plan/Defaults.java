@@ -228,6 +228,16 @@ public final class Defaults {
     }
 
     /**
+     * Returns the tilt of a face.
+     *
+     * @param face the face
+     * @return degrees from level: 0 for roof and floor, 90 for walls
+     */
+    public static double tiltDeg(FaceName face) {
+        return face == FaceName.ROOF || face == FaceName.FLOOR ? 0 : 90;
+    }
+
+    /**
      * Returns the electric power of a compressor at its rated point: capacity over a share of the
      * Carnot coefficient of performance.
      *

@@ -14,6 +14,7 @@ import org.junit.jupiter.api.Test;
 import org.wardon.air.Site;
 import org.wardon.air.Timeline;
 import org.wardon.air.Weather;
+import org.wardon.air.YearWave;
 
 /** What each kind of far side gives a face. */
 class OutsideBoundaryTest {
@@ -93,7 +94,8 @@ class OutsideBoundaryTest {
     @Test
     void groundIsTheSlabOfTheStandardOverTheYearlyMean() {
         Face floor = face(FaceName.FLOOR, new Beyond.Ground(), 0);
-        Surroundings around = Surroundings.of(SITE, DAY, sunny(), 48, 12).withDeepGround(26.5);
+        Site known = SITE.withYear(new YearWave(26.5, 0, 200));
+        Surroundings around = Surroundings.of(known, DAY, sunny(), 48, 12);
         OutsideBoundary ground = OutsideBoundary.of(enclosure(floor), floor, around);
         assertEquals(26.5, ground.temperatureC(30));
         assertEquals(List.of(), ground.reasons());

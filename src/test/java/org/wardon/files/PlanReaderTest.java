@@ -13,6 +13,7 @@ import java.util.Optional;
 import java.util.OptionalDouble;
 import org.junit.jupiter.api.Test;
 import org.wardon.air.Weather;
+import org.wardon.air.YearWave;
 import org.wardon.air.normals.NormalsWeather;
 import org.wardon.cooling.Compressor;
 import org.wardon.cooling.Control;
@@ -61,6 +62,8 @@ class PlanReaderTest {
         assertEquals("Three chambers at the ferry landing", EXAMPLE.name());
         assertEquals(20, EXAMPLE.site().elevationM());
         assertEquals("America/Grenada", EXAMPLE.site().zone().getId());
+        assertEquals(Optional.of(new YearWave(27, 1.5, 240)), EXAMPLE.site().year());
+        assertEquals(Optional.empty(), MINIMAL.site().year());
         assertEquals(LocalDateTime.parse("2026-03-02T00:00"), EXAMPLE.from());
         assertEquals(10, EXAMPLE.days());
         assertEquals(new WithoutChamber.Steady(30, 70), EXAMPLE.without());
@@ -85,6 +88,7 @@ class PlanReaderTest {
         assertEquals(6.58, made.normals().globalKWhM2Day().orElseThrow().get(0));
         Weather again = NormalsWeather.of(made.normals(), plan.site(), plan.timeline(), 4, 6 * 24);
         assertEquals(6 * 24 + 1, made.weather().hours());
+        assertEquals(Optional.of(made.normals().year()), plan.site().year());
         assertEquals(again.temperatureC(77), made.weather().temperatureC(77));
     }
 
@@ -259,7 +263,9 @@ class PlanReaderTest {
                         new Beyond.Neighbour("south"),
                         new Beyond.SpaceAboveOutdoor(3)),
                 beyond);
+        assertEquals(12, enclosure.faces().get(0).tiltDeg());
         Face north = enclosure.faces().get(2);
+        assertEquals(90, north.tiltDeg());
         assertEquals(10, north.azimuthDeg());
         assertEquals(0.5, north.solarAbsorptance());
         assertEquals(

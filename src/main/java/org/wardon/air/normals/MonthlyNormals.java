@@ -5,7 +5,9 @@ import java.time.YearMonth;
 import java.util.List;
 import java.util.Locale;
 import java.util.Optional;
+import java.util.stream.IntStream;
 import org.wardon.air.DailyRadiation;
+import org.wardon.air.YearWave;
 import org.wardon.errors.Require;
 
 /**
@@ -84,16 +86,12 @@ public record MonthlyNormals(
     }
 
     /**
-     * Returns the mean temperature of the year, months alike.
+     * Returns the course of the year.
      *
-     * @return °C
+     * @return mean and first harmonic of the months' means
      */
-    public double yearC() {
-        double sum = 0;
-        for (int m = 0; m < MONTHS; m++) {
-            sum += middleC(m);
-        }
-        return sum / MONTHS;
+    public YearWave year() {
+        return YearWave.ofMonths(IntStream.range(0, MONTHS).mapToObj(this::middleC).toList());
     }
 
     /**

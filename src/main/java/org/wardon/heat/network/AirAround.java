@@ -2,7 +2,6 @@ package org.wardon.heat.network;
 
 import java.util.Optional;
 import org.wardon.air.MoistAir;
-import org.wardon.air.SaturatedAir;
 import org.wardon.enclosure.Beyond;
 import org.wardon.enclosure.Door;
 import org.wardon.enclosure.DoorExchange;
@@ -23,9 +22,7 @@ final class AirAround {
         double[] ratio = new double[n];
         for (int h = 0; h < n; h++) {
             airC[h] = around.weather().temperatureC(h);
-            // Stations state humidity over water at all temperatures.
-            double pa = around.weather().humidityPct(h) / 100 * SaturatedAir.overWaterPa(airC[h]);
-            ratio[h] = MoistAir.humidityRatio(pa, inputs.pressurePa());
+            ratio[h] = around.weather().humidityRatio(h, inputs.pressurePa());
         }
         return new HourlyAir(airC, ratio, inputs.rowHours());
     }
