@@ -86,7 +86,9 @@ final class HourRecorder {
         set(Hours.Column.CO2_PPM, co2Ppm);
         set(
                 Hours.Column.EXCHANGE_M3S,
-                network.cubicMetres((terms.exchanged(totals) - lastExchanged) / span));
+                // A fan that fades out within the band is summed to the solver's error, to either
+                // side.
+                Math.max(network.cubicMetres((terms.exchanged(totals) - lastExchanged) / span), 0));
         set(Hours.Column.FREE_M3, network.freeM3());
         set(Hours.Column.SUPPLY_C, supply);
         set(Hours.Column.BLOWS, blownS / span);

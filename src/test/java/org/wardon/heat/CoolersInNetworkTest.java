@@ -3,6 +3,8 @@ package org.wardon.heat;
 import static org.junit.jupiter.api.Assertions.assertEquals;
 import static org.junit.jupiter.api.Assertions.assertTrue;
 
+import com.sun.management.ThreadMXBean;
+import java.lang.management.ManagementFactory;
 import java.time.LocalTime;
 import java.util.List;
 import java.util.Optional;
@@ -22,6 +24,7 @@ import org.wardon.cooling.Setting;
 import org.wardon.enclosure.Enclosure;
 import org.wardon.heat.network.ChamberNetwork;
 import org.wardon.heat.solver.DenseJacobian;
+import org.wardon.heat.solver.Integrator;
 
 /**
  * A chamber with coolers of every kind that acts on its air: what the network states of them equals
@@ -222,6 +225,36 @@ class CoolersInNetworkTest {
                 assertEquals(
                         difference, along[i], 1e-3 * scale + 1e-12, "state " + k + " flow " + i);
             }
+        }
+    }
+
+    @Test
+    void stepsAllocateNothing() {
+        for (Control control : Control.values()) {
+            List<Cooler> kinds =
+                    List.of(
+                            new EvaporativePad(0.8, 0.1, 80, 20, control),
+                            new NightAir(0.15, 90, 2, 3, 30, 80, control),
+                            new IceBank(
+                                    150, 150, ice().material(), 30, 20, ice().recharge(), control));
+            ChamberRun mixed = run.withControlMode(ControlMode.AS_BUILT).withCoolers(kinds);
+            ChamberNetwork built = RunCompiler.network(mixed, false);
+            built.accuracy(1e-6, 1e-5);
+            double[] y = built.start(24, 0.01);
+            Integrator integrator = new Integrator(built, 1, 1, 1e-6);
+            SwitchedCoolers thermostats = new SwitchedCoolers(built);
+            Integrator.StepListener deaf = (from, to, state) -> {};
+            thermostats.fire(0, y);
+            double t = integrator.advance(0, y, 600, thermostats, deaf);
+            thermostats.fire(t, y);
+            ThreadMXBean threads = (ThreadMXBean) ManagementFactory.getThreadMXBean();
+            long id = Thread.currentThread().getId();
+            long before = threads.getThreadAllocatedBytes(id);
+            long steps = integrator.steps();
+            integrator.advance(t, y, t + 600, thermostats, deaf);
+            long allocated = threads.getThreadAllocatedBytes(id) - before;
+            assertTrue(integrator.steps() - steps > 5, control + " " + integrator.steps());
+            assertTrue(allocated < 512, control + " allocated " + allocated + " bytes");
         }
     }
 }

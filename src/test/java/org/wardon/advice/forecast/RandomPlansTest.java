@@ -43,7 +43,7 @@ class RandomPlansTest {
     }
 
     @ParameterizedTest(name = "seed {0}")
-    @ValueSource(ints = {1, 2, 3, 4, 5, 6, 7, 8, 9, 10})
+    @ValueSource(ints = {1, 2, 3, 4, 5, 6, 7, 8, 9, 10, 11, 12, 13, 14, 15, 16, 80})
     void balancesCloseAndRangesAreInOrder(int seed) throws IOException {
         Path file = folder.resolve("plan.json");
         Files.writeString(file, new RandomPlan(new SplittableRandom(seed), book.list()).json());
@@ -150,15 +150,10 @@ class RandomPlansTest {
                                         conductivity,
                                         thickness));
             }
-            String cooling =
-                    random.nextInt(4) == 0
-                            ? ""
-                            : String.format(
-                                    "{\"kind\": \"compressor\", \"ratedCapacityW\": %d,"
-                                            + " \"ratedPowerW\": %d, \"control\": \"%s\"}",
-                                    pick(1000, 4000, 10_000),
-                                    pick(500, 1500, 4000),
-                                    random.nextBoolean() ? "on-off" : "modulating");
+            StringBuilder cooling = new StringBuilder();
+            for (int n = pick(0, 1, 1, 2, 3); n > 0; n--) {
+                cooling.append(cooling.isEmpty() ? "" : ",").append(cooler());
+            }
             return String.format(
                     Locale.ROOT,
                     "{\"id\": \"c\", \"lengthM\": %.1f, \"widthM\": 3, \"heightM\": 2.5, \"faces\":"
@@ -172,6 +167,36 @@ class RandomPlansTest {
                     pick(20, 60, 600),
                     cooling,
                     pick(0, 5, 12, 20));
+        }
+
+        private String cooler() {
+            String control = random.nextBoolean() ? "on-off" : "modulating";
+            return switch (random.nextInt(7)) {
+                case 0 ->
+                        String.format(
+                                "{\"kind\": \"evaporative-pad\", \"bleedPct\": %d, \"control\":"
+                                        + " \"%s\"}",
+                                pick(0, 50), control);
+                case 1 ->
+                        String.format(
+                                "{\"kind\": \"night-air\", \"lowestHumidityPct\": %d, \"control\":"
+                                        + " \"%s\"}",
+                                pick(0, 40), control);
+                case 2 ->
+                        String.format(
+                                "{\"kind\": \"ice-bank\", \"iceKg\": %d, \"uaWK\": %d, \"fanW\":"
+                                        + " %d, \"rechargeW\": %d, \"control\": \"%s\"}",
+                                pick(20, 300, 2000),
+                                pick(20, 150),
+                                pick(0, 50),
+                                pick(0, 1500),
+                                control);
+                default ->
+                        String.format(
+                                "{\"kind\": \"compressor\", \"ratedCapacityW\": %d,"
+                                        + " \"ratedPowerW\": %d, \"control\": \"%s\"}",
+                                pick(1000, 4000, 10_000), pick(500, 1500, 4000), control);
+            };
         }
 
         private String lot(int i) {
