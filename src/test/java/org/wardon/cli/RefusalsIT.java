@@ -44,7 +44,7 @@ class RefusalsIT {
                 "text-windows-1252",
                 "time-31-february",
                 "weather-file-outside",
-                "word-kind-not-built-ice-bank"
+                "cooler-ice-bank"
             })
     void aBadPlanIsRefusedInItsOwnWordsAndNothingIsWritten(String name) throws IOException {
         Path bad = CORPUS.resolve(name);
