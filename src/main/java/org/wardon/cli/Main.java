@@ -39,6 +39,7 @@ public final class Main implements Runnable {
                     Keep.class,
                     Share.class,
                     Look.class,
+                    Why.class,
                     SchemaVerb.class,
                     Demo.class);
 

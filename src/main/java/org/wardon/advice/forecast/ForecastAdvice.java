@@ -46,6 +46,24 @@ public final class ForecastAdvice {
      * @throws org.wardon.errors.RunStopped where a chamber meets a state that cannot be
      */
     public StoreAdvice advise(StorePlan asked, Progress progress) {
+        Prepared prepared = prepare(asked);
+        StoreOutcome outcome = new StoreRun(prepared.model()).run(progress);
+        return together(outcome, prepared.placed());
+    }
+
+    /**
+     * A plan ready to be run, every lot placed.
+     *
+     * @param model the store
+     * @param placed what was placed where
+     */
+    record Prepared(StoreModel model, List<Caution> placed) {
+        Prepared {
+            placed = List.copyOf(placed);
+        }
+    }
+
+    Prepared prepare(StorePlan asked) {
         Weather weather =
                 PlanWeather.prolonged(
                         asked.weatherSource().weather(),
@@ -54,8 +72,7 @@ public final class ForecastAdvice {
         StoreModel open = model(asked, weather);
         SimplePlacing.Placed placed = new SimplePlacing(open).place();
         StoreModel model = placed.told().isEmpty() ? open : open.placed(placed.plan());
-        StoreOutcome outcome = new StoreRun(model).run(progress);
-        return together(outcome, placed.told());
+        return new Prepared(model, placed.told());
     }
 
     private StoreModel model(StorePlan plan, Weather weather) {

@@ -109,6 +109,27 @@ final class StoreModel {
      * averaged doors, which have no cycles of their own to disagree about.
      */
     Map<String, Course> plain(double durationS, Progress progress) {
+        Map<String, AirSeries> air = agreedAir(durationS);
+        progress.at("forecast", 0.5);
+        Map<String, Course> courses =
+                pass(Draw.MEDIAN, id -> durationS, air, DoorMode.PULSES, ControlMode.AS_BUILT);
+        progress.at("forecast", 1);
+        return courses;
+    }
+
+    /** One chamber exactly as the plain run has it, to be run again. */
+    ChamberRun asInPlain(ChamberPlan chamber, double durationS) {
+        Map<String, AirSeries> air = agreedAir(durationS);
+        ChamberRun run = run(chamber, Draw.MEDIAN, durationS, air);
+        if (run.stays().stream().allMatch(stay -> stay.berth().from().isEmpty())) {
+            return run;
+        }
+        Map<String, Course> plain =
+                pass(Draw.MEDIAN, id -> durationS, air, DoorMode.PULSES, ControlMode.AS_BUILT);
+        return run.withStays(run.stays().stream().map(stay -> known(stay, plain)).toList());
+    }
+
+    private Map<String, AirSeries> agreedAir(double durationS) {
         Map<String, AirSeries> air = startAir();
         boolean coupled = plan.chambers().stream().anyMatch(StoreModel::hasNeighbour);
         for (int pass = 0; coupled && pass < MOST_PASSES; pass++) {
@@ -126,11 +147,7 @@ final class StoreModel {
                 break;
             }
         }
-        progress.at("forecast", 0.5);
-        Map<String, Course> courses =
-                pass(Draw.MEDIAN, id -> durationS, air, DoorMode.PULSES, ControlMode.AS_BUILT);
-        progress.at("forecast", 1);
-        return courses;
+        return air;
     }
 
     /**

@@ -9,6 +9,7 @@ import org.wardon.advice.wording.Units;
 import org.wardon.advice.wording.Words;
 import org.wardon.errors.Progress;
 import org.wardon.files.PlanReader;
+import org.wardon.plan.StorePlan;
 import org.wardon.reference.ReferenceBook;
 
 /** Invented small stores for tests of forecasts. */
@@ -43,8 +44,7 @@ final class SmallStores {
                 .formatted(id, crop, arrives, atC, rest);
     }
 
-    static StoreAdvice advise(
-            Path folder, ReferenceBook book, List<String> chambers, List<String> lots)
+    static StorePlan plan(Path folder, ReferenceBook book, List<String> chambers, List<String> lots)
             throws IOException {
         String plan =
                 """
@@ -56,7 +56,13 @@ final class SmallStores {
                 """
                         .formatted(String.join(",", chambers), String.join(",", lots));
         Path file = Files.writeString(folder.resolve("plan.json"), plan);
+        return PlanReader.read(file, PlanLookups.of(book));
+    }
+
+    static StoreAdvice advise(
+            Path folder, ReferenceBook book, List<String> chambers, List<String> lots)
+            throws IOException {
         return new ForecastAdvice(book, Words.english(Units.METRIC))
-                .advise(PlanReader.read(file, PlanLookups.of(book)), Progress.SILENT);
+                .advise(plan(folder, book, chambers, lots), Progress.SILENT);
     }
 }

@@ -49,7 +49,15 @@ class WordsTest {
     private static final Words AMERICAN = Words.english(new Units(true, true));
     private static final Pattern GAP = Pattern.compile("\\{(s?)(\\d+)}|\\{[a-z-]+\\.(\\d+)}");
     private static final Set<String> FAMILIES =
-            Set.of("limit", "mechanism", "rests-on", "side", "verdict");
+            Set.of(
+                    "limit",
+                    "mechanism",
+                    "rests-on",
+                    "side",
+                    "verdict",
+                    "why",
+                    "heat-term",
+                    "water-term");
     private static final double DAY_S = 86_400;
 
     /** Hyphenated words in quotes beside codes and sources. */
