@@ -7,6 +7,8 @@ import java.io.IOException;
 import java.nio.file.Path;
 import java.util.List;
 import java.util.Optional;
+import java.util.regex.Matcher;
+import java.util.regex.Pattern;
 import org.junit.jupiter.api.AfterAll;
 import org.junit.jupiter.api.BeforeAll;
 import org.junit.jupiter.api.Test;
@@ -102,5 +104,23 @@ class ColdBlastAdviceTest {
                 there.chillingRisk().probability() >= here.chillingRisk().probability(),
                 there.chillingRisk() + " and " + here.chillingRisk());
         assertTrue(told(near, "chills-in-blast").isEmpty(), "it is there; its own risk is told");
+    }
+
+    @Test
+    void aLotThatWouldBeChilledByTheCoolerIsToldByHowMuch() throws IOException {
+        StoreAdvice advice = advise(14, "banana-green", "");
+        Forecast.Warning chills = told(advice, "chills-in-blast").orElseThrow();
+        assertEquals("caution", chills.level());
+        Matcher words =
+                Pattern.compile(
+                                "L: standing near the cooler of north, in air about ([0-9.]+) K"
+                                        + " colder while it blows, it runs a ([0-9.]+) % risk of"
+                                        + " chilling injury instead of ([0-9.]+) %\\.")
+                        .matcher(chills.text());
+        assertTrue(words.matches(), chills.text());
+        double there = Double.parseDouble(words.group(2));
+        double here = Double.parseDouble(words.group(3));
+        assertTrue(there >= 10 && there >= here + 4, chills.text());
+        assertTrue(told(advise(20, "banana-green", ""), "chills-in-blast").isEmpty());
     }
 }
