@@ -55,4 +55,34 @@ class CoolerCautionsTest {
         assertEquals(List.of("rating-unlikely"), codes(unit(500, 600, -5, false), 12));
         assertEquals(List.of("coil-small"), codes(unit(1_800, 150, -5, false), 12));
     }
+
+    @Test
+    void iceCannotBringAirToItsMeltingPoint() {
+        IceBank bank =
+                new IceBank(
+                        100,
+                        100,
+                        IceBank.Material.ICE,
+                        50,
+                        0,
+                        Optional.empty(),
+                        Control.ON_OFF);
+        assertEquals(List.of("ice-handling"), of(bank, 4));
+        assertEquals(List.of("ice-handling", "ice-too-warm"), of(bank, 1));
+    }
+
+    @Test
+    void padsAndNightAirAreToldWhatTheyMayBringIn() {
+        assertEquals(
+                List.of("pad-water"), of(new EvaporativePad(0.8, 0.5, 50, 0, Control.ON_OFF), 15));
+        assertEquals(
+                List.of("night-air-rain"),
+                of(new NightAir(0.5, 50, 2, 0, 0, 100, Control.ON_OFF), 15));
+    }
+
+    private static List<String> of(Cooler cooler, double settingC) {
+        return CoolerCautions.of(cooler, new Setting(settingC, 1, 90), "north", 101_325).stream()
+                .map(c -> c.reason().code())
+                .toList();
+    }
 }

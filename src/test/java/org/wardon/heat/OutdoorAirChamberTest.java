@@ -4,12 +4,14 @@ import static org.junit.jupiter.api.Assertions.assertEquals;
 import static org.junit.jupiter.api.Assertions.assertTrue;
 
 import java.util.List;
+import java.util.OptionalDouble;
 import java.util.SplittableRandom;
 import org.junit.jupiter.api.Test;
 import org.wardon.air.MoistAir;
 import org.wardon.air.SaturatedAir;
 import org.wardon.air.Weather;
 import org.wardon.air.WetBulb;
+import org.wardon.cooling.Compressor;
 import org.wardon.cooling.Control;
 import org.wardon.cooling.Cooler;
 import org.wardon.cooling.EvaporativePad;
@@ -231,5 +233,42 @@ class OutdoorAirChamberTest {
             }
             assertTrue(course.counts().steps() < 40_000, what + " " + course.counts().steps());
         }
+    }
+
+    /** What a daily energy limits is the cooler that names it; the next one takes over. */
+    @Test
+    void anEnergyUsedUpStopsTheCoolerOnItAlone() {
+        Compressor plain = Chambers.unit(Control.ON_OFF, 0);
+        Compressor solar =
+                new Compressor(
+                        plain.ratedCapacityW(),
+                        plain.ratedPowerW(),
+                        plain.ratedAirC(),
+                        plain.ratedOutdoorC(),
+                        plain.fanW(),
+                        false,
+                        plain.coilUaWK(),
+                        plain.airFlowM3s(),
+                        plain.control(),
+                        0,
+                        0,
+                        plain.condenserRiseK(),
+                        plain.lowestC(),
+                        plain.defrost(),
+                        OptionalDouble.of(1.5));
+        Weather dry = swinging(33, 4, 25, 52);
+        Course course =
+                run(
+                        chamber(dry, 12, 2, solar)
+                                .withCoolers(List.of(solar, pad(Control.ON_OFF)))
+                                .withStays(Chambers.load(2, 800, 30)));
+        assertTrue(
+                course.events().stream()
+                        .anyMatch(e -> e.kind() == CourseEvent.Kind.ENERGY_USED_UP));
+        double kWh = course.coolers().get(0).electricityJ() / 3.6e6;
+        // Two days of 1.5 kWh, and half a minute of full power at most until it is noticed.
+        assertEquals(3, kWh, 2 * 30 * solar.mostElectricW() / 3.6e6);
+        assertEquals(0, course.hours().ran(0, 20), "used up by evening");
+        assertTrue(course.hours().ran(1, 20) > 0.9, "the pad goes on");
     }
 }
