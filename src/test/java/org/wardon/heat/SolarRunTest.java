@@ -10,6 +10,7 @@ import java.util.OptionalDouble;
 import org.junit.jupiter.api.Test;
 import org.junit.jupiter.params.ParameterizedTest;
 import org.junit.jupiter.params.provider.CsvSource;
+import org.junit.jupiter.params.provider.EnumSource;
 import org.wardon.air.Sunshine;
 import org.wardon.cooling.Control;
 import org.wardon.cooling.Cooler;
@@ -146,11 +147,12 @@ class SolarRunTest {
         assertEquals(gridJ, large.solar().orElseThrow().usedJ(), 1e-3 * gridJ);
     }
 
-    @Test
-    void drawsWithAnAveragedDoorRunOnItToo() {
+    @ParameterizedTest
+    @EnumSource(names = {"AVERAGED", "SKETCHED"})
+    void drawsWithAnAveragedDoorRunOnItToo(DoorMode door) {
         ChamberRun drawn =
                 Chambers.full(Control.ON_OFF, 3, 4)
-                        .withDoorMode(DoorMode.AVERAGED)
+                        .withDoorMode(door)
                         .withControlMode(ControlMode.MODULATING);
         Course course = run(on(drawn, supply(9_000, 6, 50)));
         assertTrue(course.solar().orElseThrow().errorShare() < 1e-9);

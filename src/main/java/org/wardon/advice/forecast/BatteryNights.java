@@ -2,9 +2,12 @@ package org.wardon.advice.forecast;
 
 import java.time.LocalDateTime;
 import java.time.temporal.ChronoUnit;
+import java.util.ArrayList;
+import java.util.List;
 import java.util.Optional;
 import java.util.stream.Stream;
 import org.wardon.air.Timeline;
+import org.wardon.cooling.Outage;
 import org.wardon.heat.Course;
 import org.wardon.heat.CourseEvent;
 import org.wardon.produce.Reason.Argument;
@@ -21,6 +24,15 @@ final class BatteryNights {
     /** The first time it ran out. */
     static Optional<CourseEvent> first(Course course) {
         return events(course).findFirst();
+    }
+
+    /** Spans without power for any reason. */
+    static List<Outage> with(List<Outage> outages, Course course) {
+        List<Outage> all = new ArrayList<>(outages);
+        events(course)
+                .filter(event -> event.untilS() > event.fromS())
+                .forEach(event -> all.add(new Outage(event.fromS(), event.untilS())));
+        return Outage.joined(all);
     }
 
     /** Hours without power in all. */

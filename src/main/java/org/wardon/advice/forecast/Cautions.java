@@ -5,8 +5,10 @@ import java.util.ArrayList;
 import java.util.HashSet;
 import java.util.List;
 import java.util.Set;
+import java.util.stream.IntStream;
 import org.wardon.air.StandardAtmosphere;
 import org.wardon.air.Timeline;
+import org.wardon.air.Weather;
 import org.wardon.cooling.Cooler;
 import org.wardon.cooling.CoolerCautions;
 import org.wardon.cooling.solar.Inverter;
@@ -118,6 +120,10 @@ final class Cautions {
 
     private void solar(ChamberPlan chamber, SolarSupply supply) {
         add(Level.CAUTION, Reason.about("solar-hazards", chamber.id(), PRACTICE));
+        Weather weather = outcome.model().weather();
+        if (IntStream.range(0, weather.hours()).anyMatch(h -> Double.isNaN(weather.globalWm2(h)))) {
+            add(Level.NOTE, Reason.about("sun-from-temperature-range", chamber.id(), "FAO56"));
+        }
         List<Boolean> carried =
                 Inverter.carries(
                         supply.inverterW(),

@@ -64,7 +64,7 @@ final class Fates {
 
     private StoreEthylene ethylene(Map<String, Course> courses, Draw draw, boolean scrubbed) {
         Map<String, ChamberAir> air = new HashMap<>();
-        courses.forEach((id, course) -> air.put(id, air(id, course.hours(), scrubbed)));
+        courses.forEach((id, course) -> air.put(id, air(course, scrubbed)));
         return StoreEthylene.of(air, givers(courses), around.outdoorPpm(), draw);
     }
 
@@ -216,7 +216,8 @@ final class Fates {
     }
 
     /** Exchange of a run as keeping reads it: each value holds from its time on. */
-    private ChamberAir air(String chamberId, Hours hours, boolean scrubbed) {
+    private ChamberAir air(Course course, boolean scrubbed) {
+        Hours hours = course.hours();
         int lead = hours.atS(0) > 0 ? 1 : 0;
         int n = hours.size() + lead;
         double[] time = new double[n];
@@ -229,16 +230,16 @@ final class Fates {
             exchange[i] = hours.exchangeM3s(Math.min(row + 1, hours.size() - 1));
         }
         return scrubbed
-                ? new ChamberAir(time, exchange, free, cleaned(chamberId, time))
+                ? new ChamberAir(time, exchange, free, cleaned(course, time))
                 : new ChamberAir(time, exchange, free);
     }
 
-    /** Air a scrubber cleans from each time to the next, less what falls into outages, m3/s. */
-    private double[] cleaned(String chamberId, double[] timeS) {
+    /** Air a scrubber cleans from each time to the next, less what has no power, m3/s. */
+    private double[] cleaned(Course course, double[] timeS) {
         double[] cleaned = new double[timeS.length];
-        ChamberPlan chamber = model.plan().getChamber(chamberId);
+        ChamberPlan chamber = model.plan().getChamber(course.chamberId());
         if (chamber.ethyleneScrub().isPresent()) {
-            List<Outage> outages = model.outages(chamber);
+            List<Outage> outages = BatteryNights.with(model.outages(chamber), course);
             double most = chamber.ethyleneScrub().get().cleanedM3s();
             for (int i = 0; i + 1 < timeS.length; i++) {
                 double out = 0;

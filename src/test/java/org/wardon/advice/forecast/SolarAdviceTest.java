@@ -135,4 +135,36 @@ class SolarAdviceTest {
                                 .daysLeft()
                                 .p50());
     }
+
+    @Test
+    void aScrubberStandsStillWithTheRestWhenTheBatteryIsEmpty() throws IOException {
+        String scrub = ", \"ethyleneScrub\": {\"airM3PerHour\": 30}";
+        ChamberForecast fed = advise(plan(solar(4_000, 12) + scrub)).forecast().chambers().get(0);
+        ChamberForecast hungry = advise(plan(solar(900, 0.8) + scrub)).forecast().chambers().get(0);
+        assertTrue(
+                hungry.ethylenePpmMax() > 1.5 * fed.ethylenePpmMax(),
+                hungry.ethylenePpmMax() + " and " + fed.ethylenePpmMax());
+    }
+
+    @Test
+    void aFileWithoutSunshineIsSaidToBeGuessedFrom() throws IOException {
+        StringBuilder csv = new StringBuilder("time,temperatureC,humidityPct\n");
+        LocalDateTime from = LocalDateTime.parse("2026-01-28T00:00");
+        for (int h = 0; h <= 5 * 24; h++) {
+            double airC = 24 - 6 * Math.cos(2 * Math.PI * (h - 3) / 24);
+            csv.append(from.plusHours(h)).append(String.format(Locale.ROOT, ",%.1f,60%n", airC));
+        }
+        Files.writeString(folder.resolve("weather.csv"), csv);
+        String text = plan(solar(4_000, 12));
+        int start = text.indexOf("\"weather\"");
+        int end = text.indexOf("\"from\"", start);
+        Forecast forecast =
+                advise(
+                                text.substring(0, start)
+                                        + "\"weather\": {\"csv\": \"weather.csv\"}, "
+                                        + text.substring(end))
+                        .forecast();
+        assertTrue(codes(forecast).contains("sun-from-temperature-range"));
+        assertTrue(forecast.chambers().get(0).solar().orElseThrow().panelKWh() > 20);
+    }
 }
