@@ -16,6 +16,7 @@ import org.wardon.files.forecast.Quantiles;
 import org.wardon.plan.LotPlan;
 import org.wardon.plan.StorePlan;
 import org.wardon.produce.Reason;
+import org.wardon.produce.Reason.Argument;
 
 /** The advice on a store plan for a person. */
 final class AdvicePage {
@@ -178,11 +179,13 @@ final class AdvicePage {
         return solar.firstWithout()
                 .map(
                         at ->
-                                ", though the battery runs out (first on "
-                                        + at.toString().replace("T", " at ")
-                                        + ", "
-                                        + units.figure(solar.hoursWithout(), "h")
-                                        + " without power in all)")
+                                Reason.about(
+                                        "battery-runs-out",
+                                        "",
+                                        "own",
+                                        Argument.of(solar.hoursWithout(), "h"),
+                                        Argument.text(at.toString().replace("T", " at "))))
+                .map(reason -> ", though " + words.sentence(reason))
                 .orElse("");
     }
 

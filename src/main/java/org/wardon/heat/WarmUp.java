@@ -4,7 +4,9 @@ import java.util.List;
 import org.wardon.air.MoistAir;
 import org.wardon.air.Timeline;
 import org.wardon.air.Weather;
+import org.wardon.air.YearWave;
 import org.wardon.cooling.FaceCooler;
+import org.wardon.enclosure.Surroundings;
 import org.wardon.errors.Progress;
 import org.wardon.heat.network.ChamberNetwork;
 
@@ -69,7 +71,7 @@ final class WarmUp {
         }
         return new ChamberRun(
                 run.chamberId(),
-                run.site(),
+                run.site().withYear(year(run)),
                 new Timeline(run.timeline().from().minusDays(DAYS), run.site().zone()),
                 new Weather(temperature, humidity, sun, wind),
                 run.enclosure(),
@@ -84,5 +86,11 @@ final class WarmUp {
                 run.doorMode(),
                 run.controlMode(),
                 run.extras().onGrid());
+    }
+
+    /** The year the ground of the run follows, which its first day alone would not tell. */
+    private static YearWave year(ChamberRun run) {
+        Surroundings around = RunCompiler.surroundings(run);
+        return around.year().orElseGet(() -> new YearWave(around.meanOutdoorC(), 0, 1));
     }
 }

@@ -318,4 +318,50 @@ class OutdoorsInRunTest {
         int last = course.hours().size() - 1;
         assertEquals(ratio, course.hours().humidityRatio(last), 0.01 * ratio);
     }
+
+    @Test
+    void aPassiveChamberStartsOverTheGroundOfItsRunNotOfItsFirstDay() {
+        Face floor =
+                new Face(
+                        FaceName.FLOOR,
+                        new Beyond.Ground(),
+                        0,
+                        0.6,
+                        List.of(new Layer("concrete", 0.1, 1.8, 2_400, 1_000)));
+        // A first day of 30 °C, then 10 °C for a month: soil at the mean, not at 30 °C.
+        Weather cold = weather(30, 10, 0, Double.NaN);
+        double[] t = new double[cold.hours()];
+        double[] rest = new double[t.length];
+        Arrays.setAll(t, h -> h <= 24 ? 30 : 10);
+        Site site = new Site(47, 0, 0, UTC);
+        ChamberRun run =
+                ChamberRun.of(
+                        "north",
+                        site,
+                        new Timeline(LocalDateTime.of(2026, 3, 2, 0, 0), UTC),
+                        new Weather(t, rest, rest, rest),
+                        only(floor),
+                        new Setting(SETTING_C, 1, 90),
+                        30 * 86_400.0);
+        YearWave told = new YearWave((30 * 25 + 10 * (30 * 24 - 23)) / (30 * 24.0 + 2), 0, 1);
+        double guessed = HeatModel.run(run, Progress.SILENT).hours().airC(0);
+        ChamberRun known =
+                new ChamberRun(
+                        run.chamberId(),
+                        site.withYear(told),
+                        run.timeline(),
+                        run.weather(),
+                        run.enclosure(),
+                        run.coolers(),
+                        run.setting(),
+                        run.outages(),
+                        run.stays(),
+                        run.factors(),
+                        run.start(),
+                        run.durationS(),
+                        run.doorMode(),
+                        run.controlMode(),
+                        run.extras());
+        assertEquals(HeatModel.run(known, Progress.SILENT).hours().airC(0), guessed, 0.01);
+    }
 }
