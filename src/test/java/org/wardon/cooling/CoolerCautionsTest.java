@@ -60,13 +60,7 @@ class CoolerCautionsTest {
     void iceCannotBringAirToItsMeltingPoint() {
         IceBank bank =
                 new IceBank(
-                        100,
-                        100,
-                        IceBank.Material.ICE,
-                        50,
-                        0,
-                        Optional.empty(),
-                        Control.ON_OFF);
+                        100, 100, IceBank.Material.ICE, 50, 0, Optional.empty(), Control.ON_OFF);
         assertEquals(List.of("ice-handling"), of(bank, 4));
         assertEquals(List.of("ice-handling", "ice-too-warm"), of(bank, 1));
     }
