@@ -14,6 +14,7 @@ import org.wardon.files.forecast.ChamberForecast;
 import org.wardon.files.forecast.Forecast.Action;
 import org.wardon.heat.Course;
 import org.wardon.heat.CourseEvent;
+import org.wardon.heat.Hours;
 import org.wardon.heat.IceLedger;
 import org.wardon.keeping.Fate;
 import org.wardon.keeping.Outlook;
@@ -232,25 +233,38 @@ final class Actions {
         }
     }
 
-    /** Ice that ran out: at the pace the first of it went, for the hours that were without. */
+    /** Ice that ran out: at the pace it melted until then, for the hours that were without. */
     private void addIce(ChamberPlan chamber) {
         Course course = outcome.course(chamber.id());
         List<CourseEvent> gone =
                 course.events().stream()
                         .filter(event -> event.kind() == CourseEvent.Kind.ICE_GONE)
                         .toList();
-        double startKg =
-                course.coolers().stream()
-                        .flatMap(cooler -> cooler.ice().stream())
-                        .mapToDouble(IceLedger::startKg)
-                        .sum();
         if (gone.isEmpty() || gone.get(0).fromS() < Timeline.HOUR_S) {
             return;
         }
         double goneS = gone.stream().mapToDouble(event -> event.untilS() - event.fromS()).sum();
-        double days = course.hours().atS(course.hours().size() - 1) / Timeline.DAY_S;
-        double kgADay = startKg / gone.get(0).fromS() * goneS / days;
+        Hours hours = course.hours();
+        double days = hours.atS(hours.size() - 1) / Timeline.DAY_S;
+        double kgADay = meltedKgPerS(course, gone.get(0).fromS()) * goneS / days;
         say(6, Reason.about("do-add-ice", chamber.id(), OWN_RULE, Argument.of(kgADay, "kg")));
+    }
+
+    /** Ice made again melts too, so what melted in all is shared out by the heat taken. */
+    private static double meltedKgPerS(Course course, double untilS) {
+        double meltedKg =
+                course.coolers().stream()
+                        .flatMap(cooler -> cooler.ice().stream())
+                        .mapToDouble(IceLedger::meltedKg)
+                        .sum();
+        Hours hours = course.hours();
+        double before = 0;
+        double all = 0;
+        for (int i = 0; i < hours.size(); i++) {
+            all += hours.coolingW(i);
+            before += hours.atS(i) <= untilS ? hours.coolingW(i) : 0;
+        }
+        return all > 0 ? meltedKg * before / all / untilS : 0;
     }
 
     private static boolean weatherDecides(ChamberPlan chamber) {

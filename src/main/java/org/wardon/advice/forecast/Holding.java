@@ -14,6 +14,7 @@ import org.wardon.heat.CourseEvent;
 import org.wardon.heat.Hours;
 import org.wardon.lots.LotHistory;
 import org.wardon.plan.ChamberPlan;
+import org.wardon.plan.DailyOutage;
 import org.wardon.produce.Reason;
 import org.wardon.produce.Reason.Argument;
 
@@ -23,7 +24,8 @@ import org.wardon.produce.Reason.Argument;
  * outages and disturbed hours (where the weather decides, as without coolers, with pads, wet walls
  * and night air: at or below setting + band); every lot reaches seven-eighths cooling within max(24
  * h, 4.5 half-cooling times of its package); no lot already cold rises more than 2 K through an
- * arrival; no lot leaves its safe range.
+ * arrival; no lot leaves its safe range. Outages left out are single ones: those of every day are
+ * how the chamber is run, and count.
  *
  * @param holds the verdict
  * @param hoursOutside hours outside the band after pull-down, outages and disturbed hours left out
@@ -138,8 +140,9 @@ record Holding(
             return OptionalDouble.empty();
         }
 
+        /** Hours without power that come back every day are how the chamber is run, and count. */
         private boolean inOutage(double atS) {
-            for (Outage outage : outcome.model().outages(chamber)) {
+            for (Outage outage : outcome.model().singleOutages(chamber)) {
                 if (atS > outage.startS() && atS - Timeline.HOUR_S < outage.endS()) {
                     return true;
                 }
@@ -170,10 +173,20 @@ record Holding(
             }
         }
 
-        /** Where something is too warm and the battery ran out, that is the first thing to say. */
+        /** Where something is too warm and power was missing, that is the first thing to say. */
         private void judgeSupply() {
             Optional<CourseEvent> first = BatteryNights.first(course);
             boolean warm = reasons.stream().anyMatch(r -> !TOO_COLD.contains(r.code()));
+            double daily = chamber.power().daily().stream().mapToDouble(DailyOutage::hours).sum();
+            if (warm && daily > 0 && chamber.coolers().stream().anyMatch(Cooler::needsPower)) {
+                reasons.add(
+                        0,
+                        Reason.about(
+                                "no-power-daily",
+                                chamber.id(),
+                                RULE,
+                                Argument.of(Math.min(daily, 24), "h")));
+            }
             if (warm && first.isPresent()) {
                 reasons.add(
                         0,

@@ -43,8 +43,9 @@ public final class Giving {
 
     /**
      * Returns what a commodity gives off. Rows of ripe or turning fruit hold once it ripens, all
-     * others before; where one kind is missing the other holds throughout. A row that prints only
-     * "more than" speaks of ripening fruit: before that the class low is taken (assumption).
+     * others before; where one kind is missing the other holds throughout, but that a commodity
+     * which is green fruit by its name has its class before. A row that prints only "more than"
+     * speaks of ripening fruit: before that the class low is taken (assumption).
      *
      * @param commodity the commodity
      * @return its rates
@@ -64,7 +65,7 @@ public final class Giving {
         if (early.isEmpty() && commodity.breath().ethylene().stream().anyMatch(Giving::moreThan)) {
             early.add(classPoint("low"));
         }
-        if (early.isEmpty() && late.isEmpty()) {
+        if (early.isEmpty() && (late.isEmpty() || Stage.soldGreen(commodity))) {
             early.add(classPoint(commodity.needs().ethyleneProduction()));
         }
         return new Giving(

@@ -28,6 +28,16 @@ public final class Stage {
     }
 
     /**
+     * Returns whether the commodity's own rows are those of green fruit.
+     *
+     * @param commodity the commodity
+     * @return true if its class of ethylene is that of green fruit
+     */
+    public static boolean soldGreen(Commodity commodity) {
+        return GREEN_IDS.contains(commodity.id());
+    }
+
+    /**
      * Returns the ripeness to judge by.
      *
      * @param commodity the commodity
@@ -38,9 +48,7 @@ public final class Stage {
         if (soldRipe(commodity)) {
             return Ripeness.RIPE;
         }
-        return told == Ripeness.UNKNOWN && GREEN_IDS.contains(commodity.id())
-                ? Ripeness.GREEN
-                : told;
+        return told == Ripeness.UNKNOWN && soldGreen(commodity) ? Ripeness.GREEN : told;
     }
 
     /**
