@@ -24,4 +24,16 @@ public final class RadiantFilm {
         double t = meanC + SaturatedAir.ZERO_C_IN_K;
         return EMISSIVITY * 4 * STEFAN_BOLTZMANN * t * t * t;
     }
+
+    /**
+     * Returns the film between two wide surfaces that face each other, both of emissivity 0.9.
+     *
+     * <p>Source: ISO 6946:2017, annex D: 4 sigma T^3 / (1/e + 1/e - 1) (from memory).
+     *
+     * @param meanC mean of the surfaces, °C
+     * @return W/(m2 K)
+     */
+    public static double betweenWm2K(double meanC) {
+        return wattsM2K(meanC) / EMISSIVITY / (2 / EMISSIVITY - 1);
+    }
 }
