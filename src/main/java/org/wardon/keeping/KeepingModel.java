@@ -35,8 +35,7 @@ public final class KeepingModel {
         span = new LifeSpan(commodity, lot.door());
         Ripeness ripeness = span.ripeness();
         chilling = Chilling.of(commodity, ripeness);
-        double floorC = chilling.map(c -> c.zone().topC()).orElse(Double.NEGATIVE_INFINITY);
-        curve = LifeCurve.of(commodity, floorC, lot.door().knownLife());
+        curve = LifeCurve.of(commodity, lot.door().knownLife());
         dormancy = Dormancy.of(commodity);
         response = Response.of(commodity, lot.door().ripeness());
         water = new WaterLimit(commodity, curve);

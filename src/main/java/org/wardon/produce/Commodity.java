@@ -12,6 +12,7 @@ import org.wardon.produce.rows.EthyleneEffect;
 import org.wardon.produce.rows.EthyleneRate;
 import org.wardon.produce.rows.GasInjury;
 import org.wardon.produce.rows.GeometryRow;
+import org.wardon.produce.rows.LifeCurveRow;
 import org.wardon.produce.rows.LifeRow;
 import org.wardon.produce.rows.MoistureLimit;
 import org.wardon.produce.rows.MoistureLossRow;
@@ -140,6 +141,7 @@ public record Commodity(
      * @param sprouting sprouting rows
      * @param curing curing rows
      * @param ambient lives at market temperature
+     * @param curves fitted curves of life, that of the commodity as a whole first
      */
     public record Keeping(
             List<LifeRow> lives,
@@ -148,7 +150,8 @@ public record Commodity(
             List<ChillingExposure> exposures,
             List<SproutingRow> sprouting,
             List<CuringRow> curing,
-            List<AmbientLife> ambient) {
+            List<AmbientLife> ambient,
+            List<LifeCurveRow> curves) {
         /** Copies the lists. */
         public Keeping {
             lives = List.copyOf(lives);
@@ -158,6 +161,7 @@ public record Commodity(
             sprouting = List.copyOf(sprouting);
             curing = List.copyOf(curing);
             ambient = List.copyOf(ambient);
+            curves = List.copyOf(curves);
         }
     }
 

@@ -8,6 +8,7 @@ import org.wardon.produce.rows.AmbientLife;
 import org.wardon.produce.rows.ChillingExposure;
 import org.wardon.produce.rows.ChillingFloor;
 import org.wardon.produce.rows.CuringRow;
+import org.wardon.produce.rows.LifeCurveRow;
 import org.wardon.produce.rows.LifeRow;
 import org.wardon.produce.rows.Q10Row;
 import org.wardon.produce.rows.SproutingRow;
@@ -41,6 +42,7 @@ final class KeepingRows {
     private final Grouped<SproutingRow> sprouting;
     private final Grouped<CuringRow> curing;
     private final Grouped<AmbientLife> ambient;
+    private final Grouped<LifeCurveRow> curves;
 
     KeepingRows(Selection selection) {
         lives = selection.present(Query.table("life_temperature"), KeepingRows::life);
@@ -52,6 +54,7 @@ final class KeepingRows {
         sprouting = selection.rows(Query.table("sprouting"), KeepingRows::sprouting);
         curing = selection.rows(CURING, KeepingRows::curing);
         ambient = selection.rows(Query.table("ambient_practice"), KeepingRows::ambient);
+        curves = selection.rows(Query.table("life_curves"), KeepingRows::curve);
     }
 
     private static Query floors(int later) {
@@ -71,7 +74,8 @@ final class KeepingRows {
                 exposures.of(id),
                 sprouting.of(id),
                 curing.of(id),
-                ambient.of(id));
+                ambient.of(id),
+                curves.of(id));
     }
 
     private static Stream<ChillingFloor> sorted(List<ChillingFloor> floors) {
@@ -162,5 +166,21 @@ final class KeepingRows {
                 row.fact("cooled_life_d", "day"),
                 row.text("cooling"),
                 row.text("note"));
+    }
+
+    private static LifeCurveRow curve(Row row) {
+        return new LifeCurveRow(
+                row.text("variant"),
+                row.value("slope_kJ_mol"),
+                row.value("slope_sd_kJ_mol"),
+                row.value("own_weight"),
+                row.number("temp_min_C"),
+                row.number("temp_max_C"),
+                (int) row.value("temperatures"),
+                row.number("shortest_days"),
+                row.number("longest_days"),
+                row.value("source_sd_ln"),
+                row.value("crop_sd_share"),
+                List.of(row.text("source_id").split(";", -1)));
     }
 }

@@ -120,7 +120,8 @@ final class OwnOverlay {
                 of.exposures(),
                 of.sprouting(),
                 of.curing(),
-                of.ambient());
+                of.ambient(),
+                of.curves());
     }
 
     private static Commodity.Water limits(Commodity.Water of, Fact own) {

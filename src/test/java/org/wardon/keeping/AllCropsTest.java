@@ -5,6 +5,7 @@ import static org.junit.jupiter.api.Assertions.assertTrue;
 
 import java.util.ArrayList;
 import java.util.List;
+import java.util.OptionalDouble;
 import org.junit.jupiter.api.Test;
 import org.wardon.air.Timeline;
 import org.wardon.lots.LotHistory;
@@ -29,6 +30,10 @@ class AllCropsTest {
         assertEquals(106, Crops.list().size());
     }
 
+    /**
+     * In the plain run the handbook's shortest life; in a draw the shortest that any source printed
+     * for that condition, or 1.4 times less than a single figure.
+     */
     @Test
     void nothingEndsALotBeforeThePublishedLifeInTheHandbooksOwnCondition() {
         List<String> early = new ArrayList<>();
@@ -44,6 +49,7 @@ class AllCropsTest {
                     life.lowest() == life.highest()
                             ? life.lowest() / WIDENED_SINGLE_FIGURE
                             : life.lowest();
+            least = Math.min(least, shortestOfOthers(commodity).orElse(least));
             KeepingModel model = Crops.model(commodity.id());
             for (double t : new double[] {at.lowest(), at.middle(), at.highest()}) {
                 if (t < -2) {
@@ -56,6 +62,10 @@ class AllCropsTest {
             }
         }
         assertTrue(early.isEmpty(), String.join("\n", early));
+    }
+
+    private static OptionalDouble shortestOfOthers(Commodity commodity) {
+        return commodity.keeping().curves().get(0).shortestDays();
     }
 
     private static void check(

@@ -41,7 +41,7 @@ final class Crops {
                 breath,
                 new Commodity.Water(transpiration, List.of(), List.of()),
                 new Commodity.Keeping(
-                        List.of(), List.of(), List.of(), List.of(), List.of(), List.of(),
+                        List.of(), List.of(), List.of(), List.of(), List.of(), List.of(), List.of(),
                         List.of()),
                 new Commodity.Company(List.of(), List.of(), List.of()));
     }

@@ -110,7 +110,7 @@ class OwnValuesTest {
     }
 
     private static LifeCurve life(Commodity commodity) {
-        return LifeCurve.of(commodity, 0, Optional.empty());
+        return LifeCurve.of(commodity, Optional.empty());
     }
 
     private static double wattsPerKg(Commodity commodity) {

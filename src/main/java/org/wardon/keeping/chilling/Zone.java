@@ -1,6 +1,9 @@
 package org.wardon.keeping.chilling;
 
+import java.util.Optional;
 import java.util.OptionalDouble;
+import org.wardon.produce.Commodity;
+import org.wardon.produce.Ripeness;
 
 /**
  * The temperatures that injure.
@@ -19,6 +22,17 @@ public record Zone(
      * °C and 21 at 0 °C (chilling-exposure table, memory): about 0.4.
      */
     private static final double BELOW_BAND = 0.4;
+
+    /**
+     * Returns the zone that injures a commodity.
+     *
+     * @param commodity the commodity
+     * @param ripeness how ripe it is; unknown is judged as green
+     * @return the zone as printed; empty where it does not chill
+     */
+    public static Optional<Zone> of(Commodity commodity, Ripeness ripeness) {
+        return Floors.of(commodity, ripeness);
+    }
 
     /**
      * Returns how strongly a temperature injures, in kelvin below the top.

@@ -1,21 +1,24 @@
 package org.wardon.keeping.life;
 
-/** Rate of ageing over temperature in one draw. */
+/**
+ * Rate of ageing over temperature in one draw: by the fitted slope up to the highest temperature at
+ * which lives are published, by the class's Q10 beyond.
+ */
 public final class Ageing {
-    private final GenericCurve generic;
-    private final OwnSlope slope;
+    private final GenericCurve beyond;
     private final double kilojoulePerMol;
+    private final double highestC;
     private final double offset;
 
-    Ageing(GenericCurve generic, OwnSlope slope, double kilojoulePerMol, double offset) {
-        this.generic = generic;
-        this.slope = slope;
+    Ageing(GenericCurve beyond, double kilojoulePerMol, double highestC, double offset) {
+        this.beyond = beyond;
         this.kilojoulePerMol = kilojoulePerMol;
+        this.highestC = highestC;
         this.offset = offset;
     }
 
     Ageing anchored(double lnLifeDays, double atC) {
-        return new Ageing(generic, slope, kilojoulePerMol, offset - lnLifeDays - lnRate(atC));
+        return new Ageing(beyond, kilojoulePerMol, highestC, offset - lnLifeDays - lnRate(atC));
     }
 
     /**
@@ -25,17 +28,9 @@ public final class Ageing {
      * @return ln of the share of life used a day
      */
     public double lnRate(double temperatureC) {
-        if (!(slope.ownWeight() > 0)) {
-            return offset + generic.lnRate(temperatureC);
-        }
-        double low = slope.lowestC();
-        double high = slope.highestC();
-        double inside = Math.min(Math.max(temperatureC, low), high);
-        double own =
-                OwnSlope.lnRate(inside, kilojoulePerMol) - OwnSlope.lnRate(low, kilojoulePerMol);
-        double below = generic.lnRate(Math.min(temperatureC, low));
-        double above = generic.lnRate(Math.max(temperatureC, high)) - generic.lnRate(high);
-        return offset + below + own + above;
+        double fitted = OwnSlope.lnRate(Math.min(temperatureC, highestC), kilojoulePerMol);
+        double above = beyond.lnRate(Math.max(temperatureC, highestC)) - beyond.lnRate(highestC);
+        return offset + fitted + above;
     }
 
     /**

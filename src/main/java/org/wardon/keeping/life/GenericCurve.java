@@ -4,8 +4,7 @@ package org.wardon.keeping.life;
  * How much faster produce ages when warmer, as the handbook draws it for a typical perishable.
  *
  * <p>Source: ah66-2002-tab, Table 20.3: assumed Q10 of 3.0, 2.5, 2.0 and 1.5 a decade from 0 to 40
- * °C, typical ranges 2.5 to 4.0, 2.0 to 2.5, 1.5 to 2.0 and 1.0 to 1.5. Below 0 °C the first decade
- * goes on, above 40 °C nothing changes any more (both ours).
+ * °C. Below 0 °C the first decade goes on, above 40 °C nothing changes any more (both ours).
  */
 public final class GenericCurve {
     /** Source of the curve. */
@@ -13,25 +12,22 @@ public final class GenericCurve {
 
     private static final double DECADE_K = 10;
     private static final double HIGHEST_C = 40;
-    private static final double[] FLAT = {2.5, 2.0, 1.5, 1.0};
     private static final double[] ASSUMED = {3.0, 2.5, 2.0, 1.5};
-    private static final double[] STEEP = {4.0, 2.5, 2.0, 1.5};
 
     /** {@code [decade]}, slope of ln rate, 1/K. */
-    private final double[] perK = new double[FLAT.length];
+    private final double[] perK = new double[ASSUMED.length];
 
     /** {@code [decade]}, ln rate at the lower end of the decade. */
-    private final double[] atStart = new double[FLAT.length + 1];
+    private final double[] atStart = new double[ASSUMED.length + 1];
 
     /**
-     * Takes a curve from the published ranges.
+     * Takes the curve raised to a power.
      *
-     * @param quantile 0 for the flattest, 0.5 for the assumed, 1 for the steepest
-     * @param exponent power to which the whole curve is raised, 1 for a typical perishable
+     * @param power 1 for a typical perishable, more for one that suffers more from warmth
      */
-    public GenericCurve(double quantile, double exponent) {
-        for (int decade = 0; decade < FLAT.length; decade++) {
-            perK[decade] = exponent * Math.log(q10(decade, quantile)) / DECADE_K;
+    public GenericCurve(double power) {
+        for (int decade = 0; decade < ASSUMED.length; decade++) {
+            perK[decade] = power * Math.log(ASSUMED[decade]) / DECADE_K;
             atStart[decade + 1] = atStart[decade] + perK[decade] * DECADE_K;
         }
     }
@@ -40,13 +36,10 @@ public final class GenericCurve {
      * Returns the Q10 of a decade.
      *
      * @param decade 0 for 0 to 10 °C, to 3 for 30 to 40 °C
-     * @param quantile 0 to 1
      * @return factor a 10 K
      */
-    public static double q10(int decade, double quantile) {
-        return quantile < 0.5
-                ? FLAT[decade] + 2 * quantile * (ASSUMED[decade] - FLAT[decade])
-                : ASSUMED[decade] + (2 * quantile - 1) * (STEEP[decade] - ASSUMED[decade]);
+    public static double q10(int decade) {
+        return ASSUMED[decade];
     }
 
     /**
@@ -57,7 +50,7 @@ public final class GenericCurve {
      */
     public double lnRate(double temperatureC) {
         double capped = Math.min(temperatureC, HIGHEST_C);
-        int decade = (int) Math.min(Math.max(capped / DECADE_K, 0), FLAT.length - 1);
+        int decade = (int) Math.min(Math.max(capped / DECADE_K, 0), ASSUMED.length - 1);
         return atStart[decade] + perK[decade] * (capped - decade * DECADE_K);
     }
 }

@@ -1,19 +1,23 @@
 package org.wardon.keeping.life;
 
 import java.util.Optional;
+import java.util.OptionalDouble;
 import org.apache.commons.math3.distribution.NormalDistribution;
 import org.wardon.keeping.Draw;
 import org.wardon.keeping.KnownLife;
 import org.wardon.keeping.RestsOn;
 import org.wardon.produce.Commodity;
+import org.wardon.produce.rows.LifeCurveRow;
 
 /**
  * Life of a commodity over temperature, with its range.
  *
  * <p>The level is the handbook's life in its own condition. A printed range of life beside a
  * printed range of temperature is read as one: the short life belongs to the warm end, the long one
- * to the cold end. Between the temperatures of the commodity's own published lives the rate follows
- * their slope, elsewhere the generic curve.
+ * to the cold end. Up to the highest temperature of the commodity's own published lives the rate
+ * follows the fitted slope, beyond it the generic curve. The middle of the range is the handbook's;
+ * its short end is the shortest life printed for that condition, its long end as far as sources
+ * differ.
  */
 public final class LifeCurve {
     /** Lives of one crop at one temperature differ between sources by this factor in the median. */
@@ -26,18 +30,53 @@ public final class LifeCurve {
     private static final double LEAST_WIDTH = 0.5;
 
     private static final double LEAST_KJ_MOL = 15;
+    private static final double LEAST_POWER = 0.2;
     private static final double ENOUGH_WEIGHT = 0.4;
     private static final int ENOUGH_TEMPERATURES = 3;
+
+    /** One lot in ten lies beyond this many deviations. */
+    private static final double TENTH = 1.2816;
+
+    /** The short end, a little inside the tenth so that the tenth of a few dozen draws is on it. */
+    private static final double SHORTEST = 1.2;
+
+    /** Draws farther out are taken there: one in fifty (ours). */
+    private static final double FARTHEST = 2.05;
+
     private static final NormalDistribution NORMAL = new NormalDistribution(null, 0, 1);
 
     private final LifeLevel level;
     private final OwnSlope slope;
     private final double exponent;
+    private final Sources sources;
     private final Optional<KnownLife> known;
 
-    private LifeCurve(LifeLevel level, OwnSlope slope, double exponent, Optional<KnownLife> known) {
+    /**
+     * How sources differ in the handbook's own condition.
+     *
+     * @param deviation standard deviation of ln life of one source over another's
+     * @param shortestDays shortest life another source gives there, days
+     * @param longestDays longest, days
+     */
+    private record Sources(
+            double deviation, OptionalDouble shortestDays, OptionalDouble longestDays) {
+        /** Without a fit: 1.4 times in the median, which is a deviation of 0.5. */
+        static final Sources USUAL =
+                new Sources(0.5, OptionalDouble.empty(), OptionalDouble.empty());
+
+        static Sources of(LifeCurveRow row) {
+            return new Sources(row.betweenSources(), row.shortestDays(), row.longestDays());
+        }
+    }
+
+    private LifeCurve(
+            LifeLevel level,
+            Optional<LifeCurveRow> row,
+            double exponent,
+            Optional<KnownLife> known) {
         this.level = level;
-        this.slope = slope;
+        this.slope = row.map(OwnSlope::of).orElse(OwnSlope.COMMON);
+        this.sources = row.map(Sources::of).orElse(Sources.USUAL);
         this.exponent = exponent;
         this.known = known;
     }
@@ -46,19 +85,31 @@ public final class LifeCurve {
      * Returns the curve of a commodity.
      *
      * @param commodity the commodity
-     * @param chillingFloorC lives below it are left to chilling, °C; minus infinity where it does
-     *     not chill
      * @param known the keeper's own figure, which sets the level; where there is none, an own life
      *     at a temperature among the commodity's facts does
      * @return the curve
      */
-    public static LifeCurve of(
-            Commodity commodity, double chillingFloorC, Optional<KnownLife> known) {
+    public static LifeCurve of(Commodity commodity, Optional<KnownLife> known) {
         return new LifeCurve(
                 LifeLevel.of(commodity),
-                OwnSlope.of(commodity, chillingFloorC),
+                OwnSlope.row(commodity),
                 Rest.exponent(commodity),
                 known.or(() -> own(commodity)));
+    }
+
+    /**
+     * Returns the curve a commodity has by another fit, for scoring.
+     *
+     * @param commodity the commodity
+     * @param row the other fit
+     * @return the curve
+     */
+    public static LifeCurve of(Commodity commodity, LifeCurveRow row) {
+        return new LifeCurve(
+                LifeLevel.of(commodity),
+                Optional.of(row),
+                Rest.exponent(commodity),
+                Optional.empty());
     }
 
     private static Optional<KnownLife> own(Commodity commodity) {
@@ -104,7 +155,7 @@ public final class LifeCurve {
         if (slope.ownWeight() >= ENOUGH_WEIGHT && slope.temperatures() >= ENOUGH_TEMPERATURES) {
             return RestsOn.OWN_CURVE;
         }
-        return slope.ownWeight() > 0 ? RestsOn.POOLED_SLOPE : RestsOn.HANDBOOK_LIFE;
+        return spansTemperatures() ? RestsOn.POOLED_SLOPE : RestsOn.HANDBOOK_LIFE;
     }
 
     /**
@@ -113,9 +164,7 @@ public final class LifeCurve {
      * @return °C
      */
     public double highestPublishedC() {
-        return slope.ownWeight() > 0
-                ? Math.max(slope.highestC(), level.atHighC())
-                : level.atHighC();
+        return Math.max(slope.highestC().orElse(level.atHighC()), level.atHighC());
     }
 
     /**
@@ -125,7 +174,7 @@ public final class LifeCurve {
      * @return true if the slope has figures of its own
      */
     public boolean spansTemperatures() {
-        return slope.ownWeight() > 0;
+        return slope.highestC().isPresent();
     }
 
     /**
@@ -135,14 +184,10 @@ public final class LifeCurve {
      * @return rate over temperature
      */
     public Ageing at(Draw draw) {
-        GenericCurve generic = new GenericCurve(draw.slope(), exponent);
-        double kilojoule =
-                Math.max(
-                        LEAST_KJ_MOL,
-                        slope.kilojoulePerMol()
-                                + slope.deviation()
-                                        * NORMAL.inverseCumulativeProbability(draw.slope()));
-        Ageing free = new Ageing(generic, slope, kilojoule, 0);
+        double z = NORMAL.inverseCumulativeProbability(draw.slope());
+        double power = exponent * Math.max(LEAST_POWER, 1 + slope.betweenCrops() * z);
+        double kilojoule = Math.max(LEAST_KJ_MOL, slope.kilojoulePerMol() + slope.deviation() * z);
+        Ageing free = new Ageing(new GenericCurve(power), kilojoule, highestPublishedC(), 0);
         return free.anchored(lnLifeAtAnchor(draw, free), anchorC());
     }
 
@@ -151,17 +196,34 @@ public final class LifeCurve {
     }
 
     private double lnLifeAtAnchor(Draw draw, Ageing free) {
-        double q = draw.lifeLevel();
         if (known.isPresent()) {
             double width = 2 * Math.log(OF_OWN_FIGURE);
-            return Math.log(known.get().days()) + (q - 0.5) * width;
+            return Math.log(known.get().days()) + (draw.lifeLevel() - 0.5) * width;
         }
+        double z = NORMAL.inverseCumulativeProbability(draw.lifeLevel());
         double low = Math.log(level.lowDays());
-        double high = Math.log(level.highDays());
-        if (high - low < 1e-9) {
-            return low + (2 * q - 1) * Math.log(BETWEEN_SOURCES);
-        }
+        double printed = Math.log(level.highDays()) - low;
         double fall = free.lnRate(level.atHighC()) - free.lnRate(level.atLowC());
-        return low + q * Math.max(high - low - fall, LEAST_WIDTH * (high - low));
+        double half = 0.5 * Math.max(printed - fall, LEAST_WIDTH * printed);
+        double middle = low + half;
+        return middle + (z < 0 ? shorter(middle, z) : longer(middle, half, z));
+    }
+
+    /**
+     * The short side ends at the shortest life anybody printed for the condition: there nothing
+     * ends a lot before its published life.
+     */
+    private double shorter(double middle, double z) {
+        boolean single = level.highDays() <= level.lowDays();
+        double printed = Math.log(single ? level.lowDays() / BETWEEN_SOURCES : level.lowDays());
+        double least = Math.min(printed, Math.log(sources.shortestDays().orElse(level.lowDays())));
+        return (middle - least) * Math.max(z, -SHORTEST) / SHORTEST;
+    }
+
+    /** The long side is as wide as sources differ, or as one of them says. */
+    private double longer(double middle, double half, double z) {
+        double printed =
+                Math.max(half, Math.log(sources.longestDays().orElse(level.highDays())) - middle);
+        return Math.max(sources.deviation(), printed / TENTH) * Math.min(z, FARTHEST);
     }
 }
