@@ -14,7 +14,7 @@ import org.wardon.errors.Progress;
 import org.wardon.errors.RunStopped;
 import org.wardon.heat.network.ChamberNetwork;
 import org.wardon.heat.network.CoolerPart;
-import org.wardon.heat.network.LotBranch;
+import org.wardon.heat.network.LotPart;
 import org.wardon.heat.network.Terms;
 import org.wardon.heat.solver.Integrator;
 import org.wardon.heat.solver.StepTooShort;
@@ -228,6 +228,9 @@ final class ChamberRunner implements Integrator.StepListener {
         hours.stepped(from, to, state);
         solar.ifPresent(supply -> supply.stepped(to, totals));
         for (int i = 0; i < lots.length; i++) {
+            if (!network.lot(i).there()) {
+                continue;
+            }
             lots[i].stepped(to, state, totals);
             double warm = network.lot(i).warmestC(state);
             if (!(warm > COLDEST_C && warm < WARMEST_C)) {
@@ -411,15 +414,15 @@ final class ChamberRunner implements Integrator.StepListener {
     private void arrive(Edge edge, double t) {
         int i = edge.index();
         Stay stay = run.stays().get(i);
-        LotBranch lot = network.lot(i);
+        LotPart lot = network.lot(i);
         boolean fresh = stay.freshUntilS() > t;
         lot.breathe(fresh ? stay.lot().respiration().fresh() : stay.lot().respiration());
         if (stay.berth().from().isPresent()) {
             LotState state = Objects.requireNonNull(carried[i], "it runs with where it came from");
-            state.into(lot, y);
+            state.into(network, i, y);
             lots[i].carriedIn(t, y, totals, state.massKg());
         } else {
-            lot.arrive(stay.pulpC(), stay.surfaceWaterKg(), network.ratio(y), y);
+            network.arrive(i, stay.pulpC(), stay.surfaceWaterKg(), y);
             lots[i].arrives(t, y, totals);
         }
         changeVolume();

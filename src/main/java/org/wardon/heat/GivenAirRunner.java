@@ -47,7 +47,7 @@ final class GivenAirRunner implements Integrator.StepListener, Integrator.Trigge
         boolean fresh = stay.freshUntilS() > t;
         network.lot().breathe(law(fresh));
         network.air(y, air.temperatureC(t), ratio(t), air.temperatureC(t), ratio(t), 1);
-        network.lot().arrive(stay.pulpC(), stay.surfaceWaterKg(), ratio(t), y);
+        network.arrive(stay.pulpC(), stay.surfaceWaterKg(), ratio(t), y);
         recorder.arrives(t, y, integrator.totals());
         int sample = 0;
         double nextRow = rowS * (Math.floor(t / rowS + 1e-9) + 1);

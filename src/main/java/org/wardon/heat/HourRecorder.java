@@ -99,7 +99,8 @@ final class HourRecorder {
         set(Hours.Column.WATER_USED_KG, terms.waterUsed(totals) - lastUsedKg);
         for (int k = 0; k < ran.length; k++) {
             double ranS = terms.ranS(k, totals);
-            ran[k][size] = (ranS - lastRan[k]) / span;
+            // Summed to the solver's error too.
+            ran[k][size] = Math.min(Math.max((ranS - lastRan[k]) / span, 0), 1);
             lastRan[k] = ranS;
         }
         size++;

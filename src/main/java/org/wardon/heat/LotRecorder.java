@@ -6,7 +6,7 @@ import java.util.List;
 import java.util.Map;
 import java.util.Objects;
 import java.util.Optional;
-import org.wardon.heat.network.LotBranch;
+import org.wardon.heat.network.LotPart;
 import org.wardon.lots.BurntSugar;
 import org.wardon.lots.LotHistory;
 
@@ -24,7 +24,7 @@ final class LotRecorder {
     private static final double WET_SHARE = 0.02;
 
     private final Stay stay;
-    private final LotBranch lot;
+    private final LotPart lot;
     private final LotHistory.Builder history;
     private final Map<LotCourse.Column, double[]> rows = new EnumMap<>(LotCourse.Column.class);
     private double lastRowS = Double.NEGATIVE_INFINITY;
@@ -44,7 +44,7 @@ final class LotRecorder {
     private final LotTotals nothing;
     private LotTotals totals;
 
-    LotRecorder(Stay stay, LotBranch lot, int mostRows) {
+    LotRecorder(Stay stay, LotPart lot, int mostRows) {
         this.stay = stay;
         this.lot = lot;
         this.startMassKg = stay.lot().massKg();

@@ -1,7 +1,8 @@
 package org.wardon.heat;
 
-import org.wardon.heat.network.LotBranch;
+import org.wardon.heat.network.ChamberNetwork;
 import org.wardon.heat.network.LotNodes;
+import org.wardon.heat.network.LotPart;
 
 /**
  * A lot at the moment it is carried from one chamber to another: each shell's temperature, the free
@@ -11,7 +12,7 @@ public final class LotState {
     private final double[] nodes;
     private final double massKg;
 
-    LotState(LotBranch lot, double[] y, double massKg) {
+    LotState(LotPart lot, double[] y, double massKg) {
         this.nodes = LotNodes.of(lot, y);
         this.massKg = massKg;
     }
@@ -25,7 +26,7 @@ public final class LotState {
         return massKg;
     }
 
-    void into(LotBranch lot, double[] y) {
-        LotNodes.put(nodes, lot, y);
+    void into(ChamberNetwork network, int lot, double[] y) {
+        network.bringIn(lot, nodes, y);
     }
 }

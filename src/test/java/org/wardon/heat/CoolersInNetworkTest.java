@@ -25,6 +25,7 @@ import org.wardon.enclosure.Enclosure;
 import org.wardon.heat.network.ChamberNetwork;
 import org.wardon.heat.solver.DenseJacobian;
 import org.wardon.heat.solver.Integrator;
+import org.wardon.heat.solver.TreeSystem;
 
 /**
  * A chamber with coolers of every kind that acts on its air: what the network states of them equals
@@ -137,7 +138,11 @@ class CoolersInNetworkTest {
         int[] partly = new int[network.coolerCount()];
         for (int k = 0; k < 150; k++) {
             double[] y = randomState();
-            network.linearise(T, y, slope, flowSlope);
+            network.linearise(
+                    T,
+                    y,
+                    new TreeSystem.Change(size, network.flows()),
+                    new TreeSystem.Change(slope, flowSlope));
             for (int i = 0; i < partly.length; i++) {
                 CoolerEffect effect = network.cooler(i).effect();
                 partly[i] += effect.ran > 0.01 && effect.ran < 0.99 ? 1 : 0;
@@ -176,7 +181,11 @@ class CoolersInNetworkTest {
         double[] flowsDown = new double[network.flows()];
         for (int k = 0; k < 100; k++) {
             double[] y = randomState();
-            network.linearise(T, y, slope, flowSlope);
+            network.linearise(
+                    T,
+                    y,
+                    new TreeSystem.Change(size, network.flows()),
+                    new TreeSystem.Change(slope, flowSlope));
             double[] up = rates(T + 1, y, flowsUp);
             double[] down = rates(T - 1, y, flowsDown);
             for (int i = 0; i < flowSlope.length; i++) {
@@ -207,7 +216,11 @@ class CoolersInNetworkTest {
         double[] along = new double[network.flows()];
         for (int k = 0; k < 150; k++) {
             double[] y = randomState();
-            network.linearise(T, y, slope, flowSlope);
+            network.linearise(
+                    T,
+                    y,
+                    new TreeSystem.Change(size, network.flows()),
+                    new TreeSystem.Change(slope, flowSlope));
             double[] v = new double[size];
             double[] plus = y.clone();
             double[] minus = y.clone();

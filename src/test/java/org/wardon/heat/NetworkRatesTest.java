@@ -22,7 +22,9 @@ import org.wardon.heat.laws.FreeWater;
 import org.wardon.heat.laws.Mist;
 import org.wardon.heat.laws.SkinWater;
 import org.wardon.heat.network.ChamberNetwork;
+import org.wardon.heat.network.LotNodes;
 import org.wardon.heat.solver.DenseJacobian;
+import org.wardon.heat.solver.TreeSystem;
 import org.wardon.lots.Lot;
 import org.wardon.lots.Shells;
 
@@ -67,15 +69,13 @@ class NetworkRatesTest {
         for (int k = 0; k < 334; k++) {
             double[] y = randomState();
             double[] f = rates(1800, y, flows);
-            int at = size;
-            for (int i = run.stays().size() - 1; i >= 0; i--) {
+            for (int i = 0; i < run.stays().size(); i++) {
                 Lot lot = run.stays().get(i).lot();
-                at -= lot.shells().count() + 3;
-                double[] expected = lotRates(lot, at, y);
+                double[] expected = lotRates(lot, LotNodes.of(network.lot(i), y), y);
+                double[] found = LotNodes.of(network.lot(i), f);
                 for (int n = 0; n < expected.length; n++) {
                     double scale = Math.abs(expected[n]) + gross(lot, n);
-                    assertEquals(
-                            expected[n], f[at + n], 1e-12 * scale, "state " + k + " node " + n);
+                    assertEquals(expected[n], found[n], 1e-12 * scale, "state " + k + " node " + n);
                 }
             }
         }
@@ -103,20 +103,20 @@ class NetworkRatesTest {
     }
 
     /** Rates of a lot's nodes from shells, skin balance, respiration and water, by the laws. */
-    private double[] lotRates(Lot lot, int at, double[] y) {
+    private double[] lotRates(Lot lot, double[] own, double[] y) {
         Shells cut = lot.shells();
         int n = cut.count();
         double kg = lot.massKg();
-        double ratio = y[at + n + 2];
+        double ratio = own[n + 2];
         double dry =
                 kg * lot.packing().airM3PerKg() / MoistAir.specificVolumeM3kg(10, 0, pressurePa);
         double tare = kg * lot.packing().tareJPerKgK() / dry;
         double packageC =
-                (y[at + n + 1] - ratio * MoistAir.EVAPORATION_J_KG)
+                (own[n + 1] - ratio * MoistAir.EVAPORATION_J_KG)
                         / (tare + MoistAir.heatCapacityJkgK(ratio));
         double packagePa = MoistAir.vapourPressurePa(ratio, pressurePa);
         double full = kg * lot.item().areaM2PerKg() * FreeWater.FULL_KG_M2;
-        double wet = FreeWater.wetShare(y[at + n] / full);
+        double wet = FreeWater.wetShare(own[n] / full);
         double film = lot.packing().filmWPerKgK();
         double skin =
                 new BrentSolver(1e-14, 1e-13)
@@ -124,7 +124,7 @@ class NetworkRatesTest {
                                 200,
                                 t ->
                                         cut.skinC(
-                                                        y[at + n - 1],
+                                                        own[n - 1],
                                                         packageC,
                                                         film,
                                                         latentW(lot, t, packagePa, wet))
@@ -141,12 +141,12 @@ class NetworkRatesTest {
         double[] f = new double[n + 3];
         double c = lot.item().specificHeatJkgK();
         for (int i = 0; i < n; i++) {
-            double in = i == 0 ? 0 : cut.conductanceWPerKgK(i - 1) * (y[at + i - 1] - y[at + i]);
+            double in = i == 0 ? 0 : cut.conductanceWPerKgK(i - 1) * (own[i - 1] - own[i]);
             double out =
                     i == n - 1
-                            ? cut.skinConductanceWPerKgK() * (y[at + i] - skin)
-                            : cut.conductanceWPerKgK(i) * (y[at + i] - y[at + i + 1]);
-            double breath = cut.massFraction(i) * lot.respiration().wattsPerKg(y[at + i]);
+                            ? cut.skinConductanceWPerKgK() * (own[i] - skin)
+                            : cut.conductanceWPerKgK(i) * (own[i] - own[i + 1]);
+            double breath = cut.massFraction(i) * lot.respiration().wattsPerKg(own[i]);
             f[i] = (in - out + breath) / (cut.massFraction(i) * c);
         }
         double airC = network.airC(y);
@@ -154,7 +154,7 @@ class NetworkRatesTest {
                 kg
                         * lot.packing().vapourKgPerKgSPa()
                         * (packagePa - MoistAir.vapourPressurePa(network.ratio(y), pressurePa));
-        double toSkin = kg * cut.skinConductanceWPerKgK() * (y[at + n - 1] - skin);
+        double toSkin = kg * cut.skinConductanceWPerKgK() * (own[n - 1] - skin);
         f[n] = -kg * fromFilm;
         f[n + 1] =
                 (toSkin
@@ -293,7 +293,11 @@ class NetworkRatesTest {
         double[] flowSlope = new double[network.flows()];
         for (int k = 0; k < 40; k++) {
             double[] y = randomState();
-            network.linearise(1800, y, slope, flowSlope);
+            network.linearise(
+                    1800,
+                    y,
+                    new TreeSystem.Change(size, network.flows()),
+                    new TreeSystem.Change(slope, flowSlope));
             double[][] j = DenseJacobian.of(network.tree());
             for (int c = 0; c < size; c++) {
                 double step = 1e-6 * Math.max(Math.abs(y[c]), 1e-2);
@@ -325,7 +329,11 @@ class NetworkRatesTest {
         double[] flowsDown = new double[network.flows()];
         for (int k = 0; k < 40; k++) {
             double[] y = randomState();
-            network.linearise(1800, y, slope, flowSlope);
+            network.linearise(
+                    1800,
+                    y,
+                    new TreeSystem.Change(size, network.flows()),
+                    new TreeSystem.Change(slope, flowSlope));
             double[] up = rates(1830, y, flowsUp);
             double[] down = rates(1770, y, flowsDown);
             for (int i = 0; i < flowSlope.length; i++) {
@@ -350,7 +358,11 @@ class NetworkRatesTest {
         double[] along = new double[network.flows()];
         for (int k = 0; k < 40; k++) {
             double[] y = randomState();
-            network.linearise(1800, y, slope, flowSlope);
+            network.linearise(
+                    1800,
+                    y,
+                    new TreeSystem.Change(size, network.flows()),
+                    new TreeSystem.Change(slope, flowSlope));
             double[] v = new double[size];
             double[] plus = y.clone();
             double[] minus = y.clone();
@@ -381,7 +393,11 @@ class NetworkRatesTest {
             for (int i = 0; i < run.stays().size(); i++) {
                 quick.lot(i).arrive(20, 0, network.ratio(y), y.clone());
             }
-            quick.linearise(1800, y, slope, flowSlope);
+            quick.linearise(
+                    1800,
+                    y,
+                    new TreeSystem.Change(size, network.flows()),
+                    new TreeSystem.Change(slope, flowSlope));
             double[] exact = rates(1800, y, flows);
             double[] near = new double[size];
             quick.rates(1800, y, near, flows);

@@ -18,6 +18,7 @@ import org.wardon.cooling.WaterFilm;
 import org.wardon.enclosure.Beyond;
 import org.wardon.heat.network.ChamberNetwork;
 import org.wardon.heat.solver.DenseJacobian;
+import org.wardon.heat.solver.TreeSystem;
 
 /** Faces under water and walls kept wet: Jacobian, slopes and flows against differences. */
 class WaterRatesTest {
@@ -90,7 +91,11 @@ class WaterRatesTest {
         int compared = 0;
         for (int k = 0; k < 40; k++) {
             double[] y = randomState(network, RunCompiler.pressurePa(RUNS.get(name)));
-            network.linearise(t, y, new double[size], new double[network.flows()]);
+            network.linearise(
+                    t,
+                    y,
+                    new TreeSystem.Change(size, network.flows()),
+                    new TreeSystem.Change(size, network.flows()));
             double[][] j = DenseJacobian.of(network.tree());
             for (int c = 0; c < size; c++) {
                 double step = 1e-6 * Math.max(Math.abs(y[c]), 1e-2);
@@ -127,7 +132,11 @@ class WaterRatesTest {
             double[] flowSlope = new double[network.flows()];
             double[] flowsUp = new double[network.flows()];
             double[] flowsDown = new double[network.flows()];
-            network.linearise(t, y, slope, flowSlope);
+            network.linearise(
+                    t,
+                    y,
+                    new TreeSystem.Change(size, network.flows()),
+                    new TreeSystem.Change(slope, flowSlope));
             double[] up = rates(network, t + 30, y, flowsUp);
             double[] down = rates(network, t - 30, y, flowsDown);
             for (int i = 0; i < flowSlope.length; i++) {
@@ -150,7 +159,11 @@ class WaterRatesTest {
         double t = 9 * 3_600 + 1_800;
         for (int k = 0; k < 40; k++) {
             double[] y = randomState(network, RunCompiler.pressurePa(RUNS.get(name)));
-            network.linearise(t, y, new double[size], new double[network.flows()]);
+            network.linearise(
+                    t,
+                    y,
+                    new TreeSystem.Change(size, network.flows()),
+                    new TreeSystem.Change(size, network.flows()));
             double[] v = new double[size];
             double[] plus = y.clone();
             double[] minus = y.clone();

@@ -42,17 +42,6 @@ final class AirState {
         vapourByRatio = pressurePa * MoistAir.MOLAR_MASS_RATIO / (sum * sum);
     }
 
-    /** Takes the values of another. */
-    void like(AirState other) {
-        enthalpy = other.enthalpy;
-        ratio = other.ratio;
-        airC = other.airC;
-        vapourPa = other.vapourPa;
-        airByEnthalpy = other.airByEnthalpy;
-        airByRatio = other.airByRatio;
-        vapourByRatio = other.vapourByRatio;
-    }
-
     /** Change of temperature along a direction of the state, linearised. */
     double airAlong(double[] v) {
         return airByEnthalpy * v[ENTHALPY] + airByRatio * v[HUMIDITY];

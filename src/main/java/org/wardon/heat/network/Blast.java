@@ -12,24 +12,20 @@ final class Blast {
     private static final double SHARE = 0.5;
 
     private final CoolerPart[] coolers;
-    private final boolean[] in;
-    private final AirState midway;
-    private boolean any;
+    private boolean wanted;
 
-    Blast(CoolerPart[] coolers, int lots, double pressurePa) {
+    Blast(CoolerPart[] coolers) {
         this.coolers = coolers;
-        in = new boolean[lots];
-        midway = new AirState(pressurePa);
     }
 
-    void put(int lot) {
-        in[lot] = true;
-        any = true;
+    /** Some lot stands in it. */
+    void wanted() {
+        wanted = true;
     }
 
-    /** Takes up what the coolers, asked in this air before, do to it. */
-    void follow(AirState air) {
-        if (!any) {
+    /** Tells the lots what the coolers, asked in this air before, do to it. */
+    void follow(AirState air, LotBank lots) {
+        if (!wanted) {
             return;
         }
         double chillK = 0;
@@ -42,13 +38,6 @@ final class Blast {
                 dryPa = cooler.blows() * Math.max(0, air.vapourPa - supplyPa);
             }
         }
-        midway.like(air);
-        midway.airC -= SHARE * chillK;
-        midway.vapourPa -= SHARE * dryPa;
-    }
-
-    /** The air around a lot. */
-    AirState around(int lot, AirState air) {
-        return in[lot] ? midway : air;
+        lots.blast(SHARE * chillK, SHARE * dryPa);
     }
 }

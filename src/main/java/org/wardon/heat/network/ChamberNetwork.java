@@ -9,7 +9,6 @@ import org.wardon.enclosure.Enclosure;
 import org.wardon.enclosure.Leakage;
 import org.wardon.heat.solver.Tree;
 import org.wardon.heat.solver.TreeSystem;
-import org.wardon.lots.Lot;
 import org.wardon.produce.Reason;
 
 /**
@@ -36,10 +35,13 @@ public final class ChamberNetwork implements TreeSystem {
     private final int gainsFlowAt;
     private final MistPart mist;
     private final int mistFlowAt;
-    private final LotBranch[] lots;
+    private final LotBank bank;
+    private final LotPart[] lots;
     private final Blast blast;
     private final Part[] always;
-    private final double[] tolerances;
+    private final double[] weights;
+    private double lotK = 1;
+    private double airK = 1;
     private int flows;
     private double airKg;
     private double freeM3;
@@ -93,13 +95,15 @@ public final class ChamberNetwork implements TreeSystem {
         mist =
                 new MistPart(
                         mistFlowAt, dryAirKg(inputs.enclosure().box().volumeM3()), inputs.plain());
-        lots = new LotBranch[inputs.lots().size()];
+        lots = new LotPart[inputs.lots().size()];
+        int flowsOfLots = take(LotBank.FLOWS * lots.length);
+        bank = new LotBank(tree, flowsOfLots, lots.length, inputs.pressurePa(), inputs.plain());
         for (int i = 0; i < lots.length; i++) {
-            lots[i] = lot(inputs.lots().get(i));
+            lots[i] = new LotPart(bank, inputs.lots().get(i), inputs.tuning(), inputs.pressurePa());
         }
-        blast = new Blast(coolers, lots.length, inputs.pressurePa());
+        blast = new Blast(coolers);
         always = alwaysThere();
-        tolerances = new double[tree.size()];
+        weights = new double[tree.size()];
         freeVolume(inputs.enclosure().box().volumeM3());
         hour(0);
     }
@@ -134,18 +138,6 @@ public final class ChamberNetwork implements TreeSystem {
                 new AirExchange.Steady(leak * perM3, fresh * perM3),
                 AirAround.doorway(inputs, factor),
                 coolers);
-    }
-
-    private LotBranch lot(Lot lot) {
-        return new LotBranch(
-                tree,
-                take(LotBranch.FLOWS),
-                lot,
-                LotInGivenAir.packing(lot, inputs.tuning().packageTime()),
-                inputs.tuning().respiration(),
-                inputs.tuning().transpiration(),
-                inputs.pressurePa(),
-                inputs.plain());
     }
 
     /** Dry air in a volume at the setting, kg; a constant for flows counted in chamber air. */
@@ -240,8 +232,9 @@ public final class ChamberNetwork implements TreeSystem {
         faces.steadyProfile(airC, y);
         structure.ifPresent(s -> s.start(airC, y));
         List.of(coolers).forEach(cooler -> cooler.start(y));
-        for (LotBranch lot : lots) {
-            lot.branch.activate(false);
+        bank.clear();
+        for (LotPart lot : lots) {
+            lot.takeOut();
         }
         settle(y);
         return y;
@@ -261,9 +254,9 @@ public final class ChamberNetwork implements TreeSystem {
      * Returns a lot.
      *
      * @param i number of the lot in the inputs
-     * @return its branch
+     * @return the part
      */
-    public LotBranch lot(int i) {
+    public LotPart lot(int i) {
         return lots[i];
     }
 
@@ -273,7 +266,8 @@ public final class ChamberNetwork implements TreeSystem {
      * @param i number of the lot in the inputs
      */
     public void inBlast(int i) {
-        blast.put(i);
+        lots[i].standInBlast();
+        blast.wanted();
     }
 
     /**
@@ -509,12 +503,42 @@ public final class ChamberNetwork implements TreeSystem {
      * @param airK air, K
      */
     public void accuracy(double lotK, double airK) {
+        this.lotK = lotK;
+        this.airK = airK;
+        double[] tolerances = new double[tree.size()];
         Arrays.fill(tolerances, lotK);
         tolerances[AirState.ENTHALPY] = airK * MoistAir.DRY_AIR_J_KG_K;
         tolerances[AirState.HUMIDITY] = airK * 5e-4;
         faces.tolerances(airK, tolerances);
-        List.of(lots).forEach(lot -> lot.tolerances(lotK, airK, tolerances));
         List.of(coolers).forEach(cooler -> cooler.tolerances(tolerances));
+        for (int i = 0; i < weights.length; i++) {
+            weights[i] = 1 / tolerances[i];
+        }
+    }
+
+    /**
+     * Lets a lot arrive.
+     *
+     * @param i number of the lot in the inputs
+     * @param pulpC flesh, °C
+     * @param waterKg free water, kg
+     * @param y state, changed in place
+     */
+    public void arrive(int i, double pulpC, double waterKg, double[] y) {
+        lots[i].arrive(pulpC, waterKg, ratio(y), y);
+        lots[i].weights(lotK, airK, weights);
+    }
+
+    /**
+     * Lets a lot come in as it was carried out elsewhere.
+     *
+     * @param i number of the lot in the inputs
+     * @param nodes its nodes there
+     * @param y state, changed in place
+     */
+    public void bringIn(int i, double[] nodes, double[] y) {
+        LotNodes.put(nodes, lots[i], y);
+        lots[i].weights(lotK, airK, weights);
     }
 
     /**
@@ -538,46 +562,47 @@ public final class ChamberNetwork implements TreeSystem {
     }
 
     @Override
-    public double[] tolerances() {
-        return tolerances;
+    public double[] weights() {
+        return weights;
     }
 
     @Override
     public void rates(double t, double[] y, double[] rates, double[] flow) {
         at(t);
-        air.set(y);
+        ask(air, y, rates, flow);
+    }
+
+    private void ask(AirState state, double[] y, double[] rates, double[] flow) {
+        state.set(y);
         rates[AirState.ENTHALPY] = 0;
         rates[AirState.HUMIDITY] = 0;
         for (Part part : always) {
-            part.rates(air, outside, y, rates, flow);
+            part.rates(state, outside, y, rates, flow);
         }
-        blast.follow(air);
-        for (int i = 0; i < lots.length; i++) {
-            if (lots[i].branch.active()) {
-                lots[i].rates(blast.around(i, air), outside, y, rates, flow);
-            }
-        }
+        blast.follow(state, bank);
+        bank.rates(state, outside, y, rates, flow);
         rates[AirState.ENTHALPY] /= airKg;
         rates[AirState.HUMIDITY] /= airKg;
     }
 
     @Override
-    public void linearise(double t, double[] y, double[] rateSlope, double[] flowSlope) {
+    public void linearise(double t, double[] y, Change now, Change slope) {
         at(t);
         startAir.set(y);
+        for (Part part : always) {
+            part.near(startAir, y);
+        }
+        bank.near(startAir, y);
+        ask(startAir, y, now.rates(), now.flows());
+        double[] rateSlope = slope.rates();
         Arrays.fill(tree.hubByHub, 0);
         Arrays.fill(rateSlope, 0);
-        Arrays.fill(flowSlope, 0);
+        Arrays.fill(slope.flows(), 0);
         for (Part part : always) {
             part.linearise(startAir, outside, airKg, y, tree);
-            part.timeSlope(startAir, outside, y, rateSlope, flowSlope);
+            part.timeSlope(startAir, outside, y, rateSlope, slope.flows());
         }
-        blast.follow(startAir);
-        for (int i = 0; i < lots.length; i++) {
-            if (lots[i].branch.active()) {
-                lots[i].linearise(blast.around(i, startAir), outside, airKg, y, tree);
-            }
-        }
+        bank.linearise(startAir, outside, airKg, y, tree);
         rateSlope[AirState.ENTHALPY] /= airKg;
         rateSlope[AirState.HUMIDITY] /= airKg;
     }
@@ -587,10 +612,6 @@ public final class ChamberNetwork implements TreeSystem {
         for (Part part : always) {
             part.flowsAlong(startAir, direction, change);
         }
-        for (LotBranch lot : lots) {
-            if (lot.branch.active()) {
-                lot.flowsAlong(startAir, direction, change);
-            }
-        }
+        bank.flowsAlong(startAir, direction, change);
     }
 }

@@ -28,6 +28,10 @@ final class FaceBranch implements FacePart {
     private final FaceGrid grid;
     private final double bridgeWK;
     private final double vapourKgS;
+    private final double perFullKg;
+    private final double[] perCapacity;
+    private final double filmWK;
+    private final double perSurface;
     private final LocalCurve saturation;
     private final double wallFactor;
     private double farFilm;
@@ -35,6 +39,10 @@ final class FaceBranch implements FacePart {
     private double beyondC;
     private double beyondSlope;
 
+    private double psat;
+    private double drop;
+    private double wet;
+    private double up;
     private double vapour;
     private double vapourBySurface;
     private double vapourByWater;
@@ -60,6 +68,13 @@ final class FaceBranch implements FacePart {
         this.bridgeWK = bridgeWK;
         this.vapourKgS = areaM2 * FaceWater.conductanceKgM2S(convectiveWm2K);
         this.wallFactor = wallFactor;
+        perFullKg = 1 / (areaM2 * FreeWater.FULL_KG_M2);
+        filmWK = areaM2 * grid.inner;
+        perCapacity = new double[grid.capacity.length];
+        for (int i = 0; i < perCapacity.length; i++) {
+            perCapacity[i] = 1 / grid.capacity[i];
+        }
+        perSurface = perCapacity[branch.run] / areaM2;
         this.saturation = Saturation.curve(plain);
         farFilm(25);
     }
@@ -193,38 +208,30 @@ final class FaceBranch implements FacePart {
     }
 
     private void water(AirState air, double surfaceC, double waterKg) {
-        double psat = saturation.value(surfaceC);
-        double rest = air.pressurePa - psat;
-        double saturated = MoistAir.MOLAR_MASS_RATIO * psat / rest;
-        double drop = saturated - air.ratio;
-        double full = areaM2 * FreeWater.FULL_KG_M2;
-        double wet = FreeWater.wetShare(waterKg / full);
-        double up = FreeWater.positive(drop, FaceWater.ROUND_KG_KG);
+        psat = saturation.value(surfaceC);
+        drop = MoistAir.MOLAR_MASS_RATIO * psat / (air.pressurePa - psat) - air.ratio;
+        wet = FreeWater.wetShare(waterKg * perFullKg);
+        up = FreeWater.positive(drop, FaceWater.ROUND_KG_KG);
         double down = FreeWater.positive(-drop, FaceWater.ROUND_KG_KG);
         vapour = vapourKgS * (wet * up - down);
         runOff = areaM2 * FaceWater.runsOffKgM2S(waterKg / areaM2);
     }
 
+    /** The slopes of what {@link #water} was asked for last. */
     private void waterSlopes(AirState air, double surfaceC, double waterKg) {
-        water(air, surfaceC, waterKg);
-        double psat = saturation.value(surfaceC);
         double rest = air.pressurePa - psat;
         double saturatedSlope =
                 MoistAir.MOLAR_MASS_RATIO
                         * air.pressurePa
                         / (rest * rest)
                         * saturation.slope(surfaceC);
-        double drop = MoistAir.MOLAR_MASS_RATIO * psat / rest - air.ratio;
-        double full = areaM2 * FreeWater.FULL_KG_M2;
-        double wet = FreeWater.wetShare(waterKg / full);
-        double up = FreeWater.positive(drop, FaceWater.ROUND_KG_KG);
         double byDrop =
                 vapourKgS
                         * (wet * FreeWater.positiveSlope(drop, FaceWater.ROUND_KG_KG)
                                 + FreeWater.positiveSlope(-drop, FaceWater.ROUND_KG_KG));
         vapourBySurface = byDrop * saturatedSlope;
         vapourByRatio = -byDrop;
-        vapourByWater = vapourKgS * up * FreeWater.wetShareSlope(waterKg / full) / full;
+        vapourByWater = vapourKgS * up * FreeWater.wetShareSlope(waterKg * perFullKg) * perFullKg;
         runOffByWater =
                 FreeWater.positiveSlope(waterKg / areaM2 - FreeWater.FACE_HOLDS_KG_M2, 0.01)
                         / FreeWater.RUNS_OFF_S;
@@ -235,23 +242,28 @@ final class FaceBranch implements FacePart {
     }
 
     @Override
+    public void near(AirState air, double[] y) {
+        saturation.near(y[branch.blockAt(0)]);
+    }
+
+    @Override
     public void rates(AirState air, Outside outside, double[] y, double[] rates, double[] flows) {
         int start = branch.start;
         double flux = outer * (beyondC - y[start]);
         flows[flowAt + FROM_BEYOND] = areaM2 * flux;
         for (int i = 0; i < branch.run; i++) {
             double next = grid.between[i] * (y[start + i] - y[start + i + 1]);
-            rates[start + i] = (flux - next) / grid.capacity[i];
+            rates[start + i] = (flux - next) * perCapacity[i];
             flux = next;
         }
         int surface = branch.blockAt(0);
         double surfaceC = y[surface];
         water(air, surfaceC, y[surface + 1]);
-        double film = areaM2 * grid.inner * (surfaceC - air.airC);
+        double film = filmWK * (surfaceC - air.airC);
         double latent = vapour * (EVAPORATION + VAPOUR_LESS_WATER * surfaceC);
         double enthalpy = vapour * MoistAir.vapourEnthalpyJkg(surfaceC);
         double bridge = bridgeWK * (beyondC - air.airC);
-        rates[surface] = (areaM2 * flux - film - latent) / (areaM2 * grid.capacity[branch.run]);
+        rates[surface] = (areaM2 * flux - film - latent) * perSurface;
         rates[surface + 1] = -vapour - runOff;
         rates[AirState.ENTHALPY] += film + bridge + enthalpy;
         rates[AirState.HUMIDITY] += vapour;
@@ -267,29 +279,28 @@ final class FaceBranch implements FacePart {
     public void linearise(AirState air, Outside outside, double airKg, double[] y, Tree tree) {
         int surface = branch.blockAt(0);
         double surfaceC = y[surface];
-        saturation.near(surfaceC);
         waterSlopes(air, surfaceC, y[surface + 1]);
-        double film = areaM2 * grid.inner;
-        double capacity = areaM2 * grid.capacity[branch.run];
+        double film = filmWK;
+        double perAirKg = 1 / airKg;
         double latent = EVAPORATION + VAPOUR_LESS_WATER * surfaceC;
         double enthalpy = MoistAir.vapourEnthalpyJkg(surfaceC);
         double left = branch.run > 0 ? areaM2 * grid.between[branch.run - 1] : areaM2 * outer;
-        branch.inner[0] = -(left + film + latentBySurface) / capacity;
-        branch.inner[1] = -latent * vapourByWater / capacity;
+        branch.inner[0] = -(left + film + latentBySurface) * perSurface;
+        branch.inner[1] = -latent * vapourByWater * perSurface;
         branch.inner[2] = -vapourBySurface;
         branch.inner[3] = -vapourByWater - runOffByWater;
-        branch.byHub[0] = film * air.airByEnthalpy / capacity;
-        branch.byHub[1] = (film * air.airByRatio - latent * vapourByRatio) / capacity;
+        branch.byHub[0] = film * air.airByEnthalpy * perSurface;
+        branch.byHub[1] = (film * air.airByRatio - latent * vapourByRatio) * perSurface;
         branch.byHub[2] = 0;
         branch.byHub[3] = -vapourByRatio;
-        branch.onHub[0] = (film + enthalpyBySurface) / airKg;
-        branch.onHub[1] = enthalpy * vapourByWater / airKg;
-        branch.onHub[2] = vapourBySurface / airKg;
-        branch.onHub[3] = vapourByWater / airKg;
+        branch.onHub[0] = (film + enthalpyBySurface) * perAirKg;
+        branch.onHub[1] = enthalpy * vapourByWater * perAirKg;
+        branch.onHub[2] = vapourBySurface * perAirKg;
+        branch.onHub[3] = vapourByWater * perAirKg;
         double toAir = film + bridgeWK;
-        tree.hubByHub[0] -= toAir * air.airByEnthalpy / airKg;
-        tree.hubByHub[1] += (-toAir * air.airByRatio + enthalpy * vapourByRatio) / airKg;
-        tree.hubByHub[3] += vapourByRatio / airKg;
+        tree.hubByHub[0] -= toAir * air.airByEnthalpy * perAirKg;
+        tree.hubByHub[1] += (-toAir * air.airByRatio + enthalpy * vapourByRatio) * perAirKg;
+        tree.hubByHub[3] += vapourByRatio * perAirKg;
         latentNow = latent;
         enthalpyNow = enthalpy;
     }
@@ -314,7 +325,7 @@ final class FaceBranch implements FacePart {
         double airC = air.airAlong(v);
         double ratio = v[AirState.HUMIDITY];
         double byWater = vapourByWater * v[surface + 1] + vapourByRatio * ratio;
-        change[flowAt + HEAT] = areaM2 * grid.inner * (v[surface] - airC) - bridgeWK * airC;
+        change[flowAt + HEAT] = filmWK * (v[surface] - airC) - bridgeWK * airC;
         change[flowAt + BRIDGE] = -bridgeWK * airC;
         change[flowAt + VAPOUR] = vapourBySurface * v[surface] + byWater;
         change[flowAt + VAPOUR_ENTHALPY] = enthalpyBySurface * v[surface] + enthalpyNow * byWater;

@@ -71,6 +71,11 @@ final class IdealCooler implements Part {
     }
 
     @Override
+    public void near(AirState air, double[] y) {
+        saturation.near(air.airC - coilBelowK);
+    }
+
+    @Override
     public void rates(AirState air, Outside outside, double[] y, double[] rates, double[] flows) {
         ask(air);
         double removed = sensible + vapour * MoistAir.vapourEnthalpyJkg(air.airC);
@@ -82,7 +87,6 @@ final class IdealCooler implements Part {
 
     @Override
     public void linearise(AirState air, Outside outside, double airKg, double[] y, Tree tree) {
-        saturation.near(air.airC - coilBelowK);
         ask(air);
         double perSensible = 1 / (MoistAir.DRY_AIR_J_KG_K * coilBelowK);
         double wetness = wetness(air);

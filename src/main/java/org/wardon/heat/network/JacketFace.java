@@ -87,6 +87,11 @@ final class JacketFace extends FilmedFace {
     }
 
     @Override
+    public void near(AirState air, double[] y) {
+        surface.near(y[sheetAt()]);
+    }
+
+    @Override
     public void rates(AirState air, Outside outside, double[] y, double[] rates, double[] flows) {
         follow(air.airC);
         double in = outer * (beyondC - y[outermost]);
@@ -186,8 +191,8 @@ final class JacketFace extends FilmedFace {
         along(air, v, v[sheetAt()], change);
         double byWater = surface.byWater * v[waterAt()];
         change[flowAt + VAPOUR] += byWater;
-        change[flowAt + VAPOUR_ENTHALPY] += byWater * surface.enthalpy;
-        change[flowAt + LATENT] += byWater * surface.latent;
+        change[flowAt + VAPOUR_ENTHALPY] += byWater * surface.enthalpyAtStart;
+        change[flowAt + LATENT] += byWater * surface.latentAtStart;
         change[flowAt + RUNS_OFF] = surface.runOffByWater * v[waterAt()];
     }
 }

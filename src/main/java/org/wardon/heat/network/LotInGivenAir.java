@@ -14,8 +14,11 @@ public final class LotInGivenAir implements TreeSystem {
     private final AirState air;
     private final AirState startAir;
     private final Outside nowhere = new Outside();
-    private final LotBranch lot;
-    private final double[] tolerances;
+    private final LotBank bank;
+    private final LotPart lot;
+    private final double[] weights;
+    private double lotK;
+    private double airK;
     private double enthalpySlope;
     private double ratioSlope;
 
@@ -29,18 +32,10 @@ public final class LotInGivenAir implements TreeSystem {
     public LotInGivenAir(Lot lot, Tuning tuning, double pressurePa) {
         air = new AirState(pressurePa);
         startAir = new AirState(pressurePa);
-        this.lot =
-                new LotBranch(
-                        tree,
-                        0,
-                        lot,
-                        packing(lot, tuning.packageTime()),
-                        tuning.respiration(),
-                        tuning.transpiration(),
-                        pressurePa,
-                        false);
+        bank = new LotBank(tree, 0, 1, pressurePa, false);
+        this.lot = new LotPart(bank, lot, tuning, pressurePa);
         this.lot.give(false);
-        tolerances = new double[tree.size()];
+        weights = new double[tree.size()];
     }
 
     /** The packing of a lot, slowed by a factor on its half-cooling time. */
@@ -55,7 +50,7 @@ public final class LotInGivenAir implements TreeSystem {
      *
      * @return its branch
      */
-    public LotBranch lot() {
+    public LotPart lot() {
         return lot;
     }
 
@@ -66,8 +61,22 @@ public final class LotInGivenAir implements TreeSystem {
      * @param airK of package air, K
      */
     public void accuracy(double lotK, double airK) {
-        Arrays.fill(tolerances, 1);
-        lot.tolerances(lotK, airK, tolerances);
+        this.lotK = lotK;
+        this.airK = airK;
+    }
+
+    /**
+     * Lets the lot arrive.
+     *
+     * @param pulpC flesh, °C
+     * @param waterKg free water, kg
+     * @param ratio humidity ratio of the air, kg/kg
+     * @param y state, changed in place
+     */
+    public void arrive(double pulpC, double waterKg, double ratio, double[] y) {
+        lot.arrive(pulpC, waterKg, ratio, y);
+        Arrays.fill(weights, 1);
+        lot.weights(lotK, airK, weights);
     }
 
     /**
@@ -96,33 +105,38 @@ public final class LotInGivenAir implements TreeSystem {
 
     @Override
     public int flows() {
-        return LotBranch.FLOWS;
+        return LotBank.FLOWS;
     }
 
     @Override
-    public double[] tolerances() {
-        return tolerances;
+    public double[] weights() {
+        return weights;
     }
 
     @Override
     public void rates(double t, double[] y, double[] rates, double[] flows) {
-        air.set(y);
+        ask(air, y, rates, flows);
+    }
+
+    private void ask(AirState state, double[] y, double[] rates, double[] flows) {
+        state.set(y);
         rates[AirState.ENTHALPY] = enthalpySlope;
         rates[AirState.HUMIDITY] = ratioSlope;
-        lot.rates(air, nowhere, y, rates, flows);
+        bank.rates(state, nowhere, y, rates, flows);
     }
 
     @Override
-    public void linearise(double t, double[] y, double[] rateSlope, double[] flowSlope) {
-        startAir.set(y);
+    public void linearise(double t, double[] y, Change now, Change slope) {
+        bank.near(startAir, y);
+        ask(startAir, y, now.rates(), now.flows());
         Arrays.fill(tree.hubByHub, 0);
-        Arrays.fill(rateSlope, 0);
-        Arrays.fill(flowSlope, 0);
-        lot.linearise(startAir, nowhere, 1, y, tree);
+        Arrays.fill(slope.rates(), 0);
+        Arrays.fill(slope.flows(), 0);
+        bank.linearise(startAir, nowhere, 1, y, tree);
     }
 
     @Override
     public void flowsAlong(double[] direction, double[] change) {
-        lot.flowsAlong(startAir, direction, change);
+        bank.flowsAlong(startAir, direction, change);
     }
 }

@@ -1,6 +1,5 @@
 package org.wardon.heat.network;
 
-import java.util.Arrays;
 import org.wardon.errors.Require;
 
 /**
@@ -18,8 +17,8 @@ public final class LotNodes {
      * @param y state it is in
      * @return {@code [node]}, a copy
      */
-    public static double[] of(LotBranch lot, double[] y) {
-        return Arrays.copyOfRange(y, lot.branch.start, lot.branch.blockAt(3) + 1);
+    public static double[] of(LotPart lot, double[] y) {
+        return lot.nodes(y);
     }
 
     /**
@@ -29,10 +28,9 @@ public final class LotNodes {
      * @param lot the lot
      * @param y state, changed in place
      */
-    public static void put(double[] nodes, LotBranch lot, double[] y) {
-        int places = lot.branch.blockAt(3) + 1 - lot.branch.start;
-        Require.that(nodes.length == places, "a lot of " + places + " nodes, not " + nodes.length);
-        System.arraycopy(nodes, 0, y, lot.branch.start, nodes.length);
-        lot.branch.activate(true);
+    public static void put(double[] nodes, LotPart lot, double[] y) {
+        int rows = LotBank.SHELLS + 3;
+        Require.that(nodes.length == rows, "a lot of " + rows + " nodes, not " + nodes.length);
+        lot.put(nodes, y);
     }
 }

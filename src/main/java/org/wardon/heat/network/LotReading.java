@@ -30,13 +30,12 @@ public record LotReading(
      * @param y state, in which the rates were asked for last
      * @return the reading
      */
-    public static LotReading of(LotBranch lot, double[] y) {
+    public static LotReading of(LotPart lot, double[] y) {
         List<Double> shells = new ArrayList<>();
-        for (int i = lot.branch.start; i <= lot.branch.blockAt(0); i++) {
-            shells.add(y[i]);
+        for (int k = 0; k < LotBank.SHELLS; k++) {
+            shells.add(lot.shellC(k, y));
         }
-        double skinC = lot.skinC;
         double humidity = lot.humidityFraction(y);
-        return new LotReading(shells, skinC, lot.packageC, humidity, lot.waterKg(y));
+        return new LotReading(shells, lot.skinC(), lot.packageC(y), humidity, lot.waterKg(y));
     }
 }

@@ -40,6 +40,11 @@ final class MistPart implements Part {
     }
 
     @Override
+    public void near(AirState air, double[] y) {
+        saturation.near(air.airC);
+    }
+
+    @Override
     public void rates(AirState air, Outside outside, double[] y, double[] rates, double[] flows) {
         double water = perS * FreeWater.positive(excess(air), Mist.ROUND_KG_KG);
         double heat = water * MoistAir.WATER_J_KG_K * air.airC;
@@ -51,7 +56,6 @@ final class MistPart implements Part {
 
     @Override
     public void linearise(AirState air, Outside outside, double airKg, double[] y, Tree tree) {
-        saturation.near(air.airC);
         double psat = saturation.value(air.airC);
         double dry = air.pressurePa - psat;
         double satByAirC =

@@ -93,6 +93,11 @@ final class OpenFilmFace extends FilmedFace {
     }
 
     @Override
+    public void near(AirState air, double[] y) {
+        surface.near(y[innermost]);
+    }
+
+    @Override
     public void rates(AirState air, Outside outside, double[] y, double[] rates, double[] flows) {
         follow(air.airC);
         double in = outer * (beyondC - y[outermost]);

@@ -10,8 +10,12 @@ interface Part {
      */
     void rates(AirState air, Outside outside, double[] y, double[] rates, double[] flows);
 
+    /** Hears that a step starts here, before it is asked for rates. */
+    default void near(AirState air, double[] y) {}
+
     /**
-     * Writes J; what the part does to the air goes, divided by {@code airKg}, to the hub's rows.
+     * Writes J, after {@link #rates} was asked of the same state; what the part does to the air
+     * goes, divided by {@code airKg}, to the hub's rows.
      */
     void linearise(AirState air, Outside outside, double airKg, double[] y, Tree tree);
 

@@ -4,9 +4,9 @@ package org.wardon.heat.network;
 final class PartNames {
     private final NetworkInputs inputs;
     private final FacePart[] faces;
-    private final LotBranch[] lots;
+    private final LotPart[] lots;
 
-    PartNames(NetworkInputs inputs, FacePart[] faces, LotBranch[] lots) {
+    PartNames(NetworkInputs inputs, FacePart[] faces, LotPart[] lots) {
         this.inputs = inputs;
         this.faces = faces;
         this.lots = lots;
@@ -18,7 +18,7 @@ final class PartNames {
             return node == AirState.ENTHALPY ? "air" : "humidity of the air";
         }
         for (int i = lots.length - 1; i >= 0; i--) {
-            if (node >= lots[i].branch.start) {
+            if (lots[i].holds(node)) {
                 return "lot " + inputs.lots().get(i).id();
             }
         }

@@ -13,7 +13,7 @@ final class Saturation {
     private static final double SLOPE_K = 1e-4;
 
     /** A cubic over this much to either side is exact to 1e-6. */
-    private static final double REACH_K = 1.2;
+    static final double REACH_K = 1.2;
 
     private Saturation() {}
 

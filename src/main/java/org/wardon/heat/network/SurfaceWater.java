@@ -30,6 +30,11 @@ final class SurfaceWater {
     /** Enthalpy of that vapour, J/kg. */
     double enthalpy;
 
+    /** The same two where the step started, to which all slopes belong. */
+    double latentAtStart;
+
+    double enthalpyAtStart;
+
     double bySurface;
     double byWater;
     double byRatio;
@@ -59,9 +64,13 @@ final class SurfaceWater {
         enthalpy = MoistAir.vapourEnthalpyJkg(surfaceC);
     }
 
-    /** Renews the curve and works out rates and slopes at the start of a step. */
-    void slopesAt(AirState air, double surfaceC, double waterKg, double damp) {
+    /** Renews the curve where need be, before a step starts. */
+    void near(double surfaceC) {
         saturation.near(surfaceC);
+    }
+
+    /** Works out rates and slopes at the start of a step. */
+    void slopesAt(AirState air, double surfaceC, double waterKg, double damp) {
         at(air, surfaceC, waterKg, damp);
         double psat = saturation.value(surfaceC);
         double rest = air.pressurePa - psat;
@@ -86,6 +95,8 @@ final class SurfaceWater {
         runOffByWater =
                 FreeWater.positiveSlope(waterKg / areaM2 - FreeWater.FACE_HOLDS_KG_M2, 0.01)
                         / FreeWater.RUNS_OFF_S;
+        latentAtStart = latent;
+        enthalpyAtStart = enthalpy;
         latentBySurface = bySurface * latent + vapour * VAPOUR_LESS_WATER;
         enthalpyBySurface = bySurface * enthalpy + vapour * MoistAir.VAPOUR_J_KG_K;
     }

@@ -147,7 +147,6 @@ final class WettedFace extends FaceChain {
     }
 
     private void outsideSlopes(double surfaceC, AirState air, Outside outside) {
-        saturation.near(surfaceC);
         outside(surfaceC, air, outside);
         double slope =
                 wet
@@ -165,6 +164,12 @@ final class WettedFace extends FaceChain {
                         * saturation.slope(surfaceC);
         outByRatio = -slope;
         outLatentBySurface = outBySurface * outLatent + outVapour * LATENT_SLOPE;
+    }
+
+    @Override
+    public void near(AirState air, double[] y) {
+        saturation.near(y[outermost]);
+        inside.near(y[innermost]);
     }
 
     @Override
@@ -265,8 +270,8 @@ final class WettedFace extends FaceChain {
         change[flowAt + BRIDGE] = -bridgeWK * airC;
         change[flowAt + VAPOUR] = inside.bySurface * surface + byWater;
         change[flowAt + VAPOUR_ENTHALPY] =
-                inside.enthalpyBySurface * surface + inside.enthalpy * byWater;
-        change[flowAt + LATENT] = inside.latentBySurface * surface + inside.latent * byWater;
+                inside.enthalpyBySurface * surface + inside.enthalpyAtStart * byWater;
+        change[flowAt + LATENT] = inside.latentBySurface * surface + inside.latentAtStart * byWater;
         change[flowAt + FROM_BEYOND] = -areaM2 * outer * v[outermost];
         change[flowAt + RUNS_OFF] = inside.runOffByWater * v[waterAt()];
         change[flowAt + LATENT_OUTSIDE] = outLatentBySurface * v[outermost];

@@ -1,13 +1,21 @@
 package org.wardon.heat.solver;
 
-import java.util.Arrays;
-
 /**
  * Carries a state through time in steps as long as the error allows, and lands exactly on the times
  * asked for and on the first crossing of a {@link Trigger}. Allocates nothing after construction.
  */
 public final class Integrator {
     private static final double SAFETY = 0.85;
+
+    /** The same for a step that is tried again behind the next edge of its kind. */
+    private static final double CAREFUL = 0.8;
+
+    /** Steps behind an edge that are remembered. */
+    private static final int REMEMBERED = 8;
+
+    /** The error of a step is not trusted to fall faster than to this share of its cube law. */
+    private static final double STEEPEST = 0.05;
+
     private static final double SHORTEST = 0.15;
     private static final double LONGEST = 6;
 
@@ -21,8 +29,13 @@ public final class Integrator {
     private final double shortestStep;
     private double nextStep;
     private double lastError = 1;
-    private final double[] edgeStep;
-    private int edge = 0;
+    private double lastStep;
+
+    /** Steps that went well behind an edge, {@code [kind][number of the step]}; 0 unknown. */
+    private final double[][] learned;
+
+    private int edge;
+    private int sinceEdge;
     private boolean fired;
     private long steps;
     private long rejected;
@@ -38,8 +51,10 @@ public final class Integrator {
     public Integrator(TreeSystem system, int edges, double firstStep, double shortestStep) {
         this.method = new Rosenbrock(system);
         this.totals = new double[system.flows()];
-        this.edgeStep = new double[edges];
-        Arrays.fill(edgeStep, firstStep);
+        this.learned = new double[edges][REMEMBERED];
+        for (double[] steps : learned) {
+            steps[0] = firstStep;
+        }
         this.nextStep = firstStep;
         this.shortestStep = shortestStep;
     }
@@ -78,13 +93,15 @@ public final class Integrator {
 
     /**
      * Tells that the rates jump here, so that the step last used says little about the next; the
-     * step that went well behind the last edge of the same kind is tried.
+     * steps that went well behind the last edge of the same kind are tried again.
      *
      * @param kind kind of edge, from 0
      */
     public void restart(int kind) {
-        nextStep = edgeStep[kind];
         edge = kind;
+        sinceEdge = 0;
+        nextStep = learned[kind][0];
+        lastStep = 0;
     }
 
     /**
@@ -149,21 +166,41 @@ public final class Integrator {
         return wanted > 0.5 * left ? 0.5 * left : wanted;
     }
 
-    /** Standard control; after a step that went worse than the one before, more carefully. */
+    /**
+     * Standard control, and foresight: where the error a step makes has been falling or rising from
+     * step to step, it is taken to go on so. Behind an edge, what went well the last time.
+     */
     private void chooseNext(double h, double error, boolean refused) {
         double e = Math.max(error, 1e-6);
         double factor = SAFETY / Math.cbrt(e);
-        if (edge < 0 && e > lastError) {
-            factor *= Math.pow(lastError / e, 0.2);
+        if (lastStep > 0) {
+            double grown = h / lastStep;
+            double trend = e / (lastError * grown * grown * grown);
+            if (trend < 1) {
+                factor /= Math.cbrt(Math.max(trend, STEEPEST));
+            } else if (e > lastError) {
+                factor *= Math.pow(lastError / e, 0.2);
+            }
         }
         double proposed = h * Math.max(SHORTEST, Math.min(factor, refused ? 1 : LONGEST));
-        if (edge >= 0) {
-            edgeStep[edge] = proposed;
-            edge = -1;
-        }
         // A step cut short to land on an event says nothing against the step wanted before.
-        nextStep = h < nextStep && !refused ? Math.max(proposed, nextStep) : proposed;
+        boolean cut = h < nextStep && !refused;
+        if (sinceEdge < REMEMBERED) {
+            proposed = learn(h, e, cut, refused, proposed);
+        }
+        nextStep = cut ? Math.max(proposed, nextStep) : proposed;
         lastError = e;
+        lastStep = h;
+    }
+
+    /** Remembers what would have gone best here; returns what to try next. */
+    private double learn(double h, double e, boolean cut, boolean refused, double proposed) {
+        double[] steps = learned[edge];
+        double best = h * Math.min(Math.max(CAREFUL / Math.cbrt(e), 0.7), refused ? 1 : 1.5);
+        steps[sinceEdge] = cut ? Math.max(best, steps[sinceEdge]) : best;
+        sinceEdge++;
+        boolean known = sinceEdge < REMEMBERED && steps[sinceEdge] > 0;
+        return known ? Math.min(steps[sinceEdge], 2 * Math.max(proposed, h)) : proposed;
     }
 
     /**

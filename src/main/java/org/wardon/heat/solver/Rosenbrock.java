@@ -29,6 +29,8 @@ final class Rosenbrock {
     private final Tree tree;
     private final int n;
     private final int flows;
+    private final TreeSystem.Change start;
+    private final TreeSystem.Change slope;
     private final double[] f0;
     private final double[] ft;
     private final double[] u1;
@@ -55,8 +57,12 @@ final class Rosenbrock {
         tree = system.tree();
         n = tree.size();
         flows = system.flows();
-        f0 = new double[n];
-        ft = new double[n];
+        start = new TreeSystem.Change(n, flows);
+        slope = new TreeSystem.Change(n, flows);
+        f0 = start.rates();
+        ft = slope.rates();
+        flow0 = start.flows();
+        flowSlope = slope.flows();
         u1 = new double[n];
         u2 = new double[n];
         u3 = new double[n];
@@ -65,8 +71,6 @@ final class Rosenbrock {
         stage = new double[n];
         along = new double[n];
         end = new double[n];
-        flow0 = new double[flows];
-        flowSlope = new double[flows];
         flow3 = new double[flows];
         flow4 = new double[flows];
         flowAlong = new double[flows];
@@ -74,8 +78,7 @@ final class Rosenbrock {
 
     /** Prepares steps of any length from one state. */
     void startFrom(double t, double[] y) {
-        system.linearise(t, y, ft, flowSlope);
-        system.rates(t, y, f0, flow0);
+        system.linearise(t, y, start, slope);
     }
 
     /**
@@ -102,15 +105,15 @@ final class Rosenbrock {
     /** Right-hand sides of the first two stages, which see the rates at the start. */
     private void fromStart(int s, double h) {
         if (s == 0) {
-            double slope = 0.5 * h;
+            double byTime = 0.5 * h;
             for (int i = 0; i < n; i++) {
-                u1[i] = f0[i] + slope * ft[i];
+                u1[i] = f0[i] + byTime * ft[i];
             }
         } else {
-            double slope = 1.5 * h;
+            double byTime = 1.5 * h;
             double four = 4 / h;
             for (int i = 0; i < n; i++) {
-                u2[i] = f0[i] + four * u1[i] + slope * ft[i];
+                u2[i] = f0[i] + four * u1[i] + byTime * ft[i];
             }
         }
     }
@@ -137,10 +140,10 @@ final class Rosenbrock {
 
     /** Each node of the hub counts for itself, each branch by its root mean square. */
     private double error() {
-        double[] tolerance = system.tolerances();
+        double[] weights = system.weights();
         double worst = 0;
         for (int i = 0; i < tree.hub(); i++) {
-            double e = Math.abs(u4[i] / tolerance[i]);
+            double e = Math.abs(u4[i] * weights[i]);
             if (!(e <= worst)) {
                 worst = e;
                 worstNode = i;
@@ -150,7 +153,7 @@ final class Rosenbrock {
             if (branch.active()) {
                 double sum = 0;
                 for (int i = branch.start; i < branch.start + branch.size(); i++) {
-                    double share = u4[i] / tolerance[i];
+                    double share = u4[i] * weights[i];
                     sum += share * share;
                 }
                 double e = Math.sqrt(sum / branch.size());
@@ -158,6 +161,13 @@ final class Rosenbrock {
                     worst = e;
                     worstNode = branch.start;
                 }
+            }
+        }
+        for (Bank bank : tree.banks()) {
+            double e = bank.worst(u4, weights);
+            if (!(e <= worst)) {
+                worst = e;
+                worstNode = bank.at(0, bank.worstMember);
             }
         }
         return worst;

@@ -16,6 +16,8 @@ public final class Tree {
     private final int hub;
     private final List<Branch> list = new ArrayList<>();
     private Branch[] branches = new Branch[0];
+    private final List<Bank> bankList = new ArrayList<>();
+    private Bank[] banks = new Bank[0];
     private final double[] hubLu;
     private int size;
 
@@ -50,6 +52,22 @@ public final class Tree {
     }
 
     /**
+     * Adds a bank behind what was added last.
+     *
+     * @param places members there is room for, 1 or more
+     * @param run nodes of the run of each, 1 or more
+     * @param hubAt first of the two nodes of the hub they touch
+     * @return the bank, whose J parts the system writes
+     */
+    public Bank addBank(int places, int run, int hubAt) {
+        Bank bank = new Bank(size, places, run, hubAt);
+        size += bank.size();
+        bankList.add(bank);
+        banks = bankList.toArray(new Bank[0]);
+        return bank;
+    }
+
+    /**
      * Returns the number of nodes.
      *
      * @return hub and branches
@@ -71,6 +89,10 @@ public final class Tree {
         return branches;
     }
 
+    Bank[] banks() {
+        return banks;
+    }
+
     void factor(double shift) {
         for (int i = 0; i < hub * hub; i++) {
             hubLu[i] = -hubByHub[i];
@@ -82,6 +104,9 @@ public final class Tree {
             if (branch.active()) {
                 branch.factor(shift, hubLu);
             }
+        }
+        for (Bank bank : banks) {
+            bank.factor(shift, hubLu, hub);
         }
         factorHub();
     }
@@ -107,6 +132,9 @@ public final class Tree {
                 branch.forward(x);
             }
         }
+        for (Bank bank : banks) {
+            bank.forward(x);
+        }
         for (int i = 1; i < hub; i++) {
             for (int k = 0; k < i; k++) {
                 x[i] -= hubLu[i * hub + k] * x[k];
@@ -122,6 +150,9 @@ public final class Tree {
             if (branch.active()) {
                 branch.back(x);
             }
+        }
+        for (Bank bank : banks) {
+            bank.back(x);
         }
     }
 }

@@ -31,14 +31,15 @@ public interface TreeSystem {
     void rates(double t, double[] y, double[] rates, double[] flows);
 
     /**
-     * Writes J into the tree and keeps what {@link #flowsAlong} needs.
+     * Starts a step: writes rates and flows as {@link #rates} does, J into the tree, and keeps what
+     * {@link #flowsAlong} needs.
      *
      * @param t time of the start of a step
      * @param y state there
-     * @param rateSlope filled with the partial derivative of the rates by time
-     * @param flowSlope filled with the partial derivative of the flows by time
+     * @param now filled with rates and flows
+     * @param slope filled with their partial derivatives by time
      */
-    void linearise(double t, double[] y, double[] rateSlope, double[] flowSlope);
+    void linearise(double t, double[] y, Change now, Change slope);
 
     /**
      * Writes the change of the flows along a direction, linearised where {@link #linearise} was
@@ -50,9 +51,28 @@ public interface TreeSystem {
     void flowsAlong(double[] direction, double[] change);
 
     /**
-     * Returns what error of a node counts as 1.
+     * Returns what error of a node counts as 1, the other way round.
      *
-     * @return {@code [node]}, above 0; may change from step to step
+     * @return {@code [node]}, one over the error, above 0; may change from step to step
      */
-    double[] tolerances();
+    double[] weights();
+
+    /**
+     * Rates and flows, or their derivatives.
+     *
+     * @param rates {@code [node]}
+     * @param flows {@code [flow]}
+     */
+    @SuppressWarnings("ArrayRecordComponent") // a place to write to, shared by solver and system
+    record Change(double[] rates, double[] flows) {
+        /**
+         * Makes room for a system.
+         *
+         * @param nodes nodes of its tree
+         * @param flows its flows
+         */
+        public Change(int nodes, int flows) {
+            this(new double[nodes], new double[flows]);
+        }
+    }
 }

@@ -10,13 +10,13 @@ final class Cascade implements TreeSystem {
     private final Tree tree = new Tree(2);
     private final Branch branch = tree.addBranch(1, 1);
     private final double stiffness;
-    private final double[] tolerances = new double[4];
+    private final double[] weights = new double[4];
     private double flowA;
     private final double[] flowRow = new double[4];
 
     Cascade(double stiffness, double tolerance) {
         this.stiffness = stiffness;
-        java.util.Arrays.fill(tolerances, tolerance);
+        java.util.Arrays.fill(weights, 1 / tolerance);
     }
 
     @Override
@@ -44,7 +44,10 @@ final class Cascade implements TreeSystem {
     }
 
     @Override
-    public void linearise(double t, double[] y, double[] rateSlope, double[] flowSlope) {
+    public void linearise(double t, double[] y, Change now, Change slope) {
+        rates(t, y, now.rates(), now.flows());
+        double[] rateSlope = slope.rates();
+        double[] flowSlope = slope.flows();
         tree.hubByHub[0] = flowRow[0] = -y[1] - 1;
         tree.hubByHub[1] = flowRow[1] = -y[0];
         tree.hubByHub[2] = 2 * y[0];
@@ -71,7 +74,7 @@ final class Cascade implements TreeSystem {
     }
 
     @Override
-    public double[] tolerances() {
-        return tolerances;
+    public double[] weights() {
+        return weights;
     }
 }

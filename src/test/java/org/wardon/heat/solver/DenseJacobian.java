@@ -21,7 +21,39 @@ public final class DenseJacobian {
                 write(branch, hub, j);
             }
         }
+        for (Bank bank : tree.banks()) {
+            for (int i = 0; i < bank.count(); i++) {
+                write(bank, i, j);
+            }
+        }
         return j;
+    }
+
+    /** A bank that hangs on the first two nodes of the hub. */
+    private static void write(Bank bank, int i, double[][] j) {
+        int p = bank.places;
+        for (int k = 0; k < bank.run; k++) {
+            int at = bank.at(k, i);
+            j[at][at] = bank.self[k * p + i];
+            j[at][bank.at(k + 1, i)] = bank.after[k * p + i];
+            if (k > 0) {
+                j[at][bank.at(k - 1, i)] = bank.before[k * p + i];
+            }
+        }
+        j[bank.at(bank.run, i)][bank.at(bank.run - 1, i)] = bank.blockByRun[i];
+        for (int r = 0; r < Bank.BLOCK; r++) {
+            for (int c = 0; c < Bank.BLOCK; c++) {
+                j[bank.at(bank.run + r, i)][bank.at(bank.run + c, i)] =
+                        bank.inner[(r * Bank.BLOCK + c) * p + i];
+            }
+        }
+        for (int r = 0; r < Bank.TOUCH; r++) {
+            for (int h = 0; h < Bank.TOUCH; h++) {
+                int node = bank.at(bank.run + 2 + r, i);
+                j[node][h] = bank.byHub[(r * Bank.TOUCH + h) * p + i];
+                j[h][node] = bank.onHub[(h * Bank.TOUCH + r) * p + i];
+            }
+        }
     }
 
     private static void write(Branch branch, int hub, double[][] j) {

@@ -19,6 +19,8 @@ class TreeTest {
         Branch wall = tree.addBranch(6, 2);
         Branch stub = tree.addBranch(0, 1);
         Branch lot = tree.addBranch(4, 4);
+        Bank bank = tree.addBank(5, 3, 0);
+        bank.count(4);
         double[][] j = new double[tree.size()][tree.size()];
         for (int r = 0; r < 2; r++) {
             for (int c = 0; c < 2; c++) {
@@ -28,6 +30,13 @@ class TreeTest {
         for (Branch branch : new Branch[] {wall, stub, lot}) {
             fill(branch, j, random);
         }
+        fill(bank, random);
+        double[][] ofBank = DenseJacobian.of(tree);
+        for (int r = 0; r < j.length; r++) {
+            for (int c = 0; c < j.length; c++) {
+                j[r][c] = r >= bank.start || c >= bank.start ? ofBank[r][c] : j[r][c];
+            }
+        }
         double[] x = new double[tree.size()];
         for (int i = 0; i < x.length; i++) {
             x[i] = random.nextDouble(-1, 1);
@@ -36,7 +45,27 @@ class TreeTest {
         tree.factor(SHIFT);
         tree.solve(x);
         for (int i = 0; i < x.length; i++) {
+            if (i >= bank.start && (i - bank.start) % bank.places >= bank.count()) {
+                continue;
+            }
             assertEquals(expected[i], x[i], 1e-13, "node " + i);
+        }
+    }
+
+    private static void fill(Bank bank, SplittableRandom random) {
+        for (double[] part :
+                new double[][] {
+                    bank.before,
+                    bank.self,
+                    bank.after,
+                    bank.blockByRun,
+                    bank.inner,
+                    bank.byHub,
+                    bank.onHub
+                }) {
+            for (int i = 0; i < part.length; i++) {
+                part[i] = random.nextDouble(-1, 1);
+            }
         }
     }
 
