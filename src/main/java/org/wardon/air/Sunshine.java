@@ -18,6 +18,8 @@ public final class Sunshine {
     private static final double LOWEST_COS_ZENITH = Math.cos(Math.toRadians(85));
     private static final int DAY_H = 24;
 
+    private static final double CLEANEST_AIR = 0.8;
+
     private final double[] beamNormalWm2;
     private final double[] diffuseWm2;
     private final double[] cosZenith;
@@ -76,11 +78,27 @@ public final class Sunshine {
         return SOLAR_CONSTANT_WM2 * distance * Math.max(0, cosZenith[h]);
     }
 
+    /**
+     * Beam is never more than the cleanest air lets through: a clock an hour wrong would else make
+     * suns of a little light at a low sun. What is left of the measured is diffuse then.
+     */
     private void split(int h, double globalWm2, double outsideWm2) {
         boolean low = cosZenith[h] < LOWEST_COS_ZENITH;
         double share = low ? 1 : DiffuseShare.of(globalWm2 / outsideWm2);
-        diffuseWm2[h] = share * globalWm2;
-        beamNormalWm2[h] = low ? 0 : (1 - share) * globalWm2 / cosZenith[h];
+        double most = low ? 0 : outsideWm2 * cleanestShare(cosZenith[h]);
+        double beam = Math.min((1 - share) * globalWm2, most);
+        diffuseWm2[h] = globalWm2 - beam;
+        beamNormalWm2[h] = low ? 0 : beam / cosZenith[h];
+    }
+
+    /**
+     * Share of the beam that the cleanest air lets through.
+     *
+     * <p>Source: the form is that of Meinel and Meinel 1976, 0.7^(air mass^0.678) for usual clear
+     * air (from memory); 0.8 for the cleanest (assumption).
+     */
+    private static double cleanestShare(double cosZenith) {
+        return Math.pow(CLEANEST_AIR, Math.pow(1 / cosZenith, 0.678));
     }
 
     private static double estimatedShare(

@@ -74,6 +74,16 @@ public record Surroundings(
     }
 
     /**
+     * Returns a copy for a chamber that is expected to keep another temperature.
+     *
+     * @param otherC that temperature, °C
+     * @return the copy
+     */
+    public Surroundings keeping(double otherC) {
+        return new Surroundings(site, timeline, weather, sun, hours, otherC, neighbourC);
+    }
+
+    /**
      * Returns the course of the year that the ground follows: what the site tells, else that of a
      * run of a year.
      *

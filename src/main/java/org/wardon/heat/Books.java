@@ -96,6 +96,7 @@ final class Books {
     double layersError(double[] y) {
         double stored = network.layersJ(y) - startLayersJ;
         double entered = Math.abs(terms.fromBeyond(totals)) + Math.abs(stored);
-        return entered > 0 ? Math.abs(terms.intoLayers(totals) - stored) / entered : 0;
+        double error = Math.abs(terms.intoLayers(totals) - stored);
+        return error / Math.max(entered, HeatLedger.LEAST_J);
     }
 }

@@ -18,4 +18,11 @@ public record CoolerTotals(
         double removedJ,
         double electricityJ,
         double waterKg,
-        Optional<IceLedger> ice) {}
+        Optional<IceLedger> ice) {
+    /** What fades out within the band is summed to the solver's error, to either side of 0. */
+    public CoolerTotals {
+        ranS = Math.max(ranS, 0);
+        electricityJ = Math.max(electricityJ, 0);
+        waterKg = Math.max(waterKg, 0);
+    }
+}

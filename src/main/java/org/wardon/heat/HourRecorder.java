@@ -76,19 +76,22 @@ final class HourRecorder {
         double span = t - lastS;
         double airC = network.airC(y);
         set(Hours.Column.AT_S, t);
-        set(Hours.Column.AIR_C, (terms.airC(totals) - lastAir) / span);
-        set(Hours.Column.AIR_LOWEST_C, Math.min(lowest, airC));
-        set(Hours.Column.AIR_HIGHEST_C, Math.max(highest, airC));
+        double meanC = (terms.airC(totals) - lastAir) / span;
+        set(Hours.Column.AIR_C, meanC);
+        // Between the ends of steps the air may have been a little beyond them.
+        set(Hours.Column.AIR_LOWEST_C, Math.min(Math.min(lowest, airC), meanC));
+        set(Hours.Column.AIR_HIGHEST_C, Math.max(Math.max(highest, airC), meanC));
         set(Hours.Column.HUMIDITY, network.humidityFraction(y));
         set(Hours.Column.OUTDOOR_C, network.outdoorC());
         set(Hours.Column.COOLING_W, (terms.removed(totals) - lastRemoved) / span);
-        set(Hours.Column.POWER_W, (terms.electricity(totals) - lastElectricity) / span);
+        set(
+                Hours.Column.POWER_W,
+                nothingAtLeast(terms.electricity(totals) - lastElectricity) / span);
         set(Hours.Column.CO2_PPM, co2Ppm);
         set(
                 Hours.Column.EXCHANGE_M3S,
-                // A fan that fades out within the band is summed to the solver's error, to either
-                // side.
-                Math.max(network.cubicMetres((terms.exchanged(totals) - lastExchanged) / span), 0));
+                network.cubicMetres(
+                        nothingAtLeast(terms.exchanged(totals) - lastExchanged) / span));
         set(Hours.Column.FREE_M3, network.freeM3());
         set(Hours.Column.SUPPLY_C, supply);
         set(Hours.Column.BLOWS, blownS / span);
@@ -99,12 +102,18 @@ final class HourRecorder {
         set(Hours.Column.WATER_USED_KG, terms.waterUsed(totals) - lastUsedKg);
         for (int k = 0; k < ran.length; k++) {
             double ranS = terms.ranS(k, totals);
-            // Summed to the solver's error too.
-            ran[k][size] = Math.min(Math.max((ranS - lastRan[k]) / span, 0), 1);
+            ran[k][size] = Math.min(nothingAtLeast(ranS - lastRan[k]) / span, 1);
             lastRan[k] = ranS;
         }
         size++;
         startSpan(t, totals, respirationJ);
+        lowest = airC;
+        highest = airC;
+    }
+
+    /** What fades out within the band is summed to the solver's error, to either side of 0. */
+    private static double nothingAtLeast(double sum) {
+        return Math.max(sum, 0);
     }
 
     private double waterOutC(double[] totals) {
@@ -137,8 +146,6 @@ final class HourRecorder {
         lastWaterKg = terms.facesWaterKg(totals);
         lastOutletJ = terms.facesOutletJ(totals);
         lastUsedKg = terms.waterUsed(totals);
-        lowest = Double.POSITIVE_INFINITY;
-        highest = Double.NEGATIVE_INFINITY;
         supply = Double.NaN;
         blownS = 0;
         chilledKS = 0;

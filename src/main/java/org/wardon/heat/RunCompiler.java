@@ -45,12 +45,16 @@ final class RunCompiler {
     }
 
     static ChamberNetwork network(ChamberRun run, boolean plain) {
+        return network(run, surroundings(run), plain);
+    }
+
+    static ChamberNetwork network(ChamberRun run, Surroundings around, boolean plain) {
         checkControl(run);
         double pressure = pressurePa(run);
         return new ChamberNetwork(
                 new NetworkInputs(
                         run.enclosure(),
-                        surroundings(run),
+                        around,
                         neighbourRatios(run, pressure),
                         pressure,
                         run.coolers(),

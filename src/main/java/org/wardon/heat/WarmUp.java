@@ -43,8 +43,11 @@ final class WarmUp {
     }
 
     static Warmed warmed(ChamberRun run, Accuracy accuracy, boolean plain) {
-        ChamberRun before = firstDayRepeated(run);
-        ChamberNetwork empty = RunCompiler.network(before, plain);
+        Surroundings around = RunCompiler.surroundings(run);
+        ChamberRun before = firstDayRepeated(run, around);
+        // Faces and soil are cut by where heat is expected to flow: as in the run it is for.
+        Surroundings keeping = RunCompiler.surroundings(before).keeping(around.insideMeanC());
+        ChamberNetwork empty = RunCompiler.network(before, keeping, plain);
         double[] warm =
                 empty.start(RunCompiler.startC(before), RunCompiler.startRatio(before, empty));
         new ChamberRunner(before, empty, warm, accuracy).run(Progress.SILENT);
@@ -55,7 +58,7 @@ final class WarmUp {
         return RunCompiler.startsOutdoors(run) && run.start().temperatureC().isEmpty();
     }
 
-    private static ChamberRun firstDayRepeated(ChamberRun run) {
+    private static ChamberRun firstDayRepeated(ChamberRun run, Surroundings around) {
         int hours = DAYS * DAY_H + 3;
         double[] temperature = new double[hours];
         double[] humidity = new double[hours];
@@ -71,7 +74,7 @@ final class WarmUp {
         }
         return new ChamberRun(
                 run.chamberId(),
-                run.site().withYear(year(run)),
+                run.site().withYear(year(around)),
                 new Timeline(run.timeline().from().minusDays(DAYS), run.site().zone()),
                 new Weather(temperature, humidity, sun, wind),
                 run.enclosure(),
@@ -89,8 +92,7 @@ final class WarmUp {
     }
 
     /** The year the ground of the run follows, which its first day alone would not tell. */
-    private static YearWave year(ChamberRun run) {
-        Surroundings around = RunCompiler.surroundings(run);
+    private static YearWave year(Surroundings around) {
         return around.year().orElseGet(() -> new YearWave(around.meanOutdoorC(), 0, 1));
     }
 }

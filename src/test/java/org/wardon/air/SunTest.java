@@ -75,6 +75,25 @@ class SunTest {
         assertEquals(12, SunPosition.daylengthH(0, 23), 1e-9);
     }
 
+    /** A station's clock two hours wrong shows noon's light at a low sun. */
+    @Test
+    void aWrongClockMakesNoSunsOfALowSun() {
+        Site site = new Site(12, 0, 20, UTC);
+        Timeline day = new Timeline(LocalDateTime.of(2026, 3, 21, 0, 0), UTC);
+        double[] t = new double[25];
+        double[] global = new double[25];
+        Arrays.fill(t, 28);
+        for (int h = 0; h < 25; h++) {
+            global[h] = Math.max(0, 900 * Math.sin(Math.PI * (h - 8) / 12));
+        }
+        Sunshine sun = Sunshine.of(site, day, new Weather(t, t, global, t), 24);
+        for (int h = 0; h <= 24; h++) {
+            assertEquals(global[h], sun.onFaceWm2(h, 0, 0), 1e-9, "hour " + h);
+            // 900 W/m2 in the beam and from the sky and the ground together is a bright wall.
+            assertTrue(sun.onFaceWm2(h, 90, 270) < 1_100, h + ": " + sun.onFaceWm2(h, 90, 270));
+        }
+    }
+
     @Test
     void splitKeepsMeasuredRadiationOnTheLevelAndFavoursTheSunnyWall() {
         Site site = new Site(12, 0, 20, UTC);

@@ -10,7 +10,7 @@ import java.util.OptionalDouble;
  *
  * @param id its id
  * @param holds whether it holds its setting
- * @param airC its air, °C, hourly means
+ * @param airC its air, °C
  * @param humidityPct its relative humidity, percent
  * @param hoursOutsideBand hours outside the band after pull-down, h
  * @param hoursDisturbed hours within 12 h of a later arrival, h
@@ -117,8 +117,8 @@ public record ChamberForecast(
      * The chamber's air.
      *
      * @param mean mean, °C
-     * @param min lowest hourly mean, °C
-     * @param max highest hourly mean, °C
+     * @param min lowest at any time, °C
+     * @param max highest at any time, °C
      * @param p95 19 of 20 hours are below, °C
      */
     public record AirC(double mean, double min, double max, double p95) {}
