@@ -96,7 +96,6 @@ final class Books {
     double layersError(double[] y) {
         double stored = network.layersJ(y) - startLayersJ;
         double entered = Math.abs(terms.fromBeyond(totals)) + Math.abs(stored);
-        double error = Math.abs(terms.intoLayers(totals) - stored);
-        return error / Math.max(entered, HeatLedger.LEAST_J);
+        return entered > 0 ? Math.abs(terms.intoLayers(totals) - stored) / entered : 0;
     }
 }

@@ -41,13 +41,6 @@ public record HeatLedger(
         double air,
         double removed,
         double electricity) {
-    /**
-     * A chamber that ends a day as it began nets next to nothing, whatever went in and out; of less
-     * than this a share says nothing, J (assumption; a small chamber's walls let as much through in
-     * minutes).
-     */
-    static final double LEAST_J = 2e5;
-
     static final HeatLedger NOTHING =
             new HeatLedger(0, 0, 0, 0, 0, 0, 0, 0, 0, 0, 0, 0, 0, 0, 0, 0, 0);
 
@@ -130,9 +123,10 @@ public record HeatLedger(
     /**
      * Returns the error of the balance.
      *
-     * @return share of the throughput, 0.2 MJ at least
+     * @return share of the throughput; 0 where nothing passed
      */
     public double errorShare() {
-        return Math.abs(sum() - removed) / Math.max(throughput(), LEAST_J);
+        double through = throughput();
+        return through > 0 ? Math.abs(sum() - removed) / through : 0;
     }
 }

@@ -66,7 +66,7 @@ final class RunLimits {
     }
 
     private void books() {
-        check(course.balanceErrorPct() < 0.1, "balance error " + course.balanceErrorPct() + " %");
+        check(course.balanceErrorPct() < 1e-6, "balance error " + course.balanceErrorPct() + " %");
         for (CoolerTotals cooler : course.coolers()) {
             check(cooler.waterKg() >= -1e-9, "water " + cooler);
             check(cooler.electricityJ() >= -1e-6, "electricity " + cooler);
