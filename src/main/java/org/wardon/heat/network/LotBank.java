@@ -38,7 +38,7 @@ final class LotBank implements Part {
     static final int FLOWS = 5;
 
     static final int SHELLS = Shells.USUAL;
-    private static final int BY = 4;
+    static final int BY = 4;
 
     /** Respiration is followed by a cubic this far to either side, K. */
     private static final double BREATH_REACH_K = 0.6;
@@ -54,12 +54,12 @@ final class LotBank implements Part {
     /** The skin found last is a good start when it lies this near to a dry one, K. */
     private static final double NEAR_K = 5;
 
-    private static final double L0 = MoistAir.EVAPORATION_J_KG;
-    private static final double VAPOUR_LESS_WATER = MoistAir.VAPOUR_J_KG_K - MoistAir.WATER_J_KG_K;
-    private static final double WATER = MoistAir.WATER_J_KG_K;
-    private static final double RATIO = MoistAir.MOLAR_MASS_RATIO;
-    private static final double WIDTH = FreeWater.ROUND_PA;
-    private static final double PER_WIDTH = 1 / (2 * WIDTH);
+    static final double L0 = MoistAir.EVAPORATION_J_KG;
+    static final double VAPOUR_LESS_WATER = MoistAir.VAPOUR_J_KG_K - MoistAir.WATER_J_KG_K;
+    static final double WATER = MoistAir.WATER_J_KG_K;
+    static final double RATIO = MoistAir.MOLAR_MASS_RATIO;
+    static final double WIDTH = FreeWater.ROUND_PA;
+    static final double PER_WIDTH = 1 / (2 * WIDTH);
 
     /** Their place in the state. */
     final Bank bank;
@@ -67,8 +67,8 @@ final class LotBank implements Part {
     /** Slots there are. */
     final int places;
 
-    private final int flowAt;
-    private final double pressurePa;
+    final int flowAt;
+    final double pressurePa;
     private final boolean plain;
     private final RespirationLaw[] laws;
     private final DoubleUnaryOperator[] breathes;
@@ -97,36 +97,28 @@ final class LotBank implements Part {
     /** 1 for a lot that stands in the cold blast, 0 for others. */
     final double[] inBlast;
 
-    private final LocalCubics breath;
-    private final LocalCubics saturation;
+    final LocalCubics breath;
+    final LocalCubics saturation;
 
     /** What the state last asked for is like. */
     final double[] skinC;
 
     final double[] packageC;
-    private final double[] packagePa;
-    private final double[] evaporated;
+    final double[] packagePa;
+    final double[] evaporated;
     private final double[] filmWater;
-    private final double[] breathing;
+    final double[] breathing;
     private final double[] flux;
 
     /** At the start of the step: the block's unknowns, skin, and what the former do to the rest. */
     private final double[] startBlock;
 
     private final double[] startSkinC;
-    private final double[] skinBy;
-    private final double[] evaporatedBy;
-    private final double[] liquidBy;
-    private final double[] breathSlope;
-    private final double[] packageByEnthalpy;
-    private final double[] packageByRatio;
-    private final double[] toAirByEnthalpy;
-    private final double[] toAirByRatio;
-    private final double[] vapourByRatio;
-    private final double[] toAirByAirRatio;
+    final double[] skinBy;
+    private final LotSlopes slopes;
     private boolean starts;
     private double chillK;
-    private double dryPa;
+    double dryPa;
 
     LotBank(Tree tree, int flowAt, int places, double pressurePa, boolean plain) {
         this.bank = tree.addBank(places, SHELLS - 1, AirState.ENTHALPY);
@@ -165,15 +157,7 @@ final class LotBank implements Part {
         startBlock = new double[BY * places];
         startSkinC = new double[places];
         skinBy = new double[BY * places];
-        evaporatedBy = new double[BY * places];
-        liquidBy = new double[BY * places];
-        breathSlope = new double[SHELLS * places];
-        packageByEnthalpy = new double[places];
-        packageByRatio = new double[places];
-        toAirByEnthalpy = new double[places];
-        toAirByRatio = new double[places];
-        vapourByRatio = new double[places];
-        toAirByAirRatio = new double[places];
+        slopes = new LotSlopes(this);
     }
 
     /** Empties all slots. */
@@ -405,12 +389,12 @@ final class LotBank implements Part {
     }
 
     /** {@link FreeWater#wetShare} without a branch. */
-    private static double wetShare(double fullness) {
+    static double wetShare(double fullness) {
         double f = Math.min(fullness, 1);
         return f * (2 - Math.max(f, 0));
     }
 
-    private static double within(double drop) {
+    static double within(double drop) {
         return Math.min(Math.max(drop, -WIDTH), WIDTH);
     }
 
@@ -458,160 +442,7 @@ final class LotBank implements Part {
         if (plain) {
             askSaturation();
         }
-        breathJ(y);
-        for (int i = 0; i < n; i++) {
-            skinJ(i, y);
-        }
-        hubJ(air, airKg, tree);
-    }
-
-    private void breathJ(double[] y) {
-        int n = bank.count();
-        for (int k = 0; k < SHELLS; k++) {
-            int row = k * places;
-            int at = bank.start + row;
-            for (int j = row; j < row + n; j++) {
-                double d = y[at + j - row] - breath.centre[j];
-                breathSlope[j] = breath.c1[j] + d * (2 * breath.c2[j] + d * 3 * breath.c3[j]);
-            }
-            if (k < SHELLS - 1) {
-                for (int j = row; j < row + n; j++) {
-                    bank.self[j] = breathSlope[j] * perCapacity[j] - leaves[j];
-                }
-            }
-        }
-    }
-
-    /** What the block's unknowns do to skin and evaporation; the block's rows. */
-    private void skinJ(int i, double[] y) {
-        int p = places;
-        int b = bank.at(SHELLS - 1, i);
-        double t = skinC[i];
-        double pa = packagePa[i];
-        double ratio = y[b + 3 * p];
-        double d = t - saturation.centre[i];
-        double psat =
-                saturation.c0[i]
-                        + d * (saturation.c1[i] + d * (saturation.c2[i] + d * saturation.c3[i]));
-        double slope = saturation.c1[i] + d * (2 * saturation.c2[i] + d * 3 * saturation.c3[i]);
-        double fullness = y[b + p] * perFullKg[i];
-        double wet = wetShare(fullness);
-        double wetSlope = 2 * (1 - Math.min(Math.max(fullness, 0), 1)) * perFullKg[i];
-        double drop = lowering[i] * psat - pa;
-        double filmDrop = psat - pa;
-        double near = within(drop);
-        double nearFilm = within(filmDrop);
-        double tissueBy = tissueKgSPa[i] * (1 - wet) * (near + WIDTH) * PER_WIDTH;
-        double filmBy = filmKgSPa[i] * (wet * (nearFilm + WIDTH) + (WIDTH - nearFilm)) * PER_WIDTH;
-        double up =
-                (nearFilm + WIDTH) * (nearFilm + WIDTH) * (0.5 * PER_WIDTH)
-                        + Math.max(filmDrop - WIDTH, 0);
-        double tissueUp =
-                (near + WIDTH) * (near + WIDTH) * (0.5 * PER_WIDTH) + Math.max(drop - WIDTH, 0);
-        double sum = RATIO + ratio;
-        double paByRatio = pressurePa * RATIO / (sum * sum);
-        double bySkin = (tissueBy * lowering[i] + filmBy) * slope;
-        double byRatio = -(tissueBy + filmBy) * paByRatio;
-        double byWater = (filmKgSPa[i] * up - tissueKgSPa[i] * tissueUp) * wetSlope;
-        double gone = evaporated[i];
-        double latent = L0 + VAPOUR_LESS_WATER * t;
-        double inverse = 1 / (packageJkgK[i] + MoistAir.VAPOUR_J_KG_K * ratio);
-        double cByRatio = -(L0 + MoistAir.VAPOUR_J_KG_K * packageC[i]) * inverse;
-        double perFall = 1 / (skinWK[i] + filmWK[i] + bySkin * latent + gone * VAPOUR_LESS_WATER);
-        double s0 = skinWK[i] * perFall;
-        double s1 = -latent * byWater * perFall;
-        double s2 = filmWK[i] * inverse * perFall;
-        double s3 = (filmWK[i] * cByRatio - latent * byRatio) * perFall;
-        double e0 = bySkin * s0;
-        double e1 = bySkin * s1 + byWater;
-        double e2 = bySkin * s2;
-        double e3 = bySkin * s3 + byRatio;
-        double filmBySkin = filmBy * slope;
-        double[] j = bank.inner;
-        j[4 * p + i] = -filmBySkin * s0;
-        j[5 * p + i] = -filmBySkin * s1 - filmKgSPa[i] * up * wetSlope;
-        j[6 * p + i] = -filmBySkin * s2;
-        j[7 * p + i] = -filmBySkin * s3 + filmBy * paByRatio;
-        keep(skinBy, i, s0, s1, s2, s3);
-        keep(evaporatedBy, i, e0, e1, e2, e3);
-        keep(
-                liquidBy,
-                i,
-                WATER * (e0 * t + gone * s0),
-                WATER * (e1 * t + gone * s1),
-                WATER * (e2 * t + gone * s2),
-                WATER * (e3 * t + gone * s3));
-        packageByEnthalpy[i] = inverse;
-        packageByRatio[i] = cByRatio;
-        vapourByRatio[i] = packageKgSPa[i] * paByRatio;
-    }
-
-    private void keep(double[] by, int i, double v0, double v1, double v2, double v3) {
-        by[i] = v0;
-        by[places + i] = v1;
-        by[2 * places + i] = v2;
-        by[3 * places + i] = v3;
-    }
-
-    /** The other rows of the block, and what hangs on the chamber's air. */
-    private void hubJ(AirState air, double airKg, Tree tree) {
-        int n = bank.count();
-        int p = places;
-        int last = (SHELLS - 1) * p;
-        double[] j = bank.inner;
-        double perAirKg = 1 / airKg;
-        double byEnthalpy = 0;
-        double byRatio = 0;
-        double vapourBy = 0;
-        for (int i = 0; i < n; i++) {
-            double per = perPackageKg[i];
-            double perShell = perCapacity[last + i];
-            double skin = skinWK[i];
-            double enthalpy = L0 + MoistAir.VAPOUR_J_KG_K * packageC[i];
-            double out = packageKgSPa[i] * (packagePa[i] - (air.vapourPa - inBlast[i] * dryPa));
-            double byPackageC = packageWK[i] + out * MoistAir.VAPOUR_J_KG_K;
-            double jRatio = vapourByRatio[i];
-            double toAir2 = byPackageC * packageByEnthalpy[i];
-            double toAir3 = byPackageC * packageByRatio[i] + enthalpy * jRatio;
-            double jAir = -packageKgSPa[i] * air.vapourByRatio;
-            double toAirByAir = enthalpy * jAir;
-            double hubEnthalpy = -packageWK[i] * air.airByEnthalpy;
-            double hubRatio = -packageWK[i] * air.airByRatio + toAirByAir;
-            double s0 = skin * (1 - skinBy[i]);
-            double s1 = -skin * skinBy[p + i];
-            double s2 = -skin * skinBy[2 * p + i];
-            double s3 = -skin * skinBy[3 * p + i];
-            j[i] = (breathSlope[last + i] - between[last - p + i] - s0) * perShell;
-            j[p + i] = -s1 * perShell;
-            j[2 * p + i] = -s2 * perShell;
-            j[3 * p + i] = -s3 * perShell;
-            j[8 * p + i] = (s0 + liquidBy[i]) * per;
-            j[9 * p + i] = (s1 + liquidBy[p + i]) * per;
-            j[10 * p + i] = (s2 + liquidBy[2 * p + i] - toAir2) * per;
-            j[11 * p + i] = (s3 + liquidBy[3 * p + i] - toAir3) * per;
-            j[12 * p + i] = evaporatedBy[i] * per;
-            j[13 * p + i] = evaporatedBy[p + i] * per;
-            j[14 * p + i] = evaporatedBy[2 * p + i] * per;
-            j[15 * p + i] = (evaporatedBy[3 * p + i] - jRatio) * per;
-            bank.byHub[i] = -hubEnthalpy * per;
-            bank.byHub[p + i] = -hubRatio * per;
-            bank.byHub[2 * p + i] = 0;
-            bank.byHub[3 * p + i] = -jAir * per;
-            double share = gives[i] * perAirKg;
-            bank.onHub[i] = toAir2 * share;
-            bank.onHub[p + i] = toAir3 * share;
-            bank.onHub[2 * p + i] = 0;
-            bank.onHub[3 * p + i] = jRatio * share;
-            toAirByEnthalpy[i] = toAir2;
-            toAirByRatio[i] = toAir3;
-            toAirByAirRatio[i] = toAirByAir;
-            byEnthalpy += hubEnthalpy * share;
-            byRatio += hubRatio * share;
-            vapourBy += jAir * share;
-        }
-        tree.hubByHub[0] += byEnthalpy;
-        tree.hubByHub[1] += byRatio;
-        tree.hubByHub[tree.hub() + 1] += vapourBy;
+        slopes.at(air, airKg, y, tree);
     }
 
     @Override
@@ -622,42 +453,7 @@ final class LotBank implements Part {
 
     @Override
     public void flowsAlong(AirState air, double[] v, double[] change) {
-        int n = bank.count();
-        int p = places;
-        int b = bank.at(SHELLS - 1, 0);
-        double airC = air.airAlong(v);
-        double ratio = v[AirState.HUMIDITY];
-        Arrays.fill(breathing, 0, n, 0);
-        for (int k = 0; k < SHELLS; k++) {
-            int at = bank.at(k, 0);
-            for (int i = 0; i < n; i++) {
-                breathing[i] += breathSlope[k * p + i] * v[at + i];
-            }
-        }
-        for (int i = 0; i < n; i++) {
-            double v0 = v[b + i];
-            double v1 = v[b + p + i];
-            double v2 = v[b + 2 * p + i];
-            double v3 = v[b + 3 * p + i];
-            change[flowAt + i] =
-                    toAirByEnthalpy[i] * v2
-                            + toAirByRatio[i] * v3
-                            - packageWK[i] * airC
-                            + toAirByAirRatio[i] * ratio;
-            change[flowAt + VAPOUR * p + i] =
-                    vapourByRatio[i] * v3 - packageKgSPa[i] * air.vapourByRatio * ratio;
-            change[flowAt + RESPIRATION * p + i] = breathing[i];
-            change[flowAt + EVAPORATED * p + i] =
-                    evaporatedBy[i] * v0
-                            + evaporatedBy[p + i] * v1
-                            + evaporatedBy[2 * p + i] * v2
-                            + evaporatedBy[3 * p + i] * v3;
-            change[flowAt + LIQUID * p + i] =
-                    liquidBy[i] * v0
-                            + liquidBy[p + i] * v1
-                            + liquidBy[2 * p + i] * v2
-                            + liquidBy[3 * p + i] * v3;
-        }
+        slopes.flowsAlong(air, v, change);
     }
 
     private void askBreath(double[] y) {

@@ -10,6 +10,9 @@ public final class Integrator {
     /** The same for a step that is tried again behind the next edge of its kind. */
     private static final double CAREFUL = 0.8;
 
+    /** An error so small that the step may grow by much more the next time. */
+    private static final double SMALL = 0.02;
+
     /** Steps behind an edge that are remembered. */
     private static final int REMEMBERED = 8;
 
@@ -196,7 +199,8 @@ public final class Integrator {
     /** Remembers what would have gone best here; returns what to try next. */
     private double learn(double h, double e, boolean cut, boolean refused, double proposed) {
         double[] steps = learned[edge];
-        double best = h * Math.min(Math.max(CAREFUL / Math.cbrt(e), 0.7), refused ? 1 : 1.5);
+        double most = e < SMALL ? 4 : 1.5;
+        double best = h * Math.min(Math.max(CAREFUL / Math.cbrt(e), 0.7), refused ? 1 : most);
         steps[sinceEdge] = cut ? Math.max(best, steps[sinceEdge]) : best;
         sinceEdge++;
         boolean known = sinceEdge < REMEMBERED && steps[sinceEdge] > 0;
