@@ -73,6 +73,7 @@ final class ChamberRunner implements Integrator.StepListener {
     private double lastRespiration;
     private double lastPeople;
     private final Books books;
+    private final Optional<UseByRow> useByRow;
 
     ChamberRunner(ChamberRun run, ChamberNetwork network, double[] start, Accuracy accuracy) {
         this.run = run;
@@ -116,6 +117,17 @@ final class ChamberRunner implements Integrator.StepListener {
         icing = new Spans(CourseEvent.Kind.ICES_UP, id);
         books = new Books(network, y, totals, lots);
         solar.ifPresent(any -> feed(0));
+        useByRow =
+                run.doorMode() == DoorMode.SKETCHED
+                        ? Optional.of(new UseByRow(run))
+                        : Optional.empty();
+        enterRow();
+    }
+
+    private void enterRow() {
+        if (useByRow.isPresent() && useByRow.get().enter(now, hourEndS(), network)) {
+            integrator.restart(SCHEDULED.indexOf(Edge.Kind.USE_STARTS));
+        }
     }
 
     /** Compiles a run; it stands at its start. */
@@ -162,6 +174,7 @@ final class ChamberRunner implements Integrator.StepListener {
             network.hour(hour);
             network.settle(y);
             endHour(now);
+            enterRow();
         }
     }
 
@@ -324,7 +337,7 @@ final class ChamberRunner implements Integrator.StepListener {
             }
             case USE_STARTS, USE_ENDS -> use(edge);
             case LIGHTS_ON, LIGHTS_OFF -> {
-                network.light(edge.kind() == Edge.Kind.LIGHTS_ON);
+                network.light(edge.kind() == Edge.Kind.LIGHTS_ON ? 1 : 0);
                 restart(edge);
             }
             case POWER_OFF -> power(t, false);
@@ -357,7 +370,7 @@ final class ChamberRunner implements Integrator.StepListener {
         double present = run.enclosure().gains().peopleHoursPerDay() * 3600 / usedS;
         network.people(starts ? present : 0);
         if (run.doorMode() != DoorMode.PULSES) {
-            network.door(starts);
+            network.door(starts ? 1 : 0);
         }
         restart(edge);
     }
@@ -400,7 +413,7 @@ final class ChamberRunner implements Integrator.StepListener {
 
     private void door(Edge edge) {
         boolean opens = edge.kind() == Edge.Kind.DOOR_OPENS;
-        network.door(opens);
+        network.door(opens ? 1 : 0);
         if (opens && edge.atS() >= 0) {
             openings++;
             if (awaitsFirstOpening) {

@@ -10,8 +10,9 @@ public enum DoorMode {
      */
     AVERAGED(1),
     /**
-     * As averaged, the outdoors in means of three hours and a row every third hour, with a looser
-     * step: for sampling, where a lot's days count and no single hour does.
+     * As averaged, the outdoors in means of three hours and a row every third hour, door, people
+     * and lights spread over each row, with a looser step: for sampling, where a lot's days count
+     * and no single hour does.
      */
     SKETCHED(3);
 

@@ -49,35 +49,46 @@ final class Schedule {
 
     private void day(int day, double midnight) {
         add(midnight, Edge.Kind.MIDNIGHT, 0);
-        double from = midnight + useFrom().toSecondOfDay();
-        double to = midnight + useTo().toSecondOfDay();
+        if (run.doorMode() == DoorMode.SKETCHED) {
+            return;
+        }
+        double from = midnight + use(run).fromS();
+        double to = midnight + use(run).toS();
         add(from, Edge.Kind.USE_STARTS, 0);
         add(to, Edge.Kind.USE_ENDS, 0);
-        Gains gains = run.enclosure().gains();
-        double lit = gains.lightsHoursPerDay() * Timeline.HOUR_S;
-        if (gains.lightsW() > 0 && lit > 0) {
-            // Longer than the hours of use, they burn on as long before as after.
-            double first = lit > to - from ? 0.5 * (from + to - lit) : from;
-            add(first, Edge.Kind.LIGHTS_ON, 0);
-            add(first + lit, Edge.Kind.LIGHTS_OFF, 0);
+        Hours lit = lights(run);
+        if (lit.toS() > lit.fromS()) {
+            add(midnight + lit.fromS(), Edge.Kind.LIGHTS_ON, 0);
+            add(midnight + lit.toS(), Edge.Kind.LIGHTS_OFF, 0);
         }
         if (run.enclosure().door().isPresent() && run.doorMode() == DoorMode.PULSES) {
             openings(run.enclosure().door().get(), day, from, to);
         }
     }
 
-    LocalTime useFrom() {
-        return run.enclosure().door().map(Door::from).orElse(USE_FROM);
+    /** Hours of every day, s from midnight. */
+    record Hours(double fromS, double toS) {}
+
+    /** Hours of use. */
+    static Hours use(ChamberRun run) {
+        Optional<Door> door = run.enclosure().door();
+        return new Hours(
+                door.map(Door::from).orElse(USE_FROM).toSecondOfDay(),
+                door.map(Door::to).orElse(USE_TO).toSecondOfDay());
     }
 
-    LocalTime useTo() {
-        return run.enclosure().door().map(Door::to).orElse(USE_TO);
+    /** Hours of light; longer than the hours of use, they burn on as long before as after. */
+    static Hours lights(ChamberRun run) {
+        Gains gains = run.enclosure().gains();
+        Hours use = use(run);
+        double lit = gains.lightsW() > 0 ? gains.lightsHoursPerDay() * Timeline.HOUR_S : 0;
+        double first = lit > use.toS - use.fromS ? 0.5 * (use.fromS + use.toS - lit) : use.fromS;
+        return new Hours(first, first + lit);
     }
 
     /** Hours of use a day, s. */
     static double useS(ChamberRun run) {
-        Schedule schedule = new Schedule(run);
-        return schedule.useTo().toSecondOfDay() - schedule.useFrom().toSecondOfDay();
+        return use(run).toS - use(run).fromS;
     }
 
     /** Openings spread evenly; a fraction of one adds up over the days. */

@@ -176,9 +176,9 @@ class NetworkRatesTest {
 
     @Test
     void airFeelsDoorLeakagePeopleFacesLotsAndCoolerByTheLaws() {
-        network.door(true);
+        network.door(1);
         network.people(1.5);
-        network.light(true);
+        network.light(1);
         double[] flows = new double[network.flows()];
         double hourShare = 0.5;
         for (int k = 0; k < 500; k++) {
@@ -286,7 +286,7 @@ class NetworkRatesTest {
 
     @Test
     void jacobianEqualsDifferences() {
-        network.door(true);
+        network.door(1);
         network.people(1.5);
         double[] none = new double[network.flows()];
         double[] slope = new double[size];
@@ -322,7 +322,7 @@ class NetworkRatesTest {
 
     @Test
     void slopesInTimeEqualDifferences() {
-        network.door(true);
+        network.door(1);
         double[] slope = new double[size];
         double[] flowSlope = new double[network.flows()];
         double[] flowsUp = new double[network.flows()];
@@ -350,7 +350,7 @@ class NetworkRatesTest {
 
     @Test
     void flowsAlongADirectionEqualDifferences() {
-        network.door(true);
+        network.door(1);
         double[] slope = new double[size];
         double[] flowSlope = new double[network.flows()];
         double[] up = new double[network.flows()];

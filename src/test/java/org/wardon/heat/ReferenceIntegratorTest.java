@@ -59,10 +59,10 @@ class ReferenceIntegratorTest {
 
     private static void pass(Edge edge, ChamberNetwork network, double[] y) {
         switch (edge.kind()) {
-            case DOOR_OPENS -> network.door(true);
-            case DOOR_SHUTS -> network.door(false);
-            case LIGHTS_ON -> network.light(true);
-            case LIGHTS_OFF -> network.light(false);
+            case DOOR_OPENS -> network.door(1);
+            case DOOR_SHUTS -> network.door(0);
+            case LIGHTS_ON -> network.light(1);
+            case LIGHTS_OFF -> network.light(0);
             case USE_STARTS -> network.people(2.0 / 12);
             case USE_ENDS -> network.people(0);
             case ARRIVES -> {

@@ -47,7 +47,7 @@ final class AirExchange implements Part {
     private final double freshKgS;
     private final Doorway doorway;
     private final CoolerPart[] coolers;
-    private boolean open;
+    private double open;
     private double freeM3 = 1;
 
     private double door;
@@ -111,8 +111,8 @@ final class AirExchange implements Part {
     }
 
     /** Opens or shuts the door; where averaged, starts or ends its hours of use. */
-    void open(boolean standsOpen) {
-        open = standsOpen;
+    void open(double share) {
+        open = share;
     }
 
     /** Tells the free volume of the chamber, m3. */
@@ -130,7 +130,7 @@ final class AirExchange implements Part {
 
     /** Dry air through the door, kg/s. */
     private double doorKgS(double airC, double ratio, double beyondC, double beyondRatio) {
-        if (!open || doorway.widthM <= 0) {
+        if (open <= 0 || doorway.widthM <= 0) {
             return 0;
         }
         double inside = density(airC, ratio);
@@ -143,10 +143,11 @@ final class AirExchange implements Part {
                         * doorway.share
                         / (1 + ratio);
         if (doorway.averagedOpenS <= 0) {
-            return full;
+            return open * full;
         }
         double dry = inside / (1 + ratio);
-        return dry
+        return open
+                * dry
                 * DoorExchange.volumeAnOpeningM3(full / dry, doorway.averagedOpenS, freeM3)
                 * doorway.openingsPerS;
     }

@@ -451,9 +451,9 @@ public final class ChamberNetwork implements TreeSystem {
     /**
      * Opens or shuts the door; where averaged, starts or ends its hours of use.
      *
-     * @param open true to open
+     * @param open 1 to open, 0 to shut; between them a share of the exchange
      */
-    public void door(boolean open) {
+    public void door(double open) {
         exchange.open(open);
     }
 
@@ -481,9 +481,9 @@ public final class ChamberNetwork implements TreeSystem {
     /**
      * Turns the lights on or off.
      *
-     * @param on true for on
+     * @param on 1 for on, 0 for off; between them a share of the time
      */
-    public void light(boolean on) {
+    public void light(double on) {
         gains.light(on);
     }
 

@@ -63,7 +63,7 @@ final class InnerGains implements Part {
     private final double heaterW;
     private final double humidifierKgS;
     private boolean powered = true;
-    private boolean lit;
+    private double lit;
     private double people;
 
     private double peopleByAirC;
@@ -92,8 +92,8 @@ final class InnerGains implements Part {
         powered = on;
     }
 
-    void light(boolean on) {
-        lit = on;
+    void light(double share) {
+        lit = share;
     }
 
     void people(double present) {
@@ -121,7 +121,7 @@ final class InnerGains implements Part {
     @Override
     public void rates(AirState air, Outside outside, double[] y, double[] rates, double[] flows) {
         double fans = powered ? fansW : 0;
-        double lights = powered && lit ? lightsW : 0;
+        double lights = powered ? lit * lightsW : 0;
         double body = people * PeopleHeat.watts(air.airC);
         double breath = PeopleHeat.LATENT_SHARE * body / MoistAir.vapourEnthalpyJkg(BODY_C);
         double heater = powered && heaterW > 0 ? heaterW * heaterShare(air.airC) : 0;
