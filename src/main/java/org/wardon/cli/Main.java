@@ -40,6 +40,7 @@ public final class Main implements Runnable {
                     Share.class,
                     Look.class,
                     Why.class,
+                    Section.class,
                     SchemaVerb.class,
                     Demo.class);
 

@@ -82,6 +82,15 @@ public sealed interface Cooler permits Compressor, EvaporativePad, NightAir, Ice
     }
 
     /**
+     * Returns whether a fan of it stirs the chamber's air.
+     *
+     * @return false for one that leaves the air still
+     */
+    default boolean stirsAir() {
+        return true;
+    }
+
+    /**
      * Returns its timed defrost.
      *
      * @return empty where there is none

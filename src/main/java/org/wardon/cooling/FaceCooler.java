@@ -13,6 +13,11 @@ public sealed interface FaceCooler extends Cooler permits WettedWall, WaterFilm 
      */
     Set<FaceName> wets();
 
+    @Override
+    default boolean stirsAir() {
+        return false;
+    }
+
     /**
      * Gives the answer of its kind.
      *

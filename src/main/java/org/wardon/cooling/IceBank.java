@@ -67,6 +67,11 @@ public record IceBank(
     }
 
     @Override
+    public boolean stirsAir() {
+        return fanW > 0;
+    }
+
+    @Override
     public Optional<Following> following() {
         return Optional.of(Following.ofFan(control));
     }

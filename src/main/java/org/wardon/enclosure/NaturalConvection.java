@@ -78,7 +78,7 @@ public final class NaturalConvection {
      * @return dimensionless
      */
     public static double wallNusselt(double rayleigh, double prandtl) {
-        Require.within("rayleigh", rayleigh, 0, 1e14, "", "");
+        Require.within("rayleigh", rayleigh, 0, 1e20, "", "");
         double p = Math.pow(1 + Math.pow(0.492 / prandtl, 9.0 / 16), 8.0 / 27);
         double root = 0.825 + 0.387 * Math.pow(rayleigh, 1.0 / 6) / p;
         return root * root;
@@ -93,7 +93,7 @@ public final class NaturalConvection {
      * @return dimensionless
      */
     public static double stirringNusselt(double rayleigh) {
-        Require.within("rayleigh", rayleigh, 0, 1e14, "", "");
+        Require.within("rayleigh", rayleigh, 0, 1e20, "", "");
         return rayleigh < 1e7 ? 0.54 * Math.pow(rayleigh, 0.25) : 0.15 * Math.cbrt(rayleigh);
     }
 
@@ -105,7 +105,7 @@ public final class NaturalConvection {
      * @return dimensionless
      */
     public static double restingNusselt(double rayleigh) {
-        Require.within("rayleigh", rayleigh, 0, 1e14, "", "");
+        Require.within("rayleigh", rayleigh, 0, 1e20, "", "");
         return 0.27 * Math.pow(rayleigh, 0.25);
     }
 

@@ -198,6 +198,16 @@ final class ChamberRunner implements Integrator.StepListener {
         return accountant.close(now, y);
     }
 
+    /** The same for each step of a span, the last perhaps shorter. */
+    List<HourAccount> accounts(double fromS, double untilS, double stepS) {
+        List<HourAccount> all = new ArrayList<>();
+        goTo(fromS, Progress.SILENT);
+        while (now < untilS) {
+            all.add(account(now, Math.min(untilS, now + stepS)));
+        }
+        return all;
+    }
+
     /** How a lot is now, to be carried to another chamber. */
     LotState carryOut(int lot) {
         return lots[lot].state(y, totals);

@@ -88,6 +88,22 @@ public final class HeatModel {
     }
 
     /**
+     * Accounts for a span hour by hour.
+     *
+     * @param run what to run; a lot carried in must be known
+     * @param fromS start of the span, s since the start of the run
+     * @param untilS its end, s, after its start, within the run
+     * @return an account for each hour, the last perhaps shorter
+     * @throws org.wardon.errors.RunStopped where a state cannot be
+     */
+    public static List<HourAccount> accounts(ChamberRun run, double fromS, double untilS) {
+        Require.that(
+                fromS >= 0 && untilS > fromS && untilS <= run.durationS(),
+                "a span of the run, not " + fromS + " to " + untilS + " s");
+        return ChamberRunner.of(run, Accuracy.USUAL, false).accounts(fromS, untilS, 3_600);
+    }
+
+    /**
      * Runs one lot in air that is given: without the chamber, along a logger, or before it arrived.
      * The lot breathes, sweats and cools by the same code as in a chamber; it does not act on the
      * air.

@@ -19,8 +19,8 @@ public record Reason(
      *
      * @param value the number; not used where {@code unit} is {@code text}
      * @param unit unit of the number: {@code C}, {@code K}, {@code day}, {@code h}, {@code pct},
-     *     {@code kg}, {@code g/m2}, {@code m3/h}, {@code W}, {@code ppm}, {@code 1}; or {@code
-     *     text}
+     *     {@code kg}, {@code g/m2}, {@code m}, {@code m3/h}, {@code W}, {@code ppm}, {@code 1}; or
+     *     {@code text}
      * @param text the text, else empty
      */
     public record Argument(double value, String unit, String text) {

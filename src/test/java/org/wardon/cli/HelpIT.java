@@ -18,7 +18,9 @@ class HelpIT {
     void helpListsTheVerbsAndTheExitStatuses() {
         String help = WardonJar.run("--help").good().out();
         for (String verb :
-                new String[] {"advise", "keep", "share", "look", "why", "schema", "demo"}) {
+                new String[] {
+                    "advise", "keep", "share", "look", "why", "section", "schema", "demo"
+                }) {
             assertTrue(help.contains("\n  " + verb + " "), help);
         }
         assertTrue(help.contains("Exit status: 0 done; 2 "), help);
@@ -26,7 +28,7 @@ class HelpIT {
     }
 
     @ParameterizedTest
-    @ValueSource(strings = {"advise", "keep", "share", "look", "why", "schema", "demo"})
+    @ValueSource(strings = {"advise", "keep", "share", "look", "why", "section", "schema", "demo"})
     void everyVerbHasHelp(String verb) {
         String help = WardonJar.run(verb, "--help").good().out();
         assertTrue(help.startsWith("Usage: wardon " + verb + " "), help);

@@ -57,6 +57,23 @@ class HourAccountTest {
     }
 
     @Test
+    void aSpanHourByHourIsTheSameAsItsHoursAskedOneByOne() {
+        List<HourAccount> hours = HeatModel.accounts(run(), 31.5 * HOUR_S, 35 * HOUR_S);
+        assertEquals(4, hours.size());
+        assertEquals(0.5 * HOUR_S, hours.get(3).untilS() - hours.get(3).fromS(), 1e-9);
+        for (HourAccount hour : hours) {
+            HourAccount alone = HeatModel.account(run(), hour.fromS(), hour.untilS());
+            // The steps of the two runs land in other places.
+            assertEquals(alone.after().temperatureC(), hour.after().temperatureC(), 0.02);
+            assertEquals(
+                    alone.heat().removed(),
+                    hour.heat().removed(),
+                    0.01 * Math.abs(alone.heat().removed()) + 2_000);
+            assertEquals(alone.lots().size(), hour.lots().size());
+        }
+    }
+
+    @Test
     void theHoursOfADayAddUpToTheDaysLedger() {
         ChamberRun day = run().withDurationS(24 * HOUR_S).withStays(run().stays().subList(0, 2));
         HeatLedger whole = HeatModel.run(day, org.wardon.errors.Progress.SILENT).heat();

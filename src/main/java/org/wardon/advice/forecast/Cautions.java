@@ -52,6 +52,7 @@ final class Cautions {
             chamber(chamber);
             new Deliveries(outcome, chamber).all().forEach(c -> add(c.level(), c.reason()));
             new ColdBlast(outcome, chamber).all().forEach(c -> add(c.level(), c.reason()));
+            StillChamber.wide(outcome, chamber).ifPresent(c -> add(c.level(), c.reason()));
         }
         List<Caution> carried = new Carried(outcome).all();
         carried.forEach(c -> add(c.level(), c.reason()));

@@ -1,7 +1,5 @@
 package org.wardon.advice.forecast;
 
-import java.time.LocalDateTime;
-import java.time.format.DateTimeParseException;
 import java.util.ArrayList;
 import java.util.Arrays;
 import java.util.List;
@@ -60,9 +58,11 @@ public final class WhyAdvice {
      */
     public WhyAnswer ask(StorePlan plan, Question asked) {
         List<Fault> faults = new ArrayList<>();
-        known("--chamber", asked.chamber(), chambers(plan), "chamber of this plan", faults);
-        asked.face().ifPresent(face -> known("--face", face, faces(), "face of a chamber", faults));
-        Optional<Double> untilS = seconds(plan, asked.at(), faults);
+        Asked.chamber(plan, asked.chamber(), faults);
+        asked.face()
+                .ifPresent(
+                        face -> Asked.known("--face", face, faces(), "face of a chamber", faults));
+        Optional<Double> untilS = Asked.hourEnd(plan, asked.at(), faults);
         if (!faults.isEmpty()) {
             throw new BadInput(faults);
         }
@@ -77,58 +77,10 @@ public final class WhyAdvice {
                         asked.lot());
     }
 
-    private static void known(
-            String option, String given, List<String> there, String what, List<Fault> faults) {
-        if (!there.contains(given)) {
-            faults.add(
-                    new Fault(
-                            option,
-                            "",
-                            "is '" + given + "', no " + what,
-                            Nearest.question(given, there)
-                                    + "accepted: "
-                                    + String.join(", ", there)));
-        }
-    }
-
-    private static List<String> chambers(StorePlan plan) {
-        return plan.chambers().stream().map(ChamberPlan::id).toList();
-    }
-
     private static List<String> faces() {
         return Arrays.stream(FaceName.values())
                 .map(face -> face.name().toLowerCase(Locale.ROOT))
                 .toList();
-    }
-
-    private static Optional<Double> seconds(StorePlan plan, String at, List<Fault> faults) {
-        LocalDateTime time;
-        try {
-            time = LocalDateTime.parse(at);
-        } catch (DateTimeParseException e) {
-            faults.add(
-                    new Fault(
-                            "--at",
-                            "",
-                            "is '" + at + "', no local time",
-                            "accepted: such as " + plan.from().plusHours(15)));
-            return Optional.empty();
-        }
-        Timeline timeline = plan.timeline();
-        double untilS = timeline.secondsAt(time);
-        if (untilS < Timeline.HOUR_S || untilS > plan.durationS()) {
-            faults.add(
-                    new Fault(
-                            "--at",
-                            "",
-                            "is " + time + ", where no hour of the plan ends",
-                            "accepted: "
-                                    + plan.from().plusHours(1)
-                                    + " to "
-                                    + timeline.localAt(plan.durationS())));
-            return Optional.empty();
-        }
-        return Optional.of(untilS);
     }
 
     private static void stands(StoreModel model, String chamber, String lot, double untilS) {

@@ -15,6 +15,7 @@ public record Units(boolean fahrenheit, boolean pounds) {
     private static final double G_M2_PER_OZ_FT2 = 305.15;
     private static final double M3_H_PER_FT3_MIN = 1.699;
     private static final double KG_PER_LB = 0.45359237;
+    private static final double M_PER_FT = 0.3048;
 
     /**
      * Returns a temperature.
@@ -26,6 +27,27 @@ public record Units(boolean fahrenheit, boolean pounds) {
         return fahrenheit
                 ? format("%.0f °F", 1.8 * temperatureC + 32)
                 : format("%.1f °C", temperatureC);
+    }
+
+    /**
+     * Returns a temperature as a number of the unit in use, for scales.
+     *
+     * @param temperatureC °C
+     * @return °C or °F
+     */
+    public double shown(double temperatureC) {
+        return fahrenheit ? 1.8 * temperatureC + 32 : temperatureC;
+    }
+
+    /**
+     * Returns a temperature without its unit, for tables and pictures that name it once.
+     *
+     * @param temperatureC °C
+     * @return such as "9.8", or "50" in °F
+     */
+    public String degrees(double temperatureC) {
+        String text = format(fahrenheit ? "%.0f" : "%.1f", shown(temperatureC));
+        return text.equals("-0.0") || text.equals("-0") ? text.substring(1) : text;
     }
 
     /**
@@ -69,6 +91,7 @@ public record Units(boolean fahrenheit, boolean pounds) {
                             ? format("%,.0f ft3/min", value / M3_H_PER_FT3_MIN)
                             : format("%,.0f m3/h", value);
             case "day" -> days(value);
+            case "m" -> pounds ? format("%.1f ft", value / M_PER_FT) : format("%.2f m", value);
             case "h" -> brief(value) + " h";
             case "pct" -> brief(value) + " %";
             case "W" -> value >= 1000 ? format("%.1f kW", value / 1000) : format("%.0f W", value);

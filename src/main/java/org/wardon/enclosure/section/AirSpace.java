@@ -27,7 +27,7 @@ public final class AirSpace {
      * @return 1 or more
      */
     public static double layerNusselt(double rayleigh, boolean warmBelow) {
-        Require.within("rayleigh", rayleigh, 0, 1e15, "", "");
+        Require.within("rayleigh", rayleigh, 0, 1e20, "", "");
         if (!warmBelow) {
             return 1;
         }
@@ -51,8 +51,8 @@ public final class AirSpace {
      * @return 1 or more, on the width
      */
     public static double cavityNusselt(double rayleigh, double highOverWide, double prandtl) {
-        Require.within("rayleigh", rayleigh, 0, 1e15, "", "");
-        Require.within("highOverWide", highOverWide, 1e-3, 1e5, "", "");
+        Require.within("rayleigh", rayleigh, 0, 1e20, "", "");
+        Require.within("highOverWide", highOverWide, 1e-5, 1e5, "", "");
         if (rayleigh == 0) {
             return 1;
         }

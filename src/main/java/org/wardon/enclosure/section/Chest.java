@@ -29,7 +29,7 @@ public record Chest(
     public Chest {
         surfaceC = Map.copyOf(new EnumMap<>(surfaceC));
         Require.that(surfaceC.size() == 4, "four surfaces are needed, found " + surfaceC.keySet());
-        surfaceC.forEach((side, c) -> Require.within("surface " + side, c, -60, 90, "°C", ""));
+        surfaceC.forEach((side, c) -> Require.within("surface " + side, c, -60, 150, "°C", ""));
         Require.within("airHeatW", airHeatW, -1e6, 1e6, "W", "");
         Require.within("airC", airC, -60, 90, "°C", "");
         Require.within("pressurePa", pressurePa, 3e4, 1.2e5, "Pa", "");

@@ -1,6 +1,7 @@
 package org.wardon.enclosure.section;
 
 import java.util.ArrayList;
+import java.util.Arrays;
 import java.util.Comparator;
 import java.util.List;
 import org.wardon.enclosure.section.Section.Span;
@@ -24,6 +25,49 @@ public final class SectionField {
      */
     public double temperatureC(int column, int row) {
         return temperatureC[section.cell(column, row)];
+    }
+
+    /**
+     * Returns the temperature at a place, straight between the middles of cells; nearer to an edge
+     * than the last of them that of the last.
+     *
+     * @param xM from the left, m
+     * @param yM above the floor, m
+     * @return °C
+     */
+    public double atC(double xM, double yM) {
+        int columns = section.columns().to();
+        int rows = section.rows().to();
+        double[] across = new double[columns];
+        Arrays.setAll(across, this::xM);
+        double[] up = new double[rows];
+        Arrays.setAll(up, this::yM);
+        double i = place(across, xM);
+        double j = place(up, yM);
+        int left = Math.min((int) i, columns - 1);
+        int low = Math.min((int) j, rows - 1);
+        int right = Math.min(left + 1, columns - 1);
+        int high = Math.min(low + 1, rows - 1);
+        double below = mix(temperatureC(left, low), temperatureC(right, low), i - left);
+        double above = mix(temperatureC(left, high), temperatureC(right, high), i - left);
+        return mix(below, above, j - low);
+    }
+
+    private static double mix(double one, double other, double share) {
+        return one + share * (other - one);
+    }
+
+    /** Where a value lies among rising ones, as a number of places; held at their ends. */
+    private static double place(double[] rising, double value) {
+        int i = 0;
+        while (i < rising.length - 1 && rising[i + 1] < value) {
+            i++;
+        }
+        if (i == rising.length - 1) {
+            return i;
+        }
+        double share = (value - rising[i]) / (rising[i + 1] - rising[i]);
+        return i + Math.min(1, Math.max(0, share));
     }
 
     /**

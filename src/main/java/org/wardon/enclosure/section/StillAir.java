@@ -18,12 +18,12 @@ import org.wardon.enclosure.section.SpaceReading.Space;
  *
  * <p>Rising and falling air is taken for a conductor: each space conducts its Nusselt number
  * ({@link AirSpace}) times still air, alike both ways, as ISO 10077-2:2017 takes closed spaces of
- * air (from memory). In the narrow spaces beside and below the stack half of the resistance stands
- * at the face (assumption). In the open space above it the faces have their plate films ({@link
- * NaturalConvection}); as the Nusselt number of an enclosure counts the layers at its sides too,
- * they count twice there, and the spread comes out rather too wide than too narrow. Of wall against
- * wall, each wall against the air and floor against roof the strongest stirs the open space.
- * Radiation goes past the air: the stack's sides see the walls, its top the roof and the walls.
+ * air (from memory). That number counts the layers of air at the sides too: half of the resistance
+ * is taken to stand there and half in the air between (assumption). Beside and below the stack that
+ * half stands at the face; in the open space above it the faces have their plate films ({@link
+ * NaturalConvection}). Of wall against wall, each wall against the air and floor against roof the
+ * strongest stirs the open space. Radiation goes past the air: the stack's sides see the walls, its
+ * top the roof and the walls.
  *
  * <p>The walls before and behind the section are left out, as in the middle of a long chest.
  */
@@ -153,7 +153,7 @@ public final class StillAir {
                 chest.stack().isEmpty()
                         ? chest.at(Side.FLOOR)
                         : sideC(before, stackColumns, row(stackRows.to() - 1));
-        double conducts = remembered(strongest(floorC, chest.openM()));
+        double conducts = 2 * remembered(strongest(floorC, chest.openM()));
         section.fill(section.columns(), section.rows(), conducts, airHeatWm3());
         for (Side side : Side.values()) {
             plate(section, side, side.upright() ? section.rows() : section.columns());

@@ -35,6 +35,7 @@ class UnitsTest {
         "0.326, ppm, 0.33 ppm, 0.33 ppm",
         "27912, ppm, 27 912 ppm, 27 912 ppm",
         "0, ppm, 0 ppm, 0 ppm",
+        "0.8, m, 0.80 m, 2.6 ft",
         "0.35, 1, 0.35, 0.35",
         "5, 1, 5, 5"
     })
@@ -49,5 +50,12 @@ class UnitsTest {
                 assertThrows(
                         IllegalArgumentException.class, () -> Units.METRIC.figure(1, "furlong"));
         assertEquals("no words for the unit 'furlong'", refused.getMessage());
+    }
+
+    @ParameterizedTest(name = "{0} °C -> {1} or {2}")
+    @CsvSource({"9.84, 9.8, 50", "-0.04, 0.0, 32", "-17.9, -17.9, 0", "100, 100.0, 212"})
+    void degreesStandWithoutTheirUnit(double temperatureC, String metric, String american) {
+        assertEquals(metric, Units.METRIC.degrees(temperatureC));
+        assertEquals(american, AMERICAN.degrees(temperatureC));
     }
 }

@@ -56,6 +56,10 @@ class WordsTest {
                     "side",
                     "verdict",
                     "why",
+                    "section",
+                    "within",
+                    "height",
+                    "beside",
                     "heat-term",
                     "water-term");
     private static final double DAY_S = 86_400;
