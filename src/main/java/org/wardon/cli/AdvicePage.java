@@ -6,6 +6,7 @@ import java.util.List;
 import java.util.Locale;
 import java.util.Map;
 import java.util.stream.Collectors;
+import java.util.stream.IntStream;
 import org.wardon.advice.forecast.StoreAdvice;
 import org.wardon.advice.wording.Units;
 import org.wardon.advice.wording.Words;
@@ -131,8 +132,12 @@ final class AdvicePage {
         List<ChamberForecast.OfCooler> all = chamber.coolers();
         if (all.size() > 1 || all.stream().anyMatch(c -> !c.kind().equals("compressor"))) {
             String each =
-                    all.stream()
-                            .map(c -> c.kind() + " " + units.figure(c.runningHours(), "h"))
+                    IntStream.range(0, all.size())
+                            .mapToObj(
+                                    i ->
+                                            named(all, i)
+                                                    + " "
+                                                    + units.figure(all.get(i).runningHours(), "h"))
                             .collect(Collectors.joining(", "));
             String water =
                     chamber.waterUsedKg() > 0
@@ -140,6 +145,14 @@ final class AdvicePage {
                             : "";
             line("ran", each + water);
         }
+    }
+
+    /** Its kind, with a number where there are several. */
+    private static String named(List<ChamberForecast.OfCooler> all, int place) {
+        String kind = all.get(place).kind();
+        long before = all.subList(0, place).stream().filter(c -> c.kind().equals(kind)).count();
+        boolean several = all.stream().filter(c -> c.kind().equals(kind)).count() > 1;
+        return several ? kind + " " + (before + 1) + ":" : kind;
     }
 
     private String sentence(ChamberForecast chamber) {

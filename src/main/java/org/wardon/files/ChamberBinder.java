@@ -41,11 +41,14 @@ final class ChamberBinder {
                         inputs.number(chamber, "widthM"),
                         inputs.number(chamber, "heightM"));
         Enclosure enclosure = enclosure(chamber, box);
-        Setting setting = setting(chamber.at("setting"));
+        Setting one = setting(chamber.at("setting"));
         double capacityKg = capacityKg(chamber, box);
         CoolerBinder coolerBinder = new CoolerBinder(inputs, capacityKg);
         List<Cooler> coolers =
-                chamber.at("cooling").items().stream().map(coolerBinder::bind).toList();
+                chamber.at("cooling").items().stream()
+                        .flatMap(part -> coolerBinder.bind(part).stream())
+                        .toList();
+        Setting setting = staged(one, chamber.at("setting"), coolers);
         return new ChamberPlan(
                 inputs.text(chamber, "id"),
                 enclosure,
@@ -114,6 +117,17 @@ final class ChamberBinder {
                 inputs.number(setting, "temperatureC"),
                 inputs.number(setting, "bandK", Defaults.BAND_K),
                 inputs.number(setting, "humidityPct", Defaults.HUMIDITY_PCT));
+    }
+
+    /** The step from one cooler to the next, which is told where there is a next one. */
+    private Setting staged(Setting one, Part setting, List<Cooler> coolers) {
+        long thermostats = coolers.stream().filter(c -> c.following().isPresent()).count();
+        double stageK =
+                thermostats > 1
+                        ? inputs.number(
+                                setting, "stageK", one.stageK(), "K", Defaults.COMMON_PRACTICE)
+                        : inputs.numberElse(setting, "stageK", one.stageK());
+        return new Setting(one.temperatureC(), one.bandK(), one.humidityPct(), stageK);
     }
 
     private double capacityKg(Part chamber, Box box) {

@@ -47,7 +47,24 @@ final class ChamberRules {
             }
             power.check(chamber);
             chamber.at("cooling").items().forEach(this::cooler);
+            units(chamber.at("cooling"));
             new WaterRules(faults).check(chamber);
+        }
+    }
+
+    private void units(Part cooling) {
+        double all = 0;
+        for (Part cooler : cooling.items()) {
+            all += cooler.at("units").number().orElse(1);
+        }
+        boolean counted = cooling.items().stream().noneMatch(c -> faults.at(c.at("units").path()));
+        if (counted
+                && all > CoolerBinder.MOST_UNITS
+                && cooling.items().size() <= CoolerBinder.MOST_UNITS) {
+            faults.add(
+                    cooling.path(),
+                    "makes " + Math.round(all) + " units in all",
+                    "accepted: " + CoolerBinder.MOST_UNITS + " units at most");
         }
     }
 

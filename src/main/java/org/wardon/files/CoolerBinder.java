@@ -1,10 +1,15 @@
 package org.wardon.files;
 
+import java.util.Collections;
+import java.util.List;
 import org.wardon.cooling.Cooler;
+import org.wardon.errors.Require;
 import org.wardon.files.json.Part;
 
-/** Turns a cooler of a checked plan into the record of its kind. */
+/** Turns a cooler of a checked plan into the record of its kind, one for each of its units. */
 final class CoolerBinder {
+    static final int MOST_UNITS = 20;
+
     private final Inputs inputs;
     private final FanBinder fans;
 
@@ -14,7 +19,13 @@ final class CoolerBinder {
         this.fans = new FanBinder(inputs, capacityKg);
     }
 
-    Cooler bind(Part part) {
+    List<Cooler> bind(Part part) {
+        double units = inputs.numberElse(part, "units", 1);
+        Require.within("units", units, 1, MOST_UNITS, "", "");
+        return Collections.nCopies((int) units, one(part));
+    }
+
+    private Cooler one(Part part) {
         String kind = inputs.text(part, "kind");
         return switch (kind) {
             case "compressor" -> new CompressorBinder(inputs).bind(part);

@@ -4,6 +4,7 @@ import java.time.LocalDateTime;
 import java.time.temporal.ChronoUnit;
 import java.util.ArrayList;
 import java.util.List;
+import java.util.stream.IntStream;
 import org.wardon.air.MoistAir;
 import org.wardon.air.SaturatedAir;
 import org.wardon.air.StandardAtmosphere;
@@ -28,7 +29,8 @@ import org.wardon.produce.Reason.Argument;
 
 /**
  * What this weather and this load make of coolers: {@code pad-gives-little}, {@code
- * night-air-rests}, {@code night-air-dry}, {@code wet-wall-gives-little}, {@code ice-gone}.
+ * night-air-rests}, {@code night-air-dry}, {@code wet-wall-gives-little}, {@code ice-gone}, {@code
+ * unit-never-ran}.
  */
 final class CoolersAtWork implements Cooler.Kinds<List<Caution>> {
     /**
@@ -52,6 +54,8 @@ final class CoolersAtWork implements Cooler.Kinds<List<Caution>> {
     private static final int DAY_H = 24;
 
     private static final String OWN_RULE = "assumption";
+
+    private static final String PRACTICE = "common-practice";
 
     private final ChamberPlan chamber;
     private final int place;
@@ -80,9 +84,24 @@ final class CoolersAtWork implements Cooler.Kinds<List<Caution>> {
         return all;
     }
 
+    /** A further compressor that never came on is a reserve. */
     @Override
     public List<Caution> compressor(Compressor unit) {
-        return List.of();
+        long before =
+                chamber.coolers().subList(0, place).stream()
+                        .filter(Compressor.class::isInstance)
+                        .count();
+        boolean rested = IntStream.range(0, hours.size()).allMatch(i -> hours.ran(place, i) == 0);
+        return before > 0 && rested
+                ? List.of(
+                        new Caution(
+                                Level.NOTE,
+                                Reason.about(
+                                        "unit-never-ran",
+                                        chamber.id(),
+                                        PRACTICE,
+                                        Argument.of(before + 1.0, "1"))))
+                : List.of();
     }
 
     @Override

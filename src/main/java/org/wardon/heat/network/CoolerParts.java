@@ -10,7 +10,7 @@ import org.wardon.heat.solver.Tree;
 
 /**
  * The coolers of a chamber as parts, in the order they act: of another size by the capacity factor,
- * modulating where the run asks for it, each further one with a thermostat in a band later than the
+ * modulating where the run asks for it, each further one with a thermostat a stage later than the
  * one before.
  */
 final class CoolerParts {
@@ -54,6 +54,7 @@ final class CoolerParts {
                         .map(lowestC -> Thermostat.followedC(inputs.setting(), lowestC))
                         .orElse(inputs.setting().temperatureC());
         return new CoolerPart.Band(
-                kept - inputs.tuning().thermostatOffsetK() + stage * bandK, bandK);
+                kept - inputs.tuning().thermostatOffsetK() + stage * inputs.setting().stageK(),
+                bandK);
     }
 }
