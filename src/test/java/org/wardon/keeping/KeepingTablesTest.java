@@ -3,23 +3,16 @@ package org.wardon.keeping;
 import static org.junit.jupiter.api.Assertions.assertEquals;
 import static org.junit.jupiter.api.Assertions.assertTrue;
 
-import java.util.ArrayList;
 import java.util.List;
 import org.junit.jupiter.api.Test;
 import org.wardon.Source;
 import org.wardon.air.Timeline;
-import org.wardon.keeping.chilling.Chilling;
 import org.wardon.keeping.life.GenericCurve;
 import org.wardon.lots.LotHistory;
-import org.wardon.produce.Commodity;
-import org.wardon.produce.Ripeness;
-import org.wardon.produce.rows.ChillingExposure;
 import org.wardon.produce.rows.Q10Row;
 
 /** Figures that stand in the keeping room against the tables they come from. */
 class KeepingTablesTest {
-    private static final List<Draw> DRAWS = Draws.seeded(1, 64);
-
     @Test
     @Source("ah66-2002-tab, Table 20.3, as in q10.csv")
     void genericCurveIsThatOfTheHandbook() {
@@ -45,55 +38,6 @@ class KeepingTablesTest {
         for (int i = 0; i < printed.length; i++) {
             assertEquals(printed[i], 100 / Math.exp(curve.lnRate(10 * i)), 0.5);
         }
-    }
-
-    /**
-     * How often the model and a published exposure are on one side. The fit has seen the rows, so
-     * this is a guard against drift, not a score; sources contradict each other on a third of the
-     * misses (banana at 10 °C, pineapple).
-     */
-    @Test
-    @Source("chilling-exposure.csv")
-    void unchangedSinceFirstFitSevenInTenExposuresAreOnTheRightSide() {
-        List<String> misses = new ArrayList<>();
-        int judged = 0;
-        for (Commodity commodity : Crops.list()) {
-            for (ChillingExposure row : commodity.keeping().exposures()) {
-                boolean seen = !row.visible().equals("no");
-                boolean safe = row.kind().equals("safe");
-                if (!safe && !seen) {
-                    continue;
-                }
-                Ripeness ripeness = row.ripeness().equals("ripe") ? Ripeness.RIPE : Ripeness.GREEN;
-                Chilling chilling = Chilling.of(commodity, ripeness).orElse(null);
-                if (chilling == null) {
-                    continue;
-                }
-                judged++;
-                double days = safe ? row.days().highest() : 1.5 * row.days().highest();
-                boolean below = row.bound().equals("below-temperature");
-                double atC = row.temperatureC() - (below ? 1 : 0);
-                double injured = 0;
-                for (Draw draw : DRAWS) {
-                    double dose = chilling.at(draw).perDay(atC, atC) * days;
-                    injured += dose >= 1 ? 1.0 / DRAWS.size() : 0;
-                }
-                if (safe == (injured > 0.5)) {
-                    misses.add(
-                            String.format(
-                                    "%s %s at %.1f °C %s %s d: %.2f",
-                                    commodity.id(),
-                                    row.ripeness(),
-                                    row.temperatureC(),
-                                    row.kind(),
-                                    row.days().highest(),
-                                    injured));
-                }
-            }
-        }
-        assertTrue(
-                misses.size() <= 0.31 * judged,
-                judged + " judged, missed:\n" + String.join("\n", misses));
     }
 
     @Test

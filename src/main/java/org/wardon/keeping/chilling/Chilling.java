@@ -1,31 +1,34 @@
 package org.wardon.keeping.chilling;
 
+import java.util.List;
 import java.util.Optional;
 import org.apache.commons.math3.distribution.NormalDistribution;
 import org.wardon.keeping.Draw;
 import org.wardon.keeping.life.LifeLevel;
 import org.wardon.produce.Commodity;
 import org.wardon.produce.Ripeness;
+import org.wardon.produce.rows.ChillingExposure;
 
 /**
  * Chilling of a commodity at a ripeness: dose in kelvin-days below its floor or in its band.
  *
- * <p>Where the handbook's own condition lies inside the zone of another source, the floor moves
- * down until that condition keeps the published life: sources disagree, and the handbook's
- * condition is the one that must hold.
+ * <p>Where the handbook's own condition lies inside the zone of another source, no lot is injured
+ * by a smaller dose than that condition gives over the shortest published life: sources disagree,
+ * and the handbook's condition is the one that must hold.
  */
 public final class Chilling {
     private static final NormalDistribution NORMAL = new NormalDistribution(null, 0, 1);
-    private static final double STEP_K = 0.5;
 
     private final Zone zone;
     private final DoseFit fit;
-    private final LifeLevel handbook;
+    private final Ripeness ripeness;
+    private final double leastDoseKd;
 
-    private Chilling(Zone zone, DoseFit fit, LifeLevel handbook) {
+    private Chilling(Zone zone, DoseFit fit, Ripeness ripeness, LifeLevel handbook) {
         this.zone = zone;
         this.fit = fit;
-        this.handbook = handbook;
+        this.ripeness = ripeness;
+        leastDoseKd = handbook.lowDays() * DoseFit.worstK(zone, handbook);
     }
 
     /**
@@ -36,23 +39,34 @@ public final class Chilling {
      * @return its chilling; empty where it does not chill
      */
     public static Optional<Chilling> of(Commodity commodity, Ripeness ripeness) {
-        return Floors.of(commodity, ripeness).map(zone -> of(commodity, ripeness, zone));
+        return of(commodity, ripeness, commodity.keeping().exposures());
     }
 
-    private static Chilling of(Commodity commodity, Ripeness ripeness, Zone zone) {
+    /**
+     * Returns the chilling of a commodity by other exposures than all, for scoring.
+     *
+     * @param commodity the commodity
+     * @param ripeness how ripe the lot is; unknown is judged as green
+     * @param exposures the exposures to fit
+     * @return its chilling; empty where it does not chill
+     */
+    public static Optional<Chilling> of(
+            Commodity commodity, Ripeness ripeness, List<ChillingExposure> exposures) {
         LifeLevel handbook = LifeLevel.of(commodity);
-        DoseFit first = DoseFit.of(commodity, ripeness, zone, 0);
-        Chilling printed = new Chilling(zone, first, handbook);
-        double shift =
-                zone.bandLowC().isPresent() ? 0 : printed.shiftK(Math.exp(first.lnMedian()), 0.5);
-        DoseFit fit = shift > 0 ? DoseFit.of(commodity, ripeness, zone, shift) : first;
-        return new Chilling(zone, fit, handbook);
+        return Zone.of(commodity, ripeness, exposures)
+                .map(
+                        zone ->
+                                new Chilling(
+                                        zone,
+                                        DoseFit.of(commodity, zone, exposures),
+                                        ripeness,
+                                        handbook));
     }
 
     /**
      * Returns the zone that injures.
      *
-     * @return floor or band with its source
+     * @return floor or band as printed, with its source
      */
     public Zone zone() {
         return zone;
@@ -83,32 +97,29 @@ public final class Chilling {
      * @return dose over temperature
      */
     public Injury at(Draw draw) {
-        double dose =
-                Math.exp(
-                        fit.lnMedian()
-                                + fit.deviation()
-                                        * NORMAL.inverseCumulativeProbability(draw.chilling()));
-        if (zone.bandLowC().isEmpty()) {
-            return new Injury(zone, shiftK(dose, draw.chilling()), dose);
+        double z = NORMAL.inverseCumulativeProbability(draw.chilling());
+        double dose = Math.exp(fit.lnMedian(ripeness) + fit.deviation() * z);
+        return new Injury(zone, Math.max(dose, leastDoseKd));
+    }
+
+    /**
+     * Returns the probability that an exposure like a published one injures.
+     *
+     * @param commodity the commodity
+     * @param row temperature, ripeness, variant and where injury is looked for
+     * @param days time, days
+     * @param handbookHolds whether the handbook's own condition must keep its published life
+     * @return 0 to 1
+     */
+    public double probability(
+            Commodity commodity, ChillingExposure row, double days, boolean handbookHolds) {
+        double dose = days * DoseFit.kelvins(commodity, zone, row);
+        if (dose <= 0 || (handbookHolds && dose < leastDoseKd)) {
+            return 0;
         }
-        return new Injury(zone, 0, Math.max(dose, days(draw.chilling()) * worstInHandbookK()));
-    }
-
-    /** How far the floor moves down so that the handbook's coldest keeps the published life. */
-    private double shiftK(double doseKd, double quantile) {
-        return Math.max(0, zone.topC() - handbook.atLowC() - doseKd / days(quantile));
-    }
-
-    /** A tender lot must keep the shortest published life there, a hardy one the longest. */
-    private double days(double quantile) {
-        return handbook.lowDays() * Math.pow(handbook.highDays() / handbook.lowDays(), quantile);
-    }
-
-    private double worstInHandbookK() {
-        double worst = zone.severityK(handbook.atHighC(), 0);
-        for (double t = handbook.atLowC(); t < handbook.atHighC(); t += STEP_K) {
-            worst = Math.max(worst, zone.severityK(t, 0));
-        }
-        return worst;
+        double median =
+                fit.lnMedian(
+                        row.ripeness().equals("ripe"), row.visible().equals("after-rewarming"));
+        return NORMAL.cumulativeProbability((Math.log(dose) - median) / fit.deviation());
     }
 }

@@ -1,7 +1,9 @@
 package org.wardon.keeping.chilling;
 
 import java.util.List;
+import java.util.Set;
 import org.apache.commons.math3.distribution.NormalDistribution;
+import org.wardon.keeping.life.LifeLevel;
 import org.wardon.produce.Commodity;
 import org.wardon.produce.Ripeness;
 import org.wardon.produce.rows.ChillingExposure;
@@ -14,106 +16,163 @@ import org.wardon.produce.rows.ChillingExposure;
  *
  * <p>That the days times the kelvins stay about constant is seen in the rows of papaya (20 d at 7.5
  * °C, 10 d at 2 °C below a floor of 13 °C: 110 both) and sweet potato (42 d at 6 °C, 70 d at 9 °C:
- * 294 and 280). The prior is the spread of all first-injury rows of the table, worked out here.
+ * 294 and 280). Where sources contradict each other the deviation grows with them; one row in
+ * twenty may speak of something else altogether, so that none drags the dose alone.
  *
- * @param lnMedian logarithm of the median dose, K d
- * @param deviation standard deviation of the logarithm
+ * @param lnMedian logarithm of the median dose at which injury shows in the commodity, K d
+ * @param deviation standard deviation of the logarithm, what is not known of the median included
  * @param rows number of exposures that bear on it
  * @param afterRewarming whether most of them show only after rewarming
  */
 record DoseFit(double lnMedian, double deviation, int rows, boolean afterRewarming) {
-    /** Median of the first-injury rows over all crops, K d. */
-    static final double CLASS_MEDIAN_KD = 37;
+    /**
+     * Median over all crops, K d, of injury seen on the spot in unripe fruit, roots and tubers.
+     * This and the following are round figures near which the rows of all crops are likeliest when
+     * each is left out in turn.
+     */
+    static final double CLASS_MEDIAN_KD = 40;
 
-    /** Standard deviation of the logarithm over all crops. */
-    static final double CLASS_DEVIATION = 1.2;
+    /** Pods, leaves and fruit used as vegetables are injured by so much less, ln. */
+    private static final double TENDER_PART_LN = -1;
 
-    /** Usual deviation within a crop and its tightness (assumption). */
-    private static final double USUAL_WITHIN = 0.8;
+    private static final Set<String> TENDER_PARTS =
+            Set.of("fruit-vegetable", "seed-pod", "herb", "leafy");
 
-    private static final double USUAL_WITHIN_DEVIATION = 0.3;
+    /** Ripe fruit bears so much more, ln. */
+    private static final double RIPE_LN = 0.8;
 
-    private static final double LEAST_K = 0.25;
+    /** What only shows after rewarming takes so much less, ln. */
+    private static final double REWARMED_LN = -1;
+
+    /** Standard deviation of the logarithm of the median between crops. */
+    private static final double BETWEEN_CROPS = 0.9;
+
+    /** Usual deviation within a crop, and the deviation of its logarithm. */
+    private static final double USUAL_WITHIN = 0.5;
+
+    private static final double USUAL_WITHIN_LN = 0.4;
+    private static final double[] WITHIN = {0.25, 0.4, 0.6, 1, 1.5};
+
+    private static final double STRAY_SHARE = 0.05;
+
+    private static final double HALF_K = 0.5;
+    private static final double LEAST_K = 0.1;
     private static final double BELOW_MEANS_K = 1;
-    private static final double MEASURING_ERROR = 0.15;
-    private static final double LEAST_LIKELY = 1e-6;
+    private static final double MEASURING_ERROR = 0.2;
+    private static final double LEAST_LN = -2;
+    private static final double MOST_LN = 8;
+    private static final double STEP_LN = 0.25;
     private static final NormalDistribution NORMAL = new NormalDistribution(null, 0, 1);
 
     /**
      * Fits the dose of a commodity.
      *
      * @param commodity the commodity
-     * @param ripeness ripeness of the lot
      * @param zone the zone that counts for it
-     * @param shiftK how far the top lies lower than printed, K
-     * @return the fit; the class where no exposure bears on it
+     * @param exposures the exposures to fit, all ripenesses together
+     * @return the fit for unripe lots; the class where no exposure bears on it
      */
-    static DoseFit of(Commodity commodity, Ripeness ripeness, Zone zone, double shiftK) {
-        List<ChillingExposure> rows =
-                commodity.keeping().exposures().stream()
-                        .filter(row -> bears(row, ripeness, zone, shiftK))
+    static DoseFit of(Commodity commodity, Zone zone, List<ChillingExposure> exposures) {
+        List<Bearing> rows =
+                exposures.stream()
+                        .filter(DoseFit::bears)
+                        .map(row -> new Bearing(row, kelvins(commodity, zone, row)))
+                        .filter(row -> row.kelvins() > LEAST_K)
                         .toList();
-        double best = Double.NEGATIVE_INFINITY;
-        DoseFit fit = new DoseFit(Math.log(CLASS_MEDIAN_KD), CLASS_DEVIATION, 0, false);
-        if (rows.isEmpty()) {
-            return fit;
-        }
-        long rewarmed =
-                rows.stream().filter(row -> row.visible().equals("after-rewarming")).count();
-        for (double deviation = 0.3; deviation < 1.65; deviation += 0.15) {
-            for (double mean = -2; mean < 7.5; mean += 0.1) {
-                double likely = prior(mean, deviation);
-                for (ChillingExposure row : rows) {
-                    likely += lnLikelihood(row, zone, shiftK, mean, deviation);
+        boolean tender = TENDER_PARTS.contains(commodity.plantPart());
+        double prior = Math.log(CLASS_MEDIAN_KD) + (tender ? TENDER_PART_LN : 0);
+        Moments moments = new Moments();
+        for (double within : WITHIN) {
+            double w = Math.log(within / USUAL_WITHIN) / USUAL_WITHIN_LN;
+            for (double ln = LEAST_LN; ln < MOST_LN; ln += STEP_LN) {
+                double m = (ln - prior) / BETWEEN_CROPS;
+                double likely = -0.5 * (m * m + w * w);
+                for (Bearing row : rows) {
+                    likely += Math.log(row.likelihood(ln, within));
                 }
-                if (likely > best) {
-                    best = likely;
-                    fit = new DoseFit(mean, deviation, rows.size(), 2 * rewarmed > rows.size());
-                }
+                moments.add(Math.exp(likely), ln, within);
             }
         }
-        return fit;
+        long rewarmed = rows.stream().filter(Bearing::rewarmed).count();
+        return new DoseFit(
+                moments.mean(), moments.deviation(), rows.size(), 2 * rewarmed > rows.size());
     }
 
-    private static double prior(double mean, double deviation) {
-        double m = (mean - Math.log(CLASS_MEDIAN_KD)) / CLASS_DEVIATION;
-        double d = (deviation - USUAL_WITHIN) / USUAL_WITHIN_DEVIATION;
-        return -0.5 * (m * m + d * d);
-    }
-
-    private static boolean bears(
-            ChillingExposure row, Ripeness ripeness, Zone zone, double shiftK) {
-        boolean injured = !row.kind().equals("safe");
-        if (injured && row.visible().equals("no")) {
-            return false;
+    /** Severity of the worst temperature the handbook advises, K. */
+    static double worstK(Zone zone, LifeLevel handbook) {
+        double worst = zone.severityK(handbook.atHighC());
+        for (double t = handbook.atLowC(); t < handbook.atHighC(); t += HALF_K) {
+            worst = Math.max(worst, zone.severityK(t));
         }
-        boolean green = row.ripeness().equals("mature-green") || row.ripeness().equals("turning");
-        boolean ripe = row.ripeness().equals("ripe");
-        if (ripeness == Ripeness.RIPE ? green : ripe) {
-            return false;
-        }
-        return kelvins(row, zone, shiftK) > LEAST_K && row.days().highest() > 0;
+        return worst;
     }
 
-    private static double kelvins(ChillingExposure row, Zone zone, double shiftK) {
+    /** Logarithm of the dose by how ripe the lot is and where the injury is looked for. */
+    double lnMedian(boolean ripe, boolean rewarmed) {
+        return lnMedian + (ripe ? RIPE_LN : 0) + (rewarmed ? REWARMED_LN : 0);
+    }
+
+    /** Logarithm of the dose of visible injury in a lot, after rewarming where mostly so named. */
+    double lnMedian(Ripeness ripeness) {
+        return lnMedian(ripeness == Ripeness.RIPE, afterRewarming);
+    }
+
+    /** Sums of a posterior over a grid. */
+    private static final class Moments {
+        private double weight;
+        private double first;
+        private double second;
+
+        void add(double share, double ln, double within) {
+            weight += share;
+            first += share * ln;
+            second += share * (ln * ln + within * within);
+        }
+
+        double mean() {
+            return first / weight;
+        }
+
+        double deviation() {
+            return Math.sqrt(second / weight - mean() * mean());
+        }
+    }
+
+    static boolean bears(ChillingExposure row) {
+        boolean seen = row.kind().equals("safe") || !row.visible().equals("no");
+        return seen && row.days().highest() > 0;
+    }
+
+    /**
+     * How far below the top an exposure lies, K; the top of its own variant where one is printed.
+     */
+    static double kelvins(Commodity commodity, Zone zone, ChillingExposure row) {
         double lower = row.bound().equals("below-temperature") ? BELOW_MEANS_K : 0;
-        return zone.severityK(row.temperatureC() - lower, shiftK);
+        return zone.ofVariant(commodity, row.variant()).severityK(row.temperatureC() - lower);
     }
 
-    private static double lnLikelihood(
-            ChillingExposure row, Zone zone, double shiftK, double mean, double deviation) {
-        double kelvins = kelvins(row, zone, shiftK);
-        double low = (Math.log(row.days().lowest() * kelvins) - mean) / deviation;
-        double high = (Math.log(row.days().highest() * kelvins) - mean) / deviation;
-        double width = MEASURING_ERROR / deviation;
-        double share =
-                switch (row.kind()) {
-                    case "safe" -> 1 - NORMAL.cumulativeProbability(high);
-                    case "by" -> NORMAL.cumulativeProbability(high);
-                    default ->
-                            NORMAL.cumulativeProbability(high + width)
-                                    - NORMAL.cumulativeProbability(low - width);
-                };
-        return Math.log(Math.max(share, LEAST_LIKELY));
+    /** An exposure with its severity. */
+    private record Bearing(ChillingExposure row, double kelvins) {
+        boolean rewarmed() {
+            return row.visible().equals("after-rewarming");
+        }
+
+        double likelihood(double lnMedian, double within) {
+            double shift =
+                    (row.ripeness().equals("ripe") ? RIPE_LN : 0) + (rewarmed() ? REWARMED_LN : 0);
+            double median = lnMedian + shift - Math.log(kelvins);
+            double low = (Math.log(row.days().lowest()) - median) / within;
+            double high = (Math.log(row.days().highest()) - median) / within;
+            double error = MEASURING_ERROR / within;
+            double share =
+                    switch (row.kind()) {
+                        case "safe" -> NORMAL.cumulativeProbability(-high);
+                        case "by" -> NORMAL.cumulativeProbability(high);
+                        default ->
+                                NORMAL.cumulativeProbability(high + error)
+                                        - NORMAL.cumulativeProbability(low - error);
+                    };
+            return STRAY_SHARE + (1 - STRAY_SHARE) * share;
+        }
     }
 }

@@ -7,6 +7,7 @@ import java.util.OptionalDouble;
 import org.wardon.keeping.life.LifeLevel;
 import org.wardon.produce.Commodity;
 import org.wardon.produce.Ripeness;
+import org.wardon.produce.rows.ChillingExposure;
 import org.wardon.produce.rows.ChillingFloor;
 
 /**
@@ -15,12 +16,16 @@ import org.wardon.produce.rows.ChillingFloor;
  * <p>The rule: the keeper's own floor, where there is one; else of the printed rows, those of the
  * lot's ripeness, else those that state none; rows of single cultivars only where there are no
  * others. Among them the highest printed figure counts, but not above the handbook's own storage
- * temperature unless a row gives it as its lower bound. Unknown ripeness is judged as green. A
- * commodity without a row whose handbook temperature is 7 °C or more is taken to chill below that
- * temperature (assumption).
+ * temperature unless a row gives it as its lower bound. Injury reported at the floor raises it.
+ * Unknown ripeness is judged as green. A commodity without a row whose handbook temperature is 7 °C
+ * or more is taken to chill below that temperature (assumption).
  */
 final class Floors {
     private static final double TROPICAL_FROM_C = 7;
+    private static final double AT_K = 0.25;
+    private static final double NEAR_K = 3;
+    private static final double INJURED_BELOW_K = 1;
+    private static final String SAFE = "safe";
     private static final String BAND = "band";
     private static final double BAND_WIDTH_K = 10;
 
@@ -31,9 +36,11 @@ final class Floors {
      *
      * @param commodity the commodity
      * @param ripeness how ripe the lot is
+     * @param exposures injuries that may raise a floor
      * @return the zone; empty where it does not chill
      */
-    static Optional<Zone> of(Commodity commodity, Ripeness ripeness) {
+    static Optional<Zone> of(
+            Commodity commodity, Ripeness ripeness, List<ChillingExposure> exposures) {
         List<ChillingFloor> rows = chosen(commodity, ripeness);
         LifeLevel handbook = LifeLevel.of(commodity);
         if (rows.isEmpty()) {
@@ -50,7 +57,57 @@ final class Floors {
                     : Optional.empty();
         }
         boolean band = rows.stream().anyMatch(row -> row.zone().equals(BAND));
-        return Optional.of(band ? band(rows) : floor(rows, handbook.atLowC()));
+        Zone zone = band ? band(rows) : floor(rows, handbook.atLowC());
+        boolean own = rows.stream().anyMatch(row -> row.lowestSafeC().orElseThrow().own());
+        return Optional.of(
+                band || own
+                        ? zone
+                        : raised(zone, ofRipeness(exposures, ripeness), handbook.atHighC()));
+    }
+
+    /** Exposures of the lot's ripeness or of none stated. */
+    private static List<ChillingExposure> ofRipeness(
+            List<ChillingExposure> exposures, Ripeness ripeness) {
+        String word = word(ripeness);
+        return exposures.stream()
+                .filter(row -> row.ripeness().equals(word) || row.ripeness().equals("not-stated"))
+                .toList();
+    }
+
+    /**
+     * Where injury is reported at the floor or a little above it, not of one variant alone and not
+     * where somebody found none in colder and longer stays, the zone reaches a kelvin above it, but
+     * not beyond the warm end of the handbook's condition.
+     */
+    private static Zone raised(Zone zone, List<ChillingExposure> exposures, double warmC) {
+        double warmest =
+                exposures.stream()
+                        .filter(row -> !row.kind().equals(SAFE) && row.variant().isEmpty())
+                        .filter(row -> !row.visible().equals("no"))
+                        .filter(row -> near(zone, row) && !contradicted(row, exposures))
+                        .mapToDouble(row -> Math.min(row.temperatureC() + INJURED_BELOW_K, warmC))
+                        .max()
+                        .orElse(zone.topC());
+        return new Zone(
+                Math.max(zone.topC(), warmest),
+                zone.bandLowC(),
+                zone.bySkin(),
+                zone.assumed(),
+                zone.sourceId());
+    }
+
+    private static boolean near(Zone zone, ChillingExposure row) {
+        double above = row.temperatureC() - zone.topC();
+        return above >= -AT_K && above < NEAR_K;
+    }
+
+    private static boolean contradicted(ChillingExposure row, List<ChillingExposure> exposures) {
+        return exposures.stream()
+                .anyMatch(
+                        other ->
+                                other.kind().equals(SAFE)
+                                        && other.temperatureC() <= row.temperatureC()
+                                        && other.days().highest() >= row.days().highest());
     }
 
     private static Zone band(List<ChillingFloor> rows) {

@@ -1,9 +1,11 @@
 package org.wardon.keeping.chilling;
 
+import java.util.List;
 import java.util.Optional;
 import java.util.OptionalDouble;
 import org.wardon.produce.Commodity;
 import org.wardon.produce.Ripeness;
+import org.wardon.produce.rows.ChillingExposure;
 
 /**
  * The temperatures that injure.
@@ -31,18 +33,36 @@ public record Zone(
      * @return the zone as printed; empty where it does not chill
      */
     public static Optional<Zone> of(Commodity commodity, Ripeness ripeness) {
-        return Floors.of(commodity, ripeness);
+        return Floors.of(commodity, ripeness, commodity.keeping().exposures());
+    }
+
+    /** The zone by other exposures than all. */
+    static Optional<Zone> of(
+            Commodity commodity, Ripeness ripeness, List<ChillingExposure> exposures) {
+        return Floors.of(commodity, ripeness, exposures);
+    }
+
+    /** The same zone with the floor somebody printed for one variant of the commodity. */
+    Zone ofVariant(Commodity commodity, String variant) {
+        if (variant.isEmpty()) {
+            return this;
+        }
+        return commodity.keeping().floors().stream()
+                .filter(row -> row.variant().equals(variant) && !row.zone().isEmpty())
+                .flatMap(row -> row.lowestSafeC().stream())
+                .findFirst()
+                .map(own -> new Zone(own.highest(), bandLowC, bySkin, assumed, own.sourceId()))
+                .orElse(this);
     }
 
     /**
      * Returns how strongly a temperature injures, in kelvin below the top.
      *
      * @param temperatureC temperature, °C
-     * @param shiftK how far the top lies lower than printed, K
      * @return K, 0 at and above the top
      */
-    double severityK(double temperatureC, double shiftK) {
-        double below = topC - shiftK - temperatureC;
+    double severityK(double temperatureC) {
+        double below = topC - temperatureC;
         if (below <= 0) {
             return 0;
         }
