@@ -29,7 +29,8 @@ import picocli.CommandLine.Option;
         })
 final class Demo implements Callable<Integer> {
     private static final String PLAN = "landing.json";
-    private static final List<String> FILES = List.of(PLAN, "weather.csv", "README.md");
+    private static final List<String> FILES =
+            List.of(PLAN, "weather.csv", "hillside.json", "README.md");
 
     @Mixin private Shared shared = new Shared();
 

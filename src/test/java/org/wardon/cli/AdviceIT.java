@@ -202,7 +202,7 @@ class AdviceIT {
                         .good();
         assertArrayEquals(Files.readAllBytes(folder.resolve("out.json")), Files.readAllBytes(out));
         assertEquals(advised.out(), demo.out());
-        for (String file : List.of("landing.json", "weather.csv", "README.md")) {
+        for (String file : List.of("landing.json", "weather.csv", "hillside.json", "README.md")) {
             assertEquals(-1, Files.mismatch(Path.of("demo-data", file), copy.resolve(file)));
         }
         assertEquals(
