@@ -139,6 +139,16 @@ public record Compressor(
     }
 
     @Override
+    public boolean actsInRoom() {
+        return true;
+    }
+
+    @Override
+    public double circulatesM3s() {
+        return airFlowM3s;
+    }
+
+    @Override
     public boolean startsAtSetting() {
         return true;
     }

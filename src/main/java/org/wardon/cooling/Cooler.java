@@ -73,6 +73,24 @@ public sealed interface Cooler permits Compressor, EvaporativePad, NightAir, Ice
     double mostElectricW();
 
     /**
+     * Returns whether it stands in the room and acts on nothing but the room's air.
+     *
+     * @return false where it blows outdoor air in or acts on faces
+     */
+    default boolean actsInRoom() {
+        return false;
+    }
+
+    /**
+     * Returns the room's air its fan moves while it runs.
+     *
+     * @return m3/s; 0 where it is not known
+     */
+    default double circulatesM3s() {
+        return 0;
+    }
+
+    /**
      * Returns whether it stands still without electricity.
      *
      * @return true for most

@@ -92,6 +92,11 @@ public record IceBank(
     }
 
     @Override
+    public boolean actsInRoom() {
+        return true;
+    }
+
+    @Override
     public boolean startsAtSetting() {
         return true;
     }

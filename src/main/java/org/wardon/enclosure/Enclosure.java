@@ -18,6 +18,7 @@ import org.wardon.errors.Require;
  * @param gains heat given off inside
  * @param structureCapacityJK heat capacity of racks and structure, J/K
  * @param computedFilms whether inside films come from natural convection instead of ISO 6946
+ * @param zones its air in two zones; absent where it is one
  */
 public record Enclosure(
         Box box,
@@ -28,7 +29,64 @@ public record Enclosure(
         double freshAirM3PerHour,
         Gains gains,
         double structureCapacityJK,
-        boolean computedFilms) {
+        boolean computedFilms,
+        Optional<AirZones> zones) {
+    /**
+     * A chamber whose air is one.
+     *
+     * @param box inside measures
+     * @param faces all six faces
+     * @param thermalBridgePct uplift of the heat flow through all faces, percent
+     * @param door the door, where there is one
+     * @param leakageAirChangesPerDay leakage with the door shut, gross volumes a day
+     * @param freshAirM3PerHour deliberate fresh air, m3 of chamber air an hour
+     * @param gains heat given off inside
+     * @param structureCapacityJK heat capacity of racks and structure, J/K
+     * @param computedFilms whether inside films come from natural convection
+     */
+    public Enclosure(
+            Box box,
+            List<Face> faces,
+            double thermalBridgePct,
+            Optional<Door> door,
+            double leakageAirChangesPerDay,
+            double freshAirM3PerHour,
+            Gains gains,
+            double structureCapacityJK,
+            boolean computedFilms) {
+        this(
+                box,
+                faces,
+                thermalBridgePct,
+                door,
+                leakageAirChangesPerDay,
+                freshAirM3PerHour,
+                gains,
+                structureCapacityJK,
+                computedFilms,
+                Optional.empty());
+    }
+
+    /**
+     * Returns the same with its air in other zones.
+     *
+     * @param other two zones, or none for one air
+     * @return the changed copy
+     */
+    public Enclosure withZones(Optional<AirZones> other) {
+        return new Enclosure(
+                box,
+                faces,
+                thermalBridgePct,
+                door,
+                leakageAirChangesPerDay,
+                freshAirM3PerHour,
+                gains,
+                structureCapacityJK,
+                computedFilms,
+                other);
+    }
+
     /** Copies the faces and checks the bounds. */
     public Enclosure {
         faces = List.copyOf(faces);

@@ -4,6 +4,8 @@ import java.util.ArrayList;
 import java.util.EnumMap;
 import java.util.List;
 import java.util.Map;
+import org.wardon.air.MoistAir;
+import org.wardon.air.SaturatedAir;
 import org.wardon.enclosure.Face;
 import org.wardon.enclosure.FaceName;
 import org.wardon.heat.network.ChamberNetwork;
@@ -93,11 +95,12 @@ final class Accountant {
     }
 
     private HourAccount.Air air(double[] y) {
-        return new HourAccount.Air(
-                network.airC(y),
-                network.humidityFraction(y),
-                network.ratio(y),
-                network.airKg(),
-                network.enthalpyJkg(y));
+        double enthalpy = network.air().heatJ(y) / network.airKg();
+        double ratio = network.air().vapourKg(y) / network.airKg();
+        double airC = MoistAir.temperatureC(enthalpy, ratio);
+        double pressure = RunCompiler.pressurePa(run);
+        double humidity =
+                MoistAir.vapourPressurePa(ratio, pressure) / SaturatedAir.pressurePa(airC);
+        return new HourAccount.Air(airC, humidity, ratio, network.airKg(), enthalpy);
     }
 }

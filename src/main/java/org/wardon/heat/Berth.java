@@ -8,11 +8,22 @@ import java.util.Optional;
  * @param from id of the chamber it is carried from; absent where it comes in by the door
  * @param to id of the chamber it is carried to; absent where it leaves by the door
  * @param as how it is when it is carried in; absent where the run of the chambers together finds it
- * @param inBlast whether it stands near the cooler, in air midway between the room's and that which
- *     leaves the cooler
+ * @param spot where in the chamber
  */
-public record Berth(
-        Optional<String> from, Optional<String> to, Optional<LotState> as, boolean inBlast) {
+public record Berth(Optional<String> from, Optional<String> to, Optional<LotState> as, Spot spot) {
+    /** Where in a chamber a lot stands. */
+    public enum Spot {
+        /**
+         * Near the cooler, in air midway between the room's and that which leaves the cooler; at
+         * the coil end.
+         */
+        NEAR_COOLER,
+        /** In the middle; at the larger end, at the coil end of two alike. */
+        MIDDLE,
+        /** By the door; at the door end where the air is two. */
+        BY_DOOR
+    }
+
     /** In and out by the door, in the room's air. */
     public static final Berth DOOR = between(Optional.empty(), Optional.empty());
 
@@ -24,7 +35,26 @@ public record Berth(
      * @return the berth
      */
     public static Berth between(Optional<String> from, Optional<String> to) {
-        return new Berth(from, to, Optional.empty(), false);
+        return new Berth(from, to, Optional.empty(), Spot.MIDDLE);
+    }
+
+    /**
+     * Returns whether the lot stands in the blast of the cooler.
+     *
+     * @return true near the cooler
+     */
+    public boolean inBlast() {
+        return spot == Spot.NEAR_COOLER;
+    }
+
+    /**
+     * Returns the same elsewhere in the chamber.
+     *
+     * @param other where
+     * @return the changed copy
+     */
+    public Berth at(Spot other) {
+        return new Berth(from, to, as, other);
     }
 
     /**
@@ -33,6 +63,6 @@ public record Berth(
      * @return in the blast
      */
     public Berth nearCooler() {
-        return new Berth(from, to, as, true);
+        return at(Spot.NEAR_COOLER);
     }
 }

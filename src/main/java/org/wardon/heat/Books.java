@@ -27,8 +27,8 @@ final class Books {
         this.lots = lots;
         startLayersJ = network.layersJ(y);
         startStructureJ = network.structureJ(y);
-        startAirJ = network.airKg() * network.enthalpyJkg(y);
-        startAirKg = network.airKg() * network.ratio(y);
+        startAirJ = network.air().heatJ(y);
+        startAirKg = network.air().vapourKg(y);
     }
 
     /** Air drawn in or pushed out by lots that come and go, J and kg. */
@@ -62,7 +62,7 @@ final class Books {
                 terms.humidifier(totals),
                 terms.heater(totals),
                 terms.pumps(totals),
-                startAirJ - network.airKg() * network.enthalpyJkg(y),
+                startAirJ - network.air().heatJ(y),
                 terms.removed(totals),
                 terms.electricity(totals));
     }
@@ -87,7 +87,7 @@ final class Books {
                 terms.humidifierWater(totals),
                 terms.wallVapour(totals) - terms.mist(totals),
                 -terms.removedVapour(totals),
-                startAirKg - network.airKg() * network.ratio(y),
+                startAirKg - network.air().vapourKg(y),
                 respiration / BurntSugar.JOULE_PER_KG_CO2 * BurntSugar.WATER_KG_PER_KG_CO2,
                 terms.ranOff(totals) + terms.mist(totals));
     }

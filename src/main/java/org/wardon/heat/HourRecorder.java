@@ -18,6 +18,7 @@ final class HourRecorder {
     private int size;
     private double lastS;
     private double lastAir;
+    private double lastDoorEnd;
     private double lastRemoved;
     private double lastElectricity;
     private double lastExchanged;
@@ -81,6 +82,10 @@ final class HourRecorder {
         // Between the ends of steps the air may have been a little beyond them.
         set(Hours.Column.AIR_LOWEST_C, Math.min(Math.min(lowest, airC), meanC));
         set(Hours.Column.AIR_HIGHEST_C, Math.max(Math.max(highest, airC), meanC));
+        set(Hours.Column.DOOR_END_C, (terms.doorEndC(totals) - lastDoorEnd) / span);
+        set(
+                Hours.Column.DOOR_END_HUMIDITY,
+                network.air().hasDoorEnd() ? network.air().doorEndHumidityFraction(y) : Double.NaN);
         set(Hours.Column.HUMIDITY, network.humidityFraction(y));
         set(Hours.Column.OUTDOOR_C, network.outdoorC());
         set(Hours.Column.COOLING_W, (terms.removed(totals) - lastRemoved) / span);
@@ -139,6 +144,7 @@ final class HourRecorder {
     private void startSpan(double t, double[] totals, double respirationJ) {
         lastS = t;
         lastAir = terms.airC(totals);
+        lastDoorEnd = terms.doorEndC(totals);
         lastRemoved = terms.removed(totals);
         lastElectricity = terms.electricity(totals);
         lastExchanged = terms.exchanged(totals);

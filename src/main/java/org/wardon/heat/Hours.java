@@ -7,8 +7,9 @@ import java.util.Objects;
 
 /**
  * The chamber's series. Row i stands at {@link #atS}, an hour after the one before (the last may be
- * shorter). Air, cooling, power, exchange, load, running and water used are those of the span
- * before; all else is at the instant.
+ * shorter). Where the air is two, that which is not said to be the door end's is the coil end's.
+ * Air, cooling, power, exchange, load, running and water used are those of the span before; all
+ * else is at the instant.
  */
 public final class Hours {
     private final Map<Column, double[]> columns = new EnumMap<>(Column.class);
@@ -21,6 +22,8 @@ public final class Hours {
         AIR_C,
         AIR_LOWEST_C,
         AIR_HIGHEST_C,
+        DOOR_END_C,
+        DOOR_END_HUMIDITY,
         HUMIDITY,
         OUTDOOR_C,
         COOLING_W,
@@ -80,6 +83,26 @@ public final class Hours {
      */
     public double airC(int i) {
         return get(Column.AIR_C, i);
+    }
+
+    /**
+     * Returns the mean air temperature at the door end in the span before.
+     *
+     * @param i row
+     * @return °C; NaN where the air is one
+     */
+    public double doorEndC(int i) {
+        return get(Column.DOOR_END_C, i);
+    }
+
+    /**
+     * Returns the relative humidity at the door end at the instant.
+     *
+     * @param i row
+     * @return 0 to 1; NaN where the air is one
+     */
+    public double doorEndHumidityFraction(int i) {
+        return get(Column.DOOR_END_HUMIDITY, i);
     }
 
     /**

@@ -1,12 +1,16 @@
 package org.wardon.heat;
 
 import java.util.HashMap;
+import java.util.HashSet;
 import java.util.Map;
+import java.util.Optional;
 import java.util.OptionalDouble;
+import java.util.Set;
 import org.wardon.air.MoistAir;
 import org.wardon.air.StandardAtmosphere;
 import org.wardon.air.Sunshine;
 import org.wardon.cooling.Cooler;
+import org.wardon.enclosure.Enclosure;
 import org.wardon.enclosure.Surroundings;
 import org.wardon.errors.Require;
 import org.wardon.heat.network.ChamberNetwork;
@@ -53,7 +57,7 @@ final class RunCompiler {
         double pressure = pressurePa(run);
         return new ChamberNetwork(
                 new NetworkInputs(
-                        run.enclosure(),
+                        enclosure(run),
                         around,
                         neighbourRatios(run, pressure),
                         pressure,
@@ -61,6 +65,7 @@ final class RunCompiler {
                         control(run.controlMode()),
                         run.setting(),
                         run.stays().stream().map(Stay::lot).toList(),
+                        atDoorEnd(run),
                         tuning(run.factors()),
                         run.doorMode() != DoorMode.PULSES,
                         run.doorMode().rowHours(),
@@ -68,6 +73,27 @@ final class RunCompiler {
                         run.extras().humidifierKgH() / 3600,
                         plain,
                         run.timeline().secondOfDay(0) / 3600));
+    }
+
+    /** As built; a load is counted in one air, whose ideal cooler reaches everywhere. */
+    private static Enclosure enclosure(ChamberRun run) {
+        return run.controlMode() == ControlMode.IDEAL
+                ? run.enclosure().withZones(Optional.empty())
+                : run.enclosure();
+    }
+
+    /** Numbers of the lots at the door end: those by the door, and the middle's where it is. */
+    private static Set<Integer> atDoorEnd(ChamberRun run) {
+        boolean middle =
+                run.enclosure().zones().filter(zones -> zones.doorEndShare() > 0.5).isPresent();
+        Set<Integer> found = new HashSet<>();
+        for (int i = 0; i < run.stays().size(); i++) {
+            Berth.Spot spot = run.stays().get(i).berth().spot();
+            if (spot == Berth.Spot.BY_DOOR || (middle && spot == Berth.Spot.MIDDLE)) {
+                found.add(i);
+            }
+        }
+        return found;
     }
 
     static Tuning tuning(Factors f) {

@@ -80,7 +80,7 @@ public record Stay(
      * @return the changed copy
      */
     public Stay carriedInAs(LotState state) {
-        Berth known = new Berth(berth.from(), berth.to(), Optional.of(state), berth.inBlast());
+        Berth known = new Berth(berth.from(), berth.to(), Optional.of(state), berth.spot());
         return new Stay(lot, arrivesS, leavesS, pulpC, freshUntilS, surfaceWaterKg, known);
     }
 

@@ -1,7 +1,6 @@
 package org.wardon.heat;
 
 import java.util.List;
-import org.wardon.air.MoistAir;
 import org.wardon.air.Timeline;
 import org.wardon.air.Weather;
 import org.wardon.air.YearWave;
@@ -28,17 +27,7 @@ final class WarmUp {
             return y;
         }
         run.start().warmed().orElseGet(() -> warmed(run, accuracy, plain)).into(y);
-        run.start()
-                .humidityPct()
-                .ifPresent(
-                        pct -> {
-                            double airC = network.airC(y);
-                            network.setAir(
-                                    airC,
-                                    MoistAir.humidityRatioAt(
-                                            airC, pct / 100, RunCompiler.pressurePa(run)),
-                                    y);
-                        });
+        run.start().humidityPct().ifPresent(pct -> network.air().setHumidity(pct / 100, y));
         return y;
     }
 

@@ -53,7 +53,7 @@ final class AirAround {
     static AirExchange.Doorway doorway(NetworkInputs inputs, double factor) {
         Optional<Door> door = inputs.enclosure().door();
         if (door.isEmpty()) {
-            return new AirExchange.Doorway(0, 0, 0, 0, 0);
+            return AirExchange.Doorway.NONE;
         }
         Door d = door.get();
         double usedS = d.to().toSecondOfDay() - d.from().toSecondOfDay();

@@ -4,7 +4,6 @@ import org.wardon.air.MoistAir;
 import org.wardon.air.SaturatedAir;
 import org.wardon.enclosure.DoorExchange;
 import org.wardon.heat.laws.FreeWater;
-import org.wardon.heat.solver.Tree;
 
 /**
  * Air that comes and goes: leakage and fresh air as steady flows of outdoor air, and the door by
@@ -75,7 +74,10 @@ final class AirExchange implements Part {
             double heightM,
             double share,
             double averagedOpenS,
-            double openingsPerS) {}
+            double openingsPerS) {
+        /** No door. */
+        static final Doorway NONE = new Doorway(0, 0, 0, 0, 0);
+    }
 
     /** Steady flows of outdoor air with the door shut and no fan blowing in, kg/s. */
     record Steady(double leakKgS, double freshKgS) {}
@@ -169,12 +171,12 @@ final class AirExchange implements Part {
         flows[flowAt + DOOR_HEAT] = doorHeat;
         flows[flowAt + DOOR_VAPOUR] = doorVapour;
         flows[flowAt + EXCHANGED] = leaks + freshKgS + through;
-        rates[AirState.ENTHALPY] += (leaks + freshKgS) * heat + doorHeat;
-        rates[AirState.HUMIDITY] += (leaks + freshKgS) * vapour + doorVapour;
+        rates[air.at] += (leaks + freshKgS) * heat + doorHeat;
+        rates[air.at + 1] += (leaks + freshKgS) * vapour + doorVapour;
     }
 
     @Override
-    public void linearise(AirState air, Outside outside, double airKg, double[] y, Tree tree) {
+    public void linearise(AirState air, Outside outside, double airKg, double[] y) {
         Outside.Place beyond = outside.beyondDoor;
         door = doorKgS(air.airC, air.ratio, beyond.airC, beyond.ratio);
         doorByAirC = 0;
@@ -203,16 +205,16 @@ final class AirExchange implements Part {
         toBeyondRatio = beyond.ratio - air.ratio;
         double byEnthalpy = doorByAirC * air.airByEnthalpy;
         double byRatio = doorByAirC * air.airByRatio + doorByRatio;
-        tree.hubByHub[0] += (-toOutdoors - door + byEnthalpy * toBeyondHeat) / airKg;
-        tree.hubByHub[1] += byRatio * toBeyondHeat / airKg;
-        tree.hubByHub[2] += byEnthalpy * toBeyondRatio / airKg;
-        tree.hubByHub[3] += (-toOutdoors - door + byRatio * toBeyondRatio) / airKg;
+        air.byItself[0] += (-toOutdoors - door + byEnthalpy * toBeyondHeat) / airKg;
+        air.byItself[1] += byRatio * toBeyondHeat / airKg;
+        air.byItself[2] += byEnthalpy * toBeyondRatio / airKg;
+        air.byItself[3] += (-toOutdoors - door + byRatio * toBeyondRatio) / airKg;
         double leakByEnthalpy = leakByAirC * air.airByEnthalpy / airKg;
         double leakByRatio = leakByAirC * air.airByRatio / airKg;
-        tree.hubByHub[0] += leakByEnthalpy * toOutdoorsHeat;
-        tree.hubByHub[1] += leakByRatio * toOutdoorsHeat;
-        tree.hubByHub[2] += leakByEnthalpy * toOutdoorsRatio;
-        tree.hubByHub[3] += leakByRatio * toOutdoorsRatio;
+        air.byItself[0] += leakByEnthalpy * toOutdoorsHeat;
+        air.byItself[1] += leakByRatio * toOutdoorsHeat;
+        air.byItself[2] += leakByEnthalpy * toOutdoorsRatio;
+        air.byItself[3] += leakByRatio * toOutdoorsRatio;
     }
 
     @Override
@@ -244,17 +246,16 @@ final class AirExchange implements Part {
         slope[flowAt + DOOR_HEAT] = doorHeat;
         slope[flowAt + DOOR_VAPOUR] = doorVapour;
         slope[flowAt + EXCHANGED] = leaks + doorSlope;
-        rateSlope[AirState.ENTHALPY] += toOutdoors * heat + leaks * toOutdoorsHeat + doorHeat;
-        rateSlope[AirState.HUMIDITY] +=
-                toOutdoors * out.ratioSlope + leaks * toOutdoorsRatio + doorVapour;
+        rateSlope[air.at] += toOutdoors * heat + leaks * toOutdoorsHeat + doorHeat;
+        rateSlope[air.at + 1] += toOutdoors * out.ratioSlope + leaks * toOutdoorsRatio + doorVapour;
     }
 
     @Override
     public void flowsAlong(AirState air, double[] v, double[] change) {
-        double heat = -v[AirState.ENTHALPY];
-        double vapour = -v[AirState.HUMIDITY];
+        double heat = -v[air.at];
+        double vapour = -v[air.at + 1];
         double airC = air.airAlong(v);
-        double through = doorByAirC * airC + doorByRatio * v[AirState.HUMIDITY];
+        double through = doorByAirC * airC + doorByRatio * v[air.at + 1];
         double leaks = leakByAirC * airC;
         change[flowAt + LEAK_HEAT] = leak * heat + leaks * toOutdoorsHeat;
         change[flowAt + LEAK_VAPOUR] = leak * vapour + leaks * toOutdoorsRatio;

@@ -3,42 +3,36 @@ package org.wardon.heat.network;
 import java.util.ArrayList;
 import java.util.Arrays;
 import java.util.List;
-import java.util.Optional;
 import org.wardon.air.MoistAir;
-import org.wardon.enclosure.Enclosure;
-import org.wardon.enclosure.Leakage;
 import org.wardon.heat.solver.Tree;
 import org.wardon.heat.solver.TreeSystem;
 import org.wardon.produce.Reason;
 
 /**
  * A chamber compiled into parts around its air. The state holds the air's enthalpy and humidity
- * ratio first, then faces, structure, coolers and lots.
+ * ratio first, of both ends where the air is two, then faces, structure, coolers and lots.
  */
 public final class ChamberNetwork implements TreeSystem {
+    private static final int NONE = -1;
+
     private final NetworkInputs inputs;
-    private final Tree tree = new Tree(2);
-    private final AirState air;
-    private final AirState startAir;
+    private final AirEnd[] ends;
+    private final RoomAir roomAir;
+    private final Tree tree;
     private final Outside outside = new Outside();
     private final HourlyAir outdoors;
     private final HourlyAir beyondDoor;
     private final Faces faces;
     private final WettedWalls wettedWalls;
-    private final Optional<StructurePart> structure;
+    private final List<StructurePart> structure = new ArrayList<>();
     private final CoolerPart[] coolers;
-    private final Optional<IdealCooler> ideal;
     private final int idealFlowAt;
-    private final AirExchange exchange;
-    private final int exchangeFlowAt;
-    private final InnerGains gains;
-    private final int gainsFlowAt;
-    private final MistPart mist;
-    private final int mistFlowAt;
-    private final LotBank bank;
+    private final AirEnd.Equipment[] equipment;
+    private final Mixing[] mixing;
+    private final int mixingFlowAt;
+    private final LotBank[] banks;
     private final LotPart[] lots;
     private final Blast blast;
-    private final Part[] always;
     private final double[] weights;
     private double lotK = 1;
     private double airK = 1;
@@ -55,89 +49,88 @@ public final class ChamberNetwork implements TreeSystem {
      */
     public ChamberNetwork(NetworkInputs inputs) {
         this.inputs = inputs;
-        air = new AirState(inputs.pressurePa());
-        startAir = new AirState(inputs.pressurePa());
+        ends = AirEnd.of(inputs);
+        roomAir = new RoomAir(ends, inputs.pressurePa());
+        tree = new Tree(2 * ends.length);
         outdoors = AirAround.outdoors(inputs);
         beyondDoor = AirAround.beyondDoor(inputs, outdoors);
-        faces = new Faces(tree, this::take, inputs);
+        faces = new Faces(tree, this::take, inputs, ends);
         wettedWalls = new WettedWalls(faces.wetted());
-        double structureJK = inputs.enclosure().structureCapacityJK();
-        structure =
-                structureJK > 0
-                        ? Optional.of(
-                                new StructurePart(tree, take(StructurePart.FLOWS), structureJK))
-                        : Optional.empty();
+        addStructure();
+        ends[AirEnd.COIL].hang(tree);
         boolean unlimited = inputs.control() == NetworkInputs.Control.IDEAL;
         coolers = unlimited ? new CoolerPart[0] : CoolerParts.of(tree, this::take, inputs);
         faces.drivenBy(coolers);
-        idealFlowAt = flows;
-        ideal =
-                unlimited
-                        ? Optional.of(
-                                IdealCooler.of(
-                                        take(IdealCooler.FLOWS),
-                                        inputs,
-                                        dryAirKg(inputs.enclosure().box().volumeM3())))
-                        : Optional.empty();
-        exchangeFlowAt = take(AirExchange.FLOWS);
-        exchange = exchange();
-        gainsFlowAt = take(InnerGains.FLOWS);
-        gains =
-                new InnerGains(
-                        gainsFlowAt,
-                        inputs.setting(),
-                        inputs.tuning().thermostatOffsetK(),
-                        inputs.enclosure().gains().fansW(),
-                        inputs.enclosure().gains().lightsW(),
-                        inputs.heaterW(),
-                        inputs.humidifierKgS());
-        mistFlowAt = take(MistPart.FLOWS);
-        mist =
-                new MistPart(
-                        mistFlowAt, dryAirKg(inputs.enclosure().box().volumeM3()), inputs.plain());
+        ends[AirEnd.COIL].add(List.of(coolers));
+        idealFlowAt = unlimited ? addIdeal() : NONE;
+        equipment = new AirEnd.Equipment[ends.length];
+        for (int e = 0; e < ends.length; e++) {
+            equipment[e] = ends[e].equip(this::take, inputs, dryAirKg(1), coolers);
+        }
+        mixingFlowAt = ends.length > 1 ? take(Mixing.FLOWS) : NONE;
+        mixing =
+                ends.length > 1
+                        ? new Mixing[] {
+                            new Mixing(mixingFlowAt, ends, inputs, dryAirKg(1), coolers)
+                        }
+                        : new Mixing[0];
+        banks = new LotBank[ends.length];
         lots = new LotPart[inputs.lots().size()];
-        int flowsOfLots = take(LotBank.FLOWS * lots.length);
-        bank = new LotBank(tree, flowsOfLots, lots.length, inputs.pressurePa(), inputs.plain());
-        for (int i = 0; i < lots.length; i++) {
-            lots[i] = new LotPart(bank, inputs.lots().get(i), inputs.tuning(), inputs.pressurePa());
+        for (int e = 0; e < ends.length; e++) {
+            addLots(e);
         }
         blast = new Blast(coolers);
-        always = alwaysThere();
         weights = new double[tree.size()];
         freeVolume(inputs.enclosure().box().volumeM3());
         hour(0);
+    }
+
+    private void addStructure() {
+        double capacity = inputs.enclosure().structureCapacityJK();
+        for (AirEnd end : ends) {
+            if (capacity > 0) {
+                end.hang(tree);
+                StructurePart part =
+                        new StructurePart(tree, take(StructurePart.FLOWS), capacity * end.share);
+                structure.add(part);
+                end.add(List.of(part));
+            }
+        }
+    }
+
+    private int addIdeal() {
+        int flowAt = take(IdealCooler.FLOWS);
+        double airOfAll = dryAirKg(inputs.enclosure().box().volumeM3());
+        ends[AirEnd.COIL].add(List.of(IdealCooler.of(flowAt, inputs, airOfAll)));
+        return flowAt;
+    }
+
+    private void addLots(int e) {
+        List<Integer> here = new ArrayList<>();
+        for (int i = 0; i < lots.length; i++) {
+            if (endOf(i) == e) {
+                here.add(i);
+            }
+        }
+        ends[e].hang(tree);
+        int flowsOfLots = take(LotBank.FLOWS * here.size());
+        LotBank bank =
+                new LotBank(tree, flowsOfLots, here.size(), inputs.pressurePa(), inputs.plain());
+        for (int i : here) {
+            lots[i] = new LotPart(bank, inputs.lots().get(i), inputs.tuning(), inputs.pressurePa());
+        }
+        banks[e] = bank;
+    }
+
+    /** Number of the end a lot stands in. */
+    private int endOf(int lot) {
+        return ends.length > 1 && inputs.atDoorEnd().contains(lot) ? 1 : AirEnd.COIL;
     }
 
     private int take(int count) {
         int at = flows;
         flows += count;
         return at;
-    }
-
-    private Part[] alwaysThere() {
-        List<Part> parts = new ArrayList<>(List.of(faces.parts()));
-        structure.ifPresent(parts::add);
-        parts.addAll(List.of(coolers));
-        ideal.ifPresent(parts::add);
-        parts.add(exchange);
-        parts.add(gains);
-        parts.add(mist);
-        return parts.toArray(new Part[0]);
-    }
-
-    private AirExchange exchange() {
-        Enclosure enclosure = inputs.enclosure();
-        double factor = inputs.tuning().exchange();
-        double perM3 = dryAirKg(1);
-        double volume = enclosure.box().volumeM3();
-        double leak = Leakage.leakM3s(enclosure.leakageAirChangesPerDay(), volume) * factor;
-        double fresh = enclosure.freshAirM3PerHour() / 3600 * factor;
-        return new AirExchange(
-                exchangeFlowAt,
-                inputs.pressurePa(),
-                new AirExchange.Steady(leak * perM3, fresh * perM3),
-                AirAround.doorway(inputs, factor),
-                coolers);
     }
 
     /** Dry air in a volume at the setting, kg; a constant for flows counted in chamber air. */
@@ -155,7 +148,10 @@ public final class ChamberNetwork implements TreeSystem {
     public void freeVolume(double m3) {
         freeM3 = m3;
         airKg = dryAirKg(m3);
-        exchange.freeVolume(m3);
+        for (int e = 0; e < ends.length; e++) {
+            ends[e].airKg = airKg * ends[e].share;
+            equipment[e].exchange().freeVolume(m3);
+        }
     }
 
     /**
@@ -214,8 +210,9 @@ public final class ChamberNetwork implements TreeSystem {
      * @param y state
      */
     public void settle(double[] y) {
-        startAir.set(y);
-        faces.settle(startAir, y);
+        AirState state = ends[AirEnd.COIL].startAir;
+        state.set(y);
+        faces.settle(state, y);
     }
 
     /**
@@ -227,12 +224,14 @@ public final class ChamberNetwork implements TreeSystem {
      */
     public double[] start(double airC, double ratio) {
         double[] y = new double[tree.size()];
-        setAir(airC, ratio, y);
+        roomAir.set(airC, ratio, y);
         at(0);
         faces.steadyProfile(airC, y);
-        structure.ifPresent(s -> s.start(airC, y));
+        structure.forEach(s -> s.start(airC, y));
         List.of(coolers).forEach(cooler -> cooler.start(y));
-        bank.clear();
+        for (LotBank bank : banks) {
+            bank.clear();
+        }
         for (LotPart lot : lots) {
             lot.takeOut();
         }
@@ -246,8 +245,11 @@ public final class ChamberNetwork implements TreeSystem {
      * @return the terms
      */
     public Terms terms() {
-        int idealAt = ideal.isPresent() ? idealFlowAt : -1;
-        return new Terms(faces.parts(), coolers, idealAt, exchangeFlowAt, gainsFlowAt, mistFlowAt);
+        AirEnd.Flows[] ofEnds = new AirEnd.Flows[ends.length];
+        for (int e = 0; e < ends.length; e++) {
+            ofEnds[e] = equipment[e].flows();
+        }
+        return new Terms(faces, coolers, idealFlowAt, mixingFlowAt, ofEnds);
     }
 
     /**
@@ -303,17 +305,26 @@ public final class ChamberNetwork implements TreeSystem {
     }
 
     /**
-     * Returns the air temperature of a state.
+     * Returns the air, all of it and that at the door end.
+     *
+     * @return what a state says of it
+     */
+    public RoomAir air() {
+        return roomAir;
+    }
+
+    /**
+     * Returns the air temperature of a state; at the coil end where the air is two.
      *
      * @param y state
      * @return °C
      */
     public double airC(double[] y) {
-        return MoistAir.temperatureC(y[AirState.ENTHALPY], y[AirState.HUMIDITY]);
+        return roomAir.airC(AirEnd.COIL, y);
     }
 
     /**
-     * Returns the humidity ratio of a state.
+     * Returns the humidity ratio of a state; at the coil end where the air is two.
      *
      * @param y state
      * @return kg/kg
@@ -323,40 +334,18 @@ public final class ChamberNetwork implements TreeSystem {
     }
 
     /**
-     * Returns the relative humidity of the air of a state.
+     * Returns the relative humidity of the air of a state; at the coil end where the air is two.
      *
      * @param y state
      * @return 0 to 1, a little above where supersaturated
      */
     public double humidityFraction(double[] y) {
-        double pa = MoistAir.vapourPressurePa(y[AirState.HUMIDITY], inputs.pressurePa());
-        return pa / Saturation.pressurePa(airC(y));
+        return roomAir.humidityFraction(AirEnd.COIL, y);
     }
 
     /**
-     * Returns the enthalpy of the air of a state.
-     *
-     * @param y state
-     * @return J per kg dry air
-     */
-    public double enthalpyJkg(double[] y) {
-        return y[AirState.ENTHALPY];
-    }
-
-    /**
-     * Sets the air of a state.
-     *
-     * @param airC temperature, °C
-     * @param ratio humidity ratio, kg/kg
-     * @param y state, changed in place
-     */
-    public void setAir(double airC, double ratio, double[] y) {
-        y[AirState.ENTHALPY] = MoistAir.enthalpyJkg(airC, ratio);
-        y[AirState.HUMIDITY] = ratio;
-    }
-
-    /**
-     * Mixes outdoor air into the chamber where lots left, or pushes air out where they came in.
+     * Mixes outdoor air into the chamber where lots left, or pushes air out where they came in; at
+     * both ends alike where the air is two.
      *
      * @param m3 free volume from now on, m3
      * @param y state, changed in place
@@ -364,19 +353,13 @@ public final class ChamberNetwork implements TreeSystem {
      */
     public double[] changeFreeVolume(double m3, double[] y) {
         double before = airKg;
-        double heatBefore = before * y[AirState.ENTHALPY];
-        double waterBefore = before * y[AirState.HUMIDITY];
+        double heatBefore = roomAir.heatJ(y);
+        double waterBefore = roomAir.vapourKg(y);
         freeVolume(m3);
         if (airKg > before) {
-            double in = airKg - before;
-            double heat = heatBefore + in * outside.outdoors.enthalpy();
-            double water = waterBefore + in * outside.outdoors.ratio;
-            y[AirState.ENTHALPY] = heat / airKg;
-            y[AirState.HUMIDITY] = water / airKg;
+            roomAir.mixIn((airKg - before) / airKg, outside.outdoors, y);
         }
-        return new double[] {
-            airKg * y[AirState.ENTHALPY] - heatBefore, airKg * y[AirState.HUMIDITY] - waterBefore
-        };
+        return new double[] {roomAir.heatJ(y) - heatBefore, roomAir.vapourKg(y) - waterBefore};
     }
 
     /**
@@ -407,7 +390,7 @@ public final class ChamberNetwork implements TreeSystem {
      * @return °C
      */
     public double surfaceC(int i, double[] y) {
-        return faces.parts()[i].surfaceC(y);
+        return faces.surfaceC(i, y);
     }
 
     /**
@@ -417,7 +400,7 @@ public final class ChamberNetwork implements TreeSystem {
      * @return J from 0 °C
      */
     public double structureJ(double[] y) {
-        return structure.map(s -> s.heatJ(y)).orElse(0.0);
+        return structure.stream().mapToDouble(s -> s.heatJ(y)).sum();
     }
 
     /**
@@ -454,7 +437,9 @@ public final class ChamberNetwork implements TreeSystem {
      * @param open 1 to open, 0 to shut; between them a share of the exchange
      */
     public void door(double open) {
-        exchange.open(open);
+        for (AirEnd.Equipment one : equipment) {
+            one.exchange().open(open);
+        }
     }
 
     /**
@@ -463,7 +448,9 @@ public final class ChamberNetwork implements TreeSystem {
      * @param on true for on
      */
     public void power(boolean on) {
-        gains.power(on);
+        for (AirEnd.Equipment one : equipment) {
+            one.gains().power(on);
+        }
         for (CoolerPart cooler : coolers) {
             cooler.power(on);
         }
@@ -484,7 +471,9 @@ public final class ChamberNetwork implements TreeSystem {
      * @param on 1 for on, 0 for off; between them a share of the time
      */
     public void light(double on) {
-        gains.light(on);
+        for (AirEnd.Equipment one : equipment) {
+            one.gains().light(on);
+        }
     }
 
     /**
@@ -493,7 +482,9 @@ public final class ChamberNetwork implements TreeSystem {
      * @param present persons, may be a mean
      */
     public void people(double present) {
-        gains.people(present);
+        for (int e = 0; e < ends.length; e++) {
+            ends[e].people(equipment[e].gains(), present);
+        }
     }
 
     /**
@@ -507,8 +498,10 @@ public final class ChamberNetwork implements TreeSystem {
         this.airK = airK;
         double[] tolerances = new double[tree.size()];
         Arrays.fill(tolerances, lotK);
-        tolerances[AirState.ENTHALPY] = airK * MoistAir.DRY_AIR_J_KG_K;
-        tolerances[AirState.HUMIDITY] = airK * 5e-4;
+        for (AirEnd end : ends) {
+            tolerances[end.air.at] = airK * MoistAir.DRY_AIR_J_KG_K;
+            tolerances[end.air.at + 1] = airK * 5e-4;
+        }
         faces.tolerances(airK, tolerances);
         List.of(coolers).forEach(cooler -> cooler.tolerances(tolerances));
         for (int i = 0; i < weights.length; i++) {
@@ -525,7 +518,7 @@ public final class ChamberNetwork implements TreeSystem {
      * @param y state, changed in place
      */
     public void arrive(int i, double pulpC, double waterKg, double[] y) {
-        lots[i].arrive(pulpC, waterKg, ratio(y), y);
+        lots[i].arrive(pulpC, waterKg, roomAir.ratio(endOf(i), y), y);
         lots[i].weights(lotK, airK, weights);
     }
 
@@ -548,7 +541,7 @@ public final class ChamberNetwork implements TreeSystem {
      * @return such as {@code air} or {@code lot M1}
      */
     public String partAt(int node) {
-        return new PartNames(inputs, faces.parts(), lots).at(node);
+        return new PartNames(inputs, ends.length, faces, lots).at(node);
     }
 
     @Override
@@ -569,49 +562,62 @@ public final class ChamberNetwork implements TreeSystem {
     @Override
     public void rates(double t, double[] y, double[] rates, double[] flow) {
         at(t);
-        ask(air, y, rates, flow);
+        ask(false, y, rates, flow);
     }
 
-    private void ask(AirState state, double[] y, double[] rates, double[] flow) {
-        state.set(y);
-        rates[AirState.ENTHALPY] = 0;
-        rates[AirState.HUMIDITY] = 0;
-        for (Part part : always) {
-            part.rates(state, outside, y, rates, flow);
+    private AirState air(AirEnd end, boolean atStart) {
+        return atStart ? end.startAir : end.air;
+    }
+
+    private void ask(boolean atStart, double[] y, double[] rates, double[] flow) {
+        for (AirEnd end : ends) {
+            end.rates(air(end, atStart), outside, y, rates, flow);
         }
-        blast.follow(state, bank);
-        bank.rates(state, outside, y, rates, flow);
-        rates[AirState.ENTHALPY] /= airKg;
-        rates[AirState.HUMIDITY] /= airKg;
+        AirState coil = air(ends[AirEnd.COIL], atStart);
+        for (Mixing both : mixing) {
+            both.rates(coil, air(ends[1], atStart), rates, flow);
+        }
+        blast.follow(coil, banks[AirEnd.COIL]);
+        for (int e = 0; e < ends.length; e++) {
+            banks[e].rates(air(ends[e], atStart), outside, y, rates, flow);
+            ends[e].divide(rates);
+        }
     }
 
     @Override
     public void linearise(double t, double[] y, Change now, Change slope) {
         at(t);
-        startAir.set(y);
-        for (Part part : always) {
-            part.near(startAir, y);
+        for (int e = 0; e < ends.length; e++) {
+            ends[e].near(y);
+            banks[e].near(ends[e].startAir, y);
         }
-        bank.near(startAir, y);
-        ask(startAir, y, now.rates(), now.flows());
+        ask(true, y, now.rates(), now.flows());
         double[] rateSlope = slope.rates();
         Arrays.fill(tree.hubByHub, 0);
         Arrays.fill(rateSlope, 0);
         Arrays.fill(slope.flows(), 0);
-        for (Part part : always) {
-            part.linearise(startAir, outside, airKg, y, tree);
-            part.timeSlope(startAir, outside, y, rateSlope, slope.flows());
+        for (int e = 0; e < ends.length; e++) {
+            AirState air = ends[e].startAir;
+            ends[e].linearise(outside, y, rateSlope, slope.flows());
+            banks[e].linearise(air, outside, ends[e].airKg, y);
+            air.intoHub(tree);
         }
-        bank.linearise(startAir, outside, airKg, y, tree);
-        rateSlope[AirState.ENTHALPY] /= airKg;
-        rateSlope[AirState.HUMIDITY] /= airKg;
+        for (Mixing both : mixing) {
+            both.linearise(tree, rateSlope, slope.flows());
+        }
+        for (AirEnd end : ends) {
+            end.divide(rateSlope);
+        }
     }
 
     @Override
     public void flowsAlong(double[] direction, double[] change) {
-        for (Part part : always) {
-            part.flowsAlong(startAir, direction, change);
+        for (int e = 0; e < ends.length; e++) {
+            ends[e].flowsAlong(direction, change);
+            banks[e].flowsAlong(ends[e].startAir, direction, change);
         }
-        bank.flowsAlong(startAir, direction, change);
+        for (Mixing both : mixing) {
+            both.flowsAlong(direction, change);
+        }
     }
 }

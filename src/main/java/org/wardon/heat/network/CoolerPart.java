@@ -273,6 +273,28 @@ public final class CoolerPart implements Part, FilmedFace.Control {
         return byAirC[EXCHANGED];
     }
 
+    /** Share of the time its fan runs, 0 to 1, as it was last asked. */
+    double fanRuns() {
+        if (!powered || defrosting) {
+            return 0;
+        }
+        return fanAlwaysW > 0 ? 1 : Math.min(Math.max(effect.ran, 0), 1);
+    }
+
+    /** The same by air temperature, where the network was linearised last, 1/K. */
+    double fanRunsByAirC() {
+        return fanFollows() ? byAirC[RUN] : 0;
+    }
+
+    /** The same in time, out of the slopes of the flows, 1/s. */
+    double fanRunsSlope(double[] flowSlope) {
+        return fanFollows() ? flowSlope[flowAt + RUN] : 0;
+    }
+
+    private boolean fanFollows() {
+        return powered && !defrosting && fanAlwaysW <= 0 && effect.ran < 1;
+    }
+
     /**
      * Returns an own state, such as the water on its coil.
      *
@@ -368,22 +390,22 @@ public final class CoolerPart implements Part, FilmedFace.Control {
         flows[flowAt + WATER] = effect.waterKgS;
         flows[flowAt + MELTS] = effect.meltsW;
         flows[flowAt + REFREEZES] = effect.refreezesW;
-        rates[AirState.ENTHALPY] += fanW() + heater - removed;
-        rates[AirState.HUMIDITY] -= effect.vapourKgS;
+        rates[air.at] += fanW() + heater - removed;
+        rates[air.at + 1] -= effect.vapourKgS;
         for (int i = 0; i < own; i++) {
             rates[branch[0].blockAt(i)] = effect.ownRate[i];
         }
     }
 
     @Override
-    public void linearise(AirState air, Outside outside, double airKg, double[] y, Tree tree) {
+    public void linearise(AirState air, Outside outside, double airKg, double[] y) {
         ask(air, outside, y);
         slopes(air.airC);
         double heatByAirC = byAirC[FAN] - byAirC[REMOVED];
-        tree.hubByHub[0] += heatByAirC * air.airByEnthalpy / airKg;
-        tree.hubByHub[1] += (heatByAirC * air.airByRatio - byRatio[REMOVED]) / airKg;
-        tree.hubByHub[2] -= byAirC[VAPOUR] * air.airByEnthalpy / airKg;
-        tree.hubByHub[3] -= (byAirC[VAPOUR] * air.airByRatio + byRatio[VAPOUR]) / airKg;
+        air.byItself[0] += heatByAirC * air.airByEnthalpy / airKg;
+        air.byItself[1] += (heatByAirC * air.airByRatio - byRatio[REMOVED]) / airKg;
+        air.byItself[2] -= byAirC[VAPOUR] * air.airByEnthalpy / airKg;
+        air.byItself[3] -= (byAirC[VAPOUR] * air.airByRatio + byRatio[VAPOUR]) / airKg;
         ownJ(air, airKg);
     }
 
@@ -458,8 +480,8 @@ public final class CoolerPart implements Part, FilmedFace.Control {
         slope[flowAt + WATER] = (after.waterKgS - behind.waterKgS) / span;
         slope[flowAt + MELTS] = (after.meltsW - behind.meltsW) / span;
         slope[flowAt + REFREEZES] = (after.refreezesW - behind.refreezesW) / span;
-        rateSlope[AirState.ENTHALPY] += fan - removed;
-        rateSlope[AirState.HUMIDITY] -= vapour;
+        rateSlope[air.at] += fan - removed;
+        rateSlope[air.at + 1] -= vapour;
         for (int i = 0; i < own; i++) {
             rateSlope[branch[0].blockAt(i)] += (after.ownRate[i] - behind.ownRate[i]) / span;
         }
@@ -480,7 +502,7 @@ public final class CoolerPart implements Part, FilmedFace.Control {
     @Override
     public void flowsAlong(AirState air, double[] v, double[] change) {
         double airC = air.airAlong(v);
-        double ratio = v[AirState.HUMIDITY];
+        double ratio = v[air.at + 1];
         for (int kind = 0; kind < FLOWS; kind++) {
             double sum = byAirC[kind] * airC + byRatio[kind] * ratio;
             for (int i = 0; i < own; i++) {

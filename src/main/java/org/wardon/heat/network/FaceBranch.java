@@ -79,16 +79,21 @@ final class FaceBranch implements FacePart {
         farFilm(25);
     }
 
-    /** Compiles a face of a chamber. */
+    /** Compiles a share of a face of a chamber. */
     static FaceBranch of(
-            Tree tree, int flowAt, Face face, OutsideBoundary boundary, NetworkInputs inputs) {
+            Tree tree,
+            int flowAt,
+            Face face,
+            double share,
+            OutsideBoundary boundary,
+            NetworkInputs inputs) {
         Enclosure enclosure = inputs.enclosure();
         List<Layer> layers = new ArrayList<>(boundary.addedLayers());
         layers.addAll(face.asBuilt());
         double wall = inputs.tuning().wall();
         FaceFilms.Film inside = FaceFilms.inside(enclosure, face, boundary, inputs);
         FaceGrid grid = new FaceGrid(layers, inside.resistanceM2KW(), wall);
-        double area = enclosure.box().areaM2(face.name());
+        double area = enclosure.box().areaM2(face.name()) * share;
         double steady = grid.steady(boundary.filmWm2K(0) * wall);
         return new FaceBranch(
                 tree,
@@ -265,8 +270,8 @@ final class FaceBranch implements FacePart {
         double bridge = bridgeWK * (beyondC - air.airC);
         rates[surface] = (areaM2 * flux - film - latent) * perSurface;
         rates[surface + 1] = -vapour - runOff;
-        rates[AirState.ENTHALPY] += film + bridge + enthalpy;
-        rates[AirState.HUMIDITY] += vapour;
+        rates[air.at] += film + bridge + enthalpy;
+        rates[air.at + 1] += vapour;
         flows[flowAt + HEAT] = film + bridge;
         flows[flowAt + VAPOUR] = vapour;
         flows[flowAt + VAPOUR_ENTHALPY] = enthalpy;
@@ -276,7 +281,7 @@ final class FaceBranch implements FacePart {
     }
 
     @Override
-    public void linearise(AirState air, Outside outside, double airKg, double[] y, Tree tree) {
+    public void linearise(AirState air, Outside outside, double airKg, double[] y) {
         int surface = branch.blockAt(0);
         double surfaceC = y[surface];
         waterSlopes(air, surfaceC, y[surface + 1]);
@@ -298,9 +303,9 @@ final class FaceBranch implements FacePart {
         branch.onHub[2] = vapourBySurface * perAirKg;
         branch.onHub[3] = vapourByWater * perAirKg;
         double toAir = film + bridgeWK;
-        tree.hubByHub[0] -= toAir * air.airByEnthalpy * perAirKg;
-        tree.hubByHub[1] += (-toAir * air.airByRatio + enthalpy * vapourByRatio) * perAirKg;
-        tree.hubByHub[3] += vapourByRatio * perAirKg;
+        air.byItself[0] -= toAir * air.airByEnthalpy * perAirKg;
+        air.byItself[1] += (-toAir * air.airByRatio + enthalpy * vapourByRatio) * perAirKg;
+        air.byItself[3] += vapourByRatio * perAirKg;
         latentNow = latent;
         enthalpyNow = enthalpy;
     }
@@ -313,7 +318,7 @@ final class FaceBranch implements FacePart {
             AirState air, Outside outside, double[] y, double[] rateSlope, double[] slope) {
         double left = areaM2 * outer * beyondSlope;
         rateSlope[branch.start] += left / (areaM2 * grid.capacity[0]);
-        rateSlope[AirState.ENTHALPY] += bridgeWK * beyondSlope;
+        rateSlope[air.at] += bridgeWK * beyondSlope;
         slope[flowAt + FROM_BEYOND] = left;
         slope[flowAt + HEAT] = bridgeWK * beyondSlope;
         slope[flowAt + BRIDGE] = bridgeWK * beyondSlope;
@@ -323,7 +328,7 @@ final class FaceBranch implements FacePart {
     public void flowsAlong(AirState air, double[] v, double[] change) {
         int surface = branch.blockAt(0);
         double airC = air.airAlong(v);
-        double ratio = v[AirState.HUMIDITY];
+        double ratio = v[air.at + 1];
         double byWater = vapourByWater * v[surface + 1] + vapourByRatio * ratio;
         change[flowAt + HEAT] = filmWK * (v[surface] - airC) - bridgeWK * airC;
         change[flowAt + BRIDGE] = -bridgeWK * airC;

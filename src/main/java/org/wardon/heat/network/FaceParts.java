@@ -35,10 +35,12 @@ final class FaceParts {
         this.inputs = inputs;
     }
 
-    FacePart of(Face face, OutsideBoundary boundary) {
+    /** A share of a face; no cooler acts on one that is shared. */
+    FacePart of(Face face, double share, OutsideBoundary boundary) {
         Optional<Integer> cooler = coolerOf(face.name());
         if (cooler.isEmpty()) {
-            return FaceBranch.of(tree, take.applyAsInt(FacePart.COMMON), face, boundary, inputs);
+            int flowAt = take.applyAsInt(FacePart.COMMON);
+            return FaceBranch.of(tree, flowAt, face, share, boundary, inputs);
         }
         int index = cooler.get();
         FaceCooler asked = (FaceCooler) CoolerParts.asked(inputs.coolers().get(index), inputs);

@@ -65,7 +65,39 @@ public record FaceReading(
                 waterKg);
     }
 
-    static FaceReading of(FacePart face, double[] y, double[] totals) {
+    /** The parts of one face as one: temperatures in the mean by area, the rest added. */
+    static FaceReading of(List<FacePart> parts, double[] y, double[] totals) {
+        FaceReading all = of(parts.get(0), y, totals);
+        for (FacePart part : parts.subList(1, parts.size())) {
+            all = all.with(of(part, y, totals));
+        }
+        return all;
+    }
+
+    private FaceReading with(FaceReading other) {
+        double share = other.areaM2 / (areaM2 + other.areaM2);
+        List<Point> mean = new ArrayList<>();
+        for (int i = 0; i < points.size(); i++) {
+            Point here = points.get(i);
+            double there = other.points.get(i).temperatureC();
+            double both = here.temperatureC() + share * (there - here.temperatureC());
+            mean.add(new Point(here.depthM(), both, here.layer()));
+        }
+        return new FaceReading(
+                areaM2 + other.areaM2,
+                beyondC,
+                outerC + share * (other.outerC - outerC),
+                mean,
+                thicknessM,
+                innerC + share * (other.innerC - innerC),
+                fromBeyondJ + other.fromBeyondJ,
+                toAirJ + other.toAirJ,
+                bridgeJ + other.bridgeJ,
+                vapourKg + other.vapourKg,
+                waterKg + other.waterKg);
+    }
+
+    private static FaceReading of(FacePart face, double[] y, double[] totals) {
         FaceGrid grid = face.grid();
         List<Point> points = new ArrayList<>();
         for (int i = 0; i < grid.depthM.length; i++) {

@@ -11,28 +11,46 @@ import org.wardon.enclosure.OutsideBoundary;
 import org.wardon.heat.solver.Tree;
 import org.wardon.produce.Reason;
 
-/** The faces of a chamber with what lies beyond them, hour by hour. */
+/**
+ * The faces of a chamber with what lies beyond them, hour by hour. A face that bounds both ends of
+ * the air is two parts.
+ */
 final class Faces {
     private final NetworkInputs inputs;
     private final List<OutsideBoundary> boundaries = new ArrayList<>();
     private final FacePart[] parts;
+    private final int[] faceOf;
     private final double[][] beyondC;
     private final double[] hourStartC;
     private final double[] hourChangeK;
     private final List<FilmedFace> filmed = new ArrayList<>();
     private final List<WettedFace> wetted = new ArrayList<>();
 
-    Faces(Tree tree, IntUnaryOperator take, NetworkInputs inputs) {
+    Faces(Tree tree, IntUnaryOperator take, NetworkInputs inputs, AirEnd[] ends) {
         this.inputs = inputs;
         Enclosure enclosure = inputs.enclosure();
         FaceParts kinds = new FaceParts(tree, take, inputs);
         List<FacePart> list = new ArrayList<>();
         for (Face face : enclosure.faces()) {
-            OutsideBoundary boundary = OutsideBoundary.of(enclosure, face, inputs.around());
-            boundaries.add(boundary);
-            list.add(kinds.of(face, boundary));
+            boundaries.add(OutsideBoundary.of(enclosure, face, inputs.around()));
+        }
+        List<Integer> numbers = new ArrayList<>();
+        for (AirEnd end : ends) {
+            end.hang(tree);
+            List<FacePart> here = new ArrayList<>();
+            for (int i = 0; i < enclosure.faces().size(); i++) {
+                Face face = enclosure.faces().get(i);
+                double share = end.shareOf(face.name());
+                if (share > 0) {
+                    here.add(kinds.of(face, share, boundaries.get(i)));
+                    numbers.add(i);
+                }
+            }
+            end.add(here);
+            list.addAll(here);
         }
         parts = list.toArray(new FacePart[0]);
+        faceOf = numbers.stream().mapToInt(i -> i).toArray();
         for (FacePart part : parts) {
             if (part instanceof FilmedFace under) {
                 filmed.add(under);
@@ -42,7 +60,8 @@ final class Faces {
         }
         beyondC = new double[parts.length][];
         for (int i = 0; i < parts.length; i++) {
-            beyondC[i] = Coarse.means(boundaries.get(i).temperaturesC(), inputs.rowHours());
+            double[] hourly = boundaries.get(faceOf[i]).temperaturesC();
+            beyondC[i] = Coarse.means(hourly, inputs.rowHours());
         }
         hourStartC = new double[parts.length];
         hourChangeK = new double[parts.length];
@@ -50,6 +69,38 @@ final class Faces {
 
     FacePart[] parts() {
         return parts;
+    }
+
+    /** The parts of one face. */
+    List<FacePart> of(int face) {
+        List<FacePart> found = new ArrayList<>();
+        for (int i = 0; i < parts.length; i++) {
+            if (faceOf[i] == face) {
+                found.add(parts[i]);
+            }
+        }
+        return found;
+    }
+
+    /** Number of the face a node of the state lies in, -1 for none. */
+    int holding(int node) {
+        for (int i = 0; i < parts.length; i++) {
+            if (node >= parts[i].firstNode() && node <= parts[i].lastNode()) {
+                return faceOf[i];
+            }
+        }
+        return -1;
+    }
+
+    /** Mean inner surface of a face, °C. */
+    double surfaceC(int face, double[] y) {
+        double mean = 0;
+        double area = 0;
+        for (FacePart part : of(face)) {
+            area += part.areaM2();
+            mean += part.areaM2() / area * (part.surfaceC(y) - mean);
+        }
+        return mean;
     }
 
     List<WettedFace> wetted() {
@@ -69,7 +120,7 @@ final class Faces {
     void hour(int hour) {
         int until = Math.min(hour + inputs.rowHours(), inputs.around().hours());
         for (int i = 0; i < parts.length; i++) {
-            OutsideBoundary b = boundaries.get(i);
+            OutsideBoundary b = boundaries.get(faceOf[i]);
             parts[i].farFilm(0.5 * (b.filmWm2K(hour) + b.filmWm2K(until)));
             hourStartC[i] = beyondC[i][hour];
             hourChangeK[i] = beyondC[i][hour + 1] - hourStartC[i];

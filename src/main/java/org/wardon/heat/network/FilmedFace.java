@@ -192,7 +192,7 @@ abstract class FilmedFace extends FaceChain {
             AirState air, Outside outside, double[] y, double[] rateSlope, double[] slope) {
         double in = areaM2 * outer * beyondSlope;
         rateSlope[outermost] += in / (areaM2 * grid.capacity[0]);
-        rateSlope[AirState.ENTHALPY] += bridgeWK * beyondSlope;
+        rateSlope[air.at] += bridgeWK * beyondSlope;
         slope[flowAt + FROM_BEYOND] = in;
         slope[flowAt + HEAT] = bridgeWK * beyondSlope;
         slope[flowAt + BRIDGE] = bridgeWK * beyondSlope;
@@ -206,7 +206,7 @@ abstract class FilmedFace extends FaceChain {
                     by[SURFACE][kind] * v[innermost]
                             + by[SECOND][kind] * second
                             + by[AIR][kind] * airC
-                            + by[RATIO][kind] * v[AirState.HUMIDITY];
+                            + by[RATIO][kind] * v[air.at + 1];
         }
         change[flowAt + HEAT] -= bridgeWK * airC;
         change[flowAt + BRIDGE] = -bridgeWK * airC;

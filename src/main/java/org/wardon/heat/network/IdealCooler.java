@@ -2,7 +2,6 @@ package org.wardon.heat.network;
 
 import org.wardon.air.MoistAir;
 import org.wardon.heat.laws.FreeWater;
-import org.wardon.heat.solver.Tree;
 
 /**
  * A cooler without a limit, for the load: it takes whatever keeps the air from rising above the
@@ -81,12 +80,12 @@ final class IdealCooler implements Part {
         double removed = sensible + vapour * MoistAir.vapourEnthalpyJkg(air.airC);
         flows[flowAt + REMOVED] = removed;
         flows[flowAt + VAPOUR] = vapour;
-        rates[AirState.ENTHALPY] -= removed;
-        rates[AirState.HUMIDITY] -= vapour;
+        rates[air.at] -= removed;
+        rates[air.at + 1] -= vapour;
     }
 
     @Override
-    public void linearise(AirState air, Outside outside, double airKg, double[] y, Tree tree) {
+    public void linearise(AirState air, Outside outside, double airKg, double[] y) {
         ask(air);
         double perSensible = 1 / (MoistAir.DRY_AIR_J_KG_K * coilBelowK);
         double wetness = wetness(air);
@@ -106,10 +105,10 @@ final class IdealCooler implements Part {
         double enthalpy = MoistAir.vapourEnthalpyJkg(air.airC);
         removedByAirC = sensibleByAirC + vapourByAirC * enthalpy + vapour * MoistAir.VAPOUR_J_KG_K;
         removedByRatio = vapourByRatio * enthalpy;
-        tree.hubByHub[0] -= removedByAirC * air.airByEnthalpy / airKg;
-        tree.hubByHub[1] -= (removedByAirC * air.airByRatio + removedByRatio) / airKg;
-        tree.hubByHub[2] -= vapourByAirC * air.airByEnthalpy / airKg;
-        tree.hubByHub[3] -= (vapourByAirC * air.airByRatio + vapourByRatio) / airKg;
+        air.byItself[0] -= removedByAirC * air.airByEnthalpy / airKg;
+        air.byItself[1] -= (removedByAirC * air.airByRatio + removedByRatio) / airKg;
+        air.byItself[2] -= vapourByAirC * air.airByEnthalpy / airKg;
+        air.byItself[3] -= (vapourByAirC * air.airByRatio + vapourByRatio) / airKg;
     }
 
     @Override
@@ -121,7 +120,7 @@ final class IdealCooler implements Part {
     @Override
     public void flowsAlong(AirState air, double[] v, double[] change) {
         double airC = air.airAlong(v);
-        double ratio = v[AirState.HUMIDITY];
+        double ratio = v[air.at + 1];
         change[flowAt + REMOVED] = removedByAirC * airC + removedByRatio * ratio;
         change[flowAt + VAPOUR] = vapourByAirC * airC + vapourByRatio * ratio;
     }

@@ -6,7 +6,6 @@ import org.wardon.cooling.Thermostat;
 import org.wardon.cooling.solar.Inverter;
 import org.wardon.enclosure.PeopleHeat;
 import org.wardon.heat.laws.FreeWater;
-import org.wardon.heat.solver.Tree;
 
 /**
  * What is given off inside: fans that run always, lights, people, a heater that keeps the chamber
@@ -135,12 +134,12 @@ final class InnerGains implements Part {
         flows[flowAt + HUMIDIFIER] = mist;
         flows[flowAt + HUMIDIFIER_HEAT] = mistHeat;
         flows[flowAt + AIR_C] = air.airC;
-        rates[AirState.ENTHALPY] += fans + lights + body + heater + mistHeat;
-        rates[AirState.HUMIDITY] += breath + mist;
+        rates[air.at] += fans + lights + body + heater + mistHeat;
+        rates[air.at + 1] += breath + mist;
     }
 
     @Override
-    public void linearise(AirState air, Outside outside, double airKg, double[] y, Tree tree) {
+    public void linearise(AirState air, Outside outside, double airKg, double[] y) {
         peopleByAirC = people * PeopleHeat.slopeWattsPerK(air.airC);
         double low = setting.temperatureC() - setting.bandK();
         heaterByAirC =
@@ -168,10 +167,10 @@ final class InnerGains implements Part {
         double breathByAirC =
                 PeopleHeat.LATENT_SHARE * peopleByAirC / MoistAir.vapourEnthalpyJkg(BODY_C);
         double waterByAirC = breathByAirC + humidifierByAirC;
-        tree.hubByHub[0] += heatByAirC * air.airByEnthalpy / airKg;
-        tree.hubByHub[1] += (heatByAirC * air.airByRatio + humidifierByRatio * waterHeat) / airKg;
-        tree.hubByHub[2] += waterByAirC * air.airByEnthalpy / airKg;
-        tree.hubByHub[3] += (waterByAirC * air.airByRatio + humidifierByRatio) / airKg;
+        air.byItself[0] += heatByAirC * air.airByEnthalpy / airKg;
+        air.byItself[1] += (heatByAirC * air.airByRatio + humidifierByRatio * waterHeat) / airKg;
+        air.byItself[2] += waterByAirC * air.airByEnthalpy / airKg;
+        air.byItself[3] += (waterByAirC * air.airByRatio + humidifierByRatio) / airKg;
     }
 
     @Override
@@ -183,7 +182,7 @@ final class InnerGains implements Part {
     @Override
     public void flowsAlong(AirState air, double[] v, double[] change) {
         double airC = air.airAlong(v);
-        double mist = humidifierByAirC * airC + humidifierByRatio * v[AirState.HUMIDITY];
+        double mist = humidifierByAirC * airC + humidifierByRatio * v[air.at + 1];
         change[flowAt + PEOPLE] = peopleByAirC * airC;
         change[flowAt + PEOPLE_VAPOUR] =
                 PeopleHeat.LATENT_SHARE * peopleByAirC * airC / MoistAir.vapourEnthalpyJkg(BODY_C);

@@ -107,13 +107,13 @@ final class JacketFace extends FilmedFace {
         rates[innermost] = (areaM2 * flux - fromWall) / (areaM2 * grid.capacity[last]);
         rates[sheetAt()] = (value(INTO_SHEET) - value(HEAT) - value(LATENT)) / sheetJK;
         rates[waterAt()] = -surface.vapour - surface.runOff;
-        rates[AirState.ENTHALPY] += value(HEAT) + bridge + value(VAPOUR_ENTHALPY);
-        rates[AirState.HUMIDITY] += surface.vapour;
+        rates[air.at] += value(HEAT) + bridge + value(VAPOUR_ENTHALPY);
+        rates[air.at + 1] += surface.vapour;
         writeFlows(bridge, areaM2 * in, flows);
     }
 
     @Override
-    public void linearise(AirState air, Outside outside, double airKg, double[] y, Tree tree) {
+    public void linearise(AirState air, Outside outside, double airKg, double[] y) {
         follow(air.airC);
         double wallC = y[innermost];
         double sheetC = y[sheetAt()];
@@ -132,9 +132,9 @@ final class JacketFace extends FilmedFace {
         branch.onHub[4] = surface.bySurface / airKg;
         branch.onHub[5] = surface.byWater / airKg;
         double toAir = filmWK + bridgeWK;
-        tree.hubByHub[0] -= toAir * air.airByEnthalpy / airKg;
-        tree.hubByHub[1] += (-toAir * air.airByRatio + surface.enthalpy * surface.byRatio) / airKg;
-        tree.hubByHub[3] += surface.byRatio / airKg;
+        air.byItself[0] -= toAir * air.airByEnthalpy / airKg;
+        air.byItself[1] += (-toAir * air.airByRatio + surface.enthalpy * surface.byRatio) / airKg;
+        air.byItself[3] += surface.byRatio / airKg;
     }
 
     private void wallRow(AirState air) {

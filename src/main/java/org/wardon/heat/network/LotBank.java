@@ -121,7 +121,7 @@ final class LotBank implements Part {
     double dryPa;
 
     LotBank(Tree tree, int flowAt, int places, double pressurePa, boolean plain) {
-        this.bank = tree.addBank(places, SHELLS - 1, AirState.ENTHALPY);
+        this.bank = tree.addBank(places, SHELLS - 1);
         this.places = places;
         this.flowAt = flowAt;
         this.pressurePa = pressurePa;
@@ -426,12 +426,12 @@ final class LotBank implements Part {
             heat += gives[i] * toAir;
             vapour += gives[i] * out;
         }
-        rates[AirState.ENTHALPY] += heat;
-        rates[AirState.HUMIDITY] += vapour;
+        rates[air.at] += heat;
+        rates[air.at + 1] += vapour;
     }
 
     @Override
-    public void linearise(AirState air, Outside outside, double airKg, double[] y, Tree tree) {
+    public void linearise(AirState air, Outside outside, double airKg, double[] y) {
         int n = bank.count();
         int p = places;
         starts = false;
@@ -442,7 +442,7 @@ final class LotBank implements Part {
         if (plain) {
             askSaturation();
         }
-        slopes.at(air, airKg, y, tree);
+        slopes.at(air, airKg, y);
     }
 
     @Override

@@ -30,8 +30,8 @@ public final class LotInGivenAir implements TreeSystem {
      * @param pressurePa air pressure, Pa
      */
     public LotInGivenAir(Lot lot, Tuning tuning, double pressurePa) {
-        air = new AirState(pressurePa);
-        startAir = new AirState(pressurePa);
+        air = new AirState(pressurePa, AirState.ENTHALPY);
+        startAir = new AirState(pressurePa, AirState.ENTHALPY);
         bank = new LotBank(tree, 0, 1, pressurePa, false);
         this.lot = new LotPart(bank, lot, tuning, pressurePa);
         this.lot.give(false);
@@ -129,10 +129,11 @@ public final class LotInGivenAir implements TreeSystem {
     public void linearise(double t, double[] y, Change now, Change slope) {
         bank.near(startAir, y);
         ask(startAir, y, now.rates(), now.flows());
-        Arrays.fill(tree.hubByHub, 0);
+        startAir.startJ();
         Arrays.fill(slope.rates(), 0);
         Arrays.fill(slope.flows(), 0);
-        bank.linearise(startAir, nowhere, 1, y, tree);
+        bank.linearise(startAir, nowhere, 1, y);
+        startAir.intoHub(tree);
     }
 
     @Override

@@ -3,7 +3,6 @@ package org.wardon.heat.network;
 import java.util.Arrays;
 import org.wardon.air.MoistAir;
 import org.wardon.heat.solver.Bank;
-import org.wardon.heat.solver.Tree;
 
 /**
  * The derivatives of a {@link LotBank} where a step starts: what its unknowns do to each other, to
@@ -38,12 +37,12 @@ final class LotSlopes {
     }
 
     /** Writes J of the lots, of whose state the rates were asked last. */
-    void at(AirState air, double airKg, double[] y, Tree tree) {
+    void at(AirState air, double airKg, double[] y) {
         breathJ(y);
         for (int i = 0; i < bank.count(); i++) {
             skinJ(i, y);
         }
-        hubJ(air, airKg, tree);
+        hubJ(air, airKg);
     }
 
     private void breathJ(double[] y) {
@@ -150,7 +149,7 @@ final class LotSlopes {
     }
 
     /** The other rows of the block, and what hangs on the chamber's air. */
-    private void hubJ(AirState air, double airKg, Tree tree) {
+    private void hubJ(AirState air, double airKg) {
         int n = bank.count();
         int p = lots.places;
         int last = (LotBank.SHELLS - 1) * p;
@@ -207,9 +206,9 @@ final class LotSlopes {
             byRatio += hubRatio * share;
             vapourBy += jAir * share;
         }
-        tree.hubByHub[0] += byEnthalpy;
-        tree.hubByHub[1] += byRatio;
-        tree.hubByHub[tree.hub() + 1] += vapourBy;
+        air.byItself[0] += byEnthalpy;
+        air.byItself[1] += byRatio;
+        air.byItself[3] += vapourBy;
     }
 
     /** Writes the change of the lots' flows along a direction. */
@@ -218,7 +217,7 @@ final class LotSlopes {
         int p = lots.places;
         int b = bank.at(LotBank.SHELLS - 1, 0);
         double airC = air.airAlong(v);
-        double ratio = v[AirState.HUMIDITY];
+        double ratio = v[air.at + 1];
         Arrays.fill(lots.breathing, 0, n, 0);
         for (int k = 0; k < LotBank.SHELLS; k++) {
             int at = bank.at(k, 0);

@@ -3,7 +3,6 @@ package org.wardon.heat.network;
 import org.wardon.air.MoistAir;
 import org.wardon.heat.laws.FreeWater;
 import org.wardon.heat.laws.Mist;
-import org.wardon.heat.solver.Tree;
 
 /** Mist, by {@link Mist}; its water runs off with that of the faces. */
 final class MistPart implements Part {
@@ -48,14 +47,14 @@ final class MistPart implements Part {
     public void rates(AirState air, Outside outside, double[] y, double[] rates, double[] flows) {
         double water = perS * FreeWater.positive(excess(air), Mist.ROUND_KG_KG);
         double heat = water * MoistAir.WATER_J_KG_K * air.airC;
-        rates[AirState.ENTHALPY] -= heat;
-        rates[AirState.HUMIDITY] -= water;
+        rates[air.at] -= heat;
+        rates[air.at + 1] -= water;
         flows[flowAt + WATER] = water;
         flows[flowAt + ENTHALPY] = heat;
     }
 
     @Override
-    public void linearise(AirState air, Outside outside, double airKg, double[] y, Tree tree) {
+    public void linearise(AirState air, Outside outside, double airKg, double[] y) {
         double psat = saturation.value(air.airC);
         double dry = air.pressurePa - psat;
         double satByAirC =
@@ -69,10 +68,10 @@ final class MistPart implements Part {
         double water = perS * FreeWater.positive(over, Mist.ROUND_KG_KG);
         heatByRatio = byRatio * MoistAir.WATER_J_KG_K * air.airC;
         heatByAirC = MoistAir.WATER_J_KG_K * (water + byAirC * air.airC);
-        tree.hubByHub[0] -= heatByAirC * air.airByEnthalpy / airKg;
-        tree.hubByHub[1] -= (heatByAirC * air.airByRatio + heatByRatio) / airKg;
-        tree.hubByHub[2] -= byAirC * air.airByEnthalpy / airKg;
-        tree.hubByHub[3] -= (byAirC * air.airByRatio + byRatio) / airKg;
+        air.byItself[0] -= heatByAirC * air.airByEnthalpy / airKg;
+        air.byItself[1] -= (heatByAirC * air.airByRatio + heatByRatio) / airKg;
+        air.byItself[2] -= byAirC * air.airByEnthalpy / airKg;
+        air.byItself[3] -= (byAirC * air.airByRatio + byRatio) / airKg;
     }
 
     @Override
@@ -84,7 +83,7 @@ final class MistPart implements Part {
     @Override
     public void flowsAlong(AirState air, double[] v, double[] change) {
         double airC = air.airAlong(v);
-        double ratio = v[AirState.HUMIDITY];
+        double ratio = v[air.at + 1];
         change[flowAt + WATER] = byAirC * airC + byRatio * ratio;
         change[flowAt + ENTHALPY] = heatByAirC * airC + heatByRatio * ratio;
     }

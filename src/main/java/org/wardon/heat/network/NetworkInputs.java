@@ -2,6 +2,7 @@ package org.wardon.heat.network;
 
 import java.util.List;
 import java.util.Map;
+import java.util.Set;
 import org.wardon.cooling.Cooler;
 import org.wardon.cooling.Setting;
 import org.wardon.enclosure.Enclosure;
@@ -19,6 +20,7 @@ import org.wardon.lots.Lot;
  * @param control how they follow the thermostat
  * @param setting what the keeper dialled in
  * @param lots all lots that will ever be in it
+ * @param atDoorEnd numbers of the lots that stand in the door end; heard where the air is two
  * @param tuning factors
  * @param averagedDoor whether openings are averaged over the hours of use
  * @param rowHours hours from row to row; the outdoors run straight between means of as many
@@ -36,6 +38,7 @@ public record NetworkInputs(
         Control control,
         Setting setting,
         List<Lot> lots,
+        Set<Integer> atDoorEnd,
         Tuning tuning,
         boolean averagedDoor,
         int rowHours,

@@ -112,13 +112,13 @@ final class OpenFilmFace extends FilmedFace {
         int last = grid.capacity.length - 1;
         rates[innermost] = (areaM2 * flux - fromWall) / (areaM2 * grid.capacity[last]);
         rates[waterAt()] = value(WATER_RATE);
-        rates[AirState.ENTHALPY] += value(HEAT) + bridge + value(VAPOUR_ENTHALPY);
-        rates[AirState.HUMIDITY] += value(VAPOUR);
+        rates[air.at] += value(HEAT) + bridge + value(VAPOUR_ENTHALPY);
+        rates[air.at + 1] += value(VAPOUR);
         writeFlows(bridge, areaM2 * in, flows);
     }
 
     @Override
-    public void linearise(AirState air, Outside outside, double airKg, double[] y, Tree tree) {
+    public void linearise(AirState air, Outside outside, double airKg, double[] y) {
         follow(air.airC);
         double surfaceC = y[innermost];
         surface.slopesAt(air, surfaceC, y[waterAt()], 0);
@@ -142,10 +142,10 @@ final class OpenFilmFace extends FilmedFace {
         branch.onHub[2] = by[SURFACE][VAPOUR] / airKg;
         branch.onHub[3] = by[SECOND][VAPOUR] / airKg;
         double byAir = toAir(AIR) - bridgeWK;
-        tree.hubByHub[0] += byAir * air.airByEnthalpy / airKg;
-        tree.hubByHub[1] += (byAir * air.airByRatio + toAir(RATIO)) / airKg;
-        tree.hubByHub[2] += by[AIR][VAPOUR] * air.airByEnthalpy / airKg;
-        tree.hubByHub[3] += (by[AIR][VAPOUR] * air.airByRatio + by[RATIO][VAPOUR]) / airKg;
+        air.byItself[0] += byAir * air.airByEnthalpy / airKg;
+        air.byItself[1] += (byAir * air.airByRatio + toAir(RATIO)) / airKg;
+        air.byItself[2] += by[AIR][VAPOUR] * air.airByEnthalpy / airKg;
+        air.byItself[3] += (by[AIR][VAPOUR] * air.airByRatio + by[RATIO][VAPOUR]) / airKg;
     }
 
     private double outOfWall(int partial) {

@@ -1,7 +1,5 @@
 package org.wardon.heat.network;
 
-import org.wardon.heat.solver.Tree;
-
 /** Something that hangs on the chamber's air: writes its own rates and adds to those of the air. */
 interface Part {
     /**
@@ -15,9 +13,9 @@ interface Part {
 
     /**
      * Writes J, after {@link #rates} was asked of the same state; what the part does to the air
-     * goes, divided by {@code airKg}, to the hub's rows.
+     * goes, divided by {@code airKg}, to the air's own rows.
      */
-    void linearise(AirState air, Outside outside, double airKg, double[] y, Tree tree);
+    void linearise(AirState air, Outside outside, double airKg, double[] y);
 
     /**
      * Adds what the outside's change in time does, after {@link #linearise}; the hub's entries

@@ -37,19 +37,19 @@ final class StructurePart implements Part {
     public void rates(AirState air, Outside outside, double[] y, double[] rates, double[] flows) {
         double heat = filmWK * (y[branch.blockAt(0)] - air.airC);
         rates[branch.blockAt(0)] = -heat / capacityJK;
-        rates[AirState.ENTHALPY] += heat;
+        rates[air.at] += heat;
         flows[flowAt + HEAT] = heat;
     }
 
     @Override
-    public void linearise(AirState air, Outside outside, double airKg, double[] y, Tree tree) {
+    public void linearise(AirState air, Outside outside, double airKg, double[] y) {
         branch.inner[0] = -filmWK / capacityJK;
         branch.byHub[0] = filmWK * air.airByEnthalpy / capacityJK;
         branch.byHub[1] = filmWK * air.airByRatio / capacityJK;
         branch.onHub[0] = filmWK / airKg;
         branch.onHub[1] = 0;
-        tree.hubByHub[0] -= filmWK * air.airByEnthalpy / airKg;
-        tree.hubByHub[1] -= filmWK * air.airByRatio / airKg;
+        air.byItself[0] -= filmWK * air.airByEnthalpy / airKg;
+        air.byItself[1] -= filmWK * air.airByRatio / airKg;
     }
 
     @Override

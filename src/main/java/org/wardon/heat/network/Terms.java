@@ -8,26 +8,44 @@ import org.wardon.cooling.FaceCooler;
 public final class Terms {
     private static final int ALL = -1;
 
+    private final Faces byFace;
     private final FacePart[] faces;
     private final CoolerPart[] coolers;
     private final int idealAt;
-    private final int exchangeAt;
-    private final int gainsAt;
-    private final int mistAt;
+    private final int mixingAt;
+    private final AirEnd.Flows[] ends;
 
-    Terms(
-            FacePart[] faces,
-            CoolerPart[] coolers,
-            int idealAt,
-            int exchangeAt,
-            int gainsAt,
-            int mistAt) {
-        this.faces = faces;
+    Terms(Faces faces, CoolerPart[] coolers, int idealAt, int mixingAt, AirEnd.Flows[] ends) {
+        this.byFace = faces;
+        this.faces = faces.parts();
         this.coolers = coolers;
         this.idealAt = idealAt;
-        this.exchangeAt = exchangeAt;
-        this.gainsAt = gainsAt;
-        this.mistAt = mistAt;
+        this.mixingAt = mixingAt;
+        this.ends = ends;
+    }
+
+    private double exchange(double[] totals, int kind) {
+        double sum = 0;
+        for (AirEnd.Flows end : ends) {
+            sum += totals[end.exchangeAt() + kind];
+        }
+        return sum;
+    }
+
+    private double gains(double[] totals, int kind) {
+        double sum = 0;
+        for (AirEnd.Flows end : ends) {
+            sum += totals[end.gainsAt() + kind];
+        }
+        return sum;
+    }
+
+    private double mist(double[] totals, int kind) {
+        double sum = 0;
+        for (AirEnd.Flows end : ends) {
+            sum += totals[end.mistAt() + kind];
+        }
+        return sum;
     }
 
     private double faces(double[] totals, int kind) {
@@ -47,7 +65,7 @@ public final class Terms {
      * @return its temperatures and what went through it
      */
     public FaceReading face(int i, double[] y, double[] totals) {
-        return FaceReading.of(faces[i], y, totals);
+        return FaceReading.of(byFace.of(i), y, totals);
     }
 
     private double coolers(double[] totals, int kind) {
@@ -94,7 +112,7 @@ public final class Terms {
         return faces(totals, FacePart.HEAT)
                 + taken(totals, ALL)
                 + faces(totals, FacePart.VAPOUR_ENTHALPY)
-                - totals[mistAt + MistPart.ENTHALPY];
+                - mist(totals, MistPart.ENTHALPY);
     }
 
     /**
@@ -114,7 +132,7 @@ public final class Terms {
      * @return kg
      */
     public double mist(double[] totals) {
-        return totals[mistAt + MistPart.WATER];
+        return mist(totals, MistPart.WATER);
     }
 
     /**
@@ -157,7 +175,7 @@ public final class Terms {
      * @return J
      */
     public double leakage(double[] totals) {
-        return totals[exchangeAt + AirExchange.LEAK_HEAT];
+        return exchange(totals, AirExchange.LEAK_HEAT);
     }
 
     /**
@@ -167,7 +185,7 @@ public final class Terms {
      * @return J
      */
     public double freshAir(double[] totals) {
-        return totals[exchangeAt + AirExchange.FRESH_HEAT];
+        return exchange(totals, AirExchange.FRESH_HEAT);
     }
 
     /**
@@ -177,7 +195,7 @@ public final class Terms {
      * @return J
      */
     public double door(double[] totals) {
-        return totals[exchangeAt + AirExchange.DOOR_HEAT];
+        return exchange(totals, AirExchange.DOOR_HEAT);
     }
 
     /**
@@ -187,7 +205,7 @@ public final class Terms {
      * @return kg
      */
     public double leakageVapour(double[] totals) {
-        return totals[exchangeAt + AirExchange.LEAK_VAPOUR];
+        return exchange(totals, AirExchange.LEAK_VAPOUR);
     }
 
     /**
@@ -197,7 +215,7 @@ public final class Terms {
      * @return kg
      */
     public double freshAirVapour(double[] totals) {
-        return totals[exchangeAt + AirExchange.FRESH_VAPOUR];
+        return exchange(totals, AirExchange.FRESH_VAPOUR);
     }
 
     /**
@@ -207,7 +225,7 @@ public final class Terms {
      * @return kg
      */
     public double doorVapour(double[] totals) {
-        return totals[exchangeAt + AirExchange.DOOR_VAPOUR];
+        return exchange(totals, AirExchange.DOOR_VAPOUR);
     }
 
     /**
@@ -217,7 +235,7 @@ public final class Terms {
      * @return kg
      */
     public double exchanged(double[] totals) {
-        return totals[exchangeAt + AirExchange.EXCHANGED] + coolers(totals, CoolerPart.EXCHANGED);
+        return exchange(totals, AirExchange.EXCHANGED) + coolers(totals, CoolerPart.EXCHANGED);
     }
 
     /**
@@ -227,7 +245,7 @@ public final class Terms {
      * @return J
      */
     public double fans(double[] totals) {
-        return totals[gainsAt + InnerGains.FANS] + coolers(totals, CoolerPart.FAN);
+        return gains(totals, InnerGains.FANS) + coolers(totals, CoolerPart.FAN);
     }
 
     /**
@@ -237,7 +255,7 @@ public final class Terms {
      * @return J
      */
     public double lights(double[] totals) {
-        return totals[gainsAt + InnerGains.LIGHTS];
+        return gains(totals, InnerGains.LIGHTS);
     }
 
     /**
@@ -247,7 +265,7 @@ public final class Terms {
      * @return J
      */
     public double people(double[] totals) {
-        return totals[gainsAt + InnerGains.PEOPLE];
+        return gains(totals, InnerGains.PEOPLE);
     }
 
     /**
@@ -257,7 +275,7 @@ public final class Terms {
      * @return kg
      */
     public double peopleVapour(double[] totals) {
-        return totals[gainsAt + InnerGains.PEOPLE_VAPOUR];
+        return gains(totals, InnerGains.PEOPLE_VAPOUR);
     }
 
     /**
@@ -267,7 +285,7 @@ public final class Terms {
      * @return J
      */
     public double heater(double[] totals) {
-        return totals[gainsAt + InnerGains.HEATER];
+        return gains(totals, InnerGains.HEATER);
     }
 
     /**
@@ -277,7 +295,7 @@ public final class Terms {
      * @return kg
      */
     public double humidifierWater(double[] totals) {
-        return totals[gainsAt + InnerGains.HUMIDIFIER];
+        return gains(totals, InnerGains.HUMIDIFIER);
     }
 
     /**
@@ -287,17 +305,57 @@ public final class Terms {
      * @return J
      */
     public double humidifier(double[] totals) {
-        return totals[gainsAt + InnerGains.HUMIDIFIER_HEAT];
+        return gains(totals, InnerGains.HUMIDIFIER_HEAT);
     }
 
     /**
-     * Integral of the air's temperature.
+     * Integral of the temperature of the air; of the coil end where there are two.
      *
      * @param totals integrals of the flows
      * @return °C s
      */
     public double airC(double[] totals) {
-        return totals[gainsAt + InnerGains.AIR_C];
+        return totals[ends[AirEnd.COIL].gainsAt() + InnerGains.AIR_C];
+    }
+
+    /**
+     * Integral of the temperature of the door end's air.
+     *
+     * @param totals integrals of the flows
+     * @return °C s; NaN where the air is one
+     */
+    public double doorEndC(double[] totals) {
+        return ends.length > 1 ? totals[ends[1].gainsAt() + InnerGains.AIR_C] : Double.NaN;
+    }
+
+    /**
+     * Heat that went from the door end to the coil end.
+     *
+     * @param totals integrals of the flows
+     * @return J; 0 where the air is one
+     */
+    public double mixed(double[] totals) {
+        return mixingAt < 0 ? 0 : totals[mixingAt + Mixing.HEAT];
+    }
+
+    /**
+     * Vapour that went from the door end to the coil end.
+     *
+     * @param totals integrals of the flows
+     * @return kg; 0 where the air is one
+     */
+    public double mixedVapour(double[] totals) {
+        return mixingAt < 0 ? 0 : totals[mixingAt + Mixing.VAPOUR];
+    }
+
+    /**
+     * Dry air that went each way between the ends.
+     *
+     * @param totals integrals of the flows
+     * @return kg; 0 where the air is one
+     */
+    public double mixedAir(double[] totals) {
+        return mixingAt < 0 ? 0 : totals[mixingAt + Mixing.AIR];
     }
 
     /**

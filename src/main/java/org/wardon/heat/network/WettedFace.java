@@ -190,8 +190,8 @@ final class WettedFace extends FaceChain {
         rates[branch.start] = -outVapour;
         rates[waterAt()] = inside.fromDamp - inside.vapour - inside.runOff;
         rates[drawnInsideAt()] = -inside.fromDamp;
-        rates[AirState.ENTHALPY] += film + bridge + enthalpy;
-        rates[AirState.HUMIDITY] += inside.vapour;
+        rates[air.at] += film + bridge + enthalpy;
+        rates[air.at + 1] += inside.vapour;
         flows[flowAt + HEAT] = film + bridge;
         flows[flowAt + VAPOUR] = inside.vapour;
         flows[flowAt + VAPOUR_ENTHALPY] = enthalpy;
@@ -206,7 +206,7 @@ final class WettedFace extends FaceChain {
     }
 
     @Override
-    public void linearise(AirState air, Outside outside, double airKg, double[] y, Tree tree) {
+    public void linearise(AirState air, Outside outside, double airKg, double[] y) {
         outsideSlopes(y[outermost], air, outside);
         inside.slopesAt(air, y[innermost], y[waterAt()], damp());
         int last = grid.capacity.length - 1;
@@ -227,9 +227,9 @@ final class WettedFace extends FaceChain {
         branch.onHub[3] = inside.bySurface / airKg;
         branch.onHub[4] = inside.byWater / airKg;
         double toAir = film + bridgeWK;
-        tree.hubByHub[0] -= toAir * air.airByEnthalpy / airKg;
-        tree.hubByHub[1] += (-toAir * air.airByRatio + inside.enthalpy * inside.byRatio) / airKg;
-        tree.hubByHub[3] += inside.byRatio / airKg;
+        air.byItself[0] -= toAir * air.airByEnthalpy / airKg;
+        air.byItself[1] += (-toAir * air.airByRatio + inside.enthalpy * inside.byRatio) / airKg;
+        air.byItself[3] += inside.byRatio / airKg;
     }
 
     private void block(double self, double film, double capacity, AirState air) {
@@ -252,7 +252,7 @@ final class WettedFace extends FaceChain {
         double latent = vapour * outLatent;
         rateSlope[outermost] += (in - latent) / (areaM2 * grid.capacity[0]);
         rateSlope[branch.start] -= vapour;
-        rateSlope[AirState.ENTHALPY] += bridgeWK * beyondSlope;
+        rateSlope[air.at] += bridgeWK * beyondSlope;
         slope[flowAt + FROM_BEYOND] = in;
         slope[flowAt + HEAT] = bridgeWK * beyondSlope;
         slope[flowAt + BRIDGE] = bridgeWK * beyondSlope;
@@ -263,7 +263,7 @@ final class WettedFace extends FaceChain {
     @Override
     public void flowsAlong(AirState air, double[] v, double[] change) {
         double airC = air.airAlong(v);
-        double ratio = v[AirState.HUMIDITY];
+        double ratio = v[air.at + 1];
         double surface = v[innermost];
         double byWater = inside.byWater * v[waterAt()] + inside.byRatio * ratio;
         change[flowAt + HEAT] = areaM2 * grid.inner * (surface - airC) - bridgeWK * airC;

@@ -49,7 +49,9 @@ public final class Bank {
     /** J of the hub's rows by those two, {@code [(hubRow * 2 + column) * places + member]}. */
     public final double[] onHub;
 
-    private final int hubAt;
+    /** First of the two nodes of the hub they touch. */
+    public final int hubAt;
+
     private final double[] inversePivot;
     private final double[] ratio;
     private final double[] afterShare;

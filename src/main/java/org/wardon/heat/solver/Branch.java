@@ -4,12 +4,15 @@ import java.util.Arrays;
 
 /**
  * One branch of the tree: a run of nodes, each coupled to its neighbours, that ends in a small
- * dense block; the block alone is coupled to the hub. The branch holds its part of the Jacobian J
- * and eliminates {@code shift I - J} into the hub.
+ * dense block; the block alone is coupled to two nodes of the hub. The branch holds its part of the
+ * Jacobian J and eliminates {@code shift I - J} into the hub.
  *
  * <p>Arrays are flat; matrices are row by row. A caller writes the J parts and never the factors.
  */
 public final class Branch {
+    /** Nodes of the hub a branch touches. */
+    public static final int TOUCH = 2;
+
     /** Place of the first node of the run in the state. */
     public final int start;
 
@@ -31,16 +34,18 @@ public final class Branch {
     /** J within the block, {@code [row * block + column]}. */
     public final double[] inner;
 
-    /** J of the block's rows by the hub, {@code [row * hub + hubColumn]}. */
+    /** J of the block's rows by the two nodes of the hub, {@code [row * 2 + column]}. */
     public final double[] byHub;
 
-    /** J of the hub's rows by the block, {@code [hubRow * block + column]}. */
+    /** J of the hub's two rows by the block, {@code [hubRow * block + column]}. */
     public final double[] onHub;
 
     /** J of the block's first row by the last node of the run. */
     public double blockByRun;
 
-    private final int hub;
+    /** First of the two nodes of the hub it touches. */
+    public final int hubAt;
+
     private final double[] inversePivot;
     private final double[] ratio;
     private final double[] afterShare;
@@ -50,23 +55,23 @@ public final class Branch {
     private double blockRatio;
     private boolean active = true;
 
-    Branch(int start, int run, int block, int hub) {
+    Branch(int start, int run, int block, int hubAt) {
         this.start = start;
         this.run = run;
         this.block = block;
-        this.hub = hub;
+        this.hubAt = hubAt;
         before = new double[run];
         self = new double[run];
         after = new double[run];
         inner = new double[block * block];
-        byHub = new double[block * hub];
-        onHub = new double[hub * block];
+        byHub = new double[block * TOUCH];
+        onHub = new double[TOUCH * block];
         inversePivot = new double[run];
         ratio = new double[run];
         afterShare = new double[run];
         inverse = new double[block * block];
         work = new double[block];
-        hubShare = new double[block * hub];
+        hubShare = new double[block * TOUCH];
     }
 
     /**
@@ -109,7 +114,7 @@ public final class Branch {
     }
 
     /** Factors {@code shift I - J} and takes the branch's share off the hub's matrix. */
-    void factor(double shift, double[] hubMatrix) {
+    void factor(double shift, double[] hubMatrix, int hub) {
         factorRun(shift);
         for (int i = 0; i < block * block; i++) {
             inverse[i] = -inner[i];
@@ -122,36 +127,10 @@ public final class Branch {
             inverse[0] += blockRatio * after[run - 1];
         }
         invertBlock();
-        if (hub == 2) {
-            shareOfTwo(hubMatrix);
-        } else {
-            shareOfHub(hubMatrix);
-        }
+        shareOfHub(hubMatrix, hub);
     }
 
-    private void shareOfHub(double[] hubMatrix) {
-        for (int i = 0; i < block; i++) {
-            for (int c = 0; c < hub; c++) {
-                double sum = 0;
-                for (int k = 0; k < block; k++) {
-                    sum -= inverse[i * block + k] * byHub[k * hub + c];
-                }
-                hubShare[i * hub + c] = sum;
-            }
-        }
-        for (int r = 0; r < hub; r++) {
-            for (int c = 0; c < hub; c++) {
-                double sum = 0;
-                for (int k = 0; k < block; k++) {
-                    sum += onHub[r * block + k] * hubShare[k * hub + c];
-                }
-                hubMatrix[r * hub + c] += sum;
-            }
-        }
-    }
-
-    /** The same for a hub of two, written out: it is the usual one. */
-    private void shareOfTwo(double[] hubMatrix) {
+    private void shareOfHub(double[] hubMatrix, int hub) {
         double first = 0;
         double firstBySecond = 0;
         double secondByFirst = 0;
@@ -171,10 +150,11 @@ public final class Branch {
             secondByFirst += onHub[block + i] * left;
             second += onHub[block + i] * right;
         }
-        hubMatrix[0] += first;
-        hubMatrix[1] += firstBySecond;
-        hubMatrix[2] += secondByFirst;
-        hubMatrix[3] += second;
+        int row = hubAt * hub + hubAt;
+        hubMatrix[row] += first;
+        hubMatrix[row + 1] += firstBySecond;
+        hubMatrix[row + hub] += secondByFirst;
+        hubMatrix[row + hub + 1] += second;
     }
 
     private void factorRun(double shift) {
@@ -278,44 +258,24 @@ public final class Branch {
             x[b] -= blockRatio * last;
         }
         solveBlock(x, b);
-        if (hub == 2) {
-            double first = 0;
-            double second = 0;
-            for (int k = 0; k < block; k++) {
-                double part = x[b + k];
-                first += onHub[k] * part;
-                second += onHub[block + k] * part;
-            }
-            x[0] += first;
-            x[1] += second;
-            return;
+        double first = 0;
+        double second = 0;
+        for (int k = 0; k < block; k++) {
+            double part = x[b + k];
+            first += onHub[k] * part;
+            second += onHub[block + k] * part;
         }
-        for (int r = 0; r < hub; r++) {
-            double sum = 0;
-            for (int k = 0; k < block; k++) {
-                sum += onHub[r * block + k] * x[b + k];
-            }
-            x[r] += sum;
-        }
+        x[hubAt] += first;
+        x[hubAt + 1] += second;
     }
 
     /** Puts the hub's solution back into the branch, in place. */
     void back(double[] x) {
         int b = start + run;
-        if (hub == 2) {
-            double first = x[0];
-            double second = x[1];
-            for (int i = 0; i < block; i++) {
-                x[b + i] -= hubShare[2 * i] * first + hubShare[2 * i + 1] * second;
-            }
-        } else {
-            for (int i = 0; i < block; i++) {
-                double sum = 0;
-                for (int c = 0; c < hub; c++) {
-                    sum += hubShare[i * hub + c] * x[c];
-                }
-                x[b + i] -= sum;
-            }
+        double first = x[hubAt];
+        double second = x[hubAt + 1];
+        for (int i = 0; i < block; i++) {
+            x[b + i] -= hubShare[2 * i] * first + hubShare[2 * i + 1] * second;
         }
         double next = x[b];
         for (int i = run - 1; i >= 0; i--) {

@@ -20,6 +20,7 @@ public final class Tree {
     private Bank[] banks = new Bank[0];
     private final double[] hubLu;
     private int size;
+    private int hangsAt;
 
     /** J of the hub's rows by the hub, {@code [row * hub + column]}; written by the system. */
     public final double[] hubByHub;
@@ -27,13 +28,22 @@ public final class Tree {
     /**
      * Starts a tree.
      *
-     * @param hub nodes of the hub, at least 1
+     * @param hub nodes of the hub, at least 2
      */
     public Tree(int hub) {
         this.hub = hub;
         this.size = hub;
         hubByHub = new double[hub * hub];
         hubLu = new double[hub * hub];
+    }
+
+    /**
+     * Chooses where on the hub that hangs which is added from now on; at its first nodes before.
+     *
+     * @param hubAt first of the two nodes of the hub it touches
+     */
+    public void hangAt(int hubAt) {
+        hangsAt = hubAt;
     }
 
     /**
@@ -44,7 +54,7 @@ public final class Tree {
      * @return the branch, whose J parts the system writes
      */
     public Branch addBranch(int run, int block) {
-        Branch branch = new Branch(size, run, block, hub);
+        Branch branch = new Branch(size, run, block, hangsAt);
         size += branch.size();
         list.add(branch);
         branches = list.toArray(new Branch[0]);
@@ -56,11 +66,10 @@ public final class Tree {
      *
      * @param places members there is room for, 1 or more
      * @param run nodes of the run of each, 1 or more
-     * @param hubAt first of the two nodes of the hub they touch
      * @return the bank, whose J parts the system writes
      */
-    public Bank addBank(int places, int run, int hubAt) {
-        Bank bank = new Bank(size, places, run, hubAt);
+    public Bank addBank(int places, int run) {
+        Bank bank = new Bank(size, places, run, hangsAt);
         size += bank.size();
         bankList.add(bank);
         banks = bankList.toArray(new Bank[0]);
@@ -79,7 +88,7 @@ public final class Tree {
     /**
      * Returns the number of nodes of the hub.
      *
-     * @return at least 1
+     * @return at least 2
      */
     public int hub() {
         return hub;
@@ -102,7 +111,7 @@ public final class Tree {
         }
         for (Branch branch : branches) {
             if (branch.active()) {
-                branch.factor(shift, hubLu);
+                branch.factor(shift, hubLu, hub);
             }
         }
         for (Bank bank : banks) {

@@ -35,7 +35,7 @@ class WateredFacesTest {
 
     private final SplittableRandom random = new SplittableRandom(17);
     private final Tree tree = new Tree(2);
-    private final AirState air = new AirState(P);
+    private final AirState air = new AirState(P, AirState.ENTHALPY);
     private final Outside outside = new Outside();
     private final double[] flows = new double[20];
     private double[] y = new double[0];

@@ -18,7 +18,7 @@ public final class DenseJacobian {
         }
         for (Branch branch : tree.branches()) {
             if (branch.active()) {
-                write(branch, hub, j);
+                write(branch, j);
             }
         }
         for (Bank bank : tree.banks()) {
@@ -29,7 +29,6 @@ public final class DenseJacobian {
         return j;
     }
 
-    /** A bank that hangs on the first two nodes of the hub. */
     private static void write(Bank bank, int i, double[][] j) {
         int p = bank.places;
         for (int k = 0; k < bank.run; k++) {
@@ -50,13 +49,13 @@ public final class DenseJacobian {
         for (int r = 0; r < Bank.TOUCH; r++) {
             for (int h = 0; h < Bank.TOUCH; h++) {
                 int node = bank.at(bank.run + 2 + r, i);
-                j[node][h] = bank.byHub[(r * Bank.TOUCH + h) * p + i];
-                j[h][node] = bank.onHub[(h * Bank.TOUCH + r) * p + i];
+                j[node][bank.hubAt + h] = bank.byHub[(r * Bank.TOUCH + h) * p + i];
+                j[bank.hubAt + h][node] = bank.onHub[(h * Bank.TOUCH + r) * p + i];
             }
         }
     }
 
-    private static void write(Branch branch, int hub, double[][] j) {
+    private static void write(Branch branch, double[][] j) {
         for (int i = 0; i < branch.run; i++) {
             int at = branch.start + i;
             j[at][at] = branch.self[i];
@@ -71,9 +70,9 @@ public final class DenseJacobian {
         }
         for (int r = 0; r < branch.block; r++) {
             System.arraycopy(branch.inner, r * branch.block, j[b + r], b, branch.block);
-            for (int h = 0; h < hub; h++) {
-                j[b + r][h] = branch.byHub[r * hub + h];
-                j[h][b + r] = branch.onHub[h * branch.block + r];
+            for (int h = 0; h < Branch.TOUCH; h++) {
+                j[b + r][branch.hubAt + h] = branch.byHub[r * Branch.TOUCH + h];
+                j[branch.hubAt + h][b + r] = branch.onHub[h * branch.block + r];
             }
         }
     }

@@ -14,17 +14,27 @@ class TreeTest {
 
     @Test
     void solvesAsADenseSolverDoes() {
+        solves(2);
+    }
+
+    @Test
+    void solvesWhereBranchesHangOnOtherNodesOfALargerHub() {
+        solves(4);
+    }
+
+    private static void solves(int hub) {
         SplittableRandom random = new SplittableRandom(20260301);
-        Tree tree = new Tree(2);
+        Tree tree = new Tree(hub);
         Branch wall = tree.addBranch(6, 2);
+        tree.hangAt(hub - 2);
         Branch stub = tree.addBranch(0, 1);
         Branch lot = tree.addBranch(4, 4);
-        Bank bank = tree.addBank(5, 3, 0);
+        Bank bank = tree.addBank(5, 3);
         bank.count(4);
         double[][] j = new double[tree.size()][tree.size()];
-        for (int r = 0; r < 2; r++) {
-            for (int c = 0; c < 2; c++) {
-                j[r][c] = tree.hubByHub[r * 2 + c] = random.nextDouble(-1, 1);
+        for (int r = 0; r < hub; r++) {
+            for (int c = 0; c < hub; c++) {
+                j[r][c] = tree.hubByHub[r * hub + c] = random.nextDouble(-1, 1);
             }
         }
         for (Branch branch : new Branch[] {wall, stub, lot}) {
@@ -97,8 +107,9 @@ class TreeTest {
                 j[b + r][b + c] = branch.inner[r * branch.block + c] = random.nextDouble(-1, 1);
             }
             for (int h = 0; h < 2; h++) {
-                j[b + r][h] = branch.byHub[r * 2 + h] = random.nextDouble(-1, 1);
-                j[h][b + r] = branch.onHub[h * branch.block + r] = random.nextDouble(-1, 1);
+                j[b + r][branch.hubAt + h] = branch.byHub[r * 2 + h] = random.nextDouble(-1, 1);
+                j[branch.hubAt + h][b + r] =
+                        branch.onHub[h * branch.block + r] = random.nextDouble(-1, 1);
             }
         }
     }
