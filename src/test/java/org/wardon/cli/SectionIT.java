@@ -56,7 +56,7 @@ class SectionIT {
                 section,
                 "",
                 ("chamber at hours across widthM heightM faces settingC outdoorC oneAirC meanC"
-                                + " airMeanC warmest coldest spreadK stack spaces leftOpenPct field"
+                                + " airMeanC warmest coldest spreadK airSpreadK stack spaces leftOpenPct field"
                                 + " said warnings")
                         .split(" "));
         JsonNames.check(section, "faces[]", "side", "face", "innerC");

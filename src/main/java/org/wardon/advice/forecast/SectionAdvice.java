@@ -60,32 +60,7 @@ public final class SectionAdvice {
      * @throws org.wardon.errors.RunStopped where the chamber meets a state that cannot be
      */
     public SectionAnswer ask(StorePlan plan, Question asked) {
-        List<Fault> faults = new ArrayList<>();
-        Asked.chamber(plan, asked.chamber(), faults);
-        asked.across()
-                .ifPresent(
-                        way ->
-                                Asked.known(
-                                        "--across",
-                                        way,
-                                        ways(),
-                                        words.text("section.way-of-cutting"),
-                                        faults));
-        Optional<Double> endS = asked.at().flatMap(at -> Asked.hourEnd(plan, at, faults));
-        if (asked.hours() < 1 || asked.hours() > MOST_HOURS) {
-            faults.add(
-                    new Fault(
-                            "--hours",
-                            "",
-                            words.text("section.hours-out").replace("{0}", "" + asked.hours()),
-                            words.text("section.hours-in").replace("{0}", "" + MOST_HOURS)));
-        }
-        if (faults.isEmpty()) {
-            stirred(plan, asked, faults);
-        }
-        if (!faults.isEmpty()) {
-            throw new BadInput(faults);
-        }
+        Optional<Double> endS = checked(plan, asked);
         StoreModel model = forecast.prepare(plan).model();
         ChamberPlan chamber = model.plan().getChamber(asked.chamber());
         StillChamber still =
@@ -97,6 +72,27 @@ public final class SectionAdvice {
                 .answer(still.at(untilS, asked.hours(), cut));
     }
 
+    /** Refuses what cannot be asked; returns the end of the hours where it was given, s. */
+    private Optional<Double> checked(StorePlan plan, Question asked) {
+        List<Fault> faults = new ArrayList<>();
+        Asked.chamber(plan, asked.chamber(), faults);
+        String way = words.text("section.way-of-cutting");
+        asked.across().ifPresent(a -> Asked.known("--across", a, ways(), way, faults));
+        Optional<Double> endS = asked.at().flatMap(at -> Asked.hourEnd(plan, at, faults));
+        if (asked.hours() < 1 || asked.hours() > MOST_HOURS) {
+            String out = words.text("section.hours-out").replace("{0}", "" + asked.hours());
+            String in = words.text("section.hours-in").replace("{0}", "" + MOST_HOURS);
+            faults.add(new Fault("--hours", "", out, in));
+        }
+        if (faults.isEmpty()) {
+            stirred(plan, asked, faults);
+        }
+        if (!faults.isEmpty()) {
+            throw new BadInput(faults);
+        }
+        return endS;
+    }
+
     private static List<String> ways() {
         return Arrays.stream(Cut.values()).map(SectionFigures::word).toList();
     }
@@ -106,28 +102,23 @@ public final class SectionAdvice {
     }
 
     private void stirred(StorePlan plan, Question asked, List<Fault> faults) {
+        List<String> still =
+                plan.chambers().stream()
+                        .filter(chamber -> StillChamber.stirredBy(chamber).isEmpty())
+                        .map(ChamberPlan::id)
+                        .toList();
+        String others = still.isEmpty() ? words.text("section.none") : String.join(", ", still);
         StillChamber.stirredBy(plan.getChamber(asked.chamber()))
+                .map(by -> words.text("section.stirred").replace("{1}", by))
                 .ifPresent(
-                        by -> {
-                            List<String> still =
-                                    plan.chambers().stream()
-                                            .filter(c -> StillChamber.stirredBy(c).isEmpty())
-                                            .map(ChamberPlan::id)
-                                            .toList();
-                            faults.add(
-                                    new Fault(
-                                            "--chamber",
-                                            "",
-                                            words.text("section.stirred")
-                                                    .replace("{0}", asked.chamber())
-                                                    .replace("{1}", by),
-                                            words.text("section.ask-instead")
-                                                    .replace("{0}", asked.chamber())
-                                                    .replace(
-                                                            "{1}",
-                                                            still.isEmpty()
-                                                                    ? words.text("section.none")
-                                                                    : String.join(", ", still))));
-                        });
+                        told ->
+                                faults.add(
+                                        new Fault(
+                                                "--chamber",
+                                                "",
+                                                told.replace("{0}", asked.chamber()),
+                                                words.text("section.ask-instead")
+                                                        .replace("{0}", asked.chamber())
+                                                        .replace("{1}", others))));
     }
 }

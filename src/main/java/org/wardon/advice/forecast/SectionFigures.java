@@ -67,6 +67,7 @@ final class SectionFigures {
                 place(places, field.warmest()),
                 place(places, field.coldest()),
                 section.spreadK(),
+                section.airSpreadK(),
                 stack(seen),
                 section.spaces().stream().map(SectionFigures::space).toList(),
                 leftOpenPct(field),

@@ -100,28 +100,35 @@ final class StillPlaces {
         return Argument.of(section.warmestInStack().orElseThrow().temperatureC(), "C");
     }
 
-    /** What is told where the places are further apart than the band is wide. */
+    /**
+     * What is told where places of the air are further apart than the band is wide. How warm the
+     * middle of a load becomes hangs on how it is stacked, which is not known here.
+     */
     Optional<Caution> wide() {
         double bandK = 2 * chamber.setting().bandK();
-        return section.spreadK() <= bandK
+        Level level = seen.lots().isEmpty() ? Level.NOTE : Level.CAUTION;
+        return section.airSpreadK() <= bandK
                 ? Optional.empty()
-                : Optional.of(
-                        new Caution(
-                                seen.lots().isEmpty() ? Level.NOTE : Level.CAUTION,
-                                Reason.about(
-                                        "still-air-spread",
-                                        chamber.id(),
-                                        OWN_RULE,
-                                        Argument.of(section.spreadK(), "K"),
-                                        Argument.of(bandK, "K"),
-                                        Argument.text(at()),
-                                        Argument.of(warm.temperatureC(), "C"),
-                                        height(warm),
-                                        beside(warm),
-                                        Argument.of(cold.temperatureC(), "C"),
-                                        height(cold),
-                                        beside(cold),
-                                        hours())));
+                : Optional.of(new Caution(level, apart(bandK)));
+    }
+
+    private Reason apart(double bandK) {
+        Spot warmAir = section.warmestInAir();
+        Spot coldAir = section.coldestInAir();
+        return Reason.about(
+                "still-air-spread",
+                chamber.id(),
+                OWN_RULE,
+                Argument.of(section.airSpreadK(), "K"),
+                Argument.of(bandK, "K"),
+                Argument.text(at()),
+                Argument.of(warmAir.temperatureC(), "C"),
+                height(warmAir),
+                beside(warmAir),
+                Argument.of(coldAir.temperatureC(), "C"),
+                height(coldAir),
+                beside(coldAir),
+                hours());
     }
 
     /** All there is to beware of. */
@@ -183,7 +190,7 @@ final class StillPlaces {
     }
 
     boolean inStack(Spot place) {
-        return section.outline().map(outline -> outline.holds(place)).orElse(false);
+        return section.inStack(place);
     }
 
     /** A place, to be said in a line of its own. */

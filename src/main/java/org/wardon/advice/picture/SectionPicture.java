@@ -116,21 +116,28 @@ public final class SectionPicture {
 
     private void cells() {
         SectionAnswer.Field field = answer.field();
-        double wide = ACROSS / field.columns();
-        double high = up / field.rows();
         svg.add("<g shape-rendering=\"crispEdges\">");
         for (int row = 0; row < field.rows(); row++) {
-            for (int column = 0; column < field.columns(); column++) {
-                svg.add(
-                        "<rect x=\"%s\" y=\"%s\" width=\"%s\" height=\"%s\" fill=\"%s\"/>",
-                        LEFT + column * wide,
-                        TOP + row * high,
-                        wide + 0.5,
-                        high + 0.5,
-                        Shades.of(share(field.temperatureC().get(row).get(column))));
+            List<String> shades =
+                    field.temperatureC().get(row).stream().map(c -> Shades.of(share(c))).toList();
+            int from = 0;
+            for (int column = 1; column <= field.columns(); column++) {
+                if (column == field.columns() || !shades.get(column).equals(shades.get(from))) {
+                    run(row, from, column, shades.get(from));
+                    from = column;
+                }
             }
         }
         svg.add("</g>");
+    }
+
+    /** Cells of one row and one colour. */
+    private void run(int row, int from, int to, String shade) {
+        double wide = ACROSS / answer.field().columns();
+        double high = up / answer.field().rows();
+        svg.add(
+                "<rect x=\"%s\" y=\"%s\" width=\"%s\" height=\"%s\" fill=\"%s\"/>",
+                LEFT + from * wide, TOP + row * high, (to - from) * wide + 0.5, high + 0.5, shade);
     }
 
     private void lines() {

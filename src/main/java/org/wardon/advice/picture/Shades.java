@@ -8,11 +8,15 @@ final class Shades {
         {46, 96, 140}, {131, 172, 196}, {238, 236, 225}, {224, 166, 112}, {176, 82, 48}
     };
 
+    /** No eye tells more steps apart; neighbours alike are drawn as one. */
+    private static final int STEPS = 60;
+
     private Shades() {}
 
     /** The colour of a share of the way from cold, 0, to warm, 1. */
     static String of(double share) {
-        double place = Math.min(1, Math.max(0, share)) * (STOPS.length - 1);
+        double step = Math.round(STEPS * Math.min(1, Math.max(0, share)));
+        double place = step / STEPS * (STOPS.length - 1);
         int low = Math.min((int) place, STOPS.length - 2);
         double part = place - low;
         int[] mixed = new int[3];

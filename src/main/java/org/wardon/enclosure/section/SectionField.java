@@ -4,6 +4,7 @@ import java.util.ArrayList;
 import java.util.Arrays;
 import java.util.Comparator;
 import java.util.List;
+import java.util.function.Predicate;
 import org.wardon.enclosure.section.Section.Span;
 
 /** Temperatures of a section at rest, and the heat that goes through it. */
@@ -167,9 +168,7 @@ public final class SectionField {
      * @return the place
      */
     public Spot warmest() {
-        return spots(section.columns(), section.rows(), true).stream()
-                .max(Comparator.comparingDouble(Spot::temperatureC))
-                .orElseThrow();
+        return warmest(place -> true);
     }
 
     /**
@@ -178,7 +177,33 @@ public final class SectionField {
      * @return the place
      */
     public Spot coldest() {
+        return coldest(place -> true);
+    }
+
+    /**
+     * Returns the warmest of some places, the inner side of the films included.
+     *
+     * @param some which
+     * @return the place
+     * @throws java.util.NoSuchElementException where there is none such
+     */
+    public Spot warmest(Predicate<Spot> some) {
         return spots(section.columns(), section.rows(), true).stream()
+                .filter(some)
+                .max(Comparator.comparingDouble(Spot::temperatureC))
+                .orElseThrow();
+    }
+
+    /**
+     * Returns the coldest of some places, the inner side of the films included.
+     *
+     * @param some which
+     * @return the place
+     * @throws java.util.NoSuchElementException where there is none such
+     */
+    public Spot coldest(Predicate<Spot> some) {
+        return spots(section.columns(), section.rows(), true).stream()
+                .filter(some)
                 .min(Comparator.comparingDouble(Spot::temperatureC))
                 .orElseThrow();
     }

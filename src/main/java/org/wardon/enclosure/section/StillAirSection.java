@@ -73,6 +73,43 @@ public record StillAirSection(
     }
 
     /**
+     * Returns whether a place lies in the stack.
+     *
+     * @param place the place
+     * @return false in the air
+     */
+    public boolean inStack(Spot place) {
+        return outline().map(outline -> outline.holds(place)).orElse(false);
+    }
+
+    /**
+     * Returns the warmest place of the air.
+     *
+     * @return the place
+     */
+    public Spot warmestInAir() {
+        return field.warmest(place -> !inStack(place));
+    }
+
+    /**
+     * Returns the coldest place of the air.
+     *
+     * @return the place
+     */
+    public Spot coldestInAir() {
+        return field.coldest(place -> !inStack(place));
+    }
+
+    /**
+     * Returns how far warm and cold air are apart.
+     *
+     * @return K
+     */
+    public double airSpreadK() {
+        return warmestInAir().temperatureC() - coldestInAir().temperatureC();
+    }
+
+    /**
      * Returns the warmest place in the stack.
      *
      * @return empty without a load

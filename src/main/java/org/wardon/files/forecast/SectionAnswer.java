@@ -23,6 +23,7 @@ import java.util.Optional;
  * @param warmest warmest place
  * @param coldest coldest place
  * @param spreadK between them, K
+ * @param airSpreadK between the warmest and the coldest place of the air, K
  * @param stack the load as it is taken; absent without one
  * @param spaces how the air of each space carries heat
  * @param leftOpenPct what the balance of the section leaves open, percent of the heat through it
@@ -46,6 +47,7 @@ public record SectionAnswer(
         Place warmest,
         Place coldest,
         double spreadK,
+        double airSpreadK,
         Optional<OfStack> stack,
         List<OfSpace> spaces,
         double leftOpenPct,

@@ -125,7 +125,8 @@ class SectionAdviceTest {
         assertTrue(answer.coldest().xM() < 0.02 || answer.coldest().xM() > 0.98);
         assertTrue(answer.coldest().where().matches("in the air, .*, by the (south|north) wall"));
         assertTrue(answer.warmest().inStack());
-        assertTrue(answer.spreadK() > 2, answer.spreadK() + " K");
+        assertTrue(answer.airSpreadK() > 2, answer.airSpreadK() + " K");
+        assertTrue(answer.spreadK() >= answer.airSpreadK());
         assertTrue(answer.leftOpenPct() < 1e-6, answer.leftOpenPct() + " %");
         assertEquals(List.of("BRO1"), answer.stack().orElseThrow().lots());
         assertTrue(warns(answer, "still-air-spread", "chest"), answer.warnings().toString());
@@ -294,8 +295,17 @@ class SectionAdviceTest {
             assertTrue(told.toString().contains(part), part + " in " + told);
         }
         assertFalse(svg.contains("NaN") || svg.contains("{0}"), svg);
-        int cells = answer.field().columns() * answer.field().rows();
-        assertTrue(drawn.getElementsByTagName("rect").getLength() > cells);
+        // Every row of cells is drawn to its end.
+        double wide = 0;
+        NodeList cells = drawn.getElementsByTagName("g").item(0).getChildNodes();
+        for (int i = 0; i < cells.getLength(); i++) {
+            if (cells.item(i) instanceof org.w3c.dom.Element cell) {
+                wide += Double.parseDouble(cell.getAttribute("width")) - 0.5;
+            }
+        }
+        // Each width is written to two decimals.
+        double rounding = 0.005 * cells.getLength();
+        assertEquals(answer.field().rows() * (360 - 2 * 66), wide, rounding);
         Words fahrenheit = Words.english(new Units(true, false));
         SectionAnswer asked =
                 new SectionAdvice(book, fahrenheit)
