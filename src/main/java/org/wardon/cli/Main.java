@@ -41,6 +41,7 @@ public final class Main implements Runnable {
                     Look.class,
                     Why.class,
                     Section.class,
+                    Size.class,
                     SchemaVerb.class,
                     Demo.class);
 

@@ -19,7 +19,7 @@ class HelpIT {
         String help = WardonJar.run("--help").good().out();
         for (String verb :
                 new String[] {
-                    "advise", "keep", "share", "look", "why", "section", "schema", "demo"
+                    "advise", "keep", "share", "look", "why", "section", "size", "schema", "demo"
                 }) {
             assertTrue(help.contains("\n  " + verb + " "), help);
         }
@@ -28,7 +28,10 @@ class HelpIT {
     }
 
     @ParameterizedTest
-    @ValueSource(strings = {"advise", "keep", "share", "look", "why", "section", "schema", "demo"})
+    @ValueSource(
+            strings = {
+                "advise", "keep", "share", "look", "why", "section", "size", "schema", "demo"
+            })
     void everyVerbHasHelp(String verb) {
         String help = WardonJar.run(verb, "--help").good().out();
         assertTrue(help.startsWith("Usage: wardon " + verb + " "), help);

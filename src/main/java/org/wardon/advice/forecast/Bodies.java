@@ -30,6 +30,11 @@ final class Bodies {
                                 .value());
     }
 
+    /** The body in the middle of its ranges. */
+    Lot middle() {
+        return range.at(Shares.MIDDLE).value();
+    }
+
     /** What the body rests on. */
     List<Reason> restsOn() {
         return range.at(Shares.MIDDLE).restsOn();

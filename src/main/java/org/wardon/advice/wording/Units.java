@@ -95,6 +95,7 @@ public record Units(boolean fahrenheit, boolean pounds) {
             case "h" -> brief(value) + " h";
             case "pct" -> brief(value) + " %";
             case "W" -> value >= 1000 ? format("%.1f kW", value / 1000) : format("%.0f W", value);
+            case "kWh" -> brief(value) + " kWh";
             case "ppm" -> format(value != 0 && value < 10 ? "%.2f ppm" : "%,.0f ppm", value);
             case "1" -> format(value == Math.rint(value) ? "%.0f" : "%.2f", value);
             default -> throw new IllegalArgumentException("no words for the unit '" + unit + "'");

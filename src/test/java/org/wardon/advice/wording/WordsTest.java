@@ -60,6 +60,7 @@ class WordsTest {
                     "within",
                     "height",
                     "beside",
+                    "size",
                     "heat-term",
                     "water-term");
     private static final double DAY_S = 86_400;
