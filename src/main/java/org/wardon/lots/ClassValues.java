@@ -1,9 +1,11 @@
 package org.wardon.lots;
 
+import java.util.ArrayList;
 import java.util.Collection;
 import java.util.List;
 import java.util.Map;
 import java.util.Optional;
+import java.util.Set;
 import java.util.TreeMap;
 import java.util.concurrent.ConcurrentHashMap;
 import java.util.function.Function;
@@ -22,8 +24,9 @@ import org.wardon.produce.Ripeness;
  *
  * <p>Each figure is the median over those that have it of their own: first over commodities of the
  * same plant part and scientific name, else over the plant part, else over a kindred part (leafy
- * vegetables for herbs), else over all commodities. All of it is (assumption): that a crop is like
- * its kin.
+ * vegetables for herbs), else over all commodities; for water, roots with a skin of cork are kin of
+ * sweet potato and potato (common practice, no source). All of it is (assumption): that a crop is
+ * like its kin.
  */
 public final class ClassValues {
     /** Source named where a class value stands in. */
@@ -31,6 +34,12 @@ public final class ClassValues {
 
     private static final String ALL = "all";
     private static final Map<String, String> KINDRED = Map.of("herb", "leafy");
+
+    /** Roots with a skin of cork, which loses water as a potato does and not as a carrot. */
+    private static final Set<String> CORKED = Set.of("cassava", "ginger", "turmeric", "jicama");
+
+    private static final Set<String> CORKED_AND_MEASURED = Set.of("sweet-potato", "potato-table");
+    private static final String CORKED_NAME = "roots and tubers with a skin of cork";
     private static final double[] RESPIRATION_C = {0, 5, 10, 15, 20, 25, 30};
 
     /** Commodities that share something, and its name. */
@@ -72,20 +81,25 @@ public final class ClassValues {
     /** Specific heat, conductivity and density. */
     Figure<ItemHeat> heat(Commodity commodity) {
         return heats.computeIfAbsent(
-                kind(commodity), kind -> first(commodity, ClassValues::medianHeat, "composition"));
+                kind(commodity),
+                kind -> first(groups(commodity), ClassValues::medianHeat, "composition"));
     }
 
     /** Shape and size. */
     Figure<ItemSize> size(Commodity commodity) {
         return sizes.computeIfAbsent(
-                kind(commodity), kind -> first(commodity, ClassValues::medianSize, "size"));
+                kind(commodity), kind -> first(groups(commodity), ClassValues::medianSize, "size"));
     }
 
     /** Rates by temperature in °C, W/t, median × or ÷ the class spread. */
     Figure<Map<Double, Fact>> respiration(Commodity commodity) {
         return respirations.computeIfAbsent(
                 kind(commodity),
-                kind -> first(commodity, ClassValues::medianRespiration, "respiration rate"));
+                kind ->
+                        first(
+                                groups(commodity),
+                                ClassValues::medianRespiration,
+                                "respiration rate"));
     }
 
     /** Tissue to package air, kg/(kg s Pa). */
@@ -94,9 +108,17 @@ public final class ClassValues {
                 kind(commodity),
                 kind ->
                         first(
-                                commodity,
+                                watery(commodity),
                                 ClassValues::medianTranspiration,
                                 "transpiration coefficient"));
+    }
+
+    private List<Group> watery(Commodity commodity) {
+        List<Group> groups = new ArrayList<>(groups(commodity));
+        if (CORKED.contains(commodity.id())) {
+            groups.add(0, group(CORKED_NAME, other -> CORKED_AND_MEASURED.contains(other.id())));
+        }
+        return groups;
     }
 
     /** Commodities of one kind have the same kin, and so the same class values. */
@@ -111,8 +133,8 @@ public final class ClassValues {
 
     /** Takes the figure from the first group that has it. */
     private <T> Figure<T> first(
-            Commodity commodity, Function<Collection<Commodity>, Optional<T>> figure, String what) {
-        for (Group group : groups(commodity)) {
+            List<Group> groups, Function<Collection<Commodity>, Optional<T>> figure, String what) {
+        for (Group group : groups) {
             Optional<T> found = figure.apply(group.members());
             if (found.isPresent()) {
                 return new Figure<>(found.get(), group.name());
