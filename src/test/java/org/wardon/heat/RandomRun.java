@@ -191,7 +191,7 @@ final class RandomRun {
         return faces;
     }
 
-    static double looks(FaceName name) {
+    private static double looks(FaceName name) {
         return switch (name) {
             case EAST -> 90;
             case SOUTH -> 180;

@@ -8,7 +8,6 @@ import java.util.Set;
 import org.wardon.cooling.Cooler;
 import org.wardon.cooling.WaterFilm;
 import org.wardon.cooling.WettedWall;
-import org.wardon.enclosure.Beyond;
 import org.wardon.enclosure.Enclosure;
 import org.wardon.enclosure.Face;
 import org.wardon.enclosure.FaceName;
@@ -16,6 +15,9 @@ import org.wardon.lots.Lot;
 
 /** Runs that must come to the same as another, or to nearly the same. */
 final class RunVariants {
+    /** Twelve watts for a day: of less a share says nothing. */
+    private static final double LEAST_J = 1e6;
+
     private RunVariants() {}
 
     /** The lots named in another order. */
@@ -25,7 +27,7 @@ final class RunVariants {
         return run.withStays(stays);
     }
 
-    /** North and south walls changed for each other, the water on them too. */
+    /** North and south walls changed for each other, and the side of the sun with them. */
     static ChamberRun mirrored(ChamberRun run) {
         List<Face> faces = run.enclosure().faces().stream().map(RunVariants::mirrored).toList();
         Enclosure was = run.enclosure();
@@ -44,12 +46,6 @@ final class RunVariants {
                 .withCoolers(run.coolers().stream().map(RunVariants::mirrored).toList());
     }
 
-    /** Whether no sun tells north from south. */
-    static boolean canBeMirrored(ChamberRun run) {
-        return run.enclosure().faces().stream()
-                .noneMatch(face -> face.beyond() instanceof Beyond.Outdoors);
-    }
-
     private static FaceName mirrored(FaceName name) {
         return switch (name) {
             case NORTH -> FaceName.SOUTH;
@@ -59,11 +55,10 @@ final class RunVariants {
     }
 
     private static Face mirrored(Face face) {
-        FaceName other = mirrored(face.name());
         return new Face(
-                other,
+                mirrored(face.name()),
                 face.beyond(),
-                RandomRun.looks(other),
+                face.azimuthDeg(),
                 face.solarAbsorptance(),
                 face.layers());
     }
@@ -149,7 +144,7 @@ final class RunVariants {
                     mass = Math.max(mass, Math.abs(1 - kg * other.massKg(i) / lot.massKg(i)));
                 }
             }
-            double through = Math.max(a.heat().throughput(), 1e4);
+            double through = Math.max(a.heat().throughput(), LEAST_J);
             double heat = Math.abs(a.heat().removed() - b.heat().removed()) / through;
             return new Apart(airK, lotK, mass, heat);
         }
