@@ -14,7 +14,11 @@ import org.openjdk.jmh.annotations.Warmup;
 import org.wardon.cooling.Control;
 import org.wardon.errors.Progress;
 
-/** Time of whole runs; for a person to run, not a check. */
+/**
+ * Time of whole runs; for a person to run, not a check. A year of 12 lots: {@code -p days=365 -p
+ * lots=12 -p way=modulating}. Two threads ({@code -t 2}) show what a second core brings to
+ * sampling.
+ */
 @State(Scope.Benchmark)
 @BenchmarkMode(Mode.SampleTime)
 @OutputTimeUnit(TimeUnit.MILLISECONDS)
@@ -23,36 +27,47 @@ import org.wardon.errors.Progress;
 @Fork(1)
 public class HeatBenchmark {
     /** Lots in the chamber. */
-    @Param({"1", "12", "100"})
+    @Param({"1", "12", "100", "1000"})
     public int lots;
 
-    /** One of modulating, on-off, averaged. */
-    @Param({"modulating", "on-off", "averaged"})
+    /** Length of the run, days. */
+    @Param("30")
+    public int days;
+
+    /** One of modulating, on-off, averaged, sketched. */
+    @Param({"modulating", "on-off", "averaged", "sketched"})
     public String way;
 
+    private ChamberRun run() {
+        Control control = way.equals("on-off") ? Control.ON_OFF : Control.MODULATING;
+        ChamberRun run = Chambers.full(control, lots, days);
+        return switch (way) {
+            case "averaged" ->
+                    run.withDoorMode(DoorMode.AVERAGED).withControlMode(ControlMode.MODULATING);
+            case "sketched" ->
+                    run.withDoorMode(DoorMode.SKETCHED).withControlMode(ControlMode.MODULATING);
+            default -> run;
+        };
+    }
+
     /**
-     * Runs a chamber for thirty days.
+     * Runs a chamber.
      *
      * @return what happened
      */
     @Benchmark
-    public Course thirtyDays() {
-        Control control = way.equals("on-off") ? Control.ON_OFF : Control.MODULATING;
-        ChamberRun run = Chambers.full(control, lots, 30);
-        if (way.equals("averaged")) {
-            run = run.withDoorMode(DoorMode.AVERAGED).withControlMode(ControlMode.MODULATING);
-        }
-        return HeatModel.run(run, Progress.SILENT);
+    public Course wholeRun() {
+        return HeatModel.run(run(), Progress.SILENT);
     }
 
     /**
-     * Runs a lot for thirty days in outdoor air.
+     * Runs a lot in outdoor air.
      *
      * @return what it went through
      */
     @Benchmark
     public LotCourse withoutTheChamber() {
-        ChamberRun run = Chambers.full(Control.MODULATING, lots, 30);
+        ChamberRun run = Chambers.full(Control.MODULATING, lots, days);
         AirSeries air = AirSeries.outdoors(run.weather());
         return HeatModel.runInGivenAir(
                 run.stays().get(0), air, run.site(), Factors.PLAIN, run.durationS());

@@ -5,13 +5,10 @@ import static org.junit.jupiter.api.Assertions.assertTrue;
 
 import java.util.ArrayList;
 import java.util.List;
-import org.apache.commons.math3.ode.FirstOrderDifferentialEquations;
-import org.apache.commons.math3.ode.nonstiff.DormandPrince853Integrator;
 import org.junit.jupiter.api.BeforeAll;
 import org.junit.jupiter.api.Test;
 import org.wardon.cooling.Control;
 import org.wardon.errors.Progress;
-import org.wardon.heat.network.ChamberNetwork;
 
 /**
  * A full chamber (12 lots, sun, door pulses, people, modulating compressor) against an explicit
@@ -26,81 +23,17 @@ class ReferenceIntegratorTest {
     /** Integrates edge by edge; keeps surface and core of each lot and the mean air, hourly. */
     @BeforeAll
     static void integrateReference() {
-        ChamberNetwork network = RunCompiler.network(RUN, true);
-        double[] y = network.start(RunCompiler.startC(RUN), RunCompiler.startRatio(RUN, network));
-        List<Edge> edges = Schedule.of(RUN);
-        double t = 0;
-        int next = 0;
-        double[] carried = new double[y.length + 1];
-        for (int hour = 0; hour < 24 * DAYS; hour++) {
-            network.hour(hour);
-            double end = (hour + 1) * 3600.0;
-            double airBefore = carried[y.length];
-            while (t < end) {
-                while (next < edges.size() && edges.get(next).atS() <= t) {
-                    pass(edges.get(next++), network, y);
-                }
-                double edge = next < edges.size() ? edges.get(next).atS() : end;
-                double until = Math.min(edge, end);
-                System.arraycopy(y, 0, carried, 0, y.length);
-                explicit(network, t, carried, until);
-                System.arraycopy(carried, 0, y, 0, y.length);
-                t = until;
-            }
-            AIR_MEAN.add((carried[y.length] - airBefore) / 3600);
-            double[] lots = new double[2 * RUN.stays().size()];
-            for (int i = 0; i < RUN.stays().size(); i++) {
-                lots[2 * i] = network.lot(i).surfaceC(y);
-                lots[2 * i + 1] = network.lot(i).coreC(y);
-            }
-            REFERENCE.add(lots);
-        }
-    }
-
-    private static void pass(Edge edge, ChamberNetwork network, double[] y) {
-        switch (edge.kind()) {
-            case DOOR_OPENS -> network.door(1);
-            case DOOR_SHUTS -> network.door(0);
-            case LIGHTS_ON -> network.light(1);
-            case LIGHTS_OFF -> network.light(0);
-            case USE_STARTS -> network.people(2.0 / 12);
-            case USE_ENDS -> network.people(0);
-            case ARRIVES -> {
-                network.lot(edge.index())
-                        .arrive(RUN.stays().get(edge.index()).pulpC(), 0, network.ratio(y), y);
-                double free = network.freeM3();
-                var lot = RUN.stays().get(edge.index()).lot();
-                network.changeFreeVolume(free - 1.05 * lot.massKg() / lot.item().densityKgM3(), y);
-            }
-            default -> {}
-        }
-    }
-
-    private static void explicit(ChamberNetwork network, double t, double[] y, double until) {
-        double[] flows = new double[network.flows()];
-        int n = y.length - 1;
-        double[] state = new double[n];
-        double[] f = new double[n];
-        new DormandPrince853Integrator(1e-6, 600, 1e-7, 1e-9)
-                .integrate(
-                        new FirstOrderDifferentialEquations() {
-                            @Override
-                            public int getDimension() {
-                                return n + 1;
+        new ExplicitRun(RUN, true, new ExplicitRun.Tolerance(1e-7, 1e-9))
+                .go(
+                        (network, y, meanAirC) -> {
+                            AIR_MEAN.add(meanAirC);
+                            double[] lots = new double[2 * RUN.stays().size()];
+                            for (int i = 0; i < RUN.stays().size(); i++) {
+                                lots[2 * i] = network.lot(i).surfaceC(y);
+                                lots[2 * i + 1] = network.lot(i).coreC(y);
                             }
-
-                            @Override
-                            public void computeDerivatives(double at, double[] x, double[] out) {
-                                System.arraycopy(x, 0, state, 0, n);
-                                network.rates(at, state, f, flows);
-                                System.arraycopy(f, 0, out, 0, n);
-                                out[n] = network.airC(state);
-                            }
-                        },
-                        t,
-                        y,
-                        until,
-                        y);
+                            REFERENCE.add(lots);
+                        });
     }
 
     private static double worstLotK(Course course) {
