@@ -129,12 +129,20 @@ final class LifeTables {
         lines.add(row("part", deviations.partKJMol(), "kJ/mol", "sd of slopes between parts"));
         lines.add(row("crop", deviations.cropKJMol(), "kJ/mol", "sd of slopes between crops"));
         lines.add(row("variant", deviations.curveKJMol(), "kJ/mol", "sd between variants"));
+        lines.add(row("follows-breath", followsBreath(), "1", "slope of ageing a slope of breath"));
         lines.add(slope("slope-all", ""));
         for (String part :
                 new TreeSet<>(used.crops().stream().map(Crop::part).distinct().toList())) {
             lines.add(slope("slope-" + part, part));
         }
         return text(lines);
+    }
+
+    /** How much steeper a crop ages that breathes more steeply by one kJ/mol. */
+    private double followsBreath() {
+        Trial usual = new Trial("none", "none", "none", "", 0, false);
+        Trial steep = new Trial("none", "none", "none", "", 1, false);
+        return fits.pooled().slopeKJMol(steep) - fits.pooled().slopeKJMol(usual);
     }
 
     private static String row(String name, double value, String unit, String meaning) {
