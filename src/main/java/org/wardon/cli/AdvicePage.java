@@ -98,6 +98,7 @@ final class AdvicePage {
                         + units.temperature(chamber.airC().max())
                         + "; humidity "
                         + units.figure(chamber.humidityPct().mean(), "pct"));
+        chamber.doorEnd().ifPresent(this::doorEnd);
         line("pull-down", pullDown(chamber));
         line(
                 "heat",
@@ -200,6 +201,18 @@ final class AdvicePage {
                                         Argument.text(at.toString().replace("T", " at "))))
                 .map(reason -> ", though " + words.sentence(reason))
                 .orElse("");
+    }
+
+    private void doorEnd(ChamberForecast.DoorEnd end) {
+        line(
+                "door end",
+                units.temperature(end.airC().mean())
+                        + " on average, "
+                        + units.temperature(end.airC().min())
+                        + " to "
+                        + units.temperature(end.airC().max())
+                        + " by the hour; humidity "
+                        + units.figure(end.humidityPct().mean(), "pct"));
     }
 
     private void solar(ChamberForecast.Solar solar) {

@@ -2,9 +2,12 @@ package org.wardon.files;
 
 import java.time.LocalDate;
 import java.util.List;
+import java.util.Locale;
 import java.util.Optional;
+import java.util.OptionalDouble;
 import org.wardon.cooling.Cooler;
 import org.wardon.cooling.Setting;
+import org.wardon.enclosure.AirZones;
 import org.wardon.enclosure.Box;
 import org.wardon.enclosure.Enclosure;
 import org.wardon.enclosure.Face;
@@ -78,7 +81,30 @@ final class ChamberBinder {
                 inputs.numberElse(chamber, "freshAirM3PerHour", 0),
                 gains(chamber.at("gains")),
                 inputs.number(chamber, "structureCapacityJK", structure(box)),
-                chamber.at("films").text().equals(Optional.of("computed")));
+                chamber.at("films").text().equals(Optional.of("computed")),
+                chamber.has("airZones")
+                        ? Optional.of(zones(chamber.at("airZones")))
+                        : Optional.empty());
+    }
+
+    private AirZones zones(Part zones) {
+        String end = inputs.text(zones, "doorEnd", Defaults.DOOR_END, Defaults.ASSUMPTION);
+        double share = inputs.number(zones, "doorEndShare", Defaults.DOOR_END_SHARE);
+        OptionalDouble hourly = inputs.maybe(zones, "exchangeM3PerHour");
+        if (hourly.isEmpty()) {
+            inputs.note(
+                    zones,
+                    "exchangeM3PerHour",
+                    Defaults.ENDS_EXCHANGE,
+                    "",
+                    Defaults.COMMON_PRACTICE);
+        }
+        return new AirZones(
+                FaceName.valueOf(end.toUpperCase(Locale.ROOT)),
+                share,
+                hourly.isPresent()
+                        ? OptionalDouble.of(hourly.getAsDouble() / 3_600)
+                        : OptionalDouble.empty());
     }
 
     private static Default structure(Box box) {

@@ -19,6 +19,9 @@ final class ChamberRules {
     private static final List<String> FACES =
             List.of("roof", "floor", "north", "east", "south", "west");
 
+    /** Coolers that act on nothing but the room's air. */
+    private static final List<String> IN_ROOM = List.of("compressor", "ice-bank");
+
     private final Part plan;
     private final Lookups lookups;
     private final Faults faults;
@@ -49,6 +52,7 @@ final class ChamberRules {
             chamber.at("cooling").items().forEach(this::cooler);
             units(chamber.at("cooling"));
             new WaterRules(faults).check(chamber);
+            zones(chamber);
         }
     }
 
@@ -65,6 +69,25 @@ final class ChamberRules {
                     cooling.path(),
                     "makes " + Math.round(all) + " units in all",
                     "accepted: " + CoolerBinder.MOST_UNITS + " units at most");
+        }
+    }
+
+    /** Outdoor air blown through a chamber, and water on its faces, know no ends. */
+    private void zones(Part chamber) {
+        if (!chamber.has("airZones")) {
+            return;
+        }
+        for (Part cooler : chamber.at("cooling").items()) {
+            Optional<String> kind = cooler.at("kind").text();
+            if (kind.isPresent()
+                    && !IN_ROOM.contains(kind.get())
+                    && !faults.at(cooler.at("kind").path())) {
+                faults.add(
+                        chamber.at("airZones").path(),
+                        "stands beside " + cooler.path() + " of kind " + Json.quoted(kind.get()),
+                        "accepted: with coolers of kind " + String.join(", ", IN_ROOM) + " only");
+                return;
+            }
         }
     }
 

@@ -1,6 +1,7 @@
 package org.wardon.heat;
 
 import java.util.Optional;
+import org.wardon.enclosure.Enclosure;
 
 /**
  * How a lot comes to its place in a chamber, where that is, and how it leaves it.
@@ -21,7 +22,22 @@ public record Berth(Optional<String> from, Optional<String> to, Optional<LotStat
         /** In the middle; at the larger end, at the coil end of two alike. */
         MIDDLE,
         /** By the door; at the door end where the air is two. */
-        BY_DOOR
+        BY_DOOR;
+
+        /**
+         * Returns which end of a chamber it lies in.
+         *
+         * @param built the chamber
+         * @return true at the door end; false where the air is one
+         */
+        public boolean atDoorEnd(Enclosure built) {
+            return built.zones()
+                    .filter(
+                            zones ->
+                                    this == BY_DOOR
+                                            || (this == MIDDLE && zones.doorEndShare() > 0.5))
+                    .isPresent();
+        }
     }
 
     /** In and out by the door, in the room's air. */

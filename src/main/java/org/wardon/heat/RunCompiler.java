@@ -82,14 +82,11 @@ final class RunCompiler {
                 : run.enclosure();
     }
 
-    /** Numbers of the lots at the door end: those by the door, and the middle's where it is. */
+    /** Numbers of the lots at the door end. */
     private static Set<Integer> atDoorEnd(ChamberRun run) {
-        boolean middle =
-                run.enclosure().zones().filter(zones -> zones.doorEndShare() > 0.5).isPresent();
         Set<Integer> found = new HashSet<>();
         for (int i = 0; i < run.stays().size(); i++) {
-            Berth.Spot spot = run.stays().get(i).berth().spot();
-            if (spot == Berth.Spot.BY_DOOR || (middle && spot == Berth.Spot.MIDDLE)) {
+            if (run.stays().get(i).berth().spot().atDoorEnd(run.enclosure())) {
                 found.add(i);
             }
         }

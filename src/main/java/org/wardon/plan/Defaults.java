@@ -47,6 +47,16 @@ public final class Defaults {
     /** Uplift of the heat flow through all faces. */
     public static final Default THERMAL_BRIDGE_PCT = new Default(10, "%", COMMON_PRACTICE);
 
+    /** Share of a chamber's length that is its door end, where its air is two. */
+    public static final Default DOOR_END_SHARE = new Default(0.5, "", ASSUMPTION);
+
+    /** End wall of the door end. */
+    public static final String DOOR_END = "east";
+
+    /** What the ends of a chamber change where no exchange is given. */
+    public static final String ENDS_EXCHANGE =
+            "half of what fans move; at rest by density, as through an opening of the whole section";
+
     /** Conductivity of the foam core of a panel some years old. */
     public static final Default AGED_PANEL_CONDUCTIVITY =
             new Default(0.028, "W/(m K)", COMMON_PRACTICE);

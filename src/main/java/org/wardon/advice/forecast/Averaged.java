@@ -41,6 +41,7 @@ final class Averaged {
                 built.freshAirM3PerHour(),
                 more,
                 built.structureCapacityJK(),
-                built.computedFilms());
+                built.computedFilms(),
+                built.zones());
     }
 }

@@ -105,6 +105,7 @@ final class Cautions {
             CoolerCautions.of(cooler, chamber.setting(), chamber.id(), pressurePa)
                     .forEach(caution -> add(caution.level(), caution.reason()));
         }
+        DoorEnd.of(outcome, chamber).forEach(c -> add(c.level(), c.reason()));
         FaceMoisture.of(chamber, outcome).forEach(c -> add(c.level(), c.reason()));
         CoolersAtWork.of(outcome, chamber).forEach(c -> add(c.level(), c.reason()));
         chamber.power().solar().ifPresent(supply -> solar(chamber, supply));

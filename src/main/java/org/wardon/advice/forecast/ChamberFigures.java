@@ -62,7 +62,15 @@ final class ChamberFigures {
                 ethylenePpm(),
                 course.balanceErrorPct(),
                 course.coolers().stream().map(ChamberFigures::cooler).toList(),
-                course.solar().map(this::solar));
+                course.solar().map(this::solar),
+                chamber.enclosure().zones().map(zones -> doorEnd(hours)));
+    }
+
+    private static ChamberForecast.DoorEnd doorEnd(Hours hours) {
+        return new ChamberForecast.DoorEnd(
+                meanMinMax(hours, hours::doorEndC),
+                meanMinMax(hours, i -> StoreSeries.doorEndHumidityPct(hours, i)),
+                meanMinMax(hours, i -> hours.doorEndC(i) - hours.airC(i)));
     }
 
     private static OfCooler cooler(CoolerTotals did) {

@@ -1,6 +1,7 @@
 package org.wardon.advice.forecast;
 
 import java.util.OptionalDouble;
+import java.util.function.IntToDoubleFunction;
 import org.wardon.air.Timeline;
 import org.wardon.heat.Course;
 import org.wardon.heat.Hours;
@@ -23,9 +24,10 @@ record Cooling(
     /** Below this difference cooling times say nothing, K. */
     private static final double LEAST_K = 2;
 
-    static Cooling of(LotHistory history, ChamberPlan chamber, Course course) {
+    static Cooling of(LotHistory history, LotSheet sheet, ChamberPlan chamber, Course course) {
         double start = history.meanC(0);
-        double mark = markC(chamber, course);
+        IntToDoubleFunction airC = sheet.airC(chamber.enclosure(), course.hours());
+        double mark = markC(chamber, course, airC);
         if (start - mark < LEAST_K) {
             return new Cooling(start, mark, OptionalDouble.empty(), OptionalDouble.empty());
         }
@@ -41,20 +43,20 @@ record Cooling(
         return startC - markC >= LEAST_K;
     }
 
-    private static double markC(ChamberPlan chamber, Course course) {
+    private static double markC(ChamberPlan chamber, Course course, IntToDoubleFunction airC) {
         double setting = chamber.setting().temperatureC();
-        double own = lastDayC(course.hours());
+        double own = lastDayC(course.hours(), airC);
         boolean reaches =
                 !chamber.coolers().isEmpty() && own <= setting + chamber.setting().bandK() + 0.5;
         return reaches ? setting : own;
     }
 
-    private static double lastDayC(Hours hours) {
+    private static double lastDayC(Hours hours, IntToDoubleFunction airC) {
         double end = hours.atS(hours.size() - 1);
         double sum = 0;
         int n = 0;
         for (int i = hours.size() - 1; i >= 0 && hours.atS(i) > end - Timeline.DAY_S; i--) {
-            sum += hours.airC(i);
+            sum += airC.applyAsDouble(i);
             n++;
         }
         return sum / n;

@@ -67,7 +67,8 @@ final class Deliveries {
         List<Rise> rises = new ArrayList<>();
         for (Visit visit : visits) {
             LotHistory history = visit.within(outcome.history(visit.id()));
-            Cooling cooling = Cooling.of(history, chamber, outcome.course(chamber.id()));
+            Cooling cooling =
+                    Cooling.of(history, visit.sheet(), chamber, outcome.course(chamber.id()));
             if (cooling.wasWarm() && cooling.sevenEighthsHours().isEmpty()) {
                 continue;
             }

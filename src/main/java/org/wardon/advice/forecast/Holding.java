@@ -209,7 +209,7 @@ record Holding(
 
         private void judgeLot(Visit visit) {
             LotHistory history = visit.within(outcome.history(visit.id()));
-            Cooling cooling = Cooling.of(history, chamber, course);
+            Cooling cooling = Cooling.of(history, visit.sheet(), chamber, course);
             judgeCooling(visit, history, cooling);
             judgeSafety(visit, history, cooling);
         }

@@ -3,7 +3,11 @@ package org.wardon.advice.forecast;
 import java.util.ArrayList;
 import java.util.List;
 import java.util.Optional;
+import java.util.function.IntToDoubleFunction;
 import org.wardon.air.Timeline;
+import org.wardon.enclosure.Enclosure;
+import org.wardon.heat.Berth;
+import org.wardon.heat.Hours;
 import org.wardon.heat.Stay;
 import org.wardon.keeping.Draw;
 import org.wardon.keeping.KeepingModel;
@@ -113,6 +117,20 @@ record LotSheet(
                 plan.temperatureC(),
                 clock.freshUntilS(),
                 water);
+    }
+
+    /** Where in a chamber it stands, in each alike. */
+    Berth.Spot spot() {
+        return switch (plan.place()) {
+            case NEAR_COOLER -> Berth.Spot.NEAR_COOLER;
+            case MIDDLE -> Berth.Spot.MIDDLE;
+            case DOOR -> Berth.Spot.BY_DOOR;
+        };
+    }
+
+    /** Hourly means of the air it stands in, by row of a chamber's course, °C. */
+    IntToDoubleFunction airC(Enclosure built, Hours hours) {
+        return spot().atDoorEnd(built) ? hours::doorEndC : hours::airC;
     }
 
     /** What the body of the lot rests on. */

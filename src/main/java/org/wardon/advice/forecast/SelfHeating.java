@@ -2,7 +2,9 @@ package org.wardon.advice.forecast;
 
 import java.util.Comparator;
 import java.util.Optional;
+import java.util.function.IntToDoubleFunction;
 import org.wardon.air.Timeline;
+import org.wardon.enclosure.Enclosure;
 import org.wardon.heat.Hours;
 import org.wardon.keeping.Draw;
 import org.wardon.lots.Lot;
@@ -90,15 +92,17 @@ final class SelfHeating {
 
     private static double airC(Visit visit, StoreOutcome outcome, double to) {
         Hours hours = outcome.course(visit.chamber()).hours();
+        Enclosure built = outcome.model().plan().getChamber(visit.chamber()).enclosure();
+        IntToDoubleFunction airC = visit.sheet().airC(built, hours);
         double sum = 0;
         int n = 0;
         for (int i = 0; i < hours.size(); i++) {
             if (hours.atS(i) > to - Timeline.DAY_S && hours.atS(i) <= to + 1) {
-                sum += hours.airC(i);
+                sum += airC.applyAsDouble(i);
                 n++;
             }
         }
-        return n > 0 ? sum / n : hours.airC(hours.size() - 1);
+        return n > 0 ? sum / n : airC.applyAsDouble(hours.size() - 1);
     }
 
     /** NaN where the history does not reach there; its last value where it ends before. */

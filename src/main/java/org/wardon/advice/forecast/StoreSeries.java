@@ -31,6 +31,11 @@ final class StoreSeries {
         return Math.min(100, 100 * hours.humidityFraction(row));
     }
 
+    /** The same at the door end of a chamber whose air is two. */
+    static double doorEndHumidityPct(Hours hours, int row) {
+        return Math.min(100, 100 * hours.doorEndHumidityFraction(row));
+    }
+
     private void chamber(SeriesWriter writer, String id, Course course) {
         Hours hours = course.hours();
         ChamberEthylene level = outcome.ethylene(id);
@@ -42,6 +47,10 @@ final class StoreSeries {
         columns.put("powerW", hours::powerW);
         columns.put("co2Ppm", hours::co2Ppm);
         columns.put("ethylenePpm", i -> level.ppmAt(hours.atS(i)));
+        if (Double.isFinite(hours.doorEndC(0))) {
+            columns.put("doorEndC", hours::doorEndC);
+            columns.put("doorEndHumidityPct", i -> doorEndHumidityPct(hours, i));
+        }
         ofCoolers(course, columns);
         if (course.solar().isPresent()) {
             columns.put("panelW", hours::panelW);

@@ -5,7 +5,6 @@ import org.wardon.heat.Berth;
 import org.wardon.heat.Stay;
 import org.wardon.keeping.Draw;
 import org.wardon.lots.LotHistory;
-import org.wardon.plan.Place;
 
 /**
  * One lot in one chamber for a time. A lot that is never moved has one visit, from arrival to
@@ -66,12 +65,12 @@ record Visit(
                 whole.pulpC(),
                 whole.freshUntilS(),
                 from.isEmpty() ? whole.surfaceWaterKg() : 0,
-                nearCooler() ? berth.nearCooler() : berth);
+                berth.at(sheet.spot()));
     }
 
     /** Whether it stands in the blast of the cooler, here as anywhere. */
     boolean nearCooler() {
-        return sheet.plan().place() == Place.NEAR_COOLER;
+        return sheet.spot() == Berth.Spot.NEAR_COOLER;
     }
 
     /** What the lot goes through here, of all it goes through. */

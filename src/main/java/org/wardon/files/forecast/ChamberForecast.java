@@ -1,5 +1,6 @@
 package org.wardon.files.forecast;
 
+import com.fasterxml.jackson.annotation.JsonInclude;
 import java.time.LocalDateTime;
 import java.util.List;
 import java.util.Optional;
@@ -33,6 +34,8 @@ import java.util.OptionalDouble;
  * @param balanceErrorPct error of the balances, percent of the throughput
  * @param coolers what each cooler did, in the order of the plan
  * @param solar panels and battery; absent where a grid feeds the chamber
+ * @param doorEnd air of the door end; absent where the air is one, else {@code airC} and {@code
+ *     humidityPct} are those of the coil end
  */
 public record ChamberForecast(
         String id,
@@ -56,7 +59,8 @@ public record ChamberForecast(
         double ethylenePpmMax,
         double balanceErrorPct,
         List<OfCooler> coolers,
-        Optional<Solar> solar) {
+        Optional<Solar> solar,
+        @JsonInclude(JsonInclude.Include.NON_ABSENT) Optional<DoorEnd> doorEnd) {
     /** Copies the list. */
     public ChamberForecast {
         coolers = List.copyOf(coolers);
@@ -112,6 +116,15 @@ public record ChamberForecast(
             double batteryLowPct,
             double hoursWithout,
             Optional<LocalDateTime> firstWithout) {}
+
+    /**
+     * Air of the door end, by hourly means.
+     *
+     * @param airC temperature, °C
+     * @param humidityPct relative humidity, percent
+     * @param warmerK how much warmer than the coil end, K; below 0 colder
+     */
+    public record DoorEnd(MeanMinMax airC, MeanMinMax humidityPct, MeanMinMax warmerK) {}
 
     /**
      * The chamber's air.

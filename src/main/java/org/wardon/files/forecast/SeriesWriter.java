@@ -33,12 +33,19 @@ public final class SeriesWriter {
             List.of("meanC", "surfaceC", "coreC", "respirationW", "massKg", "lifeUsedPct");
 
     /**
-     * Columns of a chamber that has them: water leaving a film, water used in the hour before, ice
-     * left, power of panels, charge of a battery. After them may come the share of the hour before
-     * that each cooler ran, {@link #running}.
+     * Columns of a chamber that has them: air of the door end where it is two, water leaving a
+     * film, water used in the hour before, ice left, power of panels, charge of a battery. After
+     * them may come the share of the hour before that each cooler ran, {@link #running}.
      */
     public static final List<String> OPTIONAL =
-            List.of("waterOutC", "waterUsedKg", "iceKg", "panelW", "batteryPct");
+            List.of(
+                    "doorEndC",
+                    "doorEndHumidityPct",
+                    "waterOutC",
+                    "waterUsedKg",
+                    "iceKg",
+                    "panelW",
+                    "batteryPct");
 
     private final Path folder;
     private final Timeline timeline;

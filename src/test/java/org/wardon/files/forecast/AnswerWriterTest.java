@@ -194,7 +194,8 @@ class AnswerWriterTest {
                                         Optional.of(new ChamberForecast.Ice(900, 800, 100)))),
                         Optional.of(
                                 new ChamberForecast.Solar(
-                                        60, 50, 6, 3, 5, 6, 12.5, 0, Optional.empty())));
+                                        60, 50, 6, 3, 5, 6, 12.5, 0, Optional.empty())),
+                        Optional.empty());
         LotForecast lot =
                 new LotForecast(
                         "M1",
