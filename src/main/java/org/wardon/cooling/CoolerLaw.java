@@ -63,4 +63,14 @@ public sealed interface CoolerLaw
     default double ownTolerance(int i) {
         return 0.005;
     }
+
+    /**
+     * Returns the most an own state can hold; below 0 it never is.
+     *
+     * @param i number of the state
+     * @return in its unit; infinite where there is no such bound
+     */
+    default double ownMost(int i) {
+        return Double.POSITIVE_INFINITY;
+    }
 }

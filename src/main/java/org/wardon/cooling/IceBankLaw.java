@@ -78,6 +78,11 @@ public final class IceBankLaw implements CoolerLaw {
     }
 
     @Override
+    public double ownMost(int i) {
+        return bank.iceKg();
+    }
+
+    @Override
     public void effect(CoolerInputs in, CoolerEffect out) {
         out.clear();
         out.ran = in.run;

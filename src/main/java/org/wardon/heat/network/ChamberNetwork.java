@@ -555,6 +555,16 @@ public final class ChamberNetwork implements TreeSystem {
     }
 
     @Override
+    public boolean possible(double[] y) {
+        for (CoolerPart cooler : coolers) {
+            if (!cooler.possible(y)) {
+                return false;
+            }
+        }
+        return true;
+    }
+
+    @Override
     public double[] weights() {
         return weights;
     }

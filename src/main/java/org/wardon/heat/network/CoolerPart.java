@@ -259,6 +259,19 @@ public final class CoolerPart implements Part, FilmedFace.Control {
         }
     }
 
+    /** Whether a state is one its own states can be in, to the error allowed them. */
+    boolean possible(double[] y) {
+        for (int i = 0; i < own; i++) {
+            double state = y[branch[0].blockAt(i)];
+            double most = law.ownMost(i);
+            double over = law.ownTolerance(i);
+            if (Double.isFinite(most) && !(state >= -over && state <= most + over)) {
+                return false;
+            }
+        }
+        return true;
+    }
+
     int flow(int kind) {
         return flowAt + kind;
     }

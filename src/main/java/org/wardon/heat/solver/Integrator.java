@@ -27,6 +27,7 @@ public final class Integrator {
 
     private static final int LANDINGS = 40;
 
+    private final TreeSystem system;
     private final Rosenbrock method;
     private final double[] totals;
     private final double shortestStep;
@@ -52,6 +53,7 @@ public final class Integrator {
      * @param shortestStep a step the error control would make shorter than this stops the run
      */
     public Integrator(TreeSystem system, int edges, double firstStep, double shortestStep) {
+        this.system = system;
         this.method = new Rosenbrock(system);
         this.totals = new double[system.flows()];
         this.learned = new double[edges][REMEMBERED];
@@ -147,14 +149,15 @@ public final class Integrator {
         boolean refused = false;
         while (true) {
             double error = method.tryStep(now, y, h);
-            if (error <= 1) {
+            boolean possible = system.possible(method.end);
+            if (error <= 1 && possible) {
                 chooseNext(h, error, refused);
                 return h;
             }
             rejected++;
             refused = true;
             double factor = error < 1e12 ? SAFETY / Math.cbrt(error) : SHORTEST;
-            h *= Math.max(SHORTEST, Math.min(factor, 0.8));
+            h *= Math.max(SHORTEST, Math.min(factor, possible ? 0.8 : 0.4));
             if (!(h > shortestStep)) {
                 throw new StepTooShort(now, h, method.worstNode);
             }

@@ -58,6 +58,17 @@ public interface TreeSystem {
     double[] weights();
 
     /**
+     * Tells whether a state can be. A step into one that cannot is refused however small its error
+     * seems: where rates bend sharply, the method may see past the bend.
+     *
+     * @param y state
+     * @return true where it can
+     */
+    default boolean possible(double[] y) {
+        return true;
+    }
+
+    /**
      * Rates and flows, or their derivatives.
      *
      * @param rates {@code [node]}

@@ -108,7 +108,7 @@ class ColdBlastAdviceTest {
 
     @Test
     void aLotThatWouldBeChilledByTheCoolerIsToldByHowMuch() throws IOException {
-        StoreAdvice advice = advise(14, "banana-green", "");
+        StoreAdvice advice = advise(13.5, "banana-green", "");
         Forecast.Warning chills = told(advice, "chills-in-blast").orElseThrow();
         assertEquals("caution", chills.level());
         Matcher words =
