@@ -31,6 +31,7 @@ final class WhyPage {
 
     String of(WhyAnswer answer) {
         head(answer);
+        answer.ends().ifPresent(this::ends);
         heat(answer);
         water(answer);
         answer.face().ifPresent(this::face);
@@ -61,6 +62,21 @@ final class WhyPage {
                                 + ", outdoors are "
                                 + units.temperature(answer.outdoorC())
                                 + "."));
+    }
+
+    private void ends(WhyAnswer.Ends ends) {
+        page.append(
+                Paragraph.hanging(
+                        "",
+                        "Its coil end is at "
+                                + units.temperature(ends.coilEndC())
+                                + ", its door end at "
+                                + units.temperature(ends.doorEndC())
+                                + "; "
+                                + units.figure(ends.exchangeM3H(), "m3/h")
+                                + " of air go each way between them and carry "
+                                + watts(ends.toCoilEndW())
+                                + " to the coil end."));
     }
 
     private void heat(WhyAnswer answer) {

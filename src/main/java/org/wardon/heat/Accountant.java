@@ -4,6 +4,7 @@ import java.util.ArrayList;
 import java.util.EnumMap;
 import java.util.List;
 import java.util.Map;
+import java.util.Optional;
 import org.wardon.air.MoistAir;
 import org.wardon.air.SaturatedAir;
 import org.wardon.enclosure.Face;
@@ -20,6 +21,8 @@ final class Accountant {
     private final LotRecorder[] lots;
     private final Books books;
     private double fromS;
+    private double mixedJ;
+    private double mixedKg;
     private HourAccount.Air before = new HourAccount.Air(0, 0, 0, 0, 0);
     private HeatLedger heat = HeatLedger.NOTHING;
     private WaterLedger water = WaterLedger.NOTHING;
@@ -44,6 +47,8 @@ final class Accountant {
         fromS = t;
         asked(t, y);
         before = air(y);
+        mixedJ = network.terms().mixed(totals);
+        mixedKg = network.terms().mixedAir(totals);
         heat = books.heat(y);
         water = books.water(y);
         for (int i = 0; i < run.enclosure().faces().size(); i++) {
@@ -71,6 +76,7 @@ final class Accountant {
                         new HourAccount.OfLot(
                                 run.stays().get(i).lot().id(),
                                 lots[i].present(),
+                                atDoorEnd(i) ? network.air().doorEndC(y) : network.airC(y),
                                 LotReading.of(network.lot(i), y),
                                 here,
                                 lots[i].massKg(y, totals)));
@@ -85,8 +91,25 @@ final class Accountant {
                 network.outdoorC(),
                 books.heat(y).since(heat),
                 books.water(y).since(water),
+                ends(y),
                 read,
                 stood);
+    }
+
+    private boolean atDoorEnd(int lot) {
+        return run.stays().get(lot).berth().spot().atDoorEnd(run.enclosure());
+    }
+
+    private Optional<HourAccount.Ends> ends(double[] y) {
+        if (!network.air().hasDoorEnd()) {
+            return Optional.empty();
+        }
+        return Optional.of(
+                new HourAccount.Ends(
+                        network.airC(y),
+                        network.air().doorEndC(y),
+                        network.terms().mixed(totals) - mixedJ,
+                        network.cubicMetres(network.terms().mixedAir(totals) - mixedKg)));
     }
 
     /** Asks for the rates, so that every part knows of this state. */

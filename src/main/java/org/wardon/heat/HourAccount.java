@@ -2,6 +2,7 @@ package org.wardon.heat;
 
 import java.util.List;
 import java.util.Map;
+import java.util.Optional;
 import org.wardon.enclosure.FaceName;
 import org.wardon.heat.network.FaceReading;
 import org.wardon.heat.network.LotReading;
@@ -18,6 +19,7 @@ import org.wardon.heat.network.LotReading;
  * @param outdoorC outdoor air at the end, °C
  * @param heat heat of the span by term
  * @param water water of the span by term
+ * @param ends the two ends of the air at the end; absent where it is one
  * @param faces faces at the end; what went through them is that of the span
  * @param lots lots that stood there in the span, by id
  */
@@ -30,6 +32,7 @@ public record HourAccount(
         double outdoorC,
         HeatLedger heat,
         WaterLedger water,
+        Optional<Ends> ends,
         Map<FaceName, FaceReading> faces,
         List<OfLot> lots) {
     /** Copies the list and the map. */
@@ -39,7 +42,7 @@ public record HourAccount(
     }
 
     /**
-     * The chamber's air at an instant.
+     * The chamber's air at an instant; all of it mixed where it is two.
      *
      * @param temperatureC temperature, °C
      * @param humidityFraction relative humidity, 0 to 1 and a little above
@@ -55,14 +58,30 @@ public record HourAccount(
             double enthalpyJkg) {}
 
     /**
+     * The two ends of a chamber's air and what they changed with each other in the span.
+     *
+     * @param coilEndC air of the coil end at the end, °C
+     * @param doorEndC air of the door end at the end, °C
+     * @param heatJ heat from the door end to the coil end, vapour's counted in, J
+     * @param airM3 chamber air that went each way, m3
+     */
+    public record Ends(double coilEndC, double doorEndC, double heatJ, double airM3) {}
+
+    /**
      * A lot in the span.
      *
      * @param id its id
      * @param there whether it stands there at the end
+     * @param airC air of the end it stands in, °C
      * @param inside how it is at the end, or would be where it left
      * @param gave what it gave and took in the span
      * @param massKg its mass at the end, kg
      */
     public record OfLot(
-            String id, boolean there, LotReading inside, LotAmounts gave, double massKg) {}
+            String id,
+            boolean there,
+            double airC,
+            LotReading inside,
+            LotAmounts gave,
+            double massKg) {}
 }

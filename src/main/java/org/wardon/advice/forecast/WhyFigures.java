@@ -55,6 +55,7 @@ final class WhyFigures {
                 waterKgH(water),
                 perHour(water.sum()),
                 100 * water.errorShare(),
+                account.ends().map(this::ends),
                 face.map(this::face),
                 lot.map(this::lot));
     }
@@ -64,6 +65,11 @@ final class WhyFigures {
                 air.temperatureC(),
                 Math.min(100, 100 * air.humidityFraction()),
                 dewPointC(air.humidityRatio()));
+    }
+
+    private WhyAnswer.Ends ends(HourAccount.Ends ends) {
+        return new WhyAnswer.Ends(
+                ends.coilEndC(), ends.doorEndC(), ends.heatJ() / spanS, perHour(ends.airM3()));
     }
 
     private double dewPointC(double ratio) {
@@ -159,7 +165,7 @@ final class WhyFigures {
                 inside.skinC(),
                 inside.packageC(),
                 100 * Math.min(1, inside.packageHumidityFraction()),
-                account.after().temperatureC(),
+                lot.airC(),
                 gave.respirationJ() / spanS,
                 gave.fleshJ() / spanS,
                 gave.liquidJ() / spanS,

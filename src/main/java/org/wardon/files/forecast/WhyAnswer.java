@@ -1,5 +1,6 @@
 package org.wardon.files.forecast;
 
+import com.fasterxml.jackson.annotation.JsonInclude;
 import java.time.LocalDateTime;
 import java.util.List;
 import java.util.Optional;
@@ -23,6 +24,8 @@ import java.util.Optional;
  * @param waterKgH water into the air by term, kg/h
  * @param waterSumKgH their sum, which must be nothing, kg/h
  * @param waterErrorPct that error, percent of what passed
+ * @param ends the two ends of the air; absent where it is one, else {@code before} and {@code
+ *     after} are all of it mixed
  * @param face the face asked for
  * @param lot the lot asked for
  */
@@ -42,6 +45,7 @@ public record WhyAnswer(
         WaterKgH waterKgH,
         double waterSumKgH,
         double waterErrorPct,
+        @JsonInclude(JsonInclude.Include.NON_ABSENT) Optional<Ends> ends,
         Optional<OfFace> face,
         Optional<OfLot> lot) {
     /**
@@ -52,6 +56,16 @@ public record WhyAnswer(
      * @param dewPointC dew point, °C
      */
     public record Air(double airC, double humidityPct, double dewPointC) {}
+
+    /**
+     * The two ends of the air; what one gives the other takes, so that it is no term of the sum.
+     *
+     * @param coilEndC coil end, °C
+     * @param doorEndC door end, °C
+     * @param toCoilEndW heat from the door end to the coil end, W
+     * @param exchangeM3H air that goes each way, m3/h
+     */
+    public record Ends(double coilEndC, double doorEndC, double toCoilEndW, double exchangeM3H) {}
 
     /**
      * Heat into the air, W; the names are those of {@code loadKWh} in the forecast.

@@ -13,13 +13,18 @@ import org.junit.jupiter.api.BeforeAll;
 import org.junit.jupiter.api.Test;
 import org.junit.jupiter.api.io.TempDir;
 import org.wardon.advice.wording.Units;
+import org.wardon.advice.wording.Words;
+import org.wardon.errors.Progress;
 import org.wardon.files.forecast.ChamberForecast;
 import org.wardon.files.forecast.Forecast;
 import org.wardon.files.forecast.LotForecast;
+import org.wardon.files.forecast.WhyAnswer;
+import org.wardon.plan.StorePlan;
 import org.wardon.reference.ReferenceBook;
 
 /** A chamber whose air is two, as advice: a busy door, and one lot of a crop at each end. */
 class DoorEndAdviceTest {
+    private static final Words WORDS = Words.english(Units.METRIC);
     private static ReferenceBook book;
 
     @TempDir Path folder;
@@ -35,6 +40,10 @@ class DoorEndAdviceTest {
     }
 
     private StoreAdvice advise(String zones) throws IOException {
+        return new ForecastAdvice(book, WORDS).advise(plan(zones), Progress.SILENT);
+    }
+
+    private StorePlan plan(String zones) throws IOException {
         String chamber =
                 SmallStores.chamber("cold", 1)
                         .replace(
@@ -46,7 +55,7 @@ class DoorEndAdviceTest {
                 List.of(
                         lot("D", "\"chamber\": \"cold\", \"place\": \"door\""),
                         lot("M", "\"chamber\": \"cold\", \"place\": \"middle\""));
-        return SmallStores.advise(folder, book, List.of(chamber), lots);
+        return SmallStores.plan(folder, book, List.of(chamber), lots);
     }
 
     private static String lot(String id, String rest) {
@@ -95,6 +104,28 @@ class DoorEndAdviceTest {
         assertEquals("caution", warm.level());
         assertTrue(warm.text().startsWith("D: by the door of cold it stands at "), warm.text());
         assertTrue(chamber.balanceErrorPct() < 1e-6, chamber.balanceErrorPct() + " %");
+    }
+
+    @Test
+    void whyTellsWhatTheEndsChangeAndItsTermsStillAddUp() throws IOException {
+        WhyAnswer why =
+                new WhyAdvice(book, WORDS)
+                        .ask(
+                                plan(ZONES),
+                                new WhyAdvice.Question(
+                                        "cold",
+                                        "2026-03-05T12:00",
+                                        Optional.of("roof"),
+                                        Optional.of("D")));
+        WhyAnswer.Ends ends = why.ends().orElseThrow();
+        assertEquals(250, ends.exchangeM3H(), 1e-6);
+        // 250 m3/h of air of 1 °C and 1013 hPa: 0.0895 kg/s; vapour adds to 1.006 kJ/(kg K).
+        double dryW = 89.5 * 1.006 * (ends.doorEndC() - ends.coilEndC());
+        assertTrue(ends.toCoilEndW() > 0.8 * dryW && ends.toCoilEndW() < 4 * dryW, ends + "");
+        assertEquals(ends.doorEndC(), why.lot().orElseThrow().airC(), 1e-9);
+        assertTrue(why.after().airC() > ends.coilEndC() && why.after().airC() < ends.doorEndC());
+        assertEquals(why.removedW(), why.heatSumW(), 1e-3 * why.heatSumW());
+        assertTrue(why.heatErrorPct() < 0.1 && why.waterErrorPct() < 0.1, why.heatErrorPct() + "");
     }
 
     @Test
