@@ -16,8 +16,8 @@ import org.wardon.produce.rows.ChillingExposure;
  *
  * <p>That the days times the kelvins stay about constant is seen in the rows of papaya (20 d at 7.5
  * °C, 10 d at 2 °C below a floor of 13 °C: 110 both) and sweet potato (42 d at 6 °C, 70 d at 9 °C:
- * 294 and 280). Where sources contradict each other the deviation grows with them; one row in
- * twenty may speak of something else altogether, so that none drags the dose alone.
+ * 294 and 280). Where sources contradict each other the deviation grows with them (banana at 10 °C:
+ * from an hour to days); one row in two hundred may speak of something else altogether.
  *
  * @param lnMedian logarithm of the median dose at which injury shows in the commodity, K d
  * @param deviation standard deviation of the logarithm, what is not known of the median included
@@ -50,10 +50,10 @@ record DoseFit(double lnMedian, double deviation, int rows, boolean afterRewarmi
     /** Usual deviation within a crop, and the deviation of its logarithm. */
     private static final double USUAL_WITHIN = 0.5;
 
-    private static final double USUAL_WITHIN_LN = 0.4;
-    private static final double[] WITHIN = {0.25, 0.4, 0.6, 1, 1.5};
+    private static final double USUAL_WITHIN_LN = 0.5;
+    private static final double[] WITHIN = {0.25, 0.4, 0.6, 1, 1.6, 2.4};
 
-    private static final double STRAY_SHARE = 0.05;
+    private static final double STRAY_SHARE = 0.005;
 
     private static final double HALF_K = 0.5;
     private static final double LEAST_K = 0.1;
