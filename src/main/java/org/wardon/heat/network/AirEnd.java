@@ -88,6 +88,36 @@ final class AirEnd {
         always = parts.toArray(new Part[0]);
     }
 
+    /** Adds its share of racks and structure, where there are any. */
+    Optional<StructurePart> racks(Tree tree, IntUnaryOperator take, NetworkInputs inputs) {
+        double capacity = inputs.enclosure().structureCapacityJK() * share;
+        if (capacity <= 0) {
+            return Optional.empty();
+        }
+        hang(tree);
+        int flowAt = take.applyAsInt(StructurePart.FLOWS);
+        StructurePart part = new StructurePart(tree, flowAt, capacity);
+        add(List.of(part));
+        return Optional.of(part);
+    }
+
+    /** Adds the lots of these numbers, behind all else; they are put into {@code lots}. */
+    LotBank lots(
+            Tree tree,
+            IntUnaryOperator take,
+            NetworkInputs inputs,
+            List<Integer> here,
+            LotPart[] lots) {
+        hang(tree);
+        int flowAt = take.applyAsInt(LotBank.FLOWS * here.size());
+        double pressure = inputs.pressurePa();
+        LotBank bank = new LotBank(tree, flowAt, here.size(), pressure, inputs.plain());
+        for (int i : here) {
+            lots[i] = new LotPart(bank, inputs.lots().get(i), inputs.tuning(), pressure);
+        }
+        return bank;
+    }
+
     /**
      * Adds exchange with outdoors, what is given off inside and mist, behind the coolers.
      *

@@ -3,6 +3,7 @@ package org.wardon.heat.network;
 import java.util.ArrayList;
 import java.util.Arrays;
 import java.util.List;
+import java.util.stream.IntStream;
 import org.wardon.air.MoistAir;
 import org.wardon.heat.solver.Tree;
 import org.wardon.heat.solver.TreeSystem;
@@ -19,9 +20,8 @@ public final class ChamberNetwork implements TreeSystem {
     private final AirEnd[] ends;
     private final RoomAir roomAir;
     private final Tree tree;
-    private final Outside outside = new Outside();
-    private final HourlyAir outdoors;
-    private final HourlyAir beyondDoor;
+    private final OutsideInTime around;
+    private final Outside outside;
     private final Faces faces;
     private final WettedWalls wettedWalls;
     private final List<StructurePart> structure = new ArrayList<>();
@@ -39,8 +39,6 @@ public final class ChamberNetwork implements TreeSystem {
     private int flows;
     private double airKg;
     private double freeM3;
-    private int hour;
-    private double at = Double.NaN;
 
     /**
      * Compiles a chamber.
@@ -52,11 +50,13 @@ public final class ChamberNetwork implements TreeSystem {
         ends = AirEnd.of(inputs);
         roomAir = new RoomAir(ends, inputs.pressurePa());
         tree = new Tree(2 * ends.length);
-        outdoors = AirAround.outdoors(inputs);
-        beyondDoor = AirAround.beyondDoor(inputs, outdoors);
         faces = new Faces(tree, this::take, inputs, ends);
+        around = new OutsideInTime(inputs, faces);
+        outside = around.now;
         wettedWalls = new WettedWalls(faces.wetted());
-        addStructure();
+        for (AirEnd end : ends) {
+            end.racks(tree, this::take, inputs).ifPresent(structure::add);
+        }
         ends[AirEnd.COIL].hang(tree);
         boolean unlimited = inputs.control() == NetworkInputs.Control.IDEAL;
         coolers = unlimited ? new CoolerPart[0] : CoolerParts.of(tree, this::take, inputs);
@@ -77,7 +77,10 @@ public final class ChamberNetwork implements TreeSystem {
         banks = new LotBank[ends.length];
         lots = new LotPart[inputs.lots().size()];
         for (int e = 0; e < ends.length; e++) {
-            addLots(e);
+            int end = e;
+            List<Integer> here =
+                    IntStream.range(0, lots.length).filter(i -> endOf(i) == end).boxed().toList();
+            banks[e] = ends[e].lots(tree, this::take, inputs, here, lots);
         }
         blast = new Blast(coolers);
         weights = new double[tree.size()];
@@ -85,41 +88,11 @@ public final class ChamberNetwork implements TreeSystem {
         hour(0);
     }
 
-    private void addStructure() {
-        double capacity = inputs.enclosure().structureCapacityJK();
-        for (AirEnd end : ends) {
-            if (capacity > 0) {
-                end.hang(tree);
-                StructurePart part =
-                        new StructurePart(tree, take(StructurePart.FLOWS), capacity * end.share);
-                structure.add(part);
-                end.add(List.of(part));
-            }
-        }
-    }
-
     private int addIdeal() {
         int flowAt = take(IdealCooler.FLOWS);
         double airOfAll = dryAirKg(inputs.enclosure().box().volumeM3());
         ends[AirEnd.COIL].add(List.of(IdealCooler.of(flowAt, inputs, airOfAll)));
         return flowAt;
-    }
-
-    private void addLots(int e) {
-        List<Integer> here = new ArrayList<>();
-        for (int i = 0; i < lots.length; i++) {
-            if (endOf(i) == e) {
-                here.add(i);
-            }
-        }
-        ends[e].hang(tree);
-        int flowsOfLots = take(LotBank.FLOWS * here.size());
-        LotBank bank =
-                new LotBank(tree, flowsOfLots, here.size(), inputs.pressurePa(), inputs.plain());
-        for (int i : here) {
-            lots[i] = new LotPart(bank, inputs.lots().get(i), inputs.tuning(), inputs.pressurePa());
-        }
-        banks[e] = bank;
     }
 
     /** Number of the end a lot stands in. */
@@ -188,20 +161,7 @@ public final class ChamberNetwork implements TreeSystem {
      * @param h hour of the run, 0 to the last but one
      */
     public void hour(int h) {
-        hour = Math.min(h, inputs.around().hours() - 1);
-        at = Double.NaN;
-        faces.hour(hour);
-    }
-
-    private void at(double t) {
-        if (t == at) {
-            return;
-        }
-        at = t;
-        double into = t - hour * 3600.0;
-        outdoors.at(hour, into, outside.outdoors);
-        beyondDoor.at(hour, into, outside.beyondDoor);
-        faces.at(into / 3600);
+        around.hour(h);
     }
 
     /**
@@ -225,7 +185,7 @@ public final class ChamberNetwork implements TreeSystem {
     public double[] start(double airC, double ratio) {
         double[] y = new double[tree.size()];
         roomAir.set(airC, ratio, y);
-        at(0);
+        around.at(0);
         faces.steadyProfile(airC, y);
         structure.forEach(s -> s.start(airC, y));
         List.of(coolers).forEach(cooler -> cooler.start(y));
@@ -300,7 +260,7 @@ public final class ChamberNetwork implements TreeSystem {
      * @return K or percent of humidity, below 0 outside; infinite where it has no conditions
      */
     public double inside(int i, double t, double[] y) {
-        at(t);
+        around.at(t);
         return coolers[i].inside(airC(y), ratio(y), outside);
     }
 
@@ -419,7 +379,7 @@ public final class ChamberNetwork implements TreeSystem {
      * @return humidity ratio, kg/kg
      */
     public double outdoorRatio(int h) {
-        return outdoors.ratio(h);
+        return around.outdoorRatio(h);
     }
 
     /**
@@ -571,7 +531,7 @@ public final class ChamberNetwork implements TreeSystem {
 
     @Override
     public void rates(double t, double[] y, double[] rates, double[] flow) {
-        at(t);
+        around.at(t);
         ask(false, y, rates, flow);
     }
 
@@ -596,7 +556,7 @@ public final class ChamberNetwork implements TreeSystem {
 
     @Override
     public void linearise(double t, double[] y, Change now, Change slope) {
-        at(t);
+        around.at(t);
         for (int e = 0; e < ends.length; e++) {
             ends[e].near(y);
             banks[e].near(ends[e].startAir, y);
