@@ -14,7 +14,7 @@ class SizeIT {
     @Test
     void aPersonGetsTheSumLineByLine() {
         String page = WardonJar.run("size", DEMO, "--chamber", "cold").good().out();
-        assertTrue(page.startsWith("Chamber cold at 2 °C, outdoors "), page);
+        assertTrue(page.startsWith("Chamber cold at 2.0 °C, outdoors "), page);
         assertTrue(page.contains("  cooling it needs while it runs "), page);
         assertTrue(page.contains("licensed refrigeration engineer"), page);
         assertFalse(page.contains("NaN") || page.contains("{"), page);
