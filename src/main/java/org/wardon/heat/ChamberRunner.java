@@ -97,7 +97,8 @@ final class ChamberRunner implements Integrator.StepListener {
         triggers = solar.isPresent() ? new FirstOf(dryOrWarm, solar.get()) : dryOrWarm;
         double pressure = RunCompiler.pressurePa(run);
         carbon = new Carbon(pressure);
-        int rows = RunCompiler.hours(run) + 2;
+        int rowHours = run.doorMode().rowHours();
+        int rows = (RunCompiler.hours(run) + rowHours - 1) / rowHours + 2;
         hours = new HourRecorder(network, rows);
         lots = new LotRecorder[run.stays().size()];
         carried = new LotState[lots.length];
