@@ -1,7 +1,6 @@
 package org.wardon.heat;
 
 import org.wardon.heat.network.ChamberNetwork;
-import org.wardon.heat.network.LotNodes;
 import org.wardon.heat.network.LotPart;
 
 /**
@@ -13,7 +12,7 @@ public final class LotState {
     private final double massKg;
 
     LotState(LotPart lot, double[] y, double massKg) {
-        this.nodes = LotNodes.of(lot, y);
+        this.nodes = lot.nodes(y);
         this.massKg = massKg;
     }
 

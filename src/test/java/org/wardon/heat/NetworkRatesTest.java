@@ -22,7 +22,6 @@ import org.wardon.heat.laws.FreeWater;
 import org.wardon.heat.laws.Mist;
 import org.wardon.heat.laws.SkinWater;
 import org.wardon.heat.network.ChamberNetwork;
-import org.wardon.heat.network.LotNodes;
 import org.wardon.heat.solver.DenseJacobian;
 import org.wardon.heat.solver.TreeSystem;
 import org.wardon.lots.Lot;
@@ -71,8 +70,8 @@ class NetworkRatesTest {
             double[] f = rates(1800, y, flows);
             for (int i = 0; i < run.stays().size(); i++) {
                 Lot lot = run.stays().get(i).lot();
-                double[] expected = lotRates(lot, LotNodes.of(network.lot(i), y), y);
-                double[] found = LotNodes.of(network.lot(i), f);
+                double[] expected = lotRates(lot, network.lot(i).nodes(y), y);
+                double[] found = network.lot(i).nodes(f);
                 for (int n = 0; n < expected.length; n++) {
                     double scale = Math.abs(expected[n]) + gross(lot, n);
                     assertEquals(expected[n], found[n], 1e-12 * scale, "state " + k + " node " + n);

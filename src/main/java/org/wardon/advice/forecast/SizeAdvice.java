@@ -14,12 +14,12 @@ import org.wardon.advice.size.DesignLoad;
 import org.wardon.advice.wording.Words;
 import org.wardon.air.StandardAtmosphere;
 import org.wardon.air.Weather;
+import org.wardon.air.YearWave;
 import org.wardon.cooling.Compressor;
+import org.wardon.enclosure.Surroundings;
 import org.wardon.errors.BadInput;
 import org.wardon.errors.Fault;
 import org.wardon.files.forecast.SizeAnswer;
-import org.wardon.files.json.Nearest;
-import org.wardon.heat.HeatModel;
 import org.wardon.lots.Lot;
 import org.wardon.plan.ChamberPlan;
 import org.wardon.plan.StorePlan;
@@ -73,7 +73,7 @@ public final class SizeAdvice {
         check(plan, asked);
         StoreModel model = forecast.prepare(plan).model();
         ChamberPlan chamber = model.plan().getChamber(asked.chamber());
-        ChamberLoad.DesignDay day = day(model, chamber, asked);
+        ChamberLoad.DesignDay day = day(model, asked);
         Map<LocalDate, List<Visit>> byDay = arrivals(model, chamber);
         LocalDate busiest =
                 byDay.entrySet().stream()
@@ -91,17 +91,7 @@ public final class SizeAdvice {
 
     private static void check(StorePlan plan, Question asked) {
         List<Fault> faults = new ArrayList<>();
-        List<String> there = plan.chambers().stream().map(ChamberPlan::id).toList();
-        if (!there.contains(asked.chamber())) {
-            faults.add(
-                    new Fault(
-                            "--chamber",
-                            "",
-                            "is '" + asked.chamber() + "', no chamber of this plan",
-                            Nearest.question(asked.chamber(), there)
-                                    + "accepted: "
-                                    + String.join(", ", there)));
-        }
+        Asked.chamber(plan, asked.chamber(), faults);
         asked.outdoorC().ifPresent(c -> within("--outdoor-c", c, -60, 60, faults));
         asked.outdoorHumidityPct()
                 .ifPresent(pct -> within("--outdoor-humidity-pct", pct, 0, 100, faults));
@@ -124,26 +114,36 @@ public final class SizeAdvice {
         }
     }
 
-    private static ChamberLoad.DesignDay day(
-            StoreModel model, ChamberPlan chamber, Question asked) {
+    private static ChamberLoad.DesignDay day(StoreModel model, Question asked) {
         StorePlan plan = model.plan();
         Weather weather = model.weather();
         int warmest = 0;
         for (int h = 1; h <= plan.days() * 24; h++) {
             warmest = weather.temperatureC(h) > weather.temperatureC(warmest) ? h : warmest;
         }
-        double groundC =
-                HeatModel.around(model.asInPlain(chamber, plan.durationS())).meanOutdoorC();
         return new ChamberLoad.DesignDay(
                 asked.outdoorC().orElse(weather.temperatureC(warmest)),
                 asked.outdoorHumidityPct().orElse(weather.humidityPct(warmest)),
-                groundC,
+                groundC(model),
                 plan.site().latitudeDeg(),
                 StandardAtmosphere.pressurePa(plan.site().elevationM()),
                 plan.chambers().stream()
                         .collect(
                                 Collectors.toMap(
                                         ChamberPlan::id, c -> c.setting().temperatureC())));
+    }
+
+    /** The mean of the year where it is known, else that of the plan's weather. */
+    private static double groundC(StoreModel model) {
+        StorePlan plan = model.plan();
+        Surroundings around =
+                Surroundings.of(
+                        plan.site(),
+                        plan.timeline(),
+                        model.weather(),
+                        (int) Math.ceil(plan.days() * 24),
+                        0);
+        return around.year().map(YearWave::meanC).orElseGet(around::meanOutdoorC);
     }
 
     /** Lots by the day they come in; what stands there at the start comes in with it. */

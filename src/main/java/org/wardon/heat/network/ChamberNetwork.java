@@ -490,7 +490,7 @@ public final class ChamberNetwork implements TreeSystem {
      * @param y state, changed in place
      */
     public void bringIn(int i, double[] nodes, double[] y) {
-        LotNodes.put(nodes, lots[i], y);
+        lots[i].put(nodes, y);
         lots[i].weights(lotK, airK, weights);
     }
 

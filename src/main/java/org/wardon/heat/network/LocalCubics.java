@@ -70,4 +70,9 @@ final class LocalCubics {
         double d = t - centre[j];
         return c0[j] + d * (c1[j] + d * (c2[j] + d * c3[j]));
     }
+
+    double slope(int j, double t) {
+        double d = t - centre[j];
+        return c1[j] + d * (2 * c2[j] + d * 3 * c3[j]);
+    }
 }

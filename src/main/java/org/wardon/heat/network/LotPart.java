@@ -1,6 +1,7 @@
 package org.wardon.heat.network;
 
 import org.wardon.air.MoistAir;
+import org.wardon.errors.Require;
 import org.wardon.heat.laws.FreeWater;
 import org.wardon.lots.Lot;
 import org.wardon.lots.Packing;
@@ -158,8 +159,15 @@ public final class LotPart {
                 && (node - from) % bank.places == slot;
     }
 
-    /** Its nodes, copied out of a state. */
-    double[] nodes(double[] y) {
+    /**
+     * Returns what its nodes hold, to be put into another chamber's state: shells, free water,
+     * enthalpy and humidity ratio of the package air. Networks of one site cut a lot alike, so that
+     * nothing is lost on the way.
+     *
+     * @param y state it is in
+     * @return {@code [node]}, a copy
+     */
+    public double[] nodes(double[] y) {
         double[] all = new double[bank.bank.rows()];
         for (int k = 0; k < all.length; k++) {
             all[k] = y[at(k)];
@@ -169,6 +177,8 @@ public final class LotPart {
 
     /** Puts nodes into a state; from then on it takes part. */
     void put(double[] nodes, double[] y) {
+        int rows = bank.bank.rows();
+        Require.that(nodes.length == rows, "a lot of " + rows + " nodes, not " + nodes.length);
         takeSlot(nodes[LotBank.SHELLS - 1]);
         for (int k = 0; k < nodes.length; k++) {
             y[at(k)] = nodes[k];

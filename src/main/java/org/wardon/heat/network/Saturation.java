@@ -46,10 +46,12 @@ final class Saturation {
     }
 
     static double overWaterSlopePaPerK(double t) {
-        if (t > SaturatedAir.TRIPLE_POINT_C) {
+        if (!(t <= SaturatedAir.TRIPLE_POINT_C)) {
             return slopePaPerK(t);
         }
-        return (SaturatedAir.overWaterPa(t + SLOPE_K) - SaturatedAir.overWaterPa(t - SLOPE_K))
+        double inside = Math.max(t, LOW_C);
+        return (SaturatedAir.overWaterPa(inside + SLOPE_K)
+                        - SaturatedAir.overWaterPa(inside - SLOPE_K))
                 / (2 * SLOPE_K);
     }
 

@@ -212,10 +212,6 @@ public final class Branch {
 
     /** Multiplies the block's entries by its inverse, in place. */
     private void solveBlock(double[] x, int at) {
-        if (block == 4) {
-            solveFour(x, at);
-            return;
-        }
         if (block == 2) {
             double a = x[at];
             double b = x[at + 1];
@@ -231,19 +227,6 @@ public final class Branch {
             work[i] = sum;
         }
         System.arraycopy(work, 0, x, at, block);
-    }
-
-    /** A block of four, written out: such make up most of a tree. */
-    private void solveFour(double[] x, int at) {
-        double[] m = inverse;
-        double a = x[at];
-        double b = x[at + 1];
-        double c = x[at + 2];
-        double d = x[at + 3];
-        x[at] = m[0] * a + m[1] * b + m[2] * c + m[3] * d;
-        x[at + 1] = m[4] * a + m[5] * b + m[6] * c + m[7] * d;
-        x[at + 2] = m[8] * a + m[9] * b + m[10] * c + m[11] * d;
-        x[at + 3] = m[12] * a + m[13] * b + m[14] * c + m[15] * d;
     }
 
     /** Eliminates the branch from the right-hand side into the hub's entries, in place. */
