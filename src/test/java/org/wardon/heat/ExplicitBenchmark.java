@@ -22,7 +22,7 @@ import org.wardon.cooling.Control;
 @Fork(1)
 public class ExplicitBenchmark {
     /** Length of the run, days. */
-    @Param("3")
+    @Param("30")
     public int days;
 
     /**
@@ -34,7 +34,7 @@ public class ExplicitBenchmark {
     public double wholeRun() {
         double[] last = new double[1];
         ChamberRun run = Chambers.full(Control.MODULATING, 12, days);
-        new ExplicitRun(run, true, new ExplicitRun.Tolerance(1e-3, 1e-4))
+        new ExplicitRun(run, true, new ExplicitRun.Tolerance(1e-7, 1e-9))
                 .go((network, y, meanAirC) -> last[0] = meanAirC);
         return last[0];
     }
