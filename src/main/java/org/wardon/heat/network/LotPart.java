@@ -81,15 +81,6 @@ public final class LotPart {
     }
 
     /**
-     * Returns whether the lot gives to the air.
-     *
-     * @return false for a shadow
-     */
-    public boolean gives() {
-        return gives;
-    }
-
-    /**
      * Returns whether the lot has arrived; one that left stays as a shadow.
      *
      * @return true from its arrival on

@@ -1,7 +1,5 @@
 package org.wardon.heat.solver;
 
-import java.util.Arrays;
-
 /**
  * One branch of the tree: a run of nodes, each coupled to its neighbours, that ends in a small
  * dense block; the block alone is coupled to two nodes of the hub. The branch holds its part of the
@@ -53,7 +51,6 @@ public final class Branch {
     private final double[] work;
     private final double[] hubShare;
     private double blockRatio;
-    private boolean active = true;
 
     Branch(int start, int run, int block, int hubAt) {
         this.start = start;
@@ -75,24 +72,6 @@ public final class Branch {
     }
 
     /**
-     * Returns whether the branch takes part.
-     *
-     * @return false while its nodes stand still and touch nothing
-     */
-    public boolean active() {
-        return active;
-    }
-
-    /**
-     * Lets the branch take part or stand still.
-     *
-     * @param takesPart true to take part
-     */
-    public void activate(boolean takesPart) {
-        active = takesPart;
-    }
-
-    /**
      * Returns the place of a block node in the state.
      *
      * @param row row of the block
@@ -104,13 +83,6 @@ public final class Branch {
 
     int size() {
         return run + block;
-    }
-
-    /** Sets J within the block and towards the hub to zero. */
-    public void clearBlock() {
-        Arrays.fill(inner, 0);
-        Arrays.fill(byHub, 0);
-        Arrays.fill(onHub, 0);
     }
 
     /** Factors {@code shift I - J} and takes the branch's share off the hub's matrix. */

@@ -150,17 +150,15 @@ final class Rosenbrock {
             }
         }
         for (Branch branch : tree.branches()) {
-            if (branch.active()) {
-                double sum = 0;
-                for (int i = branch.start; i < branch.start + branch.size(); i++) {
-                    double share = u4[i] * weights[i];
-                    sum += share * share;
-                }
-                double e = Math.sqrt(sum / branch.size());
-                if (!(e <= worst)) {
-                    worst = e;
-                    worstNode = branch.start;
-                }
+            double sum = 0;
+            for (int i = branch.start; i < branch.start + branch.size(); i++) {
+                double share = u4[i] * weights[i];
+                sum += share * share;
+            }
+            double e = Math.sqrt(sum / branch.size());
+            if (!(e <= worst)) {
+                worst = e;
+                worstNode = branch.start;
             }
         }
         for (Bank bank : tree.banks()) {

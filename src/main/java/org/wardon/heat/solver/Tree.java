@@ -110,9 +110,7 @@ public final class Tree {
             hubLu[i * hub + i] += shift;
         }
         for (Branch branch : branches) {
-            if (branch.active()) {
-                branch.factor(shift, hubLu, hub);
-            }
+            branch.factor(shift, hubLu, hub);
         }
         for (Bank bank : banks) {
             bank.factor(shift, hubLu, hub);
@@ -137,9 +135,7 @@ public final class Tree {
     /** Solves (shift I - J) x = right-hand side, in place. */
     void solve(double[] x) {
         for (Branch branch : branches) {
-            if (branch.active()) {
-                branch.forward(x);
-            }
+            branch.forward(x);
         }
         for (Bank bank : banks) {
             bank.forward(x);
@@ -156,9 +152,7 @@ public final class Tree {
             x[i] *= hubLu[i * hub + i];
         }
         for (Branch branch : branches) {
-            if (branch.active()) {
-                branch.back(x);
-            }
+            branch.back(x);
         }
         for (Bank bank : banks) {
             bank.back(x);

@@ -25,7 +25,7 @@ public interface TreeSystem {
      *
      * @param t time
      * @param y state
-     * @param rates filled, {@code [node]}; 0 for nodes of branches that stand still
+     * @param rates filled, {@code [node]}; 0 for members of a bank that take no part
      * @param flows filled, {@code [flow]}
      */
     void rates(double t, double[] y, double[] rates, double[] flows);

@@ -17,9 +17,7 @@ public final class DenseJacobian {
             System.arraycopy(tree.hubByHub, r * hub, j[r], 0, hub);
         }
         for (Branch branch : tree.branches()) {
-            if (branch.active()) {
-                write(branch, j);
-            }
+            write(branch, j);
         }
         for (Bank bank : tree.banks()) {
             for (int i = 0; i < bank.count(); i++) {
