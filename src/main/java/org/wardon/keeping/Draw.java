@@ -19,6 +19,7 @@ package org.wardon.keeping;
  * @param ripening along the share of life left once ripe, short to long
  * @param dormancy along the rest before sprouting, short to long
  * @param curing along what a lot that may not be cured still keeps, little to all
+ * @param ripeningPace along the printed days from the start of ripening to ripe, short to long
  */
 public record Draw(
         int number,
@@ -34,13 +35,14 @@ public record Draw(
         double market,
         double ripening,
         double dormancy,
-        double curing) {
+        double curing,
+        double ripeningPace) {
     /** The plain run: the middle of every range. */
     public static final Draw MEDIAN =
-            new Draw(0, 0.5, 0.5, 0.5, 0.5, 0.5, 0.5, 0.5, 0.5, 0.5, 0.5, 0.5, 0.5, 0.5);
+            new Draw(0, 0.5, 0.5, 0.5, 0.5, 0.5, 0.5, 0.5, 0.5, 0.5, 0.5, 0.5, 0.5, 0.5, 0.5);
 
     /** How many ranges a draw chooses from. */
-    static final int RANGES = 13;
+    static final int RANGES = 14;
 
     /** Refuses quantiles outside 0 to 1. */
     public Draw {
@@ -57,7 +59,8 @@ public record Draw(
             market,
             ripening,
             dormancy,
-            curing
+            curing,
+            ripeningPace
         };
         for (double quantile : all) {
             if (!(quantile > 0 && quantile < 1)) {
@@ -72,7 +75,7 @@ public record Draw(
     }
 
     /**
-     * Returns the draw of thirteen quantiles in the order of the record.
+     * Returns the draw of fourteen quantiles in the order of the record.
      *
      * @param number its number
      * @param quantiles {@code [range]}, 0 to 1
@@ -82,6 +85,6 @@ public record Draw(
         double[] q = quantiles;
         return new Draw(
                 number, q[0], q[1], q[2], q[3], q[4], q[5], q[6], q[7], q[8], q[9], q[10], q[11],
-                q[12]);
+                q[12], q[13]);
     }
 }

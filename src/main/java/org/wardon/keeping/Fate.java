@@ -25,6 +25,7 @@ public final class Fate {
     private final Mechanism ageing;
     private final Optional<Track> green;
     private final Optional<Track> edible;
+    private final Optional<RipeTimes> ripe;
 
     Fate(
             int drawNumber,
@@ -32,13 +33,15 @@ public final class Fate {
             Map<Mechanism, Track> tracks,
             Mechanism ageing,
             Optional<Track> green,
-            Optional<Track> edible) {
+            Optional<Track> edible,
+            Optional<RipeTimes> ripe) {
         this.drawNumber = drawNumber;
         this.startS = startS;
         this.tracks = new EnumMap<>(tracks);
         this.ageing = ageing;
         this.green = green;
         this.edible = edible;
+        this.ripe = ripe;
     }
 
     /**
@@ -56,7 +59,8 @@ public final class Fate {
                 ends,
                 ageing,
                 green.map(Track::brief),
-                edible.map(Track::brief));
+                edible.map(Track::brief),
+                ripe);
     }
 
     /**
@@ -142,6 +146,28 @@ public final class Fate {
     public OptionalDouble edibleDaysLeft(double fromS) {
         return edible.map(track -> OptionalDouble.of(days(track.reachesS(1), fromS)))
                 .orElse(OptionalDouble.empty());
+    }
+
+    /**
+     * Returns the days until a ripening fruit is ripe.
+     *
+     * @param fromS counted from here, s
+     * @return days, 0 where it is ripe already, {@link #MOST_DAYS} where heat keeps it from
+     *     ripening; empty where no times of ripening are printed or its ripeness is unknown
+     */
+    public OptionalDouble ripeDaysFrom(double fromS) {
+        return ripe.map(times -> OptionalDouble.of(days(times.ripeS(), fromS)))
+                .orElse(OptionalDouble.empty());
+    }
+
+    /**
+     * Returns whether a ripening fruit is ripe at a time, and not overripe.
+     *
+     * @param atS time, s
+     * @return true if ripe; false too where no times of ripening are printed
+     */
+    public boolean ripeAt(double atS) {
+        return ripe.isPresent() && ripe.get().ripeAt(atS);
     }
 
     private static double days(double endS, double fromS) {

@@ -30,19 +30,47 @@ final class Following {
         if (history.knowsMass()) {
             tracks.put(Mechanism.WATER_LOSS, weighed());
         }
+        double startsS = model.span().twoClocks() ? startOfRipening() : Double.POSITIVE_INFINITY;
+        Optional<RipeningCourse> course =
+                paces.ripening()
+                        .map(pace -> new RipeningCourse(paces, history, beyond, true, startsS));
+        Optional<Track> edible = course.map(RipeningCourse::toOverripe);
+        if (model.endsOverripe()) {
+            overripe(edible.orElseThrow());
+        }
         Optional<Track> green = Optional.empty();
-        Optional<Track> edible = Optional.empty();
         if (model.span().twoClocks()) {
-            green = Optional.of(clock(paces.greenShare(), 1));
-            edible = Optional.of(clock(paces.wholeShare(), 1 / (1 + paces.ripeShare())));
+            green = Optional.of(clock(paces.greenShare(), 1, startsS));
+            edible =
+                    edible.or(
+                            () ->
+                                    Optional.of(
+                                            clock(
+                                                    paces.wholeShare(),
+                                                    1 / (1 + paces.ripeShare()),
+                                                    startsS)));
             tracks.put(
                     Mechanism.ETHYLENE, model.span().shippedGreen() ? green.get() : edible.get());
-        } else if (model.span().pastGreen()) {
+        } else if (model.span().pastGreen() && edible.isEmpty()) {
             Track ageing = track(paces.clock());
             edible = Optional.of(tracks.getOrDefault(Mechanism.ETHYLENE, ageing));
         }
         return new Fate(
-                paces.draw().number(), history.timeS(0), tracks, paces.clock(), green, edible);
+                paces.draw().number(),
+                history.timeS(0),
+                tracks,
+                paces.clock(),
+                green,
+                edible,
+                course.map(RipeningCourse::times));
+    }
+
+    /** Ageing alone and with ethylene, of a lot that ends overripe. */
+    private void overripe(Track withEthylene) {
+        RipeningCourse alone =
+                new RipeningCourse(paces, history, beyond, false, Double.POSITIVE_INFINITY);
+        tracks.put(paces.clock(), alone.toOverripe());
+        tracks.computeIfPresent(Mechanism.ETHYLENE, (mechanism, track) -> withEthylene);
     }
 
     private Track track(Mechanism mechanism) {
@@ -51,11 +79,10 @@ final class Following {
     }
 
     /** A clock of ripening fruit, set on to a share when ethylene starts it. */
-    private Track clock(double share, double onceRipening) {
+    private Track clock(double share, double onceRipening, double startsS) {
         Wear wear = paces.aged(share, true);
-        LotAtDoor door = model.lot().door();
-        double start = door.usedFraction().orElse(paces.beforeArrival(wear));
-        return Track.of(history, wear, start, beyond).jumpedTo(onceRipening, startOfRipening());
+        return Track.of(history, wear, paces.usedAtDoor(wear), beyond)
+                .jumpedTo(onceRipening, startsS);
     }
 
     private double startOfRipening() {

@@ -7,6 +7,7 @@ import org.wardon.keeping.chilling.Chilling;
 import org.wardon.keeping.dormancy.Dormancy;
 import org.wardon.keeping.ethylene.Response;
 import org.wardon.keeping.life.LifeCurve;
+import org.wardon.keeping.ripening.Ripening;
 import org.wardon.lots.LotHistory;
 import org.wardon.produce.Commodity;
 import org.wardon.produce.Ripeness;
@@ -27,6 +28,7 @@ public final class KeepingModel {
     private final Response response;
     private final LifeSpan span;
     private final WaterLimit water;
+    private final Optional<Ripening> ripening;
     private final double freezingC;
 
     private KeepingModel(KeptLot lot) {
@@ -39,6 +41,7 @@ public final class KeepingModel {
         dormancy = Dormancy.of(commodity);
         response = Response.of(commodity, lot.door().ripeness());
         water = new WaterLimit(commodity, curve);
+        ripening = Ripening.of(commodity, lot.door().ripeness());
         freezingC = freezing(commodity);
     }
 
@@ -197,6 +200,20 @@ public final class KeepingModel {
      */
     public Response response() {
         return response;
+    }
+
+    /**
+     * Returns how the lot ripens.
+     *
+     * @return its ripening; empty where no times are printed or nobody said how ripe it is
+     */
+    public Optional<Ripening> ripening() {
+        return ripening;
+    }
+
+    /** Whether the lot ends when it is overripe by printed times of ripening. */
+    boolean endsOverripe() {
+        return ripening.isPresent() && !span.shippedGreen();
     }
 
     LifeCurve curve() {

@@ -19,6 +19,7 @@ import org.wardon.produce.Reason;
  * @param mechanisms days left by each mechanism
  * @param greenLeft days until ripening can no longer be held; empty where it does not apply
  * @param edibleLeft days until overripe; empty where it does not apply
+ * @param ripeFrom days until ripe; empty where no times of ripening are printed
  * @param restsOn what the life rests on
  * @param reasons why, and what to know
  */
@@ -30,6 +31,7 @@ public record Outlook(
         Map<Mechanism, Spread> mechanisms,
         Optional<Spread> greenLeft,
         Optional<Spread> edibleLeft,
+        Optional<Spread> ripeFrom,
         RestsOn restsOn,
         List<Reason> reasons) {
     /** Copies map and list. */
@@ -63,6 +65,7 @@ public record Outlook(
                 each,
                 clock(plain.greenDaysLeft(fromS), draws, fate -> fate.greenDaysLeft(fromS)),
                 clock(plain.edibleDaysLeft(fromS), draws, fate -> fate.edibleDaysLeft(fromS)),
+                clock(plain.ripeDaysFrom(fromS), draws, fate -> fate.ripeDaysFrom(fromS)),
                 basis.restsOn(),
                 basis.reasons());
     }
@@ -99,6 +102,18 @@ public record Outlook(
     public static double shareSound(List<Fate> draws, double atS) {
         double sound = draws.stream().filter(fate -> fate.soundAt(atS)).count();
         return sound / draws.size();
+    }
+
+    /**
+     * Returns the share of draws in which a fruit is ripe and not overripe.
+     *
+     * @param draws fates of the draws
+     * @param atS time, s
+     * @return 0 to 1
+     */
+    public static double shareRipe(List<Fate> draws, double atS) {
+        double ripe = draws.stream().filter(fate -> fate.ripeAt(atS)).count();
+        return ripe / draws.size();
     }
 
     /**

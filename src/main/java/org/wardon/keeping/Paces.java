@@ -10,6 +10,7 @@ import org.wardon.keeping.chilling.Injury;
 import org.wardon.keeping.dormancy.Dormancy;
 import org.wardon.keeping.ethylene.Response;
 import org.wardon.keeping.life.Ageing;
+import org.wardon.keeping.ripening.RipeningPace;
 import org.wardon.lots.TranspirationLaw;
 
 /**
@@ -28,6 +29,7 @@ public final class Paces {
     private final double referencePpm;
     private final double waterLimit;
     private final Mechanism clock;
+    private final Optional<RipeningPace> ripening;
     private final Map<Mechanism, Wear> wears = new EnumMap<>(Mechanism.class);
     private final Map<Mechanism, Double> starts = new EnumMap<>(Mechanism.class);
 
@@ -37,6 +39,7 @@ public final class Paces {
         door = model.lot().door();
         ageing = model.curve().at(draw);
         referencePpm = model.response().referencePpm(draw);
+        ripening = model.ripening().map(printed -> printed.at(draw));
         waterLimit = model.water().fraction(model.lot().transpiration(), ageing, draw);
         clock = model.span().shippedGreen() ? Mechanism.RIPENING : Mechanism.SENESCENCE;
         age();
@@ -52,11 +55,29 @@ public final class Paces {
     }
 
     private void age() {
-        double life = model.span().shippedGreen() ? greenShare() : wholeShare();
-        putLife(clock, aged(life, false));
+        putLife(clock, lived(false));
         if (model.span().twoClocks() || model.response().sensitive()) {
-            putLife(Mechanism.ETHYLENE, aged(life, true));
+            putLife(Mechanism.ETHYLENE, lived(true));
         }
+    }
+
+    private Wear lived(boolean withEthylene) {
+        if (model.endsOverripe()) {
+            return throughRipe(ripening.orElseThrow(), withEthylene);
+        }
+        return aged(model.span().shippedGreen() ? greenShare() : wholeShare(), withEthylene);
+    }
+
+    /** Green, ripening and ripe in one condition: as long as the legs together. */
+    private Wear throughRipe(RipeningPace pace, boolean withEthylene) {
+        Wear green = greenClock(withEthylene);
+        double greenLeg = model.span().twoClocks() ? pace.startsAtGreenShare() : 0;
+        double toRipe = 1 - pace.atDoor();
+        return (mean, skin, humid, ppm) -> {
+            double greenDays = greenLeg > 0 ? greenLeg / green.perDay(mean, skin, humid, ppm) : 0;
+            double days = toRipe / pace.softensPerDay(mean) + 1 / pace.spoilsPerDay(mean);
+            return 1 / (greenDays + days);
+        };
     }
 
     /** Ageing over a share of the published life. */
@@ -66,6 +87,17 @@ public final class Paces {
                 ? (mean, skin, humid, ppm) ->
                         ageing.perDay(mean) / (share * response.lifeFactor(ppm, referencePpm))
                 : (mean, skin, humid, ppm) -> ageing.perDay(mean) / share;
+    }
+
+    /**
+     * The clock by which ripening starts by itself. Ethylene hastens it up to the level that starts
+     * ripening; what is above it acts through its own 24 hours, and where it is too cold for them
+     * not at all.
+     */
+    Wear greenClock(boolean withEthylene) {
+        Wear clock = aged(greenShare(), withEthylene);
+        double most = model.response().triggerPpm(draw).orElse(Double.POSITIVE_INFINITY);
+        return (mean, skin, humid, ppm) -> clock.perDay(mean, skin, humid, Math.min(ppm, most));
     }
 
     /** Share of the published life until a green fruit ripens, or of the only clock there is. */
@@ -119,6 +151,21 @@ public final class Paces {
     private void put(Mechanism mechanism, Wear wear) {
         wears.put(mechanism, wear);
         starts.put(mechanism, beforeArrival(wear));
+    }
+
+    /** Share used when the history begins: as told, else since harvest. */
+    double usedAtDoor(Wear wear) {
+        return door.usedFraction().orElse(beforeArrival(wear));
+    }
+
+    /** Days between harvest and arrival; none where nobody asks. */
+    double daysBeforeArrival() {
+        return door.age().map(age -> age.hours(draw) / HOURS_A_DAY).orElse(0.0);
+    }
+
+    /** How the lot ripens; empty where no times are printed. */
+    Optional<RipeningPace> ripening() {
+        return ripening;
     }
 
     /** Share used between harvest and arrival. */

@@ -32,7 +32,7 @@ final class RipeningLot {
         trigger = new Trigger(level.orElse(Double.POSITIVE_INFINITY), model.lowestSafeC());
         Paces paces = model.paces(draw);
         green = paces.aged(paces.greenShare(), true);
-        greenUsed = model.lot().door().usedFraction().orElse(paces.beforeArrival(green));
+        greenUsed = paces.usedAtDoor(green);
     }
 
     private boolean here(double atS) {

@@ -55,6 +55,11 @@ final class Track {
                 timeS, used, Math.max(0, slope(timeS, used, window)), Double.POSITIVE_INFINITY, 0);
     }
 
+    /** Takes shares that were worked out elsewhere with the rate beyond their end, 1/day. */
+    static Track on(double[] timeS, double[] used, double beyondPerDay) {
+        return new Track(timeS, used, beyondPerDay, Double.POSITIVE_INFINITY, 0);
+    }
+
     private static double meanRate(
             LotHistory history, Wear wear, int i, double before, double after) {
         double meanK = Math.abs(history.meanC(i) - history.meanC(i - 1));

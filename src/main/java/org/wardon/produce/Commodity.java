@@ -20,6 +20,7 @@ import org.wardon.produce.rows.OdourPair;
 import org.wardon.produce.rows.Q10Row;
 import org.wardon.produce.rows.RespirationPower;
 import org.wardon.produce.rows.RespirationRow;
+import org.wardon.produce.rows.RipeningRow;
 import org.wardon.produce.rows.SproutingRow;
 import org.wardon.produce.rows.TranspirationRow;
 
@@ -142,6 +143,7 @@ public record Commodity(
      * @param curing curing rows
      * @param ambient lives at market temperature
      * @param curves fitted curves of life, that of the commodity as a whole first
+     * @param ripening printed times of ripening
      */
     public record Keeping(
             List<LifeRow> lives,
@@ -151,7 +153,8 @@ public record Commodity(
             List<SproutingRow> sprouting,
             List<CuringRow> curing,
             List<AmbientLife> ambient,
-            List<LifeCurveRow> curves) {
+            List<LifeCurveRow> curves,
+            List<RipeningRow> ripening) {
         /** Copies the lists. */
         public Keeping {
             lives = List.copyOf(lives);
@@ -162,6 +165,7 @@ public record Commodity(
             curing = List.copyOf(curing);
             ambient = List.copyOf(ambient);
             curves = List.copyOf(curves);
+            ripening = List.copyOf(ripening);
         }
     }
 

@@ -11,6 +11,7 @@ import org.wardon.produce.rows.CuringRow;
 import org.wardon.produce.rows.LifeCurveRow;
 import org.wardon.produce.rows.LifeRow;
 import org.wardon.produce.rows.Q10Row;
+import org.wardon.produce.rows.RipeningRow;
 import org.wardon.produce.rows.SproutingRow;
 
 /** Lives, chilling, sprouting and curing of a commodity. */
@@ -43,6 +44,7 @@ final class KeepingRows {
     private final Grouped<CuringRow> curing;
     private final Grouped<AmbientLife> ambient;
     private final Grouped<LifeCurveRow> curves;
+    private final Grouped<RipeningRow> ripening;
 
     KeepingRows(Selection selection) {
         lives = selection.present(Query.table("life_temperature"), KeepingRows::life);
@@ -55,6 +57,7 @@ final class KeepingRows {
         curing = selection.rows(CURING, KeepingRows::curing);
         ambient = selection.rows(Query.table("ambient_practice"), KeepingRows::ambient);
         curves = selection.rows(Query.table("life_curves"), KeepingRows::curve);
+        ripening = selection.rows(Query.table("ripening"), KeepingRows::ripening);
     }
 
     private static Query floors(int later) {
@@ -75,7 +78,8 @@ final class KeepingRows {
                 sprouting.of(id),
                 curing.of(id),
                 ambient.of(id),
-                curves.of(id));
+                curves.of(id),
+                ripening.of(id));
     }
 
     private static Stream<ChillingFloor> sorted(List<ChillingFloor> floors) {
@@ -156,6 +160,16 @@ final class KeepingRows {
                 row.fact("days_low", "days_high", "day"),
                 row.text("source_id"),
                 row.text("note"));
+    }
+
+    private static RipeningRow ripening(Row row) {
+        return new RipeningRow(
+                row.text("leg"),
+                row.value("temp_low_C"),
+                row.number("temp_high_C"),
+                row.fact("days_low", "days_high", "day"),
+                row.text("ethylene").equals("yes"),
+                row.text("source_id"));
     }
 
     private static AmbientLife ambient(Row row) {

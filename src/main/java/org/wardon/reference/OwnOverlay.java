@@ -121,7 +121,8 @@ final class OwnOverlay {
                 of.sprouting(),
                 of.curing(),
                 of.ambient(),
-                of.curves());
+                of.curves(),
+                of.ripening());
     }
 
     private static Commodity.Water limits(Commodity.Water of, Fact own) {

@@ -23,7 +23,8 @@ class DrawsTest {
                     Draw::market,
                     Draw::ripening,
                     Draw::dormancy,
-                    Draw::curing);
+                    Draw::curing,
+                    Draw::ripeningPace);
 
     @Test
     void sameSeedGivesTheSameDrawsAndAnotherSeedOthers() {
