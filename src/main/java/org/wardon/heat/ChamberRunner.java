@@ -82,7 +82,8 @@ final class ChamberRunner implements Integrator.StepListener {
         this.y = start;
         network.accuracy(accuracy.lotK(), accuracy.airK());
         network.settle(y);
-        integrator = new Integrator(network, EDGES, FIRST_STEP_S, SHORTEST_STEP_S);
+        integrator =
+                new Integrator(network, accuracy.steps(), EDGES, FIRST_STEP_S, SHORTEST_STEP_S);
         totals = integrator.totals();
         thermostats = new SwitchedCoolers(network);
         watering = new Watering(run, network, y);

@@ -32,7 +32,7 @@ final class GivenAirRunner implements Integrator.StepListener, Integrator.Trigge
         Accuracy accuracy = air.rowHours() > 1 ? Accuracy.SKETCHED : Accuracy.USUAL;
         network.accuracy(accuracy.lotK(), accuracy.airK());
         rowS = 3600.0 * air.rowHours();
-        integrator = new Integrator(network, 1, FIRST_STEP_S, SHORTEST_STEP_S);
+        integrator = new Integrator(network, accuracy.steps(), 1, FIRST_STEP_S, SHORTEST_STEP_S);
         int rows = (int) Math.ceil((endS - startS()) / rowS) + 3;
         recorder = new LotRecorder(stay, network.lot(), rows);
     }

@@ -12,6 +12,8 @@ package org.wardon.heat;
  */
 public record IceLedger(
         double meltedJ, double refrozenJ, double startKg, double endKg, double latentJkg) {
+    private static final double ROUNDED = 1e-6;
+
     /**
      * Returns the ice that melted.
      *
@@ -33,10 +35,11 @@ public record IceLedger(
     /**
      * Returns the error of the balance.
      *
-     * @return share of what melted and was made; 0 where nothing was
+     * @return share of what melted and was made, or of a millionth of the ice where that is more: a
+     *     smaller change is told by states of that size to a few digits only
      */
     public double errorShare() {
-        double through = meltedKg() + refrozenKg();
+        double through = Math.max(meltedKg() + refrozenKg(), ROUNDED * Math.max(startKg, endKg));
         double gained = endKg - startKg;
         return through > 0 ? Math.abs(gained - refrozenKg() + meltedKg()) / through : 0;
     }

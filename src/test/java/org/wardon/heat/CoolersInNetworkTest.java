@@ -252,7 +252,7 @@ class CoolersInNetworkTest {
                                     150, 150, ice().material(), 30, 20, ice().recharge(), control));
             ChamberRun mixed = run.withControlMode(ControlMode.AS_BUILT).withCoolers(kinds);
             ChamberNetwork built = RunCompiler.network(mixed, false);
-            built.accuracy(1e-6, 1e-5);
+            built.accuracy(1e-8, 1e-7);
             double[] y = built.start(24, 0.01);
             Integrator integrator = new Integrator(built, 1, 1, 1e-6);
             SwitchedCoolers thermostats = new SwitchedCoolers(built);

@@ -8,7 +8,7 @@ public final class Integrator {
     private static final double SAFETY = 0.85;
 
     /** The same for a step that is tried again behind the next edge of its kind. */
-    private static final double CAREFUL = 0.8;
+    private static final double CAREFUL = 0.9;
 
     /** An error so small that the step may grow by much more the next time. */
     private static final double SMALL = 0.02;
@@ -16,7 +16,7 @@ public final class Integrator {
     /** Steps behind an edge that are remembered. */
     private static final int REMEMBERED = 8;
 
-    /** The error of a step is not trusted to fall faster than to this share of its cube law. */
+    /** The error of a step is not trusted to fall faster than to this share of its power law. */
     private static final double STEEPEST = 0.05;
 
     private static final double SHORTEST = 0.15;
@@ -45,7 +45,7 @@ public final class Integrator {
     private long rejected;
 
     /**
-     * Makes room for a system.
+     * Makes room for a system, to be followed in fine steps.
      *
      * @param system what to integrate; its tree must be complete
      * @param edges kinds of edges {@link #restart} will tell of, at least 1
@@ -53,15 +53,37 @@ public final class Integrator {
      * @param shortestStep a step the error control would make shorter than this stops the run
      */
     public Integrator(TreeSystem system, int edges, double firstStep, double shortestStep) {
+        this(system, Steps.FINE, edges, firstStep, shortestStep);
+    }
+
+    /**
+     * Makes room for a system.
+     *
+     * @param system what to integrate; its tree must be complete
+     * @param steps what its steps are like
+     * @param edges kinds of edges {@link #restart} will tell of, at least 1
+     * @param firstStep first step tried, above 0
+     * @param shortestStep a step the error control would make shorter than this stops the run
+     */
+    public Integrator(
+            TreeSystem system, Steps steps, int edges, double firstStep, double shortestStep) {
         this.system = system;
-        this.method = new Rosenbrock(system);
+        this.method = steps == Steps.LONG ? new StifflyAccurate(system) : new FourthOrder(system);
         this.totals = new double[system.flows()];
         this.learned = new double[edges][REMEMBERED];
-        for (double[] steps : learned) {
-            steps[0] = firstStep;
+        for (double[] known : learned) {
+            known[0] = firstStep;
         }
         this.nextStep = firstStep;
         this.shortestStep = shortestStep;
+    }
+
+    /** What most steps of a run are like. */
+    public enum Steps {
+        /** They follow the fast modes behind edges. */
+        FINE,
+        /** They are long beside them. */
+        LONG
     }
 
     /** Hears of each step taken. */
@@ -156,7 +178,7 @@ public final class Integrator {
             }
             rejected++;
             refused = true;
-            double factor = error < 1e12 ? SAFETY / Math.cbrt(error) : SHORTEST;
+            double factor = error < 1e12 ? SAFETY / method.root(error) : SHORTEST;
             h *= Math.max(SHORTEST, Math.min(factor, possible ? 0.8 : 0.4));
             if (!(h > shortestStep)) {
                 throw new StepTooShort(now, h, method.worstNode);
@@ -178,12 +200,12 @@ public final class Integrator {
      */
     private void chooseNext(double h, double error, boolean refused) {
         double e = Math.max(error, 1e-6);
-        double factor = SAFETY / Math.cbrt(e);
+        double factor = SAFETY / method.root(e);
         if (lastStep > 0) {
             double grown = h / lastStep;
-            double trend = e / (lastError * grown * grown * grown);
+            double trend = e / (lastError * method.power(grown));
             if (trend < 1) {
-                factor /= Math.cbrt(Math.max(trend, STEEPEST));
+                factor /= method.root(Math.max(trend, STEEPEST));
             } else if (e > lastError) {
                 factor *= Math.pow(lastError / e, 0.2);
             }
@@ -202,12 +224,12 @@ public final class Integrator {
     /** Remembers what would have gone best here; returns what to try next. */
     private double learn(double h, double e, boolean cut, boolean refused, double proposed) {
         double[] steps = learned[edge];
-        double most = e < SMALL ? 4 : 1.5;
-        double best = h * Math.min(Math.max(CAREFUL / Math.cbrt(e), 0.7), refused ? 1 : most);
+        double most = e < SMALL ? 4 : 2;
+        double best = h * Math.min(Math.max(CAREFUL / method.root(e), 0.7), refused ? 1 : most);
         steps[sinceEdge] = cut ? Math.max(best, steps[sinceEdge]) : best;
         sinceEdge++;
         boolean known = sinceEdge < REMEMBERED && steps[sinceEdge] > 0;
-        return known ? Math.min(steps[sinceEdge], 2 * Math.max(proposed, h)) : proposed;
+        return known ? Math.min(steps[sinceEdge], 3 * Math.max(proposed, h)) : proposed;
     }
 
     /**
