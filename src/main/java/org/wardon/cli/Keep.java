@@ -98,6 +98,18 @@ final class Keep implements Callable<Integer> {
             description = "Whether bulbs or roots were cured (default: unknown).")
     private @Nullable YesNo cured;
 
+    @Option(
+            names = "--ethylene",
+            paramLabel = "PPM",
+            description = "With --at: ethylene in the air, ppm (default: clean outdoor air).")
+    private @Nullable Double ethylenePpm;
+
+    @Option(
+            names = "--ripe-in",
+            paramLabel = "DAYS",
+            description = "Is it ripe, and not overripe, in so many days, and at what setting?")
+    private @Nullable Double ripeInDays;
+
     @Option(names = "--json", description = "Answer in JSON.")
     private boolean json;
 
@@ -130,6 +142,7 @@ final class Keep implements Callable<Integer> {
             condition = new KeepRequest.Steady(where.atC, told);
         } else {
             refuse("--days", days);
+            refuse("--ethylene", ethylenePpm);
             condition = new KeepRequest.Logged(where.history, number(thenC));
         }
         return new KeepRequest(
@@ -139,7 +152,9 @@ final class Keep implements Callable<Integer> {
                 number(usedPct),
                 Optional.ofNullable(knownLife),
                 ripeness,
-                Optional.ofNullable(cured).map(answer -> answer == YesNo.YES));
+                Optional.ofNullable(cured).map(answer -> answer == YesNo.YES),
+                number(ethylenePpm),
+                number(ripeInDays));
     }
 
     private static void refuse(String option, @Nullable Double value) {
@@ -148,7 +163,7 @@ final class Keep implements Callable<Integer> {
                     option,
                     "",
                     "it does not go with the other options given",
-                    "accepted: --days with --at, --then with --history");
+                    "accepted: --days and --ethylene with --at, --then with --history");
         }
     }
 

@@ -3,6 +3,7 @@ package org.wardon.cli;
 import org.wardon.advice.outlook.KeepReport;
 import org.wardon.advice.wording.Words;
 import org.wardon.files.forecast.KeepAnswer;
+import org.wardon.files.forecast.Quantiles;
 import org.wardon.produce.Reason;
 
 /** The answer of {@code keep} for a person. */
@@ -43,6 +44,10 @@ final class KeepPage {
                                 + ". The figure rests on "
                                 + words.text("rests-on." + report.restsOn())
                                 + "."));
+        answer.ripeFrom().ifPresent(from -> page.append(Paragraph.hanging("", ripe(answer, from))));
+        for (Reason reason : report.ripe()) {
+            page.append(Paragraph.entry("", words.sentence(reason), reason.sourceId()));
+        }
         if (answer.chillingRisk().probability() > 0) {
             page.append(
                     Paragraph.hanging(
@@ -70,6 +75,17 @@ final class KeepPage {
             }
         }
         return page.toString();
+    }
+
+    private String ripe(KeepAnswer answer, Quantiles from) {
+        String edible =
+                answer.edibleLeft()
+                        .map(until -> "; past eating after " + words.range(until))
+                        .orElse("");
+        if (Words.isCapped(from.p50())) {
+            return "It does not ripen as it should" + edible + ".";
+        }
+        return (from.p90() == 0 ? "Ripe now" : "Ripe after " + words.range(from)) + edible + ".";
     }
 
     private String safe(KeepAnswer answer) {

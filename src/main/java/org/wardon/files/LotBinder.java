@@ -1,5 +1,6 @@
 package org.wardon.files;
 
+import java.time.LocalDate;
 import java.time.LocalDateTime;
 import java.time.temporal.ChronoUnit;
 import java.util.List;
@@ -123,7 +124,8 @@ final class LotBinder {
                 inputs.number(lot, "marketDays", Defaults.MARKET_DAYS),
                 inputs.maybe(lot, "marketC"),
                 lot.at("purpose").text().map(word -> Purpose.valueOf(constant(word))),
-                inputs.number(lot, "pricePerKg", Defaults.PRICE_PER_KG));
+                inputs.number(lot, "pricePerKg", Defaults.PRICE_PER_KG),
+                lot.at("ripeOn").text().map(LocalDate::parse));
     }
 
     static String constant(String word) {

@@ -1,5 +1,6 @@
 package org.wardon.files;
 
+import java.time.LocalDate;
 import java.time.LocalDateTime;
 import java.util.List;
 import java.util.Optional;
@@ -44,6 +45,7 @@ final class LotRules {
             return;
         }
         harvested(lot, arrives.get());
+        ripeOn(lot, arrives.get());
         Optional<LocalDateTime> end = Times.end(plan);
         if (end.isPresent() && arrivesAt.given() && !arrives.get().isBefore(end.get())) {
             faults.add(
@@ -66,6 +68,17 @@ final class LotRules {
                     harvested.path(),
                     "is " + time.get() + ", after the lot arrives at " + arrives,
                     "accepted: a time up to its arrival");
+        }
+    }
+
+    private void ripeOn(Part lot, LocalDateTime arrives) {
+        Part ripeOn = lot.at("ripeOn");
+        Optional<LocalDate> day = Times.dayAt(ripeOn);
+        if (day.isPresent() && day.get().isBefore(arrives.toLocalDate())) {
+            faults.add(
+                    ripeOn.path(),
+                    "is " + day.get() + ", before the lot arrives at " + arrives,
+                    "accepted: a day from its arrival on");
         }
     }
 

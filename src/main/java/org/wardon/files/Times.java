@@ -1,6 +1,7 @@
 package org.wardon.files;
 
 import java.time.DateTimeException;
+import java.time.LocalDate;
 import java.time.LocalDateTime;
 import java.util.Optional;
 import org.wardon.files.json.Part;
@@ -14,6 +15,14 @@ final class Times {
     static Optional<LocalDateTime> at(Part part) {
         try {
             return part.text().map(LocalDateTime::parse);
+        } catch (DateTimeException e) {
+            return Optional.empty();
+        }
+    }
+
+    static Optional<LocalDate> dayAt(Part part) {
+        try {
+            return part.text().map(LocalDate::parse);
         } catch (DateTimeException e) {
             return Optional.empty();
         }

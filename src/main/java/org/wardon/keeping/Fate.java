@@ -170,6 +170,16 @@ public final class Fate {
         return ripe.isPresent() && ripe.get().ripeAt(atS);
     }
 
+    /**
+     * Returns whether a ripening fruit is past eating at a time.
+     *
+     * @param atS time, s
+     * @return true if overripe; false too where no times of ripening are printed
+     */
+    public boolean overripeAt(double atS) {
+        return ripe.isPresent() && atS >= ripe.get().overripeS();
+    }
+
     private static double days(double endS, double fromS) {
         return Math.min(MOST_DAYS, Math.max(0, (endS - fromS) / Timeline.DAY_S));
     }

@@ -6,6 +6,7 @@ import org.wardon.air.Timeline;
 import org.wardon.keeping.chilling.Chilling;
 import org.wardon.keeping.dormancy.Dormancy;
 import org.wardon.keeping.ethylene.Response;
+import org.wardon.keeping.ripening.Ripening;
 import org.wardon.lots.LotHistory;
 import org.wardon.produce.Commodity;
 import org.wardon.produce.Reason;
@@ -19,6 +20,10 @@ final class Grounds {
     private static final double WET_LONG_H = 24;
     private static final double SWEETENS_BELOW_C = 4;
     private static final double HEAT_KILLS_C = 42;
+
+    /** Heat of field and road that lasts no longer is not told of ripening (assumption). */
+    private static final double HOT_DAYS = 0.5;
+
     private static final double DAMP_FRACTION = 0.75;
 
     private final KeepingModel model;
@@ -34,7 +39,11 @@ final class Grounds {
 
     Basis basis() {
         RestsOn rests = restsOn();
-        say("life-rests-on", model.curve().level().sourceId(), Argument.text(rests.word()));
+        String source =
+                rests == RestsOn.RIPENING_TIMES
+                        ? model.ripening().orElseThrow().sourceId()
+                        : model.curve().level().sourceId();
+        say("life-rests-on", source, Argument.text(rests.word()));
         if (rests == RestsOn.EXTRAPOLATED) {
             say(
                     "life-extrapolated",
@@ -43,6 +52,7 @@ final class Grounds {
         }
         door();
         model.chilling().ifPresent(this::chilling);
+        model.ripening().ifPresent(this::ripening);
         dormancy();
         ethylene();
         weather();
@@ -50,6 +60,9 @@ final class Grounds {
     }
 
     private RestsOn restsOn() {
+        if (model.endsOverripe() && !model.span().twoClocks()) {
+            return RestsOn.RIPENING_TIMES;
+        }
         RestsOn rests = model.curve().restsOn();
         double limit = model.curve().highestPublishedC() + BEYOND_K;
         boolean spans = model.curve().spansTemperatures();
@@ -63,7 +76,7 @@ final class Grounds {
         if (model.span().unknown()) {
             say("ripeness-unknown", ASSUMPTION);
         }
-        if (model.span().pastGreen()) {
+        if (model.span().pastGreen() && model.ripening().isEmpty()) {
             say("ripe-keeps-less", ASSUMPTION);
         }
         if (door.usedFraction().isEmpty() && door.age().map(Age::guessed).orElse(false)) {
@@ -96,6 +109,14 @@ final class Grounds {
         }
         if (model.lot().commodity().id().equals("basil")) {
             say("chilling-hardening-not-counted", chilling.zone().sourceId());
+        }
+    }
+
+    private void ripening(Ripening ripening) {
+        say("ripens-as-printed", ripening.sourceId());
+        double limit = ripening.suffersAboveC();
+        if (days(i -> history.meanC(i) > limit) > HOT_DAYS) {
+            say("ripening-in-heat", ripening.heatSourceId(), Argument.of(limit, "C"));
         }
     }
 

@@ -10,6 +10,8 @@ public enum RestsOn {
     POOLED_SLOPE("pooled-slope"),
     /** One life in the handbook's condition and the generic curve. */
     HANDBOOK_LIFE("handbook-life"),
+    /** Printed times of ripening. */
+    RIPENING_TIMES("ripening-times"),
     /** No life printed; that of its plant part or kin. */
     CLASS("class"),
     /** Mostly judged at temperatures above the highest published one. */

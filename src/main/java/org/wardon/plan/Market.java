@@ -1,5 +1,6 @@
 package org.wardon.plan;
 
+import java.time.LocalDate;
 import java.util.Optional;
 import java.util.OptionalDouble;
 import org.wardon.errors.Require;
@@ -11,9 +12,14 @@ import org.wardon.errors.Require;
  * @param temperatureC on the way and at the market, °C; absent: as without the chamber
  * @param purpose what a ripening lot is kept for, where the plan says
  * @param pricePerKg value of a sound kilogram, currency/kg
+ * @param ripeOn day on which a ripening lot is wanted ripe, where the plan says
  */
 public record Market(
-        double days, OptionalDouble temperatureC, Optional<Purpose> purpose, double pricePerKg) {
+        double days,
+        OptionalDouble temperatureC,
+        Optional<Purpose> purpose,
+        double pricePerKg,
+        Optional<LocalDate> ripeOn) {
     /** Checks the bounds. */
     public Market {
         Require.within("marketDays", days, 0, 60, "day", "");

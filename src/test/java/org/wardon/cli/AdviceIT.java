@@ -110,12 +110,18 @@ class AdviceIT {
                 "lots[]",
                 ("id chamber valueKept coolHalfHours coolSevenEighthsHours temperatureC"
                                 + " respirationKWh weightLossPct lifeUsedPct restsOn greenLeft"
-                                + " edibleLeft daysLeft daysLeftWithout daysGained limitedBy"
+                                + " edibleLeft ripeFrom ripeOn daysLeft daysLeftWithout daysGained limitedBy"
                                 + " chillingRisk leaveBy")
                         .split(" "));
         JsonNames.check(forecast, "lots[].temperatureC", "mean", "min", "max", "atEnd");
         for (String name :
-                List.of("greenLeft", "edibleLeft", "daysLeft", "daysLeftWithout", "daysGained")) {
+                List.of(
+                        "greenLeft",
+                        "edibleLeft",
+                        "ripeFrom",
+                        "daysLeft",
+                        "daysLeftWithout",
+                        "daysGained")) {
             JsonNames.check(forecast, "lots[]." + name, "p10", "p50", "p90");
         }
         JsonNames.check(forecast, "lots[].chillingRisk", "probability", "safeDays");

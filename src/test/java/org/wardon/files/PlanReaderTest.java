@@ -295,7 +295,12 @@ class PlanReaderTest {
                         Optional.of(new KnownLife(9, 10))),
                 mango.atDoor());
         assertEquals(
-                new Market(3, OptionalDouble.of(26), Optional.of(Purpose.SELL_RIPE), 1.2),
+                new Market(
+                        3,
+                        OptionalDouble.of(26),
+                        Optional.of(Purpose.SELL_RIPE),
+                        1.2,
+                        Optional.of(LocalDate.parse("2026-03-09"))),
                 mango.market());
         LotPlan okra = EXAMPLE.lots().get(1);
         assertEquals(new PackagePlan.HalfCooling(9), okra.packed());

@@ -211,6 +211,8 @@ final class Cautions {
         }
         GasCautions.ofLot(sheet, outcome).forEach(c -> add(c.level(), c.reason()));
         SelfHeating.of(sheet, outcome).ifPresent(c -> add(c.level(), c.reason()));
+        RipeWanted.of(sheet, outcome)
+                .ifPresent(w -> w.told().forEach(c -> add(c.level(), c.reason())));
         for (Reason reason : sheet.restsOn()) {
             if (reason.code().endsWith("-class") || reason.code().endsWith("-broad")) {
                 add(
@@ -227,7 +229,12 @@ final class Cautions {
     private static Level level(String code) {
         return switch (code) {
             case "freezes", "heat-killed" -> Level.DANGER;
-            case "cure-first", "too-damp", "wet-long", "cold-sweetening", "ethylene-harms" ->
+            case "cure-first",
+                    "too-damp",
+                    "wet-long",
+                    "cold-sweetening",
+                    "ethylene-harms",
+                    "ripening-in-heat" ->
                     Level.CAUTION;
             default -> Level.NOTE;
         };

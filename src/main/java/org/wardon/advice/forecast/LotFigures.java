@@ -50,6 +50,8 @@ final class LotFigures {
                 outlook.restsOn().word(),
                 outlook.greenLeft().map(LotFigures::quantiles),
                 outlook.edibleLeft().map(LotFigures::quantiles),
+                outlook.ripeFrom().map(LotFigures::quantiles),
+                RipeWanted.of(sheet, outcome).flatMap(RipeWanted::figures),
                 quantiles(outlook.daysLeft()),
                 quantiles(fates.daysLeftWithout(fromS)),
                 quantiles(fates.daysGained(fromS)),

@@ -15,6 +15,8 @@ import org.wardon.produce.Ripeness;
  * @param knownLife the keeper's own life as {@code DAYS@C}
  * @param ripeness how far it has come
  * @param cured whether it was cured, where that is known
+ * @param ethylenePpm ethylene in the air of one condition, µL/L; empty for clean outdoor air
+ * @param ripeInDays asks whether it is ripe after so many days
  */
 public record KeepRequest(
         String commodity,
@@ -23,7 +25,9 @@ public record KeepRequest(
         OptionalDouble usedPct,
         Optional<String> knownLife,
         Ripeness ripeness,
-        Optional<Boolean> cured) {
+        Optional<Boolean> cured,
+        OptionalDouble ethylenePpm,
+        OptionalDouble ripeInDays) {
     /** What the lot goes through. */
     public sealed interface Condition {}
 

@@ -5,6 +5,7 @@ import java.util.Comparator;
 import java.util.List;
 import java.util.Locale;
 import java.util.Map;
+import java.util.Optional;
 import java.util.regex.Matcher;
 import java.util.regex.Pattern;
 import org.wardon.air.Timeline;
@@ -13,6 +14,7 @@ import org.wardon.errors.Fault;
 import org.wardon.files.forecast.ChillingRisk;
 import org.wardon.files.forecast.KeepAnswer;
 import org.wardon.files.forecast.Quantiles;
+import org.wardon.files.forecast.RipeOn;
 import org.wardon.files.readings.HistoryCsv;
 import org.wardon.files.readings.LoggedHistory;
 import org.wardon.keeping.ChamberEthylene;
@@ -24,6 +26,7 @@ import org.wardon.keeping.KeptLot;
 import org.wardon.keeping.KnownLife;
 import org.wardon.keeping.LotAtDoor;
 import org.wardon.keeping.Outlook;
+import org.wardon.keeping.Purpose;
 import org.wardon.keeping.Spread;
 import org.wardon.lots.ClassValues;
 import org.wardon.lots.LotHistory;
@@ -36,7 +39,7 @@ public final class KeepingAdvice {
     public static final int DRAWS = 128;
 
     /** Seed of the draws: a question without a plan always gets the same. */
-    private static final long SEED = 1;
+    static final long SEED = 1;
 
     /** Humidity at the produce where neither print nor person gives one (assumption). */
     private static final double USUAL_HUMIDITY = 0.9;
@@ -73,18 +76,29 @@ public final class KeepingAdvice {
         Commodity commodity = book.named(request.commodity());
         LotHistory told = history(request, commodity);
         double endS = told.timeS(told.size() - 1);
-        LotHistory followed = carriedOn(request.condition(), told, endS);
+        LotHistory followed = carriedOn(request, told, endS);
         double fromS = request.condition() instanceof KeepRequest.Steady ? 0 : endS;
         KeepingModel model =
                 KeepingModel.of(
                         KeptLot.inOpenPackage(commodity.id(), commodity, door(request), classes));
         Outlook outlook = model.outlook(followed, Draws.seeded(SEED, DRAWS), fromS, endS);
         double usedPct = 100 * model.follow(followed, Draw.MEDIAN).usedAt(endS);
+        Optional<RipeQuestion> ripe =
+                RipeQuestion.of(request, model, followed, fromS, () -> ripening(book));
         return new KeepReport(
                 commodity,
-                answer(commodity, outlook, usedPct),
+                answer(commodity, outlook, usedPct, ripe.map(RipeQuestion::figures)),
                 outlook.restsOn().word(),
-                outlook.reasons());
+                outlook.reasons(),
+                ripe.map(RipeQuestion::told).orElse(List.of()));
+    }
+
+    /** Commodities with printed days to ripe. */
+    private static List<String> ripening(ReferenceBook book) {
+        return book.all().stream()
+                .filter(one -> !one.keeping().ripening().isEmpty())
+                .map(Commodity::id)
+                .toList();
     }
 
     private static void check(KeepRequest request) {
@@ -95,6 +109,8 @@ public final class KeepingAdvice {
         } else if (request.condition() instanceof KeepRequest.Logged logged) {
             logged.thenC().ifPresent(c -> within(faults, "--then", c, -5, 50, "°C"));
         }
+        request.ethylenePpm().ifPresent(ppm -> within(faults, "--ethylene", ppm, 0, 1000, "ppm"));
+        request.ripeInDays().ifPresent(days -> within(faults, "--ripe-in", days, 0, 120, "days"));
         request.humidityPct().ifPresent(pct -> within(faults, "--humidity", pct, 0, 100, "%"));
         request.usedPct().ifPresent(pct -> within(faults, "--used", pct, 0, 100, "%"));
         request.knownLife().ifPresent(text -> checkLife(faults, text));
@@ -139,7 +155,7 @@ public final class KeepingAdvice {
             return LotHistory.constant(
                     steady.atC(),
                     humidity,
-                    ChamberEthylene.OUTDOOR_PPM,
+                    request.ethylenePpm().orElse(ChamberEthylene.OUTDOOR_PPM),
                     steady.days() * Timeline.DAY_S);
         }
         KeepRequest.Logged logged = (KeepRequest.Logged) request.condition();
@@ -160,9 +176,19 @@ public final class KeepingAdvice {
                 .orElse(USUAL_HUMIDITY);
     }
 
-    private static LotHistory carriedOn(
-            KeepRequest.Condition condition, LotHistory told, double endS) {
-        if (condition instanceof KeepRequest.Logged logged && logged.thenC().isPresent()) {
+    private static LotHistory carriedOn(KeepRequest request, LotHistory told, double endS) {
+        boolean gassed = request.ethylenePpm().isPresent();
+        if (gassed && request.condition() instanceof KeepRequest.Steady steady) {
+            // Ethylene takes a day to start ripening, however short the days that are told.
+            double days = Math.max(steady.days(), CARRIED_DAYS);
+            return LotHistory.constant(
+                    steady.atC(),
+                    told.humidityFraction(0),
+                    told.ethylenePpm(0),
+                    days * Timeline.DAY_S);
+        }
+        if (request.condition() instanceof KeepRequest.Logged logged
+                && logged.thenC().isPresent()) {
             int last = told.size() - 1;
             return HistoryLegs.then(
                     told,
@@ -180,6 +206,9 @@ public final class KeepingAdvice {
         if (request.usedPct().isPresent()) {
             door = door.withUsed(request.usedPct().getAsDouble() / 100);
         }
+        if (request.ripeInDays().isPresent()) {
+            door = door.withPurpose(Purpose.SELL_RIPE);
+        }
         if (request.cured().isPresent()) {
             door = door.withCured(request.cured().get());
         }
@@ -196,7 +225,8 @@ public final class KeepingAdvice {
         return door;
     }
 
-    private static KeepAnswer answer(Commodity commodity, Outlook outlook, double usedPct) {
+    private static KeepAnswer answer(
+            Commodity commodity, Outlook outlook, double usedPct, Optional<RipeOn> ripe) {
         List<KeepAnswer.Mechanism> mechanisms =
                 outlook.mechanisms().entrySet().stream()
                         .sorted(Comparator.comparing(Map.Entry::getKey))
@@ -211,7 +241,10 @@ public final class KeepingAdvice {
                 usedPct,
                 outlook.limitedBy().word(),
                 new ChillingRisk(outlook.chilling().probability(), outlook.chilling().safeDays()),
-                mechanisms);
+                mechanisms,
+                outlook.ripeFrom().map(KeepingAdvice::quantiles),
+                outlook.edibleLeft().map(KeepingAdvice::quantiles),
+                ripe);
     }
 
     private static Quantiles quantiles(Spread spread) {

@@ -1,6 +1,7 @@
 package org.wardon.files.forecast;
 
 import java.util.List;
+import java.util.Optional;
 
 /**
  * The answer of {@code keep}.
@@ -11,6 +12,9 @@ import java.util.List;
  * @param limitedBy the mechanism that ends it first
  * @param chillingRisk risk of chilling injury
  * @param mechanisms days left by each mechanism alone
+ * @param ripeFrom days until ripe; absent where no times of ripening are printed
+ * @param edibleLeft days until overripe; absent unless it ripens
+ * @param ripeOn whether it is ripe after the days asked for; absent where nobody asked
  */
 public record KeepAnswer(
         String commodity,
@@ -18,7 +22,10 @@ public record KeepAnswer(
         double lifeUsedPct,
         String limitedBy,
         ChillingRisk chillingRisk,
-        List<Mechanism> mechanisms) {
+        List<Mechanism> mechanisms,
+        Optional<Quantiles> ripeFrom,
+        Optional<Quantiles> edibleLeft,
+        Optional<RipeOn> ripeOn) {
     /** Copies the list. */
     public KeepAnswer {
         mechanisms = List.copyOf(mechanisms);

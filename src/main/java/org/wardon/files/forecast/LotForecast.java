@@ -19,6 +19,9 @@ import java.util.OptionalDouble;
  * @param restsOn what the life rests on
  * @param greenLeft days until ripening can no longer be held; absent unless it ripens
  * @param edibleLeft days until overripe; absent unless it ripens
+ * @param ripeFrom days until ripe; absent where no times of ripening are printed
+ * @param ripeOn whether it is ripe on the day it is wanted ripe; absent where nobody asked or
+ *     nothing is known
  * @param daysLeft days left
  * @param daysLeftWithout days left without the chamber
  * @param daysGained the difference, draw by draw
@@ -39,6 +42,8 @@ public record LotForecast(
         String restsOn,
         Optional<Quantiles> greenLeft,
         Optional<Quantiles> edibleLeft,
+        Optional<Quantiles> ripeFrom,
+        Optional<RipeOn> ripeOn,
         Quantiles daysLeft,
         Quantiles daysLeftWithout,
         Quantiles daysGained,

@@ -148,6 +148,19 @@ public final class Ripening {
         return leg("ripening").get(0).sourceId();
     }
 
+    /**
+     * Returns the source of the heat.
+     *
+     * @return id; that of the days where no heat is printed
+     */
+    public String heatSourceId() {
+        return rows.stream()
+                .filter(row -> row.leg().equals("heat"))
+                .findFirst()
+                .map(RipeningRow::sourceId)
+                .orElseGet(this::sourceId);
+    }
+
     LegDays toRipe() {
         return toRipe;
     }

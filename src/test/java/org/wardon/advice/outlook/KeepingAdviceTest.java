@@ -44,7 +44,9 @@ class KeepingAdviceTest {
                 usedPct == 0 ? OptionalDouble.empty() : OptionalDouble.of(usedPct),
                 Optional.of(knownLife).filter(text -> !text.isEmpty()),
                 Ripeness.UNKNOWN,
-                Optional.empty());
+                Optional.empty(),
+                OptionalDouble.empty(),
+                OptionalDouble.empty());
     }
 
     private static KeepAnswer at(double atC, double days, double usedPct, String knownLife) {

@@ -72,7 +72,7 @@ class AnswerWriterTest {
         assertNames(
                 "id chamber valueKept coolHalfHours coolSevenEighthsHours temperatureC"
                         + " respirationKWh weightLossPct lifeUsedPct restsOn greenLeft edibleLeft"
-                        + " daysLeft daysLeftWithout daysGained limitedBy chillingRisk leaveBy",
+                        + " ripeFrom ripeOn daysLeft daysLeftWithout daysGained limitedBy chillingRisk leaveBy",
                 lot);
         assertNames("mean min max atEnd", lot.get("temperatureC"));
         assertNames("p10 p50 p90", lot.get("daysLeft"));
@@ -126,8 +126,20 @@ class AnswerWriterTest {
                                                 10,
                                                 "ripening",
                                                 new ChillingRisk(0.1, OptionalDouble.of(4)),
-                                                List.of())));
-        assertNames("commodity daysLeft lifeUsedPct limitedBy chillingRisk mechanisms", keep);
+                                                List.of(),
+                                                Optional.empty(),
+                                                Optional.of(RANGE),
+                                                Optional.of(
+                                                        new RipeOn(
+                                                                4,
+                                                                0.6,
+                                                                0.1,
+                                                                OptionalDouble.empty())))));
+        assertNames("inDays probability overripe atC", keep.get("ripeOn"));
+        assertNames(
+                "commodity daysLeft lifeUsedPct limitedBy chillingRisk mechanisms ripeFrom edibleLeft"
+                        + " ripeOn",
+                keep);
         JsonNode look =
                 JsonMapper.shared()
                         .readTree(
@@ -210,6 +222,8 @@ class AnswerWriterTest {
                         "temperature-curve",
                         Optional.empty(),
                         Optional.of(RANGE),
+                        Optional.empty(),
+                        Optional.empty(),
                         RANGE,
                         RANGE,
                         RANGE,
