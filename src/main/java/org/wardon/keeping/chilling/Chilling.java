@@ -12,9 +12,7 @@ import org.wardon.produce.rows.ChillingExposure;
 /**
  * Chilling of a commodity at a ripeness: dose in kelvin-days below its floor or in its band.
  *
- * <p>Where the handbook's own condition lies inside the zone of another source, no lot is injured
- * by a smaller dose than that condition gives over the shortest published life: sources disagree,
- * and the handbook's condition is the one that must hold.
+ * <p>The handbook's own condition holds, {@link Handbook}.
  */
 public final class Chilling {
     private static final NormalDistribution NORMAL = new NormalDistribution(null, 0, 1);
@@ -22,13 +20,13 @@ public final class Chilling {
     private final Zone zone;
     private final DoseFit fit;
     private final Ripeness ripeness;
-    private final double leastDoseKd;
+    private final Handbook handbook;
 
-    private Chilling(Zone zone, DoseFit fit, Ripeness ripeness, LifeLevel handbook) {
+    private Chilling(Zone zone, DoseFit fit, Ripeness ripeness, Handbook handbook) {
         this.zone = zone;
         this.fit = fit;
         this.ripeness = ripeness;
-        leastDoseKd = handbook.lowDays() * DoseFit.worstK(zone, handbook);
+        this.handbook = handbook;
     }
 
     /**
@@ -39,28 +37,42 @@ public final class Chilling {
      * @return its chilling; empty where it does not chill
      */
     public static Optional<Chilling> of(Commodity commodity, Ripeness ripeness) {
-        return of(commodity, ripeness, commodity.keeping().exposures());
+        return of(commodity, ripeness, commodity.keeping().exposures(), "");
     }
 
     /**
-     * Returns the chilling of a commodity by other exposures than all, for scoring.
+     * Returns the chilling of the fruit of a trial by other exposures than all, for scoring.
      *
      * @param commodity the commodity
      * @param ripeness how ripe the lot is; unknown is judged as green
      * @param exposures the exposures to fit
+     * @param trial source and variant of the trial as in {@link #trial}; "" for a lot of no trial
      * @return its chilling; empty where it does not chill
      */
     public static Optional<Chilling> of(
-            Commodity commodity, Ripeness ripeness, List<ChillingExposure> exposures) {
-        LifeLevel handbook = LifeLevel.of(commodity);
+            Commodity commodity,
+            Ripeness ripeness,
+            List<ChillingExposure> exposures,
+            String trial) {
+        Handbook handbook = Handbook.of(LifeLevel.of(commodity));
         return Zone.of(commodity, ripeness, exposures)
                 .map(
                         zone ->
                                 new Chilling(
                                         zone,
-                                        DoseFit.of(commodity, zone, exposures),
+                                        DoseFit.of(commodity, zone, exposures, trial),
                                         ripeness,
                                         handbook));
+    }
+
+    /**
+     * Returns the trial an exposure is from.
+     *
+     * @param row the exposure
+     * @return its source and variant
+     */
+    public static String trial(ChillingExposure row) {
+        return Bearing.trial(row);
     }
 
     /**
@@ -99,7 +111,7 @@ public final class Chilling {
     public Injury at(Draw draw) {
         double z = NORMAL.inverseCumulativeProbability(draw.chilling());
         double dose = Math.exp(fit.lnMedian(ripeness) + fit.deviation() * z);
-        return new Injury(zone, Math.max(dose, leastDoseKd));
+        return new Injury(zone, dose, handbook);
     }
 
     /**
@@ -113,8 +125,13 @@ public final class Chilling {
      */
     public double probability(
             Commodity commodity, ChillingExposure row, double days, boolean handbookHolds) {
-        double dose = days * DoseFit.kelvins(commodity, zone, row);
-        if (dose <= 0 || (handbookHolds && dose < leastDoseKd)) {
+        double temperatureC = DoseFit.temperatureC(row);
+        double kelvins = DoseFit.kelvins(commodity, zone, row);
+        double dose =
+                handbookHolds
+                        ? handbook.dose(days, kelvins, temperatureC, zone.bandLowC().isPresent())
+                        : days * kelvins;
+        if (dose <= 0) {
             return 0;
         }
         double median =

@@ -24,7 +24,7 @@ final class Floors {
     private static final double TROPICAL_FROM_C = 7;
     private static final double AT_K = 0.25;
     private static final double NEAR_K = 3;
-    private static final double INJURED_BELOW_K = 1;
+    private static final double INJURED_BELOW_K = 2;
     private static final String SAFE = "safe";
     private static final String BAND = "band";
     private static final double BAND_WIDTH_K = 10;
@@ -76,8 +76,8 @@ final class Floors {
 
     /**
      * Where injury is reported at the floor or a little above it, not of one variant alone and not
-     * where somebody found none in colder and longer stays, the zone reaches a kelvin above it, but
-     * not beyond the warm end of the handbook's condition.
+     * where somebody found none in colder and longer stays, the zone reaches two kelvins above it,
+     * but not beyond the warm end of the handbook's condition.
      */
     private static Zone raised(Zone zone, List<ChillingExposure> exposures, double warmC) {
         double warmest =
@@ -85,7 +85,8 @@ final class Floors {
                         .filter(row -> !row.kind().equals(SAFE) && row.variant().isEmpty())
                         .filter(row -> !row.visible().equals("no"))
                         .filter(row -> near(zone, row) && !contradicted(row, exposures))
-                        .mapToDouble(row -> Math.min(row.temperatureC() + INJURED_BELOW_K, warmC))
+                        .mapToDouble(
+                                row -> Math.min(DoseFit.temperatureC(row) + INJURED_BELOW_K, warmC))
                         .max()
                         .orElse(zone.topC());
         return new Zone(
@@ -97,7 +98,7 @@ final class Floors {
     }
 
     private static boolean near(Zone zone, ChillingExposure row) {
-        double above = row.temperatureC() - zone.topC();
+        double above = DoseFit.temperatureC(row) - zone.topC();
         return above >= -AT_K && above < NEAR_K;
     }
 
@@ -106,6 +107,7 @@ final class Floors {
                 .anyMatch(
                         other ->
                                 other.kind().equals(SAFE)
+                                        && other.variant().isEmpty()
                                         && other.temperatureC() <= row.temperatureC()
                                         && other.days().highest() >= row.days().highest());
     }

@@ -5,8 +5,9 @@ package org.wardon.keeping.chilling;
  *
  * @param zone the zone that injures
  * @param doseKd dose at which injury shows, K d
+ * @param handbook the condition that holds whatever exposures say
  */
-public record Injury(Zone zone, double doseKd) {
+public record Injury(Zone zone, double doseKd, Handbook handbook) {
     /**
      * Returns the share of the injuring dose a day.
      *
@@ -15,6 +16,8 @@ public record Injury(Zone zone, double doseKd) {
      * @return 1/day, 0 where it is safe
      */
     public double perDay(double meanC, double skinC) {
-        return zone.severityK(zone.bySkin() ? skinC : meanC) / doseKd;
+        double temperatureC = zone.bySkin() ? skinC : meanC;
+        return handbook.hold(
+                zone.severityK(temperatureC) / doseKd, temperatureC, zone.bandLowC().isPresent());
     }
 }

@@ -67,7 +67,7 @@ final class LeaveOneExposure {
             List<ChillingExposure> rest,
             List<Judged> all) {
         Ripeness ripeness = row.ripeness().equals("ripe") ? Ripeness.RIPE : Ripeness.GREEN;
-        Chilling.of(commodity, ripeness, rest)
+        Chilling.of(commodity, ripeness, rest, Chilling.trial(row))
                 .map(
                         chilling -> {
                             boolean safe = row.kind().equals("safe");

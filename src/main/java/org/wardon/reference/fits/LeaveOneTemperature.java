@@ -16,7 +16,8 @@ import org.wardon.keeping.pooling.LifePoint.Trial;
 
 /**
  * Leaves out every temperature of every trial that tried several, once, fits again without it and
- * asks the rest. The level is that of the same trial; the deviations are those of all rows.
+ * asks the rest. Fitted and generic curve alike are anchored at the nearest temperature left of the
+ * same trial; the deviations are those of all rows.
  */
 final class LeaveOneTemperature {
     private static final GenericCurve GENERIC = new GenericCurve(1);
@@ -75,7 +76,7 @@ final class LeaveOneTemperature {
                                 row,
                                 interior,
                                 chills(crop),
-                                predicted(row, rest, fitted),
+                                predicted(row, nearest(rest, atC), fitted),
                                 predicted(row, nearest(rest, atC), LeaveOneTemperature::generic),
                                 predicted(row, coldest(rest), LeaveOneTemperature::generic)));
             }

@@ -40,7 +40,7 @@ public final class ScoreChilling {
     private static void miss(PrintStream out, Judged one) {
         out.printf(
                 Locale.ROOT,
-                "%s %s %s %.1f °C %s %.1f d %s %s: injured %.2f, held %.2f, zone below %.1f °C%n",
+                "%s %s %s %.1f °C %s %.1f d %s %s: injured %.2f, held %.2f, zone below %.1f °C; %s%n",
                 one.commodity().id(),
                 one.row().ripeness(),
                 one.row().variant(),
@@ -51,6 +51,7 @@ public final class ScoreChilling {
                 one.row().days().sourceId(),
                 one.probability(),
                 one.heldProbability(),
-                one.topC());
+                one.topC(),
+                WhyMissed.likely(one));
     }
 }

@@ -40,23 +40,53 @@ class ChillingScoreTest {
     }
 
     /**
-     * What is met, not what was aimed at, which is 80 %: the misses are sources that contradict
-     * each other or the handbook; the program prints them.
+     * Four in five, by the exposures alone and as the program answers, where the handbook's own
+     * condition is held; the program that scores prints the misses with their likely reasons.
      */
     @Test
     @Source("chilling-exposure.csv")
-    void threeExposuresInFourLieOnTheRightSideWhenLeftOut() {
+    void fourExposuresInFiveLieOnTheRightSideWhenLeftOut() {
         List<Judged> all = LeaveOneExposure.list(book.all());
         assertTrue(all.size() >= 160);
         long right = all.stream().filter(Judged::right).count();
         long held = all.stream().filter(Judged::rightHeld).count();
-        assertTrue(right >= 0.77 * all.size(), right + " of " + all.size());
-        assertTrue(held >= 0.7 * all.size(), held + " of " + all.size());
+        assertTrue(right >= 0.8 * all.size(), right + " of " + all.size());
+        assertTrue(held >= 0.8 * all.size(), held + " of " + all.size());
+        all.stream()
+                .filter(one -> !one.rightHeld())
+                .forEach(one -> assertFalse(WhyMissed.likely(one).isBlank()));
     }
 
-    /** Colder, the band is milder again: the worst lies inside. */
+    /** Where colder is always worse it stays so beside the handbook's condition, without a jump. */
+    @Test
+    void colderNeverInjuresLessAboveAFloorAndNothingJumps() {
+        for (Commodity one : book.all()) {
+            Chilling.of(one, Ripeness.GREEN)
+                    .filter(chilling -> chilling.zone().bandLowC().isEmpty())
+                    .ifPresent(chilling -> risesTowardsCold(one, chilling));
+        }
+    }
+
+    private static void risesTowardsCold(Commodity one, Chilling chilling) {
+        for (Draw draw : Draws.seeded(8, 8)) {
+            var injury = chilling.at(draw);
+            double steepest = (chilling.zone().topC() + 3) / injury.doseKd();
+            double warmer = 0;
+            for (double t = chilling.zone().topC(); t > -2; t -= 0.01) {
+                double here = injury.perDay(t, t);
+                assertTrue(here >= warmer, one.id() + " at " + t);
+                assertTrue(here - warmer <= 0.011 * (steepest + 1 / injury.doseKd()), one.id());
+                warmer = here;
+            }
+        }
+    }
+
+    /**
+     * Colder, the band is milder again: the worst lies inside. Pineapple's handbook keeps it in the
+     * middle of its band, which is held.
+     */
     @ParameterizedTest
-    @ValueSource(strings = {"peach", "plum", "persimmon", "pineapple"})
+    @ValueSource(strings = {"peach", "plum", "persimmon"})
     void aBandIsWorstInItsMiddle(String id) {
         Chilling chilling = Chilling.of(book.get(id), Ripeness.GREEN).orElseThrow();
         double low = chilling.zone().bandLowC().orElseThrow();
@@ -131,7 +161,7 @@ class ChillingScoreTest {
     }
 
     private static double spread(Commodity commodity, List<ChillingExposure> rows) {
-        Chilling chilling = Chilling.of(commodity, Ripeness.GREEN, rows).orElseThrow();
+        Chilling chilling = Chilling.of(commodity, Ripeness.GREEN, rows, "").orElseThrow();
         double[] doses =
                 Stream.concat(Draws.seeded(5, 128).stream(), Stream.of(Draw.MEDIAN))
                         .mapToDouble(draw -> chilling.at(draw).doseKd())

@@ -78,7 +78,7 @@ class LifeFitsTest {
         for (Predicate<LeftOut> which : List.of(chills, chills.negate())) {
             List<LeftOut> some = left.stream().filter(which).toList();
             double pooled = ScoreLives.median(some, LeftOut::fittedError);
-            assertTrue(some.size() >= 20);
+            assertTrue(some.size() >= 16);
             assertTrue(pooled <= ScoreLives.median(some, LeftOut::genericError));
             assertTrue(pooled <= ScoreLives.median(some, LeftOut::genericColdError));
         }
