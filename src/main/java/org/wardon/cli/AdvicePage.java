@@ -278,6 +278,26 @@ final class AdvicePage {
                 .sorted(Comparator.comparing(LotForecast::leaveBy))
                 .forEach(lot -> lot(table, lot));
         page.append(table.text()).append('\n');
+        narrower();
+    }
+
+    /** What the ranges hang on, so that a keeper can narrow them. */
+    private void narrower() {
+        Map<String, String> lots = new LinkedHashMap<>();
+        for (LotForecast lot : forecast.lots()) {
+            lot.hangsOn().ifPresent(on -> lots.merge(on.range(), lot.id(), (a, b) -> a + ", " + b));
+        }
+        if (lots.isEmpty()) {
+            return;
+        }
+        head(words.text("ranges-hang-on"));
+        lots.forEach(
+                (range, ids) ->
+                        page.append(
+                                Paragraph.hanging(
+                                        "  - ",
+                                        ids + ": " + words.text("hangs-on." + range) + ".")));
+        page.append('\n');
     }
 
     private void lot(Table table, LotForecast lot) {

@@ -44,6 +44,16 @@ final class KeepPage {
                                 + ". The figure rests on "
                                 + words.text("rests-on." + report.restsOn())
                                 + "."));
+        answer.hangsOn()
+                .ifPresent(
+                        most ->
+                                page.append(
+                                        Paragraph.hanging(
+                                                "",
+                                                words.text("range-hangs-on")
+                                                        + " "
+                                                        + words.text("hangs-on." + most.range())
+                                                        + ".")));
         answer.ripeFrom().ifPresent(from -> page.append(Paragraph.hanging("", ripe(answer, from))));
         for (Reason reason : report.ripe()) {
             page.append(Paragraph.entry("", words.sentence(reason), reason.sourceId()));

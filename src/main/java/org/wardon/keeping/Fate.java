@@ -19,7 +19,7 @@ public final class Fate {
     /** Ethylene is named as the limit where it takes at least this share of the time left. */
     private static final double NOTABLE = 0.1;
 
-    private final int drawNumber;
+    private final Draw draw;
     private final double startS;
     private final Map<Mechanism, Track> tracks;
     private final Mechanism ageing;
@@ -28,14 +28,14 @@ public final class Fate {
     private final Optional<RipeTimes> ripe;
 
     Fate(
-            int drawNumber,
+            Draw draw,
             double startS,
             Map<Mechanism, Track> tracks,
             Mechanism ageing,
             Optional<Track> green,
             Optional<Track> edible,
             Optional<RipeTimes> ripe) {
-        this.drawNumber = drawNumber;
+        this.draw = draw;
         this.startS = startS;
         this.tracks = new EnumMap<>(tracks);
         this.ageing = ageing;
@@ -54,7 +54,7 @@ public final class Fate {
         Map<Mechanism, Track> ends = new EnumMap<>(Mechanism.class);
         tracks.forEach((mechanism, track) -> ends.put(mechanism, track.brief()));
         return new Fate(
-                drawNumber,
+                draw,
                 startS,
                 ends,
                 ageing,
@@ -64,12 +64,12 @@ public final class Fate {
     }
 
     /**
-     * Returns the number of the draw.
+     * Returns the draw.
      *
-     * @return 0 for the plain run
+     * @return its number is 0 for the plain run
      */
-    public int drawNumber() {
-        return drawNumber;
+    public Draw draw() {
+        return draw;
     }
 
     /**

@@ -56,7 +56,7 @@ final class Following {
             edible = Optional.of(tracks.getOrDefault(Mechanism.ETHYLENE, ageing));
         }
         return new Fate(
-                paces.draw().number(),
+                paces.draw(),
                 history.timeS(0),
                 tracks,
                 paces.clock(),

@@ -20,6 +20,7 @@ import org.wardon.produce.Reason;
  * @param greenLeft days until ripening can no longer be held; empty where it does not apply
  * @param edibleLeft days until overripe; empty where it does not apply
  * @param ripeFrom days until ripe; empty where no times of ripening are printed
+ * @param hangsOn the range the days left hang on most; empty where none stands out
  * @param restsOn what the life rests on
  * @param reasons why, and what to know
  */
@@ -32,6 +33,7 @@ public record Outlook(
         Optional<Spread> greenLeft,
         Optional<Spread> edibleLeft,
         Optional<Spread> ripeFrom,
+        Optional<HangsOn> hangsOn,
         RestsOn restsOn,
         List<Reason> reasons) {
     /** Copies map and list. */
@@ -66,6 +68,9 @@ public record Outlook(
                 clock(plain.greenDaysLeft(fromS), draws, fate -> fate.greenDaysLeft(fromS)),
                 clock(plain.edibleDaysLeft(fromS), draws, fate -> fate.edibleDaysLeft(fromS)),
                 clock(plain.ripeDaysFrom(fromS), draws, fate -> fate.ripeDaysFrom(fromS)),
+                HangsOn.of(
+                        draws.stream().map(Fate::draw).toList(),
+                        draws.stream().mapToDouble(fate -> fate.daysLeft(fromS)).toArray()),
                 basis.restsOn(),
                 basis.reasons());
     }

@@ -110,8 +110,8 @@ class AdviceIT {
                 "lots[]",
                 ("id chamber valueKept coolHalfHours coolSevenEighthsHours temperatureC"
                                 + " respirationKWh weightLossPct lifeUsedPct restsOn greenLeft"
-                                + " edibleLeft ripeFrom ripeOn daysLeft daysLeftWithout daysGained limitedBy"
-                                + " chillingRisk leaveBy")
+                                + " edibleLeft ripeFrom ripeOn daysLeft hangsOn daysLeftWithout daysGained"
+                                + " limitedBy chillingRisk leaveBy")
                         .split(" "));
         JsonNames.check(forecast, "lots[].temperatureC", "mean", "min", "max", "atEnd");
         for (String name :
@@ -125,6 +125,7 @@ class AdviceIT {
             JsonNames.check(forecast, "lots[]." + name, "p10", "p50", "p90");
         }
         JsonNames.check(forecast, "lots[].chillingRisk", "probability", "safeDays");
+        JsonNames.check(forecast, "lots[].hangsOn", "range", "sharePct");
         assertEquals(ids(plan, "lots[]"), ids(forecast, "lots[]"));
         for (JsonNode lot : forecast.get("lots")) {
             assertTrue(LIMITS.contains(lot.get("limitedBy").asString()), lot.toString());

@@ -4,6 +4,7 @@ import java.util.Optional;
 import java.util.OptionalDouble;
 import org.wardon.air.Timeline;
 import org.wardon.files.forecast.ChillingRisk;
+import org.wardon.files.forecast.HangsOn;
 import org.wardon.files.forecast.LotForecast;
 import org.wardon.files.forecast.LotForecast.TemperatureC;
 import org.wardon.files.forecast.Quantiles;
@@ -53,6 +54,7 @@ final class LotFigures {
                 outlook.ripeFrom().map(LotFigures::quantiles),
                 RipeWanted.of(sheet, outcome).flatMap(RipeWanted::figures),
                 quantiles(outlook.daysLeft()),
+                outlook.hangsOn().map(LotFigures::hangsOn),
                 quantiles(fates.daysLeftWithout(fromS)),
                 quantiles(fates.daysGained(fromS)),
                 outlook.limitedBy().word(),
@@ -101,6 +103,10 @@ final class LotFigures {
         }
         double mean = span > 0 ? sum / span : end;
         return new TemperatureC(mean, least, most, end);
+    }
+
+    private static HangsOn hangsOn(org.wardon.keeping.HangsOn most) {
+        return new HangsOn(most.range().word(), 100 * most.share());
     }
 
     static Quantiles quantiles(Spread spread) {

@@ -12,6 +12,7 @@ import org.wardon.air.Timeline;
 import org.wardon.errors.BadInput;
 import org.wardon.errors.Fault;
 import org.wardon.files.forecast.ChillingRisk;
+import org.wardon.files.forecast.HangsOn;
 import org.wardon.files.forecast.KeepAnswer;
 import org.wardon.files.forecast.Quantiles;
 import org.wardon.files.forecast.RipeOn;
@@ -238,6 +239,7 @@ public final class KeepingAdvice {
         return new KeepAnswer(
                 commodity.id(),
                 quantiles(outlook.daysLeft()),
+                outlook.hangsOn().map(most -> new HangsOn(most.range().word(), 100 * most.share())),
                 usedPct,
                 outlook.limitedBy().word(),
                 new ChillingRisk(outlook.chilling().probability(), outlook.chilling().safeDays()),

@@ -8,6 +8,7 @@ import java.util.Optional;
  *
  * @param commodity its id
  * @param daysLeft days left
+ * @param hangsOn what its range hangs on most; absent where nothing stands out
  * @param lifeUsedPct life used, percent
  * @param limitedBy the mechanism that ends it first
  * @param chillingRisk risk of chilling injury
@@ -19,6 +20,7 @@ import java.util.Optional;
 public record KeepAnswer(
         String commodity,
         Quantiles daysLeft,
+        Optional<HangsOn> hangsOn,
         double lifeUsedPct,
         String limitedBy,
         ChillingRisk chillingRisk,

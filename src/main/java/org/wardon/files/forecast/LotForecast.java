@@ -23,6 +23,7 @@ import java.util.OptionalDouble;
  * @param ripeOn whether it is ripe on the day it is wanted ripe; absent where nobody asked or
  *     nothing is known
  * @param daysLeft days left
+ * @param hangsOn what its range hangs on most; absent where nothing stands out
  * @param daysLeftWithout days left without the chamber
  * @param daysGained the difference, draw by draw
  * @param limitedBy the mechanism that ends it first
@@ -45,6 +46,7 @@ public record LotForecast(
         Optional<Quantiles> ripeFrom,
         Optional<RipeOn> ripeOn,
         Quantiles daysLeft,
+        Optional<HangsOn> hangsOn,
         Quantiles daysLeftWithout,
         Quantiles daysGained,
         String limitedBy,

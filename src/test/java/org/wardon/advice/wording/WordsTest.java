@@ -22,6 +22,7 @@ import org.wardon.files.forecast.Quantiles;
 import org.wardon.keeping.Crops;
 import org.wardon.keeping.Draw;
 import org.wardon.keeping.Draws;
+import org.wardon.keeping.HangsOn;
 import org.wardon.keeping.KeepingModel;
 import org.wardon.keeping.LotAtDoor;
 import org.wardon.keeping.Mechanism;
@@ -51,6 +52,7 @@ class WordsTest {
     private static final Set<String> FAMILIES =
             Set.of(
                     "limit",
+                    "hangs-on",
                     "mechanism",
                     "rests-on",
                     "side",
@@ -229,6 +231,9 @@ class WordsTest {
         for (Mechanism mechanism : Mechanism.values()) {
             WORDS.text("limit." + mechanism.word());
             WORDS.text("mechanism." + mechanism.word());
+        }
+        for (HangsOn.Range range : HangsOn.Range.values()) {
+            WORDS.text("hangs-on." + range.word());
         }
         for (RestsOn ground : RestsOn.values()) {
             WORDS.text("rests-on." + ground.word());

@@ -72,7 +72,7 @@ class AnswerWriterTest {
         assertNames(
                 "id chamber valueKept coolHalfHours coolSevenEighthsHours temperatureC"
                         + " respirationKWh weightLossPct lifeUsedPct restsOn greenLeft edibleLeft"
-                        + " ripeFrom ripeOn daysLeft daysLeftWithout daysGained limitedBy chillingRisk leaveBy",
+                        + " ripeFrom ripeOn daysLeft hangsOn daysLeftWithout daysGained limitedBy chillingRisk leaveBy",
                 lot);
         assertNames("mean min max atEnd", lot.get("temperatureC"));
         assertNames("p10 p50 p90", lot.get("daysLeft"));
@@ -123,6 +123,7 @@ class AnswerWriterTest {
                                         new KeepAnswer(
                                                 "mango",
                                                 RANGE,
+                                                Optional.of(new HangsOn("life-level", 40)),
                                                 10,
                                                 "ripening",
                                                 new ChillingRisk(0.1, OptionalDouble.of(4)),
@@ -137,7 +138,7 @@ class AnswerWriterTest {
                                                                 OptionalDouble.empty())))));
         assertNames("inDays probability overripe atC", keep.get("ripeOn"));
         assertNames(
-                "commodity daysLeft lifeUsedPct limitedBy chillingRisk mechanisms ripeFrom edibleLeft"
+                "commodity daysLeft hangsOn lifeUsedPct limitedBy chillingRisk mechanisms ripeFrom edibleLeft"
                         + " ripeOn",
                 keep);
         JsonNode look =
@@ -225,6 +226,7 @@ class AnswerWriterTest {
                         Optional.empty(),
                         Optional.empty(),
                         RANGE,
+                        Optional.empty(),
                         RANGE,
                         RANGE,
                         "ripening",
