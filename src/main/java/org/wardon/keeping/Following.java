@@ -4,6 +4,7 @@ import java.util.EnumMap;
 import java.util.Map;
 import java.util.Optional;
 import java.util.OptionalDouble;
+import org.wardon.air.Timeline;
 import org.wardon.keeping.ethylene.Trigger;
 import org.wardon.lots.LotHistory;
 
@@ -112,12 +113,21 @@ final class Following {
     private Track weighed() {
         double[] timeS = new double[history.size()];
         double[] used = new double[history.size()];
-        double start = paces.start(Mechanism.WATER_LOSS);
-        for (int i = 0; i < history.size(); i++) {
+        timeS[0] = history.timeS(0);
+        used[0] = paces.start(Mechanism.WATER_LOSS);
+        for (int i = 1; i < history.size(); i++) {
             timeS[i] = history.timeS(i);
-            double lost = 1 - history.massKg(i) / history.massKg(0);
-            used[i] = start + lost / paces.waterLimit();
+            double days = (timeS[i] - timeS[i - 1]) / Timeline.DAY_S;
+            used[i] = used[i - 1] + (days > 0 ? days * dried(i, days) : 0);
         }
         return Track.given(timeS, used, beyond);
+    }
+
+    /** Share of the limit used a day over the step that ends at a place of the history. */
+    private double dried(int i, double days) {
+        double lost = (history.massKg(i - 1) - history.massKg(i)) / history.massKg(0);
+        double skin = 0.5 * (history.surfaceC(i - 1) + history.surfaceC(i));
+        double humidity = 0.5 * (history.humidityFraction(i - 1) + history.humidityFraction(i));
+        return paces.water().perDay(lost / days, skin, humidity);
     }
 }

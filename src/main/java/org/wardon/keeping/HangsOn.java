@@ -3,7 +3,6 @@ package org.wardon.keeping;
 import java.util.Arrays;
 import java.util.List;
 import java.util.Optional;
-import java.util.function.ToDoubleFunction;
 import org.apache.commons.math3.stat.correlation.SpearmansCorrelation;
 
 /**
@@ -25,40 +24,38 @@ public record HangsOn(Range range, double share) {
     /** Ranges of a draw. */
     public enum Range {
         /** How long the crop keeps. */
-        LIFE_LEVEL("life-level", Draw::lifeLevel),
+        LIFE_LEVEL("life-level"),
         /** How much faster it ages in warmth. */
-        SLOPE("slope", Draw::slope),
+        SLOPE("slope"),
         /** How much cold it bears. */
-        CHILLING("chilling", Draw::chilling),
+        CHILLING("chilling"),
         /** How fast it loses water. */
-        TRANSPIRATION("transpiration", Draw::transpiration),
+        TRANSPIRATION("transpiration"),
         /** How much heat it breathes. */
-        RESPIRATION("respiration", Draw::respiration),
+        RESPIRATION("respiration"),
         /** How fast its package cools. */
-        PACKAGING("packaging", Draw::packaging),
+        PACKAGING("packaging"),
         /** How old it was at the door. */
-        DELAY("delay", Draw::delay),
+        DELAY("delay"),
         /** How clean the air of the published trials was. */
-        ETHYLENE_REFERENCE("ethylene-reference", Draw::ethyleneReference),
+        ETHYLENE_REFERENCE("ethylene-reference"),
         /** How much ethylene is given off. */
-        ETHYLENE_GIVEN("ethylene-given", Draw::ethyleneGiven),
+        ETHYLENE_GIVEN("ethylene-given"),
         /** How warm the way to market is. */
-        MARKET("market", Draw::market),
+        MARKET("market"),
         /** How long it stays good once ripe. */
-        RIPENING("ripening", Draw::ripening),
+        RIPENING("ripening"),
         /** How long it rests before it sprouts. */
-        DORMANCY("dormancy", Draw::dormancy),
+        DORMANCY("dormancy"),
         /** What a lot that may not be cured still keeps. */
-        CURING("curing", Draw::curing),
+        CURING("curing"),
         /** How fast it ripens. */
-        RIPENING_PACE("ripening-pace", Draw::ripeningPace);
+        RIPENING_PACE("ripening-pace");
 
         private final String word;
-        private final ToDoubleFunction<Draw> quantile;
 
-        Range(String word, ToDoubleFunction<Draw> quantile) {
+        Range(String word) {
             this.word = word;
-            this.quantile = quantile;
         }
 
         /**
@@ -71,7 +68,22 @@ public record HangsOn(Range range, double share) {
         }
 
         double quantile(Draw draw) {
-            return quantile.applyAsDouble(draw);
+            return switch (this) {
+                case LIFE_LEVEL -> draw.lifeLevel();
+                case SLOPE -> draw.slope();
+                case CHILLING -> draw.chilling();
+                case TRANSPIRATION -> draw.transpiration();
+                case RESPIRATION -> draw.respiration();
+                case PACKAGING -> draw.packaging();
+                case DELAY -> draw.delay();
+                case ETHYLENE_REFERENCE -> draw.ethyleneReference();
+                case ETHYLENE_GIVEN -> draw.ethyleneGiven();
+                case MARKET -> draw.market();
+                case RIPENING -> draw.ripening();
+                case DORMANCY -> draw.dormancy();
+                case CURING -> draw.curing();
+                case RIPENING_PACE -> draw.ripeningPace();
+            };
         }
     }
 
@@ -98,6 +110,8 @@ public record HangsOn(Range range, double share) {
                 strongest = range;
             }
         }
-        return most >= LEAST_SHARE ? Optional.of(new HangsOn(strongest, most)) : Optional.empty();
+        return most >= LEAST_SHARE + BY_CHANCE / draws.size()
+                ? Optional.of(new HangsOn(strongest, most))
+                : Optional.empty();
     }
 }

@@ -27,7 +27,7 @@ public final class Paces {
     private final LotAtDoor door;
     private final Ageing ageing;
     private final double referencePpm;
-    private final double waterLimit;
+    private final WaterPace water;
     private final Mechanism clock;
     private final Optional<RipeningPace> ripening;
     private final Map<Mechanism, Wear> wears = new EnumMap<>(Mechanism.class);
@@ -40,7 +40,7 @@ public final class Paces {
         ageing = model.curve().at(draw);
         referencePpm = model.response().referencePpm(draw);
         ripening = model.ripening().map(printed -> printed.at(draw));
-        waterLimit = model.water().fraction(model.lot().transpiration(), ageing, draw);
+        water = model.water().pace(model.lot().transpiration(), ageing);
         clock = model.span().shippedGreen() ? Mechanism.RIPENING : Mechanism.SENESCENCE;
         age();
         model.chilling().ifPresent(this::chill);
@@ -128,7 +128,8 @@ public final class Paces {
     private void lose(TranspirationLaw law) {
         put(
                 Mechanism.WATER_LOSS,
-                (mean, skin, humid, ppm) -> WaterLimit.perDay(law, skin, humid) / waterLimit);
+                (mean, skin, humid, ppm) ->
+                        water.perDay(WaterLimit.perDay(law, skin, humid), skin, humid));
     }
 
     private void rest() {
@@ -224,8 +225,8 @@ public final class Paces {
         return Optional.ofNullable(wears.get(mechanism));
     }
 
-    double waterLimit() {
-        return waterLimit;
+    WaterPace water() {
+        return water;
     }
 
     Draw draw() {

@@ -71,14 +71,22 @@ final class WaterLimit {
         return handbookHumidity;
     }
 
-    /** Permissible loss of a draw, share of the mass. */
-    double fraction(Optional<DoubleFunction<TranspirationLaw>> laws, Ageing ageing, Draw draw) {
-        if (laws.isEmpty()) {
-            return printedFraction;
-        }
-        TranspirationLaw law = laws.get().apply(draw.transpiration());
+    /** What an item loses, share of its mass a day. */
+    interface Loss {
+        double perDay(double skinC, double humidityFraction);
+    }
+
+    /** How fast a draw's loss uses up what it may lose; the limit is that of a usual skin. */
+    WaterPace pace(Optional<DoubleFunction<TranspirationLaw>> laws, Ageing ageing) {
         double days = general ? ageing.lifeDays(handbookC) : curve.level().lowDays();
-        return Math.max(printedFraction, perDay(law, handbookC, handbookHumidity) * days);
+        if (laws.isEmpty()) {
+            return new WaterPace(printedFraction, days, 0, (skinC, humidity) -> 0);
+        }
+        TranspirationLaw usual = laws.get().apply(Draw.MEDIAN.transpiration());
+        Loss loss = (skinC, humidity) -> perDay(usual, skinC, humidity);
+        double handbookPerDay = loss.perDay(handbookC, handbookHumidity);
+        double limit = Math.max(printedFraction, handbookPerDay * days);
+        return new WaterPace(limit, days, handbookPerDay, loss);
     }
 
     /** Water lost from a kilogram, kg a day; not below 0. */

@@ -43,7 +43,7 @@ final class WhyMissed {
     private static String against(Judged one) {
         ChillingExposure row = one.row();
         return one.commodity().keeping().exposures().stream()
-                .filter(other -> other != row && counts(other))
+                .filter(other -> !other.equals(row) && counts(other))
                 .filter(other -> Math.abs(other.temperatureC() - row.temperatureC()) < NEAR_K)
                 .filter(other -> opposite(row, other))
                 .map(other -> other.days().sourceId())
