@@ -34,8 +34,10 @@ final class Keep implements Callable<Integer> {
     @Parameters(paramLabel = "COMMODITY", description = "Its id or any common name.")
     private String name = "";
 
-    @ArgGroup(multiplicity = "1")
-    private Where where = new Where();
+    @ArgGroup(multiplicity = "0..1")
+    private @Nullable Where where;
+
+    @Mixin private OwnLotWords ownLots = new OwnLotWords();
 
     /** One condition, or a history. */
     static final class Where {
@@ -83,7 +85,9 @@ final class Keep implements Callable<Integer> {
     @Option(
             names = "--known-life",
             paramLabel = "DAYS@C",
-            description = "In my store it keeps so many days at so many °C, such as 9@10.")
+            description = {
+                "In my store it keeps so many days at so many °C, such as 9@10 or 8..10@10."
+            })
     private @Nullable String knownLife;
 
     @Option(
@@ -116,9 +120,26 @@ final class Keep implements Callable<Integer> {
     @Override
     public Integer call() {
         PrintStream out = Terminal.ofProcess().out();
+        Where asked = where;
+        ownLots.check(asked != null && asked.history == null && days == null);
+        if (ownLots.listed()) {
+            out.print(ownLots.list(shared, name, json));
+            return Exit.OK;
+        }
+        if (asked == null) {
+            throw new BadInput(
+                    "keep",
+                    "",
+                    "nothing says what the lot goes through",
+                    "accepted: --at C or --history CSV; --outcomes to list lots of your own");
+        }
+        if (ownLots.remembered()) {
+            out.print(ownLots.remember(shared, request(asked), json));
+            return Exit.OK;
+        }
         try (ReferenceBook book = shared.book()) {
             Words words = shared.words();
-            KeepRequest request = request();
+            KeepRequest request = request(asked);
             KeepReport report = new KeepingAdvice(book).ask(request);
             out.print(
                     json
@@ -134,7 +155,7 @@ final class Keep implements Callable<Integer> {
                 : "at the end of the history";
     }
 
-    private KeepRequest request() {
+    private KeepRequest request(Where where) {
         KeepRequest.Condition condition;
         if (where.history == null) {
             refuse("--then", thenC);

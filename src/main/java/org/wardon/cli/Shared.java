@@ -7,6 +7,7 @@ import org.wardon.advice.PlanLookups;
 import org.wardon.advice.wording.Units;
 import org.wardon.advice.wording.Words;
 import org.wardon.files.Lookups;
+import org.wardon.reference.GoneLots;
 import org.wardon.reference.OwnValues;
 import org.wardon.reference.ReferenceBook;
 import org.wardon.reference.StoreFolder;
@@ -18,7 +19,7 @@ final class Shared {
             names = "--home",
             paramLabel = "DIR",
             description = {
-                "Folder of the keeper's own values (default: WARDON_HOME, else the user's data"
+                "Folder of the keeper's own values and lots (default: WARDON_HOME, else the user's data"
                         + " folder)."
             })
     private @Nullable Path home;
@@ -31,17 +32,25 @@ final class Shared {
 
     /** Opens the book with the keeper's own values. */
     ReferenceBook book() {
-        return ReferenceBook.open(ownValues());
+        return ReferenceBook.open(ownValues(), goneLots().list());
     }
 
     /** The keeper's own values. */
     OwnValues ownValues() {
-        return new OwnValues(
-                StoreFolder.of(
-                        Optional.ofNullable(home),
-                        System.getenv(),
-                        System.getProperty("os.name", ""),
-                        Path.of(System.getProperty("user.home", "."))));
+        return new OwnValues(folder());
+    }
+
+    /** The keeper's own lots that are gone. */
+    GoneLots goneLots() {
+        return new GoneLots(folder());
+    }
+
+    private Path folder() {
+        return StoreFolder.of(
+                Optional.ofNullable(home),
+                System.getenv(),
+                System.getProperty("os.name", ""),
+                Path.of(System.getProperty("user.home", ".")));
     }
 
     /** What a plan may name. */

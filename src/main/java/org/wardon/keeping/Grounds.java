@@ -50,6 +50,7 @@ final class Grounds {
                     "ah66-2002-tab",
                     Argument.of(model.curve().highestPublishedC(), "C"));
         }
+        reasons.addAll(OwnGrounds.of(model));
         door();
         model.chilling().ifPresent(this::chilling);
         model.ripening().ifPresent(this::ripening);
@@ -66,6 +67,9 @@ final class Grounds {
         RestsOn rests = model.curve().restsOn();
         double limit = model.curve().highestPublishedC() + BEYOND_K;
         boolean spans = model.curve().spansTemperatures();
+        if (rests == RestsOn.KNOWN_LIFE || rests == RestsOn.OWN_LOTS) {
+            return rests;
+        }
         return spans && days((i) -> history.meanC(i) > limit) > 0.5 * wholeDays()
                 ? RestsOn.EXTRAPOLATED
                 : rests;

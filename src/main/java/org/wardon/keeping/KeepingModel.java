@@ -6,12 +6,15 @@ import java.util.Optional;
 import org.wardon.keeping.chilling.Chilling;
 import org.wardon.keeping.dormancy.Dormancy;
 import org.wardon.keeping.ethylene.Response;
+import org.wardon.keeping.experience.Sighting;
 import org.wardon.keeping.life.LifeCurve;
 import org.wardon.keeping.ripening.Ripening;
 import org.wardon.lots.LotHistory;
 import org.wardon.produce.Commodity;
+import org.wardon.produce.Reason;
 import org.wardon.produce.Ripeness;
 import org.wardon.produce.rows.CompositionRow;
+import org.wardon.produce.rows.OwnLot;
 
 /**
  * How one lot keeps: all mechanisms, ready to follow histories. Build it once a lot; following is
@@ -37,7 +40,7 @@ public final class KeepingModel {
         span = new LifeSpan(commodity, lot.door());
         Ripeness ripeness = span.ripeness();
         chilling = Chilling.of(commodity, ripeness);
-        curve = LifeCurve.of(commodity, lot.door().knownLife());
+        curve = LifeCurve.of(commodity, lot.door().knownLife(), OwnLots.of(commodity));
         dormancy = Dormancy.of(commodity);
         response = Response.of(commodity, lot.door().ripeness());
         water = new WaterLimit(commodity, curve);
@@ -214,6 +217,35 @@ public final class KeepingModel {
     /** Whether the lot ends when it is overripe by printed times of ripening. */
     boolean endsOverripe() {
         return ripening.isPresent() && !span.shippedGreen();
+    }
+
+    /**
+     * Returns the life of the commodity over temperature.
+     *
+     * @return the curve, moved by what the keeper has seen
+     */
+    public LifeCurve life() {
+        return curve;
+    }
+
+    /**
+     * Returns how long a lot of the keeper's own kept, or at least kept.
+     *
+     * @param lot the lot
+     * @return its life over the published one in the middle run
+     */
+    public double timesPublished(OwnLot lot) {
+        Sighting seen = OwnLots.of(this.lot.commodity(), lot);
+        return Math.exp(seen.lnRatio(curve.published(Draw.MEDIAN), Draw.MEDIAN));
+    }
+
+    /**
+     * Returns what the keeper's own figures and lots did to the life.
+     *
+     * @return reasons; none where there are no own ones
+     */
+    public List<Reason> ownGrounds() {
+        return OwnGrounds.of(this);
     }
 
     LifeCurve curve() {

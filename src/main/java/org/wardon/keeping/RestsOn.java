@@ -4,6 +4,8 @@ package org.wardon.keeping;
 public enum RestsOn {
     /** The keeper's own figure sets the level. */
     KNOWN_LIFE("known-life"),
+    /** Lots of the keeper's own set the level. */
+    OWN_LOTS("own-lots"),
     /** Published lives of this commodity at several temperatures set the slope. */
     OWN_CURVE("own-curve"),
     /** Few lives of its own; the slope leans on that of all crops. */

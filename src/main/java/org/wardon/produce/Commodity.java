@@ -17,6 +17,7 @@ import org.wardon.produce.rows.LifeRow;
 import org.wardon.produce.rows.MoistureLimit;
 import org.wardon.produce.rows.MoistureLossRow;
 import org.wardon.produce.rows.OdourPair;
+import org.wardon.produce.rows.OwnLot;
 import org.wardon.produce.rows.Q10Row;
 import org.wardon.produce.rows.RespirationPower;
 import org.wardon.produce.rows.RespirationRow;
@@ -144,6 +145,7 @@ public record Commodity(
      * @param ambient lives at market temperature
      * @param curves fitted curves of life, that of the commodity as a whole first
      * @param ripening printed times of ripening
+     * @param ownLots lots of the keeper's own that are gone
      */
     public record Keeping(
             List<LifeRow> lives,
@@ -154,7 +156,8 @@ public record Commodity(
             List<CuringRow> curing,
             List<AmbientLife> ambient,
             List<LifeCurveRow> curves,
-            List<RipeningRow> ripening) {
+            List<RipeningRow> ripening,
+            List<OwnLot> ownLots) {
         /** Copies the lists. */
         public Keeping {
             lives = List.copyOf(lives);
@@ -166,6 +169,7 @@ public record Commodity(
             ambient = List.copyOf(ambient);
             curves = List.copyOf(curves);
             ripening = List.copyOf(ripening);
+            ownLots = List.copyOf(ownLots);
         }
     }
 

@@ -79,7 +79,8 @@ final class KeepingRows {
                 curing.of(id),
                 ambient.of(id),
                 curves.of(id),
-                ripening.of(id));
+                ripening.of(id),
+                List.of());
     }
 
     private static Stream<ChillingFloor> sorted(List<ChillingFloor> floors) {

@@ -9,6 +9,7 @@ import org.wardon.produce.Fact;
 import org.wardon.produce.rows.ChillingFloor;
 import org.wardon.produce.rows.LifeRow;
 import org.wardon.produce.rows.MoistureLimit;
+import org.wardon.produce.rows.OwnLot;
 import org.wardon.produce.rows.RespirationRow;
 
 /** Lays a keeper's own values over a published commodity: own first, print behind. */
@@ -27,6 +28,27 @@ final class OwnOverlay {
             }
         }
         return commodity;
+    }
+
+    /** Lays a keeper's own lots beside what is printed. */
+    static Commodity beside(Commodity published, List<OwnLot> lots) {
+        if (lots.isEmpty()) {
+            return published;
+        }
+        Commodity.Keeping of = published.keeping();
+        Commodity.Keeping keeping =
+                new Commodity.Keeping(
+                        of.lives(),
+                        of.q10s(),
+                        of.floors(),
+                        of.exposures(),
+                        of.sprouting(),
+                        of.curing(),
+                        of.ambient(),
+                        of.curves(),
+                        of.ripening(),
+                        lots);
+        return with(published, published.needs(), published.breath(), published.water(), keeping);
     }
 
     private static Commodity over(Commodity of, OwnName name, Fact own) {
@@ -122,7 +144,8 @@ final class OwnOverlay {
                 of.curing(),
                 of.ambient(),
                 of.curves(),
-                of.ripening());
+                of.ripening(),
+                of.ownLots());
     }
 
     private static Commodity.Water limits(Commodity.Water of, Fact own) {

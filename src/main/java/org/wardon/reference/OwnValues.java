@@ -10,6 +10,8 @@ import java.util.List;
 
 /** A keeper's own values, kept in {@code store.db}. Reading them creates no file. */
 public final class OwnValues {
+    private static final int SINCE_VERSION = 1;
+
     private final StoreFile store;
 
     /**
@@ -28,7 +30,7 @@ public final class OwnValues {
      * @throws org.wardon.errors.BadInput if the file cannot be read
      */
     public List<OwnValue> list() {
-        return store.read(OwnValues::readAll, List.of());
+        return store.read(SINCE_VERSION, OwnValues::readAll, List.of());
     }
 
     private static List<OwnValue> readAll(Connection connection) throws SQLException {

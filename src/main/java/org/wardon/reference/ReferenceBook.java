@@ -17,6 +17,7 @@ import org.wardon.produce.PackageClass;
 import org.wardon.produce.PackageKind;
 import org.wardon.produce.Source;
 import org.wardon.produce.rows.EthyleneStorageRow;
+import org.wardon.produce.rows.OwnLot;
 
 /**
  * The published tables, read from the database shipped with the program and never changed, with a
@@ -25,6 +26,7 @@ import org.wardon.produce.rows.EthyleneStorageRow;
 public final class ReferenceBook implements AutoCloseable {
     private final ReferenceDatabase database;
     private final Map<String, List<OwnValue>> own;
+    private final Map<String, List<GoneLot>> gone;
     private final FactReader facts;
     private final GroupReader groups;
     private final Once<Names> names;
@@ -35,9 +37,10 @@ public final class ReferenceBook implements AutoCloseable {
     private final Once<List<Commodity>> all;
     private final Map<String, Commodity> read = new ConcurrentHashMap<>();
 
-    private ReferenceBook(ReferenceDatabase database, List<OwnValue> own) {
+    private ReferenceBook(ReferenceDatabase database, List<OwnValue> own, List<GoneLot> gone) {
         this.database = database;
         this.own = own.stream().collect(Collectors.groupingBy(OwnValue::commodityId));
+        this.gone = gone.stream().collect(Collectors.groupingBy(GoneLot::commodityId));
         facts = new FactReader(database);
         groups = new GroupReader(database);
         names = new Once<>(() -> new Names(database));
@@ -59,7 +62,7 @@ public final class ReferenceBook implements AutoCloseable {
      * @return the book; close it when done
      */
     public static ReferenceBook open() {
-        return new ReferenceBook(ReferenceDatabase.open(), List.of());
+        return new ReferenceBook(ReferenceDatabase.open(), List.of(), List.of());
     }
 
     /**
@@ -70,7 +73,19 @@ public final class ReferenceBook implements AutoCloseable {
      * @throws BadInput if the keeper's file cannot be read
      */
     public static ReferenceBook open(OwnValues own) {
-        return new ReferenceBook(ReferenceDatabase.open(), own.list());
+        return open(own, List.of());
+    }
+
+    /**
+     * Opens the book with a keeper's own values laid over it and their own lots beside.
+     *
+     * @param own the own values
+     * @param gone lots of the keeper's own that are gone
+     * @return the book; close it when done
+     * @throws BadInput if the keeper's file cannot be read
+     */
+    public static ReferenceBook open(OwnValues own, List<GoneLot> gone) {
+        return new ReferenceBook(ReferenceDatabase.open(), own.list(), gone);
     }
 
     /**
@@ -150,11 +165,17 @@ public final class ReferenceBook implements AutoCloseable {
 
     /** One record a commodity, however it was asked for. */
     private Commodity kept(Commodity published) {
-        return read.computeIfAbsent(published.id(), id -> OwnOverlay.over(published, ownOf(id)));
+        return read.computeIfAbsent(
+                published.id(),
+                id -> OwnOverlay.beside(OwnOverlay.over(published, ownOf(id)), goneOf(id)));
     }
 
     private List<OwnValue> ownOf(String id) {
         return own.getOrDefault(id, List.of());
+    }
+
+    private List<OwnLot> goneOf(String id) {
+        return gone.getOrDefault(id, List.of()).stream().map(GoneLot::lot).toList();
     }
 
     private BadInput unknown(String name) {

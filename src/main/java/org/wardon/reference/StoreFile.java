@@ -18,7 +18,7 @@ import org.wardon.errors.BadInput;
  * brings it to the present version, step by step, by the numbered SQL beside this class.
  */
 final class StoreFile {
-    private static final int VERSION = 1;
+    private static final int VERSION = 2;
 
     private final Path file;
 
@@ -31,15 +31,19 @@ final class StoreFile {
         T on(Connection connection) throws SQLException;
     }
 
-    /** Reads the file if it is there and has content; else returns the other value. */
-    <T> T read(Work<T> work, T otherwise) {
+    /**
+     * Reads the file if it is there and of a version that has what is looked for; else returns the
+     * other value.
+     */
+    <T> T read(int sinceVersion, Work<T> work, T otherwise) {
         if (!Files.isRegularFile(file)) {
             return otherwise;
         }
         SQLiteConfig config = new SQLiteConfig();
         config.setReadOnly(true);
         return with(
-                config, connection -> version(connection) == 0 ? otherwise : work.on(connection));
+                config,
+                connection -> version(connection) < sinceVersion ? otherwise : work.on(connection));
     }
 
     /** Changes the file, which is created and brought to the present version first. */

@@ -23,7 +23,7 @@ class LotFatesTest {
 
     @Test
     void ownFigureSetsTheLevelAndKeepsTheShape() {
-        LotAtDoor known = LotAtDoor.SOUND.withKnownLife(new KnownLife(9, 10));
+        LotAtDoor known = LotAtDoor.SOUND.withKnownLife(new KnownLife(9, 10, 0));
         KeepingModel own = Crops.model("strawberry", known);
         KeepingModel printed = Crops.model("strawberry");
         assertEquals(9, 1 / own.paces(Draw.MEDIAN).perDay(Mechanism.SENESCENCE, 10, 1, 0), 1e-9);

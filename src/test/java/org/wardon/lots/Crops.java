@@ -42,7 +42,7 @@ final class Crops {
                 new Commodity.Water(transpiration, List.of(), List.of()),
                 new Commodity.Keeping(
                         List.of(), List.of(), List.of(), List.of(), List.of(), List.of(), List.of(),
-                        List.of(), List.of()),
+                        List.of(), List.of(), List.of()),
                 new Commodity.Company(List.of(), List.of(), List.of()));
     }
 

@@ -1,5 +1,6 @@
 package org.wardon.advice.outlook;
 
+import java.time.LocalDate;
 import java.util.ArrayList;
 import java.util.Comparator;
 import java.util.List;
@@ -49,7 +50,7 @@ public final class KeepingAdvice {
     private static final double CARRIED_DAYS = 2;
 
     private static final Pattern DAYS_AT_C =
-            Pattern.compile("(\\d+(?:\\.\\d+)?)@(-?\\d+(?:\\.\\d+)?)");
+            Pattern.compile("(\\d+(?:\\.\\d+)?)(?:\\.\\.(\\d+(?:\\.\\d+)?))?@(-?\\d+(?:\\.\\d+)?)");
 
     private final ReferenceBook book;
     private final ClassValues classes;
@@ -73,9 +74,9 @@ public final class KeepingAdvice {
      * @throws BadInput with every fault of the question
      */
     public KeepReport ask(KeepRequest request) {
-        check(request);
-        Commodity commodity = book.named(request.commodity());
-        LotHistory told = history(request, commodity);
+        Told read = told(request);
+        Commodity commodity = read.commodity();
+        LotHistory told = read.history();
         double endS = told.timeS(told.size() - 1);
         LotHistory followed = carriedOn(request, told, endS);
         double fromS = request.condition() instanceof KeepRequest.Steady ? 0 : endS;
@@ -132,7 +133,17 @@ public final class KeepingAdvice {
             return;
         }
         within(faults, "--known-life days", Double.parseDouble(match.group(1)), 0.1, 730, "days");
-        within(faults, "--known-life °C", Double.parseDouble(match.group(2)), -2, 40, "°C");
+        if (match.group(2) != null) {
+            double low = Double.parseDouble(match.group(1));
+            within(
+                    faults,
+                    "--known-life days",
+                    Double.parseDouble(match.group(2)),
+                    low,
+                    730,
+                    "days");
+        }
+        within(faults, "--known-life °C", Double.parseDouble(match.group(3)), -2, 40, "°C");
     }
 
     private static void within(
@@ -147,17 +158,31 @@ public final class KeepingAdvice {
         }
     }
 
-    private LotHistory history(KeepRequest request, Commodity commodity) {
+    /**
+     * What a lot went through.
+     *
+     * @param commodity what it is
+     * @param history its history
+     * @param lastDay the day of the last reading, where it was logged
+     */
+    record Told(Commodity commodity, LotHistory history, Optional<LocalDate> lastDay) {}
+
+    /** Checks a question and reads what the lot goes through. */
+    Told told(KeepRequest request) {
+        check(request);
+        Commodity commodity = book.named(request.commodity());
         double humidity =
                 request.humidityPct().isPresent()
                         ? request.humidityPct().getAsDouble() / 100
                         : handbookHumidity(commodity);
         if (request.condition() instanceof KeepRequest.Steady steady) {
-            return LotHistory.constant(
-                    steady.atC(),
-                    humidity,
-                    request.ethylenePpm().orElse(ChamberEthylene.OUTDOOR_PPM),
-                    steady.days() * Timeline.DAY_S);
+            LotHistory steadily =
+                    LotHistory.constant(
+                            steady.atC(),
+                            humidity,
+                            request.ethylenePpm().orElse(ChamberEthylene.OUTDOOR_PPM),
+                            steady.days() * Timeline.DAY_S);
+            return new Told(commodity, steadily, Optional.empty());
         }
         KeepRequest.Logged logged = (KeepRequest.Logged) request.condition();
         LoggedHistory read =
@@ -166,7 +191,10 @@ public final class KeepingAdvice {
                         logged.csv().toString(),
                         humidity,
                         ChamberEthylene.OUTDOOR_PPM);
-        return read.history();
+        LotHistory history = read.history();
+        long seconds = (long) history.timeS(history.size() - 1);
+        return new Told(
+                commodity, history, Optional.of(read.from().plusSeconds(seconds).toLocalDate()));
     }
 
     private static double handbookHumidity(Commodity commodity) {
@@ -216,11 +244,10 @@ public final class KeepingAdvice {
         if (request.knownLife().isPresent()) {
             Matcher match = DAYS_AT_C.matcher(request.knownLife().get());
             if (match.matches()) {
-                door =
-                        door.withKnownLife(
-                                new KnownLife(
-                                        Double.parseDouble(match.group(1)),
-                                        Double.parseDouble(match.group(2))));
+                double low = Double.parseDouble(match.group(1));
+                double high = match.group(2) == null ? low : Double.parseDouble(match.group(2));
+                double atC = Double.parseDouble(match.group(3));
+                door = door.withKnownLife(KnownLife.between(low, high, atC));
             }
         }
         return door;

@@ -1,11 +1,16 @@
 package org.wardon.keeping.life;
 
+import java.util.ArrayList;
+import java.util.List;
 import java.util.Optional;
 import java.util.OptionalDouble;
 import org.apache.commons.math3.distribution.NormalDistribution;
 import org.wardon.keeping.Draw;
 import org.wardon.keeping.KnownLife;
 import org.wardon.keeping.RestsOn;
+import org.wardon.keeping.experience.Belief;
+import org.wardon.keeping.experience.LevelSpread;
+import org.wardon.keeping.experience.Sighting;
 import org.wardon.produce.Commodity;
 import org.wardon.produce.rows.LifeCurveRow;
 
@@ -17,14 +22,12 @@ import org.wardon.produce.rows.LifeCurveRow;
  * to the cold end. Up to the highest temperature of the commodity's own published lives the rate
  * follows the fitted slope, beyond it the generic curve. The middle of the range is the handbook's;
  * its short end is the shortest life printed for that condition, its long end as far as sources
- * differ.
+ * differ. What the keeper has seen moves the level within a draw's slope, so its shape stays as
+ * published.
  */
 public final class LifeCurve {
     /** Lives of one crop at one temperature differ between sources by this factor in the median. */
     private static final double BETWEEN_SOURCES = 1.4;
-
-    /** How well a keeper's own figure is known (assumption). */
-    private static final double OF_OWN_FIGURE = 1.25;
 
     /** Least share of a printed range that is left to lots once temperature has its part (ours). */
     private static final double LEAST_WIDTH = 0.5;
@@ -49,7 +52,7 @@ public final class LifeCurve {
     private final OwnSlope slope;
     private final double exponent;
     private final Sources sources;
-    private final Optional<KnownLife> known;
+    private final List<Sighting> seen;
 
     /**
      * How sources differ in the handbook's own condition.
@@ -70,31 +73,50 @@ public final class LifeCurve {
     }
 
     private LifeCurve(
-            LifeLevel level,
-            Optional<LifeCurveRow> row,
-            double exponent,
-            Optional<KnownLife> known) {
+            LifeLevel level, Optional<LifeCurveRow> row, double exponent, List<Sighting> seen) {
         this.level = level;
         this.slope = row.map(OwnSlope::of).orElse(OwnSlope.COMMON);
         this.sources = row.map(Sources::of).orElse(Sources.USUAL);
         this.exponent = exponent;
-        this.known = known;
+        this.seen = List.copyOf(seen);
+    }
+
+    private LifeCurve(LifeCurve same, List<Sighting> seen) {
+        level = same.level;
+        slope = same.slope;
+        sources = same.sources;
+        exponent = same.exponent;
+        this.seen = List.copyOf(seen);
     }
 
     /**
      * Returns the curve of a commodity.
      *
      * @param commodity the commodity
-     * @param known the keeper's own figure, which sets the level; where there is none, an own life
-     *     at a temperature among the commodity's facts does
+     * @param known the keeper's own figure; where there is none, the own lives at a temperature
+     *     among the commodity's facts count
      * @return the curve
      */
     public static LifeCurve of(Commodity commodity, Optional<KnownLife> known) {
+        return of(commodity, known, List.of());
+    }
+
+    /**
+     * Returns the curve of a commodity, its level moved by what the keeper has seen.
+     *
+     * @param commodity the commodity
+     * @param known the keeper's own figure, as above
+     * @param lots the keeper's own lots
+     * @return the curve
+     */
+    public static LifeCurve of(
+            Commodity commodity, Optional<KnownLife> known, List<Sighting> lots) {
+        List<Sighting> seen = new ArrayList<>(lots);
+        known.map(List::of).orElseGet(() -> own(commodity)).stream()
+                .map(Sighting::of)
+                .forEach(seen::add);
         return new LifeCurve(
-                LifeLevel.of(commodity),
-                OwnSlope.row(commodity),
-                Rest.exponent(commodity),
-                known.or(() -> own(commodity)));
+                LifeLevel.of(commodity), OwnSlope.row(commodity), Rest.exponent(commodity), seen);
     }
 
     /**
@@ -106,20 +128,19 @@ public final class LifeCurve {
      */
     public static LifeCurve of(Commodity commodity, LifeCurveRow row) {
         return new LifeCurve(
-                LifeLevel.of(commodity),
-                Optional.of(row),
-                Rest.exponent(commodity),
-                Optional.empty());
+                LifeLevel.of(commodity), Optional.of(row), Rest.exponent(commodity), List.of());
     }
 
-    private static Optional<KnownLife> own(Commodity commodity) {
+    private static List<KnownLife> own(Commodity commodity) {
         return commodity.keeping().lives().stream()
                 .filter(row -> row.lifeDays().own() && row.temperatureC().isPresent())
-                .findFirst()
                 .map(
                         row ->
-                                new KnownLife(
-                                        row.lifeDays().middle(), row.temperatureC().getAsDouble()));
+                                KnownLife.between(
+                                        row.lifeDays().lowest(),
+                                        row.lifeDays().highest(),
+                                        row.temperatureC().getAsDouble()))
+                .toList();
     }
 
     /**
@@ -146,8 +167,11 @@ public final class LifeCurve {
      * @return strongest statement that holds for the whole curve
      */
     public RestsOn restsOn() {
-        if (known.isPresent()) {
+        if (seen.stream().anyMatch(one -> one.kind() == Sighting.Kind.USUAL)) {
             return RestsOn.KNOWN_LIFE;
+        }
+        if (seen.stream().anyMatch(one -> one.kind() == Sighting.Kind.LOT)) {
+            return RestsOn.OWN_LOTS;
         }
         if (level.restsOn() == RestsOn.CLASS) {
             return RestsOn.CLASS;
@@ -184,46 +208,103 @@ public final class LifeCurve {
      * @return rate over temperature
      */
     public Ageing at(Draw draw) {
+        Level printed = level(draw);
+        double z = NORMAL.inverseCumulativeProbability(draw.lifeLevel());
+        double within = Math.min(Math.max(z, -SHORTEST), FARTHEST);
+        return printed.at(
+                seen.isEmpty() ? within : believed(printed, draw).lot(within, printed.spread()));
+    }
+
+    private Belief believed(Level printed, Draw draw) {
+        Ageing middle = printed.at(0);
+        return Belief.after(
+                seen.stream().map(one -> one.reading(middle, printed.spread(), draw)).toList());
+    }
+
+    /**
+     * Returns the ageing as published, whatever the keeper has seen.
+     *
+     * @param draw the draw
+     * @return rate over temperature in the middle of the published level
+     */
+    public Ageing published(Draw draw) {
+        return level(draw).at(0);
+    }
+
+    /**
+     * Returns the curve as if the keeper had seen nothing.
+     *
+     * @return the published curve
+     */
+    public LifeCurve withoutOwn() {
+        return new LifeCurve(this, List.of());
+    }
+
+    /**
+     * Returns what the keeper's figures and lots make of the published life.
+     *
+     * @return life in the middle run over the published one, 1 where there are none
+     */
+    public double factor() {
+        double atC = level.atHighC();
+        return at(Draw.MEDIAN).lifeDays(atC) / published(Draw.MEDIAN).lifeDays(atC);
+    }
+
+    /**
+     * Returns how far lives lie from the middle of the published level.
+     *
+     * @param draw the draw
+     * @return the published spread
+     */
+    public LevelSpread spread(Draw draw) {
+        return level(draw).spread();
+    }
+
+    /**
+     * Returns what the keeper has seen.
+     *
+     * @return figures and lots
+     */
+    public List<Sighting> seen() {
+        return seen;
+    }
+
+    /** The published level along one slope. */
+    private record Level(Ageing free, double atC, double lnMiddleDays, LevelSpread spread) {
+        Ageing at(double z) {
+            return free.anchored(lnMiddleDays + spread.lnRatio(z), atC);
+        }
+    }
+
+    private Level level(Draw draw) {
         double z = NORMAL.inverseCumulativeProbability(draw.slope());
         double power = exponent * Math.max(LEAST_POWER, 1 + slope.betweenCrops() * z);
         double kilojoule = Math.max(LEAST_KJ_MOL, slope.kilojoulePerMol() + slope.deviation() * z);
         Ageing free = new Ageing(new GenericCurve(power), kilojoule, highestPublishedC(), 0);
-        return free.anchored(lnLifeAtAnchor(draw, free), anchorC());
-    }
-
-    private double anchorC() {
-        return known.map(KnownLife::atC).orElse(level.atHighC());
-    }
-
-    private double lnLifeAtAnchor(Draw draw, Ageing free) {
-        if (known.isPresent()) {
-            double width = 2 * Math.log(OF_OWN_FIGURE);
-            return Math.log(known.get().days()) + (draw.lifeLevel() - 0.5) * width;
-        }
-        double z = NORMAL.inverseCumulativeProbability(draw.lifeLevel());
         double low = Math.log(level.lowDays());
         double printed = Math.log(level.highDays()) - low;
         double fall = free.lnRate(level.atHighC()) - free.lnRate(level.atLowC());
         double half = 0.5 * Math.max(printed - fall, LEAST_WIDTH * printed);
         double middle = low + half;
-        return middle + (z < 0 ? shorter(middle, z) : longer(middle, half, z));
+        LevelSpread spread = new LevelSpread(shortSide(middle), longSide(middle, half));
+        return new Level(free, level.atHighC(), middle, spread);
     }
 
     /**
      * The short side ends at the shortest life anybody printed for the condition: there nothing
      * ends a lot before its published life.
      */
-    private double shorter(double middle, double z) {
+    private double shortSide(double middle) {
         boolean single = level.highDays() <= level.lowDays();
         double printed = Math.log(single ? level.lowDays() / BETWEEN_SOURCES : level.lowDays());
         double least = Math.min(printed, Math.log(sources.shortestDays().orElse(level.lowDays())));
-        return (middle - least) * Math.max(z, -SHORTEST) / SHORTEST;
+        return (middle - least) / SHORTEST;
     }
 
     /** The long side is as wide as sources differ, or as one of them says. */
-    private double longer(double middle, double half, double z) {
+    private double longSide(double middle, double half) {
         double printed =
                 Math.max(half, Math.log(sources.longestDays().orElse(level.highDays())) - middle);
-        return Math.max(sources.deviation(), printed / TENTH) * Math.min(z, FARTHEST);
+        return Math.max(sources.deviation(), printed / TENTH);
     }
 }
