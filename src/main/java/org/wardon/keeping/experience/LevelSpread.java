@@ -12,7 +12,7 @@ public record LevelSpread(double shortSide, double longSide) {
      * Standard deviation of ln life from lot to lot in one place: what lives of one source deviate
      * from its own curve (life-pool table, measured; our own fit of published lives).
      */
-    public static final double BETWEEN_LOTS = 0.158;
+    public static final double BETWEEN_LOTS = 0.169;
 
     /** A side nobody prints any width for keeps this one (ours). */
     private static final double LEAST = 0.02;
