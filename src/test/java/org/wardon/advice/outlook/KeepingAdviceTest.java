@@ -101,14 +101,14 @@ class KeepingAdviceTest {
     }
 
     @Test
-    void aKnownLifeShiftsTheLevelAndKeepsTheShape() {
+    void aKnownLifeShiftsTheLevel() {
         double published = ageing(at(10, 7, 0, "")).p50();
         double known = ageing(at(10, 7, 0, "4@10")).p50();
         assertTrue(published > 1.1 * 4 || published < 0.9 * 4, "the test needs another life");
         assertEquals(4, known, 0.05 * 4);
-        // The plain run tells the curve itself; middles of draws mix level and slope.
-        double shape = at(10, 1, 0, "").lifeUsedPct() / at(2, 1, 0, "").lifeUsedPct();
-        same(shape, at(10, 1, 0, "4@10").lifeUsedPct() / at(2, 1, 0, "4@10").lifeUsedPct());
+        // Longer where colder, as the curve runs; that its shape stays is held where single draws
+        // are.
+        assertTrue(ageing(at(2, 7, 0, "4@10")).p50() > 2 * known);
         KeepRequest told = request(CROP, new KeepRequest.Steady(2, 7), 0, "4@10");
         assertEquals("known-life", ADVICE.ask(told).restsOn());
     }
