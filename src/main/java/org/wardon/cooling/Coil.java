@@ -82,6 +82,65 @@ final class Coil {
         double totalByCoil;
         double effectiveness;
 
+        /** Where the coil was in balance last, and how its temperature follows from there. */
+        double coilByAir;
+
+        double coilByHumidity;
+        double coilBySpeed;
+        double coilByCondensing;
+        private double foundAirC;
+        private double foundRatio;
+        private double foundSpeed;
+        private double foundCondensingC;
+
+        private double bypassUnits = Double.NaN;
+        private double bypass;
+
+        /** A coil without frost has the same one always. */
+        private double bypass(double transferUnits) {
+            if (transferUnits != bypassUnits) {
+                bypassUnits = transferUnits;
+                bypass = Math.exp(-transferUnits);
+            }
+            return bypass;
+        }
+
+        /** Remembers what it was in balance with. */
+        void found(CoolerInputs in, double speed, double condensingC) {
+            foundAirC = in.airC;
+            foundRatio = in.humidityRatio;
+            foundSpeed = speed;
+            foundCondensingC = condensingC;
+        }
+
+        /** Takes over where another was in balance. */
+        void foundAs(State other) {
+            coilByAir = other.coilByAir;
+            coilByHumidity = other.coilByHumidity;
+            coilBySpeed = other.coilBySpeed;
+            coilByCondensing = other.coilByCondensing;
+            foundAirC = other.foundAirC;
+            foundRatio = other.foundRatio;
+            foundSpeed = other.foundSpeed;
+            foundCondensingC = other.foundCondensingC;
+        }
+
+        /** The balance to be expected, from a coil that was at {@code lastC} in the last one. */
+        double foreseenC(double lastC, CoolerInputs in, double speed, double condensingC) {
+            return lastC
+                    + coilByAir * (in.airC - foundAirC)
+                    + coilByHumidity * (in.humidityRatio - foundRatio)
+                    + coilBySpeed * (speed - foundSpeed)
+                    + coilByCondensing * (condensingC - foundCondensingC);
+        }
+
+        /** Moves on to a coil a little warmer, along the slopes. */
+        void follow(double warmerK) {
+            sensibleW += sensibleByCoil * warmerK;
+            vapourKgS += vapourByCoil * warmerK;
+            totalW += totalByCoil * warmerK;
+        }
+
         /** Fills the state for air of {@code airC} and {@code w} on a coil at {@code coilC}. */
         void at(
                 double airC,
@@ -91,7 +150,7 @@ final class Coil {
                 double uaWK,
                 double pressurePa) {
             double ntu = uaWK / (flowKgS * MoistAir.DRY_AIR_J_KG_K);
-            double bypass = Math.exp(-ntu * frostFactor(coilC));
+            double bypass = bypass(ntu * frostFactor(coilC));
             double eps = 1 - bypass;
             double epsByCoil = bypass * ntu * frostFactorSlope(coilC);
             double psat = SaturatedAir.pressurePa(coilC);

@@ -36,10 +36,14 @@ public final class CompressorLaw implements CoolerLaw {
     private static final double COMFORT_HUMIDITY = 0.47;
     private static final double COIL_WATER_KG_PER_KW = 0.2;
 
+    /** A step of Newton this short is followed by slopes; what is left is of its square, K. */
+    private static final double LAST_STEP_K = 2e-5;
+
     private final Compressor unit;
     private final double pressurePa;
     private final double flowKgS;
     private final double ratedEvaporatingC;
+    private final double ratedLimitedC;
     private final double ratedCondensingC;
     private final double carnotFraction;
     private final double coilWaterKg;
@@ -57,6 +61,7 @@ public final class CompressorLaw implements CoolerLaw {
         // The fan moves a volume; its mass is taken at the rated air (within 5 % in use).
         flowKgS = unit.airFlowM3s() / MoistAir.specificVolumeM3kg(unit.ratedAirC(), 0, pressurePa);
         ratedEvaporatingC = ratedCoilC();
+        ratedLimitedC = limited(ratedEvaporatingC);
         ratedCondensingC = Condensing.temperatureC(unit.ratedOutdoorC());
         double teK = limited(ratedEvaporatingC) + SaturatedAir.ZERO_C_IN_K;
         double lift = ratedCondensingC - limited(ratedEvaporatingC);
@@ -144,13 +149,24 @@ public final class CompressorLaw implements CoolerLaw {
             double condensingC,
             double speed,
             double share) {
-        double teC = balance(in, out.coil, guessC, condensingC, speed);
         Coil.State coil = out.coil;
+        double teC =
+                balance(
+                        in,
+                        coil,
+                        coil.foreseenC(guessC, in, speed, condensingC),
+                        condensingC,
+                        speed);
         double full = capacityW(teC, condensingC);
         double byCoil = coil.totalByCoil - speed * full * capacityLogSlope(teC);
         double teByAir = -coil.totalByAir / byCoil;
         double teByHumidity = -coil.totalByHumidity / byCoil;
         double teBySpeed = full / byCoil;
+        coil.found(in, speed, condensingC);
+        coil.coilByAir = teByAir;
+        coil.coilByHumidity = teByHumidity;
+        coil.coilBySpeed = teBySpeed;
+        coil.coilByCondensing = speed * teBySpeed * condensingLogSlope(condensingC);
         out.sensibleW = share * coil.sensibleW;
         out.vapourKgS = share * coil.vapourKgS;
         out.sensibleByAirC = share * (coil.sensibleByAir + coil.sensibleByCoil * teByAir);
@@ -209,8 +225,9 @@ public final class CompressorLaw implements CoolerLaw {
             double step = -f / (coil.totalByCoil - carried * capacityLogSlope(te));
             double next = te + step;
             next = next > low && next < high ? next : 0.5 * (low + high);
-            if (Math.abs(next - te) < 1e-11 * (1 + Math.abs(te))) {
-                return te;
+            if (Math.abs(next - te) < LAST_STEP_K) {
+                coil.follow(next - te);
+                return next;
             }
             te = next;
         }
@@ -223,10 +240,14 @@ public final class CompressorLaw implements CoolerLaw {
     }
 
     private double capacityW(double evaporatingC, double condensingC) {
-        double warmer = limited(evaporatingC) - limited(ratedEvaporatingC);
+        double warmer = limited(evaporatingC) - ratedLimitedC;
         return unit.ratedCapacityW()
                 * Math.exp(CAPACITY_PER_TE_K * warmer)
                 * (1 - CAPACITY_PER_TC_K * (condensingC - ratedCondensingC));
+    }
+
+    private double condensingLogSlope(double condensingC) {
+        return -CAPACITY_PER_TC_K / (1 - CAPACITY_PER_TC_K * (condensingC - ratedCondensingC));
     }
 
     private static double capacityLogSlope(double evaporatingC) {

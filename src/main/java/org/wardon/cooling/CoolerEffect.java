@@ -190,6 +190,13 @@ public final class CoolerEffect {
         electricW = fanW = electricByAirC = electricByHumidity = electricByRun = 0;
         evaporatingC = condensingC = supplyC = Double.NaN;
         tripped = false;
+        if (ownRate.length > 0) {
+            clearOwn();
+        }
+        nextEventS = Double.POSITIVE_INFINITY;
+    }
+
+    private void clearOwn() {
         Arrays.fill(ownRate, 0);
         Arrays.fill(ownRateByAirC, 0);
         Arrays.fill(ownRateByHumidity, 0);
@@ -200,6 +207,15 @@ public final class CoolerEffect {
         Arrays.fill(electricByOwn, 0);
         Arrays.fill(meltsByOwn, 0);
         Arrays.fill(refreezesByOwn, 0);
-        nextEventS = Double.POSITIVE_INFINITY;
+    }
+
+    /**
+     * Expects an effect like another, so that it is found from near there.
+     *
+     * @param other what was found last, of the same cooler
+     */
+    public void expect(CoolerEffect other) {
+        evaporatingC = other.evaporatingC;
+        coil.foundAs(other.coil);
     }
 }

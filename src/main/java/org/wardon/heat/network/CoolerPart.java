@@ -506,7 +506,7 @@ public final class CoolerPart implements Part, FilmedFace.Control {
         double outdoorRatio = in.outdoorHumidityRatio;
         in.outdoorC = outdoorC + seconds * out.airSlope;
         in.outdoorHumidityRatio = outdoorRatio + seconds * out.ratioSlope;
-        then.evaporatingC = effect.evaporatingC;
+        then.expect(effect);
         law.effect(in, then);
         in.outdoorC = outdoorC;
         in.outdoorHumidityRatio = outdoorRatio;

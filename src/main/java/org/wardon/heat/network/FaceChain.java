@@ -66,7 +66,11 @@ abstract class FaceChain implements FacePart {
 
     @Override
     public void farFilm(double wattsM2K) {
-        farFilm = wattsM2K * wallFactor;
+        double film = wattsM2K * wallFactor;
+        if (film == farFilm) {
+            return; // most hours are like the one before
+        }
+        farFilm = film;
         outer = 1 / (1 / farFilm + grid.outerM2KW);
         conductionJ();
     }

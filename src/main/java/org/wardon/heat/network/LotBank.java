@@ -44,7 +44,7 @@ final class LotBank implements Part {
     private static final double BREATH_REACH_K = 0.6;
 
     /** Newton's last step; what is left is of its square, K. */
-    private static final double LAST_STEP_K = 2e-3;
+    private static final double LAST_STEP_K = 1e-2;
 
     /** The same where laws are asked directly, K. */
     private static final double PLAIN_LAST_STEP_K = 1e-7;
@@ -59,7 +59,6 @@ final class LotBank implements Part {
     static final double WATER = MoistAir.WATER_J_KG_K;
     static final double RATIO = MoistAir.MOLAR_MASS_RATIO;
     static final double WIDTH = FreeWater.ROUND_PA;
-    static final double PER_WIDTH = 1 / (2 * WIDTH);
 
     /** Their place in the state. */
     final Bank bank;
@@ -193,8 +192,12 @@ final class LotBank implements Part {
         return flowAt + kind * places + slot;
     }
 
-    /** Heat of respiration of a shell, W. */
+    /** Heat of respiration of a shell as the steps see it, W. */
     double breathW(int k, int slot, double t) {
+        return plain ? lawfulW(k, slot, t) : breath.value(k * places + slot, t);
+    }
+
+    private double lawfulW(int k, int slot, double t) {
         return shellKg[k * places + slot] * respirationFactor[slot] * laws[slot].wattsPerKg(t);
     }
 
@@ -335,7 +338,9 @@ final class LotBank implements Part {
 
     /**
      * One step of Newton on the heat of the skins, with evaporation carried along by its slope;
-     * returns the longest of them, K. By {@link org.wardon.heat.laws.SkinWater}.
+     * returns the longest of them, K. By {@link org.wardon.heat.laws.SkinWater}; what condenses is
+     * what evaporates less the drop. Branches here go the same way nearly always and cost less than
+     * the larger of two numbers does.
      */
     private double newton(double[] y) {
         int n = bank.count();
@@ -352,29 +357,17 @@ final class LotBank implements Part {
                                     * (saturation.c1[i]
                                             + d * (saturation.c2[i] + d * saturation.c3[i]));
             double slope = saturation.c1[i] + d * (2 * saturation.c2[i] + d * 3 * saturation.c3[i]);
-            double wet = wetShare(y[water + i] * perFullKg[i]);
+            double wet = FreeWater.wetShare(y[water + i] * perFullKg[i]);
             double drop = lowering[i] * psat - pa;
             double filmDrop = psat - pa;
-            double near = within(drop);
-            double nearFilm = within(filmDrop);
-            double tissue = tissueKgSPa[i] * (1 - wet);
-            double up = (nearFilm + WIDTH) * (nearFilm + WIDTH) * (0.5 * PER_WIDTH);
-            double down = (WIDTH - nearFilm) * (WIDTH - nearFilm) * (0.5 * PER_WIDTH);
-            double film =
-                    filmKgSPa[i]
-                            * (wet * (up + Math.max(filmDrop - WIDTH, 0))
-                                    - (down + Math.max(-filmDrop - WIDTH, 0)));
-            double gone =
-                    tissue
-                                    * ((near + WIDTH) * (near + WIDTH) * (0.5 * PER_WIDTH)
-                                            + Math.max(drop - WIDTH, 0))
-                            + film;
-            double filmBySkin =
-                    filmKgSPa[i]
-                            * (wet * (nearFilm + WIDTH) + (WIDTH - nearFilm))
-                            * PER_WIDTH
-                            * slope;
-            double bySkin = tissue * (near + WIDTH) * PER_WIDTH * lowering[i] * slope + filmBySkin;
+            double dry = tissueKgSPa[i] * (1 - wet);
+            double up = FreeWater.positive(filmDrop, WIDTH);
+            double upSlope = FreeWater.positiveSlope(filmDrop, WIDTH);
+            double film = filmKgSPa[i] * (wet * up - (up - filmDrop));
+            double gone = dry * FreeWater.positive(drop, WIDTH) + film;
+            double filmBySkin = filmKgSPa[i] * (wet * upSlope + (1 - upSlope)) * slope;
+            double bySkin =
+                    dry * FreeWater.positiveSlope(drop, WIDTH) * lowering[i] * slope + filmBySkin;
             double latent = L0 + VAPOUR_LESS_WATER * t;
             double miss =
                     skinWK[i] * (y[shell + i] - t) + filmWK[i] * (packageC[i] - t) - gone * latent;
@@ -383,19 +376,10 @@ final class LotBank implements Part {
             skinC[i] = t + step;
             evaporated[i] = gone + bySkin * step;
             filmWater[i] = film + filmBySkin * step;
-            longest = Math.max(longest, Math.abs(step));
+            double length = Math.abs(step);
+            longest = length > longest ? length : longest;
         }
         return longest;
-    }
-
-    /** {@link FreeWater#wetShare} without a branch. */
-    static double wetShare(double fullness) {
-        double f = Math.min(fullness, 1);
-        return f * (2 - Math.max(f, 0));
-    }
-
-    static double within(double drop) {
-        return Math.min(Math.max(drop, -WIDTH), WIDTH);
     }
 
     private void exchange(AirState air, double[] y, double[] rates, double[] flows) {
@@ -464,7 +448,7 @@ final class LotBank implements Part {
                         shellKg[k * places + i]
                                 * respirationFactor[i]
                                 * laws[i].slopeWattsPerKgK(t);
-                breath.exact(k * places + i, t, breathW(k, i, t), slope);
+                breath.exact(k * places + i, t, lawfulW(k, i, t), slope);
             }
         }
     }

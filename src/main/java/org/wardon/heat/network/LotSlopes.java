@@ -2,6 +2,7 @@ package org.wardon.heat.network;
 
 import java.util.Arrays;
 import org.wardon.air.MoistAir;
+import org.wardon.heat.laws.FreeWater;
 import org.wardon.heat.solver.Bank;
 
 /**
@@ -80,24 +81,16 @@ final class LotSlopes {
                 lots.saturation.c1[i]
                         + d * (2 * lots.saturation.c2[i] + d * 3 * lots.saturation.c3[i]);
         double fullness = y[b + p] * lots.perFullKg[i];
-        double wet = LotBank.wetShare(fullness);
-        double wetSlope = 2 * (1 - Math.min(Math.max(fullness, 0), 1)) * lots.perFullKg[i];
+        double wet = FreeWater.wetShare(fullness);
+        double wetSlope = FreeWater.wetShareSlope(fullness) * lots.perFullKg[i];
         double drop = lots.lowering[i] * psat - pa;
         double filmDrop = psat - pa;
-        double near = LotBank.within(drop);
-        double nearFilm = LotBank.within(filmDrop);
+        double upSlope = FreeWater.positiveSlope(filmDrop, LotBank.WIDTH);
         double tissueBy =
-                lots.tissueKgSPa[i] * (1 - wet) * (near + LotBank.WIDTH) * LotBank.PER_WIDTH;
-        double filmBy =
-                lots.filmKgSPa[i]
-                        * (wet * (nearFilm + LotBank.WIDTH) + (LotBank.WIDTH - nearFilm))
-                        * LotBank.PER_WIDTH;
-        double up =
-                (nearFilm + LotBank.WIDTH) * (nearFilm + LotBank.WIDTH) * (0.5 * LotBank.PER_WIDTH)
-                        + Math.max(filmDrop - LotBank.WIDTH, 0);
-        double tissueUp =
-                (near + LotBank.WIDTH) * (near + LotBank.WIDTH) * (0.5 * LotBank.PER_WIDTH)
-                        + Math.max(drop - LotBank.WIDTH, 0);
+                lots.tissueKgSPa[i] * (1 - wet) * FreeWater.positiveSlope(drop, LotBank.WIDTH);
+        double filmBy = lots.filmKgSPa[i] * (wet * upSlope + (1 - upSlope));
+        double up = FreeWater.positive(filmDrop, LotBank.WIDTH);
+        double tissueUp = FreeWater.positive(drop, LotBank.WIDTH);
         double sum = LotBank.RATIO + ratio;
         double paByRatio = lots.pressurePa * LotBank.RATIO / (sum * sum);
         double bySkin = (tissueBy * lots.lowering[i] + filmBy) * slope;
