@@ -37,7 +37,7 @@ public final class CompressorLaw implements CoolerLaw {
     private static final double COIL_WATER_KG_PER_KW = 0.2;
 
     /** A step of Newton this short is followed by slopes; what is left is of its square, K. */
-    private static final double LAST_STEP_K = 2e-5;
+    private static final double LAST_STEP_K = 1e-7;
 
     private final Compressor unit;
     private final double pressurePa;
@@ -223,13 +223,12 @@ public final class CompressorLaw implements CoolerLaw {
                 high = te;
             }
             double step = -f / (coil.totalByCoil - carried * capacityLogSlope(te));
-            double next = te + step;
-            next = next > low && next < high ? next : 0.5 * (low + high);
-            if (Math.abs(next - te) < LAST_STEP_K) {
-                coil.follow(next - te);
-                return next;
+            if (Math.abs(step) < LAST_STEP_K) {
+                coil.follow(step);
+                return te + step;
             }
-            te = next;
+            double next = te + step;
+            te = next > low && next < high ? next : 0.5 * (low + high);
         }
         return te;
     }
