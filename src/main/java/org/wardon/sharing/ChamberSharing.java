@@ -76,7 +76,7 @@ public final class ChamberSharing {
                         handbookSource(lot),
                         Argument.of(spread.p10(), "day"),
                         Argument.of(wanted, "day"),
-                        Argument.of(lot.meanC(), "C")));
+                        Argument.of(lot.felt().meanC(), "C")));
     }
 
     private void chilled(Together lot) {
@@ -85,7 +85,7 @@ public final class ChamberSharing {
             injured += fate.endS(Mechanism.CHILLING) <= marketEndS(lot) ? 1 : 0;
         }
         double share = injured / lot.fates().size();
-        boolean coldHere = lot.span().last() || lot.meanC() < lot.model().lowestSafeC();
+        boolean coldHere = lot.span().last() || lot.felt().coldestC() < lot.model().lowestSafeC();
         if (share < Limits.GOOD_CHILLING || !coldHere) {
             return;
         }
@@ -96,14 +96,19 @@ public final class ChamberSharing {
                         lot.id(),
                         handbookSource(lot),
                         Argument.of(100 * share, "pct"),
-                        Argument.of(lot.meanC(), "C"),
+                        Argument.of(lot.felt().coldestC(), "C"),
+                        Argument.of(lot.felt().meanC(), "C"),
                         Argument.of(lot.model().lowestSafeC(), "C")));
     }
 
     private void company(Together lot) {
         Conflicts conflicts = new Conflicts();
         conflicts.ethylene(
-                lot.wish(), lot.model(), strongestGiver(lot), lot.ethylenePpm(), lot.meanC());
+                lot.wish(),
+                lot.model(),
+                strongestGiver(lot),
+                lot.felt().ethylenePpm(),
+                lot.felt().meanC());
         for (Together other : lots) {
             double days = other.daysWith(lot);
             if (!other.id().equals(lot.id()) && days > 0) {
@@ -138,7 +143,7 @@ public final class ChamberSharing {
                 * lot.model()
                         .response()
                         .giving()
-                        .microlitrePerKgHour(lot.meanC(), stage, Draw.MEDIAN);
+                        .microlitrePerKgHour(lot.felt().meanC(), stage, Draw.MEDIAN);
     }
 
     private static String handbookSource(Together lot) {

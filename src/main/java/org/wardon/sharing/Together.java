@@ -12,17 +12,19 @@ import org.wardon.keeping.KeepingModel;
  * @param fates its fates in the draws, with the chamber's air, humidity and ethylene
  * @param massKg its mass, kg
  * @param span when it is there, and when in the store
- * @param meanC its mean temperature while there, °C
- * @param ethylenePpm mean ethylene while it is there, µL/L
+ * @param felt what it went through while there
  */
 public record Together(
-        Wish wish,
-        KeepingModel model,
-        List<Fate> fates,
-        double massKg,
-        Span span,
-        double meanC,
-        double ethylenePpm) {
+        Wish wish, KeepingModel model, List<Fate> fates, double massKg, Span span, Felt felt) {
+    /**
+     * What a lot went through in a chamber.
+     *
+     * @param meanC its mean temperature, °C
+     * @param coldestC the lowest its mean came to, °C
+     * @param ethylenePpm mean ethylene of the air, µL/L
+     */
+    public record Felt(double meanC, double coldestC, double ethylenePpm) {}
+
     /**
      * When a lot is in a chamber, and when in the store, of which it may leave another chamber.
      *

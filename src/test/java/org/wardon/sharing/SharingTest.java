@@ -106,7 +106,8 @@ class SharingTest {
         LotHistory history = LotHistory.constant(atC, humidity, ppm, 7 * DAY_S);
         List<Fate> fates = DRAWS.stream().map(draw -> model.follow(history, draw)).toList();
         Together.Span span = Together.Span.only(0, 7 * DAY_S);
-        return new Together(Wish.of(model.lot(), 7), model, fates, 500, span, atC, ppm);
+        return new Together(
+                Wish.of(model.lot(), 7), model, fates, 500, span, new Together.Felt(atC, atC, ppm));
     }
 
     @Test

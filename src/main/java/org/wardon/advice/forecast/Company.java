@@ -102,17 +102,6 @@ final class Company {
     private Together together(Visit visit, ChamberEthylene level) {
         LotSheet sheet = visit.sheet();
         LotHistory history = visit.within(outcome.history(visit.id()));
-        double untilS = Math.min(visit.leavesS(), outcome.horizonS());
-        double sumC = 0;
-        double sumPpm = 0;
-        double span = 0;
-        for (int i = 1; i < history.size() && history.timeS(i) <= untilS + 1; i++) {
-            double step = history.timeS(i) - history.timeS(i - 1);
-            sumC += step * 0.5 * (history.meanC(i) + history.meanC(i - 1));
-            sumPpm += step * level.ppmAt(history.timeS(i));
-            span += step;
-        }
-        boolean there = span > 0;
         return new Together(
                 wish(visit),
                 sheet.model(),
@@ -123,8 +112,24 @@ final class Company {
                         visit.leavesS(),
                         sheet.clock().hereFromS(),
                         sheet.clock().leavesS()),
-                there ? sumC / span : history.meanC(0),
-                there ? sumPpm / span : level.ppmAt(history.timeS(0)));
+                felt(history, level, Math.min(visit.leavesS(), outcome.horizonS())));
+    }
+
+    private static Together.Felt felt(LotHistory history, ChamberEthylene level, double untilS) {
+        double sumC = 0;
+        double sumPpm = 0;
+        double span = 0;
+        double coldestC = history.meanC(0);
+        for (int i = 1; i < history.size() && history.timeS(i) <= untilS + 1; i++) {
+            double step = history.timeS(i) - history.timeS(i - 1);
+            sumC += step * 0.5 * (history.meanC(i) + history.meanC(i - 1));
+            sumPpm += step * level.ppmAt(history.timeS(i));
+            coldestC = Math.min(coldestC, history.meanC(i));
+            span += step;
+        }
+        return span > 0
+                ? new Together.Felt(sumC / span, coldestC, sumPpm / span)
+                : new Together.Felt(coldestC, coldestC, level.ppmAt(history.timeS(0)));
     }
 
     private static Wish wish(Visit visit) {
