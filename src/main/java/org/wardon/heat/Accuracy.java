@@ -16,12 +16,23 @@ record Accuracy(double lotK, double airK, Integrator.Steps steps) {
      */
     static final Accuracy USUAL = new Accuracy(1e-2, 1e-1);
 
+    /** For a run without pulses, whose steps are long: as exact, humidity too (measured). */
+    static final Accuracy EVEN = new Accuracy(5e-3, 5e-2, Integrator.Steps.LONG);
+
     /** For a run whose single hours nobody reads: lots within 0.02 K (measured). */
     static final Accuracy SKETCHED = new Accuracy(2e-2, 2e-1, Integrator.Steps.LONG);
 
     Accuracy {
         Require.within("lotK", lotK, 1e-9, 1, "K", "");
         Require.within("airK", airK, 1e-9, 1, "K", "");
+    }
+
+    static Accuracy of(DoorMode mode) {
+        return switch (mode) {
+            case PULSES -> USUAL;
+            case AVERAGED -> EVEN;
+            case SKETCHED -> SKETCHED;
+        };
     }
 
     Accuracy(double lotK, double airK) {

@@ -29,7 +29,7 @@ final class GivenAirRunner implements Integrator.StepListener, Integrator.Trigge
         this.pressurePa = pressurePa;
         this.endS = endS;
         this.network = network;
-        Accuracy accuracy = air.rowHours() > 1 ? Accuracy.SKETCHED : Accuracy.USUAL;
+        Accuracy accuracy = air.rowHours() > 1 ? Accuracy.SKETCHED : Accuracy.EVEN;
         network.accuracy(accuracy.lotK(), accuracy.airK());
         rowS = 3600.0 * air.rowHours();
         integrator = new Integrator(network, accuracy.steps(), 1, FIRST_STEP_S, SHORTEST_STEP_S);

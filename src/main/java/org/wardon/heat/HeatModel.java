@@ -23,7 +23,7 @@ public final class HeatModel {
      * @throws IllegalArgumentException where a part is not built or parts do not fit together
      */
     public static Course run(ChamberRun run, Progress progress) {
-        return run(run, progress, accuracy(run), false);
+        return run(run, progress, Accuracy.of(run.doorMode()), false);
     }
 
     /**
@@ -36,13 +36,9 @@ public final class HeatModel {
         if (!WarmUp.wanted(run)) {
             return run.start();
         }
-        Warmed warmed = WarmUp.warmed(run, accuracy(run), false);
+        Warmed warmed = WarmUp.warmed(run, Accuracy.of(run.doorMode()), false);
         return new Start(
                 run.start().temperatureC(), run.start().humidityPct(), Optional.of(warmed));
-    }
-
-    private static Accuracy accuracy(ChamberRun run) {
-        return run.doorMode() == DoorMode.SKETCHED ? Accuracy.SKETCHED : Accuracy.USUAL;
     }
 
     /**
@@ -68,7 +64,8 @@ public final class HeatModel {
      * @throws IllegalArgumentException where a lot is carried to where no such lot comes in
      */
     public static List<Course> runTogether(List<ChamberRun> runs) {
-        return TogetherRun.of(runs, runs.isEmpty() ? Accuracy.USUAL : accuracy(runs.get(0)));
+        return TogetherRun.of(
+                runs, runs.isEmpty() ? Accuracy.USUAL : Accuracy.of(runs.get(0).doorMode()));
     }
 
     /**

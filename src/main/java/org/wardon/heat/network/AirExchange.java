@@ -37,6 +37,9 @@ final class AirExchange implements Part {
     private static final double VAPOUR_VOLUME = 1.607858;
     private static final double SLOPE_OVER_S = 1;
 
+    /** Share of the density over which the slope of the door is taken. */
+    private static final double DENSITY_STEP = 3e-7;
+
     /** The last of the leakage fades out over this share of it, to either side. */
     private static final double FADES_OVER = 0.05;
 
@@ -48,6 +51,9 @@ final class AirExchange implements Part {
     private final CoolerPart[] coolers;
     private double open;
     private double freeM3 = 1;
+
+    /** Dry air through the door as it was last asked, kg/s. */
+    private double through;
 
     private double door;
     private double doorByAirC;
@@ -135,30 +141,48 @@ final class AirExchange implements Part {
         if (open <= 0 || doorway.widthM <= 0) {
             return 0;
         }
-        double inside = density(airC, ratio);
+        return moistKgS(density(airC, ratio), density(beyondC, beyondRatio)) / (1 + ratio);
+    }
+
+    /** Moist air through the door by the densities on its sides, kg/s. */
+    private double moistKgS(double inside, double beyond) {
         double full =
-                DoorExchange.flowKgS(
-                                inside,
-                                density(beyondC, beyondRatio),
-                                doorway.widthM,
-                                doorway.heightM)
-                        * doorway.share
-                        / (1 + ratio);
+                DoorExchange.flowKgS(inside, beyond, doorway.widthM, doorway.heightM)
+                        * doorway.share;
         if (doorway.averagedOpenS <= 0) {
             return open * full;
         }
-        double dry = inside / (1 + ratio);
         return open
-                * dry
-                * DoorExchange.volumeAnOpeningM3(full / dry, doorway.averagedOpenS, freeM3)
+                * inside
+                * DoorExchange.volumeAnOpeningM3(full / inside, doorway.averagedOpenS, freeM3)
                 * doorway.openingsPerS;
+    }
+
+    /**
+     * Slopes of the door's air, which feels the chamber's by its density; {@code door} is known.
+     */
+    private void doorSlopes(AirState air, Outside.Place beyond) {
+        doorByAirC = 0;
+        doorByRatio = 0;
+        if (door <= 0) {
+            return;
+        }
+        double inside = density(air.airC, air.ratio);
+        double there = density(beyond.airC, beyond.ratio);
+        double step = DENSITY_STEP * inside;
+        double byDensity =
+                (moistKgS(inside + step, there) - moistKgS(inside - step, there)) / (2 * step);
+        double perMoist = 1 / (1 + air.ratio);
+        doorByAirC = -byDensity * perMoist * inside / (air.airC + SaturatedAir.ZERO_C_IN_K);
+        double lighter = perMoist - VAPOUR_VOLUME / (1 + VAPOUR_VOLUME * air.ratio);
+        doorByRatio = (byDensity * inside * lighter - door) * perMoist;
     }
 
     @Override
     public void rates(AirState air, Outside outside, double[] y, double[] rates, double[] flows) {
         Outside.Place out = outside.outdoors;
         Outside.Place beyond = outside.beyondDoor;
-        double through = doorKgS(air.airC, air.ratio, beyond.airC, beyond.ratio);
+        through = doorKgS(air.airC, air.ratio, beyond.airC, beyond.ratio);
         double heat = out.enthalpy() - air.enthalpy;
         double vapour = out.ratio - air.ratio;
         double doorHeat = through * (beyond.enthalpy() - air.enthalpy);
@@ -178,21 +202,8 @@ final class AirExchange implements Part {
     @Override
     public void linearise(AirState air, Outside outside, double airKg, double[] y) {
         Outside.Place beyond = outside.beyondDoor;
-        door = doorKgS(air.airC, air.ratio, beyond.airC, beyond.ratio);
-        doorByAirC = 0;
-        doorByRatio = 0;
-        if (door > 0) {
-            double t = 1e-4;
-            double w = 1e-7;
-            doorByAirC =
-                    (doorKgS(air.airC + t, air.ratio, beyond.airC, beyond.ratio)
-                                    - doorKgS(air.airC - t, air.ratio, beyond.airC, beyond.ratio))
-                            / (2 * t);
-            doorByRatio =
-                    (doorKgS(air.airC, air.ratio + w, beyond.airC, beyond.ratio)
-                                    - doorKgS(air.airC, air.ratio - w, beyond.airC, beyond.ratio))
-                            / (2 * w);
-        }
+        door = through;
+        doorSlopes(air, beyond);
         leak = leakKgS();
         leakByAirC = 0;
         for (CoolerPart cooler : coolers) {
@@ -255,14 +266,14 @@ final class AirExchange implements Part {
         double heat = -v[air.at];
         double vapour = -v[air.at + 1];
         double airC = air.airAlong(v);
-        double through = doorByAirC * airC + doorByRatio * v[air.at + 1];
+        double more = doorByAirC * airC + doorByRatio * v[air.at + 1];
         double leaks = leakByAirC * airC;
         change[flowAt + LEAK_HEAT] = leak * heat + leaks * toOutdoorsHeat;
         change[flowAt + LEAK_VAPOUR] = leak * vapour + leaks * toOutdoorsRatio;
         change[flowAt + FRESH_HEAT] = freshKgS * heat;
         change[flowAt + FRESH_VAPOUR] = freshKgS * vapour;
-        change[flowAt + DOOR_HEAT] = door * heat + through * toBeyondHeat;
-        change[flowAt + DOOR_VAPOUR] = door * vapour + through * toBeyondRatio;
-        change[flowAt + EXCHANGED] = leaks + through;
+        change[flowAt + DOOR_HEAT] = door * heat + more * toBeyondHeat;
+        change[flowAt + DOOR_VAPOUR] = door * vapour + more * toBeyondRatio;
+        change[flowAt + EXCHANGED] = leaks + more;
     }
 }

@@ -129,17 +129,26 @@ public final class Branch {
         hubMatrix[row + hub + 1] += second;
     }
 
+    /**
+     * Pivots by the leading minors, each over the product of the diagonal so far: {@code e(k) =
+     * e(k-1) - before(k) after(k-1) / (d(k) d(k-1)) e(k-2)}. No node waits for the division of the
+     * one before it, as it would where pivots follow from pivots.
+     */
     private void factorRun(double shift) {
-        double last = 0;
-        double lastAfter = 0;
+        double last = 1;
+        double beforeLast = 1;
+        double coupled = 0;
         for (int i = 0; i < run; i++) {
-            double r = -before[i] * last;
-            double pivot = shift - self[i] + r * lastAfter;
-            last = 1 / pivot;
-            lastAfter = after[i];
-            ratio[i] = r;
-            inversePivot[i] = last;
-            afterShare[i] = lastAfter * last;
+            double perDiagonal = 1 / (shift - self[i]);
+            double minor = last - before[i] * coupled * perDiagonal * beforeLast;
+            inversePivot[i] = perDiagonal * (last / minor);
+            afterShare[i] = after[i] * inversePivot[i];
+            coupled = after[i] * perDiagonal;
+            beforeLast = last;
+            last = minor;
+        }
+        for (int i = 1; i < run; i++) {
+            ratio[i] = -before[i] * inversePivot[i - 1];
         }
     }
 
