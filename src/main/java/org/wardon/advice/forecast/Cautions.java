@@ -53,6 +53,7 @@ final class Cautions {
             new Deliveries(outcome, chamber).all().forEach(c -> add(c.level(), c.reason()));
             new ColdBlast(outcome, chamber).all().forEach(c -> add(c.level(), c.reason()));
             StillChamber.wide(outcome, chamber).ifPresent(c -> add(c.level(), c.reason()));
+            CleanerAir.told(chamber, outcome).ifPresent(reason -> add(Level.NOTE, reason));
         }
         List<Caution> carried = new Carried(outcome).all();
         carried.forEach(c -> add(c.level(), c.reason()));

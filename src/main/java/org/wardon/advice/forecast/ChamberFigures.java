@@ -63,7 +63,8 @@ final class ChamberFigures {
                 course.balanceErrorPct(),
                 course.coolers().stream().map(ChamberFigures::cooler).toList(),
                 course.solar().map(this::solar),
-                chamber.enclosure().zones().map(zones -> doorEnd(hours)));
+                chamber.enclosure().zones().map(zones -> doorEnd(hours)),
+                CleanerAir.figures(chamber, outcome));
     }
 
     private static ChamberForecast.DoorEnd doorEnd(Hours hours) {

@@ -16,12 +16,14 @@ import org.wardon.keeping.Draw;
 import org.wardon.keeping.Fate;
 import org.wardon.keeping.Giver;
 import org.wardon.keeping.HistoryLegs;
+import org.wardon.keeping.Mechanism;
 import org.wardon.keeping.StoreEthylene;
 import org.wardon.keeping.Window;
 import org.wardon.keeping.ethylene.ChamberAir;
 import org.wardon.lots.LotHistory;
 import org.wardon.plan.ChamberPlan;
 import org.wardon.plan.EthyleneAround;
+import org.wardon.plan.EthyleneScrub;
 
 /** Follows the lots of a store through one draw: staying, sold, and without a chamber. */
 final class Fates {
@@ -54,17 +56,23 @@ final class Fates {
 
     /** Ethylene of all chambers in a draw, and with it the completed histories of the lots. */
     StoreEthylene ethylene(Map<String, Course> courses, Draw draw) {
-        return ethylene(courses, draw, true);
+        return ethylene(courses, draw, true, CleanerAir.More.NOTHING);
+    }
+
+    /** The same with more fresh air or another scrubber; the heat of the chambers stays. */
+    StoreEthylene cleaned(Map<String, Course> courses, Draw draw, CleanerAir.More more) {
+        return ethylene(courses, draw, true, more);
     }
 
     /** Ethylene of all chambers in the middle draw as if no scrubber ran. */
     StoreEthylene unscrubbed(Map<String, Course> courses) {
-        return ethylene(courses, Draw.MEDIAN, false);
+        return ethylene(courses, Draw.MEDIAN, false, CleanerAir.More.NOTHING);
     }
 
-    private StoreEthylene ethylene(Map<String, Course> courses, Draw draw, boolean scrubbed) {
+    private StoreEthylene ethylene(
+            Map<String, Course> courses, Draw draw, boolean scrubbed, CleanerAir.More more) {
         Map<String, ChamberAir> air = new HashMap<>();
-        courses.forEach((id, course) -> air.put(id, air(course, scrubbed)));
+        courses.forEach((id, course) -> air.put(id, air(course, scrubbed, more)));
         return StoreEthylene.of(air, givers(courses), around.outdoorPpm(), draw);
     }
 
@@ -100,6 +108,27 @@ final class Fates {
         Fate staying = sheet.model().follow(history, draw, beyond(sheet, history));
         Fate alone = sheet.model().follow(outside, draw);
         return new Three(staying, sold(sheet, history, staying, draw), alone);
+    }
+
+    /** Days left of a lot staying in its chamber for good. */
+    double daysStaying(LotSheet sheet, LotHistory history, Draw draw) {
+        return sheet.model()
+                .follow(history, draw, beyond(sheet, history))
+                .daysLeft(sheet.clock().hereFromS());
+    }
+
+    /**
+     * Days that the ethylene it felt costs a lot in the middle draw, beside clean outdoor air, were
+     * nothing else to end it.
+     */
+    double costDays(LotSheet sheet, LotHistory history) {
+        return ethyleneDays(sheet, clean(history)) - ethyleneDays(sheet, history);
+    }
+
+    private double ethyleneDays(LotSheet sheet, LotHistory history) {
+        return sheet.model()
+                .follow(history, Draw.MEDIAN, beyond(sheet, history))
+                .daysLeft(Mechanism.ETHYLENE, sheet.clock().hereFromS());
     }
 
     /** History of a lot in another air than that of its chamber, market leg included. */
@@ -216,7 +245,7 @@ final class Fates {
     }
 
     /** Exchange of a run as keeping reads it: each value holds from its time on. */
-    private ChamberAir air(Course course, boolean scrubbed) {
+    private ChamberAir air(Course course, boolean scrubbed, CleanerAir.More more) {
         Hours hours = course.hours();
         int lead = hours.atS(0) > 0 ? 1 : 0;
         int n = hours.size() + lead;
@@ -227,20 +256,24 @@ final class Fates {
             int row = i - lead;
             time[i] = row < 0 ? 0 : hours.atS(row);
             free[i] = hours.freeM3(Math.max(0, row));
-            exchange[i] = hours.exchangeM3s(Math.min(row + 1, hours.size() - 1));
+            exchange[i] =
+                    hours.exchangeM3s(Math.min(row + 1, hours.size() - 1))
+                            + more.freshM3s(course.chamberId());
         }
         return scrubbed
-                ? new ChamberAir(time, exchange, free, cleaned(course, time))
+                ? new ChamberAir(time, exchange, free, cleaned(course, time, more))
                 : new ChamberAir(time, exchange, free);
     }
 
     /** Air a scrubber cleans from each time to the next, less what has no power, m3/s. */
-    private double[] cleaned(Course course, double[] timeS) {
+    private double[] cleaned(Course course, double[] timeS, CleanerAir.More more) {
         double[] cleaned = new double[timeS.length];
         ChamberPlan chamber = model.plan().getChamber(course.chamberId());
-        if (chamber.ethyleneScrub().isPresent()) {
+        double most =
+                chamber.ethyleneScrub().map(EthyleneScrub::cleanedM3s).orElse(0.0)
+                        + more.cleanedM3s(course.chamberId());
+        if (most > 0) {
             List<Outage> outages = BatteryNights.with(model.outages(chamber), course);
-            double most = chamber.ethyleneScrub().get().cleanedM3s();
             for (int i = 0; i + 1 < timeS.length; i++) {
                 double out = 0;
                 for (Outage outage : outages) {

@@ -15,6 +15,7 @@ import org.wardon.lots.LotHistory;
  * @param ethylene ethylene of the chambers in the plain run
  * @param histories lots in the plain run, by id, with their ethylene
  * @param fates fates of the lots, by id
+ * @param cleaner what cleaner air is worth to the lots that ethylene costs days, by id
  */
 record StoreOutcome(
         StoreModel model,
@@ -22,12 +23,14 @@ record StoreOutcome(
         Map<String, Course> courses,
         Map<String, ChamberEthylene> ethylene,
         Map<String, LotHistory> histories,
-        Map<String, LotFates> fates) {
+        Map<String, LotFates> fates,
+        Map<String, CleanerAir.Worth> cleaner) {
     StoreOutcome {
         courses = Map.copyOf(courses);
         ethylene = Map.copyOf(ethylene);
         histories = Map.copyOf(histories);
         fates = Map.copyOf(fates);
+        cleaner = Map.copyOf(cleaner);
     }
 
     /** Whether a lot is in the run. */

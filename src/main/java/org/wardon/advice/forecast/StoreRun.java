@@ -41,18 +41,23 @@ final class StoreRun {
         StoreEthylene ethylene = fates.ethylene(courses, Draw.MEDIAN);
         Map<String, LotHistory> histories = ethylene.histories();
         Map<String, Fates.Three> plain = fates.follow(histories, Draw.MEDIAN, id -> horizonS);
-        List<Map<String, Fates.Three>> drawn = draws(courses, ends, progress);
+        CleanerAir cleaner = new CleanerAir(model, fates, histories);
+        List<Drawn> drawn = draws(courses, ends, cleaner, progress);
         return new StoreOutcome(
                 model,
                 horizonS,
                 courses,
                 ethylene.chambers(),
                 histories,
-                together(plain, drawn, histories));
+                together(plain, drawn.stream().map(Drawn::ends).toList(), histories),
+                cleaner.together(drawn.stream().map(Drawn::cleaner).toList()));
     }
 
-    private List<Map<String, Fates.Three>> draws(
-            Map<String, Course> plain, Settling ends, Progress progress) {
+    /** What a draw leaves: ends of the lots, and what cleaner air gains them. */
+    private record Drawn(Map<String, Fates.Three> ends, Map<String, CleanerAir.Gain> cleaner) {}
+
+    private List<Drawn> draws(
+            Map<String, Course> plain, Settling ends, CleanerAir cleaner, Progress progress) {
         AtomicInteger done = new AtomicInteger();
         return Draws.seeded(model.plan().seed(), DRAWS).parallelStream()
                 .map(
@@ -61,7 +66,9 @@ final class StoreRun {
                             Map<String, LotHistory> histories =
                                     fates.ethylene(courses, draw).histories();
                             progress.at("draws", done.incrementAndGet() / (double) DRAWS);
-                            return fates.ends(histories, draw, ends::withoutS);
+                            return new Drawn(
+                                    fates.ends(histories, draw, ends::withoutS),
+                                    cleaner.gains(courses, draw, histories));
                         })
                 .toList();
     }

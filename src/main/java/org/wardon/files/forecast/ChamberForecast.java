@@ -36,6 +36,8 @@ import java.util.OptionalDouble;
  * @param solar panels and battery; absent where a grid feeds the chamber
  * @param doorEnd air of the door end; absent where the air is one, else {@code airC} and {@code
  *     humidityPct} are those of the coil end
+ * @param cleanerAir what cleaner air is worth to its lots; absent where ethylene costs none of them
+ *     days
  */
 public record ChamberForecast(
         String id,
@@ -60,10 +62,41 @@ public record ChamberForecast(
         double balanceErrorPct,
         List<OfCooler> coolers,
         Optional<Solar> solar,
-        @JsonInclude(JsonInclude.Include.NON_ABSENT) Optional<DoorEnd> doorEnd) {
+        @JsonInclude(JsonInclude.Include.NON_ABSENT) Optional<DoorEnd> doorEnd,
+        @JsonInclude(JsonInclude.Include.NON_ABSENT) Optional<CleanerAir> cleanerAir) {
     /** Copies the list. */
     public ChamberForecast {
         coolers = List.copyOf(coolers);
+    }
+
+    /**
+     * What cleaner air is worth.
+     *
+     * @param freshAirM3PerHour fresh air it is reckoned with beside the plan's, m3/h
+     * @param freshAirCoolingW cooling it asks for at the least, W
+     * @param scrubM3PerHour air a scrubber draws beside the plan's, m3/h
+     * @param scrubEfficiencyPct share of the ethylene it takes at a pass, percent
+     * @param lots what each lot gains that ethylene costs days
+     */
+    public record CleanerAir(
+            double freshAirM3PerHour,
+            double freshAirCoolingW,
+            double scrubM3PerHour,
+            double scrubEfficiencyPct,
+            List<OfLot> lots) {
+        /** Copies the list. */
+        public CleanerAir {
+            lots = List.copyOf(lots);
+        }
+
+        /**
+         * What one lot gains.
+         *
+         * @param id its id
+         * @param freshAirDays days gained by the fresh air, draw by draw
+         * @param scrubDays days gained by the scrubber, draw by draw
+         */
+        public record OfLot(String id, Quantiles freshAirDays, Quantiles scrubDays) {}
     }
 
     /**

@@ -208,6 +208,7 @@ class AnswerWriterTest {
                         Optional.of(
                                 new ChamberForecast.Solar(
                                         60, 50, 6, 3, 5, 6, 12.5, 0, Optional.empty())),
+                        Optional.empty(),
                         Optional.empty());
         LotForecast lot =
                 new LotForecast(
