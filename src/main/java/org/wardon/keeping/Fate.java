@@ -152,9 +152,8 @@ public final class Fate {
      * Returns the days until a ripening fruit is ripe.
      *
      * @param fromS counted from here, s
-     * @return days, 0 where it is ripe already, {@link #MOST_DAYS} where heat or injury by cold
-     *     keep it from ripening; empty where no times of ripening are printed or its ripeness is
-     *     unknown
+     * @return days, 0 where it is ripe already, {@link #MOST_DAYS} where heat or cold keep it from
+     *     ripening; empty where no times of ripening are printed or its ripeness is unknown
      */
     public OptionalDouble ripeDaysFrom(double fromS) {
         return ripe.map(times -> OptionalDouble.of(days(times.ripeS(), fromS)))

@@ -63,15 +63,7 @@ final class Following {
                 paces.clock(),
                 green,
                 edible,
-                course.map(legs -> legs.times().unlessInjured(injuredS())));
-    }
-
-    private double injuredS() {
-        Track chilled = tracks.get(Mechanism.CHILLING);
-        Track frozen = tracks.get(Mechanism.FREEZING);
-        return Math.min(
-                chilled == null ? Double.POSITIVE_INFINITY : chilled.reachesS(1),
-                frozen == null ? Double.POSITIVE_INFINITY : frozen.reachesS(1));
+                course.map(legs -> legs.times().unlessFrozen(frozen().reachesS(1))));
     }
 
     /** Ageing alone and with ethylene, of a lot that ends overripe. */

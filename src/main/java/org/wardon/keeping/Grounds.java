@@ -12,6 +12,7 @@ import org.wardon.produce.Commodity;
 import org.wardon.produce.Reason;
 import org.wardon.produce.Reason.Argument;
 import org.wardon.produce.rows.EthyleneEffect;
+import org.wardon.produce.rows.RipeningRow;
 
 /** What the answer of one lot along one history rests on, in codes. */
 final class Grounds {
@@ -21,8 +22,8 @@ final class Grounds {
     private static final double SWEETENS_BELOW_C = 4;
     private static final double HEAT_KILLS_C = 42;
 
-    /** Heat of field and road that lasts no longer is not told of ripening (assumption). */
-    private static final double HOT_DAYS = 0.5;
+    /** Heat or cold that lasts no longer is not told of ripening (assumption). */
+    private static final double LONG_DAYS = 0.5;
 
     private static final double DAMP_FRACTION = 0.75;
 
@@ -118,10 +119,17 @@ final class Grounds {
 
     private void ripening(Ripening ripening) {
         say("ripens-as-printed", ripening.sourceId());
-        double limit = ripening.suffersAboveC();
-        if (days(i -> history.meanC(i) > limit) > HOT_DAYS) {
-            say("ripening-in-heat", ripening.heatSourceId(), Argument.of(limit, "C"));
-        }
+        ripening.heat()
+                .filter(row -> days(i -> history.meanC(i) > row.lowC()) > LONG_DAYS)
+                .ifPresent(row -> say("ripening-in-heat", row.sourceId(), at(row)));
+        boolean ripe = ripening.at(Draw.MEDIAN).atDoor() >= 1;
+        ripening.cold()
+                .filter(row -> !ripe && days(i -> history.meanC(i) < row.lowC()) > LONG_DAYS)
+                .ifPresent(row -> say("ripening-in-cold", row.sourceId(), at(row)));
+    }
+
+    private static Argument at(RipeningRow row) {
+        return Argument.of(row.lowC(), "C");
     }
 
     private void dormancy() {

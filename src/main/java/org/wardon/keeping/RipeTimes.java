@@ -7,9 +7,9 @@ package org.wardon.keeping;
  * @param overripeS past eating from here on, s
  */
 record RipeTimes(double ripeS, double overripeS) {
-    /** Injured by cold or ice before it is ripe, it does not ripen as it should. */
-    RipeTimes unlessInjured(double injuredS) {
-        return injuredS <= ripeS ? new RipeTimes(Double.POSITIVE_INFINITY, overripeS) : this;
+    /** Frozen before it is ripe, it does not ripen. */
+    RipeTimes unlessFrozen(double frozenS) {
+        return frozenS <= ripeS ? new RipeTimes(Double.POSITIVE_INFINITY, overripeS) : this;
     }
 
     boolean ripeAt(double atS) {

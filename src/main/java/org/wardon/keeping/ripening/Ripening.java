@@ -35,7 +35,7 @@ public final class Ripening {
     private final List<RipeningRow> rows;
     private final LegDays toRipe;
     private final LegDays toOverripe;
-    private final Heat heat;
+    private final Warmth warmth;
     private final Span startsAtGreenShare;
     private final Span atDoor;
 
@@ -44,7 +44,7 @@ public final class Ripening {
         this.atDoor = atDoor;
         toRipe = LegDays.of(leg("ripening"), false);
         toOverripe = LegDays.of(leg("ripe"), true);
-        heat = Heat.of(rows);
+        warmth = Warmth.of(rows);
         startsAtGreenShare = shares(leg("whole"), leg("ripening"));
     }
 
@@ -127,7 +127,7 @@ public final class Ripening {
      * @return °C, infinite where no limit is printed
      */
     public double suffersAboveC() {
-        return heat.suffersAboveC();
+        return warmth.suffersAboveC();
     }
 
     /**
@@ -136,7 +136,7 @@ public final class Ripening {
      * @return the printed row; empty where none is
      */
     public Optional<RipeningRow> advised() {
-        return rows.stream().filter(row -> row.leg().equals("advised")).findFirst();
+        return Warmth.first(rows, "advised");
     }
 
     /**
@@ -149,16 +149,21 @@ public final class Ripening {
     }
 
     /**
-     * Returns the source of the heat.
+     * Returns the row of the cold in which it does not ripen.
      *
-     * @return id; that of the days where no heat is printed
+     * @return the printed row; empty where none is
      */
-    public String heatSourceId() {
-        return rows.stream()
-                .filter(row -> row.leg().equals("heat"))
-                .findFirst()
-                .map(RipeningRow::sourceId)
-                .orElseGet(this::sourceId);
+    public Optional<RipeningRow> cold() {
+        return Warmth.first(rows, "cold");
+    }
+
+    /**
+     * Returns the row of the heat in which it does not ripen well.
+     *
+     * @return the printed row; empty where none is
+     */
+    public Optional<RipeningRow> heat() {
+        return Warmth.first(rows, "heat");
     }
 
     LegDays toRipe() {
@@ -169,8 +174,8 @@ public final class Ripening {
         return toOverripe;
     }
 
-    Heat heat() {
-        return heat;
+    Warmth warmth() {
+        return warmth;
     }
 
     Span startsAtGreenShare() {

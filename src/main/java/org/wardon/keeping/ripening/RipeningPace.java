@@ -3,8 +3,8 @@ package org.wardon.keeping.ripening;
 import org.wardon.keeping.Draw;
 
 /**
- * How fast a lot ripens in one draw. Heat keeps fruit from ripening as it should, but not from
- * going soft: it is past eating as early as it would be without the heat.
+ * How fast a lot ripens in one draw. Heat and cold keep fruit from ripening as it should, but not
+ * from going soft: it is past eating as early as it would be without them.
  */
 public final class RipeningPace {
     private final Ripening ripening;
@@ -19,14 +19,14 @@ public final class RipeningPace {
      * Returns how fast it comes from the start of ripening to ripe.
      *
      * @param temperatureC temperature of the fruit, °C
-     * @return share of the leg a day, 0 where heat keeps it from ripening
+     * @return share of the leg a day, 0 where cold or heat keep it from ripening
      */
     public double ripensPerDay(double temperatureC) {
-        return ripening.heat().left(temperatureC) * softensPerDay(temperatureC);
+        return ripening.warmth().left(temperatureC) * softensPerDay(temperatureC);
     }
 
     /**
-     * Returns how fast it comes there but for heat.
+     * Returns how fast it comes there but for cold and heat.
      *
      * @param temperatureC temperature of the fruit, °C
      * @return share of the leg a day, above 0

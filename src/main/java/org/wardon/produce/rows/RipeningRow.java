@@ -9,10 +9,11 @@ import org.wardon.produce.Fact;
  *
  * @param leg {@code whole} picked green to ripe by its own clock, {@code ripening} from its start
  *     to ripe, {@code ripe} from ripe to overripe, {@code advised} temperatures advised for
- *     ripening, {@code heat} from where ripening suffers to where it fails
+ *     ripening, {@code heat} from where ripening suffers to where it fails, {@code cold} from where
+ *     it does not ripen to where it does by its days
  * @param lowC temperature of the fruit, lower end, °C
  * @param highC upper end, °C; empty where only the lower is printed
- * @param days days the leg takes; only high: at most; empty for {@code advised} and {@code heat}
+ * @param days days the leg takes; only high: at most; empty for the legs of temperature
  * @param treated whether it was treated with ethylene
  * @param sourceId source
  */

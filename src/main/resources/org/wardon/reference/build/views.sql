@@ -166,9 +166,9 @@ select commodity_id as commodity_id, 36 as ord, 'curing-time' as name, days_low 
        'curing' as table_name, line
   from curing where source_id is not null and (days_low is not null or days_high is not null)
 union all
-select commodity_id as commodity_id, 37 as ord, case leg when 'whole' then 'green-to-ripe' when 'ripening' then 'to-ripe' when 'ripe' then 'ripe-to-overripe' when 'advised' then 'ripening-temperature' else 'ripening-fails-in-heat' end || case when leg in ('advised', 'heat') then '' else '@' || printf('%g', temp_low_C) || case when temp_high_C > temp_low_C then '-' || printf('%g', temp_high_C) else '' end || 'C' end as name,
-       case when leg in ('advised', 'heat') then temp_low_C else days_low end as low, case when leg in ('advised', 'heat') then temp_high_C else days_high end as high,
-       case when leg in ('advised', 'heat') then 'C' else 'day' end as unit, '' as text, source_id as source_id, evidence as evidence,
+select commodity_id as commodity_id, 37 as ord, case leg when 'whole' then 'green-to-ripe' when 'ripening' then 'to-ripe' when 'ripe' then 'ripe-to-overripe' when 'advised' then 'ripening-temperature' when 'cold' then 'ripens-not-in-cold' else 'ripening-fails-in-heat' end || case when leg in ('advised', 'heat', 'cold') then '' else '@' || printf('%g', temp_low_C) || case when temp_high_C > temp_low_C then '-' || printf('%g', temp_high_C) else '' end || 'C' end as name,
+       case when leg in ('advised', 'heat', 'cold') then temp_low_C else days_low end as low, case when leg in ('advised', 'heat', 'cold') then temp_high_C else days_high end as high,
+       case when leg in ('advised', 'heat', 'cold') then 'C' else 'day' end as unit, '' as text, source_id as source_id, evidence as evidence,
        trim(coalesce(trim(coalesce('; ' || case ethylene when 'yes' then 'with ethylene' when 'no' then 'without ethylene' end, '') || coalesce('; ' || note, ''), '; '), '') || '; ' || case when evidence_text <> evidence then evidence_text else '' end, '; ') as note,
        'ripening' as table_name, line
   from ripening
