@@ -24,6 +24,9 @@ final class AdvicePage {
     /** Heat below this is not worth a word, kWh. */
     private static final double LEAST_TOLD_KWH = 0.5;
 
+    /** Money below this is not worth a word, currency. */
+    private static final double LEAST_TOLD_MONEY = 1;
+
     private final StoreAdvice advice;
     private final StorePlan plan;
     private final Forecast forecast;
@@ -278,7 +281,38 @@ final class AdvicePage {
                 .sorted(Comparator.comparing(LotForecast::leaveBy))
                 .forEach(lot -> lot(table, lot));
         page.append(table.text()).append('\n');
+        dried();
         narrower();
+    }
+
+    /** What loss of weight costs, the dearest first. */
+    private void dried() {
+        double all = forecast.lots().stream().mapToDouble(LotForecast::weightLossValue).sum();
+        if (all < LEAST_TOLD_MONEY) {
+            return;
+        }
+        String dearest =
+                forecast.lots().stream()
+                        .sorted(Comparator.comparingDouble(LotForecast::weightLossValue).reversed())
+                        .limit(3)
+                        .filter(lot -> lot.weightLossValue() >= LEAST_TOLD_MONEY)
+                        .map(
+                                lot ->
+                                        lot.id()
+                                                + " "
+                                                + units.figure(lot.weightLossPct(), "pct")
+                                                + " ("
+                                                + money(lot.weightLossValue())
+                                                + ")")
+                        .collect(Collectors.joining(", "));
+        page.append(
+                Paragraph.hanging(
+                        "",
+                        words.text("weight-lost")
+                                + " "
+                                + money(all)
+                                + (dearest.isEmpty() ? "." : ": " + dearest + ".")));
+        page.append('\n');
     }
 
     /** What the ranges hang on, so that a keeper can narrow them. */

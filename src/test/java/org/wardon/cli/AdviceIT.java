@@ -109,7 +109,7 @@ class AdviceIT {
                 forecast,
                 "lots[]",
                 ("id chamber valueKept coolHalfHours coolSevenEighthsHours temperatureC"
-                                + " respirationKWh weightLossPct lifeUsedPct restsOn greenLeft"
+                                + " respirationKWh weightLossPct weightLossValue lifeUsedPct restsOn greenLeft"
                                 + " edibleLeft ripeFrom ripeOn daysLeft hangsOn daysLeftWithout daysGained"
                                 + " limitedBy chillingRisk leaveBy")
                         .split(" "));
@@ -129,6 +129,27 @@ class AdviceIT {
         assertEquals(ids(plan, "lots[]"), ids(forecast, "lots[]"));
         for (JsonNode lot : forecast.get("lots")) {
             assertTrue(LIMITS.contains(lot.get("limitedBy").asString()), lot.toString());
+        }
+    }
+
+    /** A lot that leaves within the run loses what its mass at leaving lacks. */
+    @Test
+    void weightLostIsPricedByTheKilogram() {
+        for (JsonNode planned : plan.get("lots")) {
+            for (JsonNode lot : forecast.get("lots")) {
+                boolean same = lot.get("id").asString().equals(planned.get("id").asString());
+                boolean leaves = planned.path("wantedDays").asDouble(99) <= 7;
+                if (same && leaves) {
+                    double kg = planned.get("massKg").asDouble();
+                    double price = planned.get("pricePerKg").asDouble();
+                    double lost = lot.get("weightLossPct").asDouble() / 100;
+                    assertEquals(
+                            kg * price * lost,
+                            lot.get("weightLossValue").asDouble(),
+                            1e-3 * kg * price * lost,
+                            lot.toString());
+                }
+            }
         }
     }
 

@@ -47,6 +47,7 @@ final class LotFigures {
                 temperature(),
                 inHorizon.totals().respirationJ() / ChamberFigures.J_PER_KWH,
                 inHorizon.totals().weightLossPct(),
+                weightLossValue(),
                 outlook.lifeUsedPct(),
                 outlook.restsOn().word(),
                 outlook.greenLeft().map(LotFigures::quantiles),
@@ -76,6 +77,13 @@ final class LotFigures {
         double at = Math.min(sheet.clock().leavesS(), history.timeS(history.size() - 1));
         double mass = massAt(at);
         return sheet.plan().market().pricePerKg() * mass * fates.shareSoundWhenSold(sheet.soldS());
+    }
+
+    /** Price x mass lost until it leaves, of a lot that would be sold by weight. */
+    private double weightLossValue() {
+        double at = Math.min(sheet.clock().leavesS(), history.timeS(history.size() - 1));
+        double lost = Math.max(0, history.massKg(0) - massAt(at));
+        return sheet.plan().market().pricePerKg() * lost;
     }
 
     private double massAt(double atS) {

@@ -15,6 +15,7 @@ import java.util.OptionalDouble;
  * @param temperatureC its mean temperature, °C
  * @param respirationKWh heat of its respiration in the chamber, kWh
  * @param weightLossPct loss of mass, percent
+ * @param weightLossValue what that loss costs until it leaves, currency
  * @param lifeUsedPct life used at the horizon's end, percent; may pass 100
  * @param restsOn what the life rests on
  * @param greenLeft days until ripening can no longer be held; absent unless it ripens
@@ -39,6 +40,7 @@ public record LotForecast(
         TemperatureC temperatureC,
         double respirationKWh,
         double weightLossPct,
+        double weightLossValue,
         double lifeUsedPct,
         String restsOn,
         Optional<Quantiles> greenLeft,

@@ -71,7 +71,7 @@ class AnswerWriterTest {
         JsonNode lot = json.get("lots").get(0);
         assertNames(
                 "id chamber valueKept coolHalfHours coolSevenEighthsHours temperatureC"
-                        + " respirationKWh weightLossPct lifeUsedPct restsOn greenLeft edibleLeft"
+                        + " respirationKWh weightLossPct weightLossValue lifeUsedPct restsOn greenLeft edibleLeft"
                         + " ripeFrom ripeOn daysLeft hangsOn daysLeftWithout daysGained limitedBy chillingRisk leaveBy",
                 lot);
         assertNames("mean min max atEnd", lot.get("temperatureC"));
@@ -220,6 +220,7 @@ class AnswerWriterTest {
                         new LotForecast.TemperatureC(13, 12, 29, 12.1),
                         7,
                         2,
+                        18,
                         60,
                         "temperature-curve",
                         Optional.empty(),
