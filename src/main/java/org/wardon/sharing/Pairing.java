@@ -38,16 +38,22 @@ final class Pairing {
             shortened(a);
             shortened(b);
         }
+        double days = Math.min(a.wish().wantedDays(), b.wish().wantedDays());
+        Conflicts conflicts = conflicts(a, b, atC, days);
+        verdict = verdict.worse(conflicts.verdict());
+        reasons.addAll(conflicts.reasons());
+    }
+
+    /** Ethylene and smell of two lots at a temperature for some days together. */
+    static Conflicts conflicts(Workable a, Workable b, double atC, double days) {
         Conflicts conflicts = new Conflicts();
         double ppmA = steadyPpm(a, atC);
         double ppmB = steadyPpm(b, atC);
         conflicts.ethylene(a.wish(), a.model(), ppmB >= ppmA ? id(b) : id(a), ppmA + ppmB, atC);
         conflicts.ethylene(b.wish(), b.model(), ppmA >= ppmB ? id(a) : id(b), ppmA + ppmB, atC);
-        double days = Math.min(a.wish().wantedDays(), b.wish().wantedDays());
         conflicts.odour(a.wish(), b.wish(), days);
         conflicts.odour(b.wish(), a.wish(), days);
-        verdict = verdict.worse(conflicts.verdict());
-        reasons.addAll(conflicts.reasons());
+        return conflicts;
     }
 
     /** Level one lot makes as half of a usual load in a chamber with usual air exchange. */

@@ -19,6 +19,9 @@ public final class Workable {
 
     private final double[][] median = new double[Settings.TEMPERATURES][Settings.HUMIDITIES];
 
+    /** {@code [temperature][humidity]}, share of draws that last stay and market leg. */
+    private final double[][] sound = new double[Settings.TEMPERATURES][Settings.HUMIDITIES];
+
     /** {@code [temperature]}, share of draws injured by the end of the market leg. */
     private final double[] chilled = new double[Settings.TEMPERATURES];
 
@@ -71,6 +74,7 @@ public final class Workable {
             place(t, 0, anyHumidity);
             double untouchedTenth = tenth[t][0];
             double untouchedMedian = median[t][0];
+            double untouchedSound = sound[t][0];
             for (int h = 0; h < Settings.HUMIDITIES; h++) {
                 double humidity = Settings.humidityPct(h) / 100;
                 boolean touched = false;
@@ -87,6 +91,7 @@ public final class Workable {
                 } else {
                     tenth[t][h] = untouchedTenth;
                     median[t][h] = untouchedMedian;
+                    sound[t][h] = untouchedSound;
                 }
             }
         }
@@ -97,6 +102,15 @@ public final class Workable {
         Arrays.sort(sorted);
         tenth[t][h] = at(sorted, Limits.GOOD_SHARE);
         median[t][h] = at(sorted, Limits.TOLERABLE_SHARE);
+        sound[t][h] = sound(sorted);
+    }
+
+    private double sound(double[] days) {
+        int lasting = 0;
+        for (double one : days) {
+            lasting += one >= wish.wholeDays() ? 1 : 0;
+        }
+        return (double) lasting / days.length;
     }
 
     private void judge() {
@@ -184,6 +198,28 @@ public final class Workable {
     public double tenthDays(double temperatureC, double humidityPct) {
         return tenth[Settings.nearestTemperature(temperatureC)][
                 Settings.nearestHumidity(humidityPct)];
+    }
+
+    /**
+     * Returns the share of draws that last stay and market leg in a setting.
+     *
+     * @param temperatureC temperature, °C
+     * @param humidityPct humidity at the produce, percent
+     * @return 0 to 1
+     */
+    public double soundShare(double temperatureC, double humidityPct) {
+        return sound[Settings.nearestTemperature(temperatureC)][
+                Settings.nearestHumidity(humidityPct)];
+    }
+
+    /**
+     * Returns whether a temperature is clear of freezing and hardly chills.
+     *
+     * @param temperatureC temperature, °C
+     * @return false where the lot must not stand
+     */
+    public boolean safe(double temperatureC) {
+        return safe(Settings.nearestTemperature(temperatureC));
     }
 
     /**

@@ -1,0 +1,67 @@
+package org.wardon.sharing.placing;
+
+/** The climates of all chambers with the weights of their limits, and how high each can reach. */
+final class Offers {
+    private static final int FIRST_TIGHTENING = 60;
+
+    private final Store store;
+    private final Weights[][] weights;
+    private final boolean[][] tightened;
+
+    /** {@code [lot]}, earnings less price where last asked for. */
+    final double[] gain;
+
+    /** {@code [chamber][offer]}, no load earns more above the prices last looked at. */
+    final double[][] ceiling;
+
+    Offers(Store store) {
+        this.store = store;
+        gain = new double[store.lots];
+        weights = new Weights[store.chambers][];
+        ceiling = new double[store.chambers][];
+        tightened = new boolean[store.chambers][];
+        for (int c = 0; c < store.chambers; c++) {
+            weights[c] = new Weights[store.offers(c)];
+            for (int o = 0; o < store.offers(c); o++) {
+                weights[c][o] = new Weights(store, c, o);
+            }
+            ceiling[c] = new double[store.offers(c)];
+            tightened[c] = new boolean[store.offers(c)];
+        }
+    }
+
+    Weights weights(int c, int o) {
+        return weights[c][o];
+    }
+
+    /** Fills {@link #gain} with earnings less prices of what a branch allows. */
+    void gains(Branch branch, int c, int o, double[] price) {
+        double[] earns = store.earns[c][o];
+        for (int l = 0; l < store.lots; l++) {
+            gain[l] = branch.lots[c].get(l) ? earns[l] - price[l] : Climate.NEVER;
+        }
+    }
+
+    /** Climates of a chamber that a branch allows, the most promising at these prices first. */
+    int[] ordered(Branch branch, int c, double[] price) {
+        int[] order = branch.offers[c].stream().toArray();
+        for (int o : order) {
+            gains(branch, c, o, price);
+            if (!tightened[c][o]) {
+                tightened[c][o] = true;
+                weights[c][o].tighten(gain, 0, FIRST_TIGHTENING);
+            }
+            ceiling[c][o] = weights[c][o].bound(gain) - store.cost[c][o];
+        }
+        for (int i = 1; i < order.length; i++) {
+            int one = order[i];
+            int at = i;
+            while (at > 0 && ceiling[c][order[at - 1]] < ceiling[c][one]) {
+                order[at] = order[at - 1];
+                at--;
+            }
+            order[at] = one;
+        }
+        return order;
+    }
+}

@@ -1,0 +1,248 @@
+package org.wardon.sharing.placing;
+
+import java.util.ArrayList;
+import java.util.Arrays;
+import java.util.Comparator;
+import java.util.List;
+import java.util.PriorityQueue;
+import java.util.SplittableRandom;
+import java.util.stream.IntStream;
+
+/** Finds the best placing it can and says what none can exceed. */
+public final class PlacingSearch {
+    private static final long SEED = 1;
+    private static final double ROUNDING = 1e-7;
+    private static final double NEAR = 0.02;
+    private static final double HELPS = 0.2;
+    private static final long QUICKER = 10;
+    private static final double HARDLY_NEAR = 0.002;
+
+    private final Effort effort;
+    private final Store store;
+    private final Prices prices;
+    private final PartedLoads parted;
+    private final WholeLoads whole;
+    private Loads last;
+    private boolean wholeHelps;
+    private final Polish polish;
+    private final PriorityQueue<Branch> branches =
+            new PriorityQueue<>(
+                    Comparator.<Branch>comparingDouble(branch -> -branch.bound)
+                            .thenComparingInt(branch -> branch.number));
+    private double closed = Double.NEGATIVE_INFINITY;
+    private int made;
+    private final double[][] offerUse;
+    private final double[][] lotUse;
+
+    private PlacingSearch(PlacingProblem problem, Effort effort) {
+        this.effort = effort;
+        store = new Store(problem);
+        offerUse = new double[store.chambers][];
+        lotUse = new double[store.chambers][store.lots];
+        for (int c = 0; c < store.chambers; c++) {
+            offerUse[c] = new double[store.offers(c)];
+        }
+        Offers offers = new Offers(store);
+        LoadSearch search = new LoadSearch(store);
+        parted = new PartedLoads(store, offers, search);
+        whole = new WholeLoads(store, offers, search, effort.loadSteps());
+        last = whole;
+        prices = new Prices(store, offers);
+        polish =
+                new Polish(
+                        store,
+                        offers,
+                        prices,
+                        parted,
+                        whole,
+                        Math.max(1, effort.loadSteps() / QUICKER));
+    }
+
+    /**
+     * Searches.
+     *
+     * @param problem the store to be filled
+     * @param effort how much work to do
+     * @return the best placing found and what no placing can exceed
+     */
+    public static PlacingAnswer of(PlacingProblem problem, Effort effort) {
+        return new PlacingSearch(problem, effort).search();
+    }
+
+    /** A bound this low leaves nothing better to be found but by rounding. */
+    static double enough(double known) {
+        return known + ROUNDING * Math.max(1, Math.abs(known));
+    }
+
+    private PlacingAnswer search() {
+        Branch all = Branch.whole(store);
+        prices.lower(all, parted, effort.priceSteps(), () -> polish.bestValue);
+        double ofParts = all.bound;
+        prices.lower(all, whole, effort.priceSteps(), () -> repaired(NEAR));
+        wholeHelps = ofParts - all.bound > HELPS * (ofParts - polish.bestValue);
+        polish.fillAll(all);
+        SplittableRandom random = new SplittableRandom(SEED);
+        for (int i = 0; i < effort.polishes() && !near(all.bound); i++) {
+            polish.shake(random, all);
+        }
+        branches.add(all);
+        int looked = 0;
+        while (!branches.isEmpty() && looked < effort.branches() && !near(branches.peek().bound)) {
+            split(branches.remove());
+            looked++;
+        }
+        double bound = Math.max(polish.bestValue, closed);
+        bound = branches.isEmpty() ? bound : Math.max(bound, branches.peek().bound);
+        boolean proven = bound <= enough(polish.bestValue);
+        return new PlacingAnswer(placing(), bound, proven, looked, prices.steps);
+    }
+
+    private double repaired(double near) {
+        polish.repair(near);
+        return polish.bestValue;
+    }
+
+    private boolean near(double bound) {
+        double gap = effort.gapFraction() * Math.abs(bound);
+        return bound <= enough(polish.bestValue) + gap;
+    }
+
+    private void lower(Branch branch) {
+        last = parted;
+        prices.lower(branch, parted, effort.branchSteps(), () -> polish.bestValue);
+        if (branch.bound > enough(polish.bestValue)) {
+            int steps = wholeHelps ? effort.branchSteps() : 1;
+            last = wholeHelps ? whole : parted;
+            prices.lower(branch, whole, steps, () -> repaired(HARDLY_NEAR));
+        }
+    }
+
+    /** Looks into a branch by parting it in two. */
+    private void split(Branch branch) {
+        lower(branch);
+        if (branch.bound <= enough(polish.bestValue)) {
+            return;
+        }
+        Branch one = branch.copy(++made);
+        Branch other = branch.copy(++made);
+        last.bundle.use(offerUse, lotUse);
+        if (!partOffers(one, other) && !partLots(one, other)) {
+            close(branch);
+            return;
+        }
+        for (Branch part : List.of(one, other)) {
+            lower(part);
+            if (part.bound > enough(polish.bestValue)) {
+                branches.add(part);
+            }
+        }
+    }
+
+    /** Nothing is left to decide, so no lot has a price: the loads themselves are the placing. */
+    private void close(Branch branch) {
+        Arrays.fill(branch.price, 0);
+        prices.lower(branch, whole, 1, () -> repaired(HARDLY_NEAR));
+        closed = Math.max(closed, branch.bound);
+    }
+
+    /** Parts the climates of the chamber that wavers most between several. */
+    private boolean partOffers(Branch one, Branch other) {
+        int chamber = -1;
+        double most = 0;
+        for (int c = 0; c < store.chambers; c++) {
+            double wavering = wavering(one, c);
+            if (one.offers[c].cardinality() > 1 && (chamber < 0 || wavering > most)) {
+                chamber = c;
+                most = wavering;
+            }
+        }
+        if (chamber < 0) {
+            return false;
+        }
+        int upTo = middle(one, chamber);
+        one.offers[chamber].clear(upTo, store.offers(chamber));
+        other.offers[chamber].clear(0, upTo);
+        return true;
+    }
+
+    private double wavering(Branch branch, int c) {
+        double sum = 0;
+        double squares = 0;
+        for (int o = 0; o < store.offers(c); o++) {
+            if (branch.offers[c].get(o)) {
+                sum += offerUse[c][o];
+                squares += offerUse[c][o] * offerUse[c][o];
+            }
+        }
+        return sum * sum - squares;
+    }
+
+    /** The climate from which on the other half begins, by how often each was chosen of late. */
+    private int middle(Branch branch, int c) {
+        int[] offers = branch.offers[c].stream().toArray();
+        double all = IntStream.of(offers).mapToDouble(o -> offerUse[c][o]).sum();
+        double sum = 0;
+        for (int i = 0; i < offers.length - 1; i++) {
+            sum += offerUse[c][offers[i]];
+            if (sum >= 0.5 * all && all > 0) {
+                boolean sooner = i > 0 && sum - 0.5 * all > 0.5 * all - (sum - offerUse[c][offers[i]]);
+                return sooner ? offers[i] : offers[i + 1];
+            }
+        }
+        return all > 0 ? offers[offers.length - 1] : offers[offers.length / 2];
+    }
+
+    /** Parts a lot: into the chamber it is most often in, or any other. */
+    private boolean partLots(Branch one, Branch other) {
+        int lot = -1;
+        int chamber = -1;
+        double most = Double.NEGATIVE_INFINITY;
+        for (int l = 0; l < store.lots; l++) {
+            if (one.decided(l)) {
+                continue;
+            }
+            for (int c = 0; c < store.chambers; c++) {
+                double use = lotUse[c][l];
+                double open = use * (1 - Math.min(1, use)) * (1 + one.price[l]);
+                if (one.lots[c].get(l) && open > most) {
+                    most = open;
+                    lot = l;
+                    chamber = c;
+                }
+            }
+        }
+        if (lot < 0) {
+            return false;
+        }
+        for (int c = 0; c < store.chambers; c++) {
+            if (c != chamber) {
+                one.lots[c].clear(lot);
+            }
+        }
+        other.lots[chamber].clear(lot);
+        return true;
+    }
+
+    private Placing placing() {
+        List<Placing.Filled> filled = new ArrayList<>();
+        Fill best = polish.best;
+        int[] placeOf = new int[store.chambers];
+        for (int c = 0; c < store.chambers; c++) {
+            placeOf[store.chamberNumber[c]] = c;
+        }
+        for (int number = 0; number < store.chambers; number++) {
+            int c = placeOf[number];
+            filled.add(new Placing.Filled(best.offer[c], standing(best, c)));
+        }
+        return new Placing(filled, standing(best, Fill.NOWHERE), best.value());
+    }
+
+    private List<Integer> standing(Fill fill, int c) {
+        return IntStream.range(0, store.lots)
+                .filter(l -> fill.chamber[l] == c)
+                .map(l -> store.lotNumber[l])
+                .sorted()
+                .boxed()
+                .toList();
+    }
+}
