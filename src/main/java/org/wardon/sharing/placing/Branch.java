@@ -2,7 +2,9 @@ package org.wardon.sharing.placing;
 
 import java.util.BitSet;
 
-/** A part of all placings: which climates each chamber may still have and which lots it may hold. */
+/**
+ * A part of all placings: which climates each chamber may still have and which lots it may hold.
+ */
 final class Branch {
     /** {@code [chamber]}, climates by number. */
     final BitSet[] offers;

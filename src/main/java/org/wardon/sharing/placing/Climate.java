@@ -26,8 +26,8 @@ public final class Climate {
      * @param worth {@code [lot]}, what is kept of the lot at the end of its market leg, currency;
      *     {@link #NEVER} where it must not stand here
      * @param heatW {@code [lot][day]}, heat the lot gives, mean of the day, W, 0 or more
-     * @param lossTogether {@code [lot][lot]}, symmetric, what two lots lose by each other's company,
-     *     currency, 0 or more; {@link #APART} where they must not stand together
+     * @param lossTogether {@code [lot][lot]}, symmetric, what two lots lose by each other's
+     *     company, currency, 0 or more; {@link #APART} where they must not stand together
      */
     public Climate(String name, double[] worth, double[][] heatW, double[][] lossTogether) {
         this.name = Require.text("name of a climate", name);

@@ -25,9 +25,7 @@ final class PartedLoads extends Loads {
             offers.gains(branch, c, o, price);
             weights.tighten(offers.gain, 0, TIGHTENING);
             double roof =
-                    Math.min(
-                            weights.bound(offers.gain),
-                            search.roof(c, o, offers.gain, weights));
+                    Math.min(weights.bound(offers.gain), search.roof(c, o, offers.gain, weights));
             offers.ceiling[c][o] = roof - cost;
             if (roof - cost > best) {
                 best = roof - cost;

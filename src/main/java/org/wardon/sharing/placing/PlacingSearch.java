@@ -185,7 +185,8 @@ public final class PlacingSearch {
         for (int i = 0; i < offers.length - 1; i++) {
             sum += offerUse[c][offers[i]];
             if (sum >= 0.5 * all && all > 0) {
-                boolean sooner = i > 0 && sum - 0.5 * all > 0.5 * all - (sum - offerUse[c][offers[i]]);
+                boolean sooner =
+                        i > 0 && sum - 0.5 * all > 0.5 * all - (sum - offerUse[c][offers[i]]);
                 return sooner ? offers[i] : offers[i + 1];
             }
         }

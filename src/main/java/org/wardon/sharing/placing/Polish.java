@@ -34,7 +34,13 @@ final class Polish {
 
     double bestValue;
 
-    Polish(Store store, Offers offers, Prices prices, PartedLoads parted, WholeLoads loads, long loadSteps) {
+    Polish(
+            Store store,
+            Offers offers,
+            Prices prices,
+            PartedLoads parted,
+            WholeLoads loads,
+            long loadSteps) {
         offerUse = new double[store.chambers][];
         lotUse = new double[store.chambers][store.lots];
         for (int c = 0; c < store.chambers; c++) {
@@ -66,8 +72,7 @@ final class Polish {
             int most = Fill.NOWHERE;
             for (int c = 0; c < store.chambers; c++) {
                 if (loads.load[c][l]
-                        && (most == Fill.NOWHERE
-                                || trial.gain(l, c) > trial.gain(l, most))) {
+                        && (most == Fill.NOWHERE || trial.gain(l, c) > trial.gain(l, most))) {
                     most = c;
                 }
             }

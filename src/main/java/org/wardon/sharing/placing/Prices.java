@@ -4,8 +4,8 @@ import java.util.Arrays;
 
 /**
  * Prices on lots: at given prices each chamber takes the load that earns most above them, and the
- * prices and these surpluses together exceed every placing. Moving the prices towards the lots
- * that several chambers take, or none, lowers that bound.
+ * prices and these surpluses together exceed every placing. Moving the prices towards the lots that
+ * several chambers take, or none, lowers that bound.
  */
 final class Prices {
     private static final double LONGEST = 3;
@@ -78,7 +78,9 @@ final class Prices {
         loads.bundle.length = Math.max(SHORTEST, length);
     }
 
-    /** Leaves out climates, and lots of chambers, with which the bound falls below what is known. */
+    /**
+     * Leaves out climates, and lots of chambers, with which the bound falls below what is known.
+     */
     private void leaveOut(Branch branch, Loads loads, double[] price, double above) {
         for (int c = 0; c < store.chambers; c++) {
             double spare = above - loads.most[c];

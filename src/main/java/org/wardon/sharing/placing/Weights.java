@@ -4,9 +4,9 @@ import java.util.Arrays;
 
 /**
  * What room, mass and cooling of each day are worth in one climate of one chamber. Summed over a
- * lot's stay they make one weight of it, and the many limits become one that every load keeps:
- * the sum of the weights of a load is at most {@link #total}. The best such values make the bound
- * of a load as low as that of its linear program.
+ * lot's stay they make one weight of it, and the many limits become one that every load keeps: the
+ * sum of the weights of a load is at most {@link #total}. The best such values make the bound of a
+ * load as low as that of its linear program.
  */
 final class Weights {
     private static final int KINDS = 3;
@@ -49,7 +49,9 @@ final class Weights {
         return sum;
     }
 
-    /** Takes some steps towards the lowest bound; {@code reached} is a load known to be possible. */
+    /**
+     * Takes some steps towards the lowest bound; {@code reached} is a load known to be possible.
+     */
     void tighten(double[] gain, double reached, int steps) {
         double[] best = day.clone();
         double least = bound(gain);

@@ -2,9 +2,9 @@
  * Which lot stands in which chamber at which setting, so that most is kept of all of them.
  *
  * <p>Lives here: the problem as pure numbers, the search for the best placing and the bound that
- * says how far from the best it can be at most. Nothing here knows a crop: what a lot is worth, what
- * heat it gives and whom it harms stand in the {@link org.wardon.sharing.placing.Climate} of each
- * setting.
+ * says how far from the best it can be at most. Nothing here knows a crop: what a lot is worth,
+ * what heat it gives and whom it harms stand in the {@link org.wardon.sharing.placing.Climate} of
+ * each setting.
  *
  * <p>The search: prices on lots split the store into chambers; of each chamber the best setting and
  * load at those prices is found exactly where it can be, and its sum bounds every placing from

@@ -111,13 +111,7 @@ final class Instances {
         double most = 0;
         for (int d = 0; d < DAYS; d++) {
             int day = d;
-            most =
-                    Math.max(
-                            most,
-                            lots.stream()
-                                    .filter(l -> stands(l, day))
-                                    .mapToDouble(of)
-                                    .sum());
+            most = Math.max(most, lots.stream().filter(l -> stands(l, day)).mapToDouble(of).sum());
         }
         return most;
     }
@@ -158,8 +152,9 @@ final class Instances {
     }
 
     private static void heat(Drawn one, double c, double[] heatW) {
-        RespirationLaw law = Respirations.of(
-                                one.commodity(), org.wardon.produce.Ripeness.UNKNOWN, CLASSES, 0.5).value();
+        RespirationLaw law =
+                Respirations.of(one.commodity(), org.wardon.produce.Ripeness.UNKNOWN, CLASSES, 0.5)
+                        .value();
         for (int d = one.lot().firstDay(); d <= one.lot().lastDay(); d++) {
             double field = d == one.lot().firstDay() ? HEAT_CAPACITY * (ARRIVES_C - c) / 86_400 : 0;
             heatW[d] = one.lot().massKg() * (law.wattsPerKg(c) + field);

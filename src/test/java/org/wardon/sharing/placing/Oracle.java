@@ -99,7 +99,8 @@ final class Oracle {
         }
     }
 
-    private void limit(BoolVar[] in, BoolVar set, int d, java.util.function.IntToDoubleFunction of) {
+    private void limit(
+            BoolVar[] in, BoolVar set, int d, java.util.function.IntToDoubleFunction of) {
         LinearExprBuilder sum = LinearExpr.newBuilder();
         for (int l = 0; l < in.length; l++) {
             if (in[l] != null && store.first[l] <= d && d <= store.last[l]) {

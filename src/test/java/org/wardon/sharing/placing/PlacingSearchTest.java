@@ -144,8 +144,7 @@ class PlacingSearchTest {
                                                     o.costPerWDay()))
                             .toList();
             chambers.add(
-                    0,
-                    new ChamberToFill(one.id(), one.massKg(), one.volumeM3(), offers, true));
+                    0, new ChamberToFill(one.id(), one.massKg(), one.volumeM3(), offers, true));
         }
         PlacingAnswer shuffled = search(new PlacingProblem(problem.days(), lots, chambers));
         PlacingAnswer plain = search(problem);
