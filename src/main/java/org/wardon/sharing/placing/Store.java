@@ -1,7 +1,7 @@
 package org.wardon.sharing.placing;
 
 import java.util.Comparator;
-import java.util.IdentityHashMap;
+import java.util.HashMap;
 import java.util.List;
 import java.util.Map;
 import java.util.stream.IntStream;
@@ -58,7 +58,7 @@ final class Store {
         volumeShare = new double[chambers][lots];
         heatShare = new double[chambers][][];
         company = new Company[chambers][];
-        Map<Climate, Company> known = new IdentityHashMap<>();
+        Map<Climate, Company> known = new HashMap<>();
         for (int c = 0; c < chambers; c++) {
             fill(c, problem, known);
         }
