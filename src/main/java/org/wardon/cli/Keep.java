@@ -53,7 +53,8 @@ final class Keep implements Callable<Integer> {
                 paramLabel = "CSV",
                 required = true,
                 description = {
-                    "Logged history: time,temperatureC[,humidityPct] or time,temperatureF."
+                    "Logged history: time,temperatureC[,humidityPct] or time,temperatureF, or as the"
+                            + " logger wrote it."
                 })
         private @Nullable Path history;
     }

@@ -9,6 +9,7 @@ import java.util.Map;
 import java.util.Optional;
 import java.util.regex.Matcher;
 import java.util.regex.Pattern;
+import java.util.stream.Stream;
 import org.wardon.air.Timeline;
 import org.wardon.errors.BadInput;
 import org.wardon.errors.Fault;
@@ -33,6 +34,7 @@ import org.wardon.keeping.Spread;
 import org.wardon.lots.ClassValues;
 import org.wardon.lots.LotHistory;
 import org.wardon.produce.Commodity;
+import org.wardon.produce.Reason;
 import org.wardon.reference.ReferenceBook;
 
 /** Answers how long a lot keeps. */
@@ -84,14 +86,21 @@ public final class KeepingAdvice {
                 KeepingModel.of(
                         KeptLot.inOpenPackage(commodity.id(), commodity, door(request), classes));
         Outlook outlook = model.outlook(followed, Draws.seeded(SEED, DRAWS), fromS, endS);
+        List<Outlook> others =
+                read.others().stream()
+                        .map(one -> carriedOn(request, one, endS))
+                        .map(one -> model.outlook(one, Draws.seeded(SEED, DRAWS), fromS, endS))
+                        .toList();
         double usedPct = 100 * model.follow(followed, Draw.MEDIAN).usedAt(endS);
         Optional<RipeQuestion> ripe =
                 RipeQuestion.of(request, model, followed, fromS, () -> ripening(book));
         return new KeepReport(
                 commodity,
-                answer(commodity, outlook, usedPct, ripe.map(RipeQuestion::figures)),
+                GapRange.widened(
+                        answer(commodity, outlook, usedPct, ripe.map(RipeQuestion::figures)),
+                        others),
                 outlook.restsOn().word(),
-                outlook.reasons(),
+                Stream.concat(read.notes().stream(), outlook.reasons().stream()).toList(),
                 ripe.map(RipeQuestion::told).orElse(List.of()));
     }
 
@@ -164,8 +173,15 @@ public final class KeepingAdvice {
      * @param commodity what it is
      * @param history its history
      * @param lastDay the day of the last reading, where it was logged
+     * @param others the same, as cold and as warm as it may have been in gaps of the readings
+     * @param notes what was assumed in reading it
      */
-    record Told(Commodity commodity, LotHistory history, Optional<LocalDate> lastDay) {}
+    record Told(
+            Commodity commodity,
+            LotHistory history,
+            Optional<LocalDate> lastDay,
+            List<LotHistory> others,
+            List<Reason> notes) {}
 
     /** Checks a question and reads what the lot goes through. */
     Told told(KeepRequest request) {
@@ -182,7 +198,7 @@ public final class KeepingAdvice {
                             humidity,
                             request.ethylenePpm().orElse(ChamberEthylene.OUTDOOR_PPM),
                             steady.days() * Timeline.DAY_S);
-            return new Told(commodity, steadily, Optional.empty());
+            return new Told(commodity, steadily, Optional.empty(), List.of(), List.of());
         }
         KeepRequest.Logged logged = (KeepRequest.Logged) request.condition();
         LoggedHistory read =
@@ -194,7 +210,11 @@ public final class KeepingAdvice {
         LotHistory history = read.history();
         long seconds = (long) history.timeS(history.size() - 1);
         return new Told(
-                commodity, history, Optional.of(read.from().plusSeconds(seconds).toLocalDate()));
+                commodity,
+                history,
+                Optional.of(read.from().plusSeconds(seconds).toLocalDate()),
+                read.bounds().map(b -> List.of(b.colder(), b.warmer())).orElse(List.of()),
+                read.notes());
     }
 
     private static double handbookHumidity(Commodity commodity) {

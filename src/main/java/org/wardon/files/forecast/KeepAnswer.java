@@ -34,6 +34,27 @@ public record KeepAnswer(
     }
 
     /**
+     * Returns the answer with other days.
+     *
+     * @param days days left
+     * @param each days left by each mechanism alone
+     * @return the copy
+     */
+    public KeepAnswer with(Quantiles days, List<Mechanism> each) {
+        return new KeepAnswer(
+                commodity,
+                days,
+                hangsOn,
+                lifeUsedPct,
+                limitedBy,
+                chillingRisk,
+                each,
+                ripeFrom,
+                edibleLeft,
+                ripeOn);
+    }
+
+    /**
      * One mechanism alone.
      *
      * @param name its name

@@ -21,6 +21,21 @@ record Track(LongList at, LongList line, DoubleList value) {
         return valuesAt(times);
     }
 
+    /** Returns the value at a time by straight lines; the ends are held. */
+    double at(long t) {
+        int low = 0;
+        int high = size();
+        while (low < high) {
+            int middle = (low + high) >>> 1;
+            if (at.get(middle) < t) {
+                low = middle + 1;
+            } else {
+                high = middle;
+            }
+        }
+        return between(low, t);
+    }
+
     /** Returns the values at rising times by straight lines; the ends are held. */
     double[] valuesAt(LongList times) {
         double[] out = new double[times.size()];
