@@ -8,7 +8,14 @@ import org.wardon.keeping.ethylene.Trigger;
 import org.wardon.lots.LotHistory;
 import org.wardon.produce.Ripeness;
 
-/** One lot stepped through a chamber's ethylene: gives off, feels, begins to ripen. */
+/**
+ * One lot stepped through a chamber's ethylene: gives off, feels, begins to ripen.
+ *
+ * <p>Autocatalysis is one step (ours, kept simple): until its green clock is over or ethylene has
+ * started it, the lot gives off the lowest rate printed for its temperature, from then on the
+ * highest, which feeds the air that it and its neighbours feel. A slow rise between the two, and
+ * its own gas inside the fruit, are not followed.
+ */
 final class RipeningLot {
     /** Ageing does not ask for humidity. */
     private static final double ANY_HUMIDITY = 0.9;
