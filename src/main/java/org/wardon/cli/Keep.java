@@ -84,6 +84,12 @@ final class Keep implements Callable<Integer> {
     private @Nullable Double usedPct;
 
     @Option(
+            names = "--variant",
+            paramLabel = "NAME",
+            description = "A variant that 'look' shows, such as hass of avocado.")
+    private @Nullable String variant;
+
+    @Option(
             names = "--known-life",
             paramLabel = "DAYS@C",
             description = {
@@ -176,7 +182,8 @@ final class Keep implements Callable<Integer> {
                 ripeness,
                 Optional.ofNullable(cured).map(answer -> answer == YesNo.YES),
                 number(ethylenePpm),
-                number(ripeInDays));
+                number(ripeInDays),
+                Optional.ofNullable(variant));
     }
 
     private static void refuse(String option, @Nullable Double value) {

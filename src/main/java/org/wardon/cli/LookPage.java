@@ -11,6 +11,7 @@ import org.wardon.files.forecast.WrittenNumber;
 import org.wardon.produce.Commodity;
 import org.wardon.produce.NamedFact;
 import org.wardon.reference.ReferenceBook;
+import org.wardon.reference.Variants;
 
 /** What print says of a commodity, for a person. */
 final class LookPage {
@@ -37,6 +38,14 @@ final class LookPage {
         page.append(
                 Paragraph.hanging(
                         "", String.join(", ", commodity.names()) + " [" + commodity.id() + "]"));
+        Map<String, String> variants = Variants.of(commodity);
+        if (!variants.isEmpty()) {
+            page.append(
+                    Paragraph.hanging(
+                            "",
+                            "Variants with rows of their own (keep --variant): "
+                                    + String.join(", ", variants.keySet())));
+        }
         page.append('\n');
         Set<String> sources = new LinkedHashSet<>();
         for (NamedFact fact : facts) {

@@ -48,7 +48,12 @@ final class OwnOverlay {
                         of.curves(),
                         of.ripening(),
                         lots);
-        return with(published, published.needs(), published.breath(), published.water(), keeping);
+        return keeping(published, keeping);
+    }
+
+    /** Returns the commodity with other rows of keeping. */
+    static Commodity keeping(Commodity of, Commodity.Keeping keeping) {
+        return with(of, of.needs(), of.breath(), of.water(), keeping);
     }
 
     private static Commodity over(Commodity of, OwnName name, Fact own) {

@@ -17,6 +17,7 @@ import org.wardon.produce.Ripeness;
  * @param cured whether it was cured, where that is known
  * @param ethylenePpm ethylene in the air of one condition, µL/L; empty for clean outdoor air
  * @param ripeInDays asks whether it is ripe after so many days
+ * @param variant variant of the commodity; empty for the crop as a whole
  */
 public record KeepRequest(
         String commodity,
@@ -27,7 +28,8 @@ public record KeepRequest(
         Ripeness ripeness,
         Optional<Boolean> cured,
         OptionalDouble ethylenePpm,
-        OptionalDouble ripeInDays) {
+        OptionalDouble ripeInDays,
+        Optional<String> variant) {
     /** What the lot goes through. */
     public sealed interface Condition {}
 

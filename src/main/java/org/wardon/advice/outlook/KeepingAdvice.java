@@ -36,6 +36,7 @@ import org.wardon.lots.LotHistory;
 import org.wardon.produce.Commodity;
 import org.wardon.produce.Reason;
 import org.wardon.reference.ReferenceBook;
+import org.wardon.reference.Variants;
 
 /** Answers how long a lot keeps. */
 public final class KeepingAdvice {
@@ -186,7 +187,11 @@ public final class KeepingAdvice {
     /** Checks a question and reads what the lot goes through. */
     Told told(KeepRequest request) {
         check(request);
-        Commodity commodity = book.named(request.commodity());
+        Commodity crop = book.named(request.commodity());
+        Optional<Variants.Chosen> chosen =
+                request.variant().map(name -> Variants.choose(crop, name));
+        Commodity commodity = chosen.map(Variants.Chosen::commodity).orElse(crop);
+        List<Reason> notes = chosen.map(one -> List.of(one.told())).orElse(List.of());
         double humidity =
                 request.humidityPct().isPresent()
                         ? request.humidityPct().getAsDouble() / 100
@@ -198,7 +203,7 @@ public final class KeepingAdvice {
                             humidity,
                             request.ethylenePpm().orElse(ChamberEthylene.OUTDOOR_PPM),
                             steady.days() * Timeline.DAY_S);
-            return new Told(commodity, steadily, Optional.empty(), List.of(), List.of());
+            return new Told(commodity, steadily, Optional.empty(), List.of(), notes);
         }
         KeepRequest.Logged logged = (KeepRequest.Logged) request.condition();
         LoggedHistory read =
@@ -214,7 +219,7 @@ public final class KeepingAdvice {
                 history,
                 Optional.of(read.from().plusSeconds(seconds).toLocalDate()),
                 read.bounds().map(b -> List.of(b.colder(), b.warmer())).orElse(List.of()),
-                read.notes());
+                Stream.concat(notes.stream(), read.notes().stream()).toList());
     }
 
     private static double handbookHumidity(Commodity commodity) {

@@ -19,6 +19,7 @@ import org.wardon.produce.Reason;
 import org.wardon.produce.rows.OwnLot;
 import org.wardon.reference.GoneLot;
 import org.wardon.reference.ReferenceBook;
+import org.wardon.reference.Variants;
 
 /** What the keeper's own lots that are gone say of the life of a commodity. */
 public final class OwnLotAdvice {
@@ -70,7 +71,7 @@ public final class OwnLotAdvice {
                         on,
                         request.ended(),
                         new OwnLot.Began(
-                                "",
+                                request.went().variant().map(Variants::id).orElse(""),
                                 request.went().ripeness(),
                                 request.went().cured(),
                                 request.went().usedPct().orElse(0) / 100),

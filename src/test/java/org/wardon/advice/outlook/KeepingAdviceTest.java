@@ -46,7 +46,8 @@ class KeepingAdviceTest {
                 Ripeness.UNKNOWN,
                 Optional.empty(),
                 OptionalDouble.empty(),
-                OptionalDouble.empty());
+                OptionalDouble.empty(),
+                Optional.empty());
     }
 
     private static KeepAnswer at(double atC, double days, double usedPct, String knownLife) {

@@ -43,7 +43,8 @@ class RipeInTest {
                         ripeness,
                         Optional.empty(),
                         OptionalDouble.of(ppm),
-                        OptionalDouble.of(inDays)));
+                        OptionalDouble.of(inDays),
+                        Optional.empty()));
     }
 
     private static RipeOn answer(KeepReport report) {
