@@ -11,6 +11,7 @@ import org.wardon.cooling.Outage;
 import org.wardon.cooling.Setting;
 import org.wardon.cooling.solar.SolarSupply;
 import org.wardon.enclosure.Enclosure;
+import org.wardon.enclosure.Surroundings;
 import org.wardon.errors.Require;
 
 /**
@@ -55,12 +56,15 @@ public record ChamberRun(
      * @param humidifierKgH water a humidifier can add towards the wanted humidity, kg/h
      * @param neighbours air of the chambers next door, by id
      * @param solar panels and battery its electricity comes from; absent where a grid feeds it
+     * @param around surroundings worked out before for the same site, weather and span, whose sun
+     *     is taken; absent, or of another span or weather, it is worked out
      */
     public record Extras(
             double heaterW,
             double humidifierKgH,
             Map<String, AirSeries> neighbours,
-            Optional<SolarSupply> solar) {
+            Optional<SolarSupply> solar,
+            Optional<Surroundings> around) {
         /** Nothing else. */
         public static final Extras NONE = new Extras(0, 0, Map.of());
 
@@ -83,12 +87,38 @@ public record ChamberRun(
         }
 
         /**
+         * A chamber whose surroundings are worked out for it.
+         *
+         * @param heaterW heater, W
+         * @param humidifierKgH humidifier, kg/h
+         * @param neighbours air of the chambers next door, by id
+         * @param solar panels and battery, absent where a grid feeds it
+         */
+        public Extras(
+                double heaterW,
+                double humidifierKgH,
+                Map<String, AirSeries> neighbours,
+                Optional<SolarSupply> solar) {
+            this(heaterW, humidifierKgH, neighbours, solar, Optional.empty());
+        }
+
+        /**
+         * Returns the same with surroundings worked out before.
+         *
+         * @param known surroundings of a run like it
+         * @return the changed copy
+         */
+        public Extras under(Surroundings known) {
+            return new Extras(heaterW, humidifierKgH, neighbours, solar, Optional.of(known));
+        }
+
+        /**
          * Returns the same, fed by a grid.
          *
          * @return the changed copy
          */
         Extras onGrid() {
-            return new Extras(heaterW, humidifierKgH, neighbours, Optional.empty());
+            return new Extras(heaterW, humidifierKgH, neighbours, Optional.empty(), around);
         }
     }
 

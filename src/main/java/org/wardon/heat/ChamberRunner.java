@@ -161,7 +161,7 @@ final class ChamberRunner implements Integrator.StepListener {
     }
 
     private double nextSunS() {
-        return solar.map(supply -> supply.nextLanding(now)).orElse(Double.POSITIVE_INFINITY);
+        return solar.isPresent() ? solar.get().nextLanding(now) : Double.POSITIVE_INFINITY;
     }
 
     /** Lets pass what changes at the time it stands at, and ends the hour where it is over. */

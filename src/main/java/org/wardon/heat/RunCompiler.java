@@ -143,10 +143,22 @@ final class RunCompiler {
                 run.site(),
                 run.timeline(),
                 run.weather(),
-                Sunshine.of(run.site(), run.timeline(), run.weather(), hours),
+                sun(run, hours),
                 hours,
                 insideMeanC(run, mean),
                 neighbours);
+    }
+
+    /** The sun, worked out anew where the run does not bring one of just its span and weather. */
+    private static Sunshine sun(ChamberRun run, int hours) {
+        return run.extras()
+                .around()
+                .filter(known -> known.hours() == hours)
+                .filter(known -> known.weather().equals(run.weather()))
+                .filter(known -> known.timeline().equals(run.timeline()))
+                .filter(known -> known.site().equals(run.site()))
+                .map(Surroundings::sun)
+                .orElseGet(() -> Sunshine.of(run.site(), run.timeline(), run.weather(), hours));
     }
 
     private static Map<String, double[]> neighbourRatios(ChamberRun run, double pressurePa) {

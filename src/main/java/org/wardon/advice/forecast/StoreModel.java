@@ -16,6 +16,7 @@ import org.wardon.cooling.Cooler;
 import org.wardon.cooling.Outage;
 import org.wardon.enclosure.Beyond;
 import org.wardon.enclosure.Enclosure;
+import org.wardon.enclosure.Surroundings;
 import org.wardon.errors.Progress;
 import org.wardon.heat.AirSeries;
 import org.wardon.heat.ChamberRun;
@@ -54,6 +55,7 @@ final class StoreModel {
     private final AirSeries withoutAir;
     private final AirSeries sketchedAir;
     private final Map<String, Start> warmed = new ConcurrentHashMap<>();
+    private final Map<Double, Surroundings> around = new ConcurrentHashMap<>();
 
     StoreModel(StorePlan plan, Weather weather, List<LotSheet> sheets) {
         this.plan = plan;
@@ -268,25 +270,32 @@ final class StoreModel {
                         .filter(visit -> visit.leavesS() > 0)
                         .map(visit -> visit.stay(draw))
                         .toList();
-        return ChamberRun.of(
-                        chamber.id(),
-                        plan.site(),
-                        timeline,
-                        weather,
-                        chamber.enclosure(),
-                        chamber.setting(),
-                        durationS)
-                .withCoolers(chamber.coolers())
-                .withOutages(outages(chamber))
-                .withStays(stays)
-                .withFactors(factors(chamber.corrections()))
-                .withStart(start(chamber))
-                .withExtras(
-                        new ChamberRun.Extras(
-                                chamber.heaterW(),
-                                chamber.humidifierKgH(),
-                                air,
-                                chamber.power().solar()));
+        ChamberRun run =
+                ChamberRun.of(
+                                chamber.id(),
+                                plan.site(),
+                                timeline,
+                                weather,
+                                chamber.enclosure(),
+                                chamber.setting(),
+                                durationS)
+                        .withCoolers(chamber.coolers())
+                        .withOutages(outages(chamber))
+                        .withStays(stays)
+                        .withFactors(factors(chamber.corrections()))
+                        .withStart(start(chamber))
+                        .withExtras(
+                                new ChamberRun.Extras(
+                                        chamber.heaterW(),
+                                        chamber.humidifierKgH(),
+                                        air,
+                                        chamber.power().solar()));
+        return run.withExtras(run.extras().under(around(run)));
+    }
+
+    /** The surroundings of all runs of a span have one sun. */
+    private Surroundings around(ChamberRun run) {
+        return around.computeIfAbsent(run.durationS(), any -> HeatModel.around(run));
     }
 
     /** All spans without power of a chamber, to the end of the longest run, none overlapping. */
