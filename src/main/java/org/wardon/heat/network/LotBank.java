@@ -194,7 +194,8 @@ final class LotBank implements Part {
 
     /** Heat of respiration of a shell as the steps see it, W. */
     double breathW(int k, int slot, double t) {
-        return plain ? lawfulW(k, slot, t) : breath.value(k * places + slot, t);
+        int j = k * places + slot;
+        return plain || breath.stale(j, t) ? lawfulW(k, slot, t) : breath.value(j, t);
     }
 
     private double lawfulW(int k, int slot, double t) {

@@ -324,7 +324,7 @@ public final class Bank {
                 double share = error[at] * weights[at];
                 sum += share * share;
             }
-            if (!(sum <= worst)) {
+            if (sum > worst || Double.isNaN(sum)) {
                 worst = sum;
                 worstMember = i;
             }

@@ -98,13 +98,16 @@ abstract class Rosenbrock {
         addFlows(h, flowAlong, totals);
     }
 
-    /** Each node of the hub counts for itself, each branch by its root mean square. */
+    /**
+     * Each node of the hub counts for itself, each branch by its root mean square; not a number
+     * where any of them is none.
+     */
     final double error(double[] miss) {
         double[] weights = system.weights();
         double worst = 0;
         for (int i = 0; i < tree.hub(); i++) {
             double e = Math.abs(miss[i] * weights[i]);
-            if (!(e <= worst)) {
+            if (e > worst || Double.isNaN(e)) {
                 worst = e;
                 worstNode = i;
             }
@@ -116,14 +119,14 @@ abstract class Rosenbrock {
                 sum += share * share;
             }
             double e = Math.sqrt(sum / branch.size());
-            if (!(e <= worst)) {
+            if (e > worst || Double.isNaN(e)) {
                 worst = e;
                 worstNode = branch.start;
             }
         }
         for (Bank bank : tree.banks()) {
             double e = bank.worst(miss, weights);
-            if (!(e <= worst)) {
+            if (e > worst || Double.isNaN(e)) {
                 worst = e;
                 worstNode = bank.at(0, bank.worstMember);
             }
