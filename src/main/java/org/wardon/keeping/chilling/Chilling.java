@@ -54,7 +54,7 @@ public final class Chilling {
             Ripeness ripeness,
             List<ChillingExposure> exposures,
             String trial) {
-        Handbook handbook = Handbook.of(LifeLevel.of(commodity));
+        LifeLevel level = LifeLevel.of(commodity);
         return Zone.of(commodity, ripeness, exposures)
                 .map(
                         zone ->
@@ -62,7 +62,7 @@ public final class Chilling {
                                         zone,
                                         DoseFit.of(commodity, zone, exposures, trial),
                                         ripeness,
-                                        handbook));
+                                        Handbook.of(level, zone)));
     }
 
     /**

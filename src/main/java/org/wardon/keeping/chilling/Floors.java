@@ -28,6 +28,7 @@ final class Floors {
     private static final String SAFE = "safe";
     private static final String BAND = "band";
     private static final double BAND_WIDTH_K = 10;
+    private static final double BAND_ABOVE_K = 2;
 
     private Floors() {}
 
@@ -57,7 +58,7 @@ final class Floors {
                     : Optional.empty();
         }
         boolean band = rows.stream().anyMatch(row -> row.zone().equals(BAND));
-        Zone zone = band ? band(rows) : floor(rows, handbook.atLowC());
+        Zone zone = band ? band(rows, handbook.atHighC()) : floor(rows, handbook.atLowC());
         boolean own = rows.stream().anyMatch(row -> row.lowestSafeC().orElseThrow().own());
         return Optional.of(
                 band || own
@@ -112,14 +113,20 @@ final class Floors {
                                         && other.days().highest() >= row.days().highest());
     }
 
-    private static Zone band(List<ChillingFloor> rows) {
+    /**
+     * A band whose lower end nobody printed is ten kelvins wide, but ends two kelvins above a
+     * handbook that advises to keep colder than it, as those printed do (assumption).
+     */
+    private static Zone band(List<ChillingFloor> rows, double keptAtC) {
         double top = rows.stream().mapToDouble(Floors::high).max().orElseThrow();
         OptionalDouble printed =
                 rows.stream()
                         .filter(row -> row.bandLowC().isPresent())
                         .mapToDouble(row -> row.bandLowC().getAsDouble())
                         .min();
-        double low = printed.orElse(top - BAND_WIDTH_K);
+        double above = keptAtC + BAND_ABOVE_K;
+        double widest = top - BAND_WIDTH_K;
+        double low = printed.orElse(above < top - BAND_ABOVE_K ? Math.max(widest, above) : widest);
         return new Zone(top, OptionalDouble.of(low), skin(rows), false, rows.get(0).sourceId());
     }
 

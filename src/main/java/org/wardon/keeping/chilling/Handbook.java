@@ -14,8 +14,10 @@ import org.wardon.keeping.life.LifeLevel;
 record Handbook(double lowC, double highC, double days) {
     private static final double FULLY_AFTER_K = 1;
 
-    static Handbook of(LifeLevel handbook) {
-        return new Handbook(handbook.atLowC(), handbook.atHighC(), handbook.lowDays());
+    /** Between the handbook's condition and a band above it nothing is worse than in either. */
+    static Handbook of(LifeLevel handbook, Zone zone) {
+        double highC = Math.max(handbook.atHighC(), zone.bandLowC().orElse(handbook.atHighC()));
+        return new Handbook(handbook.atLowC(), highC, handbook.lowDays());
     }
 
     /**
