@@ -5,6 +5,7 @@ import java.util.Map;
 import java.util.Set;
 import org.wardon.files.Lookups;
 import org.wardon.reference.ReferenceBook;
+import org.wardon.reference.Variants;
 
 /** What a store plan may name, from the reference book. */
 public final class PlanLookups {
@@ -14,7 +15,7 @@ public final class PlanLookups {
      * Returns the ids of a book.
      *
      * @param book the book
-     * @return ids of commodities, packages, materials and door protections
+     * @return ids of commodities, their variants, packages, materials and door protections
      */
     public static Lookups of(ReferenceBook book) {
         Map<String, Double> protections = new HashMap<>();
@@ -23,8 +24,11 @@ public final class PlanLookups {
                         (id, doorway) ->
                                 doorway.usual()
                                         .ifPresent(fact -> protections.put(id, fact.middle())));
+        Map<String, Set<String>> variants = new HashMap<>();
+        book.all().forEach(one -> variants.put(one.id(), Variants.of(one).keySet()));
         return new Lookups(
                 Set.copyOf(book.list()),
+                variants,
                 book.packageKinds().keySet(),
                 book.materials(),
                 protections);

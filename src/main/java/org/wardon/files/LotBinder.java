@@ -39,6 +39,7 @@ final class LotBinder {
         return new LotPlan(
                 inputs.text(lot, "id"),
                 inputs.text(lot, "commodity"),
+                lot.at("variant").text(),
                 inputs.number(lot, "massKg"),
                 packed(lot),
                 arrives,

@@ -11,6 +11,8 @@ import org.wardon.plan.Defaults;
 
 /** What the schema cannot say of lots: what names what, what comes before what. */
 final class LotRules {
+    private static final String VARIANT = "variant of this commodity with rows of its own";
+
     private final Part plan;
     private final Lookups lookups;
     private final Faults faults;
@@ -28,6 +30,10 @@ final class LotRules {
         ids.unique(lots, "lot");
         for (Part lot : lots) {
             ids.known(lot.at("commodity"), lookups.commodities(), "commodity of the tables");
+            lot.at("commodity")
+                    .text()
+                    .map(lookups.variants()::get)
+                    .ifPresent(known -> ids.known(lot.at("variant"), known, VARIANT));
             ids.known(
                     lot.at("package"),
                     lookups.packages(),

@@ -11,6 +11,7 @@ import org.wardon.produce.Ripeness;
  *
  * @param id its id, unique in the plan
  * @param commodity id of the commodity
+ * @param variant id of its variant; absent: the crop as a whole
  * @param massKg net mass on arrival, kg
  * @param packed how it is packed
  * @param arrives local time; one before the plan's {@code from} is in its chamber at the start, at
@@ -27,6 +28,7 @@ import org.wardon.produce.Ripeness;
 public record LotPlan(
         String id,
         String commodity,
+        Optional<String> variant,
         double massKg,
         PackagePlan packed,
         LocalDateTime arrives,
@@ -75,6 +77,7 @@ public record LotPlan(
         return new LotPlan(
                 id,
                 commodity,
+                variant,
                 massKg,
                 packed,
                 arrives,

@@ -278,6 +278,7 @@ class PlanReaderTest {
     @Test
     void valuesOfALot() {
         LotPlan mango = EXAMPLE.lots().get(0);
+        assertEquals(Optional.of("kensington"), mango.variant());
         assertEquals(new PackagePlan.Named("room-cooling-any"), mango.packed());
         assertEquals(LocalDateTime.parse("2026-03-09T15:00"), mango.leaves());
         assertEquals(Place.NEAR_COOLER, mango.place());

@@ -48,7 +48,12 @@ public final class TableLookups {
                                 .orElse((low.getAsDouble() + high.getAsDouble()) / 2));
             }
         }
-        return new Lookups(commodities, packages, materials, protections);
+        return new Lookups(
+                commodities,
+                Map.of("mango", Set.of("kensington", "okrong"), "okra", Set.of()),
+                packages,
+                materials,
+                protections);
     }
 
     private static Material material(NamedCsvRecord row, Map<String, NamedCsvRecord> moisture) {

@@ -3,6 +3,7 @@ package org.wardon.advice.forecast;
 import java.util.List;
 import java.util.Map;
 import java.util.concurrent.ConcurrentHashMap;
+import java.util.stream.Stream;
 import org.wardon.keeping.Draw;
 import org.wardon.lots.Lot;
 import org.wardon.lots.LotRange;
@@ -12,10 +13,12 @@ import org.wardon.produce.Reason;
 /** The body of a lot in each draw, fitted once: it stands in chambers and without one alike. */
 final class Bodies {
     private final LotRange range;
+    private final List<Reason> chosen;
     private final Map<Integer, Lot> byDraw = new ConcurrentHashMap<>();
 
-    Bodies(LotRange range) {
+    Bodies(LotRange range, List<Reason> chosen) {
         this.range = range;
+        this.chosen = chosen;
     }
 
     Lot in(Draw draw) {
@@ -35,8 +38,8 @@ final class Bodies {
         return range.at(Shares.MIDDLE).value();
     }
 
-    /** What the body rests on. */
+    /** What the body rests on, and the variant that was chosen. */
     List<Reason> restsOn() {
-        return range.at(Shares.MIDDLE).restsOn();
+        return Stream.concat(chosen.stream(), range.at(Shares.MIDDLE).restsOn().stream()).toList();
     }
 }

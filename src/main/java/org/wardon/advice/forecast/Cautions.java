@@ -215,7 +215,9 @@ final class Cautions {
         RipeWanted.of(sheet, outcome)
                 .ifPresent(w -> w.told().forEach(c -> add(c.level(), c.reason())));
         for (Reason reason : sheet.restsOn()) {
-            if (reason.code().endsWith("-class") || reason.code().endsWith("-broad")) {
+            if (reason.code().endsWith("-class")
+                    || reason.code().endsWith("-broad")
+                    || reason.code().equals("variant-facts")) {
                 add(
                         Level.NOTE,
                         new Reason(

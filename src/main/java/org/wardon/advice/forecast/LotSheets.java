@@ -25,7 +25,9 @@ import org.wardon.produce.Commodity;
 import org.wardon.produce.Evidence;
 import org.wardon.produce.Fact;
 import org.wardon.produce.PackageKind;
+import org.wardon.produce.Reason;
 import org.wardon.reference.ReferenceBook;
+import org.wardon.reference.Variants;
 
 /** Makes the sheets of a plan's lots. */
 final class LotSheets {
@@ -56,7 +58,9 @@ final class LotSheets {
     }
 
     private LotSheet sheet(LotPlan lot) {
-        Commodity commodity = book.get(lot.commodity());
+        Commodity crop = book.get(lot.commodity());
+        Optional<Variants.Chosen> chosen = lot.variant().map(id -> Variants.choose(crop, id));
+        Commodity commodity = chosen.map(Variants.Chosen::commodity).orElse(crop);
         PackageKind kind = kind(lot.packed());
         LotRange range =
                 LotRange.of(
@@ -66,7 +70,9 @@ final class LotSheets {
                 KeptLot.inOpenPackage(lot.id(), commodity, door(lot), classes).packedIn(vapour);
         KeepingModel model = KeepingModel.of(kept);
         LotRange breathing = model.uncured() ? range.uncured() : range;
-        return new LotSheet(lot, commodity, kind, new Bodies(breathing), clock(lot), model);
+        List<Reason> told = chosen.map(one -> List.of(one.told())).orElse(List.of());
+        Bodies bodies = new Bodies(breathing, told);
+        return new LotSheet(lot, commodity, kind, bodies, clock(lot), model);
     }
 
     private LotSheet.Clock clock(LotPlan lot) {
