@@ -2,6 +2,7 @@ package org.wardon.advice.forecast;
 
 import java.util.List;
 import java.util.Map;
+import java.util.Optional;
 import java.util.concurrent.ConcurrentHashMap;
 import java.util.stream.Stream;
 import org.wardon.keeping.Draw;
@@ -9,6 +10,7 @@ import org.wardon.lots.Lot;
 import org.wardon.lots.LotRange;
 import org.wardon.lots.Shares;
 import org.wardon.produce.Reason;
+import org.wardon.reference.Variants;
 
 /** The body of a lot in each draw, fitted once: it stands in chambers and without one alike. */
 final class Bodies {
@@ -16,9 +18,9 @@ final class Bodies {
     private final List<Reason> chosen;
     private final Map<Integer, Lot> byDraw = new ConcurrentHashMap<>();
 
-    Bodies(LotRange range, List<Reason> chosen) {
+    Bodies(LotRange range, Optional<Variants.Chosen> variant) {
         this.range = range;
-        this.chosen = chosen;
+        chosen = variant.map(one -> List.of(one.told())).orElse(List.of());
     }
 
     Lot in(Draw draw) {

@@ -25,7 +25,6 @@ import org.wardon.produce.Commodity;
 import org.wardon.produce.Evidence;
 import org.wardon.produce.Fact;
 import org.wardon.produce.PackageKind;
-import org.wardon.produce.Reason;
 import org.wardon.reference.ReferenceBook;
 import org.wardon.reference.Variants;
 
@@ -70,8 +69,7 @@ final class LotSheets {
                 KeptLot.inOpenPackage(lot.id(), commodity, door(lot), classes).packedIn(vapour);
         KeepingModel model = KeepingModel.of(kept);
         LotRange breathing = model.uncured() ? range.uncured() : range;
-        List<Reason> told = chosen.map(one -> List.of(one.told())).orElse(List.of());
-        Bodies bodies = new Bodies(breathing, told);
+        Bodies bodies = new Bodies(breathing, chosen);
         return new LotSheet(lot, commodity, kind, bodies, clock(lot), model);
     }
 
