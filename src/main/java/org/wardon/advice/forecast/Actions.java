@@ -95,13 +95,14 @@ final class Actions {
             String source = sheet.commodity().keeping().curing().get(0).sourceId();
             say(1, Reason.about("do-cure-first", sheet.id(), source));
         }
-        move(sheet, fates);
-        sell(sheet, fates);
+        Optional<Candidate> move = move(sheet, fates);
+        move.ifPresent(found::add);
+        sell(sheet, fates, move.isPresent());
     }
 
-    private void move(LotSheet sheet, LotFates fates) {
+    private Optional<Candidate> move(LotSheet sheet, LotFates fates) {
         if (sheet.visits().size() > 1) {
-            return; // The keeper moves it already.
+            return Optional.empty(); // The keeper moves it already.
         }
         String here = sheet.endsIn();
         double best = 0;
@@ -109,7 +110,7 @@ final class Actions {
         double price = sheet.plan().market().pricePerKg() * sheet.plan().massKg();
         double soundHere = fates.shareSoundWhenSold(sheet.soldS());
         if (soundHere + WORTH_MOVING >= 1) {
-            return;
+            return Optional.empty();
         }
         for (ChamberPlan other : outcome.model().plan().chambers()) {
             if (other.id().equals(here) || harms(sheet, other)) {
@@ -146,7 +147,7 @@ final class Actions {
                                                 : OptionalDouble.empty()));
             }
         }
-        move.ifPresent(found::add);
+        return move;
     }
 
     /**
@@ -173,7 +174,7 @@ final class Actions {
         return Spread.of(fates.stream().mapToDouble(fate -> fate.daysLeft(from)).toArray()).p50();
     }
 
-    private void sell(LotSheet sheet, LotFates fates) {
+    private void sell(LotSheet sheet, LotFates fates, boolean orMove) {
         double leaveBy =
                 Outlook.leaveByS(fates.staying(), sheet.clock().arrivesS(), sheet.marketDays());
         if (leaveBy >= sheet.clock().leavesS()) {
@@ -181,10 +182,12 @@ final class Actions {
         }
         double earlier = (sheet.clock().leavesS() - leaveBy) / Timeline.DAY_S;
         boolean now = leaveBy <= sheet.clock().hereFromS() + 0.5 * Timeline.DAY_S;
+        String unmoved = now ? "do-sell-now-unmoved" : "do-sell-earlier-unmoved";
+        String sold = now ? "do-sell-now" : "do-sell-earlier";
         say(
                 now ? 3 : 4,
                 Reason.about(
-                        now ? "do-sell-now" : "do-sell-earlier",
+                        orMove ? unmoved : sold,
                         sheet.id(),
                         OWN_RULE,
                         Argument.of(earlier, "day"),
