@@ -11,14 +11,11 @@ import org.wardon.advice.picture.SectionPicture;
 import org.wardon.advice.wording.Words;
 import org.wardon.errors.BadInput;
 import org.wardon.files.AtomicFile;
-import org.wardon.files.PlanReader;
-import org.wardon.files.forecast.AnswerWriter;
 import org.wardon.files.forecast.SectionAnswer;
 import org.wardon.reference.ReferenceBook;
 import picocli.CommandLine.Command;
 import picocli.CommandLine.Mixin;
 import picocli.CommandLine.Option;
-import picocli.CommandLine.Parameters;
 
 /** Says where it is warm and where cold in a chamber without a fan. */
 @Command(
@@ -35,15 +32,7 @@ final class Section implements Callable<Integer> {
 
     @Mixin private Shared shared = new Shared();
 
-    @Parameters(paramLabel = "PLAN", description = "Store plan, a JSON file; see 'wardon schema'.")
-    private Path plan = Path.of("");
-
-    @Option(
-            names = "--chamber",
-            paramLabel = "ID",
-            required = true,
-            description = "Chamber of the plan.")
-    private String chamber = "";
+    @Mixin private ChamberQuestion asked = new ChamberQuestion();
 
     @Option(
             names = "--at",
@@ -73,9 +62,6 @@ final class Section implements Callable<Integer> {
             description = "Draw the section into this SVG file.")
     private @Nullable Path picture;
 
-    @Option(names = "--json", description = "Answer in JSON.")
-    private boolean json;
-
     @Override
     public Integer call() {
         Words words = shared.words();
@@ -84,7 +70,7 @@ final class Section implements Callable<Integer> {
         }
         SectionAnswer answer;
         try (ReferenceBook book = shared.book()) {
-            var store = PlanReader.read(plan, shared.lookups(book));
+            var store = asked.plan(shared, book);
             if (picture != null) {
                 AtomicFile.tryOut(picture);
             }
@@ -93,7 +79,7 @@ final class Section implements Callable<Integer> {
                             .ask(
                                     store,
                                     new SectionAdvice.Question(
-                                            chamber,
+                                            asked.chamber(),
                                             Optional.ofNullable(at),
                                             hours,
                                             Optional.ofNullable(across)));
@@ -103,9 +89,7 @@ final class Section implements Callable<Integer> {
             AtomicFile.write(picture, out -> out.write(drawn));
         }
         Optional<String> file = Optional.ofNullable(picture).map(Path::toString);
-        Terminal.ofProcess()
-                .out()
-                .print(json ? AnswerWriter.json(answer) : new SectionPage(words).of(answer, file));
+        asked.tell(answer, () -> new SectionPage(words).of(answer, file));
         return Exit.OK;
     }
 

@@ -1,18 +1,14 @@
 package org.wardon.cli;
 
-import java.nio.file.Path;
 import java.util.OptionalDouble;
 import java.util.concurrent.Callable;
 import org.jspecify.annotations.Nullable;
 import org.wardon.advice.forecast.SizeAdvice;
-import org.wardon.files.PlanReader;
-import org.wardon.files.forecast.AnswerWriter;
 import org.wardon.files.forecast.SizeAnswer;
 import org.wardon.reference.ReferenceBook;
 import picocli.CommandLine.Command;
 import picocli.CommandLine.Mixin;
 import picocli.CommandLine.Option;
-import picocli.CommandLine.Parameters;
 
 /** Sums the design heat load of a chamber by hand. */
 @Command(
@@ -25,15 +21,7 @@ import picocli.CommandLine.Parameters;
 final class Size implements Callable<Integer> {
     @Mixin private Shared shared = new Shared();
 
-    @Parameters(paramLabel = "PLAN", description = "Store plan, a JSON file; see 'wardon schema'.")
-    private Path plan = Path.of("");
-
-    @Option(
-            names = "--chamber",
-            paramLabel = "ID",
-            required = true,
-            description = "Chamber of the plan.")
-    private String chamber = "";
+    @Mixin private ChamberQuestion asked = new ChamberQuestion();
 
     @Option(
             names = "--outdoor-c",
@@ -61,28 +49,20 @@ final class Size implements Callable<Integer> {
             description = "Margin on the sum (${DEFAULT-VALUE}).")
     private double marginPct;
 
-    @Option(names = "--json", description = "Answer in JSON.")
-    private boolean json;
-
     @Override
     public Integer call() {
         try (ReferenceBook book = shared.book()) {
             SizeAnswer answer =
                     new SizeAdvice(book, shared.words())
                             .ask(
-                                    PlanReader.read(plan, shared.lookups(book)),
+                                    asked.plan(shared, book),
                                     new SizeAdvice.Question(
-                                            chamber,
+                                            asked.chamber(),
                                             given(outdoorC),
                                             given(outdoorHumidityPct),
                                             pullDownHours,
                                             marginPct));
-            Terminal.ofProcess()
-                    .out()
-                    .print(
-                            json
-                                    ? AnswerWriter.json(answer)
-                                    : new SizePage(shared.words()).of(answer));
+            asked.tell(answer, () -> new SizePage(shared.words()).of(answer));
         }
         return Exit.OK;
     }

@@ -1,18 +1,14 @@
 package org.wardon.cli;
 
-import java.nio.file.Path;
 import java.util.Optional;
 import java.util.concurrent.Callable;
 import org.jspecify.annotations.Nullable;
 import org.wardon.advice.forecast.WhyAdvice;
-import org.wardon.files.PlanReader;
-import org.wardon.files.forecast.AnswerWriter;
 import org.wardon.files.forecast.WhyAnswer;
 import org.wardon.reference.ReferenceBook;
 import picocli.CommandLine.Command;
 import picocli.CommandLine.Mixin;
 import picocli.CommandLine.Option;
-import picocli.CommandLine.Parameters;
 
 /** Says what moved heat and water in a chamber in one hour. */
 @Command(
@@ -25,15 +21,7 @@ import picocli.CommandLine.Parameters;
 final class Why implements Callable<Integer> {
     @Mixin private Shared shared = new Shared();
 
-    @Parameters(paramLabel = "PLAN", description = "Store plan, a JSON file; see 'wardon schema'.")
-    private Path plan = Path.of("");
-
-    @Option(
-            names = "--chamber",
-            paramLabel = "ID",
-            required = true,
-            description = "Chamber of the plan.")
-    private String chamber = "";
+    @Mixin private ChamberQuestion asked = new ChamberQuestion();
 
     @Option(
             names = "--at",
@@ -51,27 +39,19 @@ final class Why implements Callable<Integer> {
     @Option(names = "--lot", paramLabel = "ID", description = "Tell this lot of the chamber too.")
     private @Nullable String lot;
 
-    @Option(names = "--json", description = "Answer in JSON.")
-    private boolean json;
-
     @Override
     public Integer call() {
         try (ReferenceBook book = shared.book()) {
             WhyAnswer answer =
                     new WhyAdvice(book, shared.words())
                             .ask(
-                                    PlanReader.read(plan, shared.lookups(book)),
+                                    asked.plan(shared, book),
                                     new WhyAdvice.Question(
-                                            chamber,
+                                            asked.chamber(),
                                             at,
                                             Optional.ofNullable(face),
                                             Optional.ofNullable(lot)));
-            Terminal.ofProcess()
-                    .out()
-                    .print(
-                            json
-                                    ? AnswerWriter.json(answer)
-                                    : new WhyPage(shared.words()).of(answer));
+            asked.tell(answer, () -> new WhyPage(shared.words()).of(answer));
         }
         return Exit.OK;
     }

@@ -13,7 +13,6 @@ import org.wardon.errors.BadInput;
 import org.wardon.produce.Commodity;
 import org.wardon.produce.MixingGroup;
 import org.wardon.produce.NamedFact;
-import org.wardon.produce.PackageClass;
 import org.wardon.produce.PackageKind;
 import org.wardon.produce.Source;
 import org.wardon.produce.rows.EthyleneStorageRow;
@@ -302,15 +301,6 @@ public final class ReferenceBook implements AutoCloseable {
      */
     public Map<String, String> packagesWithoutTime() {
         return Map.copyOf(packages.get().withoutTime());
-    }
-
-    /**
-     * Returns the classes of package.
-     *
-     * @return by id
-     */
-    public Map<String, PackageClass> packageClasses() {
-        return Map.copyOf(packages.get().classes());
     }
 
     private static <T> T known(Map<String, T> values, String id, String what) {

@@ -223,16 +223,6 @@ public final class Workable {
     }
 
     /**
-     * Returns the share of draws chilled by the end of the market leg.
-     *
-     * @param temperatureC temperature, °C
-     * @return 0 to 1
-     */
-    public double chilledShare(double temperatureC) {
-        return chilled[Settings.nearestTemperature(temperatureC)];
-    }
-
-    /**
      * Returns the lot and its days.
      *
      * @return the wish

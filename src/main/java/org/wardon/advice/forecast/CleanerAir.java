@@ -9,6 +9,7 @@ import java.util.Optional;
 import java.util.Set;
 import java.util.TreeSet;
 import java.util.stream.Collectors;
+import org.wardon.advice.Ranges;
 import org.wardon.air.Timeline;
 import org.wardon.files.forecast.ChamberForecast;
 import org.wardon.heat.Course;
@@ -158,8 +159,8 @@ final class CleanerAir {
                                     Worth worth = ById.get(outcome.cleaner(), sheet.id());
                                     return new ChamberForecast.CleanerAir.OfLot(
                                             sheet.id(),
-                                            LotFigures.quantiles(worth.fresh()),
-                                            LotFigures.quantiles(worth.scrub()));
+                                            Ranges.told(worth.fresh()),
+                                            Ranges.told(worth.scrub()));
                                 })
                         .toList();
         double perHour = CHANGES_PER_HOUR * volumeM3(chamber);

@@ -2,15 +2,13 @@ package org.wardon.advice.forecast;
 
 import java.util.Optional;
 import java.util.OptionalDouble;
+import org.wardon.advice.Ranges;
 import org.wardon.air.Timeline;
 import org.wardon.files.forecast.ChillingRisk;
-import org.wardon.files.forecast.HangsOn;
 import org.wardon.files.forecast.LotForecast;
 import org.wardon.files.forecast.LotForecast.TemperatureC;
-import org.wardon.files.forecast.Quantiles;
 import org.wardon.heat.LotCourse;
 import org.wardon.keeping.Outlook;
-import org.wardon.keeping.Spread;
 import org.wardon.lots.LotHistory;
 import org.wardon.plan.ChamberPlan;
 
@@ -50,14 +48,14 @@ final class LotFigures {
                 weightLossValue(),
                 outlook.lifeUsedPct(),
                 outlook.restsOn().word(),
-                outlook.greenLeft().map(LotFigures::quantiles),
-                outlook.edibleLeft().map(LotFigures::quantiles),
-                outlook.ripeFrom().map(LotFigures::quantiles),
+                outlook.greenLeft().map(Ranges::told),
+                outlook.edibleLeft().map(Ranges::told),
+                outlook.ripeFrom().map(Ranges::told),
                 RipeWanted.of(sheet, outcome).flatMap(RipeWanted::figures),
-                quantiles(outlook.daysLeft()),
-                outlook.hangsOn().map(LotFigures::hangsOn),
-                quantiles(fates.daysLeftWithout(fromS)),
-                quantiles(fates.daysGained(fromS)),
+                Ranges.told(outlook.daysLeft()),
+                outlook.hangsOn().map(Ranges::told),
+                Ranges.told(fates.daysLeftWithout(fromS)),
+                Ranges.told(fates.daysGained(fromS)),
                 outlook.limitedBy().word(),
                 risk(outlook),
                 outcome.model().plan().timeline().localAt(leaveBy));
@@ -111,13 +109,5 @@ final class LotFigures {
         }
         double mean = span > 0 ? sum / span : end;
         return new TemperatureC(mean, least, most, end);
-    }
-
-    private static HangsOn hangsOn(org.wardon.keeping.HangsOn most) {
-        return new HangsOn(most.range().word(), 100 * most.share());
-    }
-
-    static Quantiles quantiles(Spread spread) {
-        return new Quantiles(spread.p10(), spread.p50(), spread.p90());
     }
 }

@@ -10,13 +10,12 @@ import java.util.Optional;
 import java.util.regex.Matcher;
 import java.util.regex.Pattern;
 import java.util.stream.Stream;
+import org.wardon.advice.Ranges;
 import org.wardon.air.Timeline;
 import org.wardon.errors.BadInput;
 import org.wardon.errors.Fault;
 import org.wardon.files.forecast.ChillingRisk;
-import org.wardon.files.forecast.HangsOn;
 import org.wardon.files.forecast.KeepAnswer;
-import org.wardon.files.forecast.Quantiles;
 import org.wardon.files.forecast.RipeOn;
 import org.wardon.files.readings.HistoryCsv;
 import org.wardon.files.readings.LoggedHistory;
@@ -30,7 +29,6 @@ import org.wardon.keeping.KnownLife;
 import org.wardon.keeping.LotAtDoor;
 import org.wardon.keeping.Outlook;
 import org.wardon.keeping.Purpose;
-import org.wardon.keeping.Spread;
 import org.wardon.lots.ClassValues;
 import org.wardon.lots.LotHistory;
 import org.wardon.produce.Commodity;
@@ -286,22 +284,18 @@ public final class KeepingAdvice {
                         .map(
                                 e ->
                                         new KeepAnswer.Mechanism(
-                                                e.getKey().word(), quantiles(e.getValue())))
+                                                e.getKey().word(), Ranges.told(e.getValue())))
                         .toList();
         return new KeepAnswer(
                 commodity.id(),
-                quantiles(outlook.daysLeft()),
-                outlook.hangsOn().map(most -> new HangsOn(most.range().word(), 100 * most.share())),
+                Ranges.told(outlook.daysLeft()),
+                outlook.hangsOn().map(Ranges::told),
                 usedPct,
                 outlook.limitedBy().word(),
                 new ChillingRisk(outlook.chilling().probability(), outlook.chilling().safeDays()),
                 mechanisms,
-                outlook.ripeFrom().map(KeepingAdvice::quantiles),
-                outlook.edibleLeft().map(KeepingAdvice::quantiles),
+                outlook.ripeFrom().map(Ranges::told),
+                outlook.edibleLeft().map(Ranges::told),
                 ripe);
-    }
-
-    private static Quantiles quantiles(Spread spread) {
-        return new Quantiles(spread.p10(), spread.p50(), spread.p90());
     }
 }

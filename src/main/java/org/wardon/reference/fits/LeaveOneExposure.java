@@ -51,7 +51,7 @@ final class LeaveOneExposure {
             List<ChillingExposure> rows = commodity.keeping().exposures();
             for (int i = 0; i < rows.size(); i++) {
                 ChillingExposure row = rows.get(i);
-                if (row.kind().equals("safe") || !row.visible().equals("no")) {
+                if (counts(row)) {
                     List<ChillingExposure> rest = new ArrayList<>(rows);
                     rest.remove(i);
                     judge(commodity, row, rest, all);
@@ -59,6 +59,11 @@ final class LeaveOneExposure {
             }
         }
         return all;
+    }
+
+    /** Whether an exposure says on which side it lies: safe, or injured so that it is seen. */
+    static boolean counts(ChillingExposure row) {
+        return row.kind().equals("safe") || !row.visible().equals("no");
     }
 
     private static void judge(

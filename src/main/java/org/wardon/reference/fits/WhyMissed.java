@@ -43,16 +43,12 @@ final class WhyMissed {
     private static String against(Judged one) {
         ChillingExposure row = one.row();
         return one.commodity().keeping().exposures().stream()
-                .filter(other -> !other.equals(row) && counts(other))
+                .filter(other -> !other.equals(row) && LeaveOneExposure.counts(other))
                 .filter(other -> Math.abs(other.temperatureC() - row.temperatureC()) < NEAR_K)
                 .filter(other -> opposite(row, other))
                 .map(other -> other.days().sourceId())
                 .findFirst()
                 .orElse("");
-    }
-
-    private static boolean counts(ChillingExposure row) {
-        return row.kind().equals("safe") || !row.visible().equals("no");
     }
 
     /** Injured in less time than another was safe, or safe for longer than another took. */

@@ -51,13 +51,4 @@ public record Effort(
                 ? new Effort(100, 15, 60, 2_000, 100, 0.005)
                 : new Effort(60, 15, 0, 1_000, 400, 0.03);
     }
-
-    /**
-     * Returns the work for one lot that stands at the door: an answer at once.
-     *
-     * @return the effort
-     */
-    public static Effort atTheDoor() {
-        return new Effort(40, 10, 40, 1_000, 5, 0.001);
-    }
 }
