@@ -95,6 +95,20 @@ public final class KeepingModel {
     }
 
     /**
+     * Follows several histories, each by itself; quicker than one after the other.
+     *
+     * @param histories what the lot may go through from its arrival on
+     * @param draw the draw
+     * @return a fate a history
+     */
+    public List<Fate> follow(List<LotHistory> histories, Draw draw) {
+        Paces paces = paces(draw);
+        return histories.stream()
+                .map(one -> new Following(paces, one, Window.lastDay(one)).fate())
+                .toList();
+    }
+
+    /**
      * Returns the pace of each mechanism in a draw.
      *
      * @param draw the draw

@@ -60,7 +60,7 @@ public record Outlook(
             each.put(mechanism, spread(draws, fate -> fate.daysLeft(mechanism, fromS)));
         }
         return new Outlook(
-                spread(draws, fate -> fate.daysLeft(fromS)),
+                daysLeft(draws, fromS),
                 100 * plain.usedAt(endS),
                 plain.limitedBy(),
                 chilling(draws, fromS, leavesS),
@@ -78,10 +78,30 @@ public record Outlook(
     private static ChillingRisk chilling(List<Fate> draws, double fromS, double leavesS) {
         double injured =
                 draws.stream().filter(fate -> fate.endS(Mechanism.CHILLING) <= leavesS).count();
+        return new ChillingRisk(injured / draws.size(), safeDays(draws, fromS));
+    }
+
+    /**
+     * Returns the days left over the draws.
+     *
+     * @param draws fates of the draws, at least one
+     * @param fromS days left count from here, s
+     * @return days, 0 to 730
+     */
+    public static Spread daysLeft(List<Fate> draws, double fromS) {
+        return spread(draws, fate -> fate.daysLeft(fromS));
+    }
+
+    /**
+     * Returns the days until one lot in ten is injured by cold.
+     *
+     * @param draws fates of the draws, at least one
+     * @param fromS days count from here, s
+     * @return days; empty where there is no such injury
+     */
+    public static OptionalDouble safeDays(List<Fate> draws, double fromS) {
         double safe = spread(draws, fate -> fate.daysLeft(Mechanism.CHILLING, fromS)).p10();
-        return new ChillingRisk(
-                injured / draws.size(),
-                safe < Fate.MOST_DAYS ? OptionalDouble.of(safe) : OptionalDouble.empty());
+        return safe < Fate.MOST_DAYS ? OptionalDouble.of(safe) : OptionalDouble.empty();
     }
 
     private static Optional<Spread> clock(

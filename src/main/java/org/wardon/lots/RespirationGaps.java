@@ -87,6 +87,17 @@ final class RespirationGaps {
         return filling;
     }
 
+    /** Whether a row is one of those that other sources gave. */
+    boolean filledBy(RespirationRow row) {
+        Fact filled = filling.get(row.temperatureC());
+        Fact rate = row.wattsPerTonne();
+        return filled != null
+                && rate.evidence() == Evidence.SEEN
+                && filled.sourceId().equals(rate.sourceId())
+                && filled.lowest() <= rate.lowest()
+                && filled.highest() >= rate.highest();
+    }
+
     /** Sources with a seen rate at a temperature that stayed open because they disagree. */
     Set<String> refused() {
         return refused;

@@ -70,6 +70,25 @@ public final class Respirations {
     }
 
     /**
+     * Returns the printed rows that the curve goes through.
+     *
+     * @param commodity the commodity
+     * @param ripeness how far it has come
+     * @return the rows chosen and those that fill their gaps; none where it rests on a power law or
+     *     on the class
+     */
+    public static List<RespirationRow> taken(Commodity commodity, Ripeness ripeness) {
+        List<RespirationRow> usable =
+                usable(commodity).filter(row -> !row.state().equals(UNCURED)).toList();
+        List<RespirationRow> rows = chosen(usable, states(ripeness));
+        if (rows.isEmpty()) {
+            return rows;
+        }
+        RespirationGaps gaps = RespirationGaps.filled(rows, usable);
+        return usable.stream().filter(row -> rows.contains(row) || gaps.filledBy(row)).toList();
+    }
+
+    /**
      * Returns the curve of a root or bulb that has not been cured.
      *
      * @param commodity the commodity

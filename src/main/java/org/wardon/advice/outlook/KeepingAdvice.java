@@ -42,7 +42,7 @@ public final class KeepingAdvice {
     public static final int DRAWS = 128;
 
     /** Seed of the draws: a question without a plan always gets the same. */
-    static final long SEED = 1;
+    public static final long SEED = 1;
 
     /** Humidity at the produce where neither print nor person gives one (assumption). */
     private static final double USUAL_HUMIDITY = 0.9;
@@ -220,7 +220,13 @@ public final class KeepingAdvice {
                 Stream.concat(notes.stream(), read.notes().stream()).toList());
     }
 
-    private static double handbookHumidity(Commodity commodity) {
+    /**
+     * Returns the humidity a lot is taken to be in where nobody says.
+     *
+     * @param commodity the commodity
+     * @return the handbook's, else 0.9; 0 to 1
+     */
+    public static double handbookHumidity(Commodity commodity) {
         return commodity
                 .needs()
                 .humidityPct()
