@@ -1,7 +1,9 @@
 package org.wardon.sharing;
 
 import java.util.ArrayList;
+import java.util.HashMap;
 import java.util.List;
+import java.util.Map;
 import org.wardon.air.Timeline;
 import org.wardon.keeping.Draw;
 import org.wardon.keeping.Fate;
@@ -17,6 +19,7 @@ import org.wardon.produce.Reason.Argument;
 public final class ChamberSharing {
     private final List<Together> lots;
     private final List<Reason> reasons = new ArrayList<>();
+    private final Map<String, Verdict> each = new HashMap<>();
     private Verdict verdict = Verdict.GOOD;
 
     private ChamberSharing(List<Together> lots) {
@@ -31,12 +34,16 @@ public final class ChamberSharing {
      */
     public static ChamberVerdict of(List<Together> lots) {
         ChamberSharing sharing = new ChamberSharing(List.copyOf(lots));
+        Verdict all = Verdict.GOOD;
         for (Together lot : sharing.lots) {
+            sharing.verdict = Verdict.GOOD;
             sharing.lasts(lot);
             sharing.chilled(lot);
             sharing.company(lot);
+            sharing.each.merge(lot.id(), sharing.verdict, Verdict::worse);
+            all = all.worse(sharing.verdict);
         }
-        return new ChamberVerdict(sharing.verdict, sharing.reasons);
+        return new ChamberVerdict(all, sharing.reasons, sharing.each);
     }
 
     private static double marketEndS(Together lot) {

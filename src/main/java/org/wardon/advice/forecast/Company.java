@@ -55,13 +55,18 @@ final class Company {
     }
 
     private Forecast.Sharing verdict(ChamberPlan chamber, List<Visit> visits) {
-        ChamberEthylene level = outcome.ethylene(chamber.id());
-        ChamberVerdict found =
-                ChamberSharing.of(visits.stream().map(visit -> together(visit, level)).toList());
+        ChamberVerdict found = together(outcome, chamber.id(), visits);
         List<Because> reasons = new ArrayList<>();
         apart(visits).forEach(reason -> reasons.add(because(reason)));
         found.reasons().forEach(reason -> reasons.add(because(reason)));
         return new Forecast.Sharing(chamber.id(), found.verdict().word(), reasons);
+    }
+
+    /** What the air of a chamber, as it was worked out, does to visits there. */
+    static ChamberVerdict together(StoreOutcome outcome, String chamberId, List<Visit> visits) {
+        ChamberEthylene level = outcome.ethylene(chamberId);
+        return ChamberSharing.of(
+                visits.stream().map(visit -> together(outcome, visit, level)).toList());
     }
 
     /** Why pairs that no setting suits do not go together; those that meet, where lots move. */
@@ -99,7 +104,7 @@ final class Company {
         return false;
     }
 
-    private Together together(Visit visit, ChamberEthylene level) {
+    private static Together together(StoreOutcome outcome, Visit visit, ChamberEthylene level) {
         LotSheet sheet = visit.sheet();
         LotHistory history = visit.within(outcome.history(visit.id()));
         return new Together(

@@ -54,6 +54,19 @@ final class Fates {
         }
     }
 
+    /**
+     * The fates of one lot in its chamber in one draw.
+     *
+     * @param staying staying for good
+     * @param sold leaving as planned, market leg included
+     */
+    record Two(Fate staying, Fate sold) {
+        /** The same ends without the courses to them. */
+        Two brief() {
+            return new Two(staying.brief(), sold.brief());
+        }
+    }
+
     /** Ethylene of all chambers in a draw, and with it the completed histories of the lots. */
     StoreEthylene ethylene(Map<String, Course> courses, Draw draw) {
         return ethylene(courses, draw, true, CleanerAir.More.NOTHING);
@@ -105,9 +118,19 @@ final class Fates {
     }
 
     private Three three(LotSheet sheet, LotHistory history, LotHistory outside, Draw draw) {
+        Two inside = inside(sheet, history, draw);
+        return new Three(inside.staying(), inside.sold(), sheet.model().follow(outside, draw));
+    }
+
+    /** Follows a lot in its chamber alone. */
+    Two inside(LotSheet sheet, LotHistory history, Draw draw) {
         Fate staying = sheet.model().follow(history, draw, beyond(sheet, history));
-        Fate alone = sheet.model().follow(outside, draw);
-        return new Three(staying, sold(sheet, history, staying, draw), alone);
+        return new Two(staying, sold(sheet, history, staying, draw));
+    }
+
+    /** Follows a lot without a chamber in one draw to a time. */
+    Fate outside(LotSheet sheet, Draw draw, double untilS) {
+        return sheet.model().follow(clean(model.without(sheet, draw, untilS).history()), draw);
     }
 
     /** Days left of a lot staying in its chamber for good. */

@@ -56,8 +56,9 @@ public final class ForecastAdvice {
      *
      * @param model the store
      * @param placed what was placed where
+     * @param lots makes the sheets of its lots, and of lots that come to it
      */
-    record Prepared(StoreModel model, List<Caution> placed) {
+    record Prepared(StoreModel model, List<Caution> placed, LotSheets lots) {
         Prepared {
             placed = List.copyOf(placed);
         }
@@ -69,14 +70,11 @@ public final class ForecastAdvice {
                         asked.weatherSource().weather(),
                         asked.durationS(),
                         StoreRun.MOST_BEYOND_DAYS);
-        StoreModel open = model(asked, weather);
+        LotSheets lots = new LotSheets(asked, weather, book);
+        StoreModel open = new StoreModel(asked, weather, lots.all());
         SimplePlacing.Placed placed = new SimplePlacing(open).place();
         StoreModel model = placed.told().isEmpty() ? open : open.placed(placed.plan());
-        return new Prepared(model, placed.told());
-    }
-
-    private StoreModel model(StorePlan plan, Weather weather) {
-        return new StoreModel(plan, weather, new LotSheets(plan, weather, book).all());
+        return new Prepared(model, placed.told(), lots);
     }
 
     private StoreAdvice together(StoreOutcome outcome, List<Caution> placed) {

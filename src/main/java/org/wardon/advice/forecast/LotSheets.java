@@ -56,7 +56,8 @@ final class LotSheets {
         return plan.lots().parallelStream().map(this::sheet).toList();
     }
 
-    private LotSheet sheet(LotPlan lot) {
+    /** The sheet of a lot, whether the plan has it already or not. */
+    LotSheet sheet(LotPlan lot) {
         Commodity crop = book.get(lot.commodity());
         Optional<Variants.Chosen> chosen = lot.variant().map(id -> Variants.choose(crop, id));
         Commodity commodity = chosen.map(Variants.Chosen::commodity).orElse(crop);

@@ -56,8 +56,8 @@ final class Settling {
         chambers.replaceAll((id, at) -> last);
     }
 
-    private static double withoutS(
-            StoreModel model, LotSheet sheet, double horizonS, double lastS) {
+    /** How far a lot without a chamber is to be followed, s. */
+    static double withoutS(StoreModel model, LotSheet sheet, double horizonS, double lastS) {
         double atS = Math.max(horizonS, sheet.clock().hereFromS() + 2 * Timeline.DAY_S);
         LotHistory outside = model.without(sheet, Draw.MEDIAN, lastS).history();
         while (atS < lastS && !settled(outside, atS)) {
@@ -77,8 +77,7 @@ final class Settling {
     }
 
     /** Whether every lot's daily mean has come to rest a day after the last outage. */
-    private static boolean settled(
-            Collection<LotCourse> lots, List<Outage> outages, double durationS) {
+    static boolean settled(Collection<LotCourse> lots, List<Outage> outages, double durationS) {
         for (Outage outage : outages) {
             if (outage.startS() < durationS && outage.endS() > durationS - Timeline.DAY_S) {
                 return false;

@@ -1,5 +1,7 @@
 package org.wardon.advice.forecast;
 
+import static java.util.stream.Collectors.toSet;
+
 import java.time.LocalDateTime;
 import java.util.ArrayList;
 import java.util.HashMap;
@@ -8,6 +10,8 @@ import java.util.List;
 import java.util.Map;
 import java.util.Optional;
 import java.util.OptionalDouble;
+import java.util.Set;
+import java.util.TreeSet;
 import java.util.concurrent.ConcurrentHashMap;
 import java.util.function.ToDoubleFunction;
 import org.wardon.air.Timeline;
@@ -54,14 +58,25 @@ final class StoreModel {
     private final Timeline timeline;
     private final AirSeries withoutAir;
     private final AirSeries sketchedAir;
-    private final Map<String, Start> warmed = new ConcurrentHashMap<>();
-    private final Map<Double, Surroundings> around = new ConcurrentHashMap<>();
+    private final Map<String, Start> warmed;
+    private final Map<Double, Surroundings> around;
 
     StoreModel(StorePlan plan, Weather weather, List<LotSheet> sheets) {
+        this(plan, weather, sheets, new ConcurrentHashMap<>(), new ConcurrentHashMap<>());
+    }
+
+    private StoreModel(
+            StorePlan plan,
+            Weather weather,
+            List<LotSheet> sheets,
+            Map<String, Start> warmed,
+            Map<Double, Surroundings> around) {
         this.plan = plan;
         this.weather = weather;
         this.sheets = List.copyOf(sheets);
         this.timeline = plan.timeline();
+        this.warmed = warmed;
+        this.around = around;
         if (plan.without() instanceof WithoutChamber.Steady steady) {
             withoutAir = AirSeries.steady(steady.temperatureC(), steady.humidityPct() / 100);
             sketchedAir = withoutAir;
@@ -79,6 +94,15 @@ final class StoreModel {
                 otherwise,
                 weather,
                 sheets.stream().map(sheet -> sheet.planned(ById.get(lots, sheet.id()))).toList());
+    }
+
+    /** The same store with one more lot; chambers are warmed before any lot, so for all alike. */
+    StoreModel with(LotSheet more) {
+        List<LotPlan> lots = new ArrayList<>(plan.lots());
+        lots.add(more.plan());
+        List<LotSheet> all = new ArrayList<>(sheets);
+        all.add(more);
+        return new StoreModel(plan.withLots(lots), weather, all, warmed, around);
     }
 
     StorePlan plan() {
@@ -131,7 +155,8 @@ final class StoreModel {
         return run.withStays(run.stays().stream().map(stay -> known(stay, plain)).toList());
     }
 
-    private Map<String, AirSeries> agreedAir(double durationS) {
+    /** Air of all chambers as their neighbours feel it, handed on until it agrees. */
+    Map<String, AirSeries> agreedAir(double durationS) {
         Map<String, AirSeries> air = startAir();
         boolean coupled = plan.chambers().stream().anyMatch(StoreModel::hasNeighbour);
         for (int pass = 0; coupled && pass < MOST_PASSES; pass++) {
@@ -158,6 +183,29 @@ final class StoreModel {
      */
     Map<String, Course> drawn(Draw draw, ToDoubleFunction<String> endS, Map<String, Course> plain) {
         return pass(draw, endS, airOf(plain), DoorMode.SKETCHED, ControlMode.MODULATING);
+    }
+
+    /** Runs some chambers in one draw with averaged doors, in air of neighbours that is there. */
+    Map<String, Course> drawn(
+            Set<String> chambers, Draw draw, double endS, Map<String, AirSeries> neighbours) {
+        return pass(
+                chambers, draw, id -> endS, neighbours, DoorMode.SKETCHED, ControlMode.MODULATING);
+    }
+
+    /** A chamber with all that lots are carried to it from, or from it to, near and far. */
+    Set<String> linked(String chamberId) {
+        Set<String> linked = new TreeSet<>(Set.of(chamberId));
+        boolean grown = true;
+        while (grown) {
+            grown = false;
+            for (LotSheet sheet : sheets) {
+                List<String> where = sheet.visits().stream().map(Visit::chamber).toList();
+                if (where.stream().anyMatch(linked::contains)) {
+                    grown |= linked.addAll(where);
+                }
+            }
+        }
+        return linked;
     }
 
     /** Runs all chambers with averaged doors, each neighbour taken to stand at its setting. */
@@ -244,8 +292,20 @@ final class StoreModel {
             Map<String, AirSeries> air,
             DoorMode door,
             ControlMode control) {
+        Set<String> all = plan.chambers().stream().map(ChamberPlan::id).collect(toSet());
+        return pass(all, draw, endS, air, door, control);
+    }
+
+    private Map<String, Course> pass(
+            Set<String> chambers,
+            Draw draw,
+            ToDoubleFunction<String> endS,
+            Map<String, AirSeries> air,
+            DoorMode door,
+            ControlMode control) {
         List<ChamberRun> runs =
                 plan.chambers().stream()
+                        .filter(chamber -> chambers.contains(chamber.id()))
                         .map(chamber -> run(chamber, draw, endS.applyAsDouble(chamber.id()), air))
                         .map(run -> run.withDoorMode(door).withControlMode(control))
                         .map(run -> door == DoorMode.PULSES ? run : Averaged.of(run))
