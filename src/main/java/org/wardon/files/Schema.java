@@ -8,6 +8,8 @@ import java.io.UncheckedIOException;
 import org.wardon.files.json.Faults;
 import org.wardon.files.json.Json;
 import org.wardon.files.json.JsonText;
+import org.wardon.files.json.Shape;
+import org.wardon.files.json.Shapes;
 
 /** The JSON Schema of a store plan, as shipped with the program. */
 public final class Schema {
@@ -29,6 +31,15 @@ public final class Schema {
         } catch (IOException e) {
             throw new UncheckedIOException(RESOURCE + " cannot be read from the program", e);
         }
+    }
+
+    /**
+     * Returns what a plan may hold, for a form.
+     *
+     * @return the shape of the whole plan
+     */
+    public static Shape shape() {
+        return Shapes.of(tree());
     }
 
     static Json tree() {

@@ -35,6 +35,30 @@ public record Part(String path, Optional<Json> json) {
     }
 
     /**
+     * Returns the place a path leads to from here.
+     *
+     * @param way the path, from here
+     * @return the place, there or not
+     */
+    public Part at(JsonPath way) {
+        Part here = this;
+        for (JsonPath.Step step : way.steps()) {
+            here =
+                    step instanceof JsonPath.Item item
+                            ? here.item(item.index())
+                            : here.at(((JsonPath.Member) step).name());
+        }
+        return here;
+    }
+
+    private Part item(int index) {
+        List<Part> items = items();
+        return index < items.size()
+                ? items.get(index)
+                : new Part(path + "[" + index + "]", Optional.empty());
+    }
+
+    /**
      * Returns whether anything stands there.
      *
      * @return true if so
