@@ -207,7 +207,8 @@ public final class JsonEdit {
      */
     public static String quoted(String plain) {
         StringBuilder json = new StringBuilder("\"");
-        for (char c : plain.toCharArray()) {
+        for (int i = 0; i < plain.length(); i++) {
+            char c = plain.charAt(i);
             if (c == '"' || c == '\\') {
                 json.append('\\').append(c);
             } else if (c < ' ') {

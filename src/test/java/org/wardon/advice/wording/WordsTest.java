@@ -59,6 +59,8 @@ class WordsTest {
                     "verdict",
                     "why",
                     "section",
+                    "crop",
+                    "face",
                     "within",
                     "height",
                     "beside",
