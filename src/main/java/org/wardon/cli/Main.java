@@ -36,6 +36,7 @@ public final class Main implements Runnable {
     private static final List<Class<?>> VERBS =
             List.of(
                     Advise.class,
+                    Receive.class,
                     Keep.class,
                     Share.class,
                     Look.class,

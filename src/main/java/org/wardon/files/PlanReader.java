@@ -31,9 +31,20 @@ public final class PlanReader {
      * @throws BadInput with every fault
      */
     public static StorePlan read(Path file, Lookups lookups) {
-        String shown = file.toString();
-        Faults faults = new Faults(shown);
-        String text = TextFile.read(file, shown, LARGEST_MB);
+        return read(TextFile.read(file, file.toString(), LARGEST_MB), file, lookups);
+    }
+
+    /**
+     * Reads the text of a plan and the weather it names.
+     *
+     * @param text the plan
+     * @param file where it stands or is to stand, for files it names and for messages
+     * @param lookups the ids of the tables
+     * @return the plan, with every default put in and listed
+     * @throws BadInput with every fault
+     */
+    public static StorePlan read(String text, Path file, Lookups lookups) {
+        Faults faults = new Faults(file.toString());
         Optional<Json> json = JsonText.read(text, faults);
         if (json.isPresent()) {
             new SchemaCheck(Schema.tree(), faults).check(json.get());

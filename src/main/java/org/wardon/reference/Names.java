@@ -1,30 +1,42 @@
 package org.wardon.reference;
 
+import java.text.Normalizer;
+import java.util.ArrayList;
 import java.util.HashMap;
 import java.util.LinkedHashMap;
 import java.util.List;
 import java.util.Locale;
 import java.util.Map;
 import java.util.Optional;
+import org.wardon.reference.NameMatch.How;
 
 /** Finds a commodity by what people call it. */
 final class Names {
     private static final int SUGGESTIONS = 4;
 
     private final Map<String, String> idOf = new LinkedHashMap<>();
+    private final List<NameSearch.Known> known = new ArrayList<>();
+    private final NameSearch search;
 
     Names(ReferenceDatabase database) {
         read(database, "select commodity_id as name, commodity_id from commodities");
         read(database, "select alias as name, commodity_id from aliases");
         read(database, "select common_name as name, commodity_id from commodities");
         readScientific(database);
+        search = new NameSearch(known);
     }
 
     private void read(ReferenceDatabase database, String sql) {
         database.list(
                         sql + " order by line",
                         row -> List.of(row.text("name"), row.text("commodity_id")))
-                .forEach(pair -> idOf.putIfAbsent(plain(pair.get(0)), pair.get(1)));
+                .forEach(pair -> know(pair.get(0), pair.get(1)));
+    }
+
+    private void know(String name, String id) {
+        if (idOf.putIfAbsent(plain(name), id) == null) {
+            known.add(new NameSearch.Known(plain(name), name, id));
+        }
     }
 
     /** A botanical name leads to a commodity only where no other shares it. */
@@ -42,7 +54,7 @@ final class Names {
         single.forEach(
                 (name, id) -> {
                     if (!id.isEmpty()) {
-                        idOf.putIfAbsent(name, id);
+                        know(name, id);
                     }
                 });
     }
@@ -54,32 +66,32 @@ final class Names {
     }
 
     /**
-     * Returns the ids whose names come nearest to a name that is misspelt or too short, nearest
-     * first; a whole word of a name, such as {@code pepper}, counts as one slip.
+     * Returns the ids whose names come nearest to a name that is misspelt or too short, surest
+     * first: of the misspelt ones those with the fewest slips.
      */
     List<String> nearest(String name) {
+        List<NameMatch> found = search(name);
+        List<NameMatch> sure =
+                found.stream().filter(match -> match.how().compareTo(How.SLIP) < 0).toList();
+        List<NameMatch> told = sure.isEmpty() ? fewestSlips(name, found) : sure;
+        return told.stream().limit(SUGGESTIONS).map(NameMatch::id).toList();
+    }
+
+    private static List<NameMatch> fewestSlips(String name, List<NameMatch> found) {
         String plain = plain(name);
-        int reach = Math.max(2, plain.length() / 3);
-        Map<String, Integer> slipsTo = new HashMap<>();
-        idOf.forEach(
-                (known, id) -> {
-                    int slips = hasWord(known, plain) ? 1 : EditDistance.between(plain, known);
-                    if (slips <= reach) {
-                        slipsTo.merge(id, slips, Math::min);
-                    }
-                });
-        return slipsTo.entrySet().stream()
-                .sorted(
-                        Map.Entry.<String, Integer>comparingByValue()
-                                .thenComparing(Map.Entry.comparingByKey()))
-                .limit(SUGGESTIONS)
-                .map(Map.Entry::getKey)
+        List<NameMatch> slips = found.stream().filter(match -> match.how() == How.SLIP).toList();
+        if (slips.isEmpty()) {
+            return found;
+        }
+        int least = EditDistance.between(plain, plain(slips.get(0).name()));
+        return slips.stream()
+                .filter(match -> EditDistance.between(plain, plain(match.name())) == least)
                 .toList();
     }
 
-    private static boolean hasWord(String known, String plain) {
-        return singulars(plain).stream()
-                .anyMatch(word -> (" " + known + " ").contains(" " + word + " "));
+    /** Returns all commodities that a text may mean, surest first. */
+    List<NameMatch> search(String text) {
+        return search.find(singulars(plain(text)));
     }
 
     private static List<String> singulars(String plain) {
@@ -98,7 +110,9 @@ final class Names {
     }
 
     private static String plain(String name) {
-        return name.strip()
+        return Normalizer.normalize(name, Normalizer.Form.NFD)
+                .replaceAll("\\p{M}", "")
+                .strip()
                 .toLowerCase(Locale.ROOT)
                 .replace('’', '\'')
                 .replaceAll("[-_,()\\s]+", " ")

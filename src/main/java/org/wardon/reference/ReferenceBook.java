@@ -150,6 +150,17 @@ public final class ReferenceBook implements AutoCloseable {
         return names.get().nearest(name);
     }
 
+    /**
+     * Searches the names of all commodities: ids, common, other and botanical names; case, accents,
+     * hyphens and the plural do not matter.
+     *
+     * @param text what was typed, whole, begun or misspelt
+     * @return what it may mean with the name met and how, surest first; none for a blank text
+     */
+    public List<NameMatch> search(String text) {
+        return names.get().search(text);
+    }
+
     private Optional<Commodity> byId(String id) {
         Commodity known = read.get(id);
         if (known != null) {

@@ -2,11 +2,13 @@ package org.wardon.sharing;
 
 import java.util.ArrayList;
 import java.util.List;
+import java.util.Optional;
 import java.util.OptionalDouble;
 import org.wardon.keeping.Draw;
 import org.wardon.keeping.KeepingModel;
 import org.wardon.keeping.Mechanism;
 import org.wardon.keeping.Paces;
+import org.wardon.keeping.Purpose;
 import org.wardon.keeping.ethylene.Response;
 import org.wardon.keeping.ethylene.Stage;
 import org.wardon.produce.Reason;
@@ -75,8 +77,10 @@ final class Conflicts {
             return;
         }
         if (ppm > trigger.getAsDouble() && atC >= model.lowestSafeC()) {
+            // Of fruit that is to be sold ripe, only the days that are lost count.
+            boolean ripe = taker.lot().door().purpose().equals(Optional.of(Purpose.SELL_RIPE));
             say(
-                    Verdict.NO,
+                    ripe ? Verdict.TOLERABLE : Verdict.NO,
                     reason(
                             "ethylene-starts-ripening",
                             taker.lot().id(),

@@ -311,7 +311,7 @@ class ReceivingTest {
                         .toList();
         assertEquals(
                 Stream.of(
-                                "--commodity: 'mangoo': no commodity is called so; perhaps mango, cassava?"
+                                "--commodity: 'mangoo': no commodity is called so; perhaps mango?"
                                         + " 'look' without a name lists all commodities",
                                 "--mass: is -3; accepted: 0.1 to 500000 kg, net",
                                 "--temperature: is 80; accepted: -5 to 55 °C, measured in the flesh",
