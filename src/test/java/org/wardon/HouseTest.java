@@ -34,6 +34,12 @@ class HouseTest {
     private static final Set<String> PARTS = Set.of("enclosure", "cooling", "lots");
     private static final Set<String> MODEL = Set.of("heat", "keeping", "sharing", "plan");
 
+    /**
+     * What those who talk to people may use: desk, shelf, the plan and the ground, never a part.
+     */
+    private static final Set<String> COUNTER =
+            Set.of("errors", "air", "produce", "plan", "reference", "files", "advice");
+
     /** What each room may import besides itself; JSON, SQL and CSV are ruled below. */
     private static final Map<String, Set<String>> MAY_IMPORT =
             Map.ofEntries(
@@ -50,16 +56,9 @@ class HouseTest {
                     Map.entry("reference", union(GROUND, PARTS, MODEL)),
                     Map.entry("files", union(GROUND, PARTS, MODEL)),
                     Map.entry("advice", union(GROUND, PARTS, MODEL, Set.of("reference", "files"))),
-                    Map.entry(
-                            "cli",
-                            Set.of(
-                                    "errors",
-                                    "air",
-                                    "produce",
-                                    "plan",
-                                    "reference",
-                                    "files",
-                                    "advice")));
+                    Map.entry("logbook", union(GROUND, PARTS, MODEL, Set.of("reference", "files"))),
+                    Map.entry("web", union(COUNTER, Set.of("logbook"))),
+                    Map.entry("cli", union(COUNTER, Set.of("logbook", "web"))));
 
     private static final Set<String> PURE =
             Set.of(

@@ -44,7 +44,8 @@ public final class Main implements Runnable {
                     Section.class,
                     Size.class,
                     SchemaVerb.class,
-                    Demo.class);
+                    Demo.class,
+                    Open.class);
 
     @Spec private CommandSpec spec = CommandSpec.create();
 

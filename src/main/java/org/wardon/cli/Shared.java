@@ -45,7 +45,8 @@ final class Shared {
         return new GoneLots(folder());
     }
 
-    private Path folder() {
+    /** Folder of the keeper's own file. */
+    Path folder() {
         return StoreFolder.of(
                 Optional.ofNullable(home),
                 System.getenv(),

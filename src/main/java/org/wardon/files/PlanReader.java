@@ -44,8 +44,30 @@ public final class PlanReader {
      * @throws BadInput with every fault
      */
     public static StorePlan read(String text, Path file, Lookups lookups) {
-        Faults faults = new Faults(file.toString());
-        Optional<Json> json = JsonText.read(text, faults);
+        Given given = new Given(text, file.toString(), nameOf(file));
+        return read(given, new FilesOfFolder(file), lookups);
+    }
+
+    /**
+     * Reads a plan that is no file, with the files that belong to it.
+     *
+     * @param text text of the plan
+     * @param name its name in messages, and for people where the plan gives none
+     * @param files the files it may name
+     * @param lookups the ids of the tables
+     * @return the plan, with every default put in and listed
+     * @throws BadInput with every fault
+     */
+    public static StorePlan read(String text, String name, PlanFiles files, Lookups lookups) {
+        return read(new Given(text, name, name), files, lookups);
+    }
+
+    /** A plan's text, its name in messages and its name for people. */
+    private record Given(String text, String shown, String name) {}
+
+    private static StorePlan read(Given given, PlanFiles files, Lookups lookups) {
+        Faults faults = new Faults(given.shown);
+        Optional<Json> json = JsonText.read(given.text, faults);
         if (json.isPresent()) {
             new SchemaCheck(Schema.tree(), faults).check(json.get());
         }
@@ -53,23 +75,20 @@ public final class PlanReader {
             faults.refuseIfAny();
         }
         Part plan = Part.root(json.orElseThrow());
-        Optional<WeatherSource> weather = PlanWeather.read(plan, file, faults);
+        Optional<WeatherSource> weather = PlanWeather.read(plan, files, faults);
         new ChamberRules(plan, lookups, faults).check();
         new LotRules(plan, lookups, faults).check();
         faults.refuseIfAny();
-        return bound(plan, weather.orElseThrow(), lookups, file);
+        return bound(plan, weather.orElseThrow(), lookups, given);
     }
 
-    private static StorePlan bound(Part plan, WeatherSource weather, Lookups lookups, Path file) {
+    private static StorePlan bound(Part plan, WeatherSource weather, Lookups lookups, Given given) {
         try {
-            return new PlanBinder(plan, lookups).bind(weather, nameOf(file));
+            return new PlanBinder(plan, lookups).bind(weather, given.name);
         } catch (IllegalArgumentException e) {
             // The records hold the schema's bounds too; what slips past it still ends as a fault.
             throw new BadInput(
-                    file.toString(),
-                    "$",
-                    String.valueOf(e.getMessage()),
-                    "accepted: see the schema");
+                    given.shown, "$", String.valueOf(e.getMessage()), "accepted: see the schema");
         }
     }
 

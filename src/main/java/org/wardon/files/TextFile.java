@@ -62,7 +62,15 @@ public final class TextFile {
         }
     }
 
-    private static String decoded(byte[] bytes, String shown) {
+    /**
+     * Returns the text of bytes that came from elsewhere than a file.
+     *
+     * @param bytes the bytes
+     * @param shown their name in messages
+     * @return their text
+     * @throws BadInput where they are no UTF-8
+     */
+    public static String decoded(byte[] bytes, String shown) {
         if (bytes.length > 1 && (bytes[0] & 0xFF) >= 0xFE && (bytes[1] & 0xFF) >= 0xFE) {
             throw new BadInput(
                     shown, "", "the text is UTF-16", "accepted: UTF-8; save the file as UTF-8");

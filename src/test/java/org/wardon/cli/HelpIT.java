@@ -19,7 +19,8 @@ class HelpIT {
         String help = WardonJar.run("--help").good().out();
         for (String verb :
                 new String[] {
-                    "advise", "keep", "share", "look", "why", "section", "size", "schema", "demo"
+                    "advise", "keep", "share", "look", "why", "section", "size", "schema", "demo",
+                    "open"
                 }) {
             assertTrue(help.contains("\n  " + verb + " "), help);
         }
@@ -30,7 +31,8 @@ class HelpIT {
     @ParameterizedTest
     @ValueSource(
             strings = {
-                "advise", "keep", "share", "look", "why", "section", "size", "schema", "demo"
+                "advise", "keep", "share", "look", "why", "section", "size", "schema", "demo",
+                "open"
             })
     void everyVerbHasHelp(String verb) {
         String help = WardonJar.run(verb, "--help").good().out();

@@ -233,7 +233,10 @@ class SchemaTest {
                 Part.root(JsonText.read(plan.toString(), new Faults("plan.json")).orElseThrow());
         WeatherSource weather =
                 part.at("weather").has("steady")
-                        ? PlanWeather.read(part, Path.of("plan.json"), new Faults("x"))
+                        ? PlanWeather.read(
+                                        part,
+                                        new FilesOfFolder(Path.of("plan.json")),
+                                        new Faults("x"))
                                 .orElseThrow()
                         : new WeatherSource.Steady(20, 50);
         new PlanBinder(part, LOOKUPS).bind(weather, "plan");

@@ -194,7 +194,7 @@ class OwnValuesTest {
         BadInput refused = assertThrows(BadInput.class, () -> new OwnValues(folder).list());
         assertEquals(
                 file
-                        + ": was written by a later version of the program (99); version 2 or"
+                        + ": was written by a later version of the program (99); version 3 or"
                         + " lower; bring the program up to date",
                 refused.getMessage());
     }

@@ -48,7 +48,34 @@ public final class ForecastAdvice {
     public StoreAdvice advise(StorePlan asked, Progress progress) {
         Prepared prepared = prepare(asked);
         StoreOutcome outcome = new StoreRun(prepared.model()).run(progress);
-        return together(outcome, prepared.placed());
+        progress.at("judging", 0);
+        StoreAdvice advice = together(outcome, prepared.placed());
+        progress.at("judging", 1);
+        return advice;
+    }
+
+    /**
+     * Returns the same advice in the words of this desk, in other units perhaps; nothing is run
+     * again.
+     *
+     * @param advice advice given before
+     * @return the advice in these words
+     */
+    public StoreAdvice inTheseWords(StoreAdvice advice) {
+        StoreOutcome outcome = advice.outcome();
+        Forecast told = advice.forecast();
+        Map<String, ChamberForecast> chambers = new LinkedHashMap<>();
+        told.chambers().forEach(chamber -> chambers.put(chamber.id(), chamber));
+        Forecast forecast =
+                new Forecast(
+                        Forecast.VERSION,
+                        told.chambers(),
+                        told.value(),
+                        told.lots(),
+                        new Company(outcome, words).verdicts(),
+                        warnings(outcome, advice.placed()),
+                        new Actions(outcome, chambers, words).all());
+        return advice.told(forecast);
     }
 
     /**
@@ -100,7 +127,7 @@ public final class ForecastAdvice {
                         new Company(outcome, words).verdicts(),
                         warnings(outcome, placed),
                         new Actions(outcome, chambers, words).all());
-        return new StoreAdvice(outcome, forecast, whyNot);
+        return new StoreAdvice(outcome, forecast, whyNot, placed);
     }
 
     /** A chamber's figures, and why it does not hold where it does not. */

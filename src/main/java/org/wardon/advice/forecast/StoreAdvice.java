@@ -5,6 +5,7 @@ import java.util.List;
 import java.util.Map;
 import org.wardon.files.forecast.Forecast;
 import org.wardon.plan.StorePlan;
+import org.wardon.produce.Caution;
 import org.wardon.produce.Reason;
 
 /** The advice on a store plan: the forecast, why chambers hold or do not, the series. */
@@ -13,10 +14,27 @@ public final class StoreAdvice {
     private final Forecast forecast;
     private final Map<String, List<Reason>> whyNotHeld;
 
-    StoreAdvice(StoreOutcome outcome, Forecast forecast, Map<String, List<Reason>> whyNotHeld) {
+    private final List<Caution> placed;
+
+    StoreAdvice(
+            StoreOutcome outcome,
+            Forecast forecast,
+            Map<String, List<Reason>> whyNotHeld,
+            List<Caution> placed) {
         this.outcome = outcome;
         this.forecast = forecast;
         this.whyNotHeld = Map.copyOf(whyNotHeld);
+        this.placed = List.copyOf(placed);
+    }
+
+    /** The same advice, told in another forecast. */
+    StoreAdvice told(Forecast otherwise) {
+        return new StoreAdvice(outcome, otherwise, whyNotHeld, placed);
+    }
+
+    /** What was said on placing lots. */
+    List<Caution> placed() {
+        return placed;
     }
 
     StoreOutcome outcome() {
@@ -59,6 +77,16 @@ public final class StoreAdvice {
      */
     public double settingC(String chamberId) {
         return plan().getChamber(chamberId).setting().temperatureC();
+    }
+
+    /**
+     * Returns the air of a chamber hour by hour, beside what it is set to.
+     *
+     * @param chamberId its id
+     * @return its air to the end of the plan
+     */
+    public ChamberAir air(String chamberId) {
+        return new ChamberAir(plan().getChamber(chamberId), outcome);
     }
 
     /**

@@ -4,7 +4,6 @@ import de.siegmar.fastcsv.reader.CsvParseException;
 import de.siegmar.fastcsv.reader.CsvReader;
 import de.siegmar.fastcsv.reader.CsvRecord;
 import de.siegmar.fastcsv.reader.FieldMismatchStrategy;
-import java.nio.file.Path;
 import java.time.DateTimeException;
 import java.time.LocalDateTime;
 import java.util.ArrayList;
@@ -14,7 +13,6 @@ import java.util.List;
 import java.util.Map;
 import java.util.Optional;
 import java.util.regex.Pattern;
-import org.wardon.files.TextFile;
 import org.wardon.files.json.Faults;
 import org.wardon.files.json.Json;
 import org.wardon.files.json.Nearest;
@@ -43,8 +41,7 @@ final class ReadingsCsv {
     }
 
     /** Returns the readings, absent where anything is wrong, which the faults then hear. */
-    static Optional<Readings> read(Path file, String shown, List<Column> columns, Faults faults) {
-        String text = TextFile.read(file, shown, LARGEST_MB);
+    static Optional<Readings> read(String text, List<Column> columns, Faults faults) {
         LimitedFaults limited = new LimitedFaults(faults);
         ReadingsCsv csv = new ReadingsCsv(columns, limited);
         try {

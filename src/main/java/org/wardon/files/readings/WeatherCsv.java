@@ -7,6 +7,7 @@ import java.util.List;
 import java.util.Optional;
 import org.wardon.air.Weather;
 import org.wardon.errors.BadInput;
+import org.wardon.files.TextFile;
 import org.wardon.files.json.Faults;
 import org.wardon.plan.FilledGap;
 import org.wardon.plan.WeatherSource;
@@ -43,8 +44,24 @@ public final class WeatherCsv {
      */
     public static WeatherSource.Csv read(
             Path file, String shown, String name, LocalDateTime from, double days) {
+        return read(TextFile.read(file, shown, LARGEST_MB), shown, name, from, days);
+    }
+
+    /**
+     * Reads the weather of a run from a text.
+     *
+     * @param text text of the file
+     * @param shown its name in messages
+     * @param name its name as the plan gives it
+     * @param from local time the run starts
+     * @param days how long it is, days
+     * @return hourly weather from {@code from} to the end, and the gaps that were filled
+     * @throws BadInput with every fault, as for a file
+     */
+    public static WeatherSource.Csv read(
+            String text, String shown, String name, LocalDateTime from, double days) {
         Faults faults = new Faults(shown);
-        Optional<Readings> readings = ReadingsCsv.read(file, shown, COLUMNS, faults);
+        Optional<Readings> readings = ReadingsCsv.read(text, COLUMNS, faults);
         faults.refuseIfAny();
         Readings all = readings.orElseThrow();
         int hours = (int) Math.ceil(days * 24 - 1e-9);

@@ -1,0 +1,95 @@
+package org.wardon.web;
+
+import io.javalin.config.RoutesConfig;
+import io.javalin.http.Handler;
+import io.javalin.http.HttpResponseException;
+import java.util.function.Consumer;
+import org.wardon.errors.BadInput;
+import org.wardon.web.api.PlansApi;
+import org.wardon.web.guard.Guard;
+import org.wardon.web.guard.Refusal;
+import org.wardon.web.pages.AllChambersPage;
+import org.wardon.web.pages.Call;
+import org.wardon.web.pages.EntrancePage;
+import org.wardon.web.pages.ForecastRoutes;
+import org.wardon.web.pages.PlansPage;
+import org.wardon.web.pages.PreferencesPage;
+import org.wardon.web.pages.Press;
+import org.wardon.web.pages.StaticFiles;
+import org.wardon.web.pages.Troubles;
+import org.wardon.web.work.Workbench;
+
+/** Every route there is. Reading is GET and changes nothing a person keeps; changing is POST. */
+final class Routes {
+    private final RoutesConfig routes;
+    private final Workbench bench;
+    private final Press press;
+    private final Guard guard;
+
+    Routes(RoutesConfig routes, Workbench bench, Press press, Guard guard) {
+        this.routes = routes;
+        this.bench = bench;
+        this.press = press;
+        this.guard = guard;
+    }
+
+    void add() {
+        routes.before(guard::check);
+        frame();
+        plans();
+        forecast();
+        api();
+        troubles();
+    }
+
+    private void frame() {
+        StaticFiles files = new StaticFiles(press.assets());
+        EntrancePage entrance = new EntrancePage(guard, press);
+        PreferencesPage preferences = new PreferencesPage(press);
+        routes.get("/static/{digest}/{name}", call(files::give));
+        routes.get(Guard.ENTRANCE, call(entrance::show));
+        routes.post(Guard.ENTRANCE, call(entrance::enter));
+        routes.post("/leave", call(entrance::leave));
+        routes.get("/preferences", call(preferences::show));
+        routes.post("/preferences", call(preferences::keep));
+    }
+
+    private void plans() {
+        PlansPage plans = new PlansPage(bench, press);
+        routes.get("/plans", call(plans::show));
+        routes.post("/plans/demo", call(plans::demo));
+        routes.post("/plans/bring", call(plans::bring));
+        routes.get("/plan/{plan}/take", call(plans::take));
+        routes.post("/plan/{plan}/undo", call(plans::undo));
+        routes.post("/plan/{plan}/redo", call(plans::redo));
+        routes.post("/plan/{plan}/delete", call(plans::delete));
+    }
+
+    private void forecast() {
+        AllChambersPage chambers = new AllChambersPage(bench, press);
+        ForecastRoutes forecast = new ForecastRoutes(bench, press.words());
+        routes.get("/", call(chambers::home));
+        routes.get("/plan/{plan}", call(chambers::show));
+        routes.get("/plan/{plan}/progress", call(forecast::progress));
+        routes.get("/plan/{plan}/air/{chamber}", call(forecast::air));
+        routes.post("/plan/{plan}/forecast/cancel", call(forecast::cancel));
+        routes.post("/plan/{plan}/forecast/again", call(forecast::again));
+    }
+
+    private void api() {
+        PlansApi plans = new PlansApi(bench);
+        routes.get("/api/plans", call(plans::list));
+    }
+
+    private void troubles() {
+        Troubles troubles = new Troubles(press, System.err);
+        routes.exception(Refusal.class, troubles::refused);
+        routes.exception(BadInput.class, troubles::badInput);
+        routes.exception(HttpResponseException.class, troubles::http);
+        routes.exception(Exception.class, troubles::own);
+    }
+
+    private static Handler call(Consumer<Call> page) {
+        return http -> page.accept(new Call(http));
+    }
+}

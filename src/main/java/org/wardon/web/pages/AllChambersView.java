@@ -1,0 +1,52 @@
+package org.wardon.web.pages;
+
+import java.util.List;
+import java.util.Optional;
+import org.wardon.errors.Fault;
+
+/**
+ * All chambers of a plan.
+ *
+ * @param title name of the plan
+ * @param span days it covers, in words
+ * @param progress how far the forecast is; absent once it is there
+ * @param stopped why there is none; absent where there is one
+ * @param faults faults of the plan; empty where it can be run
+ * @param cautions what to beware of, the worst first
+ * @param actions what to do first
+ * @param chambers the chambers
+ * @param waiting lots without a chamber
+ * @param money what it is worth, in a sentence
+ * @param plan number of the plan
+ */
+public record AllChambersView(
+        String title,
+        String span,
+        Optional<ProgressView> progress,
+        Optional<String> stopped,
+        List<Fault> faults,
+        List<CautionView> cautions,
+        List<String> actions,
+        List<ChamberView> chambers,
+        List<LotCardView> waiting,
+        String money,
+        long plan) {
+    /** Copies the lists. */
+    public AllChambersView {
+        faults = List.copyOf(faults);
+        cautions = List.copyOf(cautions);
+        actions = List.copyOf(actions);
+        chambers = List.copyOf(chambers);
+        waiting = List.copyOf(waiting);
+    }
+
+    /**
+     * Returns the cautions of a level.
+     *
+     * @param level {@code danger}, {@code caution} or {@code note}
+     * @return in their order
+     */
+    public List<CautionView> of(String level) {
+        return cautions.stream().filter(caution -> caution.level().equals(level)).toList();
+    }
+}

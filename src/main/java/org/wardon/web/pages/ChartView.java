@@ -1,0 +1,10 @@
+package org.wardon.web.pages;
+
+/**
+ * A chart that a script draws from a data route, with the table behind it that everybody can read.
+ *
+ * @param title what it shows
+ * @param source path of its data, see {@link ChartData}
+ * @param table the same in numbers, perhaps by day
+ */
+public record ChartView(String title, String source, TableView table) {}

@@ -1,0 +1,68 @@
+package org.wardon.web.pages;
+
+import java.util.Optional;
+import org.wardon.logbook.KeptPlan;
+
+/**
+ * What every page has around its own: title, open plan, room, token, words and figures. Templates
+ * ask it for words.
+ *
+ * @param title title of the page
+ * @param room where in the navigation it is; absent for pages beside it
+ * @param plan the open plan
+ * @param token token of the session, for forms; blank where there is none
+ * @param preferences the person's preferences
+ * @param words the words
+ * @param assets addresses of style, script and charts
+ * @param waiting whether the page asks to be loaded again, for people without script
+ * @param leaves whether there is something to leave, a passcode having been asked
+ */
+public record Frame(
+        String title,
+        Optional<Room> room,
+        Optional<KeptPlan> plan,
+        String token,
+        Preferences preferences,
+        PageWords words,
+        Assets assets,
+        boolean waiting,
+        boolean leaves) {
+    /**
+     * Returns words.
+     *
+     * @param key a key of the words
+     * @param with what fills them
+     * @return the words
+     */
+    public String say(String key, String... with) {
+        return words.say(key, with);
+    }
+
+    /**
+     * Returns the figures.
+     *
+     * @return as the person prefers
+     */
+    public Figures figures() {
+        return new Figures(preferences);
+    }
+
+    /**
+     * Returns whether a room is the one shown.
+     *
+     * @param other a room
+     * @return true if so
+     */
+    public boolean in(Room other) {
+        return room.isPresent() && room.get() == other;
+    }
+
+    /**
+     * Returns the same frame for a page that asks to be loaded again.
+     *
+     * @return the frame
+     */
+    public Frame thatWaits() {
+        return new Frame(title, room, plan, token, preferences, words, assets, true, leaves);
+    }
+}

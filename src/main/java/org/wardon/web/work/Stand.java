@@ -1,0 +1,31 @@
+package org.wardon.web.work;
+
+import org.wardon.advice.forecast.StoreAdvice;
+
+/** How far a forecast has come. */
+public sealed interface Stand {
+    /**
+     * It is being worked out, or waits for others.
+     *
+     * @param stage what is being done, a code; {@code waiting} before it begins
+     * @param fraction done of all, 0 to 1
+     */
+    record Running(String stage, double fraction) implements Stand {}
+
+    /**
+     * It is there.
+     *
+     * @param advice the advice
+     */
+    record Ready(StoreAdvice advice) implements Stand {}
+
+    /**
+     * It could not be worked out.
+     *
+     * @param message what happened, for people
+     */
+    record Stopped(String message) implements Stand {}
+
+    /** Somebody asked to stop it. */
+    record Cancelled() implements Stand {}
+}

@@ -1,0 +1,81 @@
+// Everything works without this script; it saves waiting and draws charts.
+
+const here = document.querySelector('script[data-uplot]');
+const style = (name) => getComputedStyle(document.documentElement).getPropertyValue(name).trim();
+
+async function json(path) {
+  const answer = await fetch(path, { headers: { Accept: 'application/json' } });
+  if (!answer.ok) throw new Error(String(answer.status));
+  return answer.json();
+}
+
+// A forecast on its way: tell how far it is, then show the page.
+async function follow(section) {
+  const bar = section.querySelector('progress');
+  const stage = section.querySelector('[data-stage]');
+  for (;;) {
+    await new Promise((resolve) => setTimeout(resolve, 250));
+    let far;
+    try {
+      far = await json(section.dataset.progress);
+    } catch {
+      await new Promise((resolve) => setTimeout(resolve, 2000));
+      continue;
+    }
+    if (far.state !== 'running') break;
+    bar.value = far.percent;
+    if (stage.textContent !== far.stage) stage.textContent = far.stage;
+  }
+  location.reload();
+}
+
+// Charts are fetched when somebody opens them.
+let library;
+function charts() {
+  library ??= new Promise((resolve, reject) => {
+    const sheet = document.createElement('link');
+    sheet.rel = 'stylesheet';
+    sheet.href = here.dataset.uplotStyle;
+    const script = document.createElement('script');
+    script.src = here.dataset.uplot;
+    script.onload = () => resolve(window.uPlot);
+    script.onerror = reject;
+    document.head.append(sheet, script);
+  });
+  return library;
+}
+
+const TONES = { main: '--russet', second: '--faded', third: '--leafgreen' };
+
+async function draw(box) {
+  if (box.dataset.drawn) return;
+  box.dataset.drawn = 'yes';
+  const [UPlot, data] = await Promise.all([charts(), json(box.dataset.chart)]);
+  const font = '13px ' + style('--serif');
+  const axis = { stroke: style('--ink'), font, grid: { stroke: style('--rule'), width: 1 }, ticks: { stroke: style('--rule'), width: 1 } };
+  const levels = data.levels.map((level) => ({
+    label: level.name, stroke: style('--ink'), width: 1.5, dash: [7, 5], points: { show: false },
+  }));
+  const lines = data.lines.map((line) => ({
+    label: line.name, stroke: style(TONES[line.tone] ?? '--ink'), width: 2, points: { show: false },
+  }));
+  const options = {
+    width: box.clientWidth, height: 260, tzDate: (seconds) => UPlot.tzDate(new Date(seconds * 1000), 'Etc/UTC'),
+    scales: { x: { time: true } },
+    axes: [axis, { ...axis, label: data.unit, labelFont: font, size: 56 }],
+    series: [{}, ...lines, ...levels],
+  };
+  const values = [data.time, ...data.lines.map((line) => line.values), ...data.levels.map((level) => data.time.map(() => level.value))];
+  const chart = new UPlot(options, values, box);
+  new ResizeObserver(() => chart.setSize({ width: box.clientWidth, height: 260 })).observe(box);
+}
+
+document.querySelectorAll('[data-progress]').forEach(follow);
+document.querySelectorAll('[data-chart]').forEach((box) => {
+  const details = box.closest('details');
+  if (details && !details.open) {
+    details.addEventListener('toggle', () => details.open && draw(box), { once: true });
+  } else {
+    draw(box);
+  }
+});
