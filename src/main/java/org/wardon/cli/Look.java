@@ -78,6 +78,6 @@ final class Look implements Callable<Integer> {
         List<NamedFact> facts = book.facts(commodity.id());
         return json
                 ? AnswerWriter.json(LookAnswer.of(commodity, facts))
-                : new LookPage(book, shared.words().units().fahrenheit()).of(commodity, facts);
+                : new LookPage(book, shared.words().units()).of(commodity, facts);
     }
 }

@@ -1,6 +1,9 @@
 package org.wardon.files;
 
+import java.util.LinkedHashMap;
 import java.util.List;
+import java.util.Map;
+import java.util.NoSuchElementException;
 import java.util.Optional;
 import java.util.OptionalDouble;
 import org.wardon.enclosure.Beyond;
@@ -18,6 +21,7 @@ import org.wardon.plan.Defaults;
 /** Faces of a plan that need not be whole elsewhere. */
 public final class PlanFaces {
     private static final double MM_IN_M = 1_000;
+    private static final JsonPath BUILD_UPS = JsonPath.ROOT.then(new JsonPath.Member("buildUps"));
 
     private final Part plan;
     private final Faults faults;
@@ -52,11 +56,38 @@ public final class PlanFaces {
     /**
      * Returns how a face conducts.
      *
-     * @param path its path, such as {@code $.chambers[0].faces[2]}
+     * @param path its path, such as {@code $.chambers[0].faces[2]}; that of a build-up is told as a
+     *     wall in the shade without thermal bridges
      * @return the sheet; absent where there is no such face, or it or its layers have a fault
      */
     public Optional<FaceSheet> sheet(JsonPath path) {
-        return face(path).map(face -> sheet(face, plan.at(path.up().up())));
+        if (path.up().equals(BUILD_UPS)) {
+            return wall(plan.at(path)).map(wall -> FaceSheet.of(wall, 0, Optional.empty()));
+        }
+        return path.toString().contains("faces")
+                ? face(path).map(face -> sheet(face, plan.at(path.up().up())))
+                : Optional.empty();
+    }
+
+    private Optional<Face> wall(Part buildUp) {
+        if (!buildUp.given() || faults.at(buildUp.path())) {
+            return Optional.empty();
+        }
+        Map<String, Json> face = new LinkedHashMap<>();
+        face.put("face", new Json.Text("north"));
+        face.put("beyond", new Json.Text("shade"));
+        buildUp.at("layers").json().ifPresent(layers -> face.put("layers", layers));
+        return bound(Part.root(new Json.Obj(face)));
+    }
+
+    private Optional<Face> bound(Part part) {
+        try {
+            return Optional.of(
+                    new FaceBinder(plan.at("buildUps"), lookups, new Inputs()).bind(part));
+        } catch (IllegalArgumentException | NoSuchElementException e) {
+            // A face that is not whole has no sheet; its faults are told where the plan is read.
+            return Optional.empty();
+        }
     }
 
     /**
@@ -76,12 +107,7 @@ public final class PlanFaces {
                 || (named && !buildUps.has(part.at("buildUp").text().orElse("")))) {
             return Optional.empty();
         }
-        try {
-            return Optional.of(new FaceBinder(buildUps, lookups, new Inputs()).bind(part));
-        } catch (IllegalArgumentException | java.util.NoSuchElementException e) {
-            // A face that is not whole has no sheet; its faults are told where the plan is read.
-            return Optional.empty();
-        }
+        return bound(part);
     }
 
     private FaceSheet sheet(Face face, Part chamber) {

@@ -6,6 +6,7 @@ import io.javalin.http.HttpResponseException;
 import java.util.function.Consumer;
 import org.wardon.errors.BadInput;
 import org.wardon.web.api.PlansApi;
+import org.wardon.web.crops.CropsPage;
 import org.wardon.web.guard.Guard;
 import org.wardon.web.guard.Refusal;
 import org.wardon.web.pages.AllChambersPage;
@@ -17,6 +18,7 @@ import org.wardon.web.pages.PreferencesPage;
 import org.wardon.web.pages.Press;
 import org.wardon.web.pages.StaticFiles;
 import org.wardon.web.pages.Troubles;
+import org.wardon.web.plan.PlanEditor;
 import org.wardon.web.work.Workbench;
 
 /** Every route there is. Reading is GET and changes nothing a person keeps; changing is POST. */
@@ -38,6 +40,8 @@ final class Routes {
         frame();
         plans();
         forecast();
+        crops();
+        editor();
         api();
         troubles();
     }
@@ -74,6 +78,25 @@ final class Routes {
         routes.get("/plan/{plan}/air/{chamber}", call(forecast::air));
         routes.post("/plan/{plan}/forecast/cancel", call(forecast::cancel));
         routes.post("/plan/{plan}/forecast/again", call(forecast::again));
+    }
+
+    private void crops() {
+        CropsPage crops = new CropsPage(bench, press);
+        routes.get("/crops", call(crops::list));
+        routes.get("/crops/{crop}", call(crops::show));
+        routes.post("/crops/{crop}/own", call(crops::own));
+        routes.post("/crops/{crop}/forget", call(crops::forget));
+        routes.post("/crops/{crop}/lot", call(crops::lot));
+        routes.post("/crops/{crop}/forget-lot", call(crops::forgetLot));
+    }
+
+    private void editor() {
+        PlanEditor editor = new PlanEditor(bench, press);
+        routes.post("/plans/new", call(editor::begin));
+        routes.get("/plan/{plan}/edit", call(editor::show));
+        routes.post("/plan/{plan}/edit", call(editor::change));
+        routes.post("/plan/{plan}/edit/face", call(editor::face));
+        routes.post("/plan/{plan}/edit/weather", call(editor::weather));
     }
 
     private void api() {

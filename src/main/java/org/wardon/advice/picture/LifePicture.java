@@ -1,6 +1,7 @@
 package org.wardon.advice.picture;
 
 import java.util.List;
+import java.util.Optional;
 import java.util.Set;
 import java.util.function.UnaryOperator;
 import java.util.stream.DoubleStream;
@@ -60,8 +61,13 @@ public final class LifePicture {
 
     private String text() {
         double freezingC = sheet.life().freezingC();
-        cold(freezingC);
-        plot.zone(CropSheets.COLDEST_C, freezingC, "frost", "");
+        cold().ifPresent(
+                        zone ->
+                                plot.zone(
+                                        zone.bandLowC().orElse(freezingC),
+                                        zone.safeFromC(),
+                                        "cold"));
+        plot.zone(CropSheets.COLDEST_C, freezingC, "frost");
         plot.grid(
                 scale(units).boxed().toList(),
                 c -> String.valueOf(Math.round(units.shown(c))),
@@ -71,6 +77,7 @@ public final class LifePicture {
                 sheet.life().at().stream().filter(one -> one.temperatureC() > freezingC).toList();
         plot.band(at, LifeLine.At::temperatureC, o -> o.days().p10(), o -> o.days().p90());
         plot.line(at, LifeLine.At::temperatureC, o -> o.days().p50(), "middle");
+        cold().ifPresent(this::told);
         sheet.life().printed().forEach(this::point);
         plot.names(units.fahrenheit() ? "°F" : "°C", words.text("crop.axis-days"));
         return plot.text(words.text("crop.life-title").replace("{0}", name()));
@@ -80,19 +87,15 @@ public final class LifePicture {
         return sheet.commodity().names().get(0);
     }
 
-    private void cold(double freezingC) {
-        sheet.cold().stream()
+    private Optional<ColdZone> cold() {
+        return sheet.cold().stream()
                 .filter(zone -> zone.ripeness() == Ripeness.UNKNOWN)
-                .findFirst()
-                .ifPresent(zone -> cold(zone, freezingC));
+                .findFirst();
     }
 
-    private void cold(ColdZone zone, double freezingC) {
-        double from = zone.bandLowC().orElse(freezingC);
-        plot.zone(
-                Math.max(from, CropSheets.COLDEST_C),
+    private void told(ColdZone zone) {
+        plot.told(
                 zone.safeFromC(),
-                "cold",
                 words.text("crop.cold-below")
                         .replace("{0}", marks.apply(units.temperature(zone.safeFromC()))));
     }

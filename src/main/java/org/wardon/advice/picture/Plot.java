@@ -13,7 +13,7 @@ final class Plot {
 
     private static final double LEFT = 46;
     private static final double RIGHT = 10;
-    private static final double TOP = 12;
+    private static final double TOP = 20;
     private static final double BELOW = 44;
 
     private final double high;
@@ -78,11 +78,11 @@ final class Plot {
 
     void names(String across, String upright) {
         svg.text((LEFT + WIDTH - RIGHT) / 2, high - 10, "middle", "scale", across);
-        svg.text(4, TOP - 1, "start", "scale", upright);
+        svg.text(4, 11, "start", "scale", upright);
     }
 
     /** A strip between two temperatures, hatched so that it is seen without colour. */
-    void zone(double from, double to, String kind, String text) {
+    void zone(double from, double to, String kind) {
         double left = x(from);
         double wide = x(to) - left;
         if (wide <= 0) {
@@ -94,11 +94,14 @@ final class Plot {
         for (double at = left - (bottom() - TOP); at < left + wide; at += 9) {
             hatch(at, left, left + wide);
         }
-        if (!text.isEmpty()) {
-            svg.add(
-                    "<text class=\"told\" transform=\"translate(%s %s) rotate(-90)\">%s</text>",
-                    left + wide - 5, bottom() - 6, Svg.safe(text));
-        }
+    }
+
+    /** What a strip is, written upright along its warm edge. */
+    void told(double edge, String text) {
+        svg.add(
+                "<text class=\"upright\" text-anchor=\"end\" transform=\"translate(%s %s)"
+                        + " rotate(-90)\">%s</text>",
+                x(edge) - 5, TOP + 4, Svg.safe(text));
     }
 
     private void hatch(double at, double left, double right) {

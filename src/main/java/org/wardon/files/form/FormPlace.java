@@ -87,6 +87,23 @@ public record FormPlace(
     }
 
     /**
+     * Returns names of a group that the schema does not know.
+     *
+     * @return names as they stand in the plan
+     */
+    public List<String> strangers() {
+        if (shape instanceof Shape.Group group && json.orElse(null) instanceof Json.Obj object) {
+            return object.members().keySet().stream()
+                    .filter(member -> group.member(member).isEmpty())
+                    .toList();
+        }
+        return taken().filter(option -> option.by() == Shape.By.KIND)
+                .map(this::ofOption)
+                .map(FormPlace::strangers)
+                .orElse(List.of());
+    }
+
+    /**
      * Returns a place of a group by its name.
      *
      * @param member the name
@@ -119,7 +136,7 @@ public record FormPlace(
             return new FormPlace(
                     path.then(new JsonPath.Member(option.word())),
                     option.word(),
-                    true,
+                    now,
                     option.shape(),
                     now ? value(option.word()) : Optional.empty());
         }

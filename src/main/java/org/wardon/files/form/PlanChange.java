@@ -2,9 +2,11 @@ package org.wardon.files.form;
 
 import java.util.ArrayList;
 import java.util.Comparator;
+import java.util.HashMap;
 import java.util.List;
 import java.util.Map;
 import java.util.Optional;
+import java.util.function.Predicate;
 import java.util.stream.Collectors;
 import org.wardon.files.json.Json;
 import org.wardon.files.json.JsonEdit;
@@ -71,6 +73,51 @@ public final class PlanChange {
             }
         }
         return edit.text();
+    }
+
+    /**
+     * Returns what of it differs from what the form showed.
+     *
+     * @param text the plan the form was made of
+     * @param typed what was typed
+     * @return the rest left out
+     */
+    public Typed changed(String text, Typed typed) {
+        PlanForm form = PlanForm.of(text);
+        Map<String, String> values = new HashMap<>();
+        typed.values()
+                .forEach(
+                        (path, value) -> {
+                            if (!value.strip().equals(shownAt(form, path).strip())) {
+                                values.put(path, value);
+                            }
+                        });
+        Map<String, String> options = new HashMap<>();
+        typed.options()
+                .forEach(
+                        (path, word) -> {
+                            boolean beside = values.keySet().stream().anyMatch(inside(path));
+                            if (!word.equals(optionAt(form, path)) || beside) {
+                                options.put(path, word);
+                            }
+                        });
+        return new Typed(values, options, typed.sets());
+    }
+
+    private static Predicate<String> inside(String path) {
+        return other -> other.equals(path) || other.startsWith(path + ".");
+    }
+
+    private String shownAt(PlanForm form, String path) {
+        return JsonPath.parse(path).flatMap(form::at).map(this::shown).orElse("");
+    }
+
+    private static String optionAt(PlanForm form, String path) {
+        return JsonPath.parse(path)
+                .flatMap(form::at)
+                .flatMap(FormPlace::taken)
+                .map(Shape.Option::word)
+                .orElse("");
     }
 
     private static List<JsonPath> ordered(Iterable<String> paths) {

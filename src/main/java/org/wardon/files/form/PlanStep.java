@@ -52,15 +52,15 @@ public final class PlanStep {
      */
     public static Done take(String text, Kind kind, JsonPath path, String word) {
         JsonEdit edit = JsonEdit.of(text);
+        if (kind == Kind.REMOVE) {
+            return new Done(edit.remove(path).text(), path.up());
+        }
         Optional<FormPlace> place = PlanForm.of(text).at(path);
         if (place.isEmpty()) {
             return new Done(text, path.up());
         }
         if (kind == Kind.ADD) {
             return add(edit, place.get(), word);
-        }
-        if (kind == Kind.REMOVE) {
-            return new Done(edit.remove(path).text(), path.up());
         }
         return path.last().orElse(null) instanceof JsonPath.Item item
                 ? item(edit, kind, path.up(), item.index())

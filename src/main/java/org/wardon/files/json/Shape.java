@@ -82,8 +82,9 @@ public sealed interface Shape {
      * @param name the name
      * @param required whether it must be given
      * @param shape what it may hold
+     * @param hint what the schema says of it
      */
-    record Member(String name, boolean required, Shape shape) {}
+    record Member(String name, boolean required, Shape shape, String hint) {}
 
     /**
      * Values under ids of the person's own.
@@ -129,8 +130,9 @@ public sealed interface Shape {
      * @param word the word it is chosen by
      * @param by how the JSON tells it
      * @param shape what it holds; a {@link Fixed} where the word says it all
+     * @param hint what the schema says of it
      */
-    record Option(String word, By by, Shape shape) {}
+    record Option(String word, By by, Shape shape, String hint) {}
 
     /** How the JSON tells which option was chosen. */
     enum By {

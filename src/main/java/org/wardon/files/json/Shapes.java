@@ -78,37 +78,40 @@ public final class Shapes {
         List<String> required = rule.words("required");
         List<Shape.Member> members = new ArrayList<>();
         for (String name : rule.propertyNames()) {
-            members.add(
-                    new Shape.Member(
-                            name, required.contains(name), of(rule.property(name).orElseThrow())));
+            Rule of = rule.property(name).orElseThrow();
+            members.add(new Shape.Member(name, required.contains(name), of(of), hint(of)));
         }
         return new Shape.Group(members);
     }
 
+    private static String hint(Rule rule) {
+        return rule.word("description").orElse("");
+    }
+
     private static List<Shape.Option> byName(Rule rule) {
-        return rule.propertyNames().stream()
-                .map(
-                        name ->
-                                new Shape.Option(
-                                        name, Shape.By.NAME, of(rule.property(name).orElseThrow())))
-                .toList();
+        List<Shape.Option> options = new ArrayList<>();
+        for (String name : rule.propertyNames()) {
+            Rule of = rule.property(name).orElseThrow();
+            options.add(new Shape.Option(name, Shape.By.NAME, of(of), hint(of)));
+        }
+        return options;
     }
 
     private static Shape choice(Rule rule) {
         List<Shape.Option> options = new ArrayList<>();
         for (Rule one : rule.alternatives()) {
             if (one.kind().isPresent()) {
-                options.add(new Shape.Option(one.kind().get(), Shape.By.KIND, of(one)));
+                options.add(new Shape.Option(one.kind().get(), Shape.By.KIND, of(one), hint(one)));
             } else if (one.has("enum")) {
                 for (String word : one.words("enum")) {
                     Shape fixed = new Shape.Fixed(JsonEdit.quoted(word));
-                    options.add(new Shape.Option(word, Shape.By.WORD, fixed));
+                    options.add(new Shape.Option(word, Shape.By.WORD, fixed, ""));
                 }
             } else if (one.type().equals("object")) {
                 // A group beside words is told by its one name, whether or not it may have more.
                 options.addAll(byName(one));
             } else {
-                options.add(new Shape.Option(one.type(), Shape.By.TYPE, of(one)));
+                options.add(new Shape.Option(one.type(), Shape.By.TYPE, of(one), hint(one)));
             }
         }
         return new Shape.Choice(options);

@@ -58,6 +58,16 @@ public record Frame(
     }
 
     /**
+     * Returns the same frame under another title.
+     *
+     * @param other the title
+     * @return the frame
+     */
+    public Frame titled(String other) {
+        return new Frame(other, room, plan, token, preferences, words, assets, waiting, leaves);
+    }
+
+    /**
      * Returns the same frame for a page that asks to be loaded again.
      *
      * @return the frame

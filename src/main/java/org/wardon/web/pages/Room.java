@@ -6,6 +6,10 @@ import java.util.Locale;
 public enum Room {
     /** All chambers of a plan. */
     CHAMBERS("/plan/{plan}"),
+    /** The open plan, to be changed. */
+    PLAN("/plan/{plan}/edit"),
+    /** Crops and what is known of them. */
+    CROPS("/crops"),
     /** All kept plans. */
     PLANS("/plans");
 

@@ -13,12 +13,15 @@ import org.wardon.files.PlanReader;
 import org.wardon.logbook.KeptPlan;
 import org.wardon.logbook.KeptPlans;
 import org.wardon.logbook.PlanText;
+import org.wardon.reference.GoneLots;
+import org.wardon.reference.OwnValues;
 import org.wardon.reference.ReferenceBook;
 
 /** Everything the pages work with: kept plans, the reference book, forecasts. */
 public final class Workbench implements AutoCloseable {
     private static final int REMEMBERED = 32;
 
+    private final Path home;
     private final KeptPlans plans;
     private final Books books;
     private final Clock clock;
@@ -35,6 +38,7 @@ public final class Workbench implements AutoCloseable {
      * @param clock tells when something was changed
      */
     public Workbench(Path home, Clock clock) {
+        this.home = home;
         this.plans = new KeptPlans(home, clock);
         this.books = new Books(home);
         this.clock = clock;
@@ -65,6 +69,24 @@ public final class Workbench implements AutoCloseable {
      */
     public ReferenceBook book() {
         return books.current();
+    }
+
+    /**
+     * Returns the keeper's own values, to be changed.
+     *
+     * @return the values; the next book has the changes
+     */
+    public OwnValues ownValues() {
+        return new OwnValues(home);
+    }
+
+    /**
+     * Returns the keeper's own lots that are gone, to be added to.
+     *
+     * @return the lots; the next book has the changes
+     */
+    public GoneLots goneLots() {
+        return new GoneLots(home);
     }
 
     /**

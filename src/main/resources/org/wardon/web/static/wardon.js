@@ -79,3 +79,18 @@ document.querySelectorAll('[data-chart]').forEach((box) => {
     draw(box);
   }
 });
+
+// A face is told as it is typed.
+document.querySelectorAll('form[data-face]').forEach((form) => {
+  const sheet = form.querySelector('#face-sheet');
+  let waiting;
+  let asked = 0;
+  form.addEventListener('input', () => {
+    clearTimeout(waiting);
+    waiting = setTimeout(async () => {
+      const mine = ++asked;
+      const answer = await fetch(form.dataset.face, { method: 'POST', body: new URLSearchParams(new FormData(form)) });
+      if (answer.ok && mine === asked) sheet.innerHTML = await answer.text();
+    }, 200);
+  });
+});
