@@ -355,13 +355,17 @@ public final class PlanEditor {
         }
         Optional<FormPlace> place = form.at(page);
         String id =
-                place.flatMap(one -> one.place("id").or(() -> one.place("face")))
+                place.flatMap(one -> one.place("id"))
                         .map(FormPlace::written)
+                        .or(
+                                () ->
+                                        place.flatMap(one -> one.place("face"))
+                                                .map(one -> words.word(one.written())))
                         .orElse("");
         String key = PlanPlaces.key(form, page);
         boolean named =
-                page.last().orElse(null) instanceof JsonPath.Member m && key.equals("buildUps");
-        String last = named ? ((JsonPath.Member) page.last().orElseThrow()).name() : words.word(id);
+                page.last().orElse(null) instanceof JsonPath.Member && key.equals("buildUps");
+        String last = named ? ((JsonPath.Member) page.last().orElseThrow()).name() : id;
         String label =
                 press.words().has("edit.one-" + key)
                         ? press.words().say("edit.one-" + key)
