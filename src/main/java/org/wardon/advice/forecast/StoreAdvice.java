@@ -90,6 +90,17 @@ public final class StoreAdvice {
     }
 
     /**
+     * Returns the view of a chamber, hour by hour.
+     *
+     * @param chamberId its id
+     * @return what a page shows of it
+     * @throws java.util.NoSuchElementException where the plan has none of that id
+     */
+    public ChamberView view(String chamberId) {
+        return new ChamberView(outcome, chamberId);
+    }
+
+    /**
      * Writes the hourly series of chambers and lots.
      *
      * @param folder where to; it is made

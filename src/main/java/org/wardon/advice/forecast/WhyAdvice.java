@@ -66,11 +66,14 @@ public final class WhyAdvice {
         if (!faults.isEmpty()) {
             throw new BadInput(faults);
         }
-        StoreModel model = forecast.prepare(plan).model();
+        return told(forecast.prepare(plan).model(), asked, untilS.orElseThrow());
+    }
+
+    /** Answers a question whose chamber and hour are known to be there. */
+    static WhyAnswer told(StoreModel model, Question asked, double endS) {
         ChamberPlan chamber = model.plan().getChamber(asked.chamber());
-        double endS = untilS.orElseThrow();
         asked.lot().ifPresent(lot -> stands(model, asked.chamber(), lot, endS));
-        ChamberRun run = model.asInPlain(chamber, plan.durationS());
+        ChamberRun run = model.asInPlain(chamber, model.plan().durationS());
         return new WhyFigures(model, chamber, HeatModel.account(run, endS - Timeline.HOUR_S, endS))
                 .answer(
                         asked.face().map(face -> FaceName.valueOf(face.toUpperCase(Locale.ROOT))),

@@ -4,6 +4,7 @@ import java.io.IOException;
 import java.io.Writer;
 import java.nio.file.Path;
 import java.util.ArrayList;
+import java.util.LinkedHashMap;
 import java.util.List;
 import java.util.Map;
 import java.util.function.IntToDoubleFunction;
@@ -77,6 +78,42 @@ public final class SeriesWriter {
             names.add(running(i));
         }
         write("chamber-" + id + ".csv", names, timeS, columns);
+    }
+
+    /**
+     * Writes the series of a chamber.
+     *
+     * @param series a column for each name of {@link #CHAMBER}, those of {@link #OPTIONAL} and
+     *     {@link #running} that it has; others are not written
+     */
+    public void chamber(HourlySeries series) {
+        Map<String, IntToDoubleFunction> columns = columns(series);
+        columns.keySet()
+                .removeIf(
+                        name ->
+                                !CHAMBER.contains(name)
+                                        && !OPTIONAL.contains(name)
+                                        && !name.startsWith("running"));
+        chamber(series.of(), times(series), columns);
+    }
+
+    /**
+     * Writes the series of a lot.
+     *
+     * @param series a column for each name of {@link #LOT}
+     */
+    public void lot(HourlySeries series) {
+        lot(series.of(), times(series), columns(series));
+    }
+
+    private static double[] times(HourlySeries series) {
+        return series.timeS().stream().mapToDouble(Double::doubleValue).toArray();
+    }
+
+    private static Map<String, IntToDoubleFunction> columns(HourlySeries series) {
+        Map<String, IntToDoubleFunction> columns = new LinkedHashMap<>();
+        series.columns().forEach(one -> columns.put(one.name(), one.values()::get));
+        return columns;
     }
 
     /**
