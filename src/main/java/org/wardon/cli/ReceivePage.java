@@ -36,9 +36,8 @@ final class ReceivePage {
                         "",
                         "Ranges over "
                                 + answer.draws()
-                                + " draws, with doors and defrosts averaged; 'advise' on the plan with"
-                                + " the lot in it follows each opening. Keeping quality, not food"
-                                + " safety. Nobody alone in a closed chamber; its door must open from"
+                                + " draws; neighbouring chambers as they are without the lot."
+                                + " Keeping quality, not food safety. Nobody alone in a closed chamber; its door must open from"
                                 + " inside."));
         return page.toString();
     }

@@ -50,4 +50,29 @@ public record ChamberPlan(
                     "outages of " + id + " overlap at " + outages.get(i).from());
         }
     }
+
+    /**
+     * Returns a copy built, cooled or set otherwise.
+     *
+     * @param otherEnclosure as built and used
+     * @param otherCoolers in the order they act
+     * @param otherSetting what the keeper dials in
+     * @return the copy
+     */
+    public ChamberPlan with(
+            Enclosure otherEnclosure, List<Cooler> otherCoolers, Setting otherSetting) {
+        return new ChamberPlan(
+                id,
+                otherEnclosure,
+                otherCoolers,
+                otherSetting,
+                capacityKg,
+                outages,
+                power,
+                humidifierKgH,
+                heaterW,
+                ethyleneScrub,
+                starts,
+                corrections);
+    }
 }

@@ -90,4 +90,28 @@ public record LotPlan(
                 atDoor,
                 market);
     }
+
+    /**
+     * Returns a heavier or lighter copy.
+     *
+     * @param kg net mass on arrival, kg
+     * @return the copy
+     */
+    public LotPlan weighing(double kg) {
+        return new LotPlan(
+                id,
+                commodity,
+                variant,
+                kg,
+                packed,
+                arrives,
+                temperatureC,
+                wantedDays,
+                leaves,
+                chamber,
+                place,
+                moves,
+                atDoor,
+                market);
+    }
 }

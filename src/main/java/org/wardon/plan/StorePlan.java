@@ -114,4 +114,28 @@ public record StorePlan(
                 ethylene,
                 assumed);
     }
+
+    /**
+     * Returns a copy with a chamber built or set otherwise.
+     *
+     * @param other taken for the chamber of its id
+     * @return the copy
+     */
+    public StorePlan withChamber(ChamberPlan other) {
+        return new StorePlan(
+                name,
+                site,
+                weatherSource,
+                from,
+                days,
+                chambers.stream()
+                        .map(chamber -> chamber.id().equals(other.id()) ? other : chamber)
+                        .toList(),
+                lots,
+                without,
+                seed,
+                prices,
+                ethylene,
+                assumed);
+    }
 }

@@ -5,6 +5,7 @@ import java.util.List;
 import java.util.OptionalDouble;
 import java.util.stream.IntStream;
 import org.wardon.air.Timeline;
+import org.wardon.files.forecast.HourlySeries;
 import org.wardon.heat.Course;
 import org.wardon.heat.Hours;
 import org.wardon.keeping.Fate;
@@ -15,7 +16,7 @@ import org.wardon.produce.Caution;
 import org.wardon.produce.Reason;
 import org.wardon.sharing.ChamberVerdict;
 
-/** One chamber tried: its air, its lots, whether it holds. Doors and defrosts are averaged. */
+/** One chamber tried: its air, its lots, whether it holds. */
 public final class ChamberTrial {
     private final StoreOutcome outcome;
     private final ChamberPlan chamber;
@@ -80,6 +81,15 @@ public final class ChamberTrial {
         return course().hours();
     }
 
+    /**
+     * Returns the chamber hour by hour to the plan's end.
+     *
+     * @return the columns of {@link ChamberView#air}
+     */
+    public HourlySeries series() {
+        return new StoreSeries(outcome).chamber(chamber.id());
+    }
+
     private Course course() {
         return outcome.course(chamber.id());
     }
@@ -133,6 +143,16 @@ public final class ChamberTrial {
         return outcome.fates(lotId).staying().stream()
                 .mapToDouble((Fate fate) -> fate.daysLeft(fromS))
                 .toArray();
+    }
+
+    /**
+     * Returns the days a lot has left from its arrival or the plan's start, staying there.
+     *
+     * @param lotId its id
+     * @return {@code [draw]}, days
+     */
+    public double[] daysLeft(String lotId) {
+        return daysLeft(lotId, sheet(lotId).clock().hereFromS());
     }
 
     /**

@@ -6,6 +6,7 @@ import java.util.LinkedHashMap;
 import java.util.List;
 import java.util.Map;
 import java.util.Set;
+import java.util.function.Predicate;
 import java.util.stream.IntStream;
 import org.wardon.advice.wording.Words;
 import org.wardon.air.Timeline;
@@ -23,10 +24,10 @@ import org.wardon.plan.StorePlan;
 import org.wardon.reference.ReferenceBook;
 
 /**
- * Tries chambers of a store quickly: as they stand, and with one more lot. Doors and defrosts are
- * averaged and coolers modulate, as in the draws of a forecast; only the chamber in question runs,
- * with those that lots are carried to or from, its neighbours as they are in the plan. May be asked
- * by several threads at once.
+ * Tries chambers of a store quickly: as they stand, with one more lot, and built or set otherwise.
+ * As in a forecast, one run follows each opening of a door, and the draws take doors and defrosts
+ * averaged; only the chamber in question runs, with those that lots are carried to or from, its
+ * neighbours as they are in the plan. May be asked by several threads at once.
  */
 public final class ChamberTrials {
     private final StoreModel model;
@@ -35,13 +36,16 @@ public final class ChamberTrials {
     private final Map<String, AirSeries> neighbours;
     private final Map<String, ChamberTrial> standing;
 
-    private ChamberTrials(ForecastAdvice.Prepared prepared, int count) {
+    private ChamberTrials(
+            ForecastAdvice.Prepared prepared, int count, Predicate<ChamberPlan> wanted) {
         model = prepared.model();
         sheets = prepared.lots();
         draws = Draws.seeded(model.plan().seed(), count);
         neighbours = model.agreedAir(model.plan().durationS());
         Map<String, StoreModel> all = new LinkedHashMap<>();
-        model.plan().chambers().forEach(chamber -> all.put(chamber.id(), model));
+        model.plan().chambers().stream()
+                .filter(wanted)
+                .forEach(chamber -> all.put(chamber.id(), model));
         standing = run(all);
     }
 
@@ -56,7 +60,27 @@ public final class ChamberTrials {
      * @throws org.wardon.errors.RunStopped where a chamber meets a state that cannot be
      */
     public static ChamberTrials of(StorePlan plan, ReferenceBook book, Words words, int draws) {
-        return new ChamberTrials(new ForecastAdvice(book, words).prepare(plan), draws);
+        return new ChamberTrials(
+                new ForecastAdvice(book, words).prepare(plan), draws, chamber -> true);
+    }
+
+    /**
+     * Works out one chamber as it stands.
+     *
+     * @param plan the plan; lots without a chamber are placed as a forecast places them
+     * @param chamberId the chamber
+     * @param book the reference book
+     * @param words words, for the forecast that prepares the plan
+     * @param draws how many draws, 1 to 32, the first of those a forecast takes
+     * @return the trials, of that chamber alone
+     * @throws org.wardon.errors.RunStopped where the chamber meets a state that cannot be
+     */
+    public static ChamberTrials of(
+            StorePlan plan, String chamberId, ReferenceBook book, Words words, int draws) {
+        return new ChamberTrials(
+                new ForecastAdvice(book, words).prepare(plan),
+                draws,
+                chamber -> chamber.id().equals(chamberId));
     }
 
     /**
@@ -114,6 +138,35 @@ public final class ChamberTrials {
         return model.plan().durationS() + StoreRun.MOST_BEYOND_DAYS * Timeline.DAY_S;
     }
 
+    /**
+     * Tries a chamber built, cooled, set or filled otherwise; its neighbours stay as they are.
+     *
+     * @param other taken for the chamber of its id
+     * @param loadFactor how many times heavier each lot that is ever there is
+     * @return what was worked out
+     * @throws org.wardon.errors.RunStopped where the chamber meets a state that cannot be
+     */
+    public ChamberTrial changed(ChamberPlan other, double loadFactor) {
+        StoreModel store = model.rebuilt(other);
+        if (loadFactor != 1) {
+            store = store.holding(heavier(store, other.id(), loadFactor));
+        }
+        return ById.get(run(Map.of(other.id(), store)), other.id());
+    }
+
+    private List<LotSheet> heavier(StoreModel store, String chamberId, double factor) {
+        List<LotSheet> there = store.sheetsIn(chamberId);
+        return store.sheets().parallelStream()
+                .map(
+                        sheet ->
+                                there.contains(sheet)
+                                        ? sheets.sheet(
+                                                sheet.plan()
+                                                        .weighing(factor * sheet.plan().massKg()))
+                                        : sheet)
+                .toList();
+    }
+
     /** Fates of a lot without a chamber, a draw each. */
     private List<Fate> outside(LotSheet sheet) {
         double horizonS = model.plan().durationS();
@@ -155,7 +208,7 @@ public final class ChamberTrials {
     private Setup setup(StoreModel store, String chamberId) {
         double horizonS = store.plan().durationS();
         Set<String> chambers = store.linked(chamberId);
-        Map<String, Course> plain = store.drawn(chambers, Draw.MEDIAN, horizonS, neighbours);
+        Map<String, Course> plain = store.plain(chambers, horizonS, neighbours);
         return new Setup(
                 store,
                 chamberId,

@@ -105,6 +105,22 @@ final class StoreModel {
         return new StoreModel(plan.withLots(lots), weather, all, warmed, around);
     }
 
+    /** The same lots in a store one chamber of which is built or set otherwise. */
+    StoreModel rebuilt(ChamberPlan other) {
+        return new StoreModel(
+                plan.withChamber(other), weather, sheets, new ConcurrentHashMap<>(), around);
+    }
+
+    /** The same store with other lots, which stand where their sheets say. */
+    StoreModel holding(List<LotSheet> other) {
+        return new StoreModel(
+                plan.withLots(other.stream().map(LotSheet::plan).toList()),
+                weather,
+                other,
+                warmed,
+                around);
+    }
+
     StorePlan plan() {
         return plan;
     }
@@ -183,6 +199,21 @@ final class StoreModel {
      */
     Map<String, Course> drawn(Draw draw, ToDoubleFunction<String> endS, Map<String, Course> plain) {
         return pass(draw, endS, airOf(plain), DoorMode.SKETCHED, ControlMode.MODULATING);
+    }
+
+    /**
+     * Runs some chambers in full, each opening of a door and each run of a cooler, in air of
+     * neighbours that is there.
+     */
+    Map<String, Course> plain(
+            Set<String> chambers, double endS, Map<String, AirSeries> neighbours) {
+        return pass(
+                chambers,
+                Draw.MEDIAN,
+                id -> endS,
+                neighbours,
+                DoorMode.PULSES,
+                ControlMode.AS_BUILT);
     }
 
     /** Runs some chambers in one draw with averaged doors, in air of neighbours that is there. */
