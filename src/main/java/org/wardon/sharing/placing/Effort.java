@@ -49,6 +49,6 @@ public record Effort(
         }
         return size <= MANY
                 ? new Effort(100, 15, 60, 2_000, 100, 0.005)
-                : new Effort(60, 15, 0, 1_000, 400, 0.03);
+                : new Effort(50, 15, 0, 1_500, 300, 0.02);
     }
 }

@@ -3,14 +3,17 @@ package org.wardon.sharing.placing;
 import java.util.Arrays;
 
 /**
- * The best load of one chamber in one climate at given gains of lots: depth first; lots that shut
- * out most are decided first, then those with most gain for their weight. A branch is bounded by
- * filling what is left of the weights, of two lots that must not meet only the better one. Stops
- * after a number of steps; what it has not looked into then counts in {@link #open}.
+ * The best load of one chamber in one climate at given gains of lots, depth first. Of the lots left
+ * as many are covered by groups of which only one can be taken as cannot lead to a better load by
+ * themselves; a better one holds one of the rest, so only with each of these is it looked for
+ * (branching on what a cover leaves, as for heaviest cliques; E. Balas and J. Xue, SIAM Journal on
+ * Computing 20, 1991, from memory). Two lots for which there is no room or cooling together, or
+ * that lose as much by each other as the lesser gains, are such a group too. Stops after a number
+ * of steps; what it has not looked into then counts in {@link #open}.
  */
 final class LoadSearch {
     private static final double ROUNDING = 1e-9;
-    private static final int NARROWINGS = 4;
+    private static final int NARROWINGS = 3;
     private static final double TINY = 1e-12;
 
     private final Store store;
@@ -33,10 +36,16 @@ final class LoadSearch {
     private final int[] heaviest;
     private final double[] loses;
     private final long[][] free;
+    private final long[][] branches;
     private final boolean[] paired;
     private final int[] better;
     private final int[] lesser;
     private final int[] filled;
+    private final Cover cover;
+    private final int[][] partners;
+    private final double[][] losses;
+    private final int[] partnerCount;
+    private final int[] lightest;
     private double slope;
     private int pairs;
     private int fill;
@@ -70,15 +79,21 @@ final class LoadSearch {
         lot = new int[lots];
         place = new int[lots];
         key = new double[lots];
-        apart = new long[lots][words(lots)];
+        apart = new long[lots][Cover.words(lots)];
         shutsOut = new double[lots];
         heaviest = new int[lots];
         loses = new double[lots];
-        free = new long[2 * lots + 2][words(lots)];
+        free = new long[2 * lots + 2][Cover.words(lots)];
+        branches = new long[2 * lots + 2][Cover.words(lots)];
         paired = new boolean[lots];
         better = new int[lots];
         lesser = new int[lots];
         filled = new int[lots];
+        cover = new Cover(lots);
+        partners = new int[lots][lots];
+        losses = new double[lots][lots];
+        partnerCount = new int[lots];
+        lightest = new int[lots];
         mass = new double[days];
         volume = new double[days];
         heat = new double[days];
@@ -87,10 +102,6 @@ final class LoadSearch {
         gain = new double[0];
         weight = new double[0];
         company = Company.NONE;
-    }
-
-    private static int words(int lots) {
-        return (lots + Long.SIZE - 1) / Long.SIZE;
     }
 
     /**
@@ -216,7 +227,7 @@ final class LoadSearch {
                 insert(l, gain[l] / (weight[l] + TINY));
             }
         }
-        words = words(count);
+        words = Cover.words(count);
         for (int i = 0; i < count; i++) {
             place[lot[i]] = i;
             loses[i] = 0;
@@ -234,20 +245,25 @@ final class LoadSearch {
         lot[at] = l;
     }
 
-    /** Who shuts out whom, and in which order that is decided. */
+    /** Who shuts out whom, and in which order lots are covered. */
     private void relate() {
         for (int i = 0; i < count; i++) {
             Arrays.fill(apart[i], 0, words, 0);
             shutsOut[i] = 0;
+            partnerCount[i] = 0;
             int[] others = company.others[lot[i]];
             double[] loss = company.loss[lot[i]];
             for (int k = 0; k < others.length; k++) {
                 int j = place[others[k]];
-                if (j >= 0 && loss[k] == Climate.APART) {
+                if (j >= 0 && loss[k] >= Math.min(gain[lot[i]], gain[lot[j]])) {
                     apart[i][j >> 6] |= 1L << j;
                     shutsOut[i] += gain[lot[j]];
+                } else if (j >= 0) {
+                    partners[i][partnerCount[i]] = j;
+                    losses[i][partnerCount[i]++] = loss[k];
                 }
             }
+            crowd(i);
             int at = i;
             while (at > 0 && shutsOut[heaviest[at - 1]] < shutsOut[i]) {
                 heaviest[at] = heaviest[at - 1];
@@ -255,6 +271,37 @@ final class LoadSearch {
             }
             heaviest[at] = i;
         }
+        for (int i = 0; i < count; i++) {
+            lightest[i] = heaviest[count - 1 - i];
+        }
+        cover.of(count, apart, partners, losses, partnerCount, lightest);
+    }
+
+    private void crowd(int i) {
+        long[] crowd = store.crowds[chamber][offer][lot[i]];
+        for (int j = 0; j < count; j++) {
+            int l = lot[j];
+            if ((crowd[l >> 6] & 1L << l) != 0 && (apart[i][j >> 6] & 1L << j) == 0) {
+                apart[i][j >> 6] |= 1L << j;
+                shutsOut[i] += gain[l];
+            }
+        }
+    }
+
+    /** The bound of lots left, those that must not meet counted once, up to what is granted. */
+    private double covered(long[] left, double room, double granted) {
+        cover.clear();
+        for (int w = 0; w < words; w++) {
+            for (long bits = left[w]; bits != 0; bits &= bits - 1) {
+                int i = (w << 6) + Long.numberOfTrailingZeros(bits);
+                double above = above(i);
+                if (above > 0) {
+                    cover.gains(i, above);
+                }
+            }
+        }
+        double full = slope * Math.max(0, room);
+        return full + cover.sum(granted - full);
     }
 
     private void deepen(int depth, double worth, double left) {
@@ -264,22 +311,21 @@ final class LoadSearch {
             return;
         }
         if (++steps > most) {
-            open = Math.max(open, roof);
+            double all = covered(free[depth], left, Double.POSITIVE_INFINITY);
+            open = Math.max(open, Math.min(roof, worth + all));
             return;
         }
-        int next = next(free[depth]);
-        if (next < 0) {
-            return;
+        covered(free[depth], left, toBeat - worth);
+        long[] branch = branches[depth];
+        for (int w = 0; w < words; w++) {
+            branch[w] = cover.uncovered(w);
         }
-        boolean with = shutsOut[next] <= 2 * gain[lot[next]];
-        free[depth][next >> 6] &= ~(1L << next);
-        if (with) {
-            include(next, depth, worth, left);
-            deepen(depth, worth, left);
-        } else {
-            System.arraycopy(free[depth], 0, free[depth + 1], 0, words);
-            deepen(depth + 1, worth, left);
-            include(next, depth, worth, left);
+        for (int w = 0; w < words; w++) {
+            for (; branch[w] != 0; branch[w] &= branch[w] - 1) {
+                int i = (w << 6) + Long.numberOfTrailingZeros(branch[w]);
+                free[depth][w] &= ~(1L << i);
+                include(i, depth, worth, left);
+            }
         }
     }
 
@@ -307,29 +353,6 @@ final class LoadSearch {
         }
         deepen(depth + 1, with, left - weight[l]);
         change(i, -1);
-    }
-
-    /** The lot to decide next: one that shuts out most of what is left, else the best. */
-    private int next(long[] left) {
-        for (int k = 0; k < count; k++) {
-            int i = heaviest[k];
-            if (shutsOut[i] <= 0) {
-                break;
-            }
-            if ((left[i >> 6] & 1L << i) != 0) {
-                for (int w = 0; w < words; w++) {
-                    if ((left[w] & apart[i][w]) != 0) {
-                        return i;
-                    }
-                }
-            }
-        }
-        for (int w = 0; w < words; w++) {
-            if (left[w] != 0) {
-                return (w << 6) + Long.numberOfTrailingZeros(left[w]);
-            }
-        }
-        return -1;
     }
 
     /**

@@ -14,16 +14,25 @@ final class Offers {
     /** {@code [chamber][offer]}, no load earns more above the prices last looked at. */
     final double[][] ceiling;
 
-    Offers(Store store) {
+    Offers(Store store, boolean together) {
         this.store = store;
         gain = new double[store.lots];
+        Cover cover = new Cover(store.lots);
+        Picking picking = new Picking(store.lots);
         weights = new Weights[store.chambers][];
         ceiling = new double[store.chambers][];
         tightened = new boolean[store.chambers][];
         for (int c = 0; c < store.chambers; c++) {
             weights[c] = new Weights[store.offers(c)];
             for (int o = 0; o < store.offers(c); o++) {
-                weights[c][o] = new Weights(store, c, o);
+                weights[c][o] =
+                        new Weights(
+                                store,
+                                c,
+                                o,
+                                together ? store.company[c][o] : store.alone,
+                                cover,
+                                picking);
             }
             ceiling[c] = new double[store.offers(c)];
             tightened[c] = new boolean[store.offers(c)];

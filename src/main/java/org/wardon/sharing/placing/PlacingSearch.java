@@ -42,12 +42,12 @@ public final class PlacingSearch {
         for (int c = 0; c < store.chambers; c++) {
             offerUse[c] = new double[store.offers(c)];
         }
-        Offers offers = new Offers(store);
+        Offers offers = new Offers(store, true);
         LoadSearch search = new LoadSearch(store);
-        parted = new PartedLoads(store, offers, search);
+        parted = new PartedLoads(store, new Offers(store, false), search);
         whole = new WholeLoads(store, offers, search, effort.loadSteps());
         last = whole;
-        prices = new Prices(store, offers);
+        prices = new Prices(store);
         polish =
                 new Polish(
                         store,

@@ -13,13 +13,12 @@ final class Prices {
     private static final double LONGER = 1.4;
     private static final double SHORTER = 0.7;
     private static final double GOOD = 0.3;
-    private static final int PATIENCE = 6;
-    private static final int MOST_FRUITLESS = 24;
+    private static final int PATIENCE = 3;
+    private static final int MOST_FRUITLESS = 8;
     private static final double CONVERGED = 3e-5;
     private static final int LEAVE_OUT_EVERY = 8;
 
     private final Store store;
-    private final Offers offers;
     private final double[] highest;
 
     int steps;
@@ -29,9 +28,8 @@ final class Prices {
         double best();
     }
 
-    Prices(Store store, Offers offers) {
+    Prices(Store store) {
         this.store = store;
-        this.offers = offers;
         highest = new double[store.lots];
     }
 
@@ -85,17 +83,17 @@ final class Prices {
         for (int c = 0; c < store.chambers; c++) {
             double spare = above - loads.most[c];
             for (int o = 0; o < store.offers(c); o++) {
-                if (branch.offers[c].get(o) && spare + offers.ceiling[c][o] <= 0) {
+                if (branch.offers[c].get(o) && spare + loads.offers.ceiling[c][o] <= 0) {
                     branch.offers[c].clear(o);
                 }
             }
             if (steps % LEAVE_OUT_EVERY == 0) {
-                leaveOutLots(branch, c, price, spare);
+                leaveOutLots(branch, loads.offers, c, price, spare);
             }
         }
     }
 
-    private void leaveOutLots(Branch branch, int c, double[] price, double spare) {
+    private void leaveOutLots(Branch branch, Offers offers, int c, double[] price, double spare) {
         Arrays.fill(highest, Double.NEGATIVE_INFINITY);
         for (int o = 0; o < store.offers(c); o++) {
             if (branch.offers[c].get(o)) {

@@ -14,6 +14,9 @@ final class Store {
     /** A share nothing can bear. */
     private static final double TOO_MUCH = 1e9;
 
+    /** More than all there is, but for rounding. */
+    private static final double FULL = 1 + 1e-8;
+
     final int lots;
     final int chambers;
     final int days;
@@ -43,6 +46,12 @@ final class Store {
     /** {@code [chamber][offer]}. */
     final Company[][] company;
 
+    /** {@code [chamber][offer][lot]}, bits of those there is no room or cooling for beside it. */
+    final long[][][][] crowds;
+
+    /** Nobody harms anybody. */
+    final Company alone;
+
     Store(PlacingProblem problem) {
         lots = problem.lots().size();
         chambers = problem.chambers().size();
@@ -58,6 +67,8 @@ final class Store {
         volumeShare = new double[chambers][lots];
         heatShare = new double[chambers][][];
         company = new Company[chambers][];
+        alone = new Company(lots);
+        crowds = new long[chambers][][][];
         Map<Climate, Company> known = new HashMap<>();
         for (int c = 0; c < chambers; c++) {
             fill(c, problem, known);
@@ -81,6 +92,7 @@ final class Store {
             massShare[c][l] = share(lot.massKg(), chamber.massKg());
             volumeShare[c][l] = share(lot.volumeM3(), chamber.volumeM3());
         }
+        crowds[c] = new long[offers.size()][lots][Cover.words(lots)];
         for (int o = 0; o < offers.size(); o++) {
             Offer offer = offers.get(o);
             company[c][o] =
@@ -90,6 +102,7 @@ final class Store {
                 heat(c, o, l, offer);
                 earns[c][o][l] = earns(c, o, l, problem, offer);
             }
+            crowd(c, o);
         }
     }
 
@@ -110,6 +123,32 @@ final class Store {
         }
         boolean elsewhere = lot.onlyIn().isPresent() && !lot.onlyIn().get().equals(chamber);
         return elsewhere || most > 1 ? Climate.NEVER : problem.earns(lotNumber[l], offer);
+    }
+
+    private void crowd(int c, int o) {
+        for (int a = 0; a < lots; a++) {
+            for (int b = 0; b < a && earns[c][o][a] > 0; b++) {
+                if (earns[c][o][b] > 0 && crowd(c, o, a, b)) {
+                    crowds[c][o][a][b >> 6] |= 1L << b;
+                    crowds[c][o][b][a >> 6] |= 1L << a;
+                }
+            }
+        }
+    }
+
+    private boolean crowd(int c, int o, int a, int b) {
+        int from = Math.max(first[a], first[b]);
+        int to = Math.min(last[a], last[b]);
+        if (from > to) {
+            return false;
+        }
+        boolean full =
+                massShare[c][a] + massShare[c][b] > FULL
+                        || volumeShare[c][a] + volumeShare[c][b] > FULL;
+        for (int d = from; d <= to && !full; d++) {
+            full = heatShare[c][o][a * days + d] + heatShare[c][o][b * days + d] > FULL;
+        }
+        return full;
     }
 
     private static double share(double part, double whole) {

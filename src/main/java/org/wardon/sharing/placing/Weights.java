@@ -20,18 +20,24 @@ final class Weights {
     private final double[] day;
 
     private final double[] slack;
+    private final Company company;
+    private final Cover cover;
+    private final Picking picking;
 
     /** {@code [lot]}, the weight of each lot. */
     final double[] ofLot;
 
     double total;
 
-    Weights(Store store, int chamber, int offer) {
+    Weights(Store store, int chamber, int offer, Company company, Cover cover, Picking picking) {
         this.store = store;
         this.chamber = chamber;
         this.offer = offer;
         day = new double[KINDS * store.days];
         slack = new double[KINDS * store.days];
+        this.company = company;
+        this.cover = cover;
+        this.picking = picking;
         ofLot = new double[store.lots];
     }
 
@@ -42,11 +48,27 @@ final class Weights {
      *     not stand
      */
     double bound(double[] gain) {
-        double sum = total;
-        for (int l = 0; l < store.lots; l++) {
-            sum += Math.max(0, gain[l] - ofLot[l]);
+        if (company == store.alone) {
+            double sum = total;
+            for (int l = 0; l < store.lots; l++) {
+                sum += Math.max(0, gain[l] - ofLot[l]);
+            }
+            return sum;
         }
-        return sum;
+        cover.of(
+                store.lots,
+                company.apart,
+                company.partners,
+                company.partnerLoss,
+                company.partnerCount,
+                company.lightest);
+        cover.clear();
+        for (int l = 0; l < store.lots; l++) {
+            if (gain[l] > ofLot[l]) {
+                cover.gains(l, gain[l] - ofLot[l]);
+            }
+        }
+        return total + cover.sum();
     }
 
     /**
@@ -82,9 +104,10 @@ final class Weights {
     /** What the lots worth taking leave of each limit; returns the square of its length. */
     private double slope(double[] gain) {
         Arrays.fill(slack, 1);
+        picking.pick(company, gain, ofLot);
         int days = store.days;
         for (int l = 0; l < store.lots; l++) {
-            if (gain[l] > ofLot[l]) {
+            if (picking.taken[l]) {
                 for (int d = store.first[l]; d <= store.last[l]; d++) {
                     slack[d] -= store.massShare[chamber][l];
                     slack[days + d] -= store.volumeShare[chamber][l];

@@ -33,6 +33,9 @@ final class Instances {
     private static final List<Draw> DRAWS = Draws.seeded(1, 32);
     private static final double ARRIVES_C = 28;
     private static final double HEAT_CAPACITY = 3_700;
+    private static final double[] ALIKE_KG = {400, 1_000, 2_500};
+    private static final double TOO_LARGE = 10_000;
+    private static final double MOST_KG = 100_000;
     private static final ClassValues CLASSES = ClassValues.of(Crops.list());
 
     private final Map<String, Workable> workable = new HashMap<>();
@@ -43,28 +46,40 @@ final class Instances {
 
     /** A store of lots whose mass at its peak is the given share above or below what there is. */
     PlacingProblem draw(int lots, int chambers, double capacityShare, long seed) {
+        return draw(lots, chambers, Mix.ofAllCrops(capacityShare), seed);
+    }
+
+    /** A store of lots as a mix says. */
+    PlacingProblem draw(int lots, int chambers, Mix mix, long seed) {
         SplittableRandom random = new SplittableRandom(seed);
+        double capacityShare = mix.capacityShare();
         List<Drawn> drawn = new ArrayList<>();
-        List<Commodity> crops = Crops.list();
+        List<Commodity> crops = mix.some(Crops.list(), random);
         while (drawn.size() < lots) {
             Commodity crop = crops.get(random.nextInt(crops.size()));
-            drawn.add(lot(drawn.size(), crop, random));
+            drawn.add(lot(drawn.size(), crop, mix, random));
         }
+        List<Drawn> fitting = drawn.stream().filter(l -> l.lot().massKg() < MOST_KG).toList();
         List<Climate> climates = new ArrayList<>();
         List<Double> temperatures = new ArrayList<>();
         for (double pct : HUMIDITIES_PCT) {
             for (double c : TEMPERATURES_C) {
-                climates.add(climate(drawn, c, pct));
+                climates.add(climate(drawn, c, pct, mix.company()));
                 temperatures.add(c);
             }
         }
         List<ChamberToFill> filled = new ArrayList<>();
-        double[] size = random.doubles(chambers, 0.5, 1.5).toArray();
+        double[] size =
+                mix.largest() <= 3
+                        ? random.doubles(chambers, 0.5, 1.5).toArray()
+                        : random.doubles(chambers, 0, 1)
+                                .map(part -> Math.pow(mix.largest(), part))
+                                .toArray();
         double all = Arrays.stream(size).sum();
         for (int c = 0; c < chambers; c++) {
-            double mass = capacityShare * peak(drawn, l -> l.lot().massKg()) * size[c] / all;
-            double volume = capacityShare * peak(drawn, l -> l.lot().volumeM3()) * size[c] / all;
-            double heat = capacityShare * peakHeat(drawn, climates.get(3)) * size[c] / all;
+            double mass = capacityShare * peak(fitting, l -> l.lot().massKg()) * size[c] / all;
+            double volume = capacityShare * peak(fitting, l -> l.lot().volumeM3()) * size[c] / all;
+            double heat = capacityShare * peakHeat(fitting, climates.get(3), drawn) * size[c] / all;
             double eer = random.nextDouble(2, 3.5);
             double wall = heat * random.nextDouble(0.2, 0.5);
             List<Offer> offers = new ArrayList<>();
@@ -85,15 +100,42 @@ final class Instances {
         return new PlacingProblem(DAYS, drawn.stream().map(Drawn::lot).toList(), filled);
     }
 
-    private Drawn lot(int number, Commodity crop, SplittableRandom random) {
+    private Drawn lot(int number, Commodity crop, Mix mix, SplittableRandom random) {
         double mass = Math.rint(Math.exp(random.nextDouble(Math.log(50), Math.log(5_000))));
         int first = random.nextInt(DAYS - 3);
-        int stay = Math.min(3 + random.nextInt(7), DAYS - first);
+        int stay = 3 + random.nextInt(7);
+        double kgPerM3 = random.nextDouble(200, 300);
+        double price = random.nextDouble(0.5, 6);
+        if (mix.days() > 0) {
+            first = first * mix.days() / (DAYS - 3) * 3;
+        }
+        if (mix.alike()) {
+            mass = ALIKE_KG[number % ALIKE_KG.length];
+            kgPerM3 = 250;
+            int kind = Math.floorMod(crop.id().hashCode(), 60);
+            stay = 4 + kind % 6;
+            price = 1 + 0.1 * kind;
+        }
+        if (number % 100 < mix.tooLarge()) {
+            mass *= TOO_LARGE;
+        }
+        return lot(number, crop, mass, mass / kgPerM3, first, stay, price);
+    }
+
+    private Drawn lot(
+            int number,
+            Commodity crop,
+            double mass,
+            double volume,
+            int first,
+            int longest,
+            double price) {
+        int stay = Math.min(longest, DAYS - first);
         LotToPlace lot =
                 new LotToPlace(
                         "l" + (100 + number),
                         mass,
-                        mass / random.nextDouble(200, 300),
+                        volume,
                         first,
                         first + stay - 1,
                         Optional.empty());
@@ -104,7 +146,7 @@ final class Instances {
                                 Workable.of(
                                         new Wish(Crops.lot(crop), stay, 2, OptionalDouble.of(20)),
                                         DRAWS));
-        return new Drawn(lot, here, crop, random.nextDouble(0.5, 6));
+        return new Drawn(lot, here, crop, price);
     }
 
     private static double peak(List<Drawn> lots, java.util.function.ToDoubleFunction<Drawn> of) {
@@ -120,19 +162,19 @@ final class Instances {
         return lot.lot().firstDay() <= day && day <= lot.lot().lastDay();
     }
 
-    private static double peakHeat(List<Drawn> lots, Climate climate) {
+    private static double peakHeat(List<Drawn> lots, Climate climate, List<Drawn> all) {
         double most = 0;
         for (int d = 0; d < DAYS; d++) {
             double sum = 0;
-            for (int l = 0; l < lots.size(); l++) {
-                sum += climate.heatW(l, d);
+            for (int l = 0; l < all.size(); l++) {
+                sum += lots.contains(all.get(l)) ? climate.heatW(l, d) : 0;
             }
             most = Math.max(most, sum);
         }
         return most;
     }
 
-    private Climate climate(List<Drawn> lots, double c, double pct) {
+    private Climate climate(List<Drawn> lots, double c, double pct, Mix.Harm harm) {
         int n = lots.size();
         double[] worth = new double[n];
         double[][] heat = new double[n][DAYS];
@@ -144,7 +186,7 @@ final class Instances {
             worth[l] = may ? one.price() * one.lot().massKg() * sound : Climate.NEVER;
             heat(one, c, heat[l]);
             for (int o = 0; o < l; o++) {
-                loss[l][o] = together(one, lots.get(o), c);
+                loss[l][o] = together(one, lots.get(o), c, harm);
                 loss[o][l] = loss[l][o];
             }
         }
@@ -161,9 +203,18 @@ final class Instances {
         }
     }
 
-    private double together(Drawn a, Drawn b, double c) {
-        if (!a.lot().meets(b.lot())) {
+    private double together(Drawn a, Drawn b, double c, Mix.Harm harm) {
+        if (!a.lot().meets(b.lot()) || harm == Mix.Harm.NONE) {
             return 0;
+        }
+        double smaller = Math.min(a.price() * a.lot().massKg(), b.price() * b.lot().massKg());
+        if (harm == Mix.Harm.MANY) {
+            int kind =
+                    Math.floorMod(
+                            31 * (a.commodity().id().hashCode() ^ b.commodity().id().hashCode()),
+                            5);
+            boolean one = a.commodity() == b.commodity() || kind == 4;
+            return one ? 0 : kind < 2 ? Climate.APART : 0.05 * kind * smaller;
         }
         PairConflict conflict =
                 conflicts.computeIfAbsent(
@@ -176,8 +227,6 @@ final class Instances {
         if (conflict.verdict() == Verdict.NO) {
             return Climate.APART;
         }
-        return conflict.verdict() == Verdict.GOOD
-                ? 0
-                : 0.05 * Math.min(a.price() * a.lot().massKg(), b.price() * b.lot().massKg());
+        return conflict.verdict() == Verdict.GOOD ? 0 : 0.05 * smaller;
     }
 }
