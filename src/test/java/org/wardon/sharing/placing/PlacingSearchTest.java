@@ -77,7 +77,7 @@ class PlacingSearchTest {
 
     @Test
     void aStoreWithoutChambersOrWithOneLotIsAnsweredToo() {
-        PlacingProblem one = INSTANCES.draw(1, 3, 1.5, 1);
+        PlacingProblem one = INSTANCES.draw(1, 3, 9, 1);
         PlacingAnswer ours = search(one);
         assertTrue(ours.proven() && ours.placing().unplaced().isEmpty(), ours.toString());
         PlacingAnswer nowhere = search(new PlacingProblem(one.days(), one.lots(), List.of()));
