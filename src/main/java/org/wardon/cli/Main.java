@@ -39,6 +39,7 @@ public final class Main implements Runnable {
                     Receive.class,
                     Keep.class,
                     Share.class,
+                    Place.class,
                     Look.class,
                     Why.class,
                     Section.class,

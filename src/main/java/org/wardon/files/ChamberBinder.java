@@ -15,6 +15,7 @@ import org.wardon.enclosure.FaceName;
 import org.wardon.enclosure.Gains;
 import org.wardon.files.json.Part;
 import org.wardon.plan.ChamberPlan;
+import org.wardon.plan.ChamberUse;
 import org.wardon.plan.Corrections;
 import org.wardon.plan.Default;
 import org.wardon.plan.Defaults;
@@ -52,19 +53,22 @@ final class ChamberBinder {
                         .flatMap(part -> coolerBinder.bind(part).stream())
                         .toList();
         Setting setting = staged(one, chamber.at("setting"), coolers);
-        return new ChamberPlan(
-                inputs.text(chamber, "id"),
-                enclosure,
-                coolers,
-                setting,
-                capacityKg,
-                powerBinder.single(chamber),
-                powerBinder.power(chamber),
-                inputs.numberElse(chamber, "humidifierKgH", 0),
-                inputs.numberElse(chamber, "heaterW", 0),
-                scrub(chamber.at("ethyleneScrub")),
-                starts(chamber.at("starts")),
-                corrections(chamber.at("corrections")));
+        ChamberPlan bound =
+                new ChamberPlan(
+                        inputs.text(chamber, "id"),
+                        enclosure,
+                        coolers,
+                        setting,
+                        capacityKg,
+                        powerBinder.single(chamber),
+                        powerBinder.power(chamber),
+                        inputs.numberElse(chamber, "humidifierKgH", 0),
+                        inputs.numberElse(chamber, "heaterW", 0),
+                        scrub(chamber.at("ethyleneScrub")),
+                        starts(chamber.at("starts")),
+                        corrections(chamber.at("corrections")),
+                        new ChamberUse(PlanBinder.accepts(chamber), Optional.empty()));
+        return inputs.flag(chamber, "off") ? bound.switchedOff() : bound;
     }
 
     private Enclosure enclosure(Part chamber, Box box) {

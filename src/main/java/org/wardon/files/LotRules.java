@@ -41,6 +41,20 @@ final class LotRules {
             ids.chamber(lot.at("chamber"), plan);
             stay(lot);
         }
+        wish(lots);
+    }
+
+    private void wish(List<Part> lots) {
+        List<String> known = lots.stream().flatMap(lot -> lot.at("id").text().stream()).toList();
+        Part named = plan.at("wishLots");
+        named.items().forEach(id -> ids.known(id, known, "lot of this plan"));
+        Part wish = plan.at("wish");
+        if (wish.text().equals(Optional.of("most-days")) && named.items().isEmpty()) {
+            faults.add(
+                    wish.path(),
+                    "is 'most-days' for no lot",
+                    "accepted: wishLots given beside it, with at least one lot");
+        }
     }
 
     private void stay(Part lot) {

@@ -3,13 +3,17 @@ package org.wardon.files;
 import java.time.LocalDateTime;
 import java.time.ZoneId;
 import java.util.List;
+import java.util.Set;
+import java.util.stream.Collectors;
 import org.wardon.air.Site;
 import org.wardon.air.YearWave;
 import org.wardon.files.json.Part;
 import org.wardon.plan.ChamberPlan;
+import org.wardon.plan.Conflict;
 import org.wardon.plan.Defaults;
 import org.wardon.plan.EthyleneAround;
 import org.wardon.plan.LotPlan;
+import org.wardon.plan.PlaceWish;
 import org.wardon.plan.Prices;
 import org.wardon.plan.StorePlan;
 import org.wardon.plan.WeatherSource;
@@ -59,7 +63,24 @@ final class PlanBinder {
                 (long) inputs.numberElse(plan, "seed", Defaults.SEED),
                 prices,
                 ethylene,
+                new PlaceWish(
+                        plan.at("wish")
+                                .text()
+                                .map(word -> PlaceWish.Aim.valueOf(LotBinder.constant(word)))
+                                .orElse(PlaceWish.Aim.MOST_VALUE),
+                        plan.at("wishLots").items().stream()
+                                .flatMap(id -> id.text().stream())
+                                .toList(),
+                        accepts(plan)),
                 inputs.assumed());
+    }
+
+    /** Conflicts a chamber or the plan accepts. */
+    static Set<Conflict> accepts(Part owner) {
+        return owner.at("accept").items().stream()
+                .flatMap(word -> word.text().stream())
+                .map(word -> Conflict.valueOf(LotBinder.constant(word)))
+                .collect(Collectors.toUnmodifiableSet());
     }
 
     private Site site(WeatherSource weather) {

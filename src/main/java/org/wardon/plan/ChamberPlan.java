@@ -22,6 +22,7 @@ import org.wardon.errors.Require;
  * @param ethyleneScrub a scrubber of ethylene, where there is one
  * @param starts the air it starts with, where the plan says
  * @param corrections what a fit found
+ * @param use whether it is switched off, and which conflicts its keeper accepts
  */
 public record ChamberPlan(
         String id,
@@ -35,7 +36,8 @@ public record ChamberPlan(
         double heaterW,
         Optional<EthyleneScrub> ethyleneScrub,
         Optional<StartAir> starts,
-        Corrections corrections) {
+        Corrections corrections,
+        ChamberUse use) {
     /** Copies the lists and checks the bounds. */
     public ChamberPlan {
         Ids.check("chamber", id);
@@ -73,6 +75,121 @@ public record ChamberPlan(
                 heaterW,
                 ethyleneScrub,
                 starts,
-                corrections);
+                corrections,
+                use);
+    }
+
+    /**
+     * Returns the chamber at another setting.
+     *
+     * @param other taken instead
+     * @return the changed copy
+     */
+    public ChamberPlan withSetting(Setting other) {
+        return with(other, coolers, humidifierKgH, heaterW, use);
+    }
+
+    /**
+     * Returns the chamber switched off: its coolers, humidifier and heater stand still.
+     *
+     * @return the changed copy; itself where it is off already
+     */
+    public ChamberPlan switchedOff() {
+        if (use.off().isPresent()) {
+            return this;
+        }
+        ChamberUse.Installed there = new ChamberUse.Installed(coolers, humidifierKgH, heaterW);
+        return with(setting, List.of(), 0, 0, new ChamberUse(use.accepts(), Optional.of(there)));
+    }
+
+    /**
+     * Returns the chamber with all it has switched on.
+     *
+     * @return the changed copy; itself where nothing is off
+     */
+    public ChamberPlan switchedOn() {
+        return use.off()
+                .map(
+                        there ->
+                                with(
+                                        setting,
+                                        there.coolers(),
+                                        there.humidifierKgH(),
+                                        there.heaterW(),
+                                        new ChamberUse(use.accepts(), Optional.empty())))
+                .orElse(this);
+    }
+
+    /**
+     * Returns whether the chamber is switched off.
+     *
+     * @return true where its coolers stand still
+     */
+    public boolean off() {
+        return use.off().isPresent();
+    }
+
+    private ChamberPlan with(
+            Setting set, List<Cooler> cooled, double humidifier, double heater, ChamberUse used) {
+        return new ChamberPlan(
+                id,
+                enclosure,
+                cooled,
+                set,
+                capacityKg,
+                outages,
+                power,
+                humidifier,
+                heater,
+                ethyleneScrub,
+                starts,
+                corrections,
+                used);
+    }
+
+    /**
+     * Returns a copy under another id.
+     *
+     * @param otherId its id
+     * @return the copy
+     */
+    public ChamberPlan named(String otherId) {
+        return new ChamberPlan(
+                otherId,
+                enclosure,
+                coolers,
+                setting,
+                capacityKg,
+                outages,
+                power,
+                humidifierKgH,
+                heaterW,
+                ethyleneScrub,
+                starts,
+                corrections,
+                use);
+    }
+
+    /**
+     * Returns the chamber starting in other air.
+     *
+     * @param air the air, absent for the usual start
+     * @return the changed copy
+     */
+    public ChamberPlan starting(Optional<StartAir> air) {
+        return new ChamberPlan(
+                id,
+                enclosure,
+                coolers,
+                setting,
+                capacityKg,
+                outages,
+                power,
+                humidifierKgH,
+                heaterW,
+                ethyleneScrub,
+                air,
+                corrections,
+                use);
     }
 }

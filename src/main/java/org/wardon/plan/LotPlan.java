@@ -74,6 +74,19 @@ public record LotPlan(
      * @return the copy
      */
     public LotPlan placedIn(String chamberId) {
+        return standing(Optional.of(chamberId));
+    }
+
+    /**
+     * Returns a copy without a chamber.
+     *
+     * @return the copy, to be placed
+     */
+    public LotPlan unplaced() {
+        return standing(Optional.empty());
+    }
+
+    private LotPlan standing(Optional<String> chamberId) {
         return new LotPlan(
                 id,
                 commodity,
@@ -84,7 +97,7 @@ public record LotPlan(
                 temperatureC,
                 wantedDays,
                 leaves,
-                Optional.of(chamberId),
+                chamberId,
                 place,
                 moves,
                 atDoor,

@@ -23,6 +23,7 @@ import org.wardon.errors.Require;
  * @param seed number the draws start from
  * @param prices money
  * @param ethylene ethylene of the air around
+ * @param wish what a placing is to seek
  * @param assumed every value the plan left out, in the order of the plan
  */
 public record StorePlan(
@@ -37,6 +38,7 @@ public record StorePlan(
         long seed,
         Prices prices,
         EthyleneAround ethylene,
+        PlaceWish wish,
         List<Assumed> assumed) {
     /** Copies the lists and checks bounds and ids. */
     public StorePlan {
@@ -100,18 +102,45 @@ public record StorePlan(
      * @return the copy
      */
     public StorePlan withLots(List<LotPlan> otherLots) {
+        return with(chambers, otherLots);
+    }
+
+    /**
+     * Returns a copy with other chambers and lots.
+     *
+     * @param otherChambers the chambers
+     * @param otherLots the lots
+     * @return the copy
+     */
+    public StorePlan with(List<ChamberPlan> otherChambers, List<LotPlan> otherLots) {
+        return with(otherChambers, otherLots, wish);
+    }
+
+    /**
+     * Returns a copy of which a placing is to seek something else.
+     *
+     * @param other the wish
+     * @return the copy
+     */
+    public StorePlan wishing(PlaceWish other) {
+        return with(chambers, lots, other);
+    }
+
+    private StorePlan with(
+            List<ChamberPlan> otherChambers, List<LotPlan> otherLots, PlaceWish other) {
         return new StorePlan(
                 name,
                 site,
                 weatherSource,
                 from,
                 days,
-                chambers,
+                otherChambers,
                 otherLots,
                 without,
                 seed,
                 prices,
                 ethylene,
+                other,
                 assumed);
     }
 

@@ -1,6 +1,7 @@
 package org.wardon.sharing;
 
 import java.util.List;
+import org.wardon.keeping.KeepingModel;
 import org.wardon.produce.Reason;
 
 /**
@@ -27,6 +28,38 @@ public record PairConflict(Verdict verdict, List<Reason> reasons) {
      */
     public static PairConflict of(Workable a, Workable b, double atC, double days) {
         Conflicts conflicts = Pairing.conflicts(a, b, atC, days);
+        return new PairConflict(conflicts.verdict(), conflicts.reasons());
+    }
+
+    /**
+     * Judges what a level of ethylene does to a lot.
+     *
+     * @param taker the lot and its days
+     * @param model how it keeps
+     * @param giverId the lot that gives most of it
+     * @param ppm the level, µL/L
+     * @param atC temperature of the air, °C
+     * @return verdict and reasons
+     */
+    public static PairConflict ofEthylene(
+            Wish taker, KeepingModel model, String giverId, double ppm, double atC) {
+        Conflicts conflicts = new Conflicts();
+        conflicts.ethylene(taker, model, giverId, ppm, atC);
+        return new PairConflict(conflicts.verdict(), conflicts.reasons());
+    }
+
+    /**
+     * Judges whether two lots take each other's smell.
+     *
+     * @param one one lot
+     * @param other the other
+     * @param days days together
+     * @return verdict and reasons
+     */
+    public static PairConflict ofOdour(Wish one, Wish other, double days) {
+        Conflicts conflicts = new Conflicts();
+        conflicts.odour(one, other, days);
+        conflicts.odour(other, one, days);
         return new PairConflict(conflicts.verdict(), conflicts.reasons());
     }
 }

@@ -24,7 +24,8 @@ final class Averaged {
         return heatersW > 0 ? even.withEnclosure(warmed(run.enclosure(), heatersW)) : even;
     }
 
-    private static Enclosure warmed(Enclosure built, double heatersW) {
+    /** The same enclosure with so much more heat in it at all times, W. */
+    static Enclosure warmed(Enclosure built, double heatersW) {
         Gains g = built.gains();
         Gains more =
                 new Gains(

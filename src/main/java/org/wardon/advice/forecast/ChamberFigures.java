@@ -18,6 +18,7 @@ import org.wardon.heat.HeatLedger;
 import org.wardon.heat.Hours;
 import org.wardon.heat.SolarLedger;
 import org.wardon.plan.ChamberPlan;
+import org.wardon.plan.StorePlan;
 
 /** Figures of one chamber over the course. */
 final class ChamberFigures {
@@ -54,9 +55,7 @@ final class ChamberFigures {
                 load(course.heat()),
                 course.heat().removed() / J_PER_KWH,
                 energyKWh,
-                chamber.power().solar().isPresent()
-                        ? 0
-                        : energyKWh * outcome.model().plan().prices().energyPerKWh(),
+                energyCost(chamber, course, outcome.model().plan()),
                 course.waterUsedKg(),
                 co2,
                 ethylenePpm(),
@@ -65,6 +64,13 @@ final class ChamberFigures {
                 course.solar().map(this::solar),
                 chamber.enclosure().zones().map(zones -> doorEnd(hours)),
                 CleanerAir.figures(chamber, outcome));
+    }
+
+    /** What the grid's electricity costs; that of panels is had for nothing. */
+    static double energyCost(ChamberPlan chamber, Course course, StorePlan plan) {
+        return chamber.power().solar().isPresent()
+                ? 0
+                : course.heat().electricity() / J_PER_KWH * plan.prices().energyPerKWh();
     }
 
     private static ChamberForecast.DoorEnd doorEnd(Hours hours) {

@@ -70,21 +70,23 @@ final class LotFigures {
         return new ChillingRisk(LotRisk.chilling(fates, sheet.soldS()), safe);
     }
 
-    /** Price x what is left of the mass at leaving x share of draws still sound when sold. */
     double valueKept() {
-        double at = Math.min(sheet.clock().leavesS(), history.timeS(history.size() - 1));
-        double mass = massAt(at);
-        return sheet.plan().market().pricePerKg() * mass * fates.shareSoundWhenSold(sheet.soldS());
+        return valueKept(sheet, history, fates.shareSoundWhenSold(sheet.soldS()));
+    }
+
+    /** Price x what is left of the mass at leaving x share of draws still sound when sold. */
+    static double valueKept(LotSheet sheet, LotHistory history, double shareSound) {
+        return sheet.plan().market().pricePerKg() * massAtLeaving(sheet, history) * shareSound;
     }
 
     /** Price x mass lost until it leaves, of a lot that would be sold by weight. */
     private double weightLossValue() {
-        double at = Math.min(sheet.clock().leavesS(), history.timeS(history.size() - 1));
-        double lost = Math.max(0, history.massKg(0) - massAt(at));
+        double lost = Math.max(0, history.massKg(0) - massAtLeaving(sheet, history));
         return sheet.plan().market().pricePerKg() * lost;
     }
 
-    private double massAt(double atS) {
+    static double massAtLeaving(LotSheet sheet, LotHistory history) {
+        double atS = Math.min(sheet.clock().leavesS(), history.timeS(history.size() - 1));
         double mass = history.massKg(0);
         for (int i = 0; i < history.size() && history.timeS(i) <= atS; i++) {
             mass = history.massKg(i);

@@ -258,6 +258,25 @@ final class StoreModel {
         return HeatModel.run(Averaged.of(run), Progress.SILENT);
     }
 
+    /**
+     * Sketches one chamber otherwise set, with other lots and more heat in it than the plan says,
+     * its neighbours at their settings.
+     *
+     * @param as the chamber
+     * @param stays what stands in it
+     * @param heatW more heat in it at all times, W
+     */
+    Course sketch(ChamberPlan as, List<Stay> stays, double heatW) {
+        ChamberRun run =
+                run(as, Draw.MEDIAN, plan.durationS(), startAir())
+                        .withStays(stays)
+                        .withDoorMode(DoorMode.SKETCHED)
+                        .withControlMode(ControlMode.MODULATING);
+        ChamberRun warmer = run.withEnclosure(Averaged.warmed(run.enclosure(), heatW));
+        ChamberRun even = Averaged.of(warmer);
+        return HeatModel.run(even.withStart(warmed(even)), Progress.SILENT);
+    }
+
     /** Runs one chamber with the air held ideally at its setting: what it takes is the load. */
     Course ideal(ChamberPlan chamber, double durationS, Map<String, Course> plain) {
         ChamberRun run =
@@ -308,7 +327,7 @@ final class StoreModel {
         return inAir(stay, blast, durationS).history();
     }
 
-    private LotCourse inAir(Stay stay, AirSeries air, double durationS) {
+    LotCourse inAir(Stay stay, AirSeries air, double durationS) {
         return HeatModel.runInGivenAir(stay, air, plan.site(), Factors.PLAIN, durationS);
     }
 

@@ -1,6 +1,7 @@
 package org.wardon.files.forecast;
 
 import java.util.List;
+import java.util.OptionalDouble;
 
 /**
  * The answer of {@code place}.
@@ -8,10 +9,20 @@ import java.util.List;
  * @param placing version of the format, 1
  * @param chambers what goes where
  * @param unplaced lots for which no place was found
- * @param value value kept net of energy, currency
- * @param bound no placing can be worth more, currency
+ * @param value value kept net of energy as the forecast of this placing tells it, currency
+ * @param bound no placing can be worth more by what is known of the chambers, currency
  * @param gapPct how far the value is below the bound, percent of the bound
- * @param because why each lot stands where it stands
+ * @param because why each lot stands where it stands, and what other chambers would cost it
+ * @param wish what was sought
+ * @param assumedValue the value as the search had assumed it, currency
+ * @param presentValue the value of the plan's own arrangement, lots without a chamber left out,
+ *     currency
+ * @param proven whether the search was complete
+ * @param told the gap in plain words
+ * @param moves lots that stand elsewhere than the plan has them
+ * @param changes what is dialled otherwise than in the plan
+ * @param worth what one more chamber or one kelvin would be worth
+ * @param notes what else is to be known, cautions among it
  */
 public record PlaceAnswer(
         int placing,
@@ -20,7 +31,16 @@ public record PlaceAnswer(
         double value,
         double bound,
         double gapPct,
-        List<Choice> because) {
+        List<Choice> because,
+        String wish,
+        double assumedValue,
+        double presentValue,
+        boolean proven,
+        String told,
+        List<Change> moves,
+        List<Change> changes,
+        List<Worth> worth,
+        List<Because> notes) {
     /** Version of the format. */
     public static final int VERSION = 1;
 
@@ -29,6 +49,10 @@ public record PlaceAnswer(
         chambers = List.copyOf(chambers);
         unplaced = List.copyOf(unplaced);
         because = List.copyOf(because);
+        moves = List.copyOf(moves);
+        changes = List.copyOf(changes);
+        worth = List.copyOf(worth);
+        notes = List.copyOf(notes);
     }
 
     /**
@@ -36,9 +60,13 @@ public record PlaceAnswer(
      *
      * @param id its id
      * @param setting what to dial in
+     * @param off whether it is switched off
+     * @param airC mean of its air in the forecast, °C
      * @param lots ids of its lots
+     * @param text why it is set so
      */
-    public record Placed(String id, Dial setting, List<String> lots) {
+    public record Placed(
+            String id, Dial setting, boolean off, double airC, List<String> lots, String text) {
         /** Copies the list. */
         public Placed {
             lots = List.copyOf(lots);
@@ -54,6 +82,24 @@ public record PlaceAnswer(
     public record Dial(double temperatureC, double humidityPct) {}
 
     /**
+     * Something that is to be otherwise than in the plan.
+     *
+     * @param subject id of a lot or chamber
+     * @param text the sentence
+     */
+    public record Change(String subject, String text) {}
+
+    /**
+     * What something would be worth by what is assumed.
+     *
+     * @param subject id of a chamber
+     * @param what {@code one-more-chamber}, {@code kelvin-colder} or {@code kelvin-warmer}
+     * @param value value gained, currency
+     * @param text the sentence
+     */
+    public record Worth(String subject, String what, double value, String text) {}
+
+    /**
      * A lot without a place.
      *
      * @param lot its id
@@ -66,7 +112,17 @@ public record PlaceAnswer(
      *
      * @param lot its id
      * @param chamber the chamber spoken of
+     * @param here whether it stands there
+     * @param costDays days it would lose there, where it does not stand; below 0 for a gain; null
+     *     where it cannot stand there
+     * @param costValue value it would lose there, likewise, currency
      * @param text the sentence
      */
-    public record Choice(String lot, String chamber, String text) {}
+    public record Choice(
+            String lot,
+            String chamber,
+            boolean here,
+            OptionalDouble costDays,
+            OptionalDouble costValue,
+            String text) {}
 }

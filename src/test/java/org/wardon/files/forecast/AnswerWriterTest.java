@@ -165,8 +165,26 @@ class AnswerWriterTest {
                         .readTree(
                                 AnswerWriter.json(
                                         new PlaceAnswer(
-                                                1, List.of(), List.of(), 9, 10, 10, List.of())));
-        assertNames("placing chambers unplaced value bound gapPct because", place);
+                                                1,
+                                                List.of(),
+                                                List.of(),
+                                                9,
+                                                10,
+                                                10,
+                                                List.of(),
+                                                "most-value",
+                                                9.5,
+                                                8,
+                                                true,
+                                                "",
+                                                List.of(),
+                                                List.of(),
+                                                List.of(),
+                                                List.of())));
+        assertNames(
+                "placing chambers unplaced value bound gapPct because wish assumedValue"
+                        + " presentValue proven told moves changes worth notes",
+                place);
     }
 
     private static void assertNames(String expected, JsonNode object) {

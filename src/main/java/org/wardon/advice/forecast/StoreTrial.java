@@ -1,0 +1,217 @@
+package org.wardon.advice.forecast;
+
+import java.util.ArrayList;
+import java.util.Arrays;
+import java.util.HashMap;
+import java.util.LinkedHashSet;
+import java.util.List;
+import java.util.Map;
+import java.util.Objects;
+import java.util.Optional;
+import java.util.Set;
+import org.wardon.air.Timeline;
+import org.wardon.air.Weather;
+import org.wardon.heat.AirSeries;
+import org.wardon.heat.Course;
+import org.wardon.heat.LotCourse;
+import org.wardon.heat.Stay;
+import org.wardon.keeping.Draw;
+import org.wardon.keeping.Draws;
+import org.wardon.keeping.Fate;
+import org.wardon.lots.Lot;
+import org.wardon.lots.LotHistory;
+import org.wardon.plan.ChamberPlan;
+import org.wardon.plan.StorePlan;
+import org.wardon.reference.ReferenceBook;
+
+/**
+ * A store under question: its chambers tried at other settings and loads, its lots in other air,
+ * and the whole of it with other chambers or another placing.
+ */
+public final class StoreTrial {
+    private static final double LEAST_KG = 0.1;
+
+    private final StoreModel model;
+    private final Fates fates;
+    private final List<TrialLot> lots;
+    private final List<Draw> draws;
+
+    /** The draw whose body stands for each draw's. */
+    private final List<Draw> standsFor;
+
+    private final Set<Draw> typical;
+
+    private StoreTrial(StoreModel model) {
+        this.model = model;
+        fates = new Fates(model);
+        lots = model.sheets().stream().map(TrialLot::new).toList();
+        draws = Draws.seeded(model.plan().seed(), StoreRun.DRAWS);
+        standsFor = TypicalBodies.of(draws);
+        typical = new LinkedHashSet<>(standsFor);
+    }
+
+    /**
+     * Prepares a plan to be asked about.
+     *
+     * @param plan the plan; lots may be without a chamber
+     * @param book the reference book
+     * @return the store
+     */
+    public static StoreTrial of(StorePlan plan, ReferenceBook book) {
+        Weather weather =
+                PlanWeather.prolonged(
+                        plan.weatherSource().weather(),
+                        plan.durationS(),
+                        StoreRun.MOST_BEYOND_DAYS);
+        return of(new StoreModel(plan, weather, new LotSheets(plan, weather, book).all()));
+    }
+
+    static StoreTrial of(StoreModel model) {
+        return new StoreTrial(model);
+    }
+
+    /**
+     * Returns the plan asked about.
+     *
+     * @return the plan
+     */
+    public StorePlan plan() {
+        return model.plan();
+    }
+
+    /**
+     * Returns its lots.
+     *
+     * @return all, in the order of the plan
+     */
+    public List<TrialLot> lots() {
+        return lots;
+    }
+
+    /**
+     * Returns the draws it is judged by, those of a forecast.
+     *
+     * @return the draws
+     */
+    public List<Draw> draws() {
+        return draws;
+    }
+
+    /**
+     * Sketches one chamber over the horizon, the air next door at its setting.
+     *
+     * @param as the chamber, set and built as it is to be tried
+     * @param with lots in it, as they come and go
+     * @param share share of each lot's mass that stands there, above 0
+     * @param heatW more heat in it at all times, W
+     * @return what it comes to, a row every three hours
+     */
+    public Course sketch(ChamberPlan as, List<TrialLot> with, double share, double heatW) {
+        List<Stay> stays = new ArrayList<>();
+        for (TrialLot one : with) {
+            Stay whole = one.sheet().stay(Draw.MEDIAN);
+            stays.add(
+                    new Stay(
+                            ofMass(whole.lot(), share),
+                            whole.arrivesS(),
+                            whole.leavesS(),
+                            whole.pulpC(),
+                            whole.freshUntilS(),
+                            0));
+        }
+        return model.sketch(as, stays, heatW);
+    }
+
+    private static Lot ofMass(Lot lot, double share) {
+        return new Lot(
+                lot.id(),
+                Math.max(LEAST_KG, share * lot.massKg()),
+                lot.item(),
+                lot.packing(),
+                lot.respiration(),
+                lot.transpiration());
+    }
+
+    /**
+     * Puts a lot into air.
+     *
+     * @param lot the lot
+     * @param air the air, over the horizon
+     * @param ppm ethylene in it, µL/L
+     * @return what it comes to
+     */
+    public LotInAir in(TrialLot lot, AirSeries air, double ppm) {
+        LotSheet sheet = lot.sheet();
+        double endS = model.plan().durationS();
+        LotCourse middle = model.inAir(sheet.stay(Draw.MEDIAN), air, endS);
+        Map<Draw, LotHistory> bodies = new HashMap<>();
+        for (Draw draw : typical) {
+            bodies.put(draw, model.inAir(sheet.stay(draw), air, endS).history());
+        }
+        List<Fate> sold = new ArrayList<>();
+        for (int d = 0; d < draws.size(); d++) {
+            LotHistory here = Objects.requireNonNull(bodies.get(standsFor.get(d)));
+            LotHistory there = fates.inOtherAir(sheet, here, ppm);
+            sold.add(sheet.model().follow(there, draws.get(d)).brief());
+        }
+        return new LotInAir(sheet, middle, sold);
+    }
+
+    /**
+     * Returns the air a chamber made, as lots are put into it.
+     *
+     * @param course the chamber, whose temperature is taken
+     * @param loaded a run of it with like rows, whose humidity is taken
+     * @param warmerK how much warmer it is taken to be, K, at the same water in it
+     * @return the air in rows of three hours
+     */
+    public static AirSeries air(Course course, Course loaded, double warmerK) {
+        return TrialAir.of(course, loaded, warmerK);
+    }
+
+    /**
+     * Runs the store in full, with other chambers or its lots placed otherwise.
+     *
+     * @param otherwise a plan of the same lots and times
+     * @return what is kept and what it costs, as the forecast tells it
+     */
+    public Tried run(StorePlan otherwise) {
+        return new TrialRun(model.placed(otherwise)).run();
+    }
+
+    /**
+     * Returns the hours of outdoor weather of the horizon, as means of days.
+     *
+     * @return {@code [day]}, °C
+     */
+    public double[] outdoorC() {
+        int days = days();
+        double[] mean = new double[days];
+        int[] count = new int[days];
+        for (int h = 0; h < plan().durationS() / Timeline.HOUR_S; h++) {
+            mean[h / 24] += model.weather().temperatureC(h);
+            count[h / 24]++;
+        }
+        Arrays.setAll(mean, day -> mean[day] / Math.max(1, count[day]));
+        return mean;
+    }
+
+    /**
+     * Returns the days of the horizon.
+     *
+     * @return count, the last perhaps not whole
+     */
+    public int days() {
+        return (int) Math.ceil(plan().durationS() / Timeline.DAY_S - 1e-9);
+    }
+
+    /**
+     * Returns a lot.
+     *
+     * @param id its id
+     * @return the lot; empty where the plan has none of that id
+     */
+    public Optional<TrialLot> lot(String id) {
+        return lots.stream().filter(lot -> lot.id().equals(id)).findFirst();
+    }
+}

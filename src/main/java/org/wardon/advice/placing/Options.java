@@ -1,0 +1,323 @@
+package org.wardon.advice.placing;
+
+import java.util.ArrayList;
+import java.util.Arrays;
+import java.util.Comparator;
+import java.util.HashMap;
+import java.util.LinkedHashMap;
+import java.util.List;
+import java.util.Map;
+import java.util.Objects;
+import java.util.stream.IntStream;
+import org.wardon.advice.forecast.LotInAir;
+import org.wardon.advice.forecast.StoreTrial;
+import org.wardon.advice.forecast.TrialLot;
+import org.wardon.cooling.Cooler;
+import org.wardon.cooling.Setting;
+import org.wardon.heat.AirSeries;
+import org.wardon.heat.Course;
+import org.wardon.heat.Hours;
+import org.wardon.keeping.Paces;
+import org.wardon.plan.ChamberPlan;
+import org.wardon.plan.Conflict;
+import org.wardon.plan.EthyleneScrub;
+
+/** Works out what each chamber can make and what each lot comes to in it. */
+final class Options {
+    private static final double J_PER_KWH = 3.6e6;
+    private static final double W_DAY_J = 86_400;
+    private static final double LEAST_EXCHANGE_M3H = 0.05;
+
+    /** Lots that stand for all where the humidity of a loaded chamber is sketched. */
+    private static final int TYPICAL_LOTS = 10;
+
+    /** Share of its capacity that a chamber is loaded with there. */
+    private static final double TYPICAL_LOAD = 0.5;
+
+    /** Chambers whose humidity differs by less are one air to lots, percent. */
+    private static final double HUMIDITY_STEP_PCT = 2.5;
+
+    /** A mean of a day may stand so far above the setting beside the band and still hold, K. */
+    private static final double BESIDE_BAND_K = 0.5;
+
+    /** Distance every shell keeps from freezing, K. */
+    private static final double FREEZING_MARGIN_K = 0.5;
+
+    /** How much warmer lots may make a chamber that keeps no temperature, K. */
+    private static final double[] RISES_K = {0.5, 1.5, 3, 6};
+
+    private final StoreTrial trial;
+    private final Temperatures temperatures;
+    private final Map<String, List<Paces>> paces = new LinkedHashMap<>();
+    private final Map<String, Reach> reaches = new LinkedHashMap<>();
+    private final Map<Air, List<Cell.Alone>> airs = new HashMap<>();
+    private final List<Double> prices;
+
+    Options(StoreTrial trial) {
+        this.trial = trial;
+        temperatures = Temperatures.of(trial);
+        prices = Worth.prices(trial.lots());
+        List<List<Paces>> all =
+                trial.lots().parallelStream()
+                        .map(lot -> trial.draws().stream().map(lot.model()::paces).toList())
+                        .toList();
+        for (int i = 0; i < all.size(); i++) {
+            paces.put(trial.lots().get(i).id(), all.get(i));
+        }
+        List<Reach> found = trial.plan().chambers().parallelStream().map(this::reach).toList();
+        for (int c = 0; c < found.size(); c++) {
+            reaches.put(trial.plan().chambers().get(c).id(), found.get(c));
+        }
+    }
+
+    private Reach reach(ChamberPlan chamber) {
+        return Reach.of(
+                trial,
+                chamber.switchedOn(),
+                temperatures.coldestC(chamber.setting().temperatureC()));
+    }
+
+    Reach reach(String chamberId) {
+        return Objects.requireNonNull(reaches.get(chamberId), chamberId);
+    }
+
+    /** All options of all chambers, those of one chamber by temperature. */
+    Map<String, List<Option>> all() {
+        List<Dial> dials = new ArrayList<>();
+        for (ChamberPlan chamber : trial.plan().chambers()) {
+            ChamberPlan on = chamber.switchedOn();
+            double nowC = on.setting().temperatureC();
+            List<Double> tried =
+                    keeps(on) ? temperatures.in(nowC, reach(on.id()).lowestC()) : List.of(nowC);
+            tried.forEach(c -> dials.add(new Dial(on, c)));
+        }
+        Map<String, List<Option>> options = new LinkedHashMap<>();
+        trial.plan().chambers().forEach(c -> options.put(c.id(), new ArrayList<>()));
+        for (Option option : of(dials)) {
+            Objects.requireNonNull(options.get(option.chamber().id())).add(option);
+        }
+        return options;
+    }
+
+    /** A chamber to be tried at a setting. */
+    record Dial(ChamberPlan on, double settingC) {}
+
+    /** The options of chambers at settings, in their order. */
+    List<Option> of(List<Dial> dials) {
+        List<Sketch> sketches =
+                dials.parallelStream().flatMap(dial -> sketches(dial).stream()).toList();
+        learn(sketches);
+        return sketches.stream().map(this::option).toList();
+    }
+
+    /** What is known of an option before lots are put into it. */
+    private record Sketch(
+            ChamberPlan set,
+            double riseK,
+            boolean held,
+            AirSeries air,
+            Option.Figures figures,
+            List<Double> takesW) {
+        Air like() {
+            return new Air(figures.meanC(), humidityStep(figures));
+        }
+    }
+
+    private List<Sketch> sketches(Dial dial) {
+        Setting now = dial.on().setting();
+        ChamberPlan set =
+                dial.on()
+                        .withSetting(
+                                new Setting(
+                                        dial.settingC(),
+                                        now.bandK(),
+                                        now.humidityPct(),
+                                        now.stageK()));
+        Course empty = trial.sketch(set, List.of(), 1, 0);
+        Loaded loaded = loaded(set, empty);
+        List<Sketch> sketches = new ArrayList<>();
+        for (double riseK : holds(set) ? new double[] {0} : RISES_K) {
+            sketches.add(sketch(set, empty, loaded, riseK));
+        }
+        return sketches;
+    }
+
+    private static boolean keeps(ChamberPlan chamber) {
+        return chamber.coolers().stream().anyMatch(cooler -> cooler.following().isPresent());
+    }
+
+    private static boolean holds(ChamberPlan chamber) {
+        return chamber.coolers().stream().anyMatch(Cooler::holdsBand);
+    }
+
+    /** Puts the lots into steady airs that are not known yet. */
+    private void learn(List<Sketch> sketches) {
+        List<Air> asked =
+                sketches.stream()
+                        .filter(Sketch::held)
+                        .map(Sketch::like)
+                        .filter(air -> !airs.containsKey(air))
+                        .distinct()
+                        .toList();
+        List<List<Cell.Alone>> found =
+                asked.parallelStream().map(air -> alone(air.series(), air.atC())).toList();
+        for (int i = 0; i < asked.size(); i++) {
+            airs.put(asked.get(i), found.get(i));
+        }
+    }
+
+    private Option option(Sketch sketch) {
+        List<Cell.Alone> alone =
+                sketch.held()
+                        ? Objects.requireNonNull(airs.get(sketch.like()))
+                        : alone(sketch.air(), sketch.figures().meanC());
+        return new Option(
+                sketch.set(),
+                sketch.riseK(),
+                sketch.air(),
+                sketch.figures(),
+                sketch.takesW(),
+                cells(sketch.set(), sketch.figures(), alone));
+    }
+
+    /** A chamber with lots in it, for humidity and for what a watt of them costs. */
+    private record Loaded(Course course, double costPerWDay) {}
+
+    private Loaded loaded(ChamberPlan set, Course empty) {
+        List<TrialLot> typical =
+                trial.lots().stream()
+                        .filter(lot -> lot.leavesS() > 0)
+                        .filter(lot -> lot.hereFromS() < trial.plan().durationS())
+                        .sorted(
+                                Comparator.comparingDouble((TrialLot lot) -> -lot.plan().massKg())
+                                        .thenComparing(TrialLot::id))
+                        .limit(TYPICAL_LOTS)
+                        .toList();
+        double mass = typical.stream().mapToDouble(lot -> lot.plan().massKg()).sum();
+        if (mass <= 0) {
+            return new Loaded(empty, 0);
+        }
+        double share = Math.min(1, TYPICAL_LOAD * set.capacityKg() / mass);
+        Course course = trial.sketch(set, typical, share, 0);
+        double heat = course.heat().fieldHeat() + course.heat().respiration();
+        double more = course.heat().electricity() - empty.heat().electricity();
+        double perJ = heat > 0 ? Math.max(0, more) / heat : 0;
+        return new Loaded(course, perJ * W_DAY_J / J_PER_KWH * price(set));
+    }
+
+    private double price(ChamberPlan chamber) {
+        return chamber.power().solar().isPresent() ? 0 : trial.plan().prices().energyPerKWh();
+    }
+
+    private Sketch sketch(ChamberPlan set, Course empty, Loaded loaded, double riseK) {
+        Hours hours = empty.hours();
+        double scrubbed = set.ethyleneScrub().map(EthyleneScrub::cleanedM3s).orElse(0.0);
+        double[] mean = DayMeans.of(empty, trial.days());
+        boolean held = held(set, mean);
+        double meanC =
+                held ? set.setting().temperatureC() : DayMeans.whole(hours, hours::airC) + riseK;
+        double exchange = 3_600 * (DayMeans.whole(hours, hours::exchangeM3s) + scrubbed);
+        Option.Figures figures =
+                new Option.Figures(
+                        meanC,
+                        humidityPct(loaded.course()),
+                        Math.max(LEAST_EXCHANGE_M3H, exchange),
+                        Math.max(0, empty.heat().electricity()) / J_PER_KWH * price(set),
+                        loaded.costPerWDay());
+        AirSeries air =
+                held
+                        ? new Air(meanC, humidityStep(figures)).series()
+                        : StoreTrial.air(empty, loaded.course(), riseK);
+        return new Sketch(set, riseK, held, air, figures, takes(set, mean, riseK));
+    }
+
+    /** Whether the chamber keeps its setting all the time while it is empty. */
+    private static boolean held(ChamberPlan set, double[] mean) {
+        double off = set.setting().bandK() + BESIDE_BAND_K;
+        double settingC = set.setting().temperatureC();
+        return holds(set)
+                && Arrays.stream(mean).allMatch(c -> c <= settingC + off)
+                && Arrays.stream(mean).average().orElse(settingC) >= settingC - off;
+    }
+
+    private static long humidityStep(Option.Figures figures) {
+        return Math.round(figures.humidityPct() / HUMIDITY_STEP_PCT);
+    }
+
+    /**
+     * A steady air. Chambers that keep the same setting at much the same humidity are one air to
+     * lots.
+     */
+    private record Air(double atC, long humidityStep) {
+        AirSeries series() {
+            return AirSeries.steady(atC, Math.min(1, humidityStep * HUMIDITY_STEP_PCT / 100));
+        }
+    }
+
+    static double humidityPct(Course course) {
+        return 100 * DayMeans.whole(course.hours(), i -> course.hours().humidityFraction(i));
+    }
+
+    private List<Double> takes(ChamberPlan set, double[] emptyC, double riseK) {
+        boolean keeps = keeps(set);
+        boolean holds = holds(set);
+        Reach reach = reach(set.id());
+        double settingC = set.setting().temperatureC();
+        return IntStream.range(0, trial.days())
+                .mapToObj(
+                        day -> {
+                            double at = keeps ? Math.max(emptyC[day], settingC) : emptyC[day];
+                            double beside = holds ? set.setting().bandK() + BESIDE_BAND_K : riseK;
+                            return Math.max(0, reach.takesW(day, at + beside));
+                        })
+                .toList();
+    }
+
+    /** What every lot comes to in air. */
+    List<Cell.Alone> alone(AirSeries air, double meanC) {
+        return trial.lots().parallelStream().map(lot -> alone(lot, air, meanC)).toList();
+    }
+
+    private Cell.Alone alone(TrialLot lot, AirSeries air, double meanC) {
+        double clean = trial.plan().ethylene().outdoorPpm();
+        LotInAir there = trial.in(lot, air, clean);
+        Taking taking =
+                Taking.of(
+                        lot,
+                        Objects.requireNonNull(paces.get(lot.id())),
+                        there,
+                        clean,
+                        meanC,
+                        ppm -> trial.in(lot, air, ppm));
+        return new Cell.Alone(lot, there, taking);
+    }
+
+    /** What every lot comes to in a chamber. */
+    List<Cell> cells(ChamberPlan set, Option.Figures figures, List<Cell.Alone> alone) {
+        List<Cell> cells = new ArrayList<>();
+        for (int l = 0; l < alone.size(); l++) {
+            Cell.Alone one = alone.get(l);
+            GivenHere giving = GivenHere.of(one.lot(), trial.draws(), figures);
+            Cell.Forbidden forbidden = forbidden(one.lot(), one.there(), set, figures);
+            cells.add(Cell.of(one, prices.get(l), forbidden, giving));
+        }
+        return cells;
+    }
+
+    private Cell.Forbidden forbidden(
+            TrialLot lot, LotInAir there, ChamberPlan set, Option.Figures figures) {
+        if (lot.model().uncured() && !set.coolers().isEmpty() && !accepts(set, Conflict.UNCURED)) {
+            return Cell.Forbidden.UNCURED;
+        }
+        double coldest = figures.meanC() - 0.5 * set.setting().bandK();
+        if (coldest < lot.model().freezingC() + FREEZING_MARGIN_K) {
+            return Cell.Forbidden.FREEZING;
+        }
+        return there.shareSound() > 0 ? Cell.Forbidden.NO : Cell.Forbidden.LOST;
+    }
+
+    boolean accepts(ChamberPlan chamber, Conflict conflict) {
+        return chamber.use().accepts().contains(conflict)
+                || trial.plan().wish().accepts().contains(conflict);
+    }
+}

@@ -1,0 +1,81 @@
+package org.wardon.files;
+
+import java.nio.file.Path;
+import java.util.Optional;
+import org.wardon.files.json.JsonEdit;
+import org.wardon.files.json.JsonPath;
+import org.wardon.plan.ChamberPlan;
+import org.wardon.plan.LotPlan;
+import org.wardon.plan.StorePlan;
+
+/**
+ * Writes a plan with other settings and chambers of lots, all else of the keeper's text untouched.
+ */
+public final class PlacedPlan {
+    private PlacedPlan() {}
+
+    /**
+     * Writes the plan of a placing.
+     *
+     * @param from the keeper's plan
+     * @param to where the other is written
+     * @param asked the plan as it was read from there
+     * @param placed the same with chambers and lots as proposed
+     * @throws org.wardon.errors.BadInput where the plan cannot be read any more
+     * @throws CannotWrite where the file cannot be written
+     */
+    public static void write(Path from, Path to, StorePlan asked, StorePlan placed) {
+        String text = TextFile.read(from, from.toString(), PlanReader.LARGEST_MB);
+        String changed = changed(text, asked, placed);
+        AtomicFile.write(to, out -> out.write(changed));
+    }
+
+    /**
+     * Returns the text of the plan of a placing.
+     *
+     * @param text the keeper's plan
+     * @param asked the plan as it was read from it
+     * @param placed the same with chambers and lots as proposed
+     * @return the changed text
+     */
+    static String changed(String text, StorePlan asked, StorePlan placed) {
+        JsonEdit edit = JsonEdit.of(text);
+        for (int i = 0; i < asked.chambers().size(); i++) {
+            edit = chamber(edit, i, asked.chambers().get(i), placed.chambers().get(i));
+        }
+        for (int i = 0; i < asked.lots().size(); i++) {
+            edit = lot(edit, i, asked.lots().get(i), placed.lots().get(i));
+        }
+        return edit.text();
+    }
+
+    private static JsonEdit chamber(JsonEdit edit, int i, ChamberPlan was, ChamberPlan is) {
+        JsonEdit changed = edit;
+        if (was.setting().temperatureC() != is.setting().temperatureC()) {
+            String value = Inputs.plain(is.setting().temperatureC());
+            changed = changed.set(path("chambers", i, "setting", "temperatureC"), value);
+        }
+        if (was.off() && !is.off()) {
+            changed = changed.remove(path("chambers", i, "off"));
+        }
+        return !was.off() && is.off() ? changed.set(path("chambers", i, "off"), "true") : changed;
+    }
+
+    private static JsonEdit lot(JsonEdit edit, int i, LotPlan was, LotPlan is) {
+        Optional<String> to = is.chamber();
+        if (was.chamber().equals(to)) {
+            return edit;
+        }
+        JsonPath path = path("lots", i, "chamber");
+        return to.isPresent() ? edit.set(path, JsonEdit.quoted(to.get())) : edit.remove(path);
+    }
+
+    private static JsonPath path(String list, int index, String... names) {
+        JsonPath path =
+                JsonPath.ROOT.then(new JsonPath.Member(list)).then(new JsonPath.Item(index));
+        for (String name : names) {
+            path = path.then(new JsonPath.Member(name));
+        }
+        return path;
+    }
+}
