@@ -22,7 +22,7 @@ import org.jspecify.annotations.Nullable;
 public final class Launcher {
     /** Verbs that compute for seconds. */
     private static final Set<String> LONG =
-            Set.of("advise", "demo", "place", "receive", "section", "open");
+            Set.of("advise", "compare", "demo", "place", "receive", "section", "open");
 
     private static final List<String> MACHINE =
             List.of("-XX:+UseSerialGC", "-Xms64m", "-XX:TieredStopAtLevel=1");

@@ -43,6 +43,7 @@ public final class Main implements Runnable {
                     Look.class,
                     Why.class,
                     Section.class,
+                    Compare.class,
                     Size.class,
                     SchemaVerb.class,
                     Demo.class,

@@ -151,20 +151,10 @@ public record StorePlan(
      * @return the copy
      */
     public StorePlan withChamber(ChamberPlan other) {
-        return new StorePlan(
-                name,
-                site,
-                weatherSource,
-                from,
-                days,
+        return with(
                 chambers.stream()
                         .map(chamber -> chamber.id().equals(other.id()) ? other : chamber)
                         .toList(),
-                lots,
-                without,
-                seed,
-                prices,
-                ethylene,
-                assumed);
+                lots);
     }
 }
