@@ -119,11 +119,14 @@ public final class Guard {
     }
 
     private static String token(Context http) {
+        if (http.contentLength() > Uploads.LARGEST_REQUEST) {
+            throw new Refusal(413, "too-large");
+        }
         @Nullable String header = http.header(TOKEN_HEADER);
         if (header != null) {
             return header;
         }
-        return Optional.ofNullable(http.formParam(TOKEN_FIELD)).orElse("");
+        return Optional.ofNullable(Uploads.read(() -> http.formParam(TOKEN_FIELD))).orElse("");
     }
 
     /**

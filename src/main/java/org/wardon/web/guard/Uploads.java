@@ -8,6 +8,8 @@ import java.util.LinkedHashMap;
 import java.util.List;
 import java.util.Locale;
 import java.util.Map;
+import java.util.function.Supplier;
+import org.jspecify.annotations.Nullable;
 import org.wardon.errors.BadInput;
 
 /**
@@ -70,6 +72,25 @@ public final class Uploads {
             }
         }
         return brought;
+    }
+
+    /**
+     * Reads a form, whose parts the server counts and weighs as it takes them in.
+     *
+     * @throws Refusal where one is too large, or the form is none
+     */
+    static @Nullable String read(Supplier<@Nullable String> field) {
+        try {
+            return field.get();
+        } catch (Exception e) {
+            // What the server throws here is not declared: the reason stands at the bottom.
+            for (Throwable cause = e; cause != null; cause = cause.getCause()) {
+                if (cause instanceof IllegalStateException) {
+                    throw new Refusal(413, "too-large");
+                }
+            }
+            throw new Refusal(400, "not-understood");
+        }
     }
 
     /** The last part of a name, without anything but letters that can be shown. */
