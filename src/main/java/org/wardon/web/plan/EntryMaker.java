@@ -5,6 +5,7 @@ import java.util.List;
 import java.util.Map;
 import java.util.Optional;
 import java.util.OptionalDouble;
+import java.util.Set;
 import java.util.regex.Pattern;
 import org.wardon.errors.Fault;
 import org.wardon.files.form.FormPlace;
@@ -24,6 +25,31 @@ final class EntryMaker {
                             Pattern.compile("|\\d{4}-\\d\\d-\\d\\dT\\d\\d:\\d\\d(:\\d\\d)?"),
                     "date", Pattern.compile("|\\d{4}-\\d\\d-\\d\\d"),
                     "time", Pattern.compile("|\\d\\d:\\d\\d"));
+
+    /** Names a keeper often gives; all others are folded away until they are. */
+    private static final Set<String> OFTEN =
+            Set.of(
+                    "name",
+                    "lots",
+                    "buildUps",
+                    "chamber",
+                    "package",
+                    "arrives",
+                    "wantedDays",
+                    "harvested",
+                    "ripeness",
+                    "door",
+                    "cooling",
+                    "layers",
+                    "buildUp",
+                    "beyond",
+                    "humidityPct",
+                    "capacityKg",
+                    "material",
+                    "withoutChamber");
+
+    /** So many are not worth folding. */
+    private static final int FEW = 2;
 
     private final PlanForm form;
     private final List<Fault> faults;
@@ -70,16 +96,35 @@ final class EntryMaker {
         if (place.shape() instanceof Shape.Choice choice) {
             return List.of(choice(place, choice, key, ""));
         }
+        return place.shape() instanceof Shape.Group group ? members(place, group, key) : List.of();
+    }
+
+    /** What is given, needed or often wanted comes first; the rest is folded away. */
+    private List<EntryView> members(FormPlace place, Shape.Group group, String key) {
         List<EntryView> entries = new ArrayList<>();
-        if (place.shape() instanceof Shape.Group group) {
-            for (FormPlace part : place.places()) {
-                if (!(part.shape() instanceof Shape.Fixed)) {
-                    String below = key.isEmpty() ? part.name() : key + "." + part.name();
-                    entries.add(entry(part, below, hint(group, part.name())));
-                }
+        List<EntryView> folded = new ArrayList<>();
+        for (FormPlace part : place.places()) {
+            if (!(part.shape() instanceof Shape.Fixed)) {
+                String below = key.isEmpty() ? part.name() : key + "." + part.name();
+                EntryView entry = entry(part, below, hint(group, part.name()));
+                (shown(part) ? entries : folded).add(entry);
             }
         }
+        if (folded.size() > FEW) {
+            String count = String.valueOf(folded.size());
+            JsonPath more = place.path().then(new JsonPath.Member("more"));
+            entries.add(box("more", more, page.say("edit.more", count), "", folded, List.of()));
+        } else {
+            entries.addAll(folded);
+        }
         return entries;
+    }
+
+    private boolean shown(FormPlace part) {
+        return part.given()
+                || part.required()
+                || OFTEN.contains(part.name())
+                || !below(part.path()).isEmpty();
     }
 
     private static String hint(Shape.Group group, String name) {
@@ -228,7 +273,8 @@ final class EntryMaker {
             String below = option.by() == Shape.By.WORD ? "" : key + "." + option.word();
             String label =
                     words.has("label." + below) ? words.label(below) : words.word(option.word());
-            List<EntryView> within = within(place.ofOption(option), option, below);
+            boolean typed = option.by() == Shape.By.TYPE;
+            List<EntryView> within = within(place.ofOption(option), option, typed ? key : below);
             options.add(option(place.path(), name, option.word(), label, taken, within));
         }
         return new EntryView(
