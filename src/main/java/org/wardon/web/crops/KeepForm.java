@@ -3,6 +3,7 @@ package org.wardon.web.crops;
 import java.util.ArrayList;
 import java.util.List;
 import java.util.Locale;
+import java.util.Map;
 import java.util.Optional;
 import java.util.OptionalDouble;
 import java.util.function.Function;
@@ -26,6 +27,23 @@ final class KeepForm {
     static final String ASKS = "keep-";
 
     private static final double ALL_PCT = 100;
+
+    /** What a field accepts. */
+    private record Range(double low, double high) {
+        boolean holds(double value) {
+            return value >= low && value <= high;
+        }
+    }
+
+    /** As {@code keep} accepts, told in the person's own unit. */
+    private static final Map<String, Range> RANGES =
+            Map.of(
+                    "at", new Range(-5, 50),
+                    "humidity", new Range(0, 100),
+                    "days", new Range(0.05, 730),
+                    "used", new Range(0, 100),
+                    "ripe", new Range(0, 120),
+                    "ethylene", new Range(0, 1000));
 
     private final String prefix;
     private final Commodity commodity;
@@ -121,8 +139,29 @@ final class KeepForm {
                             "",
                             page.say("crop.no-number", typed),
                             page.say("crop.give-number")));
+        } else if (!range(name).holds(number.getAsDouble())) {
+            faults.add(
+                    new Fault(
+                            option(name),
+                            "",
+                            page.say("crop.out-of-range", typed),
+                            page.say("crop.give-within", low(name), high(name))));
         }
         return number;
+    }
+
+    private static Range range(String name) {
+        return Optional.ofNullable(RANGES.get(name)).orElseThrow();
+    }
+
+    private String low(String name) {
+        double low = range(name).low();
+        return name.equals("at") ? figures.typedTemperature(low) : figures.typed(low);
+    }
+
+    private String high(String name) {
+        double high = range(name).high();
+        return name.equals("at") ? figures.typedTemperature(high) : figures.typed(high);
     }
 
     private Ripeness ripeness() {
@@ -234,30 +273,22 @@ final class KeepForm {
 
     List<FieldView> fields(List<Fault> found) {
         List<FieldView> fields = new ArrayList<>();
-        fields.add(field("at", figures.temperatureUnit(), "-5", "50", found, true));
-        fields.add(field("humidity", "%", "0", "100", found, false));
-        fields.add(field("days", page.say("crop.unit-days"), "0.05", "730", found, false));
-        fields.add(field("used", "%", "0", "100", found, false));
+        fields.add(field("at", figures.temperatureUnit(), found).asNeeded());
+        fields.add(field("humidity", "%", found));
+        fields.add(field("days", page.say("crop.unit-days"), found));
+        fields.add(field("used", "%", found));
         if (prefix.equals(ASKS) && !commodity.keeping().ripening().isEmpty()) {
-            fields.add(field("ripe", page.say("crop.unit-days"), "0", "120", found, false));
-            fields.add(field("ethylene", "ppm", "0", "1000", found, false));
+            fields.add(field("ripe", page.say("crop.unit-days"), found));
+            fields.add(field("ethylene", "ppm", found));
         }
         return fields;
     }
 
-    private FieldView field(
-            String name, String unit, String low, String high, List<Fault> found, boolean needed) {
-        boolean degrees = name.equals("at");
-        String from = degrees ? shown(low) : figures.text(low);
-        String to = degrees ? shown(high) : figures.text(high);
+    private FieldView field(String name, String unit, List<Fault> found) {
         FieldView field =
                 FieldView.number(prefix + name, page.say("keep." + name), given.apply(name), unit)
-                        .withHint(page.say("keep.hint-" + name, from, to));
-        return withFault(needed ? field.asNeeded() : field, option(name), found);
-    }
-
-    private String shown(String celsius) {
-        return figures.typedTemperature(Double.parseDouble(celsius));
+                        .withHint(page.say("keep.hint-" + name, low(name), high(name)));
+        return withFault(field, option(name), found);
     }
 
     static FieldView withFault(FieldView field, String option, List<Fault> found) {

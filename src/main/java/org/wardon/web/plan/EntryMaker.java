@@ -171,7 +171,9 @@ final class EntryMaker {
         }
         List<EntryView> items = new ArrayList<>();
         for (FormPlace item : place.places()) {
-            String name = words.label(key) + " " + (items.size() + 1);
+            String one = "edit.one-" + place.name();
+            String name =
+                    (page.has(one) ? page.say(one) : words.label(key)) + " " + (items.size() + 1);
             items.add(
                     box(
                             "item",

@@ -31,7 +31,13 @@ final class FaceViews {
         }
         FaceReport face = found.get();
         List<String> told = new ArrayList<>();
-        told.add(page.say("face.u", number(face.wattsM2K(), 3), number(face.upliftedWm2K(), 3)));
+        told.add(
+                face.upliftedWm2K() > face.wattsM2K()
+                        ? page.say(
+                                "face.u",
+                                number(face.wattsM2K(), 3),
+                                number(face.upliftedWm2K(), 3))
+                        : page.say("face.u-alone", number(face.wattsM2K(), 3)));
         if (face.wattsM2K() > AS_NEW * face.asNewWm2K()) {
             told.add(page.say("face.as-new", number(face.asNewWm2K(), 3)));
         }
