@@ -7,6 +7,7 @@ import java.util.function.Consumer;
 import org.wardon.errors.BadInput;
 import org.wardon.web.api.PlansApi;
 import org.wardon.web.crops.CropsPage;
+import org.wardon.web.door.DoorPage;
 import org.wardon.web.guard.Guard;
 import org.wardon.web.guard.Refusal;
 import org.wardon.web.pages.AllChambersPage;
@@ -16,6 +17,7 @@ import org.wardon.web.pages.ForecastRoutes;
 import org.wardon.web.pages.PlansPage;
 import org.wardon.web.pages.PreferencesPage;
 import org.wardon.web.pages.Press;
+import org.wardon.web.pages.Room;
 import org.wardon.web.pages.StaticFiles;
 import org.wardon.web.pages.Troubles;
 import org.wardon.web.plan.PlanEditor;
@@ -40,6 +42,7 @@ final class Routes {
         frame();
         plans();
         forecast();
+        door();
         crops();
         editor();
         api();
@@ -78,6 +81,16 @@ final class Routes {
         routes.get("/plan/{plan}/air/{chamber}", call(forecast::air));
         routes.post("/plan/{plan}/forecast/cancel", call(forecast::cancel));
         routes.post("/plan/{plan}/forecast/again", call(forecast::again));
+    }
+
+    private void door() {
+        DoorPage door = new DoorPage(bench, press);
+        AllChambersPage chambers = new AllChambersPage(bench, press);
+        routes.get("/door", call(http -> chambers.home(http, Room.DOOR)));
+        routes.get("/crops-like", call(door::suggest));
+        routes.get("/plan/{plan}/door", call(door::show));
+        routes.get("/plan/{plan}/door/progress", call(door::progress));
+        routes.post("/plan/{plan}/door/put", call(door::put));
     }
 
     private void crops() {

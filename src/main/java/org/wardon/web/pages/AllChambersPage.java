@@ -36,6 +36,17 @@ public final class AllChambersPage {
      * @param call the request
      */
     public void home(Call call) {
+        home(call, Room.CHAMBERS);
+    }
+
+    /**
+     * Sends people on to a room of the plan they last looked at, else of the last changed, else to
+     * all plans.
+     *
+     * @param call the request
+     * @param room the room
+     */
+    public void home(Call call, Room room) {
         List<KeptPlan> plans = bench.plans().list();
         Optional<KeptPlan> last =
                 call.session()
@@ -49,7 +60,7 @@ public final class AllChambersPage {
                                                 .findFirst());
         call.goTo(
                 last.or(() -> plans.stream().findFirst())
-                        .map(plan -> Room.CHAMBERS.path(plan.id()))
+                        .map(plan -> room.path(plan.id()))
                         .orElse(Room.PLANS.path(0)));
     }
 

@@ -210,4 +210,17 @@ public final class Figures {
                 ? OptionalDouble.of(number.getAsDouble() * KG_PER_LB)
                 : number;
     }
+
+    /**
+     * Reads a price as it was typed.
+     *
+     * @param typed a number a preferred unit of mass
+     * @return currency/kg, empty where it is no number
+     */
+    public OptionalDouble pricePerKg(String typed) {
+        OptionalDouble number = number(typed);
+        return number.isPresent() && preferences.pounds()
+                ? OptionalDouble.of(number.getAsDouble() / KG_PER_LB)
+                : number;
+    }
 }

@@ -6,6 +6,8 @@ import java.util.Locale;
 public enum Room {
     /** All chambers of a plan. */
     CHAMBERS("/plan/{plan}"),
+    /** A lot that comes to the door. */
+    DOOR("/plan/{plan}/door"),
     /** The open plan, to be changed. */
     PLAN("/plan/{plan}/edit"),
     /** Crops and what is known of them. */

@@ -6,6 +6,7 @@ import java.util.LinkedHashMap;
 import java.util.Map;
 import java.util.Optional;
 import org.wardon.advice.PlanLookups;
+import org.wardon.advice.receiving.Receiving;
 import org.wardon.advice.wording.Units;
 import org.wardon.errors.BadInput;
 import org.wardon.files.PlanFiles;
@@ -26,6 +27,7 @@ public final class Workbench implements AutoCloseable {
     private final Books books;
     private final Clock clock;
     private final Forecasts forecasts = new Forecasts();
+    private final Doors doors = new Doors();
     private final Map<Key, OpenPlan> read = new LinkedHashMap<>(16, 0.75f, true);
 
     /** A plan in one version, read with one book. */
@@ -184,8 +186,25 @@ public final class Workbench implements AutoCloseable {
         forecasts.again(open);
     }
 
+    /**
+     * Returns what answers questions at the door of a store, and begins to work it out where nobody
+     * has.
+     *
+     * @param open the plan
+     * @param plan what reading it gave
+     * @param units units its sentences are told in
+     * @param patienceMs how long to wait for it, ms
+     * @return it, absent where it is not ready yet
+     * @throws org.wardon.errors.RunStopped where a chamber meets a state that cannot be
+     */
+    public Optional<Receiving> door(
+            OpenPlan open, Reading.Good plan, Units units, long patienceMs) {
+        return doors.of(open, plan.plan(), units, patienceMs);
+    }
+
     @Override
     public void close() {
+        doors.close();
         forecasts.close();
         books.close();
     }

@@ -94,3 +94,40 @@ document.querySelectorAll('form[data-face]').forEach((form) => {
     }, 200);
   });
 });
+
+// Crops are suggested while their name is typed.
+document.querySelectorAll('form[data-suggest]').forEach((form) => {
+  const field = form.querySelector('[name="crop"]');
+  const list = document.createElement('ul');
+  list.className = 'suggested';
+  const told = document.createElement('p');
+  told.className = 'visually-hidden';
+  told.setAttribute('role', 'status');
+  field.closest('.field').append(list, told);
+  let waiting;
+  let asked = 0;
+  const taken = (crop) => {
+    field.value = crop.name;
+    list.replaceChildren();
+    told.textContent = '';
+    form.querySelector('[name="mass"]').focus();
+  };
+  field.addEventListener('input', () => {
+    clearTimeout(waiting);
+    waiting = setTimeout(async () => {
+      const mine = ++asked;
+      const crops = await json(form.dataset.suggest + '?q=' + encodeURIComponent(field.value));
+      if (mine !== asked) return;
+      list.replaceChildren(...crops.map((crop) => {
+        const item = document.createElement('li');
+        const button = document.createElement('button');
+        button.type = 'button';
+        button.textContent = crop.by ? `${crop.name} (${crop.by})` : crop.name;
+        button.addEventListener('click', () => taken(crop));
+        item.append(button);
+        return item;
+      }));
+      told.textContent = form.dataset.found.replace('{0}', crops.length);
+    }, 150);
+  });
+});

@@ -42,7 +42,9 @@ class PageWordsTest {
                     "crop.",
                     "edit.",
                     "face.",
-                    "flow.");
+                    "flow.",
+                    "door.",
+                    "packed.");
 
     private static List<String> sources() throws IOException {
         List<String> texts = new ArrayList<>();

@@ -1,0 +1,76 @@
+package org.wardon.web.browser;
+
+import static org.junit.jupiter.api.Assertions.assertEquals;
+import static org.junit.jupiter.api.Assertions.assertTrue;
+
+import com.microsoft.playwright.Locator;
+import com.microsoft.playwright.Page;
+import org.junit.jupiter.api.BeforeAll;
+import org.junit.jupiter.api.Test;
+import org.junit.jupiter.params.ParameterizedTest;
+import org.junit.jupiter.params.provider.ValueSource;
+
+/** A warm lot at the door: asked about in three fields, put into the plan by one press. */
+class DoorIT extends InBrowser {
+    private static final int THUMB_PX = 44;
+    private static final int LARGEST_BYTES = 100_000;
+
+    private String plan = "";
+
+    @BeforeAll
+    void openDemo() {
+        plan = demo();
+    }
+
+    private Page asked(int width) {
+        Page page = show(plan + "/door?crop=mango&mass=500&pulp=30", width);
+        page.waitForSelector("#answer-title");
+        return page;
+    }
+
+    @ParameterizedTest
+    @ValueSource(ints = {PHONE, DESK})
+    void threeFieldsAreEnough(int width) {
+        Page page = show(plan + "/door", width);
+        page.fill("[name=crop]", "mengo");
+        Locator mango = page.locator(".suggested button").first();
+        assertEquals("Mango", mango.textContent());
+        mango.click();
+        page.fill("[name=mass]", "500");
+        page.fill("[name=pulp]", "30");
+        hold(page, "door-form");
+        page.click(".door-form button.main");
+        page.waitForSelector("#answer-title");
+        assertEquals(5, page.locator(".door-choice").count());
+        assertTrue(page.content().length() < LARGEST_BYTES);
+        hold(page, "door-answer");
+        page.close();
+    }
+
+    @Test
+    void everythingIsWideEnoughForAThumb() {
+        Page page = asked(PHONE);
+        for (Locator one : page.locator("main button, main summary, .pictures label").all()) {
+            if (one.isVisible()) {
+                assertTrue(one.boundingBox().height >= THUMB_PX, one.textContent());
+            }
+        }
+        page.close();
+    }
+
+    @Test
+    void aLotGoesIntoThePlanAndAStaleVersionIsTold() {
+        Page first = asked(DESK);
+        Page second = asked(DESK);
+        String put = ".door-choice form:has(input[value=fruit]) button";
+        first.click(put);
+        first.waitForSelector(".saved");
+        assertTrue(first.locator(".saved").textContent().contains("put into fruit"));
+        second.click(put);
+        second.waitForSelector(".notice");
+        assertTrue(second.locator(".notice").textContent().contains("nothing of yours is lost"));
+        assertEquals("500", second.inputValue("[name=mass]"));
+        first.close();
+        second.close();
+    }
+}
