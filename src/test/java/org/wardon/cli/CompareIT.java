@@ -15,15 +15,21 @@ class CompareIT {
     void aPersonGetsWhatEarnsMostFirst() {
         String page =
                 WardonJar.run(
-                                "compare", DEMO, "--variant", "curtain", "--set", CURTAIN,
-                                "--variant", "warmer", "--set",
+                                "compare",
+                                DEMO,
+                                "--variant",
+                                "curtain",
+                                "--set",
+                                CURTAIN,
+                                "--variant",
+                                "warmer",
+                                "--set",
                                 "chambers[cold].setting.temperatureC=8")
                         .good()
                         .out();
         assertTrue(page.lines().findFirst().orElseThrow().contains(" earn"), page);
         assertTrue(page.contains("  curtain "), page);
-        assertTrue(
-                page.contains("warmer: $.chambers[1].setting.temperatureC from 2 to 8\n"), page);
+        assertTrue(page.contains("warmer: $.chambers[1].setting.temperatureC from 2 to 8\n"), page);
     }
 
     @Test

@@ -93,7 +93,8 @@ class GuardTest {
     void aNameThatIsNotOursIsRefused() {
         String happened = "This page was asked for under a name that is not its own";
         String port = http.host().replaceFirst(".*:", ":");
-        for (String host : List.of("evil.example" + port, "127.0.0.1:1", "127.0.0.1", "a@" + port)) {
+        for (String host :
+                List.of("evil.example" + port, "127.0.0.1:1", "127.0.0.1", "a@" + port)) {
             Answer answer = http.get("/plans", "Host: " + host);
             assertTrue(answer.status() == 421 || answer.status() == 400, host + answer.head());
             assertFalse(answer.body().contains("Plans kept</h1>"), answer.body());
@@ -162,8 +163,19 @@ class GuardTest {
     @ParameterizedTest
     @ValueSource(
             strings = {
-                "/", "/plans", "/preferences", "/enter", "/crops", "/plan/7", "/plan/x", "/nope",
-                "/static/x/wardon.css", "/static/0/../1", "/api/plans", "/api/nope", "/plan/1/air/x"
+                "/",
+                "/plans",
+                "/preferences",
+                "/enter",
+                "/crops",
+                "/plan/7",
+                "/plan/x",
+                "/nope",
+                "/static/x/wardon.css",
+                "/static/0/../1",
+                "/api/plans",
+                "/api/nope",
+                "/plan/1/air/x"
             })
     void everyAnswerCarriesThePolicyAndIsNotStored(String path) {
         Answer answer = http.get(path);
@@ -281,7 +293,8 @@ class GuardTest {
         assertEquals(303, in.status());
         assertNotEquals(outside.cookie(), in.cookie().orElseThrow(), "a planted session is ended");
         assertEquals(200, http.get("/plans", "Cookie: " + in.cookie().get()).status());
-        assertEquals("/enter", http.get("/plans", "Cookie: " + outside.cookie()).header("Location"));
+        assertEquals(
+                "/enter", http.get("/plans", "Cookie: " + outside.cookie()).header("Location"));
 
         Visitor guesser = http.visitor("/enter");
         String guess = "token=" + guesser.token() + "&passcode=";

@@ -9,7 +9,9 @@ import java.util.Optional;
 import java.util.regex.Matcher;
 import java.util.regex.Pattern;
 
-/** Sends exactly what it is told, so that nothing polite stands between an attack and the server. */
+/**
+ * Sends exactly what it is told, so that nothing polite stands between an attack and the server.
+ */
 final class RawHttp {
     private static final int PATIENCE_MS = 20_000;
     private static final Pattern COOKIE =

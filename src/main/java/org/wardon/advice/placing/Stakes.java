@@ -74,8 +74,7 @@ final class Stakes {
             return stays + (item.whole() ? cell.worth() : 0) + days(cell);
         }
         // Days are days even where they do not last until it is sold.
-        boolean may =
-                cell.allowed() || (first(cell) && cell.forbidden() == Cell.Forbidden.LOST);
+        boolean may = cell.allowed() || (first(cell) && cell.forbidden() == Cell.Forbidden.LOST);
         return may ? cell.worth() + placed + days(cell) : Climate.NEVER;
     }
 

@@ -37,8 +37,17 @@ final class DoorForm {
 
     static final List<String> NAMES =
             List.of(
-                    "crop", "mass", "pulp", "ripe", "purpose", "harvested", "wanted", "market",
-                    "price", "packed", "comes");
+                    "crop",
+                    "mass",
+                    "pulp",
+                    "ripe",
+                    "purpose",
+                    "harvested",
+                    "wanted",
+                    "market",
+                    "price",
+                    "packed",
+                    "comes");
 
     private final UnaryOperator<String> typed;
     private final PageWords say;
@@ -162,9 +171,7 @@ final class DoorForm {
                         .withHint(say.say("door.harvested-hint")),
                 with(number("market", say.say("door.days")), wrong)
                         .withHint(say.say("door.market-hint", market)),
-                with(
-                                number("price", (currency + " / " + figures.massUnit()).strip()),
-                                wrong)
+                with(number("price", (currency + " / " + figures.massUnit()).strip()), wrong)
                         .withHint(say.say("door.price-hint")),
                 with(FieldView.time("comes", say.say("door.comes"), typed("comes")), wrong)
                         .withHint(say.say("door.comes-hint")));
@@ -203,8 +210,7 @@ final class DoorForm {
         for (Ripeness one :
                 List.of(Ripeness.UNKNOWN, Ripeness.GREEN, Ripeness.TURNING, Ripeness.RIPE)) {
             String word = one.name().toLowerCase(Locale.ROOT);
-            picks.add(
-                    new DoorView.Pick(word, say.say("ripeness." + word), "", one == ripeness()));
+            picks.add(new DoorView.Pick(word, say.say("ripeness." + word), "", one == ripeness()));
         }
         return picks;
     }

@@ -92,7 +92,7 @@ public final class DoorPage {
     private static Suggested suggested(CropSearch.Hit hit) {
         String name = hit.commodity().names().get(0);
         return new Suggested(
-                hit.commodity().id(), name, name.equals(hit.by()) ? "" : hit.by());
+                hit.commodity().id(), name, name.equalsIgnoreCase(hit.by()) ? "" : hit.by());
     }
 
     /**
@@ -102,14 +102,22 @@ public final class DoorPage {
      */
     public void progress(Call call) {
         OpenPlan open = AllChambersPage.opened(bench, call);
-        boolean ready =
-                !(open.reading() instanceof Reading.Good good)
-                        || bench.door(open, good, call.preferences().units(), 0).isPresent();
+        boolean ready = isReady(call, open);
         call.http()
                 .json(
                         ready
                                 ? new Far("over", "", 100)
                                 : new Far("running", press.words().say("door.prepares"), 0));
+    }
+
+    /** A store that cannot be worked out is ready too: the page tells what happened. */
+    private boolean isReady(Call call, OpenPlan open) {
+        try {
+            return !(open.reading() instanceof Reading.Good good)
+                    || bench.door(open, good, call.preferences().units(), 0).isPresent();
+        } catch (RunStopped e) {
+            return true;
+        }
     }
 
     /**
@@ -159,10 +167,8 @@ public final class DoorPage {
         Receiving receiving =
                 bench.door(open, good, call.preferences().units(), 60_000)
                         .orElseThrow(() -> new Refusal(503, "not-ready"));
-        LotPlan lot =
-                receiving.placed(form.lot(crop, now(good.plan())), call.field("chamber"));
-        String text =
-                PlanText.addedTo(open.text().text(), open.kept().name(), lot);
+        LotPlan lot = receiving.placed(form.lot(crop, now(good.plan())), call.field("chamber"));
+        String text = PlanText.addedTo(open.text().text(), open.kept().name(), lot);
         String note =
                 press.words()
                         .say(
@@ -240,11 +246,11 @@ public final class DoorPage {
 
         void ask(Reading.Good good) {
             currency = good.plan().prices().currency();
-            Optional<Receiving> ready = prepared(good);
-            if (!form.asked()) {
-                return;
-            }
             try {
+                Optional<Receiving> ready = prepared(good);
+                if (!form.asked()) {
+                    return;
+                }
                 crop = meant();
                 if (crop.isEmpty()) {
                     return;
@@ -283,8 +289,7 @@ public final class DoorPage {
             try {
                 return Optional.of(open.book().named(asked));
             } catch (BadInput unknown) {
-                List<CropSearch.Hit> hits =
-                        asked.isBlank() ? List.of() : hits(open.book(), asked);
+                List<CropSearch.Hit> hits = asked.isBlank() ? List.of() : hits(open.book(), asked);
                 if (hits.size() == 1) {
                     String name = hits.get(0).commodity().names().get(0);
                     troubles.add(press.words().say("door.read-as", asked, name));

@@ -115,10 +115,7 @@ final class DoorViews {
         }
         List<ReceiveAnswer.OfLot> touched =
                 inside.lots().stream()
-                        .filter(
-                                lot ->
-                                        lot.daysLost() >= NOTICED_DAYS
-                                                || lot.warmsK() >= NOTICED_K)
+                        .filter(lot -> lot.daysLost() >= NOTICED_DAYS || lot.warmsK() >= NOTICED_K)
                         .toList();
         touched.forEach(lot -> facts.add(neighbour(lot)));
         if (touched.isEmpty() && !inside.lots().isEmpty()) {

@@ -5,8 +5,8 @@ import java.util.Locale;
 
 /**
  * Prints how good and how fast the search is on drawn stores, beside the general solver given as
- * long. Run it on the test class path: {@code PlacingFigures LOTS CHAMBERS
- * FIRST_SEED LAST_SEED [MIX]}, a mix by its place in {@link Mix#all}.
+ * long. Run it on the test class path: {@code PlacingFigures LOTS CHAMBERS FIRST_SEED LAST_SEED
+ * [MIX]}, a mix by its place in {@link Mix#all}.
  */
 final class PlacingFigures {
     private static final double SECOND_NS = 1e9;
