@@ -6,6 +6,7 @@ import io.javalin.http.HttpResponseException;
 import java.util.function.Consumer;
 import org.wardon.errors.BadInput;
 import org.wardon.web.api.PlansApi;
+import org.wardon.web.chamber.ChamberPage;
 import org.wardon.web.crops.CropsPage;
 import org.wardon.web.door.DoorPage;
 import org.wardon.web.guard.Guard;
@@ -43,6 +44,7 @@ final class Routes {
         plans();
         forecast();
         door();
+        chamber();
         crops();
         editor();
         api();
@@ -91,6 +93,19 @@ final class Routes {
         routes.get("/plan/{plan}/door", call(door::show));
         routes.get("/plan/{plan}/door/progress", call(door::progress));
         routes.post("/plan/{plan}/door/put", call(door::put));
+    }
+
+    private void chamber() {
+        ChamberPage chamber = new ChamberPage(bench, press);
+        String path = "/plan/{plan}/chamber/{chamber}";
+        routes.get("/chambers/{chamber}", call(chamber::ofLastPlan));
+        routes.get(path, call(chamber::show));
+        routes.get(path + "/curve/{curve}", call(chamber::curve));
+        routes.get(path + "/lot/{lot}", call(chamber::lot));
+        routes.get(path + "/what-if", call(chamber::whatIf));
+        routes.get(path + "/what-if/air", call(chamber::whatIfAir));
+        routes.get(path + "/section", call(chamber::section));
+        routes.get(path + "/section.svg", call(chamber::sectionPicture));
     }
 
     private void crops() {

@@ -96,4 +96,13 @@ public final class ChamberView {
                 .map(one -> one.name().name().toLowerCase(Locale.ROOT))
                 .toList();
     }
+
+    /**
+     * Returns whether no fan stirs the air, so that a section tells more than one temperature.
+     *
+     * @return true if so
+     */
+    public boolean isStill() {
+        return StillChamber.stirredBy(chamber).isEmpty();
+    }
 }

@@ -19,17 +19,12 @@ import org.wardon.produce.rows.GasInjury;
 
 /** What carbon dioxide and the oxygen it leaves do to people and to produce. */
 final class GasCautions {
-    /** Eight-hour limit of carbon dioxide, ppm; source: safety limits, id OSHA-1910. */
-    private static final double CAUTION_PPM = 5_000;
+    private static final double CAUTION_PPM = CarbonDioxideLimits.CAUTION_PPM;
 
-    /**
-     * Danger, ppm: the oxygen burnt for it leaves 19.5 %, below which air counts as short of oxygen
-     * (safety limits, id OSHA-1910).
-     */
-    static final double DANGER_PPM = 14_000;
+    /** Danger, ppm: the air is short of oxygen. */
+    static final double DANGER_PPM = CarbonDioxideLimits.DANGER_PPM;
 
-    /** Fifteen-minute limit, ppm; source: safety limits, id ACGIH. */
-    private static final double EVACUATE_PPM = 30_000;
+    private static final double EVACUATE_PPM = CarbonDioxideLimits.EVACUATE_PPM;
 
     /** Oxygen of clean air, percent; source: safety limits, id OSHA-1910. */
     private static final double AIR_O2_PCT = 20.9;

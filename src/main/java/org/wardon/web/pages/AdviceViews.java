@@ -20,7 +20,7 @@ import org.wardon.produce.Reason;
 import org.wardon.web.work.OpenPlan;
 
 /** Turns advice on a store into what pages show. */
-final class AdviceViews {
+public final class AdviceViews {
     /** Codes of what figures rest on, for those who ask: the notes of the command line. */
     private static final List<String> DETAILS =
             List.of("default-taken", "life-", "chilling-floor", "chilling-band", "chilling-dose");
@@ -34,7 +34,16 @@ final class AdviceViews {
     private final Figures figures;
     private final LocalDateTime today;
 
-    AdviceViews(StoreAdvice advice, OpenPlan open, Words words, Frame frame, Clock clock) {
+    /**
+     * Prepares the views.
+     *
+     * @param advice the advice
+     * @param open the plan it is on
+     * @param words words of reasons
+     * @param frame frame of the page
+     * @param clock tells the day
+     */
+    public AdviceViews(StoreAdvice advice, OpenPlan open, Words words, Frame frame, Clock clock) {
         this.advice = advice;
         this.plan = advice.plan();
         this.forecast = advice.forecast();
@@ -99,7 +108,13 @@ final class AdviceViews {
                         money(value.net()));
     }
 
-    ChamberView chamber(ChamberForecast chamber) {
+    /**
+     * Returns a chamber as it leads a page.
+     *
+     * @param chamber its forecast
+     * @return the view
+     */
+    public ChamberView chamber(ChamberForecast chamber) {
         List<Reason> why = advice.whyNotHeld(chamber.id());
         Optional<Forecast.Sharing> sharing =
                 forecast.sharing().stream()

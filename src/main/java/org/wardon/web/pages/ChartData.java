@@ -1,6 +1,9 @@
 package org.wardon.web.pages;
 
+import java.util.ArrayList;
+import java.util.Collections;
 import java.util.List;
+import org.jspecify.annotations.Nullable;
 
 /**
  * Data of a chart, as its route writes it.
@@ -22,13 +25,14 @@ public record ChartData(String unit, List<Long> time, List<Line> lines, List<Lev
      * A line.
      *
      * @param name its name
-     * @param tone {@code main}, {@code second} or {@code third}
-     * @param values {@code [row]}, as many as there are times
+     * @param tone {@code main}, {@code second}, {@code third} or {@code fourth}; each has dashes of
+     *     its own
+     * @param values {@code [row]}, as many as there are times; null where there is none
      */
-    public record Line(String name, String tone, List<Double> values) {
+    public record Line(String name, String tone, List<@Nullable Double> values) {
         /** Copies the list. */
         public Line {
-            values = List.copyOf(values);
+            values = Collections.unmodifiableList(new ArrayList<>(values));
         }
     }
 

@@ -30,7 +30,15 @@ public final class ForecastRoutes {
      */
     public record Far(String state, String stage, int percent) {}
 
-    static ProgressView progress(OpenPlan open, Stand.Running running, PageWords words) {
+    /**
+     * Returns how far a forecast is, for a page.
+     *
+     * @param open the plan
+     * @param running how far it is
+     * @param words words of the pages
+     * @return the view
+     */
+    public static ProgressView progress(OpenPlan open, Stand.Running running, PageWords words) {
         String plan = "/plan/" + open.kept().id();
         return new ProgressView(
                 words.say("stage." + running.stage()),

@@ -45,7 +45,8 @@ function charts() {
   return library;
 }
 
-const TONES = { main: '--russet', second: '--faded', third: '--leafgreen' };
+const TONES = { main: '--russet', second: '--faded', third: '--leafgreen', fourth: '--focus' };
+const DASHES = { second: [10, 4], third: [3, 3], fourth: [8, 3, 2, 3] };
 
 async function draw(box) {
   if (box.dataset.drawn) return;
@@ -57,13 +58,14 @@ async function draw(box) {
     label: level.name, stroke: style('--ink'), width: 1.5, dash: [7, 5], points: { show: false },
   }));
   const lines = data.lines.map((line) => ({
-    label: line.name, stroke: style(TONES[line.tone] ?? '--ink'), width: 2, points: { show: false },
+    label: line.name, stroke: style(TONES[line.tone] ?? '--ink'), width: 2, dash: DASHES[line.tone], points: { show: false },
   }));
   const options = {
     width: box.clientWidth, height: 260, tzDate: (seconds) => UPlot.tzDate(new Date(seconds * 1000), 'Etc/UTC'),
     scales: { x: { time: true } },
     axes: [axis, { ...axis, label: data.unit, labelFont: font, size: 56 }],
-    series: [{}, ...lines, ...levels],
+    series: [{ label: box.dataset.title }, ...lines, ...levels],
+    legend: { markers: { dash: (chart, i) => (i > 1 ? (i % 2 ? 'dotted' : 'dashed') : 'solid') } },
   };
   const values = [data.time, ...data.lines.map((line) => line.values), ...data.levels.map((level) => data.time.map(() => level.value))];
   const chart = new UPlot(options, values, box);
@@ -129,5 +131,45 @@ document.querySelectorAll('form[data-suggest]').forEach((form) => {
       }));
       told.textContent = form.dataset.found.replace('{0}', crops.length);
     }, 150);
+  });
+});
+
+// What if: a slider beside each field, and the answer as it moves.
+document.querySelectorAll('form[data-what]').forEach((form) => {
+  const answer = document.querySelector('#what-answer');
+  const comma = document.documentElement.dataset.comma !== undefined;
+  let waiting;
+  let asked = 0;
+  const ask = () => {
+    clearTimeout(waiting);
+    waiting = setTimeout(async () => {
+      const mine = ++asked;
+      const got = await fetch(form.dataset.what + '?' + new URLSearchParams(new FormData(form)));
+      const text = await got.text();
+      if (!got.ok || mine !== asked) return;
+      answer.innerHTML = text;
+      answer.querySelectorAll('[data-chart]').forEach(draw);
+    }, 150);
+  };
+  form.querySelectorAll('.slide').forEach((slide) => {
+    const field = slide.querySelector('input');
+    const number = () => Number(field.value.replace(',', '.'));
+    const slider = document.createElement('input');
+    Object.assign(slider, { type: 'range', min: slide.dataset.low, max: slide.dataset.high, step: slide.dataset.step });
+    slider.setAttribute('aria-label', slide.querySelector('label').textContent);
+    slider.value = number();
+    slider.addEventListener('input', () => {
+      field.value = comma ? slider.value.replace('.', ',') : slider.value;
+      ask();
+    });
+    field.addEventListener('input', () => {
+      slider.value = number();
+      ask();
+    });
+    slide.append(slider);
+  });
+  form.addEventListener('submit', (event) => {
+    event.preventDefault();
+    ask();
   });
 });

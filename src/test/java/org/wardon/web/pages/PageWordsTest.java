@@ -44,7 +44,12 @@ class PageWordsTest {
                     "face.",
                     "flow.",
                     "door.",
-                    "packed.");
+                    "packed.",
+                    "what.",
+                    "curve.",
+                    "heat.",
+                    "limit.",
+                    "profile.");
 
     private static List<String> sources() throws IOException {
         List<String> texts = new ArrayList<>();

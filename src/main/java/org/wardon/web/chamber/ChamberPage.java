@@ -1,0 +1,329 @@
+package org.wardon.web.chamber;
+
+import java.net.URLEncoder;
+import java.nio.charset.StandardCharsets;
+import java.util.LinkedHashMap;
+import java.util.List;
+import java.util.Map;
+import java.util.Optional;
+import java.util.stream.Collectors;
+import org.wardon.advice.forecast.StoreAdvice;
+import org.wardon.advice.picture.SectionPicture;
+import org.wardon.advice.whatif.Changes;
+import org.wardon.advice.wording.Units;
+import org.wardon.advice.wording.Words;
+import org.wardon.errors.BadInput;
+import org.wardon.errors.RunStopped;
+import org.wardon.files.forecast.ChamberForecast;
+import org.wardon.files.forecast.SectionAnswer;
+import org.wardon.files.forecast.WhatIfAnswer;
+import org.wardon.web.guard.Refusal;
+import org.wardon.web.pages.AdviceViews;
+import org.wardon.web.pages.AllChambersPage;
+import org.wardon.web.pages.Call;
+import org.wardon.web.pages.ChartData;
+import org.wardon.web.pages.ForecastRoutes;
+import org.wardon.web.pages.Frame;
+import org.wardon.web.pages.Press;
+import org.wardon.web.pages.Room;
+import org.wardon.web.work.OpenPlan;
+import org.wardon.web.work.Reading;
+import org.wardon.web.work.Stand;
+import org.wardon.web.work.Workbench;
+
+/**
+ * One chamber: hour by hour, what heats it, through a face, its lots, and with something changed.
+ */
+public final class ChamberPage {
+    private static final long PATIENCE_MS = 250;
+    private static final List<String> FIELDS =
+            List.of("setting", "insulation", "door", "cooling", "load");
+
+    private final Workbench bench;
+    private final Press press;
+    private final ChamberDesk desk = new ChamberDesk();
+
+    /**
+     * Makes the page.
+     *
+     * @param bench what it works with
+     * @param press what prints it
+     */
+    public ChamberPage(Workbench bench, Press press) {
+        this.bench = bench;
+        this.press = press;
+    }
+
+    /** A request about a chamber whose forecast is there. */
+    private record Asked(Call call, OpenPlan open, StoreAdvice advice, String chamber) {
+        Units units() {
+            return call.preferences().units();
+        }
+
+        String path() {
+            return ChamberPage.path(open, chamber);
+        }
+
+        String query(String name) {
+            return Optional.ofNullable(call.http().queryParam(name)).orElse("").strip();
+        }
+    }
+
+    private static String path(OpenPlan open, String chamber) {
+        return Room.CHAMBERS.path(open.kept().id()) + "/chamber/" + chamber;
+    }
+
+    /**
+     * Sends people on to a chamber of the plan they last looked at.
+     *
+     * @param call the request
+     */
+    public void ofLastPlan(Call call) {
+        long plan =
+                call.session()
+                        .flatMap(session -> session.plan().stream().boxed().findFirst())
+                        .orElseThrow(() -> new Refusal(404, "no-plan"));
+        OpenPlan open = bench.open(plan).orElseThrow(() -> new Refusal(404, "no-plan"));
+        call.goTo(path(open, call.http().pathParam("chamber")));
+    }
+
+    /**
+     * Shows the page, or how far the forecast is.
+     *
+     * @param call the request
+     */
+    public void show(Call call) {
+        OpenPlan open = AllChambersPage.opened(bench, call);
+        String chamber = call.http().pathParam("chamber");
+        if (!(open.reading() instanceof Reading.Good good)) {
+            call.goTo(open.kept());
+            return;
+        }
+        known(good, chamber);
+        Frame frame = frame(call, open, chamber);
+        Stand stand = bench.forecast(open, good, call.preferences().units(), PATIENCE_MS);
+        if (stand instanceof Stand.Ready ready) {
+            Asked asked = new Asked(call, open, ready.advice(), chamber);
+            press.print(call, "chamber", frame, sheet(asked, frame));
+        } else if (stand instanceof Stand.Running running) {
+            ChamberSheet waiting =
+                    new ChamberSheet(
+                            path(open, chamber),
+                            chamber,
+                            open.kept().id(),
+                            Optional.of(ForecastRoutes.progress(open, running, press.words())),
+                            Optional.empty());
+            press.print(call, "chamber", frame.thatWaits(), waiting);
+        } else {
+            call.goTo(open.kept());
+        }
+    }
+
+    private static void known(Reading.Good good, String chamber) {
+        if (good.plan().chambers().stream().noneMatch(one -> one.id().equals(chamber))) {
+            throw new Refusal(404, "nothing-here");
+        }
+    }
+
+    private Frame frame(Call call, OpenPlan open, String chamber) {
+        return press.frame(call, Room.CHAMBERS, Optional.of(open.kept()))
+                .titled(press.words().say("page.chamber", chamber));
+    }
+
+    private ChamberSheet sheet(Asked asked, Frame frame) {
+        return new ChamberSheet(
+                asked.path(),
+                asked.chamber(),
+                asked.open().kept().id(),
+                Optional.empty(),
+                Optional.of(body(asked, frame)));
+    }
+
+    private ChamberSheet.Body body(Asked asked, Frame frame) {
+        ChamberViews views = views(asked);
+        WhatIfForm form = form(asked);
+        Optional<Changes> changes = form.changes();
+        Words words = Words.english(asked.units());
+        ChamberForecast forecast =
+                asked.advice().forecast().chambers().stream()
+                        .filter(one -> one.id().equals(asked.chamber()))
+                        .findFirst()
+                        .orElseThrow();
+        return new ChamberSheet.Body(
+                new AdviceViews(asked.advice(), asked.open(), words, frame, bench.clock())
+                        .chamber(forecast),
+                form.slides(),
+                form.asked() ? Optional.of(answer(asked, frame, changes)) : Optional.empty(),
+                views.charts(asked.path()),
+                views.limits(),
+                views.heat(desk.heat(asked.open(), asked.advice(), asked.chamber())),
+                views.face(asked.query("face"), asked.query("at")),
+                views.lots(asked.path()),
+                asked.advice().view(asked.chamber()).isStill()
+                        ? Optional.of(asked.path() + "/section")
+                        : Optional.empty());
+    }
+
+    private ChamberViews views(Asked asked) {
+        return new ChamberViews(
+                asked.advice(), asked.chamber(), press.words(), asked.call().figures());
+    }
+
+    private WhatIfForm form(Asked asked) {
+        return new WhatIfForm(
+                asked.advice().plan().getChamber(asked.chamber()),
+                asked.call().figures(),
+                press.words(),
+                asked::query);
+    }
+
+    private WhatIfView answer(Asked asked, Frame frame, Optional<Changes> changes) {
+        WhatIfViews views =
+                new WhatIfViews(
+                        frame, views(asked).curves(), asked.advice().plan().prices().currency());
+        if (changes.isEmpty()) {
+            return views.told(press.words().say("what.faulty"));
+        }
+        try {
+            return views.view(
+                    worked(asked, changes.get()), asked.path() + "/what-if/air" + again(asked));
+        } catch (BadInput bad) {
+            return views.told(
+                    bad.faults().stream().map(f -> f.sentence()).collect(Collectors.joining(" ")));
+        } catch (RunStopped stopped) {
+            return views.told(String.valueOf(stopped.getMessage()));
+        }
+    }
+
+    private WhatIfAnswer worked(Asked asked, Changes changes) {
+        return desk.answer(
+                asked.open(), asked.advice().plan(), asked.chamber(), changes, asked.units());
+    }
+
+    /** The same question as part of an address. */
+    private static String again(Asked asked) {
+        Map<String, String> given = new LinkedHashMap<>();
+        FIELDS.forEach(name -> given.put(name, asked.query(name)));
+        return given.entrySet().stream()
+                .filter(field -> !field.getValue().isBlank())
+                .map(
+                        field ->
+                                field.getKey()
+                                        + "="
+                                        + URLEncoder.encode(
+                                                field.getValue(), StandardCharsets.UTF_8))
+                .collect(Collectors.joining("&", "?", ""));
+    }
+
+    /**
+     * Shows a chamber with something changed, as a part of the page, for a script.
+     *
+     * @param call the request
+     */
+    public void whatIf(Call call) {
+        Asked asked = asked(call);
+        Frame frame = frame(call, asked.open(), asked.chamber());
+        press.print(call, "part/whatIf", frame, answer(asked, frame, form(asked).changes()));
+    }
+
+    /**
+     * Tells the air of a chamber with something changed, the plan's behind it.
+     *
+     * @param call the request
+     */
+    public void whatIfAir(Call call) {
+        Asked asked = asked(call);
+        Changes changes =
+                form(asked).changes().orElseThrow(() -> new Refusal(422, "not-understood"));
+        double planned = asked.advice().plan().getChamber(asked.chamber()).setting().temperatureC();
+        call.http()
+                .json(
+                        views(asked)
+                                .curves()
+                                .compared(
+                                        worked(asked, changes).series(),
+                                        desk.unchanged(
+                                                asked.open(),
+                                                asked.advice().plan(),
+                                                asked.chamber(),
+                                                asked.units()),
+                                        changes.settingC().orElse(planned)));
+    }
+
+    /**
+     * Tells a chart of the chamber.
+     *
+     * @param call the request
+     */
+    public void curve(Call call) {
+        Asked asked = asked(call);
+        give(call, views(asked).data(call.http().pathParam("curve")));
+    }
+
+    /**
+     * Tells core and surface of a lot.
+     *
+     * @param call the request
+     */
+    public void lot(Call call) {
+        Asked asked = asked(call);
+        give(call, views(asked).lot(call.http().pathParam("lot")));
+    }
+
+    private static void give(Call call, Optional<ChartData> data) {
+        call.http().json(data.orElseThrow(() -> new Refusal(404, "nothing-here")));
+    }
+
+    /**
+     * Shows where it is warm and where cold in a chamber no fan stirs.
+     *
+     * @param call the request
+     */
+    public void section(Call call) {
+        Asked asked = asked(call);
+        SectionAnswer answer = sectionOf(asked);
+        press.print(
+                call,
+                "section",
+                frame(call, asked.open(), asked.chamber()),
+                new SectionSheet(
+                        asked.path(),
+                        press.words().say("section.title", asked.chamber()),
+                        asked.path() + "/section.svg",
+                        answer.said().stream().map(call.figures()::text).toList(),
+                        answer.warnings().stream()
+                                .map(w -> call.figures().text(w.text()))
+                                .toList()));
+    }
+
+    /**
+     * Draws it.
+     *
+     * @param call the request
+     */
+    public void sectionPicture(Call call) {
+        Asked asked = asked(call);
+        call.http()
+                .contentType("image/svg+xml; charset=utf-8")
+                .result(SectionPicture.of(sectionOf(asked), Words.english(asked.units())));
+    }
+
+    private SectionAnswer sectionOf(Asked asked) {
+        return desk.section(asked.open(), asked.advice().plan(), asked.chamber(), asked.units())
+                .orElseThrow(() -> new Refusal(404, "nothing-here"));
+    }
+
+    private Asked asked(Call call) {
+        OpenPlan open = AllChambersPage.opened(bench, call);
+        String chamber = call.http().pathParam("chamber");
+        if (!(open.reading() instanceof Reading.Good good)) {
+            throw new Refusal(409, "no-forecast");
+        }
+        known(good, chamber);
+        Stand stand = bench.forecast(open, good, call.preferences().units(), PATIENCE_MS);
+        if (!(stand instanceof Stand.Ready ready)) {
+            throw new Refusal(409, "no-forecast");
+        }
+        return new Asked(call, open, ready.advice(), chamber);
+    }
+}
