@@ -11,6 +11,8 @@ import org.wardon.files.forecast.ShareAnswer;
 
 /** The answer of {@code share} for a person. */
 final class SharePage {
+    private static final double LEAST_DAYS = 0.05;
+
     private final Words words;
 
     SharePage(Words words) {
@@ -24,6 +26,13 @@ final class SharePage {
                 Paragraph.hanging(
                         "", named(answer) + words.text("verdict." + answer.verdict()) + "."));
         page.append(Paragraph.hanging("", setting(answer)));
+        answer.compromise().ifPresent(one -> page.append(Paragraph.hanging("", compromise(one))));
+        answer.takeOut()
+                .ifPresent(
+                        id ->
+                                page.append(
+                                        Paragraph.hanging(
+                                                "", "Without " + id + " the others may share.")));
         report.notes()
                 .forEach(
                         note ->
@@ -55,6 +64,24 @@ final class SharePage {
                         .distinct()
                         .collect(Collectors.joining(", "));
         return all.isEmpty() ? "" : all + ": ";
+    }
+
+    private String compromise(ShareAnswer.Compromise one) {
+        String lost =
+                one.daysLost().entrySet().stream()
+                        .filter(each -> each.getValue() >= LEAST_DAYS)
+                        .map(
+                                each ->
+                                        String.format(
+                                                Locale.ROOT,
+                                                "%s %.1f days",
+                                                each.getKey(),
+                                                each.getValue()))
+                        .collect(Collectors.joining(", "));
+        return "The nearest compromise, "
+                + words.units().temperature(one.atC())
+                + String.format(Locale.ROOT, " and %d %% humidity", Math.round(one.humidityPct()))
+                + (lost.isEmpty() ? "." : ", costs " + lost + ".");
     }
 
     private String setting(ShareAnswer answer) {

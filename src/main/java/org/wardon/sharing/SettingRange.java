@@ -9,6 +9,11 @@ import java.util.Optional;
  * @param high highest
  */
 public record SettingRange(double low, double high) {
+    /** How wide it is. */
+    double widthK() {
+        return high - low;
+    }
+
     static Optional<SettingRange> of(Settings.Extent extent) {
         return extent.low().isPresent()
                 ? Optional.of(

@@ -2,6 +2,7 @@ package org.wardon.sharing;
 
 import java.util.ArrayList;
 import java.util.List;
+import java.util.Optional;
 import org.wardon.errors.Require;
 import org.wardon.keeping.Draw;
 import org.wardon.produce.Reason;
@@ -44,8 +45,45 @@ public final class Sharing {
                 verdict = verdict.worse(pair.verdict());
             }
         }
+        boolean apart = common.verdict() == Verdict.NO;
         return new SharingAnswer(
-                verdict, common.temperatureC(), common.humidityPct(), pairs, reasons(lots));
+                verdict,
+                common.temperatureC(),
+                common.humidityPct(),
+                pairs,
+                reasons(lots),
+                apart ? Compromise.of(lots) : Optional.empty(),
+                verdict == Verdict.NO ? takeOut(lots, pairs) : Optional.empty());
+    }
+
+    /** The lot without which the others have the best verdict and the widest temperatures. */
+    private static Optional<String> takeOut(List<Workable> lots, List<PairVerdict> pairs) {
+        Optional<String> out = Optional.empty();
+        Verdict best = Verdict.NO;
+        double widest = 0;
+        for (Workable one : lots.size() > 2 ? lots : List.<Workable>of()) {
+            String id = one.wish().lot().id();
+            Common rest = Common.of(lots.stream().filter(lot -> lot != one).toList());
+            Verdict verdict = rest.verdict();
+            for (PairVerdict pair : pairs) {
+                boolean stays = !pair.a().equals(id) && !pair.b().equals(id);
+                verdict = stays ? verdict.worse(pair.verdict()) : verdict;
+            }
+            double wide = rest.temperatureC().map(SettingRange::widthK).orElse(0.0);
+            boolean better = verdict.compareTo(best) > 0;
+            boolean same = verdict == best && verdict != Verdict.NO;
+            if (better || (same && (wide > widest || (wide == widest && first(id, out))))) {
+                best = verdict;
+                widest = wide;
+                out = Optional.of(id);
+            }
+        }
+        return out;
+    }
+
+    /** Between equals the id decides, so that the order of lots changes nothing. */
+    private static boolean first(String id, Optional<String> known) {
+        return known.map(other -> id.compareTo(other) < 0).orElse(true);
     }
 
     private static List<Reason> reasons(List<Workable> lots) {

@@ -12,13 +12,19 @@ import org.wardon.produce.Reason;
  * @param workableHumidityPct humidities that go with them, percent; empty where none does
  * @param pairs every pair
  * @param reasons what concerns single lots or the group
+ * @param compromise the setting that costs least where none works for all; empty where one does, or
+ *     where every setting freezes or chills one of them
+ * @param takeOut id of the one lot without which the others, two at least, may share best; empty
+ *     where all may share or taking out one does not help
  */
 public record SharingAnswer(
         Verdict verdict,
         Optional<SettingRange> workableC,
         Optional<SettingRange> workableHumidityPct,
         List<PairVerdict> pairs,
-        List<Reason> reasons) {
+        List<Reason> reasons,
+        Optional<Compromise> compromise,
+        Optional<String> takeOut) {
     /** Copies the lists. */
     public SharingAnswer {
         pairs = List.copyOf(pairs);

@@ -200,6 +200,11 @@ public final class Workable {
                 Settings.nearestHumidity(humidityPct)];
     }
 
+    /** Days it falls short, in the middle of its range, of what it wants and can reach at all. */
+    double daysLost(int t, int h) {
+        return Math.max(0, Math.min(wish.wholeDays(), handbookMedian()) - median[t][h]);
+    }
+
     /**
      * Returns the share of draws that last stay and market leg in a setting.
      *

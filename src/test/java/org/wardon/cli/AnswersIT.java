@@ -146,7 +146,14 @@ class AnswersIT {
     void shareTellsPairsInTheFixedNames() {
         JsonNode shared = WardonJar.run("share", "mango", "banana-green", "--json").json();
         JsonNames.check(
-                shared, "", "verdict", "workableC", "workableHumidityPct", "pairs", "compromise");
+                shared,
+                "",
+                "verdict",
+                "workableC",
+                "workableHumidityPct",
+                "pairs",
+                "compromise",
+                "takeOut");
         JsonNames.check(shared, "pairs[]", "a", "b", "verdict", "reasons");
         JsonNames.check(shared, "pairs[].reasons[]", "code", "lots", "text", "source");
         assertEquals(1, shared.get("pairs").size());

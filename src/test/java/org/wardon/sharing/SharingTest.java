@@ -93,6 +93,42 @@ class SharingTest {
     }
 
     @Test
+    void withoutTheBananasTheOthersMayShare() {
+        SharingAnswer answer = share(7, "broccoli", "cauliflower", "banana-green");
+        assertEquals("banana-green", answer.takeOut().orElseThrow());
+        Compromise nearest = answer.compromise().orElseThrow();
+        assertTrue(nearest.atC() >= 8 && nearest.atC() <= 16, nearest.toString());
+        assertTrue(nearest.daysLost().get("broccoli") > 0, nearest.toString());
+        SharingAnswer fine = share(7, "broccoli", "cauliflower");
+        assertTrue(fine.compromise().isEmpty() && fine.takeOut().isEmpty());
+    }
+
+    @Test
+    void theOrderOfLotsChangesNothingAndAnotherLotNeverWidens() {
+        List<String> ids = List.of("mango", "okra", "celery", "apple");
+        SharingAnswer one = share(4, ids.toArray(String[]::new));
+        SharingAnswer other = share(4, "apple", "celery", "okra", "mango");
+        assertEquals(one.verdict(), other.verdict());
+        assertEquals(one.workableC(), other.workableC());
+        assertEquals(one.takeOut(), other.takeOut());
+        assertEquals(one.compromise(), other.compromise());
+        List<Workable> lots =
+                ids.stream()
+                        .map(id -> Workable.of(Wish.of(Crops.lot(Crops.get(id)), 4), DRAWS))
+                        .toList();
+        for (int n = 1; n < lots.size(); n++) {
+            Common few = Common.of(lots.subList(0, n));
+            Common more = Common.of(lots.subList(0, n + 1));
+            assertTrue(more.verdict().compareTo(few.verdict()) <= 0, ids.get(n));
+            if (more.verdict() == few.verdict() && few.verdict() != Verdict.NO) {
+                SettingRange wide = few.temperatureC().orElseThrow();
+                SettingRange narrow = more.temperatureC().orElseThrow();
+                assertTrue(narrow.low() >= wide.low() && narrow.high() <= wide.high());
+            }
+        }
+    }
+
+    @Test
     void warmMarketNarrowsTheSettings() {
         Wish cool = Wish.of(Crops.lot(Crops.get("broccoli")), 5);
         Wish warm = new Wish(cool.lot(), 5, 2, OptionalDouble.of(28));

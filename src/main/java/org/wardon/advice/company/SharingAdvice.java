@@ -107,7 +107,12 @@ public final class SharingAdvice {
                 found.workableC().map(SharingAdvice::bounds),
                 found.workableHumidityPct().map(SharingAdvice::bounds),
                 found.pairs().stream().map(this::pair).toList(),
-                Optional.empty());
+                found.compromise()
+                        .map(
+                                one ->
+                                        new ShareAnswer.Compromise(
+                                                one.atC(), one.humidityPct(), one.daysLost())),
+                found.takeOut());
     }
 
     private static Bounds bounds(SettingRange range) {

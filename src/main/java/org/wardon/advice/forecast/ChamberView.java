@@ -5,6 +5,8 @@ import java.util.ArrayList;
 import java.util.List;
 import java.util.Locale;
 import java.util.Optional;
+import java.util.OptionalDouble;
+import org.wardon.enclosure.Door;
 import org.wardon.errors.BadInput;
 import org.wardon.errors.Fault;
 import org.wardon.files.forecast.HourlySeries;
@@ -104,5 +106,14 @@ public final class ChamberView {
      */
     public boolean isStill() {
         return StillChamber.stirredBy(chamber).isEmpty();
+    }
+
+    /**
+     * Returns how often the door is planned to be opened.
+     *
+     * @return openings a day; empty where there is no door
+     */
+    public OptionalDouble openingsPerDay() {
+        return chamber.enclosure().door().stream().mapToDouble(Door::openingsPerDay).findFirst();
     }
 }

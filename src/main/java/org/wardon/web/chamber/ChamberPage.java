@@ -64,6 +64,12 @@ public final class ChamberPage {
             return ChamberPage.path(open, chamber);
         }
 
+        /** The hour before or after by its button, else the hour typed. */
+        String hour() {
+            String next = query("hour");
+            return next.isEmpty() ? query("at") : next;
+        }
+
         String query(String name) {
             return Optional.ofNullable(call.http().queryParam(name)).orElse("").strip();
         }
@@ -157,7 +163,7 @@ public final class ChamberPage {
                 views.charts(asked.path()),
                 views.limits(),
                 views.heat(desk.heat(asked.open(), asked.advice(), asked.chamber())),
-                views.face(asked.query("face"), asked.query("at")),
+                views.face(asked.query("face"), asked.hour()),
                 views.lots(asked.path()),
                 asked.advice().view(asked.chamber()).isStill()
                         ? Optional.of(asked.path() + "/section")
@@ -171,7 +177,8 @@ public final class ChamberPage {
 
     private WhatIfForm form(Asked asked) {
         return new WhatIfForm(
-                asked.advice().plan().getChamber(asked.chamber()),
+                asked.advice().settingC(asked.chamber()),
+                asked.advice().view(asked.chamber()).openingsPerDay(),
                 asked.call().figures(),
                 press.words(),
                 asked::query);
@@ -235,7 +242,7 @@ public final class ChamberPage {
         Asked asked = asked(call);
         Changes changes =
                 form(asked).changes().orElseThrow(() -> new Refusal(422, "not-understood"));
-        double planned = asked.advice().plan().getChamber(asked.chamber()).setting().temperatureC();
+        double planned = asked.advice().settingC(asked.chamber());
         call.http()
                 .json(
                         views(asked)

@@ -6,8 +6,6 @@ import java.util.Optional;
 import java.util.OptionalDouble;
 import java.util.function.Function;
 import org.wardon.advice.whatif.Changes;
-import org.wardon.enclosure.Door;
-import org.wardon.plan.ChamberPlan;
 import org.wardon.web.pages.FieldView;
 import org.wardon.web.pages.Figures;
 import org.wardon.web.pages.PageWords;
@@ -21,7 +19,8 @@ public final class WhatIfForm {
     private static final double MOST_PCT = 1_000;
     private static final double MOST_OPENINGS = 2_000;
 
-    private final ChamberPlan chamber;
+    private final double settingC;
+    private final OptionalDouble openingsPerDay;
     private final Figures figures;
     private final PageWords words;
     private final Function<String, String> typed;
@@ -41,8 +40,13 @@ public final class WhatIfForm {
 
     /** Reads what was typed; blank is as planned. */
     WhatIfForm(
-            ChamberPlan chamber, Figures figures, PageWords words, Function<String, String> typed) {
-        this.chamber = chamber;
+            double settingC,
+            OptionalDouble openingsPerDay,
+            Figures figures,
+            PageWords words,
+            Function<String, String> typed) {
+        this.settingC = settingC;
+        this.openingsPerDay = openingsPerDay;
         this.figures = figures;
         this.words = words;
         this.typed = typed;
@@ -87,7 +91,7 @@ public final class WhatIfForm {
     }
 
     private OptionalDouble setting() {
-        double planned = chamber.setting().temperatureC();
+        double planned = settingC;
         OptionalDouble given = figures.temperatureC(typed("setting"));
         double low = figures.shownTemperature(LEAST_C);
         double high = figures.shownTemperature(MOST_C);
@@ -115,16 +119,15 @@ public final class WhatIfForm {
     }
 
     private OptionalDouble door() {
-        if (chamber.enclosure().door().isEmpty()) {
+        if (openingsPerDay.isEmpty()) {
             return OptionalDouble.empty();
         }
-        Door door = chamber.enclosure().door().get();
+        double planned = openingsPerDay.getAsDouble();
         OptionalDouble given = figures.number(typed("door"));
         OptionalDouble checked = checked("door", given, 0, MOST_OPENINGS, range(0, MOST_OPENINGS));
-        double most = Math.max(40, 3 * door.openingsPerDay());
-        slides.add(
-                slide("door", figures.typed(door.openingsPerDay()), "", new double[] {0, most, 1}));
-        return differs(checked, door.openingsPerDay());
+        double most = Math.max(40, 3 * planned);
+        slides.add(slide("door", figures.typed(planned), "", new double[] {0, most, 1}));
+        return differs(checked, planned);
     }
 
     private static OptionalDouble differs(OptionalDouble given, double planned) {

@@ -72,6 +72,15 @@ async function draw(box) {
   new ResizeObserver(() => chart.setSize({ width: box.clientWidth, height: 260 })).observe(box);
 }
 
+// Charts take the colours of the page, so they are drawn again when it turns dark or light.
+matchMedia('(prefers-color-scheme: dark)').addEventListener('change', () => {
+  document.querySelectorAll('[data-drawn]').forEach((box) => {
+    delete box.dataset.drawn;
+    box.replaceChildren();
+    draw(box);
+  });
+});
+
 document.querySelectorAll('[data-progress]').forEach(follow);
 document.querySelectorAll('[data-chart]').forEach((box) => {
   const details = box.closest('details');

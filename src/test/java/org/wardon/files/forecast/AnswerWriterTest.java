@@ -111,8 +111,9 @@ class AnswerWriterTest {
                                                                 "mango", "okra", "no", List.of())),
                                                 Optional.of(
                                                         new ShareAnswer.Compromise(
-                                                                9, Map.of("okra", 2.5))))));
-        assertNames("verdict workableC workableHumidityPct pairs compromise", share);
+                                                                9, 90, Map.of("okra", 2.5))),
+                                                Optional.of("okra"))));
+        assertNames("verdict workableC workableHumidityPct pairs compromise takeOut", share);
         assertTrue(share.get("workableC").isNull());
         assertNames("a b verdict reasons", share.get("pairs").get(0));
         assertEquals(2.5, share.get("compromise").get("daysLost").get("okra").asDouble());
