@@ -30,8 +30,8 @@ final class PlacingFigures {
             Oracle.Answer theirs = Oracle.ask(problem, Math.max(1, seconds));
             System.out.printf(
                     Locale.ROOT,
-                    "%d x %d, seed %d: %.0f of at most %.0f (%.2f %%), %s, %.1f s (%.1f s of a processor);"
-                            + " general solver %.0f of at most %.0f%n",
+                    "%d x %d, seed %d: %.0f of at most %.0f (%.2f %%), %s, %.1f s (%.1f s of a"
+                        + " processor); general solver %.0f of at most %.0f%n",
                     lots,
                     chambers,
                     seed,
