@@ -23,6 +23,10 @@ import org.wardon.produce.rows.OwnLot;
 
 /** Lots that are gone stay in the keeper's file and come to the commodity. */
 class GoneLotsTest {
+    /** Tables that a file of the first version has not, those that are pointed to last. */
+    private static final List<String> LATER_TABLES =
+            List.of("kept_file", "kept_body", "kept_version", "kept_plan", "gone_lot");
+
     @TempDir Path folder;
 
     private static GoneLot gone(String commodity, double days, String note) {
@@ -64,7 +68,9 @@ class GoneLotsTest {
         try (Connection connection =
                         DriverManager.getConnection("jdbc:sqlite:" + folder.resolve("store.db"));
                 Statement statement = connection.createStatement()) {
-            statement.execute("drop table gone_lot");
+            for (String later : LATER_TABLES) {
+                statement.execute("drop table " + later);
+            }
             statement.execute("pragma user_version = 1");
         }
         GoneLots file = new GoneLots(folder);

@@ -31,7 +31,7 @@ public record Effort(
     }
 
     /** Lots and chambers up to which a best placing is proven. */
-    private static final int FEW = 90;
+    private static final int FEW = 150;
 
     private static final int MANY = 600;
 
