@@ -31,7 +31,7 @@ final class PlacingFigures {
             System.out.printf(
                     Locale.ROOT,
                     "%d x %d, seed %d: %.0f of at most %.0f (%.2f %%), %s, %.1f s (%.1f s of a"
-                        + " processor); general solver %.0f of at most %.0f%n",
+                            + " processor); general solver %.0f of at most %.0f%n",
                     lots,
                     chambers,
                     seed,
