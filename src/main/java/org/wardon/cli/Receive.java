@@ -8,8 +8,8 @@ import org.wardon.advice.receiving.Receiving;
 import org.wardon.errors.BadInput;
 import org.wardon.files.AtomicFile;
 import org.wardon.files.Lookups;
+import org.wardon.files.LotIntoPlan;
 import org.wardon.files.PlanReader;
-import org.wardon.files.PlanText;
 import org.wardon.files.TextFile;
 import org.wardon.files.forecast.AnswerWriter;
 import org.wardon.files.forecast.ReceiveAnswer;
@@ -80,7 +80,8 @@ final class Receive implements Callable<Integer> {
         ReceiveAnswer answer = receiving.answer(lot);
         if (put != null && write != null) {
             String chamber = chamber(put, receiving, answer);
-            String with = PlanText.addedTo(text, plan.toString(), receiving.placed(lot, chamber));
+            String with =
+                    LotIntoPlan.addedTo(text, plan.toString(), receiving.placed(lot, chamber));
             // What it names has to be found from where it is to stand.
             PlanReader.read(with, write, lookups);
             Path file = write;

@@ -14,8 +14,9 @@ import org.wardon.advice.wording.Words;
 import org.wardon.errors.BadInput;
 import org.wardon.errors.Fault;
 import org.wardon.errors.RunStopped;
-import org.wardon.files.PlanText;
+import org.wardon.files.LotIntoPlan;
 import org.wardon.files.forecast.ReceiveAnswer;
+import org.wardon.logbook.PlanText;
 import org.wardon.logbook.Saved;
 import org.wardon.plan.LotPlan;
 import org.wardon.plan.StorePlan;
@@ -168,7 +169,7 @@ public final class DoorPage {
                 bench.door(open, good, call.preferences().units(), 60_000)
                         .orElseThrow(() -> new Refusal(503, "not-ready"));
         LotPlan lot = receiving.placed(form.lot(crop, now(good.plan())), call.field("chamber"));
-        String text = PlanText.addedTo(open.text().text(), open.kept().name(), lot);
+        String text = LotIntoPlan.addedTo(open.text().text(), open.kept().name(), lot);
         String note =
                 press.words()
                         .say(
@@ -183,7 +184,7 @@ public final class DoorPage {
                                 open.kept().id(),
                                 version,
                                 open.kept().name(),
-                                new org.wardon.logbook.PlanText(text, open.text().files()),
+                                new PlanText(text, open.text().files()),
                                 note);
         if (saved instanceof Saved.Kept) {
             call.goTo(open.kept());

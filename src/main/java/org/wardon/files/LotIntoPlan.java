@@ -19,11 +19,11 @@ import org.wardon.plan.PackagePlan;
 import org.wardon.plan.Place;
 import org.wardon.produce.Ripeness;
 
-/** Changes the text of a store plan and leaves all else in it as it was typed. */
-public final class PlanText {
+/** Adds a lot to the text of a store plan and leaves all else in it as it was typed. */
+public final class LotIntoPlan {
     private static final JsonPath LOTS = JsonPath.ROOT.then(new JsonPath.Member("lots"));
 
-    private PlanText() {}
+    private LotIntoPlan() {}
 
     /**
      * Adds a lot to a plan.

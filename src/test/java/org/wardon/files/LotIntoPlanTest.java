@@ -25,7 +25,7 @@ import org.wardon.plan.StorePlan;
 import org.wardon.produce.Ripeness;
 
 /** Lots put into the text of a plan. */
-class PlanTextTest {
+class LotIntoPlanTest {
     private static final Path DEMO = Path.of("demo-data/landing.json");
     private static final String LINE =
             "{\"id\": \"MAN2\", \"commodity\": \"mango\", \"massKg\": 812.5, \"package\":"
@@ -71,7 +71,7 @@ class PlanTextTest {
     @Test
     void everyOtherLetterOfTheDemoStays() throws IOException {
         String before = Files.readString(DEMO);
-        String after = PlanText.addedTo(before, "landing.json", MANGO);
+        String after = LotIntoPlan.addedTo(before, "landing.json", MANGO);
         int at = after.indexOf(LINE);
         String lead = ",\n    ";
         assertEquals(lead, after.substring(at - lead.length(), at));
@@ -89,7 +89,7 @@ class PlanTextTest {
                     case "stack" -> new PackagePlan.Stack(0.4);
                     default -> new PackagePlan.Named("room-cooling-any");
                 };
-        String after = PlanText.addedTo(Files.readString(DEMO), "landing.json", mango(how));
+        String after = LotIntoPlan.addedTo(Files.readString(DEMO), "landing.json", mango(how));
         StorePlan plan = PlanReader.read(after, DEMO, TableLookups.read());
         assertEquals(mango(how), plan.lots().get(plan.lots().size() - 1));
         assertEquals(12, plan.lots().size());
@@ -99,13 +99,14 @@ class PlanTextTest {
     void aListOnOneLineAnEmptyOneAndNone() {
         assertEquals(
                 "{\"a\": 1, \"lots\": [{\"id\": \"é🥭\"}, " + LINE + "], \"b\": [2]}",
-                PlanText.addedTo(
+                LotIntoPlan.addedTo(
                         "{\"a\": 1, \"lots\": [{\"id\": \"é🥭\"}], \"b\": [2]}", "p", MANGO));
-        assertEquals("{\"lots\": [" + LINE + "]}", PlanText.addedTo("{\"lots\": []}", "p", MANGO));
+        assertEquals(
+                "{\"lots\": [" + LINE + "]}", LotIntoPlan.addedTo("{\"lots\": []}", "p", MANGO));
         assertEquals(
                 "{\n  \"a\": {\"lots\": []},\n  \"lots\": [" + LINE + "]\n}\n",
-                PlanText.addedTo("{\n  \"a\": {\"lots\": []}\n}\n", "p", MANGO));
-        assertEquals("{\"lots\": [" + LINE + "]}", PlanText.addedTo("{}", "p", MANGO));
+                LotIntoPlan.addedTo("{\n  \"a\": {\"lots\": []}\n}\n", "p", MANGO));
+        assertEquals("{\"lots\": [" + LINE + "]}", LotIntoPlan.addedTo("{}", "p", MANGO));
     }
 
     @Test
@@ -116,12 +117,13 @@ class PlanTextTest {
                 "{\"lots\": [{\"id\": \"A\"}, {\"id\": \"MAN2\"}]}",
                 "p $.lots[1].id: is 'MAN2', the id of the new lot; accepted: each id once");
         BadInput broken =
-                assertThrows(BadInput.class, () -> PlanText.addedTo("{\"lots\": [", "p", MANGO));
+                assertThrows(BadInput.class, () -> LotIntoPlan.addedTo("{\"lots\": [", "p", MANGO));
         assertTrue(broken.faults().get(0).sentence().startsWith("p "), broken.getMessage());
     }
 
     private static void refused(String text, String sentence) {
-        BadInput refused = assertThrows(BadInput.class, () -> PlanText.addedTo(text, "p", MANGO));
+        BadInput refused =
+                assertThrows(BadInput.class, () -> LotIntoPlan.addedTo(text, "p", MANGO));
         assertEquals(1, refused.faults().size());
         assertEquals(sentence, refused.faults().get(0).sentence());
     }
