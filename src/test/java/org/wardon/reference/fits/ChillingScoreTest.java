@@ -41,8 +41,8 @@ class ChillingScoreTest {
 
     /**
      * Four in five by the exposures alone; as the program answers, where the handbook's own
-     * condition is held, 132 of 166, which is just below. The program that scores prints the misses
-     * with their likely reasons.
+     * condition is held, 133 of 166. The program that scores prints the misses with their likely
+     * reasons.
      */
     @Test
     @Source("chilling-exposure.csv")
@@ -52,13 +52,16 @@ class ChillingScoreTest {
         long right = all.stream().filter(Judged::right).count();
         long held = all.stream().filter(Judged::rightHeld).count();
         assertTrue(right >= 0.8 * all.size(), right + " of " + all.size());
-        assertTrue(held >= 0.79 * all.size(), held + " of " + all.size());
+        assertTrue(held >= 0.8 * all.size(), held + " of " + all.size());
         all.stream()
                 .filter(one -> !one.rightHeld())
                 .forEach(one -> assertFalse(WhyMissed.likely(one).isBlank()));
     }
 
-    /** Where colder is always worse it stays so beside the handbook's condition, without a jump. */
+    /**
+     * Where colder is always worse it stays so beside the handbook's condition, without a jump:
+     * what a kelvin more harms comes in over no less than 0.3 K.
+     */
     @Test
     void colderNeverInjuresLessAboveAFloorAndNothingJumps() {
         for (Commodity one : book.all()) {
@@ -76,7 +79,8 @@ class ChillingScoreTest {
             for (double t = chilling.zone().topC(); t > -2; t -= 0.01) {
                 double here = injury.perDay(t, t);
                 assertTrue(here >= warmer, one.id() + " at " + t);
-                assertTrue(here - warmer <= 0.011 * (steepest + 1 / injury.doseKd()), one.id());
+                assertTrue(
+                        here - warmer <= 0.011 * (steepest / 0.3 + 1 / injury.doseKd()), one.id());
                 warmer = here;
             }
         }
