@@ -64,8 +64,21 @@ public final class HeatModel {
      * @throws IllegalArgumentException where a lot is carried to where no such lot comes in
      */
     public static List<Course> runTogether(List<ChamberRun> runs) {
-        return TogetherRun.of(
-                runs, runs.isEmpty() ? Accuracy.USUAL : Accuracy.of(runs.get(0).doorMode()));
+        return runTogether(runs, Progress.SILENT);
+    }
+
+    /**
+     * Runs the chambers of a store for as long as nobody stops it.
+     *
+     * @param runs the chambers, of one span and one site; a lot that is carried on stands in both
+     * @param progress hears of each hour of each chamber, in any order, as stage {@code heat}
+     * @return what happened, in the order of the runs
+     * @throws org.wardon.errors.RunStopped where a state cannot be
+     * @throws IllegalArgumentException where a lot is carried to where no such lot comes in
+     */
+    public static List<Course> runTogether(List<ChamberRun> runs, Progress progress) {
+        Accuracy accuracy = runs.isEmpty() ? Accuracy.USUAL : Accuracy.of(runs.get(0).doorMode());
+        return TogetherRun.of(runs, accuracy, progress);
     }
 
     /**

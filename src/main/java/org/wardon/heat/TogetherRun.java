@@ -21,15 +21,17 @@ final class TogetherRun {
     private record HandOver(ChamberRunner from, int lot, ChamberRunner to, int place) {}
 
     private final List<ChamberRun> runs;
+    private final Progress progress;
     private final Map<String, ChamberRunner> taking = new HashMap<>();
     private final TreeMap<Double, List<HandOver>> handOvers = new TreeMap<>();
 
-    private TogetherRun(List<ChamberRun> runs) {
+    private TogetherRun(List<ChamberRun> runs, Progress progress) {
         this.runs = runs;
+        this.progress = progress;
     }
 
-    static List<Course> of(List<ChamberRun> runs, Accuracy accuracy) {
-        TogetherRun together = new TogetherRun(List.copyOf(runs));
+    static List<Course> of(List<ChamberRun> runs, Accuracy accuracy, Progress progress) {
+        TogetherRun together = new TogetherRun(List.copyOf(runs), progress);
         together.prepare(accuracy);
         together.handOver();
         return together.runs.parallelStream().map(run -> together.finish(run, accuracy)).toList();
@@ -91,7 +93,7 @@ final class TogetherRun {
                             .distinct()
                             .toList()
                             .parallelStream()
-                            .forEach(runner -> runner.goTo(atS, Progress.SILENT));
+                            .forEach(runner -> runner.goTo(atS, progress));
                     List<LotState> states =
                             group.stream().map(one -> one.from.carryOut(one.lot)).toList();
                     for (int i = 0; i < states.size(); i++) {
@@ -103,6 +105,6 @@ final class TogetherRun {
     private Course finish(ChamberRun run, Accuracy accuracy) {
         ChamberRunner begun = taking.get(run.chamberId());
         ChamberRunner runner = begun == null ? ChamberRunner.of(run, accuracy, false) : begun;
-        return runner.run(Progress.SILENT);
+        return runner.run(progress);
     }
 }

@@ -23,6 +23,11 @@ final class Pairing {
         verdict = common.verdict();
     }
 
+    /** Whether the two have no setting in common. */
+    boolean isApart() {
+        return common.verdict() == Verdict.NO;
+    }
+
     PairVerdict verdict() {
         if (common.verdict() == Verdict.NO) {
             apart();

@@ -3,6 +3,7 @@ package org.wardon.sharing;
 import java.util.ArrayList;
 import java.util.List;
 import java.util.Optional;
+import java.util.function.BiPredicate;
 import org.wardon.errors.Require;
 import org.wardon.keeping.Draw;
 import org.wardon.produce.Reason;
@@ -34,15 +35,30 @@ public final class Sharing {
      * @return verdict, workable settings and every pair
      */
     public static SharingAnswer among(List<Workable> lots) {
+        return among(lots, (one, other) -> true);
+    }
+
+    /**
+     * Judges a group not all of whom are there at one time. They still have to have a setting in
+     * common, as that stays; what two do to each other counts where they meet.
+     *
+     * @param lots the lots with their workable settings, at least one
+     * @param meet whether two lots, by id, are there at one time
+     * @return verdict, workable settings and every pair that meets or has no setting in common
+     */
+    public static SharingAnswer among(List<Workable> lots, BiPredicate<String, String> meet) {
         Require.that(!lots.isEmpty(), "sharing is judged of at least one lot");
         Common common = Common.of(lots);
         Verdict verdict = common.verdict();
         List<PairVerdict> pairs = new ArrayList<>();
         for (int i = 0; i < lots.size(); i++) {
             for (int j = i + 1; j < lots.size(); j++) {
-                PairVerdict pair = new Pairing(lots.get(i), lots.get(j)).verdict();
-                pairs.add(pair);
-                verdict = verdict.worse(pair.verdict());
+                Pairing pairing = new Pairing(lots.get(i), lots.get(j));
+                PairVerdict pair = pairing.verdict();
+                if (pairing.isApart() || meet.test(pair.a(), pair.b())) {
+                    pairs.add(pair);
+                    verdict = verdict.worse(pair.verdict());
+                }
             }
         }
         boolean apart = common.verdict() == Verdict.NO;

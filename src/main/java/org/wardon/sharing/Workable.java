@@ -1,7 +1,9 @@
 package org.wardon.sharing;
 
+import java.util.ArrayList;
 import java.util.Arrays;
 import java.util.List;
+import java.util.Optional;
 import org.wardon.keeping.Draw;
 import org.wardon.keeping.KeepingModel;
 
@@ -160,7 +162,7 @@ public final class Workable {
     }
 
     private boolean clearOfFreezing(int t) {
-        return Settings.temperatureC(t) >= model.freezingC() + Limits.FREEZING_MARGIN_K;
+        return Settings.temperatureC(t) >= frostC();
     }
 
     /**
@@ -225,6 +227,84 @@ public final class Workable {
      */
     public boolean safe(double temperatureC) {
         return safe(Settings.nearestTemperature(temperatureC));
+    }
+
+    /**
+     * Returns what every temperature does to the lot, from cold to warm.
+     *
+     * @return stretches of the temperatures looked at, half a degree apart
+     */
+    public List<Stretch> stretches() {
+        List<Stretch> stretches = new ArrayList<>();
+        int from = 0;
+        for (int t = 1; t <= Settings.TEMPERATURES; t++) {
+            if (t == Settings.TEMPERATURES || what(t) != what(from)) {
+                double lowC = Settings.temperatureC(from);
+                double highC = Settings.temperatureC(t - 1);
+                stretches.add(new Stretch(lowC, highC, what(from)));
+                from = t;
+            }
+        }
+        return stretches;
+    }
+
+    private Stretch.What what(int t) {
+        if (!clearOfFreezing(t)) {
+            return Stretch.What.FREEZES;
+        }
+        if (!safe(t)) {
+            return Stretch.What.CHILLS;
+        }
+        Stretch.What best = Stretch.What.SHORT;
+        for (int h = 0; h < Settings.HUMIDITIES; h++) {
+            if (verdicts[t][h] == Verdict.GOOD) {
+                return Stretch.What.LASTS;
+            }
+            best = bearable(t, h) ? Stretch.What.BEARS : best;
+        }
+        return best;
+    }
+
+    /**
+     * Returns the temperature the lot must not come below for fear of freezing.
+     *
+     * @return its freezing point and the margin, °C
+     */
+    public double frostC() {
+        return model.freezingC() + Limits.FREEZING_MARGIN_K;
+    }
+
+    /**
+     * Returns the humidities at which the lot bears some temperature.
+     *
+     * @return lowest and highest, percent; empty where it bears none
+     */
+    public Optional<SettingRange> bornePct() {
+        Settings.Extent borne = new Settings.Extent();
+        for (int t = 0; t < Settings.TEMPERATURES; t++) {
+            for (int h = 0; h < Settings.HUMIDITIES; h++) {
+                if (bearable(t, h)) {
+                    borne.add(Settings.humidityPct(h));
+                }
+            }
+        }
+        return SettingRange.of(borne);
+    }
+
+    /**
+     * Returns the temperatures the lot bears.
+     *
+     * @return lowest and highest, °C, perhaps with harm between; empty where it bears none
+     */
+    public Optional<SettingRange> borneC() {
+        Settings.Extent borne = new Settings.Extent();
+        for (Stretch stretch : stretches()) {
+            if (stretch.what().compareTo(Stretch.What.BEARS) >= 0) {
+                borne.add(stretch.lowC());
+                borne.add(stretch.highC());
+            }
+        }
+        return SettingRange.of(borne);
     }
 
     /**

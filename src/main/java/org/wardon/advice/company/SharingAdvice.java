@@ -57,6 +57,12 @@ public final class SharingAdvice {
      * @throws BadInput with every fault: an unknown name, a crop named twice, days out of range
      */
     public ShareReport ask(Map<String, Double> days) {
+        SharingAnswer found = Sharing.of(wishes(days), draws);
+        return new ShareReport(answer(found), found.reasons());
+    }
+
+    /** The crops as lots that are to keep their days; throws every fault. */
+    List<Wish> wishes(Map<String, Double> days) {
         List<Fault> faults = new ArrayList<>();
         List<Wish> wishes = new ArrayList<>();
         List<String> seen = new ArrayList<>();
@@ -64,8 +70,7 @@ public final class SharingAdvice {
         if (!faults.isEmpty()) {
             throw new BadInput(faults);
         }
-        SharingAnswer found = Sharing.of(wishes, draws);
-        return new ShareReport(answer(found), found.reasons());
+        return wishes;
     }
 
     private Optional<Wish> wish(String name, double wanted, List<String> seen, List<Fault> faults) {

@@ -151,10 +151,18 @@ final class StoreModel {
      * averaged doors, which have no cycles of their own to disagree about.
      */
     Map<String, Course> plain(double durationS, Progress progress) {
-        Map<String, AirSeries> air = agreedAir(durationS);
+        Map<String, AirSeries> air =
+                agreedAir(durationS, (stage, done) -> progress.at("forecast", 0));
         progress.at("forecast", 0.5);
         Map<String, Course> courses =
-                pass(Draw.MEDIAN, id -> durationS, air, DoorMode.PULSES, ControlMode.AS_BUILT);
+                pass(
+                        everyChamber(),
+                        Draw.MEDIAN,
+                        id -> durationS,
+                        air,
+                        DoorMode.PULSES,
+                        ControlMode.AS_BUILT,
+                        (stage, done) -> progress.at("forecast", 0.5));
         progress.at("forecast", 1);
         return courses;
     }
@@ -173,17 +181,23 @@ final class StoreModel {
 
     /** Air of all chambers as their neighbours feel it, handed on until it agrees. */
     Map<String, AirSeries> agreedAir(double durationS) {
+        return agreedAir(durationS, Progress.SILENT);
+    }
+
+    private Map<String, AirSeries> agreedAir(double durationS, Progress progress) {
         Map<String, AirSeries> air = startAir();
         boolean coupled = plan.chambers().stream().anyMatch(StoreModel::hasNeighbour);
         for (int pass = 0; coupled && pass < MOST_PASSES; pass++) {
             Map<String, AirSeries> next =
                     airOf(
                             pass(
+                                    everyChamber(),
                                     Draw.MEDIAN,
                                     id -> durationS,
                                     air,
                                     DoorMode.AVERAGED,
-                                    ControlMode.MODULATING));
+                                    ControlMode.MODULATING,
+                                    progress));
             boolean agreed = apartK(air, next, durationS) < AGREED_K;
             air = next;
             if (agreed) {
@@ -342,8 +356,11 @@ final class StoreModel {
             Map<String, AirSeries> air,
             DoorMode door,
             ControlMode control) {
-        Set<String> all = plan.chambers().stream().map(ChamberPlan::id).collect(toSet());
-        return pass(all, draw, endS, air, door, control);
+        return pass(everyChamber(), draw, endS, air, door, control);
+    }
+
+    private Set<String> everyChamber() {
+        return plan.chambers().stream().map(ChamberPlan::id).collect(toSet());
     }
 
     private Map<String, Course> pass(
@@ -353,6 +370,17 @@ final class StoreModel {
             Map<String, AirSeries> air,
             DoorMode door,
             ControlMode control) {
+        return pass(chambers, draw, endS, air, door, control, Progress.SILENT);
+    }
+
+    private Map<String, Course> pass(
+            Set<String> chambers,
+            Draw draw,
+            ToDoubleFunction<String> endS,
+            Map<String, AirSeries> air,
+            DoorMode door,
+            ControlMode control,
+            Progress progress) {
         List<ChamberRun> runs =
                 plan.chambers().stream()
                         .filter(chamber -> chambers.contains(chamber.id()))
@@ -361,7 +389,7 @@ final class StoreModel {
                         .map(run -> door == DoorMode.PULSES ? run : Averaged.of(run))
                         .map(run -> door == DoorMode.SKETCHED ? run.withStart(warmed(run)) : run)
                         .toList();
-        List<Course> ran = HeatModel.runTogether(runs);
+        List<Course> ran = HeatModel.runTogether(runs, progress);
         Map<String, Course> courses = new LinkedHashMap<>();
         ran.forEach(course -> courses.put(course.chamberId(), course));
         return courses;

@@ -11,6 +11,7 @@ import java.util.Optional;
 import java.util.Set;
 import org.wardon.air.Timeline;
 import org.wardon.air.Weather;
+import org.wardon.errors.Progress;
 import org.wardon.heat.AirSeries;
 import org.wardon.heat.Course;
 import org.wardon.heat.LotCourse;
@@ -32,6 +33,7 @@ public final class StoreTrial {
     private static final double LEAST_KG = 0.1;
 
     private final StoreModel model;
+    private final Progress progress;
     private final Fates fates;
     private final List<TrialLot> lots;
     private final List<Draw> draws;
@@ -41,8 +43,9 @@ public final class StoreTrial {
 
     private final Set<Draw> typical;
 
-    private StoreTrial(StoreModel model) {
+    private StoreTrial(StoreModel model, Progress progress) {
         this.model = model;
+        this.progress = progress;
         fates = new Fates(model);
         lots = model.sheets().stream().map(TrialLot::new).toList();
         draws = Draws.seeded(model.plan().seed(), StoreRun.DRAWS);
@@ -58,16 +61,29 @@ public final class StoreTrial {
      * @return the store
      */
     public static StoreTrial of(StorePlan plan, ReferenceBook book) {
+        return of(plan, book, Progress.SILENT);
+    }
+
+    /**
+     * Prepares a plan to be asked about for as long as nobody stops it.
+     *
+     * @param plan the plan; lots may be without a chamber
+     * @param book the reference book
+     * @param progress hears of every trial before it is made, and may stop the work
+     * @return the store
+     */
+    public static StoreTrial of(StorePlan plan, ReferenceBook book, Progress progress) {
         Weather weather =
                 PlanWeather.prolonged(
                         plan.weatherSource().weather(),
                         plan.durationS(),
                         StoreRun.MOST_BEYOND_DAYS);
-        return of(new StoreModel(plan, weather, new LotSheets(plan, weather, book).all()));
+        return new StoreTrial(
+                new StoreModel(plan, weather, new LotSheets(plan, weather, book).all()), progress);
     }
 
     static StoreTrial of(StoreModel model) {
-        return new StoreTrial(model);
+        return new StoreTrial(model, Progress.SILENT);
     }
 
     /**
@@ -77,6 +93,15 @@ public final class StoreTrial {
      */
     public StorePlan plan() {
         return model.plan();
+    }
+
+    /**
+     * Returns who hears of the work and may stop it.
+     *
+     * @return the hearer
+     */
+    public Progress progress() {
+        return progress;
     }
 
     /**
@@ -107,6 +132,7 @@ public final class StoreTrial {
      * @return what it comes to, a row every three hours
      */
     public Course sketch(ChamberPlan as, List<TrialLot> with, double share, double heatW) {
+        progress.at("trial", 0);
         List<Stay> stays = new ArrayList<>();
         for (TrialLot one : with) {
             Stay whole = one.sheet().stay(Draw.MEDIAN);
@@ -141,6 +167,7 @@ public final class StoreTrial {
      * @return what it comes to
      */
     public LotInAir in(TrialLot lot, AirSeries air, double ppm) {
+        progress.at("trial", 0);
         LotSheet sheet = lot.sheet();
         double endS = model.plan().durationS();
         LotCourse middle = model.inAir(sheet.stay(Draw.MEDIAN), air, endS);
@@ -176,7 +203,7 @@ public final class StoreTrial {
      * @return what is kept and what it costs, as the forecast tells it
      */
     public Tried run(StorePlan otherwise) {
-        return new TrialRun(model.placed(otherwise)).run();
+        return new TrialRun(model.placed(otherwise), progress).run();
     }
 
     /**

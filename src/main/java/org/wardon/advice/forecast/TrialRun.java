@@ -3,18 +3,16 @@ package org.wardon.advice.forecast;
 import java.util.HashMap;
 import java.util.List;
 import java.util.Map;
-import java.util.stream.Collectors;
 import org.wardon.errors.Progress;
 import org.wardon.heat.Course;
 import org.wardon.keeping.Draw;
 import org.wardon.keeping.Draws;
-import org.wardon.keeping.Fate;
 import org.wardon.keeping.Mechanism;
 import org.wardon.keeping.Outlook;
-import org.wardon.keeping.Spread;
 import org.wardon.keeping.StoreEthylene;
 import org.wardon.lots.LotHistory;
 import org.wardon.plan.ChamberPlan;
+import org.wardon.produce.Reason;
 
 /**
  * Runs a store as a forecast does, once in full and once a draw, and keeps what a placing is judged
@@ -22,28 +20,31 @@ import org.wardon.plan.ChamberPlan;
  */
 final class TrialRun {
     private final StoreModel model;
+    private final Progress progress;
     private final Fates fates;
     private final double horizonS;
 
-    TrialRun(StoreModel model) {
+    TrialRun(StoreModel model, Progress progress) {
         this.model = model;
+        this.progress = progress;
         fates = new Fates(model);
         horizonS = model.plan().durationS();
     }
 
     Tried run() {
-        Map<String, Course> courses = model.plain(horizonS, Progress.SILENT);
+        Map<String, Course> courses = model.plain(horizonS, progress);
         Settling ends = Settling.of(model, courses, horizonS);
         StoreEthylene ethylene = fates.ethylene(courses, Draw.MEDIAN);
         List<Map<String, Fates.Two>> drawn =
                 Draws.seeded(model.plan().seed(), StoreRun.DRAWS).parallelStream()
                         .map(draw -> drawn(draw, courses, ends))
                         .toList();
+        StoreOutcome outcome = outcome(courses, ethylene, drawn);
         Map<String, Tried.OfLot> lots = new HashMap<>();
         for (LotSheet sheet : model.sheets()) {
             LotHistory history = ethylene.histories().get(sheet.id());
             if (history != null) {
-                lots.put(sheet.id(), lot(sheet, history, drawn));
+                lots.put(sheet.id(), lot(sheet, history, outcome.fates(sheet.id())));
             }
         }
         // Summed in the order of the plan, as the forecast does.
@@ -57,10 +58,51 @@ final class TrialRun {
             Course course = ById.get(courses, chamber.id());
             energy += ChamberFigures.energyCost(chamber, course, model.plan());
         }
-        return new Tried(model.plan(), kept, energy, courses, ethylene.chambers(), lots);
+        return new Tried(
+                model.plan(), kept, energy, courses, ethylene.chambers(), lots, notHeld(outcome));
+    }
+
+    /** What the verdict on chambers asks for; nothing of lots without a chamber. */
+    private StoreOutcome outcome(
+            Map<String, Course> courses,
+            StoreEthylene ethylene,
+            List<Map<String, Fates.Two>> drawn) {
+        Map<String, LotFates> ends = new HashMap<>();
+        for (LotSheet sheet : model.sheets()) {
+            LotHistory history = ethylene.histories().get(sheet.id());
+            if (history != null) {
+                List<Fates.Two> here =
+                        drawn.stream().map(draw -> ById.get(draw, sheet.id())).toList();
+                ends.put(
+                        sheet.id(),
+                        new LotFates(
+                                fates.inside(sheet, history, Draw.MEDIAN).staying(),
+                                here.stream().map(Fates.Two::staying).toList(),
+                                here.stream().map(Fates.Two::sold).toList(),
+                                List.of(),
+                                sheet.model().basis(history)));
+            }
+        }
+        return new StoreOutcome(
+                model,
+                horizonS,
+                courses,
+                ethylene.chambers(),
+                ethylene.histories(),
+                ends,
+                Map.of());
+    }
+
+    private static Map<String, List<Reason>> notHeld(StoreOutcome outcome) {
+        Map<String, List<Reason>> why = new HashMap<>();
+        for (ChamberPlan chamber : outcome.model().plan().chambers()) {
+            why.put(chamber.id(), Holding.of(chamber, outcome).reasons());
+        }
+        return why;
     }
 
     private Map<String, Fates.Two> drawn(Draw draw, Map<String, Course> plain, Settling ends) {
+        progress.at("trial", 0);
         Map<String, Course> courses = model.drawn(draw, ends::chamberS, plain);
         Map<String, LotHistory> histories = fates.ethylene(courses, draw).histories();
         Map<String, Fates.Two> found = new HashMap<>();
@@ -73,21 +115,20 @@ final class TrialRun {
         return found;
     }
 
-    private Tried.OfLot lot(
-            LotSheet sheet, LotHistory history, List<Map<String, Fates.Two>> drawn) {
-        List<Fates.Two> here =
-                drawn.stream().map(draw -> ById.get(draw, sheet.id())).collect(Collectors.toList());
-        List<Fate> sold = here.stream().map(Fates.Two::sold).toList();
+    private Tried.OfLot lot(LotSheet sheet, LotHistory history, LotFates fates) {
         double from = sheet.clock().hereFromS();
-        double sound = Outlook.shareSound(sold, sheet.soldS());
+        double sound = fates.shareSoundWhenSold(sheet.soldS());
         double chilled =
-                sold.stream().filter(f -> f.endS(Mechanism.CHILLING) <= sheet.soldS()).count();
+                fates.sold().stream()
+                        .filter(f -> f.endS(Mechanism.CHILLING) <= sheet.soldS())
+                        .count();
+        Outlook outlook = fates.outlook(from, horizonS, sheet.soldS());
         return new Tried.OfLot(
                 LotFigures.valueKept(sheet, history, sound),
                 sound,
                 LotFigures.massAtLeaving(sheet, history) / history.massKg(0),
-                chilled / sold.size(),
-                Spread.of(here.stream().mapToDouble(f -> f.staying().daysLeft(from)).toArray()),
-                here.get(0).staying().limitedBy());
+                chilled / fates.sold().size(),
+                outlook.daysLeft(),
+                outlook.limitedBy());
     }
 }

@@ -1,11 +1,13 @@
 package org.wardon.advice.forecast;
 
+import java.util.List;
 import java.util.Map;
 import org.wardon.heat.Course;
 import org.wardon.keeping.ChamberEthylene;
 import org.wardon.keeping.Mechanism;
 import org.wardon.keeping.Spread;
 import org.wardon.plan.StorePlan;
+import org.wardon.produce.Reason;
 
 /**
  * A store run in full: the money as the forecast tells it, chambers and lots.
@@ -16,6 +18,7 @@ import org.wardon.plan.StorePlan;
  * @param chambers the chambers, by id
  * @param ethylene their ethylene, by id
  * @param lots the lots that stood in the store, by id
+ * @param notHeld why a chamber does not hold its setting, by id; empty where it does
  */
 public record Tried(
         StorePlan plan,
@@ -23,12 +26,16 @@ public record Tried(
         double energyCost,
         Map<String, Course> chambers,
         Map<String, ChamberEthylene> ethylene,
-        Map<String, OfLot> lots) {
+        Map<String, OfLot> lots,
+        Map<String, List<Reason>> notHeld) {
+    private static final double J_PER_KWH = 3.6e6;
+
     /** Copies the maps. */
     public Tried {
         chambers = Map.copyOf(chambers);
         ethylene = Map.copyOf(ethylene);
         lots = Map.copyOf(lots);
+        notHeld = Map.copyOf(notHeld);
     }
 
     /**
@@ -56,6 +63,17 @@ public record Tried(
      */
     public double net() {
         return kept - energyCost;
+    }
+
+    /**
+     * Returns the electricity all chambers take.
+     *
+     * @return kWh
+     */
+    public double energyKWh() {
+        return chambers.values().stream()
+                .mapToDouble(course -> course.heat().electricity() / J_PER_KWH)
+                .sum();
     }
 
     /**

@@ -3,7 +3,6 @@ package org.wardon.advice.placing;
 import java.util.ArrayList;
 import java.util.List;
 import java.util.Optional;
-import org.wardon.advice.wording.Words;
 import org.wardon.files.forecast.PlaceAnswer.Change;
 import org.wardon.plan.ChamberPlan;
 import org.wardon.plan.LotPlan;
@@ -17,25 +16,27 @@ final class Changes {
 
     private final StorePlan now;
     private final StorePlan then;
-    private final Words words;
 
-    Changes(StorePlan now, StorePlan then, Words words) {
+    Changes(StorePlan now, StorePlan then) {
         this.now = now;
         this.then = then;
-        this.words = words;
     }
 
-    List<Change> moves() {
-        List<Change> moves = new ArrayList<>();
+    List<Said<Change>> moves() {
+        List<Said<Change>> moves = new ArrayList<>();
         for (int i = 0; i < now.lots().size(); i++) {
             LotPlan lot = now.lots().get(i);
             Optional<String> from = lot.chamber();
             Optional<String> to = then.lots().get(i).chamber();
             if (!from.equals(to)) {
-                moves.add(new Change(lot.id(), words.sentence(move(lot.id(), from, to))));
+                moves.add(said(lot.id(), move(lot.id(), from, to)));
             }
         }
         return moves;
+    }
+
+    private static Said<Change> said(String subject, Reason reason) {
+        return new Said<>(text -> new Change(subject, text), reason);
     }
 
     private static Reason move(String lot, Optional<String> from, Optional<String> to) {
@@ -47,12 +48,12 @@ final class Changes {
                 : new Reason("place-move", List.of(lot, from.get(), to.get()), List.of(), RULE);
     }
 
-    List<Change> settings() {
-        List<Change> changes = new ArrayList<>();
+    List<Said<Change>> settings() {
+        List<Said<Change>> changes = new ArrayList<>();
         for (int i = 0; i < now.chambers().size(); i++) {
             ChamberPlan was = now.chambers().get(i);
             setting(was, then.chambers().get(i))
-                    .ifPresent(reason -> changes.add(new Change(was.id(), words.sentence(reason))));
+                    .ifPresent(reason -> changes.add(said(was.id(), reason)));
         }
         return changes;
     }

@@ -7,6 +7,7 @@ import java.util.Objects;
 import java.util.Optional;
 import java.util.stream.IntStream;
 import org.wardon.advice.forecast.StoreTrial;
+import org.wardon.advice.forecast.TrialLot;
 import org.wardon.plan.ChamberPlan;
 import org.wardon.plan.PlaceWish;
 import org.wardon.sharing.placing.ChamberToFill;
@@ -54,7 +55,8 @@ final class Draft {
             double share) {
         Stakes stakes = Stakes.of(trial, task, options, aim);
         PlacingProblem problem = problem(chambers, options, stakes);
-        PlacingAnswer answer = PlacingSearch.of(problem, effort(problem, stakes, share));
+        PlacingAnswer answer =
+                PlacingSearch.of(problem, effort(problem, stakes, share), trial.progress());
         List<Optional<Option>> chosen = new ArrayList<>();
         for (int c = 0; c < chambers.size(); c++) {
             int offer = answer.placing().chambers().get(c).offer();
@@ -71,6 +73,16 @@ final class Draft {
                 answer.bound() - stakes.all(),
                 answer.proven(),
                 companions);
+    }
+
+    /** Room a lot takes in its packages, m3. */
+    static double packedM3(TrialLot lot) {
+        return lot.produceM3() / PACKED;
+    }
+
+    /** Room a chamber has for packed lots, m3. */
+    static double roomM3(ChamberPlan chamber) {
+        return FILLED * chamber.enclosure().box().volumeM3();
     }
 
     private static List<Option> of(Map<String, List<Option>> options, ChamberPlan chamber) {
@@ -98,7 +110,7 @@ final class Draft {
                     new LotToPlace(
                             item.lot().id() + (item.whole() ? "" : "@" + i),
                             item.lot().plan().massKg(),
-                            item.lot().produceM3() / PACKED,
+                            packedM3(item.lot()),
                             item.firstDay(),
                             item.lastDay(),
                             item.fixed()));
@@ -130,7 +142,7 @@ final class Draft {
         return new ChamberToFill(
                 chamber.id(),
                 Math.max(chamber.capacityKg(), SLACK * mass),
-                Math.max(FILLED * chamber.enclosure().box().volumeM3(), SLACK * room),
+                Math.max(roomM3(chamber), SLACK * room),
                 options.stream().map(option -> offer(chamber, option, stakes)).toList(),
                 !task.hasFixed(chamber.id()));
     }

@@ -6,7 +6,6 @@ import java.util.List;
 import java.util.Map;
 import java.util.Optional;
 import org.wardon.advice.forecast.StoreTrial;
-import org.wardon.advice.wording.Words;
 import org.wardon.files.forecast.PlaceAnswer.Worth;
 import org.wardon.plan.ChamberPlan;
 import org.wardon.plan.PlaceWish;
@@ -23,19 +22,17 @@ final class Gains {
     private final Options options;
     private final Draft draft;
     private final Money money;
-    private final Words words;
 
-    Gains(StoreTrial trial, Options options, Draft draft, Money money, Words words) {
+    Gains(StoreTrial trial, Options options, Draft draft, Money money) {
         this.trial = trial;
         this.options = options;
         this.draft = draft;
         this.money = money;
-        this.words = words;
     }
 
     /** The same lots a kelvin colder and warmer, chamber by chamber. */
-    List<Worth> kelvins(Sought sought) {
-        List<Worth> worth = new ArrayList<>();
+    List<Said<Worth>> kelvins(Sought sought) {
+        List<Said<Worth>> worth = new ArrayList<>();
         for (int c = 0; c < sought.chambers().size(); c++) {
             Optional<Option> now = sought.chosen().get(c);
             if (now.isPresent() && now.get().riseK() == 0 && !sought.in(c).isEmpty()) {
@@ -46,7 +43,7 @@ final class Gains {
         return worth;
     }
 
-    private Worth kelvin(Sought sought, int chamber, Option now, int kelvin) {
+    private Said<Worth> kelvin(Sought sought, int chamber, Option now, int kelvin) {
         Option beside =
                 options.of(List.of(new Options.Dial(now.chamber(), now.settingC() + kelvin)))
                         .get(0);
@@ -64,11 +61,11 @@ final class Gains {
                         at,
                         money.argument(Math.abs(gain)));
         String what = kelvin < 0 ? "kelvin-colder" : "kelvin-warmer";
-        return new Worth(id, what, gain, words.sentence(reason));
+        return new Said<>(text -> new Worth(id, what, gain, text), reason);
     }
 
     /** The store with a copy of the chamber that brings most. */
-    Optional<Worth> oneMore(Sought sought, Map<String, List<Option>> known) {
+    Optional<Said<Worth>> oneMore(Sought sought, Map<String, List<Option>> known) {
         Optional<ChamberPlan> best = best(sought);
         if (best.isEmpty()) {
             return Optional.empty();
@@ -84,7 +81,8 @@ final class Gains {
         double after = draft.seek(chambers, more, aim, 1).assumed();
         double gain = Math.max(0, after - before);
         Reason reason = Reason.about("one-more-chamber", id, RULE, money.argument(gain));
-        return Optional.of(new Worth(id, "one-more-chamber", gain, words.sentence(reason)));
+        return Optional.of(
+                new Said<>(text -> new Worth(id, "one-more-chamber", gain, text), reason));
     }
 
     private static Optional<ChamberPlan> best(Sought sought) {

@@ -3,6 +3,7 @@ package org.wardon.advice.placing;
 import java.util.ArrayList;
 import java.util.List;
 import java.util.Map;
+import org.wardon.advice.company.GroupSharing;
 import org.wardon.advice.forecast.StoreTrial;
 import org.wardon.advice.wording.Words;
 import org.wardon.errors.BadInput;
@@ -47,17 +48,18 @@ public final class PlaceAdvice {
      */
     public PlaceReport place(StorePlan plan, PlaceQuestion question, Progress progress) {
         check(plan, question);
-        StoreTrial trial = StoreTrial.of(plan, book);
+        Stages stages = new Stages(progress);
+        StoreTrial trial = StoreTrial.of(plan, book, stages);
         Options options = new Options(trial);
-        progress.at("chambers", 0.1);
+        stages.begin("chambers", 0.1);
         Map<String, List<Option>> all = options.all();
-        progress.at("chambers", 0.4);
+        stages.begin("chambers", 0.4);
         Task task = new Task(trial, question);
         Companions companions = new Companions(trial, options);
         Draft draft = new Draft(trial, task, companions);
         Sought asPlanned = Trials.present(trial, task, all, companions);
         Candidate present = new Candidate(asPlanned, trial.run(plan));
-        progress.at("placing", 0.5);
+        stages.begin("placing", 0.5);
         boolean small = task.items().size() * plan.chambers().size() <= SMALL;
         Coupling coupling = new Coupling(trial, options, draft);
         PlaceWish.Aim aim = plan.wish().aim();
@@ -65,9 +67,18 @@ public final class PlaceAdvice {
         List<Candidate> candidates = new ArrayList<>(List.of(present));
         candidates.addAll(coupling.candidates());
         Candidate best = new Ranked(plan.wish()).best(candidates);
-        progress.at("placing", 1);
-        Telling telling = new Telling(trial, options, draft, coupling, words);
-        return new PlaceReport(plan, best.tried().plan(), telling.of(best, present, small));
+        stages.begin("telling", 0.8);
+        Told told = new Telling(trial, options, draft, coupling).of(best, present, small);
+        Arranged arranged = new Arranged(trial, GroupSharing.of(trial, book));
+        PlaceReport report =
+                new PlaceReport(
+                        new PlaceReport.Plans(plan, best.tried().plan()),
+                        arranged.of(present.tried()),
+                        arranged.of(best.tried()),
+                        told,
+                        words);
+        progress.at("telling", 1);
+        return report;
     }
 
     private static void check(StorePlan plan, PlaceQuestion question) {

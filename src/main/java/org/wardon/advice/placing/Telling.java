@@ -8,8 +8,6 @@ import java.util.OptionalDouble;
 import java.util.stream.IntStream;
 import org.wardon.advice.forecast.StoreTrial;
 import org.wardon.advice.forecast.Tried;
-import org.wardon.advice.wording.Words;
-import org.wardon.files.forecast.Because;
 import org.wardon.files.forecast.PlaceAnswer;
 import org.wardon.files.forecast.PlaceAnswer.Choice;
 import org.wardon.files.forecast.PlaceAnswer.Placed;
@@ -27,19 +25,17 @@ final class Telling {
     private final Options options;
     private final Draft draft;
     private final Coupling coupling;
-    private final Words words;
     private final Money money;
 
-    Telling(StoreTrial trial, Options options, Draft draft, Coupling coupling, Words words) {
+    Telling(StoreTrial trial, Options options, Draft draft, Coupling coupling) {
         this.trial = trial;
         this.options = options;
         this.draft = draft;
         this.coupling = coupling;
-        this.words = words;
         money = new Money(trial.plan().prices().currency());
     }
 
-    PlaceAnswer of(Candidate best, Candidate present, boolean small) {
+    Told of(Candidate best, Candidate present, boolean small) {
         Sought sought = best.sought();
         Tried tried = best.tried();
         Sought last =
@@ -47,58 +43,55 @@ final class Telling {
         double value = tried.net();
         double bound = Math.max(last.bound(), value);
         double gap = bound > 0 ? 100 * (bound - value) / bound : 0;
-        Changes changes = new Changes(trial.plan(), tried.plan(), words);
-        List<PlaceAnswer.Worth> worth = new ArrayList<>();
-        Gains gains = new Gains(trial, options, draft, money, words);
+        Changes changes = new Changes(trial.plan(), tried.plan());
+        List<Said<PlaceAnswer.Worth>> worth = new ArrayList<>();
+        Gains gains = new Gains(trial, options, draft, money);
         if (small) {
             gains.oneMore(sought, coupling.known()).ifPresent(worth::add);
             worth.addAll(gains.kelvins(sought));
         }
-        return new PlaceAnswer(
-                PlaceAnswer.VERSION,
+        return new Told(
+                new Told.Figures(
+                        value,
+                        bound,
+                        gap,
+                        trial.plan().wish().aim().word(),
+                        sought.assumed(),
+                        present.tried().net(),
+                        last.proven(),
+                        told(value, bound, gap, last.proven())),
                 chambers(sought, tried),
                 unplaced(sought),
-                value,
-                bound,
-                gap,
                 because(sought, tried),
-                trial.plan().wish().aim().word(),
-                sought.assumed(),
-                present.tried().net(),
-                last.proven(),
-                told(value, bound, gap, last.proven()),
                 changes.moves(),
                 changes.settings(),
                 worth,
                 notes(sought, tried));
     }
 
-    private String told(double value, double bound, double gap, boolean proven) {
+    private Reason told(double value, double bound, double gap, boolean proven) {
         Argument[] arguments = {
             money.argument(bound), money.argument(value), Argument.of(gap, "pct")
         };
         String code = gap < 0.05 ? "place-at-bound" : proven ? "place-proven" : "place-gap";
-        return words.sentence(new Reason(code, List.of(), List.of(arguments), RULE));
+        return new Reason(code, List.of(), List.of(arguments), RULE);
     }
 
-    private List<Placed> chambers(Sought sought, Tried tried) {
-        List<Placed> placed = new ArrayList<>();
+    private List<Said<Placed>> chambers(Sought sought, Tried tried) {
+        List<Said<Placed>> placed = new ArrayList<>();
         for (int c = 0; c < tried.plan().chambers().size(); c++) {
             ChamberPlan chamber = tried.plan().chambers().get(c);
             var course = Objects.requireNonNull(tried.chambers().get(chamber.id()));
             double airC = DayMeans.whole(course.hours(), course.hours()::airC);
             List<String> lots =
                     sought.in(c).stream().map(item -> item.lot().id()).distinct().toList();
+            PlaceAnswer.Dial dial =
+                    new PlaceAnswer.Dial(
+                            chamber.setting().temperatureC(), chamber.setting().humidityPct());
             placed.add(
-                    new Placed(
-                            chamber.id(),
-                            new PlaceAnswer.Dial(
-                                    chamber.setting().temperatureC(),
-                                    chamber.setting().humidityPct()),
-                            chamber.off(),
-                            airC,
-                            lots,
-                            words.sentence(chamber(chamber, airC, lots, tried))));
+                    new Said<>(
+                            text -> new Placed(chamber.id(), dial, chamber.off(), airC, lots, text),
+                            chamber(chamber, airC, lots, tried)));
         }
         return placed;
     }
@@ -129,16 +122,20 @@ final class Telling {
                 money.argument(kept));
     }
 
-    private List<Unplaced> unplaced(Sought sought) {
-        List<Unplaced> left = new ArrayList<>();
+    private List<Said<Unplaced>> unplaced(Sought sought) {
+        List<Said<Unplaced>> left = new ArrayList<>();
         for (int number : sought.placing().unplaced()) {
             Task.Item item = sought.task().items().get(number);
-            left.add(new Unplaced(item.lot().id(), words.sentence(whyNowhere(item))));
+            left.add(unplaced(item.lot().id(), whyNowhere(item)));
         }
         for (String id : sought.task().outside()) {
-            left.add(new Unplaced(id, words.sentence(Reason.about("unplaced-outside", id, RULE))));
+            left.add(unplaced(id, Reason.about("unplaced-outside", id, RULE)));
         }
         return left;
+    }
+
+    private static Said<Unplaced> unplaced(String id, Reason reason) {
+        return new Said<>(text -> new Unplaced(id, text), reason);
     }
 
     private Reason whyNowhere(Task.Item item) {
@@ -168,7 +165,7 @@ final class Telling {
                 RULE);
     }
 
-    private List<Choice> because(Sought sought, Tried tried) {
+    private List<Said<Choice>> because(Sought sought, Tried tried) {
         Elsewhere elsewhere = new Elsewhere(trial, sought, money);
         return IntStream.range(0, sought.task().items().size())
                 .parallel()
@@ -178,10 +175,11 @@ final class Telling {
                 .toList();
     }
 
-    private List<Choice> because(int number, Sought sought, Tried tried, Elsewhere elsewhere) {
+    private List<Said<Choice>> because(
+            int number, Sought sought, Tried tried, Elsewhere elsewhere) {
         Task.Item item = sought.task().items().get(number);
         int here = sought.chamberOf(number).orElse(-1);
-        List<Choice> choices = new ArrayList<>();
+        List<Said<Choice>> choices = new ArrayList<>();
         String lot = item.lot().id();
         if (here >= 0 && tried.lots().containsKey(lot)) {
             choices.add(here(item, sought.chambers().get(here).id(), tried.lot(lot)));
@@ -192,19 +190,22 @@ final class Telling {
                 List<Option> known = coupling.known().getOrDefault(chamber, List.of());
                 Elsewhere.Cost cost = elsewhere.of(number, here, c, known);
                 choices.add(
-                        new Choice(
-                                lot,
-                                chamber,
-                                false,
-                                cost.days(),
-                                cost.value(),
-                                words.sentence(cost.reason())));
+                        new Said<>(
+                                text ->
+                                        new Choice(
+                                                lot,
+                                                chamber,
+                                                false,
+                                                cost.days(),
+                                                cost.value(),
+                                                text),
+                                cost.reason()));
             }
         }
         return choices;
     }
 
-    private Choice here(Task.Item item, String chamber, Tried.OfLot lot) {
+    private Said<Choice> here(Task.Item item, String chamber, Tried.OfLot lot) {
         Reason reason =
                 new Reason(
                         item.isFixed() ? "placed-stays" : "placed-here",
@@ -215,29 +216,25 @@ final class Telling {
                                 money.argument(lot.valueKept()),
                                 Argument.text(lot.limitedBy().word())),
                         RULE);
-        return new Choice(
-                item.lot().id(),
-                chamber,
-                true,
-                OptionalDouble.empty(),
-                OptionalDouble.empty(),
-                words.sentence(reason));
+        String id = item.lot().id();
+        return new Said<>(
+                text ->
+                        new Choice(
+                                id,
+                                chamber,
+                                true,
+                                OptionalDouble.empty(),
+                                OptionalDouble.empty(),
+                                text),
+                reason);
     }
 
-    private List<Because> notes(Sought sought, Tried tried) {
+    private List<Reason> notes(Sought sought, Tried tried) {
         List<Reason> reasons = new ArrayList<>(new Accepted(sought, money).told());
         reasons.addAll(0, PlaceCautions.of(tried));
         if (trial.lots().stream().allMatch(l -> l.plan().market().pricePerKg() == 0)) {
             reasons.add(new Reason("place-no-prices", List.of(), List.of(), RULE));
         }
-        return reasons.stream()
-                .map(
-                        reason ->
-                                new Because(
-                                        reason.code(),
-                                        reason.subjects(),
-                                        words.sentence(reason),
-                                        reason.sourceId()))
-                .toList();
+        return reasons;
     }
 }

@@ -7,6 +7,7 @@ import java.util.List;
 import java.util.PriorityQueue;
 import java.util.SplittableRandom;
 import java.util.stream.IntStream;
+import org.wardon.errors.Progress;
 
 /** Finds the best placing it can and says what none can exceed. */
 public final class PlacingSearch {
@@ -18,6 +19,7 @@ public final class PlacingSearch {
     private static final double HARDLY_NEAR = 0.002;
 
     private final Effort effort;
+    private final Progress progress;
     private final Store store;
     private final Prices prices;
     private final PartedLoads parted;
@@ -34,8 +36,9 @@ public final class PlacingSearch {
     private final double[][] offerUse;
     private final double[][] lotUse;
 
-    private PlacingSearch(PlacingProblem problem, Effort effort) {
+    private PlacingSearch(PlacingProblem problem, Effort effort, Progress progress) {
         this.effort = effort;
+        this.progress = progress;
         store = new Store(problem);
         offerUse = new double[store.chambers][];
         lotUse = new double[store.chambers][store.lots];
@@ -66,7 +69,19 @@ public final class PlacingSearch {
      * @return the best placing found and what no placing can exceed
      */
     public static PlacingAnswer of(PlacingProblem problem, Effort effort) {
-        return new PlacingSearch(problem, effort).search();
+        return of(problem, effort, Progress.SILENT);
+    }
+
+    /**
+     * Searches as long as nobody stops it.
+     *
+     * @param problem the store to be filled
+     * @param effort how much work to do
+     * @param progress hears of each step and may stop the search
+     * @return the best placing found and what no placing can exceed
+     */
+    public static PlacingAnswer of(PlacingProblem problem, Effort effort, Progress progress) {
+        return new PlacingSearch(problem, effort, progress).search();
     }
 
     /** A bound this low leaves nothing better to be found but by rounding. */
@@ -76,13 +91,14 @@ public final class PlacingSearch {
 
     private PlacingAnswer search() {
         Branch all = Branch.whole(store);
-        prices.lower(all, parted, effort.priceSteps(), () -> polish.bestValue);
+        prices.lower(all, parted, effort.priceSteps(), this::known);
         double ofParts = all.bound;
         prices.lower(all, whole, effort.priceSteps(), () -> repaired(NEAR));
         wholeHelps = ofParts - all.bound > HELPS * (ofParts - polish.bestValue);
         polish.fillAll(all);
         SplittableRandom random = new SplittableRandom(SEED);
         for (int i = 0; i < effort.polishes() && !near(all.bound); i++) {
+            goOn();
             polish.shake(random, all);
         }
         branches.add(all);
@@ -97,7 +113,18 @@ public final class PlacingSearch {
         return new PlacingAnswer(placing(), bound, proven, looked, prices.steps);
     }
 
+    private double known() {
+        goOn();
+        return polish.bestValue;
+    }
+
+    /** Whoever hears of the step may stop the search. */
+    private void goOn() {
+        progress.at("search", 0);
+    }
+
     private double repaired(double near) {
+        goOn();
         polish.repair(near);
         return polish.bestValue;
     }
@@ -109,7 +136,7 @@ public final class PlacingSearch {
 
     private void lower(Branch branch) {
         last = parted;
-        prices.lower(branch, parted, effort.branchSteps(), () -> polish.bestValue);
+        prices.lower(branch, parted, effort.branchSteps(), this::known);
         if (branch.bound > enough(polish.bestValue)) {
             int steps = wholeHelps ? effort.branchSteps() : 1;
             last = wholeHelps ? whole : parted;

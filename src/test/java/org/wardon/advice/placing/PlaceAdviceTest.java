@@ -11,6 +11,8 @@ import java.util.List;
 import java.util.Optional;
 import java.util.Set;
 import java.util.SplittableRandom;
+import java.util.concurrent.CancellationException;
+import java.util.concurrent.atomic.AtomicInteger;
 import org.junit.jupiter.api.AfterAll;
 import org.junit.jupiter.api.BeforeAll;
 import org.junit.jupiter.api.Test;
@@ -25,6 +27,9 @@ import org.wardon.advice.wording.Words;
 import org.wardon.errors.BadInput;
 import org.wardon.errors.Progress;
 import org.wardon.files.PlanReader;
+import org.wardon.files.forecast.ChamberForecast;
+import org.wardon.files.forecast.Forecast;
+import org.wardon.files.forecast.LotForecast;
 import org.wardon.files.forecast.PlaceAnswer;
 import org.wardon.plan.ChamberPlan;
 import org.wardon.plan.LotPlan;
@@ -73,18 +78,63 @@ class PlaceAdviceTest {
         store.lot("P1", "carrot-topped", new SplittableRandom(seed), ", \"chamber\": \"warm\"");
         PlaceReport report = place(store.plan(folder, book), PlaceQuestion.NONE_MOVES);
         PlaceAnswer answer = report.answer();
-        double net =
+        Forecast forecast =
                 new ForecastAdvice(book, Words.english(Units.METRIC))
                         .advise(report.proposed(), Progress.SILENT)
-                        .forecast()
-                        .value()
-                        .net();
+                        .forecast();
+        double net = forecast.value().net();
         assertEquals(net, answer.value(), 1e-9 * Math.abs(net), "value.net of the forecast");
+        assertEquals(answer.presentValue(), report.present().net(), ROUNDING);
+        bothTellTheSame(report.then(), forecast);
         assertTrue(answer.value() >= answer.presentValue(), answer.toString());
         assertTrue(answer.bound() >= answer.value() && answer.gapPct() >= 0, answer.toString());
         assertEquals(Optional.of("warm"), report.proposed().lots().get(4).chamber(), "the pin");
         everyLotIsTold(report);
         capacityHolds(report.proposed());
+    }
+
+    private static void bothTellTheSame(Arrangement then, Forecast forecast) {
+        for (Arrangement.There chamber : then.chambers()) {
+            boolean holds =
+                    forecast.chambers().stream()
+                            .filter(one -> one.id().equals(chamber.id()))
+                            .allMatch(ChamberForecast::holds);
+            if (!chamber.off() && !chamber.lots().isEmpty()) {
+                assertEquals(holds, chamber.notHeld().isEmpty(), chamber.toString());
+            }
+            var filled = chamber.filled();
+            assertTrue(filled.massKg() <= filled.capacityKg(), chamber.toString());
+            assertTrue(filled.volumeM3() <= filled.roomM3(), chamber.toString());
+        }
+        for (LotForecast lot : forecast.lots()) {
+            var there = then.lots().get(lot.id());
+            if (there != null) {
+                assertEquals(lot.daysLeft().p50(), there.daysLeft().p50(), 1e-6, lot.id());
+                assertEquals(lot.limitedBy(), there.limitedBy(), lot.id());
+            }
+        }
+    }
+
+    @Test
+    void workIsStoppedWhereverItStands() {
+        StorePlan plan = DrawnStore.of(2, 2).plan(folder, book);
+        PlaceAdvice advice = new PlaceAdvice(book, Words.english(Units.METRIC));
+        AtomicInteger heard = new AtomicInteger();
+        advice.place(plan, ALL, (stage, done) -> heard.incrementAndGet());
+        assertTrue(heard.get() > 1_000, "heard " + heard.get());
+        for (double share : List.of(0.05, 0.6)) {
+            AtomicInteger left = new AtomicInteger((int) (share * heard.get()));
+            Progress impatient =
+                    (stage, done) -> {
+                        if (left.getAndDecrement() <= 0) {
+                            throw new CancellationException(stage);
+                        }
+                    };
+            assertThrows(
+                    CancellationException.class,
+                    () -> advice.place(plan, ALL, impatient),
+                    "" + share);
+        }
     }
 
     private static void everyLotIsTold(PlaceReport report) {
