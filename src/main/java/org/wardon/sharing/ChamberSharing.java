@@ -115,7 +115,8 @@ public final class ChamberSharing {
                 lot.model(),
                 strongestGiver(lot),
                 lot.felt().ethylenePpm(),
-                lot.felt().meanC());
+                lot.felt().meanC(),
+                lot.wish().wantedDays());
         for (Together other : lots) {
             double days = other.daysWith(lot);
             if (!other.id().equals(lot.id()) && days > 0) {

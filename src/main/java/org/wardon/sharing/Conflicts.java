@@ -45,14 +45,16 @@ final class Conflicts {
      * @param giverId the lot that gives most of it
      * @param ppm the level, µL/L
      * @param atC the temperature, °C
+     * @param days days in that air; the market leg is not spent in it
      */
-    void ethylene(Wish taker, KeepingModel model, String giverId, double ppm, double atC) {
+    void ethylene(
+            Wish taker, KeepingModel model, String giverId, double ppm, double atC, double days) {
         starts(taker, model, giverId, ppm, atC);
         if (model.response().sensitive()) {
             Paces paces = model.paces(Draw.MEDIAN);
             double with = paces.perDay(Mechanism.ETHYLENE, atC, 1, ppm);
             double without = paces.perDay(Mechanism.ETHYLENE, atC, 1, 0);
-            double cost = (with - without) * taker.wholeDays();
+            double cost = (with - without) * days;
             if (cost >= Limits.GOOD_ETHYLENE) {
                 say(
                         cost < Limits.TOLERABLE_ETHYLENE ? Verdict.TOLERABLE : Verdict.NO,

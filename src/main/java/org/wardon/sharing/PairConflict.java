@@ -32,7 +32,7 @@ public record PairConflict(Verdict verdict, List<Reason> reasons) {
     }
 
     /**
-     * Judges what a level of ethylene does to a lot.
+     * Judges what a level of ethylene does to a lot in the days it is wanted in the chamber.
      *
      * @param taker the lot and its days
      * @param model how it keeps
@@ -44,7 +44,7 @@ public record PairConflict(Verdict verdict, List<Reason> reasons) {
     public static PairConflict ofEthylene(
             Wish taker, KeepingModel model, String giverId, double ppm, double atC) {
         Conflicts conflicts = new Conflicts();
-        conflicts.ethylene(taker, model, giverId, ppm, atC);
+        conflicts.ethylene(taker, model, giverId, ppm, atC, taker.wantedDays());
         return new PairConflict(conflicts.verdict(), conflicts.reasons());
     }
 

@@ -54,8 +54,10 @@ final class Pairing {
         Conflicts conflicts = new Conflicts();
         double ppmA = steadyPpm(a, atC);
         double ppmB = steadyPpm(b, atC);
-        conflicts.ethylene(a.wish(), a.model(), ppmB >= ppmA ? id(b) : id(a), ppmA + ppmB, atC);
-        conflicts.ethylene(b.wish(), b.model(), ppmA >= ppmB ? id(a) : id(b), ppmA + ppmB, atC);
+        conflicts.ethylene(
+                a.wish(), a.model(), ppmB >= ppmA ? id(b) : id(a), ppmA + ppmB, atC, days);
+        conflicts.ethylene(
+                b.wish(), b.model(), ppmA >= ppmB ? id(a) : id(b), ppmA + ppmB, atC, days);
         conflicts.odour(a.wish(), b.wish(), days);
         conflicts.odour(b.wish(), a.wish(), days);
         return conflicts;
