@@ -4,6 +4,7 @@ import java.nio.file.Path;
 import org.jspecify.annotations.Nullable;
 import org.wardon.advice.forecast.ForecastAdvice;
 import org.wardon.advice.forecast.StoreAdvice;
+import org.wardon.advice.placing.OpenLots;
 import org.wardon.files.AtomicFile;
 import org.wardon.files.forecast.AnswerWriter;
 import org.wardon.plan.StorePlan;
@@ -36,8 +37,10 @@ final class AdviceOutput {
         if (series != null) {
             AtomicFile.folder(series);
         }
+        OpenLots.Housed housed = OpenLots.house(plan, book, terminal.progress());
         StoreAdvice advice =
-                new ForecastAdvice(book, shared.words()).advise(plan, terminal.progress());
+                new ForecastAdvice(book, shared.words())
+                        .advise(housed.plan(), housed.told(), terminal.progress());
         if (series != null) {
             advice.writeSeries(series);
         }

@@ -2,6 +2,8 @@ package org.wardon.cli;
 
 import java.nio.file.Path;
 import java.util.function.Supplier;
+import org.wardon.advice.placing.OpenLots;
+import org.wardon.errors.Progress;
 import org.wardon.files.PlanReader;
 import org.wardon.files.forecast.AnswerWriter;
 import org.wardon.plan.StorePlan;
@@ -25,7 +27,8 @@ final class ChamberQuestion {
     private boolean json;
 
     StorePlan plan(Shared shared, ReferenceBook book) {
-        return PlanReader.read(plan, shared.lookups(book));
+        StorePlan read = PlanReader.read(plan, shared.lookups(book));
+        return OpenLots.house(read, book, Progress.SILENT).plan();
     }
 
     String chamber() {

@@ -6,9 +6,11 @@ import java.util.LinkedHashMap;
 import java.util.List;
 import java.util.Map;
 import java.util.concurrent.Callable;
+import org.wardon.advice.placing.OpenLots;
 import org.wardon.advice.whatif.Comparison;
 import org.wardon.errors.BadInput;
 import org.wardon.errors.Fault;
+import org.wardon.errors.Progress;
 import org.wardon.files.Lookups;
 import org.wardon.files.PlanReader;
 import org.wardon.files.PlanVariants;
@@ -82,7 +84,7 @@ final class Compare implements Callable<Integer> {
         try (ReferenceBook book = shared.book()) {
             CompareAnswer answer =
                     new Comparison(book, shared.words())
-                            .of(read(asked, shared.lookups(book)), terminal.progress());
+                            .of(housed(asked, shared.lookups(book), book), terminal.progress());
             terminal.out()
                     .print(
                             json
@@ -113,6 +115,13 @@ final class Compare implements Callable<Integer> {
             }
         }
         return asked;
+    }
+
+    private List<Comparison.Named> housed(
+            Map<String, List<String>> asked, Lookups lookups, ReferenceBook book) {
+        return read(asked, lookups).stream()
+                .map(one -> one.in(OpenLots.house(one.plan(), book, Progress.SILENT).plan()))
+                .toList();
     }
 
     private List<Comparison.Named> read(Map<String, List<String>> asked, Lookups lookups) {

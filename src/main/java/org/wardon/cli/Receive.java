@@ -3,9 +3,11 @@ package org.wardon.cli;
 import java.nio.file.Path;
 import java.util.concurrent.Callable;
 import org.jspecify.annotations.Nullable;
+import org.wardon.advice.placing.OpenLots;
 import org.wardon.advice.receiving.NewLot;
 import org.wardon.advice.receiving.Receiving;
 import org.wardon.errors.BadInput;
+import org.wardon.errors.Progress;
 import org.wardon.files.AtomicFile;
 import org.wardon.files.Lookups;
 import org.wardon.files.LotIntoPlan;
@@ -76,7 +78,11 @@ final class Receive implements Callable<Integer> {
         String text = TextFile.read(plan, plan.toString(), PlanReader.LARGEST_MB);
         NewLot lot = newLot.lot();
         Receiving receiving =
-                Receiving.once(PlanReader.read(text, plan, lookups), book, shared.words());
+                Receiving.once(
+                        OpenLots.house(PlanReader.read(text, plan, lookups), book, Progress.SILENT)
+                                .plan(),
+                        book,
+                        shared.words());
         ReceiveAnswer answer = receiving.answer(lot);
         if (put != null && write != null) {
             String chamber = chamber(put, receiving, answer);

@@ -46,10 +46,24 @@ public final class ForecastAdvice {
      * @throws org.wardon.errors.RunStopped where a chamber meets a state that cannot be
      */
     public StoreAdvice advise(StorePlan asked, Progress progress) {
+        return advise(asked, List.of(), progress);
+    }
+
+    /**
+     * Advises on a plan some of whose lots were given chambers before.
+     *
+     * @param asked the plan
+     * @param housed what was placed where
+     * @param progress hears how far the work has come
+     * @return the advice
+     * @throws org.wardon.errors.RunStopped where a chamber meets a state that cannot be
+     */
+    public StoreAdvice advise(StorePlan asked, List<Caution> housed, Progress progress) {
         Prepared prepared = prepare(asked);
         StoreOutcome outcome = new StoreRun(prepared.model()).run(progress);
         progress.at("judging", 0);
-        StoreAdvice advice = together(outcome, prepared.placed());
+        List<Caution> placed = Stream.concat(housed.stream(), prepared.placed().stream()).toList();
+        StoreAdvice advice = together(outcome, placed);
         progress.at("judging", 1);
         return advice;
     }

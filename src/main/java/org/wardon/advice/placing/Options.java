@@ -91,6 +91,19 @@ final class Options {
                     keeps(on) ? temperatures.in(nowC, reach(on.id()).lowestC()) : List.of(nowC);
             tried.forEach(c -> dials.add(new Dial(on, c)));
         }
+        return byChamber(dials);
+    }
+
+    /** What the chambers that run make at the settings of the plan. */
+    Map<String, List<Option>> asSet() {
+        return byChamber(
+                trial.plan().chambers().stream()
+                        .filter(chamber -> !chamber.off())
+                        .map(chamber -> new Dial(chamber, chamber.setting().temperatureC()))
+                        .toList());
+    }
+
+    private Map<String, List<Option>> byChamber(List<Dial> dials) {
         Map<String, List<Option>> options = new LinkedHashMap<>();
         trial.plan().chambers().forEach(c -> options.put(c.id(), new ArrayList<>()));
         for (Option option : of(dials)) {

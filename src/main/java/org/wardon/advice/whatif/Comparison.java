@@ -37,6 +37,16 @@ public final class Comparison {
         public Named {
             changed = List.copyOf(changed);
         }
+
+        /**
+         * Returns the same with chambers for its lots.
+         *
+         * @param housed the plan with them
+         * @return the plan to be compared
+         */
+        public Named in(StorePlan housed) {
+            return new Named(name, housed, changed);
+        }
     }
 
     /**

@@ -3,11 +3,13 @@ package org.wardon.web.chamber;
 import java.util.Optional;
 import org.wardon.advice.forecast.SectionAdvice;
 import org.wardon.advice.forecast.StoreAdvice;
+import org.wardon.advice.placing.OpenLots;
 import org.wardon.advice.whatif.Changes;
 import org.wardon.advice.whatif.WhatIf;
 import org.wardon.advice.wording.Units;
 import org.wardon.advice.wording.Words;
 import org.wardon.errors.BadInput;
+import org.wardon.errors.Progress;
 import org.wardon.files.forecast.HourlySeries;
 import org.wardon.files.forecast.SectionAnswer;
 import org.wardon.files.forecast.WhatIfAnswer;
@@ -51,7 +53,16 @@ final class ChamberDesk {
     private WhatIf trial(Asked asked, StorePlan plan) {
         return trials.of(
                 asked,
-                () -> WhatIf.of(plan, asked.book(), Words.english(asked.units()), asked.chamber()));
+                () ->
+                        WhatIf.of(
+                                housed(plan, asked.book()),
+                                asked.book(),
+                                Words.english(asked.units()),
+                                asked.chamber()));
+    }
+
+    private static StorePlan housed(StorePlan plan, ReferenceBook book) {
+        return OpenLots.house(plan, book, Progress.SILENT).plan();
     }
 
     /** What heats the chamber hour by hour. */
@@ -72,7 +83,7 @@ final class ChamberDesk {
             return Optional.of(
                     new SectionAdvice(open.book(), words)
                             .ask(
-                                    plan,
+                                    housed(plan, open.book()),
                                     new SectionAdvice.Question(
                                             chamber,
                                             Optional.empty(),

@@ -9,9 +9,11 @@ import java.util.concurrent.Executors;
 import java.util.concurrent.Future;
 import java.util.concurrent.TimeUnit;
 import java.util.concurrent.TimeoutException;
+import org.wardon.advice.placing.OpenLots;
 import org.wardon.advice.receiving.Receiving;
 import org.wardon.advice.wording.Units;
 import org.wardon.advice.wording.Words;
+import org.wardon.errors.Progress;
 import org.wardon.errors.RunStopped;
 import org.wardon.plan.StorePlan;
 import org.wardon.reference.ReferenceBook;
@@ -62,7 +64,7 @@ final class Doors implements AutoCloseable {
                                 worker.submit(
                                         () ->
                                                 Receiving.of(
-                                                        plan,
+                                                        housed(plan, one.book()),
                                                         one.book(),
                                                         Words.english(one.units()))));
         var oldest = known.entrySet().iterator();
@@ -71,6 +73,10 @@ final class Doors implements AutoCloseable {
             oldest.remove();
         }
         return work;
+    }
+
+    private static StorePlan housed(StorePlan plan, ReferenceBook book) {
+        return OpenLots.house(plan, book, Progress.SILENT).plan();
     }
 
     @Override

@@ -9,6 +9,7 @@ import java.util.function.Function;
 import org.jspecify.annotations.Nullable;
 import org.wardon.advice.forecast.ForecastAdvice;
 import org.wardon.advice.forecast.StoreAdvice;
+import org.wardon.advice.placing.OpenLots;
 import org.wardon.advice.wording.Units;
 import org.wardon.advice.wording.Words;
 import org.wardon.errors.Progress;
@@ -57,9 +58,11 @@ final class Forecasts implements AutoCloseable {
             return known;
         }
         Function<Progress, StoreAdvice> work =
-                progress ->
-                        new ForecastAdvice(book, Words.english(Units.METRIC))
-                                .advise(plan, progress);
+                progress -> {
+                    OpenLots.Housed housed = OpenLots.house(plan, book, progress);
+                    return new ForecastAdvice(book, Words.english(Units.METRIC))
+                            .advise(housed.plan(), housed.told(), progress);
+                };
         Job job = new Job(work);
         jobs.put(key, job);
         forgetOldest();
