@@ -94,6 +94,11 @@ final class DrawnStore {
         return this;
     }
 
+    DrawnStore lot(String json) {
+        lots.add(json);
+        return this;
+    }
+
     /** Members of the plan beside those it has. */
     DrawnStore with(String json) {
         members += ", " + json;
