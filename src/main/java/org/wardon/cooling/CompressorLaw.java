@@ -37,7 +37,7 @@ public final class CompressorLaw implements CoolerLaw {
     private static final double COIL_WATER_KG_PER_KW = 0.2;
 
     /** A step of Newton this short is followed by slopes; what is left is of its square, K. */
-    private static final double LAST_STEP_K = 1e-7;
+    private static final double LAST_STEP_K = 1e-5;
 
     private final Compressor unit;
     private final double pressurePa;
