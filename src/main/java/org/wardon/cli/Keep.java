@@ -12,7 +12,6 @@ import org.wardon.advice.outlook.KeepingAdvice;
 import org.wardon.advice.wording.Words;
 import org.wardon.errors.BadInput;
 import org.wardon.files.forecast.AnswerWriter;
-import org.wardon.produce.Ripeness;
 import org.wardon.reference.ReferenceBook;
 import picocli.CommandLine.ArgGroup;
 import picocli.CommandLine.Command;
@@ -36,6 +35,8 @@ final class Keep implements Callable<Integer> {
 
     @ArgGroup(multiplicity = "0..1")
     private @Nullable Where where;
+
+    @Mixin private LooksWords looks = new LooksWords();
 
     @Mixin private OwnLotWords ownLots = new OwnLotWords();
 
@@ -84,30 +85,12 @@ final class Keep implements Callable<Integer> {
     private @Nullable Double usedPct;
 
     @Option(
-            names = "--variant",
-            paramLabel = "NAME",
-            description = "A variant that 'look' shows, such as hass of avocado.")
-    private @Nullable String variant;
-
-    @Option(
             names = "--known-life",
             paramLabel = "DAYS@C",
             description = {
                 "In my store it keeps so many days at so many °C, such as 9@10 or 8..10@10."
             })
     private @Nullable String knownLife;
-
-    @Option(
-            names = "--ripeness",
-            paramLabel = "STATE",
-            description = "green, turning or ripe (default: unknown).")
-    private Ripeness ripeness = Ripeness.UNKNOWN;
-
-    @Option(
-            names = "--cured",
-            paramLabel = "yes|no",
-            description = "Whether bulbs or roots were cured (default: unknown).")
-    private @Nullable YesNo cured;
 
     @Option(
             names = "--ethylene",
@@ -179,11 +162,11 @@ final class Keep implements Callable<Integer> {
                 number(humidityPct),
                 number(usedPct),
                 Optional.ofNullable(knownLife),
-                ripeness,
-                Optional.ofNullable(cured).map(answer -> answer == YesNo.YES),
+                looks.ripeness(),
+                looks.cured(),
                 number(ethylenePpm),
                 number(ripeInDays),
-                Optional.ofNullable(variant));
+                looks.variant());
     }
 
     private static void refuse(String option, @Nullable Double value) {

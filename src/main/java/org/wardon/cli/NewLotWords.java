@@ -8,7 +8,7 @@ import org.jspecify.annotations.Nullable;
 import org.wardon.advice.receiving.NewLot;
 import org.wardon.errors.BadInput;
 import org.wardon.plan.Purpose;
-import org.wardon.produce.Ripeness;
+import picocli.CommandLine.Mixin;
 import picocli.CommandLine.Option;
 
 /** What a keeper tells of a lot at the door. */
@@ -31,6 +31,8 @@ final class NewLotWords {
             return this == SHIP_GREEN ? "ship-green" : "sell-ripe";
         }
     }
+
+    @Mixin private LooksWords looks = new LooksWords();
 
     @Option(
             names = "--commodity",
@@ -55,12 +57,6 @@ final class NewLotWords {
     private @Nullable Double temperatureC;
 
     @Option(
-            names = "--ripeness",
-            paramLabel = "STATE",
-            description = "green, turning or ripe (default: unknown).")
-    private Ripeness ripeness = Ripeness.UNKNOWN;
-
-    @Option(
             names = "--purpose",
             paramLabel = "WHAT",
             description = "Of green fruit: ship-green (default) or sell-ripe.")
@@ -71,18 +67,6 @@ final class NewLotWords {
             paramLabel = "HOURS",
             description = "Hours since harvest (default: 4 to 36 are drawn).")
     private @Nullable Double harvestedHoursAgo;
-
-    @Option(
-            names = "--cured",
-            paramLabel = "yes|no",
-            description = "Whether bulbs or roots were cured (default: unknown).")
-    private @Nullable YesNo cured;
-
-    @Option(
-            names = "--variant",
-            paramLabel = "NAME",
-            description = "A variant that 'look' shows, such as hass of avocado.")
-    private @Nullable String variant;
 
     @Option(
             names = "--package",
@@ -124,11 +108,11 @@ final class NewLotWords {
                 massKg,
                 new NewLot.Fruit(
                         given(temperatureC),
-                        ripeness,
+                        looks.ripeness(),
                         given(harvestedHoursAgo),
-                        Optional.ofNullable(cured).map(answer -> answer == YesNo.YES),
+                        looks.cured(),
                         Optional.ofNullable(packed),
-                        Optional.ofNullable(variant)),
+                        looks.variant()),
                 new NewLot.Wish(
                         Optional.ofNullable(at).map(NewLotWords::time),
                         given(wantedDays),
