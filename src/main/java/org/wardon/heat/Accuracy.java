@@ -20,7 +20,7 @@ record Accuracy(double lotK, double airK, Integrator.Steps steps) {
     static final Accuracy EVEN = new Accuracy(5e-3, 5e-2, Integrator.Steps.LONG);
 
     /** For a run whose single hours nobody reads: lots within 0.02 K (measured). */
-    static final Accuracy SKETCHED = new Accuracy(2e-2, 2e-1, Integrator.Steps.LONG);
+    static final Accuracy SKETCHED = new Accuracy(4e-2, 4e-1, Integrator.Steps.LONG);
 
     Accuracy {
         Require.within("lotK", lotK, 1e-9, 1, "K", "");

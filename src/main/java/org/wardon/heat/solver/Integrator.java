@@ -10,8 +10,16 @@ public final class Integrator {
     /** The same for a step that is tried again behind the next edge of its kind. */
     private static final double CAREFUL = 0.9;
 
-    /** An error so small that the step may grow by much more the next time. */
+    /** A remembered step grows by no more than this from one time to the next. */
+    private static final double MORE = 4;
+
+    /** An error so small that it may grow by more, and by how much. */
     private static final double SMALL = 0.02;
+
+    private static final double MUCH_MORE = 8;
+
+    /** A remembered step is tried where it is no longer than this beside the one before it. */
+    private static final double RISES = 8;
 
     /** Steps behind an edge that are remembered. */
     private static final int REMEMBERED = 8;
@@ -224,12 +232,12 @@ public final class Integrator {
     /** Remembers what would have gone best here; returns what to try next. */
     private double learn(double h, double e, boolean cut, boolean refused, double proposed) {
         double[] steps = learned[edge];
-        double most = e < SMALL ? 4 : 2;
+        double most = e < SMALL ? MUCH_MORE : MORE;
         double best = h * Math.min(Math.max(CAREFUL / method.root(e), 0.7), refused ? 1 : most);
         steps[sinceEdge] = cut ? Math.max(best, steps[sinceEdge]) : best;
         sinceEdge++;
         boolean known = sinceEdge < REMEMBERED && steps[sinceEdge] > 0;
-        return known ? Math.min(steps[sinceEdge], 3 * Math.max(proposed, h)) : proposed;
+        return known ? Math.min(steps[sinceEdge], RISES * Math.max(proposed, h)) : proposed;
     }
 
     /**
