@@ -37,8 +37,9 @@ public final class PlacedPlan {
      * @param asked the plan as it was read from it
      * @param placed the same with chambers and lots as proposed
      * @return the changed text
+     * @throws org.wardon.errors.BadInput where the text is no plan
      */
-    static String changed(String text, StorePlan asked, StorePlan placed) {
+    public static String changed(String text, StorePlan asked, StorePlan placed) {
         JsonEdit edit = JsonEdit.of(text);
         for (int i = 0; i < asked.chambers().size(); i++) {
             edit = chamber(edit, i, asked.chambers().get(i), placed.chambers().get(i));

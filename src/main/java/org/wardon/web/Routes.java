@@ -21,6 +21,8 @@ import org.wardon.web.pages.Press;
 import org.wardon.web.pages.Room;
 import org.wardon.web.pages.StaticFiles;
 import org.wardon.web.pages.Troubles;
+import org.wardon.web.placing.PlacingPage;
+import org.wardon.web.placing.SharingPage;
 import org.wardon.web.plan.PlanEditor;
 import org.wardon.web.work.Workbench;
 
@@ -44,6 +46,7 @@ final class Routes {
         plans();
         forecast();
         door();
+        placing();
         chamber();
         crops();
         editor();
@@ -93,6 +96,20 @@ final class Routes {
         routes.get("/plan/{plan}/door", call(door::show));
         routes.get("/plan/{plan}/door/progress", call(door::progress));
         routes.post("/plan/{plan}/door/put", call(door::put));
+    }
+
+    private void placing() {
+        PlacingPage placing = new PlacingPage(bench, press);
+        SharingPage sharing = new SharingPage(bench, press);
+        AllChambersPage chambers = new AllChambersPage(bench, press);
+        String path = "/plan/{plan}/placing";
+        routes.get("/placing", call(http -> chambers.home(http, Room.PLACING)));
+        routes.get(path, call(placing::show));
+        routes.get(path + "/progress", call(placing::progress));
+        routes.post(path + "/cancel", call(placing::cancel));
+        routes.post(path + "/again", call(placing::again));
+        routes.post(path + "/take-over", call(placing::takeOver));
+        routes.get("/plan/{plan}/sharing", call(sharing::show));
     }
 
     private void chamber() {

@@ -5,7 +5,6 @@ import java.util.List;
 import java.util.OptionalDouble;
 import org.wardon.advice.wording.Words;
 import org.wardon.files.forecast.Because;
-import org.wardon.files.forecast.Quantiles;
 import org.wardon.files.forecast.ReceiveAnswer;
 import org.wardon.web.pages.Figures;
 import org.wardon.web.pages.PageWords;
@@ -61,7 +60,7 @@ final class DoorViews {
                 say.say("door.verdict-" + choice.verdict()),
                 best,
                 best ? "" : figures.text(choice.text()),
-                days(choice.keeps().daysLeft()),
+                RangeView.days(choice.keeps().daysLeft(), words, figures),
                 words.text("mechanism." + choice.keeps().limitedBy()),
                 facts,
                 told(
@@ -74,18 +73,6 @@ final class DoorViews {
         return choice.chamber()
                 .map(id -> say.say("door.chamber", id))
                 .orElseGet(() -> say.say("door." + choice.kind()));
-    }
-
-    private RangeView days(Quantiles days) {
-        if (Words.isCapped(days.p10())) {
-            return RangeView.of(figures.text(words.range(days)));
-        }
-        String low = figures.figure(days.p10(), "day").replaceAll(" days?$", "");
-        String high =
-                Words.isCapped(days.p90())
-                        ? "730+"
-                        : figures.figure(days.p90(), "day").replaceAll(" days?$", "");
-        return new RangeView(figures.figure(days.p50(), "day"), low, high);
     }
 
     private void cooling(OptionalDouble hours, List<String> facts) {

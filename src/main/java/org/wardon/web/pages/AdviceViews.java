@@ -228,7 +228,7 @@ public final class AdviceViews {
                 crop(planned),
                 figures.mass(planned.massKg()),
                 figures.day(lot.leaveBy().toLocalDate()),
-                days(lot.daysLeft()),
+                RangeView.days(lot.daysLeft(), words, figures),
                 words.text("mechanism." + lot.limitedBy()),
                 gained(lot.daysGained()),
                 lot.hangsOn().map(on -> words.text("hangs-on." + on.range())).stream().toList(),
@@ -238,20 +238,6 @@ public final class AdviceViews {
     private String crop(LotPlan lot) {
         String name = open.book().get(lot.commodity()).names().get(0);
         return lot.variant().map(variant -> name + ", " + variant).orElse(name);
-    }
-
-    private RangeView days(Quantiles days) {
-        if (Words.isCapped(days.p10())) {
-            return RangeView.of(figures.text(words.range(days)));
-        }
-        String low = figures.figure(days.p10(), "day");
-        String high = figures.text(Words.isCapped(days.p90()) ? "730+" : brief(days.p90()));
-        return new RangeView(
-                figures.figure(days.p50(), "day"), low.replaceAll(" days?$", ""), high);
-    }
-
-    private String brief(double days) {
-        return words.units().figure(days, "day").replaceAll(" days?$", "");
     }
 
     private String gained(Quantiles days) {

@@ -8,6 +8,8 @@ public enum Room {
     CHAMBERS("/plan/{plan}"),
     /** A lot that comes to the door. */
     DOOR("/plan/{plan}/door"),
+    /** Which lot goes where. */
+    PLACING("/plan/{plan}/placing"),
     /** The open plan, to be changed. */
     PLAN("/plan/{plan}/edit"),
     /** Crops and what is known of them. */

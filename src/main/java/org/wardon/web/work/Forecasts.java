@@ -3,34 +3,26 @@ package org.wardon.web.work;
 import java.util.LinkedHashMap;
 import java.util.Map;
 import java.util.Optional;
-import java.util.concurrent.ExecutorService;
-import java.util.concurrent.Executors;
-import java.util.function.Function;
-import org.jspecify.annotations.Nullable;
 import org.wardon.advice.forecast.ForecastAdvice;
 import org.wardon.advice.forecast.StoreAdvice;
 import org.wardon.advice.placing.OpenLots;
 import org.wardon.advice.wording.Units;
 import org.wardon.advice.wording.Words;
-import org.wardon.errors.Progress;
 import org.wardon.plan.StorePlan;
 import org.wardon.reference.ReferenceBook;
 
-/**
- * Forecasts, worked out one after the other in the background, as each takes all processors, and
- * remembered by plan and version.
- */
+/** Forecasts, remembered by plan and version. */
 final class Forecasts implements AutoCloseable {
     private static final int REMEMBERED = 12;
 
-    private final ExecutorService worker =
-            Executors.newSingleThreadExecutor(
-                    task -> {
-                        Thread thread = new Thread(task, "forecast");
-                        thread.setDaemon(true);
-                        return thread;
-                    });
-    private final Map<Key, Job> jobs = new LinkedHashMap<>(16, 0.75f, true);
+    /** Where each stage begins and how much of all it is; measured on the demo. */
+    private static final Map<String, double[]> STAGES =
+            Map.of(
+                    "forecast", new double[] {0.02, 0.23},
+                    "draws", new double[] {0.25, 0.55},
+                    "judging", new double[] {0.8, 0.2});
+
+    private final Jobs<Key> jobs = new Jobs<>("forecast", REMEMBERED, this::forget);
     private final Map<Told, StoreAdvice> otherWords = new LinkedHashMap<>(16, 0.75f, true);
 
     /** A plan in one version, advised on with one book. */
@@ -45,74 +37,56 @@ final class Forecasts implements AutoCloseable {
 
     /** Returns how far the forecast is, and begins it where nobody has. */
     Stand of(OpenPlan open, StorePlan plan, Units units, long patienceMs) {
-        Job job = started(key(open), open.book(), plan);
+        Job job = jobs.started(key(open), () -> job(open.book(), plan));
         job.await(patienceMs);
         return job.stand() instanceof Stand.Ready ready
                 ? new Stand.Ready(told(open, ready.advice(), units))
                 : job.stand();
     }
 
-    private synchronized Job started(Key key, ReferenceBook book, StorePlan plan) {
-        Job known = jobs.get(key);
-        if (known != null) {
-            return known;
-        }
-        Function<Progress, StoreAdvice> work =
+    private static Job job(ReferenceBook book, StorePlan plan) {
+        ForecastAdvice advice = new ForecastAdvice(book, Words.english(Units.METRIC));
+        return new Job(
                 progress -> {
                     OpenLots.Housed housed = OpenLots.house(plan, book, progress);
-                    return new ForecastAdvice(book, Words.english(Units.METRIC))
-                            .advise(housed.plan(), housed.told(), progress);
-                };
-        Job job = new Job(work);
-        jobs.put(key, job);
-        forgetOldest();
-        worker.execute(job);
-        return job;
+                    return new Stand.Ready(advice.advise(housed.plan(), housed.told(), progress));
+                },
+                STAGES);
     }
 
-    private void forgetOldest() {
-        var oldest = jobs.entrySet().iterator();
-        while (jobs.size() > REMEMBERED && oldest.hasNext()) {
-            Map.Entry<Key, Job> entry = oldest.next();
-            entry.getValue().cancel();
-            otherWords.keySet().removeIf(told -> told.key().equals(entry.getKey()));
-            oldest.remove();
+    private void forget(Key key) {
+        synchronized (otherWords) {
+            otherWords.keySet().removeIf(told -> told.key().equals(key));
         }
     }
 
-    private synchronized StoreAdvice told(OpenPlan open, StoreAdvice advice, Units units) {
+    private StoreAdvice told(OpenPlan open, StoreAdvice advice, Units units) {
         if (units.equals(Units.METRIC)) {
             return advice;
         }
-        return otherWords.computeIfAbsent(
-                new Told(key(open), units),
-                told -> new ForecastAdvice(open.book(), Words.english(units)).inTheseWords(advice));
-    }
-
-    synchronized Optional<Stand> stand(OpenPlan open) {
-        return Optional.ofNullable(jobs.get(key(open))).map(Job::stand);
-    }
-
-    synchronized void cancel(OpenPlan open) {
-        @Nullable Job job = jobs.get(key(open));
-        if (job != null) {
-            job.cancel();
+        synchronized (otherWords) {
+            return otherWords.computeIfAbsent(
+                    new Told(key(open), units),
+                    told ->
+                            new ForecastAdvice(open.book(), Words.english(units))
+                                    .inTheseWords(advice));
         }
     }
 
-    /** Forgets a forecast that was cancelled or stopped, so that it is begun again when asked. */
-    synchronized void again(OpenPlan open) {
-        @Nullable Job job = jobs.get(key(open));
-        if (job != null && job.isOver() && !(job.stand() instanceof Stand.Ready)) {
-            jobs.remove(key(open));
-        }
+    Optional<Stand> stand(OpenPlan open) {
+        return jobs.stand(key(open));
+    }
+
+    void cancel(OpenPlan open) {
+        jobs.cancel(key(open));
+    }
+
+    void again(OpenPlan open) {
+        jobs.again(key(open));
     }
 
     @Override
     public void close() {
-        synchronized (this) {
-            jobs.values().forEach(Job::cancel);
-        }
-        worker.shutdownNow();
+        jobs.close();
     }
 }

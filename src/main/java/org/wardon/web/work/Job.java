@@ -5,26 +5,26 @@ import java.util.concurrent.CancellationException;
 import java.util.concurrent.CountDownLatch;
 import java.util.concurrent.TimeUnit;
 import java.util.function.Function;
-import org.wardon.advice.forecast.StoreAdvice;
 import org.wardon.errors.Progress;
 import org.wardon.errors.RunStopped;
 
-/** One forecast on its way. */
+/** One piece of long work on its way. */
 final class Job implements Runnable {
-    /** Where each stage begins and how much of all it is; measured on the demo. */
-    private static final Map<String, double[]> STAGES =
-            Map.of(
-                    "forecast", new double[] {0.02, 0.23},
-                    "draws", new double[] {0.25, 0.55},
-                    "judging", new double[] {0.8, 0.2});
-
-    private final Function<Progress, StoreAdvice> work;
+    private final Function<Progress, Stand> work;
+    private final Map<String, double[]> stages;
     private final CountDownLatch done = new CountDownLatch(1);
     private volatile Stand stand = new Stand.Running("waiting", 0);
     private volatile boolean cancelled;
 
-    Job(Function<Progress, StoreAdvice> work) {
+    /**
+     * Prepares it.
+     *
+     * @param work does it and says where it stands then
+     * @param stages where each stage of its progress begins and how much of all it is
+     */
+    Job(Function<Progress, Stand> work, Map<String, double[]> stages) {
         this.work = work;
+        this.stages = stages;
     }
 
     Stand stand() {
@@ -33,6 +33,11 @@ final class Job implements Runnable {
 
     boolean isOver() {
         return done.getCount() == 0;
+    }
+
+    /** Whether it ended with an answer. */
+    boolean isAnswered() {
+        return stand instanceof Stand.Ready || stand instanceof Stand.Placed;
     }
 
     /** A run hears it at its next step of progress. */
@@ -52,8 +57,8 @@ final class Job implements Runnable {
     @Override
     public void run() {
         try {
-            heard("forecast", 0);
-            stand = new Stand.Ready(work.apply(this::heard));
+            heard("", 0);
+            stand = work.apply(this::heard);
         } catch (CancellationException e) {
             stand = new Stand.Cancelled();
         } catch (RunStopped e) {
@@ -67,14 +72,17 @@ final class Job implements Runnable {
         }
     }
 
+    /** Stages that are nobody's tell that the work goes on, not how far it is. */
     private void heard(String stage, double fraction) {
         if (cancelled) {
             throw new CancellationException(stage);
         }
-        double[] part = STAGES.getOrDefault(stage, new double[] {0, 1});
-        double all = part[0] + part[1] * fraction;
-        if (stand instanceof Stand.Running before && before.fraction() <= all) {
-            stand = new Stand.Running(stage, all);
+        double[] part = stages.get(stage);
+        if (part != null) {
+            double all = part[0] + part[1] * fraction;
+            if (stand instanceof Stand.Running before && before.fraction() <= all) {
+                stand = new Stand.Running(stage, all);
+            }
         }
     }
 }

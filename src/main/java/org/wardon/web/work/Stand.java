@@ -1,8 +1,9 @@
 package org.wardon.web.work;
 
 import org.wardon.advice.forecast.StoreAdvice;
+import org.wardon.advice.placing.PlaceReport;
 
-/** How far a forecast has come. */
+/** How far long work has come. */
 public sealed interface Stand {
     /**
      * It is being worked out, or waits for others.
@@ -13,11 +14,18 @@ public sealed interface Stand {
     record Running(String stage, double fraction) implements Stand {}
 
     /**
-     * It is there.
+     * A forecast is there.
      *
      * @param advice the advice
      */
     record Ready(StoreAdvice advice) implements Stand {}
+
+    /**
+     * A placing is there.
+     *
+     * @param report the placing
+     */
+    record Placed(PlaceReport report) implements Stand {}
 
     /**
      * It could not be worked out.

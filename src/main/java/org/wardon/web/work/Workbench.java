@@ -27,6 +27,7 @@ public final class Workbench implements AutoCloseable {
     private final Books books;
     private final Clock clock;
     private final Forecasts forecasts = new Forecasts();
+    private final Placings placings = new Placings();
     private final Doors doors = new Doors();
     private final Map<Key, OpenPlan> read = new LinkedHashMap<>(16, 0.75f, true);
 
@@ -187,6 +188,15 @@ public final class Workbench implements AutoCloseable {
     }
 
     /**
+     * Returns the placings that were sought.
+     *
+     * @return what seeks them and remembers them
+     */
+    public Placings placings() {
+        return placings;
+    }
+
+    /**
      * Returns what answers questions at the door of a store, and begins to work it out where nobody
      * has.
      *
@@ -205,6 +215,7 @@ public final class Workbench implements AutoCloseable {
     @Override
     public void close() {
         doors.close();
+        placings.close();
         forecasts.close();
         books.close();
     }

@@ -49,7 +49,12 @@ class PageWordsTest {
                     "curve.",
                     "heat.",
                     "limit.",
-                    "profile.");
+                    "profile.",
+                    "placing.aim-",
+                    "placing.move-",
+                    "ruler.pulls-",
+                    "ruler.key-",
+                    "sharing.");
 
     private static List<String> sources() throws IOException {
         List<String> texts = new ArrayList<>();
@@ -88,7 +93,15 @@ class PageWordsTest {
         for (Room room : Room.values()) {
             WORDS.say(room.key());
         }
-        for (String stage : List.of("waiting", "forecast", "draws", "judging")) {
+        for (String stage :
+                List.of(
+                        "waiting",
+                        "forecast",
+                        "draws",
+                        "judging",
+                        "chambers",
+                        "placing",
+                        "telling")) {
             WORDS.say("stage." + stage);
         }
         for (Preferences.Light light : Preferences.Light.values()) {
