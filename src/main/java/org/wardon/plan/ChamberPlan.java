@@ -80,6 +80,15 @@ public record ChamberPlan(
     }
 
     /**
+     * Returns the temperature that is dialled in.
+     *
+     * @return °C
+     */
+    public double settingC() {
+        return setting.temperatureC();
+    }
+
+    /**
      * Returns the chamber at another setting.
      *
      * @param other taken instead

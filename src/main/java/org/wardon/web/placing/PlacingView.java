@@ -119,7 +119,7 @@ public record PlacingView(
     public record Result(
             String lead,
             String sought,
-            List<String> steps,
+            List<Step> steps,
             List<Spread> chambers,
             List<Told> unplaced,
             boolean many,
@@ -143,6 +143,14 @@ public record PlacingView(
             notes = List.copyOf(notes);
         }
     }
+
+    /**
+     * A step of the walk.
+     *
+     * @param text what to do
+     * @param about the lot it is about, in a few words; blank for a chamber
+     */
+    public record Step(String text, String about) {}
 
     /**
      * Pages of a long list.

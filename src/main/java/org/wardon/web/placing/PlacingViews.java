@@ -67,7 +67,7 @@ final class PlacingViews {
         return new PlacingView.Result(
                 lead(),
                 form.told(),
-                steps(),
+                steps(spreads),
                 spreads.all(answer),
                 answer.unplaced().stream()
                         .map(lot -> new PlacingView.Told(figures.text(lot.text()), ""))
@@ -87,10 +87,16 @@ final class PlacingViews {
         return new PlacingView.Told(figures.text(because.text()), because.source());
     }
 
-    private List<String> steps() {
-        return Stream.concat(answer.changes().stream(), answer.moves().stream())
-                .map(change -> figures.text(change.text()))
+    private List<PlacingView.Step> steps(SpreadViews spreads) {
+        return Stream.concat(
+                        answer.changes().stream().map(change -> step(change, "")),
+                        answer.moves().stream()
+                                .map(change -> step(change, spreads.about(change.subject()))))
                 .toList();
+    }
+
+    private PlacingView.Step step(PlaceAnswer.Change change, String about) {
+        return new PlacingView.Step(figures.text(change.text()), about);
     }
 
     private String lead() {
@@ -103,7 +109,8 @@ final class PlacingViews {
                         key,
                         money.of(answer.value()),
                         money.of(answer.presentValue()),
-                        money.of(Math.abs(more)))
+                        money.of(Math.abs(more)),
+                        figures.figure(report.asked().days(), "day"))
                 + wished();
     }
 
@@ -191,19 +198,29 @@ final class PlacingViews {
                         .toList();
         RulerViews views = new RulerViews(groups, words, say, figures);
         List<PlacingView.Rulers> rulers = new ArrayList<>();
-        for (int c = 0; c < now.size(); c++) {
+        for (int i = 0; i < now.size(); i++) {
+            int c = i;
             List<RulerView> shown = new ArrayList<>();
             if (isAlike(now.get(c), then.get(c))) {
                 ruler(views, then.get(c), "ruler.title-both").ifPresent(shown::add);
             } else {
                 ruler(views, now.get(c), "ruler.title-now").ifPresent(shown::add);
-                ruler(views, then.get(c), "ruler.title-then").ifPresent(shown::add);
+                ruler(views, then.get(c), "ruler.title-then")
+                        .map(ruler -> allTheSame(ruler, then.get(c).sharing()))
+                        .ifPresent(shown::add);
             }
             if (!shown.isEmpty()) {
                 rulers.add(new PlacingView.Rulers(now.get(c).id(), shown));
             }
         }
         return rulers;
+    }
+
+    /** A placing weighs money or days, and may bear what sharing would refuse. */
+    private RulerView allTheSame(RulerView ruler, Optional<GroupReport> group) {
+        return group.filter(one -> one.verdict().equals("no")).isPresent()
+                ? ruler.withSecond(new PlacingView.Told(say.say("ruler.all-the-same"), ""))
+                : ruler;
     }
 
     private static boolean isAlike(Arrangement.There now, Arrangement.There then) {
@@ -289,8 +306,7 @@ final class PlacingViews {
                                         ? say.say("placing.off")
                                         : say.say(
                                                 "placing.set",
-                                                figures.temperature(
-                                                        chamber.setting().temperatureC())))
+                                                figures.temperature(chamber.settingC())))
                 .orElse(say.say("placing.gone"));
     }
 

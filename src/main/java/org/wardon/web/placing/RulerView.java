@@ -1,5 +1,6 @@
 package org.wardon.web.placing;
 
+import java.util.ArrayList;
 import java.util.List;
 import java.util.Optional;
 import org.wardon.web.pages.TableView;
@@ -11,6 +12,7 @@ import org.wardon.web.pages.TableView;
  * @param unit unit of its figures
  * @param ticks its marks
  * @param common where all of them agree; absent where nowhere
+ * @param apart where the two lie apart that pull apart most; absent where none do
  * @param setting what is dialled in; absent where nothing is
  * @param rows a line a lot, or several lots alike
  * @param sentences what it comes to, in words
@@ -22,6 +24,7 @@ public record RulerView(
         String unit,
         List<Tick> ticks,
         Optional<Span> common,
+        Optional<Span> apart,
         Optional<Mark> setting,
         List<Row> rows,
         List<PlacingView.Told> sentences,
@@ -33,6 +36,18 @@ public record RulerView(
         rows = List.copyOf(rows);
         sentences = List.copyOf(sentences);
         more = List.copyOf(more);
+    }
+
+    /**
+     * Returns the ruler with one more sentence behind the first.
+     *
+     * @param told the sentence
+     * @return the ruler
+     */
+    public RulerView withSecond(PlacingView.Told told) {
+        List<PlacingView.Told> all = new ArrayList<>(sentences);
+        all.add(Math.min(1, all.size()), told);
+        return new RulerView(title, unit, ticks, common, apart, setting, rows, all, more, table);
     }
 
     /**
@@ -58,7 +73,7 @@ public record RulerView(
      * @param at where it begins
      * @param wide how wide it is
      * @param kind what it is: {@code lasts}, {@code bears}, {@code chills}, {@code freezes}; the
-     *     words of the part where all agree
+     *     words of the part where all agree, or of that where two lie apart
      */
     public record Span(String at, String wide, String kind) {}
 

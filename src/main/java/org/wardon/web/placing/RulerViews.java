@@ -1,6 +1,7 @@
 package org.wardon.web.placing;
 
 import java.util.ArrayList;
+import java.util.Comparator;
 import java.util.List;
 import java.util.Locale;
 import java.util.Optional;
@@ -24,7 +25,10 @@ final class RulerViews {
     private static final double LONGEST_C = 35;
     private static final double BEYOND_K = 2;
     private static final int MOST_IDS = 4;
-    private static final int MOST_SENTENCES = 5;
+    private static final int MOST_SENTENCES = 4;
+
+    /** A figure so near the warm end would meet the unit, share of the length. */
+    private static final double UNIT_FROM = 0.93;
 
     /** Half of the distance between the temperatures a lot was looked at, K. */
     private static final double HALF_STEP_K = 0.25;
@@ -72,6 +76,7 @@ final class RulerViews {
                 figures.temperatureUnit(),
                 ticks(),
                 group.workableC().map(this::common),
+                apart(group),
                 settingC.isPresent()
                         ? Optional.of(setting(settingC.getAsDouble()))
                         : Optional.empty(),
@@ -105,8 +110,9 @@ final class RulerViews {
         int from = (int) Math.ceil(figures.shownTemperature(COLDEST_C) / step) * step;
         for (int t = from; t <= figures.shownTemperature(warmestC) + 1e-9; t += step) {
             double temperatureC = fahrenheit ? (t - 32) / 1.8 : t;
-            ticks.add(
-                    new RulerView.Tick(at(temperatureC), t % named == 0 ? String.valueOf(t) : ""));
+            double share = (temperatureC - COLDEST_C) / (warmestC - COLDEST_C);
+            boolean told = t % named == 0 && share < UNIT_FROM;
+            ticks.add(new RulerView.Tick(at(temperatureC), told ? String.valueOf(t) : ""));
         }
         return ticks;
     }
@@ -114,6 +120,28 @@ final class RulerViews {
     private RulerView.Span common(Bounds all) {
         RulerView.Span span = span(all.low(), all.high(), "");
         return new RulerView.Span(span.at(), span.wide(), say.say("ruler.all", range(all)));
+    }
+
+    /** The two that pull apart most, told by the reason itself. */
+    private Optional<RulerView.Span> apart(GroupReport group) {
+        return group.pairs().stream()
+                .flatMap(pair -> pair.reasons().stream())
+                .filter(reason -> reason.code().equals("temperature-gap"))
+                .max(Comparator.comparingDouble(reason -> reason.arguments().get(0).value()))
+                .map(this::gap);
+    }
+
+    private RulerView.Span gap(Reason reason) {
+        double fromC = reason.arguments().get(1).value() + HALF_STEP_K;
+        double toC = reason.arguments().get(2).value() - HALF_STEP_K;
+        String told =
+                say.say(
+                        "ruler.apart",
+                        reason.subjects().get(0),
+                        reason.subjects().get(1),
+                        figures.figure(reason.arguments().get(0).value(), "K"));
+        double wide = Math.max(0, Math.min(warmestC, toC) - Math.max(COLDEST_C, fromC));
+        return new RulerView.Span(at(fromC), percent(wide), told);
     }
 
     private RulerView.Mark setting(double temperatureC) {

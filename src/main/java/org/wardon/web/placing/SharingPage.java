@@ -150,7 +150,7 @@ public final class SharingPage {
             ChamberPlan chamber = plan.getChamber(where.get(0).get());
             return chamber.off() || chamber.coolers().isEmpty()
                     ? OptionalDouble.empty()
-                    : OptionalDouble.of(chamber.setting().temperatureC());
+                    : OptionalDouble.of(chamber.settingC());
         }
 
         private Map<String, Double> wanted() {

@@ -148,11 +148,11 @@ final class SpreadViews {
                 Optional.ofNullable(report.present().lots().get(id)).filter(lot -> proposed);
         return new PlacingView.Tag(
                 id,
-                say.say("placing.crop", crop(was), figures.mass(was.massKg())),
+                about(id),
                 moved ? proposed ? "comes" : "goes" : STAYS,
                 moved ? way(was, is, proposed) : "",
                 here == null ? RangeView.of("–") : days(here),
-                here == null ? "" : words.text("mechanism." + here.limitedBy()),
+                here == null ? "" : say.say("placing.ended", limit(here)),
                 before.map(lot -> say.say("placing.before", brief(lot), limit(lot))).orElse(""));
     }
 
@@ -182,7 +182,13 @@ final class SpreadViews {
                 .orElse(say.say("placing.taken-out"));
     }
 
-    String crop(LotPlan lot) {
+    /** A lot of the plan in a few words. */
+    String about(String id) {
+        LotPlan lot = lot(report.asked().lots(), id);
+        return say.say("placing.crop", crop(lot), figures.mass(lot.massKg()));
+    }
+
+    private String crop(LotPlan lot) {
         String name = open.book().get(lot.commodity()).names().get(0);
         return lot.variant().map(variant -> name + ", " + variant).orElse(name);
     }

@@ -46,6 +46,25 @@ function charts() {
 }
 
 const TONES = { main: '--russet', second: '--faded', third: '--leafgreen', fourth: '--focus' };
+const MONTHS = ['Jan', 'Feb', 'Mar', 'Apr', 'May', 'Jun', 'Jul', 'Aug', 'Sep', 'Oct', 'Nov', 'Dec'];
+const pad = (number) => String(number).padStart(2, '0');
+
+// Days and hours as the pages write them; local times stand in the data as if they were UTC.
+function day(seconds) {
+  const at = new Date(seconds * 1000);
+  return at.getUTCDate() + ' ' + MONTHS[at.getUTCMonth()];
+}
+function hour(seconds) {
+  const at = new Date(seconds * 1000);
+  return pad(at.getUTCHours()) + ':' + pad(at.getUTCMinutes());
+}
+const comma = document.documentElement.dataset.comma !== undefined;
+const figure = (value) => (comma ? String(value).replace('.', ',') : String(value));
+
+// Nothing is told of no time: where nobody points, figures are left blank.
+const told = (write) => (chart, value) => (value == null ? '' : write(value));
+const reading = told((value) => figure(Math.round(value * 100) / 100));
+
 const DASHES = { second: [10, 4], third: [3, 3], fourth: [8, 3, 2, 3] };
 
 async function draw(box) {
@@ -55,16 +74,16 @@ async function draw(box) {
   const font = '13px ' + style('--serif');
   const axis = { stroke: style('--ink'), font, grid: { stroke: style('--rule'), width: 1 }, ticks: { stroke: style('--rule'), width: 1 } };
   const levels = data.levels.map((level) => ({
-    label: level.name, stroke: style('--ink'), width: 1.5, dash: [7, 5], points: { show: false },
+    label: level.name, value: reading, stroke: style('--ink'), width: 1.5, dash: [7, 5], points: { show: false },
   }));
   const lines = data.lines.map((line) => ({
-    label: line.name, stroke: style(TONES[line.tone] ?? '--ink'), width: 2, dash: DASHES[line.tone], points: { show: false },
+    label: line.name, value: reading, stroke: style(TONES[line.tone] ?? '--ink'), width: 2, dash: DASHES[line.tone], points: { show: false },
   }));
   const options = {
     width: box.clientWidth, height: 260, tzDate: (seconds) => UPlot.tzDate(new Date(seconds * 1000), 'Etc/UTC'),
     scales: { x: { time: true } },
-    axes: [axis, { ...axis, label: data.unit, labelFont: font, size: 56 }],
-    series: [{ label: box.dataset.title }, ...lines, ...levels],
+    axes: [{ ...axis, values: (chart, splits) => splits.map((at) => (at % 86400 ? hour(at) : day(at))) }, { ...axis, values: (chart, splits) => splits.map(figure), label: data.unit, labelFont: font, size: 56 }],
+    series: [{ label: box.dataset.title, value: told((at) => day(at) + ' ' + hour(at)) }, ...lines, ...levels],
     legend: { markers: { dash: (chart, i) => (i > 1 ? (i % 2 ? 'dotted' : 'dashed') : 'solid') } },
   };
   const values = [data.time, ...data.lines.map((line) => line.values), ...data.levels.map((level) => data.time.map(() => level.value))];
@@ -146,7 +165,6 @@ document.querySelectorAll('form[data-suggest]').forEach((form) => {
 // What if: a slider beside each field, and the answer as it moves.
 document.querySelectorAll('form[data-what]').forEach((form) => {
   const answer = document.querySelector('#what-answer');
-  const comma = document.documentElement.dataset.comma !== undefined;
   let waiting;
   let asked = 0;
   const ask = () => {

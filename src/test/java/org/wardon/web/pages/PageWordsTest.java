@@ -50,10 +50,8 @@ class PageWordsTest {
                     "heat.",
                     "limit.",
                     "profile.",
-                    "placing.aim-",
-                    "placing.move-",
-                    "ruler.pulls-",
-                    "ruler.key-",
+                    "placing.",
+                    "ruler.",
                     "sharing.");
 
     private static List<String> sources() throws IOException {

@@ -1,0 +1,132 @@
+package org.wardon.web.browser;
+
+import static org.junit.jupiter.api.Assertions.assertEquals;
+import static org.junit.jupiter.api.Assertions.assertTrue;
+
+import com.microsoft.playwright.Page;
+import java.nio.file.Path;
+import java.util.List;
+import org.junit.jupiter.api.BeforeAll;
+import org.junit.jupiter.api.MethodOrderer;
+import org.junit.jupiter.api.Order;
+import org.junit.jupiter.api.Test;
+import org.junit.jupiter.api.TestMethodOrder;
+import org.junit.jupiter.params.ParameterizedTest;
+import org.junit.jupiter.params.provider.ValueSource;
+
+/** A placing: wished, sought, stopped, read, taken over and taken back. */
+@TestMethodOrder(MethodOrderer.OrderAnnotation.class)
+class PlacingIT extends InBrowser {
+    private static final int LARGEST_BYTES = 100_000;
+    private static final String ALL = "/placing?wish=most-value&move=all";
+
+    private String plan = "";
+
+    @BeforeAll
+    void bringTwoRooms() {
+        Page page = show("/plans", DESK);
+        page.setInputFiles(
+                "input[name=plan]", Path.of("src/test/resources/plans/placing/two-rooms.json"));
+        page.click("form[action='/plans/bring'] button");
+        page.waitForURL("**/plan/*");
+        plan = page.url().substring(address().length());
+        page.close();
+    }
+
+    private Page placed(int width) {
+        Page page = show(plan + ALL, width);
+        page.waitForSelector("#walk");
+        return page;
+    }
+
+    @Test
+    @Order(1)
+    void aWishIsSentByKeysAloneAndTheSearchStopsWhenTold() {
+        Page page = show("/plans", PHONE);
+        page.click("form[action='/plans/demo'] button");
+        page.waitForURL("**/plan/*");
+        page.navigate(page.url() + "/placing");
+        assertEquals(0, page.locator("#walk").count(), "something was sought unasked");
+        hold(page, "placing-wishes");
+        page.focus("input[name=wish][value=fewest-chambers]");
+        page.keyboard().press("Space");
+        page.focus(".wishes button.main");
+        page.keyboard().press("Enter");
+        page.waitForSelector(".progress");
+        picture(page, "placing-progress-360");
+        page.click(".progress button");
+        page.waitForSelector(".notice:has-text('stopped before it was done')");
+        page.click(".notice button");
+        page.waitForSelector(".progress");
+        page.click(".progress button");
+        page.waitForSelector(".notice");
+        page.close();
+    }
+
+    @ParameterizedTest
+    @Order(2)
+    @ValueSource(ints = {PHONE, DESK})
+    void presentStandsAgainstProposed(int width) {
+        Page page = placed(width);
+        List<String> steps = page.locator(".walk li").allTextContents();
+        assertTrue(steps.get(0).startsWith("Move B1 from back to front."), steps.toString());
+        assertEquals(2, page.locator(".spread").count());
+        assertEquals(2, page.locator(".tag.goes").count());
+        assertEquals(3, page.locator(".tag.comes").count());
+        assertTrue(page.locator(".ruler").count() >= 2);
+        assertTrue(page.content().length() < LARGEST_BYTES, "page of " + page.content().length());
+        hold(page, "placing");
+        page.click("details.why summary");
+        assertEquals(
+                "back", page.locator("details.why table tbody th").first().textContent().strip());
+        page.close();
+    }
+
+    @Test
+    @Order(3)
+    void withoutScriptThePageComesToTheSame() {
+        Page page = tab(PHONE);
+        page.route("**/*.js", route -> route.abort());
+        page.navigate(address() + plan + "/placing?wish=most-value&move=later");
+        for (int i = 0; i < 60 && page.locator("#gain").count() == 0; i++) {
+            page.reload();
+        }
+        assertTrue(page.locator("#gain").count() == 1, "no placing without script");
+        page.close();
+    }
+
+    @Test
+    @Order(4)
+    void lotsThatPullApartAreSeenAndSaid() {
+        Page page = show(plan + "/sharing?lots=B1&lots=L1&crops=mango=3", DESK);
+        List<String> pulls = page.locator(".ruler-pulls").allTextContents();
+        assertTrue(
+                pulls.contains("pulls warmer ▸") && pulls.contains("◂ pulls colder"), "" + pulls);
+        assertTrue(page.locator(".ruler").textContent().contains("apart."));
+        hold(page, "sharing");
+        page.close();
+        Page wrong = show(plan + "/sharing?crops=mango=many", PHONE);
+        assertTrue(wrong.locator(".faults").textContent().contains("no number of days"));
+        wrong.close();
+    }
+
+    @Test
+    @Order(5)
+    void whatIsTakenOverCanBeTakenBackAndLateHandsSeeBothSides() {
+        Page first = placed(DESK);
+        Page second = placed(DESK);
+        first.click(".walk button.main");
+        first.waitForURL(address() + plan);
+        assertTrue(first.locator(".saved").textContent().contains("placing taken over"));
+        second.click(".walk button.main");
+        second.waitForSelector("#clash");
+        String both = second.locator("section[aria-labelledby=clash] table").textContent();
+        assertTrue(both.contains("B1") && both.contains("in front"), both);
+        first.click(".steps button:not([disabled])");
+        first.waitForURL(address() + plan);
+        first.navigate(address() + plan + "/edit?at=$.lots[0]");
+        assertEquals("back", first.inputValue("[name='$.lots[0].chamber']"));
+        first.close();
+        second.close();
+    }
+}
