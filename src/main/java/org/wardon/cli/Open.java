@@ -93,6 +93,16 @@ final class Open implements Callable<Integer> {
             terminal.out().println(server.url() + path);
             if (!noBrowser) {
                 terminal.err().println("Open this address in a browser; Ctrl-C ends the program.");
+                server.secretFile()
+                        .ifPresent(
+                                file ->
+                                        terminal.err()
+                                                .println(
+                                                        "Programs ask at "
+                                                                + server.url()
+                                                                + "/api with the secret in "
+                                                                + file
+                                                                + "."));
             }
             waitForTheEnd(server);
         }

@@ -4,6 +4,7 @@ import java.nio.file.Path;
 import java.util.ArrayList;
 import java.util.List;
 import java.util.Optional;
+import java.util.function.Function;
 import org.wardon.errors.BadInput;
 import org.wardon.errors.Fault;
 import org.wardon.files.forecast.CompareAnswer.Changed;
@@ -18,8 +19,7 @@ import org.wardon.plan.StorePlan;
 /** Reads a plan with some of its inputs changed. */
 public final class PlanVariants {
     private final String text;
-    private final Path file;
-    private final Lookups lookups;
+    private final Function<String, StorePlan> reader;
 
     /**
      * Takes a plan.
@@ -30,8 +30,20 @@ public final class PlanVariants {
      */
     public PlanVariants(Path file, Lookups lookups) {
         text = TextFile.read(file, file.toString(), PlanReader.LARGEST_MB);
-        this.file = file;
-        this.lookups = lookups;
+        reader = changed -> PlanReader.read(changed, file, lookups);
+    }
+
+    /**
+     * Takes a plan that is kept elsewhere.
+     *
+     * @param text the plan
+     * @param name its name in messages
+     * @param files the files it may name
+     * @param lookups what its names may mean
+     */
+    public PlanVariants(String text, String name, PlanFiles files, Lookups lookups) {
+        this.text = text;
+        reader = changed -> PlanReader.read(changed, name, files, lookups);
     }
 
     /**
@@ -68,7 +80,7 @@ public final class PlanVariants {
             throw new BadInput(faults);
         }
         try {
-            return new Variant(PlanReader.read(edit.text(), file, lookups), changed);
+            return new Variant(reader.apply(edit.text()), changed);
         } catch (BadInput wrong) {
             throw new BadInput(
                     wrong.faults().stream()

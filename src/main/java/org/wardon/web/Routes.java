@@ -5,7 +5,10 @@ import io.javalin.http.Handler;
 import io.javalin.http.HttpResponseException;
 import java.util.function.Consumer;
 import org.wardon.errors.BadInput;
-import org.wardon.web.api.PlansApi;
+import org.wardon.errors.RunStopped;
+import org.wardon.web.api.Api;
+import org.wardon.web.api.route.Unreadable;
+import org.wardon.web.chamber.ChamberAnswers;
 import org.wardon.web.chamber.ChamberPage;
 import org.wardon.web.crops.CropsPage;
 import org.wardon.web.door.DoorPage;
@@ -32,12 +35,14 @@ final class Routes {
     private final Workbench bench;
     private final Press press;
     private final Guard guard;
+    private final ChamberAnswers answers;
 
     Routes(RoutesConfig routes, Workbench bench, Press press, Guard guard) {
         this.routes = routes;
         this.bench = bench;
         this.press = press;
         this.guard = guard;
+        this.answers = new ChamberAnswers(press.words());
     }
 
     void add() {
@@ -79,11 +84,9 @@ final class Routes {
 
     private void forecast() {
         AllChambersPage chambers = new AllChambersPage(bench, press);
-        ForecastRoutes forecast = new ForecastRoutes(bench, press.words());
+        ForecastRoutes forecast = new ForecastRoutes(bench);
         routes.get("/", call(chambers::home));
         routes.get("/plan/{plan}", call(chambers::show));
-        routes.get("/plan/{plan}/progress", call(forecast::progress));
-        routes.get("/plan/{plan}/air/{chamber}", call(forecast::air));
         routes.post("/plan/{plan}/forecast/cancel", call(forecast::cancel));
         routes.post("/plan/{plan}/forecast/again", call(forecast::again));
     }
@@ -92,9 +95,7 @@ final class Routes {
         DoorPage door = new DoorPage(bench, press);
         AllChambersPage chambers = new AllChambersPage(bench, press);
         routes.get("/door", call(http -> chambers.home(http, Room.DOOR)));
-        routes.get("/crops-like", call(door::suggest));
         routes.get("/plan/{plan}/door", call(door::show));
-        routes.get("/plan/{plan}/door/progress", call(door::progress));
         routes.post("/plan/{plan}/door/put", call(door::put));
     }
 
@@ -105,7 +106,6 @@ final class Routes {
         String path = "/plan/{plan}/placing";
         routes.get("/placing", call(http -> chambers.home(http, Room.PLACING)));
         routes.get(path, call(placing::show));
-        routes.get(path + "/progress", call(placing::progress));
         routes.post(path + "/cancel", call(placing::cancel));
         routes.post(path + "/again", call(placing::again));
         routes.post(path + "/take-over", call(placing::takeOver));
@@ -113,14 +113,11 @@ final class Routes {
     }
 
     private void chamber() {
-        ChamberPage chamber = new ChamberPage(bench, press);
+        ChamberPage chamber = new ChamberPage(bench, press, answers);
         String path = "/plan/{plan}/chamber/{chamber}";
         routes.get("/chambers/{chamber}", call(chamber::ofLastPlan));
         routes.get(path, call(chamber::show));
-        routes.get(path + "/curve/{curve}", call(chamber::curve));
-        routes.get(path + "/lot/{lot}", call(chamber::lot));
         routes.get(path + "/what-if", call(chamber::whatIf));
-        routes.get(path + "/what-if/air", call(chamber::whatIfAir));
         routes.get(path + "/section", call(chamber::section));
         routes.get(path + "/section.svg", call(chamber::sectionPicture));
     }
@@ -145,14 +142,17 @@ final class Routes {
     }
 
     private void api() {
-        PlansApi plans = new PlansApi(bench);
-        routes.get("/api/plans", call(plans::list));
+        Api api = new Api(bench, press.words(), guard, answers);
+        api.addTo(routes);
     }
 
     private void troubles() {
         Troubles troubles = new Troubles(press, System.err);
         routes.exception(Refusal.class, troubles::refused);
         routes.exception(BadInput.class, troubles::badInput);
+        routes.exception(RunStopped.class, troubles::stopped);
+        routes.exception(
+                Unreadable.class, (body, http) -> troubles.faulty(http, 400, body.faults()));
         routes.exception(HttpResponseException.class, troubles::http);
         routes.exception(Exception.class, troubles::own);
     }

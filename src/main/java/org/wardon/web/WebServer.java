@@ -5,11 +5,13 @@ import io.javalin.compression.CompressionStrategy;
 import io.javalin.config.JavalinConfig;
 import io.javalin.config.SizeUnit;
 import java.nio.file.Path;
+import java.util.Optional;
 import java.util.concurrent.atomic.AtomicInteger;
 import org.eclipse.jetty.server.HttpConfiguration;
 import org.eclipse.jetty.util.thread.QueuedThreadPool;
 import org.wardon.errors.BadInput;
 import org.wardon.logbook.KeptPlan;
+import org.wardon.web.guard.ApiSecret;
 import org.wardon.web.guard.Guard;
 import org.wardon.web.guard.Uploads;
 import org.wardon.web.pages.PageWords;
@@ -27,11 +29,15 @@ public final class WebServer implements AutoCloseable {
     private final Workbench bench;
     private final Javalin javalin;
     private final AtomicInteger port = new AtomicInteger();
+    private final ApiSecret secret;
 
     private WebServer(WebOptions options) {
         this.options = options;
         bench = new Workbench(options.home(), options.clock());
-        Guard guard = new Guard(options.address(), port::get, options.passcode(), options.clock());
+        secret = new ApiSecret(options.home());
+        Guard guard =
+                new Guard(
+                        options.address(), port::get, options.passcode(), secret, options.clock());
         Press press = new Press(guard.asksPasscode());
         javalin =
                 Javalin.create(
@@ -73,6 +79,7 @@ public final class WebServer implements AutoCloseable {
         try {
             server.javalin.start(options.address(), options.port());
             server.port.set(server.javalin.port());
+            server.secret.settle();
             return server;
         } catch (RuntimeException e) {
             server.close();
@@ -115,6 +122,15 @@ public final class WebServer implements AutoCloseable {
         boolean everywhere = host.equals("0.0.0.0") || host.equals("::");
         String shown = everywhere ? "127.0.0.1" : host.contains(":") ? "[" + host + "]" : host;
         return "http://" + shown + ":" + port.get();
+    }
+
+    /**
+     * Returns where programs find what they have to carry.
+     *
+     * @return the file; absent where none could be kept
+     */
+    public Optional<Path> secretFile() {
+        return secret.file();
     }
 
     @Override

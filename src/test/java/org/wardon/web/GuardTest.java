@@ -133,7 +133,7 @@ class GuardTest {
         refused(http.post(me, "/plans/demo", "token=wrong"), 403, happened);
         refused(http.post(me, "/plans/demo", "token=" + other.token()), 403, happened);
         refused(http.post(me, "/plans/demo?token=wrong", "a=b"), 403, happened);
-        assertEquals("{\"plans\":[]}", http.get("/api/plans").body());
+        assertEquals("{\n  \"plans\" : [ ]\n}\n", http.get("/api/plans").body());
         Answer byHeader = http.post(me, "/plans/demo", "a=b", "X-Wardon-Token: " + me.token());
         assertEquals(303, byHeader.status());
     }
@@ -253,7 +253,7 @@ class GuardTest {
         assertTrue(kind.body().contains("the file is of another kind; accepted: .json"));
         assertEquals(303, upload(me, "../../etc/x<b>.json", "{}").status());
         String plans = http.get("/api/plans").body();
-        assertTrue(plans.contains("\"name\":\"x_b_\""), plans);
+        assertTrue(plans.contains("\"name\" : \"x_b_\""), plans);
         Answer tooMuch =
                 http.exactly(
                         "POST /plans/bring HTTP/1.1\r\nHost: "
@@ -277,7 +277,7 @@ class GuardTest {
                 http.post(me, "/plan/1/delete", "token=" + me.token()),
                 400,
                 "The form does not say from which version it started");
-        assertTrue(http.get("/api/plans").body().contains("\"version\":1"));
+        assertTrue(http.get("/api/plans").body().contains("\"version\" : 1"));
     }
 
     @Test

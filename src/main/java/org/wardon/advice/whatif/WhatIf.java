@@ -84,6 +84,15 @@ public final class WhatIf {
     }
 
     /**
+     * Returns what the chamber is set to as planned.
+     *
+     * @return the setting, °C
+     */
+    public double settingC() {
+        return chamber.setting().temperatureC();
+    }
+
+    /**
      * Returns the chamber hour by hour as it stands, to be compared with.
      *
      * @return the columns of an answer

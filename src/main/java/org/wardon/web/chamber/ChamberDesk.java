@@ -50,6 +50,11 @@ final class ChamberDesk {
         return trial(asked(open, chamber, units), plan).unchanged();
     }
 
+    /** What the chamber is set to as planned, °C. */
+    double settingC(OpenPlan open, StorePlan plan, String chamber) {
+        return trial(asked(open, chamber, Units.METRIC), plan).settingC();
+    }
+
     private WhatIf trial(Asked asked, StorePlan plan) {
         return trials.of(
                 asked,

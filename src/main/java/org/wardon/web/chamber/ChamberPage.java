@@ -1,11 +1,9 @@
 package org.wardon.web.chamber;
 
-import java.net.URLEncoder;
-import java.nio.charset.StandardCharsets;
 import java.util.LinkedHashMap;
-import java.util.List;
 import java.util.Map;
 import java.util.Optional;
+import java.util.OptionalDouble;
 import java.util.stream.Collectors;
 import org.wardon.advice.forecast.StoreAdvice;
 import org.wardon.advice.picture.SectionPicture;
@@ -21,7 +19,6 @@ import org.wardon.web.guard.Refusal;
 import org.wardon.web.pages.AdviceViews;
 import org.wardon.web.pages.AllChambersPage;
 import org.wardon.web.pages.Call;
-import org.wardon.web.pages.ChartData;
 import org.wardon.web.pages.ForecastRoutes;
 import org.wardon.web.pages.Frame;
 import org.wardon.web.pages.Press;
@@ -36,22 +33,22 @@ import org.wardon.web.work.Workbench;
  */
 public final class ChamberPage {
     private static final long PATIENCE_MS = 250;
-    private static final List<String> FIELDS =
-            List.of("setting", "insulation", "door", "cooling", "load");
 
     private final Workbench bench;
     private final Press press;
-    private final ChamberDesk desk = new ChamberDesk();
+    private final ChamberDesk desk;
 
     /**
      * Makes the page.
      *
      * @param bench what it works with
      * @param press what prints it
+     * @param answers what remembers answers, for pages and programs alike
      */
-    public ChamberPage(Workbench bench, Press press) {
+    public ChamberPage(Workbench bench, Press press, ChamberAnswers answers) {
         this.bench = bench;
         this.press = press;
+        this.desk = answers.desk();
     }
 
     /** A request about a chamber whose forecast is there. */
@@ -62,6 +59,11 @@ public final class ChamberPage {
 
         String path() {
             return ChamberPage.path(open, chamber);
+        }
+
+        /** Where scripts ask for the data of its charts. */
+        String dataPath() {
+            return "/api/plans/" + open.kept().id() + "/chambers/" + chamber;
         }
 
         /** The hour before or after by its button, else the hour typed. */
@@ -160,11 +162,11 @@ public final class ChamberPage {
                         .chamber(forecast),
                 form.slides(),
                 form.asked() ? Optional.of(answer(asked, frame, changes)) : Optional.empty(),
-                views.charts(asked.path()),
+                views.charts(asked.dataPath()),
                 views.limits(),
                 views.heat(desk.heat(asked.open(), asked.advice(), asked.chamber())),
                 views.face(asked.query("face"), asked.hour()),
-                views.lots(asked.path()),
+                views.lots(asked.dataPath()),
                 asked.advice().view(asked.chamber()).isStill()
                         ? Optional.of(asked.path() + "/section")
                         : Optional.empty());
@@ -193,7 +195,8 @@ public final class ChamberPage {
         }
         try {
             return views.view(
-                    worked(asked, changes.get()), asked.path() + "/what-if/air" + again(asked));
+                    worked(asked, changes.get()),
+                    asked.dataPath() + "/what-if" + again(changes.get()));
         } catch (BadInput bad) {
             return views.told(
                     bad.faults().stream().map(f -> f.sentence()).collect(Collectors.joining(" ")));
@@ -207,19 +210,24 @@ public final class ChamberPage {
                 asked.open(), asked.advice().plan(), asked.chamber(), changes, asked.units());
     }
 
-    /** The same question as part of an address. */
-    private static String again(Asked asked) {
-        Map<String, String> given = new LinkedHashMap<>();
-        FIELDS.forEach(name -> given.put(name, asked.query(name)));
+    /** The same question as programs ask it. */
+    private static String again(Changes changes) {
+        Map<String, OptionalDouble> given = new LinkedHashMap<>();
+        given.put("settingC", changes.settingC());
+        given.put("insulationFactor", thickness(changes));
+        given.put("openingsPerDay", changes.door().openingsPerDay());
+        given.put("coolingFactor", changes.coolingFactor());
+        given.put("loadFactor", changes.loadFactor());
         return given.entrySet().stream()
-                .filter(field -> !field.getValue().isBlank())
-                .map(
-                        field ->
-                                field.getKey()
-                                        + "="
-                                        + URLEncoder.encode(
-                                                field.getValue(), StandardCharsets.UTF_8))
+                .filter(one -> one.getValue().isPresent())
+                .map(one -> one.getKey() + "=" + one.getValue().getAsDouble())
                 .collect(Collectors.joining("&", "?", ""));
+    }
+
+    private static OptionalDouble thickness(Changes changes) {
+        return changes.insulation().stream()
+                .mapToDouble(Changes.Insulation::thicknessFactor)
+                .findFirst();
     }
 
     /**
@@ -231,54 +239,6 @@ public final class ChamberPage {
         Asked asked = asked(call);
         Frame frame = frame(call, asked.open(), asked.chamber());
         press.print(call, "part/whatIf", frame, answer(asked, frame, form(asked).changes()));
-    }
-
-    /**
-     * Tells the air of a chamber with something changed, the plan's behind it.
-     *
-     * @param call the request
-     */
-    public void whatIfAir(Call call) {
-        Asked asked = asked(call);
-        Changes changes =
-                form(asked).changes().orElseThrow(() -> new Refusal(422, "not-understood"));
-        double planned = asked.advice().settingC(asked.chamber());
-        call.http()
-                .json(
-                        views(asked)
-                                .curves()
-                                .compared(
-                                        worked(asked, changes).series(),
-                                        desk.unchanged(
-                                                asked.open(),
-                                                asked.advice().plan(),
-                                                asked.chamber(),
-                                                asked.units()),
-                                        changes.settingC().orElse(planned)));
-    }
-
-    /**
-     * Tells a chart of the chamber.
-     *
-     * @param call the request
-     */
-    public void curve(Call call) {
-        Asked asked = asked(call);
-        give(call, views(asked).data(call.http().pathParam("curve")));
-    }
-
-    /**
-     * Tells core and surface of a lot.
-     *
-     * @param call the request
-     */
-    public void lot(Call call) {
-        Asked asked = asked(call);
-        give(call, views(asked).lot(call.http().pathParam("lot")));
-    }
-
-    private static void give(Call call, Optional<ChartData> data) {
-        call.http().json(data.orElseThrow(() -> new Refusal(404, "nothing-here")));
     }
 
     /**

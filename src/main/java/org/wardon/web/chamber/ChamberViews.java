@@ -57,7 +57,8 @@ final class ChamberViews {
                             String title = say.say("curve.title-" + curve.key());
                             return new ChartView(
                                     title,
-                                    path + "/curve/" + curve.key(),
+                                    path + "/curves/" + curve.key(),
+                                    "",
                                     curves.byDay(curve, air, say.say("curve.by-day", title)));
                         })
                 .toList();
@@ -94,7 +95,7 @@ final class ChamberViews {
                         .orElse(0);
         for (CarbonDioxideLimits.Limit limit : CarbonDioxideLimits.ALL) {
             if (levels.isEmpty() || most > PPM_SHOWN * limit.ppm()) {
-                levels.add(new ChartData.Level(limited(limit), limit.ppm()));
+                levels.add(new ChartData.Level(limit.id(), limited(limit), limit.ppm()));
             }
         }
     }
@@ -121,7 +122,8 @@ final class ChamberViews {
                         lot ->
                                 new ChartView(
                                         say.say("curve.lot", lot.of()),
-                                        path + "/lot/" + lot.of(),
+                                        path + "/lots/" + lot.of() + "/curve",
+                                        "",
                                         curves.byDay(
                                                 Curves.OF_LOT,
                                                 lot,

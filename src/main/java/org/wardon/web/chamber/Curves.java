@@ -1,7 +1,7 @@
 package org.wardon.web.chamber;
 
 import java.time.LocalDate;
-import java.time.ZoneOffset;
+import java.time.LocalDateTime;
 import java.util.ArrayList;
 import java.util.Collections;
 import java.util.LinkedHashMap;
@@ -95,51 +95,59 @@ final class Curves {
                             values ->
                                     lines.add(
                                             new ChartData.Line(
+                                                    line.column(),
                                                     name(line),
                                                     line.tone(),
-                                                    shown(values, curve.unit()))));
+                                                    rounded(values))));
         }
-        return new ChartData(unit(curve.unit()), times(series), lines, levels);
+        return new ChartData(siUnit(curve.unit()), times(series), lines, levels);
     }
 
     /** Air with a change over the air as planned. */
     ChartData compared(HourlySeries now, HourlySeries before, double settingC) {
         return new ChartData(
-                unit("C"),
+                siUnit("C"),
                 times(now),
                 List.of(
                         new ChartData.Line(
+                                "airPlannedC",
                                 words.say("what.planned"),
                                 "second",
-                                shown(before.column("airC").orElse(List.of()), "C")),
+                                rounded(before.column("airC").orElse(List.of()))),
                         new ChartData.Line(
+                                "airC",
                                 words.say("what.changed"),
                                 "main",
-                                shown(now.column("airC").orElse(List.of()), "C"))),
+                                rounded(now.column("airC").orElse(List.of())))),
                 List.of(level("curve.setting", settingC)));
     }
 
     /** A level of temperature. */
     ChartData.Level level(String key, double temperatureC) {
-        return new ChartData.Level(words.say(key), figures.shownTemperature(temperatureC));
+        return new ChartData.Level(
+                key.substring(key.indexOf('.') + 1), words.say(key), temperatureC);
     }
 
-    private List<Long> times(HourlySeries series) {
-        return series.timeS().stream()
-                .map(s -> plan.timeline().localAt(s).toEpochSecond(ZoneOffset.UTC))
-                .toList();
+    private List<LocalDateTime> times(HourlySeries series) {
+        return series.timeS().stream().map(s -> plan.timeline().localAt(s)).toList();
     }
 
-    private List<@Nullable Double> shown(List<Double> values, String unit) {
-        List<@Nullable Double> shown = new ArrayList<>();
+    /** Four decimals, as far as they count; nothing where there is no number. */
+    static List<@Nullable Double> rounded(List<Double> values) {
+        List<@Nullable Double> rounded = new ArrayList<>();
         for (double value : values) {
-            shown.add(Double.isFinite(value) ? (Double) rounded(shown(value, unit)) : null);
+            rounded.add(Double.isFinite(value) ? (Double) (Math.round(1e4 * value) / 1e4) : null);
         }
-        return Collections.unmodifiableList(shown);
+        return Collections.unmodifiableList(rounded);
     }
 
-    private static double rounded(double value) {
-        return Math.round(1e4 * value) / 1e4;
+    private static String siUnit(String unit) {
+        return switch (unit) {
+            case "C" -> "°C";
+            case "kW" -> "W";
+            case "pct" -> "%";
+            default -> unit;
+        };
     }
 
     private double shown(double value, String unit) {

@@ -51,40 +51,8 @@ public final class DoorPage {
         this.press = press;
     }
 
-    /**
-     * A crop that may be meant, for a script.
-     *
-     * @param id its id
-     * @param name its name
-     * @param by the name that was met; blank where it is its own
-     */
-    public record Suggested(String id, String name, String by) {}
-
-    /**
-     * How far the store is worked out, for a script.
-     *
-     * @param state {@code running} or {@code over}
-     * @param stage what is being done, in words
-     * @param percent done of all
-     */
-    public record Far(String state, String stage, int percent) {}
-
-    /**
-     * Suggests crops for what has been typed so far.
-     *
-     * @param call the request
-     */
-    public void suggest(Call call) {
-        String asked = Optional.ofNullable(call.http().queryParam("q")).orElse("").strip();
-        List<Suggested> found =
-                asked.isEmpty()
-                        ? List.of()
-                        : hits(bench.book(), asked).stream()
-                                .map(DoorPage::suggested)
-                                .limit(MOST_SUGGESTED)
-                                .toList();
-        call.http().json(found);
-    }
+    /** A crop that may be meant; blank where it was met by its own name. */
+    private record Suggested(String id, String name, String by) {}
 
     private static List<CropSearch.Hit> hits(ReferenceBook book, String asked) {
         return new CropSearch(book).find(asked);
@@ -94,31 +62,6 @@ public final class DoorPage {
         String name = hit.commodity().names().get(0);
         return new Suggested(
                 hit.commodity().id(), name, name.equalsIgnoreCase(hit.by()) ? "" : hit.by());
-    }
-
-    /**
-     * Tells whether the store is worked out.
-     *
-     * @param call the request
-     */
-    public void progress(Call call) {
-        OpenPlan open = AllChambersPage.opened(bench, call);
-        boolean ready = isReady(call, open);
-        call.http()
-                .json(
-                        ready
-                                ? new Far("over", "", 100)
-                                : new Far("running", press.words().say("door.prepares"), 0));
-    }
-
-    /** A store that cannot be worked out is ready too: the page tells what happened. */
-    private boolean isReady(Call call, OpenPlan open) {
-        try {
-            return !(open.reading() instanceof Reading.Good good)
-                    || bench.door(open, good, call.preferences().units(), 0).isPresent();
-        } catch (RunStopped e) {
-            return true;
-        }
     }
 
     /**

@@ -24,14 +24,32 @@ public final class Guard {
     /** Below it lies what never changes and tells nothing. */
     public static final String STATIC = "/static/";
 
+    /** Below it programs ask. */
+    public static final String API = "/api/";
+
+    /** Where a program gives the passcode. */
+    public static final String API_ENTRANCE = API + "enter";
+
+    private static final String BEARER = "Bearer ";
+
     private static final String SESSION = "wardon.session";
     private static final Set<HandlerType> METHODS =
             Set.of(HandlerType.GET, HandlerType.HEAD, HandlerType.POST);
+    private static final Set<HandlerType> READING = Set.of(HandlerType.GET, HandlerType.HEAD);
+    private static final Set<HandlerType> METHODS_OF_API =
+            Set.of(
+                    HandlerType.GET,
+                    HandlerType.HEAD,
+                    HandlerType.POST,
+                    HandlerType.PUT,
+                    HandlerType.DELETE);
 
     private final Sessions sessions;
+    private final Sessions programs;
     private final Hosts hosts;
     private final Optional<Passcode> passcode;
     private final IntSupplier port;
+    private final ApiSecret secret;
 
     /**
      * Sets up the guard.
@@ -39,10 +57,18 @@ public final class Guard {
      * @param address the address listened on
      * @param port the port listened on, asked when a request comes
      * @param passcode what must be known; absent where the machine's own people are trusted
+     * @param secret what programs carry
      * @param clock tells how long a session has been silent
      */
-    public Guard(String address, IntSupplier port, Optional<Passcode> passcode, Clock clock) {
+    public Guard(
+            String address,
+            IntSupplier port,
+            Optional<Passcode> passcode,
+            ApiSecret secret,
+            Clock clock) {
         this.sessions = new Sessions(clock);
+        this.programs = new Sessions(clock);
+        this.secret = secret;
         this.hosts = new Hosts(address, port);
         this.passcode = passcode;
         this.port = port;
@@ -60,22 +86,64 @@ public final class Guard {
         if (!hosts.known(host)) {
             throw new Refusal(421, "host");
         }
-        if (!METHODS.contains(http.method())) {
+        boolean api = http.path().startsWith(API);
+        if (!(api ? METHODS_OF_API : METHODS).contains(http.method())) {
             throw new Refusal(405, "method");
         }
         checkOrigin(http, host);
-        if (http.path().startsWith(STATIC)) {
+        if (http.path().startsWith(STATIC) || (api && isProgram(http))) {
             return;
         }
         Session session = session(http);
         http.attribute(SESSION, session);
         boolean entrance = http.path().equals(ENTRANCE);
+        if (!session.admitted() && api) {
+            throw new Refusal(401, "bearer-needed");
+        }
         if (!session.admitted() && !entrance) {
             throw new Refusal(401, "passcode");
         }
-        if (HandlerType.POST.equals(http.method()) && !Secret.same(session.token(), token(http))) {
+        if (changes(http) && !Secret.same(session.token(), token(http))) {
             throw new Refusal(403, "token");
         }
+    }
+
+    private static boolean changes(Context http) {
+        return !READING.contains(http.method());
+    }
+
+    /**
+     * A request that says who it is by a header is judged by that alone: no foreign page can send
+     * one, so it needs no token. One that asks for the entrance need not say who it is.
+     */
+    private boolean isProgram(Context http) {
+        @Nullable String given = http.header("Authorization");
+        if (given == null) {
+            return http.path().equals(API_ENTRANCE) && changes(http);
+        }
+        String bearer =
+                given.regionMatches(true, 0, BEARER, 0, BEARER.length())
+                        ? given.substring(BEARER.length()).strip()
+                        : "";
+        if (!secret.is(bearer) && programs.find(bearer).isEmpty()) {
+            throw new Refusal(401, "bearer");
+        }
+        return true;
+    }
+
+    /**
+     * Lets a program in that knows the passcode.
+     *
+     * @param http the request
+     * @param given the passcode given
+     * @return what it is to carry from now on, absent where the passcode is wrong
+     * @throws Refusal after too many wrong tries, or where none is asked for
+     */
+    public Optional<String> enterProgram(Context http, String given) {
+        Passcode code = passcode.orElseThrow(() -> new Refusal(409, "no-passcode"));
+        return code.opens(given, http.ip())
+                ? Optional.of(programs.start(true).id())
+                : Optional.empty();
     }
 
     /** Foreign pages may lead here by a link, and nothing more. */
@@ -101,7 +169,10 @@ public final class Guard {
         if (known.isPresent()) {
             return known.get();
         }
-        if (HandlerType.POST.equals(http.method())) {
+        if (changes(http) && http.path().startsWith(API)) {
+            throw new Refusal(401, "bearer-needed");
+        }
+        if (changes(http)) {
             throw new Refusal(403, "too-old");
         }
         return started(http, passcode.isEmpty());

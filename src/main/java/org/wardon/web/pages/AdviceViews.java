@@ -248,7 +248,8 @@ public final class AdviceViews {
     private ChartView chart(String chamber) {
         return new ChartView(
                 say.say("chart.title", chamber),
-                "/plan/" + open.kept().id() + "/air/" + chamber,
+                "/api/plans/" + open.kept().id() + "/chambers/" + chamber + "/curves/air",
+                "airC outdoorC setting",
                 new AirTable(advice.air(chamber), figures, say).byDay(chamber));
     }
 }

@@ -1,7 +1,6 @@
 package org.wardon.web.pages;
 
 import java.time.LocalDate;
-import java.time.ZoneOffset;
 import java.util.ArrayList;
 import java.util.List;
 import java.util.Map;
@@ -50,27 +49,5 @@ final class AirTable {
                 figures.figure(
                         hours.stream().mapToDouble(air::humidityPct).average().orElseThrow(),
                         "pct"));
-    }
-
-    ChartData byHour() {
-        List<Long> time = new ArrayList<>();
-        List<Double> inside = new ArrayList<>();
-        List<Double> outdoors = new ArrayList<>();
-        for (int i = 0; i < air.size(); i++) {
-            time.add(air.at(i).toEpochSecond(ZoneOffset.UTC));
-            inside.add(shown(air.airC(i)));
-            outdoors.add(shown(air.outdoorC(i)));
-        }
-        return new ChartData(
-                figures.temperatureUnit(),
-                time,
-                List.of(
-                        new ChartData.Line(words.say("chart.air"), "main", inside),
-                        new ChartData.Line(words.say("chart.outdoors"), "second", outdoors)),
-                List.of(new ChartData.Level(words.say("chart.setting"), shown(air.settingC()))));
-    }
-
-    private double shown(double temperatureC) {
-        return Math.round(100 * figures.shownTemperature(temperatureC)) / 100.0;
     }
 }

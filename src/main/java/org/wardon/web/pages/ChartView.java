@@ -5,6 +5,7 @@ package org.wardon.web.pages;
  *
  * @param title what it shows
  * @param source path of its data, see {@link ChartData}
+ * @param lines which of its lines are drawn, blank between; all where none is named
  * @param table the same in numbers, perhaps by day
  */
-public record ChartView(String title, String source, TableView table) {}
+public record ChartView(String title, String source, String lines, TableView table) {}

@@ -1,34 +1,21 @@
 package org.wardon.web.pages;
 
-import org.wardon.web.guard.Refusal;
 import org.wardon.web.work.OpenPlan;
 import org.wardon.web.work.Stand;
 import org.wardon.web.work.Workbench;
 
-/** How far a forecast is, stopping it, beginning it again, and its air as data of a chart. */
+/** How far a forecast is, stopping it, beginning it again. */
 public final class ForecastRoutes {
     private final Workbench bench;
-    private final PageWords words;
 
     /**
      * Makes the routes.
      *
      * @param bench what they work with
-     * @param words words of the pages
      */
-    public ForecastRoutes(Workbench bench, PageWords words) {
+    public ForecastRoutes(Workbench bench) {
         this.bench = bench;
-        this.words = words;
     }
-
-    /**
-     * How far a forecast is, for a script.
-     *
-     * @param state {@code running} or {@code over}
-     * @param stage what is being done, in words
-     * @param percent done of all
-     */
-    public record Far(String state, String stage, int percent) {}
 
     /**
      * Returns how far a forecast is, for a page.
@@ -43,30 +30,12 @@ public final class ForecastRoutes {
         return new ProgressView(
                 words.say("stage." + running.stage()),
                 percent(running),
-                plan + "/progress",
+                "/api/jobs/forecast-" + open.kept().id() + "-" + open.kept().version(),
                 plan + "/forecast/cancel");
     }
 
     private static int percent(Stand.Running running) {
         return (int) Math.round(100 * running.fraction());
-    }
-
-    /**
-     * Tells how far a forecast is.
-     *
-     * @param call the request
-     */
-    public void progress(Call call) {
-        OpenPlan open = AllChambersPage.opened(bench, call);
-        Stand stand = bench.stand(open).orElse(new Stand.Cancelled());
-        call.http()
-                .json(
-                        stand instanceof Stand.Running running
-                                ? new Far(
-                                        "running",
-                                        words.say("stage." + running.stage()),
-                                        percent(running))
-                                : new Far("over", "", 100));
     }
 
     /**
@@ -89,23 +58,5 @@ public final class ForecastRoutes {
         OpenPlan open = AllChambersPage.opened(bench, call);
         bench.again(open);
         call.goTo(open.kept());
-    }
-
-    /**
-     * Tells the air of a chamber hour by hour.
-     *
-     * @param call the request
-     */
-    public void air(Call call) {
-        OpenPlan open = AllChambersPage.opened(bench, call);
-        String chamber = call.http().pathParam("chamber");
-        Stand stand = bench.stand(open).orElse(new Stand.Cancelled());
-        if (!(stand instanceof Stand.Ready ready)) {
-            throw new Refusal(409, "no-forecast");
-        }
-        if (ready.advice().plan().chambers().stream().noneMatch(c -> c.id().equals(chamber))) {
-            throw new Refusal(404, "nothing-here");
-        }
-        call.http().json(new AirTable(ready.advice().air(chamber), call.figures(), words).byHour());
     }
 }

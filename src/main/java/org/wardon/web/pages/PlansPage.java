@@ -1,10 +1,6 @@
 package org.wardon.web.pages;
 
 import io.javalin.http.Context;
-import java.io.ByteArrayOutputStream;
-import java.io.IOException;
-import java.io.UncheckedIOException;
-import java.nio.charset.StandardCharsets;
 import java.time.Instant;
 import java.time.LocalDateTime;
 import java.time.ZoneId;
@@ -12,8 +8,6 @@ import java.util.HashMap;
 import java.util.List;
 import java.util.Map;
 import java.util.Optional;
-import java.util.zip.ZipEntry;
-import java.util.zip.ZipOutputStream;
 import org.wardon.errors.BadInput;
 import org.wardon.errors.Fault;
 import org.wardon.files.FolderPlan;
@@ -134,34 +128,11 @@ public final class PlansPage {
      */
     public void take(Call call) {
         OpenPlan open = AllChambersPage.opened(bench, call);
-        String name = "store-plan-" + open.kept().id();
-        PlanText text = open.text();
-        boolean alone = text.files().isEmpty();
+        PlanBundle bundle = PlanBundle.of(open);
         call.http()
-                .contentType(alone ? "application/json" : "application/zip")
-                .header(
-                        "Content-Disposition",
-                        "attachment; filename=\"" + name + (alone ? ".json" : ".zip") + "\"")
-                .result(alone ? text.text().getBytes(StandardCharsets.UTF_8) : zip(name, text));
-    }
-
-    private static byte[] zip(String name, PlanText text) {
-        ByteArrayOutputStream bytes = new ByteArrayOutputStream();
-        try (ZipOutputStream zip = new ZipOutputStream(bytes, StandardCharsets.UTF_8)) {
-            entry(zip, name + ".json", text.text());
-            for (Map.Entry<String, String> file : text.files().entrySet()) {
-                entry(zip, file.getKey(), file.getValue());
-            }
-        } catch (IOException e) {
-            throw new UncheckedIOException(e);
-        }
-        return bytes.toByteArray();
-    }
-
-    private static void entry(ZipOutputStream zip, String name, String text) throws IOException {
-        zip.putNextEntry(new ZipEntry(name));
-        zip.write(text.getBytes(StandardCharsets.UTF_8));
-        zip.closeEntry();
+                .contentType(bundle.mediaType())
+                .header("Content-Disposition", bundle.disposition())
+                .result(bundle.content());
     }
 
     /**

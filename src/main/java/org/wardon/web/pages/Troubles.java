@@ -4,15 +4,19 @@ import io.javalin.http.Context;
 import io.javalin.http.HttpResponseException;
 import java.io.PrintStream;
 import java.util.List;
+import java.util.Optional;
 import org.wardon.errors.BadInput;
 import org.wardon.errors.Fault;
+import org.wardon.errors.RunStopped;
+import org.wardon.files.forecast.AnswerWriter;
 import org.wardon.web.guard.Guard;
 import org.wardon.web.guard.Refusal;
 
-/** Every error as a page, or as JSON below {@code /api/}: what happened, what to do, no more. */
+/**
+ * Every error as a page, or as {@code application/problem+json} below {@code /api/}: what happened,
+ * what to do, no more.
+ */
 public final class Troubles {
-    private static final String API = "/api/";
-
     private final Press press;
     private final PrintStream log;
 
@@ -28,39 +32,60 @@ public final class Troubles {
     }
 
     /**
-     * An error as JSON.
-     *
-     * @param happened what happened
-     * @param mend what to do
-     * @param faults faults of what was given, if any
-     */
-    public record Told(String happened, String mend, List<Fault> faults) {
-        /** Copies the list. */
-        public Told {
-            faults = List.copyOf(faults);
-        }
-    }
-
-    /**
      * Answers a request that was refused.
      *
      * @param refusal why
      * @param http the request
      */
     public void refused(Refusal refusal, Context http) {
-        if (refusal.code().equals("passcode") && !http.path().startsWith(API)) {
+        if (refusal.code().equals("passcode")) {
             new Call(http).goTo(Guard.ENTRANCE);
             return;
         }
+        headers(refusal, http);
         String[] with = refusal.arguments().toArray(String[]::new);
         PageWords words = press.words();
+        String ofProgram = "api-mend." + refusal.code();
         answer(
                 http,
-                refusal.status(),
-                new TroubleView(
+                new Answer(
+                        refusal.status(),
+                        refusal.code(),
                         words.say("refusal." + refusal.code(), with),
-                        words.say("refusal." + refusal.code() + ".mend", with),
-                        List.of()));
+                        words.say(
+                                isApi(http) && words.has(ofProgram)
+                                        ? ofProgram
+                                        : "refusal." + refusal.code() + ".mend",
+                                with),
+                        List.of(),
+                        versions(refusal)));
+    }
+
+    private static void headers(Refusal refusal, Context http) {
+        switch (refusal.status()) {
+            case 401 -> http.header("WWW-Authenticate", "Bearer realm=\"wardon\"");
+            case 429 ->
+                    http.header(
+                            "Retry-After",
+                            String.valueOf(60 * Integer.parseInt(refusal.arguments().get(0))));
+            case 503 -> http.header("Retry-After", "2");
+            default -> {}
+        }
+    }
+
+    private static Optional<Problem.Versions> versions(Refusal refusal) {
+        List<String> with = refusal.arguments();
+        return refusal.code().equals("outdated")
+                ? Optional.of(
+                        new Problem.Versions(
+                                Integer.parseInt(with.get(0)),
+                                Integer.parseInt(with.get(1)),
+                                with.get(2)))
+                : Optional.empty();
+    }
+
+    private static boolean isApi(Context http) {
+        return http.path().startsWith(Guard.API);
     }
 
     /**
@@ -70,12 +95,37 @@ public final class Troubles {
      * @param http the request
      */
     public void badInput(BadInput bad, Context http) {
+        faulty(http, 422, bad.faults());
+    }
+
+    /**
+     * Answers input that is wrong or cannot even be read.
+     *
+     * @param http the request
+     * @param status HTTP status
+     * @param faults what is wrong
+     */
+    public void faulty(Context http, int status, List<Fault> faults) {
         PageWords words = press.words();
         answer(
                 http,
-                422,
-                new TroubleView(
-                        words.say("trouble.input"), words.say("trouble.input.mend"), bad.faults()));
+                new Answer(
+                        status,
+                        "input",
+                        words.say("trouble.input"),
+                        words.say("trouble.input.mend"),
+                        faults,
+                        Optional.empty()));
+    }
+
+    /**
+     * Answers where a run met a state that cannot be.
+     *
+     * @param stopped when, where and which term
+     * @param http the request
+     */
+    public void stopped(RunStopped stopped, Context http) {
+        refused(new Refusal(422, "stopped", String.valueOf(stopped.getMessage())), http);
     }
 
     /**
@@ -107,19 +157,44 @@ public final class Troubles {
         PageWords words = press.words();
         answer(
                 http,
-                500,
-                new TroubleView(
-                        words.say("trouble.own"), words.say("trouble.own.mend"), List.of()));
+                new Answer(
+                        500,
+                        "own",
+                        words.say("trouble.own"),
+                        words.say("trouble.own.mend"),
+                        List.of(),
+                        Optional.empty()));
     }
 
-    private void answer(Context http, int status, TroubleView view) {
-        http.status(status);
-        if (http.path().startsWith(API)) {
-            http.json(new Told(view.happened(), view.mend(), view.faults()));
+    /** What is answered, as a page or as a problem. */
+    private record Answer(
+            int status,
+            String code,
+            String happened,
+            String mend,
+            List<Fault> faults,
+            Optional<Problem.Versions> versions) {}
+
+    private void answer(Context http, Answer answer) {
+        http.status(answer.status());
+        if (isApi(http)) {
+            Problem problem =
+                    new Problem(
+                            "urn:wardon:trouble:" + answer.code(),
+                            answer.happened(),
+                            answer.status(),
+                            answer.mend(),
+                            answer.faults().stream().map(Problem.OneFault::of).toList(),
+                            answer.versions());
+            http.contentType(Problem.MEDIA_TYPE).result(AnswerWriter.json(problem));
         } else {
             Call call = new Call(http);
             Frame frame = press.frame(call, press.words().say("trouble.title"));
-            press.print(call, "trouble", frame, view);
+            press.print(
+                    call,
+                    "trouble",
+                    frame,
+                    new TroubleView(answer.happened(), answer.mend(), answer.faults()));
         }
     }
 }

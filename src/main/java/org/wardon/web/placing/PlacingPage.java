@@ -13,7 +13,6 @@ import org.wardon.plan.StorePlan;
 import org.wardon.web.guard.Refusal;
 import org.wardon.web.pages.AllChambersPage;
 import org.wardon.web.pages.Call;
-import org.wardon.web.pages.ForecastRoutes;
 import org.wardon.web.pages.Frame;
 import org.wardon.web.pages.Press;
 import org.wardon.web.pages.ProgressView;
@@ -81,25 +80,6 @@ public final class PlacingPage {
             throw new Refusal(400, "not-understood");
         }
         return new Asked(open, form);
-    }
-
-    /**
-     * Tells how far a placing is.
-     *
-     * @param call the request
-     */
-    public void progress(Call call) {
-        Asked asked = asked(call);
-        Stand stand =
-                bench.placings()
-                        .stand(asked.open, asked.form.asked())
-                        .orElse(new Stand.Cancelled());
-        call.http()
-                .json(
-                        stand instanceof Stand.Running running
-                                ? new ForecastRoutes.Far(
-                                        "running", stage(running), percent(running))
-                                : new ForecastRoutes.Far("over", "", 100));
     }
 
     private String stage(Stand.Running running) {
@@ -283,7 +263,7 @@ public final class PlacingPage {
             return new ProgressView(
                     stage(running),
                     percent(running),
-                    plan + "/progress?" + query(),
+                    "/api/jobs/" + bench.placings().id(open, form.orElseThrow().asked()),
                     plan + "/cancel?" + query());
         }
 

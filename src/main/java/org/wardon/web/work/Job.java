@@ -37,7 +37,9 @@ final class Job implements Runnable {
 
     /** Whether it ended with an answer. */
     boolean isAnswered() {
-        return stand instanceof Stand.Ready || stand instanceof Stand.Placed;
+        return stand instanceof Stand.Ready
+                || stand instanceof Stand.Placed
+                || stand instanceof Stand.Answered;
     }
 
     /** A run hears it at its next step of progress. */

@@ -3,6 +3,8 @@ package org.wardon.web.work;
 import java.util.List;
 import java.util.Map;
 import java.util.Optional;
+import java.util.concurrent.ConcurrentHashMap;
+import java.util.concurrent.atomic.AtomicLong;
 import org.wardon.advice.placing.PlaceAdvice;
 import org.wardon.advice.placing.PlaceReport;
 import org.wardon.advice.wording.Units;
@@ -21,7 +23,11 @@ public final class Placings implements AutoCloseable {
                     "placing", new double[] {0, 1},
                     "telling", new double[] {0, 1});
 
-    private final Jobs<Key> jobs = new Jobs<>("placing", REMEMBERED, key -> {});
+    private static final String ID = "placing-";
+
+    private final Map<Key, String> ids = new ConcurrentHashMap<>();
+    private final AtomicLong last = new AtomicLong();
+    private final Jobs<Key> jobs = new Jobs<>("placing", REMEMBERED, ids::remove);
 
     /** A plan in one version, one wish, judged with one book. */
     private record Key(long plan, int version, PlaceAsked asked, ReferenceBook book) {}
@@ -110,6 +116,58 @@ public final class Placings implements AutoCloseable {
                 .filter(Stand.Placed.class::isInstance)
                 .map(stand -> ((Stand.Placed) stand).report())
                 .reduce((first, last) -> last);
+    }
+
+    /**
+     * A placing by its id.
+     *
+     * @param plan number of its plan
+     * @param version the version it was sought for
+     * @param stand how far it is
+     */
+    public record Sought(long plan, int version, Stand stand) {}
+
+    /**
+     * Returns the id of a placing that was begun.
+     *
+     * @param open the plan
+     * @param asked what is sought
+     * @return its id in this run
+     */
+    public String id(OpenPlan open, PlaceAsked asked) {
+        return ids.computeIfAbsent(key(open, asked), any -> ID + last.incrementAndGet());
+    }
+
+    private Optional<Key> key(String id) {
+        return ids.entrySet().stream()
+                .filter(one -> one.getValue().equals(id))
+                .map(Map.Entry::getKey)
+                .findFirst();
+    }
+
+    /**
+     * Looks for a placing.
+     *
+     * @param id its id
+     * @return it, absent where it is not remembered
+     */
+    public Optional<Sought> sought(String id) {
+        return key(id).flatMap(
+                        key ->
+                                jobs.stand(key)
+                                        .map(
+                                                stand ->
+                                                        new Sought(
+                                                                key.plan(), key.version(), stand)));
+    }
+
+    /**
+     * Stops a placing.
+     *
+     * @param id its id
+     */
+    public void cancel(String id) {
+        key(id).ifPresent(jobs::cancel);
     }
 
     /**

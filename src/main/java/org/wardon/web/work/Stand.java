@@ -28,6 +28,16 @@ public sealed interface Stand {
     record Placed(PlaceReport report) implements Stand {}
 
     /**
+     * Another question is answered.
+     *
+     * @param answer its answer, as the command line writes it
+     */
+    record Answered(Record answer) implements Stand {}
+
+    /** A store is worked out as it stands, so that the door can be answered. */
+    record Door() implements Stand {}
+
+    /**
      * It could not be worked out.
      *
      * @param message what happened, for people

@@ -29,6 +29,7 @@ public final class Workbench implements AutoCloseable {
     private final Forecasts forecasts = new Forecasts();
     private final Placings placings = new Placings();
     private final Doors doors = new Doors();
+    private final Errands errands = new Errands();
     private final Map<Key, OpenPlan> read = new LinkedHashMap<>(16, 0.75f, true);
 
     /** A plan in one version, read with one book. */
@@ -212,8 +213,18 @@ public final class Workbench implements AutoCloseable {
         return doors.of(open, plan.plan(), units, patienceMs);
     }
 
+    /**
+     * Returns long questions other than forecasts.
+     *
+     * @return those asked in this run
+     */
+    public Errands errands() {
+        return errands;
+    }
+
     @Override
     public void close() {
+        errands.close();
         doors.close();
         placings.close();
         forecasts.close();

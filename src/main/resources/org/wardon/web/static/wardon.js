@@ -65,28 +65,42 @@ const figure = (value) => (comma ? String(value).replace('.', ',') : String(valu
 const told = (write) => (chart, value) => (value == null ? '' : write(value));
 const reading = told((value) => figure(Math.round(value * 100) / 100));
 
+// Data comes in °C and SI units; charts show what the person likes.
+const SHOWN = {
+  '°C': document.documentElement.dataset.fahrenheit === undefined ? ['°C', (v) => v] : ['°F', (v) => 1.8 * v + 32],
+  W: ['kW', (v) => v / 1000],
+};
+const secondsOf = (time) => Date.parse(time + 'Z') / 1000;
 const DASHES = { second: [10, 4], third: [3, 3], fourth: [8, 3, 2, 3] };
 
 async function draw(box) {
   if (box.dataset.drawn) return;
   box.dataset.drawn = 'yes';
-  const [UPlot, data] = await Promise.all([charts(), json(box.dataset.chart)]);
+  const [UPlot, given] = await Promise.all([charts(), json(box.dataset.chart)]);
+  const data = box.dataset.part ? given[box.dataset.part] : given;
+  const wanted = box.dataset.lines ? box.dataset.lines.split(' ') : null;
+  const drawn = (one) => !wanted || wanted.includes(one.id);
+  const [unit, shown] = SHOWN[data.unit] ?? [data.unit, (v) => v];
+  const value = (v) => (v === null ? null : shown(v));
+  const lined = data.lines.filter(drawn);
+  const levelled = data.levels.filter(drawn);
   const font = '13px ' + style('--serif');
   const axis = { stroke: style('--ink'), font, grid: { stroke: style('--rule'), width: 1 }, ticks: { stroke: style('--rule'), width: 1 } };
-  const levels = data.levels.map((level) => ({
+  const levels = levelled.map((level) => ({
     label: level.name, value: reading, stroke: style('--ink'), width: 1.5, dash: [7, 5], points: { show: false },
   }));
-  const lines = data.lines.map((line) => ({
+  const lines = lined.map((line) => ({
     label: line.name, value: reading, stroke: style(TONES[line.tone] ?? '--ink'), width: 2, dash: DASHES[line.tone], points: { show: false },
   }));
   const options = {
     width: box.clientWidth, height: 260, tzDate: (seconds) => UPlot.tzDate(new Date(seconds * 1000), 'Etc/UTC'),
     scales: { x: { time: true } },
-    axes: [{ ...axis, values: (chart, splits) => splits.map((at) => (at % 86400 ? hour(at) : day(at))) }, { ...axis, values: (chart, splits) => splits.map(figure), label: data.unit, labelFont: font, size: 56 }],
+    axes: [{ ...axis, values: (chart, splits) => splits.map((at) => (at % 86400 ? hour(at) : day(at))) }, { ...axis, values: (chart, splits) => splits.map(figure), label: unit, labelFont: font, size: 56 }],
     series: [{ label: box.dataset.title, value: told((at) => day(at) + ' ' + hour(at)) }, ...lines, ...levels],
     legend: { markers: { dash: (chart, i) => (i > 1 ? (i % 2 ? 'dotted' : 'dashed') : 'solid') } },
   };
-  const values = [data.time, ...data.lines.map((line) => line.values), ...data.levels.map((level) => data.time.map(() => level.value))];
+  const time = data.time.map(secondsOf);
+  const values = [time, ...lined.map((line) => line.values.map(value)), ...levelled.map((level) => time.map(() => value(level.value)))];
   const chart = new UPlot(options, values, box);
   new ResizeObserver(() => chart.setSize({ width: box.clientWidth, height: 260 })).observe(box);
 }
@@ -146,7 +160,10 @@ document.querySelectorAll('form[data-suggest]').forEach((form) => {
     clearTimeout(waiting);
     waiting = setTimeout(async () => {
       const mine = ++asked;
-      const crops = await json(form.dataset.suggest + '?q=' + encodeURIComponent(field.value));
+      const typed = field.value.trim();
+      const { crops } = typed
+        ? await json(form.dataset.suggest + '&like=' + encodeURIComponent(typed.slice(0, 80)))
+        : { crops: [] };
       if (mine !== asked) return;
       list.replaceChildren(...crops.map((crop) => {
         const item = document.createElement('li');
