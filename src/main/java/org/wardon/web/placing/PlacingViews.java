@@ -26,6 +26,9 @@ final class PlacingViews {
     /** Lots up to which each is shown on its tag on both sides, and on a ruler. */
     private static final int FEW_LOTS = 40;
 
+    /** Where the rest is told is another place here than on the command line. */
+    private static final String REST = "place-rest-by-advise";
+
     private final PlaceReport report;
     private final PlaceAnswer answer;
     private final OpenPlan open;
@@ -84,7 +87,11 @@ final class PlacingViews {
     }
 
     private PlacingView.Told note(Because because) {
-        return new PlacingView.Told(figures.text(because.text()), because.source());
+        String text =
+                because.code().equals(REST)
+                        ? say.say("placing.rest")
+                        : figures.text(because.text());
+        return new PlacingView.Told(text, because.source());
     }
 
     private List<PlacingView.Step> steps(SpreadViews spreads) {
@@ -173,9 +180,9 @@ final class PlacingViews {
         return new TableView(
                 say.say("placing.gain-table", figures.figure(report.asked().days(), "day")),
                 List.of(
-                        "",
-                        say.say("placing.now"),
-                        say.say("placing.then"),
+                        say.say("placing.head-gain"),
+                        say.say("placing.head-present"),
+                        say.say("placing.head-proposed"),
                         say.say("placing.difference")),
                 rows);
     }

@@ -75,7 +75,7 @@ final class RulerViews {
                 title,
                 figures.temperatureUnit(),
                 ticks(),
-                group.workableC().map(this::common),
+                group.workableC().filter(all -> group.members().size() > 1).map(this::common),
                 apart(group),
                 settingC.isPresent()
                         ? Optional.of(setting(settingC.getAsDouble()))
