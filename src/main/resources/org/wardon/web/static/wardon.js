@@ -97,6 +97,7 @@ async function draw(box) {
     scales: { x: { time: true } },
     axes: [{ ...axis, values: (chart, splits) => splits.map((at) => (at % 86400 ? hour(at) : day(at))) }, { ...axis, values: (chart, splits) => splits.map(figure), label: unit, labelFont: font, size: 56 }],
     series: [{ label: box.dataset.title, value: told((at) => day(at) + ' ' + hour(at)) }, ...lines, ...levels],
+    hooks: { ready: [(chart) => chart.setLegend({ idx: null }, false)] },
     legend: { markers: { dash: (chart, i) => (i > 1 ? (i % 2 ? 'dotted' : 'dashed') : 'solid') } },
   };
   const time = data.time.map(secondsOf);
