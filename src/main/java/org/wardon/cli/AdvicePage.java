@@ -14,7 +14,9 @@ import org.wardon.files.forecast.ChamberForecast;
 import org.wardon.files.forecast.Forecast;
 import org.wardon.files.forecast.LotForecast;
 import org.wardon.files.forecast.Quantiles;
+import org.wardon.plan.ChamberPlan;
 import org.wardon.plan.LotPlan;
+import org.wardon.plan.SettingChange;
 import org.wardon.plan.StorePlan;
 import org.wardon.produce.Reason;
 import org.wardon.produce.Reason.Argument;
@@ -160,12 +162,33 @@ final class AdvicePage {
     }
 
     private String sentence(ChamberForecast chamber) {
-        String set = units.temperature(advice.settingC(chamber.id()));
+        ChamberPlan planned = advice.plan().getChamber(chamber.id());
+        if (planned.off()) {
+            return chamber.holds()
+                    ? "is switched off."
+                    : "is switched off, and that harms: "
+                            + words.sentence(advice.whyNotHeld(chamber.id()).get(0))
+                            + ".";
+        }
+        String set = set(planned);
         if (chamber.holds()) {
             return "holds " + set + chamber.solar().map(this::though).orElse("") + ".";
         }
         String first = words.sentence(advice.whyNotHeld(chamber.id()).get(0));
         return "does not hold " + set + ": " + first + ".";
+    }
+
+    private String set(ChamberPlan chamber) {
+        StringBuilder all = new StringBuilder(units.temperature(advice.settingC(chamber.id())));
+        for (SettingChange change : chamber.use().changes()) {
+            all.append(", from ")
+                    .append(change.from().toLocalDate())
+                    .append(" at ")
+                    .append(change.from().toLocalTime())
+                    .append(' ')
+                    .append(units.temperature(change.temperatureC()));
+        }
+        return all.toString();
     }
 
     /** What else speaks against a chamber, beside its headline. */

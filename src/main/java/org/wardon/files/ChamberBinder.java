@@ -20,6 +20,7 @@ import org.wardon.plan.Corrections;
 import org.wardon.plan.Default;
 import org.wardon.plan.Defaults;
 import org.wardon.plan.EthyleneScrub;
+import org.wardon.plan.SettingChange;
 import org.wardon.plan.StartAir;
 
 /** Turns the chambers of a checked plan into records. */
@@ -67,7 +68,8 @@ final class ChamberBinder {
                         scrub(chamber.at("ethyleneScrub")),
                         starts(chamber.at("starts")),
                         corrections(chamber.at("corrections")),
-                        new ChamberUse(PlanBinder.accepts(chamber), Optional.empty()));
+                        new ChamberUse(
+                                PlanBinder.accepts(chamber), changes(chamber), Optional.empty()));
         return inputs.flag(chamber, "off") ? bound.switchedOff() : bound;
     }
 
@@ -158,6 +160,17 @@ final class ChamberBinder {
                                 setting, "stageK", one.stageK(), "K", Defaults.COMMON_PRACTICE)
                         : inputs.numberElse(setting, "stageK", one.stageK());
         return new Setting(one.temperatureC(), one.bandK(), one.humidityPct(), stageK);
+    }
+
+    private List<SettingChange> changes(Part chamber) {
+        return chamber.at("settingChanges").items().stream()
+                .map(
+                        change ->
+                                new SettingChange(
+                                        inputs.time(change, "from").orElseThrow(),
+                                        inputs.number(change, "temperatureC"),
+                                        inputs.maybe(change, "humidityPct")))
+                .toList();
     }
 
     private double capacityKg(Part chamber, Box box) {

@@ -27,6 +27,7 @@ final class ChamberRules {
     private final Faults faults;
     private final IdRules ids;
     private final PowerRules power;
+    private final SettingRules settings;
 
     ChamberRules(Part plan, Lookups lookups, Faults faults) {
         this.plan = plan;
@@ -34,6 +35,7 @@ final class ChamberRules {
         this.faults = faults;
         this.ids = new IdRules(faults);
         this.power = new PowerRules(plan, faults);
+        this.settings = new SettingRules(plan, faults);
     }
 
     void check() {
@@ -49,6 +51,7 @@ final class ChamberRules {
                 door(chamber);
             }
             power.check(chamber);
+            settings.check(chamber);
             chamber.at("cooling").items().forEach(this::cooler);
             units(chamber.at("cooling"));
             new WaterRules(faults).check(chamber);

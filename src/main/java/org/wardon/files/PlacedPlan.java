@@ -1,11 +1,16 @@
 package org.wardon.files;
 
+import static java.util.stream.Collectors.joining;
+
 import java.nio.file.Path;
+import java.util.List;
+import java.util.Locale;
 import java.util.Optional;
 import org.wardon.files.json.JsonEdit;
 import org.wardon.files.json.JsonPath;
 import org.wardon.plan.ChamberPlan;
 import org.wardon.plan.LotPlan;
+import org.wardon.plan.SettingChange;
 import org.wardon.plan.StorePlan;
 
 /**
@@ -56,10 +61,32 @@ public final class PlacedPlan {
             String value = Inputs.plain(is.setting().temperatureC());
             changed = changed.set(path("chambers", i, "setting", "temperatureC"), value);
         }
+        if (!was.use().changes().equals(is.use().changes())) {
+            changed = changes(changed, path("chambers", i, "settingChanges"), is);
+        }
         if (was.off() && !is.off()) {
             changed = changed.remove(path("chambers", i, "off"));
         }
         return !was.off() && is.off() ? changed.set(path("chambers", i, "off"), "true") : changed;
+    }
+
+    private static JsonEdit changes(JsonEdit edit, JsonPath path, ChamberPlan is) {
+        List<SettingChange> later = is.use().changes();
+        String each = later.stream().map(PlacedPlan::change).collect(joining(", ", "[", "]"));
+        return later.isEmpty() ? edit.remove(path) : edit.set(path, each);
+    }
+
+    private static String change(SettingChange change) {
+        String humidity =
+                change.humidityPct().isPresent()
+                        ? ", \"humidityPct\": " + Inputs.plain(change.humidityPct().getAsDouble())
+                        : "";
+        return String.format(
+                Locale.ROOT,
+                "{\"from\": %s, \"temperatureC\": %s%s}",
+                JsonEdit.quoted(change.from().toString()),
+                Inputs.plain(change.temperatureC()),
+                humidity);
     }
 
     private static JsonEdit lot(JsonEdit edit, int i, LotPlan was, LotPlan is) {

@@ -9,6 +9,7 @@ import org.wardon.air.Weather;
 import org.wardon.cooling.Cooler;
 import org.wardon.cooling.Outage;
 import org.wardon.cooling.Setting;
+import org.wardon.cooling.SettingCourse;
 import org.wardon.cooling.solar.SolarSupply;
 import org.wardon.enclosure.Enclosure;
 import org.wardon.enclosure.Surroundings;
@@ -23,7 +24,7 @@ import org.wardon.errors.Require;
  * @param weather outdoor weather from second 0
  * @param enclosure the chamber as built and used
  * @param coolers in the order they act; none for a passive chamber
- * @param setting what the keeper dials in
+ * @param settings what the keeper dials in, and when
  * @param outages spans without power, in order of time
  * @param stays the lots
  * @param factors what perturbs the run
@@ -40,7 +41,7 @@ public record ChamberRun(
         Weather weather,
         Enclosure enclosure,
         List<Cooler> coolers,
-        Setting setting,
+        SettingCourse settings,
         List<Outage> outages,
         List<Stay> stays,
         Factors factors,
@@ -158,7 +159,7 @@ public record ChamberRun(
                 weather,
                 enclosure,
                 List.of(),
-                setting,
+                SettingCourse.steady(setting),
                 List.of(),
                 List.of(),
                 Factors.PLAIN,
@@ -183,7 +184,7 @@ public record ChamberRun(
                 other,
                 enclosure,
                 coolers,
-                setting,
+                settings,
                 outages,
                 stays,
                 factors,
@@ -208,7 +209,7 @@ public record ChamberRun(
                 weather,
                 other,
                 coolers,
-                setting,
+                settings,
                 outages,
                 stays,
                 factors,
@@ -233,7 +234,7 @@ public record ChamberRun(
                 weather,
                 enclosure,
                 other,
-                setting,
+                settings,
                 outages,
                 stays,
                 factors,
@@ -245,12 +246,31 @@ public record ChamberRun(
     }
 
     /**
-     * Returns the run with another setting.
+     * Returns the run at one other setting throughout.
      *
      * @param other taken instead
      * @return the changed copy
      */
     public ChamberRun withSetting(Setting other) {
+        return withSettings(SettingCourse.steady(other));
+    }
+
+    /**
+     * Returns the setting it starts with.
+     *
+     * @return the first
+     */
+    public Setting setting() {
+        return settings.first();
+    }
+
+    /**
+     * Returns the run with other settings.
+     *
+     * @param other taken instead
+     * @return the changed copy
+     */
+    public ChamberRun withSettings(SettingCourse other) {
         return new ChamberRun(
                 chamberId,
                 site,
@@ -283,7 +303,7 @@ public record ChamberRun(
                 weather,
                 enclosure,
                 coolers,
-                setting,
+                settings,
                 other,
                 stays,
                 factors,
@@ -308,7 +328,7 @@ public record ChamberRun(
                 weather,
                 enclosure,
                 coolers,
-                setting,
+                settings,
                 outages,
                 other,
                 factors,
@@ -333,7 +353,7 @@ public record ChamberRun(
                 weather,
                 enclosure,
                 coolers,
-                setting,
+                settings,
                 outages,
                 stays,
                 other,
@@ -358,7 +378,7 @@ public record ChamberRun(
                 weather,
                 enclosure,
                 coolers,
-                setting,
+                settings,
                 outages,
                 stays,
                 factors,
@@ -383,7 +403,7 @@ public record ChamberRun(
                 weather,
                 enclosure,
                 coolers,
-                setting,
+                settings,
                 outages,
                 stays,
                 factors,
@@ -408,7 +428,7 @@ public record ChamberRun(
                 weather,
                 enclosure,
                 coolers,
-                setting,
+                settings,
                 outages,
                 stays,
                 factors,
@@ -427,7 +447,7 @@ public record ChamberRun(
      */
     public ChamberRun withControlMode(ControlMode other) {
         return new ChamberRun(
-                chamberId, site, timeline, weather, enclosure, coolers, setting, outages, stays,
+                chamberId, site, timeline, weather, enclosure, coolers, settings, outages, stays,
                 factors, start, durationS, doorMode, other, extras);
     }
 
@@ -445,7 +465,7 @@ public record ChamberRun(
                 weather,
                 enclosure,
                 coolers,
-                setting,
+                settings,
                 outages,
                 stays,
                 factors,

@@ -364,6 +364,10 @@ final class ChamberRunner implements Integrator.StepListener {
                 network.cooler(edge.index()).recharge(starts);
                 restart(edge);
             }
+            case SETTING_CHANGES -> {
+                network.set(run.settings().changes().get(edge.index()).to());
+                restart(edge);
+            }
             case DOOR_OPENS, DOOR_SHUTS -> door(edge);
             case ARRIVES -> arrive(edge, t);
             case LEAVES -> leave(edge, t);

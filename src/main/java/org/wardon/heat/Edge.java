@@ -5,7 +5,7 @@ package org.wardon.heat;
  *
  * @param atS when, s since the start of the run
  * @param kind what changes
- * @param index which lot, outage or cooler; 0 where there is but one
+ * @param index which lot, outage, cooler or setting; 0 where there is but one
  */
 record Edge(double atS, Kind kind, int index) {
     /** What changes. */
@@ -22,6 +22,7 @@ record Edge(double atS, Kind kind, int index) {
         WALL_POURED,
         RECHARGE_ENDS,
         RECHARGE_STARTS,
+        SETTING_CHANGES,
         DOOR_SHUTS,
         LEAVES,
         ARRIVES,

@@ -37,11 +37,11 @@ final class RunCompiler {
 
     /**
      * What the inside stands at in the mean, for the direction of films and the mass of air, °C:
-     * the setting, or outdoors where that is what it follows. Coolers that work with outdoor air
-     * bring the chamber below outdoors at most down to the setting.
+     * the setting in the mean, or outdoors where that is what it follows. Coolers that work with
+     * outdoor air bring the chamber below outdoors at most down to the setting.
      */
     private static double insideMeanC(ChamberRun run, double outdoorMeanC) {
-        double setC = run.setting().temperatureC();
+        double setC = run.settings().meanC(run.durationS());
         if (!startsOutdoors(run)) {
             return setC;
         }

@@ -9,6 +9,7 @@ import org.wardon.air.Timeline;
 import org.wardon.cooling.Defrost;
 import org.wardon.cooling.Outage;
 import org.wardon.cooling.Recharge;
+import org.wardon.cooling.SettingCourse;
 import org.wardon.cooling.WettedWall;
 import org.wardon.enclosure.Door;
 import org.wardon.enclosure.Gains;
@@ -35,6 +36,7 @@ final class Schedule {
             schedule.pourings(midnight);
             schedule.recharges(day, midnight);
         }
+        schedule.settings();
         schedule.outages();
         schedule.stays();
         schedule.defrosts();
@@ -136,6 +138,13 @@ final class Schedule {
             }
             add(midnight + from, Edge.Kind.RECHARGE_STARTS, i);
             add(midnight + to, Edge.Kind.RECHARGE_ENDS, i);
+        }
+    }
+
+    private void settings() {
+        List<SettingCourse.Change> changes = run.settings().changes();
+        for (int i = 0; i < changes.size(); i++) {
+            add(changes.get(i).atS(), Edge.Kind.SETTING_CHANGES, i);
         }
     }
 

@@ -5,6 +5,7 @@ import org.wardon.air.Timeline;
 import org.wardon.air.Weather;
 import org.wardon.air.YearWave;
 import org.wardon.cooling.FaceCooler;
+import org.wardon.cooling.SettingCourse;
 import org.wardon.enclosure.Surroundings;
 import org.wardon.errors.Progress;
 import org.wardon.heat.network.ChamberNetwork;
@@ -69,7 +70,7 @@ final class WarmUp {
                 run.enclosure(),
                 // Wetted walls are wet before the run too: they are what the weather makes of them.
                 run.coolers().stream().filter(FaceCooler.class::isInstance).toList(),
-                run.setting(),
+                SettingCourse.steady(run.setting()),
                 List.of(),
                 List.of(),
                 run.factors(),

@@ -1,9 +1,12 @@
 package org.wardon.plan;
 
+import java.util.ArrayList;
 import java.util.List;
 import java.util.Optional;
+import org.wardon.air.Timeline;
 import org.wardon.cooling.Cooler;
 import org.wardon.cooling.Setting;
+import org.wardon.cooling.SettingCourse;
 import org.wardon.enclosure.Enclosure;
 import org.wardon.errors.Require;
 
@@ -13,7 +16,7 @@ import org.wardon.errors.Require;
  * @param id its id, unique in the plan
  * @param enclosure as built and used
  * @param coolers in the order they act; none for a passive chamber
- * @param setting what the keeper dials in
+ * @param setting what the keeper dials in, to begin with
  * @param capacityKg most produce it takes, kg
  * @param outages single spans without power, in order, none overlapping
  * @param power hours without power every day, and what feeds it
@@ -22,7 +25,7 @@ import org.wardon.errors.Require;
  * @param ethyleneScrub a scrubber of ethylene, where there is one
  * @param starts the air it starts with, where the plan says
  * @param corrections what a fit found
- * @param use whether it is switched off, and which conflicts its keeper accepts
+ * @param use later settings, whether it is switched off, and which conflicts its keeper accepts
  */
 public record ChamberPlan(
         String id,
@@ -80,7 +83,7 @@ public record ChamberPlan(
     }
 
     /**
-     * Returns the temperature that is dialled in.
+     * Returns the temperature that is dialled in to begin with.
      *
      * @return °C
      */
@@ -89,13 +92,45 @@ public record ChamberPlan(
     }
 
     /**
-     * Returns the chamber at another setting.
+     * Returns the chamber at one other setting throughout.
      *
      * @param other taken instead
      * @return the changed copy
      */
     public ChamberPlan withSetting(Setting other) {
-        return with(other, coolers, humidifierKgH, heaterW, use);
+        return with(other, coolers, humidifierKgH, heaterW, use.changing(List.of()));
+    }
+
+    /**
+     * Returns the chamber with other later settings.
+     *
+     * @param changes in order of time, none for one setting throughout
+     * @return the changed copy
+     */
+    public ChamberPlan changing(List<SettingChange> changes) {
+        return with(setting, coolers, humidifierKgH, heaterW, use.changing(changes));
+    }
+
+    /**
+     * Returns what is dialled in over a run.
+     *
+     * @param timeline calendar of the run
+     * @return the course; changes at or before its start are taken to have been made already
+     */
+    public SettingCourse settings(Timeline timeline) {
+        Setting first = setting;
+        Setting last = setting;
+        List<SettingCourse.Change> later = new ArrayList<>();
+        for (SettingChange change : use.changes()) {
+            last = change.after(last);
+            double atS = timeline.secondsAt(change.from());
+            if (atS > 0) {
+                later.add(new SettingCourse.Change(atS, last));
+            } else {
+                first = last;
+            }
+        }
+        return new SettingCourse(first, later);
     }
 
     /**
@@ -108,7 +143,7 @@ public record ChamberPlan(
             return this;
         }
         ChamberUse.Installed there = new ChamberUse.Installed(coolers, humidifierKgH, heaterW);
-        return with(setting, List.of(), 0, 0, new ChamberUse(use.accepts(), Optional.of(there)));
+        return with(setting, List.of(), 0, 0, use.resting(Optional.of(there)));
     }
 
     /**
@@ -125,7 +160,7 @@ public record ChamberPlan(
                                         there.coolers(),
                                         there.humidifierKgH(),
                                         there.heaterW(),
-                                        new ChamberUse(use.accepts(), Optional.empty())))
+                                        use.resting(Optional.empty())))
                 .orElse(this);
     }
 

@@ -353,7 +353,7 @@ class OutdoorsInRunTest {
                         run.weather(),
                         run.enclosure(),
                         run.coolers(),
-                        run.setting(),
+                        run.settings(),
                         run.outages(),
                         run.stays(),
                         run.factors(),

@@ -277,7 +277,7 @@ final class Actions {
 
     /** Where the weather cannot give the setting, spreading the intake does not help. */
     private void addCold(ChamberPlan chamber, ChamberForecast figures) {
-        double setC = chamber.setting().temperatureC();
+        double setC = outcome.model().settings(chamber).meanC(outcome.horizonS());
         if (figures.airC().mean() > setC + chamber.setting().bandK()) {
             say(
                     6,

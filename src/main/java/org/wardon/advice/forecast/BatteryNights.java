@@ -43,16 +43,21 @@ final class BatteryNights {
 
     /** Local time at which a span begins, to the minute. */
     static LocalDateTime time(CourseEvent event, StoreOutcome outcome) {
-        return outcome.model()
-                .plan()
-                .timeline()
-                .localAt(event.fromS())
-                .truncatedTo(ChronoUnit.MINUTES);
+        return time(event.fromS(), outcome);
+    }
+
+    private static LocalDateTime time(double seconds, StoreOutcome outcome) {
+        return outcome.model().plan().timeline().localAt(seconds).truncatedTo(ChronoUnit.MINUTES);
     }
 
     /** The same in words. */
     static Argument at(CourseEvent event, StoreOutcome outcome) {
-        LocalDateTime at = time(event, outcome);
+        return at(event.fromS(), outcome);
+    }
+
+    /** A time of the run in words, to the minute. */
+    static Argument at(double seconds, StoreOutcome outcome) {
+        LocalDateTime at = time(seconds, outcome);
         return Argument.text(at.toLocalDate() + " at " + at.toLocalTime());
     }
 }

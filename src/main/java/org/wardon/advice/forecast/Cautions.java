@@ -3,6 +3,7 @@ package org.wardon.advice.forecast;
 import java.time.temporal.ChronoUnit;
 import java.util.ArrayList;
 import java.util.HashSet;
+import java.util.LinkedHashSet;
 import java.util.List;
 import java.util.Set;
 import java.util.stream.IntStream;
@@ -11,6 +12,7 @@ import org.wardon.air.Timeline;
 import org.wardon.air.Weather;
 import org.wardon.cooling.Cooler;
 import org.wardon.cooling.CoolerCautions;
+import org.wardon.cooling.Setting;
 import org.wardon.cooling.solar.Inverter;
 import org.wardon.cooling.solar.SolarSupply;
 import org.wardon.heat.Course;
@@ -102,10 +104,20 @@ final class Cautions {
         }
         double pressurePa =
                 StandardAtmosphere.pressurePa(outcome.model().plan().site().elevationM());
-        for (Cooler cooler : chamber.coolers()) {
-            CoolerCautions.of(cooler, chamber.setting(), chamber.id(), pressurePa)
-                    .forEach(caution -> add(caution.level(), caution.reason()));
+        Set<Caution> ofCoolers = new LinkedHashSet<>();
+        for (Setting set : outcome.model().settings(chamber).within(0, outcome.horizonS())) {
+            for (Cooler cooler : chamber.coolers()) {
+                ofCoolers.addAll(CoolerCautions.of(cooler, set, chamber.id(), pressurePa));
+            }
         }
+        ofCoolers.forEach(caution -> add(caution.level(), caution.reason()));
+        new Stretches(
+                        chamber,
+                        outcome.model().settings(chamber),
+                        course.hours(),
+                        outcome.horizonS())
+                .told(firstS(chamber), outcome)
+                .forEach(c -> add(c.level(), c.reason()));
         DoorEnd.of(outcome, chamber).forEach(c -> add(c.level(), c.reason()));
         FaceMoisture.of(chamber, outcome).forEach(c -> add(c.level(), c.reason()));
         CoolersAtWork.of(outcome, chamber).forEach(c -> add(c.level(), c.reason()));
@@ -119,6 +131,14 @@ final class Cautions {
                             reason.arguments(),
                             reason.sourceId()));
         }
+    }
+
+    private double firstS(ChamberPlan chamber) {
+        return outcome.model().visitsIn(chamber.id()).stream()
+                .mapToDouble(Visit::hereFromS)
+                .filter(from -> from < outcome.horizonS())
+                .min()
+                .orElse(0);
     }
 
     private void solar(ChamberPlan chamber, SolarSupply supply) {

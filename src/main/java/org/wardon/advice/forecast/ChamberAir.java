@@ -2,6 +2,7 @@ package org.wardon.advice.forecast;
 
 import java.time.LocalDateTime;
 import org.wardon.cooling.Cooler;
+import org.wardon.cooling.SettingCourse;
 import org.wardon.heat.Hours;
 import org.wardon.plan.ChamberPlan;
 
@@ -9,11 +10,13 @@ import org.wardon.plan.ChamberPlan;
 public final class ChamberAir {
     private final ChamberPlan chamber;
     private final StoreOutcome outcome;
+    private final SettingCourse settings;
     private final Hours hours;
 
     ChamberAir(ChamberPlan chamber, StoreOutcome outcome) {
         this.chamber = chamber;
         this.outcome = outcome;
+        this.settings = outcome.model().settings(chamber);
         this.hours = outcome.course(chamber.id()).hours();
     }
 
@@ -77,31 +80,43 @@ public final class ChamberAir {
     }
 
     /**
-     * Returns what the chamber is set to.
+     * Returns what the chamber is set to in an hour.
      *
+     * @param row from 0
      * @return °C
      */
-    public double settingC() {
-        return chamber.setting().temperatureC();
+    public double settingC(int row) {
+        return settings.until(hours.atS(row)).temperatureC();
     }
 
     /**
-     * Returns the warmest hour that still counts as inside.
+     * Returns whether it is set otherwise later.
      *
-     * @return °C
+     * @return true where there is more than one setting
      */
-    public double warmestC() {
-        return settingC() + chamber.setting().bandK() + (held() ? Holding.AIR_ALLOWANCE_K : 0);
+    public boolean changes() {
+        return settings.within(0, hours.atS(size() - 1)).size() > 1;
     }
 
     /**
-     * Returns the coldest hour that still counts as inside.
+     * Returns the warmest an hour may be to count as inside.
      *
+     * @param row from 0
+     * @return °C
+     */
+    public double warmestC(int row) {
+        return settingC(row) + chamber.setting().bandK() + (held() ? Holding.AIR_ALLOWANCE_K : 0);
+    }
+
+    /**
+     * Returns the coldest an hour may be to count as inside.
+     *
+     * @param row from 0
      * @return °C; minus infinity where the weather decides how cold it gets
      */
-    public double coldestC() {
+    public double coldestC(int row) {
         return held()
-                ? settingC() - chamber.setting().bandK() - Holding.AIR_ALLOWANCE_K
+                ? settingC(row) - chamber.setting().bandK() - Holding.AIR_ALLOWANCE_K
                 : Double.NEGATIVE_INFINITY;
     }
 

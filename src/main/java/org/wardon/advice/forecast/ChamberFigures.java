@@ -1,10 +1,12 @@
 package org.wardon.advice.forecast;
 
 import java.util.Arrays;
+import java.util.List;
 import java.util.OptionalDouble;
 import java.util.function.IntToDoubleFunction;
 import java.util.stream.IntStream;
 import org.wardon.air.Timeline;
+import org.wardon.cooling.SettingCourse;
 import org.wardon.files.forecast.ChamberForecast;
 import org.wardon.files.forecast.ChamberForecast.AirC;
 import org.wardon.files.forecast.ChamberForecast.LoadKWh;
@@ -47,7 +49,8 @@ final class ChamberFigures {
                 holding.hoursOutside(),
                 holding.hoursDisturbed(),
                 holding.pullDownHours(),
-                max(ideal.hours(), ideal.hours()::coolingW),
+                changes(holding),
+                peakW(ideal.hours(), holding),
                 max(hours, hours::coolingW),
                 intake,
                 new MeanMax(mean(hours, hours::respirationW), max(hours, hours::respirationW)),
@@ -64,6 +67,41 @@ final class ChamberFigures {
                 course.solar().map(this::solar),
                 chamber.enclosure().zones().map(zones -> doorEnd(hours)),
                 CleanerAir.figures(chamber, outcome));
+    }
+
+    private List<ChamberForecast.SettingChange> changes(Holding holding) {
+        SettingCourse settings = outcome.model().settings(chamber);
+        return holding.stretches().stream()
+                .filter(stretch -> settings.sinceS(stretch.fromS()) > 0)
+                .map(
+                        stretch ->
+                                new ChamberForecast.SettingChange(
+                                        outcome.model().plan().timeline().localAt(stretch.fromS()),
+                                        stretch.setting().temperatureC(),
+                                        stretch.setting().humidityPct(),
+                                        stretch.hoursToReach()))
+                .toList();
+    }
+
+    /** The highest load, but for the hours in which the air is brought to a later setting. */
+    private double peakW(Hours ideal, Holding holding) {
+        SettingCourse settings = outcome.model().settings(chamber);
+        double most = 0;
+        for (int i = 0; i < ideal.size(); i++) {
+            double at = ideal.atS(i);
+            double sinceS = settings.sinceS(Math.nextDown(at));
+            double coming =
+                    holding.stretches().stream()
+                            .filter(stretch -> stretch.fromS() == sinceS)
+                            .mapToDouble(s -> s.hoursToReach().orElse(Holding.DISTURBED_HOURS))
+                            .findFirst()
+                            .orElse(0);
+            double leftOut = Math.min(Math.max(coming, 1), Holding.DISTURBED_HOURS);
+            if (sinceS <= 0 || at > sinceS + leftOut * Timeline.HOUR_S) {
+                most = Math.max(most, ideal.coolingW(i));
+            }
+        }
+        return most;
     }
 
     /** What the grid's electricity costs; that of panels is had for nothing. */

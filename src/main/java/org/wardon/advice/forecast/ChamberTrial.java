@@ -218,7 +218,7 @@ public final class ChamberTrial {
     }
 
     private Cooling cooling(String lotId) {
-        return Cooling.of(outcome.history(lotId), sheet(lotId), chamber, course());
+        return Cooling.of(outcome.history(lotId), sheet(lotId), chamber, outcome);
     }
 
     /**

@@ -81,14 +81,17 @@ final class ColdBlast {
      */
     private Optional<Caution> lowestSetting() {
         Optional<Visit> first =
-                visits.stream().max(Comparator.comparingDouble(v -> v.sheet().model().freezingC()));
+                visits.stream()
+                        .max(
+                                Comparator.comparingDouble(
+                                        v -> v.sheet().model().freezingC() - coldestC(v)));
         if (first.isEmpty()) {
             return Optional.empty();
         }
         double limitC = first.get().sheet().model().freezingC() + Holding.FREEZING_MARGIN_K;
         double bandK = chamber.setting().bandK();
         double lowestC = limitC + bandK + SHARE * supplyBelowK();
-        double setC = chamber.setting().temperatureC();
+        double setC = coldestC(first.get());
         return setC >= lowestC
                 ? Optional.empty()
                 : Optional.of(
@@ -104,6 +107,13 @@ final class ColdBlast {
                                                 Argument.of(bandK, "K"),
                                                 Argument.of(supplyBelowK(), "K")),
                                         PRACTICE)));
+    }
+
+    /** Lowest setting while a lot is here, °C. */
+    private double coldestC(Visit visit) {
+        double fromS = Math.max(0, visit.hereFromS());
+        double untilS = Math.min(visit.leavesS(), outcome.horizonS());
+        return outcome.model().settings(chamber).coldestC(fromS, untilS);
     }
 
     private void judge(Visit visit, List<Caution> told) {

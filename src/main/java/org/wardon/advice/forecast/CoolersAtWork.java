@@ -16,6 +16,7 @@ import org.wardon.cooling.EvaporativePad;
 import org.wardon.cooling.IceBank;
 import org.wardon.cooling.NightAir;
 import org.wardon.cooling.PadOutlet;
+import org.wardon.cooling.SettingCourse;
 import org.wardon.cooling.WaterFilm;
 import org.wardon.cooling.WettedWall;
 import org.wardon.heat.Course;
@@ -59,6 +60,7 @@ final class CoolersAtWork implements Cooler.Kinds<List<Caution>> {
 
     private final ChamberPlan chamber;
     private final int place;
+    private final SettingCourse settings;
     private final Course course;
     private final Timeline timeline;
     private final Hours hours;
@@ -68,6 +70,7 @@ final class CoolersAtWork implements Cooler.Kinds<List<Caution>> {
     private CoolersAtWork(StoreOutcome outcome, ChamberPlan chamber, int place) {
         this.chamber = chamber;
         this.place = place;
+        this.settings = outcome.model().settings(chamber);
         this.course = outcome.course(chamber.id());
         this.timeline = outcome.model().plan().timeline();
         this.hours = course.hours();
@@ -168,10 +171,12 @@ final class CoolersAtWork implements Cooler.Kinds<List<Caution>> {
     public List<Caution> nightAir(NightAir fan) {
         double ran = 0;
         double humidity = 0;
+        double wished = 0;
         for (int i = 0; i < hours.size(); i++) {
             double share = hours.ran(place, i);
             double inside = SaturatedAir.pressurePa(hours.airC(i));
             ran += share;
+            wished += share * settings.until(hours.atS(i)).humidityPct();
             humidity += share * 100 * Math.min(vapourPa(i) / inside, 1);
         }
         if (ran < RESTS_BELOW * hours.size()) {
@@ -184,7 +189,7 @@ final class CoolersAtWork implements Cooler.Kinds<List<Caution>> {
                                     Argument.of(ran, "h"),
                                     Argument.of(hours.size(), "h"))));
         }
-        double wishedPct = chamber.setting().humidityPct();
+        double wishedPct = wished / ran;
         return humidity / ran >= wishedPct - DRY_BY_PCT
                 ? List.of()
                 : List.of(

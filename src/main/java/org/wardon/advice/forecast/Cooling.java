@@ -3,6 +3,7 @@ package org.wardon.advice.forecast;
 import java.util.OptionalDouble;
 import java.util.function.IntToDoubleFunction;
 import org.wardon.air.Timeline;
+import org.wardon.cooling.SettingCourse;
 import org.wardon.heat.Course;
 import org.wardon.heat.Hours;
 import org.wardon.lots.LotHistory;
@@ -12,7 +13,8 @@ import org.wardon.plan.ChamberPlan;
  * How a lot cools in its chamber, or on its way through several to the one it ends in.
  *
  * <p>The cooling fraction is (mean - mark) / (mean at arrival - mark). The mark is the setting; in
- * a chamber that cannot reach it, the chamber's own mean air of the last 24 hours.
+ * a chamber that cannot reach it, the chamber's own mean air of the last 24 hours. Where the
+ * setting changes while a lot may still be cooling, the mark is the warmer one.
  *
  * @param startC mean temperature at the start, °C
  * @param markC temperature it is to come to, °C
@@ -24,10 +26,12 @@ record Cooling(
     /** Below this difference cooling times say nothing, K. */
     private static final double LEAST_K = 2;
 
-    static Cooling of(LotHistory history, LotSheet sheet, ChamberPlan chamber, Course course) {
+    static Cooling of(
+            LotHistory history, LotSheet sheet, ChamberPlan chamber, StoreOutcome outcome) {
         double start = history.meanC(0);
+        Course course = outcome.course(chamber.id());
         IntToDoubleFunction airC = sheet.airC(chamber.enclosure(), course.hours());
-        double mark = markC(chamber, course, airC);
+        double mark = markC(chamber, course, airC, force(history, sheet, chamber, outcome));
         if (start - mark < LEAST_K) {
             return new Cooling(start, mark, OptionalDouble.empty(), OptionalDouble.empty());
         }
@@ -43,23 +47,44 @@ record Cooling(
         return startC - markC >= LEAST_K;
     }
 
-    private static double markC(ChamberPlan chamber, Course course, IntToDoubleFunction airC) {
-        double setting = chamber.setting().temperatureC();
-        double own = lastDayC(course.hours(), airC);
+    /** A setting and until when it is in force, s. */
+    private record Force(double settingC, double untilS) {}
+
+    private static Force force(
+            LotHistory history, LotSheet sheet, ChamberPlan chamber, StoreOutcome outcome) {
+        SettingCourse settings = outcome.model().settings(chamber);
+        double from = Math.max(0, history.timeS(0));
+        double until = from + Holding.coolsInS(sheet);
+        double at = from;
+        for (SettingCourse.Change change : settings.changes()) {
+            boolean cooling = change.atS() > from && change.atS() < until;
+            if (cooling && change.to().temperatureC() > settings.at(at).temperatureC()) {
+                at = change.atS();
+            }
+        }
+        return new Force(settings.at(at).temperatureC(), settings.nextS(at));
+    }
+
+    private static double markC(
+            ChamberPlan chamber, Course course, IntToDoubleFunction airC, Force force) {
+        double setting = force.settingC();
+        double own = lastDayC(course.hours(), airC, force.untilS());
         boolean reaches =
                 !chamber.coolers().isEmpty() && own <= setting + chamber.setting().bandK() + 0.5;
         return reaches ? setting : own;
     }
 
-    private static double lastDayC(Hours hours, IntToDoubleFunction airC) {
-        double end = hours.atS(hours.size() - 1);
+    private static double lastDayC(Hours hours, IntToDoubleFunction airC, double untilS) {
+        double end = Math.min(hours.atS(hours.size() - 1), untilS);
         double sum = 0;
         int n = 0;
         for (int i = hours.size() - 1; i >= 0 && hours.atS(i) > end - Timeline.DAY_S; i--) {
-            sum += airC.applyAsDouble(i);
-            n++;
+            if (hours.atS(i) <= end) {
+                sum += airC.applyAsDouble(i);
+                n++;
+            }
         }
-        return sum / n;
+        return n > 0 ? sum / n : airC.applyAsDouble(0);
     }
 
     private static OptionalDouble hoursTo(LotHistory history, double targetC) {

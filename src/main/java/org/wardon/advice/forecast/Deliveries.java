@@ -41,6 +41,7 @@ final class Deliveries {
      *
      * @param cold the lot that was cold
      * @param comes ids of what came in then
+     * @param atS when, s since the start of the run
      * @param riseK by how much its mean rises within twelve hours, K
      * @param backHours until it is within half a kelvin of before, h; empty where it is not by the
      *     next delivery, its leaving or the end
@@ -49,6 +50,7 @@ final class Deliveries {
     record Rise(
             Visit cold,
             List<String> comes,
+            double atS,
             double riseK,
             OptionalDouble backHours,
             double followedHours) {
@@ -67,8 +69,7 @@ final class Deliveries {
         List<Rise> rises = new ArrayList<>();
         for (Visit visit : visits) {
             LotHistory history = visit.within(outcome.history(visit.id()));
-            Cooling cooling =
-                    Cooling.of(history, visit.sheet(), chamber, outcome.course(chamber.id()));
+            Cooling cooling = Cooling.of(history, visit.sheet(), chamber, outcome);
             if (cooling.wasWarm() && cooling.sevenEighthsHours().isEmpty()) {
                 continue;
             }
@@ -114,6 +115,7 @@ final class Deliveries {
         return new Rise(
                 visit,
                 comes.stream().map(Visit::id).toList(),
+                atS,
                 peak < 0 ? 0 : Math.max(0, history.meanC(peak) - before),
                 backS.isPresent()
                         ? OptionalDouble.of((backS.getAsDouble() - atS) / Timeline.HOUR_S)

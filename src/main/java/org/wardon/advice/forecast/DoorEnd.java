@@ -93,13 +93,14 @@ final class DoorEnd {
         if (keptAt.isEmpty() || !sheet.spot().atDoorEnd(chamber.enclosure())) {
             return Optional.empty();
         }
-        double most =
-                Math.max(
-                        keptAt.getAsDouble(),
-                        chamber.setting().temperatureC() + chamber.setting().bandK());
         double untilS = Math.min(visit.leavesS(), outcome.horizonS());
+        double setC =
+                outcome.model()
+                        .settings(chamber)
+                        .warmestC(Math.max(0, untilS - Timeline.DAY_S), untilS);
+        double most = Math.max(keptAt.getAsDouble(), setC + chamber.setting().bandK());
         LotHistory history = visit.within(outcome.history(visit.id()));
-        Cooling cooling = Cooling.of(history, sheet, chamber, course);
+        Cooling cooling = Cooling.of(history, sheet, chamber, outcome);
         double lotC = lastDayC(history, untilS);
         int until = row(untilS);
         double coilC = mean(Math.max(0, until - 24), until, hours::airC);

@@ -6,9 +6,11 @@ import java.util.Optional;
 import java.util.OptionalDouble;
 import java.util.Set;
 import java.util.function.DoublePredicate;
+import org.wardon.advice.forecast.Stretches.Stretch;
 import org.wardon.air.Timeline;
 import org.wardon.cooling.Cooler;
 import org.wardon.cooling.Outage;
+import org.wardon.cooling.SettingCourse;
 import org.wardon.heat.Course;
 import org.wardon.heat.CourseEvent;
 import org.wardon.heat.Hours;
@@ -25,19 +27,22 @@ import org.wardon.produce.Reason.Argument;
  * and night air: at or below setting + band); every lot reaches seven-eighths cooling within max(24
  * h, 4.5 half-cooling times of its package); no lot already cold rises more than 2 K through an
  * arrival; no lot leaves its safe range. Outages left out are single ones: those of every day are
- * how the chamber is run, and count.
+ * how the chamber is run, and count. Where the setting changes, each hour is judged by the one in
+ * force; after a change the air is being brought to the new setting until it has been inside for
+ * three hours running, which a day is allowed for and is told, not held against the chamber. What
+ * is switched off has no setting to hold: there only cold that harms counts.
  *
  * @param holds the verdict
  * @param hoursOutside hours outside the band after pull-down, outages and disturbed hours left out
  * @param hoursDisturbed hours after later arrivals
- * @param pullDownHours hours from the first arrival until the air has been inside for three hours
+ * @param stretches the air from one setting to the next, from the first arrival on
  * @param reasons why not; empty where it holds
  */
 record Holding(
         boolean holds,
         double hoursOutside,
         double hoursDisturbed,
-        OptionalDouble pullDownHours,
+        List<Stretches.Stretch> stretches,
         List<Reason> reasons) {
     static final double AIR_ALLOWANCE_K = 0.5;
     static final double SHARE_INSIDE = 0.95;
@@ -56,7 +61,19 @@ record Holding(
     private static final Set<String> TOO_COLD = Set.of("near-freezing", "chilling-in-stay");
 
     Holding {
+        stretches = List.copyOf(stretches);
         reasons = List.copyOf(reasons);
+    }
+
+    /** Hours from the first arrival until the air has been inside for three hours running. */
+    OptionalDouble pullDownHours() {
+        return stretches.get(0).hoursToReach();
+    }
+
+    /** What a lot may take to come to its chamber's setting, s. */
+    static double coolsInS(LotSheet sheet) {
+        double halves = SEVEN_EIGHTHS_PER_HALF * sheet.kind().halfCoolingHours().middle();
+        return Math.max(SEVEN_EIGHTHS_LEAST_H, halves) * Timeline.HOUR_S;
     }
 
     /** Judges one chamber of an outcome. */
@@ -69,6 +86,8 @@ record Holding(
         private final StoreOutcome outcome;
         private final Course course;
         private final Hours hours;
+        private final SettingCourse settings;
+        private final Stretches air;
         private final List<Visit> lots;
         private final List<Reason> reasons = new ArrayList<>();
 
@@ -77,6 +96,8 @@ record Holding(
             this.outcome = outcome;
             course = outcome.course(chamber.id());
             hours = course.hours();
+            settings = outcome.model().settings(chamber);
+            air = new Stretches(chamber, settings, hours, outcome.horizonS());
             lots =
                     outcome.model().visitsIn(chamber.id()).stream()
                             .filter(visit -> outcome.has(visit.id()))
@@ -86,58 +107,33 @@ record Holding(
 
         Holding holding() {
             double firstS = lots.stream().mapToDouble(Visit::hereFromS).min().orElse(0);
-            OptionalDouble pulledDownS = pulledDownS(firstS);
+            List<Stretch> stretches = air.from(Math.min(firstS, outcome.horizonS()));
             double outside = 0;
             double disturbed = 0;
             double counted = 0;
-            for (int i = 0; i < hours.size() && hours.atS(i) <= outcome.horizonS(); i++) {
-                double at = hours.atS(i);
-                double span = i == 0 ? at : at - hours.atS(i - 1);
-                if (pulledDownS.isEmpty() || at <= pulledDownS.getAsDouble() || inOutage(at)) {
-                    continue;
-                }
-                if (disturbed(at, firstS)) {
-                    disturbed += span / Timeline.HOUR_S;
-                } else {
-                    counted += span / Timeline.HOUR_S;
-                    outside += inside(hours.airC(i)) ? 0 : span / Timeline.HOUR_S;
+            for (Stretch stretch : stretches) {
+                for (int i = 0; i < hours.size() && hours.atS(i) <= stretch.untilS(); i++) {
+                    double at = hours.atS(i);
+                    double span = (i == 0 ? at : at - hours.atS(i - 1)) / Timeline.HOUR_S;
+                    if (at <= stretch.fromS() || stretch.coming(at) || inOutage(at)) {
+                        continue;
+                    }
+                    if (disturbed(at, firstS)) {
+                        disturbed += span;
+                    } else {
+                        counted += span;
+                        outside += air.inside(hours.airC(i), stretch.setting()) ? 0 : span;
+                    }
                 }
             }
-            judgeAir(pulledDownS, outside, counted);
+            if (!chamber.off()) {
+                stretches.forEach(this::judgeReached);
+                judgeAir(outside, counted);
+            }
             lots.forEach(this::judgeLot);
             judgeRises();
             judgeSupply();
-            OptionalDouble pull =
-                    pulledDownS.isPresent()
-                            ? OptionalDouble.of(
-                                    (pulledDownS.getAsDouble() - firstS) / Timeline.HOUR_S)
-                            : OptionalDouble.empty();
-            return new Holding(reasons.isEmpty(), outside, disturbed, pull, reasons);
-        }
-
-        private boolean inside(double airC) {
-            double set = chamber.setting().temperatureC();
-            double band = chamber.setting().bandK();
-            return chamber.coolers().stream().anyMatch(Cooler::holdsBand)
-                    ? Math.abs(airC - set) <= band + AIR_ALLOWANCE_K
-                    : airC <= set + band;
-        }
-
-        /** When the air has been inside for three hours running: the start of those hours. */
-        private OptionalDouble pulledDownS(double firstS) {
-            double since = Double.NaN;
-            for (int i = 0; i < hours.size() && hours.atS(i) <= outcome.horizonS(); i++) {
-                if (hours.atS(i) <= firstS || !inside(hours.airC(i))) {
-                    since = Double.NaN;
-                    continue;
-                }
-                double start = Math.max(firstS, i == 0 ? 0 : hours.atS(i - 1));
-                since = Double.isNaN(since) ? start : since;
-                if (hours.atS(i) - since >= PULLED_DOWN_HOURS * Timeline.HOUR_S - 1) {
-                    return OptionalDouble.of(since);
-                }
-            }
-            return OptionalDouble.empty();
+            return new Holding(reasons.isEmpty(), outside, disturbed, stretches, reasons);
         }
 
         /** Hours without power that come back every day are how the chamber is run, and count. */
@@ -160,16 +156,37 @@ record Holding(
                                             && atS <= arrives + DISTURBED_HOURS * Timeline.HOUR_S);
         }
 
-        private void judgeAir(OptionalDouble pulledDownS, double outside, double counted) {
-            double set = chamber.setting().temperatureC();
-            if (pulledDownS.isEmpty()) {
-                say("never-pulled-down", Argument.of(set, "C"), Argument.of(meanAirC(), "C"));
-            } else if (counted > 0 && outside > (1 - SHARE_INSIDE) * counted) {
+        /** A setting that follows on another has a day to be reached in. */
+        private void judgeReached(Stretch stretch) {
+            double setC = stretch.setting().temperatureC();
+            boolean first = settings.sinceS(stretch.fromS()) <= 0;
+            if (stretch.reachedS().isPresent()
+                    || (!first && stretch.hours() < SEVEN_EIGHTHS_LEAST_H)) {
+                return;
+            }
+            Argument set = Argument.of(setC, "C");
+            if (first) {
                 say(
-                        "air-outside-band",
+                        "never-pulled-down",
+                        set,
+                        Argument.of(air.meanC(-1, settings.nextS(stretch.fromS())), "C"));
+            } else {
+                double lastDayS = Math.max(stretch.fromS(), stretch.untilS() - Timeline.DAY_S);
+                say(
+                        "setting-not-reached",
+                        BatteryNights.at(stretch.fromS(), outcome),
+                        set,
+                        Argument.of(air.meanC(lastDayS, stretch.untilS()), "C"));
+            }
+        }
+
+        private void judgeAir(double outside, double counted) {
+            if (counted > 0 && outside > (1 - SHARE_INSIDE) * counted) {
+                say(
+                        settings.changes().isEmpty() ? "air-outside-band" : "air-outside-bands",
                         Argument.of(outside, "h"),
                         Argument.of(counted, "h"),
-                        Argument.of(set, "C"));
+                        Argument.of(chamber.setting().temperatureC(), "C"));
             }
         }
 
@@ -199,29 +216,18 @@ record Holding(
             }
         }
 
-        private double meanAirC() {
-            double sum = 0;
-            for (int i = 0; i < hours.size(); i++) {
-                sum += hours.airC(i);
-            }
-            return sum / hours.size();
-        }
-
         private void judgeLot(Visit visit) {
             LotHistory history = visit.within(outcome.history(visit.id()));
-            Cooling cooling = Cooling.of(history, visit.sheet(), chamber, course);
+            Cooling cooling = Cooling.of(history, visit.sheet(), chamber, outcome);
             judgeCooling(visit, history, cooling);
             judgeSafety(visit, history, cooling);
         }
 
         private void judgeCooling(Visit visit, LotHistory history, Cooling cooling) {
             LotSheet sheet = visit.sheet();
-            double allowed =
-                    Math.max(
-                            SEVEN_EIGHTHS_LEAST_H,
-                            SEVEN_EIGHTHS_PER_HALF * sheet.kind().halfCoolingHours().middle());
+            double allowed = coolsInS(sheet) / Timeline.HOUR_S;
             double here = Math.min(visit.leavesS(), outcome.horizonS()) - history.timeS(0);
-            if (!cooling.wasWarm() || here < allowed * Timeline.HOUR_S) {
+            if (chamber.off() || !cooling.wasWarm() || here < allowed * Timeline.HOUR_S) {
                 return;
             }
             OptionalDouble took = cooling.sevenEighthsHours();
@@ -237,7 +243,7 @@ record Holding(
         /** Rises of cold lots over the twelve hours after others came in. */
         private void judgeRises() {
             for (Deliveries.Rise rise : new Deliveries(outcome, chamber).rises()) {
-                if (rise.riseK() > RISE_MOST_K) {
+                if (rise.riseK() > RISE_MOST_K && !setWarmer(rise)) {
                     sayOf(
                             "warmed-by-arrival",
                             rise.cold().sheet(),
@@ -247,46 +253,61 @@ record Holding(
             }
         }
 
+        /** Whether the keeper let the chamber warm in those hours. */
+        private boolean setWarmer(Deliveries.Rise rise) {
+            double untilS = rise.atS() + DISTURBED_HOURS * Timeline.HOUR_S;
+            return settings.warmestC(rise.atS() - Timeline.HOUR_S, untilS)
+                    > settings.until(rise.atS()).temperatureC();
+        }
+
         private void judgeSafety(Visit visit, LotHistory history, Cooling cooling) {
             LotSheet sheet = visit.sheet();
             double freezing = sheet.model().freezingC() + FREEZING_MARGIN_K;
-            if (anyWithin(visit, history, 0, c -> c < freezing, false)) {
+            if (anyWithin(visit, history, c -> c < freezing)) {
                 sayOf("near-freezing", sheet, Argument.of(sheet.model().freezingC(), "C"));
             }
             double risk = LotRisk.chilling(outcome.fates(sheet.id()), sheet.soldS());
             if (risk >= RISK_MOST && (visit.only() || chills(visit, history))) {
                 sayOf("chilling-in-stay", sheet, Argument.of(100 * risk, "pct"));
             }
-            double most =
-                    chamber.setting().temperatureC() + chamber.setting().bandK() + RISE_MOST_K;
             double settledS =
                     history.timeS(0)
                             + (cooling.sevenEighthsHours().orElse(0) + SETTLE_HOURS)
                                     * Timeline.HOUR_S;
             boolean cooled = !cooling.wasWarm() || cooling.sevenEighthsHours().isPresent();
-            if (cooled && anyWithin(visit, history, settledS, c -> c > most, true)) {
-                sayOf("lot-too-warm", sheet, Argument.of(most, "C"));
+            if (!chamber.off() && cooled) {
+                judgeWarmth(visit, history, settledS);
+            }
+        }
+
+        /** After a change a lot has as long as a warm one to come to the new setting. */
+        private void judgeWarmth(Visit visit, LotHistory history, double settledS) {
+            double bandK = chamber.setting().bandK() + RISE_MOST_K;
+            double allowedS = coolsInS(visit.sheet()) + SETTLE_HOURS * Timeline.HOUR_S;
+            for (int i = 0; i < history.size(); i++) {
+                double at = history.timeS(i);
+                boolean here =
+                        at >= settledS && at <= Math.min(visit.leavesS(), outcome.horizonS());
+                double mostC = settings.warmestC(Math.max(0, at - allowedS), at) + bandK;
+                if (here && !inOutage(at) && history.meanC(i) > mostC) {
+                    sayOf("lot-too-warm", visit.sheet(), Argument.of(mostC, "C"));
+                    return;
+                }
             }
         }
 
         /** Whether a lot that is moved is in its harmful cold here. */
         private boolean chills(Visit visit, LotHistory history) {
             double lowestC = visit.sheet().model().lowestSafeC();
-            return anyWithin(visit, history, 0, c -> c < lowestC, false);
+            return anyWithin(visit, history, c -> c < lowestC);
         }
 
-        private boolean anyWithin(
-                Visit visit,
-                LotHistory history,
-                double fromS,
-                DoublePredicate wrong,
-                boolean mean) {
+        /** Whether the coldest place of a lot is so at some time here, outages apart. */
+        private boolean anyWithin(Visit visit, LotHistory history, DoublePredicate wrong) {
             for (int i = 0; i < history.size(); i++) {
                 double at = history.timeS(i);
-                boolean here = at >= fromS && at <= Math.min(visit.leavesS(), outcome.horizonS());
-                if (here
-                        && !inOutage(at)
-                        && wrong.test(mean ? history.meanC(i) : history.coldestC(i))) {
+                boolean here = at <= Math.min(visit.leavesS(), outcome.horizonS());
+                if (here && !inOutage(at) && wrong.test(history.coldestC(i))) {
                     return true;
                 }
             }

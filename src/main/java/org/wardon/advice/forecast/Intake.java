@@ -7,6 +7,7 @@ import java.util.Optional;
 import java.util.OptionalDouble;
 import org.wardon.air.Timeline;
 import org.wardon.air.Weather;
+import org.wardon.cooling.Setting;
 import org.wardon.errors.Progress;
 import org.wardon.heat.ChamberRun;
 import org.wardon.heat.ControlMode;
@@ -45,29 +46,39 @@ final class Intake {
     OptionalDouble kgPerDay() {
         Optional<LotSheet> like =
                 outcome.model().sheetsIn(chamber.id()).stream()
-                        .filter(s -> s.plan().temperatureC() > chamber.setting().temperatureC() + 2)
+                        .filter(s -> s.plan().temperatureC() > setting(s).temperatureC() + 2)
                         .max(Comparator.comparingDouble(s -> s.plan().massKg()));
         if (chamber.coolers().isEmpty() || like.isEmpty()) {
             return OptionalDouble.empty();
         }
+        ChamberPlan then = chamber.withSetting(setting(like.get()));
+        return OptionalDouble.of(new Intake(outcome, then).kgOf(like.get()));
+    }
+
+    private double kgOf(LotSheet like) {
         double room = chamber.capacityKg();
-        if (fits(like.get(), room)) {
-            return OptionalDouble.of(room);
+        if (fits(like, room)) {
+            return room;
         }
-        if (!fits(like.get(), LEAST_KG)) {
-            return OptionalDouble.of(0);
+        if (!fits(like, LEAST_KG)) {
+            return 0;
         }
         double low = LEAST_KG;
         double high = room;
         for (int i = 0; i < HALVINGS; i++) {
             double middle = Math.sqrt(low * high);
-            if (fits(like.get(), middle)) {
+            if (fits(like, middle)) {
                 low = middle;
             } else {
                 high = middle;
             }
         }
-        return OptionalDouble.of(low);
+        return low;
+    }
+
+    /** The setting in force when a lot comes. */
+    private Setting setting(LotSheet sheet) {
+        return outcome.model().settings(chamber).at(Math.max(0, sheet.clock().arrivesS()));
     }
 
     private boolean fits(LotSheet like, double massKg) {

@@ -33,7 +33,7 @@ final class LotFigures {
     LotForecast forecast() {
         double fromS = sheet.clock().hereFromS();
         Outlook outlook = outlook();
-        Cooling cooling = Cooling.of(history, sheet, chamber, outcome.course(chamber.id()));
+        Cooling cooling = Cooling.of(history, sheet, chamber, outcome);
         double leaveBy =
                 Outlook.leaveByS(fates.staying(), sheet.clock().arrivesS(), sheet.marketDays());
         return new LotForecast(

@@ -59,7 +59,7 @@ final class SectionFigures {
                 field.widthM(),
                 field.heightM(),
                 faces(chest),
-                chamber.setting().temperatureC(),
+                model.settings(chamber).until(seen.last().untilS()).temperatureC(),
                 seen.mean(HourAccount::outdoorC),
                 chest.airC(),
                 field.meanC(),

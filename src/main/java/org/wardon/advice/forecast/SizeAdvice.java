@@ -16,6 +16,7 @@ import org.wardon.air.StandardAtmosphere;
 import org.wardon.air.Weather;
 import org.wardon.air.YearWave;
 import org.wardon.cooling.Compressor;
+import org.wardon.cooling.Setting;
 import org.wardon.enclosure.Surroundings;
 import org.wardon.errors.BadInput;
 import org.wardon.errors.Fault;
@@ -72,7 +73,8 @@ public final class SizeAdvice {
     public SizeAnswer ask(StorePlan plan, Question asked) {
         check(plan, asked);
         StoreModel model = forecast.prepare(plan).model();
-        ChamberPlan chamber = model.plan().getChamber(asked.chamber());
+        // Designed for the coldest it is to be.
+        ChamberPlan chamber = coldest(model, model.plan().getChamber(asked.chamber()));
         ChamberLoad.DesignDay day = day(model, asked);
         Map<LocalDate, List<Visit>> byDay = arrivals(model, chamber);
         LocalDate busiest =
@@ -128,9 +130,18 @@ public final class SizeAdvice {
                 plan.site().latitudeDeg(),
                 StandardAtmosphere.pressurePa(plan.site().elevationM()),
                 plan.chambers().stream()
-                        .collect(
-                                Collectors.toMap(
-                                        ChamberPlan::id, c -> c.setting().temperatureC())));
+                        .collect(Collectors.toMap(ChamberPlan::id, c -> warmestC(model, c))));
+    }
+
+    private static ChamberPlan coldest(StoreModel model, ChamberPlan chamber) {
+        return model.settings(chamber).within(0, model.plan().durationS()).stream()
+                .min(Comparator.comparingDouble(Setting::temperatureC))
+                .map(chamber::withSetting)
+                .orElse(chamber);
+    }
+
+    private static double warmestC(StoreModel model, ChamberPlan chamber) {
+        return model.settings(chamber).warmestC(0, model.plan().durationS());
     }
 
     /** The mean of the year where it is known, else that of the plan's weather. */
@@ -164,7 +175,8 @@ public final class SizeAdvice {
     /** Flesh of a lot when it comes in; from another chamber it comes as cold as that is set. */
     private static double arrivesC(Visit visit, StoreModel model) {
         return visit.from()
-                .map(from -> model.plan().getChamber(from).setting().temperatureC())
+                .map(from -> model.settings(model.plan().getChamber(from)))
+                .map(set -> set.until(Math.max(visit.arrivesS(), 1)).temperatureC())
                 .orElse(visit.sheet().plan().temperatureC());
     }
 

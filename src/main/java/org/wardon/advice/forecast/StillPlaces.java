@@ -146,8 +146,8 @@ final class StillPlaces {
                 model.sheets().stream().filter(s -> s.id().equals(lot)).findFirst().orElseThrow();
         double freezingC = sheet.model().freezingC();
         double lowestC = sheet.model().lowestSafeC();
-        double mostC =
-                chamber.setting().temperatureC() + chamber.setting().bandK() + Holding.RISE_MOST_K;
+        double setC = model.settings(chamber).until(seen.last().untilS()).temperatureC();
+        double mostC = setC + chamber.setting().bandK() + Holding.RISE_MOST_K;
         if (cold.temperatureC() < freezingC + Holding.FREEZING_MARGIN_K) {
             all.add(new Caution(Level.DANGER, told("freezes-in-cold-place", lot, cold, freezingC)));
         } else if (cold.temperatureC() < lowestC) {

@@ -70,13 +70,13 @@ public final class StoreAdvice {
     }
 
     /**
-     * Returns the temperature a chamber is set to.
+     * Returns the temperature a chamber is set to at the start.
      *
      * @param chamberId its id
      * @return °C
      */
     public double settingC(String chamberId) {
-        return plan().getChamber(chamberId).setting().temperatureC();
+        return outcome.model().settings(plan().getChamber(chamberId)).first().temperatureC();
     }
 
     /**

@@ -18,6 +18,7 @@ import org.wardon.air.Timeline;
 import org.wardon.air.Weather;
 import org.wardon.cooling.Cooler;
 import org.wardon.cooling.Outage;
+import org.wardon.cooling.SettingCourse;
 import org.wardon.enclosure.Beyond;
 import org.wardon.enclosure.Enclosure;
 import org.wardon.enclosure.Surroundings;
@@ -417,6 +418,7 @@ final class StoreModel {
                                 chamber.enclosure(),
                                 chamber.setting(),
                                 durationS)
+                        .withSettings(settings(chamber))
                         .withCoolers(chamber.coolers())
                         .withOutages(outages(chamber))
                         .withStays(stays)
@@ -434,6 +436,11 @@ final class StoreModel {
     /** The surroundings of all runs of a span have one sun. */
     private Surroundings around(ChamberRun run) {
         return around.computeIfAbsent(run.durationS(), any -> HeatModel.around(run));
+    }
+
+    /** What a chamber is set to, and when. */
+    SettingCourse settings(ChamberPlan chamber) {
+        return chamber.settings(timeline);
     }
 
     /** All spans without power of a chamber, to the end of the longest run, none overlapping. */

@@ -43,7 +43,7 @@ final class WhyFigures {
                 chamber.id(),
                 timeline.localAt(account.fromS()),
                 timeline.localAt(account.untilS()),
-                chamber.setting().temperatureC(),
+                model.settings(chamber).until(account.untilS()).temperatureC(),
                 air(account.before()),
                 air(account.after()),
                 account.outdoorC(),

@@ -41,7 +41,9 @@ final class Rebuilt {
         if (!rebuilt.faults.isEmpty()) {
             throw new BadInput(rebuilt.faults);
         }
-        return chamber.with(rebuilt.enclosure(), rebuilt.coolers(), rebuilt.setting());
+        // Another setting is asked about as one throughout.
+        ChamberPlan set = changes.settingC().isPresent() ? chamber.changing(List.of()) : chamber;
+        return set.with(rebuilt.enclosure(), rebuilt.coolers(), rebuilt.setting());
     }
 
     private void check() {

@@ -17,7 +17,9 @@ import java.util.OptionalDouble;
  * @param hoursDisturbed hours within 12 h of a later arrival, h
  * @param pullDownHours from the first arrival until the air has been inside for 3 h; absent where
  *     never
- * @param peakLoadW highest hourly load with the air held ideally, W
+ * @param settingChanges later settings, and how long the air took to come to each
+ * @param peakLoadW highest hourly load with the air held ideally, W; hours in which the air is
+ *     brought to a later setting left out, at most twelve, since that may take its time
  * @param removedPeakW highest hourly heat really removed, W
  * @param intakeKgPerDay largest warm intake a day, kg; absent where the chamber can take none to
  *     its setting or has no cooler
@@ -47,6 +49,7 @@ public record ChamberForecast(
         double hoursOutsideBand,
         double hoursDisturbed,
         OptionalDouble pullDownHours,
+        @JsonInclude(JsonInclude.Include.NON_EMPTY) List<SettingChange> settingChanges,
         double peakLoadW,
         double removedPeakW,
         OptionalDouble intakeKgPerDay,
@@ -64,10 +67,26 @@ public record ChamberForecast(
         Optional<Solar> solar,
         @JsonInclude(JsonInclude.Include.NON_ABSENT) Optional<DoorEnd> doorEnd,
         @JsonInclude(JsonInclude.Include.NON_ABSENT) Optional<CleanerAir> cleanerAir) {
-    /** Copies the list. */
+    /** Copies the lists. */
     public ChamberForecast {
+        settingChanges = List.copyOf(settingChanges);
         coolers = List.copyOf(coolers);
     }
+
+    /**
+     * A later setting.
+     *
+     * @param from local time from which it is in force, or of the first arrival if later
+     * @param temperatureC set then, °C
+     * @param humidityPct wished for then, percent
+     * @param reachedAfterHours until the air has been inside its band for 3 h, h; absent where it
+     *     is not before the next setting or the end
+     */
+    public record SettingChange(
+            LocalDateTime from,
+            double temperatureC,
+            double humidityPct,
+            OptionalDouble reachedAfterHours) {}
 
     /**
      * What cleaner air is worth.

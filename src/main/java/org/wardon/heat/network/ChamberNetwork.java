@@ -5,6 +5,7 @@ import java.util.Arrays;
 import java.util.List;
 import java.util.stream.IntStream;
 import org.wardon.air.MoistAir;
+import org.wardon.cooling.Setting;
 import org.wardon.heat.solver.Tree;
 import org.wardon.heat.solver.TreeSystem;
 import org.wardon.produce.Reason;
@@ -26,6 +27,7 @@ public final class ChamberNetwork implements TreeSystem {
     private final WettedWalls wettedWalls;
     private final List<StructurePart> structure = new ArrayList<>();
     private final CoolerPart[] coolers;
+    private final List<IdealCooler> ideal = new ArrayList<>();
     private final int idealFlowAt;
     private final AirEnd.Equipment[] equipment;
     private final Mixing[] mixing;
@@ -91,7 +93,8 @@ public final class ChamberNetwork implements TreeSystem {
     private int addIdeal() {
         int flowAt = take(IdealCooler.FLOWS);
         double airOfAll = dryAirKg(inputs.enclosure().box().volumeM3());
-        ends[AirEnd.COIL].add(List.of(IdealCooler.of(flowAt, inputs, airOfAll)));
+        ideal.add(IdealCooler.of(flowAt, inputs, airOfAll));
+        ends[AirEnd.COIL].add(ideal);
         return flowAt;
     }
 
@@ -399,6 +402,19 @@ public final class ChamberNetwork implements TreeSystem {
     public void door(double open) {
         for (AirEnd.Equipment one : equipment) {
             one.exchange().open(open);
+        }
+    }
+
+    /**
+     * Dials in another setting.
+     *
+     * @param setting in force from now on
+     */
+    public void set(Setting setting) {
+        CoolerParts.set(coolers, setting, inputs.tuning().thermostatOffsetK());
+        ideal.forEach(one -> one.set(setting));
+        for (AirEnd.Equipment one : equipment) {
+            one.gains().set(setting);
         }
     }
 

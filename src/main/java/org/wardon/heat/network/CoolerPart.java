@@ -64,7 +64,7 @@ public final class CoolerPart implements Part, FilmedFace.Control {
     private final int own;
     private final boolean follows;
     private final boolean modulating;
-    private final Band band;
+    private Band band = new Band(0, 1);
     private final double fanAlwaysW;
     private final Branch[] branch;
     private final CoolerInputs in;
@@ -89,7 +89,7 @@ public final class CoolerPart implements Part, FilmedFace.Control {
     /** The air it keeps: a temperature, and half a band to either side. */
     record Band(double followedC, double bandK) {}
 
-    CoolerPart(Tree tree, int flowAt, Cooler unit, CoolerLaw law, Band band) {
+    CoolerPart(Tree tree, int flowAt, Cooler unit, CoolerLaw law) {
         this.unit = unit;
         this.law = law;
         this.flowAt = flowAt;
@@ -97,7 +97,6 @@ public final class CoolerPart implements Part, FilmedFace.Control {
         this.follows = unit.following().isPresent();
         this.modulating = unit.following().map(Following::modulating).orElse(false);
         this.fanAlwaysW = unit.following().map(Following::fanAlwaysW).orElse(0.0);
-        this.band = band;
         this.branch = own > 0 ? new Branch[] {tree.addBranch(0, own)} : new Branch[0];
         this.in = new CoolerInputs(own);
         in.airC = Double.NaN; // unlike anything it will be asked first
@@ -105,6 +104,11 @@ public final class CoolerPart implements Part, FilmedFace.Control {
         this.after = new CoolerEffect(own);
         this.before = new CoolerEffect(own);
         this.byOwn = new double[FLOWS * own];
+    }
+
+    /** Lets it keep other air from now on. */
+    void keep(Band other) {
+        band = other;
     }
 
     /** Writes its own states as they are at the start of a run. */

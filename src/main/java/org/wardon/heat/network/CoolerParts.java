@@ -5,6 +5,7 @@ import java.util.List;
 import java.util.function.IntUnaryOperator;
 import org.wardon.cooling.Cooler;
 import org.wardon.cooling.Following;
+import org.wardon.cooling.Setting;
 import org.wardon.cooling.Thermostat;
 import org.wardon.heat.solver.Tree;
 
@@ -25,7 +26,6 @@ final class CoolerParts {
      */
     static CoolerPart[] of(Tree tree, IntUnaryOperator take, NetworkInputs inputs) {
         List<CoolerPart> parts = new ArrayList<>();
-        int stage = 0;
         for (Cooler built : inputs.coolers()) {
             Cooler asked = asked(built, inputs);
             parts.add(
@@ -33,11 +33,11 @@ final class CoolerParts {
                             tree,
                             take.applyAsInt(CoolerPart.FLOWS),
                             asked,
-                            asked.law(inputs.pressurePa()),
-                            band(asked, stage, inputs)));
-            stage += asked.following().isPresent() ? 1 : 0;
+                            asked.law(inputs.pressurePa())));
         }
-        return parts.toArray(new CoolerPart[0]);
+        CoolerPart[] all = parts.toArray(new CoolerPart[0]);
+        set(all, inputs.setting(), inputs.tuning().thermostatOffsetK());
+        return all;
     }
 
     /** A cooler as the run asks for it. */
@@ -46,15 +46,20 @@ final class CoolerParts {
         return inputs.control() == NetworkInputs.Control.MODULATING ? sized.modulating() : sized;
     }
 
-    private static CoolerPart.Band band(Cooler cooler, int stage, NetworkInputs inputs) {
-        double bandK = inputs.setting().bandK();
-        double kept =
-                cooler.following()
-                        .map(Following::lowestC)
-                        .map(lowestC -> Thermostat.followedC(inputs.setting(), lowestC))
-                        .orElse(inputs.setting().temperatureC());
-        return new CoolerPart.Band(
-                kept - inputs.tuning().thermostatOffsetK() + stage * inputs.setting().stageK(),
-                bandK);
+    /** Sets the thermostats of all. */
+    static void set(CoolerPart[] parts, Setting setting, double offsetK) {
+        int stage = 0;
+        for (CoolerPart part : parts) {
+            double kept =
+                    part.unit()
+                            .following()
+                            .map(Following::lowestC)
+                            .map(lowestC -> Thermostat.followedC(setting, lowestC))
+                            .orElse(setting.temperatureC());
+            part.keep(
+                    new CoolerPart.Band(
+                            kept - offsetK + stage * setting.stageK(), setting.bandK()));
+            stage += part.unit().following().isPresent() ? 1 : 0;
+        }
     }
 }

@@ -1,6 +1,7 @@
 package org.wardon.heat.network;
 
 import org.wardon.air.MoistAir;
+import org.wardon.cooling.Setting;
 import org.wardon.heat.laws.FreeWater;
 
 /**
@@ -26,7 +27,8 @@ final class IdealCooler implements Part {
     private static final double COIL_BELOW_K = 6;
 
     private final int flowAt;
-    private final double keptC;
+    private final double offsetK;
+    private double keptC;
     private final double coilBelowK;
     private final double wattsPerK;
     private final LocalCurve saturation;
@@ -40,21 +42,28 @@ final class IdealCooler implements Part {
     private double removedByRatio;
 
     /** {@code wattsPerK} is so large that the air stays within hundredths of the setting. */
-    IdealCooler(int flowAt, double keptC, double coilBelowK, double wattsPerK, boolean plain) {
+    IdealCooler(int flowAt, double offsetK, double coilBelowK, double wattsPerK, boolean plain) {
         this.flowAt = flowAt;
-        this.keptC = keptC;
+        this.offsetK = offsetK;
         this.coilBelowK = coilBelowK;
         this.wattsPerK = wattsPerK;
         this.saturation = Saturation.curve(plain);
     }
 
     static IdealCooler of(int flowAt, NetworkInputs inputs, double airKg) {
-        return new IdealCooler(
-                flowAt,
-                inputs.setting().temperatureC() - inputs.tuning().thermostatOffsetK(),
-                COIL_BELOW_K,
-                airKg * MoistAir.DRY_AIR_J_KG_K / FOLLOWS_IN_S,
-                inputs.plain());
+        IdealCooler cooler =
+                new IdealCooler(
+                        flowAt,
+                        inputs.tuning().thermostatOffsetK(),
+                        COIL_BELOW_K,
+                        airKg * MoistAir.DRY_AIR_J_KG_K / FOLLOWS_IN_S,
+                        inputs.plain());
+        cooler.set(inputs.setting());
+        return cooler;
+    }
+
+    void set(Setting setting) {
+        keptC = setting.temperatureC() - offsetK;
     }
 
     private double wetness(AirState air) {

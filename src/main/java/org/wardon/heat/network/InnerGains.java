@@ -55,7 +55,7 @@ final class InnerGains implements Part {
     private static final double HUMIDITY_BAND = 0.04;
 
     private final int flowAt;
-    private final Setting setting;
+    private Setting setting;
     private final double offsetK;
     private final double fansW;
     private final double lightsW;
@@ -85,6 +85,11 @@ final class InnerGains implements Part {
         this.lightsW = lightsW;
         this.heaterW = heaterW;
         this.humidifierKgS = humidifierKgS;
+    }
+
+    /** Lets heater and humidifier work towards another setting. */
+    void set(Setting other) {
+        setting = other;
     }
 
     void power(boolean on) {

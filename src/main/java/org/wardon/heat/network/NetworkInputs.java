@@ -18,7 +18,7 @@ import org.wardon.lots.Lot;
  * @param pressurePa air pressure, Pa
  * @param coolers in the order they act
  * @param control how they follow the thermostat
- * @param setting what the keeper dialled in
+ * @param setting what the keeper dialled in, to begin with
  * @param lots all lots that will ever be in it
  * @param atDoorEnd numbers of the lots that stand in the door end; heard where the air is two
  * @param tuning factors

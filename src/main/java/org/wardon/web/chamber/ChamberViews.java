@@ -65,7 +65,9 @@ final class ChamberViews {
     }
 
     Optional<ChartData> data(String key) {
-        return Curves.find(key).map(curve -> curves.data(curve, air, levels(key)));
+        return Curves.find(key)
+                .map(curve -> curves.data(curve, air, levels(key)))
+                .map(data -> key.equals("air") ? curves.stepped(data, advice.air(chamber)) : data);
     }
 
     private List<ChartData.Level> levels(String key) {
@@ -73,10 +75,12 @@ final class ChamberViews {
         List<ChartData.Level> levels = new ArrayList<>();
         switch (key) {
             case "air" -> {
-                levels.add(curves.level("curve.setting", told.settingC()));
-                levels.add(curves.level("curve.warmest", told.warmestC()));
-                if (Double.isFinite(told.coldestC())) {
-                    levels.add(curves.level("curve.coldest", told.coldestC()));
+                if (!told.changes()) {
+                    levels.add(curves.level("curve.setting", told.settingC(0)));
+                    levels.add(curves.level("curve.warmest", told.warmestC(0)));
+                    if (Double.isFinite(told.coldestC(0))) {
+                        levels.add(curves.level("curve.coldest", told.coldestC(0)));
+                    }
                 }
             }
             case "co2" -> co2(levels);

@@ -10,6 +10,7 @@ import java.util.Locale;
 import java.util.Map;
 import java.util.Optional;
 import org.jspecify.annotations.Nullable;
+import org.wardon.advice.forecast.ChamberAir;
 import org.wardon.files.forecast.HourlySeries;
 import org.wardon.plan.StorePlan;
 import org.wardon.web.pages.ChartData;
@@ -101,6 +102,20 @@ final class Curves {
                                                     rounded(values))));
         }
         return new ChartData(siUnit(curve.unit()), times(series), lines, levels);
+    }
+
+    /** A setting that changes is a line of steps, each row that of the hour before. */
+    ChartData stepped(ChartData data, ChamberAir told) {
+        if (!told.changes()) {
+            return data;
+        }
+        List<ChartData.Line> lines = new ArrayList<>(data.lines());
+        List<Double> steps = new ArrayList<>();
+        for (int i = 0; i < Math.min(told.size(), data.time().size()); i++) {
+            steps.add(figures.shownTemperature(told.settingC(i)));
+        }
+        lines.add(new ChartData.Line(words.say("curve.setting"), "fourth", steps));
+        return new ChartData(data.unit(), data.time(), lines, data.levels());
     }
 
     /** Air with a change over the air as planned. */

@@ -15,6 +15,7 @@ import org.wardon.files.forecast.LotForecast;
 import org.wardon.files.forecast.Quantiles;
 import org.wardon.plan.ChamberPlan;
 import org.wardon.plan.LotPlan;
+import org.wardon.plan.SettingChange;
 import org.wardon.plan.StorePlan;
 import org.wardon.produce.Reason;
 import org.wardon.web.work.OpenPlan;
@@ -149,10 +150,25 @@ public final class AdviceViews {
     }
 
     private String sentence(ChamberForecast chamber, List<Reason> why) {
-        String set = words.units().temperature(advice.settingC(chamber.id()));
+        if (plan.getChamber(chamber.id()).off()) {
+            return chamber.holds()
+                    ? say.say("chamber.off")
+                    : say.say("chamber.off-not", words.sentence(why.get(0)));
+        }
+        String set = set(plan.getChamber(chamber.id()));
         return chamber.holds()
                 ? say.say("chamber.holds", set)
                 : say.say("chamber.holds-not", set, words.sentence(why.get(0)));
+    }
+
+    private String set(ChamberPlan chamber) {
+        String all = words.units().temperature(advice.settingC(chamber.id()));
+        for (SettingChange change : chamber.use().changes()) {
+            String from = figures.time(change.from());
+            String to = words.units().temperature(change.temperatureC());
+            all = say.say("chamber.then", all, from, to);
+        }
+        return all;
     }
 
     private List<FactView> facts(ChamberForecast chamber) {

@@ -6,6 +6,7 @@ import java.time.LocalDateTime;
 import java.util.ArrayList;
 import java.util.List;
 import java.util.Locale;
+import java.util.stream.IntStream;
 import org.wardon.advice.forecast.ChamberAir;
 
 /** Draws the strip of days of a chamber. */
@@ -33,9 +34,12 @@ final class StripOfDays {
         this.air = air;
         this.figures = figures;
         this.words = words;
-        double low = Math.min(air.settingC() - 1, Math.max(air.coldestC(), air.settingC() - 5));
-        double high = Math.max(air.settingC() + 1, air.warmestC());
+        double low = Double.POSITIVE_INFINITY;
+        double high = Double.NEGATIVE_INFINITY;
         for (int i = 0; i < air.size(); i++) {
+            double setC = air.settingC(i);
+            low = Math.min(low, Math.min(setC - 1, Math.max(air.coldestC(i), setC - 5)));
+            high = Math.max(high, Math.max(setC + 1, air.warmestC(i)));
             low = Math.min(low, air.airC(i));
             high = Math.max(high, air.airC(i));
         }
@@ -56,18 +60,38 @@ final class StripOfDays {
         for (int first = 0; first < air.size(); first += step) {
             bar(first, Math.min(first + step, air.size()), inside, outside);
         }
-        double top = y(Math.min(air.warmestC(), highC));
-        double bottom = y(Math.max(air.coldestC(), lowC));
+        StringBuilder held = new StringBuilder();
+        StringBuilder setting = new StringBuilder();
+        steps(held, setting);
         return new StripView(
                 inside.toString(),
                 outside.toString(),
-                px(y(air.settingC())),
-                px(top),
-                px(bottom - top),
+                setting.toString(),
+                held.toString(),
                 days(),
                 marks(),
                 text(),
                 title);
+    }
+
+    /** A box of what counts as held and a dash of the setting for each setting. */
+    private void steps(StringBuilder held, StringBuilder setting) {
+        int first = 0;
+        for (int i = 1; i <= air.size(); i++) {
+            if (i < air.size() && air.settingC(i) == air.settingC(first)) {
+                continue;
+            }
+            double x = first == 0 ? 0 : ACROSS * hoursTo(air.at(first - 1)) / hours;
+            double end = i == air.size() ? ACROSS : ACROSS * hoursTo(air.at(i - 1)) / hours;
+            double top = y(Math.min(air.warmestC(first), highC));
+            double bottom = y(Math.max(air.coldestC(first), lowC));
+            held.append(
+                    String.format(
+                            Locale.ROOT, "M%.1f %.1fH%.1fV%.1fH%.1fz", x, top, end, bottom, x));
+            double y = y(air.settingC(first));
+            setting.append(String.format(Locale.ROOT, "M%.1f %.1fH%.1f", x, y, end));
+            first = i;
+        }
     }
 
     private int hoursABar() {
@@ -86,7 +110,7 @@ final class StripOfDays {
             low = Math.min(low, air.airC(i));
             high = Math.max(high, air.airC(i));
         }
-        boolean out = low < air.coldestC() || high > air.warmestC();
+        boolean out = IntStream.range(first, end).anyMatch(this::outside);
         double x = ACROSS * hoursTo(air.at(first)) / hours;
         double width = 0.8 * ACROSS * (end - first) / air.size();
         double top = y(high);
@@ -101,6 +125,10 @@ final class StripOfDays {
                                 width,
                                 bottom,
                                 width));
+    }
+
+    private boolean outside(int row) {
+        return air.airC(row) < air.coldestC(row) || air.airC(row) > air.warmestC(row);
     }
 
     private double y(double temperatureC) {
@@ -141,9 +169,10 @@ final class StripOfDays {
             high = Math.max(high, air.airC(i));
         }
         List<StripView.Mark> marks = new ArrayList<>();
-        marks.add(mark(air.settingC()));
+        double setC = air.settingC(air.size() - 1);
+        marks.add(mark(setC));
         for (double at : new double[] {high, low}) {
-            if (Math.abs(y(at) - y(air.settingC())) > 14) {
+            if (Math.abs(y(at) - y(setC)) > 14) {
                 marks.add(mark(at));
             }
         }
@@ -156,6 +185,16 @@ final class StripOfDays {
                 figures.temperature(temperatureC));
     }
 
+    private String set() {
+        StringBuilder all = new StringBuilder(figures.temperature(air.settingC(0)));
+        for (int i = 1; i < air.size(); i++) {
+            if (air.settingC(i) != air.settingC(i - 1)) {
+                all.append(", ").append(figures.temperature(air.settingC(i)));
+            }
+        }
+        return all.toString();
+    }
+
     private String text() {
         double low = Double.POSITIVE_INFINITY;
         double high = Double.NEGATIVE_INFINITY;
@@ -163,7 +202,7 @@ final class StripOfDays {
         for (int i = 0; i < air.size(); i++) {
             low = Math.min(low, air.airC(i));
             high = Math.max(high, air.airC(i));
-            outside += air.airC(i) < air.coldestC() || air.airC(i) > air.warmestC() ? 1 : 0;
+            outside += outside(i) ? 1 : 0;
         }
         return words.say(
                 "strip.text",
@@ -171,7 +210,7 @@ final class StripOfDays {
                 figures.time(air.at(air.size() - 1)),
                 figures.temperature(low),
                 figures.temperature(high),
-                figures.temperature(air.settingC()),
+                set(),
                 String.valueOf(outside),
                 String.valueOf(air.size()));
     }

@@ -8,9 +8,8 @@ import java.util.List;
  *
  * @param inside path of the bars inside
  * @param outside path of the bars outside
- * @param settingY height of the setting
- * @param bandY top of what counts as held
- * @param bandHeight its height
+ * @param setting path of the setting, a dash for each
+ * @param held path of what counts as held, a box for each setting
  * @param days names and borders of days
  * @param marks temperatures at the side
  * @param text the same in words
@@ -19,9 +18,8 @@ import java.util.List;
 public record StripView(
         String inside,
         String outside,
-        String settingY,
-        String bandY,
-        String bandHeight,
+        String setting,
+        String held,
         List<Day> days,
         List<Mark> marks,
         String text,
