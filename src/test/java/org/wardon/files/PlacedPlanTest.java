@@ -5,11 +5,14 @@ import static org.junit.jupiter.api.Assertions.assertEquals;
 import java.io.IOException;
 import java.nio.file.Files;
 import java.nio.file.Path;
+import java.time.LocalDateTime;
 import java.util.List;
+import java.util.OptionalDouble;
 import org.junit.jupiter.api.Test;
 import org.wardon.cooling.Setting;
 import org.wardon.plan.ChamberPlan;
 import org.wardon.plan.LotPlan;
+import org.wardon.plan.SettingChange;
 import org.wardon.plan.StorePlan;
 
 /** A placing written into the keeper's plan touches nothing else of it. */
@@ -48,6 +51,26 @@ class PlacedPlanTest {
                                 "\"capacityKg\": 4500\n",
                                 "\"capacityKg\": 4500,\n      \"off\": true\n");
         assertEquals(expected, changed);
+    }
+
+    @Test
+    void laterSettingsAreWrittenChangedAndTakenOut() throws IOException {
+        String text = Files.readString(DEMO);
+        StorePlan asked = PlanReader.read(DEMO, TableLookups.read());
+        SettingChange later =
+                new SettingChange(LocalDateTime.of(2026, 3, 5, 6, 0), 4.5, OptionalDouble.of(95));
+        List<ChamberPlan> chambers = new java.util.ArrayList<>(asked.chambers());
+        chambers.set(1, chambers.get(1).changing(List.of(later)));
+        StorePlan changed = asked.with(chambers, asked.lots());
+        String written = PlacedPlan.changed(text, asked, changed);
+        assertEquals(
+                text.replace(
+                        "\"capacityKg\": 4500\n",
+                        "\"capacityKg\": 4500,\n      \"settingChanges\": [{\"from\":"
+                                + " \"2026-03-05T06:00\", \"temperatureC\": 4.5,"
+                                + " \"humidityPct\": 95}]\n"),
+                written);
+        assertEquals(text, PlacedPlan.changed(written, changed, asked));
     }
 
     @Test

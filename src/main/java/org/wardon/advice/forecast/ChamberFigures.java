@@ -50,7 +50,7 @@ final class ChamberFigures {
                 holding.hoursDisturbed(),
                 holding.pullDownHours(),
                 changes(holding),
-                peakW(ideal.hours(), holding),
+                peakW(ideal.hours()),
                 max(hours, hours::coolingW),
                 intake,
                 new MeanMax(mean(hours, hours::respirationW), max(hours, hours::respirationW)),
@@ -83,25 +83,33 @@ final class ChamberFigures {
                 .toList();
     }
 
-    /** The highest load, but for the hours in which the air is brought to a later setting. */
-    private double peakW(Hours ideal, Holding holding) {
+    /**
+     * The highest load, but for the hours after a later setting in which walls and racks follow,
+     * which may take their time: up to the next arrival, three at least and twelve at most.
+     */
+    private double peakW(Hours ideal) {
         SettingCourse settings = outcome.model().settings(chamber);
         double most = 0;
         for (int i = 0; i < ideal.size(); i++) {
             double at = ideal.atS(i);
             double sinceS = settings.sinceS(Math.nextDown(at));
-            double coming =
-                    holding.stretches().stream()
-                            .filter(stretch -> stretch.fromS() == sinceS)
-                            .mapToDouble(s -> s.hoursToReach().orElse(Holding.DISTURBED_HOURS))
-                            .findFirst()
-                            .orElse(0);
-            double leftOut = Math.min(Math.max(coming, 1), Holding.DISTURBED_HOURS);
-            if (sinceS <= 0 || at > sinceS + leftOut * Timeline.HOUR_S) {
+            if (sinceS <= 0 || at > sinceS + leftOutS(sinceS)) {
                 most = Math.max(most, ideal.coolingW(i));
             }
         }
         return most;
+    }
+
+    private double leftOutS(double changeS) {
+        double most = Holding.DISTURBED_HOURS * Timeline.HOUR_S;
+        double least = Holding.PULLED_DOWN_HOURS * Timeline.HOUR_S;
+        double next =
+                outcome.model().visitsIn(chamber.id()).stream()
+                        .mapToDouble(visit -> visit.arrivesS() - changeS)
+                        .filter(after -> after >= 0)
+                        .min()
+                        .orElse(most);
+        return Math.min(Math.max(next, least), most);
     }
 
     /** What the grid's electricity costs; that of panels is had for nothing. */

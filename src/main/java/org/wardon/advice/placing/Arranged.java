@@ -54,8 +54,7 @@ final class Arranged {
         Course course = Objects.requireNonNull(tried.chambers().get(chamber.id()));
         return new Arrangement.There(
                 chamber.id(),
-                new PlaceAnswer.Dial(
-                        chamber.setting().temperatureC(), chamber.setting().humidityPct()),
+                dial(chamber),
                 chamber.off(),
                 !chamber.coolers().isEmpty()
                         || chamber.heaterW() > 0
@@ -92,5 +91,15 @@ final class Arranged {
             volume = Math.max(volume, m3);
         }
         return new Arrangement.Filled(mass, chamber.capacityKg(), volume, Draft.roomM3(chamber));
+    }
+
+    /** What is dialled in, and when. */
+    static PlaceAnswer.Dial dial(ChamberPlan chamber) {
+        return new PlaceAnswer.Dial(
+                chamber.setting().temperatureC(),
+                chamber.setting().humidityPct(),
+                chamber.use().changes().stream()
+                        .map(later -> new PlaceAnswer.Later(later.from(), later.temperatureC()))
+                        .toList());
     }
 }

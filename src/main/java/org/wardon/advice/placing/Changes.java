@@ -6,6 +6,7 @@ import java.util.Optional;
 import org.wardon.files.forecast.PlaceAnswer.Change;
 import org.wardon.plan.ChamberPlan;
 import org.wardon.plan.LotPlan;
+import org.wardon.plan.SettingChange;
 import org.wardon.plan.StorePlan;
 import org.wardon.produce.Reason;
 import org.wardon.produce.Reason.Argument;
@@ -52,10 +53,32 @@ final class Changes {
         List<Said<Change>> changes = new ArrayList<>();
         for (int i = 0; i < now.chambers().size(); i++) {
             ChamberPlan was = now.chambers().get(i);
-            setting(was, then.chambers().get(i))
-                    .ifPresent(reason -> changes.add(said(was.id(), reason)));
+            ChamberPlan is = then.chambers().get(i);
+            setting(was, is).ifPresent(reason -> changes.add(said(was.id(), reason)));
+            if (!is.off() && !is.use().changes().equals(was.use().changes())) {
+                later(is).forEach(reason -> changes.add(said(was.id(), reason)));
+            }
         }
         return changes;
+    }
+
+    /** What is dialled in later, and until when what comes first stays. */
+    private static List<Reason> later(ChamberPlan is) {
+        return is.use().changes().stream()
+                .map(
+                        change ->
+                                Reason.about(
+                                        "place-dial-later",
+                                        is.id(),
+                                        RULE,
+                                        when(change),
+                                        Argument.of(change.temperatureC(), "C")))
+                .toList();
+    }
+
+    /** From when a later setting is in force, in words. */
+    static Argument when(SettingChange change) {
+        return Argument.text(change.from().toLocalDate() + " at " + change.from().toLocalTime());
     }
 
     private static Optional<Reason> setting(ChamberPlan was, ChamberPlan is) {
@@ -66,8 +89,13 @@ final class Changes {
                             ? Reason.about("place-switch-off", is.id(), RULE)
                             : Reason.about("place-switch-on", is.id(), RULE, at));
         }
-        if (is.off() || is.setting().temperatureC() == was.setting().temperatureC()) {
+        boolean same = is.setting().temperatureC() == was.setting().temperatureC();
+        if (is.off() || (same && is.use().changes().equals(was.use().changes()))) {
             return Optional.empty();
+        }
+        if (same) {
+            String code = is.use().changes().isEmpty() ? "place-throughout" : "place-keep";
+            return Optional.of(Reason.about(code, is.id(), RULE, at));
         }
         Argument before = Argument.of(was.setting().temperatureC(), "C");
         return Optional.of(Reason.about("place-dial", is.id(), RULE, at, before));

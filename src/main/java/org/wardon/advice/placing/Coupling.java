@@ -95,10 +95,10 @@ final class Coupling {
         Candidate best = new Ranked(trial.plan().wish()).best(candidates);
         List<Options.Dial> dials = new ArrayList<>();
         for (Optional<Option> option : best.sought().chosen()) {
-            if (option.isPresent() && option.get().riseK() == 0) {
+            if (option.isPresent() && option.get().riseK() == 0 && !option.get().changes()) {
                 ChamberPlan on = option.get().chamber();
-                dials.add(new Options.Dial(on, option.get().settingC() - 1));
-                dials.add(new Options.Dial(on, option.get().settingC() + 1));
+                dials.add(Options.Dial.at(on, option.get().settingC() - 1));
+                dials.add(Options.Dial.at(on, option.get().settingC() + 1));
             }
         }
         Map<String, List<Option>> more = new LinkedHashMap<>(known);
@@ -109,7 +109,7 @@ final class Coupling {
     }
 
     private static List<Option> with(List<Option> before, Option option) {
-        if (before.stream().anyMatch(one -> one.settingC() == option.settingC())) {
+        if (before.stream().anyMatch(one -> one.setAs(option.chamber()))) {
             return before;
         }
         List<Option> all = new ArrayList<>(before);
@@ -122,6 +122,7 @@ final class Coupling {
         List<Object> key = new ArrayList<>();
         for (int c = 0; c < sought.chambers().size(); c++) {
             key.add(sought.chosen().get(c).map(Option::settingC));
+            key.add(sought.chosen().get(c).map(o -> o.chamber().use().changes()));
             key.add(sought.placing().chambers().get(c).lots());
         }
         return key;
@@ -171,7 +172,7 @@ final class Coupling {
     }
 
     private static boolean like(Option a, Option b) {
-        return a.settingC() == b.settingC() && a.riseK() == b.riseK();
+        return a.setAs(b.chamber()) && a.riseK() == b.riseK();
     }
 
     /** How much more heat its lots gave on each day than what it holds its setting with, W. */
@@ -198,7 +199,8 @@ final class Coupling {
                 sum += used.air().temperatureC((24.0 * day + h) * 3_600);
             }
             double band = used.chamber().setting().bandK();
-            double mean = Math.max(sum / 24, used.riseK() > 0 ? -100 : used.settingC());
+            double mean =
+                    Math.max(sum / 24, used.riseK() > 0 || used.changes() ? -100 : used.settingC());
             most[day] = mean + (used.riseK() > 0 ? 0 : band + BESIDE_BAND_K);
         }
         return most;

@@ -164,7 +164,12 @@ final class Draft {
         }
         Climate climate =
                 new Climate(
-                        chamber.id() + " " + option.settingC() + " " + option.riseK(),
+                        chamber.id()
+                                + " "
+                                + option.settingC()
+                                + " "
+                                + option.riseK()
+                                + (option.changes() ? " " + option.chamber().use().changes() : ""),
                         worth,
                         heat,
                         companions.losses(option, task.items()));

@@ -35,7 +35,10 @@ final class Gains {
         List<Said<Worth>> worth = new ArrayList<>();
         for (int c = 0; c < sought.chambers().size(); c++) {
             Optional<Option> now = sought.chosen().get(c);
-            if (now.isPresent() && now.get().riseK() == 0 && !sought.in(c).isEmpty()) {
+            if (now.isPresent()
+                    && now.get().riseK() == 0
+                    && !now.get().changes()
+                    && !sought.in(c).isEmpty()) {
                 worth.add(kelvin(sought, c, now.get(), -1));
                 worth.add(kelvin(sought, c, now.get(), 1));
             }
@@ -45,9 +48,8 @@ final class Gains {
 
     private Said<Worth> kelvin(Sought sought, int chamber, Option now, int kelvin) {
         Option beside =
-                options.of(List.of(new Options.Dial(now.chamber(), now.settingC() + kelvin)))
-                        .get(0);
-        Option base = options.of(List.of(new Options.Dial(now.chamber(), now.settingC()))).get(0);
+                options.of(List.of(Options.Dial.at(now.chamber(), now.settingC() + kelvin))).get(0);
+        Option base = options.of(List.of(Options.Dial.at(now.chamber(), now.settingC()))).get(0);
         double gain =
                 sought.assumed(beside, sought.in(chamber))
                         - sought.assumed(base, sought.in(chamber));

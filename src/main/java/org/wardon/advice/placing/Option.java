@@ -48,6 +48,17 @@ record Option(
         return chamber.setting().temperatureC();
     }
 
+    /** Whether its setting changes on the way. */
+    boolean changes() {
+        return !chamber.use().changes().isEmpty();
+    }
+
+    /** Whether it is set just as another is. */
+    boolean setAs(ChamberPlan other) {
+        return settingC() == other.setting().temperatureC()
+                && chamber.use().changes().equals(other.use().changes());
+    }
+
     Cell cell(int lot) {
         return cells.get(lot);
     }

@@ -12,8 +12,10 @@ import java.util.stream.IntStream;
 import org.wardon.advice.forecast.LotInAir;
 import org.wardon.advice.forecast.StoreTrial;
 import org.wardon.advice.forecast.TrialLot;
+import org.wardon.air.Timeline;
 import org.wardon.cooling.Cooler;
 import org.wardon.cooling.Setting;
+import org.wardon.cooling.SettingCourse;
 import org.wardon.heat.AirSeries;
 import org.wardon.heat.Course;
 import org.wardon.heat.Hours;
@@ -89,9 +91,35 @@ final class Options {
             double nowC = on.setting().temperatureC();
             List<Double> tried =
                     keeps(on) ? temperatures.in(nowC, reach(on.id()).lowestC()) : List.of(nowC);
-            tried.forEach(c -> dials.add(new Dial(on, c)));
+            tried.forEach(c -> dials.add(Dial.at(on, c)));
+            if (!on.use().changes().isEmpty()) {
+                dials.add(new Dial(on));
+            }
         }
-        return byChamber(dials);
+        Map<String, List<Option>> steady = byChamber(dials);
+        return withCourses(steady);
+    }
+
+    /** Adds courses of two settings where they promise more than one setting. */
+    private Map<String, List<Option>> withCourses(Map<String, List<Option>> steady) {
+        Courses courses = new Courses(trial);
+        List<Dial> dials = new ArrayList<>();
+        for (ChamberPlan chamber : trial.plan().chambers()) {
+            if (keeps(chamber.switchedOn())) {
+                List<Option> single =
+                        Objects.requireNonNull(steady.get(chamber.id())).stream()
+                                .filter(option -> !option.changes() && option.riseK() == 0)
+                                .toList();
+                courses.of(single).stream()
+                        .filter(set -> !set.use().changes().equals(chamber.use().changes()))
+                        .forEach(set -> dials.add(new Dial(set)));
+            }
+        }
+        Map<String, List<Option>> all = new LinkedHashMap<>(steady);
+        for (Option option : of(dials)) {
+            Objects.requireNonNull(all.get(option.chamber().id())).add(option);
+        }
+        return all;
     }
 
     /** What the chambers that run make at the settings of the plan. */
@@ -99,7 +127,7 @@ final class Options {
         return byChamber(
                 trial.plan().chambers().stream()
                         .filter(chamber -> !chamber.off())
-                        .map(chamber -> new Dial(chamber, chamber.setting().temperatureC()))
+                        .map(Dial::new)
                         .toList());
     }
 
@@ -112,8 +140,16 @@ final class Options {
         return options;
     }
 
-    /** A chamber to be tried at a setting. */
-    record Dial(ChamberPlan on, double settingC) {}
+    /** A chamber to be tried as it is set. */
+    record Dial(ChamberPlan set) {
+        /** At one setting throughout. */
+        static Dial at(ChamberPlan on, double settingC) {
+            Setting now = on.setting();
+            return new Dial(
+                    on.withSetting(
+                            new Setting(settingC, now.bandK(), now.humidityPct(), now.stageK())));
+        }
+    }
 
     /** The options of chambers at settings, in their order. */
     List<Option> of(List<Dial> dials) {
@@ -137,15 +173,7 @@ final class Options {
     }
 
     private List<Sketch> sketches(Dial dial) {
-        Setting now = dial.on().setting();
-        ChamberPlan set =
-                dial.on()
-                        .withSetting(
-                                new Setting(
-                                        dial.settingC(),
-                                        now.bandK(),
-                                        now.humidityPct(),
-                                        now.stageK()));
+        ChamberPlan set = dial.set();
         Course empty = trial.sketch(set, List.of(), 1, 0);
         Loaded loaded = loaded(set, empty);
         List<Sketch> sketches = new ArrayList<>();
@@ -249,6 +277,7 @@ final class Options {
         double off = set.setting().bandK() + BESIDE_BAND_K;
         double settingC = set.setting().temperatureC();
         return holds(set)
+                && set.use().changes().isEmpty()
                 && Arrays.stream(mean).allMatch(c -> c <= settingC + off)
                 && Arrays.stream(mean).average().orElse(settingC) >= settingC - off;
     }
@@ -275,10 +304,13 @@ final class Options {
         boolean keeps = keeps(set);
         boolean holds = holds(set);
         Reach reach = reach(set.id());
-        double settingC = set.setting().temperatureC();
+        SettingCourse settings = set.settings(trial.plan().timeline());
         return IntStream.range(0, trial.days())
                 .mapToObj(
                         day -> {
+                            double settingC =
+                                    settings.coldestC(
+                                            day * Timeline.DAY_S, (day + 1) * Timeline.DAY_S);
                             double at = keeps ? Math.max(emptyC[day], settingC) : emptyC[day];
                             double beside = holds ? set.setting().bandK() + BESIDE_BAND_K : riseK;
                             return Math.max(0, reach.takesW(day, at + beside));
@@ -322,11 +354,19 @@ final class Options {
         if (lot.model().uncured() && !set.coolers().isEmpty() && !accepts(set, Conflict.UNCURED)) {
             return Cell.Forbidden.UNCURED;
         }
-        double coldest = figures.meanC() - 0.5 * set.setting().bandK();
+        double hereC = set.use().changes().isEmpty() ? figures.meanC() : coldestC(lot, set);
+        double coldest = hereC - 0.5 * set.setting().bandK();
         if (coldest < lot.model().freezingC() + FREEZING_MARGIN_K) {
             return Cell.Forbidden.FREEZING;
         }
         return there.shareSound() > 0 ? Cell.Forbidden.NO : Cell.Forbidden.LOST;
+    }
+
+    /** Lowest setting while a lot is here, °C. */
+    private double coldestC(TrialLot lot, ChamberPlan set) {
+        double fromS = Math.max(0, lot.hereFromS());
+        double untilS = Math.max(fromS, Math.min(lot.leavesS(), trial.plan().durationS()));
+        return set.settings(trial.plan().timeline()).coldestC(fromS, untilS);
     }
 
     boolean accepts(ChamberPlan chamber, Conflict conflict) {

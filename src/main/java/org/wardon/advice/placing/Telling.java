@@ -14,6 +14,7 @@ import org.wardon.files.forecast.PlaceAnswer.Placed;
 import org.wardon.files.forecast.PlaceAnswer.Unplaced;
 import org.wardon.plan.ChamberPlan;
 import org.wardon.plan.PlaceWish;
+import org.wardon.plan.SettingChange;
 import org.wardon.produce.Reason;
 import org.wardon.produce.Reason.Argument;
 
@@ -85,9 +86,7 @@ final class Telling {
             double airC = DayMeans.whole(course.hours(), course.hours()::airC);
             List<String> lots =
                     sought.in(c).stream().map(item -> item.lot().id()).distinct().toList();
-            PlaceAnswer.Dial dial =
-                    new PlaceAnswer.Dial(
-                            chamber.setting().temperatureC(), chamber.setting().humidityPct());
+            PlaceAnswer.Dial dial = Arranged.dial(chamber);
             placed.add(
                     new Said<>(
                             text -> new Placed(chamber.id(), dial, chamber.off(), airC, lots, text),
@@ -113,13 +112,20 @@ final class Telling {
                     Argument.of(airC, "C"),
                     money.argument(kept));
         }
-        return Reason.about(
-                "place-set",
-                chamber.id(),
-                RULE,
-                Argument.of(chamber.setting().temperatureC(), "C"),
-                Argument.of(airC, "C"),
-                money.argument(kept));
+        List<SettingChange> later = chamber.use().changes();
+        List<Argument> told = new ArrayList<>();
+        told.add(Argument.of(chamber.setting().temperatureC(), "C"));
+        told.add(Argument.of(airC, "C"));
+        told.add(money.argument(kept));
+        if (!later.isEmpty()) {
+            told.add(Changes.when(later.get(0)));
+            told.add(Argument.of(later.get(0).temperatureC(), "C"));
+        }
+        String code =
+                later.isEmpty()
+                        ? "place-set"
+                        : later.size() > 1 ? "place-set-on" : "place-set-then";
+        return Reason.about(code, chamber.id(), RULE, told.toArray(new Argument[0]));
     }
 
     private List<Said<Unplaced>> unplaced(Sought sought) {

@@ -21,11 +21,10 @@ final class Trials {
     static Map<String, List<Option>> asSet(StorePlan plan, Map<String, List<Option>> all) {
         Map<String, List<Option>> set = new LinkedHashMap<>();
         for (ChamberPlan chamber : plan.chambers()) {
-            double nowC = chamber.setting().temperatureC();
             List<Option> options = all.getOrDefault(chamber.id(), List.of());
             set.put(
                     chamber.id(),
-                    options.stream().filter(option -> option.settingC() == nowC).toList());
+                    options.stream().filter(option -> option.setAs(chamber)).toList());
         }
         return set;
     }

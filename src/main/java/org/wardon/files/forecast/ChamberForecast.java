@@ -18,8 +18,8 @@ import java.util.OptionalDouble;
  * @param pullDownHours from the first arrival until the air has been inside for 3 h; absent where
  *     never
  * @param settingChanges later settings, and how long the air took to come to each
- * @param peakLoadW highest hourly load with the air held ideally, W; hours in which the air is
- *     brought to a later setting left out, at most twelve, since that may take its time
+ * @param peakLoadW highest hourly load with the air held ideally, W; hours after a later setting
+ *     left out, up to the next arrival, three at least and twelve at most
  * @param removedPeakW highest hourly heat really removed, W
  * @param intakeKgPerDay largest warm intake a day, kg; absent where the chamber can take none to
  *     its setting or has no cooler

@@ -1,5 +1,7 @@
 package org.wardon.files.forecast;
 
+import com.fasterxml.jackson.annotation.JsonInclude;
+import java.time.LocalDateTime;
 import java.util.List;
 import java.util.OptionalDouble;
 
@@ -78,8 +80,25 @@ public record PlaceAnswer(
      *
      * @param temperatureC air temperature, °C
      * @param humidityPct humidity wished for, percent
+     * @param later other settings from later times on
      */
-    public record Dial(double temperatureC, double humidityPct) {}
+    public record Dial(
+            double temperatureC,
+            double humidityPct,
+            @JsonInclude(JsonInclude.Include.NON_EMPTY) List<Later> later) {
+        /** Copies the list. */
+        public Dial {
+            later = List.copyOf(later);
+        }
+    }
+
+    /**
+     * What to dial in later.
+     *
+     * @param from local time from which on
+     * @param temperatureC air temperature, °C
+     */
+    public record Later(LocalDateTime from, double temperatureC) {}
 
     /**
      * Something that is to be otherwise than in the plan.

@@ -111,10 +111,10 @@ final class Curves {
         }
         List<ChartData.Line> lines = new ArrayList<>(data.lines());
         List<Double> steps = new ArrayList<>();
-        for (int i = 0; i < Math.min(told.size(), data.time().size()); i++) {
-            steps.add(figures.shownTemperature(told.settingC(i)));
+        for (int i = 0; i < data.time().size(); i++) {
+            steps.add(told.settingC(Math.min(i, told.size() - 1)));
         }
-        lines.add(new ChartData.Line(words.say("curve.setting"), "fourth", steps));
+        lines.add(new ChartData.Line("settingC", words.say("curve.setting"), "fourth", steps));
         return new ChartData(data.unit(), data.time(), lines, data.levels());
     }
 

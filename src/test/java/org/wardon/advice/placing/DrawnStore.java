@@ -33,6 +33,7 @@ final class DrawnStore {
     private final List<String> chambers = new ArrayList<>();
     private final List<String> lots = new ArrayList<>();
     private String members = "";
+    private int days = 5;
 
     /** Two panel rooms, one too small for all, and a shed. */
     static DrawnStore of(int seed, int lots) {
@@ -105,6 +106,12 @@ final class DrawnStore {
         return this;
     }
 
+    /** How long it runs, days. */
+    DrawnStore days(int howLong) {
+        days = howLong;
+        return this;
+    }
+
     /** The same with lots and chambers in the other order. */
     DrawnStore turned() {
         Collections.reverse(chambers);
@@ -117,10 +124,10 @@ final class DrawnStore {
         {"storePlan": 1, "name": "drawn (invented)",
          "site": {"latitudeDeg": 12, "longitudeDeg": -61, "elevationM": 10, "zone": "UTC"},
          "weather": {"steady": {"temperatureC": 28, "humidityPct": 75}},
-         "from": "2026-03-02T00:00", "days": 5, "energyPricePerKWh": 0.3,
+         "from": "2026-03-02T00:00", "days": %d, "energyPricePerKWh": 0.3,
          "chambers": [%s], "lots": [%s]%s}
         """
-                .formatted(String.join(",", chambers), String.join(",", lots), members);
+                .formatted(days, String.join(",", chambers), String.join(",", lots), members);
     }
 
     StorePlan plan(Path folder, ReferenceBook book) {

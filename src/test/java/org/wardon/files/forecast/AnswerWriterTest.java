@@ -202,6 +202,7 @@ class AnswerWriterTest {
                         1,
                         12,
                         OptionalDouble.empty(),
+                        List.of(),
                         3000,
                         2500,
                         OptionalDouble.of(600),
