@@ -27,8 +27,7 @@ public final class ChamberNetwork implements TreeSystem {
     private final WettedWalls wettedWalls;
     private final List<StructurePart> structure = new ArrayList<>();
     private final CoolerPart[] coolers;
-    private final List<IdealCooler> ideal = new ArrayList<>();
-    private final int idealFlowAt;
+    private final List<IdealCooler> ideal;
     private final AirEnd.Equipment[] equipment;
     private final Mixing[] mixing;
     private final int mixingFlowAt;
@@ -64,7 +63,8 @@ public final class ChamberNetwork implements TreeSystem {
         coolers = unlimited ? new CoolerPart[0] : CoolerParts.of(tree, this::take, inputs);
         faces.drivenBy(coolers);
         ends[AirEnd.COIL].add(List.of(coolers));
-        idealFlowAt = unlimited ? addIdeal() : NONE;
+        ideal = unlimited ? List.of(ideal()) : List.of();
+        ends[AirEnd.COIL].add(ideal);
         equipment = new AirEnd.Equipment[ends.length];
         for (int e = 0; e < ends.length; e++) {
             equipment[e] = ends[e].equip(this::take, inputs, dryAirKg(1), coolers);
@@ -90,12 +90,9 @@ public final class ChamberNetwork implements TreeSystem {
         hour(0);
     }
 
-    private int addIdeal() {
-        int flowAt = take(IdealCooler.FLOWS);
+    private IdealCooler ideal() {
         double airOfAll = dryAirKg(inputs.enclosure().box().volumeM3());
-        ideal.add(IdealCooler.of(flowAt, inputs, airOfAll));
-        ends[AirEnd.COIL].add(ideal);
-        return flowAt;
+        return IdealCooler.of(take(IdealCooler.FLOWS), inputs, airOfAll);
     }
 
     /** Number of the end a lot stands in. */
@@ -212,6 +209,7 @@ public final class ChamberNetwork implements TreeSystem {
         for (int e = 0; e < ends.length; e++) {
             ofEnds[e] = equipment[e].flows();
         }
+        int idealFlowAt = ideal.isEmpty() ? NONE : ideal.get(0).flowAt();
         return new Terms(faces, coolers, idealFlowAt, mixingFlowAt, ofEnds);
     }
 
@@ -413,9 +411,7 @@ public final class ChamberNetwork implements TreeSystem {
     public void set(Setting setting) {
         CoolerParts.set(coolers, setting, inputs.tuning().thermostatOffsetK());
         ideal.forEach(one -> one.set(setting));
-        for (AirEnd.Equipment one : equipment) {
-            one.gains().set(setting);
-        }
+        List.of(equipment).forEach(one -> one.gains().set(setting));
     }
 
     /**

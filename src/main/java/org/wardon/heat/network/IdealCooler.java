@@ -62,6 +62,10 @@ final class IdealCooler implements Part {
         return cooler;
     }
 
+    int flowAt() {
+        return flowAt;
+    }
+
     void set(Setting setting) {
         keptC = setting.temperatureC() - offsetK;
     }

@@ -233,7 +233,7 @@ final class PlacingViews {
     private static boolean isAlike(Arrangement.There now, Arrangement.There then) {
         return now.lots().equals(then.lots())
                 && now.off() == then.off()
-                && now.setting().temperatureC() == then.setting().temperatureC();
+                && now.setting().equals(then.setting());
     }
 
     private Optional<RulerView> ruler(RulerViews views, Arrangement.There there, String key) {
@@ -276,8 +276,7 @@ final class PlacingViews {
         for (int c = 0; c < report.then().chambers().size(); c++) {
             Arrangement.There was = report.present().chambers().get(c);
             Arrangement.There is = report.then().chambers().get(c);
-            if (was.off() != is.off()
-                    || was.setting().temperatureC() != is.setting().temperatureC()) {
+            if (was.off() != is.off() || !was.setting().equals(is.setting())) {
                 rows.add(List.of(is.id(), dial(is), dialled(now, is.id())));
             }
         }
@@ -298,9 +297,7 @@ final class PlacingViews {
     }
 
     private String dial(Arrangement.There there) {
-        return there.off()
-                ? say.say("placing.off")
-                : say.say("placing.set", figures.temperature(there.setting().temperatureC()));
+        return there.off() ? say.say("placing.off") : SpreadViews.dial(there, say, figures);
     }
 
     private String dialled(org.wardon.plan.StorePlan now, String id) {

@@ -98,9 +98,17 @@ final class SpreadViews {
         if (there.off()) {
             return say.say("placing.off");
         }
-        return there.dialled()
-                ? say.say("placing.set", figures.temperature(there.setting().temperatureC()))
-                : say.say("placing.not-dialled");
+        return there.dialled() ? dial(there, say, figures) : say.say("placing.not-dialled");
+    }
+
+    /** What is dialled in, and later. */
+    static String dial(Arrangement.There there, PageWords say, Figures figures) {
+        String all = figures.temperature(there.setting().temperatureC());
+        for (PlaceAnswer.Later later : there.setting().later()) {
+            String to = figures.temperature(later.temperatureC());
+            all = say.say("chamber.then", all, figures.time(later.from()), to);
+        }
+        return say.say("placing.set", all);
     }
 
     private String air(Arrangement.There there) {
