@@ -7,6 +7,7 @@ import java.util.function.Consumer;
 import org.wardon.errors.BadInput;
 import org.wardon.errors.RunStopped;
 import org.wardon.web.api.Api;
+import org.wardon.web.api.page.ApiPage;
 import org.wardon.web.api.route.Unreadable;
 import org.wardon.web.chamber.ChamberAnswers;
 import org.wardon.web.chamber.ChamberPage;
@@ -144,6 +145,7 @@ final class Routes {
     private void api() {
         Api api = new Api(bench, press.words(), guard, answers);
         api.addTo(routes);
+        routes.get("/api", call(new ApiPage(press, api.document())::show));
     }
 
     private void troubles() {

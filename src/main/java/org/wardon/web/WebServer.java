@@ -6,6 +6,8 @@ import io.javalin.config.JavalinConfig;
 import io.javalin.config.SizeUnit;
 import java.nio.file.Path;
 import java.util.Optional;
+import java.util.Set;
+import java.util.TreeSet;
 import java.util.concurrent.atomic.AtomicInteger;
 import org.eclipse.jetty.server.HttpConfiguration;
 import org.eclipse.jetty.util.thread.QueuedThreadPool;
@@ -131,6 +133,16 @@ public final class WebServer implements AutoCloseable {
      */
     public Optional<Path> secretFile() {
         return secret.file();
+    }
+
+    /** Every route below a path, such as {@code GET /api/plans}. */
+    Set<String> routesBelow(String path) {
+        Set<String> routes = new TreeSet<>();
+        javalin.unsafe.internalRouter.allHttpHandlers().stream()
+                .map(one -> one.endpoint)
+                .filter(one -> one.method.isHttpMethod() && one.path.startsWith(path))
+                .forEach(one -> routes.add(one.method.name() + " " + one.path));
+        return routes;
     }
 
     @Override

@@ -6,7 +6,11 @@ import static org.junit.jupiter.api.Assertions.assertNotEquals;
 import static org.junit.jupiter.api.Assertions.assertThrows;
 import static org.junit.jupiter.api.Assertions.assertTrue;
 
+import java.io.IOException;
+import java.io.UncheckedIOException;
+import java.nio.file.Files;
 import java.nio.file.Path;
+import java.nio.file.attribute.PosixFilePermissions;
 import java.time.Clock;
 import java.time.Duration;
 import java.time.Instant;
@@ -18,6 +22,7 @@ import java.util.concurrent.ExecutorService;
 import java.util.concurrent.Executors;
 import java.util.concurrent.Future;
 import java.util.stream.IntStream;
+import java.util.stream.Stream;
 import org.junit.jupiter.api.AfterEach;
 import org.junit.jupiter.api.BeforeEach;
 import org.junit.jupiter.api.Test;
@@ -173,9 +178,11 @@ class GuardTest {
                 "/nope",
                 "/static/x/wardon.css",
                 "/static/0/../1",
+                "/api",
                 "/api/plans",
+                "/api/openapi.json",
                 "/api/nope",
-                "/plan/1/air/x"
+                "/plan/1/chamber/x"
             })
     void everyAnswerCarriesThePolicyAndIsNotStored(String path) {
         Answer answer = http.get(path);
@@ -346,6 +353,205 @@ class GuardTest {
             }
         } finally {
             people.shutdown();
+        }
+    }
+
+    private static void problem(Answer answer, int status, String title) {
+        assertEquals(status, answer.status(), answer.head());
+        assertEquals("application/problem+json", answer.header("Content-Type"));
+        assertTrue(answer.body().contains("\"title\" : \"" + title + "\""), answer.body());
+        assertEquals(POLICY, answer.header("Content-Security-Policy"));
+        assertFalse(answer.body().contains("\tat "), answer.body());
+    }
+
+    private String secret() {
+        try {
+            return "Authorization: Bearer " + Files.readString(home.resolve("api-secret")).strip();
+        } catch (IOException e) {
+            throw new UncheckedIOException(e);
+        }
+    }
+
+    @Test
+    void programsChangeNothingWithoutTheSecret() {
+        String unknown = "Who asks is not known";
+        String wrong = "Who asks is not known: the secret is wrong or too old";
+        Visitor me = http.visitor("/plans");
+        String cookie = "Cookie: " + me.cookie();
+        problem(http.send("POST", "/api/plans/demo", ""), 401, unknown);
+        for (String given :
+                List.of(
+                        "Bearer",
+                        "Bearer ",
+                        "Bearer x",
+                        "Basic YTpi",
+                        "Bearer " + me.cookie().replaceFirst(".*=", ""),
+                        "Bearer " + me.token())) {
+            Answer refused =
+                    http.send(
+                            "POST",
+                            "/api/plans/demo",
+                            "",
+                            "Authorization: " + given,
+                            cookie,
+                            "X-Wardon-Token: " + me.token());
+            problem(refused, 401, wrong);
+            assertEquals("Bearer realm=\"wardon\"", refused.header("WWW-Authenticate"));
+            assertEquals("", refused.header("Set-Cookie"));
+        }
+        String distrusted = "The form could not be trusted, so nothing was done";
+        problem(http.send("POST", "/api/plans/demo", "", cookie), 403, distrusted);
+        problem(
+                http.send("DELETE", "/api/plans/1?version=1", "", cookie, "X-Wardon-Token: x"),
+                403,
+                distrusted);
+        assertEquals("{\n  \"plans\" : [ ]\n}\n", http.get("/api/plans", secret()).body());
+        assertEquals(
+                201,
+                http.send("POST", "/api/plans/demo", "", cookie, "X-Wardon-Token: " + me.token())
+                        .status());
+        Answer known = http.send("POST", "/api/plans/demo", "", secret());
+        assertEquals(201, known.status());
+        assertEquals("", known.header("Set-Cookie"), "a program gets no session");
+    }
+
+    @Test
+    void theSecretOpensTheInterfaceAloneAndNoForeignSiteCanUseIt() {
+        String site = "Another site tried to use this page";
+        Answer page = http.send("POST", "/plans/demo", "a=b", secret());
+        assertEquals(403, page.status(), "pages know no bearer");
+        problem(
+                http.send("POST", "/api/plans/demo", "", secret(), "Origin: http://evil.example"),
+                403,
+                site);
+        problem(
+                http.send("POST", "/api/plans/demo", "", secret(), "Sec-Fetch-Site: cross-site"),
+                403,
+                site);
+        String port = http.host().replaceFirst(".*:", ":");
+        problem(
+                http.get("/api/plans", secret(), "Host: evil.example" + port),
+                421,
+                "This page was asked for under a name that is not its own");
+        problem(
+                http.send("OPTIONS", "/api/plans", "", "Origin: http://" + http.host()),
+                405,
+                "This page cannot be asked in that way");
+        assertEquals("", http.get("/api/plans").header("Access-Control-Allow-Origin"));
+    }
+
+    @Test
+    void theSecretIsItsOwnersAlone() throws IOException {
+        Path file = home.resolve("api-secret");
+        String first = Files.readString(file);
+        assertEquals(
+                "rw-------", PosixFilePermissions.toString(Files.getPosixFilePermissions(file)));
+        server.close();
+        serve(Optional.empty());
+        assertEquals(first, Files.readString(file), "it lasts");
+        server.close();
+        Files.setPosixFilePermissions(file, PosixFilePermissions.fromString("rw-r--r--"));
+        serve(Optional.empty());
+        String second = Files.readString(file);
+        assertNotEquals(first, second, "what others could read is replaced");
+        server.close();
+        Path elsewhere = Files.writeString(home.resolve("elsewhere"), second);
+        Files.delete(file);
+        Files.createSymbolicLink(file, elsewhere);
+        serve(Optional.empty());
+        assertFalse(Files.isSymbolicLink(file));
+        assertNotEquals(second, Files.readString(file));
+        assertEquals(second, Files.readString(elsewhere), "a link is not followed");
+        try (Stream<Path> left = Files.list(home)) {
+            assertEquals(
+                    List.of("api-secret", "elsewhere"),
+                    left.map(one -> one.getFileName().toString()).sorted().toList());
+        }
+    }
+
+    @Test
+    void programsGetInByThePasscodeAndTriesAreLimited() {
+        server.close();
+        serve(Optional.of(new Passcode(CODE, "test", hands)));
+        String json = "Content-Type: application/json";
+        problem(http.get("/api/plans"), 401, "Who asks is not known");
+        problem(http.get("/api/openapi.json"), 401, "Who asks is not known");
+        assertEquals(200, http.get("/api/plans", secret()).status());
+        Answer in = http.send("POST", "/api/enter", "{\"passcode\": \"" + CODE + "\"}", json);
+        assertEquals(200, in.status(), in.body());
+        assertEquals("", in.header("Set-Cookie"));
+        String bearer =
+                "Authorization: Bearer "
+                        + in.body().replaceAll("(?s).*\"bearer\" : \"([^\"]+)\".*", "$1");
+        assertEquals(201, http.send("POST", "/api/plans/demo", "", bearer).status());
+        hands.forward(Duration.ofHours(13));
+        assertEquals(401, http.get("/api/plans", bearer).status(), "it ends after long silence");
+        for (int i = 0; i < 5; i++) {
+            problem(
+                    http.send("POST", "/api/enter", "{\"passcode\": \"guess " + i + "\"}", json),
+                    401,
+                    "The passcode is wrong");
+        }
+        Answer limited = http.send("POST", "/api/enter", "{\"passcode\": \"" + CODE + "\"}", json);
+        problem(limited, 429, "Too many wrong passcodes");
+        assertEquals("300", limited.header("Retry-After"));
+        problem(
+                http.send(
+                        "POST",
+                        "/api/enter",
+                        "{\"passcode\": \"" + CODE + "\"}",
+                        json,
+                        "Origin: http://evil.example"),
+                403,
+                "Another site tried to use this page");
+    }
+
+    @Test
+    void bodiesAreLimitedAndNameNoPath() throws IOException {
+        String json = "Content-Type: application/json";
+        Answer tooMuch =
+                http.exactly(
+                        "POST /api/plans HTTP/1.1\r\nHost: "
+                                + http.host()
+                                + "\r\n"
+                                + secret()
+                                + "\r\n"
+                                + json
+                                + "\r\nContent-Length: 900000000\r\nConnection: close\r\n\r\n");
+        problem(tooMuch, 413, "What was sent is too large");
+        String deep = "{\"plan\": " + "[".repeat(5_000) + "]".repeat(5_000) + "}";
+        Answer nested = http.send("POST", "/api/plans", deep, json, secret());
+        problem(nested, 400, "What was given cannot be used");
+        for (String name : List.of("../../etc/passwd", "/etc/passwd", "a/b.csv", "..", ".x")) {
+            String body =
+                    "{\"plan\": {\"weather\": {\"csv\": \""
+                            + name
+                            + "\"}}, \"evenFaulty\": true, \"files\": {\""
+                            + name
+                            + "\": \"x\"}}";
+            problem(
+                    http.send("POST", "/api/plans", body, json, secret()),
+                    422,
+                    "What was given cannot be used");
+        }
+        Path outside = Files.writeString(home.resolve("weather.csv"), "time,temperatureC\n");
+        String reading =
+                "{\"plan\": {\"weather\": {\"csv\": \"" + outside + "\"}}, \"evenFaulty\": true}";
+        assertEquals(201, http.send("POST", "/api/plans", reading, json, secret()).status());
+        Answer kept = http.get("/api/plans/1");
+        assertTrue(kept.body().contains("is not attached"), kept.body());
+        for (String path :
+                List.of(
+                        "/api/../etc/passwd",
+                        "/api/plans/..%2f..%2fetc",
+                        "/api/plans/1%00",
+                        "/api/plans/99999999999999999999",
+                        "/api/sources/..%2f..%2fetc%2fpasswd",
+                        "/api/jobs/forecast-1-1%0d%0aSet-Cookie:%20a=b",
+                        "/api/crops/%3Cscript%3E")) {
+            Answer answer = http.get(path);
+            assertTrue(answer.status() == 404 || answer.status() == 400, path + answer.head());
+            assertFalse(answer.head().contains("a=b"), answer.head());
         }
     }
 }

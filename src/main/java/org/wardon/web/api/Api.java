@@ -183,9 +183,7 @@ public final class Api {
                         .takes("CheckPlan")
                         .gives(200, Checked.class));
         add(get(PLAN, "readPlan", tag, plans::read).gives(200, PlanSheet.class));
-        add(
-                get(PLAN + "/text", "readPlanText", tag, plans::text)
-                        .givesPlain(200, "text/plain; charset=utf-8"));
+        add(get(PLAN + "/text", "readPlanText", tag, plans::text).givesPlain(200, "text/plain"));
         add(
                 get(PLAN + "/export", "exportPlan", tag, plans::export)
                         .givesPlain(200, "application/json")

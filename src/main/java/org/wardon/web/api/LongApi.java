@@ -156,7 +156,7 @@ final class LongApi {
                 PlanVariants.Variant read = variants.with(name, AnswersApi.texts(one.at("set")));
                 named.add(new Comparison.Named(name, read.plan(), read.changed()));
             } catch (BadInput wrong) {
-                wrong.faults().forEach(fault -> faults.add(at(one.at("set"), fault)));
+                wrong.faults().forEach(fault -> faults.add(at(one.at("set"), name, fault)));
             }
         }
         if (!faults.isEmpty()) {
@@ -176,13 +176,14 @@ final class LongApi {
                 .toList();
     }
 
-    private static Fault at(Part set, Fault fault) {
+    private static Fault at(Part set, String variant, Fault fault) {
         return fault.file().equals("--set")
                 ? new Fault(
                         Requests.BODY,
                         set.path(),
                         (fault.path() + " " + fault.found()).strip(),
                         fault.accepted())
-                : fault;
+                : new Fault(
+                        "variant '" + variant + "'", fault.path(), fault.found(), fault.accepted());
     }
 }

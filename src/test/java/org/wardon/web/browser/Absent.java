@@ -25,8 +25,26 @@ public final class Absent implements TestExecutionListener {
 
     /** Passes over a test, or fails it in CI, where there is no browser. */
     static void orHere() {
+        orHere(CHROMIUM, NODE);
+    }
+
+    /** Passes over a test, or fails it in CI, where there is no Node.js. */
+    public static void nodeOrHere() {
+        orHere(NODE);
+    }
+
+    /**
+     * Returns what runs scripts outside a browser.
+     *
+     * @return its path
+     */
+    public static String node() {
+        return NODE.toString();
+    }
+
+    private static void orHere(Path... needed) {
         Optional<Path> absent =
-                Stream.of(CHROMIUM, NODE).filter(file -> !Files.isExecutable(file)).findFirst();
+                Stream.of(needed).filter(file -> !Files.isExecutable(file)).findFirst();
         if (absent.isEmpty()) {
             return;
         }
@@ -41,7 +59,7 @@ public final class Absent implements TestExecutionListener {
     public void testPlanExecutionFinished(TestPlan plan) {
         if (MISSED.get()) {
             System.err.println(
-                    "NOT CHECKED: the pages in a browser. Install "
+                    "NOT CHECKED: the pages in a browser, or the JSON interface by another client. Install "
                             + CHROMIUM
                             + " and "
                             + NODE

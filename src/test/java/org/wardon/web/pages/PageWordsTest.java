@@ -27,6 +27,7 @@ class PageWordsTest {
     private static final Set<String> FAMILIES =
             Set.of(
                     "room.",
+                    "api.",
                     "api-mend.",
                     "stage.",
                     "light.",

@@ -101,6 +101,10 @@ public final class OpenApi {
         operation.takes().body().ifPresent(name -> told.set("requestBody", body(operation, name)));
         told.set("responses", responses(operation));
         told.set("security", security(operation));
+        JsonNode address = examples.get(operation.id() + ".address");
+        if (address != null) {
+            told.set("x-example-address", address);
+        }
         return told;
     }
 

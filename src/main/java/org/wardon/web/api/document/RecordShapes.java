@@ -1,5 +1,6 @@
 package org.wardon.web.api.document;
 
+import com.fasterxml.jackson.annotation.JsonInclude;
 import java.lang.reflect.AnnotatedParameterizedType;
 import java.lang.reflect.AnnotatedType;
 import java.lang.reflect.ParameterizedType;
@@ -20,7 +21,7 @@ import tools.jackson.databind.util.RawValue;
 
 /**
  * Shapes of answers, read off the records they are written from: every name is there, no other is,
- * and only what may be absent may be null.
+ * only what may be absent may be null, and what is left out where it is absent need not be there.
  */
 final class RecordShapes {
     private static final JsonNodeFactory NODES = JsonNodeFactory.instance;
@@ -63,11 +64,21 @@ final class RecordShapes {
         ObjectNode properties = shape.putObject("properties");
         shape.put("additionalProperties", false);
         for (RecordComponent component : record.getRecordComponents()) {
-            required.add(component.getName());
-            ObjectNode property = shape(component.getAnnotatedType());
+            boolean leftOut = component.getAccessor().isAnnotationPresent(JsonInclude.class);
+            if (!leftOut) {
+                required.add(component.getName());
+            }
+            ObjectNode property = leftOut ? given(component) : shape(component.getAnnotatedType());
             property.put("description", words.field(name + "." + component.getName()));
             properties.set(component.getName(), property);
         }
+    }
+
+    /** What stands there where it is not left out. */
+    private ObjectNode given(RecordComponent component) {
+        return component.getAnnotatedType() instanceof AnnotatedParameterizedType optional
+                ? shape(optional.getAnnotatedActualTypeArguments()[0])
+                : shape(component.getAnnotatedType());
     }
 
     private ObjectNode shape(AnnotatedType annotated) {

@@ -5,14 +5,12 @@ import org.wardon.web.api.route.Requests;
 import tools.jackson.databind.JsonNode;
 import tools.jackson.databind.json.JsonMapper;
 import tools.jackson.databind.node.ArrayNode;
-import tools.jackson.databind.node.JsonNodeFactory;
 import tools.jackson.databind.node.ObjectNode;
 
 /** Shapes of requests, out of the schema they are checked by. */
 final class RequestShapes {
     /** What only our own check reads. */
-    private static final List<String> OURS =
-            List.of("x-option", "x-form", "x-accepted", "x-storePlan");
+    private static final List<String> OURS = List.of("x-option", "x-form", "x-accepted");
 
     private final JsonNode defs;
 
@@ -22,16 +20,25 @@ final class RequestShapes {
 
     /** The shape of a body, closed. */
     ObjectNode body(String name) {
-        return closed((ObjectNode) defs.get(name).deepCopy());
+        ObjectNode shape = closed((ObjectNode) defs.get(name).deepCopy());
+        if (shape.get("properties").has("evenFaulty")) {
+            plansAreGoodUnlessAsked(shape);
+        }
+        return shape;
+    }
+
+    /** A plan fits its own schema, unless it is to be kept with its faults. */
+    private static void plansAreGoodUnlessAsked(ObjectNode shape) {
+        ObjectNode asked = shape.putObject("if");
+        asked.putArray("required").add("evenFaulty");
+        asked.putObject("properties").putObject("evenFaulty").put("const", true);
+        shape.putObject("else")
+                .putObject("properties")
+                .putObject("plan")
+                .put("$ref", OpenApi.PLAN_SCHEMA);
     }
 
     private static ObjectNode closed(ObjectNode shape) {
-        if (shape.has("x-storePlan")) {
-            return JsonNodeFactory.instance
-                    .objectNode()
-                    .put("description", shape.get("description").asString())
-                    .put("$ref", OpenApi.PLAN_SCHEMA);
-        }
         if (shape.has("properties")) {
             ObjectNode properties = (ObjectNode) shape.get("properties");
             List.copyOf(properties.propertyNames())
