@@ -86,7 +86,9 @@ final class SharePage {
 
     private String setting(ShareAnswer answer) {
         if (answer.workableC().isEmpty()) {
-            return "No one setting suits them all for the days wanted.";
+            return answer.spells().isEmpty()
+                    ? "No one setting suits them all for the days wanted."
+                    : "No one setting suits them all; they are not all there at one time.";
         }
         Bounds bounds = answer.workableC().get();
         String low = words.units().temperature(bounds.low());

@@ -4,6 +4,7 @@ import java.util.ArrayList;
 import java.util.List;
 import java.util.Optional;
 import java.util.OptionalDouble;
+import java.util.Set;
 import org.wardon.keeping.Draw;
 import org.wardon.keeping.KeepingModel;
 import org.wardon.keeping.Mechanism;
@@ -21,8 +22,18 @@ import org.wardon.produce.rows.OdourPair;
 final class Conflicts {
     private static final String ANY = "any";
 
+    private final Set<Trouble> accepted;
     private final List<Reason> reasons = new ArrayList<>();
     private Verdict verdict = Verdict.GOOD;
+
+    Conflicts() {
+        this(Set.of());
+    }
+
+    /** What is accepted is told and forbids nothing. */
+    Conflicts(Set<Trouble> accepted) {
+        this.accepted = accepted;
+    }
 
     Verdict verdict() {
         return verdict;
@@ -32,8 +43,9 @@ final class Conflicts {
         return reasons;
     }
 
-    private void say(Verdict at, Reason reason) {
-        verdict = verdict.worse(at);
+    private void say(Trouble trouble, Verdict at, Reason reason) {
+        boolean borne = at == Verdict.NO && accepted.contains(trouble);
+        verdict = verdict.worse(borne ? Verdict.TOLERABLE : at);
         reasons.add(reason);
     }
 
@@ -57,6 +69,7 @@ final class Conflicts {
             double cost = (with - without) * days;
             if (cost >= Limits.GOOD_ETHYLENE) {
                 say(
+                        Trouble.ETHYLENE,
                         cost < Limits.TOLERABLE_ETHYLENE ? Verdict.TOLERABLE : Verdict.NO,
                         reason(
                                 "ethylene-shortens",
@@ -82,6 +95,7 @@ final class Conflicts {
             // Of fruit that is to be sold ripe, only the days that are lost count.
             boolean ripe = taker.lot().door().purpose().equals(Optional.of(Purpose.SELL_RIPE));
             say(
+                    Trouble.ETHYLENE,
                     ripe ? Verdict.TOLERABLE : Verdict.NO,
                     reason(
                             "ethylene-starts-ripening",
@@ -98,6 +112,7 @@ final class Conflicts {
             double threshold = effect.thresholdPpm().map(fact -> fact.lowest()).orElse(Double.NaN);
             if (Response.isDisorder(effect) && ppm >= threshold) {
                 say(
+                        Trouble.ETHYLENE,
                         Verdict.TOLERABLE,
                         reason(
                                 "ethylene-disorder",
@@ -147,6 +162,7 @@ final class Conflicts {
     private void smell(
             String code, Wish giver, Wish taker, double days, double most, String sourceId) {
         say(
+                Trouble.ODOUR,
                 days <= most ? Verdict.TOLERABLE : Verdict.NO,
                 reason(
                         code,

@@ -27,7 +27,7 @@ public record PairConflict(Verdict verdict, List<Reason> reasons) {
      * @return verdict and reasons
      */
     public static PairConflict of(Workable a, Workable b, double atC, double days) {
-        Conflicts conflicts = Pairing.conflicts(a, b, atC, days);
+        Conflicts conflicts = Pairing.conflicts(a, b, atC, days, Circumstances.usual());
         return new PairConflict(conflicts.verdict(), conflicts.reasons());
     }
 
@@ -46,6 +46,13 @@ public record PairConflict(Verdict verdict, List<Reason> reasons) {
         Conflicts conflicts = new Conflicts();
         conflicts.ethylene(taker, model, giverId, ppm, atC, taker.wantedDays());
         return new PairConflict(conflicts.verdict(), conflicts.reasons());
+    }
+
+    /** Whether one takes the smell of another in so many days more than it bears. */
+    static boolean ofSmell(Wish giver, Wish taker, double days) {
+        Conflicts conflicts = new Conflicts();
+        conflicts.odour(giver, taker, days);
+        return conflicts.verdict() == Verdict.NO;
     }
 
     /**

@@ -2,9 +2,6 @@ package org.wardon.sharing;
 
 import java.util.ArrayList;
 import java.util.List;
-import org.wardon.keeping.Draw;
-import org.wardon.keeping.ethylene.Response;
-import org.wardon.keeping.ethylene.Stage;
 import org.wardon.produce.Reason;
 import org.wardon.produce.Reason.Argument;
 
@@ -12,20 +9,17 @@ import org.wardon.produce.Reason.Argument;
 final class Pairing {
     private final Workable a;
     private final Workable b;
+    private final Circumstances at;
     private final Common common;
     private final List<Reason> reasons = new ArrayList<>();
     private Verdict verdict;
 
-    Pairing(Workable a, Workable b) {
+    Pairing(Workable a, Workable b, Circumstances at) {
         this.a = a;
         this.b = b;
+        this.at = at;
         common = Common.of(List.of(a, b));
         verdict = common.verdict();
-    }
-
-    /** Whether the two have no setting in common. */
-    boolean isApart() {
-        return common.verdict() == Verdict.NO;
     }
 
     PairVerdict verdict() {
@@ -43,17 +37,16 @@ final class Pairing {
             shortened(a);
             shortened(b);
         }
-        double days = Math.min(a.wish().wantedDays(), b.wish().wantedDays());
-        Conflicts conflicts = conflicts(a, b, atC, days);
+        Conflicts conflicts = conflicts(a, b, atC, at.daysTogether(a, b), at);
         verdict = verdict.worse(conflicts.verdict());
         reasons.addAll(conflicts.reasons());
     }
 
     /** Ethylene and smell of two lots at a temperature for some days together. */
-    static Conflicts conflicts(Workable a, Workable b, double atC, double days) {
-        Conflicts conflicts = new Conflicts();
-        double ppmA = steadyPpm(a, atC);
-        double ppmB = steadyPpm(b, atC);
+    static Conflicts conflicts(Workable a, Workable b, double atC, double days, Circumstances at) {
+        Conflicts conflicts = new Conflicts(at.accepted());
+        double ppmA = at.ppm(a, 2, atC);
+        double ppmB = at.ppm(b, 2, atC);
         conflicts.ethylene(
                 a.wish(), a.model(), ppmB >= ppmA ? id(b) : id(a), ppmA + ppmB, atC, days);
         conflicts.ethylene(
@@ -61,17 +54,6 @@ final class Pairing {
         conflicts.odour(a.wish(), b.wish(), days);
         conflicts.odour(b.wish(), a.wish(), days);
         return conflicts;
-    }
-
-    /** Level one lot makes as half of a usual load in a chamber with usual air exchange. */
-    private static double steadyPpm(Workable lot, double atC) {
-        double stage =
-                Stage.giving(
-                        lot.wish().lot().commodity(),
-                        lot.wish().lot().door().ripeness(),
-                        Draw.MEDIAN);
-        double rate = lot.model().response().giving().microlitrePerKgHour(atC, stage, Draw.MEDIAN);
-        return Response.steadyPpm(0.5 * Response.USUAL_KG_M3 * rate, Response.USUAL_AIR_CHANGES);
     }
 
     private void shortened(Workable lot) {
@@ -143,6 +125,6 @@ final class Pairing {
     }
 
     private static String id(Workable lot) {
-        return lot.wish().lot().id();
+        return lot.id();
     }
 }

@@ -1,9 +1,9 @@
 package org.wardon.sharing;
 
 import java.util.ArrayList;
+import java.util.Comparator;
 import java.util.List;
 import java.util.Optional;
-import java.util.function.BiPredicate;
 import org.wardon.errors.Require;
 import org.wardon.keeping.Draw;
 import org.wardon.produce.Reason;
@@ -11,21 +11,36 @@ import org.wardon.produce.Reason.Argument;
 
 /** Who may share a chamber with whom, before there is a chamber. */
 public final class Sharing {
-    private Sharing() {}
+    private final List<Workable> lots;
+    private final Circumstances at;
+    private final Common common;
+    private final Spells spells;
+    private final List<PairVerdict> pairs = new ArrayList<>();
+
+    private Sharing(List<Workable> lots, Circumstances at) {
+        this.lots = lots;
+        this.at = at;
+        common = Common.of(lots);
+        spells = Spells.of(lots, at);
+        for (int i = 0; i < lots.size(); i++) {
+            for (int j = i + 1; j < lots.size(); j++) {
+                if (at.meet(lots.get(i), lots.get(j))) {
+                    pairs.add(new Pairing(lots.get(i), lots.get(j), at).verdict());
+                }
+            }
+        }
+    }
 
     /**
      * Judges a group of lots.
      *
      * @param wishes the lots and their days, at least one, ids all different
      * @param draws the draws, 32 are usual
+     * @param at how they stand together
      * @return verdict, workable settings and every pair
      */
-    public static SharingAnswer of(List<Wish> wishes, List<Draw> draws) {
-        List<Workable> lots = new ArrayList<>();
-        for (Wish wish : wishes) {
-            lots.add(Workable.of(wish, draws));
-        }
-        return among(lots);
+    public static SharingAnswer of(List<Wish> wishes, List<Draw> draws, Circumstances at) {
+        return among(wishes.stream().map(wish -> Workable.of(wish, draws)).toList(), at);
     }
 
     /**
@@ -35,63 +50,64 @@ public final class Sharing {
      * @return verdict, workable settings and every pair
      */
     public static SharingAnswer among(List<Workable> lots) {
-        return among(lots, (one, other) -> true);
+        return among(lots, Circumstances.usual());
     }
 
     /**
-     * Judges a group not all of whom are there at one time. They still have to have a setting in
-     * common, as that stays; what two do to each other counts where they meet.
+     * Judges a group of which more is known. Lots that are never there at one time need not agree
+     * on a setting, as it may be changed between them.
      *
      * @param lots the lots with their workable settings, at least one
-     * @param meet whether two lots, by id, are there at one time
-     * @return verdict, workable settings and every pair that meets or has no setting in common
+     * @param at how they stand together
+     * @return verdict, workable settings and every pair that meets
      */
-    public static SharingAnswer among(List<Workable> lots, BiPredicate<String, String> meet) {
+    public static SharingAnswer among(List<Workable> lots, Circumstances at) {
         Require.that(!lots.isEmpty(), "sharing is judged of at least one lot");
-        Common common = Common.of(lots);
-        Verdict verdict = common.verdict();
-        List<PairVerdict> pairs = new ArrayList<>();
-        for (int i = 0; i < lots.size(); i++) {
-            for (int j = i + 1; j < lots.size(); j++) {
-                Pairing pairing = new Pairing(lots.get(i), lots.get(j));
-                PairVerdict pair = pairing.verdict();
-                if (pairing.isApart() || meet.test(pair.a(), pair.b())) {
-                    pairs.add(pair);
-                    verdict = verdict.worse(pair.verdict());
-                }
-            }
-        }
-        boolean apart = common.verdict() == Verdict.NO;
+        return new Sharing(List.copyOf(lots), at).answer();
+    }
+
+    private SharingAnswer answer() {
+        Verdict verdict = with(spells.verdict(), "");
+        List<Workable> apart = spells.apart(lots);
         return new SharingAnswer(
                 verdict,
                 common.temperatureC(),
                 common.humidityPct(),
                 pairs,
-                reasons(lots),
-                apart ? Compromise.of(lots) : Optional.empty(),
-                verdict == Verdict.NO ? takeOut(lots, pairs) : Optional.empty());
+                reasons(),
+                apart.isEmpty() ? Optional.empty() : Compromise.of(apart),
+                verdict == Verdict.NO ? takeOut() : Optional.empty(),
+                spells.all().size() > 1
+                        ? spells.all().stream().map(Spells.One::told).toList()
+                        : List.of(),
+                Prices.of(spells, at));
+    }
+
+    /** A verdict on settings made worse by the pairs that do not hold a lot. */
+    private Verdict with(Verdict ofSettings, String without) {
+        Verdict verdict = ofSettings;
+        for (PairVerdict pair : pairs) {
+            boolean stays = !pair.a().equals(without) && !pair.b().equals(without);
+            verdict = stays ? verdict.worse(pair.verdict()) : verdict;
+        }
+        return verdict;
     }
 
     /** The lot without which the others have the best verdict and the widest temperatures. */
-    private static Optional<String> takeOut(List<Workable> lots, List<PairVerdict> pairs) {
+    private Optional<String> takeOut() {
         Optional<String> out = Optional.empty();
         Verdict best = Verdict.NO;
         double widest = 0;
         for (Workable one : lots.size() > 2 ? lots : List.<Workable>of()) {
-            String id = one.wish().lot().id();
-            Common rest = Common.of(lots.stream().filter(lot -> lot != one).toList());
-            Verdict verdict = rest.verdict();
-            for (PairVerdict pair : pairs) {
-                boolean stays = !pair.a().equals(id) && !pair.b().equals(id);
-                verdict = stays ? verdict.worse(pair.verdict()) : verdict;
-            }
-            double wide = rest.temperatureC().map(SettingRange::widthK).orElse(0.0);
+            Spells rest = Spells.of(lots.stream().filter(lot -> lot != one).toList(), at);
+            Verdict verdict = with(rest.verdict(), one.id());
+            double wide = rest.widthK();
             boolean better = verdict.compareTo(best) > 0;
             boolean same = verdict == best && verdict != Verdict.NO;
-            if (better || (same && (wide > widest || (wide == widest && first(id, out))))) {
+            if (better || (same && (wide > widest || (wide == widest && first(one.id(), out))))) {
                 best = verdict;
                 widest = wide;
-                out = Optional.of(id);
+                out = Optional.of(one.id());
             }
         }
         return out;
@@ -102,14 +118,14 @@ public final class Sharing {
         return known.map(other -> id.compareTo(other) < 0).orElse(true);
     }
 
-    private static List<Reason> reasons(List<Workable> lots) {
+    private List<Reason> reasons() {
         List<Reason> reasons = new ArrayList<>();
         for (Workable lot : lots) {
             if (lot.fallsShortAnyway()) {
                 reasons.add(
                         Reason.about(
                                 "keeps-less-than-wanted",
-                                lot.wish().lot().id(),
+                                lot.id(),
                                 "assumption",
                                 Argument.of(lot.wish().wholeDays(), "day")));
             }
@@ -117,10 +133,20 @@ public final class Sharing {
                 reasons.add(
                         Reason.about(
                                 "cure-first",
-                                lot.wish().lot().id(),
+                                lot.id(),
                                 lot.wish().lot().commodity().keeping().curing().get(0).sourceId()));
             }
         }
+        frost().ifPresent(reasons::add);
         return reasons;
+    }
+
+    /** Frost, where it is what keeps all from being set colder; of the lot it is nearest to. */
+    private Optional<Reason> frost() {
+        Optional<Workable> nearest =
+                lots.stream().max(Comparator.comparingDouble(Workable::frostC));
+        return common.temperatureC()
+                .filter(all -> all.low() - nearest.orElseThrow().frostC() < Settings.STEP_C)
+                .map(all -> nearest.orElseThrow().frost());
     }
 }

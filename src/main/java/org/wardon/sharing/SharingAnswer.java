@@ -10,12 +10,14 @@ import org.wardon.produce.Reason;
  * @param verdict whether they may, all together
  * @param workableC temperatures that work for all at the verdict's level; empty where none does
  * @param workableHumidityPct humidities that go with them, percent; empty where none does
- * @param pairs every pair
+ * @param pairs every pair of lots that are there at one time
  * @param reasons what concerns single lots or the group
  * @param compromise the setting that costs least where none works for all; empty where one does, or
  *     where every setting freezes or chills one of them
  * @param takeOut id of the one lot without which the others, two at least, may share best; empty
  *     where all may share or taking out one does not help
+ * @param spells the times in which different lots stand together; empty where there is only one
+ * @param prices what accepted troubles cost
  */
 public record SharingAnswer(
         Verdict verdict,
@@ -24,10 +26,14 @@ public record SharingAnswer(
         List<PairVerdict> pairs,
         List<Reason> reasons,
         Optional<Compromise> compromise,
-        Optional<String> takeOut) {
+        Optional<String> takeOut,
+        List<Spell> spells,
+        List<Price> prices) {
     /** Copies the lists. */
     public SharingAnswer {
         pairs = List.copyOf(pairs);
         reasons = List.copyOf(reasons);
+        spells = List.copyOf(spells);
+        prices = List.copyOf(prices);
     }
 }

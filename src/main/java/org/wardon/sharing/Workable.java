@@ -6,6 +6,8 @@ import java.util.List;
 import java.util.Optional;
 import org.wardon.keeping.Draw;
 import org.wardon.keeping.KeepingModel;
+import org.wardon.produce.Reason;
+import org.wardon.produce.Reason.Argument;
 
 /**
  * The workable settings of one lot: how good each temperature and humidity is for its wanted days
@@ -15,6 +17,9 @@ public final class Workable {
     private final Wish wish;
     private final KeepingModel model;
     private final List<Draw> draws;
+
+    /** How far below its setting the thermostat lets the air come, K; 0 where that is not known. */
+    private final double swingK;
 
     /** {@code [temperature][humidity]}, days. */
     private final double[][] tenth = new double[Settings.TEMPERATURES][Settings.HUMIDITIES];
@@ -30,10 +35,11 @@ public final class Workable {
     /** {@code [temperature][humidity]}. */
     private final Verdict[][] verdicts = new Verdict[Settings.TEMPERATURES][Settings.HUMIDITIES];
 
-    private Workable(Wish wish, KeepingModel model, List<Draw> draws) {
+    private Workable(Wish wish, KeepingModel model, List<Draw> draws, double swingK) {
         this.wish = wish;
         this.draws = draws;
         this.model = model;
+        this.swingK = swingK;
         fill();
         judge();
     }
@@ -58,7 +64,20 @@ public final class Workable {
      * @return its workable settings
      */
     public static Workable of(Wish wish, KeepingModel model, List<Draw> draws) {
-        return new Workable(wish, model, List.copyOf(draws));
+        return in(0, wish, model, draws);
+    }
+
+    /**
+     * Works out the settings of a lot in a chamber whose thermostat is known.
+     *
+     * @param swingK how far below its setting the thermostat lets the air come, K, 0 or more
+     * @param wish the lot and its days
+     * @param model the lot's model
+     * @param draws the draws, 32 are usual
+     * @return its workable settings
+     */
+    public static Workable in(double swingK, Wish wish, KeepingModel model, List<Draw> draws) {
+        return new Workable(wish, model, List.copyOf(draws), swingK);
     }
 
     private void fill() {
@@ -266,12 +285,29 @@ public final class Workable {
     }
 
     /**
-     * Returns the temperature the lot must not come below for fear of freezing.
+     * Returns the setting the lot must not be below for fear of freezing.
      *
-     * @return its freezing point and the margin, °C
+     * @return its freezing point, the margin and the swing of the thermostat, °C
      */
     public double frostC() {
-        return model.freezingC() + Limits.FREEZING_MARGIN_K;
+        return model.freezingC() + Limits.FREEZING_MARGIN_K + swingK;
+    }
+
+    /** Why it is set no colder, where frost is what bounds it. */
+    Reason frost() {
+        Argument limit = Argument.of(frostC(), "C");
+        Argument point = Argument.of(model.freezingC(), "C");
+        Argument margin = Argument.of(Limits.FREEZING_MARGIN_K, "K");
+        return swingK > 0
+                ? Reason.about(
+                        "frost-and-swing",
+                        id(),
+                        Limits.FREEZING_SOURCE,
+                        limit,
+                        point,
+                        margin,
+                        Argument.of(swingK, "K"))
+                : Reason.about("frost-margin", id(), Limits.FREEZING_SOURCE, limit, point, margin);
     }
 
     /**
@@ -318,5 +354,13 @@ public final class Workable {
 
     KeepingModel model() {
         return model;
+    }
+
+    List<Draw> draws() {
+        return draws;
+    }
+
+    String id() {
+        return wish.lot().id();
     }
 }

@@ -54,7 +54,11 @@ class MixingGroupsTest {
             for (int i = 0; i < ids.size(); i++) {
                 for (int j = i + 1; j < ids.size(); j++) {
                     PairVerdict pair =
-                            new Pairing(WEEK.get(ids.get(i)), WEEK.get(ids.get(j))).verdict();
+                            new Pairing(
+                                            WEEK.get(ids.get(i)),
+                                            WEEK.get(ids.get(j)),
+                                            Circumstances.usual())
+                                    .verdict();
                     if (pair.verdict() == Verdict.NO) {
                         refused.put(pair.a() + "," + pair.b(), codes(pair));
                     }
@@ -101,7 +105,11 @@ class MixingGroupsTest {
                 }
                 pairs++;
                 PairVerdict pair =
-                        new Pairing(FORTNIGHT.get(cold.id()), FORTNIGHT.get(warm.id())).verdict();
+                        new Pairing(
+                                        FORTNIGHT.get(cold.id()),
+                                        FORTNIGHT.get(warm.id()),
+                                        Circumstances.usual())
+                                .verdict();
                 Set<String> codes =
                         pair.reasons().stream().map(Reason::code).collect(Collectors.toSet());
                 boolean named =

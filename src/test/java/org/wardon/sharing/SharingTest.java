@@ -5,7 +5,10 @@ import static org.junit.jupiter.api.Assertions.assertFalse;
 import static org.junit.jupiter.api.Assertions.assertTrue;
 
 import java.util.List;
+import java.util.Map;
+import java.util.Objects;
 import java.util.OptionalDouble;
+import java.util.Set;
 import java.util.stream.Stream;
 import org.junit.jupiter.api.Test;
 import org.wardon.keeping.Crops;
@@ -21,8 +24,14 @@ class SharingTest {
     private static final double DAY_S = 86_400;
 
     private static SharingAnswer share(double days, String... ids) {
+        return share(Circumstances.usual(), days, ids);
+    }
+
+    private static SharingAnswer share(Circumstances at, double days, String... ids) {
         return Sharing.of(
-                Stream.of(ids).map(id -> Wish.of(Crops.lot(Crops.get(id)), days)).toList(), DRAWS);
+                Stream.of(ids).map(id -> Wish.of(Crops.lot(Crops.get(id)), days)).toList(),
+                DRAWS,
+                at);
     }
 
     private static Reason reason(PairVerdict pair, String code) {
@@ -57,6 +66,70 @@ class SharingTest {
         PairVerdict pair = share(14, "apple", "broccoli").pairs().get(0);
         assertEquals(Verdict.NO, pair.verdict());
         assertEquals(List.of("broccoli", "apple"), reason(pair, "ethylene-shortens").subjects());
+    }
+
+    @Test
+    void whatIsAcceptedForbidsNothingAndIsPricedByTheModel() {
+        Circumstances accepting = Circumstances.accepting(Set.of(Trouble.ETHYLENE));
+        Circumstances both = Circumstances.accepting(Set.of(Trouble.ETHYLENE, Trouble.ODOUR));
+        SharingAnswer day = share(accepting, 1, "apple", "broccoli");
+        SharingAnswer two = share(both, 2, "apple", "broccoli");
+        assertEquals(Verdict.TOLERABLE, two.verdict());
+        reason(two.pairs().get(0), "ethylene-shortens");
+        Price price = two.prices().get(0);
+        assertEquals("broccoli", price.id());
+        assertEquals("apple", price.from());
+        double lostInTwo = price.daysLost().orElseThrow();
+        double lostInOne = day.prices().get(0).daysLost().orElseThrow();
+        assertTrue(
+                lostInOne > 1 && lostInTwo > 1.8 * lostInOne && lostInTwo < 2.2 * lostInOne,
+                lostInOne + " then " + lostInTwo);
+        assertEquals(List.of(), share(14, "apple", "broccoli").prices());
+        assertEquals(
+                Verdict.NO,
+                share(accepting, 14, "leek", "grape").verdict(),
+                "smell is another matter");
+        SharingAnswer smell =
+                share(Circumstances.accepting(Set.of(Trouble.ODOUR)), 14, "leek", "grape");
+        assertEquals(Trouble.ODOUR, smell.prices().get(0).trouble());
+        assertTrue(smell.prices().get(0).daysLost().isEmpty());
+    }
+
+    private static Circumstances dated(Map<String, Circumstances.Stay> stays) {
+        return new Circumstances(
+                id -> Objects.requireNonNull(stays.get(id)),
+                (id, atC) -> OptionalDouble.empty(),
+                Set.of());
+    }
+
+    @Test
+    void lotsThatNeverMeetNeedNotAgree() {
+        var first = new Circumstances.Stay(0, 5 * DAY_S);
+        var then = new Circumstances.Stay(6 * DAY_S, 11 * DAY_S);
+        var over = new Circumstances.Stay(4 * DAY_S, 9 * DAY_S);
+        String[] ids = {"lettuce-crisphead", "banana-green"};
+        SharingAnswer apart = share(dated(Map.of(ids[0], first, ids[1], then)), 5, ids);
+        assertTrue(apart.verdict() != Verdict.NO, apart.toString());
+        assertEquals(List.of(), apart.pairs());
+        assertTrue(apart.workableC().isEmpty() && apart.compromise().isEmpty());
+        assertEquals(2, apart.spells().size());
+        assertEquals(List.of("banana-green"), apart.spells().get(1).ids());
+        assertTrue(apart.spells().get(1).temperatureC().orElseThrow().low() > 8);
+        SharingAnswer meeting = share(dated(Map.of(ids[0], first, ids[1], over)), 5, ids);
+        assertEquals(Verdict.NO, meeting.verdict());
+        assertEquals(List.of(), meeting.spells());
+        reason(meeting.pairs().get(0), "temperature-gap");
+    }
+
+    @Test
+    void theSwingOfTheThermostatKeepsTheSettingFurtherFromFrost() {
+        Wish lettuce = Wish.of(Crops.lot(Crops.get("lettuce-crisphead")), 7);
+        KeepingModel model = KeepingModel.of(lettuce.lot());
+        Workable still = Workable.of(lettuce, model, DRAWS);
+        Workable swings = Workable.in(1.5, lettuce, model, DRAWS);
+        assertEquals(still.frostC() + 1.5, swings.frostC(), 1e-12);
+        double setC = model.freezingC() + 1.5;
+        assertTrue(still.safe(setC) && !swings.safe(setC), "air falls to the freezing point");
     }
 
     @Test

@@ -125,6 +125,12 @@ final class ApiTour {
                 .asking("at=$.chambers[0].faces[0]".replace("[", "%5B").replace("]", "%5D"))
                 .gives(200);
         api.ask("share").asking("crop=mango%3D5&crop=banana&days=4").gives(200);
+        JsonNode borne =
+                api.ask("share")
+                        .asking("crop=apple&crop=broccoli&accept=ethylene")
+                        .gives(200)
+                        .json();
+        assertEquals("ethylene", borne.get("accepted").get(0).get("conflict").asString());
         JsonNode twice = api.ask("share").asking("crop=mango&crop=mango").gives(422).json();
         assertEquals("crop", twice.get("faults").get(0).get("path").asString());
     }

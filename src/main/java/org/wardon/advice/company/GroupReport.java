@@ -15,6 +15,8 @@ import org.wardon.produce.Reason;
  * @param workablePct humidities that go with them, percent; empty where none does
  * @param members the lots, in the order asked
  * @param pairs pairs that something speaks against
+ * @param dated what suits those who stand together, time by time; empty where all do
+ * @param borne what accepted conflicts cost
  * @param notes what concerns single lots
  * @param compromise the nearest compromise; empty where there is no need of one, or none
  * @param takeOut the lot without which the others may share; empty where there is none
@@ -25,6 +27,8 @@ public record GroupReport(
         Optional<Bounds> workablePct,
         List<Member> members,
         List<Pair> pairs,
+        List<Reason> dated,
+        List<Reason> borne,
         List<Reason> notes,
         Optional<Compromise> compromise,
         Optional<String> takeOut) {
@@ -32,6 +36,8 @@ public record GroupReport(
     public GroupReport {
         members = List.copyOf(members);
         pairs = List.copyOf(pairs);
+        dated = List.copyOf(dated);
+        borne = List.copyOf(borne);
         notes = List.copyOf(notes);
     }
 

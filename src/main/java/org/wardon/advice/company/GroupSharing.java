@@ -2,24 +2,30 @@ package org.wardon.advice.company;
 
 import java.util.ArrayList;
 import java.util.HashMap;
+import java.util.HashSet;
 import java.util.List;
 import java.util.Map;
+import java.util.Objects;
 import java.util.Optional;
 import java.util.OptionalDouble;
+import java.util.Set;
 import org.wardon.advice.forecast.StoreTrial;
 import org.wardon.advice.forecast.TrialLot;
 import org.wardon.advice.wording.Units;
 import org.wardon.advice.wording.Words;
 import org.wardon.errors.BadInput;
 import org.wardon.errors.Fault;
-import org.wardon.files.forecast.Bounds;
+import org.wardon.keeping.KeepingModel;
+import org.wardon.plan.ChamberPlan;
+import org.wardon.plan.Conflict;
 import org.wardon.plan.StorePlan;
 import org.wardon.reference.ReferenceBook;
+import org.wardon.sharing.Circumstances;
 import org.wardon.sharing.PairVerdict;
-import org.wardon.sharing.SettingRange;
 import org.wardon.sharing.Sharing;
 import org.wardon.sharing.SharingAnswer;
 import org.wardon.sharing.Stretch;
+import org.wardon.sharing.Trouble;
 import org.wardon.sharing.Wish;
 import org.wardon.sharing.Workable;
 
@@ -32,12 +38,15 @@ public final class GroupSharing {
 
     private final StoreTrial trial;
     private final ReferenceBook book;
-    private final Map<String, Workable> known = new HashMap<>();
+    private final Map<Known, Workable> known = new HashMap<>();
 
     private GroupSharing(StoreTrial trial, ReferenceBook book) {
         this.trial = trial;
         this.book = book;
     }
+
+    /** A lot under a thermostat of some swing. */
+    private record Known(String id, double swingK) {}
 
     /**
      * Prepares a plan to be asked about.
@@ -62,7 +71,8 @@ public final class GroupSharing {
     }
 
     /**
-     * Judges lots of the plan, and crops beside them.
+     * Judges lots of the plan, and crops beside them. Where all the lots stand in one chamber, by
+     * its air exchange, its thermostat and what is accepted in it.
      *
      * @param lots ids of lots of the plan
      * @param crops days wanted of each crop, by id or any common name
@@ -71,24 +81,76 @@ public final class GroupSharing {
      *     range, nobody named
      */
     public GroupReport ask(List<String> lots, Map<String, Double> crops) {
+        return report(asked(new GroupQuestion(lots, crops, Set.of())));
+    }
+
+    /**
+     * Judges likewise, in the names of {@code share}.
+     *
+     * @param question who is asked about, and what is accepted
+     * @param words words for the reasons
+     * @return the verdict
+     * @throws BadInput with every fault
+     */
+    public ShareReport tell(GroupQuestion question, Words words) {
+        return new ShareTold(words, Optional.of(trial.plan().timeline()))
+                .of(asked(question).found());
+    }
+
+    /** A group and what was found. */
+    private record Asked(List<Workable> lots, SharingAnswer found) {}
+
+    private Asked asked(GroupQuestion question) {
         List<Fault> faults = new ArrayList<>();
-        for (String id : lots) {
+        for (String id : question.lots()) {
             if (trial.lot(id).isEmpty()) {
                 faults.add(new Fault(id, "", "no lot of the plan is called so", "tick lots of it"));
             }
         }
-        List<Wish> typed = wishes(crops, faults);
-        if (faults.isEmpty() && lots.isEmpty() && typed.isEmpty()) {
+        List<Wish> typed = wishes(question.crops(), faults);
+        if (faults.isEmpty() && question.lots().isEmpty() && typed.isEmpty()) {
             faults.add(new Fault("share", "", "names nobody", "tick lots or name crops"));
         }
         if (!faults.isEmpty()) {
             throw new BadInput(faults);
         }
-        List<Workable> all = new ArrayList<>(workable(lots));
+        Optional<ChamberPlan> chamber = chamberOf(question.lots());
+        Housed housed = new Housed(trial, chamber);
+        List<Workable> all = new ArrayList<>(workable(question.lots(), housed.swingK()));
         typed.parallelStream()
-                .map(wish -> Workable.of(wish, trial.draws()))
+                .map(wish -> workable(wish, housed.swingK()))
                 .forEachOrdered(all::add);
-        return report(all);
+        return judged(all, housed, Borne.of(accepts(question.accepts(), chamber)));
+    }
+
+    private Workable workable(Wish wish, double swingK) {
+        return Workable.in(swingK, wish, KeepingModel.of(wish.lot()), trial.draws());
+    }
+
+    private Asked judged(List<Workable> lots, Housed housed, Set<Trouble> accepted) {
+        Circumstances at = new Circumstances(housed::stay, housed, accepted);
+        return new Asked(lots, Sharing.among(lots, at));
+    }
+
+    /** What is accepted in a chamber, or everywhere. */
+    private Set<Conflict> accepts(Set<Conflict> asked, Optional<ChamberPlan> chamber) {
+        Set<Conflict> all = new HashSet<>(asked);
+        all.addAll(trial.plan().wish().accepts());
+        chamber.ifPresent(one -> all.addAll(one.use().accepts()));
+        return all;
+    }
+
+    /** The chamber that all of some lots stand in, where it is one. */
+    private Optional<ChamberPlan> chamberOf(List<String> lots) {
+        List<Optional<String>> where =
+                lots.stream().map(id -> lot(id).plan().chamber()).distinct().toList();
+        return where.size() == 1
+                ? where.get(0).map(id -> trial.plan().getChamber(id))
+                : Optional.empty();
+    }
+
+    private TrialLot lot(String id) {
+        return trial.lot(id).orElseThrow();
     }
 
     private List<Wish> wishes(Map<String, Double> crops, List<Fault> faults) {
@@ -101,42 +163,51 @@ public final class GroupSharing {
     }
 
     /**
-     * Judges the lots that a plan has in one chamber.
+     * Judges the lots that stand in one chamber, those that are there at one time.
      *
+     * @param chamber the chamber as it is set
      * @param lots their ids
      * @return the verdict; empty where there are none
      */
-    public Optional<GroupReport> among(List<String> lots) {
-        return lots.isEmpty() ? Optional.empty() : Optional.of(report(workable(lots)));
+    public Optional<GroupReport> among(ChamberPlan chamber, List<String> lots) {
+        Housed housed = new Housed(trial, Optional.of(chamber));
+        Set<Trouble> accepted = Borne.of(accepts(Set.of(), Optional.of(chamber)));
+        return lots.isEmpty()
+                ? Optional.empty()
+                : Optional.of(report(judged(workable(lots, housed.swingK()), housed, accepted)));
     }
 
-    private List<Workable> workable(List<String> ids) {
+    private List<Workable> workable(List<String> ids, double swingK) {
         List<TrialLot> asked =
                 ids.stream()
-                        .filter(id -> !known.containsKey(id))
-                        .map(id -> trial.lot(id).orElseThrow())
+                        .filter(id -> !known.containsKey(new Known(id, swingK)))
+                        .map(this::lot)
                         .toList();
         List<Workable> found =
                 asked.parallelStream()
-                        .map(lot -> Workable.of(lot.wish(), lot.model(), trial.draws()))
+                        .map(lot -> Workable.in(swingK, lot.wish(), lot.model(), trial.draws()))
                         .toList();
         for (int i = 0; i < asked.size(); i++) {
-            known.put(asked.get(i).id(), found.get(i));
+            known.put(new Known(asked.get(i).id(), swingK), found.get(i));
         }
-        return ids.stream().map(known::get).toList();
+        return ids.stream()
+                .map(id -> Objects.requireNonNull(known.get(new Known(id, swingK))))
+                .toList();
     }
 
-    private GroupReport report(List<Workable> lots) {
-        SharingAnswer found = Sharing.among(lots, this::meet);
+    private GroupReport report(Asked asked) {
+        SharingAnswer found = asked.found();
         return new GroupReport(
                 found.verdict().word(),
-                found.workableC().map(GroupSharing::bounds),
-                found.workableHumidityPct().map(GroupSharing::bounds),
-                lots.stream().map(GroupSharing::member).toList(),
+                found.workableC().map(ShareTold::bounds),
+                found.workableHumidityPct().map(ShareTold::bounds),
+                asked.lots().stream().map(GroupSharing::member).toList(),
                 found.pairs().stream()
                         .filter(pair -> !pair.reasons().isEmpty())
                         .map(GroupSharing::pair)
                         .toList(),
+                Dated.told(found.spells(), trial.plan().timeline()),
+                found.prices().stream().map(Borne::told).toList(),
                 found.reasons(),
                 found.compromise()
                         .map(
@@ -146,16 +217,6 @@ public final class GroupSharing {
                                                 one.humidityPct(),
                                                 losing(one.daysLost()))),
                 found.takeOut());
-    }
-
-    /** Crops that are typed are there all the time. */
-    private boolean meet(String one, String other) {
-        Optional<TrialLot> a = trial.lot(one);
-        Optional<TrialLot> b = trial.lot(other);
-        return a.isEmpty()
-                || b.isEmpty()
-                || (a.get().hereFromS() < b.get().leavesS()
-                        && b.get().hereFromS() < a.get().leavesS());
     }
 
     private static Map<String, Double> losing(Map<String, Double> daysLost) {
@@ -177,8 +238,8 @@ public final class GroupSharing {
                 stretches.stream()
                         .map(s -> new GroupReport.Stretch(s.lowC(), s.highC(), s.what().word()))
                         .toList(),
-                lot.borneC().map(GroupSharing::bounds),
-                lot.bornePct().map(GroupSharing::bounds),
+                lot.borneC().map(ShareTold::bounds),
+                lot.bornePct().map(ShareTold::bounds),
                 lot.frostC(),
                 coldHarmsBelow(stretches));
     }
@@ -189,9 +250,5 @@ public final class GroupSharing {
                 .filter(stretch -> stretch.what() == Stretch.What.CHILLS)
                 .mapToDouble(stretch -> stretch.highC() + Stretch.HALF_STEP_K)
                 .max();
-    }
-
-    private static Bounds bounds(SettingRange range) {
-        return new Bounds(range.low(), range.high());
     }
 }

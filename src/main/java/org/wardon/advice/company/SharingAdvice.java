@@ -4,24 +4,20 @@ import java.util.ArrayList;
 import java.util.List;
 import java.util.Map;
 import java.util.Optional;
+import java.util.Set;
 import org.wardon.advice.wording.Words;
 import org.wardon.errors.BadInput;
 import org.wardon.errors.Fault;
-import org.wardon.files.forecast.Because;
-import org.wardon.files.forecast.Bounds;
-import org.wardon.files.forecast.ShareAnswer;
 import org.wardon.keeping.Draw;
 import org.wardon.keeping.Draws;
 import org.wardon.keeping.KeptLot;
 import org.wardon.keeping.LotAtDoor;
 import org.wardon.lots.ClassValues;
+import org.wardon.plan.Conflict;
 import org.wardon.produce.Commodity;
-import org.wardon.produce.Reason;
 import org.wardon.reference.ReferenceBook;
-import org.wardon.sharing.PairVerdict;
-import org.wardon.sharing.SettingRange;
+import org.wardon.sharing.Circumstances;
 import org.wardon.sharing.Sharing;
-import org.wardon.sharing.SharingAnswer;
 import org.wardon.sharing.Wish;
 
 /** Answers who may share a chamber. */
@@ -57,8 +53,20 @@ public final class SharingAdvice {
      * @throws BadInput with every fault: an unknown name, a crop named twice, days out of range
      */
     public ShareReport ask(Map<String, Double> days) {
-        SharingAnswer found = Sharing.of(wishes(days), draws);
-        return new ShareReport(answer(found), found.reasons());
+        return ask(days, Set.of());
+    }
+
+    /**
+     * Answers a question of a keeper who accepts conflicts.
+     *
+     * @param days days wanted of each crop, by id or any common name, in the order asked
+     * @param accepts conflicts that are accepted, and what they cost told
+     * @return the verdict
+     * @throws BadInput with every fault: an unknown name, a crop named twice, days out of range
+     */
+    public ShareReport ask(Map<String, Double> days, Set<Conflict> accepts) {
+        Circumstances at = Circumstances.accepting(Borne.of(accepts));
+        return new ShareTold(words).of(Sharing.of(wishes(days), draws, at));
     }
 
     /** The crops as lots that are to keep their days; throws every fault. */
@@ -104,36 +112,5 @@ public final class SharingAdvice {
                         Wish.of(
                                 KeptLot.inOpenPackage(one.id(), one, LotAtDoor.SOUND, classes),
                                 wanted));
-    }
-
-    private ShareAnswer answer(SharingAnswer found) {
-        return new ShareAnswer(
-                found.verdict().word(),
-                found.workableC().map(SharingAdvice::bounds),
-                found.workableHumidityPct().map(SharingAdvice::bounds),
-                found.pairs().stream().map(this::pair).toList(),
-                found.compromise()
-                        .map(
-                                one ->
-                                        new ShareAnswer.Compromise(
-                                                one.atC(), one.humidityPct(), one.daysLost())),
-                found.takeOut());
-    }
-
-    private static Bounds bounds(SettingRange range) {
-        return new Bounds(range.low(), range.high());
-    }
-
-    private ShareAnswer.Pair pair(PairVerdict pair) {
-        return new ShareAnswer.Pair(
-                pair.a(),
-                pair.b(),
-                pair.verdict().word(),
-                pair.reasons().stream().map(this::because).toList());
-    }
-
-    private Because because(Reason reason) {
-        return new Because(
-                reason.code(), reason.subjects(), words.sentence(reason), reason.sourceId());
     }
 }

@@ -14,6 +14,7 @@ import org.wardon.air.Weather;
 import org.wardon.errors.Progress;
 import org.wardon.heat.AirSeries;
 import org.wardon.heat.Course;
+import org.wardon.heat.Hours;
 import org.wardon.heat.LotCourse;
 import org.wardon.heat.Stay;
 import org.wardon.keeping.Draw;
@@ -22,6 +23,7 @@ import org.wardon.keeping.Fate;
 import org.wardon.lots.Lot;
 import org.wardon.lots.LotHistory;
 import org.wardon.plan.ChamberPlan;
+import org.wardon.plan.EthyleneScrub;
 import org.wardon.plan.StorePlan;
 import org.wardon.reference.ReferenceBook;
 
@@ -31,6 +33,7 @@ import org.wardon.reference.ReferenceBook;
  */
 public final class StoreTrial {
     private static final double LEAST_KG = 0.1;
+    private static final double LEAST_EXCHANGE_M3H = 0.05;
 
     private final StoreModel model;
     private final Progress progress;
@@ -146,6 +149,37 @@ public final class StoreTrial {
                             0));
         }
         return model.sketch(as, stays, heatW);
+    }
+
+    /**
+     * Returns the air that carries ethylene out of a chamber: fresh air, leakage and door, and what
+     * a scrubber cleans.
+     *
+     * @param as the chamber as it is set
+     * @param course what it comes to
+     * @return mean of the horizon, m3/h, above 0
+     */
+    public static double exchangeM3h(ChamberPlan as, Course course) {
+        Hours hours = course.hours();
+        double exchangedM3 = 0;
+        double beforeS = 0;
+        for (int i = 0; i < hours.size(); i++) {
+            exchangedM3 += (hours.atS(i) - beforeS) * hours.exchangeM3s(i);
+            beforeS = hours.atS(i);
+        }
+        double meanM3s = beforeS > 0 ? exchangedM3 / beforeS : 0;
+        double scrubbedM3s = as.ethyleneScrub().map(EthyleneScrub::cleanedM3s).orElse(0.0);
+        return Math.max(LEAST_EXCHANGE_M3H, Timeline.HOUR_S * (meanM3s + scrubbedM3s));
+    }
+
+    /**
+     * Returns the same of a chamber that is sketched for it, empty.
+     *
+     * @param as the chamber as it is set
+     * @return mean of the horizon, m3/h, above 0
+     */
+    public double exchangeM3h(ChamberPlan as) {
+        return exchangeM3h(as, sketch(as, List.of(), 1, 0));
     }
 
     private static Lot ofMass(Lot lot, double share) {

@@ -66,7 +66,7 @@ final class Arranged {
                         : Objects.requireNonNull(tried.notHeld().get(chamber.id())),
                 ids,
                 filled(chamber, ids),
-                sharing.among(ids));
+                sharing.among(chamber, ids));
     }
 
     private static boolean standsIn(LotPlan lot, String chamber) {

@@ -22,13 +22,11 @@ import org.wardon.heat.Hours;
 import org.wardon.keeping.Paces;
 import org.wardon.plan.ChamberPlan;
 import org.wardon.plan.Conflict;
-import org.wardon.plan.EthyleneScrub;
 
 /** Works out what each chamber can make and what each lot comes to in it. */
 final class Options {
     private static final double J_PER_KWH = 3.6e6;
     private static final double W_DAY_J = 86_400;
-    private static final double LEAST_EXCHANGE_M3H = 0.05;
 
     /** Lots that stand for all where the humidity of a loaded chamber is sketched. */
     private static final int TYPICAL_LOTS = 10;
@@ -252,17 +250,15 @@ final class Options {
 
     private Sketch sketch(ChamberPlan set, Course empty, Loaded loaded, double riseK) {
         Hours hours = empty.hours();
-        double scrubbed = set.ethyleneScrub().map(EthyleneScrub::cleanedM3s).orElse(0.0);
         double[] mean = DayMeans.of(empty, trial.days());
         boolean held = held(set, mean);
         double meanC =
                 held ? set.setting().temperatureC() : DayMeans.whole(hours, hours::airC) + riseK;
-        double exchange = 3_600 * (DayMeans.whole(hours, hours::exchangeM3s) + scrubbed);
         Option.Figures figures =
                 new Option.Figures(
                         meanC,
                         humidityPct(loaded.course()),
-                        Math.max(LEAST_EXCHANGE_M3H, exchange),
+                        StoreTrial.exchangeM3h(set, empty),
                         Math.max(0, empty.heat().electricity()) / J_PER_KWH * price(set),
                         loaded.costPerWDay());
         AirSeries air =

@@ -5,6 +5,8 @@ import java.util.List;
 import java.util.Map;
 import java.util.Optional;
 import java.util.OptionalDouble;
+import java.util.Set;
+import org.wardon.advice.company.Borne;
 import org.wardon.advice.company.SharingAdvice;
 import org.wardon.advice.faces.FaceAdvice;
 import org.wardon.advice.forecast.SizeAdvice;
@@ -16,6 +18,7 @@ import org.wardon.errors.BadInput;
 import org.wardon.errors.Progress;
 import org.wardon.files.json.JsonPath;
 import org.wardon.files.json.Part;
+import org.wardon.plan.Conflict;
 import org.wardon.plan.StorePlan;
 import org.wardon.web.api.route.Ask;
 import org.wardon.web.api.route.Reply;
@@ -161,7 +164,8 @@ final class AnswersApi {
                 throw crop(typed, "it is named twice", "name each crop once");
             }
         }
-        return Reply.of(new SharingAdvice(bench.book(), WORDS).ask(wanted).answer());
+        Set<Conflict> accepts = Borne.named("--accept", texts(ask.query().at("accept")));
+        return Reply.of(new SharingAdvice(bench.book(), WORDS).ask(wanted, accepts).answer());
     }
 
     private static double days(String typed) {

@@ -208,6 +208,8 @@ final class RulerViews {
     private List<PlacingView.Told> sentences(GroupReport group) {
         List<PlacingView.Told> told = new ArrayList<>();
         told.add(plain(works(group)));
+        group.dated().stream().map(this::told).forEach(told::add);
+        group.borne().stream().map(this::told).forEach(told::add);
         for (GroupReport.Pair pair : group.pairs()) {
             pair.reasons().stream()
                     .map(this::told)

@@ -8,6 +8,7 @@ import java.nio.file.Path;
 import java.util.LinkedHashMap;
 import java.util.List;
 import java.util.Map;
+import java.util.Set;
 import org.junit.jupiter.api.AfterAll;
 import org.junit.jupiter.api.Test;
 import org.wardon.advice.PlanLookups;
@@ -16,6 +17,8 @@ import org.wardon.advice.wording.Words;
 import org.wardon.errors.BadInput;
 import org.wardon.files.PlanReader;
 import org.wardon.files.forecast.ShareAnswer;
+import org.wardon.plan.Conflict;
+import org.wardon.plan.StorePlan;
 import org.wardon.produce.Reason;
 import org.wardon.reference.ReferenceBook;
 
@@ -23,9 +26,7 @@ import org.wardon.reference.ReferenceBook;
 class GroupSharingTest {
     private static final ReferenceBook BOOK = ReferenceBook.open();
     private static final double HALF_A_KELVIN = 0.5;
-    private static final GroupSharing DEMO =
-            GroupSharing.of(
-                    PlanReader.read(Path.of("demo-data/landing.json"), PlanLookups.of(BOOK)), BOOK);
+    private static final GroupSharing DEMO = GroupSharing.of(demo(), BOOK);
 
     @AfterAll
     static void close() {
@@ -85,6 +86,44 @@ class GroupSharingTest {
                 next = stretch.highC() + HALF_A_KELVIN;
             }
         }
+    }
+
+    @Test
+    void lotsOfOneChamberAreJudgedByItsDoorItsThermostatAndTheirDays() {
+        Words words = Words.english(Units.METRIC);
+        List<String> cold = List.of("CAR1", "LET1");
+        GroupReport pair = DEMO.ask(cold, Map.of());
+        double frost = member(pair, "LET1").frostC();
+        double alone =
+                member(DEMO.ask(List.of(), crops(6, "lettuce-crisphead")), "lettuce-crisphead")
+                        .frostC();
+        double bandK = demo().getChamber("cold").setting().bandK();
+        assertEquals(alone + bandK, frost, 1e-9, "the thermostat swings");
+        Map<String, Double> apples = crops(6, "apple");
+        ShareAnswer strict =
+                DEMO.tell(new GroupQuestion(List.of("LET1"), apples, Set.of()), words).answer();
+        Set<Conflict> ethylene = Set.of(Conflict.ETHYLENE);
+        ShareAnswer borne =
+                DEMO.tell(new GroupQuestion(List.of("LET1"), apples, ethylene), words).answer();
+        assertEquals("no", strict.verdict());
+        assertEquals("tolerable", borne.verdict());
+        ShareAnswer.Accepted price = borne.accepted().get(0);
+        assertEquals("ethylene", price.conflict());
+        assertTrue(price.daysLost().orElseThrow() > 0, price.text());
+    }
+
+    private static StorePlan demo() {
+        return PlanReader.read(Path.of("demo-data/landing.json"), PlanLookups.of(BOOK));
+    }
+
+    @Test
+    void whatIsNoConflictOfLotsIsRefusedByName() {
+        BadInput bad =
+                assertThrows(
+                        BadInput.class, () -> Borne.named("--accept", List.of("smell", "odour")));
+        assertEquals(
+                "--accept: 'smell' is no conflict of lots; accepted: ethylene, odour",
+                bad.getMessage());
     }
 
     @Test

@@ -112,8 +112,12 @@ class AnswerWriterTest {
                                                 Optional.of(
                                                         new ShareAnswer.Compromise(
                                                                 9, 90, Map.of("okra", 2.5))),
-                                                Optional.of("okra"))));
-        assertNames("verdict workableC workableHumidityPct pairs compromise takeOut", share);
+                                                Optional.of("okra"),
+                                                List.of(),
+                                                List.of())));
+        assertNames(
+                "verdict workableC workableHumidityPct pairs compromise takeOut spells accepted",
+                share);
         assertTrue(share.get("workableC").isNull());
         assertNames("a b verdict reasons", share.get("pairs").get(0));
         assertEquals(2.5, share.get("compromise").get("daysLost").get("okra").asDouble());

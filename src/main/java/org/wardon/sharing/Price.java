@@ -1,0 +1,15 @@
+package org.wardon.sharing;
+
+import java.util.OptionalDouble;
+
+/**
+ * What a trouble that is accepted costs a lot.
+ *
+ * @param trouble what is accepted
+ * @param id the lot that bears it
+ * @param from id of the lot it comes from; of ethylene, the one that gives most
+ * @param daysLost days of its life, in the middle of its range; empty where it cannot be counted
+ * @param days days together
+ */
+public record Price(
+        Trouble trouble, String id, String from, OptionalDouble daysLost, double days) {}
