@@ -64,6 +64,11 @@ public final class PlacedPlan {
         if (!was.use().changes().equals(is.use().changes())) {
             changed = changes(changed, path("chambers", i, "settingChanges"), is);
         }
+        if (!was.starts().equals(is.starts())) {
+            String value = Inputs.plain(is.starts().orElseThrow().temperatureC());
+            changed =
+                    changed.set(path("chambers", i, "starts"), "{\"temperatureC\": " + value + "}");
+        }
         if (was.off() && !is.off()) {
             changed = changed.remove(path("chambers", i, "off"));
         }

@@ -22,7 +22,7 @@ import org.wardon.produce.Reason.Argument;
  * source).
  */
 final class ColdBlast {
-    private static final double SHARE = 0.5;
+    static final double SHARE = 0.5;
 
     /** A blast this little colder than the room is no matter, K. */
     private static final double LEAST_K = 0.1;
@@ -66,6 +66,10 @@ final class ColdBlast {
 
     /** How far the air off the cooler is below the room's, as a mean while it blows, K. */
     double supplyBelowK() {
+        return supplyBelowK(hours);
+    }
+
+    static double supplyBelowK(Hours hours) {
         double chill = 0;
         double blown = 0;
         for (int i = 0; i < hours.size(); i++) {

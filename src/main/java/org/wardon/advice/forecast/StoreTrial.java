@@ -258,6 +258,26 @@ public final class StoreTrial {
     }
 
     /**
+     * Returns the air outdoors when the run starts.
+     *
+     * @return °C
+     */
+    public double outdoorAtStartC() {
+        return model.weather().temperatureC(0);
+    }
+
+    /**
+     * Returns how much colder than its chamber the air is that a lot meets in the blast of a
+     * cooler.
+     *
+     * @param course the chamber
+     * @return mean while it blows, K, 0 where nothing does
+     */
+    public static double blastBelowK(Course course) {
+        return ColdBlast.SHARE * ColdBlast.supplyBelowK(course.hours());
+    }
+
+    /**
      * Returns the days of the horizon.
      *
      * @return count, the last perhaps not whole

@@ -5,6 +5,7 @@ import java.util.List;
 import java.util.Map;
 import org.wardon.errors.Progress;
 import org.wardon.heat.Course;
+import org.wardon.heat.Hours;
 import org.wardon.keeping.Draw;
 import org.wardon.keeping.Draws;
 import org.wardon.keeping.Mechanism;
@@ -59,7 +60,14 @@ final class TrialRun {
             energy += ChamberFigures.energyCost(chamber, course, model.plan());
         }
         return new Tried(
-                model.plan(), kept, energy, courses, ethylene.chambers(), lots, notHeld(outcome));
+                model.plan(),
+                kept,
+                energy,
+                courses,
+                ethylene.chambers(),
+                lots,
+                reachedH(courses),
+                notHeld(outcome));
     }
 
     /** What the verdict on chambers asks for; nothing of lots without a chamber. */
@@ -91,6 +99,16 @@ final class TrialRun {
                 ethylene.histories(),
                 ends,
                 Map.of());
+    }
+
+    private Map<String, Double> reachedH(Map<String, Course> courses) {
+        Map<String, Double> reached = new HashMap<>();
+        for (ChamberPlan chamber : model.plan().chambers()) {
+            Hours hours = ById.get(courses, chamber.id()).hours();
+            Stretches air = new Stretches(chamber, model.settings(chamber), hours, horizonS);
+            air.from(0).get(0).hoursToReach().ifPresent(h -> reached.put(chamber.id(), h));
+        }
+        return reached;
     }
 
     private static Map<String, List<Reason>> notHeld(StoreOutcome outcome) {

@@ -18,6 +18,8 @@ import org.wardon.produce.Reason;
  * @param chambers the chambers, by id
  * @param ethylene their ethylene, by id
  * @param lots the lots that stood in the store, by id
+ * @param reachedH hours until a chamber's air first is at its setting, by id; none where it never
+ *     is
  * @param notHeld why a chamber does not hold its setting, by id; empty where it does
  */
 public record Tried(
@@ -27,6 +29,7 @@ public record Tried(
         Map<String, Course> chambers,
         Map<String, ChamberEthylene> ethylene,
         Map<String, OfLot> lots,
+        Map<String, Double> reachedH,
         Map<String, List<Reason>> notHeld) {
     private static final double J_PER_KWH = 3.6e6;
 
@@ -35,6 +38,7 @@ public record Tried(
         chambers = Map.copyOf(chambers);
         ethylene = Map.copyOf(ethylene);
         lots = Map.copyOf(lots);
+        reachedH = Map.copyOf(reachedH);
         notHeld = Map.copyOf(notHeld);
     }
 

@@ -2,7 +2,9 @@ package org.wardon.advice.placing;
 
 import java.util.ArrayList;
 import java.util.List;
+import java.util.Map;
 import java.util.Optional;
+import org.wardon.advice.forecast.Tried;
 import org.wardon.files.forecast.PlaceAnswer.Change;
 import org.wardon.plan.ChamberPlan;
 import org.wardon.plan.LotPlan;
@@ -17,10 +19,12 @@ final class Changes {
 
     private final StorePlan now;
     private final StorePlan then;
+    private final Map<String, Double> reachedH;
 
-    Changes(StorePlan now, StorePlan then) {
+    Changes(StorePlan now, Tried tried) {
         this.now = now;
-        this.then = then;
+        then = tried.plan();
+        reachedH = tried.reachedH();
     }
 
     List<Said<Change>> moves() {
@@ -60,6 +64,36 @@ final class Changes {
             }
         }
         return changes;
+    }
+
+    /** What it takes to come to what is dialled in now. */
+    List<Reason> ways() {
+        List<Reason> ways = new ArrayList<>();
+        for (int i = 0; i < now.chambers().size(); i++) {
+            way(now.chambers().get(i), then.chambers().get(i)).ifPresent(ways::add);
+        }
+        return ways;
+    }
+
+    /** How long the air needs from where it stands to what is dialled in. */
+    private Optional<Reason> way(ChamberPlan was, ChamberPlan is) {
+        boolean dialled = was.off() || is.setting().temperatureC() != was.setting().temperatureC();
+        if (!dialled || is.off() || is.starts().isEmpty()) {
+            return Optional.empty();
+        }
+        Argument fromC = Argument.of(is.starts().get().temperatureC(), "C");
+        Argument toC = Argument.of(is.setting().temperatureC(), "C");
+        Double hours = reachedH.get(is.id());
+        return Optional.of(
+                hours == null
+                        ? Reason.about("place-not-reached", is.id(), RULE, fromC, toC)
+                        : Reason.about(
+                                "place-reached",
+                                is.id(),
+                                RULE,
+                                fromC,
+                                toC,
+                                Argument.of(hours, "h")));
     }
 
     /** What is dialled in later, and until when what comes first stays. */

@@ -201,7 +201,8 @@ final class Coupling {
             double band = used.chamber().setting().bandK();
             double mean =
                     Math.max(sum / 24, used.riseK() > 0 || used.changes() ? -100 : used.settingC());
-            most[day] = mean + (used.riseK() > 0 ? 0 : band + BESIDE_BAND_K);
+            double kept = mean + (used.riseK() > 0 ? 0 : band + BESIDE_BAND_K);
+            most[day] = Math.max(kept, Begins.onTheWayC(used.chamber(), day));
         }
         return most;
     }
@@ -236,7 +237,8 @@ final class Coupling {
                         Options.humidityPct(course),
                         was.exchangeM3h(),
                         was.idleCost(),
-                        was.costPerWDay());
+                        was.costPerWDay(),
+                        was.blastK());
         List<Cell.Alone> alone = options.alone(air, figures.meanC());
         return used.inAir(air, figures, options.cells(used.chamber(), figures, alone));
     }

@@ -7,6 +7,7 @@ import java.util.Optional;
 import java.util.OptionalDouble;
 import org.wardon.advice.forecast.StoreTrial;
 import org.wardon.plan.ChamberPlan;
+import org.wardon.plan.Place;
 import org.wardon.produce.Reason;
 import org.wardon.produce.Reason.Argument;
 import org.wardon.sharing.Verdict;
@@ -138,7 +139,7 @@ final class Elsewhere {
                 return Optional.of(say("elsewhere-uncured", lot, there));
             }
             case FREEZING -> {
-                return Optional.of(say("elsewhere-freezing", lot, there, at(option)));
+                return Optional.of(freezing(item, option));
             }
             case LOST -> {
                 return Optional.of(say("elsewhere-lost", lot, there));
@@ -147,6 +148,18 @@ final class Elsewhere {
                 return apart(item, option, others).or(() -> full(item, option, others));
             }
         }
+    }
+
+    private static Reason freezing(Task.Item item, Option option) {
+        boolean blown = item.lot().plan().place() == Place.NEAR_COOLER;
+        double belowK = Option.swingK(option.chamber()) + (blown ? option.figures().blastK() : 0);
+        return say(
+                blown ? "elsewhere-freezing-blast" : "elsewhere-freezing",
+                item.lot().id(),
+                option.chamber().id(),
+                at(option),
+                Argument.of(belowK, "K"),
+                Argument.of(item.lot().model().freezingC(), "C"));
     }
 
     private Optional<Reason> apart(Task.Item item, Option option, List<Task.Item> others) {

@@ -1,6 +1,7 @@
 package org.wardon.advice.placing;
 
 import java.util.List;
+import org.wardon.cooling.Cooler;
 import org.wardon.heat.AirSeries;
 import org.wardon.plan.ChamberPlan;
 
@@ -22,6 +23,9 @@ record Option(
         Figures figures,
         List<Double> takesW,
         List<Cell> cells) {
+    /** Share of the band that air nobody keeps comes below its mean (assumption). */
+    private static final double UNKEPT = 0.5;
+
     /** Copies the lists. */
     Option {
         takesW = List.copyOf(takesW);
@@ -36,16 +40,25 @@ record Option(
      * @param exchangeM3h air that carries ethylene out, a scrubber's clean air among it, m3/h
      * @param idleCost energy of the chamber without lots over the horizon, currency
      * @param costPerWDay energy of a watt of lots' heat for a day, currency
+     * @param blastK how much colder it is in the blast of a cooler, K
      */
     record Figures(
             double meanC,
             double humidityPct,
             double exchangeM3h,
             double idleCost,
-            double costPerWDay) {}
+            double costPerWDay,
+            double blastK) {}
 
     double settingC() {
         return chamber.setting().temperatureC();
+    }
+
+    /** How far the air comes below the setting: half the swing of the thermostat, K. */
+    static double swingK(ChamberPlan set) {
+        return set.coolers().stream().anyMatch(Cooler::holdsBand)
+                ? set.setting().bandK()
+                : UNKEPT * set.setting().bandK();
     }
 
     /** Whether its setting changes on the way. */

@@ -22,6 +22,7 @@ import org.wardon.heat.Hours;
 import org.wardon.keeping.Paces;
 import org.wardon.plan.ChamberPlan;
 import org.wardon.plan.Conflict;
+import org.wardon.plan.Place;
 
 /** Works out what each chamber can make and what each lot comes to in it. */
 final class Options {
@@ -40,7 +41,7 @@ final class Options {
     /** A mean of a day may stand so far above the setting beside the band and still hold, K. */
     private static final double BESIDE_BAND_K = 0.5;
 
-    /** Distance every shell keeps from freezing, K. */
+    /** Distance every shell keeps from freezing, K (common practice, no source). */
     private static final double FREEZING_MARGIN_K = 0.5;
 
     /** How much warmer lots may make a chamber that keeps no temperature, K. */
@@ -50,6 +51,7 @@ final class Options {
     private final Temperatures temperatures;
     private final Map<String, List<Paces>> paces = new LinkedHashMap<>();
     private final Map<String, Reach> reaches = new LinkedHashMap<>();
+    private final Map<String, ChamberPlan> now = new HashMap<>();
     private final Map<Air, List<Cell.Alone>> airs = new HashMap<>();
     private final List<Double> prices;
 
@@ -64,6 +66,10 @@ final class Options {
         for (int i = 0; i < all.size(); i++) {
             paces.put(trial.lots().get(i).id(), all.get(i));
         }
+        double outdoorC = trial.outdoorAtStartC();
+        for (ChamberPlan chamber : trial.plan().chambers()) {
+            now.put(chamber.id(), Begins.asItStands(chamber, outdoorC));
+        }
         List<Reach> found = trial.plan().chambers().parallelStream().map(this::reach).toList();
         for (int c = 0; c < found.size(); c++) {
             reaches.put(trial.plan().chambers().get(c).id(), found.get(c));
@@ -73,8 +79,12 @@ final class Options {
     private Reach reach(ChamberPlan chamber) {
         return Reach.of(
                 trial,
-                chamber.switchedOn(),
+                asItStands(chamber),
                 temperatures.coldestC(chamber.setting().temperatureC()));
+    }
+
+    private ChamberPlan asItStands(ChamberPlan chamber) {
+        return Objects.requireNonNull(now.get(chamber.id()), chamber.id());
     }
 
     Reach reach(String chamberId) {
@@ -85,7 +95,7 @@ final class Options {
     Map<String, List<Option>> all() {
         List<Dial> dials = new ArrayList<>();
         for (ChamberPlan chamber : trial.plan().chambers()) {
-            ChamberPlan on = chamber.switchedOn();
+            ChamberPlan on = asItStands(chamber);
             double nowC = on.setting().temperatureC();
             List<Double> tried =
                     keeps(on) ? temperatures.in(nowC, reach(on.id()).lowestC()) : List.of(nowC);
@@ -249,7 +259,8 @@ final class Options {
     }
 
     private Sketch sketch(ChamberPlan set, Course empty, Loaded loaded, double riseK) {
-        Hours hours = empty.hours();
+        Course shown = holds(set) && Begins.warmsUp(set) ? loaded.course() : empty;
+        Hours hours = shown.hours();
         double[] mean = DayMeans.of(empty, trial.days());
         boolean held = held(set, mean);
         double meanC =
@@ -260,11 +271,12 @@ final class Options {
                         humidityPct(loaded.course()),
                         StoreTrial.exchangeM3h(set, empty),
                         Math.max(0, empty.heat().electricity()) / J_PER_KWH * price(set),
-                        loaded.costPerWDay());
+                        loaded.costPerWDay(),
+                        StoreTrial.blastBelowK(loaded.course()));
         AirSeries air =
                 held
                         ? new Air(meanC, humidityStep(figures)).series()
-                        : StoreTrial.air(empty, loaded.course(), riseK);
+                        : StoreTrial.air(shown, loaded.course(), riseK);
         return new Sketch(set, riseK, held, air, figures, takes(set, mean, riseK));
     }
 
@@ -309,7 +321,8 @@ final class Options {
                                             day * Timeline.DAY_S, (day + 1) * Timeline.DAY_S);
                             double at = keeps ? Math.max(emptyC[day], settingC) : emptyC[day];
                             double beside = holds ? set.setting().bandK() + BESIDE_BAND_K : riseK;
-                            return Math.max(0, reach.takesW(day, at + beside));
+                            double most = Math.max(at + beside, Begins.onTheWayC(set, day));
+                            return Math.max(0, reach.takesW(day, most));
                         })
                 .toList();
     }
@@ -350,12 +363,17 @@ final class Options {
         if (lot.model().uncured() && !set.coolers().isEmpty() && !accepts(set, Conflict.UNCURED)) {
             return Cell.Forbidden.UNCURED;
         }
-        double hereC = set.use().changes().isEmpty() ? figures.meanC() : coldestC(lot, set);
-        double coldest = hereC - 0.5 * set.setting().bandK();
-        if (coldest < lot.model().freezingC() + FREEZING_MARGIN_K) {
+        if (coldestAirC(lot, set, figures) < lot.model().freezingC() + FREEZING_MARGIN_K) {
             return Cell.Forbidden.FREEZING;
         }
         return there.shareSound() > 0 ? Cell.Forbidden.NO : Cell.Forbidden.LOST;
+    }
+
+    /** The coldest air it meets: the thermostat lets it fall below the setting, the blast more. */
+    private double coldestAirC(TrialLot lot, ChamberPlan set, Option.Figures figures) {
+        double hereC = set.use().changes().isEmpty() ? figures.meanC() : coldestC(lot, set);
+        double blastK = lot.plan().place() == Place.NEAR_COOLER ? figures.blastK() : 0;
+        return hereC - Option.swingK(set) - blastK;
     }
 
     /** Lowest setting while a lot is here, °C. */

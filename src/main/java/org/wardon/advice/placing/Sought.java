@@ -108,15 +108,11 @@ record Sought(
         for (int c = 0; c < chambers.size(); c++) {
             if (chambers.get(c).id().equals(now.id())) {
                 return chosen.get(c)
-                        .map(option -> as(now.switchedOn(), option.chamber()))
+                        .map(option -> Begins.as(now, option.chamber()))
                         .orElse(hasSwitch(now) ? now.switchedOff() : now);
             }
         }
         return now;
-    }
-
-    private static ChamberPlan as(ChamberPlan now, ChamberPlan set) {
-        return now.withSetting(set.setting()).changing(set.use().changes());
     }
 
     private static boolean hasSwitch(ChamberPlan chamber) {

@@ -44,7 +44,7 @@ final class Telling {
         double value = tried.net();
         double bound = Math.max(last.bound(), value);
         double gap = bound > 0 ? 100 * (bound - value) / bound : 0;
-        Changes changes = new Changes(trial.plan(), tried.plan());
+        Changes changes = new Changes(trial.plan(), tried);
         List<Said<PlaceAnswer.Worth>> worth = new ArrayList<>();
         Gains gains = new Gains(trial, options, draft, money);
         if (small) {
@@ -67,7 +67,7 @@ final class Telling {
                 changes.moves(),
                 changes.settings(),
                 worth,
-                notes(sought, tried));
+                notes(sought, tried, changes.ways()));
     }
 
     private Reason told(double value, double bound, double gap, boolean proven) {
@@ -235,8 +235,9 @@ final class Telling {
                 reason);
     }
 
-    private List<Reason> notes(Sought sought, Tried tried) {
-        List<Reason> reasons = new ArrayList<>(new Accepted(sought, money).told());
+    private List<Reason> notes(Sought sought, Tried tried, List<Reason> ways) {
+        List<Reason> reasons = new ArrayList<>(ways);
+        reasons.addAll(new Accepted(sought, money).told());
         reasons.addAll(0, PlaceCautions.of(tried));
         if (trial.lots().stream().allMatch(l -> l.plan().market().pricePerKg() == 0)) {
             reasons.add(new Reason("place-no-prices", List.of(), List.of(), RULE));
