@@ -59,15 +59,23 @@ final class ChamberViews {
                                     title,
                                     path + "/curves/" + curve.key(),
                                     "",
-                                    curves.byDay(curve, air, say.say("curve.by-day", title)));
+                                    curves.byDay(curve, air, say.say("curve.by-day", title)),
+                                    drawn(curve, title));
                         })
                 .toList();
     }
 
     Optional<ChartData> data(String key) {
-        return Curves.find(key)
-                .map(curve -> curves.data(curve, air, levels(key)))
-                .map(data -> key.equals("air") ? curves.stepped(data, advice.air(chamber)) : data);
+        return Curves.find(key).map(this::data);
+    }
+
+    private ChartData data(Curves.Curve curve) {
+        ChartData data = curves.data(curve, air, levels(curve.key()));
+        return curve.key().equals("air") ? curves.stepped(data, advice.air(chamber)) : data;
+    }
+
+    private String drawn(Curves.Curve curve, String title) {
+        return CurvePicture.of(curve, data(curve), curves.marks(air), title, curves);
     }
 
     private List<ChartData.Level> levels(String key) {
@@ -131,7 +139,8 @@ final class ChamberViews {
                                         curves.byDay(
                                                 Curves.OF_LOT,
                                                 lot,
-                                                say.say("curve.lot-by-day", lot.of()))))
+                                                say.say("curve.lot-by-day", lot.of())),
+                                        ""))
                 .toList();
     }
 

@@ -165,7 +165,8 @@ final class Curves {
         };
     }
 
-    private double shown(double value, String unit) {
+    /** A value as the person likes it. */
+    double shown(double value, String unit) {
         return switch (unit) {
             case "C" -> figures.shownTemperature(value);
             case "kW" -> value / W_PER_KW;
@@ -173,7 +174,8 @@ final class Curves {
         };
     }
 
-    private String unit(String unit) {
+    /** The unit the person likes. */
+    String unit(String unit) {
         return switch (unit) {
             case "C" -> figures.temperatureUnit();
             case "pct" -> "%";
@@ -232,6 +234,24 @@ final class Curves {
             days.computeIfAbsent(day, any -> new ArrayList<>()).add(i);
         }
         return days;
+    }
+
+    /** A day a picture names, and where it begins as a share of the rows. */
+    record DayMark(double share, String name) {}
+
+    /** The days a picture names, five at most. */
+    List<DayMark> marks(HourlySeries series) {
+        Map<LocalDate, List<Integer>> days = days(series);
+        int every = Math.max(1, (days.size() + 4) / 5);
+        List<DayMark> marks = new ArrayList<>();
+        int n = 0;
+        for (Map.Entry<LocalDate, List<Integer>> day : days.entrySet()) {
+            if (n++ % every == 0) {
+                double share = 1.0 * day.getValue().get(0) / series.timeS().size();
+                marks.add(new DayMark(share, shortDay(day.getKey())));
+            }
+        }
+        return marks;
     }
 
     /** A day in few letters. */

@@ -115,7 +115,8 @@ final class HeatPicture {
         }
     }
 
-    private static double step(double about) {
+    /** A round step near this. */
+    static double step(double about) {
         double ten = Math.pow(10, Math.floor(Math.log10(about)));
         double of = about / ten;
         return ten * (of > 5 ? 10 : of > 2 ? 5 : of > 1 ? 2 : 1);

@@ -266,6 +266,7 @@ public final class AdviceViews {
                 say.say("chart.title", chamber),
                 "/api/plans/" + open.kept().id() + "/chambers/" + chamber + "/curves/air",
                 "airC outdoorC setting",
-                new AirTable(advice.air(chamber), figures, say).byDay(chamber));
+                new AirTable(advice.air(chamber), figures, say).byDay(chamber),
+                "");
     }
 }

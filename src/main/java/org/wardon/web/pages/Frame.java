@@ -1,5 +1,8 @@
 package org.wardon.web.pages;
 
+import java.time.ZoneOffset;
+import java.time.format.DateTimeFormatter;
+import java.util.Locale;
 import java.util.Optional;
 import org.wardon.logbook.KeptPlan;
 
@@ -27,6 +30,10 @@ public record Frame(
         Assets assets,
         boolean waiting,
         boolean leaves) {
+    private static final DateTimeFormatter SAVED_AT =
+            DateTimeFormatter.ofPattern("d MMM yyyy, HH:mm 'UTC'", Locale.UK)
+                    .withZone(ZoneOffset.UTC);
+
     /**
      * Returns words.
      *
@@ -45,6 +52,15 @@ public record Frame(
      */
     public Figures figures() {
         return new Figures(preferences);
+    }
+
+    /**
+     * Returns when the open plan was saved, for paper: there it stands by itself.
+     *
+     * @return such as "2 Dec 2026, 16:10 UTC", blank where no plan is open
+     */
+    public String savedAt() {
+        return plan.map(kept -> SAVED_AT.format(kept.changedAt())).orElse("");
     }
 
     /**
