@@ -1,6 +1,5 @@
 package org.wardon.heat.network;
 
-import java.util.ArrayList;
 import java.util.List;
 import org.wardon.air.MoistAir;
 import org.wardon.enclosure.Enclosure;
@@ -88,11 +87,10 @@ final class FaceBranch implements FacePart {
             OutsideBoundary boundary,
             NetworkInputs inputs) {
         Enclosure enclosure = inputs.enclosure();
-        List<Layer> layers = new ArrayList<>(boundary.addedLayers());
-        layers.addAll(face.asBuilt());
+        List<Layer> layers = face.asBuilt();
         double wall = inputs.tuning().wall();
         FaceFilms.Film inside = FaceFilms.inside(enclosure, face, boundary, inputs);
-        FaceGrid grid = new FaceGrid(layers, inside.resistanceM2KW(), wall);
+        FaceGrid grid = new FaceGrid(boundary.addedLayers(), layers, inside.resistanceM2KW(), wall);
         double area = enclosure.box().areaM2(face.name()) * share;
         double steady = grid.steady(boundary.filmWm2K(0) * wall);
         return new FaceBranch(

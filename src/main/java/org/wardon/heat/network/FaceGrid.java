@@ -15,7 +15,8 @@ import org.wardon.enclosure.UValue;
  * <p>Cells are so thin against the depth a daily wave reaches, {@code sqrt(a day/pi)}, that a wave
  * of a day comes through as strong and as late as the exact one within 1 %: the error of its
  * strength grows as the face's thickness in depths times the square of a cell's (measured: 8 % of
- * that product).
+ * that product). No wave of a day comes out of the ground, and one from inside fades on its way:
+ * its cells grow outwards.
  */
 final class FaceGrid {
     private static final double DAY_S = 86_400;
@@ -24,6 +25,11 @@ final class FaceGrid {
 
     /** Below this many cells the lag asks for the whole end correction. */
     private static final int FEW_CELLS = 5;
+
+    /** The innermost cell of soil, in depths, and how much longer each next one is. */
+    private static final double FIRST_OF_SOIL = 0.2;
+
+    private static final double GROWTH_OF_SOIL = 1.6;
 
     /** A layer with less of the face's resistance may be a single cell. */
     private static final double THIN_SHARE = 0.05;
@@ -63,12 +69,20 @@ final class FaceGrid {
 
     /** Cuts layers, from outside to inside; the inner film is a resistance, m2 K/W. */
     FaceGrid(List<Layer> layers, double innerM2KW, double wallFactor) {
+        this(List.of(), layers, innerM2KW, wallFactor);
+    }
+
+    /** The same of layers that lie on ground, deepest first. */
+    FaceGrid(List<Layer> ground, List<Layer> layers, double innerM2KW, double wallFactor) {
         double depths = 0;
-        wholeM2KW = UValue.resistanceM2KW(layers) / wallFactor;
+        wholeM2KW = (UValue.resistanceM2KW(ground) + UValue.resistanceM2KW(layers)) / wallFactor;
         for (Layer layer : layers) {
             depths += conducts(layer) ? depths(layer) : 0;
         }
         double cell = Math.min(THICKEST_CELL, Math.sqrt(PRODUCT / Math.max(depths, 1e-3)));
+        for (Layer layer : ground) {
+            addSoil(layer, wallFactor);
+        }
         for (Layer layer : layers) {
             add(layer, wallFactor, cell);
         }
@@ -89,6 +103,33 @@ final class FaceGrid {
                 between[i - 1] = 1 / nodes.get(i)[1];
             }
         }
+    }
+
+    private void addSoil(Layer layer, double wallFactor) {
+        if (!conducts(layer)) {
+            add(layer, wallFactor, THICKEST_CELL);
+            return;
+        }
+        double first = FIRST_OF_SOIL / depths(layer);
+        int cells = Math.max(1, (int) Math.rint(log(1 + (GROWTH_OF_SOIL - 1) / first)));
+        double unit = (GROWTH_OF_SOIL - 1) / (Math.pow(GROWTH_OF_SOIL, cells) - 1);
+        double resistance = layer.resistanceM2KW() / wallFactor;
+        double share = unit * Math.pow(GROWTH_OF_SOIL, cells - 1);
+        massHere(0.5 * share * layer.capacityJm2K(), layer.material());
+        double depth = doneM;
+        for (int i = 0; i < cells; i++) {
+            double next = i < cells - 1 ? share / GROWTH_OF_SOIL : 0;
+            depth += share * layer.thicknessM();
+            pendingM2KW = share * resistance;
+            addNode(0.5 * (share + next) * layer.capacityJm2K(), depth, layer.material());
+            share = next;
+        }
+        doneM += layer.thicknessM();
+    }
+
+    /** Logarithm to the base of the growth. */
+    private static double log(double x) {
+        return Math.log(x) / Math.log(GROWTH_OF_SOIL);
     }
 
     private void add(Layer layer, double wallFactor, double cell) {

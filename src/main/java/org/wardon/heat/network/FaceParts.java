@@ -108,15 +108,14 @@ final class FaceParts {
     private FaceChain.Build build(
             int flows, int cooler, Face face, OutsideBoundary boundary, boolean wetOutside) {
         Enclosure enclosure = inputs.enclosure();
-        List<Layer> layers = new ArrayList<>(boundary.addedLayers());
-        layers.addAll(face.asBuilt());
+        List<Layer> layers = new ArrayList<>(face.asBuilt());
         int wet = wetOutside ? 0 : layers.size() - 1;
         if (layers.get(wet).capacityJm2K() <= 0) {
             layers.add(wetOutside ? 0 : layers.size(), SKIN);
         }
         double wall = inputs.tuning().wall();
         FaceFilms.Film film = FaceFilms.inside(enclosure, face, boundary, inputs);
-        FaceGrid grid = new FaceGrid(layers, film.resistanceM2KW(), wall);
+        FaceGrid grid = new FaceGrid(boundary.addedLayers(), layers, film.resistanceM2KW(), wall);
         double area = enclosure.box().areaM2(face.name());
         double steady = grid.steady(boundary.filmWm2K(0) * wall);
         return new FaceChain.Build(

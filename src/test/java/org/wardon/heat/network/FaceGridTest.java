@@ -10,7 +10,9 @@ import java.util.stream.Stream;
 import org.apache.commons.math3.complex.Complex;
 import org.junit.jupiter.api.Test;
 import org.junit.jupiter.params.ParameterizedTest;
+import org.junit.jupiter.params.provider.Arguments;
 import org.junit.jupiter.params.provider.MethodSource;
+import org.wardon.enclosure.GroundFloor;
 import org.wardon.enclosure.Layer;
 import org.wardon.enclosure.PeriodicTransmittance;
 import org.wardon.enclosure.UValue;
@@ -80,6 +82,59 @@ class FaceGridTest {
         assertEquals(
                 exact.transmittanceWm2K(), found.strengthWm2K, 0.01 * exact.transmittanceWm2K());
         assertEquals(exact.shiftS(), found.shiftS, 0.01 * Math.abs(exact.shiftS()));
+    }
+
+    static Stream<Arguments> floors() {
+        List<List<Layer>> floors =
+                List.of(
+                        List.of(CONCRETE),
+                        List.of(CONCRETE, EPS, PLASTER),
+                        List.of(SHEET, FOAM, SHEET),
+                        List.of(PLASTER));
+        return floors.stream()
+                .flatMap(
+                        floor ->
+                                Stream.of(0.5, 1.0, 7.0, 30.0)
+                                        .map(days -> Arguments.of(floor, days * DAY_S)));
+    }
+
+    /** A wave from inside meets soil whose cells grow, and soil as ISO 13786 has it. */
+    @ParameterizedTest
+    @MethodSource("floors")
+    void soilTakesUpAWaveFromInsideAsIso13786Says(List<Layer> floor, double periodS) {
+        GroundFloor slab = new GroundFloor(30, 22, 0.1, GroundFloor.Soil.CLAY_OR_SILT);
+        double resistance = UValue.resistanceM2KW(floor);
+        List<Layer> soil = slab.soilLayers(resistance, INSIDE);
+        List<Layer> insideToOutside = new ArrayList<>(soil);
+        insideToOutside.addAll(floor);
+        Collections.reverse(insideToOutside);
+        double tight = 1e-4;
+        double exact =
+                PeriodicTransmittance.of(insideToOutside, INSIDE, tight, periodS).capacityJm2K();
+        FaceGrid grid = new FaceGrid(soil, floor, INSIDE, 1);
+        assertEquals(exact, capacityInside(grid, tight, periodS), 0.01 * exact);
+        List<Layer> all = new ArrayList<>(soil);
+        all.addAll(floor);
+        double steady = UValue.wattsM2K(all, INSIDE, tight);
+        assertEquals(steady, grid.steady(1 / tight), 1e-4 * steady);
+    }
+
+    /** Heat into the inner side less that through it, over the swing inside and the frequency. */
+    private static double capacityInside(FaceGrid grid, double farM2KW, double periodS) {
+        double omega = 2 * Math.PI / periodS;
+        double k = 1 / (farM2KW + grid.outerM2KW);
+        Complex self = Complex.ZERO;
+        Complex through = new Complex(k);
+        for (int i = 0; i < grid.capacity.length; i++) {
+            boolean last = i == grid.capacity.length - 1;
+            double next = last ? grid.inner : grid.between[i];
+            Complex pivot = new Complex(k + next, omega * grid.capacity[i]).subtract(self);
+            self = new Complex(next * next).divide(pivot);
+            through = through.multiply(next).divide(pivot);
+            k = next;
+        }
+        Complex into = new Complex(grid.inner).subtract(self);
+        return into.subtract(through).abs() / omega;
     }
 
     @Test
