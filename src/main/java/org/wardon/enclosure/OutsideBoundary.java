@@ -3,7 +3,10 @@ package org.wardon.enclosure;
 import java.util.ArrayList;
 import java.util.Arrays;
 import java.util.List;
+import java.util.Map;
 import java.util.Optional;
+import java.util.concurrent.ConcurrentHashMap;
+import org.wardon.air.Coarse;
 import org.wardon.air.SolAir;
 import org.wardon.air.Timeline;
 import org.wardon.air.YearWave;
@@ -22,6 +25,7 @@ public final class OutsideBoundary {
     private final HeatFlow direction;
     private final List<Layer> addedLayers;
     private final List<Reason> reasons;
+    private final Map<Integer, double[]> meansC = new ConcurrentHashMap<>();
 
     private OutsideBoundary(
             double[] temperatureC,
@@ -46,6 +50,22 @@ public final class OutsideBoundary {
      * @throws IllegalArgumentException where a neighbour's air is not given
      */
     public static OutsideBoundary of(Enclosure enclosure, Face face, Surroundings around) {
+        if (face.beyond() instanceof Beyond.Neighbour) {
+            return anew(enclosure, face, around);
+        }
+        Optional<Enclosure> onGround =
+                Optional.of(enclosure).filter(any -> face.beyond() instanceof Beyond.Ground);
+        return around.known()
+                .once(
+                        new Key(face, onGround, around.insideMeanC()),
+                        OutsideBoundary.class,
+                        () -> anew(enclosure, face, around));
+    }
+
+    /** What a boundary hangs on, but for the outdoors. */
+    private record Key(Face face, Optional<Enclosure> onGround, double insideMeanC) {}
+
+    private static OutsideBoundary anew(Enclosure enclosure, Face face, Surroundings around) {
         Beyond beyond = face.beyond();
         if (beyond instanceof Beyond.Outdoors) {
             return outdoors(face, around);
@@ -185,12 +205,14 @@ public final class OutsideBoundary {
     }
 
     /**
-     * Returns the temperatures of all hours.
+     * Returns the temperatures of all hours as they run straight between means.
      *
-     * @return {@code [hour]}, °C
+     * @param stretchHours hours of each mean, odd; 1 for the hours themselves
+     * @return {@code [hour]}, °C, not to be changed
+     * @see Coarse#means
      */
-    public double[] temperaturesC() {
-        return temperatureC.clone();
+    public double[] meansC(int stretchHours) {
+        return meansC.computeIfAbsent(stretchHours, n -> Coarse.means(temperatureC, n));
     }
 
     /**

@@ -20,6 +20,7 @@ import org.wardon.errors.Require;
  * @param insideMeanC temperature the chamber is expected to keep, °C; tells heat flowing up from
  *     down
  * @param neighbourC hourly air of other chambers by id, °C, as far as they are known
+ * @param known what was worked out before of the same site, timeline, weather, sun and hours
  */
 public record Surroundings(
         Site site,
@@ -28,7 +29,8 @@ public record Surroundings(
         Sunshine sun,
         int hours,
         double insideMeanC,
-        Map<String, HourlyAir> neighbourC) {
+        Map<String, HourlyAir> neighbourC,
+        WorkedOut known) {
     /** Air of a neighbour, hour by hour. */
     @FunctionalInterface
     public interface HourlyAir {
@@ -60,7 +62,8 @@ public record Surroundings(
     public static Surroundings of(
             Site site, Timeline timeline, Weather weather, int hours, double insideMeanC) {
         Sunshine sun = Sunshine.of(site, timeline, weather, hours);
-        return new Surroundings(site, timeline, weather, sun, hours, insideMeanC, Map.of());
+        return new Surroundings(
+                site, timeline, weather, sun, hours, insideMeanC, Map.of(), new WorkedOut());
     }
 
     /**
@@ -70,7 +73,8 @@ public record Surroundings(
      * @return the copy
      */
     public Surroundings withNeighbours(Map<String, HourlyAir> neighbours) {
-        return new Surroundings(site, timeline, weather, sun, hours, insideMeanC, neighbours);
+        return new Surroundings(
+                site, timeline, weather, sun, hours, insideMeanC, neighbours, known);
     }
 
     /**
@@ -80,7 +84,7 @@ public record Surroundings(
      * @return the copy
      */
     public Surroundings keeping(double otherC) {
-        return new Surroundings(site, timeline, weather, sun, hours, otherC, neighbourC);
+        return new Surroundings(site, timeline, weather, sun, hours, otherC, neighbourC, known);
     }
 
     /**

@@ -104,7 +104,7 @@ final class ChamberRunner implements Integrator.StepListener {
         lots = new LotRecorder[run.stays().size()];
         carried = new LotState[lots.length];
         for (int i = 0; i < lots.length; i++) {
-            lots[i] = new LotRecorder(run.stays().get(i), network.lot(i), rows + 1);
+            lots[i] = new LotRecorder(run.stays().get(i), network.lot(i), rows + 1, rowHours > 1);
             carried[i] = run.stays().get(i).berth().as().orElse(null);
             if (run.stays().get(i).berth().inBlast()) {
                 network.inBlast(i);

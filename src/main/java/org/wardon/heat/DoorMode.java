@@ -10,11 +10,11 @@ public enum DoorMode {
      */
     AVERAGED(1),
     /**
-     * As averaged, the outdoors in means of three hours and a row every third hour, door, people
-     * and lights spread over each row, with a looser step: for sampling, where a lot's days count
-     * and no single hour does.
+     * As averaged, the outdoors in means of five hours and a row every fifth hour, door, people and
+     * lights spread over each row, with a looser step: for sampling, where a lot's days count and
+     * no single hour does.
      */
-    SKETCHED(3);
+    SKETCHED(5);
 
     private final int rowHours;
 

@@ -34,7 +34,7 @@ final class GivenAirRunner implements Integrator.StepListener, Integrator.Trigge
         rowS = 3600.0 * air.rowHours();
         integrator = new Integrator(network, accuracy.steps(), 1, FIRST_STEP_S, SHORTEST_STEP_S);
         int rows = (int) Math.ceil((endS - startS()) / rowS) + 3;
-        recorder = new LotRecorder(stay, network.lot(), rows);
+        recorder = new LotRecorder(stay, network.lot(), rows, air.rowHours() > 1);
     }
 
     private double startS() {

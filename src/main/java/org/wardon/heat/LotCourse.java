@@ -13,7 +13,10 @@ import org.wardon.lots.LotHistory;
 public final class LotCourse {
     private final Stay stay;
     private final LotHistory history;
+
+    /** {@code [row]}, perhaps with room behind the last row. */
     private final Map<Column, double[]> rows = new EnumMap<>(Column.class);
+
     private final int size;
     private final LotTotals totals;
     private final Optional<LotState> carriedOut;
@@ -40,7 +43,7 @@ public final class LotCourse {
         this.totals = totals;
         this.size = size;
         this.carriedOut = carriedOut;
-        rows.forEach((column, values) -> this.rows.put(column, Arrays.copyOf(values, size)));
+        this.rows.putAll(rows);
     }
 
     /**

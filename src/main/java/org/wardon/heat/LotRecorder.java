@@ -20,6 +20,9 @@ final class LotRecorder {
     /** Room for samples closer than rows; more are taken too. */
     private static final int CLOSER_SAMPLES = 80;
 
+    /** The same in a run of long steps. */
+    private static final int CLOSER_SAMPLES_OF_LONG_STEPS = 20;
+
     /** Wet from this share of the skin on; below it dew is not noticed (assumption). */
     private static final double WET_SHARE = 0.02;
 
@@ -44,13 +47,15 @@ final class LotRecorder {
     private final LotTotals nothing;
     private LotTotals totals;
 
-    LotRecorder(Stay stay, LotPart lot, int mostRows) {
+    LotRecorder(Stay stay, LotPart lot, int mostRows, boolean longSteps) {
         this.stay = stay;
         this.lot = lot;
         this.startMassKg = stay.lot().massKg();
         this.nothing = new LotTotals(0, 0, 0, 0, startMassKg);
         this.totals = nothing;
-        this.history = new LotHistory.Builder(mostRows + CLOSER_SAMPLES);
+        this.history =
+                new LotHistory.Builder(
+                        mostRows + (longSteps ? CLOSER_SAMPLES_OF_LONG_STEPS : CLOSER_SAMPLES));
         for (LotCourse.Column column : LotCourse.Column.values()) {
             rows.put(column, new double[mostRows]);
         }

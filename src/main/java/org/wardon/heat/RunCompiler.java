@@ -8,7 +8,6 @@ import java.util.OptionalDouble;
 import java.util.Set;
 import org.wardon.air.MoistAir;
 import org.wardon.air.StandardAtmosphere;
-import org.wardon.air.Sunshine;
 import org.wardon.cooling.Cooler;
 import org.wardon.enclosure.Enclosure;
 import org.wardon.enclosure.Surroundings;
@@ -139,26 +138,25 @@ final class RunCompiler {
         for (int h = 0; h <= hours; h++) {
             mean += run.weather().temperatureC(h) / (hours + 1);
         }
-        return new Surroundings(
-                run.site(),
-                run.timeline(),
-                run.weather(),
-                sun(run, hours),
-                hours,
-                insideMeanC(run, mean),
-                neighbours);
+        return outdoors(run, hours).keeping(insideMeanC(run, mean)).withNeighbours(neighbours);
     }
 
-    /** The sun, worked out anew where the run does not bring one of just its span and weather. */
-    private static Sunshine sun(ChamberRun run, int hours) {
+    /** Worked out anew where the run does not bring those of just its span and weather. */
+    private static Surroundings outdoors(ChamberRun run, int hours) {
         return run.extras()
                 .around()
                 .filter(known -> known.hours() == hours)
                 .filter(known -> known.weather().equals(run.weather()))
                 .filter(known -> known.timeline().equals(run.timeline()))
                 .filter(known -> known.site().equals(run.site()))
-                .map(Surroundings::sun)
-                .orElseGet(() -> Sunshine.of(run.site(), run.timeline(), run.weather(), hours));
+                .orElseGet(
+                        () ->
+                                Surroundings.of(
+                                        run.site(),
+                                        run.timeline(),
+                                        run.weather(),
+                                        hours,
+                                        run.setting().temperatureC()));
     }
 
     private static Map<String, double[]> neighbourRatios(ChamberRun run, double pressurePa) {

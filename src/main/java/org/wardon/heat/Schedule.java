@@ -50,8 +50,13 @@ final class Schedule {
     }
 
     private void day(int day, double midnight) {
-        add(midnight, Edge.Kind.MIDNIGHT, 0);
-        if (run.doorMode() == DoorMode.SKETCHED) {
+        boolean sketched = run.doorMode() == DoorMode.SKETCHED;
+        boolean rationed =
+                run.coolers().stream().anyMatch(cooler -> cooler.dailyEnergyKWh().isPresent());
+        if (!sketched || rationed) {
+            add(midnight, Edge.Kind.MIDNIGHT, 0);
+        }
+        if (sketched) {
             return;
         }
         double from = midnight + use(run).fromS();

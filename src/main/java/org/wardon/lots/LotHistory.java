@@ -10,6 +10,7 @@ import org.wardon.errors.Require;
  * nothing else.
  */
 public final class LotHistory {
+    private final int size;
     private final double[] timeS;
     private final double[] meanC;
     private final double[] surfaceC;
@@ -19,20 +20,22 @@ public final class LotHistory {
     private final boolean[] wet;
     private final Optional<double[]> massKg;
 
+    /** Takes over what was collected; the arrays may be longer than the samples. */
     private LotHistory(Builder b) {
-        int n = b.size;
-        timeS = Arrays.copyOf(b.timeS, n);
-        meanC = Arrays.copyOf(b.meanC, n);
-        surfaceC = Arrays.copyOf(b.surfaceC, n);
-        coldestC = Arrays.copyOf(b.coldestC, n);
-        humidity = Arrays.copyOf(b.humidity, n);
-        ethylenePpm = Arrays.copyOf(b.ethylenePpm, n);
-        wet = Arrays.copyOf(b.wet, n);
-        massKg = b.massKnown ? Optional.of(Arrays.copyOf(b.massKg, n)) : Optional.empty();
+        size = b.size;
+        timeS = b.timeS;
+        meanC = b.meanC;
+        surfaceC = b.surfaceC;
+        coldestC = b.coldestC;
+        humidity = b.humidity;
+        ethylenePpm = b.ethylenePpm;
+        wet = b.wet;
+        massKg = b.massKnown ? Optional.of(b.massKg) : Optional.empty();
     }
 
     /** The same samples with other ethylene; what never changes is shared, not copied. */
     private LotHistory(LotHistory same, double[] ppm) {
+        size = same.size;
         timeS = same.timeS;
         meanC = same.meanC;
         surfaceC = same.surfaceC;
@@ -74,7 +77,7 @@ public final class LotHistory {
      * @return at least 2
      */
     public int size() {
-        return timeS.length;
+        return size;
     }
 
     /**
@@ -233,6 +236,7 @@ public final class LotHistory {
         private double[] massKg;
         private boolean[] wet;
         private boolean massKnown;
+        private boolean built;
         private int size;
 
         /** Starts empty. */
@@ -276,6 +280,7 @@ public final class LotHistory {
                 double humidityFraction,
                 double ethylene,
                 boolean isWet) {
+            Require.that(!built, "a history that was built takes no more samples");
             if (size > 0 && !(atS > timeS[size - 1])) {
                 throw new IllegalArgumentException("history times must rise, found " + atS + " s");
             }
@@ -306,12 +311,13 @@ public final class LotHistory {
         }
 
         /**
-         * Returns the history.
+         * Returns the history; this takes no more samples then.
          *
          * @return the history, of at least 2 samples
          */
         public LotHistory build() {
             Require.that(size >= 2, "a history needs at least 2 samples, found " + size);
+            built = true;
             return new LotHistory(this);
         }
 

