@@ -19,11 +19,17 @@ public final class LotInAir {
     private final LotSheet sheet;
     private final LotCourse course;
     private final List<Fate> sold;
+    private final double shareSound;
 
     LotInAir(LotSheet sheet, LotCourse course, List<Fate> sold) {
         this.sheet = sheet;
         this.course = course;
         this.sold = List.copyOf(sold);
+        double sound = 0;
+        for (int draw = 0; draw < sold.size(); draw++) {
+            sound += sound(draw, 1) ? 1 : 0;
+        }
+        shareSound = sound / sold.size();
     }
 
     /**
@@ -32,11 +38,7 @@ public final class LotInAir {
      * @return 0 to 1
      */
     public double shareSound() {
-        double sound = 0;
-        for (int draw = 0; draw < sold.size(); draw++) {
-            sound += sound(draw, 1) ? 1 : 0;
-        }
-        return sound / sold.size();
+        return shareSound;
     }
 
     /**

@@ -28,9 +28,13 @@ final class Companions {
     double[][] losses(Option option, List<Task.Item> items) {
         int n = items.size();
         double[][] loss = new double[n][n];
+        String chamber = option.chamber().id();
         for (int i = 0; i < n; i++) {
             for (int j = 0; j < i; j++) {
-                loss[i][j] = loss(option, items.get(i), items.get(j));
+                Task.Item one = items.get(i);
+                Task.Item other = items.get(j);
+                boolean may = Task.mayStand(one, chamber) && Task.mayStand(other, chamber);
+                loss[i][j] = may ? loss(option, one, other) : 0;
                 loss[j][i] = loss[i][j];
             }
         }

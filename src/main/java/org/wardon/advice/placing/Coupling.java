@@ -239,7 +239,8 @@ final class Coupling {
                         was.idleCost(),
                         was.costPerWDay(),
                         was.blastK());
-        List<Cell.Alone> alone = options.alone(air, figures.meanC());
-        return used.inAir(air, figures, options.cells(used.chamber(), figures, alone));
+        Lazily<Cell.Alone> alone = options.alone(air, figures.meanC());
+        return options.learnt(
+                used.inAir(air, figures, options.cells(used.chamber(), figures, alone)));
     }
 }

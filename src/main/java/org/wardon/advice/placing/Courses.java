@@ -34,10 +34,12 @@ final class Courses {
     private static final LocalTime MORNING = LocalTime.of(6, 0);
 
     private final StoreTrial trial;
+    private final Task task;
     private final SortedMap<LocalDateTime, Double> times = new TreeMap<>();
 
-    Courses(StoreTrial trial) {
+    Courses(StoreTrial trial, Task task) {
         this.trial = trial;
+        this.task = task;
         for (TrialLot lot : trial.lots()) {
             leaving(lot);
             coming(lot);
@@ -73,12 +75,14 @@ final class Courses {
      */
     List<ChamberPlan> of(List<Option> steady) {
         double best = 0;
+        List<Integer> may =
+                steady.isEmpty() ? List.of() : task.mayStand(steady.get(0).chamber().id());
         List<Promise> promises = new ArrayList<>();
         for (Option first : steady) {
-            best = Math.max(best, promised(first, first, Double.POSITIVE_INFINITY));
+            best = Math.max(best, promised(may, first, first, Double.POSITIVE_INFINITY));
             for (Option then : steady) {
                 if (first.settingC() != then.settingC()) {
-                    best(first, then, promises);
+                    best(may, first, then, promises);
                 }
             }
         }
@@ -96,10 +100,10 @@ final class Courses {
     }
 
     /** The best time between two settings. */
-    private void best(Option first, Option then, List<Promise> promises) {
+    private void best(List<Integer> may, Option first, Option then, List<Promise> promises) {
         Promise best = null;
         for (Map.Entry<LocalDateTime, Double> time : times.entrySet()) {
-            double worth = promised(first, then, time.getValue());
+            double worth = promised(may, first, then, time.getValue());
             if (best == null || worth > best.worth()) {
                 best = new Promise(first, then, time.getKey(), worth);
             }
@@ -109,9 +113,9 @@ final class Courses {
         }
     }
 
-    private double promised(Option first, Option then, double changeS) {
+    private double promised(List<Integer> may, Option first, Option then, double changeS) {
         double sum = 0;
-        for (int i = 0; i < trial.lots().size(); i++) {
+        for (int i : may) {
             TrialLot lot = trial.lots().get(i);
             double before = worth(first.cell(i));
             double after = worth(then.cell(i));

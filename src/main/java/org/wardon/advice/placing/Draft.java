@@ -154,6 +154,11 @@ final class Draft {
         double[] fixed = new double[trial.days()];
         for (int i = 0; i < n; i++) {
             Task.Item item = task.items().get(i);
+            if (!Task.mayStand(item, chamber.id())) {
+                heat[i] = new double[fixed.length];
+                worth[i] = Climate.NEVER;
+                continue;
+            }
             Cell cell = option.cell(item.number());
             heat[i] = heatThere(item, cell);
             worth[i] = stakes.worth(item, cell);

@@ -49,8 +49,8 @@ public final class OpenLots {
             return new Housed(plan, List.of());
         }
         StoreTrial trial = StoreTrial.of(plan, book, progress);
-        Options options = new Options(trial);
         Task task = new Task(trial, PlaceQuestion.NONE_MOVES);
+        Options options = new Options(trial, task);
         Draft draft = new Draft(trial, task, new Companions(trial, options));
         Sought sought = draft.seek(running, options.asSet(), plan.wish().aim(), 1);
         return housed(plan, task, sought);

@@ -14,7 +14,7 @@ import org.wardon.plan.ChamberPlan;
  * @param air the air lots stand in
  * @param figures what the air is like and what it costs
  * @param takesW heat of lots it can take, {@code [day]}, mean of the day, W
- * @param cells what each lot comes to, in the order of the plan
+ * @param cells what each lot comes to
  */
 record Option(
         ChamberPlan chamber,
@@ -22,14 +22,13 @@ record Option(
         AirSeries air,
         Figures figures,
         List<Double> takesW,
-        List<Cell> cells) {
+        Cells cells) {
     /** Share of the band that air nobody keeps comes below its mean (assumption). */
     private static final double UNKEPT = 0.5;
 
-    /** Copies the lists. */
+    /** Copies the list. */
     Option {
         takesW = List.copyOf(takesW);
-        cells = List.copyOf(cells);
     }
 
     /**
@@ -73,7 +72,7 @@ record Option(
     }
 
     Cell cell(int lot) {
-        return cells.get(lot);
+        return cells.there().of(lot);
     }
 
     /** The same with other heat that it can take. */
@@ -82,7 +81,7 @@ record Option(
     }
 
     /** The same, its lots standing in other air. */
-    Option inAir(AirSeries other, Figures known, List<Cell> there) {
+    Option inAir(AirSeries other, Figures known, Cells there) {
         return new Option(chamber, riseK, other, known, takesW, there);
     }
 

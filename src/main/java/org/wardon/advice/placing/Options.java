@@ -5,9 +5,11 @@ import java.util.Arrays;
 import java.util.Comparator;
 import java.util.HashMap;
 import java.util.LinkedHashMap;
+import java.util.LinkedHashSet;
 import java.util.List;
 import java.util.Map;
 import java.util.Objects;
+import java.util.Set;
 import java.util.stream.IntStream;
 import org.wardon.advice.forecast.LotInAir;
 import org.wardon.advice.forecast.StoreTrial;
@@ -52,11 +54,13 @@ final class Options {
     private final Map<String, List<Paces>> paces = new LinkedHashMap<>();
     private final Map<String, Reach> reaches = new LinkedHashMap<>();
     private final Map<String, ChamberPlan> now = new HashMap<>();
-    private final Map<Air, List<Cell.Alone>> airs = new HashMap<>();
+    private final Map<Air, Lazily<Cell.Alone>> airs = new HashMap<>();
+    private final Task task;
     private final List<Double> prices;
 
-    Options(StoreTrial trial) {
+    Options(StoreTrial trial, Task task) {
         this.trial = trial;
+        this.task = task;
         temperatures = Temperatures.of(trial);
         prices = Worth.prices(trial.lots());
         List<List<Paces>> all =
@@ -110,7 +114,7 @@ final class Options {
 
     /** Adds courses of two settings where they promise more than one setting. */
     private Map<String, List<Option>> withCourses(Map<String, List<Option>> steady) {
-        Courses courses = new Courses(trial);
+        Courses courses = new Courses(trial, task);
         List<Dial> dials = new ArrayList<>();
         for (ChamberPlan chamber : trial.plan().chambers()) {
             if (keeps(chamber.switchedOn())) {
@@ -163,8 +167,9 @@ final class Options {
     List<Option> of(List<Dial> dials) {
         List<Sketch> sketches =
                 dials.parallelStream().flatMap(dial -> sketches(dial).stream()).toList();
-        learn(sketches);
-        return sketches.stream().map(this::option).toList();
+        List<Option> options = sketches.stream().map(this::option).toList();
+        learn(options);
+        return options;
     }
 
     /** What is known of an option before lots are put into it. */
@@ -199,26 +204,32 @@ final class Options {
         return chamber.coolers().stream().anyMatch(Cooler::holdsBand);
     }
 
-    /** Puts the lots into steady airs that are not known yet. */
-    private void learn(List<Sketch> sketches) {
-        List<Air> asked =
-                sketches.stream()
-                        .filter(Sketch::held)
-                        .map(Sketch::like)
-                        .filter(air -> !airs.containsKey(air))
-                        .distinct()
-                        .toList();
-        List<List<Cell.Alone>> found =
-                asked.parallelStream().map(air -> alone(air.series(), air.atC())).toList();
-        for (int i = 0; i < asked.size(); i++) {
-            airs.put(asked.get(i), found.get(i));
-        }
+    /** Puts the lots that may stand there into the air of an option. */
+    Option learnt(Option option) {
+        learn(List.of(option));
+        return option;
     }
 
+    /** All at once, lot by lot, so that two threads share the work whatever it is. */
+    private void learn(List<Option> options) {
+        Set<Asked> asked = new LinkedHashSet<>();
+        for (Option option : options) {
+            for (int lot : task.mayStand(option.chamber().id())) {
+                asked.add(new Asked(option.cells().alone(), lot));
+            }
+        }
+        List.copyOf(asked).parallelStream().forEach(one -> one.alone().of(one.lot()));
+        options.parallelStream()
+                .forEach(option -> task.mayStand(option.chamber().id()).forEach(option::cell));
+    }
+
+    /** A lot in an air; the same of two options whose chambers make the same air. */
+    private record Asked(Lazily<Cell.Alone> alone, int lot) {}
+
     private Option option(Sketch sketch) {
-        List<Cell.Alone> alone =
+        Lazily<Cell.Alone> alone =
                 sketch.held()
-                        ? Objects.requireNonNull(airs.get(sketch.like()))
+                        ? airs.computeIfAbsent(sketch.like(), air -> alone(air.series(), air.atC()))
                         : alone(sketch.air(), sketch.figures().meanC());
         return new Option(
                 sketch.set(),
@@ -328,8 +339,9 @@ final class Options {
     }
 
     /** What every lot comes to in air. */
-    List<Cell.Alone> alone(AirSeries air, double meanC) {
-        return trial.lots().parallelStream().map(lot -> alone(lot, air, meanC)).toList();
+    Lazily<Cell.Alone> alone(AirSeries air, double meanC) {
+        List<TrialLot> lots = trial.lots();
+        return new Lazily<>(lots.size(), lot -> alone(lots.get(lot), air, meanC));
     }
 
     private Cell.Alone alone(TrialLot lot, AirSeries air, double meanC) {
@@ -347,15 +359,18 @@ final class Options {
     }
 
     /** What every lot comes to in a chamber. */
-    List<Cell> cells(ChamberPlan set, Option.Figures figures, List<Cell.Alone> alone) {
-        List<Cell> cells = new ArrayList<>();
-        for (int l = 0; l < alone.size(); l++) {
-            Cell.Alone one = alone.get(l);
-            GivenHere giving = GivenHere.of(one.lot(), trial.draws(), figures);
-            Cell.Forbidden forbidden = forbidden(one.lot(), one.there(), set, figures);
-            cells.add(Cell.of(one, prices.get(l), forbidden, giving));
-        }
-        return cells;
+    Cells cells(ChamberPlan set, Option.Figures figures, Lazily<Cell.Alone> alone) {
+        return new Cells(
+                alone,
+                new Lazily<>(
+                        trial.lots().size(),
+                        lot -> {
+                            Cell.Alone one = alone.of(lot);
+                            GivenHere giving = GivenHere.of(one.lot(), trial.draws(), figures);
+                            Cell.Forbidden forbidden =
+                                    forbidden(one.lot(), one.there(), set, figures);
+                            return Cell.of(one, prices.get(lot), forbidden, giving);
+                        }));
     }
 
     private Cell.Forbidden forbidden(

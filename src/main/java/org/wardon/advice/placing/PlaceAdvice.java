@@ -50,11 +50,11 @@ public final class PlaceAdvice {
         check(plan, question);
         Stages stages = new Stages(progress);
         StoreTrial trial = StoreTrial.of(plan, book, stages);
-        Options options = new Options(trial);
+        Task task = new Task(trial, question);
+        Options options = new Options(trial, task);
         stages.begin("chambers", 0.1);
         Map<String, List<Option>> all = options.all();
         stages.begin("chambers", 0.4);
-        Task task = new Task(trial, question);
         Companions companions = new Companions(trial, options);
         Draft draft = new Draft(trial, task, companions);
         Sought asPlanned = Trials.present(trial, task, all, companions);

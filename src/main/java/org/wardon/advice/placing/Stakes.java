@@ -41,7 +41,7 @@ final class Stakes {
         for (Task.Item item : task.items()) {
             double most = 0;
             for (List<Option> chamber : options.values()) {
-                for (Option option : chamber) {
+                for (Option option : mayTake(item, chamber)) {
                     most = Math.max(most, option.cell(item.number()).worth());
                 }
             }
@@ -51,6 +51,11 @@ final class Stakes {
             money += chamber.stream().mapToDouble(o -> o.figures().idleCost()).max().orElse(0);
         }
         return new Stakes(trial, task, aim, money, options.size());
+    }
+
+    private static List<Option> mayTake(Task.Item item, List<Option> chamber) {
+        boolean may = chamber.isEmpty() || Task.mayStand(item, chamber.get(0).chamber().id());
+        return may ? chamber : List.of();
     }
 
     /** All money that can be at stake. */

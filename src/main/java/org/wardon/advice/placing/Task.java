@@ -88,6 +88,20 @@ final class Task {
         return items;
     }
 
+    /** Whether an item may stand in a chamber. */
+    static boolean mayStand(Item item, String chamberId) {
+        return item.fixed().map(chamberId::equals).orElse(true);
+    }
+
+    /** Numbers of lots that may stand in a chamber. */
+    List<Integer> mayStand(String chamberId) {
+        return items.stream()
+                .filter(item -> mayStand(item, chamberId))
+                .map(Item::number)
+                .distinct()
+                .toList();
+    }
+
     /** Numbers of lots that are fixed in a chamber. */
     boolean hasFixed(String chamberId) {
         return items.stream().anyMatch(item -> item.fixed().equals(Optional.of(chamberId)));

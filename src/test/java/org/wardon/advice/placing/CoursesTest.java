@@ -118,7 +118,8 @@ class CoursesTest {
     void noneIsOfferedWhereBananasStayOrItsCoolerCannotMakeTheCold() {
         for (StorePlan plan : List.of(store(10, 3_000), store(2, 300))) {
             StoreTrial trial = StoreTrial.of(plan, book);
-            Options options = new Options(trial);
+            Options options =
+                    new Options(trial, new Task(trial, new PlaceQuestion(true, Set.of())));
             List<Option> all = options.all().get("only");
             double lowestC = options.reach("only").lowestC();
             for (Option option : all) {

@@ -64,8 +64,9 @@ class PlaceAdviceTest {
     /** The placing by what is assumed, before the full model has its word. */
     private Sought sought(StorePlan plan, PlaceQuestion question) {
         StoreTrial trial = StoreTrial.of(plan, book);
-        Options options = new Options(trial);
-        Draft draft = new Draft(trial, new Task(trial, question), new Companions(trial, options));
+        Task task = new Task(trial, question);
+        Options options = new Options(trial, task);
+        Draft draft = new Draft(trial, task, new Companions(trial, options));
         Sought sought = draft.seek(plan.chambers(), options.all(), plan.wish().aim(), 1);
         assertTrue(sought.proven(), "not proven");
         return sought;
