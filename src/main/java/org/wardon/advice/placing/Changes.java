@@ -84,6 +84,9 @@ final class Changes {
         Argument fromC = Argument.of(is.starts().get().temperatureC(), "C");
         Argument toC = Argument.of(is.setting().temperatureC(), "C");
         Double hours = reachedH.get(is.id());
+        if (hours != null && hours < 1) {
+            return Optional.of(Reason.about("place-reached-soon", is.id(), RULE, fromC, toC));
+        }
         return Optional.of(
                 hours == null
                         ? Reason.about("place-not-reached", is.id(), RULE, fromC, toC)
