@@ -34,9 +34,7 @@ public final class ChamberNetwork implements TreeSystem {
     private final LotBank[] banks;
     private final LotPart[] lots;
     private final Blast blast;
-    private final double[] weights;
-    private double lotK = 1;
-    private double airK = 1;
+    private final Weights weights;
     private int flows;
     private double airKg;
     private double freeM3;
@@ -85,7 +83,7 @@ public final class ChamberNetwork implements TreeSystem {
             banks[e] = ends[e].lots(tree, this::take, inputs, here, lots);
         }
         blast = new Blast(coolers);
-        weights = new double[tree.size()];
+        weights = new Weights(tree.size());
         freeVolume(inputs.enclosure().box().volumeM3());
         hour(0);
     }
@@ -466,19 +464,7 @@ public final class ChamberNetwork implements TreeSystem {
      * @param airK air, K
      */
     public void accuracy(double lotK, double airK) {
-        this.lotK = lotK;
-        this.airK = airK;
-        double[] tolerances = new double[tree.size()];
-        Arrays.fill(tolerances, lotK);
-        for (AirEnd end : ends) {
-            tolerances[end.air.at] = airK * MoistAir.DRY_AIR_J_KG_K;
-            tolerances[end.air.at + 1] = airK * 5e-4;
-        }
-        faces.tolerances(airK, tolerances);
-        List.of(coolers).forEach(cooler -> cooler.tolerances(tolerances));
-        for (int i = 0; i < weights.length; i++) {
-            weights[i] = 1 / tolerances[i];
-        }
+        weights.allow(lotK, airK, ends, faces, coolers);
     }
 
     /**
@@ -491,7 +477,7 @@ public final class ChamberNetwork implements TreeSystem {
      */
     public void arrive(int i, double pulpC, double waterKg, double[] y) {
         lots[i].arrive(pulpC, waterKg, roomAir.ratio(endOf(i), y), y);
-        lots[i].weights(lotK, airK, weights);
+        weights.take(lots[i]);
     }
 
     /**
@@ -503,7 +489,7 @@ public final class ChamberNetwork implements TreeSystem {
      */
     public void bringIn(int i, double[] nodes, double[] y) {
         lots[i].put(nodes, y);
-        lots[i].weights(lotK, airK, weights);
+        weights.take(lots[i]);
     }
 
     /**
@@ -538,7 +524,7 @@ public final class ChamberNetwork implements TreeSystem {
 
     @Override
     public double[] weights() {
-        return weights;
+        return weights.perNode;
     }
 
     @Override
