@@ -169,7 +169,8 @@ public final class ChamberPage {
                 views.lots(asked.dataPath()),
                 asked.advice().view(asked.chamber()).isStill()
                         ? Optional.of(asked.path() + "/section")
-                        : Optional.empty());
+                        : Optional.empty(),
+                !asked.advice().plan().getChamber(asked.chamber()).use().changes().isEmpty());
     }
 
     private ChamberViews views(Asked asked) {

@@ -31,6 +31,7 @@ public record ChamberSheet(
      * @param face temperatures through a face
      * @param lots a chart a lot
      * @param section path of the section, where no fan stirs the air
+     * @param laterSettings whether its plan changes its setting on the way
      */
     public record Body(
             ChamberView chamber,
@@ -41,7 +42,8 @@ public record ChamberSheet(
             Drawing heat,
             FaceSheet face,
             List<ChartView> lots,
-            Optional<String> section) {
+            Optional<String> section,
+            boolean laterSettings) {
         /** Copies the lists. */
         public Body {
             slides = List.copyOf(slides);
