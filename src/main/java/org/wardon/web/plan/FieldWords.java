@@ -9,15 +9,29 @@ import java.nio.charset.StandardCharsets;
 import java.util.Locale;
 import java.util.Objects;
 import java.util.Properties;
+import java.util.function.DoubleFunction;
+import java.util.function.UnaryOperator;
+import java.util.regex.Pattern;
+import org.wardon.web.pages.Figures;
 
 /**
  * Words of the fields of a plan by their place. A place without words is told by its name and by
  * what the schema says of it, so that a new kind shows by itself.
  */
 final class FieldWords {
-    private final Properties bundle = new Properties();
+    private static final Pattern CELSIUS = Pattern.compile("(-?\\d+(?:\\.\\d+)?) °C");
+    private static final Pattern KILOGRAMS = Pattern.compile("(\\d+(?:\\.\\d+)?) kg\\b");
+
+    private final Properties bundle;
+    private final UnaryOperator<String> told;
+
+    private FieldWords(Properties bundle, UnaryOperator<String> told) {
+        this.bundle = bundle;
+        this.told = told;
+    }
 
     FieldWords() {
+        this(new Properties(), UnaryOperator.identity());
         String name = "/org/wardon/web/plan-fields.properties";
         try (InputStream in =
                         Objects.requireNonNull(FieldWords.class.getResourceAsStream(name), name);
@@ -40,7 +54,25 @@ final class FieldWords {
     }
 
     String hint(String key, String otherwise) {
-        return bundle.getProperty("hint." + key, otherwise);
+        return told.apply(bundle.getProperty("hint." + key, otherwise));
+    }
+
+    /** The same words, figures in hints written as a person likes them. */
+    FieldWords in(Figures figures) {
+        return new FieldWords(bundle, hint -> figures.text(converted(hint, figures)));
+    }
+
+    private static String converted(String hint, Figures figures) {
+        String shown = hint;
+        if (!figures.temperatureUnit().equals("°C")) {
+            shown = each(CELSIUS, shown, figures::temperature);
+        }
+        return figures.massUnit().equals("kg") ? shown : each(KILOGRAMS, shown, figures::mass);
+    }
+
+    private static String each(Pattern figure, String text, DoubleFunction<String> shown) {
+        return figure.matcher(text)
+                .replaceAll(found -> shown.apply(Double.parseDouble(found.group(1))));
     }
 
     /** A word of a list of words. */

@@ -288,15 +288,16 @@ public final class PlanEditor {
         boolean chamber = sheet.page().toString().startsWith("$.chambers");
         Optional<FaceAdvice> faces =
                 chamber ? Optional.of(FaceAdvice.of(text, bench.book())) : Optional.empty();
+        FieldWords shown = words.in(call.figures());
         RowMaker rows =
                 new RowMaker(
                         new RowMaker.Made(plan, form, faults, faces),
-                        words,
+                        shown,
                         press.words(),
                         call.figures(),
                         numbers);
         List<EntryView> entries =
-                new EntryMaker(form, faults, words, press.words(), numbers, rows).of(place);
+                new EntryMaker(form, faults, shown, press.words(), numbers, rows).of(place);
         boolean face = isFace(sheet.page());
         press.print(
                 call,

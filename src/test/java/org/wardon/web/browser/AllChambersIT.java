@@ -5,6 +5,12 @@ import static org.junit.jupiter.api.Assertions.assertTrue;
 
 import com.microsoft.playwright.Locator;
 import com.microsoft.playwright.Page;
+import com.microsoft.playwright.options.FilePayload;
+import com.microsoft.playwright.options.Media;
+import java.io.IOException;
+import java.nio.charset.StandardCharsets;
+import java.nio.file.Files;
+import java.nio.file.Path;
 import org.junit.jupiter.api.BeforeAll;
 import org.junit.jupiter.api.Test;
 import org.junit.jupiter.params.ParameterizedTest;
@@ -13,6 +19,7 @@ import org.junit.jupiter.params.provider.ValueSource;
 /** The first page a keeper sees: every chamber with its sentence, its days and its lots. */
 class AllChambersIT extends InBrowser {
     private static final int DAYS = 10;
+    private static final int PAPER = 700;
 
     private String plan = "";
 
@@ -49,6 +56,65 @@ class AllChambersIT extends InBrowser {
         page.keyboard().press("Enter");
         assertEquals("main", page.evaluate("() => document.activeElement.id"));
         page.close();
+    }
+
+    /** A sheet of A4 between its margins is about 700 px wide. */
+    @ParameterizedTest
+    @ValueSource(strings = {"", "/chamber/cold", "/edit", "/door?crop=mango&mass=500&pulp=30"})
+    void onPaperAllIsOpenAndNothingIsToBePressed(String path) {
+        Page page = show(plan + path, PAPER);
+        page.waitForSelector(".verdict, .plan-form, #answer-title");
+        page.emulateMedia(new Page.EmulateMediaOptions().setMedia(Media.PRINT));
+        assertEquals(0, page.locator("nav:visible, button:visible, canvas:visible").count());
+        assertTrue(page.locator(".plan-name:visible").textContent().contains("Heron Quay"));
+        assertTrue(page.locator(".on-paper:visible").textContent().endsWith("UTC"));
+        if (path.isEmpty()) {
+            assertEquals(3, page.locator(".verdict:visible").count());
+            assertEquals(3, page.locator(".hours table:visible").count());
+            assertEquals(
+                    page.locator(".caution").count(), page.locator(".caution:visible").count());
+        } else if (path.startsWith("/chamber")) {
+            assertEquals(5, page.locator(".plain-curve svg:visible").count());
+        }
+        Object cut =
+                page.evaluate(
+                        "() => [...document.querySelectorAll('table, svg, figure')].filter(one =>"
+                                + " one.getBoundingClientRect().right > innerWidth + 1).length");
+        assertEquals(0, cut, "cut off at the right");
+        page.close();
+    }
+
+    @Test
+    void aLongForecastStopsWhenToldAndGoesOnWhenWished() throws IOException {
+        String years =
+                Files.readString(Path.of("src/test/resources/plans/minimal/plan.json"))
+                        .replace("\"days\": 2,", "\"days\": 1830,");
+        Page page = show("/plans", DESK);
+        page.setInputFiles(
+                "input[name=plan]",
+                new FilePayload(
+                        "years.json", "application/json", years.getBytes(StandardCharsets.UTF_8)));
+        page.click("form[action='/plans/bring'] button");
+        page.waitForSelector(".progress");
+        page.click(".progress button");
+        Locator told = page.locator(".notice");
+        told.waitFor();
+        assertTrue(told.textContent().contains("was stopped before it was ready"));
+        told.locator("button").click();
+        page.waitForSelector(".progress");
+        page.click(".progress button");
+        told.waitFor();
+        page.close();
+    }
+
+    @ParameterizedTest
+    @ValueSource(ints = {PHONE, DESK})
+    void pagesBesideThePlanAreHeldToo(int width) {
+        for (String path : new String[] {"/api", "/preferences"}) {
+            Page page = show(path, width);
+            hold(page, path.substring(1));
+            page.close();
+        }
     }
 
     @Test

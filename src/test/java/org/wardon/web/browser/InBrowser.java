@@ -59,7 +59,7 @@ public abstract class InBrowser {
                         "PLAYWRIGHT_NODEJS_PATH",
                         Absent.NODE.toString());
         playwright = Playwright.create(new Playwright.CreateOptions().setEnv(driver));
-        browser = playwright.chromium().launchPersistentContext(profile, options());
+        browser = playwright.chromium().launchPersistentContext(profile, options(scripted()));
         browser.onConsoleMessage(
                 message -> {
                     if (List.of("error", "warning").contains(message.type())) {
@@ -69,10 +69,16 @@ public abstract class InBrowser {
         browser.onWebError(error -> complaints.add(error.error()));
     }
 
-    private static BrowserType.LaunchPersistentContextOptions options() {
+    /** Whether pages may run scripts. */
+    boolean scripted() {
+        return true;
+    }
+
+    private static BrowserType.LaunchPersistentContextOptions options(boolean scripted) {
         return new BrowserType.LaunchPersistentContextOptions()
                 .setExecutablePath(Absent.CHROMIUM)
                 .setHeadless(true)
+                .setJavaScriptEnabled(scripted)
                 .setChromiumSandbox(false)
                 .setArgs(
                         List.of(

@@ -105,10 +105,11 @@ class PlacingIT extends InBrowser {
         page.close();
     }
 
-    @Test
+    @ParameterizedTest
     @Order(4)
-    void lotsThatPullApartAreSeenAndSaid() {
-        Page page = show(plan + "/sharing?lots=B1&lots=L1&crops=mango=3", DESK);
+    @ValueSource(ints = {PHONE, DESK})
+    void lotsThatPullApartAreSeenAndSaid(int width) {
+        Page page = show(plan + "/sharing?lots=B1&lots=L1&crops=mango=3", width);
         List<String> pulls = page.locator(".ruler-pulls").allTextContents();
         assertTrue(
                 pulls.contains("pulls warmer ▸") && pulls.contains("◂ pulls colder"), "" + pulls);
