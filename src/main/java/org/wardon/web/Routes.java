@@ -15,6 +15,8 @@ import org.wardon.web.crops.CropsPage;
 import org.wardon.web.door.DoorPage;
 import org.wardon.web.guard.Guard;
 import org.wardon.web.guard.Refusal;
+import org.wardon.web.lists.ListPage;
+import org.wardon.web.lists.LotsPage;
 import org.wardon.web.pages.AllChambersPage;
 import org.wardon.web.pages.Call;
 import org.wardon.web.pages.EntrancePage;
@@ -86,8 +88,14 @@ final class Routes {
     private void forecast() {
         AllChambersPage chambers = new AllChambersPage(bench, press);
         ForecastRoutes forecast = new ForecastRoutes(bench);
+        ListPage lists = new ListPage(bench, press);
         routes.get("/", call(chambers::home));
         routes.get("/plan/{plan}", call(chambers::show));
+        routes.get("/plan/{plan}/lots", call(new LotsPage(bench, press)::show));
+        routes.get("/plan/{plan}/cautions", call(lists::cautions));
+        routes.get("/plan/{plan}/notes", call(lists::notes));
+        routes.get("/plan/{plan}/actions", call(lists::actions));
+        routes.get("/plan/{plan}/chamber/{chamber}/company", call(lists::company));
         routes.post("/plan/{plan}/forecast/cancel", call(forecast::cancel));
         routes.post("/plan/{plan}/forecast/again", call(forecast::again));
     }

@@ -166,7 +166,8 @@ public final class ChamberPage {
                 views.limits(),
                 views.heat(desk.heat(asked.open(), asked.advice(), asked.chamber())),
                 views.face(asked.query("face"), asked.hour()),
-                views.lots(asked.dataPath()),
+                views.lots(asked.dataPath(), asked.query("lot")),
+                views.picks(asked.query("lot")),
                 asked.advice().view(asked.chamber()).isStill()
                         ? Optional.of(asked.path() + "/section")
                         : Optional.empty(),

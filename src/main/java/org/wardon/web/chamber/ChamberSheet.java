@@ -29,7 +29,8 @@ public record ChamberSheet(
      * @param limits limits of carbon dioxide, with their sources
      * @param heat what heats it
      * @param face temperatures through a face
-     * @param lots a chart a lot
+     * @param lots a chart a lot, or that of the lot chosen
+     * @param picks lots to choose from where there are too many for a chart each
      * @param section path of the section, where no fan stirs the air
      * @param laterSettings whether its plan changes its setting on the way
      */
@@ -42,6 +43,7 @@ public record ChamberSheet(
             Drawing heat,
             FaceSheet face,
             List<ChartView> lots,
+            List<Pick> picks,
             Optional<String> section,
             boolean laterSettings) {
         /** Copies the lists. */
@@ -50,6 +52,7 @@ public record ChamberSheet(
             charts = List.copyOf(charts);
             limits = List.copyOf(limits);
             lots = List.copyOf(lots);
+            picks = List.copyOf(picks);
         }
     }
 

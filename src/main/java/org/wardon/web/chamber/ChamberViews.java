@@ -28,6 +28,9 @@ final class ChamberViews {
     private static final double W_PER_KW = 1_000;
     private static final double PPM_SHOWN = 0.5;
 
+    /** So many lots have a chart each. */
+    private static final int MOST_LOTS = 12;
+
     private final StoreAdvice advice;
     private final StorePlan plan;
     private final String chamber;
@@ -128,20 +131,44 @@ final class ChamberViews {
                 .toList();
     }
 
-    List<ChartView> lots(String path) {
+    /** A chart a lot; of very many that of the lot asked for, else of the first. */
+    List<ChartView> lots(String path, String asked) {
+        String one = chosen(asked);
         return advice.view(chamber).lots().stream()
-                .map(
-                        lot ->
-                                new ChartView(
-                                        say.say("curve.lot", lot.of()),
-                                        path + "/lots/" + lot.of() + "/curve",
-                                        "",
-                                        curves.byDay(
-                                                Curves.OF_LOT,
-                                                lot,
-                                                say.say("curve.lot-by-day", lot.of())),
-                                        ""))
+                .filter(lot -> !isCrowded() || lot.of().equals(one))
+                .map(lot -> ofLot(path, lot))
                 .toList();
+    }
+
+    private boolean isCrowded() {
+        return advice.view(chamber).lots().size() > MOST_LOTS;
+    }
+
+    private String chosen(String asked) {
+        List<HourlySeries> lots = advice.view(chamber).lots();
+        return lots.stream().anyMatch(lot -> lot.of().equals(asked)) || lots.isEmpty()
+                ? asked
+                : lots.get(0).of();
+    }
+
+    /** Lots to choose from; none where each has its chart. */
+    List<ChamberSheet.Pick> picks(String asked) {
+        String one = chosen(asked);
+        return isCrowded()
+                ? advice.view(chamber).lots().stream()
+                        .map(HourlySeries::of)
+                        .map(id -> new ChamberSheet.Pick(id, id, id.equals(one)))
+                        .toList()
+                : List.of();
+    }
+
+    private ChartView ofLot(String path, HourlySeries lot) {
+        return new ChartView(
+                say.say("curve.lot", lot.of()),
+                path + "/lots/" + lot.of() + "/curve",
+                "",
+                curves.byDay(Curves.OF_LOT, lot, say.say("curve.lot-by-day", lot.of())),
+                "");
     }
 
     Optional<ChartData> lot(String id) {

@@ -2,17 +2,14 @@ package org.wardon.web.pages;
 
 import java.time.Clock;
 import java.time.LocalDateTime;
-import java.util.Comparator;
 import java.util.List;
 import java.util.Locale;
 import java.util.Optional;
+import java.util.stream.Stream;
 import org.wardon.advice.forecast.StoreAdvice;
 import org.wardon.advice.wording.Words;
-import org.wardon.files.forecast.Because;
 import org.wardon.files.forecast.ChamberForecast;
 import org.wardon.files.forecast.Forecast;
-import org.wardon.files.forecast.LotForecast;
-import org.wardon.files.forecast.Quantiles;
 import org.wardon.plan.ChamberPlan;
 import org.wardon.plan.LotPlan;
 import org.wardon.plan.SettingChange;
@@ -26,6 +23,15 @@ public final class AdviceViews {
     private static final List<String> DETAILS =
             List.of("default-taken", "life-", "chilling-floor", "chilling-band", "chilling-dose");
 
+    /** So many cautions of a level, reasons of a chamber and things to do are told one by one. */
+    private static final int CAUTIONS_SHOWN = 30;
+
+    private static final int REASONS_SHOWN = 12;
+    private static final int ACTIONS_SHOWN = 12;
+
+    /** So few more are not worth a page of their own. */
+    private static final int ACTIONS_FEW = 6;
+
     private final StoreAdvice advice;
     private final StorePlan plan;
     private final Forecast forecast;
@@ -34,6 +40,7 @@ public final class AdviceViews {
     private final PageWords say;
     private final Figures figures;
     private final LocalDateTime today;
+    private final LotCards cards;
 
     /**
      * Prepares the views.
@@ -55,6 +62,7 @@ public final class AdviceViews {
         LocalDateTime now = LocalDateTime.ofInstant(clock.instant(), plan.site().zone());
         LocalDateTime end = plan.from().plusMinutes(Math.round(plan.days() * 24 * 60));
         this.today = now.isBefore(plan.from()) || now.isAfter(end) ? plan.from() : now;
+        this.cards = new LotCards(advice, open, words, frame, today);
     }
 
     AllChambersView allChambers() {
@@ -67,21 +75,78 @@ public final class AdviceViews {
                 Optional.empty(),
                 Optional.empty(),
                 List.of(),
-                forecast.warnings().stream().filter(w -> !detail(w)).map(this::caution).toList(),
-                forecast.actions().stream().map(this::action).toList(),
+                cautions(),
+                actions().stream().limit(actionsShown()).toList(),
+                moreActions(),
                 forecast.chambers().stream().map(this::chamber).toList(),
-                lots(lot -> lot.chamber().isEmpty()),
+                cards.brief(Optional.empty()),
                 money(),
                 open.kept().id());
     }
 
-    private static boolean detail(Forecast.Warning warning) {
+    static boolean isDetail(Forecast.Warning warning) {
         return warning.level().equals("note")
                 && DETAILS.stream().anyMatch(code -> warning.code().startsWith(code));
     }
 
-    private CautionView caution(Forecast.Warning warning) {
-        return new CautionView(warning.level(), figures.text(warning.text()), warning.source());
+    /**
+     * Returns what is to be told at a level, but for what figures rest on.
+     *
+     * @param level {@code danger}, {@code caution} or {@code note}
+     * @return in the order of the forecast
+     */
+    public List<Telling> told(String level) {
+        return forecast.warnings().stream()
+                .filter(warning -> warning.level().equals(level) && !isDetail(warning))
+                .map(Tellings::of)
+                .toList();
+    }
+
+    private List<CautionView> cautions() {
+        Tellings tellings = new Tellings(say, figures);
+        String path = Room.CHAMBERS.path(open.kept().id());
+        return Stream.of("danger", "caution", "note")
+                .flatMap(
+                        level ->
+                                tellings
+                                        .brief(
+                                                told(level),
+                                                CAUTIONS_SHOWN,
+                                                code -> path + "/" + listOf(level) + "?of=" + code)
+                                        .stream())
+                .toList();
+    }
+
+    private static String listOf(String level) {
+        return level.equals("note") ? "notes" : "cautions";
+    }
+
+    /**
+     * Returns what is to be done.
+     *
+     * @return sentences, what comes first at the head
+     */
+    public List<String> actions() {
+        return forecast.actions().stream().map(this::action).toList();
+    }
+
+    /** All, unless the rest would be worth a page of its own. */
+    private int actionsShown() {
+        int all = forecast.actions().size();
+        return all <= ACTIONS_SHOWN + ACTIONS_FEW ? all : ACTIONS_SHOWN;
+    }
+
+    private Optional<MoreView> moreActions() {
+        int more = forecast.actions().size() - actionsShown();
+        String path = Room.CHAMBERS.path(open.kept().id()) + "/actions?from=";
+        return more == 0
+                ? Optional.empty()
+                : Optional.of(
+                        new MoreView(
+                                "",
+                                new LinkView(
+                                        path + (actionsShown() + 1),
+                                        say.say("actions.more", String.valueOf(more)))));
     }
 
     private String action(Forecast.Action action) {
@@ -135,14 +200,38 @@ public final class AdviceViews {
                                         * fullestKg(chamber.id())
                                         / plan.getChamber(chamber.id()).capacityKg()),
                 sharing.map(one -> words.text("verdict." + one.verdict())),
-                sharing.map(one -> one.reasons().stream().map(this::because).toList())
-                        .orElse(List.of()),
-                lots(lot -> lot.chamber().equals(Optional.of(chamber.id()))),
+                because(chamber.id()),
+                cards.brief(Optional.of(chamber.id())),
                 chart(chamber.id()));
     }
 
-    private String because(Because because) {
-        return figures.text(because.text());
+    private List<CautionView> because(String chamber) {
+        String path = Room.CHAMBERS.path(open.kept().id()) + "/chamber/" + chamber;
+        return new Tellings(say, figures)
+                .brief(reasons(chamber), REASONS_SHOWN, code -> path + "/company?of=" + code);
+    }
+
+    /**
+     * Returns why the lots of a chamber may share it or not.
+     *
+     * @param chamber its id
+     * @return in the order of the forecast
+     */
+    public List<Telling> reasons(String chamber) {
+        return forecast.sharing().stream()
+                .filter(one -> one.chamber().equals(chamber))
+                .flatMap(one -> one.reasons().stream())
+                .map(Tellings::of)
+                .toList();
+    }
+
+    /**
+     * Returns lots at a glance.
+     *
+     * @return the cards of all lots
+     */
+    public LotCards cards() {
+        return cards;
     }
 
     private String sentence(Reason reason) {
@@ -223,42 +312,6 @@ public final class AdviceViews {
             }
         }
         return fullest;
-    }
-
-    private List<LotCardView> lots(java.util.function.Predicate<LotForecast> which) {
-        return forecast.lots().stream()
-                .filter(which)
-                .sorted(Comparator.comparing(LotForecast::leaveBy))
-                .map(this::lot)
-                .toList();
-    }
-
-    private LotCardView lot(LotForecast lot) {
-        LotPlan planned =
-                plan.lots().stream()
-                        .filter(one -> one.id().equals(lot.id()))
-                        .findFirst()
-                        .orElseThrow();
-        return new LotCardView(
-                lot.id(),
-                crop(planned),
-                figures.mass(planned.massKg()),
-                figures.day(lot.leaveBy().toLocalDate()),
-                RangeView.days(lot.daysLeft(), words, figures),
-                words.text("mechanism." + lot.limitedBy()),
-                gained(lot.daysGained()),
-                lot.hangsOn().map(on -> words.text("hangs-on." + on.range())).stream().toList(),
-                lot.leaveBy().isBefore(today.plusDays(1)));
-    }
-
-    private String crop(LotPlan lot) {
-        String name = open.book().get(lot.commodity()).names().get(0);
-        return lot.variant().map(variant -> name + ", " + variant).orElse(name);
-    }
-
-    private String gained(Quantiles days) {
-        String size = figures.figure(Math.abs(days.p50()), "day");
-        return days.p50() < 0 ? say.say("lot.loses", size) : say.say("lot.gains", size);
     }
 
     private ChartView chart(String chamber) {

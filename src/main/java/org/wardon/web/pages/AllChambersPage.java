@@ -140,8 +140,9 @@ public final class AllChambersPage {
                 faults,
                 List.of(),
                 List.of(),
+                Optional.empty(),
                 List.of(),
-                List.of(),
+                new LotsView(List.of(), Optional.empty()),
                 "",
                 open.kept().id());
     }

@@ -12,8 +12,9 @@ import org.wardon.errors.Fault;
  * @param progress how far the forecast is; absent once it is there
  * @param stopped why there is none; absent where there is one
  * @param faults faults of the plan; empty where it can be run
- * @param cautions what to beware of, the worst first
+ * @param cautions what to beware of, shortly where there is very much of it
  * @param actions what to do first
+ * @param moreActions what else is to be done; absent where all is shown
  * @param chambers the chambers
  * @param waiting lots without a chamber
  * @param money what it is worth, in a sentence
@@ -27,8 +28,9 @@ public record AllChambersView(
         List<Fault> faults,
         List<CautionView> cautions,
         List<String> actions,
+        Optional<MoreView> moreActions,
         List<ChamberView> chambers,
-        List<LotCardView> waiting,
+        LotsView waiting,
         String money,
         long plan) {
     /** Copies the lists. */
@@ -37,7 +39,6 @@ public record AllChambersView(
         cautions = List.copyOf(cautions);
         actions = List.copyOf(actions);
         chambers = List.copyOf(chambers);
-        waiting = List.copyOf(waiting);
     }
 
     /**

@@ -14,7 +14,7 @@ import java.util.Optional;
  * @param facts what is in it, how full it is, what it may take in, each with its name
  * @param fill how full it is at the fullest, percent of what it takes
  * @param company a sentence on who shares it; absent where there is nothing to say
- * @param because why
+ * @param because why, shortly where there are very many reasons
  * @param lots its lots, first to leave first
  * @param chart its air hour by hour
  */
@@ -27,14 +27,13 @@ public record ChamberView(
         List<FactView> facts,
         int fill,
         Optional<String> company,
-        List<String> because,
-        List<LotCardView> lots,
+        List<CautionView> because,
+        LotsView lots,
         ChartView chart) {
     /** Copies the lists. */
     public ChamberView {
         besides = List.copyOf(besides);
         facts = List.copyOf(facts);
         because = List.copyOf(because);
-        lots = List.copyOf(lots);
     }
 }

@@ -1,6 +1,7 @@
 package org.wardon.web.pages;
 
 import java.util.List;
+import java.util.Optional;
 
 /**
  * A lot at a glance.
@@ -13,6 +14,7 @@ import java.util.List;
  * @param limit what ends it
  * @param gained what the chamber gains or loses it
  * @param notes more to know, in sentences
+ * @param cautions a link to its cautions; absent where it has none or they stand beside it
  * @param urgent whether it should leave within a day
  */
 public record LotCardView(
@@ -24,6 +26,7 @@ public record LotCardView(
         String limit,
         String gained,
         List<String> notes,
+        Optional<LinkView> cautions,
         boolean urgent) {
     /** Copies the list. */
     public LotCardView {

@@ -66,6 +66,7 @@ final class StripOfDays {
         return new StripView(
                 inside.toString(),
                 outside.toString(),
+                px(barWide()),
                 setting.toString(),
                 held.toString(),
                 days(),
@@ -111,20 +112,22 @@ final class StripOfDays {
             high = Math.max(high, air.airC(i));
         }
         boolean out = IntStream.range(first, end).anyMatch(this::outside);
-        double x = ACROSS * hoursTo(air.at(first)) / hours;
-        double width = 0.8 * ACROSS * (end - first) / air.size();
+        double middle = ACROSS * hoursTo(air.at(first)) / hours + barWide() / 2;
         double top = y(high);
         double bottom = Math.max(top + THINNEST, y(low));
         (out ? outside : inside)
                 .append(
                         String.format(
                                 Locale.ROOT,
-                                "M%.1f %.1fh%.1fV%.1fh-%.1fz",
-                                Math.min(x, ACROSS - width),
+                                "M%.1f %.1fV%.1f",
+                                Math.min(middle, ACROSS - barWide() / 2),
                                 top,
-                                width,
-                                bottom,
-                                width));
+                                bottom));
+    }
+
+    /** Bars are strokes: one number wide instead of four corners each. */
+    private double barWide() {
+        return 0.8 * ACROSS * hoursABar() / Math.max(air.size(), hoursABar());
     }
 
     private boolean outside(int row) {

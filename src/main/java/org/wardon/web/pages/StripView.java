@@ -8,6 +8,7 @@ import java.util.List;
  *
  * @param inside path of the bars inside
  * @param outside path of the bars outside
+ * @param barWide width of a bar
  * @param setting path of the setting, a dash for each
  * @param held path of what counts as held, a box for each setting
  * @param days names and borders of days
@@ -18,6 +19,7 @@ import java.util.List;
 public record StripView(
         String inside,
         String outside,
+        String barWide,
         String setting,
         String held,
         List<Day> days,

@@ -27,6 +27,11 @@ final class RulerViews {
     private static final int MOST_IDS = 4;
     private static final int MOST_SENTENCES = 4;
 
+    /** So many further sentences a page bears, over all its rulers; so many each has at least. */
+    private static final int MOST_MORE = 120;
+
+    private static final int LEAST_MORE = 12;
+
     /** A figure so near the warm end would meet the unit, share of the length. */
     private static final double UNIT_FROM = 0.93;
 
@@ -37,6 +42,7 @@ final class RulerViews {
     private final PageWords say;
     private final Figures figures;
     private final double warmestC;
+    private final int mostMore;
 
     /**
      * Prepares rulers of one length.
@@ -50,6 +56,7 @@ final class RulerViews {
         this.words = words;
         this.say = say;
         this.figures = figures;
+        mostMore = Math.max(LEAST_MORE, MOST_MORE / Math.max(1, groups.size()));
         double most =
                 groups.stream()
                         .flatMap(group -> group.members().stream())
@@ -82,8 +89,18 @@ final class RulerViews {
                         : Optional.empty(),
                 rows(group),
                 told.subList(0, shown),
-                told.subList(shown, told.size()),
+                more(told.subList(shown, told.size())),
                 table(title, group));
+    }
+
+    /** Very many reasons are cut: a page is to be read, and fewer lots can be asked about. */
+    private List<PlacingView.Told> more(List<PlacingView.Told> all) {
+        if (all.size() <= mostMore) {
+            return all;
+        }
+        List<PlacingView.Told> more = new ArrayList<>(all.subList(0, mostMore));
+        more.add(plain(say.say("ruler.left-out", String.valueOf(all.size() - mostMore))));
+        return more;
     }
 
     private String at(double temperatureC) {

@@ -39,12 +39,16 @@ public final class ApiPage {
      */
     public void show(Call call) {
         String address = "http://" + call.http().header("Host");
+        String asked = Optional.ofNullable(call.http().queryParam("tag")).orElse("");
         List<ApiView.Group> groups = new ArrayList<>();
         for (JsonNode tag : document.get("tags").values()) {
             String name = tag.get("name").asString();
             groups.add(
                     new ApiView.Group(
-                            name, tag.get("description").asString(), operations(name, address)));
+                            name,
+                            tag.get("description").asString(),
+                            name.equals(asked),
+                            operations(name, address)));
         }
         press.print(
                 call,

@@ -22,9 +22,10 @@ public record ApiView(String description, String first, List<Group> groups) {
      *
      * @param name its name
      * @param description what it is
+     * @param open whether all is told of them, or only what they do
      * @param operations its operations
      */
-    public record Group(String name, String description, List<Operation> operations) {
+    public record Group(String name, String description, boolean open, List<Operation> operations) {
         /** Copies the list. */
         public Group {
             operations = List.copyOf(operations);
