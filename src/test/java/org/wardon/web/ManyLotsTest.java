@@ -78,9 +78,7 @@ class ManyLotsTest {
         Deque<String> wanted = new ArrayDeque<>(List.of(first, "/api"));
         while (!wanted.isEmpty()) {
             String path = wanted.removeFirst();
-            boolean page =
-                    !path.startsWith("/static/")
-                            && !path.matches("/api/.+|.*/take|/plan/\\d+/edit");
+            boolean page = !path.startsWith("/static/") && !path.matches("/api/.+|.*/take");
             if (page
                     && !pages.containsKey(path)
                     && kinds.merge(kind(path), 1, Integer::sum) <= OF_A_KIND) {
@@ -137,7 +135,9 @@ class ManyLotsTest {
                         "/chamber/x/company?of=",
                         "/chamber/x",
                         "/door",
-                        "/placing")) {
+                        "/placing",
+                        "/edit",
+                        "/edit?at=")) {
             assertTrue(kinds.contains("/plan/0" + kind), kind + " is not among " + kinds);
         }
         assertTrue(
@@ -168,6 +168,44 @@ class ManyLotsTest {
                         .mapToInt(more -> Integer.parseInt(more.group(1)))
                         .sum();
         assertEquals(LOTS, first.size() + left);
+    }
+
+    @Test
+    void everyFaultOfEveryLotIsReachedAndStandsAtItsField() throws IOException {
+        String faulty =
+                kept(
+                        "faulty.json",
+                        ManyLots.plan(LOTS, 2).replace("\"wantedDays\": ", "\"wantedDays\": -"));
+        Map<String, String> pages = pages(faulty + "/edit");
+        pages.putAll(pages(faulty));
+        holdSmall(pages);
+        assertTrue(get(faulty + "/edit").body().contains("180 more faults in other parts"));
+        String list = faulty + "/edit?at=%24.lots&amp;only=faults";
+        assertTrue(get(faulty + "/edit").body().contains(list));
+        Set<String> lots = new LinkedHashSet<>();
+        for (int from = 1; from <= LOTS; from += 50) {
+            String part = get(list.replace("&amp;", "&") + "&from=" + from).body();
+            lots.addAll(found(part, "(at=%24\\.lots%5B\\d+%5D)\">[^,<]*</a> <span class=\"hint"));
+        }
+        assertEquals(LOTS, lots.size());
+        String last = get(faulty + "/edit?at=%24.lots%5B199%5D").body();
+        assertTrue(last.contains("<p class=\"fault\" id=\"p-lots-199-wantedDays-fault\">"), last);
+        assertTrue(
+                last.contains(
+                        "href=\"" + faulty + "/edit?at=%24.lots%5B199%5D#p-lots-199-wantedDays\""));
+    }
+
+    @Test
+    void aStepInALongListLeadsBackToItsPart() throws IOException {
+        String moved = kept("moved.json", ManyLots.plan(LOTS, 3));
+        RawHttp.Answer list = get(moved + "/edit?at=%24.lots&from=101");
+        String form =
+                "token=" + list.token() + "&version=1&at=%24.lots&do=REMOVE+%24.lots%5B120%5D+";
+        RawHttp.Answer after =
+                http.post(new RawHttp.Visitor(cookie.substring(8), ""), moved + "/edit", form);
+        assertEquals(303, after.status());
+        assertEquals(moved + "/edit?at=%24.lots&from=121#p-lots", after.header("Location"));
+        assertTrue(get(moved + "/edit?at=%24.lots&from=121").body().contains("101 to 150 of 199"));
     }
 
     @Test

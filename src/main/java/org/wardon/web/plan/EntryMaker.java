@@ -85,6 +85,16 @@ final class EntryMaker {
         return entries;
     }
 
+    /** What a page of a long list shows: some of its items. */
+    EntryView ofList(FormPlace place, List<Integer> items) {
+        String key = PlanPlaces.key(form, place.path());
+        List<EntryView.Step> add =
+                place.shape() instanceof Shape.Listed list
+                        ? rows.add(place, list, words.label(key))
+                        : rows.addNamed(place, words.label(key));
+        return rows(place, key, "", rows.items(place, items), add);
+    }
+
     private List<EntryView> inside(FormPlace place, String key) {
         if (place.shape() instanceof Shape.Choice choice && place.taken().isPresent()) {
             Shape.Option taken = place.taken().get();
@@ -146,6 +156,14 @@ final class EntryMaker {
         if (shape instanceof Shape.Group) {
             return group(place, key, hint);
         }
+        if (shape instanceof Shape.Named && PlanPlaces.isLong(form, place.path())) {
+            return rows(
+                    place,
+                    key,
+                    hint,
+                    List.of(rows.whole(place, words.label(key))),
+                    rows.addNamed(place, words.label(key)));
+        }
         if (shape instanceof Shape.Named) {
             return rows(
                     place, key, hint, rows.items(place), rows.addNamed(place, words.label(key)));
@@ -166,6 +184,9 @@ final class EntryMaker {
         }
         JsonPath first = place.path().then(new JsonPath.Item(0));
         List<EntryView.Step> add = rows.add(place, list, words.label(key));
+        if (PlanPlaces.isLong(form, place.path())) {
+            return rows(place, key, hint, List.of(rows.whole(place, words.label(key))), add);
+        }
         if (PlanPlaces.isPage(first)) {
             return rows(place, key, hint, rows.items(place), add);
         }

@@ -62,7 +62,9 @@ public final class PlanEditor {
     public void show(Call call) {
         OpenPlan open = AllChambersPage.opened(bench, call);
         JsonPath page =
-                PlanPlaces.page(Optional.ofNullable(call.http().queryParam("at")).orElse("$"));
+                PlanPlaces.page(
+                        PlanForm.of(open.text().text()),
+                        Optional.ofNullable(call.http().queryParam("at")).orElse("$"));
         print(call, new Sheet(open, open.text(), page, Optional.empty()));
     }
 
@@ -80,7 +82,7 @@ public final class PlanEditor {
                         .orElseThrow(() -> new Refusal(400, "no-version"));
         PlanChange change = new PlanChange(new TypedNumbers(call.preferences()));
         PlanChange.Typed typed = change.changed(base.text(), TypedForm.of(call.http()));
-        JsonPath page = PlanPlaces.page(call.field("at"));
+        JsonPath page = PlanPlaces.page(PlanForm.of(base.text()), call.field("at"));
         if (version != open.kept().version()) {
             clash(call, open, change, typed, page);
             return;
@@ -100,8 +102,23 @@ public final class PlanEditor {
                 return;
             }
         }
+        call.goTo(after(call, open.kept().id(), PlanForm.of(done), next));
+    }
+
+    /** Where a step leads: of a long list to the part in which it was taken. */
+    private static String after(Call call, long plan, PlanForm form, JsonPath next) {
+        JsonPath page = PlanPlaces.page(form, next);
         String anchor = "#" + EntryView.anchor(next.toString());
-        call.goTo(PlanPlaces.href(open.kept().id(), PlanPlaces.page(next)) + anchor);
+        int item =
+                JsonPath.parse((call.field("do") + " ").split(" ", -1)[1])
+                                        .flatMap(JsonPath::last)
+                                        .orElse(null)
+                                instanceof JsonPath.Item one
+                        ? one.index()
+                        : 0;
+        return PlanPlaces.isLong(form, page)
+                ? PlanPlaces.href(plan, page, item) + anchor
+                : PlanPlaces.href(plan, page) + anchor;
     }
 
     private static PlanText with(PlanText base, String text) {
@@ -173,7 +190,9 @@ public final class PlanEditor {
     }
 
     private String name(PlanForm form, JsonPath path) {
-        return title(form, PlanPlaces.page(path)) + ": " + words.label(PlanPlaces.key(form, path));
+        return title(form, PlanPlaces.page(form, path))
+                + ": "
+                + words.label(PlanPlaces.key(form, path));
     }
 
     private String shown(PlanForm form, PlanChange change, JsonPath path) {
@@ -264,7 +283,7 @@ public final class PlanEditor {
         PlanChange change = new PlanChange(new TypedNumbers(call.preferences()));
         String text =
                 change.apply(base.text(), change.changed(base.text(), TypedForm.of(call.http())));
-        JsonPath page = PlanPlaces.page(call.field("at"));
+        JsonPath page = PlanPlaces.page(PlanForm.of(base.text()), call.field("at"));
         press.print(
                 call,
                 "part/face",
@@ -296,8 +315,16 @@ public final class PlanEditor {
                         press.words(),
                         call.figures(),
                         numbers);
+        EntryMaker maker = new EntryMaker(form, faults, shown, press.words(), numbers, rows);
+        Optional<LongList> list =
+                PlanPlaces.isLong(form, sheet.page())
+                        ? Optional.of(LongList.of(place, call, plan, rows, press.words()))
+                        : Optional.empty();
         List<EntryView> entries =
-                new EntryMaker(form, faults, shown, press.words(), numbers, rows).of(place);
+                list.isPresent()
+                        ? List.of(maker.ofList(place, list.get().items()))
+                        : maker.of(place);
+        FaultLinks told = new FaultLinks(form, plan, sheet.page(), faults, press.words());
         boolean face = isFace(sheet.page());
         press.print(
                 call,
@@ -311,7 +338,10 @@ public final class PlanEditor {
                         hint(form, sheet.page()),
                         crumbs(form, plan, sheet.page()),
                         sheet.clash(),
-                        faults.stream().map(fault -> link(form, plan, fault)).toList(),
+                        told.listed().stream().map(fault -> link(form, plan, fault)).toList(),
+                        faults.size(),
+                        told.more(),
+                        list.map(LongList::part),
                         entries,
                         suggestions(entries, form),
                         face ? Optional.of(faceView(call, text, sheet.page())) : Optional.empty(),
@@ -340,7 +370,7 @@ public final class PlanEditor {
     }
 
     private PlanPartView.Link link(PlanForm form, long plan, Fault fault) {
-        JsonPath page = PlanPlaces.page(fault.path());
+        JsonPath page = PlanPlaces.page(form, fault.path());
         String field =
                 JsonPath.parse(fault.path())
                         .map(path -> words.label(PlanPlaces.key(form, path)))
@@ -366,6 +396,9 @@ public final class PlanEditor {
         String key = PlanPlaces.key(form, page);
         boolean named =
                 page.last().orElse(null) instanceof JsonPath.Member && key.equals("buildUps");
+        if (PlanPlaces.isLong(form, page)) {
+            return words.label(key);
+        }
         String last = named ? ((JsonPath.Member) page.last().orElseThrow()).name() : id;
         String label =
                 press.words().has("edit.one-" + key)
@@ -378,7 +411,7 @@ public final class PlanEditor {
         List<PlanPartView.Link> crumbs = new ArrayList<>();
         JsonPath up = page;
         while (!up.steps().isEmpty()) {
-            up = PlanPlaces.page(up.up());
+            up = PlanPlaces.page(form, up.up());
             crumbs.add(0, new PlanPartView.Link(PlanPlaces.href(plan, up), title(form, up)));
         }
         return crumbs;

@@ -2,6 +2,7 @@ package org.wardon.web.plan;
 
 import java.util.List;
 import java.util.Optional;
+import org.wardon.web.pages.Paging;
 import org.wardon.web.pages.TableView;
 
 /**
@@ -14,7 +15,10 @@ import org.wardon.web.pages.TableView;
  * @param hint what it is
  * @param crumbs the way up
  * @param clash what stands otherwise by now; absent unless a save came too late
- * @param faults all faults of the plan, each with a link to its field
+ * @param faults faults of the plan, those of this page first, each with a link to its field
+ * @param count how many faults the plan has
+ * @param moreFaults where the others are to be found; absent where all are listed
+ * @param part which part of a long list is shown; absent on other pages
  * @param entries the form
  * @param suggestions ids its fields may name
  * @param face how the face conducts; absent for other places
@@ -30,11 +34,23 @@ public record PlanPartView(
         List<Link> crumbs,
         Optional<Clash> clash,
         List<Link> faults,
+        int count,
+        Optional<Link> moreFaults,
+        Optional<ListPart> part,
         List<EntryView> entries,
         List<Suggestions.Named> suggestions,
         Optional<FaceView> face,
         boolean weather,
         List<String> files) {
+    /**
+     * Which part of a long list is shown.
+     *
+     * @param told which of how many, in words
+     * @param paging the parts
+     * @param other a link to all of it or to those with faults; absent where there are none
+     */
+    public record ListPart(String told, Paging paging, Optional<Link> other) {}
+
     /**
      * A link.
      *

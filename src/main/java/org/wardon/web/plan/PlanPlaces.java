@@ -2,6 +2,7 @@ package org.wardon.web.plan;
 
 import java.net.URLEncoder;
 import java.nio.charset.StandardCharsets;
+import java.util.List;
 import java.util.Optional;
 import java.util.regex.Pattern;
 import org.wardon.files.form.FormPlace;
@@ -16,20 +17,34 @@ final class PlanPlaces {
                     "\\$|\\$\\.weather|\\$\\.lots\\[\\d+]|\\$\\.buildUps(\\.[^.\\[]+|\\['[^']*'])"
                             + "|\\$\\.chambers\\[\\d+](\\.(faces|cooling)\\[\\d+])?");
 
+    /** A list of more items with pages of their own has a page of its own too. */
+    private static final int MOST_ROWS = 30;
+
     private PlanPlaces() {}
 
     /** The page a place is on: itself or the nearest whole that has one. */
-    static JsonPath page(JsonPath path) {
+    static JsonPath page(PlanForm form, JsonPath path) {
         JsonPath up = path;
-        while (!PAGE.matcher(up.toString()).matches()) {
+        while (!isPage(up) && !isLong(form, up)) {
             up = up.up();
         }
         return up;
     }
 
     /** The page a fault is told on; the first where its path is none. */
-    static JsonPath page(String path) {
-        return page(JsonPath.parse(path).orElse(JsonPath.ROOT));
+    static JsonPath page(PlanForm form, String path) {
+        return page(form, JsonPath.parse(path).orElse(JsonPath.ROOT));
+    }
+
+    /** Whether a list is too long to stand on the page of what it belongs to. */
+    static boolean isLong(PlanForm form, JsonPath list) {
+        List<FormPlace> items = form.at(list).map(FormPlace::places).orElse(List.of());
+        return items.size() > MOST_ROWS && isPage(items.get(0).path());
+    }
+
+    /** Which part of a long list an item stands in. */
+    static String href(long plan, JsonPath list, int item) {
+        return href(plan, list) + "&from=" + (item + 1);
     }
 
     static boolean isPage(JsonPath path) {

@@ -4,6 +4,7 @@ import java.util.ArrayList;
 import java.util.List;
 import java.util.Locale;
 import java.util.Optional;
+import java.util.stream.IntStream;
 import org.wardon.advice.faces.FaceAdvice;
 import org.wardon.advice.faces.FaceReport;
 import org.wardon.errors.Fault;
@@ -49,18 +50,31 @@ final class RowMaker {
     }
 
     List<EntryView.Row> items(FormPlace list) {
+        return items(list, IntStream.range(0, list.places().size()).boxed().toList());
+    }
+
+    /** Some items of a list, by their numbers. */
+    List<EntryView.Row> items(FormPlace list, List<Integer> which) {
         List<EntryView.Row> rows = new ArrayList<>();
         List<FormPlace> items = list.places();
-        for (FormPlace item : items) {
+        for (int index : which) {
+            FormPlace item = items.get(index);
             boolean named = list.shape() instanceof Shape.Named;
-            String name = name(item, rows.size());
+            String name = name(item, index);
             List<EntryView.Step> steps =
                     named
                             ? List.of(brief(PlanStep.Kind.REMOVE, item.path(), "edit.remove", name))
-                            : stepsOf(item.path(), name, rows.size(), items.size());
+                            : stepsOf(item.path(), name, index, items.size());
             rows.add(row(item, name, steps));
         }
         return rows;
+    }
+
+    /** A link to the page of a long list, with how many are in it. */
+    EntryView.Row whole(FormPlace list, String name) {
+        String many = page.say("edit.so-many", String.valueOf(list.places().size()));
+        return new EntryView.Row(
+                PlanPlaces.href(plan, list.path()), name, many, faultsIn(list), List.of());
     }
 
     EntryView.Row link(FormPlace place, String name) {
@@ -68,13 +82,16 @@ final class RowMaker {
     }
 
     private EntryView.Row row(FormPlace item, String name, List<EntryView.Step> steps) {
+        return new EntryView.Row(
+                PlanPlaces.href(plan, item.path()), name, told(item), faultsIn(item), steps);
+    }
+
+    int faultsIn(FormPlace item) {
         String below = item.path().toString();
-        int inIt =
-                (int)
-                        faults.stream()
-                                .filter(f -> f.path().equals(below) || inside(f.path(), below))
-                                .count();
-        return new EntryView.Row(PlanPlaces.href(plan, item.path()), name, told(item), inIt, steps);
+        return (int)
+                faults.stream()
+                        .filter(f -> f.path().equals(below) || inside(f.path(), below))
+                        .count();
     }
 
     private static boolean inside(String path, String whole) {

@@ -10,6 +10,7 @@ import org.junit.jupiter.api.Test;
 import org.junit.jupiter.params.ParameterizedTest;
 import org.junit.jupiter.params.provider.CsvSource;
 import org.wardon.files.Schema;
+import org.wardon.files.form.PlanForm;
 import org.wardon.files.json.JsonPath;
 import org.wardon.files.json.Shape;
 import org.wardon.web.pages.Preferences;
@@ -96,7 +97,7 @@ class PlanWordsTest {
         "'line 3, column 4', $"
     })
     void faultsAreToldOnThePageOfTheirField(String path, String page) {
-        assertEquals(page, PlanPlaces.page(path).toString());
+        assertEquals(page, PlanPlaces.page(PlanForm.of("{}"), path).toString());
         assertTrue(PlanPlaces.isPage(JsonPath.parse(page).orElseThrow()));
     }
 }
