@@ -9,7 +9,6 @@ import org.wardon.air.Site;
 import org.wardon.air.YearWave;
 import org.wardon.files.json.Part;
 import org.wardon.plan.ChamberPlan;
-import org.wardon.plan.Conflict;
 import org.wardon.plan.Defaults;
 import org.wardon.plan.EthyleneAround;
 import org.wardon.plan.LotPlan;
@@ -18,6 +17,7 @@ import org.wardon.plan.Prices;
 import org.wardon.plan.StorePlan;
 import org.wardon.plan.WeatherSource;
 import org.wardon.plan.WithoutChamber;
+import org.wardon.produce.Conflict;
 
 /** Turns a checked plan into records. */
 final class PlanBinder {

@@ -6,6 +6,7 @@ import java.util.Optional;
 import org.wardon.keeping.chilling.Chilling;
 import org.wardon.keeping.dormancy.Dormancy;
 import org.wardon.keeping.ethylene.Response;
+import org.wardon.keeping.ethylene.Stage;
 import org.wardon.keeping.experience.Sighting;
 import org.wardon.keeping.life.LifeCurve;
 import org.wardon.keeping.ripening.Ripening;
@@ -21,6 +22,9 @@ import org.wardon.produce.rows.OwnLot;
  * cheap and changes nothing.
  */
 public final class KeepingModel {
+    /** Distance every part of a lot keeps from freezing, K (common practice, no source). */
+    public static final double FREEZING_MARGIN_K = 0.5;
+
     /** Freezing point where none is printed: the warm side of what is printed (assumption). */
     private static final double USUAL_FREEZING_C = -0.5;
 
@@ -208,6 +212,18 @@ public final class KeepingModel {
      */
     public KeptLot lot() {
         return lot;
+    }
+
+    /**
+     * Returns the ethylene the lot gives off as ripe as it came.
+     *
+     * @param atC its temperature, °C
+     * @param draw the draw
+     * @return µL/(kg h)
+     */
+    public double ethyleneMicrolitrePerKgHour(double atC, Draw draw) {
+        double stage = Stage.giving(lot.commodity(), lot.door().ripeness(), draw);
+        return response.giving().microlitrePerKgHour(atC, stage, draw);
     }
 
     /**

@@ -18,7 +18,6 @@ import org.wardon.lots.TranspirationLaw;
  * arrived.
  */
 public final class Paces {
-    private static final double OUTDOOR_PPM = 0.01;
     private static final double HOURS_A_DAY = 24;
     private static final double AT_ONCE_PER_DAY = 1e9;
 
@@ -176,7 +175,11 @@ public final class Paces {
         }
         Age age = door.age().get();
         double perDay =
-                wear.perDay(age.heldC(), age.heldC(), age.heldHumidityFraction(), OUTDOOR_PPM);
+                wear.perDay(
+                        age.heldC(),
+                        age.heldC(),
+                        age.heldHumidityFraction(),
+                        ChamberEthylene.OUTDOOR_PPM);
         return perDay * age.hours(draw) / HOURS_A_DAY;
     }
 

@@ -305,6 +305,7 @@ public final class LotHistory {
          * @return this
          */
         public Builder mass(double kg) {
+            Require.that(!built, "a history that was built takes no other masses");
             massKg[size - 1] = kg;
             massKnown = true;
             return this;

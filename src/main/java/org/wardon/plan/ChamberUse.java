@@ -6,6 +6,7 @@ import java.util.Optional;
 import java.util.Set;
 import org.wardon.cooling.Cooler;
 import org.wardon.errors.Require;
+import org.wardon.produce.Conflict;
 
 /**
  * How the keeper uses a chamber.

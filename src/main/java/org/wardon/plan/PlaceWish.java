@@ -3,6 +3,7 @@ package org.wardon.plan;
 import java.util.List;
 import java.util.Locale;
 import java.util.Set;
+import org.wardon.produce.Conflict;
 
 /**
  * What a placing is to seek.

@@ -10,7 +10,6 @@ import org.wardon.keeping.Fate;
 import org.wardon.keeping.Mechanism;
 import org.wardon.keeping.Outlook;
 import org.wardon.keeping.Spread;
-import org.wardon.keeping.ethylene.Stage;
 import org.wardon.produce.Fact;
 import org.wardon.produce.Reason;
 import org.wardon.produce.Reason.Argument;
@@ -142,16 +141,8 @@ public final class ChamberSharing {
     }
 
     private static double given(Together lot) {
-        double stage =
-                Stage.giving(
-                        lot.wish().lot().commodity(),
-                        lot.wish().lot().door().ripeness(),
-                        Draw.MEDIAN);
         return lot.massKg()
-                * lot.model()
-                        .response()
-                        .giving()
-                        .microlitrePerKgHour(lot.felt().meanC(), stage, Draw.MEDIAN);
+                * lot.model().ethyleneMicrolitrePerKgHour(lot.felt().meanC(), Draw.MEDIAN);
     }
 
     private static String handbookSource(Together lot) {

@@ -6,7 +6,7 @@ import java.util.function.Function;
 import org.wardon.air.Timeline;
 import org.wardon.keeping.Draw;
 import org.wardon.keeping.ethylene.Response;
-import org.wardon.keeping.ethylene.Stage;
+import org.wardon.produce.Conflict;
 
 /**
  * How lots would stand together, as far as it is known: when each is there, how much ethylene it
@@ -14,9 +14,9 @@ import org.wardon.keeping.ethylene.Stage;
  *
  * @param stays when a lot is there, by id
  * @param level ethylene of a lot in the chamber they share
- * @param accepted troubles that are accepted, at a price that is told
+ * @param accepted conflicts that are accepted, at a price that is told
  */
-public record Circumstances(Function<String, Stay> stays, Level level, Set<Trouble> accepted) {
+public record Circumstances(Function<String, Stay> stays, Level level, Set<Conflict> accepted) {
     /** Copies the set. */
     public Circumstances {
         accepted = Set.copyOf(accepted);
@@ -33,12 +33,12 @@ public record Circumstances(Function<String, Stay> stays, Level level, Set<Troub
     }
 
     /**
-     * Returns the usual circumstances with troubles accepted.
+     * Returns the usual circumstances with conflicts accepted.
      *
      * @param accepted what is accepted
      * @return the circumstances
      */
-    public static Circumstances accepting(Set<Trouble> accepted) {
+    public static Circumstances accepting(Set<Conflict> accepted) {
         return new Circumstances(id -> Stay.ALWAYS, (id, atC) -> OptionalDouble.empty(), accepted);
     }
 
@@ -93,12 +93,7 @@ public record Circumstances(Function<String, Stay> stays, Level level, Set<Troub
     }
 
     private static double usualPpm(Workable lot, double share, double atC) {
-        double stage =
-                Stage.giving(
-                        lot.wish().lot().commodity(),
-                        lot.wish().lot().door().ripeness(),
-                        Draw.MEDIAN);
-        double rate = lot.model().response().giving().microlitrePerKgHour(atC, stage, Draw.MEDIAN);
+        double rate = lot.model().ethyleneMicrolitrePerKgHour(atC, Draw.MEDIAN);
         return Response.steadyPpm(share * Response.USUAL_KG_M3 * rate, Response.USUAL_AIR_CHANGES);
     }
 }

@@ -12,6 +12,7 @@ import org.wardon.keeping.Paces;
 import org.wardon.keeping.Purpose;
 import org.wardon.keeping.ethylene.Response;
 import org.wardon.keeping.ethylene.Stage;
+import org.wardon.produce.Conflict;
 import org.wardon.produce.Reason;
 import org.wardon.produce.Reason.Argument;
 import org.wardon.produce.Ripeness;
@@ -22,7 +23,7 @@ import org.wardon.produce.rows.OdourPair;
 final class Conflicts {
     private static final String ANY = "any";
 
-    private final Set<Trouble> accepted;
+    private final Set<Conflict> accepted;
     private final List<Reason> reasons = new ArrayList<>();
     private Verdict verdict = Verdict.GOOD;
 
@@ -31,7 +32,7 @@ final class Conflicts {
     }
 
     /** What is accepted is told and forbids nothing. */
-    Conflicts(Set<Trouble> accepted) {
+    Conflicts(Set<Conflict> accepted) {
         this.accepted = accepted;
     }
 
@@ -43,8 +44,8 @@ final class Conflicts {
         return reasons;
     }
 
-    private void say(Trouble trouble, Verdict at, Reason reason) {
-        boolean borne = at == Verdict.NO && accepted.contains(trouble);
+    private void say(Conflict conflict, Verdict at, Reason reason) {
+        boolean borne = at == Verdict.NO && accepted.contains(conflict);
         verdict = verdict.worse(borne ? Verdict.TOLERABLE : at);
         reasons.add(reason);
     }
@@ -69,7 +70,7 @@ final class Conflicts {
             double cost = (with - without) * days;
             if (cost >= Limits.GOOD_ETHYLENE) {
                 say(
-                        Trouble.ETHYLENE,
+                        Conflict.ETHYLENE,
                         cost < Limits.TOLERABLE_ETHYLENE ? Verdict.TOLERABLE : Verdict.NO,
                         reason(
                                 "ethylene-shortens",
@@ -95,7 +96,7 @@ final class Conflicts {
             // Of fruit that is to be sold ripe, only the days that are lost count.
             boolean ripe = taker.lot().door().purpose().equals(Optional.of(Purpose.SELL_RIPE));
             say(
-                    Trouble.ETHYLENE,
+                    Conflict.ETHYLENE,
                     ripe ? Verdict.TOLERABLE : Verdict.NO,
                     reason(
                             "ethylene-starts-ripening",
@@ -112,7 +113,7 @@ final class Conflicts {
             double threshold = effect.thresholdPpm().map(fact -> fact.lowest()).orElse(Double.NaN);
             if (Response.isDisorder(effect) && ppm >= threshold) {
                 say(
-                        Trouble.ETHYLENE,
+                        Conflict.ETHYLENE,
                         Verdict.TOLERABLE,
                         reason(
                                 "ethylene-disorder",
@@ -162,7 +163,7 @@ final class Conflicts {
     private void smell(
             String code, Wish giver, Wish taker, double days, double most, String sourceId) {
         say(
-                Trouble.ODOUR,
+                Conflict.ODOUR,
                 days <= most ? Verdict.TOLERABLE : Verdict.NO,
                 reason(
                         code,

@@ -26,9 +26,7 @@ final class Limits {
     static final double LEAST_OF_WANTED = 0.5;
     static final double MOST_OF_HANDBOOK = 0.9;
 
-    /** Distance every shell keeps from freezing, K (common practice, no source). */
-    static final double FREEZING_MARGIN_K = 0.5;
-
+    /** What {@link org.wardon.keeping.KeepingModel#FREEZING_MARGIN_K} rests on. */
     static final String FREEZING_SOURCE = "common-practice";
 
     private Limits() {}

@@ -6,17 +6,18 @@ import java.util.List;
 import java.util.Map;
 import java.util.OptionalDouble;
 import org.wardon.air.Timeline;
+import org.wardon.keeping.ChamberEthylene;
 import org.wardon.keeping.Draw;
 import org.wardon.keeping.Spread;
 import org.wardon.lots.LotHistory;
+import org.wardon.produce.Conflict;
 
 /**
- * What accepted troubles cost the lots of a group: of ethylene the days of life, each lot followed
+ * What accepted conflicts cost the lots of a group: of ethylene the days of life, each lot followed
  * at the setting that suits all best with the level all make together for the days they are
  * together, and in clean air; of smell that it is borne.
  */
 final class Prices {
-    private static final double CLEAN_PPM = 0.01;
     private static final double LEAST_DAYS = 0.05;
 
     private final Circumstances at;
@@ -42,10 +43,10 @@ final class Prices {
             return;
         }
         for (Workable taker : spell.lots()) {
-            if (at.accepted().contains(Trouble.ETHYLENE)) {
+            if (at.accepted().contains(Conflict.ETHYLENE)) {
                 ethylene(taker, spell);
             }
-            if (at.accepted().contains(Trouble.ODOUR)) {
+            if (at.accepted().contains(Conflict.ODOUR)) {
                 odours(taker, spell);
             }
         }
@@ -53,7 +54,7 @@ final class Prices {
 
     private void ethylene(Workable taker, Spells.One spell) {
         double atC = spell.common().bestC();
-        double all = CLEAN_PPM;
+        double all = ChamberEthylene.OUTDOOR_PPM;
         double most = 0;
         double days = 0;
         String from = taker.id();
@@ -67,10 +68,10 @@ final class Prices {
             }
         }
         if (days > 0) {
-            double own = CLEAN_PPM + at.ppm(taker, spell.lots().size(), atC);
+            double own = ChamberEthylene.OUTDOOR_PPM + at.ppm(taker, spell.lots().size(), atC);
             double lost = lost(taker, spell.common(), new Levels(own, all), days);
             Price price =
-                    new Price(Trouble.ETHYLENE, taker.id(), from, OptionalDouble.of(lost), days);
+                    new Price(Conflict.ETHYLENE, taker.id(), from, OptionalDouble.of(lost), days);
             if (lost >= LEAST_DAYS) {
                 ethylene.merge(taker.id(), price, Prices::dearer);
             }
@@ -116,7 +117,7 @@ final class Prices {
             if (days > 0 && PairConflict.ofSmell(giver.wish(), taker.wish(), days)) {
                 Price price =
                         new Price(
-                                Trouble.ODOUR,
+                                Conflict.ODOUR,
                                 taker.id(),
                                 giver.id(),
                                 OptionalDouble.empty(),

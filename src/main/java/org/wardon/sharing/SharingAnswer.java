@@ -17,7 +17,7 @@ import org.wardon.produce.Reason;
  * @param takeOut id of the one lot without which the others, two at least, may share best; empty
  *     where all may share or taking out one does not help
  * @param spells the times in which different lots stand together; empty where there is only one
- * @param prices what accepted troubles cost
+ * @param prices what accepted conflicts cost
  */
 public record SharingAnswer(
         Verdict verdict,

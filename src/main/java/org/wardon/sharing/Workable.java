@@ -290,14 +290,14 @@ public final class Workable {
      * @return its freezing point, the margin and the swing of the thermostat, °C
      */
     public double frostC() {
-        return model.freezingC() + Limits.FREEZING_MARGIN_K + swingK;
+        return model.freezingC() + KeepingModel.FREEZING_MARGIN_K + swingK;
     }
 
     /** Why it is set no colder, where frost is what bounds it. */
     Reason frost() {
         Argument limit = Argument.of(frostC(), "C");
         Argument point = Argument.of(model.freezingC(), "C");
-        Argument margin = Argument.of(Limits.FREEZING_MARGIN_K, "K");
+        Argument margin = Argument.of(KeepingModel.FREEZING_MARGIN_K, "K");
         return swingK > 0
                 ? Reason.about(
                         "frost-and-swing",

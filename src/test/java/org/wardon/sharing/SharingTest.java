@@ -17,6 +17,7 @@ import org.wardon.keeping.Draws;
 import org.wardon.keeping.Fate;
 import org.wardon.keeping.KeepingModel;
 import org.wardon.lots.LotHistory;
+import org.wardon.produce.Conflict;
 import org.wardon.produce.Reason;
 
 class SharingTest {
@@ -70,8 +71,8 @@ class SharingTest {
 
     @Test
     void whatIsAcceptedForbidsNothingAndIsPricedByTheModel() {
-        Circumstances accepting = Circumstances.accepting(Set.of(Trouble.ETHYLENE));
-        Circumstances both = Circumstances.accepting(Set.of(Trouble.ETHYLENE, Trouble.ODOUR));
+        Circumstances accepting = Circumstances.accepting(Set.of(Conflict.ETHYLENE));
+        Circumstances both = Circumstances.accepting(Set.of(Conflict.ETHYLENE, Conflict.ODOUR));
         SharingAnswer day = share(accepting, 1, "apple", "broccoli");
         SharingAnswer two = share(both, 2, "apple", "broccoli");
         assertEquals(Verdict.TOLERABLE, two.verdict());
@@ -90,8 +91,8 @@ class SharingTest {
                 share(accepting, 14, "leek", "grape").verdict(),
                 "smell is another matter");
         SharingAnswer smell =
-                share(Circumstances.accepting(Set.of(Trouble.ODOUR)), 14, "leek", "grape");
-        assertEquals(Trouble.ODOUR, smell.prices().get(0).trouble());
+                share(Circumstances.accepting(Set.of(Conflict.ODOUR)), 14, "leek", "grape");
+        assertEquals(Conflict.ODOUR, smell.prices().get(0).conflict());
         assertTrue(smell.prices().get(0).daysLost().isEmpty());
     }
 

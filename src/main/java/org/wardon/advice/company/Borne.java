@@ -10,11 +10,10 @@ import org.wardon.advice.wording.Words;
 import org.wardon.errors.BadInput;
 import org.wardon.errors.Fault;
 import org.wardon.files.forecast.ShareAnswer;
-import org.wardon.plan.Conflict;
+import org.wardon.produce.Conflict;
 import org.wardon.produce.Reason;
 import org.wardon.produce.Reason.Argument;
 import org.wardon.sharing.Price;
-import org.wardon.sharing.Trouble;
 
 /** Conflicts a keeper accepts, and what is told of them. */
 public final class Borne {
@@ -61,23 +60,10 @@ public final class Borne {
         return OF_LOTS.stream().map(Conflict::word).collect(Collectors.joining(", "));
     }
 
-    /** Of what a plan accepts, what lots do to each other. */
-    static Set<Trouble> of(Set<Conflict> accepts) {
-        Set<Trouble> borne = EnumSet.noneOf(Trouble.class);
-        for (Conflict conflict : accepts) {
-            switch (conflict) {
-                case ETHYLENE -> borne.add(Trouble.ETHYLENE);
-                case ODOUR -> borne.add(Trouble.ODOUR);
-                default -> {}
-            }
-        }
-        return borne;
-    }
-
     static Reason told(Price price) {
         List<String> subjects = List.of(price.id(), price.from());
         Argument days = Argument.of(price.days(), "day");
-        return price.trouble() == Trouble.ODOUR
+        return price.conflict() == Conflict.ODOUR
                 ? new Reason("borne-odour", subjects, List.of(days), RULE)
                 : new Reason(
                         "borne-ethylene",
@@ -88,7 +74,7 @@ public final class Borne {
 
     static ShareAnswer.Accepted answer(Price price, Words words) {
         return new ShareAnswer.Accepted(
-                price.trouble().word(),
+                price.conflict().word(),
                 price.id(),
                 price.from(),
                 price.daysLost(),

@@ -5,7 +5,7 @@ import java.util.LinkedHashMap;
 import java.util.List;
 import java.util.Map;
 import java.util.Set;
-import org.wardon.plan.Conflict;
+import org.wardon.produce.Conflict;
 
 /**
  * Who of a plan is to share, with whom beside.

@@ -17,15 +17,14 @@ import org.wardon.errors.BadInput;
 import org.wardon.errors.Fault;
 import org.wardon.keeping.KeepingModel;
 import org.wardon.plan.ChamberPlan;
-import org.wardon.plan.Conflict;
 import org.wardon.plan.StorePlan;
+import org.wardon.produce.Conflict;
 import org.wardon.reference.ReferenceBook;
 import org.wardon.sharing.Circumstances;
 import org.wardon.sharing.PairVerdict;
 import org.wardon.sharing.Sharing;
 import org.wardon.sharing.SharingAnswer;
 import org.wardon.sharing.Stretch;
-import org.wardon.sharing.Trouble;
 import org.wardon.sharing.Wish;
 import org.wardon.sharing.Workable;
 
@@ -120,14 +119,14 @@ public final class GroupSharing {
         typed.parallelStream()
                 .map(wish -> workable(wish, housed.swingK()))
                 .forEachOrdered(all::add);
-        return judged(all, housed, Borne.of(accepts(question.accepts(), chamber)));
+        return judged(all, housed, accepts(question.accepts(), chamber));
     }
 
     private Workable workable(Wish wish, double swingK) {
         return Workable.in(swingK, wish, KeepingModel.of(wish.lot()), trial.draws());
     }
 
-    private Asked judged(List<Workable> lots, Housed housed, Set<Trouble> accepted) {
+    private Asked judged(List<Workable> lots, Housed housed, Set<Conflict> accepted) {
         Circumstances at = new Circumstances(housed::stay, housed, accepted);
         return new Asked(lots, Sharing.among(lots, at));
     }
@@ -171,7 +170,7 @@ public final class GroupSharing {
      */
     public Optional<GroupReport> among(ChamberPlan chamber, List<String> lots) {
         Housed housed = new Housed(trial, Optional.of(chamber));
-        Set<Trouble> accepted = Borne.of(accepts(Set.of(), Optional.of(chamber)));
+        Set<Conflict> accepted = accepts(Set.of(), Optional.of(chamber));
         return lots.isEmpty()
                 ? Optional.empty()
                 : Optional.of(report(judged(workable(lots, housed.swingK()), housed, accepted)));

@@ -6,7 +6,6 @@ import org.wardon.advice.forecast.StoreTrial;
 import org.wardon.advice.forecast.TrialLot;
 import org.wardon.cooling.Cooler;
 import org.wardon.keeping.Draw;
-import org.wardon.keeping.ethylene.Stage;
 import org.wardon.plan.ChamberPlan;
 import org.wardon.sharing.Circumstances;
 
@@ -33,10 +32,7 @@ final class Housed implements Circumstances.Level {
         if (chamber.isEmpty() || lot.isEmpty()) {
             return OptionalDouble.empty();
         }
-        var model = lot.get().model();
-        double stage =
-                Stage.giving(model.lot().commodity(), model.lot().door().ripeness(), Draw.MEDIAN);
-        double rate = model.response().giving().microlitrePerKgHour(atC, stage, Draw.MEDIAN);
+        double rate = lot.get().model().ethyleneMicrolitrePerKgHour(atC, Draw.MEDIAN);
         return OptionalDouble.of(
                 rate * lot.get().plan().massKg() / (LITRES * exchangeM3h(chamber.get())));
     }

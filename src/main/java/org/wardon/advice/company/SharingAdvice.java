@@ -13,8 +13,8 @@ import org.wardon.keeping.Draws;
 import org.wardon.keeping.KeptLot;
 import org.wardon.keeping.LotAtDoor;
 import org.wardon.lots.ClassValues;
-import org.wardon.plan.Conflict;
 import org.wardon.produce.Commodity;
+import org.wardon.produce.Conflict;
 import org.wardon.reference.ReferenceBook;
 import org.wardon.sharing.Circumstances;
 import org.wardon.sharing.Sharing;
@@ -65,7 +65,7 @@ public final class SharingAdvice {
      * @throws BadInput with every fault: an unknown name, a crop named twice, days out of range
      */
     public ShareReport ask(Map<String, Double> days, Set<Conflict> accepts) {
-        Circumstances at = Circumstances.accepting(Borne.of(accepts));
+        Circumstances at = Circumstances.accepting(accepts);
         return new ShareTold(words).of(Sharing.of(wishes(days), draws, at));
     }
 

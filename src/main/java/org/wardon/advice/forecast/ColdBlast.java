@@ -7,6 +7,7 @@ import java.util.Optional;
 import org.wardon.heat.AirSeries;
 import org.wardon.heat.Hours;
 import org.wardon.keeping.Draws;
+import org.wardon.keeping.KeepingModel;
 import org.wardon.keeping.Mechanism;
 import org.wardon.lots.LotHistory;
 import org.wardon.plan.ChamberPlan;
@@ -92,7 +93,7 @@ final class ColdBlast {
         if (first.isEmpty()) {
             return Optional.empty();
         }
-        double limitC = first.get().sheet().model().freezingC() + Holding.FREEZING_MARGIN_K;
+        double limitC = first.get().sheet().model().freezingC() + KeepingModel.FREEZING_MARGIN_K;
         double bandK = chamber.setting().bandK();
         double lowestC = limitC + bandK + SHARE * supplyBelowK();
         double setC = coldestC(first.get());
@@ -127,8 +128,8 @@ final class ColdBlast {
                 outcome.model().inBlast(visit, here.meanC(0), blast(), outcome.horizonS());
         double coldestC = coldest(blast, visit);
         double freezingC = visit.sheet().model().freezingC();
-        if (coldestC < freezingC + Holding.FREEZING_MARGIN_K
-                && coldest(here, visit) >= freezingC + Holding.FREEZING_MARGIN_K) {
+        if (coldestC < freezingC + KeepingModel.FREEZING_MARGIN_K
+                && coldest(here, visit) >= freezingC + KeepingModel.FREEZING_MARGIN_K) {
             told.add(
                     said(
                             "freezes-in-blast",

@@ -14,6 +14,7 @@ import org.wardon.cooling.SettingCourse;
 import org.wardon.heat.Course;
 import org.wardon.heat.CourseEvent;
 import org.wardon.heat.Hours;
+import org.wardon.keeping.KeepingModel;
 import org.wardon.lots.LotHistory;
 import org.wardon.plan.ChamberPlan;
 import org.wardon.plan.DailyOutage;
@@ -52,7 +53,6 @@ record Holding(
     static final double SEVEN_EIGHTHS_PER_HALF = 4.5;
     static final double RISE_MOST_K = 2;
     static final double RISK_MOST = 0.10;
-    static final double FREEZING_MARGIN_K = 0.5;
     static final double SETTLE_HOURS = 6;
 
     private static final String RULE = "assumption";
@@ -262,7 +262,7 @@ record Holding(
 
         private void judgeSafety(Visit visit, LotHistory history, Cooling cooling) {
             LotSheet sheet = visit.sheet();
-            double freezing = sheet.model().freezingC() + FREEZING_MARGIN_K;
+            double freezing = sheet.model().freezingC() + KeepingModel.FREEZING_MARGIN_K;
             if (anyWithin(visit, history, c -> c < freezing)) {
                 sayOf("near-freezing", sheet, Argument.of(sheet.model().freezingC(), "C"));
             }

@@ -9,6 +9,7 @@ import org.wardon.enclosure.section.Side;
 import org.wardon.enclosure.section.Spot;
 import org.wardon.enclosure.section.StillAirSection;
 import org.wardon.heat.HourAccount;
+import org.wardon.keeping.KeepingModel;
 import org.wardon.plan.ChamberPlan;
 import org.wardon.produce.Caution;
 import org.wardon.produce.Caution.Level;
@@ -148,7 +149,7 @@ final class StillPlaces {
         double lowestC = sheet.model().lowestSafeC();
         double setC = model.settings(chamber).until(seen.last().untilS()).temperatureC();
         double mostC = setC + chamber.setting().bandK() + Holding.RISE_MOST_K;
-        if (cold.temperatureC() < freezingC + Holding.FREEZING_MARGIN_K) {
+        if (cold.temperatureC() < freezingC + KeepingModel.FREEZING_MARGIN_K) {
             all.add(new Caution(Level.DANGER, told("freezes-in-cold-place", lot, cold, freezingC)));
         } else if (cold.temperatureC() < lowestC) {
             all.add(new Caution(Level.CAUTION, told("chills-in-cold-place", lot, cold, lowestC)));

@@ -132,7 +132,7 @@ public final class StoreTrial {
      * @param with lots in it, as they come and go
      * @param share share of each lot's mass that stands there, above 0
      * @param heatW more heat in it at all times, W
-     * @return what it comes to, a row every three hours
+     * @return what it comes to, a row every five hours
      */
     public Course sketch(ChamberPlan as, List<TrialLot> with, double share, double heatW) {
         progress.at("trial", 0);
@@ -224,7 +224,7 @@ public final class StoreTrial {
      * @param course the chamber, whose temperature is taken
      * @param loaded a run of it with like rows, whose humidity is taken
      * @param warmerK how much warmer it is taken to be, K, at the same water in it
-     * @return the air in rows of three hours
+     * @return the air in rows of five hours
      */
     public static AirSeries air(Course course, Course loaded, double warmerK) {
         return TrialAir.of(course, loaded, warmerK);

@@ -4,7 +4,7 @@ import java.util.List;
 import java.util.Map;
 import java.util.concurrent.ConcurrentHashMap;
 import org.wardon.advice.forecast.StoreTrial;
-import org.wardon.plan.Conflict;
+import org.wardon.produce.Conflict;
 import org.wardon.sharing.PairConflict;
 import org.wardon.sharing.Verdict;
 import org.wardon.sharing.placing.Climate;

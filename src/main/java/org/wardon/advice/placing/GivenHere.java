@@ -4,7 +4,6 @@ import java.util.Arrays;
 import java.util.List;
 import org.wardon.advice.forecast.TrialLot;
 import org.wardon.keeping.Draw;
-import org.wardon.keeping.ethylene.Stage;
 
 /** Ethylene one lot makes in a chamber at rest, in the middle draw and in each. */
 final class GivenHere {
@@ -32,11 +31,7 @@ final class GivenHere {
     }
 
     private static double ppm(TrialLot lot, Draw draw, Option.Figures figures) {
-        double stage =
-                Stage.giving(
-                        lot.model().lot().commodity(), lot.model().lot().door().ripeness(), draw);
-        double rate =
-                lot.model().response().giving().microlitrePerKgHour(figures.meanC(), stage, draw);
+        double rate = lot.model().ethyleneMicrolitrePerKgHour(figures.meanC(), draw);
         return rate * lot.plan().massKg() / (LITRES * figures.exchangeM3h());
     }
 

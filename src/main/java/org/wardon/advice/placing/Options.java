@@ -21,10 +21,11 @@ import org.wardon.cooling.SettingCourse;
 import org.wardon.heat.AirSeries;
 import org.wardon.heat.Course;
 import org.wardon.heat.Hours;
+import org.wardon.keeping.KeepingModel;
 import org.wardon.keeping.Paces;
 import org.wardon.plan.ChamberPlan;
-import org.wardon.plan.Conflict;
 import org.wardon.plan.Place;
+import org.wardon.produce.Conflict;
 
 /** Works out what each chamber can make and what each lot comes to in it. */
 final class Options {
@@ -42,9 +43,6 @@ final class Options {
 
     /** A mean of a day may stand so far above the setting beside the band and still hold, K. */
     private static final double BESIDE_BAND_K = 0.5;
-
-    /** Distance every shell keeps from freezing, K (common practice, no source). */
-    private static final double FREEZING_MARGIN_K = 0.5;
 
     /** How much warmer lots may make a chamber that keeps no temperature, K. */
     private static final double[] RISES_K = {0.5, 1.5, 3, 6};
@@ -378,7 +376,8 @@ final class Options {
         if (lot.model().uncured() && !set.coolers().isEmpty() && !accepts(set, Conflict.UNCURED)) {
             return Cell.Forbidden.UNCURED;
         }
-        if (coldestAirC(lot, set, figures) < lot.model().freezingC() + FREEZING_MARGIN_K) {
+        if (coldestAirC(lot, set, figures)
+                < lot.model().freezingC() + KeepingModel.FREEZING_MARGIN_K) {
             return Cell.Forbidden.FREEZING;
         }
         return there.shareSound() > 0 ? Cell.Forbidden.NO : Cell.Forbidden.LOST;

@@ -19,6 +19,7 @@ public final class FactWords {
     private static final Pattern KIND = Pattern.compile("^kind=[a-z]+(?:; |$)");
 
     private final boolean fahrenheit;
+    private final boolean pounds;
 
     /**
      * Prepares.
@@ -27,6 +28,7 @@ public final class FactWords {
      */
     public FactWords(Units units) {
         fahrenheit = units.fahrenheit();
+        pounds = units.pounds();
     }
 
     /**
@@ -79,6 +81,7 @@ public final class FactWords {
     private String sign(String unit) {
         return switch (unit) {
             case "C" -> fahrenheit ? " °F" : " °C";
+            case "kg" -> pounds ? " lb" : " kg";
             case "pct" -> " %";
             case "day" -> " days";
             case "1", "" -> "";
@@ -104,7 +107,18 @@ public final class FactWords {
     }
 
     private String figure(double value, String unit) {
-        return "C".equals(unit) ? temperature(value) : WrittenNumber.text(value);
+        return switch (unit) {
+            case "C" -> temperature(value);
+            case "kg" -> mass(value);
+            default -> WrittenNumber.text(value);
+        };
+    }
+
+    /** A printed mass of one item; in lb to a thousandth, half a gram. */
+    private String mass(double massKg) {
+        return pounds
+                ? WrittenNumber.text(Math.rint(1_000 * massKg / Units.KG_PER_LB) / 1_000)
+                : WrittenNumber.text(massKg);
     }
 
     /** A printed temperature; in °F to a tenth, finer than any source reads. */

@@ -12,9 +12,11 @@ public record Units(boolean fahrenheit, boolean pounds) {
     /** Celsius and kilograms. */
     public static final Units METRIC = new Units(false, false);
 
+    /** A pound, kg. Source: international yard and pound agreement of 1959, exact by definition. */
+    public static final double KG_PER_LB = 0.45359237;
+
     private static final double G_M2_PER_OZ_FT2 = 305.15;
     private static final double M3_H_PER_FT3_MIN = 1.699;
-    private static final double KG_PER_LB = 0.45359237;
     private static final double M_PER_FT = 0.3048;
 
     /**

@@ -18,8 +18,8 @@ import org.wardon.errors.BadInput;
 import org.wardon.errors.Progress;
 import org.wardon.files.json.JsonPath;
 import org.wardon.files.json.Part;
-import org.wardon.plan.Conflict;
 import org.wardon.plan.StorePlan;
+import org.wardon.produce.Conflict;
 import org.wardon.web.api.route.Ask;
 import org.wardon.web.api.route.Reply;
 import org.wardon.web.api.route.Requests;
@@ -164,7 +164,7 @@ final class AnswersApi {
                 throw crop(typed, "it is named twice", "name each crop once");
             }
         }
-        Set<Conflict> accepts = Borne.named("--accept", texts(ask.query().at("accept")));
+        Set<Conflict> accepts = Borne.named("accept", texts(ask.query().at("accept")));
         return Reply.of(new SharingAdvice(bench.book(), WORDS).ask(wanted, accepts).answer());
     }
 

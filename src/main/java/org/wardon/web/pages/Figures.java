@@ -12,7 +12,6 @@ import org.wardon.advice.wording.Units;
 
 /** Writes numbers as a person likes to read them, and reads them as they like to write them. */
 public final class Figures {
-    private static final double KG_PER_LB = 0.45359237;
     private static final MathContext TYPED = new MathContext(6);
     private static final Pattern POINT_BETWEEN_DIGITS = Pattern.compile("(?<=\\d)\\.(?=\\d)");
     private static final Pattern NUMBER = Pattern.compile("[-−+]?\\d{1,12}(\\.\\d{0,12})?");
@@ -154,7 +153,7 @@ public final class Figures {
      * @return up to six digits
      */
     public String typedMass(double massKg) {
-        return typed(preferences.pounds() ? massKg / KG_PER_LB : massKg);
+        return typed(preferences.pounds() ? massKg / Units.KG_PER_LB : massKg);
     }
 
     /**
@@ -207,7 +206,7 @@ public final class Figures {
     public OptionalDouble massKg(String typed) {
         OptionalDouble number = number(typed);
         return number.isPresent() && preferences.pounds()
-                ? OptionalDouble.of(number.getAsDouble() * KG_PER_LB)
+                ? OptionalDouble.of(number.getAsDouble() * Units.KG_PER_LB)
                 : number;
     }
 
@@ -220,7 +219,7 @@ public final class Figures {
     public OptionalDouble pricePerKg(String typed) {
         OptionalDouble number = number(typed);
         return number.isPresent() && preferences.pounds()
-                ? OptionalDouble.of(number.getAsDouble() / KG_PER_LB)
+                ? OptionalDouble.of(number.getAsDouble() / Units.KG_PER_LB)
                 : number;
     }
 }

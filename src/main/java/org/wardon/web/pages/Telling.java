@@ -25,10 +25,18 @@ public record Telling(String level, String code, List<String> about, String text
      * @return the sentence without that beginning
      */
     public Telling without(String lot) {
+        String bare = bare(lot);
+        return bare.equals(text) ? this : new Telling(level, code, about, capital(bare), source);
+    }
+
+    /** The sentence without the lot it is about first; itself where it begins with none. */
+    String bare() {
+        return about.isEmpty() ? text : bare(about.get(0));
+    }
+
+    private String bare(String lot) {
         String begins = lot + ": ";
-        return text.startsWith(begins)
-                ? new Telling(level, code, about, capital(text.substring(begins.length())), source)
-                : this;
+        return text.startsWith(begins) ? text.substring(begins.length()) : text;
     }
 
     private static String capital(String sentence) {

@@ -73,7 +73,7 @@ public final class Tellings {
         Map<List<String>, List<Telling>> same = new LinkedHashMap<>();
         for (Telling one : all) {
             same.computeIfAbsent(
-                            List.of(one.level(), one.code(), one.source(), bare(one)),
+                            List.of(one.level(), one.code(), one.source(), one.bare()),
                             any -> new ArrayList<>())
                     .add(one);
         }
@@ -83,27 +83,19 @@ public final class Tellings {
     private Telling joined(List<Telling> same) {
         Telling first = same.get(0);
         List<String> about = named(same);
-        return same.size() == 1 || bare(first).equals(first.text())
+        return same.size() == 1 || first.bare().equals(first.text())
                 ? first
                 : new Telling(
                         first.level(),
                         first.code(),
                         about,
-                        String.join(", ", about) + ": " + bare(first),
+                        String.join(", ", about) + ": " + first.bare(),
                         first.source());
     }
 
     /** Whom sentences are about: what a sentence begins with. */
     private static List<String> named(Collection<Telling> all) {
         return all.stream().flatMap(one -> one.about().stream().limit(1)).distinct().toList();
-    }
-
-    /** The sentence without the lot it begins with; itself where it begins with none. */
-    private static String bare(Telling one) {
-        String begins = one.about().isEmpty() ? "" : one.about().get(0) + ": ";
-        return !begins.isEmpty() && one.text().startsWith(begins)
-                ? one.text().substring(begins.length())
-                : one.text();
     }
 
     /**
@@ -139,7 +131,7 @@ public final class Tellings {
 
     /** Names some of those it is said of where it is said of very many. */
     private Telling shortened(Telling one) {
-        return one.about().size() <= MOST_NAMED || bare(one).isEmpty() || isDanger(one)
+        return one.about().size() <= MOST_NAMED || one.bare().isEmpty() || isDanger(one)
                 ? one
                 : new Telling(
                         one.level(),

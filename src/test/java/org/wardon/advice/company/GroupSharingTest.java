@@ -17,8 +17,8 @@ import org.wardon.advice.wording.Words;
 import org.wardon.errors.BadInput;
 import org.wardon.files.PlanReader;
 import org.wardon.files.forecast.ShareAnswer;
-import org.wardon.plan.Conflict;
 import org.wardon.plan.StorePlan;
+import org.wardon.produce.Conflict;
 import org.wardon.produce.Reason;
 import org.wardon.reference.ReferenceBook;
 

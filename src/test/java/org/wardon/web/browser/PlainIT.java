@@ -86,14 +86,21 @@ class PlainIT extends InBrowser {
                         "/edit?at=$.chambers[1]",
                         "/edit?at=$.chambers[1].cooling[0]",
                         "/edit?at=$.weather")) {
-            String told = told(page, plan + path);
-            Matcher metric = METRIC.matcher(told);
-            assertFalse(metric.find(), () -> path + ": " + metric.group());
+            String told = toldWithoutMetric(page, plan + path);
             assertTrue(
                     told.contains("°F") || told.contains("lb") || path.startsWith("/edit"), path);
         }
+        String crop = toldWithoutMetric(page, "/crops/mango");
+        assertTrue(crop.contains("°F") && crop.contains(" lb"), "a crop in °F and lb");
         page.context().clearCookies();
         page.close();
+    }
+
+    private String toldWithoutMetric(Page page, String path) {
+        String told = told(page, path);
+        Matcher metric = METRIC.matcher(told);
+        assertFalse(metric.find(), () -> path + ": " + metric.group());
+        return told;
     }
 
     /** The text of a page when it waits for nothing more, without what is quoted. */

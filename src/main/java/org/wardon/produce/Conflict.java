@@ -1,4 +1,4 @@
-package org.wardon.plan;
+package org.wardon.produce;
 
 import java.util.Locale;
 
@@ -12,7 +12,7 @@ public enum Conflict {
     UNCURED;
 
     /**
-     * Returns the word of a plan.
+     * Returns its word, as a plan and an answer have it.
      *
      * @return lower case
      */
