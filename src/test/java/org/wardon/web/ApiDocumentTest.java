@@ -178,7 +178,13 @@ class ApiDocumentTest {
     private static List<Path> sources() throws IOException {
         List<Path> all = new ArrayList<>();
         for (String folder :
-                List.of("files/forecast", "web", "logbook", "advice/faces", "produce")) {
+                List.of(
+                        "files/forecast",
+                        "web",
+                        "logbook",
+                        "advice/company",
+                        "advice/faces",
+                        "produce")) {
             try (Stream<Path> files = Files.walk(Path.of("src/main/java/org/wardon", folder))) {
                 files.filter(file -> file.toString().endsWith(".java")).forEach(all::add);
             }

@@ -1,6 +1,7 @@
 package org.wardon.web;
 
 import static org.junit.jupiter.api.Assertions.assertEquals;
+import static org.junit.jupiter.api.Assertions.assertNotEquals;
 import static org.junit.jupiter.api.Assertions.assertTrue;
 
 import java.io.IOException;
@@ -125,6 +126,7 @@ final class ApiTour {
                 .asking("at=$.chambers[0].faces[0]".replace("[", "%5B").replace("]", "%5D"))
                 .gives(200);
         api.ask("share").asking("crop=mango%3D5&crop=banana&days=4").gives(200);
+        lotsThatShare(plan);
         JsonNode borne =
                 api.ask("share")
                         .asking("crop=apple&crop=broccoli&accept=ethylene")
@@ -133,6 +135,29 @@ final class ApiTour {
         assertEquals("ethylene", borne.get("accepted").get(0).get("conflict").asString());
         JsonNode twice = api.ask("share").asking("crop=mango&crop=mango").gives(422).json();
         assertEquals("crop", twice.get("faults").get(0).get("path").asString());
+    }
+
+    private void lotsThatShare(String plan) {
+        JsonNode told =
+                api.ask("shareLots")
+                        .with("plan", plan)
+                        .asking("lot=M1&lot=C1&crop=lettuce%3D4")
+                        .gives(200)
+                        .json();
+        assertNotEquals("good", told.get("answer").get("verdict").asString());
+        JsonNode lots = told.get("lots");
+        assertEquals(3, lots.size());
+        assertEquals("M1", lots.get(0).get("id").asString());
+        assertEquals(6, lots.get(2).get("wholeDays").asDouble(), 1e-9, "4 days and 2 of market");
+        // Mangoes are hurt below 10 to 13 °C, lettuce bears 0 °C: field rules and handbook.
+        assertTrue(lots.get(0).get("coldHarmsBelowC").asDouble() > 5);
+        assertTrue(lots.get(2).get("bearsC").get("low").asDouble() < 2);
+        JsonNode unknown =
+                api.ask("shareLots").with("plan", plan).asking("lot=nobody").gives(422).json();
+        JsonNode fault = unknown.get("faults").get(0);
+        assertEquals("lot", fault.get("path").asString());
+        assertEquals("'nobody': no lot of the plan is called so", fault.get("found").asString());
+        api.ask("shareLots").with("plan", plan).gives(422);
     }
 
     private ApiClient.Question of(String id, String plan) {

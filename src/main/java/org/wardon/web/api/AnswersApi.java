@@ -7,6 +7,8 @@ import java.util.Optional;
 import java.util.OptionalDouble;
 import java.util.Set;
 import org.wardon.advice.company.Borne;
+import org.wardon.advice.company.GroupQuestion;
+import org.wardon.advice.company.GroupSharing;
 import org.wardon.advice.company.SharingAdvice;
 import org.wardon.advice.faces.FaceAdvice;
 import org.wardon.advice.forecast.SizeAdvice;
@@ -15,6 +17,7 @@ import org.wardon.advice.placing.OpenLots;
 import org.wardon.advice.wording.Units;
 import org.wardon.advice.wording.Words;
 import org.wardon.errors.BadInput;
+import org.wardon.errors.Fault;
 import org.wardon.errors.Progress;
 import org.wardon.files.json.JsonPath;
 import org.wardon.files.json.Part;
@@ -25,6 +28,7 @@ import org.wardon.web.api.route.Reply;
 import org.wardon.web.api.route.Requests;
 import org.wardon.web.api.told.DaysLeft;
 import org.wardon.web.api.told.FaceTold;
+import org.wardon.web.api.told.LotsSharing;
 import org.wardon.web.guard.Refusal;
 import org.wardon.web.work.OpenPlan;
 import org.wardon.web.work.Stand;
@@ -154,6 +158,38 @@ final class AnswersApi {
     }
 
     Reply share(Ask ask) {
+        return Reply.of(
+                new SharingAdvice(bench.book(), WORDS).ask(wanted(ask), accepts(ask)).answer());
+    }
+
+    /** Who of the lots of a plan may share, and what each bears. */
+    Reply shareLots(Ask ask) {
+        OpenPlan open = ask.plan();
+        GroupSharing sharing = GroupSharing.of(Ask.good(open).plan(), open.book());
+        List<String> lots = texts(ask.query().at("lot"));
+        Map<String, Double> crops = wanted(ask);
+        GroupQuestion question = new GroupQuestion(lots, crops, accepts(ask));
+        try {
+            return Reply.of(
+                    LotsSharing.of(
+                            sharing.tell(question, WORDS).answer(), sharing.ask(lots, crops)));
+        } catch (BadInput e) {
+            throw new BadInput(e.faults().stream().map(fault -> inQuestion(lots, fault)).toList());
+        }
+    }
+
+    /** A fault under the name of a lot or crop is told under the name of the question. */
+    private static Fault inQuestion(List<String> lots, Fault fault) {
+        String name = lots.contains(fault.file()) ? "lot" : "crop";
+        String found = "'" + fault.file() + "': " + fault.found();
+        return new Fault(Requests.QUERY, name, found, fault.accepted());
+    }
+
+    private static Set<Conflict> accepts(Ask ask) {
+        return Borne.named("--accept", texts(ask.query().at("accept")));
+    }
+
+    private static Map<String, Double> wanted(Ask ask) {
         Map<String, Double> wanted = new java.util.LinkedHashMap<>();
         OptionalDouble days = ask.query().at("days").number();
         for (Part crop : ask.query().at("crop").items()) {
@@ -164,8 +200,7 @@ final class AnswersApi {
                 throw crop(typed, "it is named twice", "name each crop once");
             }
         }
-        Set<Conflict> accepts = Borne.named("accept", texts(ask.query().at("accept")));
-        return Reply.of(new SharingAdvice(bench.book(), WORDS).ask(wanted, accepts).answer());
+        return wanted;
     }
 
     private static double days(String typed) {

@@ -37,6 +37,7 @@ import org.wardon.web.api.told.Entered;
 import org.wardon.web.api.told.FaceTold;
 import org.wardon.web.api.told.History;
 import org.wardon.web.api.told.JobSheet;
+import org.wardon.web.api.told.LotsSharing;
 import org.wardon.web.api.told.OwnRanges;
 import org.wardon.web.api.told.PlanSheet;
 import org.wardon.web.api.told.Plans;
@@ -234,6 +235,10 @@ public final class Api {
                 get(PLAN + "/face", "tellFace", tag, answers::face)
                         .asks("FaceQuestion")
                         .gives(200, FaceTold.class));
+        add(
+                get(PLAN + "/share", "shareLots", tag, answers::shareLots)
+                        .asks("ShareLotsQuestion")
+                        .gives(200, LotsSharing.class));
         add(
                 get("/api/share", "share", tag, answers::share)
                         .asks("ShareQuestion")
