@@ -12,8 +12,8 @@ final class Saturation {
 
     private static final double SLOPE_K = 1e-4;
 
-    /** A cubic over this much to either side is exact to 1e-6. */
-    static final double REACH_K = 1.2;
+    /** A cubic over this much to either side is exact to 2e-7. */
+    static final double REACH_K = 1;
 
     private Saturation() {}
 
@@ -57,10 +57,19 @@ final class Saturation {
 
     static LocalCurve overWater(boolean plain) {
         return new LocalCurve(
-                Saturation::overWaterPa, Saturation::overWaterSlopePaPerK, REACH_K, plain);
+                Saturation::overWaterPa,
+                Saturation::overWaterSlopePaPerK,
+                REACH_K,
+                Double.NaN,
+                plain);
     }
 
     static LocalCurve curve(boolean plain) {
-        return new LocalCurve(Saturation::pressurePa, Saturation::slopePaPerK, REACH_K, plain);
+        return new LocalCurve(
+                Saturation::pressurePa,
+                Saturation::slopePaPerK,
+                REACH_K,
+                SaturatedAir.TRIPLE_POINT_C,
+                plain);
     }
 }
