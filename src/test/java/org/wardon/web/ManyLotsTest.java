@@ -38,6 +38,22 @@ class ManyLotsTest {
 
     @TempDir static Path home;
 
+    /** Pages that wait for the forecast. */
+    private static final List<String> WAIT =
+            List.of(
+                    "",
+                    "/lots?in=leaf&from=31",
+                    "/cautions",
+                    "/chamber/leaf?setting=3",
+                    "/chamber/leaf/section");
+
+    private static final int TRIES = 5;
+
+    /** Asked of every answer but the first, ms. */
+    private static final double LATER_ANSWER_MS = 300;
+
+    private static final Map<String, String> waiting = new HashMap<>();
+
     private static WebServer server;
     private static RawHttp http;
     private static String cookie;
@@ -51,6 +67,7 @@ class ManyLotsTest {
         http = new RawHttp(server.url());
         cookie = "Cookie: " + http.visitor("/plans").cookie();
         plan = kept("good.json", ManyLots.plan(LOTS, 1));
+        WAIT.forEach(path -> waiting.put(path, get(plan + path).body()));
         long end = System.currentTimeMillis() + PATIENCE_MS;
         while (get(plan).body().contains("data-progress") && System.currentTimeMillis() < end) {
             Thread.sleep(50);
@@ -227,5 +244,28 @@ class ManyLotsTest {
         assertTrue(get(plan + "/cautions?from=nonsense").body().contains("1 to 100 of "));
         assertTrue(get(plan + "/lots?from=9999").body().contains("Lots 181 to 200 of 200"));
         assertEquals(404, get(plan + "/lots?in=nowhere").status());
+    }
+
+    @Test
+    void withoutScriptEveryPageThatWaitsAsksAgainWithoutItsFragment() {
+        for (String path : WAIT) {
+            String page = waiting.getOrDefault(path, "");
+            assertTrue(page.contains("data-progress"), path);
+            // Of an address that has a fragment, only one told without it is fetched again.
+            assertTrue(
+                    page.contains("content=\"1; url=" + plan + path.replace("&", "&amp;") + "\""),
+                    page);
+        }
+    }
+
+    @Test
+    void aChamberOfManyLotsIsShownAtOnce() {
+        double least = Double.MAX_VALUE;
+        for (int i = 0; i < TRIES; i++) {
+            long begun = System.nanoTime();
+            assertEquals(200, get(plan + "/chamber/leaf").status());
+            least = Math.min(least, (System.nanoTime() - begun) / 1e6);
+        }
+        assertTrue(least < LATER_ANSWER_MS, least + " ms");
     }
 }

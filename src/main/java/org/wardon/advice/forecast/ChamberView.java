@@ -2,6 +2,7 @@ package org.wardon.advice.forecast;
 
 import java.time.LocalDateTime;
 import java.util.ArrayList;
+import java.util.HashSet;
 import java.util.List;
 import java.util.Locale;
 import java.util.Optional;
@@ -41,16 +42,38 @@ public final class ChamberView {
     }
 
     /**
+     * Returns which lots stand there at some time.
+     *
+     * @return their ids
+     */
+    public List<String> lotIds() {
+        return outcome.model().sheetsIn(chamber.id()).stream()
+                .map(LotSheet::id)
+                .filter(outcome::has)
+                .distinct()
+                .toList();
+    }
+
+    /**
      * Returns the lots that stand there at some time.
      *
      * @return columns {@code meanC surfaceC coreC respirationW massKg lifeUsedPct}; of a lot that
      *     is moved, all it goes through
      */
     public List<HourlySeries> lots() {
-        List<String> here =
-                outcome.model().sheetsIn(chamber.id()).stream().map(LotSheet::id).toList();
-        return new StoreSeries(outcome)
-                .lots().stream().filter(lot -> here.contains(lot.of())).toList();
+        return new StoreSeries(outcome).lots(new HashSet<>(lotIds())::contains);
+    }
+
+    /**
+     * Returns a lot that stands there at some time, without the work of all others.
+     *
+     * @param id its id
+     * @return as {@link #lots} gives it, absent where it never stands there
+     */
+    public Optional<HourlySeries> lot(String id) {
+        return lotIds().contains(id)
+                ? new StoreSeries(outcome).lots(id::equals).stream().findFirst()
+                : Optional.empty();
     }
 
     /**

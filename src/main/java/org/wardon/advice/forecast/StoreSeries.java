@@ -6,6 +6,7 @@ import java.util.LinkedHashMap;
 import java.util.List;
 import java.util.Map;
 import java.util.function.IntToDoubleFunction;
+import java.util.function.Predicate;
 import java.util.function.ToDoubleFunction;
 import java.util.stream.IntStream;
 import org.wardon.files.forecast.HourlySeries;
@@ -34,7 +35,13 @@ final class StoreSeries {
 
     /** Series of all lots of the run. */
     List<HourlySeries> lots() {
+        return lots(any -> true);
+    }
+
+    /** Series of those lots of the run whose id is asked for; others cost nothing. */
+    List<HourlySeries> lots(Predicate<String> asked) {
         return Legs.joined(outcome.courses().values()).values().stream()
+                .filter(lot -> asked.test(lot.stay().lot().id()))
                 .filter(lot -> outcome.has(lot.stay().lot().id()))
                 .map(this::lot)
                 .toList();

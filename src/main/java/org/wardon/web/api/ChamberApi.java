@@ -56,10 +56,7 @@ final class ChamberApi {
         OpenPlan open = ask.plan();
         String chamber = AnswersApi.chamber(ask, open);
         StoreAdvice advice = answers.advice(ask, open);
-        Optional<HourlySeries> lot =
-                advice.view(chamber).lots().stream()
-                        .filter(one -> one.of().equals(ask.path("lot")))
-                        .findFirst();
+        Optional<HourlySeries> lot = advice.view(chamber).lot(ask.path("lot"));
         return Reply.of(
                 SeriesTold.of(lot.orElseThrow(() -> new Refusal(404, "no-lot")), advice.plan()));
     }

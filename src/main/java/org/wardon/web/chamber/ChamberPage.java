@@ -4,6 +4,7 @@ import java.util.LinkedHashMap;
 import java.util.Map;
 import java.util.Optional;
 import java.util.OptionalDouble;
+import java.util.function.BiFunction;
 import java.util.stream.Collectors;
 import org.wardon.advice.forecast.StoreAdvice;
 import org.wardon.advice.picture.SectionPicture;
@@ -101,6 +102,11 @@ public final class ChamberPage {
      * @param call the request
      */
     public void show(Call call) {
+        whenReady(call, "chamber", this::sheet);
+    }
+
+    /** Where there will be no forecast, the page of all chambers says why. */
+    private void whenReady(Call call, String template, BiFunction<Asked, Frame, ?> view) {
         OpenPlan open = AllChambersPage.opened(bench, call);
         String chamber = call.http().pathParam("chamber");
         if (!(open.reading() instanceof Reading.Good good)) {
@@ -112,16 +118,13 @@ public final class ChamberPage {
         Stand stand = bench.forecast(open, good, call.preferences().units(), PATIENCE_MS);
         if (stand instanceof Stand.Ready ready) {
             Asked asked = new Asked(call, open, ready.advice(), chamber);
-            press.print(call, "chamber", frame, sheet(asked, frame));
+            press.print(call, template, frame, view.apply(asked, frame));
         } else if (stand instanceof Stand.Running running) {
-            ChamberSheet waiting =
-                    new ChamberSheet(
-                            path(open, chamber),
-                            chamber,
-                            open.kept().id(),
-                            Optional.of(ForecastRoutes.progress(open, running, press.words())),
-                            Optional.empty());
-            press.print(call, "chamber", frame.thatWaits(), waiting);
+            press.print(
+                    call,
+                    "waiting",
+                    frame.thatWaits(),
+                    ForecastRoutes.progress(open, running, press.words()));
         } else {
             call.goTo(open.kept());
         }
@@ -139,15 +142,6 @@ public final class ChamberPage {
     }
 
     private ChamberSheet sheet(Asked asked, Frame frame) {
-        return new ChamberSheet(
-                asked.path(),
-                asked.chamber(),
-                asked.open().kept().id(),
-                Optional.empty(),
-                Optional.of(body(asked, frame)));
-    }
-
-    private ChamberSheet.Body body(Asked asked, Frame frame) {
         ChamberViews views = views(asked);
         WhatIfForm form = form(asked);
         Optional<Changes> changes = form.changes();
@@ -157,7 +151,10 @@ public final class ChamberPage {
                         .filter(one -> one.id().equals(asked.chamber()))
                         .findFirst()
                         .orElseThrow();
-        return new ChamberSheet.Body(
+        return new ChamberSheet(
+                asked.path(),
+                asked.chamber(),
+                asked.open().kept().id(),
                 new AdviceViews(asked.advice(), asked.open(), words, frame, bench.clock())
                         .chamber(forecast),
                 form.slides(),
@@ -244,25 +241,17 @@ public final class ChamberPage {
     }
 
     /**
-     * Shows where it is warm and where cold in a chamber no fan stirs.
+     * Shows where it is warm and where cold in a chamber no fan stirs, or how far the forecast is.
      *
      * @param call the request
      */
     public void section(Call call) {
-        Asked asked = asked(call);
-        SectionAnswer answer = sectionOf(asked);
-        press.print(
-                call,
-                "section",
-                frame(call, asked.open(), asked.chamber()),
-                new SectionSheet(
-                        asked.path(),
-                        press.words().say("section.title", asked.chamber()),
-                        asked.path() + "/section.svg",
-                        answer.said().stream().map(call.figures()::text).toList(),
-                        answer.warnings().stream()
-                                .map(w -> call.figures().text(w.text()))
-                                .toList()));
+        whenReady(call, "section", this::sectionSheet);
+    }
+
+    private SectionSheet sectionSheet(Asked asked, Frame frame) {
+        return new SectionViews(press.words(), asked.call().figures())
+                .sheet(sectionOf(asked), asked.path());
     }
 
     /**
@@ -272,9 +261,10 @@ public final class ChamberPage {
      */
     public void sectionPicture(Call call) {
         Asked asked = asked(call);
+        String drawn = SectionPicture.of(sectionOf(asked), Words.english(asked.units()));
         call.http()
                 .contentType("image/svg+xml; charset=utf-8")
-                .result(SectionPicture.of(sectionOf(asked), Words.english(asked.units())));
+                .result(SectionViews.written(drawn, call.figures()));
     }
 
     private SectionAnswer sectionOf(Asked asked) {

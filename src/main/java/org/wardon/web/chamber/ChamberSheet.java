@@ -5,7 +5,6 @@ import java.util.Optional;
 import org.wardon.web.pages.ChamberView;
 import org.wardon.web.pages.ChartView;
 import org.wardon.web.pages.FieldView;
-import org.wardon.web.pages.ProgressView;
 import org.wardon.web.pages.TableView;
 
 /**
@@ -14,46 +13,40 @@ import org.wardon.web.pages.TableView;
  * @param path its path
  * @param id the chamber
  * @param plan number of the plan
- * @param progress the forecast on its way; the rest is absent then
- * @param body the rest
+ * @param chamber the chamber as on the page of all chambers
+ * @param slides fields of what could be changed
+ * @param answer the chamber with something changed
+ * @param charts its air and gases
+ * @param limits limits of carbon dioxide, with their sources
+ * @param heat what heats it
+ * @param face temperatures through a face
+ * @param lots a chart a lot, or that of the lot chosen
+ * @param picks lots to choose from where there are too many for a chart each
+ * @param section path of the section, where no fan stirs the air
+ * @param laterSettings whether its plan changes its setting on the way
  */
 public record ChamberSheet(
-        String path, String id, long plan, Optional<ProgressView> progress, Optional<Body> body) {
-    /**
-     * What the page shows once the forecast is there.
-     *
-     * @param chamber the chamber as on the page of all chambers
-     * @param slides fields of what could be changed
-     * @param answer the chamber with something changed
-     * @param charts its air and gases
-     * @param limits limits of carbon dioxide, with their sources
-     * @param heat what heats it
-     * @param face temperatures through a face
-     * @param lots a chart a lot, or that of the lot chosen
-     * @param picks lots to choose from where there are too many for a chart each
-     * @param section path of the section, where no fan stirs the air
-     * @param laterSettings whether its plan changes its setting on the way
-     */
-    public record Body(
-            ChamberView chamber,
-            List<WhatIfForm.Slide> slides,
-            Optional<WhatIfView> answer,
-            List<ChartView> charts,
-            List<String> limits,
-            Drawing heat,
-            FaceSheet face,
-            List<ChartView> lots,
-            List<Pick> picks,
-            Optional<String> section,
-            boolean laterSettings) {
-        /** Copies the lists. */
-        public Body {
-            slides = List.copyOf(slides);
-            charts = List.copyOf(charts);
-            limits = List.copyOf(limits);
-            lots = List.copyOf(lots);
-            picks = List.copyOf(picks);
-        }
+        String path,
+        String id,
+        long plan,
+        ChamberView chamber,
+        List<WhatIfForm.Slide> slides,
+        Optional<WhatIfView> answer,
+        List<ChartView> charts,
+        List<String> limits,
+        Drawing heat,
+        FaceSheet face,
+        List<ChartView> lots,
+        List<Pick> picks,
+        Optional<String> section,
+        boolean laterSettings) {
+    /** Copies the lists. */
+    public ChamberSheet {
+        slides = List.copyOf(slides);
+        charts = List.copyOf(charts);
+        limits = List.copyOf(limits);
+        lots = List.copyOf(lots);
+        picks = List.copyOf(picks);
     }
 
     /**

@@ -38,6 +38,7 @@ final class ChamberViews {
     private final Figures figures;
     private final Curves curves;
     private final HourlySeries air;
+    private final List<String> lotIds;
 
     ChamberViews(StoreAdvice advice, String chamber, PageWords say, Figures figures) {
         this.advice = advice;
@@ -47,6 +48,7 @@ final class ChamberViews {
         this.figures = figures;
         this.curves = new Curves(plan, figures, say);
         this.air = advice.view(chamber).air();
+        this.lotIds = advice.view(chamber).lotIds();
     }
 
     Curves curves() {
@@ -133,32 +135,26 @@ final class ChamberViews {
 
     /** A chart a lot; of very many that of the lot asked for, else of the first. */
     List<ChartView> lots(String path, String asked) {
-        String one = chosen(asked);
-        return advice.view(chamber).lots().stream()
-                .filter(lot -> !isCrowded() || lot.of().equals(one))
-                .map(lot -> ofLot(path, lot))
-                .toList();
+        List<HourlySeries> shown =
+                isCrowded()
+                        ? advice.view(chamber).lot(chosen(asked)).stream().toList()
+                        : advice.view(chamber).lots();
+        return shown.stream().map(lot -> ofLot(path, lot)).toList();
     }
 
     private boolean isCrowded() {
-        return advice.view(chamber).lots().size() > MOST_LOTS;
+        return lotIds.size() > MOST_LOTS;
     }
 
     private String chosen(String asked) {
-        List<HourlySeries> lots = advice.view(chamber).lots();
-        return lots.stream().anyMatch(lot -> lot.of().equals(asked)) || lots.isEmpty()
-                ? asked
-                : lots.get(0).of();
+        return lotIds.contains(asked) || lotIds.isEmpty() ? asked : lotIds.get(0);
     }
 
     /** Lots to choose from; none where each has its chart. */
     List<ChamberSheet.Pick> picks(String asked) {
         String one = chosen(asked);
         return isCrowded()
-                ? advice.view(chamber).lots().stream()
-                        .map(HourlySeries::of)
-                        .map(id -> new ChamberSheet.Pick(id, id, id.equals(one)))
-                        .toList()
+                ? lotIds.stream().map(id -> new ChamberSheet.Pick(id, id, id.equals(one))).toList()
                 : List.of();
     }
 
@@ -172,10 +168,7 @@ final class ChamberViews {
     }
 
     Optional<ChartData> lot(String id) {
-        return advice.view(chamber).lots().stream()
-                .filter(lot -> lot.of().equals(id))
-                .findFirst()
-                .map(lot -> curves.data(Curves.OF_LOT, lot, List.of()));
+        return advice.view(chamber).lot(id).map(lot -> curves.data(Curves.OF_LOT, lot, List.of()));
     }
 
     Drawing heat(HourlySeries heat) {

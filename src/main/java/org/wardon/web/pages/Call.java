@@ -36,6 +36,16 @@ public final class Call {
     }
 
     /**
+     * Returns what was asked, as it was sent.
+     *
+     * @return path and question, without the fragment, which browsers keep to themselves
+     */
+    public String address() {
+        String question = Optional.ofNullable(http.queryString()).orElse("");
+        return question.isEmpty() ? http.path() : http.path() + "?" + question;
+    }
+
+    /**
      * Returns the person's preferences.
      *
      * @return preferences

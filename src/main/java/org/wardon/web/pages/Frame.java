@@ -17,7 +17,8 @@ import org.wardon.logbook.KeptPlan;
  * @param preferences the person's preferences
  * @param words the words
  * @param assets addresses of style, script and charts
- * @param waiting whether the page asks to be loaded again, for people without script
+ * @param address path and question the page was asked by, for a page that asks to be loaded again
+ * @param waiting whether it does, for people without script
  * @param leaves whether there is something to leave, a passcode having been asked
  */
 public record Frame(
@@ -28,6 +29,7 @@ public record Frame(
         Preferences preferences,
         PageWords words,
         Assets assets,
+        String address,
         boolean waiting,
         boolean leaves) {
     private static final DateTimeFormatter SAVED_AT =
@@ -80,7 +82,8 @@ public record Frame(
      * @return the frame
      */
     public Frame titled(String other) {
-        return new Frame(other, room, plan, token, preferences, words, assets, waiting, leaves);
+        return new Frame(
+                other, room, plan, token, preferences, words, assets, address, waiting, leaves);
     }
 
     /**
@@ -89,6 +92,7 @@ public record Frame(
      * @return the frame
      */
     public Frame thatWaits() {
-        return new Frame(title, room, plan, token, preferences, words, assets, true, leaves);
+        return new Frame(
+                title, room, plan, token, preferences, words, assets, address, true, leaves);
     }
 }

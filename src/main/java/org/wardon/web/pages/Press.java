@@ -76,6 +76,7 @@ public final class Press {
                 call.preferences(),
                 words,
                 assets,
+                call.address(),
                 false,
                 asksPasscode);
     }

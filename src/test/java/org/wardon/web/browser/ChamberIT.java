@@ -18,11 +18,13 @@ class ChamberIT extends InBrowser {
     private static final int DAYS = 10;
     private static final int LARGEST_PAGE = 100_000;
 
+    private String demo = "";
     private String cold = "";
 
     @BeforeAll
     void openDemo() {
-        cold = demo() + "/chamber/cold";
+        demo = demo();
+        cold = demo + "/chamber/cold";
     }
 
     @ParameterizedTest
@@ -48,6 +50,17 @@ class ChamberIT extends InBrowser {
         assertEquals("105", page.locator("#insulation").inputValue());
         page.waitForSelector("#what-answer canvas");
         hold(page, "chamber-what-if");
+        page.close();
+    }
+
+    @ParameterizedTest
+    @ValueSource(ints = {PHONE, DESK})
+    void stillAirIsDrawnWithItsNumbers(int width) {
+        Page page = show(demo + "/chamber/shed/section", width);
+        page.waitForFunction(
+                "() => document.querySelector('.section-picture img').naturalWidth > 0");
+        page.click("summary");
+        hold(page, "section");
         page.close();
     }
 

@@ -141,6 +141,9 @@ class PlainIT extends InBrowser {
         page.click(".door-choice form:has(input[value=fruit]) button");
         page.waitForURL(address() + plan);
         assertTrue(page.locator(".saved").textContent().contains("put into fruit"));
+        page.navigate(address() + plan + "/chamber/fruit?setting=11#what");
+        assertEquals(1, page.locator("meta[http-equiv=refresh]").count(), "nothing to wait for");
+        page.waitForSelector("#what-answer table");
         page.close();
     }
 

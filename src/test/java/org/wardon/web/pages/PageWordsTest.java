@@ -52,6 +52,7 @@ class PageWordsTest {
                     "heat.",
                     "limit.",
                     "profile.",
+                    "section.from-",
                     "placing.",
                     "ruler.",
                     "sharing.");
