@@ -8,6 +8,7 @@ import java.util.Set;
 import org.wardon.air.Site;
 import org.wardon.air.Timeline;
 import org.wardon.errors.Require;
+import org.wardon.produce.Conflict;
 
 /**
  * A store and what is to come into it.
@@ -75,6 +76,18 @@ public record StorePlan(
                 .filter(chamber -> chamber.id().equals(id))
                 .findFirst()
                 .orElseThrow(() -> new NoSuchElementException("no chamber '" + id + "'"));
+    }
+
+    /**
+     * Returns what the keeper accepts in a chamber, there or everywhere.
+     *
+     * @param chamberId its id
+     * @return conflicts that forbid nothing
+     */
+    public Set<Conflict> accepts(String chamberId) {
+        Set<Conflict> all = new HashSet<>(wish.accepts());
+        all.addAll(getChamber(chamberId).use().accepts());
+        return all;
     }
 
     /**

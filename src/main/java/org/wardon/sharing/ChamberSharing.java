@@ -4,12 +4,15 @@ import java.util.ArrayList;
 import java.util.HashMap;
 import java.util.List;
 import java.util.Map;
+import java.util.OptionalDouble;
+import java.util.Set;
 import org.wardon.air.Timeline;
 import org.wardon.keeping.Draw;
 import org.wardon.keeping.Fate;
 import org.wardon.keeping.Mechanism;
 import org.wardon.keeping.Outlook;
 import org.wardon.keeping.Spread;
+import org.wardon.produce.Conflict;
 import org.wardon.produce.Fact;
 import org.wardon.produce.Reason;
 import org.wardon.produce.Reason.Argument;
@@ -17,22 +20,26 @@ import org.wardon.produce.Reason.Argument;
 /** Judges the lots that really are in one chamber, by what its air does to them. */
 public final class ChamberSharing {
     private final List<Together> lots;
+    private final Set<Conflict> accepted;
     private final List<Reason> reasons = new ArrayList<>();
+    private final List<Price> borne = new ArrayList<>();
     private final Map<String, Verdict> each = new HashMap<>();
     private Verdict verdict = Verdict.GOOD;
 
-    private ChamberSharing(List<Together> lots) {
+    private ChamberSharing(List<Together> lots, Set<Conflict> accepted) {
         this.lots = lots;
+        this.accepted = accepted;
     }
 
     /**
      * Judges a chamber.
      *
      * @param lots the lots that are in it at some time of the run
+     * @param accepted conflicts its keeper accepts: told with what they cost, they refuse nothing
      * @return verdict and reasons; good for an empty chamber
      */
-    public static ChamberVerdict of(List<Together> lots) {
-        ChamberSharing sharing = new ChamberSharing(List.copyOf(lots));
+    public static ChamberVerdict of(List<Together> lots, Set<Conflict> accepted) {
+        ChamberSharing sharing = new ChamberSharing(List.copyOf(lots), Set.copyOf(accepted));
         Verdict all = Verdict.GOOD;
         for (Together lot : sharing.lots) {
             sharing.verdict = Verdict.GOOD;
@@ -42,7 +49,22 @@ public final class ChamberSharing {
             sharing.each.merge(lot.id(), sharing.verdict, Verdict::worse);
             all = all.worse(sharing.verdict);
         }
-        return new ChamberVerdict(all, sharing.reasons, sharing.each);
+        sharing.prices();
+        return new ChamberVerdict(all, sharing.reasons, sharing.borne, sharing.each);
+    }
+
+    /** Days that ethylene costs are told once; smell costs none, and is told already. */
+    private void prices() {
+        borne.stream()
+                .filter(price -> price.conflict() == Conflict.ETHYLENE)
+                .filter(price -> reasons.stream().noneMatch(one -> shortBy(price, one)))
+                .map(Price::told)
+                .toList()
+                .forEach(reasons::add);
+    }
+
+    private static boolean shortBy(Price price, Reason told) {
+        return told.code().equals("falls-short-accepted") && told.subjects().contains(price.id());
     }
 
     private static double marketEndS(Together lot) {
@@ -58,11 +80,7 @@ public final class ChamberSharing {
         if (sound >= 1 - Limits.GOOD_SHARE) {
             return;
         }
-        double[] days =
-                lot.fates().stream()
-                        .mapToDouble(fate -> fate.daysLeft(lot.span().storedS()))
-                        .toArray();
-        Spread spread = Spread.of(days);
+        Spread spread = spread(lot, List.of());
         double wanted = (marketEndS(lot) - lot.span().storedS()) / Timeline.DAY_S;
         double handbook =
                 lot.wish()
@@ -73,7 +91,16 @@ public final class ChamberSharing {
                         .map(life -> life.atLogShare(0.5))
                         .orElse(wanted);
         boolean nearly = handbook >= Limits.LEAST_OF_WANTED * wanted;
-        boolean enough = spread.p50() >= Limits.neededDays(handbook, wanted);
+        double needed = Limits.neededDays(handbook, wanted);
+        if (nearly && spread.p50() < needed && accepted.contains(Conflict.ETHYLENE)) {
+            Spread clean = spread(lot, lot.ethyleneDays());
+            if (clean.p50() >= needed) {
+                verdict = verdict.worse(Verdict.TOLERABLE);
+                reasons.add(shortByEthylene(lot, spread, clean, wanted));
+                return;
+            }
+        }
+        boolean enough = spread.p50() >= needed;
         verdict = verdict.worse(nearly && enough ? Verdict.TOLERABLE : Verdict.NO);
         reasons.add(
                 Reason.about(
@@ -83,6 +110,27 @@ public final class ChamberSharing {
                         Argument.of(spread.p10(), "day"),
                         Argument.of(wanted, "day"),
                         Argument.of(lot.felt().meanC(), "C")));
+    }
+
+    /** Days left, with more of them in each draw. */
+    private static Spread spread(Together lot, List<Double> more) {
+        double[] days = new double[lot.fates().size()];
+        for (int i = 0; i < days.length; i++) {
+            days[i] = lot.fates().get(i).daysLeft(lot.span().storedS());
+            days[i] += more.isEmpty() ? 0 : more.get(i);
+        }
+        return Spread.of(days);
+    }
+
+    /** It would last but for ethylene, which its keeper accepts. */
+    private static Reason shortByEthylene(Together lot, Spread here, Spread clean, double wanted) {
+        return Reason.about(
+                "falls-short-accepted",
+                lot.id(),
+                handbookSource(lot),
+                Argument.of(here.p50(), "day"),
+                Argument.of(wanted, "day"),
+                Argument.of(clean.p50(), "day"));
     }
 
     private void chilled(Together lot) {
@@ -108,7 +156,7 @@ public final class ChamberSharing {
     }
 
     private void company(Together lot) {
-        Conflicts conflicts = new Conflicts();
+        Conflicts conflicts = new Conflicts(accepted);
         conflicts.ethylene(
                 lot.wish(),
                 lot.model(),
@@ -120,10 +168,41 @@ public final class ChamberSharing {
             double days = other.daysWith(lot);
             if (!other.id().equals(lot.id()) && days > 0) {
                 conflicts.odour(other.wish(), lot.wish(), days);
+                smell(other, lot, days);
             }
         }
+        ethylene(lot);
         verdict = verdict.worse(conflicts.verdict());
         reasons.addAll(conflicts.reasons());
+    }
+
+    private void smell(Together giver, Together taker, double days) {
+        if (accepted.contains(Conflict.ODOUR)
+                && PairConflict.ofSmell(giver.wish(), taker.wish(), days)) {
+            borne.add(
+                    new Price(
+                            Conflict.ODOUR, taker.id(), giver.id(), OptionalDouble.empty(), days));
+        }
+    }
+
+    /** What the ethylene of others costs it, where that is accepted. */
+    private void ethylene(Together lot) {
+        double days = 0;
+        for (Together other : lots) {
+            if (!other.id().equals(lot.id()) && given(other) > 0) {
+                days = Math.max(days, other.daysWith(lot));
+            }
+        }
+        String from = strongestGiver(lot);
+        boolean asked = accepted.contains(Conflict.ETHYLENE) && !lot.ethyleneDays().isEmpty();
+        if (!asked || days == 0 || from.equals(lot.id())) {
+            return;
+        }
+        double lost =
+                Spread.of(lot.ethyleneDays().stream().mapToDouble(one -> one).toArray()).p50();
+        if (lost >= Price.LEAST_DAYS) {
+            borne.add(new Price(Conflict.ETHYLENE, lot.id(), from, OptionalDouble.of(lost), days));
+        }
     }
 
     /** Of all lots there with it, the one that gives off most ethylene; the lot itself at last. */

@@ -2,6 +2,8 @@ package org.wardon.sharing;
 
 import java.util.ArrayList;
 import java.util.List;
+import java.util.Map;
+import java.util.Objects;
 import java.util.Optional;
 import java.util.OptionalDouble;
 import java.util.Set;
@@ -22,6 +24,14 @@ import org.wardon.produce.rows.OdourPair;
 /** What two lots do to each other beside the setting: ethylene and smell. */
 final class Conflicts {
     private static final String ANY = "any";
+
+    /** What would refuse, by what it is called where its keeper accepts it. */
+    private static final Map<String, String> BORNE =
+            Map.of(
+                    "ethylene-shortens", "ethylene-shortens-accepted",
+                    "ethylene-starts-ripening", "ethylene-starts-ripening-accepted",
+                    "odour", "odour-accepted",
+                    "odour-of-all", "odour-of-all-accepted");
 
     private final Set<Conflict> accepted;
     private final List<Reason> reasons = new ArrayList<>();
@@ -47,7 +57,12 @@ final class Conflicts {
     private void say(Conflict conflict, Verdict at, Reason reason) {
         boolean borne = at == Verdict.NO && accepted.contains(conflict);
         verdict = verdict.worse(borne ? Verdict.TOLERABLE : at);
-        reasons.add(reason);
+        reasons.add(
+                borne ? named(reason, Objects.requireNonNull(BORNE.get(reason.code()))) : reason);
+    }
+
+    private static Reason named(Reason reason, String code) {
+        return new Reason(code, reason.subjects(), reason.arguments(), reason.sourceId());
     }
 
     /**

@@ -1,7 +1,10 @@
 package org.wardon.sharing;
 
+import java.util.List;
 import java.util.OptionalDouble;
 import org.wardon.produce.Conflict;
+import org.wardon.produce.Reason;
+import org.wardon.produce.Reason.Argument;
 
 /**
  * What a conflict that is accepted costs a lot.
@@ -13,4 +16,26 @@ import org.wardon.produce.Conflict;
  * @param days days together
  */
 public record Price(
-        Conflict conflict, String id, String from, OptionalDouble daysLost, double days) {}
+        Conflict conflict, String id, String from, OptionalDouble daysLost, double days) {
+    /** Days of life below this are not worth a word. */
+    static final double LEAST_DAYS = 0.05;
+
+    private static final String RULE = "assumption";
+
+    /**
+     * Returns it as a reason to be put into words.
+     *
+     * @return what is borne, from whom, at what price
+     */
+    public Reason told() {
+        List<String> subjects = List.of(id, from);
+        Argument together = Argument.of(days, "day");
+        return conflict == Conflict.ODOUR
+                ? new Reason("borne-odour", subjects, List.of(together), RULE)
+                : new Reason(
+                        "borne-ethylene",
+                        subjects,
+                        List.of(Argument.of(daysLost.orElse(0), "day"), together),
+                        RULE);
+    }
+}

@@ -18,8 +18,6 @@ import org.wardon.produce.Conflict;
  * together, and in clean air; of smell that it is borne.
  */
 final class Prices {
-    private static final double LEAST_DAYS = 0.05;
-
     private final Circumstances at;
     private final Map<String, Price> ethylene = new LinkedHashMap<>();
     private final List<Price> odours = new ArrayList<>();
@@ -72,7 +70,7 @@ final class Prices {
             double lost = lost(taker, spell.common(), new Levels(own, all), days);
             Price price =
                     new Price(Conflict.ETHYLENE, taker.id(), from, OptionalDouble.of(lost), days);
-            if (lost >= LEAST_DAYS) {
+            if (lost >= Price.LEAST_DAYS) {
                 ethylene.merge(taker.id(), price, Prices::dearer);
             }
         }

@@ -13,9 +13,17 @@ import org.wardon.keeping.KeepingModel;
  * @param massKg its mass, kg
  * @param span when it is there, and when in the store
  * @param felt what it went through while there
+ * @param ethyleneDays days of life that the ethylene there costs it, a draw each as {@code fates};
+ *     empty where nobody asked
  */
 public record Together(
-        Wish wish, KeepingModel model, List<Fate> fates, double massKg, Span span, Felt felt) {
+        Wish wish,
+        KeepingModel model,
+        List<Fate> fates,
+        double massKg,
+        Span span,
+        Felt felt,
+        List<Double> ethyleneDays) {
     /**
      * What a lot went through in a chamber.
      *
@@ -45,9 +53,10 @@ public record Together(
         }
     }
 
-    /** Copies the list. */
+    /** Copies the lists. */
     public Together {
         fates = List.copyOf(fates);
+        ethyleneDays = List.copyOf(ethyleneDays);
     }
 
     /** Days both are there, 0 where their stays do not meet. */

@@ -76,7 +76,7 @@ class SharingTest {
         SharingAnswer day = share(accepting, 1, "apple", "broccoli");
         SharingAnswer two = share(both, 2, "apple", "broccoli");
         assertEquals(Verdict.TOLERABLE, two.verdict());
-        reason(two.pairs().get(0), "ethylene-shortens");
+        reason(two.pairs().get(0), "ethylene-shortens-accepted");
         Price price = two.prices().get(0);
         assertEquals("broccoli", price.id());
         assertEquals("apple", price.from());
@@ -217,7 +217,13 @@ class SharingTest {
         List<Fate> fates = DRAWS.stream().map(draw -> model.follow(history, draw)).toList();
         Together.Span span = Together.Span.only(0, 7 * DAY_S);
         return new Together(
-                Wish.of(model.lot(), 7), model, fates, 500, span, new Together.Felt(atC, atC, ppm));
+                Wish.of(model.lot(), 7),
+                model,
+                fates,
+                500,
+                span,
+                new Together.Felt(atC, atC, ppm),
+                List.of());
     }
 
     @Test
@@ -226,7 +232,8 @@ class SharingTest {
                 ChamberSharing.of(
                         List.of(
                                 together("banana-green", 5, 0.9, 0.01),
-                                together("lettuce-crisphead", 5, 0.99, 0.01)));
+                                together("lettuce-crisphead", 5, 0.99, 0.01)),
+                        Set.of());
         assertEquals(Verdict.NO, cold.verdict());
         assertTrue(
                 cold.reasons().stream()
@@ -234,9 +241,38 @@ class SharingTest {
                                 r ->
                                         r.code().equals("chilling-risk")
                                                 && r.subjects().contains("banana-green")));
-        ChamberVerdict apart = ChamberSharing.of(List.of(together("broccoli", 0, 0.98, 0.01)));
+        ChamberVerdict apart =
+                ChamberSharing.of(List.of(together("broccoli", 0, 0.98, 0.01)), Set.of());
         assertEquals(Verdict.GOOD, apart.verdict(), apart.toString());
-        ChamberVerdict foul = ChamberSharing.of(List.of(together("broccoli", 0, 0.98, 5)));
+        ChamberVerdict foul =
+                ChamberSharing.of(List.of(together("broccoli", 0, 0.98, 5)), Set.of());
         assertEquals(Verdict.NO, foul.verdict());
+    }
+
+    @Test
+    void inAChamberToo() {
+        Together apples = together("apple", 0, 0.95, 3);
+        Together sprouts = together("broccoli", 0, 0.98, 3);
+        List<Double> clean = sprouts.fates().stream().map(fate -> 15.0).toList();
+        Together judged =
+                new Together(
+                        sprouts.wish(),
+                        sprouts.model(),
+                        sprouts.fates(),
+                        sprouts.massKg(),
+                        sprouts.span(),
+                        sprouts.felt(),
+                        clean);
+        List<Together> both = List.of(apples, judged);
+        ChamberVerdict strict = ChamberSharing.of(both, Set.of());
+        ChamberVerdict borne = ChamberSharing.of(both, Set.of(Conflict.ETHYLENE));
+        assertEquals(Verdict.NO, strict.each().get("broccoli"));
+        assertEquals(Verdict.TOLERABLE, borne.each().get("broccoli"));
+        assertEquals(List.of(), strict.borne());
+        assertEquals("apple", borne.borne().get(0).from());
+        assertEquals(15, borne.borne().get(0).daysLost().orElseThrow(), 1e-9);
+        assertTrue(
+                borne.reasons().stream()
+                        .anyMatch(one -> one.code().equals("ethylene-shortens-accepted")));
     }
 }

@@ -5,20 +5,16 @@ import java.util.EnumSet;
 import java.util.List;
 import java.util.Optional;
 import java.util.Set;
-import java.util.stream.Collectors;
 import org.wardon.advice.wording.Words;
 import org.wardon.errors.BadInput;
 import org.wardon.errors.Fault;
 import org.wardon.files.forecast.ShareAnswer;
+import org.wardon.files.json.Nearest;
 import org.wardon.produce.Conflict;
-import org.wardon.produce.Reason;
-import org.wardon.produce.Reason.Argument;
 import org.wardon.sharing.Price;
 
 /** Conflicts a keeper accepts, and what is told of them. */
 public final class Borne {
-    private static final String RULE = "assumption";
-
     /** What lots do to each other; that one is not cured is between it and the cold. */
     private static final List<Conflict> OF_LOTS = List.of(Conflict.ETHYLENE, Conflict.ODOUR);
 
@@ -48,7 +44,9 @@ public final class Borne {
                                             option,
                                             "",
                                             "'" + word + "' is no conflict of lots",
-                                            "accepted: " + all())));
+                                            Nearest.question(word.strip(), all())
+                                                    + "accepted: "
+                                                    + String.join(", ", all()))));
         }
         if (!faults.isEmpty()) {
             throw new BadInput(faults);
@@ -56,20 +54,8 @@ public final class Borne {
         return accepted;
     }
 
-    private static String all() {
-        return OF_LOTS.stream().map(Conflict::word).collect(Collectors.joining(", "));
-    }
-
-    static Reason told(Price price) {
-        List<String> subjects = List.of(price.id(), price.from());
-        Argument days = Argument.of(price.days(), "day");
-        return price.conflict() == Conflict.ODOUR
-                ? new Reason("borne-odour", subjects, List.of(days), RULE)
-                : new Reason(
-                        "borne-ethylene",
-                        subjects,
-                        List.of(Argument.of(price.daysLost().orElse(0), "day"), days),
-                        RULE);
+    private static List<String> all() {
+        return OF_LOTS.stream().map(Conflict::word).toList();
     }
 
     static ShareAnswer.Accepted answer(Price price, Words words) {
@@ -78,6 +64,6 @@ public final class Borne {
                 price.id(),
                 price.from(),
                 price.daysLost(),
-                words.sentence(told(price)));
+                words.sentence(price.told()));
     }
 }

@@ -22,6 +22,7 @@ import org.wardon.produce.Conflict;
 import org.wardon.reference.ReferenceBook;
 import org.wardon.sharing.Circumstances;
 import org.wardon.sharing.PairVerdict;
+import org.wardon.sharing.Price;
 import org.wardon.sharing.Sharing;
 import org.wardon.sharing.SharingAnswer;
 import org.wardon.sharing.Stretch;
@@ -206,7 +207,7 @@ public final class GroupSharing {
                         .map(GroupSharing::pair)
                         .toList(),
                 Dated.told(found.spells(), trial.plan().timeline()),
-                found.prices().stream().map(Borne::told).toList(),
+                found.prices().stream().map(Price::told).toList(),
                 found.reasons(),
                 found.compromise()
                         .map(

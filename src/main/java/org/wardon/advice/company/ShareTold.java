@@ -51,7 +51,7 @@ final class ShareTold {
                         found.prices().stream().map(one -> Borne.answer(one, words)).toList());
         List<Reason> notes = new ArrayList<>();
         timeline.ifPresent(at -> notes.addAll(Dated.told(found.spells(), at)));
-        found.prices().forEach(one -> notes.add(Borne.told(one)));
+        found.prices().forEach(one -> notes.add(one.told()));
         notes.addAll(found.reasons());
         return new ShareReport(answer, notes);
     }

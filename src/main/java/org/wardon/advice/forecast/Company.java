@@ -2,21 +2,26 @@ package org.wardon.advice.forecast;
 
 import java.util.ArrayList;
 import java.util.List;
+import java.util.Optional;
 import java.util.OptionalDouble;
 import java.util.Set;
 import org.wardon.advice.wording.Words;
 import org.wardon.air.Timeline;
 import org.wardon.files.forecast.Because;
 import org.wardon.files.forecast.Forecast;
+import org.wardon.files.forecast.ShareAnswer;
 import org.wardon.keeping.ChamberEthylene;
 import org.wardon.keeping.Draw;
 import org.wardon.keeping.Draws;
+import org.wardon.keeping.Fate;
 import org.wardon.lots.LotHistory;
 import org.wardon.plan.ChamberPlan;
+import org.wardon.produce.Conflict;
 import org.wardon.produce.Reason;
 import org.wardon.sharing.ChamberSharing;
 import org.wardon.sharing.ChamberVerdict;
 import org.wardon.sharing.PairVerdict;
+import org.wardon.sharing.Price;
 import org.wardon.sharing.Sharing;
 import org.wardon.sharing.Together;
 import org.wardon.sharing.Wish;
@@ -59,14 +64,31 @@ final class Company {
         List<Because> reasons = new ArrayList<>();
         apart(visits).forEach(reason -> reasons.add(because(reason)));
         found.reasons().forEach(reason -> reasons.add(because(reason)));
-        return new Forecast.Sharing(chamber.id(), found.verdict().word(), reasons);
+        return new Forecast.Sharing(
+                chamber.id(),
+                found.verdict().word(),
+                reasons,
+                found.borne().stream().map(this::accepted).toList());
+    }
+
+    private ShareAnswer.Accepted accepted(Price price) {
+        return new ShareAnswer.Accepted(
+                price.conflict().word(),
+                price.id(),
+                price.from(),
+                price.daysLost(),
+                words.sentence(price.told()));
     }
 
     /** What the air of a chamber, as it was worked out, does to visits there. */
     static ChamberVerdict together(StoreOutcome outcome, String chamberId, List<Visit> visits) {
-        ChamberEthylene level = outcome.ethylene(chamberId);
+        Set<Conflict> accepted = outcome.model().plan().accepts(chamberId);
+        Optional<Fates> asked =
+                accepted.contains(Conflict.ETHYLENE)
+                        ? Optional.of(new Fates(outcome.model()))
+                        : Optional.empty();
         return ChamberSharing.of(
-                visits.stream().map(visit -> together(outcome, visit, level)).toList());
+                visits.stream().map(visit -> together(outcome, visit, asked)).toList(), accepted);
     }
 
     /** Why pairs that no setting suits do not go together; those that meet, where lots move. */
@@ -104,20 +126,25 @@ final class Company {
         return false;
     }
 
-    private static Together together(StoreOutcome outcome, Visit visit, ChamberEthylene level) {
+    private static Together together(StoreOutcome outcome, Visit visit, Optional<Fates> asked) {
         LotSheet sheet = visit.sheet();
-        LotHistory history = visit.within(outcome.history(visit.id()));
+        LotHistory whole = outcome.history(visit.id());
+        LotHistory history = visit.within(whole);
+        ChamberEthylene level = outcome.ethylene(visit.chamber());
+        List<Fate> sold = outcome.fates(sheet.id()).sold();
+        List<Draw> draws = sold.stream().map(Fate::draw).toList();
         return new Together(
                 wish(visit),
                 sheet.model(),
-                outcome.fates(sheet.id()).sold(),
+                sold,
                 sheet.plan().massKg(),
                 new Together.Span(
                         visit.hereFromS(),
                         visit.leavesS(),
                         sheet.clock().hereFromS(),
                         sheet.clock().leavesS()),
-                felt(history, level, Math.min(visit.leavesS(), outcome.horizonS())));
+                felt(history, level, Math.min(visit.leavesS(), outcome.horizonS())),
+                asked.map(fates -> fates.lostToEthylene(visit, whole, draws)).orElse(List.of()));
     }
 
     private static Together.Felt felt(LotHistory history, ChamberEthylene level, double untilS) {

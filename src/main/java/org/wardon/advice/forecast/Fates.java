@@ -148,6 +148,26 @@ final class Fates {
         return ethyleneDays(sheet, clean(history)) - ethyleneDays(sheet, history);
     }
 
+    /** Days that the ethylene of a chamber costs a lot that leaves as planned, a draw each. */
+    List<Double> lostToEthylene(Visit visit, LotHistory history, List<Draw> draws) {
+        LotSheet sheet = visit.sheet();
+        double[] ppm = new double[history.size()];
+        for (int i = 0; i < ppm.length; i++) {
+            boolean here =
+                    history.timeS(i) >= visit.hereFromS() && history.timeS(i) <= visit.leavesS();
+            ppm[i] = here ? around.outdoorPpm() : history.ethylenePpm(i);
+        }
+        LotHistory clean = history.withEthylene(ppm);
+        double fromS = sheet.clock().hereFromS();
+        return draws.stream()
+                .map(
+                        draw ->
+                                inside(sheet, clean, draw).sold().daysLeft(fromS)
+                                        - inside(sheet, history, draw).sold().daysLeft(fromS))
+                .map(lost -> Math.max(0, lost))
+                .toList();
+    }
+
     private double ethyleneDays(LotSheet sheet, LotHistory history) {
         return sheet.model()
                 .follow(history, Draw.MEDIAN, beyond(sheet, history))

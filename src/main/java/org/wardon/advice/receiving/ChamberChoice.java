@@ -17,6 +17,7 @@ import org.wardon.heat.Hours;
 import org.wardon.keeping.Outlook;
 import org.wardon.plan.Defaults;
 import org.wardon.produce.Caution;
+import org.wardon.produce.Conflict;
 import org.wardon.produce.Reason;
 import org.wardon.produce.Reason.Argument;
 import org.wardon.sharing.Verdict;
@@ -163,10 +164,12 @@ final class ChamberChoice {
                         .average()
                         .orElse(before.chamber().setting().temperatureC());
         if (airC < cured.getAsDouble() - COLDER_THAN_CURING_K) {
+            boolean borne =
+                    question.plan().accepts(before.chamber().id()).contains(Conflict.UNCURED);
             say(
-                    Verdict.NO,
+                    borne ? Verdict.TOLERABLE : Verdict.NO,
                     Reason.about(
-                            "uncured-in-cold",
+                            borne ? "uncured-in-cold-accepted" : "uncured-in-cold",
                             lot,
                             RULE,
                             Argument.of(airC, "C"),

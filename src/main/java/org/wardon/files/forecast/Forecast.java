@@ -49,11 +49,17 @@ public record Forecast(
      * @param chamber its id
      * @param verdict {@code good}, {@code tolerable} or {@code no}
      * @param reasons why
+     * @param accepted what conflicts cost that the keeper accepts, told among the reasons too
      */
-    public record Sharing(String chamber, String verdict, List<Because> reasons) {
-        /** Copies the list. */
+    public record Sharing(
+            String chamber,
+            String verdict,
+            List<Because> reasons,
+            List<ShareAnswer.Accepted> accepted) {
+        /** Copies the lists. */
         public Sharing {
             reasons = List.copyOf(reasons);
+            accepted = List.copyOf(accepted);
         }
     }
 

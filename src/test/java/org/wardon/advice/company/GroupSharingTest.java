@@ -120,9 +120,12 @@ class GroupSharingTest {
     void whatIsNoConflictOfLotsIsRefusedByName() {
         BadInput bad =
                 assertThrows(
-                        BadInput.class, () -> Borne.named("--accept", List.of("smell", "odour")));
+                        BadInput.class,
+                        () -> Borne.named("--accept", List.of("ethylen", "smell", "odour")));
         assertEquals(
-                "--accept: 'smell' is no conflict of lots; accepted: ethylene, odour",
+                "--accept: 'ethylen' is no conflict of lots; did you mean 'ethylene'? accepted:"
+                        + " ethylene, odour\n"
+                        + "--accept: 'smell' is no conflict of lots; accepted: ethylene, odour",
                 bad.getMessage());
     }
 

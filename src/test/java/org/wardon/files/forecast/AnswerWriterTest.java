@@ -77,7 +77,7 @@ class AnswerWriterTest {
         assertNames("mean min max atEnd", lot.get("temperatureC"));
         assertNames("p10 p50 p90", lot.get("daysLeft"));
         assertNames("probability safeDays", lot.get("chillingRisk"));
-        assertNames("chamber verdict reasons", json.get("sharing").get(0));
+        assertNames("chamber verdict reasons accepted", json.get("sharing").get(0));
         assertNames("code lots text source", json.get("sharing").get(0).get("reasons").get(0));
         assertNames("code level subject text source", json.get("warnings").get(0));
         assertNames("order text subject gainDays gainValue", json.get("actions").get(0));
@@ -267,7 +267,8 @@ class AnswerWriterTest {
                         new Forecast.Sharing(
                                 "north",
                                 "good",
-                                List.of(new Because("c", List.of("M1"), "t", "s")))),
+                                List.of(new Because("c", List.of("M1"), "t", "s")),
+                                List.of())),
                 List.of(new Forecast.Warning("c", "note", "M1", "t", "s")),
                 List.of(
                         new Forecast.Action(
