@@ -14,7 +14,7 @@ record Accuracy(double lotK, double airK, Integrator.Steps steps) {
     /**
      * Lots within 0.005 K and air within 0.05 K of a tight run at the end of any step (measured).
      */
-    static final Accuracy USUAL = new Accuracy(1e-2, 1e-1);
+    static final Accuracy USUAL = new Accuracy(1e-2, 0.13);
 
     /** For a run without pulses, whose steps are long: as exact, humidity too (measured). */
     static final Accuracy EVEN = new Accuracy(5e-3, 5e-2, Integrator.Steps.LONG);

@@ -257,9 +257,9 @@ final class ChamberRunner implements Integrator.StepListener {
                 continue;
             }
             lots[i].stepped(to, state, totals);
-            double warm = network.lot(i).warmestC(state);
-            if (!(warm > COLDEST_C && warm < WARMEST_C)) {
-                stop(to, "lot " + run.stays().get(i).lot().id(), warm);
+            if (!network.lot(i).within(COLDEST_C, WARMEST_C, state)) {
+                String lot = "lot " + run.stays().get(i).lot().id();
+                stop(to, lot, network.lot(i).warmestC(state));
             }
         }
         double exchanged = terms.exchanged(totals);

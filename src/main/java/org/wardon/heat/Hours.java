@@ -1,6 +1,5 @@
 package org.wardon.heat;
 
-import java.util.Arrays;
 import java.util.EnumMap;
 import java.util.Map;
 import java.util.Objects;
@@ -43,13 +42,11 @@ public final class Hours {
         BATTERY
     }
 
+    /** Takes over what was recorded; the arrays may have room behind the last row. */
     Hours(Map<Column, double[]> columns, double[][] ran, int rows) {
         this.rows = rows;
-        this.ran = new double[ran.length][];
-        for (int k = 0; k < ran.length; k++) {
-            this.ran[k] = Arrays.copyOf(ran[k], rows);
-        }
-        columns.forEach((column, values) -> this.columns.put(column, Arrays.copyOf(values, rows)));
+        this.ran = ran;
+        this.columns.putAll(columns);
     }
 
     private double get(Column column, int i) {

@@ -1,10 +1,7 @@
 package org.wardon.heat;
 
 import java.util.Arrays;
-import java.util.EnumMap;
 import java.util.List;
-import java.util.Map;
-import java.util.Objects;
 import java.util.Optional;
 import org.wardon.errors.Require;
 import org.wardon.lots.LotHistory;
@@ -14,36 +11,32 @@ public final class LotCourse {
     private final Stay stay;
     private final LotHistory history;
 
-    /** {@code [row]}, perhaps with room behind the last row. */
-    private final Map<Column, double[]> rows = new EnumMap<>(Column.class);
-
-    private final int size;
+    private final Rows rows;
     private final LotTotals totals;
     private final Optional<LotState> carriedOut;
 
-    /** Columns of the hourly series. */
-    enum Column {
-        AT_S,
-        MEAN_C,
-        SURFACE_C,
-        CORE_C,
-        RESPIRATION_W,
-        MASS_KG
-    }
+    /**
+     * The hourly series, which stands in the history too but for two columns; arrays may have room
+     * behind the last row.
+     *
+     * @param size rows
+     * @param sample {@code [row]}, number of its sample of the history
+     * @param coreC {@code [row]}, innermost shell, °C
+     * @param respirationW {@code [row]}, W
+     */
+    record Rows(int size, int[] sample, double[] coreC, double[] respirationW) {}
 
     LotCourse(
             Stay stay,
             LotHistory history,
-            Map<Column, double[]> rows,
-            int size,
+            Rows rows,
             LotTotals totals,
             Optional<LotState> carriedOut) {
         this.stay = stay;
         this.history = history;
+        this.rows = rows;
         this.totals = totals;
-        this.size = size;
         this.carriedOut = carriedOut;
-        this.rows.putAll(rows);
     }
 
     /**
@@ -62,18 +55,24 @@ public final class LotCourse {
     }
 
     private LotCourse then(LotCourse next) {
-        double last = size > 0 ? atS(size - 1) : Double.NEGATIVE_INFINITY;
+        double last = history.timeS(history.size() - 1);
+        int first = 0;
+        while (first < next.history.size() && next.history.timeS(first) <= last) {
+            first++;
+        }
         int skip = 0;
-        while (skip < next.size && next.atS(skip) <= last) {
+        while (skip < next.size() && next.rows.sample[skip] < first) {
             skip++;
         }
-        int more = next.size - skip;
-        Map<Column, double[]> both = new EnumMap<>(Column.class);
-        for (Column column : Column.values()) {
-            double[] values = Arrays.copyOf(Objects.requireNonNull(rows.get(column)), size + more);
-            double[] behind = Objects.requireNonNull(next.rows.get(column));
-            System.arraycopy(behind, skip, values, size, more);
-            both.put(column, values);
+        int size = size() + next.size() - skip;
+        int[] sample = Arrays.copyOf(rows.sample, size);
+        double[] core = Arrays.copyOf(rows.coreC, size);
+        double[] respiration = Arrays.copyOf(rows.respirationW, size);
+        for (int i = size(); i < size; i++) {
+            int from = i - size() + skip;
+            sample[i] = next.rows.sample[from] - first + history.size();
+            core[i] = next.rows.coreC[from];
+            respiration[i] = next.rows.respirationW[from];
         }
         Stay whole =
                 new Stay(
@@ -86,8 +85,7 @@ public final class LotCourse {
         return new LotCourse(
                 whole,
                 history.then(next.history),
-                both,
-                size + more,
+                new Rows(size, sample, core, respiration),
                 totals.and(next.totals),
                 next.carriedOut);
     }
@@ -135,11 +133,7 @@ public final class LotCourse {
      * @return 0 where the lot arrives after the run
      */
     public int size() {
-        return size;
-    }
-
-    private double get(Column column, int i) {
-        return Objects.requireNonNull(rows.get(column))[i];
+        return rows.size;
     }
 
     /**
@@ -149,7 +143,7 @@ public final class LotCourse {
      * @return s since the start of the run
      */
     public double atS(int i) {
-        return get(Column.AT_S, i);
+        return history.timeS(rows.sample[i]);
     }
 
     /**
@@ -159,7 +153,7 @@ public final class LotCourse {
      * @return °C
      */
     public double meanC(int i) {
-        return get(Column.MEAN_C, i);
+        return history.meanC(rows.sample[i]);
     }
 
     /**
@@ -169,7 +163,7 @@ public final class LotCourse {
      * @return °C
      */
     public double surfaceC(int i) {
-        return get(Column.SURFACE_C, i);
+        return history.surfaceC(rows.sample[i]);
     }
 
     /**
@@ -179,7 +173,7 @@ public final class LotCourse {
      * @return °C
      */
     public double coreC(int i) {
-        return get(Column.CORE_C, i);
+        return rows.coreC[i];
     }
 
     /**
@@ -189,7 +183,7 @@ public final class LotCourse {
      * @return W
      */
     public double respirationW(int i) {
-        return get(Column.RESPIRATION_W, i);
+        return rows.respirationW[i];
     }
 
     /**
@@ -199,6 +193,6 @@ public final class LotCourse {
      * @return kg
      */
     public double massKg(int i) {
-        return get(Column.MASS_KG, i);
+        return history.massKg(rows.sample[i]);
     }
 }

@@ -1,10 +1,7 @@
 package org.wardon.heat;
 
 import java.util.ArrayList;
-import java.util.EnumMap;
 import java.util.List;
-import java.util.Map;
-import java.util.Objects;
 import java.util.Optional;
 import org.wardon.heat.network.LotPart;
 import org.wardon.lots.BurntSugar;
@@ -29,7 +26,9 @@ final class LotRecorder {
     private final Stay stay;
     private final LotPart lot;
     private final LotHistory.Builder history;
-    private final Map<LotCourse.Column, double[]> rows = new EnumMap<>(LotCourse.Column.class);
+    private final int[] sampleOfRow;
+    private final double[] coreC;
+    private final double[] respirationW;
     private double lastRowS = Double.NEGATIVE_INFINITY;
     private int size;
     private double lastSampleS = Double.NEGATIVE_INFINITY;
@@ -56,9 +55,9 @@ final class LotRecorder {
         this.history =
                 new LotHistory.Builder(
                         mostRows + (longSteps ? CLOSER_SAMPLES_OF_LONG_STEPS : CLOSER_SAMPLES));
-        for (LotCourse.Column column : LotCourse.Column.values()) {
-            rows.put(column, new double[mostRows]);
-        }
+        sampleOfRow = new int[mostRows];
+        coreC = new double[mostRows];
+        respirationW = new double[mostRows];
     }
 
     boolean present() {
@@ -158,23 +157,16 @@ final class LotRecorder {
         if (arrivedS == Double.POSITIVE_INFINITY || carriedOut.isPresent()) {
             return;
         }
-        if (t > lastRowS) {
-            set(LotCourse.Column.AT_S, t);
-            set(LotCourse.Column.MEAN_C, lot.meanC(y));
-            set(LotCourse.Column.SURFACE_C, lot.surfaceC(y));
-            set(LotCourse.Column.CORE_C, lot.coreC(y));
-            set(LotCourse.Column.RESPIRATION_W, lot.respirationW(y));
-            set(LotCourse.Column.MASS_KG, massKg(y, integrals));
-            lastRowS = t;
-            size++;
-        }
         if (t > lastSampleS) {
             sample(t, y, integrals);
         }
-    }
-
-    private void set(LotCourse.Column column, double value) {
-        Objects.requireNonNull(rows.get(column))[size] = value;
+        if (t > lastRowS) {
+            sampleOfRow[size] = history.size() - 1;
+            coreC[size] = lot.coreC(y);
+            respirationW[size] = lot.respirationW(y);
+            lastRowS = t;
+            size++;
+        }
     }
 
     private void sample(double t, double[] y, double[] integrals) {
@@ -203,6 +195,7 @@ final class LotRecorder {
     }
 
     LotCourse course() {
-        return new LotCourse(stay, history.build(), rows, size, totals, carriedOut);
+        LotCourse.Rows rows = new LotCourse.Rows(size, sampleOfRow, coreC, respirationW);
+        return new LotCourse(stay, history.build(), rows, totals, carriedOut);
     }
 }

@@ -16,7 +16,10 @@ public final class LotHistory {
     private final double[] surfaceC;
     private final double[] coldestC;
     private final double[] humidity;
+
+    /** Empty where there was none in any sample. */
     private final double[] ethylenePpm;
+
     private final boolean[] wet;
     private final Optional<double[]> massKg;
 
@@ -137,7 +140,7 @@ public final class LotHistory {
      * @return µL/L
      */
     public double ethylenePpm(int i) {
-        return ethylenePpm[i];
+        return ethylenePpm.length == 0 ? 0 : ethylenePpm[i];
     }
 
     /**
@@ -216,7 +219,7 @@ public final class LotHistory {
                         h.surfaceC[i],
                         h.coldestC[i],
                         h.humidity[i],
-                        h.ethylenePpm[i],
+                        h.ethylenePpm(i),
                         h.wet[i]);
                 if (h.massKg.isPresent()) {
                     b.mass(h.massKg.get()[i]);
@@ -232,7 +235,7 @@ public final class LotHistory {
         private double[] surfaceC;
         private double[] coldestC;
         private double[] humidity;
-        private double[] ethylenePpm;
+        private double[] ethylenePpm = {};
         private double[] massKg;
         private boolean[] wet;
         private boolean massKnown;
@@ -255,7 +258,6 @@ public final class LotHistory {
             surfaceC = new double[samples];
             coldestC = new double[samples];
             humidity = new double[samples];
-            ethylenePpm = new double[samples];
             massKg = new double[samples];
             wet = new boolean[samples];
         }
@@ -292,7 +294,7 @@ public final class LotHistory {
             surfaceC[size] = surface;
             coldestC[size] = coldest;
             humidity[size] = humidityFraction;
-            ethylenePpm[size] = ethylene;
+            gas(ethylene);
             wet[size] = isWet;
             size++;
             return this;
@@ -312,6 +314,15 @@ public final class LotHistory {
         }
 
         /**
+         * Returns how many samples were added.
+         *
+         * @return 0 or more
+         */
+        public int size() {
+            return size;
+        }
+
+        /**
          * Returns the history; this takes no more samples then.
          *
          * @return the history, of at least 2 samples
@@ -322,6 +333,16 @@ public final class LotHistory {
             return new LotHistory(this);
         }
 
+        /** Most histories are written without ethylene, which is worked out behind them. */
+        private void gas(double ppm) {
+            if (ppm != 0 && ethylenePpm.length == 0) {
+                ethylenePpm = new double[timeS.length];
+            }
+            if (ethylenePpm.length > 0) {
+                ethylenePpm[size] = ppm;
+            }
+        }
+
         private void grow() {
             int n = 2 * size;
             timeS = Arrays.copyOf(timeS, n);
@@ -329,7 +350,7 @@ public final class LotHistory {
             surfaceC = Arrays.copyOf(surfaceC, n);
             coldestC = Arrays.copyOf(coldestC, n);
             humidity = Arrays.copyOf(humidity, n);
-            ethylenePpm = Arrays.copyOf(ethylenePpm, n);
+            ethylenePpm = ethylenePpm.length == 0 ? ethylenePpm : Arrays.copyOf(ethylenePpm, n);
             massKg = Arrays.copyOf(massKg, n);
             wet = Arrays.copyOf(wet, n);
         }

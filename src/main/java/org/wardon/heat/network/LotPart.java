@@ -323,6 +323,25 @@ public final class LotPart {
     }
 
     /**
+     * Returns whether all shells are within limits; asked at every step, as {@link #warmestC} is
+     * not.
+     *
+     * @param lowC coldest allowed, °C
+     * @param highC warmest allowed, °C
+     * @param y state
+     * @return false where one is beyond them or no number
+     */
+    public boolean within(double lowC, double highC, double[] y) {
+        for (int k = 0; k < LotBank.SHELLS; k++) {
+            double t = y[at(k)];
+            if (!(t > lowC && t < highC)) {
+                return false;
+            }
+        }
+        return true;
+    }
+
+    /**
      * Returns a shell.
      *
      * @param k number of the shell, 0 in the middle

@@ -8,7 +8,7 @@ public final class Integrator {
     private static final double SAFETY = 0.85;
 
     /** The same for a step that is tried again behind the next edge of its kind. */
-    private static final double CAREFUL = 0.9;
+    private static final double CAREFUL = 0.85;
 
     /** A remembered step grows by no more than this from one time to the next. */
     private static final double MORE = 4;
@@ -28,6 +28,13 @@ public final class Integrator {
     private static final double STEEPEST = 0.05;
 
     private static final double SHORTEST = 0.15;
+
+    /**
+     * Where a shorter step has more than this share of the error, a fast mode beside long steps
+     * keeps it up.
+     */
+    private static final double HELD_UP = 0.95;
+
     private static final double LONGEST = 6;
 
     /** Rather than two halves, a step this much longer than wanted: its error is still below 1. */
@@ -37,6 +44,7 @@ public final class Integrator {
 
     private final TreeSystem system;
     private final Rosenbrock method;
+    private final boolean longSteps;
     private final double[] totals;
     private final double shortestStep;
     private double nextStep;
@@ -76,7 +84,8 @@ public final class Integrator {
     public Integrator(
             TreeSystem system, Steps steps, int edges, double firstStep, double shortestStep) {
         this.system = system;
-        this.method = steps == Steps.LONG ? new StifflyAccurate(system) : new FourthOrder(system);
+        this.longSteps = steps == Steps.LONG;
+        this.method = longSteps ? new StifflyAccurate(system) : new FourthOrder(system);
         this.totals = new double[system.flows()];
         this.learned = new double[edges][REMEMBERED];
         for (double[] known : learned) {
@@ -177,6 +186,7 @@ public final class Integrator {
     private double acceptableStep(double now, double[] y, double left) {
         double h = fit(nextStep, left);
         boolean refused = false;
+        double errorBefore = Double.POSITIVE_INFINITY;
         while (true) {
             double error = method.tryStep(now, y, h);
             boolean possible = system.possible(method.end);
@@ -186,7 +196,9 @@ public final class Integrator {
             }
             rejected++;
             refused = true;
-            double factor = error < 1e12 ? SAFETY / method.root(error) : SHORTEST;
+            boolean heldUp = longSteps && error > HELD_UP * errorBefore;
+            double factor = error < 1e12 && !heldUp ? SAFETY / method.root(error) : SHORTEST;
+            errorBefore = error;
             h *= Math.max(SHORTEST, Math.min(factor, possible ? 0.8 : 0.4));
             if (!(h > shortestStep)) {
                 throw new StepTooShort(now, h, method.worstNode);
