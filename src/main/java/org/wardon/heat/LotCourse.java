@@ -1,6 +1,5 @@
 package org.wardon.heat;
 
-import java.util.Arrays;
 import java.util.List;
 import java.util.Optional;
 import org.wardon.errors.Require;
@@ -11,25 +10,14 @@ public final class LotCourse {
     private final Stay stay;
     private final LotHistory history;
 
-    private final Rows rows;
+    private final LotRows rows;
     private final LotTotals totals;
     private final Optional<LotState> carriedOut;
-
-    /**
-     * The hourly series, which stands in the history too but for two columns; arrays may have room
-     * behind the last row.
-     *
-     * @param size rows
-     * @param sample {@code [row]}, number of its sample of the history
-     * @param coreC {@code [row]}, innermost shell, °C
-     * @param respirationW {@code [row]}, W
-     */
-    record Rows(int size, int[] sample, double[] coreC, double[] respirationW) {}
 
     LotCourse(
             Stay stay,
             LotHistory history,
-            Rows rows,
+            LotRows rows,
             LotTotals totals,
             Optional<LotState> carriedOut) {
         this.stay = stay;
@@ -60,20 +48,6 @@ public final class LotCourse {
         while (first < next.history.size() && next.history.timeS(first) <= last) {
             first++;
         }
-        int skip = 0;
-        while (skip < next.size() && next.rows.sample[skip] < first) {
-            skip++;
-        }
-        int size = size() + next.size() - skip;
-        int[] sample = Arrays.copyOf(rows.sample, size);
-        double[] core = Arrays.copyOf(rows.coreC, size);
-        double[] respiration = Arrays.copyOf(rows.respirationW, size);
-        for (int i = size(); i < size; i++) {
-            int from = i - size() + skip;
-            sample[i] = next.rows.sample[from] - first + history.size();
-            core[i] = next.rows.coreC[from];
-            respiration[i] = next.rows.respirationW[from];
-        }
         Stay whole =
                 new Stay(
                         stay.lot(),
@@ -85,7 +59,7 @@ public final class LotCourse {
         return new LotCourse(
                 whole,
                 history.then(next.history),
-                new Rows(size, sample, core, respiration),
+                rows.then(next.rows, first, history.size()),
                 totals.and(next.totals),
                 next.carriedOut);
     }
@@ -133,7 +107,7 @@ public final class LotCourse {
      * @return 0 where the lot arrives after the run
      */
     public int size() {
-        return rows.size;
+        return rows.size();
     }
 
     /**
@@ -143,7 +117,7 @@ public final class LotCourse {
      * @return s since the start of the run
      */
     public double atS(int i) {
-        return history.timeS(rows.sample[i]);
+        return history.timeS(rows.sample(i));
     }
 
     /**
@@ -153,7 +127,7 @@ public final class LotCourse {
      * @return °C
      */
     public double meanC(int i) {
-        return history.meanC(rows.sample[i]);
+        return history.meanC(rows.sample(i));
     }
 
     /**
@@ -163,7 +137,7 @@ public final class LotCourse {
      * @return °C
      */
     public double surfaceC(int i) {
-        return history.surfaceC(rows.sample[i]);
+        return history.surfaceC(rows.sample(i));
     }
 
     /**
@@ -173,7 +147,7 @@ public final class LotCourse {
      * @return °C
      */
     public double coreC(int i) {
-        return rows.coreC[i];
+        return rows.coreC(i);
     }
 
     /**
@@ -183,7 +157,7 @@ public final class LotCourse {
      * @return W
      */
     public double respirationW(int i) {
-        return rows.respirationW[i];
+        return rows.respirationW(i);
     }
 
     /**
@@ -193,6 +167,6 @@ public final class LotCourse {
      * @return kg
      */
     public double massKg(int i) {
-        return history.massKg(rows.sample[i]);
+        return history.massKg(rows.sample(i));
     }
 }

@@ -26,11 +26,8 @@ final class LotRecorder {
     private final Stay stay;
     private final LotPart lot;
     private final LotHistory.Builder history;
-    private final int[] sampleOfRow;
-    private final double[] coreC;
-    private final double[] respirationW;
+    private final LotRows rows;
     private double lastRowS = Double.NEGATIVE_INFINITY;
-    private int size;
     private double lastSampleS = Double.NEGATIVE_INFINITY;
     private double arrivedS = Double.POSITIVE_INFINITY;
     private double startHeatJ;
@@ -55,9 +52,7 @@ final class LotRecorder {
         this.history =
                 new LotHistory.Builder(
                         mostRows + (longSteps ? CLOSER_SAMPLES_OF_LONG_STEPS : CLOSER_SAMPLES));
-        sampleOfRow = new int[mostRows];
-        coreC = new double[mostRows];
-        respirationW = new double[mostRows];
+        rows = new LotRows(mostRows);
     }
 
     boolean present() {
@@ -161,11 +156,8 @@ final class LotRecorder {
             sample(t, y, integrals);
         }
         if (t > lastRowS) {
-            sampleOfRow[size] = history.size() - 1;
-            coreC[size] = lot.coreC(y);
-            respirationW[size] = lot.respirationW(y);
+            rows.add(history.size() - 1, lot.coreC(y), lot.respirationW(y));
             lastRowS = t;
-            size++;
         }
     }
 
@@ -195,7 +187,6 @@ final class LotRecorder {
     }
 
     LotCourse course() {
-        LotCourse.Rows rows = new LotCourse.Rows(size, sampleOfRow, coreC, respirationW);
         return new LotCourse(stay, history.build(), rows, totals, carriedOut);
     }
 }
