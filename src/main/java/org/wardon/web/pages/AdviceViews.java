@@ -26,6 +26,12 @@ public final class AdviceViews {
     /** So many cautions of a level, reasons of a chamber and things to do are told one by one. */
     private static final int CAUTIONS_SHOWN = 30;
 
+    /** So many cautions, or kinds of them, lead the page; of dangers all do. */
+    private static final int CAUTIONS_FIRST = 5;
+
+    /** So few more are not worth the way to the list. */
+    private static final int CAUTIONS_FEW = 2;
+
     private static final int REASONS_SHOWN = 12;
     private static final int ACTIONS_SHOWN = 12;
 
@@ -76,6 +82,8 @@ public final class AdviceViews {
                 Optional.empty(),
                 List.of(),
                 cautions(),
+                brief("caution").size(),
+                moreCautions(),
                 actions().stream().limit(actionsShown()).toList(),
                 moreActions(),
                 forecast.chambers().stream().map(this::chamber).toList(),
@@ -103,18 +111,37 @@ public final class AdviceViews {
     }
 
     private List<CautionView> cautions() {
-        Tellings tellings = new Tellings(say, figures);
-        String path = Room.CHAMBERS.path(open.kept().id());
         return Stream.of("danger", "caution", "note")
                 .flatMap(
                         level ->
-                                tellings
-                                        .brief(
-                                                told(level),
-                                                CAUTIONS_SHOWN,
-                                                code -> path + "/" + listOf(level) + "?of=" + code)
-                                        .stream())
+                                brief(level).stream()
+                                        .limit(
+                                                level.equals("caution")
+                                                        ? cautionsShown()
+                                                        : Long.MAX_VALUE))
                 .toList();
+    }
+
+    private List<CautionView> brief(String level) {
+        String path = Room.CHAMBERS.path(open.kept().id()) + "/" + listOf(level);
+        return new Tellings(say, figures)
+                .brief(told(level), CAUTIONS_SHOWN, code -> path + "?of=" + code);
+    }
+
+    private int cautionsShown() {
+        int all = brief("caution").size();
+        return all <= CAUTIONS_FIRST + CAUTIONS_FEW ? all : CAUTIONS_FIRST;
+    }
+
+    private Optional<MoreView> moreCautions() {
+        int more = brief("caution").size() - cautionsShown();
+        String path = Room.CHAMBERS.path(open.kept().id()) + "/cautions";
+        return more == 0
+                ? Optional.empty()
+                : Optional.of(
+                        new MoreView(
+                                say.say("cautions.rest", String.valueOf(more)),
+                                new LinkView(path, say.say("cautions.all"))));
     }
 
     private static String listOf(String level) {

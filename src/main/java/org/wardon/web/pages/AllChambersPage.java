@@ -139,6 +139,8 @@ public final class AllChambersPage {
                 stopped,
                 faults,
                 List.of(),
+                0,
+                Optional.empty(),
                 List.of(),
                 Optional.empty(),
                 List.of(),

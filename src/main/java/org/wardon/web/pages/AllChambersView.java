@@ -13,6 +13,8 @@ import org.wardon.errors.Fault;
  * @param stopped why there is none; absent where there is one
  * @param faults faults of the plan; empty where it can be run
  * @param cautions what to beware of, shortly where there is very much of it
+ * @param cautionsInAll how many cautions, or kinds of them, there are, shown or not
+ * @param moreCautions what else to beware of; absent where all is shown
  * @param actions what to do first
  * @param moreActions what else is to be done; absent where all is shown
  * @param chambers the chambers
@@ -27,6 +29,8 @@ public record AllChambersView(
         Optional<String> stopped,
         List<Fault> faults,
         List<CautionView> cautions,
+        int cautionsInAll,
+        Optional<MoreView> moreCautions,
         List<String> actions,
         Optional<MoreView> moreActions,
         List<ChamberView> chambers,

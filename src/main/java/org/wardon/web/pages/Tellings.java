@@ -22,7 +22,7 @@ public final class Tellings {
     private static final int FEW = 2;
 
     /** So many lots are named where a kind is told shortly; of dangers all are. */
-    private static final int MOST_NAMED = 24;
+    private static final int MOST_NAMED = 8;
 
     private final PageWords words;
     private final Figures figures;

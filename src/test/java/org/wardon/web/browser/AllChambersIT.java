@@ -11,15 +11,21 @@ import java.io.IOException;
 import java.nio.charset.StandardCharsets;
 import java.nio.file.Files;
 import java.nio.file.Path;
+import java.util.List;
 import org.junit.jupiter.api.BeforeAll;
 import org.junit.jupiter.api.Test;
 import org.junit.jupiter.params.ParameterizedTest;
 import org.junit.jupiter.params.provider.ValueSource;
+import org.wardon.web.ManyLots;
 
 /** The first page a keeper sees: every chamber with its sentence, its days and its lots. */
 class AllChambersIT extends InBrowser {
     private static final int DAYS = 10;
     private static final int PAPER = 700;
+    private static final int LOTS = 36;
+
+    /** Lots a part of their list. */
+    private static final int PART = 30;
 
     private String plan = "";
 
@@ -82,6 +88,45 @@ class AllChambersIT extends InBrowser {
                                 + " one.getBoundingClientRect().right > innerWidth + 1).length");
         assertEquals(0, cut, "cut off at the right");
         page.close();
+    }
+
+    /**
+     * Lists of a store of many lots, part by part; what leads the page of all chambers is short.
+     */
+    @Test
+    void longListsAreGoneThroughPartByPart() {
+        String many = brought("many.json", ManyLots.plan(LOTS, 1));
+        for (int width : List.of(PHONE, DESK)) {
+            Page page = show(many, width);
+            page.waitForSelector("section.chamber");
+            page.click(".cautions .more-of a:text('All cautions')");
+            page.waitForURL("**/cautions");
+            hold(page, "list-cautions");
+            for (String list : List.of("notes", "actions", "chamber/root/company")) {
+                page.navigate(address() + many + "/" + list);
+                assertTrue(page.locator(".sentences li").count() > 1, list);
+                hold(page, "list-" + list.replaceAll(".*/", ""));
+            }
+            page.navigate(address() + many + "/lots");
+            assertEquals(PART, page.locator(".lot").count());
+            page.locator(".parts a:text('" + (PART + 1) + " to ')").first().click();
+            page.waitForURL("**from=" + (PART + 1) + "*");
+            assertEquals(LOTS - PART, page.locator(".lot").count());
+            hold(page, "list-lots");
+            page.close();
+        }
+    }
+
+    private String brought(String name, String text) {
+        Page page = show("/plans", DESK);
+        page.setInputFiles(
+                "input[name=plan]",
+                new FilePayload(name, "application/json", text.getBytes(StandardCharsets.UTF_8)));
+        page.click("form[action='/plans/bring'] button");
+        page.waitForURL("**/plan/*");
+        String path = page.url().substring(address().length());
+        page.close();
+        return path;
     }
 
     @Test
