@@ -146,12 +146,14 @@ public final class WhatIfForm {
     }
 
     private String fault = "";
+    private String range = "";
 
     private OptionalDouble checked(
             String name, OptionalDouble given, double low, double high, String accepted) {
         boolean blank = typed(name).isBlank();
         boolean good =
                 given.isPresent() && given.getAsDouble() >= low && given.getAsDouble() <= high;
+        range = accepted;
         fault = blank || good ? "" : accepted;
         faulty |= !fault.isEmpty();
         return good ? given : OptionalDouble.empty();
@@ -165,7 +167,8 @@ public final class WhatIfForm {
                                 words.say("what." + name),
                                 given.isBlank() ? planned : given,
                                 unit)
-                        .withHint(words.say("what.as-planned", (planned + " " + unit).strip()))
+                        .withHint(
+                                words.say("what.as-planned", (planned + " " + unit).strip(), range))
                         .withFault(fault);
         return new Slide(field, plain(scale[0]), plain(scale[1]), plain(scale[2]));
     }

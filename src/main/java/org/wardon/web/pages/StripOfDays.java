@@ -14,6 +14,10 @@ final class StripOfDays {
     private static final int ACROSS = 1_000;
     private static final int MOST_BARS = 64;
     private static final int MOST_NAMES = 10;
+
+    /** Days beside which a name with its month has room on a phone. */
+    private static final int ROOM_FOR_NAMES = 6;
+
     private static final int[] HOURS_A_BAR = {1, 2, 3, 4, 6, 12, 24, 48, 96, 168, 336, 672};
 
     /** A bar is never thinner than this, px. */
@@ -158,10 +162,14 @@ final class StripOfDays {
         return days;
     }
 
-    /** The month with the first name and where it changes; days of the week tell nothing later. */
+    /**
+     * The month with the first name and where it changes; the day behind has none where the month
+     * leaves no room for it on a phone.
+     */
     private String named(LocalDate day, int n) {
         boolean newMonth = n == 0 || day.getDayOfMonth() <= 1;
-        return newMonth ? figures.shortDay(day) : String.valueOf(day.getDayOfMonth());
+        boolean behind = n == 1 && hours / 24 > ROOM_FOR_NAMES || day.getDayOfMonth() == 2 && n > 1;
+        return newMonth ? figures.shortDay(day) : behind ? "" : String.valueOf(day.getDayOfMonth());
     }
 
     private List<StripView.Mark> marks() {

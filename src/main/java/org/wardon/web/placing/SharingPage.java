@@ -8,6 +8,7 @@ import java.util.List;
 import java.util.Map;
 import java.util.Optional;
 import java.util.OptionalDouble;
+import java.util.regex.Pattern;
 import java.util.stream.Collectors;
 import org.wardon.advice.company.GroupReport;
 import org.wardon.advice.company.GroupSharing;
@@ -29,6 +30,9 @@ import org.wardon.web.work.Workbench;
 
 /** Who may share: any lots of a plan, and crops beside them, on one ruler of temperatures. */
 public final class SharingPage {
+    /** What stands between crops; a comma between two digits belongs to a number. */
+    private static final Pattern BETWEEN = Pattern.compile("[;\\n]|,(?!\\d)|(?<!\\d),");
+
     private static final double USUAL_DAYS = 7;
     private static final int MOST_TYPED = 400;
 
@@ -160,7 +164,7 @@ public final class SharingPage {
                 return wanted;
             }
             double all = days.isEmpty() ? USUAL_DAYS : number(frame.say("sharing.days"), days);
-            for (String one : crops.split("[;\\n]|,(?=\\s)|,$", -1)) {
+            for (String one : BETWEEN.split(crops, -1)) {
                 String crop = one.strip();
                 int equals = crop.indexOf('=');
                 String name = equals < 0 ? crop : crop.substring(0, equals).strip();
@@ -189,10 +193,11 @@ public final class SharingPage {
                     FieldView.text("crops", frame.say("sharing.crops"), crops)
                             .withHint(frame.say("sharing.crops-hint")),
                     FieldView.number(
-                            "days",
-                            frame.say("sharing.days"),
-                            days.isEmpty() ? call.figures().typed(USUAL_DAYS) : days,
-                            frame.say("sharing.days-unit")));
+                                    "days",
+                                    frame.say("sharing.days"),
+                                    days.isEmpty() ? call.figures().typed(USUAL_DAYS) : days,
+                                    frame.say("sharing.days-unit"))
+                            .withHint(frame.figures().text(frame.say("sharing.days-hint"))));
         }
 
         List<SharingView.Group> groups(long id) {

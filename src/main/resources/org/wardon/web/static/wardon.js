@@ -72,6 +72,7 @@ const SHOWN = {
 };
 const secondsOf = (time) => Date.parse(time + 'Z') / 1000;
 const DASHES = { second: [10, 4], third: [3, 3], fourth: [8, 3, 2, 3] };
+const marker = (dash) => (dash ? (dash[0] > 3 ? 'dashed' : 'dotted') : 'solid');
 
 async function draw(box) {
   if (box.dataset.drawn) return;
@@ -98,7 +99,7 @@ async function draw(box) {
     axes: [{ ...axis, values: (chart, splits) => splits.map((at) => (at % 86400 ? hour(at) : day(at))) }, { ...axis, values: (chart, splits) => splits.map(figure), label: unit, labelFont: font, size: 56 }],
     series: [{ label: box.dataset.title, value: told((at) => day(at) + ' ' + hour(at)) }, ...lines, ...levels],
     hooks: { ready: [(chart) => chart.setLegend({ idx: null }, false)] },
-    legend: { markers: { dash: (chart, i) => (i > 1 ? (i % 2 ? 'dotted' : 'dashed') : 'solid') } },
+    legend: { markers: { dash: (chart, i) => marker(chart.series[i].dash) } },
   };
   const time = data.time.map(secondsOf);
   const values = [time, ...lined.map((line) => line.values.map(value)), ...levelled.map((level) => time.map(() => value(level.value)))];

@@ -125,6 +125,18 @@ class PlacingIT extends InBrowser {
         APIResponse told = page.request().get(address() + plan + "/sharing?crops=mango=many");
         assertEquals(422, told.status());
         assertTrue(told.text().contains("mango: that is no number of days"), told.text());
+        APIResponse typed =
+                page.request()
+                        .get(
+                                address()
+                                        + plan
+                                        + "/sharing?crops=mango=3,5,banana, papaya&days=7,5",
+                                RequestOptions.create()
+                                        .setHeader("Cookie", "wardon-preferences=f.lb.comma.auto"));
+        assertEquals(200, typed.status(), typed.text());
+        for (String shown : List.of("value=\"7,5\"", "mango", "banana", "papaya", "3,5", "°F")) {
+            assertTrue(typed.text().contains(shown), shown);
+        }
         page.close();
     }
 
