@@ -168,7 +168,8 @@ final class StripOfDays {
      */
     private String named(LocalDate day, int n) {
         boolean newMonth = n == 0 || day.getDayOfMonth() <= 1;
-        boolean behind = n == 1 && hours / 24 > ROOM_FOR_NAMES || day.getDayOfMonth() == 2 && n > 1;
+        boolean behind =
+                (n == 1 && hours / 24 > ROOM_FOR_NAMES) || (day.getDayOfMonth() == 2 && n > 1);
         return newMonth ? figures.shortDay(day) : behind ? "" : String.valueOf(day.getDayOfMonth());
     }
 
