@@ -1,5 +1,6 @@
 package org.wardon.web.plan;
 
+import java.math.RoundingMode;
 import java.util.ArrayList;
 import java.util.List;
 import java.util.Map;
@@ -448,8 +449,8 @@ final class EntryMaker {
         if (shape instanceof Shape.Figure figure) {
             return page.say(
                             "edit.from-to",
-                            shown(figure.low(), figure),
-                            shown(figure.high(), figure))
+                            numbers.bound(figure.low(), figure.unit(), RoundingMode.CEILING),
+                            numbers.bound(figure.high(), figure.unit(), RoundingMode.FLOOR))
                     + usual(figure.usual(), figure);
         }
         if (shape instanceof Shape.Listed list && list.of() instanceof Shape.Figure figure) {
@@ -457,8 +458,8 @@ final class EntryMaker {
                     "edit.numbers",
                     String.valueOf(list.least()),
                     numbers.unit(figure.unit()),
-                    shown(figure.low(), figure),
-                    shown(figure.high(), figure));
+                    numbers.bound(figure.low(), figure.unit(), RoundingMode.CEILING),
+                    numbers.bound(figure.high(), figure.unit(), RoundingMode.FLOOR));
         }
         return shape instanceof Shape.Listed ? page.say("edit.several") : "";
     }

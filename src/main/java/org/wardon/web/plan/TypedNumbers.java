@@ -2,8 +2,10 @@ package org.wardon.web.plan;
 
 import java.math.BigDecimal;
 import java.math.MathContext;
+import java.math.RoundingMode;
 import java.util.Optional;
 import java.util.OptionalDouble;
+import org.wardon.advice.wording.Units;
 import org.wardon.files.form.NumberText;
 import org.wardon.web.pages.Figures;
 import org.wardon.web.pages.Preferences;
@@ -37,6 +39,24 @@ final class TypedNumbers implements NumberText {
             case "K" -> figures.typed(PER_K * value);
             default -> figures.typedMass(value);
         };
+    }
+
+    /**
+     * A bound of what may be typed: of a mass in lb three digits, so that it is read easily, and no
+     * further than the plan's own bound reaches.
+     *
+     * @param value the bound in the plan's unit
+     * @param unit the plan's unit
+     * @param inward the way that stays within the bound
+     */
+    String bound(double value, String unit, RoundingMode inward) {
+        String plain = BigDecimal.valueOf(value).stripTrailingZeros().toPlainString();
+        if (!turned(unit) || !unit.equals("kg")) {
+            return shown(plain, unit);
+        }
+        BigDecimal pounds = BigDecimal.valueOf(value / Units.KG_PER_LB);
+        BigDecimal few = pounds.round(new MathContext(3, inward));
+        return figures.typed(few.doubleValue());
     }
 
     @Override
