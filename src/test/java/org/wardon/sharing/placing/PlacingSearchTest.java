@@ -18,6 +18,7 @@ import org.junit.jupiter.params.provider.ValueSource;
 class PlacingSearchTest {
     private static final double ROUNDING = 2e-7;
     private static final Instances INSTANCES = new Instances();
+    private static final FrozenOracle FROZEN = new FrozenOracle();
 
     private static PlacingAnswer search(PlacingProblem problem) {
         PlacingAnswer answer = PlacingSearch.of(problem, Effort.of(problem));
@@ -43,10 +44,10 @@ class PlacingSearchTest {
     @ParameterizedTest(name = "60 lots, 6 chambers, seed {0}")
     @ValueSource(ints = {1, 2, 3})
     void isWithinOnePercentOfItsBoundAndTheBoundAboveTheGeneralSolver(int seed) {
-        PlacingProblem problem = INSTANCES.draw(60, 6, 0.97, seed);
-        PlacingAnswer ours = search(problem);
+        FrozenOracle.Drawn drawn = FrozenOracle.large(seed);
+        PlacingAnswer ours = search(drawn.problem());
         assertTrue(ours.gapPct() <= 1, ours.gapPct() + " %");
-        Oracle.Answer theirs = Oracle.ask(problem, 10);
+        Oracle.Answer theirs = FROZEN.answer(drawn);
         assertTrue(theirs.value() <= ours.bound() + 1, theirs + " " + ours.bound());
         assertTrue(theirs.value() <= ours.placing().value() + 1, theirs + " " + ours);
     }
@@ -66,12 +67,13 @@ class PlacingSearchTest {
     @MethodSource("mixes")
     void storesOfEveryMixAreFilledWithinOnePercentOfTheirBound(int number) {
         for (double share : new double[] {0.5, 0.97, 1.5}) {
-            Mix mix = Mix.all(share).get(number);
-            PlacingProblem problem = INSTANCES.draw(30, 4, mix, 10 + number);
-            PlacingAnswer ours = search(problem);
-            assertTrue(ours.gapPct() <= 1, mix + " " + ours.gapPct() + " %");
-            Oracle.Answer theirs = Oracle.ask(problem, 3);
-            assertTrue(theirs.value() <= ours.placing().value() * 1.0001 + 1, mix + " " + theirs);
+            FrozenOracle.Drawn drawn = FrozenOracle.mixed(number, share);
+            PlacingAnswer ours = search(drawn.problem());
+            assertTrue(ours.gapPct() <= 1, drawn.name() + " " + ours.gapPct() + " %");
+            Oracle.Answer theirs = FROZEN.answer(drawn);
+            assertTrue(
+                    theirs.value() <= ours.placing().value() * 1.0001 + 1,
+                    drawn.name() + " " + theirs);
         }
     }
 
