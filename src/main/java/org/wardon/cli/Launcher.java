@@ -24,7 +24,7 @@ public final class Launcher {
     private static final Set<String> LONG =
             Set.of("advise", "compare", "demo", "place", "receive", "section", "open");
 
-    private static final List<String> MACHINE =
+    static final List<String> MACHINE =
             List.of("-XX:+UseSerialGC", "-Xms64m", "-XX:TieredStopAtLevel=1");
 
     /** Options from here hold for every machine of the user. */

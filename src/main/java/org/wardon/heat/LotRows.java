@@ -7,9 +7,9 @@ import java.util.Arrays;
  * is, and what keeping does not ask for.
  */
 final class LotRows {
-    private int[] sample;
-    private double[] coreC;
-    private double[] respirationW;
+    private final int[] sample;
+    private final double[] coreC;
+    private final double[] respirationW;
     private int size;
 
     LotRows(int mostRows) {

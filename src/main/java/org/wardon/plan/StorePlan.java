@@ -81,13 +81,24 @@ public record StorePlan(
     /**
      * Returns what the keeper accepts in a chamber, there or everywhere.
      *
-     * @param chamberId its id
+     * @param chamber one of the plan, or one that might be added
      * @return conflicts that forbid nothing
      */
-    public Set<Conflict> accepts(String chamberId) {
+    public Set<Conflict> accepts(ChamberPlan chamber) {
         Set<Conflict> all = new HashSet<>(wish.accepts());
-        all.addAll(getChamber(chamberId).use().accepts());
+        all.addAll(chamber.use().accepts());
         return all;
+    }
+
+    /**
+     * Returns whether the keeper accepts a conflict in a chamber, there or everywhere.
+     *
+     * @param chamber one of the plan, or one that might be added
+     * @param conflict which
+     * @return whether it forbids nothing
+     */
+    public boolean accepts(ChamberPlan chamber, Conflict conflict) {
+        return wish.accepts().contains(conflict) || chamber.use().accepts().contains(conflict);
     }
 
     /**

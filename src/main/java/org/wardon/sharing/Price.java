@@ -18,7 +18,7 @@ import org.wardon.produce.Reason.Argument;
 public record Price(
         Conflict conflict, String id, String from, OptionalDouble daysLost, double days) {
     /** Days of life below this are not worth a word. */
-    static final double LEAST_DAYS = 0.05;
+    public static final double LEAST_DAYS = 0.05;
 
     private static final String RULE = "assumption";
 

@@ -55,13 +55,19 @@ class LauncherIT {
 
     @Test
     void answersTheSameInEitherMachine() throws IOException, InterruptedException {
-        String there = answer(List.of());
-        assertFalse(there.isBlank());
-        assertEquals(there, answer(OWN_OPTION));
+        for (String[] words :
+                List.of(
+                        new String[] {"advise", MINIMAL.toString()},
+                        new String[] {"keep", "mango", "--at", "13"})) {
+            String there = answer(List.of(), words);
+            assertFalse(there.isBlank());
+            assertEquals(there, answer(OWN_OPTION, words));
+        }
     }
 
-    private String answer(List<String> options) throws IOException, InterruptedException {
-        Process process = start(options, "advise", MINIMAL.toString());
+    private String answer(List<String> options, String... words)
+            throws IOException, InterruptedException {
+        Process process = start(options, words);
         end(process);
         assertEquals("", Files.readString(folder.resolve("err")));
         assertEquals(0, process.exitValue());

@@ -20,15 +20,6 @@ final class WardonJar {
     private static final Path JAR = Path.of("target/wardon.jar").toAbsolutePath();
     private static final long PATIENCE_S = 240;
 
-    /** As the program starts itself for long answers, for short ones too. */
-    private static final List<String> QUICK =
-            List.of(
-                    "-Xmx512m",
-                    "-XX:+UseSerialGC",
-                    "-XX:TieredStopAtLevel=1",
-                    "-XX:SharedArchiveFile=" + JAR.resolveSibling("wardon.jsa"),
-                    "-Xlog:disable");
-
     private WardonJar() {}
 
     /** What a run left behind. */
@@ -79,7 +70,13 @@ final class WardonJar {
     static Process start(Path out, Path err, String... words) {
         List<String> command = new ArrayList<>();
         command.add(Path.of(System.getProperty("java.home"), "bin", "java").toString());
-        command.addAll(QUICK);
+        // As the program starts itself for long answers, short ones too: they come sooner.
+        command.addAll(Launcher.MACHINE);
+        command.addAll(
+                List.of(
+                        "-Xmx512m",
+                        "-XX:SharedArchiveFile=" + JAR.resolveSibling("wardon.jsa"),
+                        "-Xlog:disable"));
         command.add("-jar");
         command.add(JAR.toString());
         command.addAll(List.of(words));

@@ -250,7 +250,7 @@ class SharingTest {
     }
 
     @Test
-    void inAChamberToo() {
+    void whatIsAcceptedRefusesNoChamberAndTellsItsPrice() {
         Together apples = together("apple", 0, 0.95, 3);
         Together sprouts = together("broccoli", 0, 0.98, 3);
         List<Double> clean = sprouts.fates().stream().map(fate -> 15.0).toList();

@@ -5,15 +5,12 @@ import java.util.EnumSet;
 import java.util.List;
 import java.util.Optional;
 import java.util.Set;
-import org.wardon.advice.wording.Words;
 import org.wardon.errors.BadInput;
 import org.wardon.errors.Fault;
-import org.wardon.files.forecast.ShareAnswer;
 import org.wardon.files.json.Nearest;
 import org.wardon.produce.Conflict;
-import org.wardon.sharing.Price;
 
-/** Conflicts a keeper accepts, and what is told of them. */
+/** Conflicts a keeper accepts, as they are named on the command line and in a request. */
 public final class Borne {
     /** What lots do to each other; that one is not cured is between it and the cold. */
     private static final List<Conflict> OF_LOTS = List.of(Conflict.ETHYLENE, Conflict.ODOUR);
@@ -56,14 +53,5 @@ public final class Borne {
 
     private static List<String> all() {
         return OF_LOTS.stream().map(Conflict::word).toList();
-    }
-
-    static ShareAnswer.Accepted answer(Price price, Words words) {
-        return new ShareAnswer.Accepted(
-                price.conflict().word(),
-                price.id(),
-                price.from(),
-                price.daysLost(),
-                words.sentence(price.told()));
     }
 }

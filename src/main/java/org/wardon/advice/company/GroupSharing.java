@@ -34,8 +34,6 @@ import org.wardon.sharing.Workable;
  * share}, with what each lot bears, for its own days and its state at the door.
  */
 public final class GroupSharing {
-    private static final double LEAST_DAYS = 0.05;
-
     private final StoreTrial trial;
     private final ReferenceBook book;
     private final Map<Known, Workable> known = new HashMap<>();
@@ -135,8 +133,7 @@ public final class GroupSharing {
     /** What is accepted in a chamber, or everywhere. */
     private Set<Conflict> accepts(Set<Conflict> asked, Optional<ChamberPlan> chamber) {
         Set<Conflict> all = new HashSet<>(asked);
-        all.addAll(trial.plan().wish().accepts());
-        chamber.ifPresent(one -> all.addAll(one.use().accepts()));
+        all.addAll(chamber.map(trial.plan()::accepts).orElse(trial.plan().wish().accepts()));
         return all;
     }
 
@@ -221,7 +218,7 @@ public final class GroupSharing {
 
     private static Map<String, Double> losing(Map<String, Double> daysLost) {
         Map<String, Double> losing = new HashMap<>(daysLost);
-        losing.values().removeIf(days -> days < LEAST_DAYS);
+        losing.values().removeIf(days -> days < Price.LEAST_DAYS);
         return losing;
     }
 

@@ -3,6 +3,7 @@ package org.wardon.advice.company;
 import java.util.ArrayList;
 import java.util.List;
 import java.util.Optional;
+import org.wardon.advice.forecast.PriceTold;
 import org.wardon.advice.wording.Words;
 import org.wardon.air.Timeline;
 import org.wardon.files.forecast.Because;
@@ -48,7 +49,7 @@ final class ShareTold {
                         timeline.stream()
                                 .flatMap(at -> found.spells().stream().map(one -> spell(one, at)))
                                 .toList(),
-                        found.prices().stream().map(one -> Borne.answer(one, words)).toList());
+                        found.prices().stream().map(one -> PriceTold.of(one, words)).toList());
         List<Reason> notes = new ArrayList<>();
         timeline.ifPresent(at -> notes.addAll(Dated.told(found.spells(), at)));
         found.prices().forEach(one -> notes.add(one.told()));

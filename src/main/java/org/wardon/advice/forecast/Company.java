@@ -9,19 +9,18 @@ import org.wardon.advice.wording.Words;
 import org.wardon.air.Timeline;
 import org.wardon.files.forecast.Because;
 import org.wardon.files.forecast.Forecast;
-import org.wardon.files.forecast.ShareAnswer;
 import org.wardon.keeping.ChamberEthylene;
 import org.wardon.keeping.Draw;
 import org.wardon.keeping.Draws;
 import org.wardon.keeping.Fate;
 import org.wardon.lots.LotHistory;
 import org.wardon.plan.ChamberPlan;
+import org.wardon.plan.StorePlan;
 import org.wardon.produce.Conflict;
 import org.wardon.produce.Reason;
 import org.wardon.sharing.ChamberSharing;
 import org.wardon.sharing.ChamberVerdict;
 import org.wardon.sharing.PairVerdict;
-import org.wardon.sharing.Price;
 import org.wardon.sharing.Sharing;
 import org.wardon.sharing.Together;
 import org.wardon.sharing.Wish;
@@ -68,21 +67,13 @@ final class Company {
                 chamber.id(),
                 found.verdict().word(),
                 reasons,
-                found.borne().stream().map(this::accepted).toList());
-    }
-
-    private ShareAnswer.Accepted accepted(Price price) {
-        return new ShareAnswer.Accepted(
-                price.conflict().word(),
-                price.id(),
-                price.from(),
-                price.daysLost(),
-                words.sentence(price.told()));
+                found.borne().stream().map(price -> PriceTold.of(price, words)).toList());
     }
 
     /** What the air of a chamber, as it was worked out, does to visits there. */
     static ChamberVerdict together(StoreOutcome outcome, String chamberId, List<Visit> visits) {
-        Set<Conflict> accepted = outcome.model().plan().accepts(chamberId);
+        StorePlan plan = outcome.model().plan();
+        Set<Conflict> accepted = plan.accepts(plan.getChamber(chamberId));
         Optional<Fates> asked =
                 accepted.contains(Conflict.ETHYLENE)
                         ? Optional.of(new Fates(outcome.model()))

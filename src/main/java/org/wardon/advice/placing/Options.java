@@ -398,7 +398,6 @@ final class Options {
     }
 
     boolean accepts(ChamberPlan chamber, Conflict conflict) {
-        return chamber.use().accepts().contains(conflict)
-                || trial.plan().wish().accepts().contains(conflict);
+        return trial.plan().accepts(chamber, conflict);
     }
 }

@@ -164,8 +164,7 @@ final class ChamberChoice {
                         .average()
                         .orElse(before.chamber().setting().temperatureC());
         if (airC < cured.getAsDouble() - COLDER_THAN_CURING_K) {
-            boolean borne =
-                    question.plan().accepts(before.chamber().id()).contains(Conflict.UNCURED);
+            boolean borne = question.plan().accepts(before.chamber(), Conflict.UNCURED);
             say(
                     borne ? Verdict.TOLERABLE : Verdict.NO,
                     Reason.about(

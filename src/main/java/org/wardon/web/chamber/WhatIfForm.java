@@ -95,10 +95,11 @@ public final class WhatIfForm {
         OptionalDouble given = figures.temperatureC(typed("setting"));
         double low = figures.shownTemperature(LEAST_C);
         double high = figures.shownTemperature(MOST_C);
-        OptionalDouble checked = checked("setting", given, LEAST_C, MOST_C, range(low, high));
+        Held held = held("setting", given, new double[] {LEAST_C, MOST_C}, range(low, high));
         slides.add(
                 slide(
                         "setting",
+                        held,
                         figures.typedTemperature(planned),
                         figures.temperatureUnit(),
                         new double[] {
@@ -106,15 +107,15 @@ public final class WhatIfForm {
                             Math.round(figures.shownTemperature(planned + SLIDE_K)),
                             0.5
                         }));
-        return differs(checked, planned);
+        return differs(held.value(), planned);
     }
 
     private OptionalDouble percent(String name) {
         OptionalDouble given = figures.number(typed(name));
-        OptionalDouble checked =
-                checked(name, given, LEAST_PCT, MOST_PCT, range(LEAST_PCT, MOST_PCT));
-        slides.add(slide(name, "100", "%", new double[] {25, 300, 5}));
-        OptionalDouble other = differs(checked, 100);
+        double[] limits = {LEAST_PCT, MOST_PCT};
+        Held held = held(name, given, limits, range(LEAST_PCT, MOST_PCT));
+        slides.add(slide(name, held, "100", "%", new double[] {25, 300, 5}));
+        OptionalDouble other = differs(held.value(), 100);
         return other.isPresent() ? OptionalDouble.of(other.getAsDouble() / 100) : other;
     }
 
@@ -124,10 +125,11 @@ public final class WhatIfForm {
         }
         double planned = openingsPerDay.getAsDouble();
         OptionalDouble given = figures.number(typed("door"));
-        OptionalDouble checked = checked("door", given, 0, MOST_OPENINGS, range(0, MOST_OPENINGS));
+        double[] limits = {0, MOST_OPENINGS};
+        Held held = held("door", given, limits, range(0, MOST_OPENINGS));
         double most = Math.max(40, 3 * planned);
-        slides.add(slide("door", figures.typed(planned), "", new double[] {0, most, 1}));
-        return differs(checked, planned);
+        slides.add(slide("door", held, figures.typed(planned), "", new double[] {0, most, 1}));
+        return differs(held.value(), planned);
     }
 
     private static OptionalDouble differs(OptionalDouble given, double planned) {
@@ -145,31 +147,30 @@ public final class WhatIfForm {
         return words.say("what.accepted", figures.typed(low), figures.typed(high));
     }
 
-    private String fault = "";
-    private String range = "";
+    /** What a field holds: nothing where it is blank or beyond its range. */
+    private record Held(OptionalDouble value, String range, String fault) {}
 
-    private OptionalDouble checked(
-            String name, OptionalDouble given, double low, double high, String accepted) {
+    private Held held(String name, OptionalDouble given, double[] limits, String range) {
         boolean blank = typed(name).isBlank();
         boolean good =
-                given.isPresent() && given.getAsDouble() >= low && given.getAsDouble() <= high;
-        range = accepted;
-        fault = blank || good ? "" : accepted;
-        faulty |= !fault.isEmpty();
-        return good ? given : OptionalDouble.empty();
+                given.isPresent()
+                        && given.getAsDouble() >= limits[0]
+                        && given.getAsDouble() <= limits[1];
+        faulty |= !blank && !good;
+        return new Held(good ? given : OptionalDouble.empty(), range, blank || good ? "" : range);
     }
 
-    private Slide slide(String name, String planned, String unit, double[] scale) {
+    private Slide slide(String name, Held held, String planned, String unit, double[] scale) {
         String given = typed(name);
+        String usual = (planned + " " + unit).strip();
         FieldView field =
                 FieldView.number(
                                 name,
                                 words.say("what." + name),
                                 given.isBlank() ? planned : given,
                                 unit)
-                        .withHint(
-                                words.say("what.as-planned", (planned + " " + unit).strip(), range))
-                        .withFault(fault);
+                        .withHint(words.say("what.as-planned", usual, held.range()))
+                        .withFault(held.fault());
         return new Slide(field, plain(scale[0]), plain(scale[1]), plain(scale[2]));
     }
 

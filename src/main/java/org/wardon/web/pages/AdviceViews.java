@@ -72,6 +72,7 @@ public final class AdviceViews {
     }
 
     AllChambersView allChambers() {
+        List<CautionView> cautions = brief("caution");
         return new AllChambersView(
                 plan.name(),
                 say.say(
@@ -81,9 +82,9 @@ public final class AdviceViews {
                 Optional.empty(),
                 Optional.empty(),
                 List.of(),
-                cautions(),
-                brief("caution").size(),
-                moreCautions(),
+                leading(cautions),
+                cautions.size(),
+                moreCautions(cautions.size()),
                 actions().stream().limit(actionsShown()).toList(),
                 moreActions(),
                 forecast.chambers().stream().map(this::chamber).toList(),
@@ -110,15 +111,13 @@ public final class AdviceViews {
                 .toList();
     }
 
-    private List<CautionView> cautions() {
-        return Stream.of("danger", "caution", "note")
-                .flatMap(
-                        level ->
-                                brief(level).stream()
-                                        .limit(
-                                                level.equals("caution")
-                                                        ? cautionsShown()
-                                                        : Long.MAX_VALUE))
+    /** What leads the page: all dangers, the first cautions, all notes. */
+    private List<CautionView> leading(List<CautionView> cautions) {
+        return Stream.of(
+                        brief("danger"),
+                        cautions.subList(0, cautionsShown(cautions.size())),
+                        brief("note"))
+                .flatMap(List::stream)
                 .toList();
     }
 
@@ -128,13 +127,12 @@ public final class AdviceViews {
                 .brief(told(level), CAUTIONS_SHOWN, code -> path + "?of=" + code);
     }
 
-    private int cautionsShown() {
-        int all = brief("caution").size();
+    private static int cautionsShown(int all) {
         return all <= CAUTIONS_FIRST + CAUTIONS_FEW ? all : CAUTIONS_FIRST;
     }
 
-    private Optional<MoreView> moreCautions() {
-        int more = brief("caution").size() - cautionsShown();
+    private Optional<MoreView> moreCautions(int all) {
+        int more = all - cautionsShown(all);
         String path = Room.CHAMBERS.path(open.kept().id()) + "/cautions";
         return more == 0
                 ? Optional.empty()

@@ -4,6 +4,7 @@ import static org.junit.jupiter.api.Assertions.assertEquals;
 
 import java.io.IOException;
 import java.io.UncheckedIOException;
+import java.nio.charset.StandardCharsets;
 import java.nio.file.Files;
 import java.nio.file.Path;
 import java.util.ArrayList;
@@ -12,6 +13,7 @@ import java.util.List;
 import java.util.Locale;
 import java.util.Map;
 import java.util.Objects;
+import java.util.zip.CRC32;
 
 /**
  * What the general solver answered on the larger drawn stores, written down since it needs minutes.
@@ -44,6 +46,7 @@ final class FrozenOracle {
                 rows.put(
                         cells[0],
                         new double[] {
+                            Double.parseDouble(cells[1]),
                             Double.parseDouble(cells[2]),
                             Double.parseDouble(cells[3]),
                             Double.parseDouble(cells[4])
@@ -72,48 +75,45 @@ final class FrozenOracle {
     /** What it answered; the store must be the one it was asked about. */
     Oracle.Answer answer(Drawn drawn) {
         double[] row = Objects.requireNonNull(rows.get(drawn.name()), drawn.name() + AGAIN);
-        double sum = sum(drawn.problem());
-        assertEquals(row[0], sum, 1e-9 * Math.abs(sum), drawn.name() + AGAIN);
-        return new Oracle.Answer(row[1], row[2], row[1] == row[2]);
+        assertEquals(drawn.seconds(), row[0], drawn.name() + AGAIN);
+        assertEquals(digest(drawn.problem()), (long) row[1], drawn.name() + AGAIN);
+        return new Oracle.Answer(row[2], row[3], row[2] == row[3]);
     }
 
-    /** One number that changes with every worth, heat, loss, limit and cost of a store. */
-    private static double sum(PlacingProblem problem) {
-        double sum = 0;
-        double weight = 1;
+    /** Of every number of a store to nine digits; what another machine's last digit is, is not. */
+    private static long digest(PlacingProblem problem) {
+        CRC32 digest = new CRC32();
+        for (LotToPlace lot : problem.lots()) {
+            add(digest, lot.massKg(), lot.volumeM3(), lot.firstDay(), lot.lastDay());
+        }
         for (ChamberToFill chamber : problem.chambers()) {
-            sum += chamber.massKg() + 7 * chamber.volumeM3();
+            add(digest, chamber.massKg(), chamber.volumeM3());
             for (Offer offer : chamber.offers()) {
-                weight = weight % 97 + 1;
-                sum += weight * (sum(problem, offer.climate()) + finite(offer.cost()));
-                sum += 1e3 * offer.costPerWDay();
-                for (double watt : offer.coolingW()) {
-                    sum += weight * watt;
-                }
+                add(digest, offer.cost(), offer.costPerWDay());
+                offer.coolingW().forEach(watt -> add(digest, watt));
+                add(digest, problem, offer.climate());
             }
         }
-        return sum;
+        return digest.getValue();
     }
 
-    private static double sum(PlacingProblem problem, Climate climate) {
-        double sum = 0;
+    private static void add(CRC32 digest, PlacingProblem problem, Climate climate) {
         for (int l = 0; l < problem.lots().size(); l++) {
-            LotToPlace lot = problem.lots().get(l);
-            double own = finite(climate.worth(l)) + lot.massKg() + 3 * lot.volumeM3();
-            for (int d = lot.firstDay(); d <= lot.lastDay(); d++) {
-                own += (1 + d) * climate.heatW(l, d);
+            add(digest, climate.worth(l));
+            for (int d = 0; d < problem.days(); d++) {
+                add(digest, climate.heatW(l, d));
             }
             for (int o = 0; o < problem.lots().size(); o++) {
-                own += (1 + o) * finite(climate.lossTogether(l, o));
+                add(digest, climate.lossTogether(l, o));
             }
-            sum += (1 + l) * own;
         }
-        return sum;
     }
 
-    /** What stands for never and for any number would drown all others. */
-    private static double finite(double money) {
-        return Math.abs(money) < 1e6 ? money : Math.signum(money);
+    private static void add(CRC32 digest, double... values) {
+        for (double value : values) {
+            String digits = String.format(Locale.ROOT, "%.8e;", value + 0.0);
+            digest.update(digits.getBytes(StandardCharsets.US_ASCII));
+        }
     }
 
     /**
@@ -134,8 +134,9 @@ final class FrozenOracle {
         }
         List<String> lines = new ArrayList<>();
         lines.add("# CP-SAT of OR-Tools, two threads, the seconds in the row; written by");
-        lines.add("# org.wardon.sharing.placing.FrozenOracle of the tests. sum tells the store.");
-        lines.add("store,seconds,sum,value,bound");
+        lines.add(
+                "# org.wardon.sharing.placing.FrozenOracle of the tests. digest tells the store.");
+        lines.add("store,seconds,digest,value,bound");
         for (Drawn drawn : all) {
             Oracle.Answer answer = Oracle.ask(drawn.problem(), drawn.seconds());
             double value = answer.value() + 0.0;
@@ -146,7 +147,7 @@ final class FrozenOracle {
                             "%s,%.0f,%s,%s,%s",
                             drawn.name(),
                             drawn.seconds(),
-                            sum(drawn.problem()),
+                            digest(drawn.problem()),
                             value,
                             bound));
         }
