@@ -36,11 +36,10 @@ final class Times {
         return plusDays(time, hours / 24);
     }
 
-    /** Returns the end of the run, where start and length are given. */
+    /** Returns the end of the run, where start and length are given and the length is one. */
     static Optional<LocalDateTime> end(Part plan) {
         Optional<LocalDateTime> from = at(plan.at("from"));
-        return plan.at("days").number().isPresent()
-                ? from.map(time -> plusDays(time, plan.at("days").number().getAsDouble()))
-                : Optional.empty();
+        double days = plan.at("days").number().orElse(0);
+        return days > 0 ? from.map(time -> plusDays(time, days)) : Optional.empty();
     }
 }

@@ -157,20 +157,24 @@ final class StripOfDays {
             double at = Math.max(0, hoursTo(day.atStartOfDay()) / hours);
             days.add(
                     new StripView.Day(
-                            px(ACROSS * at), px(100 * at), at > 0.95 ? "" : named(day, n++)));
+                            px(ACROSS * at),
+                            px(100 * at),
+                            at > 0.95 ? "" : named(day, n),
+                            isTight(day, n)));
+            n++;
         }
         return days;
     }
 
-    /**
-     * The month with the first name and where it changes; the day behind has none where the month
-     * leaves no room for it on a phone.
-     */
+    /** The month with the first name and where it changes. */
     private String named(LocalDate day, int n) {
         boolean newMonth = n == 0 || day.getDayOfMonth() <= 1;
-        boolean behind =
-                (n == 1 && hours / 24 > ROOM_FOR_NAMES) || (day.getDayOfMonth() == 2 && n > 1);
-        return newMonth ? figures.shortDay(day) : behind ? "" : String.valueOf(day.getDayOfMonth());
+        return newMonth ? figures.shortDay(day) : String.valueOf(day.getDayOfMonth());
+    }
+
+    /** Whether the month named before leaves a day's name no room on a phone. */
+    private boolean isTight(LocalDate day, int n) {
+        return (n == 1 && hours / 24 > ROOM_FOR_NAMES) || (day.getDayOfMonth() == 2 && n > 1);
     }
 
     private List<StripView.Mark> marks() {

@@ -41,8 +41,9 @@ public record StripView(
      * @param at where it begins, thousandths
      * @param percent the same, percent
      * @param name its name; blank where there is no room for it
+     * @param tight whether the name has no room on a phone
      */
-    public record Day(String at, String percent, String name) {}
+    public record Day(String at, String percent, String name, boolean tight) {}
 
     /**
      * A temperature at the side.
