@@ -78,7 +78,7 @@ final class Receive implements Callable<Integer> {
         String text = TextFile.read(plan, plan.toString(), PlanReader.LARGEST_MB);
         NewLot lot = newLot.lot();
         Receiving receiving =
-                Receiving.once(
+                Receiving.of(
                         OpenLots.house(PlanReader.read(text, plan, lookups), book, Progress.SILENT)
                                 .plan(),
                         book,

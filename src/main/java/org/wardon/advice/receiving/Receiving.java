@@ -21,11 +21,8 @@ import org.wardon.reference.ReferenceBook;
  * forecast. May be asked by several threads at once; the book is to stay open.
  */
 public final class Receiving {
-    /** Draws of a small store, as many as a forecast takes. */
-    private static final int MOST_DRAWS = 32;
-
-    /** Draws where one question alone is asked. */
-    private static final int ONCE_DRAWS = 16;
+    /** Draws of a small store: half of a forecast's, so that nobody waits at the door. */
+    private static final int MOST_DRAWS = 16;
 
     /** Least draws: the tenth and ninetieth percentile still lie inside. */
     private static final int LEAST_DRAWS = 8;
@@ -58,31 +55,22 @@ public final class Receiving {
         return new Receiving(plan, book, words, MOST_DRAWS);
     }
 
-    /**
-     * Works out a store as it stands for one question, in half of the draws: the first answer comes
-     * in half the time.
-     *
-     * @param plan the plan; lots without a chamber are placed as a forecast places them
-     * @param book the reference book
-     * @param words words for the answers
-     * @return what answers questions about it
-     * @throws org.wardon.errors.RunStopped where a chamber meets a state that cannot be
-     */
-    public static Receiving once(StorePlan plan, ReferenceBook book, Words words) {
-        return new Receiving(plan, book, words, ONCE_DRAWS);
+    /** The same in no more draws than told. */
+    static Receiving inDraws(StorePlan plan, ReferenceBook book, Words words, int most) {
+        return new Receiving(plan, book, words, most);
     }
 
     /** Fewer draws for large stores, by the size of the store, so that answers repeat. */
     private static int draws(StorePlan plan) {
         double lots = plan.lots().size() + 2.0 * plan.chambers().size();
         double affordable = LOT_DAYS / (lots * Math.max(1, plan.days()));
-        return (int) Math.max(LEAST_DRAWS, Math.min(MOST_DRAWS, 2 * Math.floor(affordable / 2)));
+        return (int) Math.max(LEAST_DRAWS, 2 * Math.floor(affordable / 2));
     }
 
     /**
      * Returns how many draws stand behind each answer.
      *
-     * @return 8 to 32
+     * @return 8 to 16
      */
     public int draws() {
         return draws;

@@ -187,6 +187,7 @@ public final class Integrator {
         double h = fit(nextStep, left);
         boolean refused = false;
         double errorBefore = Double.POSITIVE_INFINITY;
+        double before = h;
         while (true) {
             double error = method.tryStep(now, y, h);
             boolean possible = system.possible(method.end);
@@ -198,12 +199,24 @@ public final class Integrator {
             refused = true;
             boolean heldUp = longSteps && error > HELD_UP * errorBefore;
             double factor = error < 1e12 && !heldUp ? SAFETY / method.root(error) : SHORTEST;
+            if (cornered(error / errorBefore, h / before)) {
+                factor = SAFETY / error;
+            }
             errorBefore = error;
+            before = h;
             h *= Math.max(SHORTEST, Math.min(factor, possible ? 0.8 : 0.4));
             if (!(h > shortestStep)) {
                 throw new StepTooShort(now, h, method.worstNode);
             }
         }
+    }
+
+    /**
+     * Whether the error fell so slowly with the step that a corner of the rates lies within it,
+     * such as the first dew: from there on it falls in proportion.
+     */
+    private static boolean cornered(double errorShare, double stepShare) {
+        return errorShare > stepShare * stepShare && errorShare < 1;
     }
 
     /** A step that lands on the end, or leaves room for a decent last one. */
