@@ -64,6 +64,15 @@ final class Branch {
         }
     }
 
+    /** Whether two lots can be exchanged in every placing of this part. */
+    boolean alike(int one, int other, Likeness likeness) {
+        boolean alike = likeness.alike(one, other);
+        for (int c = 0; c < lots.length && alike; c++) {
+            alike = lots[c].get(one) == lots[c].get(other);
+        }
+        return alike;
+    }
+
     /** Lots that may stand in one chamber at most, so that nothing is left to decide of them. */
     boolean decided(int lot) {
         int places = 0;

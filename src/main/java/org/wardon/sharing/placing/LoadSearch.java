@@ -8,8 +8,10 @@ import java.util.Arrays;
  * themselves; a better one holds one of the rest, so only with each of these is it looked for
  * (branching on what a cover leaves, as for heaviest cliques; E. Balas and J. Xue, SIAM Journal on
  * Computing 20, 1991, from memory). Two lots for which there is no room or cooling together, or
- * that lose as much by each other as the lesser gains, are such a group too. Stops after a number
- * of steps; what it has not looked into then counts in {@link #open}.
+ * that lose as much by each other as the lesser gains, are such a group too. Of like lots those
+ * that gain more come first: a load that holds one without them is worth no more than the one that
+ * has them exchanged. Stops after a number of steps; what it has not looked into then counts in
+ * {@link #open}.
  */
 final class LoadSearch {
     private static final double ROUNDING = 1e-9;
@@ -31,6 +33,14 @@ final class LoadSearch {
     private final int[] lot;
     private final int[] place;
     private final double[] key;
+
+    /** The like lot that gains next more, -1 for none. */
+    private final int[] before;
+
+    /** The like lot that gains next less, -1 for none. */
+    private final int[] after;
+
+    private final int[] lastOfKind;
     private final long[][] apart;
     private final double[] shutsOut;
     private final int[] heaviest;
@@ -79,6 +89,9 @@ final class LoadSearch {
         lot = new int[lots];
         place = new int[lots];
         key = new double[lots];
+        before = new int[lots];
+        after = new int[lots];
+        lastOfKind = new int[lots];
         apart = new long[lots][Cover.words(lots)];
         shutsOut = new double[lots];
         heaviest = new int[lots];
@@ -228,9 +241,17 @@ final class LoadSearch {
             }
         }
         words = Cover.words(count);
+        Arrays.fill(lastOfKind, -1);
         for (int i = 0; i < count; i++) {
             place[lot[i]] = i;
             loses[i] = 0;
+            int kind = store.likeness.kind[lot[i]];
+            before[i] = lastOfKind[kind];
+            after[i] = -1;
+            if (before[i] >= 0) {
+                after[before[i]] = i;
+            }
+            lastOfKind[kind] = i;
         }
     }
 
@@ -323,15 +344,30 @@ final class LoadSearch {
         for (int w = 0; w < words; w++) {
             for (; branch[w] != 0; branch[w] &= branch[w] - 1) {
                 int i = (w << 6) + Long.numberOfTrailingZeros(branch[w]);
-                free[depth][w] &= ~(1L << i);
                 include(i, depth, worth, left);
+                for (int k = i; k >= 0; k = after[k]) {
+                    free[depth][k >> 6] &= ~(1L << k);
+                    branch[k >> 6] &= ~(1L << k);
+                }
             }
         }
     }
 
+    /** Takes a lot, with the like ones left that gain more, and looks on. */
     private void include(int i, int depth, double worth, double left) {
+        System.arraycopy(free[depth], 0, free[depth + 1], 0, words);
+        int best = i;
+        while (before[best] >= 0 && isIn(free[depth], before[best])) {
+            best = before[best];
+        }
+        take(best, i, depth + 1, worth, left);
+    }
+
+    /** Takes like lots from one to another, as long as there is room, and looks on. */
+    private void take(int i, int upTo, int depth, double worth, double left) {
         int l = lot[i];
-        if (!fits(l)) {
+        long[] now = free[depth];
+        if (!isIn(now, i) || !fits(l)) {
             return;
         }
         double with = worth + gain[l] - loses[i];
@@ -341,9 +377,22 @@ final class LoadSearch {
             found = true;
             System.arraycopy(taken, 0, load, 0, taken.length);
         }
-        long[] now = free[depth + 1];
+        now[i >> 6] &= ~(1L << i);
         for (int w = 0; w < words; w++) {
-            now[w] = free[depth][w] & ~apart[i][w];
+            now[w] &= ~apart[i][w];
+        }
+        if (i == upTo) {
+            narrow(now);
+            deepen(depth, with, left - weight[l]);
+        } else {
+            take(after[i], upTo, depth, with, left - weight[l]);
+        }
+        change(i, -1);
+    }
+
+    /** Leaves out lots that gain nothing any more or have no room. */
+    private void narrow(long[] now) {
+        for (int w = 0; w < words; w++) {
             for (long bits = now[w]; bits != 0; bits &= bits - 1) {
                 int j = (w << 6) + Long.numberOfTrailingZeros(bits);
                 if (gain[lot[j]] <= loses[j] || !fits(lot[j])) {
@@ -351,8 +400,10 @@ final class LoadSearch {
                 }
             }
         }
-        deepen(depth + 1, with, left - weight[l]);
-        change(i, -1);
+    }
+
+    private static boolean isIn(long[] lots, int i) {
+        return (lots[i >> 6] & 1L << i) != 0;
     }
 
     /**

@@ -2,6 +2,7 @@ package org.wardon.sharing.placing;
 
 import java.util.ArrayList;
 import java.util.Arrays;
+import java.util.BitSet;
 import java.util.Comparator;
 import java.util.List;
 import java.util.PriorityQueue;
@@ -220,7 +221,10 @@ public final class PlacingSearch {
         return all > 0 ? offers[offers.length - 1] : offers[offers.length / 2];
     }
 
-    /** Parts a lot: into the chamber it is most often in, or any other. */
+    /**
+     * Parts a lot: into the chamber it is most often in, or any other. Where it is not in that
+     * chamber no like lot is either: exchanged, it would be.
+     */
     private boolean partLots(Branch one, Branch other) {
         int lot = -1;
         int chamber = -1;
@@ -242,12 +246,18 @@ public final class PlacingSearch {
         if (lot < 0) {
             return false;
         }
+        BitSet like = new BitSet();
         for (int c = 0; c < store.chambers; c++) {
             if (c != chamber) {
                 one.lots[c].clear(lot);
             }
         }
-        other.lots[chamber].clear(lot);
+        for (int l = 0; l < store.lots; l++) {
+            if (other.alike(l, lot, store.likeness)) {
+                like.set(l);
+            }
+        }
+        other.lots[chamber].andNot(like);
         return true;
     }
 

@@ -278,7 +278,7 @@ final class Polish {
         }
         for (int a = 0; a < store.lots; a++) {
             for (int b = a + 1; b < store.lots; b++) {
-                if (trial.chamber[a] != trial.chamber[b]) {
+                if (trial.chamber[a] != trial.chamber[b] && !store.likeness.alike(a, b)) {
                     swap(a, b);
                 }
             }

@@ -52,6 +52,9 @@ final class Store {
     /** Nobody harms anybody. */
     final Company alone;
 
+    /** Which lots are alike. */
+    final Likeness likeness;
+
     Store(PlacingProblem problem) {
         lots = problem.lots().size();
         chambers = problem.chambers().size();
@@ -73,6 +76,7 @@ final class Store {
         for (int c = 0; c < chambers; c++) {
             fill(c, problem, known);
         }
+        likeness = new Likeness(this);
     }
 
     private static int[] order(int count, Comparator<Integer> by) {

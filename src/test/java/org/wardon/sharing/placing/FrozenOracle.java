@@ -13,6 +13,7 @@ import java.util.List;
 import java.util.Locale;
 import java.util.Map;
 import java.util.Objects;
+import java.util.stream.Stream;
 import java.util.zip.CRC32;
 
 /**
@@ -72,6 +73,12 @@ final class FrozenOracle {
         return new Drawn("mix-" + number + "-" + share, INSTANCES.draw(30, 4, mix, 10 + number), 3);
     }
 
+    /** Few crops on two days, lots of a crop alike. */
+    static Drawn alike(int seed) {
+        Mix mix = Mix.ofAllCrops(0.97).few(2, 2, true);
+        return new Drawn("alike-" + seed, INSTANCES.draw(20, 3, mix, seed), 20);
+    }
+
     /** What it answered; the store must be the one it was asked about. */
     Oracle.Answer answer(Drawn drawn) {
         double[] row = Objects.requireNonNull(rows.get(drawn.name()), drawn.name() + AGAIN);
@@ -116,13 +123,7 @@ final class FrozenOracle {
         }
     }
 
-    /**
-     * Asks the general solver about every store and writes the file.
-     *
-     * @param args none
-     * @throws IOException where the file cannot be written
-     */
-    public static void main(String[] args) throws IOException {
+    private static List<Drawn> all() {
         List<Drawn> all = new ArrayList<>();
         for (int seed = 1; seed <= 3; seed++) {
             all.add(large(seed));
@@ -132,24 +133,49 @@ final class FrozenOracle {
                 all.add(mixed(number, share));
             }
         }
+        for (int seed = 1; seed <= 4; seed++) {
+            all.add(alike(seed));
+        }
+        return all;
+    }
+
+    private static String asked(Drawn drawn) {
+        Oracle.Answer answer = Oracle.ask(drawn.problem(), drawn.seconds());
+        double value = answer.value() + 0.0;
+        double bound = answer.proven() ? value : answer.bound();
+        return String.format(
+                Locale.ROOT,
+                "%s,%.0f,%s,%s,%s",
+                drawn.name(),
+                drawn.seconds(),
+                digest(drawn.problem()),
+                value,
+                bound);
+    }
+
+    /**
+     * Asks the general solver and writes the file.
+     *
+     * @param args beginnings of the names of the stores to be asked about, the others keep their
+     *     rows; none for all
+     * @throws IOException where the file cannot be written
+     */
+    public static void main(String[] args) throws IOException {
+        List<String> known = lines();
         List<String> lines = new ArrayList<>();
         lines.add("# CP-SAT of OR-Tools, two threads, the seconds in the row; written by");
         lines.add(
                 "# org.wardon.sharing.placing.FrozenOracle of the tests. digest tells the store.");
         lines.add("store,seconds,digest,value,bound");
-        for (Drawn drawn : all) {
-            Oracle.Answer answer = Oracle.ask(drawn.problem(), drawn.seconds());
-            double value = answer.value() + 0.0;
-            double bound = answer.proven() ? value : answer.bound();
-            lines.add(
-                    String.format(
-                            Locale.ROOT,
-                            "%s,%.0f,%s,%s,%s",
-                            drawn.name(),
-                            drawn.seconds(),
-                            digest(drawn.problem()),
-                            value,
-                            bound));
+        for (Drawn drawn : all()) {
+            boolean anew = args.length == 0 || Stream.of(args).anyMatch(drawn.name()::startsWith);
+            if (anew) {
+                lines.add(asked(drawn));
+            } else {
+                known.stream()
+                        .filter(line -> line.startsWith(drawn.name() + ","))
+                        .forEach(lines::add);
+            }
         }
         Files.write(FILE, lines);
     }
