@@ -309,8 +309,15 @@ final class LoadSearch {
         }
     }
 
-    /** The bound of lots left, those that must not meet counted once, up to what is granted. */
+    /**
+     * The bound of lots left, those that must not meet counted once, up to what is granted. Where
+     * the room alone would count more than that, its price is lowered: else loads of lots worth no
+     * more than their room would be taken as covered.
+     */
     private double covered(long[] left, double room, double granted) {
+        if (slope * room > granted) {
+            slope = Math.max(0, granted) / room;
+        }
         cover.clear();
         for (int w = 0; w < words; w++) {
             for (long bits = left[w]; bits != 0; bits &= bits - 1) {
