@@ -349,7 +349,7 @@ final class LoadSearch {
             branch[w] = cover.uncovered(w);
         }
         for (int w = 0; w < words; w++) {
-            for (; branch[w] != 0; branch[w] &= branch[w] - 1) {
+            while (branch[w] != 0) {
                 int i = (w << 6) + Long.numberOfTrailingZeros(branch[w]);
                 include(i, depth, worth, left);
                 for (int k = i; k >= 0; k = after[k]) {
