@@ -263,12 +263,12 @@ final class AtTheDoor {
         double worth =
                 from.stream().mapToDouble(lot -> lot.massKg() * lot.market().pricePerKg()).sum();
         double price = kg > 0 ? worth / kg : Defaults.PRICE_PER_KG.value();
-        String told = String.format(Locale.ROOT, "%.2f", price);
-        String unit = (told + " " + plan.prices().currency()).strip();
+        String currency = plan.prices().currency();
         assume(
                 alike.isEmpty() ? "took-price" : "took-price-of-crop",
                 OWN_RULE,
-                Argument.text(unit));
+                Argument.of(price, "per kg"),
+                Argument.text(currency.isEmpty() ? "" : currency + " "));
         return price;
     }
 

@@ -84,6 +84,10 @@ public record Units(boolean fahrenheit, boolean pounds) {
             case "C" -> temperature(value);
             case "K" -> difference(value);
             case "kg" -> mass(value);
+            case "per kg" ->
+                    pounds
+                            ? format("%.2f a pound", value * KG_PER_LB)
+                            : format("%.2f a kilogram", value);
             case "g/m2" ->
                     pounds
                             ? format("%.2f oz/ft2", value / G_M2_PER_OZ_FT2)

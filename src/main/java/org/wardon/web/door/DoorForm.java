@@ -49,6 +49,9 @@ final class DoorForm {
                     "packed",
                     "comes");
 
+    /** The highest price that is taken, as a plan takes it, currency/kg. */
+    private static final double MOST_PER_KG = 1e6;
+
     private final UnaryOperator<String> typed;
     private final PageWords say;
     private final Figures figures;
@@ -190,7 +193,7 @@ final class DoorForm {
                 .orElse(field);
     }
 
-    /** Ranges of the two fields with units of their own are told in those units. */
+    /** Ranges of the fields with units of their own are told in those units. */
     private String told(Fault fault) {
         boolean isNumber = fault.found().startsWith("is ");
         if (isNumber && fault.file().equals("--temperature")) {
@@ -198,6 +201,10 @@ final class DoorForm {
         }
         if (isNumber && fault.file().equals("--mass")) {
             return say.say("door.between", figures.mass(0.1), figures.mass(500_000));
+        }
+        if (isNumber && fault.file().equals("--price")) {
+            String most = figures.typedPrice(MOST_PER_KG) + " / " + figures.massUnit();
+            return say.say("door.between", figures.typed(0), most);
         }
         return figures.text(fault.found() + "; " + fault.accepted());
     }

@@ -13,6 +13,11 @@ import org.wardon.advice.wording.Units;
 /** Writes numbers as a person likes to read them, and reads them as they like to write them. */
 public final class Figures {
     private static final MathContext TYPED = new MathContext(6);
+    private static final MathContext FOUR = new MathContext(4);
+
+    /** Digits of a number that was typed in another unit and is kept in the plan's. */
+    private static final MathContext KEPT = new MathContext(9);
+
     private static final Pattern POINT_BETWEEN_DIGITS = Pattern.compile("(?<=\\d)\\.(?=\\d)");
     private static final Pattern NUMBER = Pattern.compile("[-−+]?\\d{1,12}(\\.\\d{0,12})?");
     private static final DateTimeFormatter DAY =
@@ -150,10 +155,44 @@ public final class Figures {
      * Returns a mass as it stands in a field, without its unit.
      *
      * @param massKg kg
-     * @return up to six digits
+     * @return up to six digits of kg; of lb as few as {@link #typedTurned} gives
      */
     public String typedMass(double massKg) {
-        return typed(preferences.pounds() ? massKg / Units.KG_PER_LB : massKg);
+        return preferences.pounds() ? typedTurned(massKg, 1 / Units.KG_PER_LB) : typed(massKg);
+    }
+
+    /**
+     * Returns a price by mass as it stands in a field.
+     *
+     * @param pricePerKg currency/kg
+     * @return a preferred unit of mass, up to six digits of that of a kg; of a lb as few as {@link
+     *     #typedTurned} gives
+     */
+    public String typedPrice(double pricePerKg) {
+        return preferences.pounds() ? typedTurned(pricePerKg, Units.KG_PER_LB) : typed(pricePerKg);
+    }
+
+    /**
+     * Returns a number turned into another unit, as it stands in a field: the number somebody typed
+     * where what is kept came of it, else four digits, from 1000 on to the whole.
+     *
+     * @param kept the number in the unit it is kept in
+     * @param factor what makes the shown number of it, above 0
+     * @return the number in the other unit
+     */
+    public String typedTurned(double kept, double factor) {
+        BigDecimal shown = BigDecimal.valueOf(kept * factor);
+        BigDecimal same = BigDecimal.valueOf(kept).round(KEPT);
+        for (int digits = 1; digits <= TYPED.getPrecision(); digits++) {
+            BigDecimal few = shown.round(new MathContext(digits));
+            if (BigDecimal.valueOf(few.doubleValue() / factor).round(KEPT).compareTo(same) == 0) {
+                return typed(few.doubleValue());
+            }
+        }
+        BigDecimal four = shown.round(FOUR);
+        return typed(
+                (four.scale() < 0 ? shown.setScale(0, FOUR.getRoundingMode()) : four)
+                        .doubleValue());
     }
 
     /**

@@ -20,6 +20,7 @@ import org.wardon.web.pages.Figures;
  */
 final class FieldWords {
     private static final Pattern CELSIUS = Pattern.compile("(-?\\d+(?:\\.\\d+)?) °C");
+    private static final Pattern PER_KG = Pattern.compile("(\\d+(?:\\.\\d+)?) per kg\\b");
     private static final Pattern KILOGRAMS = Pattern.compile("(\\d+(?:\\.\\d+)?) kg\\b");
 
     private final Properties bundle;
@@ -67,7 +68,11 @@ final class FieldWords {
         if (!figures.temperatureUnit().equals("°C")) {
             shown = each(CELSIUS, shown, figures::temperature);
         }
-        return figures.massUnit().equals("kg") ? shown : each(KILOGRAMS, shown, figures::mass);
+        if (figures.massUnit().equals("kg")) {
+            return shown;
+        }
+        shown = each(KILOGRAMS, shown, figures::mass);
+        return each(PER_KG, shown, price -> figures.typedPrice(price) + " per lb");
     }
 
     private static String each(Pattern figure, String text, DoubleFunction<String> shown) {

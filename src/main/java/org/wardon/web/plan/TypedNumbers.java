@@ -3,6 +3,8 @@ package org.wardon.web.plan;
 import java.math.BigDecimal;
 import java.math.MathContext;
 import java.math.RoundingMode;
+import java.util.Map;
+import java.util.Objects;
 import java.util.Optional;
 import java.util.OptionalDouble;
 import org.wardon.advice.wording.Units;
@@ -13,7 +15,19 @@ import org.wardon.web.pages.Preferences;
 /** Numbers of a plan in the units and with the decimal mark a person likes. */
 final class TypedNumbers implements NumberText {
     private static final double PER_K = 1.8;
+
+    /** Units of the plan that hold a mass, and what a person who weighs in lb reads. */
+    private static final Map<String, Turned> OF_MASS =
+            Map.of(
+                    "kg", new Turned("lb", 1 / Units.KG_PER_LB),
+                    "kg/h", new Turned("lb/h", 1 / Units.KG_PER_LB),
+                    "kg/s", new Turned("lb/s", 1 / Units.KG_PER_LB),
+                    "per kg", new Turned("per lb", Units.KG_PER_LB));
+
     private static final MathContext KEPT = new MathContext(9);
+
+    /** A unit and what makes its number of the plan's. */
+    private record Turned(String unit, double factor) {}
 
     private final Preferences preferences;
     private final Figures figures;
@@ -25,7 +39,7 @@ final class TypedNumbers implements NumberText {
 
     private boolean turned(String unit) {
         return (preferences.fahrenheit() && (unit.equals("°C") || unit.equals("K")))
-                || (preferences.pounds() && unit.equals("kg"));
+                || (preferences.pounds() && OF_MASS.containsKey(unit));
     }
 
     @Override
@@ -37,13 +51,17 @@ final class TypedNumbers implements NumberText {
         return switch (unit) {
             case "°C" -> figures.typedTemperature(value);
             case "K" -> figures.typed(PER_K * value);
-            default -> figures.typedMass(value);
+            default -> figures.typedTurned(value, ofMass(unit).factor());
         };
     }
 
+    private static Turned ofMass(String unit) {
+        return Objects.requireNonNull(OF_MASS.get(unit), unit);
+    }
+
     /**
-     * A bound of what may be typed: of a mass in lb three digits, so that it is read easily, and no
-     * further than the plan's own bound reaches.
+     * A bound of what may be typed: of a mass in lb, or a price by it, three digits, so that it is
+     * read easily, and no further than the plan's own bound reaches.
      *
      * @param value the bound in the plan's unit
      * @param unit the plan's unit
@@ -51,10 +69,10 @@ final class TypedNumbers implements NumberText {
      */
     String bound(double value, String unit, RoundingMode inward) {
         String plain = BigDecimal.valueOf(value).stripTrailingZeros().toPlainString();
-        if (!turned(unit) || !unit.equals("kg")) {
+        if (!preferences.pounds() || !OF_MASS.containsKey(unit)) {
             return shown(plain, unit);
         }
-        BigDecimal pounds = BigDecimal.valueOf(value / Units.KG_PER_LB);
+        BigDecimal pounds = BigDecimal.valueOf(value * ofMass(unit).factor());
         BigDecimal few = pounds.round(new MathContext(3, inward));
         return figures.typed(few.doubleValue());
     }
@@ -72,7 +90,7 @@ final class TypedNumbers implements NumberText {
                 switch (unit) {
                     case "°C" -> figures.temperatureC(typed).orElseThrow();
                     case "K" -> number.getAsDouble() / PER_K;
-                    default -> figures.massKg(typed).orElseThrow();
+                    default -> number.getAsDouble() / ofMass(unit).factor();
                 };
         BigDecimal kept = BigDecimal.valueOf(value).round(KEPT).stripTrailingZeros();
         return Optional.of(kept.signum() == 0 ? "0" : kept.toPlainString());
@@ -89,6 +107,6 @@ final class TypedNumbers implements NumberText {
         if (!turned(unit)) {
             return unit;
         }
-        return unit.equals("kg") ? figures.massUnit() : "°F";
+        return OF_MASS.containsKey(unit) ? ofMass(unit).unit() : "°F";
     }
 }

@@ -19,6 +19,7 @@ class UnitsTest {
         "2, K, 2.0 K, 4 °F",
         "800, kg, 800 kg, 1 764 lb",
         "12345, kg, 12 345 kg, 27 216 lb",
+        "1.2, per kg, 1.20 a kilogram, 0.54 a pound",
         "170, m3/h, 170 m3/h, 100 ft3/min",
         "115, g/m2, 115 g/m2, 0.38 oz/ft2",
         "1, day, 1 day, 1 day",
