@@ -26,13 +26,15 @@ import org.wardon.reference.ReferenceBook;
 /**
  * Tries chambers of a store quickly: as they stand, with one more lot, and built or set otherwise.
  * As in a forecast, one run follows each opening of a door, and the draws take doors and defrosts
- * averaged; only the chamber in question runs, with those that lots are carried to or from, its
- * neighbours as they are in the plan. May be asked by several threads at once.
+ * averaged, of which the bodies of sixteen stand for all ({@link TypicalBodies}); only the chamber
+ * in question runs, with those that lots are carried to or from, its neighbours as they are in the
+ * plan. May be asked by several threads at once.
  */
 public final class ChamberTrials {
     private final StoreModel model;
     private final LotSheets sheets;
     private final List<Draw> draws;
+    private final List<Draw> standsFor;
     private final Map<String, AirSeries> neighbours;
     private final Map<String, ChamberTrial> standing;
 
@@ -41,6 +43,7 @@ public final class ChamberTrials {
         model = prepared.model();
         sheets = prepared.lots();
         draws = Draws.seeded(model.plan().seed(), count);
+        standsFor = TypicalBodies.of(draws, TypicalBodies.MANY);
         neighbours = model.agreedAir(model.plan().durationS());
         Map<String, StoreModel> all = new LinkedHashMap<>();
         model.plan().chambers().stream()
@@ -189,16 +192,21 @@ public final class ChamberTrials {
                 models.entrySet().parallelStream()
                         .map(entry -> setup(entry.getValue(), entry.getKey()))
                         .toList();
-        int each = draws.size();
-        List<Map<String, Fates.Two>> ends =
+        List<Draw> bodies = standsFor.stream().distinct().toList();
+        int each = bodies.size();
+        List<Map<Draw, Map<String, Fates.Two>>> ends =
                 IntStream.range(0, setups.size() * each)
                         .parallel()
-                        .mapToObj(i -> drawn(setups.get(i / each), draws.get(i % each)))
+                        .mapToObj(i -> drawn(setups.get(i / each), bodies.get(i % each)))
                         .toList();
         List<ChamberTrial> trials =
                 IntStream.range(0, setups.size())
                         .parallel()
-                        .mapToObj(i -> trial(setups.get(i), ends.subList(i * each, (i + 1) * each)))
+                        .mapToObj(
+                                i ->
+                                        trial(
+                                                setups.get(i),
+                                                inOrder(ends.subList(i * each, (i + 1) * each))))
                         .toList();
         Map<String, ChamberTrial> byId = new LinkedHashMap<>();
         trials.forEach(trial -> byId.put(trial.chamber().id(), trial));
@@ -243,10 +251,25 @@ public final class ChamberTrials {
                         });
     }
 
-    private Map<String, Fates.Two> drawn(Setup setup, Draw draw) {
+    /** What comes of the draws that the body of one stands for; the heat runs for that one. */
+    private Map<Draw, Map<String, Fates.Two>> drawn(Setup setup, Draw body) {
         Map<String, Course> courses =
-                setup.model().drawn(setup.chambers(), draw, setup.endS(), neighbours);
-        return followed(setup, setup.fates().ethylene(courses, draw).histories(), draw, true);
+                setup.model().drawn(setup.chambers(), body, setup.endS(), neighbours);
+        Map<Draw, Map<String, Fates.Two>> ends = new HashMap<>();
+        for (int i = 0; i < draws.size(); i++) {
+            if (standsFor.get(i).equals(body)) {
+                Draw draw = draws.get(i);
+                Map<String, LotHistory> there = setup.fates().ethylene(courses, draw).histories();
+                ends.put(draw, followed(setup, there, draw, true));
+            }
+        }
+        return ends;
+    }
+
+    private List<Map<String, Fates.Two>> inOrder(List<Map<Draw, Map<String, Fates.Two>>> parts) {
+        Map<Draw, Map<String, Fates.Two>> all = new HashMap<>();
+        parts.forEach(all::putAll);
+        return draws.stream().map(all::get).toList();
     }
 
     private static Map<String, Fates.Two> followed(

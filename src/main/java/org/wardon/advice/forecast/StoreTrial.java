@@ -52,7 +52,7 @@ public final class StoreTrial {
         fates = new Fates(model);
         lots = model.sheets().stream().map(TrialLot::new).toList();
         draws = Draws.seeded(model.plan().seed(), StoreRun.DRAWS);
-        standsFor = TypicalBodies.of(draws);
+        standsFor = TypicalBodies.of(draws, TypicalBodies.FEW);
         typical = new LinkedHashSet<>(standsFor);
     }
 

@@ -12,17 +12,27 @@ import org.wardon.keeping.Draw;
  * again; the body of the middle of each part stands for the part.
  */
 final class TypicalBodies {
-    private static final int BY_PACKAGE = 4;
+    /** Parts by package for a lot in an air that is there. */
+    static final int FEW = 4;
+
+    /** Parts by package for a whole chamber. */
+    static final int MANY = 8;
+
     private static final int BY_WATER = 2;
 
     private TypicalBodies() {}
 
-    /** The draw that stands for each draw, in their order. */
-    static List<Draw> of(List<Draw> draws) {
+    /**
+     * The draw that stands for each draw, in their order.
+     *
+     * @param draws all draws
+     * @param byPackage parts by how fast a package cools, each of two by how fast water is lost
+     */
+    static List<Draw> of(List<Draw> draws, int byPackage) {
         List<Draw> standing = new ArrayList<>(Collections.nCopies(draws.size(), draws.get(0)));
         List<Draw> sorted = new ArrayList<>(draws);
         sorted.sort(Comparator.comparingDouble(Draw::packaging));
-        for (List<Draw> like : parts(sorted, BY_PACKAGE)) {
+        for (List<Draw> like : parts(sorted, byPackage)) {
             List<Draw> byWater = new ArrayList<>(like);
             byWater.sort(Comparator.comparingDouble(Draw::transpiration));
             for (List<Draw> part : parts(byWater, BY_WATER)) {

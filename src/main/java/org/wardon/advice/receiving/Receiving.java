@@ -21,8 +21,8 @@ import org.wardon.reference.ReferenceBook;
  * forecast. May be asked by several threads at once; the book is to stay open.
  */
 public final class Receiving {
-    /** Draws of a small store: half of a forecast's, so that nobody waits at the door. */
-    private static final int MOST_DRAWS = 16;
+    /** Draws of a small store, as many as a forecast takes. */
+    private static final int MOST_DRAWS = 32;
 
     /** Least draws: the tenth and ninetieth percentile still lie inside. */
     private static final int LEAST_DRAWS = 8;
@@ -35,10 +35,10 @@ public final class Receiving {
     private final ChamberTrials trials;
     private final int draws;
 
-    private Receiving(StorePlan plan, ReferenceBook book, Words words, int most) {
+    private Receiving(StorePlan plan, ReferenceBook book, Words words) {
         this.book = book;
         this.words = words;
-        draws = Math.min(most, draws(plan));
+        draws = draws(plan);
         trials = ChamberTrials.of(plan, book, words, draws);
     }
 
@@ -52,25 +52,20 @@ public final class Receiving {
      * @throws org.wardon.errors.RunStopped where a chamber meets a state that cannot be
      */
     public static Receiving of(StorePlan plan, ReferenceBook book, Words words) {
-        return new Receiving(plan, book, words, MOST_DRAWS);
-    }
-
-    /** The same in no more draws than told. */
-    static Receiving inDraws(StorePlan plan, ReferenceBook book, Words words, int most) {
-        return new Receiving(plan, book, words, most);
+        return new Receiving(plan, book, words);
     }
 
     /** Fewer draws for large stores, by the size of the store, so that answers repeat. */
     private static int draws(StorePlan plan) {
         double lots = plan.lots().size() + 2.0 * plan.chambers().size();
         double affordable = LOT_DAYS / (lots * Math.max(1, plan.days()));
-        return (int) Math.max(LEAST_DRAWS, 2 * Math.floor(affordable / 2));
+        return (int) Math.max(LEAST_DRAWS, Math.min(MOST_DRAWS, 2 * Math.floor(affordable / 2)));
     }
 
     /**
      * Returns how many draws stand behind each answer.
      *
-     * @return 8 to 16
+     * @return 8 to 32
      */
     public int draws() {
         return draws;

@@ -101,7 +101,7 @@ class ReceivingTest {
     @Test
     void agreesWithTheForecastOfThePlanWithTheLotPutIn() {
         StorePlan demo = Stores.demo(BOOK);
-        Receiving receiving = Receiving.inDraws(demo, BOOK, Stores.WORDS, 32);
+        Receiving receiving = Receiving.of(demo, BOOK, Stores.WORDS);
         assertEquals(32, receiving.draws());
         List<NewLot> comers =
                 List.of(
