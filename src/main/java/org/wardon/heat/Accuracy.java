@@ -38,6 +38,11 @@ record Accuracy(double lotK, double airK, Integrator.Steps steps) {
         };
     }
 
+    /** The first step tried, s. */
+    double firstStepS() {
+        return steps == Integrator.Steps.LONG ? 300 : 2;
+    }
+
     Accuracy(double lotK, double airK) {
         this(lotK, airK, Integrator.Steps.FINE);
     }

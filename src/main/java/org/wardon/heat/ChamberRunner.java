@@ -25,10 +25,6 @@ final class ChamberRunner implements Integrator.StepListener {
     private static final double COLDEST_C = -60;
     private static final double WARMEST_C = 90;
     private static final double SHORTEST_STEP_S = 1e-5;
-    private static final double FIRST_STEP_S = 2;
-
-    /** The same of a run in long steps. */
-    private static final double FIRST_LONG_STEP_S = 300;
 
     /** Kinds of edges whose first steps are remembered apart: the schedule's, and two more. */
     private static final List<Edge.Kind> SCHEDULED = List.of(Edge.Kind.values());
@@ -85,9 +81,9 @@ final class ChamberRunner implements Integrator.StepListener {
         this.y = start;
         network.accuracy(accuracy.lotK(), accuracy.airK());
         network.settle(y);
-        boolean longSteps = accuracy.steps() == Integrator.Steps.LONG;
-        double firstS = longSteps ? FIRST_LONG_STEP_S : FIRST_STEP_S;
-        integrator = new Integrator(network, accuracy.steps(), EDGES, firstS, SHORTEST_STEP_S);
+        integrator =
+                new Integrator(
+                        network, accuracy.steps(), EDGES, accuracy.firstStepS(), SHORTEST_STEP_S);
         totals = integrator.totals();
         thermostats = new SwitchedCoolers(network);
         watering = new Watering(run, network, y);

@@ -10,7 +10,6 @@ import org.wardon.lots.RespirationLaw;
 /** Takes one lot through air that is given. */
 final class GivenAirRunner implements Integrator.StepListener, Integrator.Trigger {
     private static final double SHORTEST_STEP_S = 1e-5;
-    private static final double FIRST_STEP_S = 10;
     private static final double LEAST_STRETCH_S = 1e-6;
 
     private final Stay stay;
@@ -32,7 +31,9 @@ final class GivenAirRunner implements Integrator.StepListener, Integrator.Trigge
         Accuracy accuracy = air.rowHours() > 1 ? Accuracy.SKETCHED : Accuracy.EVEN;
         network.accuracy(accuracy.lotK(), accuracy.airK());
         rowS = 3600.0 * air.rowHours();
-        integrator = new Integrator(network, accuracy.steps(), 1, FIRST_STEP_S, SHORTEST_STEP_S);
+        integrator =
+                new Integrator(
+                        network, accuracy.steps(), 1, accuracy.firstStepS(), SHORTEST_STEP_S);
         int rows = (int) Math.ceil((endS - startS()) / rowS) + 3;
         recorder = new LotRecorder(stay, network.lot(), rows, air.rowHours() > 1);
     }

@@ -29,7 +29,9 @@ import org.wardon.reference.Variants;
 final class AtTheDoor {
     private static final String OWN_RULE = "assumption";
     private static final String PRACTICE = "common-practice";
-    private static final double MOST_HOURS = 8_760;
+    private static final NewLot.Limits HOURS_AGO = new NewLot.Limits(0, 8_760);
+    private static final NewLot.Limits WANTED_DAYS = new NewLot.Limits(0.1, 730);
+    private static final NewLot.Limits MARKET_DAYS = new NewLot.Limits(0, 60);
 
     private final StorePlan plan;
     private final ReferenceBook book;
@@ -123,14 +125,14 @@ final class AtTheDoor {
     }
 
     private void check() {
-        within("--mass", OptionalDouble.of(told.massKg()), 0.1, 500_000, "kg, net");
+        within("--mass", OptionalDouble.of(told.massKg()), NewLot.MASS_KG, "kg, net");
         NewLot.Fruit fruit = told.fruit();
-        within("--temperature", fruit.temperatureC(), -5, 55, "°C, measured in the flesh");
-        within("--harvested", fruit.harvestedHoursAgo(), 0, MOST_HOURS, "hours ago");
+        within("--temperature", fruit.temperatureC(), NewLot.PULP_C, "°C, measured in the flesh");
+        within("--harvested", fruit.harvestedHoursAgo(), HOURS_AGO, "hours ago");
         NewLot.Wish wish = told.wish();
-        within("--days", wish.wantedDays(), 0.1, 730, "days");
-        within("--market-days", wish.marketDays(), 0, 60, "days");
-        within("--price", wish.pricePerKg(), 0, 1e6, "a kilogram");
+        within("--days", wish.wantedDays(), WANTED_DAYS, "days");
+        within("--market-days", wish.marketDays(), MARKET_DAYS, "days");
+        within("--price", wish.pricePerKg(), NewLot.PRICE_PER_KG, "a kilogram");
         fruit.packed().ifPresent(this::known);
     }
 
@@ -150,7 +152,9 @@ final class AtTheDoor {
         }
     }
 
-    private void within(String what, OptionalDouble given, double low, double high, String unit) {
+    private void within(String what, OptionalDouble given, NewLot.Limits taken, String unit) {
+        double low = taken.low();
+        double high = taken.high();
         if (given.isPresent() && !(given.getAsDouble() >= low && given.getAsDouble() <= high)) {
             faults.add(
                     new Fault(

@@ -15,6 +15,23 @@ import org.wardon.produce.Ripeness;
  * @param wish when it comes and what it is to become
  */
 public record NewLot(String commodity, double massKg, Fruit fruit, Wish wish) {
+    /** Masses that are taken, kg, as a plan takes them. */
+    public static final Limits MASS_KG = new Limits(0.1, 500_000);
+
+    /** Temperatures of the flesh that are taken, °C, as a plan takes them. */
+    public static final Limits PULP_C = new Limits(-5, 55);
+
+    /** Prices that are taken, currency/kg, as a plan takes them. */
+    public static final Limits PRICE_PER_KG = new Limits(0, 1e6);
+
+    /**
+     * What is taken of a number.
+     *
+     * @param low the least
+     * @param high the most
+     */
+    public record Limits(double low, double high) {}
+
     /**
      * What was seen and measured.
      *

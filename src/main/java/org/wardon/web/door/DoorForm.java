@@ -8,6 +8,7 @@ import java.util.Locale;
 import java.util.Map;
 import java.util.Optional;
 import java.util.OptionalDouble;
+import java.util.function.DoubleFunction;
 import java.util.function.UnaryOperator;
 import org.wardon.advice.receiving.NewLot;
 import org.wardon.errors.BadInput;
@@ -48,9 +49,6 @@ final class DoorForm {
                     "price",
                     "packed",
                     "comes");
-
-    /** The highest price that is taken, as a plan takes it, currency/kg. */
-    private static final double MOST_PER_KG = 1e6;
 
     private final UnaryOperator<String> typed;
     private final PageWords say;
@@ -197,16 +195,21 @@ final class DoorForm {
     private String told(Fault fault) {
         boolean isNumber = fault.found().startsWith("is ");
         if (isNumber && fault.file().equals("--temperature")) {
-            return say.say("door.between", figures.temperature(-5), figures.temperature(55));
+            return between(NewLot.PULP_C, figures::temperature);
         }
         if (isNumber && fault.file().equals("--mass")) {
-            return say.say("door.between", figures.mass(0.1), figures.mass(500_000));
+            return between(NewLot.MASS_KG, figures::mass);
         }
         if (isNumber && fault.file().equals("--price")) {
-            String most = figures.typedPrice(MOST_PER_KG) + " / " + figures.massUnit();
-            return say.say("door.between", figures.typed(0), most);
+            return between(
+                    NewLot.PRICE_PER_KG,
+                    price -> figures.typedPrice(price) + " / " + figures.massUnit());
         }
         return figures.text(fault.found() + "; " + fault.accepted());
+    }
+
+    private String between(NewLot.Limits taken, DoubleFunction<String> shown) {
+        return say.say("door.between", shown.apply(taken.low()), shown.apply(taken.high()));
     }
 
     List<DoorView.Pick> ripeness(boolean stages) {

@@ -16,7 +16,7 @@ public final class Figures {
     private static final MathContext FOUR = new MathContext(4);
 
     /** Digits of a number that was typed in another unit and is kept in the plan's. */
-    private static final MathContext KEPT = new MathContext(9);
+    public static final MathContext KEPT = new MathContext(9);
 
     private static final Pattern POINT_BETWEEN_DIGITS = Pattern.compile("(?<=\\d)\\.(?=\\d)");
     private static final Pattern NUMBER = Pattern.compile("[-−+]?\\d{1,12}(\\.\\d{0,12})?");
@@ -152,21 +152,10 @@ public final class Figures {
     }
 
     /**
-     * Returns a mass as it stands in a field, without its unit.
-     *
-     * @param massKg kg
-     * @return up to six digits of kg; of lb as few as {@link #typedTurned} gives
-     */
-    public String typedMass(double massKg) {
-        return preferences.pounds() ? typedTurned(massKg, 1 / Units.KG_PER_LB) : typed(massKg);
-    }
-
-    /**
-     * Returns a price by mass as it stands in a field.
+     * Returns the price of the preferred unit of mass, as it stands in a field.
      *
      * @param pricePerKg currency/kg
-     * @return a preferred unit of mass, up to six digits of that of a kg; of a lb as few as {@link
-     *     #typedTurned} gives
+     * @return up to six digits of the price of a kg; of a lb as few as {@link #typedTurned} gives
      */
     public String typedPrice(double pricePerKg) {
         return preferences.pounds() ? typedTurned(pricePerKg, Units.KG_PER_LB) : typed(pricePerKg);

@@ -24,8 +24,6 @@ final class TypedNumbers implements NumberText {
                     "kg/s", new Turned("lb/s", 1 / Units.KG_PER_LB),
                     "per kg", new Turned("per lb", Units.KG_PER_LB));
 
-    private static final MathContext KEPT = new MathContext(9);
-
     /** A unit and what makes its number of the plan's. */
     private record Turned(String unit, double factor) {}
 
@@ -92,7 +90,7 @@ final class TypedNumbers implements NumberText {
                     case "K" -> number.getAsDouble() / PER_K;
                     default -> number.getAsDouble() / ofMass(unit).factor();
                 };
-        BigDecimal kept = BigDecimal.valueOf(value).round(KEPT).stripTrailingZeros();
+        BigDecimal kept = BigDecimal.valueOf(value).round(Figures.KEPT).stripTrailingZeros();
         return Optional.of(kept.signum() == 0 ? "0" : kept.toPlainString());
     }
 

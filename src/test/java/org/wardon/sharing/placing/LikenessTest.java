@@ -2,7 +2,6 @@ package org.wardon.sharing.placing;
 
 import static org.junit.jupiter.api.Assertions.assertArrayEquals;
 import static org.junit.jupiter.api.Assertions.assertEquals;
-import static org.junit.jupiter.api.Assertions.assertFalse;
 import static org.junit.jupiter.api.Assertions.assertTrue;
 
 import java.util.ArrayList;
@@ -111,7 +110,7 @@ class LikenessTest {
     }
 
     @ParameterizedTest(name = "seed {0}")
-    @ValueSource(ints = {2, 3, 4})
+    @ValueSource(ints = {1, 2, 3, 4})
     void provesWhatTheGeneralSolverProvesOfLikeLots(int seed) {
         FrozenOracle.Drawn drawn = FrozenOracle.alike(seed);
         PlacingAnswer ours = search(drawn.problem());
@@ -150,6 +149,6 @@ class LikenessTest {
         Mix mix = Mix.ofAllCrops(0.97).few(8, 3, true);
         PlacingAnswer ours = search(INSTANCES.draw(200, 12, mix, 1));
         assertTrue(ours.gapPct() <= 1, ours.gapPct() + " %");
-        assertFalse(ours.placing().value() <= 0, ours.toString());
+        assertTrue(ours.placing().value() > 0, ours.toString());
     }
 }
