@@ -45,7 +45,7 @@ class ReceiveIT {
     void theFirstLineIsTheSentenceAKeeperNeeds() {
         String page = WardonJar.run(mango()).good().out();
         assertTrue(page.startsWith("Put the 800 kg of mango into fruit"), page);
-        assertTrue(page.contains("Ranges over 16 draws"), page);
+        assertTrue(page.contains("Ranges over 32 draws"), page);
         assertFalse(page.contains("NaN") || page.contains("{"), page);
         assertTrue(page.lines().allMatch(line -> line.length() <= 100), page);
     }
