@@ -14,6 +14,7 @@ import java.nio.file.Path;
 import java.util.List;
 import org.junit.jupiter.api.BeforeAll;
 import org.junit.jupiter.api.Test;
+import org.junit.jupiter.api.io.TempDir;
 import org.junit.jupiter.params.ParameterizedTest;
 import org.junit.jupiter.params.provider.ValueSource;
 import org.wardon.web.ManyLots;
@@ -30,10 +31,13 @@ class AllChambersIT extends InBrowser {
     private String plan = "";
 
     @BeforeAll
-    void openDemo() {
-        Page empty = show("/plans", PHONE);
-        hold(empty, "plans-empty");
-        empty.close();
+    void openDemo(@TempDir Path home) {
+        try (Served fresh = Served.from(home)) {
+            Page empty = tab(PHONE);
+            empty.navigate(fresh.address() + "/plans");
+            hold(empty, "plans-empty");
+            empty.close();
+        }
         plan = demo();
     }
 

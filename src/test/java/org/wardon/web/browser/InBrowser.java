@@ -3,10 +3,9 @@ package org.wardon.web.browser;
 import static org.junit.jupiter.api.Assertions.assertEquals;
 import static org.junit.jupiter.api.Assertions.assertTrue;
 
+import com.microsoft.playwright.Browser;
 import com.microsoft.playwright.BrowserContext;
-import com.microsoft.playwright.BrowserType;
 import com.microsoft.playwright.Page;
-import com.microsoft.playwright.Playwright;
 import com.microsoft.playwright.options.ColorScheme;
 import java.io.IOException;
 import java.io.InputStream;
@@ -15,18 +14,17 @@ import java.nio.charset.StandardCharsets;
 import java.nio.file.Path;
 import java.util.ArrayList;
 import java.util.List;
-import java.util.Map;
 import java.util.Objects;
 import org.jspecify.annotations.Nullable;
 import org.junit.jupiter.api.AfterAll;
 import org.junit.jupiter.api.AfterEach;
 import org.junit.jupiter.api.BeforeAll;
 import org.junit.jupiter.api.TestInstance;
-import org.junit.jupiter.api.io.TempDir;
 
 /**
  * Pages in Chromium, on a phone and on a desk, from the packed program. Every test ends with the
- * browser having complained of nothing.
+ * browser having complained of nothing. Program and browser are those of {@link Running}; each
+ * class has windows, cookies and a session of its own.
  */
 @TestInstance(TestInstance.Lifecycle.PER_CLASS)
 public abstract class InBrowser {
@@ -43,30 +41,27 @@ public abstract class InBrowser {
     private static final String RULES =
             "['wcag2a','wcag2aa','wcag21a','wcag21aa','wcag22aa','best-practice']";
 
+    private static final String AXE = axe();
+
     private final List<String> complaints = new ArrayList<>();
-    private @Nullable Served served;
-    private @Nullable Playwright playwright;
-    private @Nullable BrowserContext browser;
+    private @Nullable Running running;
+    private @Nullable BrowserContext windows;
 
     @BeforeAll
-    void start(@TempDir Path home, @TempDir Path profile) {
+    void start() {
         Absent.orHere();
-        served = Served.from(home);
-        Map<String, String> driver =
-                Map.of(
-                        "PLAYWRIGHT_SKIP_BROWSER_DOWNLOAD",
-                        "1",
-                        "PLAYWRIGHT_NODEJS_PATH",
-                        Absent.NODE.toString());
-        playwright = Playwright.create(new Playwright.CreateOptions().setEnv(driver));
-        browser = playwright.chromium().launchPersistentContext(profile, options(scripted()));
-        browser.onConsoleMessage(
+        running = Running.here();
+        windows =
+                running.browser()
+                        .newContext(
+                                new Browser.NewContextOptions().setJavaScriptEnabled(scripted()));
+        windows.onConsoleMessage(
                 message -> {
                     if (List.of("error", "warning").contains(message.type())) {
                         complaints.add(message.text());
                     }
                 });
-        browser.onWebError(error -> complaints.add(error.error()));
+        windows.onWebError(error -> complaints.add(error.error()));
     }
 
     /** Whether pages may run scripts. */
@@ -74,30 +69,10 @@ public abstract class InBrowser {
         return true;
     }
 
-    private static BrowserType.LaunchPersistentContextOptions options(boolean scripted) {
-        return new BrowserType.LaunchPersistentContextOptions()
-                .setExecutablePath(Absent.CHROMIUM)
-                .setHeadless(true)
-                .setJavaScriptEnabled(scripted)
-                .setChromiumSandbox(false)
-                .setArgs(
-                        List.of(
-                                "--no-sandbox",
-                                "--disable-gpu",
-                                "--disable-quic",
-                                "--no-first-run",
-                                "--disable-background-networking",
-                                "--disable-component-update",
-                                "--disable-sync"));
-    }
-
     @AfterAll
     void stop() {
-        if (playwright != null) {
-            playwright.close();
-        }
-        if (served != null) {
-            served.close();
+        if (windows != null) {
+            windows.close();
         }
     }
 
@@ -108,12 +83,12 @@ public abstract class InBrowser {
 
     /** The address of the program. */
     protected String address() {
-        return Objects.requireNonNull(served).address();
+        return Objects.requireNonNull(running).address();
     }
 
     /** A new tab of this width. */
     protected Page tab(int width) {
-        Page page = Objects.requireNonNull(browser).newPage();
+        Page page = Objects.requireNonNull(windows).newPage();
         page.setViewportSize(width, HEIGHT);
         return page;
     }
@@ -125,8 +100,17 @@ public abstract class InBrowser {
         return page;
     }
 
-    /** Opens the demo by its one press and waits for its forecast; returns the path of its plan. */
+    /** The path of a demo that is only looked at, its forecast ready. */
     protected String demo() {
+        String path = Objects.requireNonNull(running).demo(this::ownDemo);
+        Page page = show(path, DESK);
+        page.waitForSelector("section.chamber .strip");
+        page.close();
+        return path;
+    }
+
+    /** Opens a demo by its one press and waits for its forecast; returns the path of its plan. */
+    protected String ownDemo() {
         Page page = show("/plans", DESK);
         page.click("form[action='/plans/demo'] button");
         page.waitForSelector("section.chamber .strip");
@@ -164,10 +148,13 @@ public abstract class InBrowser {
     }
 
     private static String breaches(Page page) {
-        page.evaluate(axe());
+        if (page.evaluate("() => typeof axe").equals("undefined")) {
+            page.evaluate(AXE);
+        }
+        // What passes need not be listed node by node.
         Object found =
                 page.evaluate(
-                        "() => axe.run(document, {runOnly: "
+                        "() => axe.run(document, {resultTypes: ['violations'], runOnly: "
                                 + RULES
                                 + "}).then(done => done.violations.map(one => one.id + ': ' +"
                                 + " one.nodes.map(node => node.target.join(' ') + ' (' +"

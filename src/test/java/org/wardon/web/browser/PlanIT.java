@@ -23,7 +23,7 @@ class PlanIT extends InBrowser {
 
     @BeforeAll
     void openDemo() {
-        plan = demo();
+        plan = ownDemo();
     }
 
     private Page part(String path, int width) {
