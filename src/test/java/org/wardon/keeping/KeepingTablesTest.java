@@ -3,12 +3,9 @@ package org.wardon.keeping;
 import static org.junit.jupiter.api.Assertions.assertEquals;
 import static org.junit.jupiter.api.Assertions.assertTrue;
 
-import java.util.List;
 import org.junit.jupiter.api.Test;
 import org.wardon.Source;
-import org.wardon.air.Timeline;
 import org.wardon.keeping.life.GenericCurve;
-import org.wardon.lots.LotHistory;
 import org.wardon.produce.rows.Q10Row;
 
 /** Figures that stand in the keeping room against the tables they come from. */
@@ -38,30 +35,5 @@ class KeepingTablesTest {
         for (int i = 0; i < printed.length; i++) {
             assertEquals(printed[i], 100 / Math.exp(curve.lnRate(10 * i)), 0.5);
         }
-    }
-
-    @Test
-    void twelveLotsInThirtyTwoDrawsOverTenDaysTakeLittle() {
-        LotHistory.Builder hours = new LotHistory.Builder();
-        for (int h = 0; h <= 240; h++) {
-            double t = 12 + 2 * Math.sin(h * Math.PI / 12);
-            hours.add(h * Timeline.HOUR_S, t, t, t, 0.9, 0.1, false);
-        }
-        LotHistory history = hours.build();
-        KeepingModel model = Crops.model("mango");
-        List<Draw> draws = Draws.seeded(1, 32);
-        double best = Double.POSITIVE_INFINITY;
-        for (int run = 0; run < 5; run++) {
-            long start = System.nanoTime();
-            double sum = 0;
-            for (int lot = 0; lot < 12; lot++) {
-                for (Draw draw : draws) {
-                    sum += model.follow(history, draw).daysLeft(0);
-                }
-            }
-            assertTrue(sum > 0);
-            best = Math.min(best, (System.nanoTime() - start) * 1e-9);
-        }
-        assertTrue(best < 0.4, best + " s");
     }
 }
