@@ -1,18 +1,27 @@
 package org.wardon.sharing.placing;
 
+import java.util.Arrays;
 import java.util.BitSet;
 
 /**
- * A part of all placings: which climates each chamber may still have and which lots it may hold.
+ * A part of all placings: which climates each chamber may still have and how many lots of each kind
+ * it holds. Which of the like lots these are makes no difference, so it is not said. A kind goes by
+ * its first lot; what is kept by kind stands there.
  */
 final class Branch {
     /** {@code [chamber]}, climates by number. */
     final BitSet[] offers;
 
-    /** {@code [chamber]}, lots. */
-    final BitSet[] lots;
+    /** {@code [chamber][kind]}, lots it holds at least. */
+    final int[][] least;
 
-    /** {@code [lot]}, the prices that bound this part best. */
+    /** {@code [chamber][kind]}, lots it holds at most. */
+    final int[][] most;
+
+    /** {@code [kind]}, lots there are. */
+    final int[] count;
+
+    /** {@code [kind]}, the prices that bound this part best. */
     double[] price;
 
     /** No placing of this part is worth more. */
@@ -21,9 +30,18 @@ final class Branch {
     /** In which order it was made; among equals the older is looked into first. */
     final int number;
 
-    private Branch(BitSet[] offers, BitSet[] lots, double[] price, double bound, int number) {
+    private Branch(
+            BitSet[] offers,
+            int[][] least,
+            int[][] most,
+            int[] count,
+            double[] price,
+            double bound,
+            int number) {
         this.offers = offers;
-        this.lots = lots;
+        this.least = least;
+        this.most = most;
+        this.count = count;
         this.price = price;
         this.bound = bound;
         this.number = number;
@@ -31,54 +49,81 @@ final class Branch {
 
     static Branch whole(Store store) {
         BitSet[] offers = new BitSet[store.chambers];
-        BitSet[] lots = new BitSet[store.chambers];
+        int[][] least = new int[store.chambers][store.lots];
+        int[][] most = new int[store.chambers][store.lots];
+        int[] count = store.likeness.count.clone();
         for (int c = 0; c < store.chambers; c++) {
             offers[c] = new BitSet();
             offers[c].set(0, store.offers(c));
-            lots[c] = new BitSet();
             for (int l = 0; l < store.lots; l++) {
-                lots[c].set(l, store.mayStand(c, l));
+                most[c][l] = store.mayStand(c, l) ? count[l] : 0;
             }
         }
-        return new Branch(offers, lots, new double[store.lots], Double.POSITIVE_INFINITY, 0);
+        double[] price = new double[store.lots];
+        return new Branch(offers, least, most, count, price, Double.POSITIVE_INFINITY, 0);
     }
 
     Branch copy(int asNumber) {
-        return new Branch(copied(offers), copied(lots), price.clone(), bound, asNumber);
+        BitSet[] some =
+                Arrays.stream(offers).map(set -> (BitSet) set.clone()).toArray(BitSet[]::new);
+        return new Branch(
+                some, copied(least), copied(most), count.clone(), price.clone(), bound, asNumber);
     }
 
-    private static BitSet[] copied(BitSet[] sets) {
-        BitSet[] copies = new BitSet[sets.length];
-        for (int i = 0; i < sets.length; i++) {
-            copies[i] = (BitSet) sets[i].clone();
-        }
-        return copies;
+    private static int[][] copied(int[][] rows) {
+        return Arrays.stream(rows).map(int[]::clone).toArray(int[][]::new);
     }
 
     /** Takes a chamber as decided: nothing else may come into it. */
     void shut(int c, int offer) {
-        lots[c].clear();
+        Arrays.fill(least[c], 0);
+        Arrays.fill(most[c], 0);
         offers[c].clear();
         if (offer != Placing.RESTS) {
             offers[c].set(offer);
         }
     }
 
-    /** Whether two lots can be exchanged in every placing of this part. */
-    boolean alike(int one, int other, Likeness likeness) {
-        boolean alike = likeness.alike(one, other);
-        for (int c = 0; c < lots.length && alike; c++) {
-            alike = lots[c].get(one) == lots[c].get(other);
+    /** Takes one lot of a kind as placed: one less is left of it for any chamber. */
+    void forget(int kind) {
+        count[kind]--;
+        if (count[kind] == 0) {
+            price[kind] = 0;
         }
-        return alike;
+        for (int[] chamber : most) {
+            chamber[kind] = Math.min(chamber[kind], count[kind]);
+        }
     }
 
-    /** Lots that may stand in one chamber at most, so that nothing is left to decide of them. */
-    boolean decided(int lot) {
-        int places = 0;
-        for (BitSet chamber : lots) {
-            places += chamber.get(lot) ? 1 : 0;
+    /** A chamber holds this many of a kind or more; the others are left what remains. */
+    void atLeast(int c, int kind, int lots) {
+        least[c][kind] = lots;
+        int held = 0;
+        for (int[] chamber : least) {
+            held += chamber[kind];
         }
-        return places <= 1;
+        for (int other = 0; other < most.length; other++) {
+            int left = count[kind] - held + least[other][kind];
+            most[other][kind] = Math.min(most[other][kind], left);
+        }
+    }
+
+    /** A chamber holds this many of a kind or fewer. */
+    void atMost(int c, int kind, int lots) {
+        most[c][kind] = lots;
+    }
+
+    /** A kind of which all chambers can have as many as they may, so that they need not vie. */
+    boolean decided(int kind) {
+        int sum = 0;
+        for (int[] chamber : most) {
+            sum += chamber[kind];
+        }
+        return sum <= count[kind];
+    }
+
+    /** Whether a chamber must hold anything. */
+    boolean holds(int c) {
+        return Arrays.stream(least[c]).anyMatch(lots -> lots > 0);
     }
 }

@@ -15,13 +15,14 @@ final class Bundle {
     private static final int SWEEPS = 300;
     private static final double FIRST_LENGTH = 0.1;
     private static final int MOVES = 6;
+    private static final double SLACK = 1e-6;
 
     /** One load of a chamber. */
     static final class Load {
         final int offer;
-        final int[] lots;
+        final int[] kinds;
 
-        /** How much of each of the lots, 0 to 1. */
+        /** How many lots of each of the kinds; of one a part. */
         final double[] parts;
 
         /** What it earns, currency. */
@@ -31,9 +32,18 @@ final class Bundle {
         private double pull;
         private int idle;
 
-        Load(int offer, int[] lots, double[] parts, double value) {
+        /** Whether as many lots of each kind are in it, whole or in part. */
+        boolean touchesSameAs(Load other) {
+            boolean same = Arrays.equals(kinds, other.kinds);
+            for (int i = 0; i < kinds.length && same; i++) {
+                same = Math.ceil(parts[i]) == Math.ceil(other.parts[i]);
+            }
+            return same;
+        }
+
+        Load(int offer, int[] kinds, double[] parts, double value) {
             this.offer = offer;
-            this.lots = lots;
+            this.kinds = kinds;
             this.parts = parts;
             this.value = value;
         }
@@ -42,8 +52,14 @@ final class Bundle {
     private final Store store;
     private final List<List<Load>> loads = new ArrayList<>();
 
-    /** {@code [lot]}, how far a price moves for one lot too many, currency. */
+    /** {@code [kind]}, how far a price moves for one lot too many, currency. */
     private final double[] reach;
+
+    /** The most any lot may earn, currency. */
+    private final double highest;
+
+    /** {@code [kind]}, lots there are. */
+    private int[] count;
 
     private final double[] wanted;
     private final double[] centre;
@@ -51,7 +67,7 @@ final class Bundle {
 
     private double tolerance;
 
-    /** {@code [lot]}, the prices. */
+    /** {@code [kind]}, the prices. */
     final double[] price;
 
     /** How far prices may move at a time, as a share of what the lots may earn. */
@@ -63,6 +79,7 @@ final class Bundle {
         wanted = new double[store.lots];
         centre = new double[store.lots];
         price = new double[store.lots];
+        count = store.likeness.count;
         for (int c = 0; c < store.chambers; c++) {
             loads.add(new ArrayList<>());
             open.add(new ArrayList<>());
@@ -72,11 +89,15 @@ final class Bundle {
                 }
             }
         }
+        highest = Arrays.stream(reach).max().orElse(0);
+        for (int kind = 0; kind < store.lots; kind++) {
+            reach[kind] /= Math.max(1, count[kind]);
+        }
     }
 
     void add(int c, Load load) {
         for (Load known : loads.get(c)) {
-            if (known.offer == load.offer && Arrays.equals(known.lots, load.lots)) {
+            if (known.offer == load.offer && known.touchesSameAs(load)) {
                 known.idle = 0;
                 return;
             }
@@ -92,24 +113,30 @@ final class Bundle {
         all.add(load);
     }
 
-    /** Tells how much of each climate and lot the shares make, {@code [chamber][offer or lot]}. */
-    void use(double[][] ofOffers, double[][] ofLots) {
+    /**
+     * Tells how much of each climate and kind the shares make, {@code [chamber][offer or kind]}.
+     */
+    void use(double[][] ofOffers, double[][] ofKinds) {
         for (int c = 0; c < store.chambers; c++) {
             Arrays.fill(ofOffers[c], 0);
-            Arrays.fill(ofLots[c], 0);
+            Arrays.fill(ofKinds[c], 0);
             for (Load load : open.get(c)) {
                 if (load.offer != Placing.RESTS) {
                     ofOffers[c][load.offer] += load.share;
                 }
-                for (int i = 0; i < load.lots.length; i++) {
-                    ofLots[c][load.lots[i]] += load.share * load.parts[i];
+                for (int i = 0; i < load.kinds.length; i++) {
+                    ofKinds[c][load.kinds[i]] += load.share * load.parts[i];
                 }
             }
         }
     }
 
-    /** Only the loads a branch allows; their shares start anew where one is no longer allowed. */
+    /**
+     * Only the loads a branch allows, nothing where none of those known is; their shares start anew
+     * where one is no longer allowed.
+     */
     void enter(Branch branch) {
+        count = branch.count;
         for (int c = 0; c < store.chambers; c++) {
             List<Load> allowed = open.get(c);
             allowed.clear();
@@ -120,23 +147,29 @@ final class Bundle {
                     load.share = 0;
                 }
             }
+            if (allowed.isEmpty()) {
+                allowed.add(loads.get(c).get(0));
+            }
             double sum = 0;
             for (Load load : allowed) {
                 sum += load.share;
             }
-            if (!allowed.isEmpty()) {
-                Load first = allowed.get(0);
-                first.share += 1 - sum;
-            }
+            Load first = allowed.get(0);
+            first.share += 1 - sum;
         }
     }
 
     private static boolean allowed(Branch branch, int c, Load load) {
-        if (load.lots.length > 0 && !branch.offers[c].get(load.offer)) {
+        if (load.kinds.length > 0 && !branch.offers[c].get(load.offer)) {
             return false;
         }
-        for (int l : load.lots) {
-            if (!branch.lots[c].get(l)) {
+        int[] most = branch.most[c];
+        int[] least = branch.least[c];
+        int next = 0;
+        for (int kind = 0; kind < most.length; kind++) {
+            boolean in = next < load.kinds.length && load.kinds[next] == kind;
+            double some = in ? load.parts[next++] : 0;
+            if (some > most[kind] + SLACK || some < least[kind] - SLACK) {
                 return false;
             }
         }
@@ -153,16 +186,16 @@ final class Bundle {
     double solve(double[] from, double length) {
         System.arraycopy(from, 0, centre, 0, centre.length);
         Arrays.fill(wanted, 0);
-        tolerance = 1e-5 * Arrays.stream(reach).max().orElse(0);
+        tolerance = 1e-5 * highest;
         for (List<Load> of : open) {
             for (Load load : of) {
-                for (int i = 0; i < load.lots.length; i++) {
-                    wanted[load.lots[i]] += load.share * load.parts[i];
+                for (int i = 0; i < load.kinds.length; i++) {
+                    wanted[load.kinds[i]] += load.share * load.parts[i];
                 }
             }
         }
-        for (int l = 0; l < price.length; l++) {
-            reprice(l, length);
+        for (int kind = 0; kind < price.length; kind++) {
+            reprice(kind, length);
         }
         for (int sweep = 0; sweep < SWEEPS; sweep++) {
             double pull = 0;
@@ -176,8 +209,9 @@ final class Bundle {
         return promised();
     }
 
-    private void reprice(int l, double length) {
-        price[l] = Math.max(0, centre[l] + length * reach[l] * (wanted[l] - 1));
+    private void reprice(int kind, double length) {
+        double tooMany = wanted[kind] - count[kind];
+        price[kind] = Math.max(0, centre[kind] + length * reach[kind] * tooMany);
     }
 
     /** Shares move from the load that pulls least to the one that pulls most. */
@@ -214,28 +248,28 @@ final class Bundle {
 
     private void shift(Load load, double by, double length) {
         load.share = load.share + by < 1e-12 ? 0 : load.share + by;
-        for (int i = 0; i < load.lots.length; i++) {
-            wanted[load.lots[i]] += by * load.parts[i];
-            reprice(load.lots[i], length);
+        for (int i = 0; i < load.kinds.length; i++) {
+            wanted[load.kinds[i]] += by * load.parts[i];
+            reprice(load.kinds[i], length);
         }
     }
 
     double above(Load load) {
         double sum = load.value;
-        for (int i = 0; i < load.lots.length; i++) {
-            sum -= load.parts[i] * price[load.lots[i]];
+        for (int i = 0; i < load.kinds.length; i++) {
+            sum -= load.parts[i] * price[load.kinds[i]];
         }
         return sum;
     }
 
-    /** Reach of the lots that are in one load and not in the other; both are in rising order. */
+    /** Reach of the kinds that are in one load and not in the other; both are in rising order. */
     private double apart(Load a, Load b) {
         double sum = 0;
         int i = 0;
         int j = 0;
-        while (i < a.lots.length || j < b.lots.length) {
-            int x = i < a.lots.length ? a.lots[i] : Integer.MAX_VALUE;
-            int y = j < b.lots.length ? b.lots[j] : Integer.MAX_VALUE;
+        while (i < a.kinds.length || j < b.kinds.length) {
+            int x = i < a.kinds.length ? a.kinds[i] : Integer.MAX_VALUE;
+            int y = j < b.kinds.length ? b.kinds[j] : Integer.MAX_VALUE;
             int l = Math.min(x, y);
             double more = (x == l ? a.parts[i] : 0) - (y == l ? b.parts[j] : 0);
             sum += reach[l] * more * more;
@@ -247,8 +281,8 @@ final class Bundle {
 
     private double promised() {
         double sum = 0;
-        for (double one : price) {
-            sum += one;
+        for (int kind = 0; kind < price.length; kind++) {
+            sum += count[kind] * price[kind];
         }
         for (List<Load> of : open) {
             double most = Double.NEGATIVE_INFINITY;

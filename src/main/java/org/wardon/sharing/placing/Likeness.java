@@ -11,11 +11,19 @@ final class Likeness {
     /** {@code [lot]}, the first lot it is like; itself where there is none before it. */
     final int[] kind;
 
+    /** {@code [lot]}, how many of its kind come before it. */
+    final int[] rank;
+
+    /** {@code [lot]}, how many are of its kind at the first of each, 0 at the others. */
+    final int[] count;
+
     /** Whether any two lots are alike. */
     final boolean any;
 
     Likeness(Store store) {
         kind = new int[store.lots];
+        rank = new int[store.lots];
+        count = new int[store.lots];
         boolean found = false;
         for (int l = 0; l < store.lots; l++) {
             kind[l] = l;
@@ -25,6 +33,7 @@ final class Likeness {
                     found = true;
                 }
             }
+            rank[l] = count[kind[l]]++;
         }
         any = found;
     }

@@ -19,51 +19,28 @@ final class LoadSearch {
     private static final double TINY = 1e-12;
 
     private final Store store;
-    private final int days;
-    private int chamber;
-    private int offer;
-    private double[] gain;
-    private double[] weight;
-    private Company company;
-
-    /** Lots worth looking at, most gain for their weight first; what follows is by place here. */
-    private int count;
-
-    private int words;
-    private final int[] lot;
-    private final int[] place;
-    private final double[] key;
-
-    /** The like lot that gains next more, -1 for none. */
-    private final int[] before;
-
-    /** The like lot that gains next less, -1 for none. */
-    private final int[] after;
-
-    private final int[] lastOfKind;
-    private final long[][] apart;
-    private final double[] shutsOut;
-    private final int[] heaviest;
-    private final double[] loses;
+    private final Listing list;
+    private final Rest rest;
+    private final Cover cover;
+    private final long[] shut;
     private final long[][] free;
     private final long[][] branches;
     private final boolean[] paired;
     private final int[] better;
     private final int[] lesser;
     private final int[] filled;
-    private final Cover cover;
-    private final int[][] partners;
-    private final double[][] losses;
-    private final int[] partnerCount;
-    private final int[] lightest;
+    private double[] gain;
+    private double[] weight;
     private double slope;
     private int pairs;
     private int fill;
 
-    private final double[] mass;
-    private final double[] volume;
-    private final double[] heat;
-    private final boolean[] taken;
+    /** What the lots it must hold are worth together, minus infinity where they cannot be. */
+    private double held;
+
+    /** Weight left beside them. */
+    private double room;
+
     private long steps;
     private long most;
 
@@ -85,36 +62,19 @@ final class LoadSearch {
     LoadSearch(Store store) {
         this.store = store;
         int lots = store.lots;
-        days = store.days;
-        lot = new int[lots];
-        place = new int[lots];
-        key = new double[lots];
-        before = new int[lots];
-        after = new int[lots];
-        lastOfKind = new int[lots];
-        apart = new long[lots][Cover.words(lots)];
-        shutsOut = new double[lots];
-        heaviest = new int[lots];
-        loses = new double[lots];
+        list = new Listing(store);
+        rest = new Rest(store);
+        cover = new Cover(lots);
+        shut = new long[Cover.words(lots)];
         free = new long[2 * lots + 2][Cover.words(lots)];
         branches = new long[2 * lots + 2][Cover.words(lots)];
         paired = new boolean[lots];
         better = new int[lots];
         lesser = new int[lots];
         filled = new int[lots];
-        cover = new Cover(lots);
-        partners = new int[lots][lots];
-        losses = new double[lots][lots];
-        partnerCount = new int[lots];
-        lightest = new int[lots];
-        mass = new double[days];
-        volume = new double[days];
-        heat = new double[days];
-        taken = new boolean[lots];
         load = new boolean[lots];
         gain = new double[0];
         weight = new double[0];
-        company = Company.NONE;
     }
 
     /**
@@ -122,42 +82,71 @@ final class LoadSearch {
      *
      * @param c the chamber
      * @param o its climate
-     * @param gains {@code [lot]}, earnings less price; not above 0 where it may not stand
+     * @param gains what lots gain there, and which must be held
      * @param weights weights of the lots
      * @param toBeat loads worth no more are not looked for
      * @param mostSteps limit of the search
      */
-    void run(int c, int o, double[] gains, Weights weights, double toBeat, long mostSteps) {
-        chamber = c;
-        offer = o;
-        gain = gains;
-        weight = weights.ofLot;
-        company = store.company[c][o];
+    void run(int c, int o, Gains gains, Weights weights, double toBeat, long mostSteps) {
+        hold(c, o, gains, weights);
         value = toBeat;
         open = Double.NEGATIVE_INFINITY;
-        found = false;
+        found = held > toBeat;
+        if (found) {
+            value = held;
+            System.arraycopy(rest.taken, 0, load, 0, load.length);
+        }
+        if (held == Double.NEGATIVE_INFINITY) {
+            value = held;
+            return;
+        }
         steps = 0;
         most = mostSteps;
-        choose(weights.total, toBeat);
-        relate();
-        Arrays.fill(mass, 1 + ROUNDING);
-        Arrays.fill(volume, 1 + ROUNDING);
-        Arrays.fill(heat, 1 + ROUNDING);
-        if (toBeat < 0) {
-            value = 0;
-            found = true;
-            Arrays.fill(load, false);
-        }
+        relate(c, o, gains, value - held);
         everything();
         goal = Double.NEGATIVE_INFINITY;
-        deepen(0, 0, weights.total);
+        deepen(0, held, room);
         if (steps > most) {
-            lowerOpen(weights.total);
+            lowerOpen();
         }
     }
 
+    /** Takes the lots that must be held. */
+    private void hold(int c, int o, Gains gains, Weights weights) {
+        gain = gains.ofLot;
+        weight = weights.ofLot;
+        held = 0;
+        room = weights.total;
+        rest.empty(c, o);
+        Arrays.fill(shut, 0);
+        long[][] apart = store.company[c][o].apart;
+        for (int l = 0; l < store.lots; l++) {
+            if (gains.must[l]) {
+                boolean can = rest.fits(l) && !isIn(shut, l);
+                held = can ? held + gain[l] - rest.loses[l] : Double.NEGATIVE_INFINITY;
+                room -= weight[l];
+                rest.take(l);
+                for (int w = 0; w < shut.length; w++) {
+                    shut[w] |= apart[l][w];
+                }
+            }
+        }
+    }
+
+    private void relate(int c, int o, Gains gains, double toBeat) {
+        list.choose(gains, weight, room, toBeat, shut);
+        list.relate(c, o, gain);
+        cover.of(
+                list.count,
+                list.apart,
+                list.partners,
+                list.losses,
+                list.partnerCount,
+                list.lightest);
+    }
+
     /** Where not all was looked into: shows of a value in between that nothing exceeds it. */
-    private void lowerOpen(double total) {
+    private void lowerOpen() {
         double high = open;
         double low = value;
         for (int i = 0; i < NARROWINGS && high > low; i++) {
@@ -165,7 +154,7 @@ final class LoadSearch {
             goal = 0.5 * (low + high);
             open = Double.NEGATIVE_INFINITY;
             steps = 0;
-            deepen(0, 0, total);
+            deepen(0, held, room);
             if (steps > most) {
                 low = goal;
             } else {
@@ -177,9 +166,10 @@ final class LoadSearch {
 
     private void everything() {
         Arrays.fill(free[0], 0);
-        for (int i = 0; i < count; i++) {
+        for (int i = 0; i < list.count; i++) {
             free[0][i >> 6] |= 1L << i;
         }
+        narrow(free[0]);
     }
 
     /**
@@ -187,37 +177,37 @@ final class LoadSearch {
      *
      * @param c the chamber
      * @param o its climate
-     * @param gains {@code [lot]}, earnings less price
+     * @param gains what lots gain there, and which must be held
      * @param weights weights of the lots
      * @return the bound
      */
-    double roof(int c, int o, double[] gains, Weights weights) {
-        chamber = c;
-        offer = o;
-        gain = gains;
-        weight = weights.ofLot;
-        company = store.company[c][o];
-        choose(weights.total, 0);
-        relate();
+    double roof(int c, int o, Gains gains, Weights weights) {
+        hold(c, o, gains, weights);
+        if (held == Double.NEGATIVE_INFINITY) {
+            return held;
+        }
+        relate(c, o, gains, 0);
         everything();
-        return bound(free[0], weights.total);
+        return held + bound(free[0], room);
     }
 
     /** The parts of lots behind the bound last asked for, {@code [lot]}; returns what they gain. */
-    double parts(double[] parts, double room) {
-        Arrays.fill(parts, 0);
+    double parts(double[] parts) {
         double left = room;
-        double sum = 0;
+        double sum = held;
+        for (int l = 0; l < parts.length; l++) {
+            parts[l] = rest.taken[l] ? 1 : 0;
+        }
         for (int k = 0; k < pairs; k++) {
             if (above(lesser[k]) > Math.max(0, above(better[k]))) {
-                parts[lot[lesser[k]]] = 1;
-                parts[lot[better[k]]] = -1;
-                left -= weight[lot[lesser[k]]];
-                sum += gain[lot[lesser[k]]];
+                parts[list.lot[lesser[k]]] = 1;
+                parts[list.lot[better[k]]] = -1;
+                left -= weight[list.lot[lesser[k]]];
+                sum += gain[list.lot[lesser[k]]];
             }
         }
         for (int k = 0; k < fill; k++) {
-            int l = lot[filled[k]];
+            int l = list.lot[filled[k]];
             boolean out = parts[l] < 0;
             double part = out ? 0 : Math.max(0, Math.min(1, left / (weight[l] + TINY)));
             parts[l] = part;
@@ -225,88 +215,6 @@ final class LoadSearch {
             sum += part * gain[l];
         }
         return sum;
-    }
-
-    /** Lots that can be in a load worth looking for, best first. */
-    private void choose(double total, double toBeat) {
-        double all = total;
-        for (int l = 0; l < store.lots; l++) {
-            all += Math.max(0, gain[l] - weight[l]);
-        }
-        count = 0;
-        Arrays.fill(place, -1);
-        for (int l = 0; l < store.lots; l++) {
-            if (gain[l] > 0 && all + Math.min(0, gain[l] - weight[l]) > toBeat) {
-                insert(l, gain[l] / (weight[l] + TINY));
-            }
-        }
-        words = Cover.words(count);
-        Arrays.fill(lastOfKind, -1);
-        for (int i = 0; i < count; i++) {
-            place[lot[i]] = i;
-            loses[i] = 0;
-            int kind = store.likeness.kind[lot[i]];
-            before[i] = lastOfKind[kind];
-            after[i] = -1;
-            if (before[i] >= 0) {
-                after[before[i]] = i;
-            }
-            lastOfKind[kind] = i;
-        }
-    }
-
-    private void insert(int l, double ratio) {
-        int at = count++;
-        while (at > 0 && key[at - 1] < ratio) {
-            key[at] = key[at - 1];
-            lot[at] = lot[at - 1];
-            at--;
-        }
-        key[at] = ratio;
-        lot[at] = l;
-    }
-
-    /** Who shuts out whom, and in which order lots are covered. */
-    private void relate() {
-        for (int i = 0; i < count; i++) {
-            Arrays.fill(apart[i], 0, words, 0);
-            shutsOut[i] = 0;
-            partnerCount[i] = 0;
-            int[] others = company.others[lot[i]];
-            double[] loss = company.loss[lot[i]];
-            for (int k = 0; k < others.length; k++) {
-                int j = place[others[k]];
-                if (j >= 0 && loss[k] >= Math.min(gain[lot[i]], gain[lot[j]])) {
-                    apart[i][j >> 6] |= 1L << j;
-                    shutsOut[i] += gain[lot[j]];
-                } else if (j >= 0) {
-                    partners[i][partnerCount[i]] = j;
-                    losses[i][partnerCount[i]++] = loss[k];
-                }
-            }
-            crowd(i);
-            int at = i;
-            while (at > 0 && shutsOut[heaviest[at - 1]] < shutsOut[i]) {
-                heaviest[at] = heaviest[at - 1];
-                at--;
-            }
-            heaviest[at] = i;
-        }
-        for (int i = 0; i < count; i++) {
-            lightest[i] = heaviest[count - 1 - i];
-        }
-        cover.of(count, apart, partners, losses, partnerCount, lightest);
-    }
-
-    private void crowd(int i) {
-        long[] crowd = store.crowds[chamber][offer][lot[i]];
-        for (int j = 0; j < count; j++) {
-            int l = lot[j];
-            if ((crowd[l >> 6] & 1L << l) != 0 && (apart[i][j >> 6] & 1L << j) == 0) {
-                apart[i][j >> 6] |= 1L << j;
-                shutsOut[i] += gain[l];
-            }
-        }
     }
 
     /**
@@ -319,7 +227,7 @@ final class LoadSearch {
             slope = Math.max(0, granted) / room;
         }
         cover.clear();
-        for (int w = 0; w < words; w++) {
+        for (int w = 0; w < list.words; w++) {
             for (long bits = left[w]; bits != 0; bits &= bits - 1) {
                 int i = (w << 6) + Long.numberOfTrailingZeros(bits);
                 double above = above(i);
@@ -345,14 +253,14 @@ final class LoadSearch {
         }
         covered(free[depth], left, toBeat - worth);
         long[] branch = branches[depth];
-        for (int w = 0; w < words; w++) {
+        for (int w = 0; w < list.words; w++) {
             branch[w] = cover.uncovered(w);
         }
-        for (int w = 0; w < words; w++) {
+        for (int w = 0; w < list.words; w++) {
             while (branch[w] != 0) {
                 int i = (w << 6) + Long.numberOfTrailingZeros(branch[w]);
                 include(i, depth, worth, left);
-                for (int k = i; k >= 0; k = after[k]) {
+                for (int k = i; k >= 0; k = list.after[k]) {
                     free[depth][k >> 6] &= ~(1L << k);
                     branch[k >> 6] &= ~(1L << k);
                 }
@@ -362,47 +270,47 @@ final class LoadSearch {
 
     /** Takes a lot, with the like ones left that gain more, and looks on. */
     private void include(int i, int depth, double worth, double left) {
-        System.arraycopy(free[depth], 0, free[depth + 1], 0, words);
+        System.arraycopy(free[depth], 0, free[depth + 1], 0, list.words);
         int best = i;
-        while (before[best] >= 0 && isIn(free[depth], before[best])) {
-            best = before[best];
+        while (list.before[best] >= 0 && isIn(free[depth], list.before[best])) {
+            best = list.before[best];
         }
         take(best, i, depth + 1, worth, left);
     }
 
     /** Takes like lots from one to another, as long as there is room, and looks on. */
     private void take(int i, int upTo, int depth, double worth, double left) {
-        int l = lot[i];
+        int l = list.lot[i];
         long[] now = free[depth];
-        if (!isIn(now, i) || !fits(l)) {
+        if (!isIn(now, i) || !rest.fits(l)) {
             return;
         }
-        double with = worth + gain[l] - loses[i];
-        change(i, 1);
+        double with = worth + gain[l] - rest.loses[l];
+        rest.take(l);
         if (with > value) {
             value = with;
             found = true;
-            System.arraycopy(taken, 0, load, 0, taken.length);
+            System.arraycopy(rest.taken, 0, load, 0, load.length);
         }
         now[i >> 6] &= ~(1L << i);
-        for (int w = 0; w < words; w++) {
-            now[w] &= ~apart[i][w];
+        for (int w = 0; w < list.words; w++) {
+            now[w] &= ~list.apart[i][w];
         }
         if (i == upTo) {
             narrow(now);
             deepen(depth, with, left - weight[l]);
         } else {
-            take(after[i], upTo, depth, with, left - weight[l]);
+            take(list.after[i], upTo, depth, with, left - weight[l]);
         }
-        change(i, -1);
+        rest.giveBack(l);
     }
 
     /** Leaves out lots that gain nothing any more or have no room. */
     private void narrow(long[] now) {
-        for (int w = 0; w < words; w++) {
+        for (int w = 0; w < list.words; w++) {
             for (long bits = now[w]; bits != 0; bits &= bits - 1) {
                 int j = (w << 6) + Long.numberOfTrailingZeros(bits);
-                if (gain[lot[j]] <= loses[j] || !fits(lot[j])) {
+                if (gain[list.lot[j]] <= rest.loses[list.lot[j]] || !rest.fits(list.lot[j])) {
                     now[w] &= ~(1L << j);
                 }
             }
@@ -422,10 +330,10 @@ final class LoadSearch {
         fill = 0;
         double space = room;
         slope = 0;
-        for (int i = 0; i < count; i++) {
+        for (int i = 0; i < list.count; i++) {
             paired[i] = false;
         }
-        for (int w = 0; w < words && slope == 0; w++) {
+        for (int w = 0; w < list.words && slope == 0; w++) {
             for (long bits = left[w]; bits != 0; bits &= bits - 1) {
                 int i = (w << 6) + Long.numberOfTrailingZeros(bits);
                 int partner = partner(i, left);
@@ -437,9 +345,9 @@ final class LoadSearch {
                     continue;
                 }
                 filled[fill++] = i;
-                space -= weight[lot[i]];
+                space -= weight[list.lot[i]];
                 if (space < 0) {
-                    slope = key[i];
+                    slope = list.key[i];
                     break;
                 }
             }
@@ -456,14 +364,14 @@ final class LoadSearch {
     }
 
     private double above(int i) {
-        return gain[lot[i]] - loses[i] - slope * weight[lot[i]];
+        return gain[list.lot[i]] - rest.loses[list.lot[i]] - slope * weight[list.lot[i]];
     }
 
     /** A lot before this one, itself without a partner, that it must not meet. */
     private int partner(int i, long[] left) {
         int last = i >> 6;
         for (int w = 0; w <= last; w++) {
-            long bits = left[w] & apart[i][w];
+            long bits = left[w] & list.apart[i][w];
             if (w == last) {
                 bits &= (1L << i) - 1;
             }
@@ -475,36 +383,5 @@ final class LoadSearch {
             }
         }
         return -1;
-    }
-
-    private boolean fits(int l) {
-        double m = store.massShare[chamber][l];
-        double v = store.volumeShare[chamber][l];
-        double[] q = store.heatShare[chamber][offer];
-        for (int d = store.first[l]; d <= store.last[l]; d++) {
-            if (m > mass[d] || v > volume[d] || q[l * days + d] > heat[d]) {
-                return false;
-            }
-        }
-        return true;
-    }
-
-    private void change(int i, int sign) {
-        int l = lot[i];
-        taken[l] = sign > 0;
-        double[] q = store.heatShare[chamber][offer];
-        for (int d = store.first[l]; d <= store.last[l]; d++) {
-            mass[d] -= sign * store.massShare[chamber][l];
-            volume[d] -= sign * store.volumeShare[chamber][l];
-            heat[d] -= sign * q[l * days + d];
-        }
-        int[] others = company.others[l];
-        double[] loss = company.loss[l];
-        for (int k = 0; k < others.length; k++) {
-            int j = place[others[k]];
-            if (j >= 0 && loss[k] < Climate.APART) {
-                loses[j] += sign * loss[k];
-            }
-        }
     }
 }

@@ -8,15 +8,15 @@ final class Offers {
     private final Weights[][] weights;
     private final boolean[][] tightened;
 
-    /** {@code [lot]}, earnings less price where last asked for. */
-    final double[] gain;
+    /** Earnings less prices of what a branch allows, where last asked for. */
+    final Gains gains;
 
     /** {@code [chamber][offer]}, no load earns more above the prices last looked at. */
     final double[][] ceiling;
 
     Offers(Store store, boolean together) {
         this.store = store;
-        gain = new double[store.lots];
+        gains = new Gains(store.lots);
         Cover cover = new Cover(store.lots);
         Picking picking = new Picking(store.lots);
         weights = new Weights[store.chambers][];
@@ -43,24 +43,16 @@ final class Offers {
         return weights[c][o];
     }
 
-    /** Fills {@link #gain} with earnings less prices of what a branch allows. */
-    void gains(Branch branch, int c, int o, double[] price) {
-        double[] earns = store.earns[c][o];
-        for (int l = 0; l < store.lots; l++) {
-            gain[l] = branch.lots[c].get(l) ? earns[l] - price[l] : Climate.NEVER;
-        }
-    }
-
     /** Climates of a chamber that a branch allows, the most promising at these prices first. */
     int[] ordered(Branch branch, int c, double[] price) {
         int[] order = branch.offers[c].stream().toArray();
         for (int o : order) {
-            gains(branch, c, o, price);
+            gains.of(store, branch, c, o, price);
             if (!tightened[c][o]) {
                 tightened[c][o] = true;
-                weights[c][o].tighten(gain, 0, FIRST_TIGHTENING);
+                weights[c][o].tighten(gains, gains.held(), FIRST_TIGHTENING);
             }
-            ceiling[c][o] = weights[c][o].bound(gain) - store.cost[c][o];
+            ceiling[c][o] = weights[c][o].bound(gains) - store.cost[c][o];
         }
         for (int i = 1; i < order.length; i++) {
             int one = order[i];

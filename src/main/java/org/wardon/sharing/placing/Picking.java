@@ -26,15 +26,19 @@ final class Picking {
      * Picks.
      *
      * @param company who must not meet whom
-     * @param gain {@code [lot]}, what each gains
+     * @param gains what each gains, and those to be picked in any case
      * @param weight {@code [lot]}, what of it its room and cooling are worth
      */
-    void pick(Company company, double[] gain, double[] weight) {
+    void pick(Company company, Gains gains, double[] weight) {
+        double[] gain = gains.ofLot;
         Arrays.fill(taken, false);
         Arrays.fill(shut, 0);
         int count = 0;
         for (int l = 0; l < gain.length; l++) {
-            above[l] = Math.max(0, gain[l] - weight[l]);
+            above[l] = gains.must[l] ? 0 : Math.max(0, gain[l] - weight[l]);
+            if (gains.must[l]) {
+                take(company, l);
+            }
         }
         for (int l = 0; l < gain.length; l++) {
             if (above[l] > 0) {
@@ -44,11 +48,15 @@ final class Picking {
         for (int k = 0; k < count; k++) {
             int l = order[k];
             if ((shut[l >> 6] & 1L << l) == 0 && above[l] > lost(company, l)) {
-                taken[l] = true;
-                for (int w = 0; w < shut.length; w++) {
-                    shut[w] |= company.apart[l][w];
-                }
+                take(company, l);
             }
+        }
+    }
+
+    private void take(Company company, int l) {
+        taken[l] = true;
+        for (int w = 0; w < shut.length; w++) {
+            shut[w] |= company.apart[l][w];
         }
     }
 

@@ -2,7 +2,6 @@ package org.wardon.sharing.placing;
 
 import java.util.ArrayList;
 import java.util.Arrays;
-import java.util.BitSet;
 import java.util.Comparator;
 import java.util.List;
 import java.util.PriorityQueue;
@@ -35,14 +34,14 @@ public final class PlacingSearch {
     private double closed = Double.NEGATIVE_INFINITY;
     private int made;
     private final double[][] offerUse;
-    private final double[][] lotUse;
+    private final double[][] kindUse;
 
     private PlacingSearch(PlacingProblem problem, Effort effort, Progress progress) {
         this.effort = effort;
         this.progress = progress;
         store = new Store(problem);
         offerUse = new double[store.chambers][];
-        lotUse = new double[store.chambers][store.lots];
+        kindUse = new double[store.chambers][store.lots];
         for (int c = 0; c < store.chambers; c++) {
             offerUse[c] = new double[store.offers(c)];
         }
@@ -153,7 +152,7 @@ public final class PlacingSearch {
         }
         Branch one = branch.copy(++made);
         Branch other = branch.copy(++made);
-        last.bundle.use(offerUse, lotUse);
+        last.bundle.use(offerUse, kindUse);
         if (!partOffers(one, other) && !partLots(one, other)) {
             close(branch);
             return;
@@ -222,43 +221,40 @@ public final class PlacingSearch {
     }
 
     /**
-     * Parts a lot: into the chamber it is most often in, or any other. Where it is not in that
-     * chamber no like lot is either: exchanged, it would be.
+     * Parts how many lots of a kind a chamber holds: at most as many as it held whole of late, or
+     * more.
      */
     private boolean partLots(Branch one, Branch other) {
-        int lot = -1;
+        int kind = -1;
         int chamber = -1;
         double most = Double.NEGATIVE_INFINITY;
-        for (int l = 0; l < store.lots; l++) {
-            if (one.decided(l)) {
+        for (int k = 0; k < store.lots; k++) {
+            if (one.decided(k)) {
                 continue;
             }
             for (int c = 0; c < store.chambers; c++) {
-                double use = lotUse[c][l];
-                double open = use * (1 - Math.min(1, use)) * (1 + one.price[l]);
-                if (one.lots[c].get(l) && open > most) {
+                double part = kindUse[c][k] - whole(one, c, k);
+                double open = part * (1 - Math.min(1, part)) * (1 + one.price[k]);
+                if (one.least[c][k] < one.most[c][k] && open > most) {
                     most = open;
-                    lot = l;
+                    kind = k;
                     chamber = c;
                 }
             }
         }
-        if (lot < 0) {
+        if (kind < 0) {
             return false;
         }
-        BitSet like = new BitSet();
-        for (int c = 0; c < store.chambers; c++) {
-            if (c != chamber) {
-                one.lots[c].clear(lot);
-            }
-        }
-        for (int l = 0; l < store.lots; l++) {
-            if (other.alike(l, lot, store.likeness)) {
-                like.set(l);
-            }
-        }
-        other.lots[chamber].andNot(like);
+        int lots = whole(one, chamber, kind);
+        one.atLeast(chamber, kind, lots + 1);
+        other.atMost(chamber, kind, lots);
         return true;
+    }
+
+    /** How many whole lots of a kind a chamber held of late, so that it may hold one more. */
+    private int whole(Branch branch, int c, int kind) {
+        int most = Math.min((int) kindUse[c][kind], branch.most[c][kind] - 1);
+        return Math.max(branch.least[c][kind], most);
     }
 
     private Placing placing() {

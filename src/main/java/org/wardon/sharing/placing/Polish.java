@@ -24,7 +24,8 @@ final class Polish {
     private final Offers offers;
     private final LoadSearch search;
     private final long loadSteps;
-    private final double[] gain;
+    private final Gains gains;
+    private final int[][] wanted;
     private final double[] here;
     private final boolean[] load;
     private final Fill trial;
@@ -53,7 +54,8 @@ final class Polish {
         this.prices = prices;
         this.parted = parted;
         this.loadSteps = loadSteps;
-        gain = new double[store.lots];
+        gains = new Gains(store.lots);
+        wanted = new int[store.chambers][store.lots];
         here = new double[store.lots];
         load = new boolean[store.lots];
         trial = new Fill(store);
@@ -68,16 +70,24 @@ final class Polish {
             boolean rests = offer == Placing.RESTS && !store.mayRest[c];
             trial.clear(c, rests ? best.offer[c] : offer);
         }
+        for (int c = 0; c < store.chambers; c++) {
+            Arrays.fill(wanted[c], 0);
+            for (int l = 0; l < store.lots; l++) {
+                wanted[c][store.likeness.kind[l]] += loads.load[c][l] ? 1 : 0;
+            }
+        }
         for (int l = 0; l < store.lots; l++) {
+            int kind = store.likeness.kind[l];
             int most = Fill.NOWHERE;
             for (int c = 0; c < store.chambers; c++) {
-                if (loads.load[c][l]
+                if (wanted[c][kind] > 0
                         && (most == Fill.NOWHERE || trial.gain(l, c) > trial.gain(l, most))) {
                     most = c;
                 }
             }
             if (most != Fill.NOWHERE) {
                 trial.put(l, most);
+                wanted[most][kind]--;
             }
         }
         insert();
@@ -129,7 +139,7 @@ final class Polish {
         }
         for (int l = 0; l < store.lots; l++) {
             if (trial.chamber[l] != Fill.NOWHERE) {
-                forbid(part, l);
+                part.forget(store.likeness.kind[l]);
             }
         }
         while (!emptied.isEmpty()) {
@@ -141,8 +151,9 @@ final class Polish {
             trial.clear(c, rests(c) ? trial.offer[c] : loads.offer[c]);
             for (int l = 0; l < store.lots; l++) {
                 if (loads.load[c][l]) {
-                    trial.put(l, c);
-                    forbid(part, l);
+                    int kind = store.likeness.kind[l];
+                    trial.put(unplaced(kind), c);
+                    part.forget(kind);
                 }
             }
             part.shut(c, trial.offer[c]);
@@ -156,11 +167,13 @@ final class Polish {
         return loads.offer[c] == Placing.RESTS && !store.mayRest[c];
     }
 
-    private void forbid(Branch part, int l) {
-        part.price[l] = 0;
-        for (int c = 0; c < store.chambers; c++) {
-            part.lots[c].clear(l);
+    /** The first lot of a kind that stands nowhere yet. */
+    private int unplaced(int kind) {
+        int l = kind;
+        while (store.likeness.kind[l] != kind || trial.chamber[l] != Fill.NOWHERE) {
+            l++;
         }
+        return l;
     }
 
     private int surest(BitSet among) {
@@ -206,19 +219,17 @@ final class Polish {
         if (store.mayRest[c] && most < 0) {
             most = 0;
             better = true;
-            java.util.Arrays.fill(load, false);
+            Arrays.fill(load, false);
         }
         for (int o = 0; o < store.offers(c); o++) {
-            for (int l = 0; l < store.lots; l++) {
-                gain[l] = store.earns[c][o][l] - here[l];
-            }
+            gains.of(store.earns[c][o], here);
             Weights weights = offers.weights(c, o);
             double beat = most == Double.NEGATIVE_INFINITY ? -1 : most + store.cost[c][o];
             beat += ROUNDING * Math.abs(beat);
-            if (weights.bound(gain) <= beat) {
+            if (weights.bound(gains) <= beat) {
                 continue;
             }
-            search.run(c, o, gain, weights, beat, loadSteps);
+            search.run(c, o, gains, weights, beat, loadSteps);
             if (search.found) {
                 most = search.value - store.cost[c][o];
                 offer = o;

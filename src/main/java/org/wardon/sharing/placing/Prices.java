@@ -3,9 +3,9 @@ package org.wardon.sharing.placing;
 import java.util.Arrays;
 
 /**
- * Prices on lots: at given prices each chamber takes the load that earns most above them, and the
- * prices and these surpluses together exceed every placing. Moving the prices towards the lots that
- * several chambers take, or none, lowers that bound.
+ * Prices on lots, like ones at one: at given prices each chamber takes the load that earns most
+ * above them, and the prices and these surpluses together exceed every placing. Moving the prices
+ * towards the lots that several chambers take, or none, lowers that bound.
  */
 final class Prices {
     private static final double LONGEST = 3;
@@ -94,21 +94,26 @@ final class Prices {
     }
 
     private void leaveOutLots(Branch branch, Offers offers, int c, double[] price, double spare) {
+        Likeness likeness = store.likeness;
         Arrays.fill(highest, Double.NEGATIVE_INFINITY);
         for (int o = 0; o < store.offers(c); o++) {
             if (branch.offers[c].get(o)) {
-                offers.gains(branch, c, o, price);
+                Gains gains = offers.gains;
+                gains.of(store, branch, c, o, price);
                 Weights weights = offers.weights(c, o);
-                double roof = weights.bound(offers.gain) - store.cost[c][o];
+                double roof = weights.bound(gains) - store.cost[c][o];
                 for (int l = 0; l < store.lots; l++) {
-                    double with = roof + Math.min(0, offers.gain[l] - weights.ofLot[l]);
-                    highest[l] = Math.max(highest[l], with);
+                    int more = likeness.rank[l] - branch.least[c][likeness.kind[l]] + 1;
+                    double with = more * Math.min(0, gains.ofLot[l] - weights.ofLot[l]);
+                    highest[l] = Math.max(highest[l], more > 0 ? roof + with : roof);
                 }
             }
         }
         for (int l = 0; l < store.lots; l++) {
-            if (spare + highest[l] <= 0) {
-                branch.lots[c].clear(l);
+            int kind = likeness.kind[l];
+            boolean free = likeness.rank[l] >= branch.least[c][kind];
+            if (free && spare + highest[l] <= 0) {
+                branch.atMost(c, kind, Math.min(branch.most[c][kind], likeness.rank[l]));
             }
         }
     }

@@ -44,17 +44,22 @@ final class Weights {
     /**
      * Returns what no load of this chamber and climate can exceed.
      *
-     * @param gain {@code [lot]}, what each lot would earn less its price; not above 0 where it may
-     *     not stand
+     * @param gains what lots gain there, and which must be held
      */
-    double bound(double[] gain) {
-        if (company == store.alone) {
-            double sum = total;
-            for (int l = 0; l < store.lots; l++) {
-                sum += Math.max(0, gain[l] - ofLot[l]);
+    double bound(Gains gains) {
+        double[] gain = gains.ofLot;
+        double sum = total;
+        boolean alone = company == store.alone;
+        for (int l = 0; l < store.lots; l++) {
+            double above = gain[l] - ofLot[l];
+            if (alone || gains.must[l]) {
+                sum += gains.must[l] ? above : Math.max(0, above);
             }
-            return sum;
         }
+        return alone ? sum : sum + covered(gains);
+    }
+
+    private double covered(Gains gains) {
         cover.of(
                 store.lots,
                 company.apart,
@@ -64,23 +69,24 @@ final class Weights {
                 company.lightest);
         cover.clear();
         for (int l = 0; l < store.lots; l++) {
-            if (gain[l] > ofLot[l]) {
-                cover.gains(l, gain[l] - ofLot[l]);
+            double above = gains.ofLot[l] - ofLot[l];
+            if (above > 0 && !gains.must[l]) {
+                cover.gains(l, above);
             }
         }
-        return total + cover.sum();
+        return cover.sum();
     }
 
     /**
      * Takes some steps towards the lowest bound; {@code reached} is a load known to be possible.
      */
-    void tighten(double[] gain, double reached, int steps) {
+    void tighten(Gains gains, double reached, int steps) {
         double[] best = day.clone();
-        double least = bound(gain);
+        double least = bound(gains);
         double length = FIRST_STEP;
         for (int step = 0; step < steps; step++) {
-            double square = slope(gain);
-            double above = bound(gain) - reached;
+            double square = slope(gains);
+            double above = bound(gains) - reached;
             if (square <= 0 || above <= 1e-9 * Math.abs(reached)) {
                 break;
             }
@@ -89,7 +95,7 @@ final class Weights {
                 day[i] = Math.max(0, day[i] - factor * slack[i]);
             }
             weigh();
-            double now = bound(gain);
+            double now = bound(gains);
             if (now < least) {
                 least = now;
                 System.arraycopy(day, 0, best, 0, day.length);
@@ -102,9 +108,9 @@ final class Weights {
     }
 
     /** What the lots worth taking leave of each limit; returns the square of its length. */
-    private double slope(double[] gain) {
+    private double slope(Gains gains) {
         Arrays.fill(slack, 1);
-        picking.pick(company, gain, ofLot);
+        picking.pick(company, gains, ofLot);
         int days = store.days;
         for (int l = 0; l < store.lots; l++) {
             if (picking.taken[l]) {
