@@ -113,19 +113,25 @@ final class Bundle {
         all.add(load);
     }
 
-    /**
-     * Tells how much of each climate and kind the shares make, {@code [chamber][offer or kind]}.
-     */
-    void use(double[][] ofOffers, double[][] ofKinds) {
+    /** Tells how much of each climate the shares make, {@code [chamber][offer]}. */
+    void useOfOffers(double[][] use) {
         for (int c = 0; c < store.chambers; c++) {
-            Arrays.fill(ofOffers[c], 0);
-            Arrays.fill(ofKinds[c], 0);
+            Arrays.fill(use[c], 0);
             for (Load load : open.get(c)) {
                 if (load.offer != Placing.RESTS) {
-                    ofOffers[c][load.offer] += load.share;
+                    use[c][load.offer] += load.share;
                 }
+            }
+        }
+    }
+
+    /** Tells how many lots of each kind the shares make, {@code [chamber][kind]}. */
+    void useOfKinds(double[][] use) {
+        for (int c = 0; c < store.chambers; c++) {
+            Arrays.fill(use[c], 0);
+            for (Load load : open.get(c)) {
                 for (int i = 0; i < load.kinds.length; i++) {
-                    ofKinds[c][load.kinds[i]] += load.share * load.parts[i];
+                    use[c][load.kinds[i]] += load.share * load.parts[i];
                 }
             }
         }

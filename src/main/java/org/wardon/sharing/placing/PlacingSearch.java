@@ -33,18 +33,13 @@ public final class PlacingSearch {
                             .thenComparingInt(branch -> branch.number));
     private double closed = Double.NEGATIVE_INFINITY;
     private int made;
-    private final double[][] offerUse;
     private final double[][] kindUse;
 
     private PlacingSearch(PlacingProblem problem, Effort effort, Progress progress) {
         this.effort = effort;
         this.progress = progress;
         store = new Store(problem);
-        offerUse = new double[store.chambers][];
         kindUse = new double[store.chambers][store.lots];
-        for (int c = 0; c < store.chambers; c++) {
-            offerUse[c] = new double[store.offers(c)];
-        }
         Offers offers = new Offers(store, true);
         LoadSearch search = new LoadSearch(store);
         parted = new PartedLoads(store, new Offers(store, false), search);
@@ -152,8 +147,8 @@ public final class PlacingSearch {
         }
         Branch one = branch.copy(++made);
         Branch other = branch.copy(++made);
-        last.bundle.use(offerUse, kindUse);
-        if (!partOffers(one, other) && !partLots(one, other)) {
+        last.bundle.useOfKinds(kindUse);
+        if (!part(one, other)) {
             close(branch);
             return;
         }
@@ -172,59 +167,11 @@ public final class PlacingSearch {
         closed = Math.max(closed, branch.bound);
     }
 
-    /** Parts the climates of the chamber that wavers most between several. */
-    private boolean partOffers(Branch one, Branch other) {
-        int chamber = -1;
-        double most = 0;
-        for (int c = 0; c < store.chambers; c++) {
-            double wavering = wavering(one, c);
-            if (one.offers[c].cardinality() > 1 && (chamber < 0 || wavering > most)) {
-                chamber = c;
-                most = wavering;
-            }
-        }
-        if (chamber < 0) {
-            return false;
-        }
-        int upTo = middle(one, chamber);
-        one.offers[chamber].clear(upTo, store.offers(chamber));
-        other.offers[chamber].clear(0, upTo);
-        return true;
-    }
-
-    private double wavering(Branch branch, int c) {
-        double sum = 0;
-        double squares = 0;
-        for (int o = 0; o < store.offers(c); o++) {
-            if (branch.offers[c].get(o)) {
-                sum += offerUse[c][o];
-                squares += offerUse[c][o] * offerUse[c][o];
-            }
-        }
-        return sum * sum - squares;
-    }
-
-    /** The climate from which on the other half begins, by how often each was chosen of late. */
-    private int middle(Branch branch, int c) {
-        int[] offers = branch.offers[c].stream().toArray();
-        double all = IntStream.of(offers).mapToDouble(o -> offerUse[c][o]).sum();
-        double sum = 0;
-        for (int i = 0; i < offers.length - 1; i++) {
-            sum += offerUse[c][offers[i]];
-            if (sum >= 0.5 * all && all > 0) {
-                boolean sooner =
-                        i > 0 && sum - 0.5 * all > 0.5 * all - (sum - offerUse[c][offers[i]]);
-                return sooner ? offers[i] : offers[i + 1];
-            }
-        }
-        return all > 0 ? offers[offers.length - 1] : offers[offers.length / 2];
-    }
-
     /**
      * Parts how many lots of a kind a chamber holds: at most as many as it held whole of late, or
-     * more.
+     * more. Climates need no parting: chambers that no longer vie for lots take their best each.
      */
-    private boolean partLots(Branch one, Branch other) {
+    private boolean part(Branch one, Branch other) {
         int kind = -1;
         int chamber = -1;
         double most = Double.NEGATIVE_INFINITY;
@@ -233,7 +180,7 @@ public final class PlacingSearch {
                 continue;
             }
             for (int c = 0; c < store.chambers; c++) {
-                double part = kindUse[c][k] - whole(one, c, k);
+                double part = kindUse[c][k] - wholeLots(one, c, k);
                 double open = part * (1 - Math.min(1, part)) * (1 + one.price[k]);
                 if (one.least[c][k] < one.most[c][k] && open > most) {
                     most = open;
@@ -245,14 +192,14 @@ public final class PlacingSearch {
         if (kind < 0) {
             return false;
         }
-        int lots = whole(one, chamber, kind);
+        int lots = wholeLots(one, chamber, kind);
         one.atLeast(chamber, kind, lots + 1);
         other.atMost(chamber, kind, lots);
         return true;
     }
 
     /** How many whole lots of a kind a chamber held of late, so that it may hold one more. */
-    private int whole(Branch branch, int c, int kind) {
+    private int wholeLots(Branch branch, int c, int kind) {
         int most = Math.min((int) kindUse[c][kind], branch.most[c][kind] - 1);
         return Math.max(branch.least[c][kind], most);
     }

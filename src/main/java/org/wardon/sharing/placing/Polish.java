@@ -20,7 +20,6 @@ final class Polish {
     private final PartedLoads parted;
     private final WholeLoads loads;
     private final double[][] offerUse;
-    private final double[][] lotUse;
     private final Offers offers;
     private final LoadSearch search;
     private final long loadSteps;
@@ -43,7 +42,6 @@ final class Polish {
             WholeLoads loads,
             long loadSteps) {
         offerUse = new double[store.chambers][];
-        lotUse = new double[store.chambers][store.lots];
         for (int c = 0; c < store.chambers; c++) {
             offerUse[c] = new double[store.offers(c)];
         }
@@ -144,7 +142,7 @@ final class Polish {
         }
         while (!emptied.isEmpty()) {
             prices.lower(part, parted, FILL_STEPS, () -> Double.NEGATIVE_INFINITY);
-            parted.bundle.use(offerUse, lotUse);
+            parted.bundle.useOfOffers(offerUse);
             int c = surest(emptied);
             emptied.clear(c);
             loads.most(part, c, part.price);
