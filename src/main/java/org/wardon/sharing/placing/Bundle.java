@@ -15,7 +15,6 @@ final class Bundle {
     private static final int SWEEPS = 300;
     private static final double FIRST_LENGTH = 0.1;
     private static final int MOVES = 6;
-    private static final double SLACK = 1e-6;
 
     /** One load of a chamber. */
     static final class Load {
@@ -175,7 +174,7 @@ final class Bundle {
         for (int kind = 0; kind < most.length; kind++) {
             boolean in = next < load.kinds.length && load.kinds[next] == kind;
             double some = in ? load.parts[next++] : 0;
-            if (some > most[kind] + SLACK || some < least[kind] - SLACK) {
+            if (some > most[kind] || some < least[kind]) {
                 return false;
             }
         }

@@ -1,6 +1,7 @@
 package org.wardon.sharing.placing;
 
 import java.util.Arrays;
+import java.util.function.BiPredicate;
 
 /** The best placing of few lots by trying every one, summed from the problem itself. */
 final class EveryPlacing {
@@ -8,19 +9,29 @@ final class EveryPlacing {
 
     private final PlacingProblem problem;
     private final int all;
+    private final BiPredicate<ChamberToFill, Integer> allowed;
 
     EveryPlacing(PlacingProblem problem) {
+        this(problem, (chamber, lots) -> true);
+    }
+
+    /**
+     * Of placings only those whose chambers hold sets of lots (bits by number) that are allowed.
+     */
+    EveryPlacing(PlacingProblem problem, BiPredicate<ChamberToFill, Integer> allowed) {
         this.problem = problem;
+        this.allowed = allowed;
         all = 1 << problem.lots().size();
     }
 
-    /** What the best placing is worth, currency. */
+    /** What the best placing is worth, currency; minus infinity where none is allowed. */
     double best() {
         double[] best = new double[all];
         for (ChamberToFill chamber : problem.chambers()) {
             double[] here = values(chamber);
-            double[] with = best.clone();
+            double[] with = new double[all];
             for (int lots = 0; lots < all; lots++) {
+                with[lots] = here[0] + best[lots];
                 for (int some = lots; some > 0; some = (some - 1) & lots) {
                     with[lots] = Math.max(with[lots], here[some] + best[lots & ~some]);
                 }
@@ -34,9 +45,10 @@ final class EveryPlacing {
     private double[] values(ChamberToFill chamber) {
         double[] values = new double[all];
         Arrays.fill(values, Double.NEGATIVE_INFINITY);
+        values[0] = allowed.test(chamber, 0) ? 0 : Double.NEGATIVE_INFINITY;
         for (Offer offer : chamber.offers()) {
             for (int lots = 1; lots < all; lots++) {
-                if (fits(chamber, offer, lots)) {
+                if (allowed.test(chamber, lots) && fits(chamber, offer, lots)) {
                     values[lots] = Math.max(values[lots], value(chamber, offer, lots));
                 }
             }

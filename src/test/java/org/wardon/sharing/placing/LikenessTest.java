@@ -105,6 +105,7 @@ class LikenessTest {
                 double best = new EveryPlacing(problem).best();
                 assertEquals(best, answer.placing().value(), ROUNDING * best, of);
                 assertTrue(answer.bound() >= best * (1 - ROUNDING), of);
+                assertTrue(answer.proven(), of);
             }
         }
     }
