@@ -15,6 +15,8 @@ import org.wardon.files.json.Part;
  * @param named names of the files it names
  */
 public record FolderPlan(String text, PlanFiles files, List<String> named) {
+    private static final int LONGEST_NAME = 120;
+
     /** Copies the list. */
     public FolderPlan {
         named = List.copyOf(named);
@@ -46,10 +48,17 @@ public record FolderPlan(String text, PlanFiles files, List<String> named) {
      * Returns the name a plan gives itself.
      *
      * @param text text of the plan
-     * @return its name, absent where it gives none
+     * @return its name, cut where nobody would read on; absent where it gives none
      */
     public static Optional<String> nameIn(String text) {
-        return root(text).flatMap(plan -> plan.at("name").text()).filter(name -> !name.isBlank());
+        return root(text)
+                .flatMap(plan -> plan.at("name").text())
+                .filter(name -> !name.isBlank())
+                .map(FolderPlan::cut);
+    }
+
+    private static String cut(String name) {
+        return name.length() <= LONGEST_NAME ? name : name.substring(0, LONGEST_NAME - 1) + "…";
     }
 
     private static Optional<Part> root(String text) {

@@ -14,8 +14,8 @@ import java.util.stream.Collectors;
  * @param atC the temperature it holds at, °C, for facts that need one
  */
 record OwnName(Kind kind, OptionalDouble atC) {
-    private static final double COLDEST_C = -2;
-    private static final double HOTTEST_C = 40;
+    static final double COLDEST_C = -2;
+    static final double HOTTEST_C = 40;
     private static final Pattern AT = Pattern.compile("([a-z-]+)@(-?[0-9]{1,2}(?:\\.[0-9]+)?)C");
 
     /** The facts, with their unit and the figures accepted (our bounds). */
@@ -51,6 +51,10 @@ record OwnName(Kind kind, OptionalDouble atC) {
             return value >= low && value <= high;
         }
 
+        OwnValue.Limits limits() {
+            return new OwnValue.Limits(low, high);
+        }
+
         String accepted() {
             return low + " to " + high + " " + unit;
         }
@@ -74,6 +78,14 @@ record OwnName(Kind kind, OptionalDouble atC) {
                 .findFirst()
                 .filter(kind -> !hasTemperature || inReach(atC.orElseThrow()))
                 .map(kind -> new OwnName(kind, atC));
+    }
+
+    /** Returns the figures a fact accepts, by its name without a temperature. */
+    static Optional<OwnValue.Limits> limits(String word) {
+        return Arrays.stream(Kind.values())
+                .filter(kind -> kind.word.equals(word))
+                .findFirst()
+                .map(Kind::limits);
     }
 
     private static boolean inReach(double atC) {

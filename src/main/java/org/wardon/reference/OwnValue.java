@@ -2,6 +2,7 @@ package org.wardon.reference;
 
 import java.util.ArrayList;
 import java.util.List;
+import java.util.Optional;
 import java.util.OptionalDouble;
 import org.wardon.errors.BadInput;
 import org.wardon.errors.Fault;
@@ -23,6 +24,37 @@ public record OwnValue(
         String commodityId, String name, double low, double high, String unit, String setAt) {
     /** What stands for the source of an own value. */
     public static final String SOURCE = "own";
+
+    /** Temperatures at which a fact can be told to hold, °C. */
+    public static final Limits AT_C = new Limits(OwnName.COLDEST_C, OwnName.HOTTEST_C);
+
+    /**
+     * Figures that are accepted.
+     *
+     * @param low lowest
+     * @param high highest
+     */
+    public record Limits(double low, double high) {
+        /**
+         * Returns whether a figure is accepted.
+         *
+         * @param value the figure, in the same unit
+         * @return true if so
+         */
+        public boolean hold(double value) {
+            return value >= low && value <= high;
+        }
+    }
+
+    /**
+     * Returns what a fact accepts.
+     *
+     * @param word name of the fact, without a temperature
+     * @return in the unit of that fact; absent for one that cannot be set
+     */
+    public static Optional<Limits> limits(String word) {
+        return OwnName.limits(word);
+    }
 
     /**
      * Returns a value for a fact, in the unit of that fact.

@@ -25,6 +25,10 @@ import org.wardon.web.work.Workbench;
 public final class WebServer implements AutoCloseable {
     private static final int MOST_THREADS = 48;
     private static final int SILENT_MOST_MS = 30_000;
+
+    /** Whoever sends slower than any line would hold a thread for nothing. */
+    private static final int SLOWEST_BYTES_PER_S = 200;
+
     private static final int HEADERS_MOST_BYTES = 8_192;
 
     private final WebOptions options;
@@ -67,6 +71,7 @@ public final class WebServer implements AutoCloseable {
         http.setSendServerVersion(false);
         http.setSendDateHeader(false);
         http.setIdleTimeout(SILENT_MOST_MS);
+        // RATE
     }
 
     /**

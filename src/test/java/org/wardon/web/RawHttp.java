@@ -89,6 +89,37 @@ final class RawHttp {
         return exactly(request.append("Connection: close\r\n\r\n").append(body).toString());
     }
 
+    /** A request that is sent byte by byte, its answer unread. */
+    record Slow(Socket socket) implements AutoCloseable {
+        /** Sends one more byte; where the server has hung up nothing is sent. */
+        void another() {
+            try {
+                socket.getOutputStream().write('a');
+            } catch (IOException e) {
+                // Hung up: what a server does to those who are too slow.
+            }
+        }
+
+        @Override
+        public void close() {
+            try {
+                socket.close();
+            } catch (IOException e) {
+                throw new UncheckedIOException(e);
+            }
+        }
+    }
+
+    Slow slow(String begun) {
+        try {
+            Socket socket = new Socket(host, port);
+            socket.getOutputStream().write(begun.getBytes(StandardCharsets.UTF_8));
+            return new Slow(socket);
+        } catch (IOException e) {
+            throw new UncheckedIOException(e);
+        }
+    }
+
     Answer exactly(String request) {
         try (Socket socket = new Socket(host, port)) {
             socket.setSoTimeout(PATIENCE_MS);

@@ -47,6 +47,7 @@ public record GroupReport(
      * @param id its id
      * @param crop name of its crop
      * @param wholeDays stay and market leg, days
+     * @param marketDays the market leg alone, days
      * @param stretches what temperatures do to it, from cold to warm
      * @param borneC temperatures it bears, °C; empty where none
      * @param bornePct humidities it bears, percent; empty where none
@@ -58,6 +59,7 @@ public record GroupReport(
             String id,
             String crop,
             double wholeDays,
+            double marketDays,
             List<Stretch> stretches,
             Optional<Bounds> borneC,
             Optional<Bounds> bornePct,
@@ -77,6 +79,7 @@ public record GroupReport(
         public boolean isLike(Member other) {
             return crop.equals(other.crop)
                     && wholeDays == other.wholeDays
+                    && marketDays == other.marketDays
                     && stretches.equals(other.stretches)
                     && bornePct.equals(other.bornePct);
         }

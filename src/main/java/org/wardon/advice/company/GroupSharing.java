@@ -232,6 +232,7 @@ public final class GroupSharing {
                 lot.wish().lot().id(),
                 lot.wish().lot().commodity().names().get(0),
                 lot.wish().wholeDays(),
+                lot.wish().marketDays(),
                 stretches.stream()
                         .map(s -> new GroupReport.Stretch(s.lowC(), s.highC(), s.what().word()))
                         .toList(),

@@ -25,6 +25,12 @@ public final class SharingAdvice {
     /** Days wanted unless others are asked for. */
     public static final double USUAL_DAYS = 7;
 
+    /** Fewest days that can be wanted. */
+    public static final double LEAST_DAYS = 0.1;
+
+    /** Most days that can be wanted. */
+    public static final double MOST_DAYS = 730;
+
     private static final int DRAWS = 32;
     private static final long SEED = 1;
 
@@ -88,7 +94,7 @@ public final class SharingAdvice {
         } catch (BadInput unknown) {
             faults.addAll(unknown.faults());
         }
-        if (!(wanted >= 0.1 && wanted <= 730)) {
+        if (!(wanted >= LEAST_DAYS && wanted <= MOST_DAYS)) {
             faults.add(
                     new Fault(
                             name,

@@ -1,5 +1,6 @@
 package org.wardon.advice.receiving;
 
+import java.math.BigDecimal;
 import java.time.LocalDateTime;
 import java.util.ArrayList;
 import java.util.List;
@@ -166,9 +167,7 @@ final class AtTheDoor {
     }
 
     private static String plain(double value) {
-        return value == Math.rint(value) && Math.abs(value) < 1e9
-                ? String.format(Locale.ROOT, "%.0f", value)
-                : String.valueOf(value);
+        return BigDecimal.valueOf(value).stripTrailingZeros().toPlainString();
     }
 
     private LocalDateTime at() {

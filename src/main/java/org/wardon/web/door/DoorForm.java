@@ -8,8 +8,11 @@ import java.util.Locale;
 import java.util.Map;
 import java.util.Optional;
 import java.util.OptionalDouble;
+import java.util.Set;
 import java.util.function.DoubleFunction;
 import java.util.function.UnaryOperator;
+import java.util.stream.Collectors;
+import java.util.stream.Stream;
 import org.wardon.advice.receiving.NewLot;
 import org.wardon.errors.BadInput;
 import org.wardon.errors.Fault;
@@ -152,6 +155,18 @@ final class DoorForm {
         return Optional.empty();
     }
 
+    /** What is wrong with what has no field of its own, a package say. */
+    List<String> beside(List<Fault> wrong) {
+        Set<String> shown =
+                Stream.concat(needed(wrong).stream(), more(wrong, "").stream())
+                        .map(field -> OPTIONS.getOrDefault(field.name(), field.name()))
+                        .collect(Collectors.toSet());
+        return wrong.stream()
+                .filter(fault -> !shown.contains(fault.file()))
+                .map(this::told)
+                .toList();
+    }
+
     List<FieldView> needed(List<Fault> wrong) {
         return List.of(
                 with(FieldView.text("crop", say.say("door.crop"), typed("crop")), wrong)
@@ -205,7 +220,9 @@ final class DoorForm {
                     NewLot.PRICE_PER_KG,
                     price -> figures.typedPrice(price) + " / " + figures.massUnit());
         }
-        return figures.text(fault.found() + "; " + fault.accepted());
+        // What was typed is told as it was typed.
+        String found = isNumber ? figures.text(fault.found()) : fault.found();
+        return found + "; " + figures.text(fault.accepted());
     }
 
     private String between(NewLot.Limits taken, DoubleFunction<String> shown) {

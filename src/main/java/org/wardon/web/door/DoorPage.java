@@ -264,6 +264,7 @@ public final class DoorPage {
 
         void print() {
             Frame frame = press.frame(call, Room.DOOR, Optional.of(open.kept()));
+            troubles.addAll(form.beside(faults));
             boolean stages = crop.map(Commodity::climacteric).orElse(false);
             press.print(
                     call,

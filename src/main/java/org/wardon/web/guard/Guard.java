@@ -90,7 +90,14 @@ public final class Guard {
         if (!(api ? METHODS_OF_API : METHODS).contains(http.method())) {
             throw new Refusal(405, "method");
         }
-        checkOrigin(http, host);
+        boolean foreign = isForeign(http);
+        checkOrigin(http, host, foreign);
+        if (foreign) {
+            // The browser keeps our cookie back here: a new one would take the place of the
+            // session there is, and the forms that are open would be worth nothing.
+            http.header("Refresh", "0; url=http://" + host + asked(http));
+            throw new Refusal(200, "foreign-link");
+        }
         if (http.path().startsWith(STATIC) || (api && isProgram(http))) {
             return;
         }
@@ -146,10 +153,20 @@ public final class Guard {
                 : Optional.empty();
     }
 
-    /** Foreign pages may lead here by a link, and nothing more. */
-    private static void checkOrigin(Context http, String host) {
+    /** Whether another site made the browser ask. */
+    private static boolean isForeign(Context http) {
         String site = Optional.ofNullable(http.header("Sec-Fetch-Site")).orElse("none");
-        boolean foreign = !site.equals("none") && !site.equals("same-origin");
+        return !site.equals("none") && !site.equals("same-origin");
+    }
+
+    /** Path and query as they were sent. */
+    private static String asked(Context http) {
+        String query = http.queryString();
+        return http.req().getRequestURI() + (query == null ? "" : "?" + query);
+    }
+
+    /** Foreign pages may lead here by a link, and nothing more. */
+    private static void checkOrigin(Context http, String host, boolean foreign) {
         boolean link =
                 HandlerType.GET.equals(http.method())
                         && "navigate".equals(http.header("Sec-Fetch-Mode"))
@@ -190,9 +207,7 @@ public final class Guard {
     }
 
     private static String token(Context http) {
-        if (http.contentLength() > Uploads.LARGEST_REQUEST) {
-            throw new Refusal(413, "too-large");
-        }
+        Uploads.checkSize(http);
         @Nullable String header = http.header(TOKEN_HEADER);
         if (header != null) {
             return header;

@@ -8,6 +8,7 @@ import java.util.LinkedHashMap;
 import java.util.List;
 import java.util.Locale;
 import java.util.Map;
+import java.util.Optional;
 import java.util.function.Supplier;
 import org.jspecify.annotations.Nullable;
 import org.wardon.errors.BadInput;
@@ -26,9 +27,29 @@ public final class Uploads {
     /** Most files of one request. */
     public static final int MOST_FILES = 8;
 
+    /** Most bytes of a form without files: names and values become many small texts. */
+    public static final int LARGEST_FORM = 500_000;
+
+    private static final String FORM = "application/x-www-form-urlencoded";
+
     private static final int LONGEST_NAME = 100;
 
     private Uploads() {}
+
+    /** Refuses what is too large before any of it is read; a form has to say how large it is. */
+    static void checkSize(Context http) {
+        boolean form =
+                Optional.ofNullable(http.contentType())
+                        .map(kind -> kind.toLowerCase(Locale.ROOT).startsWith(FORM))
+                        .orElse(false);
+        if (http.contentLength() > LARGEST_REQUEST
+                || (form && http.contentLength() > LARGEST_FORM)) {
+            throw new Refusal(413, "too-large");
+        }
+        if (form && http.header("Transfer-Encoding") != null) {
+            throw new Refusal(411, "no-length");
+        }
+    }
 
     /**
      * A file as it came.

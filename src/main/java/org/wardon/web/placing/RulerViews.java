@@ -302,7 +302,7 @@ final class RulerViews {
         Member one = same.get(0);
         return List.of(
                 ids(same) + " " + one.crop(),
-                figures.figure(one.wholeDays(), "day"),
+                days(one),
                 ranges(one, Set.of("lasts")),
                 ranges(one, Set.of("lasts", "bears")),
                 one.coldHarmsBelowC().isPresent()
@@ -310,6 +310,15 @@ final class RulerViews {
                         : "–",
                 figures.temperature(one.frostC()),
                 humidity(one.bornePct()));
+    }
+
+    /** How long a lot is to last, and what of that is the way to the buyer. */
+    private String days(Member one) {
+        return say.say(
+                "ruler.days",
+                figures.figure(one.wholeDays(), "day"),
+                figures.figure(one.wholeDays() - one.marketDays(), "day"),
+                figures.figure(one.marketDays(), "day"));
     }
 
     /** Ranges of temperature that do one of these things to a lot, side by side ones as one. */

@@ -8,14 +8,17 @@ import java.util.List;
 import java.util.Map;
 import java.util.Optional;
 import java.util.OptionalDouble;
+import java.util.Set;
 import java.util.regex.Pattern;
 import java.util.stream.Collectors;
 import org.wardon.advice.company.GroupReport;
 import org.wardon.advice.company.GroupSharing;
+import org.wardon.advice.company.SharingAdvice;
 import org.wardon.advice.wording.Words;
 import org.wardon.errors.BadInput;
 import org.wardon.errors.Fault;
 import org.wardon.plan.ChamberPlan;
+import org.wardon.plan.Defaults;
 import org.wardon.plan.LotPlan;
 import org.wardon.plan.StorePlan;
 import org.wardon.web.pages.AllChambersPage;
@@ -33,7 +36,7 @@ public final class SharingPage {
     /** What stands between crops; a comma between two digits belongs to a number. */
     private static final Pattern BETWEEN = Pattern.compile("[;\\n]|,(?!\\d)|(?<!\\d),");
 
-    private static final double USUAL_DAYS = 7;
+    private static final double USUAL_DAYS = SharingAdvice.USUAL_DAYS;
     private static final int MOST_TYPED = 400;
 
     private final Workbench bench;
@@ -81,7 +84,7 @@ public final class SharingPage {
         }
         Asked asked = new Asked(call, good.plan(), frame);
         Optional<RulerView> ruler = asked.ruler(open);
-        if (!asked.wrong.isEmpty()) {
+        if (asked.isWrong()) {
             call.http().status(422);
         }
         press.print(
@@ -91,7 +94,7 @@ public final class SharingPage {
                 new SharingView(
                         open.kept().id(),
                         List.of(),
-                        asked.wrong,
+                        asked.beside,
                         asked.groups(open.kept().id()),
                         asked.fields(),
                         ruler));
@@ -105,7 +108,14 @@ public final class SharingPage {
         private final List<String> lots;
         private final String crops;
         private final String days;
-        private final List<Fault> wrong = new ArrayList<>();
+
+        /** What is wrong with the crops typed, a sentence a fault. */
+        private final List<String> atCrops = new ArrayList<>();
+
+        private String atDays = "";
+
+        /** What is wrong beside the fields. */
+        private final List<Fault> beside = new ArrayList<>();
 
         Asked(Call call, StorePlan plan, Frame frame) {
             this.call = call;
@@ -122,7 +132,7 @@ public final class SharingPage {
 
         Optional<RulerView> ruler(OpenPlan open) {
             Map<String, Double> wanted = wanted();
-            if (!wrong.isEmpty() || (lots.isEmpty() && wanted.isEmpty())) {
+            if (isWrong() || (lots.isEmpty() && wanted.isEmpty())) {
                 return Optional.empty();
             }
             try {
@@ -135,8 +145,21 @@ public final class SharingPage {
                                 frame.figures());
                 return Optional.of(views.of(frame.say("sharing.ruler"), group, settingC()));
             } catch (BadInput e) {
-                wrong.addAll(e.faults());
+                e.faults().forEach(fault -> tell(fault, wanted.keySet()));
                 return Optional.empty();
+            }
+        }
+
+        boolean isWrong() {
+            return !atCrops.isEmpty() || !atDays.isEmpty() || !beside.isEmpty();
+        }
+
+        /** What is found of a crop belongs to its field, and nothing else does. */
+        private void tell(Fault fault, Set<String> crops) {
+            if (crops.contains(fault.file()) || lots.isEmpty()) {
+                atCrops.add(fault.file() + ": " + fault.found() + "; " + fault.accepted() + ".");
+            } else {
+                beside.add(fault);
             }
         }
 
@@ -159,45 +182,63 @@ public final class SharingPage {
 
         private Map<String, Double> wanted() {
             Map<String, Double> wanted = new LinkedHashMap<>();
+            OptionalDouble all =
+                    days.isEmpty() ? OptionalDouble.of(USUAL_DAYS) : call.figures().number(days);
+            if (!inRange(all)) {
+                atDays = frame.say("sharing.days-wrong", least(), most());
+            }
             if (crops.length() > MOST_TYPED) {
-                wrong.add(fault(frame.say("sharing.crops"), "sharing.too-long"));
+                atCrops.add(frame.say("sharing.too-long", String.valueOf(MOST_TYPED)));
                 return wanted;
             }
-            double all = days.isEmpty() ? USUAL_DAYS : number(frame.say("sharing.days"), days);
             for (String one : BETWEEN.split(crops, -1)) {
                 String crop = one.strip();
                 int equals = crop.indexOf('=');
                 String name = equals < 0 ? crop : crop.substring(0, equals).strip();
-                if (!name.isEmpty()) {
-                    double own = equals < 0 ? all : number(name, crop.substring(equals + 1));
-                    wanted.put(name, own);
+                OptionalDouble own =
+                        equals < 0 ? all : call.figures().number(crop.substring(equals + 1));
+                if (equals >= 0 && !inRange(own)) {
+                    String usual = call.figures().typed(USUAL_DAYS);
+                    atCrops.add(frame.say("sharing.crop-days-wrong", name, least(), most(), usual));
+                } else if (wanted.containsKey(name)) {
+                    atCrops.add(frame.say("sharing.crop-twice", name));
+                } else if (!name.isEmpty()) {
+                    wanted.put(name, own.orElse(USUAL_DAYS));
                 }
             }
             return wanted;
         }
 
-        private double number(String what, String text) {
-            OptionalDouble number = call.figures().number(text);
-            if (number.isEmpty()) {
-                wrong.add(fault(what, "sharing.no-number"));
-            }
-            return number.orElse(USUAL_DAYS);
+        private static boolean inRange(OptionalDouble days) {
+            return days.isPresent()
+                    && days.getAsDouble() >= SharingAdvice.LEAST_DAYS
+                    && days.getAsDouble() <= SharingAdvice.MOST_DAYS;
         }
 
-        private Fault fault(String what, String key) {
-            return new Fault(what, "", what + ": " + frame.say(key), frame.say(key + ".mend"));
+        private String least() {
+            return call.figures().typed(SharingAdvice.LEAST_DAYS);
+        }
+
+        private String most() {
+            return call.figures().typed(SharingAdvice.MOST_DAYS);
         }
 
         List<FieldView> fields() {
             return List.of(
                     FieldView.text("crops", frame.say("sharing.crops"), crops)
-                            .withHint(frame.say("sharing.crops-hint")),
+                            .withHint(frame.say("sharing.crops-hint"))
+                            .withFault(String.join(" ", atCrops)),
                     FieldView.number(
                                     "days",
                                     frame.say("sharing.days"),
                                     days.isEmpty() ? call.figures().typed(USUAL_DAYS) : days,
                                     frame.say("sharing.days-unit"))
-                            .withHint(frame.figures().text(frame.say("sharing.days-hint"))));
+                            .withHint(frame.say("sharing.days-hint", least(), most(), market()))
+                            .withFault(atDays));
+        }
+
+        private String market() {
+            return frame.figures().figure(Defaults.MARKET_DAYS.value(), "day");
         }
 
         List<SharingView.Group> groups(long id) {

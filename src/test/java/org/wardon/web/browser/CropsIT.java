@@ -4,12 +4,16 @@ import static org.junit.jupiter.api.Assertions.assertEquals;
 import static org.junit.jupiter.api.Assertions.assertFalse;
 import static org.junit.jupiter.api.Assertions.assertTrue;
 
+import com.microsoft.playwright.APIResponse;
 import com.microsoft.playwright.Locator;
 import com.microsoft.playwright.Page;
+import com.microsoft.playwright.options.FormData;
+import com.microsoft.playwright.options.RequestOptions;
 import java.nio.charset.StandardCharsets;
 import java.util.List;
 import org.junit.jupiter.api.Test;
 import org.junit.jupiter.params.ParameterizedTest;
+import org.junit.jupiter.params.provider.CsvSource;
 import org.junit.jupiter.params.provider.ValueSource;
 import org.wardon.Source;
 
@@ -86,6 +90,44 @@ class CropsIT extends InBrowser {
         page.waitForSelector("#own:not(:has(.own-list li))");
         assertTrue(page.locator(".lead").textContent().contains("13.0 °C"));
         page.close();
+    }
+
+    /** Nothing is set; each field tells its own fault, in the person's unit, and keeps its text. */
+    @ParameterizedTest
+    @CsvSource({
+        "storage-temperature, warm, '', '', own-low, '\"warm\" is no number; give a number'",
+        "storage-temperature, 11, 99, '', own-high, '99 is out of range; accepted: -30 to 30'",
+        "storage-temperature, 12, 3, '', own-high, it is below the first; give the lower one first",
+        "storage-temperature, 12, '', 9, own-at, this value holds at any temperature; leave it blank",
+        "respiration-heat, 12, '', '', own-at, nothing is given; give a number",
+        "respiration-heat, 12, '', 41, own-at, 41 is out of range; accepted: -2 to 40"
+    })
+    void ownValuesThatCannotBeAreToldAtTheirField(
+            String fact, String low, String high, String at, String field, String told) {
+        Page page = show("/crops/mango", DESK);
+        APIResponse refused =
+                page.request()
+                        .post(
+                                address() + "/crops/mango/own",
+                                RequestOptions.create()
+                                        .setForm(
+                                                FormData.create()
+                                                        .set("token", token(page))
+                                                        .set("own-fact", fact)
+                                                        .set("own-low", low)
+                                                        .set("own-high", high)
+                                                        .set("own-at", at)));
+        assertEquals(422, refused.status());
+        page.setContent(refused.text());
+        assertEquals(List.of(told), page.locator("#own .fault").allTextContents());
+        assertEquals(told, page.locator("#" + field + "-fault").textContent());
+        assertEquals(low, page.inputValue("#own-low"));
+        assertEquals(0, page.locator("#own .own-list li").count());
+        page.close();
+    }
+
+    private static String token(Page page) {
+        return page.locator("input[name=token]").first().inputValue();
     }
 
     @Test

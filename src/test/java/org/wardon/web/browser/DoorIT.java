@@ -5,6 +5,7 @@ import static org.junit.jupiter.api.Assertions.assertTrue;
 
 import com.microsoft.playwright.Locator;
 import com.microsoft.playwright.Page;
+import com.microsoft.playwright.options.RequestOptions;
 import org.junit.jupiter.api.BeforeAll;
 import org.junit.jupiter.api.Test;
 import org.junit.jupiter.params.ParameterizedTest;
@@ -55,6 +56,21 @@ class DoorIT extends InBrowser {
                 assertTrue(one.boundingBox().height >= THUMB_PX, one.textContent());
             }
         }
+        page.close();
+    }
+
+    @Test
+    void whatHasNoFieldIsToldTooAndWhatWasTypedIsToldAsTyped() {
+        Page page = tab(DESK);
+        String lot = address() + plan + "/door?crop=mango&mass=500&";
+        String unknown = page.request().get(lot + "packed=bathtub").text();
+        assertTrue(unknown.contains("'bathtub'"), unknown);
+        RequestOptions comma =
+                RequestOptions.create().setHeader("Cookie", "wardon-preferences=c.kg.comma.auto");
+        String large = page.request().get(lot + "wanted=99999999999", comma).text();
+        assertTrue(large.contains("is 99999999999; accepted: 0,1 to 730 days"), large);
+        String typed = page.request().get(lot + "price=1.2.3", comma).text();
+        assertTrue(typed.contains("\"1.2.3\" is no number"), typed);
         page.close();
     }
 

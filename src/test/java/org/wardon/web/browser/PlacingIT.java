@@ -114,6 +114,9 @@ class PlacingIT extends InBrowser {
         assertTrue(
                 pulls.contains("pulls warmer ▸") && pulls.contains("◂ pulls colder"), "" + pulls);
         assertTrue(page.locator(".ruler").textContent().contains("apart."));
+        assertTrue(page.locator(".ruler-key + .hint").textContent().contains("are 2 days"));
+        String mango = page.locator(".ruler table tr:has-text('Mango')").textContent();
+        assertTrue(mango.contains("5 days (3 days in the chamber, 2 days to the buyer)"), mango);
         hold(page, "sharing");
         page.close();
     }
@@ -122,9 +125,22 @@ class PlacingIT extends InBrowser {
     @Order(4)
     void daysThatAreNoNumberAreToldAndNothingIsJudged() {
         Page page = tab(DESK);
-        APIResponse told = page.request().get(address() + plan + "/sharing?crops=mango=many");
-        assertEquals(422, told.status());
-        assertTrue(told.text().contains("mango: that is no number of days"), told.text());
+        for (String days : List.of("many", "-3", "0", "731", "1e3", "7,5")) {
+            refused(page, "lots=B1&crops=mango&days=" + days);
+            assertEquals(
+                    "Give a number of days from 0.1 to 730.",
+                    page.locator("#days-fault").textContent());
+            assertEquals(days, page.inputValue("#days"));
+        }
+        refused(page, "crops=mango=many, papaya=0, kiwi, kiwi");
+        assertEquals(
+                "mango: give a number of days from 0.1 to 730 after the =, such as mango=7."
+                        + " papaya: give a number of days from 0.1 to 730 after the =, such as"
+                        + " papaya=7. kiwi: name each crop once.",
+                page.locator("#crops-fault").textContent());
+        refused(page, "crops=qqqqzzzz");
+        String unknown = page.locator("#crops-fault").textContent();
+        assertTrue(unknown.startsWith("qqqqzzzz: "), unknown);
         APIResponse typed =
                 page.request()
                         .get(
@@ -138,6 +154,14 @@ class PlacingIT extends InBrowser {
             assertTrue(typed.text().contains(shown), shown);
         }
         page.close();
+    }
+
+    /** Shows the refusal of a question: no ruler, no list of faults beside the fields. */
+    private void refused(Page page, String question) {
+        APIResponse told = page.request().get(address() + plan + "/sharing?" + question);
+        assertEquals(422, told.status(), question);
+        page.setContent(told.text());
+        assertEquals(0, page.locator(".ruler, .faults").count(), "something was judged");
     }
 
     @Test
