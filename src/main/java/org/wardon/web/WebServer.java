@@ -71,7 +71,7 @@ public final class WebServer implements AutoCloseable {
         http.setSendServerVersion(false);
         http.setSendDateHeader(false);
         http.setIdleTimeout(SILENT_MOST_MS);
-        // RATE
+        http.setMinRequestDataRate(SLOWEST_BYTES_PER_S);
     }
 
     /**
