@@ -66,6 +66,8 @@ public final class WebServer implements AutoCloseable {
         config.jetty.modifyHttpConfiguration(WebServer::limits);
     }
 
+    /** Jetty is to give up the limit of slowness; a test tells when it no longer works. */
+    @SuppressWarnings("removal")
     private static void limits(HttpConfiguration http) {
         http.setRequestHeaderSize(HEADERS_MOST_BYTES);
         http.setSendServerVersion(false);
