@@ -7,6 +7,7 @@ import java.util.Locale;
 import java.util.Set;
 import java.util.concurrent.Callable;
 import org.jspecify.annotations.Nullable;
+import org.wardon.advice.company.Borne;
 import org.wardon.advice.placing.PlaceAdvice;
 import org.wardon.advice.placing.PlaceQuestion;
 import org.wardon.advice.placing.PlaceReport;
@@ -71,6 +72,16 @@ final class Place implements Callable<Integer> {
     private List<String> mayMove = new ArrayList<>();
 
     @Option(
+            names = "--accept",
+            paramLabel = "CONFLICT",
+            split = ",",
+            description = {
+                "Conflicts that are accepted beside those the plan accepts, and what they cost"
+                        + " told: ethylene, odour, uncured; CHAMBER:ethylene in one chamber only."
+            })
+    private List<String> accept = new ArrayList<>();
+
+    @Option(
             names = "--write",
             paramLabel = "PLAN2",
             description = "Write the plan with the settings and chambers proposed to this file.")
@@ -90,14 +101,15 @@ final class Place implements Callable<Integer> {
             AtomicFile.tryOut(write);
         }
         try (ReferenceBook book = shared.book()) {
-            StorePlan asked = wished(PlanReader.read(plan, shared.lookups(book)));
+            StorePlan read = PlanReader.read(plan, shared.lookups(book));
+            StorePlan asked = wished(Borne.within("--accept", accept, read));
             boolean all = mayMove.contains(ALL);
             PlaceQuestion question = new PlaceQuestion(all, all ? Set.of() : Set.copyOf(mayMove));
             PlaceReport report =
                     new PlaceAdvice(book, shared.words())
                             .place(asked, question, terminal.progress());
             if (write != null) {
-                PlacedPlan.write(plan, write, report.asked(), report.proposed());
+                PlacedPlan.write(plan, write, read, report.proposed());
             }
             tell(report, toStdout, terminal);
         }

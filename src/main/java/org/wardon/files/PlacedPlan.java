@@ -6,15 +6,18 @@ import java.nio.file.Path;
 import java.util.List;
 import java.util.Locale;
 import java.util.Optional;
+import java.util.Set;
 import org.wardon.files.json.JsonEdit;
 import org.wardon.files.json.JsonPath;
 import org.wardon.plan.ChamberPlan;
 import org.wardon.plan.LotPlan;
 import org.wardon.plan.SettingChange;
 import org.wardon.plan.StorePlan;
+import org.wardon.produce.Conflict;
 
 /**
- * Writes a plan with other settings and chambers of lots, all else of the keeper's text untouched.
+ * Writes a plan with other settings and chambers of lots and what is accepted, all else of the
+ * keeper's text untouched.
  */
 public final class PlacedPlan {
     private PlacedPlan() {}
@@ -52,11 +55,24 @@ public final class PlacedPlan {
         for (int i = 0; i < asked.lots().size(); i++) {
             edit = lot(edit, i, asked.lots().get(i), placed.lots().get(i));
         }
+        Set<Conflict> accepts = placed.wish().accepts();
+        edit = accepts(edit, JsonPath.ROOT, asked.wish().accepts(), accepts);
         return edit.text();
     }
 
+    private static JsonEdit accepts(
+            JsonEdit edit, JsonPath owner, Set<Conflict> was, Set<Conflict> is) {
+        String words =
+                is.stream()
+                        .sorted()
+                        .map(one -> JsonEdit.quoted(one.word()))
+                        .collect(joining(", ", "[", "]"));
+        return was.equals(is) ? edit : edit.set(owner.then(new JsonPath.Member("accept")), words);
+    }
+
     private static JsonEdit chamber(JsonEdit edit, int i, ChamberPlan was, ChamberPlan is) {
-        JsonEdit changed = edit;
+        Set<Conflict> accepts = is.use().accepts();
+        JsonEdit changed = accepts(edit, path("chambers", i), was.use().accepts(), accepts);
         if (was.setting().temperatureC() != is.setting().temperatureC()) {
             String value = Inputs.plain(is.setting().temperatureC());
             changed = changed.set(path("chambers", i, "setting", "temperatureC"), value);

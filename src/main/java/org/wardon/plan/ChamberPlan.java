@@ -3,12 +3,14 @@ package org.wardon.plan;
 import java.util.ArrayList;
 import java.util.List;
 import java.util.Optional;
+import java.util.Set;
 import org.wardon.air.Timeline;
 import org.wardon.cooling.Cooler;
 import org.wardon.cooling.Setting;
 import org.wardon.cooling.SettingCourse;
 import org.wardon.enclosure.Enclosure;
 import org.wardon.errors.Require;
+import org.wardon.produce.Conflict;
 
 /**
  * One chamber of a plan.
@@ -189,6 +191,16 @@ public record ChamberPlan(
                 starts,
                 corrections,
                 used);
+    }
+
+    /**
+     * Returns the chamber of which its keeper accepts other conflicts.
+     *
+     * @param conflicts what is accepted in it
+     * @return the changed copy
+     */
+    public ChamberPlan accepting(Set<Conflict> conflicts) {
+        return with(setting, coolers, humidifierKgH, heaterW, use.accepting(conflicts));
     }
 
     /**

@@ -60,6 +60,16 @@ public record ChamberUse(
     }
 
     /**
+     * Returns the same with other conflicts accepted.
+     *
+     * @param other conflicts
+     * @return the changed copy
+     */
+    ChamberUse accepting(Set<Conflict> other) {
+        return new ChamberUse(other, changes, off);
+    }
+
+    /**
      * Returns the same switched off or on.
      *
      * @param there what stands still; absent for on
