@@ -7,7 +7,6 @@ import java.util.List;
 import java.util.Map;
 import java.util.Set;
 import java.util.function.Predicate;
-import java.util.stream.IntStream;
 import org.wardon.advice.wording.Words;
 import org.wardon.air.Timeline;
 import org.wardon.cooling.Outage;
@@ -187,30 +186,28 @@ public final class ChamberTrials {
             Map<String, Course> plain,
             double endS) {}
 
+    /**
+     * Chambers side by side, and the draws of each as soon as it is set up: a processor that is
+     * through with its chamber helps with the draws of another.
+     */
     private Map<String, ChamberTrial> run(Map<String, StoreModel> models) {
-        List<Setup> setups =
-                models.entrySet().parallelStream()
-                        .map(entry -> setup(entry.getValue(), entry.getKey()))
-                        .toList();
-        List<Draw> bodies = standsFor.stream().distinct().toList();
-        int each = bodies.size();
-        List<Map<Draw, Map<String, Fates.Two>>> ends =
-                IntStream.range(0, setups.size() * each)
-                        .parallel()
-                        .mapToObj(i -> drawn(setups.get(i / each), bodies.get(i % each)))
-                        .toList();
         List<ChamberTrial> trials =
-                IntStream.range(0, setups.size())
-                        .parallel()
-                        .mapToObj(
-                                i ->
-                                        trial(
-                                                setups.get(i),
-                                                inOrder(ends.subList(i * each, (i + 1) * each))))
+                models.entrySet().parallelStream()
+                        .map(entry -> tried(setup(entry.getValue(), entry.getKey())))
                         .toList();
         Map<String, ChamberTrial> byId = new LinkedHashMap<>();
         trials.forEach(trial -> byId.put(trial.chamber().id(), trial));
         return byId;
+    }
+
+    private ChamberTrial tried(Setup setup) {
+        return trial(
+                setup,
+                inOrder(
+                        standsFor.parallelStream()
+                                .distinct()
+                                .map(body -> drawn(setup, body))
+                                .toList()));
     }
 
     private Setup setup(StoreModel store, String chamberId) {

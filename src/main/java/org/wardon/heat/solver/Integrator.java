@@ -40,10 +40,9 @@ public final class Integrator {
     /** Rather than two halves, a step this much longer than wanted: its error is still below 1. */
     private static final double REACHES = 1.15;
 
-    private static final int LANDINGS = 40;
-
     private final TreeSystem system;
     private final Rosenbrock method;
+    private final Landing landing;
     private final boolean longSteps;
     private final double[] totals;
     private final double shortestStep;
@@ -86,6 +85,7 @@ public final class Integrator {
         this.system = system;
         this.longSteps = steps == Steps.LONG;
         this.method = longSteps ? new StifflyAccurate(system) : new FourthOrder(system);
+        this.landing = new Landing(system, method, edges * (REMEMBERED + 1), shortestStep);
         this.totals = new double[system.flows()];
         this.learned = new double[edges][REMEMBERED];
         for (double[] known : learned) {
@@ -172,7 +172,7 @@ public final class Integrator {
             double left = until - now;
             double h = acceptableStep(now, y, left);
             fired = trigger.value(now + h, method.end) > 0;
-            double taken = fired ? land(now, y, h, trigger) : h;
+            double taken = fired ? landing.shortened(now, y, h, trigger, likeness()) : h;
             double end = taken == left ? until : now + taken;
             method.addFlows(taken, totals);
             System.arraycopy(method.end, 0, y, 0, y.length);
@@ -181,6 +181,11 @@ public final class Integrator {
             now = end;
         }
         return now;
+    }
+
+    /** Steps of one number behind an edge of one kind are alike. */
+    private int likeness() {
+        return edge * (REMEMBERED + 1) + sinceEdge;
     }
 
     private double acceptableStep(double now, double[] y, double left) {
@@ -263,51 +268,6 @@ public final class Integrator {
         sinceEdge++;
         boolean known = sinceEdge < REMEMBERED && steps[sinceEdge] > 0;
         return known ? Math.min(steps[sinceEdge], RISES * Math.max(proposed, h)) : proposed;
-    }
-
-    /**
-     * Shortens the step until it ends just behind the crossing (Illinois rule of false position).
-     */
-    private double land(double now, double[] y, double h, Trigger trigger) {
-        double wanted = 0.5 * trigger.tolerance();
-        double low = 0;
-        double lowMiss = trigger.value(now, y) - wanted;
-        double high = h;
-        double tried = h;
-        double value = trigger.value(now + h, method.end);
-        double highMiss = value - wanted;
-        int side = 0;
-        if (Double.isInfinite(lowMiss)) {
-            // Not armed before the end of this step: it fires there.
-            return h;
-        }
-        for (int i = 0; i < LANDINGS; i++) {
-            boolean near = value > 0 && value <= trigger.tolerance();
-            if (near || high - low < shortestStep) {
-                break;
-            }
-            double guess = (low * highMiss - high * lowMiss) / (highMiss - lowMiss);
-            double margin = 0.01 * (high - low);
-            guess = Math.min(Math.max(guess, low + margin), high - margin);
-            method.tryStep(now, y, guess);
-            tried = guess;
-            value = trigger.value(now + guess, method.end);
-            if (value > 0) {
-                high = guess;
-                highMiss = value - wanted;
-                lowMiss *= side > 0 ? 0.5 : 1;
-                side = 1;
-            } else {
-                low = guess;
-                lowMiss = value - wanted;
-                highMiss *= side < 0 ? 0.5 : 1;
-                side = -1;
-            }
-        }
-        if (tried != high) {
-            method.tryStep(now, y, high);
-        }
-        return high;
     }
 
     /**
