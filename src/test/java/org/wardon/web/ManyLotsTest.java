@@ -85,14 +85,17 @@ class ManyLotsTest {
         return http.get(path, cookie);
     }
 
-    /** Every page that links lead to, a few of each kind, by its address. */
-    private static Map<String, String> pages(String first) {
+    /** Every page below a path that links lead to, a few of each kind, by its address. */
+    private static Map<String, String> pages(String below, String... first) {
         Map<String, String> pages = new LinkedHashMap<>();
         Map<String, Integer> kinds = new HashMap<>();
-        Deque<String> wanted = new ArrayDeque<>(List.of(first, "/api"));
+        Deque<String> wanted = new ArrayDeque<>(List.of(first));
         while (!wanted.isEmpty()) {
             String path = wanted.removeFirst();
-            boolean page = !path.startsWith("/static/") && !path.matches("/api/.+|.*/take");
+            boolean page =
+                    path.startsWith(below)
+                            && !path.startsWith("/static/")
+                            && !path.matches("/api/.+|.*/take");
             if (page
                     && !pages.containsKey(path)
                     && kinds.merge(kind(path), 1, Integer::sum) <= OF_A_KIND) {
@@ -138,7 +141,7 @@ class ManyLotsTest {
 
     @Test
     void noPageIsLarge() {
-        Map<String, String> pages = pages(plan);
+        Map<String, String> pages = pages("/", plan, "/api");
         Set<String> kinds = new TreeSet<>();
         pages.keySet().forEach(path -> kinds.add(kind(path)));
         for (String kind :
@@ -191,9 +194,7 @@ class ManyLotsTest {
                 kept(
                         "faulty.json",
                         ManyLots.plan(LOTS, 2).replace("\"wantedDays\": ", "\"wantedDays\": -"));
-        Map<String, String> pages = pages(faulty + "/edit");
-        pages.putAll(pages(faulty));
-        holdSmall(pages);
+        holdSmall(pages(faulty, faulty + "/edit", faulty));
         assertTrue(get(faulty + "/edit").body().contains("180 more faults in other parts"));
         String list = faulty + "/edit?at=%24.lots&amp;only=faults";
         assertTrue(get(faulty + "/edit").body().contains(list));

@@ -7,6 +7,7 @@ import com.microsoft.playwright.Browser;
 import com.microsoft.playwright.BrowserContext;
 import com.microsoft.playwright.Page;
 import com.microsoft.playwright.options.ColorScheme;
+import com.microsoft.playwright.options.ScreenshotAnimations;
 import java.io.IOException;
 import java.io.InputStream;
 import java.io.UncheckedIOException;
@@ -139,11 +140,12 @@ public abstract class InBrowser {
         page.emulateMedia(new Page.EmulateMediaOptions().setColorScheme(ColorScheme.LIGHT));
     }
 
-    /** Keeps a picture of the whole page. */
+    /** Keeps a picture of the whole page, colours that fade into others at their end. */
     protected void picture(Page page, String name) {
         page.screenshot(
                 new Page.ScreenshotOptions()
                         .setFullPage(true)
+                        .setAnimations(ScreenshotAnimations.DISABLED)
                         .setPath(PICTURES.resolve(name + ".png")));
     }
 
