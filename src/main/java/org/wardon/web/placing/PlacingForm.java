@@ -8,9 +8,11 @@ import java.util.Set;
 import java.util.function.Function;
 import java.util.stream.Collectors;
 import org.wardon.advice.placing.PlaceQuestion;
+import org.wardon.plan.ChamberPlan;
 import org.wardon.plan.LotPlan;
 import org.wardon.plan.PlaceWish;
 import org.wardon.plan.StorePlan;
+import org.wardon.produce.Conflict;
 import org.wardon.web.pages.PageWords;
 import org.wardon.web.work.PlaceAsked;
 
@@ -167,7 +169,30 @@ final class PlacingForm {
                                         new PlacingView.Pick(
                                                 lot.id(), lot.id(), "", lots.contains(lot.id())))
                         .toList();
-        return new PlacingView.Form(aims, ticks, moves, fault, aim == PlaceWish.Aim.MOST_DAYS);
+        boolean days = aim == PlaceWish.Aim.MOST_DAYS;
+        return new PlacingView.Form(aims, ticks, moves, fault, days, accepted());
+    }
+
+    /** What the plan accepts, so that nobody wonders who may stand together. */
+    private List<String> accepted() {
+        List<String> told = new ArrayList<>();
+        if (!plan.wish().accepts().isEmpty()) {
+            told.add(say.say("placing.accepted-everywhere", named(plan.wish().accepts())));
+        }
+        for (ChamberPlan chamber : plan.chambers()) {
+            Set<Conflict> there = chamber.use().accepts();
+            if (!there.isEmpty()) {
+                told.add(say.say("placing.accepted-there", chamber.id(), named(there)));
+            }
+        }
+        return told;
+    }
+
+    private String named(Set<Conflict> conflicts) {
+        return conflicts.stream()
+                .sorted()
+                .map(one -> say.say("placing.conflict-" + one.word()))
+                .collect(Collectors.joining(", "));
     }
 
     private PlacingView.Pick pick(String word, String family, boolean taken) {

@@ -69,12 +69,19 @@ public record PlacingView(
      * @param moves which lots may be moved
      * @param fault what is wrong with them; blank where nothing is
      * @param days whether days of some lots come first
+     * @param accepted conflicts the plan accepts, a sentence for all chambers or one
      */
     public record Form(
-            List<Pick> aims, List<Pick> lots, List<Pick> moves, String fault, boolean days) {
+            List<Pick> aims,
+            List<Pick> lots,
+            List<Pick> moves,
+            String fault,
+            boolean days,
+            List<String> accepted) {
         /** Copies the lists. */
         public Form {
             aims = List.copyOf(aims);
+            accepted = List.copyOf(accepted);
             lots = List.copyOf(lots);
             moves = List.copyOf(moves);
         }

@@ -13,6 +13,7 @@ import java.util.stream.Stream;
 import org.junit.jupiter.api.AfterAll;
 import org.junit.jupiter.api.Test;
 import org.wardon.advice.PlanLookups;
+import org.wardon.advice.company.Borne;
 import org.wardon.advice.company.GroupReport;
 import org.wardon.advice.company.GroupSharing;
 import org.wardon.advice.placing.PlaceQuestion;
@@ -37,6 +38,18 @@ class PlacingFormTest {
     @AfterAll
     static void close() {
         BOOK.close();
+    }
+
+    @Test
+    void whatThePlanAcceptsIsToldBesideTheWishes() {
+        assertEquals(List.of(), form(Map.of()).view().accepted());
+        StorePlan plan = Borne.within("", List.of("odour", "ethylene", "front:uncured"), PLAN);
+        assertEquals(
+                List.of(
+                        "The plan accepts in all chambers: ethylene that shortens a life or starts"
+                                + " ripening, smell that is taken on.",
+                        "In front it accepts: the cold for lots not cured."),
+                new PlacingForm(plan, name -> List.of(), SAY).view().accepted());
     }
 
     private static PlacingForm form(Map<String, List<String>> typed) {
