@@ -1,7 +1,8 @@
 package org.wardon.web.work;
 
 import java.nio.file.Path;
-import java.util.ArrayList;
+import java.util.ArrayDeque;
+import java.util.Deque;
 import java.util.List;
 import org.jspecify.annotations.Nullable;
 import org.wardon.reference.GoneLot;
@@ -12,12 +13,15 @@ import org.wardon.reference.ReferenceBook;
 
 /**
  * The reference book with the keeper's own values as they are now: another one where they have
- * changed. Books handed out stay open until the end, as work with them may go on.
+ * changed. Books handed out stay open while others follow, as work with them may go on.
  */
 final class Books implements AutoCloseable {
+    /** Books open at most; work goes on with one for minutes, a person changes a value in one. */
+    private static final int OPEN = 16;
+
     private final OwnValues values;
     private final GoneLots lots;
-    private final List<ReferenceBook> open = new ArrayList<>();
+    private final Deque<ReferenceBook> open = new ArrayDeque<>();
     private @Nullable Edition edition;
 
     /** A book and what of the keeper's own lies over it. */
@@ -36,6 +40,9 @@ final class Books implements AutoCloseable {
             now = new Edition(ReferenceBook.open(values, lotsNow), valuesNow, lotsNow);
             open.add(now.book);
             edition = now;
+            if (open.size() > OPEN) {
+                open.remove().close();
+            }
         }
         return now.book;
     }
