@@ -13,7 +13,7 @@ import java.util.regex.Pattern;
  * Sends exactly what it is told, so that nothing polite stands between an attack and the server.
  */
 final class RawHttp {
-    private static final int PATIENCE_MS = 20_000;
+    private static final int PATIENCE_MS = 120_000;
     private static final Pattern COOKIE =
             Pattern.compile("(?i)set-cookie: (wardon-session-\\d+=[^;]*)");
     private static final Pattern TOKEN = Pattern.compile("name=\"token\" value=\"([^\"]+)\"");

@@ -9,6 +9,7 @@ import java.util.concurrent.Executors;
 import java.util.concurrent.Future;
 import java.util.concurrent.TimeUnit;
 import java.util.concurrent.TimeoutException;
+import java.util.concurrent.atomic.AtomicBoolean;
 import org.wardon.advice.placing.OpenLots;
 import org.wardon.advice.receiving.Receiving;
 import org.wardon.advice.wording.Units;
@@ -29,6 +30,7 @@ final class Doors implements AutoCloseable {
                         thread.setDaemon(true);
                         return thread;
                     });
+    private final AtomicBoolean practised = new AtomicBoolean();
     private final Map<Key, Future<Receiving>> known = new LinkedHashMap<>(16, 0.75f, true);
 
     /** A plan in one version, judged with one book, told in some units. */
@@ -58,21 +60,31 @@ final class Doors implements AutoCloseable {
 
     private synchronized Future<Receiving> begun(Key key, StorePlan plan) {
         Future<Receiving> work =
-                known.computeIfAbsent(
-                        key,
-                        one ->
-                                worker.submit(
-                                        () ->
-                                                Receiving.of(
-                                                        housed(plan, one.book()),
-                                                        one.book(),
-                                                        Words.english(one.units()))));
+                known.computeIfAbsent(key, one -> worker.submit(() -> workedOut(plan, one)));
         var oldest = known.entrySet().iterator();
         while (known.size() > REMEMBERED && oldest.hasNext()) {
             oldest.next();
             oldest.remove();
         }
         return work;
+    }
+
+    private Receiving workedOut(StorePlan plan, Key key) {
+        StorePlan housed = housed(plan, key.book());
+        Receiving ready = Receiving.of(housed, key.book(), Words.english(key.units()));
+        if (practised.compareAndSet(false, true)) {
+            worker.execute(() -> practise(ready));
+        }
+        return ready;
+    }
+
+    /** Once in a program's life, while the first keeper types. */
+    private static void practise(Receiving with) {
+        try {
+            with.practise();
+        } catch (RunStopped | IllegalStateException untold) {
+            // Nobody waits for it; who asks the same is told.
+        }
     }
 
     private static StorePlan housed(StorePlan plan, ReferenceBook book) {
