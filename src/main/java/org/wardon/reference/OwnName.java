@@ -6,6 +6,7 @@ import java.util.OptionalDouble;
 import java.util.regex.Matcher;
 import java.util.regex.Pattern;
 import java.util.stream.Collectors;
+import org.wardon.errors.Limits;
 
 /**
  * A fact that a keeper may set for a store of their own.
@@ -31,15 +32,13 @@ record OwnName(Kind kind, OptionalDouble atC) {
 
         private final String word;
         private final String unit;
-        private final double low;
-        private final double high;
+        private final Limits limits;
         private final boolean needsTemperature;
 
         Kind(String word, String unit, double low, double high, boolean needsTemperature) {
             this.word = word;
             this.unit = unit;
-            this.low = low;
-            this.high = high;
+            limits = new Limits(low, high);
             this.needsTemperature = needsTemperature;
         }
 
@@ -48,15 +47,15 @@ record OwnName(Kind kind, OptionalDouble atC) {
         }
 
         boolean accepts(double value) {
-            return value >= low && value <= high;
+            return limits.hold(value);
         }
 
-        OwnValue.Limits limits() {
-            return new OwnValue.Limits(low, high);
+        Limits limits() {
+            return limits;
         }
 
         String accepted() {
-            return low + " to " + high + " " + unit;
+            return limits.low() + " to " + limits.high() + " " + unit;
         }
 
         private String form() {
@@ -81,7 +80,7 @@ record OwnName(Kind kind, OptionalDouble atC) {
     }
 
     /** Returns the figures a fact accepts, by its name without a temperature. */
-    static Optional<OwnValue.Limits> limits(String word) {
+    static Optional<Limits> limits(String word) {
         return Arrays.stream(Kind.values())
                 .filter(kind -> kind.word.equals(word))
                 .findFirst()

@@ -6,6 +6,7 @@ import java.util.Optional;
 import java.util.OptionalDouble;
 import org.wardon.errors.BadInput;
 import org.wardon.errors.Fault;
+import org.wardon.errors.Limits;
 import org.wardon.produce.Evidence;
 import org.wardon.produce.Fact;
 import org.wardon.produce.NamedFact;
@@ -27,24 +28,6 @@ public record OwnValue(
 
     /** Temperatures at which a fact can be told to hold, °C. */
     public static final Limits AT_C = new Limits(OwnName.COLDEST_C, OwnName.HOTTEST_C);
-
-    /**
-     * Figures that are accepted.
-     *
-     * @param low lowest
-     * @param high highest
-     */
-    public record Limits(double low, double high) {
-        /**
-         * Returns whether a figure is accepted.
-         *
-         * @param value the figure, in the same unit
-         * @return true if so
-         */
-        public boolean hold(double value) {
-            return value >= low && value <= high;
-        }
-    }
 
     /**
      * Returns what a fact accepts.

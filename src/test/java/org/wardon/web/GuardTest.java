@@ -83,7 +83,7 @@ class GuardTest {
         server.close();
     }
 
-    private static void refused(Answer answer, int status, String happened) {
+    static void refused(Answer answer, int status, String happened) {
         assertEquals(status, answer.status(), answer.head());
         assertTrue(answer.body().contains("<h1>" + happened + "</h1>"), answer.body());
         assertEquals(POLICY, answer.header("Content-Security-Policy"));

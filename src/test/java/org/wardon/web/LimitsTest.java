@@ -43,13 +43,6 @@ class LimitsTest {
         server.close();
     }
 
-    private static void refused(Answer answer, int status, String happened) {
-        assertEquals(status, answer.status(), answer.head());
-        assertTrue(answer.body().contains("<h1>" + happened + "</h1>"), answer.body());
-        assertEquals(GuardTest.POLICY, answer.header("Content-Security-Policy"));
-        assertFalse(answer.body().contains("\tat "), answer.body());
-    }
-
     private static void problem(Answer answer, int status, String title) {
         assertEquals(status, answer.status(), answer.head());
         assertEquals("application/problem+json", answer.header("Content-Type"));
@@ -91,11 +84,11 @@ class LimitsTest {
     void largeAndManyFieldedFormsAreRefusedUnread() {
         Visitor me = http.visitor("/plans");
         String field = "token=" + me.token();
-        refused(
+        GuardTest.refused(
                 http.post(me, "/plans/demo", field + "&a=1".repeat(200_000)),
                 413,
                 "What was sent is too large");
-        refused(
+        GuardTest.refused(
                 http.exactly(
                         "POST /plans/demo HTTP/1.1\r\nHost: "
                                 + http.host()
@@ -192,7 +185,8 @@ class LimitsTest {
     @Test
     void uploadsAreLimitedInSizeAndKindAndNameNoPath() {
         Visitor me = http.visitor("/plans");
-        refused(upload(me, "big.json", " ".repeat(8_000_100)), 413, "What was sent is too large");
+        GuardTest.refused(
+                upload(me, "big.json", " ".repeat(8_000_100)), 413, "What was sent is too large");
         Answer kind = upload(me, "plan.exe", "{}");
         assertEquals(422, kind.status());
         assertTrue(kind.body().contains("the file is of another kind; accepted: .json"));
@@ -207,7 +201,7 @@ class LimitsTest {
                                 + me.cookie()
                                 + "\r\nContent-Type: multipart/form-data; boundary=b\r\n"
                                 + "Content-Length: 900000000\r\nConnection: close\r\n\r\n");
-        refused(tooMuch, 413, "What was sent is too large");
+        GuardTest.refused(tooMuch, 413, "What was sent is too large");
     }
 
     @Test

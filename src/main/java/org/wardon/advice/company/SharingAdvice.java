@@ -8,6 +8,7 @@ import java.util.Set;
 import org.wardon.advice.wording.Words;
 import org.wardon.errors.BadInput;
 import org.wardon.errors.Fault;
+import org.wardon.errors.Limits;
 import org.wardon.keeping.Draw;
 import org.wardon.keeping.Draws;
 import org.wardon.keeping.KeptLot;
@@ -25,11 +26,8 @@ public final class SharingAdvice {
     /** Days wanted unless others are asked for. */
     public static final double USUAL_DAYS = 7;
 
-    /** Fewest days that can be wanted. */
-    public static final double LEAST_DAYS = 0.1;
-
-    /** Most days that can be wanted. */
-    public static final double MOST_DAYS = 730;
+    /** Days that can be wanted. */
+    public static final Limits DAYS = new Limits(0.1, 730);
 
     private static final int DRAWS = 32;
     private static final long SEED = 1;
@@ -94,7 +92,7 @@ public final class SharingAdvice {
         } catch (BadInput unknown) {
             faults.addAll(unknown.faults());
         }
-        if (!(wanted >= LEAST_DAYS && wanted <= MOST_DAYS)) {
+        if (!DAYS.hold(wanted)) {
             faults.add(
                     new Fault(
                             name,

@@ -12,6 +12,7 @@ import java.util.stream.Collectors;
 import org.wardon.air.Timeline;
 import org.wardon.errors.BadInput;
 import org.wardon.errors.Fault;
+import org.wardon.errors.Limits;
 import org.wardon.plan.AtDoor;
 import org.wardon.plan.Defaults;
 import org.wardon.plan.LotPlan;
@@ -30,9 +31,9 @@ import org.wardon.reference.Variants;
 final class AtTheDoor {
     private static final String OWN_RULE = "assumption";
     private static final String PRACTICE = "common-practice";
-    private static final NewLot.Limits HOURS_AGO = new NewLot.Limits(0, 8_760);
-    private static final NewLot.Limits WANTED_DAYS = new NewLot.Limits(0.1, 730);
-    private static final NewLot.Limits MARKET_DAYS = new NewLot.Limits(0, 60);
+    private static final Limits HOURS_AGO = new Limits(0, 8_760);
+    private static final Limits WANTED_DAYS = new Limits(0.1, 730);
+    private static final Limits MARKET_DAYS = new Limits(0, 60);
 
     private final StorePlan plan;
     private final ReferenceBook book;
@@ -153,16 +154,19 @@ final class AtTheDoor {
         }
     }
 
-    private void within(String what, OptionalDouble given, NewLot.Limits taken, String unit) {
-        double low = taken.low();
-        double high = taken.high();
-        if (given.isPresent() && !(given.getAsDouble() >= low && given.getAsDouble() <= high)) {
+    private void within(String what, OptionalDouble given, Limits taken, String unit) {
+        if (given.isPresent() && !taken.hold(given.getAsDouble())) {
             faults.add(
                     new Fault(
                             what,
                             "",
                             "is " + plain(given.getAsDouble()),
-                            "accepted: " + plain(low) + " to " + plain(high) + " " + unit));
+                            "accepted: "
+                                    + plain(taken.low())
+                                    + " to "
+                                    + plain(taken.high())
+                                    + " "
+                                    + unit));
         }
     }
 

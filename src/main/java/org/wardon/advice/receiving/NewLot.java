@@ -3,6 +3,7 @@ package org.wardon.advice.receiving;
 import java.time.LocalDateTime;
 import java.util.Optional;
 import java.util.OptionalDouble;
+import org.wardon.errors.Limits;
 import org.wardon.plan.Purpose;
 import org.wardon.produce.Ripeness;
 
@@ -23,14 +24,6 @@ public record NewLot(String commodity, double massKg, Fruit fruit, Wish wish) {
 
     /** Prices that are taken, currency/kg, as a plan takes them. */
     public static final Limits PRICE_PER_KG = new Limits(0, 1e6);
-
-    /**
-     * What is taken of a number.
-     *
-     * @param low the least
-     * @param high the most
-     */
-    public record Limits(double low, double high) {}
 
     /**
      * What was seen and measured.

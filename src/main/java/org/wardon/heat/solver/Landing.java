@@ -61,7 +61,7 @@ final class Landing {
         double nearMiss = trigger.value(now, y) - wanted;
         double value = trigger.value(now + h, method.end);
         if (Double.isInfinite(nearMiss) || lands(value, trigger)) {
-            // Not armed before the end of this step: it fires there.
+            // Not armed before the end of this step, where it fires; or near enough already.
             return h;
         }
         double farMiss = value - wanted;

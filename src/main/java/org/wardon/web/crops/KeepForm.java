@@ -12,6 +12,7 @@ import org.wardon.advice.outlook.KeepRequest;
 import org.wardon.advice.wording.Words;
 import org.wardon.errors.BadInput;
 import org.wardon.errors.Fault;
+import org.wardon.errors.Limits;
 import org.wardon.files.forecast.KeepAnswer;
 import org.wardon.produce.Commodity;
 import org.wardon.produce.Reason;
@@ -28,22 +29,15 @@ final class KeepForm {
 
     private static final double ALL_PCT = 100;
 
-    /** What a field accepts. */
-    private record Range(double low, double high) {
-        boolean holds(double value) {
-            return value >= low && value <= high;
-        }
-    }
-
     /** As {@code keep} accepts, told in the person's own unit. */
-    private static final Map<String, Range> RANGES =
+    private static final Map<String, Limits> RANGES =
             Map.of(
-                    "at", new Range(-5, 50),
-                    "humidity", new Range(0, 100),
-                    "days", new Range(0.05, 730),
-                    "used", new Range(0, 100),
-                    "ripe", new Range(0, 120),
-                    "ethylene", new Range(0, 1000));
+                    "at", new Limits(-5, 50),
+                    "humidity", new Limits(0, 100),
+                    "days", new Limits(0.05, 730),
+                    "used", new Limits(0, 100),
+                    "ripe", new Limits(0, 120),
+                    "ethylene", new Limits(0, 1000));
 
     private final String prefix;
     private final Commodity commodity;
@@ -139,7 +133,7 @@ final class KeepForm {
                             "",
                             page.say("crop.no-number", typed),
                             page.say("crop.give-number")));
-        } else if (!range(name).holds(number.getAsDouble())) {
+        } else if (!range(name).hold(number.getAsDouble())) {
             faults.add(
                     new Fault(
                             option(name),
@@ -150,7 +144,7 @@ final class KeepForm {
         return number;
     }
 
-    private static Range range(String name) {
+    private static Limits range(String name) {
         return Optional.ofNullable(RANGES.get(name)).orElseThrow();
     }
 

@@ -6,6 +6,7 @@ import java.util.Optional;
 import java.util.OptionalDouble;
 import org.wardon.errors.BadInput;
 import org.wardon.errors.Fault;
+import org.wardon.errors.Limits;
 import org.wardon.reference.OwnValue;
 import org.wardon.web.pages.Call;
 import org.wardon.web.pages.FieldView;
@@ -94,7 +95,7 @@ final class OwnForm {
         String name = call.field("own-fact");
         boolean degrees = DEGREES.contains(name);
         boolean atTemperature = AT_TEMPERATURE.contains(name);
-        Optional<OwnValue.Limits> limits = OwnValue.limits(name);
+        Optional<Limits> limits = OwnValue.limits(name);
         double low = number(LOW, degrees, limits);
         double high = call.field(HIGH).isBlank() ? low : number(HIGH, degrees, limits);
         double atC = atTemperature ? number(AT, true, Optional.of(OwnValue.AT_C)) : 0;
@@ -117,7 +118,7 @@ final class OwnForm {
     }
 
     /** The number of a field; 0 where it has a fault, which is noted. */
-    private double number(String field, boolean degrees, Optional<OwnValue.Limits> limits) {
+    private double number(String field, boolean degrees, Optional<Limits> limits) {
         String typed = call.field(field);
         OptionalDouble read = degrees ? figures.temperatureC(typed) : figures.number(typed);
         if (read.isEmpty()) {

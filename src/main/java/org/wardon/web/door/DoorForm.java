@@ -16,6 +16,7 @@ import java.util.stream.Stream;
 import org.wardon.advice.receiving.NewLot;
 import org.wardon.errors.BadInput;
 import org.wardon.errors.Fault;
+import org.wardon.errors.Limits;
 import org.wardon.plan.Defaults;
 import org.wardon.plan.Purpose;
 import org.wardon.produce.Commodity;
@@ -225,7 +226,7 @@ final class DoorForm {
         return found + "; " + figures.text(fault.accepted());
     }
 
-    private String between(NewLot.Limits taken, DoubleFunction<String> shown) {
+    private String between(Limits taken, DoubleFunction<String> shown) {
         return say.say("door.between", shown.apply(taken.low()), shown.apply(taken.high()));
     }
 

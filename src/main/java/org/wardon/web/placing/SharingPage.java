@@ -210,17 +210,15 @@ public final class SharingPage {
         }
 
         private static boolean inRange(OptionalDouble days) {
-            return days.isPresent()
-                    && days.getAsDouble() >= SharingAdvice.LEAST_DAYS
-                    && days.getAsDouble() <= SharingAdvice.MOST_DAYS;
+            return days.isPresent() && SharingAdvice.DAYS.hold(days.getAsDouble());
         }
 
         private String least() {
-            return call.figures().typed(SharingAdvice.LEAST_DAYS);
+            return call.figures().typed(SharingAdvice.DAYS.low());
         }
 
         private String most() {
-            return call.figures().typed(SharingAdvice.MOST_DAYS);
+            return call.figures().typed(SharingAdvice.DAYS.high());
         }
 
         List<FieldView> fields() {
