@@ -32,13 +32,15 @@ record OwnName(Kind kind, OptionalDouble atC) {
 
         private final String word;
         private final String unit;
-        private final Limits limits;
+        private final double low;
+        private final double high;
         private final boolean needsTemperature;
 
         Kind(String word, String unit, double low, double high, boolean needsTemperature) {
             this.word = word;
             this.unit = unit;
-            limits = new Limits(low, high);
+            this.low = low;
+            this.high = high;
             this.needsTemperature = needsTemperature;
         }
 
@@ -47,15 +49,15 @@ record OwnName(Kind kind, OptionalDouble atC) {
         }
 
         boolean accepts(double value) {
-            return limits.hold(value);
+            return limits().hold(value);
         }
 
         Limits limits() {
-            return limits;
+            return new Limits(low, high);
         }
 
         String accepted() {
-            return limits.low() + " to " + limits.high() + " " + unit;
+            return low + " to " + high + " " + unit;
         }
 
         private String form() {
