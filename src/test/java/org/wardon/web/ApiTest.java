@@ -193,7 +193,11 @@ class ApiTest {
         bad.forEach(
                 (name, query) -> {
                     JsonNode told =
-                            api.ask("receive").with("plan", plan).asking(query).gives(422).json();
+                            api.ask("receive")
+                                    .with("plan", plan)
+                                    .asking(query + "&waitS=60")
+                                    .gives(422)
+                                    .json();
                     assertEquals("query", told.get("faults").get(0).get("where").asString());
                     assertEquals(name, told.get("faults").get(0).get("path").asString());
                 });
